@@ -1,0 +1,48 @@
+import { z } from "zod";
+
+export const nothing = z.strictObject({});
+export const noContent = z.undefined();
+
+/** A shop's name in addresses: /shop/copperlark-signs. */
+export const shopSlug = z.string().regex(/^[a-z0-9](?:[a-z0-9-]{0,58}[a-z0-9])?$/);
+export const inShop = z.strictObject({ shop: shopSlug });
+
+export const email = z
+  .email({ message: "Write an e-mail address, like name@example.com." })
+  .max(254)
+  .transform((text) => text.toLowerCase());
+export const password = z
+  .string()
+  .min(10, "A password has at least 10 characters.")
+  .max(200, "A password has at most 200 characters.");
+export const instant = z.iso.datetime();
+export const day = z.iso.date();
+/** The secret part of a mailed or shared link. */
+export const token = z.string().regex(/^[A-Za-z0-9_-]{43}$/, "This link is not complete. Open it from the mail again.");
+export const sha256 = z.string().regex(/^[0-9a-f]{64}$/);
+/** C0 controls other than tab and line feed never belong in text that people typed. */
+const controls = /(?![\t\n])\p{Cc}/u;
+export const writtenText = (longest: number) =>
+  z
+    .string()
+    .transform((text) => text.replace(/\r\n?/g, "\n").trim())
+    .refine((text) => !controls.test(text), "Remove the control characters.")
+    .refine((text) => text.length <= longest, `At most ${longest} characters.`);
+
+export const pageQuery = {
+  cursor: z.string().max(400).optional(),
+  limit: z.coerce.number().int().min(1).max(100).default(30),
+};
+export const pageOf = <T extends z.ZodType>(item: T) =>
+  z.strictObject({ items: z.array(item), next: z.string().nullable() });
+
+/** One line of text, as a name or a title. */
+export const writtenLine = (longest: number, whenEmpty: string) =>
+  z
+    .string()
+    .trim()
+    .min(1, whenEmpty)
+    .max(longest, `At most ${longest} characters.`)
+    .refine((text) => !/\p{Cc}/u.test(text), "Remove the control characters.");
+
+export const personName = writtenLine(120, "Write a name.");

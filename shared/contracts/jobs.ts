@@ -1,0 +1,173 @@
+import { z } from "zod";
+import { day, inShop, instant, nothing, pageOf, pageQuery, writtenLine, writtenText } from "./common.ts";
+import { endpoint } from "./endpoint.ts";
+
+export const jobState = z.enum([
+  "brief",
+  "mockup",
+  "out for proof",
+  "revision asked",
+  "approved",
+  "in build",
+  "handed over",
+  "closed",
+  "on hold",
+  "cancelled",
+]);
+export const move = z.enum(["ours", "client", "nobody"]);
+
+const lengthMm = z.number().finite().positive().max(10_000);
+
+/** What the sign is to be. Every field may be missing until the brief is complete. */
+export const briefSchema = z.strictObject({
+  widthMm: lengthMm.nullable(),
+  heightMm: lengthMm.nullable(),
+  place: z.enum(["inside", "outside"]).nullable(),
+  wall: writtenText(400),
+  viewingDistanceMm: z.number().finite().positive().max(200_000).nullable(),
+  lighting: writtenText(400),
+  quantity: z.number().int().min(1).max(1000),
+  brandColours: writtenText(400),
+  about: writtenText(2000),
+  /** The words exactly as they shall read, a line a line. */
+  words: writtenText(1000),
+});
+export type Brief = z.infer<typeof briefSchema>;
+
+const title = writtenLine(160, "Say what the sign is.");
+
+export const jobSchema = z.strictObject({
+  id: z.uuid(),
+  number: z.string(),
+  title: z.string(),
+  state: jobState,
+  whoseMove: move,
+  /** One sentence: what is to be done next. */
+  nextStep: z.string(),
+  client: z.strictObject({ id: z.uuid(), name: z.string() }),
+  dueOn: day.nullable(),
+  brief: briefSchema,
+  briefMissing: z.array(z.string()),
+  approvers: z.array(z.strictObject({ contactId: z.uuid(), name: z.string() })),
+  /** Newest letter that the reader may see, with its state. */
+  latest: z.strictObject({ revisionId: z.uuid(), letter: z.string(), state: z.string() }).nullable(),
+  approved: z.strictObject({ revisionId: z.uuid(), letter: z.string() }).nullable(),
+  openNotes: z.number().int(),
+  consent: z.strictObject({ given: z.boolean(), at: instant.nullable() }),
+  lastEvent: z.strictObject({ text: z.string(), at: instant }).nullable(),
+  createdAt: instant,
+  can: z.strictObject({
+    editBrief: z.boolean(),
+    editMockup: z.boolean(),
+    seeMockup: z.boolean(),
+    issue: z.boolean(),
+    move: z.boolean(),
+    seeShopOnly: z.boolean(),
+    giveConsent: z.boolean(),
+    share: z.boolean(),
+  }),
+});
+export type Job = z.infer<typeof jobSchema>;
+
+/** A row of the Bench: a job without its brief. */
+export const benchRowSchema = jobSchema.omit({
+  brief: true,
+  briefMissing: true,
+  approvers: true,
+  can: true,
+  consent: true,
+  createdAt: true,
+});
+export type BenchRow = z.infer<typeof benchRowSchema>;
+
+const oneJob = inShop.extend({ jobId: z.uuid() });
+
+export const listJobs = endpoint({
+  method: "GET",
+  path: "/api/shops/:shop/jobs",
+  summary: "Jobs, those with an open move first, then by due day",
+  params: inShop,
+  query: z.strictObject({
+    ...pageQuery,
+    q: z.string().max(200).optional(),
+    whoseMove: move.optional(),
+    state: jobState.optional(),
+    clientId: z.uuid().optional(),
+    sort: z.enum(["due", "number", "newest"]).default("due"),
+  }),
+  body: nothing,
+  result: pageOf(benchRowSchema).extend({
+    counts: z.strictObject({ ours: z.number().int(), client: z.number().int(), nobody: z.number().int() }),
+  }),
+});
+export const getJob = endpoint({
+  method: "GET",
+  path: "/api/shops/:shop/jobs/:jobId",
+  summary: "One job",
+  params: oneJob,
+  query: nothing,
+  body: nothing,
+  result: jobSchema,
+});
+export const openJob = endpoint({
+  method: "POST",
+  path: "/api/shops/:shop/jobs",
+  summary: "Open a job for a client",
+  params: inShop,
+  query: nothing,
+  body: z.strictObject({ clientId: z.uuid(), title, dueOn: day.nullable().default(null) }),
+  result: jobSchema,
+  status: 201,
+});
+export const changeJob = endpoint({
+  method: "PATCH",
+  path: "/api/shops/:shop/jobs/:jobId",
+  summary: "Change title, due day, brief or approvers",
+  params: oneJob,
+  query: nothing,
+  body: z.strictObject({
+    title: title.optional(),
+    dueOn: day.nullable().optional(),
+    brief: briefSchema.partial().optional(),
+    approverIds: z.array(z.uuid()).max(20).optional(),
+  }),
+  result: jobSchema,
+});
+export const moveJob = endpoint({
+  method: "POST",
+  path: "/api/shops/:shop/jobs/:jobId/state",
+  summary: "Move a job on after approval, hold it, take it up again or cancel it",
+  params: oneJob,
+  query: nothing,
+  body: z.strictObject({
+    to: z.enum(["in build", "handed over", "closed", "on hold", "cancelled", "taken up again"]),
+    reason: writtenText(400).default(""),
+  }),
+  result: jobSchema,
+});
+export const setConsent = endpoint({
+  method: "POST",
+  path: "/api/shops/:shop/jobs/:jobId/consent",
+  summary: "The client lets the shop show the piece in its portfolio, or takes that back",
+  params: oneJob,
+  query: nothing,
+  body: z.strictObject({ given: z.boolean() }),
+  result: jobSchema,
+});
+
+export const eventSchema = z.strictObject({
+  id: z.string(),
+  at: instant,
+  who: z.string(),
+  text: z.string(),
+  kind: z.string(),
+});
+export const listEvents = endpoint({
+  method: "GET",
+  path: "/api/shops/:shop/jobs/:jobId/events",
+  summary: "The job's log, newest first",
+  params: oneJob,
+  query: z.strictObject(pageQuery),
+  body: nothing,
+  result: pageOf(eventSchema),
+});
