@@ -61,6 +61,8 @@ export const inspectLink = endpoint({
     /** Join shop: someone with this address has a password already, so they sign in to accept. */
     knownPerson: z.boolean(),
     role: role.nullable(),
+    /** Where to go once the link has been used, a path of this application. */
+    goTo: z.string().nullable(),
   }),
 });
 

@@ -1,0 +1,24 @@
+/** Every address of the application. Components never build one by hand. */
+export const paths = {
+  home: () => "/",
+  signIn: () => "/sign-in",
+  register: () => "/register",
+  forgotPassword: () => "/forgot-password",
+  /** Where mailed links lead: sign in, join a shop, new password. A page with a button, since scanners open links too. */
+  link: (token: string) => `/link/${token}`,
+  account: () => "/account",
+  share: (token: string) => `/share/${token}`,
+  bench: (shop: string) => `/shop/${shop}/bench`,
+  job: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}`,
+  mockup: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}/mockup`,
+  compare: (shop: string, jobId: string, before: string, after: string) =>
+    `/shop/${shop}/jobs/${jobId}/compare?before=${before}&after=${after}`,
+  sheet: (shop: string, revisionId: string) => `/shop/${shop}/sheets/${revisionId}`,
+  clients: (shop: string) => `/shop/${shop}/clients`,
+  client: (shop: string, clientId: string) => `/shop/${shop}/clients/${clientId}`,
+  portfolio: (shop: string) => `/shop/${shop}/portfolio`,
+  stock: (shop: string) => `/shop/${shop}/stock`,
+  team: (shop: string) => `/shop/${shop}/team`,
+  shop: (shop: string) => `/shop/${shop}/shop`,
+  outgoingMail: (shop: string) => `/shop/${shop}/outgoing-mail`,
+} as const;
