@@ -1,0 +1,113 @@
+import type { JoinType, MainModule, PathsD } from "clipper2-wasm/dist/clipper2z";
+import type { FillRule, Join, Kernel } from "./kernel.ts";
+import type { Polygon, Region } from "./path.ts";
+import { strokeParts } from "./stroke-parts.ts";
+
+/** Decimals of the kernel's grid: 3 is 0.001 mm. */
+const gridDecimals = 3;
+const arcToleranceMm = 0.01;
+const mitreLimit = 4;
+/** Far beyond any sign, and well inside what the 64-bit grid and its products can hold. */
+const largestCoordinateMm = 1_000_000;
+
+/**
+ * The kernel on a loaded clipper2-wasm module. Everything allocated in the module's memory is freed before a call
+ * returns or throws. Throws a RangeError for coordinates that are not finite or lie beyond 1,000,000 mm.
+ */
+export function clipperKernel(clipper: MainModule): Kernel {
+  const fillRules: Record<FillRule, MainModule["FillRule"]["EvenOdd" | "NonZero"]> = {
+    evenodd: clipper.FillRule.EvenOdd,
+    nonzero: clipper.FillRule.NonZero,
+  };
+  const joins: Record<Join, JoinType> = { round: clipper.JoinType.Round, mitre: clipper.JoinType.Miter };
+
+  const combine = (
+    type: MainModule["ClipType"]["Union" | "Intersection" | "Difference"],
+    rule: FillRule,
+    subject: Region,
+    clip: Region,
+  ): Region => {
+    const a = toPaths(clipper, subject);
+    try {
+      const b = toPaths(clipper, clip);
+      try {
+        return takeRegion(clipper.BooleanOpD(type, fillRules[rule], a, b, gridDecimals));
+      } finally {
+        b.delete();
+      }
+    } finally {
+      a.delete();
+    }
+  };
+  const union = (region: Region, rule: FillRule): Region =>
+    region.length === 0 ? [] : combine(clipper.ClipType.Union, rule, region, []);
+
+  return {
+    union,
+    intersect: (a, b) =>
+      a.length === 0 || b.length === 0 ? [] : combine(clipper.ClipType.Intersection, "evenodd", a, b),
+    difference: (a, b) => (a.length === 0 ? [] : combine(clipper.ClipType.Difference, "evenodd", a, b)),
+    offset: (region, distanceMm, join) => {
+      // An offset of rings whose direction does not say which is a hole is wrong without a sound, so they are oriented first.
+      const oriented = union(region, "evenodd");
+      if (oriented.length === 0 || distanceMm === 0) return oriented;
+      const paths = toPaths(clipper, oriented);
+      try {
+        return takeRegion(
+          clipper.InflatePathsD(
+            paths,
+            distanceMm,
+            joins[join],
+            clipper.EndType.Polygon,
+            mitreLimit,
+            gridDecimals,
+            arcToleranceMm,
+          ),
+        );
+      } finally {
+        paths.delete();
+      }
+    },
+    strokeOutline: (line, options) => union(strokeParts(line, options), "nonzero"),
+  };
+}
+
+function toPaths(clipper: MainModule, region: Region): PathsD {
+  const paths = new clipper.PathsD();
+  for (const polygon of region) {
+    if (polygon.length < 3) continue;
+    // The module holds a point as x, y and a label.
+    const numbers = new Float64Array(polygon.length * 3);
+    for (const [index, { x, y }] of polygon.entries()) {
+      if (!(Math.abs(x) <= largestCoordinateMm && Math.abs(y) <= largestCoordinateMm)) {
+        paths.delete();
+        throw new RangeError(`A point at ${x}, ${y} lies outside what the geometry kernel takes.`);
+      }
+      numbers[index * 3] = x;
+      numbers[index * 3 + 1] = y;
+    }
+    const path = new clipper.PathD();
+    path.assign(numbers);
+    paths.push_back(path);
+    path.delete();
+  }
+  return paths;
+}
+
+/** Copies the rings out of the module's memory and frees them. */
+function takeRegion(paths: PathsD): Region {
+  const region: Polygon[] = [];
+  const count = paths.size();
+  for (let index = 0; index < count; index++) {
+    const path = paths.get(index);
+    const numbers = path.view();
+    const polygon = Array.from({ length: numbers.length / 3 }, (_, point) => ({
+      x: numbers[point * 3] ?? 0,
+      y: numbers[point * 3 + 1] ?? 0,
+    }));
+    path.delete();
+    if (polygon.length >= 3) region.push(polygon);
+  }
+  paths.delete();
+  return region;
+}
