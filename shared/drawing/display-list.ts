@@ -16,7 +16,14 @@ export type Stroke = {
  */
 export type Item =
   /** Closed rings, even-odd. */
-  | { readonly kind: "path"; readonly id?: string; readonly path: Path; readonly fill?: Colour; readonly stroke?: Stroke; readonly opacity?: number }
+  | {
+      readonly kind: "path";
+      readonly id?: string;
+      readonly path: Path;
+      readonly fill?: Colour;
+      readonly stroke?: Stroke;
+      readonly opacity?: number;
+    }
   /** An open line. */
   | { readonly kind: "line"; readonly id?: string; readonly points: readonly Point[]; readonly stroke: Stroke }
   /** `at` is the baseline point, left, middle or right by `align`; `sizeMm` is the em size; turned clockwise about `at`. */
@@ -32,11 +39,24 @@ export type Item =
       readonly turn?: number;
     }
   /** A PNG with alpha, stretched over `box`. Shadows and textures come as images, made once for all painters. */
-  | { readonly kind: "image"; readonly id?: string; readonly box: Box; readonly pngBase64: string; readonly opacity?: number }
+  | {
+      readonly kind: "image";
+      readonly id?: string;
+      readonly box: Box;
+      readonly pngBase64: string;
+      readonly opacity?: number;
+    }
   /** Items drawn only inside `clip` (even-odd). */
   | { readonly kind: "clip"; readonly clip: Path; readonly items: readonly Item[] }
   /** Items moved by (x, y) and then scaled by `scale` about that point: how a view is set on a sheet. Stroke widths and text scale too. */
-  | { readonly kind: "group"; readonly id?: string; readonly x: number; readonly y: number; readonly scale: number; readonly items: readonly Item[] };
+  | {
+      readonly kind: "group";
+      readonly id?: string;
+      readonly x: number;
+      readonly y: number;
+      readonly scale: number;
+      readonly items: readonly Item[];
+    };
 
 export type Font = "serif" | "serif-bold" | "serif-black" | "sans" | "sans-semibold";
 
