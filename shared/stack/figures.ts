@@ -1,7 +1,7 @@
 import type { Box, Point, Region } from "../geometry/path.ts";
+import type { Banded } from "../units/banded.ts";
 
-/** A value with the band it can lie in, from the tolerances of the sheets. All mm. */
-export type Banded = { readonly nominal: number; readonly least: number; readonly most: number };
+export type { Banded };
 
 export type PieceFigures = {
   readonly pieceId: string;

@@ -1,0 +1,24 @@
+import type { LengthUnit } from "./length.ts";
+
+/** Exactly (NIST SP 811). */
+export const gramsPerPound = 453.59237;
+
+/**
+ * A mass in words: "4.2 g" under 10 g, then "0.27 kg", from 100 kg without decimals; for shops that work in inches
+ * "0.15 oz" under 10 g, then "0.6 lb". Something that is no number is an en dash.
+ */
+export function formatMass(grams: number, unit: LengthUnit): string {
+  if (!Number.isFinite(grams)) return "–";
+  const small = Math.abs(grams) < 10;
+  if (unit === "in") {
+    const pounds = grams / gramsPerPound;
+    return small ? `${decimals(pounds * 16, 2)} oz` : `${decimals(pounds, Math.abs(pounds) < 100 ? 2 : 0)} lb`;
+  }
+  if (small) return `${decimals(grams, 1)} g`;
+  return `${(grams / 1000).toFixed(Math.abs(grams) < 100_000 ? 2 : 0)} kg`;
+}
+
+function decimals(value: number, count: number): string {
+  const rounded = Number(value.toFixed(count));
+  return String(rounded === 0 ? 0 : rounded);
+}
