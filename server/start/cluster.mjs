@@ -22,7 +22,11 @@ export const superuser = "postgres";
  */
 export function runAsServerUser(program, args) {
   const [command, ...rest] = isRoot() ? ["runuser", "-u", superuser, "--", program, ...args] : [program, ...args];
-  return run(command ?? program, rest, { cwd: "/", env: { PATH: process.env.PATH, HOME: "/", LC_ALL: "C.UTF-8" } });
+  return run(command ?? program, rest, {
+    cwd: "/",
+    env: { PATH: process.env.PATH, HOME: "/", LC_ALL: "C.UTF-8" },
+    apart: true,
+  });
 }
 
 /**

@@ -46,12 +46,11 @@ export async function startDurableCluster(folder) {
   if (serverPid(data) === undefined) rmSync(join(data, "postmaster.pid"), { force: true });
 
   const port = await rememberedPort(folder);
-  await startServer(cluster, { port, durable: true });
-  const access = { port, password: secrets.superuser };
   try {
-    await runSql(cluster, { ...access, sql: `${rolesSql(secrets)}\n${databaseSql}` });
+    await startServer(cluster, { port, durable: true });
+    await runSql(cluster, { port, password: secrets.superuser, sql: `${rolesSql(secrets)}\n${databaseSql}` });
   } catch (error) {
-    await stopServer(cluster);
+    if (serverPid(data) !== undefined) await stopServer(cluster);
     throw error;
   }
   return {

@@ -3,12 +3,21 @@ import { readFileSync } from "node:fs";
 import { setTimeout as pause } from "node:timers/promises";
 import { errorCode } from "./problem.mjs";
 
+/** @type {Set<import("node:child_process").ChildProcess>} */
+const running = new Set();
+
+/** Asks every program that run() is waiting for to end; each run() then resolves with its code. */
+export function interruptRunning() {
+  for (const child of running) child.kill("SIGTERM");
+}
+
 /**
  * @typedef {object} RunOptions
  * @property {string} [cwd]
  * @property {NodeJS.ProcessEnv} [env] the whole environment of the program, not an addition
  * @property {string} [input] what it reads from its standard input
  * @property {boolean} [shown] true: its output goes to this terminal instead of being collected
+ * @property {boolean} [apart] true: in a session of its own, so that Ctrl-C in this terminal does not reach it
  *
  * @typedef {object} RunResult
  * @property {number} code its exit code; 128 when a signal ended it, 127 when it could not be started
@@ -22,16 +31,21 @@ import { errorCode } from "./problem.mjs";
  * @param {RunOptions} [options]
  * @returns {Promise<RunResult>}
  */
-export function run(command, args, { cwd, env = process.env, input, shown = false } = {}) {
+export function run(command, args, { cwd, env = process.env, input, shown = false, apart = false } = {}) {
   return new Promise((resolve) => {
     const output = shown ? "inherit" : "pipe";
-    const child = spawn(command, args, { cwd, env, stdio: [input === undefined ? "ignore" : "pipe", output, output] });
+    const stdin = input === undefined ? "ignore" : "pipe";
+    const child = spawn(command, args, { cwd, env, detached: apart, stdio: [stdin, output, output] });
+    running.add(child);
     /** @type {Buffer[]} */
     const written = [];
     child.stdout?.on("data", (chunk) => written.push(chunk));
     child.stderr?.on("data", (chunk) => written.push(chunk));
     child.on("error", (error) => resolve({ code: 127, output: `${command}: ${error.message}\n` }));
-    child.on("close", (code) => resolve({ code: code ?? 128, output: Buffer.concat(written).toString("utf8") }));
+    child.on("close", (code) => {
+      running.delete(child);
+      resolve({ code: code ?? 128, output: Buffer.concat(written).toString("utf8") });
+    });
     // A program that ends without reading its input closes the pipe; its exit code tells that story.
     child.stdin?.on("error", () => undefined);
     child.stdin?.end(input);
