@@ -22,3 +22,10 @@ export const paths = {
   shop: (shop: string) => `/shop/${shop}/shop`,
   outgoingMail: (shop: string) => `/shop/${shop}/outgoing-mail`,
 } as const;
+
+/** Sign-in that leads back to where the reader was going. */
+export const signInTo = (next: string): string => `${paths.signIn()}?next=${encodeURIComponent(next)}`;
+
+/** A way back is taken only when it stays within this application. */
+export const localPath = (next: string | null): string | null =>
+  next !== null && /^\/(?![/\\])[^\\\s]*$/.test(next) && !next.startsWith(paths.signIn()) ? next : null;

@@ -1,0 +1,13 @@
+import { QueryClient } from "@tanstack/react-query";
+import { ApiProblem } from "@/lib/api-client.ts";
+
+/** Only what may pass by itself is tried again: no answer, or a server that is not ready. */
+const mayPass = (error: unknown): boolean =>
+  error instanceof ApiProblem && (error.code === "unreachable" || error.code === "not_ready");
+
+export const queryClient = new QueryClient({
+  defaultOptions: {
+    queries: { staleTime: 10_000, retry: (failures, error) => failures < 2 && mayPass(error) },
+    mutations: { retry: false },
+  },
+});
