@@ -1,0 +1,114 @@
+import { type MouseEvent, memo, type ReactNode, useId, useMemo, useRef } from "react";
+import type { DisplayList } from "#shared/drawing/display-list.ts";
+import { cx } from "./cx.ts";
+import { DrawingSvg } from "./drawing-svg.tsx";
+import { type DrawingView, type Size, viewFit } from "./drawing-view.ts";
+import { useDrawingGestures } from "./use-drawing-gestures.ts";
+import { useRoom } from "./use-room.ts";
+
+type DrawingViewerProps = {
+  readonly list: DisplayList;
+  /** What the picture shows, for those who don't see it. */
+  readonly title: string;
+  /** null shows the whole drawing. */
+  readonly view: DrawingView | null;
+  readonly onView: (view: DrawingView | null) => void;
+  /** Size in mm that the whole view makes room for, when two pictures are to have one scale. */
+  readonly fitTo?: Size;
+  /** A cross-hair is shown and a touch names a spot in mm of the picture, with the item touched. */
+  readonly onPick?: ((id: string | null, at: { x: number; y: number }) => void) | undefined;
+  /** What lies over the drawing in window px, as balloons. */
+  readonly overlay?: (shown: DrawingView, room: Size, fit: DrawingView) => ReactNode;
+  readonly className?: string;
+};
+
+/** The picture itself: it is drawn once, and looking around only moves its frame. */
+const Picture = memo(DrawingSvg);
+
+/** A drawing in a window: drag, wheel, two fingers, keys or the three words below it to look around. */
+export function DrawingViewer({ list, title, view, onView, fitTo, onPick, overlay, className }: DrawingViewerProps) {
+  const element = useRef<HTMLDivElement>(null);
+  const room = useRoom(element);
+  const hintId = useId();
+  const picture = useMemo(() => ({ width: list.widthMm, height: list.heightMm }), [list]);
+  const fit = useMemo(() => viewFit(fitTo ?? picture, room ?? { width: 1, height: 1 }), [fitTo, picture, room]);
+  const shown = view ?? fit;
+  const gestures = useDrawingGestures({ element, picture: fitTo ?? picture, room, fit, view: shown, onView });
+
+  function handleClickCapture(event: MouseEvent) {
+    if (gestures.endedDrag()) event.stopPropagation();
+  }
+
+  return (
+    <div className={cx("relative overflow-hidden", className)}>
+      <div
+        ref={element}
+        role="application"
+        aria-label={`${title}, to look around in`}
+        aria-describedby={hintId}
+        onClickCapture={handleClickCapture}
+        {...gestures.windowProps}
+        className={cx(
+          "absolute inset-0 overflow-hidden -outline-offset-4",
+          view === null ? "touch-pan-y" : "touch-none",
+          onPick ? "cursor-crosshair" : view !== null && "cursor-grab",
+        )}
+      >
+        {room && (
+          <>
+            <div
+              className="absolute"
+              style={{
+                left: shown.x,
+                top: shown.y,
+                width: picture.width * shown.scale,
+                height: picture.height * shown.scale,
+              }}
+            >
+              <Picture
+                list={list}
+                title={title}
+                className="block h-full w-full select-none"
+                {...(onPick ? { onPick } : {})}
+              />
+            </div>
+            {overlay?.(shown, room, fit)}
+          </>
+        )}
+      </div>
+      <p className="absolute bottom-1.5 left-1.5 flex gap-1">
+        <ViewButton label="Closer" about={title} onPress={() => gestures.step(1.6)} />
+        <ViewButton label="Farther" about={title} idle={gestures.isWhole} onPress={() => gestures.step(1 / 1.6)} />
+        <ViewButton label="Whole" about={title} idle={gestures.isWhole} onPress={() => onView(null)} />
+      </p>
+      <p id={hintId} className="sr-only">
+        Plus and minus look closer and farther, arrows move, 0 shows the whole drawing.
+      </p>
+    </div>
+  );
+}
+
+type ViewButtonProps = {
+  readonly label: string;
+  readonly about: string;
+  /** Pressing it would change nothing; it keeps its place in the tab order. */
+  readonly idle?: boolean;
+  readonly onPress: () => void;
+};
+
+function ViewButton({ label, about, idle = false, onPress }: ViewButtonProps) {
+  return (
+    <button
+      type="button"
+      aria-disabled={idle}
+      onClick={idle ? undefined : onPress}
+      className={cx(
+        "min-h-8 rounded border bg-sheet/90 px-2 text-fine",
+        idle ? "border-rule text-graphite" : "cursor-pointer border-graphite text-ink hover:bg-linen",
+      )}
+    >
+      {label}
+      <span className="sr-only">: {about}</span>
+    </button>
+  );
+}
