@@ -58,7 +58,15 @@ export const woodSchema = z.strictObject({
 export const adhesiveSchema = z.strictObject({
   stockId: z.uuid().nullable(),
   name,
-  family: z.enum(["solvent cement", "bodied cement", "cyanoacrylate", "epoxy", "neutral silicone", "high-bond tape", "wood glue"]),
+  family: z.enum([
+    "solvent cement",
+    "bodied cement",
+    "cyanoacrylate",
+    "epoxy",
+    "neutral silicone",
+    "high-bond tape",
+    "wood glue",
+  ]),
 });
 
 export const capStudSchema = z.strictObject({
@@ -128,13 +136,23 @@ export const layerSchema = z.strictObject({
 export const documentSchema = z
   .strictObject({
     version: z.literal(documentVersion),
-    board: z.strictObject({ outline: z.literal("rectangle"), width: length, height: length, measures: z.enum(["body", "overall"]) }),
+    board: z.strictObject({
+      outline: z.literal("rectangle"),
+      width: length,
+      height: length,
+      measures: z.enum(["body", "overall"]),
+    }),
     hanging: z.strictObject({
       kind: z.enum(["cleat", "keyholes", "wire", "screwed through", "none"]),
       gap: z.number().finite().min(0).max(500),
     }),
     quantity: z.int().min(1).max(1000),
-    backer: z.strictObject({ kind: z.literal("plain"), stock: woodSchema, thickness: length.max(200), finish: z.string().trim().max(200) }),
+    backer: z.strictObject({
+      kind: z.literal("plain"),
+      stock: woodSchema,
+      thickness: length.max(200),
+      finish: z.string().trim().max(200),
+    }),
     /** From the wall outward. Key A is the backer's, layers start at B. */
     layers: z.array(layerSchema).max(60),
     presentation: z.strictObject({
@@ -154,11 +172,17 @@ export const documentSchema = z
     const keys = new Set<string>(["A"]);
     const ids = new Set<string>();
     for (const [index, layer] of document.layers.entries()) {
-      if (keys.has(layer.key)) context.addIssue({ code: "custom", path: ["layers", index, "key"], message: `Key ${layer.key} is used twice.` });
+      if (keys.has(layer.key))
+        context.addIssue({
+          code: "custom",
+          path: ["layers", index, "key"],
+          message: `Key ${layer.key} is used twice.`,
+        });
       keys.add(layer.key);
       const held = layer.hold.kind === "standoff" ? layer.hold.holes : [];
       for (const thing of [...layer.pieces, ...held]) {
-        if (ids.has(thing.id)) context.addIssue({ code: "custom", path: ["layers", index], message: `The id ${thing.id} is used twice.` });
+        if (ids.has(thing.id))
+          context.addIssue({ code: "custom", path: ["layers", index], message: `The id ${thing.id} is used twice.` });
         ids.add(thing.id);
       }
     }

@@ -1,0 +1,73 @@
+import { regionAreaMm2, regionCentroid, regionPerimeterMm } from "../geometry/area.ts";
+import type { Kernel } from "../geometry/kernel.ts";
+import { sheetBand } from "../materials/sheet-tolerance.ts";
+import type { Layer, MockupDocument } from "../mockup/document.ts";
+import { type Banded, bandHighest, bandLowest, bandSum, exactly } from "../units/banded.ts";
+import type { Figures, LayerFigures, PieceFigures } from "./figures.ts";
+import { computeMasses } from "./masses.ts";
+import { backerTopOf, rise, type StandingPiece, standPieces } from "./stand-pieces.ts";
+
+/**
+ * Every figure of a sign: heights with their bands, areas, masses, depth. The document must have passed its schema; then every
+ * figure is finite. An empty layer has the heights a piece lying on the backer would have. Figures are of one sign, whatever
+ * the quantity. Hardware is counted but not weighed: its density is not stated.
+ */
+export function computeFigures(document: MockupDocument, kernel: Kernel): Figures {
+  const standing = standPieces(document, kernel);
+  const masses = computeMasses(document, standing, kernel);
+  const backerTop = backerTopOf(document);
+  const pieces = standing.map((one) => pieceFigures(one, masses.pieces.get(one.piece.id) ?? 0));
+  const layers = document.layers.map((layer) => layerFigures(layer, pieces, backerTop));
+  const depth = bandHighest([backerTop, ...standing.map(topWithCap)]) ?? backerTop;
+  return {
+    backerTop,
+    backerMassG: masses.backer,
+    layers,
+    pieces,
+    hardwareCount: document.layers.reduce(
+      (count, { hold }) => count + (hold.kind === "standoff" ? hold.holes.length : 0),
+      0,
+    ),
+    massG: layers.reduce((sum, layer) => sum + layer.massG, masses.backer),
+    depth,
+    offWall: bandSum(depth, exactly(document.hanging.gap)),
+  };
+}
+
+function pieceFigures(one: StandingPiece, massG: number): PieceFigures {
+  const { x, y } = one.piece.placement;
+  return {
+    pieceId: one.piece.id,
+    layerKey: one.layer.key,
+    region: one.region,
+    box: one.box ?? { x, y, width: 0, height: 0 },
+    centroid: regionCentroid(one.region) ?? { x, y },
+    areaMm2: regionAreaMm2(one.region),
+    perimeterMm: regionPerimeterMm(one.region),
+    restsOn: one.restsOn,
+    bottom: one.bottom,
+    top: one.top,
+    massG,
+  };
+}
+
+function layerFigures(layer: Layer, all: readonly PieceFigures[], backerTop: Banded): LayerFigures {
+  const pieces = all.filter((piece) => piece.layerKey === layer.key);
+  const onBacker = bandSum(backerTop, rise(layer.hold));
+  return {
+    key: layer.key,
+    name: layer.name,
+    pieces: pieces.length,
+    bottom: bandLowest(pieces.map((piece) => piece.bottom)) ?? onBacker,
+    top:
+      bandHighest(pieces.map((piece) => piece.top)) ??
+      bandSum(onBacker, sheetBand(layer.stock.process, layer.thickness)),
+    massG: pieces.reduce((sum, piece) => sum + piece.massG, 0),
+  };
+}
+
+/** The cap of a standoff stands on the face of the piece its stud passes. */
+function topWithCap({ layer, holes, top }: StandingPiece): Banded {
+  if (layer.hold.kind !== "standoff" || holes.length === 0) return top;
+  return bandSum(top, exactly(layer.hold.hardware.capThickness));
+}

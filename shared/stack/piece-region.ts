@@ -1,0 +1,23 @@
+import { flattenPath } from "../geometry/flatten.ts";
+import type { Kernel } from "../geometry/kernel.ts";
+import type { Path, Placement, Point, Region } from "../geometry/path.ts";
+import { placePath } from "../geometry/placement.ts";
+import { circlePath, rectanglePath } from "../geometry/shapes.ts";
+
+/** A piece's outline on the board, flattened to 0.02 mm, as non-crossing rings; empty when it covers nothing. */
+export function pieceRegion(piece: { readonly path: Path; readonly placement: Placement }, kernel: Kernel): Region {
+  return kernel.union(flattenPath(placePath(piece.path, piece.placement)), "evenodd");
+}
+
+/** The board's face. */
+export function boardRegion(board: { readonly width: number; readonly height: number }): Region {
+  return flattenPath(rectanglePath({ x: 0, y: 0, width: board.width, height: board.height }));
+}
+
+/** Discs of one diameter each, joined. */
+export function discsRegion(discs: readonly (Point & { readonly diameter: number })[], kernel: Kernel): Region {
+  return kernel.union(
+    discs.flatMap((disc) => flattenPath(circlePath(disc, disc.diameter / 2))),
+    "nonzero",
+  );
+}
