@@ -1,0 +1,56 @@
+import { runMigrations } from "graphile-worker";
+import type { Sequelize } from "sequelize";
+import { SequelizeStorage, Umzug } from "umzug";
+import { connect } from "./connection.ts";
+import { migrations } from "./migrations/list.ts";
+
+/** Umzug over our migrations; each runs in a transaction of its own. */
+export function migrator(sequelize: Sequelize) {
+  const within = (run: (sql: (text: string) => Promise<void>) => Promise<void>) =>
+    sequelize.transaction((transaction) =>
+      run(async (text) => {
+        await sequelize.query(text, { transaction });
+      }),
+    );
+  return new Umzug({
+    migrations: migrations.map(({ name, up, down }) => ({ name, up: () => within(up), down: () => within(down) })),
+    storage: new SequelizeStorage({ sequelize, tableName: "migrations" }),
+    logger: undefined,
+  });
+}
+
+/** What the app's role may do: read and write rows, never own, empty or alter tables, never touch what is kept. */
+const grants = (role: string) => `
+grant usage on schema public, graphile_worker to ${role};
+grant select, insert, update, delete on all tables in schema public to ${role};
+revoke update, delete on events, decisions, certificates from ${role};
+revoke delete on revisions from ${role};
+revoke update on stored_files from ${role};
+revoke insert, update, delete on migrations from ${role};
+grant usage, select on all sequences in schema public to ${role};
+grant select, insert, update, delete on all tables in schema graphile_worker to ${role};
+grant usage, select on all sequences in schema graphile_worker to ${role};
+grant execute on all functions in schema graphile_worker to ${role};
+`;
+
+/**
+ * Brings the database up to date: our tables, the queue's tables, and the rights of the app's role.
+ * `appRole` is a plain role name that exists already; without one the app runs as the owner.
+ */
+export async function migrate({
+  ownerUrl,
+  appRole,
+}: {
+  ownerUrl: string;
+  appRole?: string | undefined;
+}): Promise<void> {
+  if (appRole !== undefined && !/^[a-z_][a-z0-9_]{0,62}$/.test(appRole)) throw new Error(`Not a role name: ${appRole}`);
+  const sequelize = connect(ownerUrl, { poolMax: 1 });
+  try {
+    await migrator(sequelize).up();
+    await runMigrations({ connectionString: ownerUrl });
+    if (appRole) await sequelize.query(grants(appRole));
+  } finally {
+    await sequelize.close();
+  }
+}

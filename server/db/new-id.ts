@@ -1,0 +1,4 @@
+import { randomUUID } from "node:crypto";
+
+/** A key for a new row. */
+export const newId = (): string => randomUUID();

@@ -1,0 +1,174 @@
+import { rm } from "node:fs/promises";
+import type { Request, Response, Router } from "express";
+import type { z } from "zod";
+import type { Endpoint } from "#shared/contracts/endpoint.ts";
+import { Shop } from "../models/shop.ts";
+import { AppError, invalid, notFound } from "./app-error.ts";
+import type { Context, ReadContext, Services } from "./context.ts";
+import { FileAnswer } from "./file-answer.ts";
+import { actorAt, readSession } from "./session.ts";
+import { type ReceivedFile, receiveFile } from "./uploads.ts";
+
+type Any = z.ZodType;
+type Parsed<E extends Endpoint> = {
+  params: z.output<E["params"]>;
+  query: z.output<E["query"]>;
+  body: z.output<E["body"]>;
+};
+type Answer<E extends Endpoint> = E extends { form: "file" } ? FileAnswer : z.input<E["result"]> | FileAnswer;
+
+/** Who may reach the handler at all: anyone, someone signed in, or someone with a place in the shop of the address. */
+export type Reach = "anyone" | "signed in" | "insiders";
+export type Registered = { readonly endpoint: Endpoint; readonly reach: Reach };
+
+/** The router with the services it hands to handlers and the list of what was registered, which the policy tests walk. */
+export type Routes = { readonly router: Router; readonly services: Services; readonly registered: Registered[] };
+
+type Options = { readonly reach?: Reach };
+
+/** A request that only reads. */
+export function read<E extends Endpoint>(
+  routes: Routes,
+  endpoint: E,
+  handle: (context: ReadContext, input: Parsed<E>) => Promise<Answer<E>>,
+  options: Options = {},
+): void {
+  register(routes, endpoint, options, async (context, input) => handle(context, input as Parsed<E>));
+}
+
+/** A request that changes rows: all of it in one transaction, committed before the answer goes out. */
+export function write<E extends Endpoint>(
+  routes: Routes,
+  endpoint: E,
+  handle: (context: Context, input: Parsed<E>) => Promise<Answer<E>>,
+  options: Options = {},
+): void {
+  register(routes, endpoint, options, (context, input) =>
+    routes.services.sequelize.transaction((transaction) => handle({ ...context, transaction }, input as Parsed<E>)),
+  );
+}
+
+/**
+ * A request that brings a file. `allow` is asked before the first byte is taken; `handle` then runs in one transaction with the
+ * file in quarantine, which is removed afterwards unless the handler moved it away.
+ */
+export function upload<E extends Endpoint>(
+  routes: Routes,
+  endpoint: E,
+  {
+    maxBytes,
+    allow,
+    handle,
+  }: {
+    maxBytes: number;
+    allow: (context: ReadContext, params: z.output<E["params"]>) => Promise<void>;
+    handle: (context: Context, input: { params: z.output<E["params"]>; file: ReceivedFile }) => Promise<Answer<E>>;
+  },
+): void {
+  routes.registered.push({ endpoint, reach: "insiders" });
+  routes.router.post(endpoint.path, async (request, response) => {
+    const context = await contextOf(request, routes.services, "insiders");
+    const params = parsed(endpoint.params, request.params, "params") as z.output<E["params"]>;
+    await allow(context, params);
+    const file = await receiveFile(request, response, { dir: routes.services.storage.quarantineDir, maxBytes });
+    try {
+      const answer = await routes.services.sequelize.transaction((transaction) =>
+        handle({ ...context, transaction }, { params, file }),
+      );
+      await send(response, endpoint, answer, routes.services.env.NODE_ENV);
+    } finally {
+      await rm(file.path, { force: true });
+    }
+  });
+}
+
+function register(
+  routes: Routes,
+  endpoint: Endpoint,
+  options: Options,
+  run: (context: ReadContext, input: Parsed<Endpoint>) => Promise<unknown>,
+): void {
+  const reach = options.reach ?? (endpoint.path.startsWith("/api/shops/:shop") ? "insiders" : "signed in");
+  routes.registered.push({ endpoint, reach });
+  const method = endpoint.method.toLowerCase() as "get" | "post" | "put" | "patch" | "delete";
+  routes.router[method](endpoint.path, async (request, response) => {
+    const context = await contextOf(request, routes.services, reach);
+    const input = {
+      params: parsed(endpoint.params, request.params, "params"),
+      query: parsed(endpoint.query, request.query, "query"),
+      body: parsed(endpoint.body, request.body ?? {}, ""),
+    };
+    await send(response, endpoint, await run(context, input), routes.services.env.NODE_ENV);
+  });
+}
+
+async function contextOf(request: Request, services: Services, reach: Reach): Promise<ReadContext> {
+  const now = new Date();
+  const live = await readSession(request, services.env, now);
+  if (reach !== "anyone" && !live) throw new AppError("not_signed_in");
+  const slug = typeof request.params.shop === "string" ? request.params.shop : null;
+  const shop = slug ? await Shop.findOne({ where: { slug } }) : null;
+  const actor = await actorAt(live, shop?.id ?? null);
+  if (reach === "insiders" && (!shop || (actor.kind !== "staff" && actor.kind !== "contact"))) throw notFound("page");
+  return {
+    services,
+    actor,
+    shop: shop ? { id: shop.id, slug: shop.slug } : null,
+    now,
+    requestId: String(request.id),
+    address: request.ip ?? "",
+    agent: (request.get("user-agent") ?? "").slice(0, 400),
+    log: request.log,
+  };
+}
+
+function parsed(schema: Any, value: unknown, within: string): unknown {
+  const outcome = schema.safeParse(value);
+  if (outcome.success) return outcome.data;
+  // A malformed id in the address is an address of nothing.
+  if (within === "params") throw notFound("page");
+  throw invalid(
+    outcome.error.issues.flatMap((issue) =>
+      issue.code === "unrecognized_keys"
+        ? issue.keys.map((key) => ({ pointer: pointerOf([...issue.path, key]), detail: "This field is not known." }))
+        : [{ pointer: pointerOf(issue.path), detail: issue.message }],
+    ),
+  );
+}
+
+/** JSON pointer (RFC 6901). */
+function pointerOf(path: readonly PropertyKey[]): string {
+  return path.map((step) => `/${String(step).replaceAll("~", "~0").replaceAll("/", "~1")}`).join("");
+}
+
+async function send(response: Response, endpoint: Endpoint, answer: unknown, mode: string): Promise<void> {
+  response.setHeader("Cache-Control", "no-store");
+  if (answer instanceof FileAnswer) {
+    response.setHeader("Content-Type", answer.mediaType);
+    response.setHeader("Content-Length", answer.byteSize);
+    response.setHeader("X-Content-Type-Options", "nosniff");
+    response.setHeader(
+      "Content-Disposition",
+      `${answer.disposition}; filename*=UTF-8''${encodeURIComponent(answer.fileName)}`,
+    );
+    if (answer.disposition === "attachment")
+      response.setHeader("Content-Security-Policy", "sandbox; default-src 'none'");
+    for await (const chunk of answer.stream) if (!response.write(chunk)) await onceDrained(response);
+    response.end();
+    return;
+  }
+  response.status(endpoint.status ?? 200);
+  if (answer === undefined) {
+    response.end();
+    return;
+  }
+  // Outside production a field too many in an answer fails here, before it can leak.
+  response.json(mode === "production" ? answer : endpoint.result.parse(answer));
+}
+
+function onceDrained(response: Response): Promise<void> {
+  return new Promise((resolve, reject) => {
+    response.once("drain", resolve);
+    response.once("close", () => reject(new Error("The reader went away.")));
+  });
+}

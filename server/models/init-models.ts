@@ -1,0 +1,53 @@
+import type { Sequelize } from "sequelize";
+import { initArtwork } from "./artwork.ts";
+import { associate } from "./associations.ts";
+import { initCertificate } from "./certificate.ts";
+import { initClient } from "./client.ts";
+import { initContact } from "./contact.ts";
+import { initDecision } from "./decision.ts";
+import { initEvent } from "./event.ts";
+import { initInvitation } from "./invitation.ts";
+import { initJob } from "./job.ts";
+import { initJobApprover } from "./job-approver.ts";
+import { initMembership } from "./membership.ts";
+import { initMockup } from "./mockup.ts";
+import { initNote } from "./note.ts";
+import { initOneTimeLink } from "./one-time-link.ts";
+import { initOutgoingMail } from "./outgoing-mail.ts";
+import { initPerson } from "./person.ts";
+import { initReply } from "./reply.ts";
+import { initRevision } from "./revision.ts";
+import { initSession } from "./session.ts";
+import { initShareLink } from "./share-link.ts";
+import { initShareLinkPiece } from "./share-link-piece.ts";
+import { initShop } from "./shop.ts";
+import { initStockItem } from "./stock-item.ts";
+import { initStoredFile } from "./stored-file.ts";
+
+/** Binds every model to a connection. Models are singletons of the process: one database a process. */
+export function initModels(sequelize: Sequelize): void {
+  initShop(sequelize);
+  initPerson(sequelize);
+  initMembership(sequelize);
+  initInvitation(sequelize);
+  initClient(sequelize);
+  initContact(sequelize);
+  initSession(sequelize);
+  initOutgoingMail(sequelize);
+  initOneTimeLink(sequelize);
+  initJob(sequelize);
+  initJobApprover(sequelize);
+  initStoredFile(sequelize);
+  initArtwork(sequelize);
+  initMockup(sequelize);
+  initRevision(sequelize);
+  initNote(sequelize);
+  initReply(sequelize);
+  initDecision(sequelize);
+  initCertificate(sequelize);
+  initShareLink(sequelize);
+  initShareLinkPiece(sequelize);
+  initStockItem(sequelize);
+  initEvent(sequelize);
+  associate();
+}

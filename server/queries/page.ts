@@ -1,0 +1,41 @@
+import { AppError } from "../http/app-error.ts";
+
+/** One page of a list and the cursor of the next, null at the end. */
+export type Page<T> = { items: T[]; next: string | null };
+
+/** Turns the sort values of the last row into an opaque cursor. */
+export function cursorOf(values: readonly (string | number | null)[]): string {
+  return Buffer.from(JSON.stringify(values)).toString("base64url");
+}
+
+/** Reads a cursor of `length` values back. A cursor we did not make is a bad request. */
+export function readCursor(cursor: string | undefined, length: number): (string | number | null)[] | null {
+  if (cursor === undefined) return null;
+  const values = parsed(cursor);
+  const plain =
+    Array.isArray(values) &&
+    values.every((value) => value === null || typeof value === "string" || typeof value === "number");
+  if (!plain || values.length !== length)
+    throw new AppError("malformed_request", { detail: "This place in the list is not known. Start at its beginning." });
+  return values;
+}
+
+function parsed(cursor: string): unknown {
+  try {
+    return JSON.parse(Buffer.from(cursor, "base64url").toString("utf8"));
+  } catch {
+    return null;
+  }
+}
+
+/** Cuts `limit + 1` rows to a page: the row too many says that there is more. */
+export function pageOf<R, T>(
+  rows: readonly R[],
+  limit: number,
+  present: (row: R) => T,
+  place: (row: R) => (string | number | null)[],
+): Page<T> {
+  const shown = rows.slice(0, limit);
+  const last = shown.at(-1);
+  return { items: shown.map(present), next: rows.length > limit && last !== undefined ? cursorOf(place(last)) : null };
+}
