@@ -25,9 +25,9 @@ export async function bundleServer(root) {
   rmSync(folder, { recursive: true, force: true });
   mkdirSync(folder, { recursive: true });
   const { code, output } = await run(
-    process.execPath,
+    // Its file is a binary or, where install scripts are off, a script: both can be executed.
+    join(root, "node_modules", ".bin", "esbuild"),
     [
-      join(root, "node_modules", "esbuild", "bin", "esbuild"),
       ...Object.entries(serverEntries).map(([name, source]) => `${name}=${source}`),
       "--bundle",
       "--platform=node",
