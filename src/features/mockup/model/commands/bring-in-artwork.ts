@@ -1,0 +1,68 @@
+import type { ArtworkPiece } from "#shared/artwork/imported-artwork.ts";
+import { boxCentre } from "#shared/geometry/box.ts";
+import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
+import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
+import { nextFreeKeys } from "../layer-key.ts";
+import { coordinateOf, mostLayers, mostPieces, roundMm } from "../limits.ts";
+import { withoutOpenings } from "../without-openings.ts";
+import { type NewLayer, newLayer } from "./new-layer.ts";
+
+export type ColourChoice = NewLayer & {
+  readonly colour: string;
+  /** Cut the outer outlines only, so that other colours can be bonded on the plate instead of lying in its openings. */
+  readonly solid: boolean;
+};
+
+export type ArtworkToBringIn = {
+  readonly artworkId: string;
+  readonly widthMm: number;
+  readonly heightMm: number;
+  readonly pieces: readonly ArtworkPiece[];
+};
+
+/**
+ * Adds a layer for each chosen colour of an artwork, from the wall outward in the order given, with the next free keys.
+ * The artwork's middle comes to the board's middle and its pieces keep their places to one another. Ids are made from `id`.
+ * Colours that no piece has are passed over; more layers or pieces than a document takes are not added.
+ */
+export function bringInArtwork(
+  document: MockupDocument,
+  { artwork, choices, id }: { artwork: ArtworkToBringIn; choices: readonly ColourChoice[]; id: string },
+): MockupDocument {
+  const dx = document.board.width / 2 - artwork.widthMm / 2;
+  const dy = document.board.height / 2 - artwork.heightMm / 2;
+  const keys = nextFreeKeys(document, choices.length);
+  const layers = [...document.layers];
+  for (const [order, choice] of choices.entries()) {
+    const ofColour = artwork.pieces.filter((piece) => piece.colour === choice.colour);
+    const pieces = (choice.solid ? withoutOpenings(ofColour) : ofColour)
+      .slice(0, mostPieces)
+      .map((piece): Piece | null => pieceOf(piece, { artworkId: artwork.artworkId, id, dx, dy }))
+      .filter((piece) => piece !== null);
+    const key = keys[layers.length - document.layers.length];
+    if (pieces.length === 0 || key === undefined || layers.length >= mostLayers) continue;
+    layers.push(newLayer(key, choice, pieces, `${id}-h${order + 1}`));
+  }
+  return layers.length === document.layers.length ? document : { ...document, layers };
+}
+
+function pieceOf(
+  piece: ArtworkPiece,
+  { artworkId, id, dx, dy }: { artworkId: string; id: string; dx: number; dy: number },
+): Piece | null {
+  const middle = boxCentre(piece.box);
+  const origin = { x: roundMm(middle.x), y: roundMm(middle.y) };
+  const x = coordinateOf(origin.x + dx);
+  const y = coordinateOf(origin.y + dy);
+  if (x === null || y === null) return null;
+  return {
+    id: `${id}-${piece.index + 1}`,
+    name: "",
+    source: { kind: "artwork", artworkId, index: piece.index, colour: piece.colour },
+    path: pathTransform(piece.path, translateMatrix(-origin.x, -origin.y)).map(({ start, segments }) => ({
+      start,
+      segments: [...segments],
+    })),
+    placement: { x, y, turn: 0, scale: 1, mirrored: false },
+  };
+}

@@ -1,0 +1,12 @@
+import type { Layer, MockupDocument } from "#shared/mockup/document.ts";
+
+/** The document with one layer changed; the same document when `change` gives the same layer back or there is none. */
+export function changeLayer(document: MockupDocument, key: string, change: (layer: Layer) => Layer): MockupDocument {
+  return changeLayers(document, (layer) => (layer.key === key ? change(layer) : layer));
+}
+
+/** The document with `change` done to every layer; the same document when every layer stayed the same. */
+export function changeLayers(document: MockupDocument, change: (layer: Layer) => Layer): MockupDocument {
+  const layers = document.layers.map(change);
+  return layers.every((layer, index) => layer === document.layers[index]) ? document : { ...document, layers };
+}

@@ -1,0 +1,83 @@
+import type { Point } from "#shared/geometry/path.ts";
+import type { Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
+import { coordinateOf, lengthOf, mostHoles } from "../limits.ts";
+import { holeDiameters, propose } from "../propose-holes.ts";
+import { isSame, withFields } from "../same.ts";
+import { changeLayer, changeLayers } from "./change-layer.ts";
+
+/** Puts a hole into a standoff layer. The first one is the fixed one. */
+export function addHole(
+  document: MockupDocument,
+  { key, id, x, y }: { key: string; id: string } & Point,
+): MockupDocument {
+  const holeX = coordinateOf(x);
+  const holeY = coordinateOf(y);
+  if (holeX === null || holeY === null) return document;
+  return changeHoles(document, key, (holes, hardware) => {
+    if (holes.length >= mostHoles) return holes;
+    const { fixed, play } = holeDiameters(hardware);
+    const first = holes.length === 0;
+    return [...holes, { id, x: holeX, y: holeY, diameter: first ? fixed : play, fixed: first }];
+  });
+}
+
+/** Sets a hole's place and diameter in mm. */
+export function setHole(
+  document: MockupDocument,
+  { holeId, ...fields }: { holeId: string; x?: number; y?: number; diameter?: number },
+): MockupDocument {
+  return changeHolesOfAll(document, (holes) =>
+    holes.map((hole) =>
+      hole.id === holeId
+        ? withFields(hole, {
+            x: coordinateOf(fields.x ?? hole.x) ?? hole.x,
+            y: coordinateOf(fields.y ?? hole.y) ?? hole.y,
+            diameter: lengthOf(fields.diameter ?? hole.diameter) ?? hole.diameter,
+          })
+        : hole,
+    ),
+  );
+}
+
+/** Takes a hole out. When it was the fixed one, the next hole of the layer becomes it. */
+export function removeHole(document: MockupDocument, { holeId }: { holeId: string }): MockupDocument {
+  return changeHolesOfAll(document, (holes) => {
+    const left = holes.filter((hole) => hole.id !== holeId);
+    const [first, ...rest] = left;
+    if (left.length === holes.length || !first || left.some((hole) => hole.fixed)) return left;
+    return [{ ...first, fixed: true }, ...rest];
+  });
+}
+
+/** Makes one hole of a layer the fixed one, from which the others move. */
+export function fixHole(document: MockupDocument, { holeId }: { holeId: string }): MockupDocument {
+  return changeHolesOfAll(document, (holes) =>
+    holes.some((hole) => hole.id === holeId)
+      ? holes.map((hole) => withFields(hole, { fixed: hole.id === holeId }))
+      : holes,
+  );
+}
+
+/** Replaces a layer's holes by ones towards the corners of its pieces, with ids made from `id`. */
+export function proposeHoles(document: MockupDocument, { key, id }: { key: string; id: string }): MockupDocument {
+  return changeLayer(document, key, (layer) => withHoles(layer, (_, hardware) => propose(layer, { hardware, id })));
+}
+
+type ChangeHoles = (
+  holes: readonly Hole[],
+  hardware: Extract<Layer["hold"], { kind: "standoff" }>["hardware"],
+) => readonly Hole[];
+
+function changeHoles(document: MockupDocument, key: string, change: ChangeHoles): MockupDocument {
+  return changeLayer(document, key, (layer) => withHoles(layer, change));
+}
+
+function changeHolesOfAll(document: MockupDocument, change: ChangeHoles): MockupDocument {
+  return changeLayers(document, (layer) => withHoles(layer, change));
+}
+
+function withHoles(layer: Layer, change: ChangeHoles): Layer {
+  if (layer.hold.kind !== "standoff") return layer;
+  const holes = change(layer.hold.holes, layer.hold.hardware);
+  return isSame(holes, layer.hold.holes) ? layer : { ...layer, hold: { ...layer.hold, holes: [...holes] } };
+}

@@ -1,0 +1,51 @@
+import type { Adhesive, CapStud, MockupDocument } from "#shared/mockup/document.ts";
+import { mostOffsetMm, roundMm } from "../limits.ts";
+import { propose } from "../propose-holes.ts";
+import { isSame, withFields } from "../same.ts";
+import { changeLayer } from "./change-layer.ts";
+
+/** Bonds a layer down. Holes of standoffs go, and with them their pattern as the way to find the place. */
+export function bondLayer(
+  document: MockupDocument,
+  { key, adhesive }: { key: string; adhesive: Adhesive },
+): MockupDocument {
+  return changeLayer(document, key, (layer) => {
+    if (layer.hold.kind === "bond" && isSame(layer.hold.adhesive, adhesive)) return layer;
+    const locate = layer.locate === "hole pattern" ? "none" : layer.locate;
+    return { ...layer, hold: { kind: "bond", adhesive }, locate };
+  });
+}
+
+/**
+ * Puts a layer on standoffs as high as the hardware's barrel. A layer that was on standoffs keeps its holes; another one
+ * gets holes proposed, with ids made from `id`.
+ */
+export function standLayer(
+  document: MockupDocument,
+  { key, hardware, id }: { key: string; hardware: CapStud; id: string },
+): MockupDocument {
+  return changeLayer(document, key, (layer) => {
+    const offset = hardware.barrelLength;
+    if (layer.hold.kind === "standoff")
+      return withFields(layer, { hold: withFields(layer.hold, { hardware, offset }) });
+    const holes = propose(layer, { hardware, id });
+    return { ...layer, hold: { kind: "standoff", hardware, offset, holes }, locate: "hole pattern" };
+  });
+}
+
+/**
+ * Raises a standoff layer to `offset` mm above what it stands over. `hardware` comes along when the offset caught on a
+ * barrel (see `catchBarrel`); without it the hardware stays and the dry fit says that barrel and offset differ.
+ */
+export function raiseLayer(
+  document: MockupDocument,
+  { key, offset, hardware }: { key: string; offset: number; hardware?: CapStud | undefined },
+): MockupDocument {
+  if (!Number.isFinite(offset)) return document;
+  const held = roundMm(Math.min(mostOffsetMm, Math.max(0, offset)));
+  return changeLayer(document, key, (layer) =>
+    layer.hold.kind === "standoff"
+      ? withFields(layer, { hold: withFields(layer.hold, { offset: held, hardware: hardware ?? layer.hold.hardware }) })
+      : layer,
+  );
+}

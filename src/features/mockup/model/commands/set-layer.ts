@@ -1,0 +1,25 @@
+import type { Acrylic, Locate, MockupDocument } from "#shared/mockup/document.ts";
+import { lengthOf, nameOf } from "../limits.ts";
+import { withFields } from "../same.ts";
+import { changeLayer } from "./change-layer.ts";
+
+export type LayerFields = {
+  readonly name?: string;
+  readonly stock?: Acrylic;
+  readonly thickness?: number;
+  readonly locate?: Locate;
+  readonly hidden?: boolean;
+};
+
+/** Sets what is given of a layer. An empty name or an impossible thickness leaves what was there. */
+export function setLayer(document: MockupDocument, { key, ...fields }: LayerFields & { key: string }): MockupDocument {
+  return changeLayer(document, key, (layer) =>
+    withFields(layer, {
+      name: nameOf(fields.name ?? layer.name) ?? layer.name,
+      stock: fields.stock ?? layer.stock,
+      thickness: lengthOf(fields.thickness ?? layer.thickness, 100) ?? layer.thickness,
+      locate: fields.locate ?? layer.locate,
+      hidden: fields.hidden ?? layer.hidden,
+    }),
+  );
+}

@@ -1,0 +1,38 @@
+/** The bounds of the document's schema, for commands that hold a value inside instead of refusing it. */
+export const longestMm = 10_000;
+export const mostLayers = 60;
+export const mostPieces = 2000;
+export const mostHoles = 1000;
+export const mostOffsetMm = 1000;
+
+/** Lengths are kept to a thousandth of a millimetre, the kernel's grid, so that sums of small moves leave no dust. */
+export function roundMm(value: number): number {
+  const rounded = Math.round(value * 1000) / 1000;
+  return rounded === 0 ? 0 : rounded;
+}
+
+/** A place on the board, rounded; null for what is no number or further off than a document takes. */
+export function coordinateOf(value: number): number | null {
+  const rounded = roundMm(value);
+  return Math.abs(rounded) <= longestMm ? rounded : null;
+}
+
+/** A length over 0 and up to `most` mm, rounded; null when it is not one. */
+export function lengthOf(value: number, most = longestMm): number | null {
+  if (!Number.isFinite(value)) return null;
+  const rounded = roundMm(value);
+  return rounded > 0 && rounded <= most ? rounded : null;
+}
+
+/** Degrees clockwise, 0 up to 360, to a hundredth; null for what is no number. */
+export function turnOf(value: number): number | null {
+  if (!Number.isFinite(value)) return null;
+  const turn = Math.round((((value % 360) + 360) % 360) * 100) / 100;
+  return turn >= 360 || turn === 0 ? 0 : turn;
+}
+
+/** A name as the document keeps it: trimmed, one to 120 characters; null when nothing is left. */
+export function nameOf(text: string): string | null {
+  const name = text.trim().slice(0, 120).trim();
+  return name === "" ? null : name;
+}

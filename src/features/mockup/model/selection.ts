@@ -1,0 +1,55 @@
+import type { MockupDocument } from "#shared/mockup/document.ts";
+
+/** What is chosen: a layer's row, the pieces a move would take along, and a hole when one is picked out. */
+export type Selection = {
+  readonly layerKey: string | null;
+  readonly pieceIds: readonly string[];
+  readonly holeId: string | null;
+};
+
+export const nothingChosen: Selection = { layerKey: null, pieceIds: [], holeId: null };
+
+/** A layer with all its pieces. */
+export function chooseLayer(document: MockupDocument, key: string): Selection {
+  const layer = document.layers.find((candidate) => candidate.key === key);
+  return layer ? { layerKey: key, pieceIds: layer.pieces.map(({ id }) => id), holeId: null } : nothingChosen;
+}
+
+/** One piece out of its layer. */
+export function choosePiece(document: MockupDocument, pieceId: string): Selection {
+  const layer = layerOfPiece(document, pieceId);
+  return layer ? { layerKey: layer.key, pieceIds: [pieceId], holeId: null } : nothingChosen;
+}
+
+/** One hole, with its layer. */
+export function chooseHole(document: MockupDocument, holeId: string): Selection {
+  const layer = document.layers.find(
+    ({ hold }) => hold.kind === "standoff" && hold.holes.some(({ id }) => id === holeId),
+  );
+  return layer ? { layerKey: layer.key, pieceIds: [], holeId } : nothingChosen;
+}
+
+/** Adds a layer's pieces to what is chosen, or takes them out when they were in. */
+export function chooseAlso(document: MockupDocument, selection: Selection, key: string): Selection {
+  const more = chooseLayer(document, key).pieceIds;
+  const had = more.some((id) => selection.pieceIds.includes(id));
+  const pieceIds = had ? selection.pieceIds.filter((id) => !more.includes(id)) : [...selection.pieceIds, ...more];
+  if (pieceIds.length === 0) return nothingChosen;
+  return { layerKey: had ? selection.layerKey : key, pieceIds, holeId: null };
+}
+
+/** What of the choice is still there after the document changed; the same selection when all of it is. */
+export function keepChosen(document: MockupDocument, selection: Selection): Selection {
+  const ids = new Set(document.layers.flatMap((layer) => layer.pieces.map(({ id }) => id)));
+  const pieceIds = selection.pieceIds.filter((id) => ids.has(id));
+  const layerKey = document.layers.some(({ key }) => key === selection.layerKey) ? selection.layerKey : null;
+  const holeId =
+    selection.holeId !== null && chooseHole(document, selection.holeId).holeId !== null ? selection.holeId : null;
+  const unchanged =
+    pieceIds.length === selection.pieceIds.length && layerKey === selection.layerKey && holeId === selection.holeId;
+  return unchanged ? selection : { layerKey, pieceIds, holeId };
+}
+
+export function layerOfPiece(document: MockupDocument, pieceId: string) {
+  return document.layers.find((layer) => layer.pieces.some(({ id }) => id === pieceId));
+}

@@ -1,0 +1,45 @@
+import type { CapStud } from "#shared/mockup/document.ts";
+
+/** Barrel lengths in stock, each once, shortest first. */
+export function barrelLengths(stock: readonly CapStud[]): number[] {
+  return [...new Set(stock.map((hardware) => hardware.barrelLength))].sort((a, b) => a - b);
+}
+
+/**
+ * Where a raised layer ends up: the nearest barrel length in stock when it is within `reachMm`, with the hardware that
+ * has it, else the offset as it is. Of several the one most like `current` is taken: same barrel, same finish.
+ */
+export function catchBarrel(
+  offset: number,
+  { stock, current, reachMm }: { stock: readonly CapStud[]; current: CapStud; reachMm: number },
+): { offset: number; hardware: CapStud | undefined } {
+  const nearest = nearestTo(offset, barrelLengths([...stock, current]));
+  if (nearest === undefined || Math.abs(nearest - offset) > reachMm) return { offset, hardware: undefined };
+  return { offset: nearest, hardware: hardwareOfLength(nearest, stock, current) };
+}
+
+/** The barrel length next above or below `offset`, for steps by key; undefined past the last one. */
+export function nextBarrel(offset: number, stock: readonly CapStud[], direction: "up" | "down"): number | undefined {
+  const lengths = barrelLengths(stock);
+  return direction === "up"
+    ? lengths.find((length) => length > offset + 0.001)
+    : lengths.findLast((length) => length < offset - 0.001);
+}
+
+/** The hardware with this barrel length that is most like `current`. */
+export function hardwareOfLength(length: number, stock: readonly CapStud[], current: CapStud): CapStud | undefined {
+  if (current.barrelLength === length) return current;
+  const likeness = (hardware: CapStud) =>
+    (hardware.barrelDiameter === current.barrelDiameter ? 2 : 0) + (hardware.finish === current.finish ? 1 : 0);
+  let best: CapStud | undefined;
+  for (const hardware of stock)
+    if (hardware.barrelLength === length && (!best || likeness(hardware) > likeness(best))) best = hardware;
+  return best;
+}
+
+function nearestTo(value: number, choices: readonly number[]): number | undefined {
+  let nearest: number | undefined;
+  for (const choice of choices)
+    if (nearest === undefined || Math.abs(choice - value) < Math.abs(nearest - value)) nearest = choice;
+  return nearest;
+}
