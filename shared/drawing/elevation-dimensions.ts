@@ -1,0 +1,146 @@
+import { boxContains, boxUnion } from "../geometry/box.ts";
+import type { Box } from "../geometry/path.ts";
+import type { MockupDocument } from "../mockup/document.ts";
+import type { Figures } from "../stack/figures.ts";
+import { formatLength } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
+import { type Dimension, dimensionRowMm, drawDimension, type PaperScale } from "./dimensions.ts";
+import type { Item } from "./display-list.ts";
+import { smallTextMm, textWidthMm } from "./type.ts";
+
+type DimensionInput = {
+  readonly document: MockupDocument;
+  readonly figures: Figures;
+  readonly unit: LengthUnit;
+  readonly paperScale: PaperScale;
+};
+
+type Measured = { readonly key: string; readonly box: Box };
+
+/** Layers a chain of dimensions is drawn for: the largest, and the next that does not lie within it. */
+const mostChains = 2;
+
+/** What the chains below and at the right place on the board: the layers that a hand must find room for, largest first. */
+function measuredLayers({ document, figures }: DimensionInput): Measured[] {
+  const layers = document.layers.flatMap((layer): Measured[] => {
+    if (layer.hidden) return [];
+    const box = boxUnion(figures.pieces.filter(({ layerKey }) => layerKey === layer.key).map((piece) => piece.box));
+    return box ? [{ key: layer.key, box }] : [];
+  });
+  const bySize = layers.sort(
+    (a, b) => b.box.width * b.box.height - a.box.width * a.box.height || (a.key < b.key ? -1 : 1),
+  );
+  const chosen: Measured[] = [];
+  for (const layer of bySize) {
+    if (chosen.length < mostChains && !chosen.some(({ box }) => boxContains(box, layer.box))) chosen.push(layer);
+  }
+  return chosen;
+}
+
+/** The outermost hole centres of the first standoff layer, on one axis; null for fewer than two or when they fall together. */
+function holeSpread({ document }: DimensionInput, axis: "x" | "y"): { key: string; from: number; to: number } | null {
+  for (const { hold, key, hidden } of document.layers) {
+    if (hold.kind !== "standoff" || hidden || hold.holes.length < 2) continue;
+    const places = hold.holes.map((hole) => hole[axis]);
+    const from = Math.min(...places);
+    const to = Math.max(...places);
+    return to - from > 0.05 ? { key, from, to } : null;
+  }
+  return null;
+}
+
+/** Edge of the board to the layer, the layer, the layer to the other edge. Steps of nothing are left out. */
+function chainDimensions(layer: Measured, axis: "x" | "y", at: number, input: DimensionInput): Dimension[] {
+  const { board } = input.document;
+  const end = axis === "x" ? board.width : board.height;
+  const thing = axis === "x" ? board.height : board.width;
+  const from = layer.box[axis];
+  const to = from + (axis === "x" ? layer.box.width : layer.box.height);
+  const steps = [
+    { from: 0, to: from, named: "", overflow: "before" as const },
+    { from, to, named: `${layer.key}  `, overflow: "under" as const },
+    { from: to, to: end, named: "", overflow: "after" as const },
+  ];
+  return steps
+    .filter((step) => step.to - step.from > 0.05)
+    .map((step) => ({
+      axis,
+      from: step.from,
+      to: step.to,
+      at,
+      thing,
+      text: `${step.named}${formatLength(step.to - step.from, input.unit)}`,
+      overflow: step.overflow,
+    }));
+}
+
+function rowsOf(input: DimensionInput, axis: "x" | "y"): Dimension[] {
+  const { board } = input.document;
+  const thing = axis === "x" ? board.height : board.width;
+  const holes = holeSpread(input, axis);
+  const row = (index: number) => thing + dimensionRowMm * (index + 1) * input.paperScale;
+  const inner: Dimension[] =
+    holes === null
+      ? []
+      : [
+          {
+            axis,
+            from: holes.from,
+            to: holes.to,
+            at: row(0),
+            thing,
+            text: `${holes.key} holes  ${formatLength(holes.to - holes.from, input.unit)}`,
+            overflow: "after",
+          },
+        ];
+  const chains = measuredLayers(input).flatMap((layer, index) =>
+    chainDimensions(layer, axis, row(index + inner.length), input),
+  );
+  return [...inner, ...chains];
+}
+
+function overallDimensions({ document: { board }, unit, paperScale }: DimensionInput): Dimension[] {
+  const away = -dimensionRowMm * paperScale;
+  return [
+    {
+      axis: "x",
+      from: 0,
+      to: board.width,
+      at: away,
+      thing: 0,
+      text: formatLength(board.width, unit),
+      overflow: "after",
+    },
+    {
+      axis: "y",
+      from: 0,
+      to: board.height,
+      at: away,
+      thing: 0,
+      text: formatLength(board.height, unit),
+      overflow: "after",
+    },
+  ];
+}
+
+/** Room the dimensions need around the board, in mm of the sign: rows, and lettering that stands beside a short step. */
+export function dimensionMargins(input: DimensionInput): { left: number; top: number; right: number; bottom: number } {
+  const { paperScale } = input;
+  const rows = (axis: "x" | "y") => new Set(rowsOf(input, axis).map(({ at }) => at)).size;
+  const beside = (text: string) => textWidthMm(text, "serif", smallTextMm) + 6;
+  const all = [...rowsOf(input, "x"), ...rowsOf(input, "y"), ...overallDimensions(input)];
+  const longest = Math.max(0, ...all.filter(({ overflow }) => overflow !== "under").map(({ text }) => beside(text)));
+  const outer = 2.5;
+  return {
+    left: Math.max(dimensionRowMm + 6, longest) * paperScale,
+    top: Math.max(dimensionRowMm + 6, 0) * paperScale,
+    right: Math.max(dimensionRowMm * rows("y") + outer, longest) * paperScale,
+    bottom: (dimensionRowMm * rows("x") + outer + smallTextMm) * paperScale,
+  };
+}
+
+/** Overall width above and height at the left; holes and the placing of the chief layers below and at the right. */
+export function drawElevationDimensions(input: DimensionInput): Item[] {
+  const dimensions = [...overallDimensions(input), ...rowsOf(input, "x"), ...rowsOf(input, "y")];
+  return dimensions.flatMap((dimension) => drawDimension(dimension, input.paperScale));
+}

@@ -1,0 +1,95 @@
+import type { Kernel } from "../geometry/kernel.ts";
+import type { Box, Point } from "../geometry/path.ts";
+import { rectanglePath } from "../geometry/shapes.ts";
+import type { MockupDocument } from "../mockup/document.ts";
+import type { Figures } from "../stack/figures.ts";
+import type { LengthUnit } from "../units/length.ts";
+import { outlineMm, type PaperScale } from "./dimensions.ts";
+import type { DisplayList, Item } from "./display-list.ts";
+import { dimensionMargins, drawElevationDimensions } from "./elevation-dimensions.ts";
+import { drawSolids, drawWallShadow } from "./elevation-pieces.ts";
+import { placedStandoffs } from "./hardware.ts";
+import { mixColours } from "./palette.ts";
+import { woodGrain } from "./wood-grain.ts";
+
+export type ElevationInput = {
+  readonly document: MockupDocument;
+  readonly figures: Figures;
+  readonly kernel: Kernel;
+  readonly unit: LengthUnit;
+  /** Dimension lines outside the board, or the sign alone. */
+  readonly dimensions: boolean;
+  /** Millimetres of the sign that make one on paper: 5 at 1:5. Lettering and lines are sized by it. */
+  readonly paperScale: PaperScale;
+  /** The wall around the board, with the shadow the board throws on it; without it the sign stands on bare paper. */
+  readonly wall: boolean;
+  /** A PNG of the board's face in place of the generated grain. */
+  readonly texture?: { readonly pngBase64: string };
+};
+
+/** Name of the group whose plane is the board's own: x right and y down from its upper left corner. */
+export const boardPlaneId = "board-plane";
+
+/** Share of the longer side that is left around a sign without dimensions. */
+const bareMargin = 0.09;
+
+/** Where the board's upper left corner lies in a picture made by `drawElevation` or `drawSection`; null in any other. */
+export function boardOriginOf(list: DisplayList): Point | null {
+  const plane = list.items.find((item) => item.kind === "group" && item.id === boardPlaneId);
+  return plane?.kind === "group" ? { x: plane.x, y: plane.y } : null;
+}
+
+function drawBoard({ document, texture, paperScale }: ElevationInput, box: Box): Item[] {
+  const outline = rectanglePath(box);
+  const { colour, name } = document.backer.stock;
+  const seed = [...name].reduce((sum, character) => (sum * 31 + (character.codePointAt(0) ?? 0)) % 9973, 17);
+  const face: Item = texture ? { kind: "image", box, pngBase64: texture.pngBase64 } : woodGrain(box, colour, seed);
+  return [
+    { kind: "path", id: "board", path: outline, fill: colour },
+    { kind: "clip", clip: outline, items: [face] },
+    {
+      kind: "path",
+      path: outline,
+      stroke: { colour: mixColours(colour, "#2A1E0C", 0.68), widthMm: outlineMm * 0.9 * paperScale },
+    },
+  ];
+}
+
+/**
+ * The sign from the front, 1:1 in mm of the sign: board, layers lowest first with their shadows, caps, dimensions outside.
+ * Pieces carry their ids, standoffs `hole:` and their hole's id, layers `layer:` and their key, the backer `board`.
+ * Hidden layers are left out.
+ */
+export function drawElevation(input: ElevationInput): DisplayList {
+  const { document, figures, kernel, dimensions, paperScale, wall } = input;
+  const { width, height } = document.board;
+  const box = { x: 0, y: 0, width, height };
+  const bare = Math.max(width, height) * bareMargin;
+  const margins = dimensions ? dimensionMargins(input) : { left: bare, top: bare, right: bare, bottom: bare };
+  const widthMm = margins.left + width + margins.right;
+  const heightMm = margins.top + height + margins.bottom;
+  const sign = {
+    document,
+    figures,
+    kernel,
+    standoffs: placedStandoffs(document, figures),
+    lineMm: 0.16 * paperScale,
+  };
+  const wallBox = { x: -margins.left, y: -margins.top, width: widthMm, height: heightMm };
+  const ground: Item[] = wall
+    ? [
+        { kind: "path", path: rectanglePath(wallBox), fill: document.presentation.wall },
+        ...drawWallShadow(sign, box, wallBox),
+      ]
+    : [];
+  const items = [
+    ...ground,
+    ...drawSolids(sign, { box, items: drawBoard(input, box) }),
+    ...(dimensions ? drawElevationDimensions(input) : []),
+  ];
+  return {
+    widthMm,
+    heightMm,
+    items: [{ kind: "group", id: boardPlaneId, x: margins.left, y: margins.top, scale: 1, items }],
+  };
+}

@@ -1,0 +1,217 @@
+import { createRequire } from "node:module";
+import * as fontkit from "fontkit";
+import { boxCentre, boxOfPath, boxUnion } from "#shared/geometry/box.ts";
+import type { Path, Placement, Point, Ring, Segment } from "#shared/geometry/path.ts";
+import { circlePath } from "#shared/geometry/shapes.ts";
+import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
+import {
+  type Acrylic,
+  type CapStud,
+  documentSchema,
+  type Layer,
+  type MockupDocument,
+} from "#shared/mockup/document.ts";
+
+/** An invented shop sign, rich enough to exercise the whole drawing: a disc on standoffs, rings and planets on it, letters on the board. */
+
+const require = createRequire(import.meta.url);
+
+function openBlack(): fontkit.Font {
+  const opened = fontkit.openSync(require.resolve("@fontsource/merriweather/files/merriweather-latin-900-normal.woff"));
+  if (!("layout" in opened)) throw new Error("The lettering's file holds a collection of fonts.");
+  return opened;
+}
+
+/** TrueType outlines are quadratic; a cubic with c1 = p + 2/3 (q − p) and c2 = p′ + 2/3 (q − p′) is the same curve. */
+function pathOfGlyph(glyph: fontkit.Glyph, at: Point, scale: number): Path {
+  const rings: Ring[] = [];
+  let segments: Segment[] = [];
+  let from: Point = at;
+  const place = (x: number, y: number): Point => ({ x: at.x + x * scale, y: at.y - y * scale });
+  const towards = (p: Point, q: Point): Point => ({ x: p.x + ((q.x - p.x) * 2) / 3, y: p.y + ((q.y - p.y) * 2) / 3 });
+  for (const { command, args } of glyph.path.commands) {
+    const [x1 = 0, y1 = 0, x2 = 0, y2 = 0] = args;
+    if (command === "moveTo") {
+      from = place(x1, y1);
+      segments = [];
+      rings.push({ start: from, segments });
+    } else if (command === "lineTo") {
+      from = place(x1, y1);
+      segments.push({ kind: "line", to: from });
+    } else if (command === "quadraticCurveTo") {
+      const control = place(x1, y1);
+      const to = place(x2, y2);
+      segments.push({ kind: "cubic", c1: towards(from, control), c2: towards(to, control), to });
+      from = to;
+    }
+  }
+  return rings;
+}
+
+function letters(text: string, capHeight: number, middle: Point): Path[] {
+  const font = openBlack();
+  const scale = capHeight / font.capHeight;
+  const { glyphs, positions } = font.layout(text);
+  let x = 0;
+  const paths = glyphs.map((glyph, index) => {
+    const path = pathOfGlyph(glyph, { x, y: 0 }, scale);
+    // Cut letters stand a little wider than set ones, so that shadows don't close the gaps.
+    x += (positions[index]?.xAdvance ?? 0) * scale + capHeight * 0.06;
+    return path;
+  });
+  const shown = paths.filter((path) => path.length > 0);
+  const box = boxUnion(shown.map(boxOfPath));
+  if (!box) return [];
+  const centre = boxCentre(box);
+  return shown.map((path) => pathTransform(path, translateMatrix(middle.x - centre.x, middle.y - centre.y)));
+}
+
+/** A piece as it is brought in: its path about the middle of its own box. */
+function pieceOf(id: string, name: string, path: Path, colour: string): Layer["pieces"][number] {
+  const centre = boxCentre(boxOfPath(path) ?? { x: 0, y: 0, width: 0, height: 0 });
+  const placement: Placement = { x: centre.x, y: centre.y, turn: 0, scale: 1, mirrored: false };
+  return {
+    id,
+    name,
+    source: { kind: "artwork", artworkId: "6f1d3a52-8f0e-4c0b-9a51-0d3c5c1b7a10", index: 0, colour },
+    path: [...pathTransform(path, translateMatrix(-centre.x, -centre.y))].map((ring) => ({
+      start: ring.start,
+      segments: [...ring.segments],
+    })),
+    placement,
+  };
+}
+
+function acrylic(name: string, colour: string, look: Acrylic["look"] = "opaque"): Acrylic {
+  return { kind: "acrylic", stockId: null, name, colour, look, process: "cast", facesDiffer: false, densityKgM3: 1190 };
+}
+
+const capStud: CapStud = {
+  kind: "capStud",
+  stockId: null,
+  name: "Standoff 15 × 19, brushed",
+  finish: "#C9C6BF",
+  barrelDiameter: 15,
+  barrelLength: 19,
+  boreDiameter: 9,
+  boreDepth: 16,
+  floorThickness: 3,
+  floorHole: 4,
+  countersunk: false,
+  studDiameter: 6,
+  studLength: 12,
+  capDiameter: 18,
+  capThickness: 4,
+  screw: { name: "No. 6 × 16 pan head", diameter: 3.5, length: 16, headDiameter: 6.9, headHeight: 2.1 },
+};
+
+const bond: Layer["hold"] = {
+  kind: "bond",
+  adhesive: { stockId: null, name: "Thick cyanoacrylate", family: "cyanoacrylate" },
+};
+const cement: Layer["hold"] = {
+  kind: "bond",
+  adhesive: { stockId: null, name: "Bodied acrylic cement", family: "bodied cement" },
+};
+
+const middle: Point = { x: 300, y: 160 };
+const turned = (radius: number, degrees: number): Point => ({
+  x: middle.x + radius * Math.cos((degrees * Math.PI) / 180),
+  y: middle.y + radius * Math.sin((degrees * Math.PI) / 180),
+});
+const ring = (radius: number, width: number): Path => [
+  ...circlePath(middle, radius + width / 2),
+  ...circlePath(middle, radius - width / 2),
+];
+
+function layer(
+  key: string,
+  name: string,
+  stock: Acrylic,
+  thickness: number,
+  rest: Pick<Layer, "hold" | "locate" | "pieces">,
+): Layer {
+  return { key, name, stock, thickness, hidden: false, ...rest };
+}
+
+/** The document of "Orrery Books": a pine board of 600 by 400 mm, layers B to G. Fresh at every call. */
+export function orreryBooks(): MockupDocument {
+  const navy = "#27304F";
+  const brass = "#C79A3A";
+  const holes = [45, 135, 225, 315].map((degrees, index) => {
+    const { x, y } = turned(113, degrees);
+    return {
+      id: `h${index + 1}`,
+      x: Math.round(x * 10) / 10,
+      y: Math.round(y * 10) / 10,
+      diameter: 8,
+      fixed: index === 0,
+    };
+  });
+  const planet = (id: string, name: string, at: Point, radius: number, colour: string) =>
+    pieceOf(id, name, circlePath(at, radius), colour);
+  return documentSchema.parse({
+    version: 1,
+    board: { outline: "rectangle", width: 600, height: 400, measures: "body" },
+    hanging: { kind: "cleat", gap: 6 },
+    quantity: 1,
+    backer: {
+      kind: "plain",
+      stock: {
+        kind: "wood",
+        stockId: null,
+        name: "Eastern white pine",
+        colour: "#E6D3AC",
+        gravity: 0.35,
+        moisturePercent: 9,
+        hardness: "softwood",
+      },
+      thickness: 20,
+      finish: "Pale wash, two coats of clear satin",
+    },
+    layers: [
+      layer("B", "Night disc", acrylic("Midnight, gloss", navy), 4.5, {
+        hold: { kind: "standoff", hardware: capStud, offset: 19, holes },
+        locate: "hole pattern",
+        pieces: [pieceOf("disc", "Disc", circlePath(middle, 130), navy)],
+      }),
+      layer("C", "Orbits", acrylic("Brass, satin", brass), 3, {
+        hold: cement,
+        locate: "template",
+        pieces: [ring(98, 5), ring(70, 5), ring(42, 5)].map((path, index) =>
+          pieceOf(`ring-${index + 1}`, `Orbit ${index + 1}`, path, brass),
+        ),
+      }),
+      layer("D", "Sun", acrylic("Amber, gloss", "#E8B64C"), 3, {
+        hold: cement,
+        locate: "template",
+        pieces: [planet("sun", "Sun", middle, 23, "#E8B64C")],
+      }),
+      layer("E", "Rust planet", acrylic("Rust, matt", "#B14E3C"), 3, {
+        hold: cement,
+        locate: "scored line",
+        pieces: [planet("planet-rust", "Rust planet", turned(70, 158), 12, "#B14E3C")],
+      }),
+      layer("F", "Chalk planets", acrylic("Chalk, matt", "#F3EEE6"), 3, {
+        hold: cement,
+        locate: "scored line",
+        pieces: [
+          planet("planet-chalk-1", "Outer planet", turned(98, -24), 13, "#F3EEE6"),
+          planet("planet-chalk-2", "Outer moon", turned(98, 204), 9, "#F3EEE6"),
+        ],
+      }),
+      layer("G", "Lettering", acrylic("Midnight, gloss", navy), 4.5, {
+        hold: bond,
+        locate: "template",
+        pieces: letters("ORRERY BOOKS", 44, { x: 300, y: 342 }).map((path, index) =>
+          pieceOf(`letter-${index + 1}`, `Letter ${index + 1}`, path, navy),
+        ),
+      }),
+    ],
+    presentation: {
+      wall: "#EFE8DC",
+      light: { azimuth: 320, elevation: 52, angularSize: 0.11 },
+      viewingDistance: 6000,
+    },
+  } satisfies MockupDocument);
+}
