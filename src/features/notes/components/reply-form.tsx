@@ -1,0 +1,60 @@
+import { type FormEvent, useState } from "react";
+import type { Note } from "#shared/contracts/notes.ts";
+import { Button } from "@/components/ui/button.tsx";
+import { Notice } from "@/components/ui/notice.tsx";
+import { TextArea } from "@/components/ui/text-area.tsx";
+import { messageOf } from "@/lib/form-problem.ts";
+import { useSessionText } from "@/lib/session-draft.ts";
+import { useReplyToNote } from "../api/mutations.ts";
+
+type ReplyFormProps = {
+  readonly shop: string;
+  readonly revisionId: string;
+  readonly note: Note;
+  readonly onDone: () => void;
+};
+
+/** An answer under a note. What is typed survives a reload. */
+export function ReplyForm({ shop, revisionId, note, onDone }: ReplyFormProps) {
+  const [text, setText] = useSessionText(`standproud:reply:${note.id}`);
+  const [isEmpty, setEmpty] = useState(false);
+  const reply = useReplyToNote(shop, revisionId, note.id);
+
+  function handleSubmit(event: FormEvent) {
+    event.preventDefault();
+    setEmpty(text.trim() === "");
+    if (text.trim() === "") return;
+    reply.mutate(text, {
+      onSuccess: () => {
+        setText("");
+        onDone();
+      },
+    });
+  }
+
+  return (
+    <form onSubmit={handleSubmit} className="mt-2 space-y-2" noValidate>
+      <TextArea
+        autoFocus
+        label={`Reply to note ${note.number}`}
+        value={text}
+        rows={2}
+        error={isEmpty ? "Write something first." : undefined}
+        onChange={(event) => setText(event.target.value)}
+      />
+      {reply.isError && (
+        <Notice tone="error" title="The reply was not sent.">
+          {messageOf(reply.error)} What you wrote is still here.
+        </Notice>
+      )}
+      <div className="flex flex-wrap gap-3">
+        <Button type="submit" size="small" busy={reply.isPending}>
+          Send the reply
+        </Button>
+        <Button kind="bare" size="small" onClick={onDone}>
+          Leave it
+        </Button>
+      </div>
+    </form>
+  );
+}

@@ -1,0 +1,41 @@
+import { expect, it } from "vitest";
+import { isHeld, standingOf } from "@/features/sheet/model/standing.ts";
+
+const approver = { name: "Cleo Marsh", side: "client", approver: true } as const;
+const colleague = { name: "Ned Marsh", side: "client", approver: false } as const;
+const maker = { name: "Ada Finch", side: "shop", approver: false } as const;
+
+it.each([
+  { reader: approver, words: "waiting for you" },
+  { reader: colleague, words: "waiting for your approver" },
+  { reader: maker, words: "waiting for the client" },
+])("an issued revision tells $reader.name: $words", ({ reader, words }) => {
+  expect(standingOf({ state: "issued", decision: null, letter: "B" }, reader)).toEqual({ words, tone: "waiting" });
+});
+
+it("an approved revision shows the name that was typed, not the account's", () => {
+  const decision = {
+    kind: "approved",
+    by: "cleo",
+    typedName: "Cleo J. Marsh",
+    summary: "",
+    at: "2026-11-30T09:12:00.000Z",
+    hasCertificate: true,
+  } as const;
+  expect(standingOf({ state: "approved", decision, letter: "B" }, maker)).toEqual({
+    words: "Cleo J. Marsh",
+    tone: "settled",
+  });
+});
+
+const id = "0b0e9a50-8c4e-4a70-9f37-0d2b8a1f6c11";
+const later = { revisionId: "6d5f1a7e-31c7-4a6d-8f0e-b8f2f1f0a922", letter: "B" };
+
+it.each([
+  { state: "approved", current: later, held: true },
+  { state: "approved", current: null, held: false },
+  { state: "approved", current: { revisionId: id, letter: "A" }, held: false },
+  { state: "superseded", current: later, held: false },
+] as const)("$state with current $current.letter is held back from cutting: $held", ({ state, current, held }) => {
+  expect(isHeld({ id, state, current })).toBe(held);
+});
