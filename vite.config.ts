@@ -1,9 +1,58 @@
 import tailwindcss from "@tailwindcss/vite";
 import react from "@vitejs/plugin-react";
-import { defineConfig } from "vite";
+import { defineConfig, type TestProjectInlineConfiguration } from "vitest/config";
+
+const here = import.meta.dirname;
+const appUrl = process.env.STANDPROUD_APP ?? "http://127.0.0.1:4601";
+const seconds = 1_000;
+
+/** Projects whose tests talk to PostgreSQL: their global setup starts a throw-away cluster. */
+function withDatabase(name: string, timeout: number, groupOrder: number): TestProjectInlineConfiguration {
+  return {
+    extends: true,
+    test: {
+      name,
+      include: [`tests/${name}/**/*.test.ts`],
+      globalSetup: "tests/support/global-setup.ts",
+      testTimeout: timeout,
+      hookTimeout: Math.max(timeout, 60 * seconds),
+      // Browser tests bring a server and a browser each: one file at a time, after all others.
+      ...(groupOrder === 0 ? {} : { maxWorkers: 1 }),
+      sequence: { groupOrder },
+    },
+  };
+}
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
-  resolve: { alias: { "@": `${import.meta.dirname}/src`, "#shared": `${import.meta.dirname}/shared` } },
+  resolve: { alias: { "@": `${here}/src`, "#shared": `${here}/shared`, "#server": `${here}/server` } },
   build: { outDir: "dist/client", sourcemap: true, target: "es2022", chunkSizeWarningLimit: 700 },
+  server: { proxy: { "/api": appUrl, "/auth": appUrl } },
+  test: {
+    maxWorkers: 2,
+    projects: [
+      {
+        extends: true,
+        test: { name: "unit", include: ["tests/unit/**/*.test.ts"], isolate: false, testTimeout: 20 * seconds },
+      },
+      {
+        extends: true,
+        test: {
+          name: "client",
+          include: ["tests/unit/**/*.test.tsx"],
+          environment: "jsdom",
+          testTimeout: 20 * seconds,
+        },
+      },
+      {
+        extends: true,
+        test: { name: "reference", include: ["tests/reference/**/*.test.ts"], testTimeout: 120 * seconds },
+      },
+      withDatabase("api", 30 * seconds, 0),
+      withDatabase("db", 60 * seconds, 0),
+      withDatabase("e2e", 180 * seconds, 1),
+      // The test runner's --long asks for these; they take longer than anybody waits for by chance.
+      ...(process.env.TEST_LONG ? [withDatabase("long", 1_800 * seconds, 2)] : []),
+    ],
+  },
 });

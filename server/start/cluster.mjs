@@ -47,7 +47,8 @@ export async function giveToServerUser(path) {
 }
 
 /**
- * Makes an empty cluster in an existing empty folder, with password sign-in over TCP only.
+ * Makes an empty cluster in an existing empty folder: with password sign-in when durable; one that is thrown away
+ * trusts everybody on this machine, since it holds nothing.
  * @param {Cluster} cluster
  * @param {{ passwordFile: string, password: string, durable: boolean }} options `passwordFile` is written for initdb and removed again
  * @throws {Problem} with initdb's words
@@ -60,7 +61,7 @@ export async function initCluster({ programs, data }, { passwordFile, password, 
       `--pgdata=${data}`,
       `--username=${superuser}`,
       `--pwfile=${passwordFile}`,
-      "--auth=scram-sha-256",
+      `--auth=${durable ? "scram-sha-256" : "trust"}`,
       "--encoding=UTF8",
       "--locale=C.UTF-8",
       durable ? "--data-checksums" : "--no-sync",
