@@ -4,7 +4,7 @@ import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
 import { formatLength } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
-import { type Dimension, dimensionRowMm, drawDimension, type PaperScale } from "./dimensions.ts";
+import { type Dimension, dimensionFits, dimensionRowMm, drawDimension, type PaperScale } from "./dimensions.ts";
 import type { Item } from "./display-list.ts";
 import { smallTextMm, textWidthMm } from "./type.ts";
 
@@ -89,7 +89,7 @@ function rowsOf(input: DimensionInput, axis: "x" | "y"): Dimension[] {
             to: holes.to,
             at: row(0),
             thing,
-            text: `${holes.key} holes  ${formatLength(holes.to - holes.from, input.unit)}`,
+            text: `${holes.key}  holes ${formatLength(holes.to - holes.from, input.unit)}`,
             overflow: "after",
           },
         ];
@@ -127,15 +127,22 @@ function overallDimensions({ document: { board }, unit, paperScale }: DimensionI
 export function dimensionMargins(input: DimensionInput): { left: number; top: number; right: number; bottom: number } {
   const { paperScale } = input;
   const rows = (axis: "x" | "y") => new Set(rowsOf(input, axis).map(({ at }) => at)).size;
-  const beside = (text: string) => textWidthMm(text, "serif", smallTextMm) + 6;
-  const all = [...rowsOf(input, "x"), ...rowsOf(input, "y"), ...overallDimensions(input)];
-  const longest = Math.max(0, ...all.filter(({ overflow }) => overflow !== "under").map(({ text }) => beside(text)));
-  const outer = 2.5;
+  const below = rowsOf(input, "x");
+  const right = rowsOf(input, "y");
+  /** The longest lettering that may stand outside the board's edges, on one axis and side. */
+  const beside = (dimensions: readonly Dimension[], side: Dimension["overflow"]) =>
+    dimensions
+      .filter((dimension) => dimension.overflow === side && !dimensionFits(dimension, paperScale))
+      .reduce((most, { text }) => Math.max(most, textWidthMm(text, "serif", smallTextMm) + 7), 0);
+  const under = (dimensions: readonly Dimension[]) =>
+    dimensions.some((dimension) => dimension.overflow === "under" && !dimensionFits(dimension, paperScale)) ? 3.2 : 0;
+  const first = dimensionRowMm + 5;
+  const past = 2.5;
   return {
-    left: Math.max(dimensionRowMm + 6, longest) * paperScale,
-    top: Math.max(dimensionRowMm + 6, 0) * paperScale,
-    right: Math.max(dimensionRowMm * rows("y") + outer, longest) * paperScale,
-    bottom: (dimensionRowMm * rows("x") + outer + smallTextMm) * paperScale,
+    left: Math.max(first, beside(below, "before")) * paperScale,
+    top: Math.max(first, beside(right, "before")) * paperScale,
+    right: Math.max(dimensionRowMm * rows("y") + past + under(right), beside(below, "after")) * paperScale,
+    bottom: Math.max(dimensionRowMm * rows("x") + past + under(below), beside(right, "after")) * paperScale,
   };
 }
 

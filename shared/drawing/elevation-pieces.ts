@@ -178,6 +178,8 @@ export function drawSolids(input: SignInput, board: { readonly box: Box; readonl
   return items;
 }
 
+const wallStrength = 0.26;
+
 /** The board's own shadow on the wall behind it; nothing when it lies flat against the wall and throws none. */
 export function drawWallShadow({ document, figures, standoffs }: SignInput, board: Box, wall: Box): Item[] {
   const { light } = document.presentation;
@@ -194,6 +196,6 @@ export function drawWallShadow({ document, figures, standoffs }: SignInput, boar
       top: standoff.capTop,
     })),
   ];
-  const shadow = shadowItem({ light, level, receiver: wall, casters });
+  const shadow = shadowItem({ light, level, receiver: wall, casters, strength: wallStrength });
   return shadow ? [shadow] : [];
 }

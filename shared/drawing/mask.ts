@@ -19,70 +19,83 @@ export function addSpan(mask: Mask, row: number, from: number, to: number, weigh
   }
 }
 
-/** Keeps the darker of two masks of one size, cell by cell, in the first. */
-export function keepDarker(into: Mask, other: Mask): void {
-  for (let at = 0; at < into.cells.length; at += 1) {
-    const value = other.cells[at] ?? 0;
-    if (value > (into.cells[at] ?? 0)) into.cells[at] = value;
-  }
-}
-
-/**
- * One mean over `width` cells along a line of cells that lie `step` apart. The width need not be whole: the sums are read
- * between cells too, so that the blur has exactly the spread asked for. Outside the line there is no shadow.
- */
-function boxPass(cells: Float32Array, start: number, step: number, count: number, width: number, sums: Float64Array) {
-  sums[0] = 0;
-  for (let index = 0; index < count; index += 1) {
-    sums[index + 1] = (sums[index] ?? 0) + (cells[start + index * step] ?? 0);
-  }
-  const total = sums[count] ?? 0;
-  const sumTo = (at: number) => {
-    if (at <= 0) return 0;
-    if (at >= count) return total;
-    const whole = Math.floor(at);
-    const before = sums[whole] ?? 0;
-    return before + ((sums[whole + 1] ?? before) - before) * (at - whole);
-  };
-  for (let index = 0; index < count; index += 1) {
-    const middle = index + 0.5;
-    cells[start + index * step] = (sumTo(middle + width / 2) - sumTo(middle - width / 2)) / width;
+/** Keeps the darker of a mask and a smaller one laid on it with its upper left cell at (column, row), cell by cell, in the first. */
+export function keepDarker(into: Mask, patch: Mask, column: number, row: number): void {
+  for (let y = 0; y < patch.rows; y += 1) {
+    const target = (row + y) * into.columns + column;
+    for (let x = 0; x < patch.columns; x += 1) {
+      const value = patch.cells[y * patch.columns + x] ?? 0;
+      if (value > (into.cells[target + x] ?? 0)) into.cells[target + x] = value;
+    }
   }
 }
 
 const passes = 3;
 
 /**
- * Blurs a mask in place by three box passes each way, which come within 1 % of a Gaussian of these sigmas (in cells): the
- * spread of a box of width w is w²/12, so each of the three is 2σ wide. Boxes of up to one cell change nothing and are left out.
+ * Three means over `width` cells along each row, in place. The width need not be whole: sums are read between cells too, so
+ * that the blur has exactly the spread asked for. Outside the row there is no shadow.
  */
-export function blurMask(mask: Mask, sigmaColumns: number, sigmaRows: number): void {
-  const sums = new Float64Array(Math.max(mask.columns, mask.rows) + 1);
-  for (let pass = 0; pass < passes; pass += 1) {
-    if (2 * sigmaColumns > 1) {
-      for (let row = 0; row < mask.rows; row += 1) {
-        boxPass(mask.cells, row * mask.columns, 1, mask.columns, 2 * sigmaColumns, sums);
+function blurRows(cells: Float32Array, columns: number, rows: number, width: number): void {
+  // Before the row the sums are 0 and after it they stay at the total, so that no place needs a check.
+  const pad = Math.ceil(width / 2) + 2;
+  const sums = new Float64Array(columns + 2 * pad + 1);
+  const [from, to] = [pad + 0.5 - width / 2, pad + 0.5 + width / 2];
+  const [lowAt, highAt] = [Math.floor(from), Math.floor(to)];
+  const [lowShare, highShare] = [from - lowAt, to - highAt];
+  for (let row = 0; row < rows; row += 1) {
+    const start = row * columns;
+    for (let pass = 0; pass < passes; pass += 1) {
+      let sum = 0;
+      for (let index = 0; index < columns; index += 1) {
+        sum += cells[start + index] ?? 0;
+        sums[pad + index + 1] = sum;
       }
-    }
-    if (2 * sigmaRows > 1) {
-      for (let column = 0; column < mask.columns; column += 1) {
-        boxPass(mask.cells, column, mask.columns, mask.rows, 2 * sigmaRows, sums);
+      if (sum === 0) break;
+      sums.fill(sum, pad + columns + 1);
+      for (let index = 0; index < columns; index += 1) {
+        const low = sums[index + lowAt] ?? 0;
+        const high = sums[index + highAt] ?? 0;
+        const lowSum = low + ((sums[index + lowAt + 1] ?? 0) - low) * lowShare;
+        const highSum = high + ((sums[index + highAt + 1] ?? 0) - high) * highShare;
+        cells[start + index] = (highSum - lowSum) / width;
       }
     }
   }
 }
 
-/** The value at a place given in cells, between the middles of the four cells around it; nothing outside. */
-export function maskAt(mask: Mask, x: number, y: number): number {
+function turnOver(cells: Float32Array, columns: number, rows: number): Float32Array {
+  const turned = new Float32Array(cells.length);
+  for (let row = 0; row < rows; row += 1) {
+    for (let column = 0; column < columns; column += 1) {
+      turned[column * rows + row] = cells[row * columns + column] ?? 0;
+    }
+  }
+  return turned;
+}
+
+/**
+ * Blurs a mask in place by three box passes each way, which come within 1 % of a Gaussian of these sigmas (in cells): the
+ * spread of a box of width w is w²/12, so each of the three is 2σ wide. Boxes of up to one cell change nothing and are left out.
+ */
+export function blurMask({ cells, columns, rows }: Mask, sigmaColumns: number, sigmaRows: number): void {
+  if (2 * sigmaColumns > 1) blurRows(cells, columns, rows, 2 * sigmaColumns);
+  if (2 * sigmaRows > 1) {
+    const turned = turnOver(cells, columns, rows);
+    blurRows(turned, rows, columns, 2 * sigmaRows);
+    cells.set(turnOver(turned, rows, columns));
+  }
+}
+
+/** The value at a place given in cells, between the middles of the four cells around it; nothing at the rim and outside. */
+export function maskAt({ columns, rows, cells }: Mask, x: number, y: number): number {
   const left = Math.floor(x - 0.5);
   const top = Math.floor(y - 0.5);
+  if (left < 0 || top < 0 || left + 1 >= columns || top + 1 >= rows) return 0;
   const shareX = x - 0.5 - left;
   const shareY = y - 0.5 - top;
-  const cell = (column: number, row: number) =>
-    column < 0 || row < 0 || column >= mask.columns || row >= mask.rows
-      ? 0
-      : (mask.cells[row * mask.columns + column] ?? 0);
-  const upper = cell(left, top) * (1 - shareX) + cell(left + 1, top) * shareX;
-  const lower = cell(left, top + 1) * (1 - shareX) + cell(left + 1, top + 1) * shareX;
+  const at = top * columns + left;
+  const upper = (cells[at] ?? 0) * (1 - shareX) + (cells[at + 1] ?? 0) * shareX;
+  const lower = (cells[at + columns] ?? 0) * (1 - shareX) + (cells[at + columns + 1] ?? 0) * shareX;
   return upper * (1 - shareY) + lower * shareY;
 }

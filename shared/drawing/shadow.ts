@@ -16,12 +16,14 @@ export type ShadowOptions = {
   /** Where that surface is; nothing is drawn outside this box. */
   readonly receiver: Box;
   readonly casters: readonly Caster[];
+  /** Opacity of a full shadow, 0 to 1; a wall far behind gets more of the room's light than the board. */
+  readonly strength?: number;
 };
 
 /** Shadows are warm and never black: what they darken is still lit by the room. */
 const shadowColour = "#1A1208";
-/** How much of the light the lamp alone takes away. Looked for by eye on pale pine. */
-export const shadowStrength = 0.46;
+/** How much of the light is the lamp's own, where the sign hides it. Looked for by eye on pale pine. */
+const boardStrength = 0.42;
 
 const finestMm = 25.4 / 72;
 const coarsestMm = 25.4 / 50;
@@ -62,17 +64,18 @@ function edgesOf(region: Region, frame: Frame): Edge[] {
   });
 }
 
-/** Where a sample row crosses the edges that reach it, row by row: filled once, so that each edge is looked at once. */
-function crossingsByRow(edges: readonly Edge[], rows: number): number[][] {
-  const crossings: number[][] = Array.from({ length: rows }, () => []);
+/** Where sample rows cross the edges of one caster, for the rows it reaches only. */
+function crossingsByRow(edges: readonly Edge[], rows: number): { first: number; crossings: number[][] } {
+  const rowAfter = (y: number) => Math.min(rows, Math.max(0, Math.ceil(y * samplesPerRow - 0.5)));
+  const first = edges.reduce((least, { top }) => Math.min(least, rowAfter(top)), rows);
+  const end = edges.reduce((most, { bottom }) => Math.max(most, rowAfter(bottom)), 0);
+  const crossings: number[][] = Array.from({ length: Math.max(0, end - first) }, () => []);
   for (const edge of edges) {
-    const first = Math.max(0, Math.ceil(edge.top * samplesPerRow - 0.5));
-    const last = Math.min(rows - 1, Math.ceil(edge.bottom * samplesPerRow - 0.5) - 1);
-    for (let row = first; row <= last; row += 1) {
-      crossings[row]?.push(edge.x + edge.slope * ((row + 0.5) / samplesPerRow - edge.top));
+    for (let row = rowAfter(edge.top); row < rowAfter(edge.bottom); row += 1) {
+      crossings[row - first]?.push(edge.x + edge.slope * ((row + 0.5) / samplesPerRow - edge.top));
     }
   }
-  return crossings;
+  return { first, crossings };
 }
 
 type Span = { readonly from: number; readonly to: number };
@@ -87,27 +90,52 @@ function spansJoined(spans: Span[]): Span[] {
   return joined;
 }
 
+/** The part of the frame's grid one group of casters can darken: it blurs that part and nothing else. */
+type Window = { readonly column: number; readonly row: number; readonly columns: number; readonly rows: number };
+
+function windowOf(
+  casters: readonly Caster[],
+  options: ShadowOptions,
+  frame: Frame,
+  grid: Mask,
+  reachMm: number,
+): Window {
+  const corners = casters.flatMap(({ region, bottom, top }) => {
+    const box = boxOfPoints(region.flat().map((point) => inFrame(frame, point)));
+    if (!box) return [];
+    const [near, far] = [Math.max(bottom - options.level, 0), top - options.level].map((height) =>
+      shadowOffsetMm(height, options.light),
+    );
+    return [
+      { x: box.x + (near ?? 0) - reachMm, y: box.y - reachMm },
+      { x: box.x + box.width + (far ?? 0) + reachMm, y: box.y + box.height + reachMm },
+    ];
+  });
+  const box = boxOfPoints(corners) ?? frame.box;
+  const within = (value: number, most: number) => Math.min(most, Math.max(0, value));
+  const column = within(Math.floor((box.x - frame.box.x) / frame.cell), grid.columns);
+  const row = within(Math.floor((box.y - frame.box.y) / frame.cell), grid.rows);
+  const right = within(Math.ceil((box.x + box.width - frame.box.x) / frame.cell), grid.columns);
+  const bottom = within(Math.ceil((box.y + box.height - frame.box.y) / frame.cell), grid.rows);
+  return { column, row, columns: right - column, rows: bottom - row };
+}
+
 /**
  * The casters that end at one height, swept from where they start (or from the receiver, if they start below it) to their top. The
  * light falls along the rows, so the sweep only makes each span of a row longer: it is exact.
  */
-function sweptMask(
-  casters: readonly Caster[],
-  options: ShadowOptions,
-  frame: Frame,
-  columns: number,
-  rows: number,
-): Mask {
+function sweptMask(casters: readonly Caster[], options: ShadowOptions, frame: Frame, { columns, rows }: Window): Mask {
   const mask = emptyMask(columns, rows);
   const sampleRows = rows * samplesPerRow;
   const spans: Span[][] = Array.from({ length: sampleRows }, () => []);
   for (const caster of casters) {
-    const first = shadowOffsetMm(Math.max(caster.bottom - options.level, 0), options.light) / frame.cell;
-    const last = shadowOffsetMm(caster.top - options.level, options.light) / frame.cell;
-    for (const [row, crossings] of crossingsByRow(edgesOf(caster.region, frame), sampleRows).entries()) {
+    const near = shadowOffsetMm(Math.max(caster.bottom - options.level, 0), options.light) / frame.cell;
+    const far = shadowOffsetMm(caster.top - options.level, options.light) / frame.cell;
+    const { first, crossings: rowsCrossed } = crossingsByRow(edgesOf(caster.region, frame), sampleRows);
+    for (const [row, crossings] of rowsCrossed.entries()) {
       crossings.sort((a, b) => a - b);
       for (let index = 0; index + 1 < crossings.length; index += 2) {
-        spans[row]?.push({ from: (crossings[index] ?? 0) + first, to: (crossings[index + 1] ?? 0) + last });
+        spans[first + row]?.push({ from: (crossings[index] ?? 0) + near, to: (crossings[index + 1] ?? 0) + far });
       }
     }
   }
@@ -173,13 +201,16 @@ function levelMask(options: ShadowOptions): { frame: Frame; mask: Mask; reach: B
     height: turned.height + 2 * margin,
   };
   const frame: Frame = { ...axes, box, cell };
-  const columns = Math.ceil(box.width / cell);
-  const rows = Math.ceil(box.height / cell);
-  const darkest = emptyMask(columns, rows);
+  const darkest = emptyMask(Math.ceil(box.width / cell), Math.ceil(box.height / cell));
   for (const { top, along, across } of sigmas) {
-    const mask = sweptMask(groups.get(top) ?? [], options, frame, columns, rows);
+    const group = groups.get(top) ?? [];
+    const window = windowOf(group, options, frame, darkest, 3 * along + 2 * cell);
+    if (window.columns <= 0 || window.rows <= 0) continue;
+    const origin = { x: box.x + window.column * cell, y: box.y + window.row * cell };
+    const part = { ...frame, box: { ...origin, width: window.columns * cell, height: window.rows * cell } };
+    const mask = sweptMask(group, options, part, window);
     blurMask(mask, along / cell, across / cell);
-    keepDarker(darkest, mask);
+    keepDarker(darkest, mask, window.column, window.row);
   }
   return { frame, mask: darkest, reach };
 }
@@ -196,12 +227,16 @@ export function shadowPlane(
   const pixels = new Uint8Array(width * height);
   let darkest = 0;
   for (let row = 0; row < height; row += 1) {
+    const start = inFrame(frame, { x: reach.x + 0.5 * frame.cell, y: reach.y + (row + 0.5) * frame.cell });
+    // One cell to the right on the board is one step of the unit vector (along.x, across.x) in the light's axes.
+    let x = (start.x - frame.box.x) / frame.cell;
+    let y = (start.y - frame.box.y) / frame.cell;
     for (let column = 0; column < width; column += 1) {
-      const point = inFrame(frame, { x: reach.x + (column + 0.5) * frame.cell, y: reach.y + (row + 0.5) * frame.cell });
-      const value = maskAt(mask, (point.x - frame.box.x) / frame.cell, (point.y - frame.box.y) / frame.cell);
-      const alpha = Math.round(255 * Math.min(1, value));
+      const alpha = Math.round(255 * Math.min(1, maskAt(mask, x, y)));
       pixels[row * width + column] = alpha;
       if (alpha > darkest) darkest = alpha;
+      x += frame.along.x;
+      y += frame.across.x;
     }
   }
   const box = { x: reach.x, y: reach.y, width: width * frame.cell, height: height * frame.cell };
@@ -213,5 +248,5 @@ export function shadowItem(options: ShadowOptions): Extract<Item, { kind: "image
   const plane = shadowPlane(options);
   if (!plane) return null;
   const png = alphaPng(plane, shadowColour);
-  return { kind: "image", box: plane.box, pngBase64: base64OfBytes(png), opacity: shadowStrength };
+  return { kind: "image", box: plane.box, pngBase64: base64OfBytes(png), opacity: options.strength ?? boardStrength };
 }

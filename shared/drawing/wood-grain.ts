@@ -66,8 +66,8 @@ export function woodGrain(box: Box, colour: Colour, seed: number): Extract<Item,
       pixels[row * width + column] = Math.round(grainAt(alongAt, acrossAt, across, seed) * (shades - 1));
     }
   }
-  const light = mixColours(colour, "#FFFFFF", 0.34);
-  const dark = mixColours(colour, "#6B4A1F", 0.34);
+  const light = mixColours(colour, "#FFFFFF", 0.42);
+  const dark = mixColours(colour, "#7A5424", 0.3);
   const colours = Array.from({ length: shades }, (_, index) => mixColours(light, dark, index / (shades - 1)));
   return { kind: "image", box, pngBase64: base64OfBytes(palettePng({ width, height, pixels }, colours)) };
 }

@@ -210,7 +210,7 @@ export function orreryBooks(): MockupDocument {
     ],
     presentation: {
       wall: "#EFE8DC",
-      light: { azimuth: 320, elevation: 52, angularSize: 0.11 },
+      light: { azimuth: 320, elevation: 52, angularSize: 0.22 },
       viewingDistance: 6000,
     },
   } satisfies MockupDocument);
