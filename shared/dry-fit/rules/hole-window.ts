@@ -1,0 +1,79 @@
+import { isShorter } from "../../geometry/tolerance.ts";
+import { fixedPoint, holeMovementMm } from "../../hardware/hole-movement.ts";
+import { holeWindow as windowOf } from "../../hardware/hole-window.ts";
+import type { Hole, Layer } from "../../mockup/document.ts";
+import { formatFine } from "../../units/format-length.ts";
+import type { Finding } from "../finding.ts";
+import { foundBy, type Rule, type RuleInput } from "../rule.ts";
+import { layersWithFigures, layerWords } from "../words.ts";
+
+const source = "arithmetic; play and cover are common practice";
+
+/** Rule 6: a hole wide enough for its stud to move and narrow enough to hide under its cap. */
+export const holeWindow: Rule = { number: 6, title: "Hole window", check };
+
+function check(input: RuleInput): Finding[] {
+  return layersWithFigures(input).flatMap(({ layer }) =>
+    layer.hold.kind === "standoff" ? layer.hold.holes.flatMap((hole) => checkHole(layer, hole, input)) : [],
+  );
+}
+
+/** The window of one hole of a layer on cap standoffs, with the movement it allows for. */
+export function windowOfHole(
+  hold: Extract<Layer["hold"], { kind: "standoff" }>,
+  hole: Hole,
+  { document, limits, context }: Pick<RuleInput, "document" | "limits" | "context">,
+): { readonly lower: number; readonly upper: number; readonly movement: number } {
+  const { hardware, holes } = hold;
+  const fixed = fixedPoint(holes) ?? hole;
+  const movement = hole.fixed
+    ? 0
+    : holeMovementMm(fixed, hole, {
+        expansionPerK: limits.expansionPerK,
+        temperatureK: context.place === "outside" ? limits.temperatureOutsideK : limits.temperatureInsideK,
+        woodPerPoint: limits.woodPerPoint,
+        moisturePoints: limits.moisturePoints,
+        // The grain of a plain board runs along its longer side (common practice).
+        grainTurn: document.board.height > document.board.width ? 90 : 0,
+      });
+  const window = windowOf({
+    passing: hardware.studDiameter,
+    cap: hardware.capDiameter,
+    barrel: hardware.barrelDiameter,
+    placingError: limits.placingErrorMm,
+    movement,
+    cover: limits.coverMm,
+  });
+  return { ...window, movement };
+}
+
+function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
+  if (layer.hold.kind !== "standoff") return [];
+  const { hardware } = layer.hold;
+  const { lower, upper, movement } = windowOfHole(layer.hold, hole, input);
+  const mm = (length: number) => formatFine(length, input.context.unit);
+  const base = {
+    severity: "stop" as const,
+    layerKey: layer.key,
+    holeId: hole.id,
+    where: { x: hole.x, y: hole.y },
+    unit: "mm",
+    source,
+  };
+  const stud = `${mm(hardware.studDiameter)} stud`;
+  const hides = `${mm(Math.min(hardware.capDiameter, hardware.barrelDiameter))} cap`;
+  const play = `${mm(input.limits.placingErrorMm)} placing error a side and ${mm(movement)} of movement`;
+  if (isShorter(upper, lower)) {
+    const text = `No hole of ${layerWords(layer)} can be right here: the ${stud} needs ${mm(lower)} for ${play}, but from ${mm(upper)} on the hole shows round the ${hides}. Take a wider cap or set the fixed hole nearer.`;
+    return [foundBy(holeWindow, { ...base, text, value: lower, limit: upper })];
+  }
+  if (isShorter(hole.diameter, lower)) {
+    const text = `A hole of ${layerWords(layer)} is ${mm(hole.diameter)} wide; the ${stud} needs at least ${mm(lower)} for ${play}, or the panel binds and cracks.`;
+    return [foundBy(holeWindow, { ...base, text, value: hole.diameter, limit: lower })];
+  }
+  if (isShorter(upper, hole.diameter)) {
+    const text = `A hole of ${layerWords(layer)} is ${mm(hole.diameter)} wide; over ${mm(upper)} it can show round the ${hides}, for ever.`;
+    return [foundBy(holeWindow, { ...base, text, value: hole.diameter, limit: upper })];
+  }
+  return [];
+}

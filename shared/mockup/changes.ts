@@ -1,0 +1,76 @@
+import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
+import { type Change, sameThing, type Wording } from "./change.ts";
+import type { MockupDocument } from "./document.ts";
+import { listHoleChanges } from "./hole-changes.ts";
+import { listLayerChanges } from "./layer-changes.ts";
+import { listPieceChanges } from "./piece-changes.ts";
+
+export type { Change, ChangeKind } from "./change.ts";
+
+/**
+ * What changed from one document to another, in words: the whole sign first, then layer by layer from the wall outward.
+ * Layers are matched by key, pieces and holes by id. No change, no entry; any difference that a client or a builder could see has one.
+ */
+export function listChanges(before: MockupDocument, after: MockupDocument, unit: LengthUnit = "mm"): Change[] {
+  const wording: Wording = { unit };
+  return [
+    ...listSignChanges(before, after, wording),
+    ...listLayerChanges(before, after, wording),
+    ...listHoleChanges(before, after, wording),
+    ...listPieceChanges(before, after, wording),
+  ];
+}
+
+function listSignChanges(before: MockupDocument, after: MockupDocument, { unit }: Wording): Change[] {
+  const changes: Change[] = [];
+  const middle = { x: after.board.width / 2, y: after.board.height / 2 };
+  const say = (kind: Change["kind"], text: string) =>
+    changes.push({
+      kind,
+      text,
+      layerKey: kind === "backer" ? "A" : null,
+      pieceIds: [],
+      where: kind === "presentation" || kind === "quantity" ? null : middle,
+    });
+  const length = (mm: number) => formatLengthWithUnit(mm, unit);
+  const size = ({ board }: MockupDocument) => formatSize(board.width, board.height, unit);
+
+  if (before.board.width !== after.board.width || before.board.height !== after.board.height) {
+    say("board", `Board ${size(before)} becomes ${size(after)}`);
+  }
+  if (before.board.outline !== after.board.outline || before.board.measures !== after.board.measures) {
+    say("board", `The board's measures mean ${after.board.measures}, not ${before.board.measures}`);
+  }
+  const [was, is] = [before.backer, after.backer];
+  if (!sameThing(was.stock, is.stock)) say("backer", `Backer of ${stockWords(was.stock, is.stock)}`);
+  if (was.thickness !== is.thickness) {
+    say("backer", `Backer ${length(was.thickness)} thick becomes ${length(is.thickness)}`);
+  }
+  if (was.finish !== is.finish) {
+    say("backer", `Finish of the backer: ${was.finish || "none"} becomes ${is.finish || "none"}`);
+  }
+  if (before.hanging.kind !== after.hanging.kind) {
+    say("hanging", `Hanging: ${before.hanging.kind} becomes ${after.hanging.kind}`);
+  }
+  if (before.hanging.gap !== after.hanging.gap) {
+    say("hanging", `Gap to the wall ${length(before.hanging.gap)} becomes ${length(after.hanging.gap)}`);
+  }
+  if (before.quantity !== after.quantity) say("quantity", `Quantity ${before.quantity} becomes ${after.quantity}`);
+  if (before.presentation.wall !== after.presentation.wall) {
+    say("presentation", `Wall shown ${before.presentation.wall} becomes ${after.presentation.wall}`);
+  }
+  if (!sameThing(before.presentation.light, after.presentation.light)) say("presentation", "The light falls otherwise");
+  if (before.presentation.viewingDistance !== after.presentation.viewingDistance) {
+    say(
+      "presentation",
+      `Viewing distance ${length(before.presentation.viewingDistance)} becomes ${length(after.presentation.viewingDistance)}`,
+    );
+  }
+  return changes;
+}
+
+function stockWords(was: { name: string; colour: string }, is: { name: string; colour: string }): string {
+  if (was.name !== is.name) return `${was.name} becomes ${is.name}`;
+  return was.colour === is.colour ? `${is.name}: other properties` : `${is.name}: ${was.colour} becomes ${is.colour}`;
+}
