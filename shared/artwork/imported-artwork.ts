@@ -1,7 +1,13 @@
 import type { Box, Path } from "../geometry/path.ts";
 
 /** A closed piece of the artwork: one connected visible area of one colour, holes by the even-odd rule. */
-export type ArtworkPiece = { readonly index: number; readonly colour: string; readonly path: Path; readonly box: Box; readonly areaMm2: number };
+export type ArtworkPiece = {
+  readonly index: number;
+  readonly colour: string;
+  readonly path: Path;
+  readonly box: Box;
+  readonly areaMm2: number;
+};
 
 /** Something of the file that the pieces do not show as drawn. Never silent. */
 export type ArtworkWarning = { readonly code: string; readonly text: string };

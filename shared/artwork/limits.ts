@@ -1,0 +1,18 @@
+/** What one artwork file may hold. Past these we refuse in words instead of working without an end. */
+export const artworkLimits = {
+  /** Bytes of the file as brought, and of its text after unpacking. */
+  fileBytes: 10_000_000,
+  textBytes: 16_000_000,
+  elements: 100_000,
+  depth: 200,
+  entities: 50,
+  entityLength: 200,
+  entityUses: 10_000,
+  paths: 20_000,
+  /** Points after flattening, all paths together. */
+  vertices: 400_000,
+  dashes: 20_000,
+  pieces: 5_000,
+  timeMs: 5_000,
+  memoryMb: 512,
+} as const;

@@ -1,0 +1,44 @@
+import type { ArtworkWarning } from "./imported-artwork.ts";
+
+/** Everything the pieces may show differently from the file, in the order in which people should read it. */
+const warningTexts = {
+  "size.guessed":
+    "The file gives no true size, so we took 96 units for an inch. Type one true measure to set the size.",
+  "size.rescaled":
+    "The size in the file can't be a sign's, so the drawing was fitted to 300 mm. Type one true measure to set the size.",
+  "text.font-replaced":
+    "Text in the file was drawn in Merriweather, not in its own font. Turn text into paths and bring the file in again.",
+  "text.missing-letters":
+    "Some letters are not in our font and show as boxes. Turn text into paths and bring the file in again.",
+  "text.lost": "Some text in the file could not be drawn. Turn text into paths and bring the file in again.",
+  "image.left-out": "A picture inside the file was left out: only drawn shapes become pieces.",
+  "foreign.left-out": "Web content embedded in the file was left out.",
+  "reference.outside":
+    "The file points to other files or addresses. They were not followed and what they hold is missing.",
+  "script.removed": "The file holds scripts or event handlers. They were removed.",
+  "animation.ignored": "The file is animated. The pieces show it without the animation.",
+  "gradient.flattened": "A gradient was replaced by its average colour: a sheet has one colour.",
+  "pattern.flattened": "A pattern fill was replaced by one of its colours: a sheet has one colour.",
+  "opacity.mixed":
+    "Translucent colours were mixed with what lies below them, or with white: a sheet can't be cut translucent.",
+  "mask.soft": "A mask with soft edges or half-tones was replaced by mixed colours.",
+  "filter.ignored": "An effect such as a blur or a shadow was left out.",
+  "blend.ignored": "A blend mode was ignored: colours show as if painted plainly.",
+  "frame.cut": "Parts of the drawing that lie outside its page were cut off, as a viewer would.",
+  "shape.too-far": "A shape that reaches far outside the drawing was left out.",
+  "css.var": "The file uses CSS variables, which we don't read: check the colours.",
+  "css.media": "The file changes with the screen it is shown on (@media). The pieces show it without that.",
+  "css.important": "The file uses !important in its styles, which we don't read: check the colours.",
+  "css.current-color": "The file takes colours from the page it is shown on (currentColor). Unset, they became black.",
+  "css.vector-effect": "The file asks for lines that keep their width when scaled (vector-effect). They were scaled.",
+  "css.transform-origin": "The file sets transform-origin, which we don't read: check the positions.",
+} as const;
+
+export type WarningCode = keyof typeof warningTexts;
+
+export const warningCodes = Object.keys(warningTexts) as readonly WarningCode[];
+
+/** The warnings for the codes met, each once and in the table's order. */
+export function artworkWarnings(codes: ReadonlySet<WarningCode>): ArtworkWarning[] {
+  return warningCodes.filter((code) => codes.has(code)).map((code) => ({ code, text: warningTexts[code] }));
+}
