@@ -47,6 +47,8 @@ export type Revision = z.infer<typeof revisionSchema>;
 /** Drawn by our own engine when the revision was issued, so it is passed on without being taken apart again. */
 const displayList = z.custom<DisplayList>((value) => typeof value === "object" && value !== null && "items" in value);
 
+const zoneField = z.strictObject({ label: z.string(), fromMm: z.number(), toMm: z.number() });
+
 export const sheetSchema = z.strictObject({
   revision: revisionSchema,
   job: z.strictObject({
@@ -79,6 +81,11 @@ export const sheetSchema = z.strictObject({
   pieces: z.array(
     z.strictObject({ id: z.string(), name: z.string(), layerKey: z.string(), x: z.number(), y: z.number() }),
   ),
+  /** The zones of the printed sheet in mm of the board, so that the screen's frame says the same addresses as the paper's. */
+  zones: z
+    .strictObject({ columns: z.array(zoneField), rows: z.array(zoneField) })
+    .nullable()
+    .optional(),
   figures: z.strictObject({ massG: z.number(), depthMm: z.number(), offWallMm: z.number() }),
   words: z.string(),
   acknowledgements: z.array(z.strictObject({ id: z.string(), text: z.string() })),

@@ -41,6 +41,7 @@ export function NoteComposer(props: NoteComposerProps) {
 
   function handleSubmit(event: FormEvent) {
     event.preventDefault();
+    if (add.isPending) return;
     setTried(true);
     const { kind, anchor } = draft;
     if (kind === null || anchor === null || Object.keys(draftGaps(draft)).length > 0) {

@@ -20,6 +20,9 @@ type NoteItemProps = {
   readonly onSelect: (noteId: string | null) => void;
 };
 
+/** The number of a note's line, where the focus goes once the note is there. */
+export const noteButtonId = (noteId: string): string => `note-${noteId}`;
+
 /** One note as a line of the margin: number, words, what and where, replies, and what can be done with it. */
 export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelected, onSelect }: NoteItemProps) {
   const [isReplying, setReplying] = useState(false);
@@ -43,6 +46,7 @@ export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelecte
       <div className="flex gap-3">
         <button
           type="button"
+          id={noteButtonId(note.id)}
           aria-pressed={isSelected}
           aria-label={`Note ${note.number}: show on the drawing`}
           onClick={() => onSelect(isSelected ? null : note.id)}

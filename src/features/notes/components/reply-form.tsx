@@ -22,6 +22,7 @@ export function ReplyForm({ shop, revisionId, note, onDone }: ReplyFormProps) {
 
   function handleSubmit(event: FormEvent) {
     event.preventDefault();
+    if (reply.isPending) return;
     setEmpty(text.trim() === "");
     if (text.trim() === "") return;
     reply.mutate(text, {
