@@ -1,7 +1,9 @@
 import { regionAreaMm2, regionCentroid } from "../geometry/area.ts";
-import { boxOfRegion } from "../geometry/box.ts";
+import { boxGrow, boxOfRegion } from "../geometry/box.ts";
+import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Point, Region } from "../geometry/path.ts";
+import { rectanglePath } from "../geometry/shapes.ts";
 
 export type Support = {
   /** Area in mm² that lies on the support: what the adhesive holds by. */
@@ -19,12 +21,17 @@ export type Support = {
 const sliverMm = 0.03;
 const reachStepMm = 0.05;
 
+/** What of a piece lies on nothing, slivers along its edge left out; empty when all of it is carried. */
+export function unsupportedPart(piece: Region, support: Region, kernel: Kernel): Region {
+  const off = kernel.difference(piece, support);
+  return off.length > 0 && kernel.offset(off, -sliverMm, "round").length > 0 ? off : [];
+}
+
 /** How a piece lies on what is under it. Both regions as the kernel gives them. */
 export function measureSupport(piece: Region, support: Region, kernel: Kernel): Support {
   const area = regionAreaMm2(piece);
   const overlapMm2 = regionAreaMm2(kernel.intersect(piece, support));
-  const off = kernel.difference(piece, support);
-  const unsupported = kernel.offset(off, -sliverMm, "round").length > 0 ? off : [];
+  const unsupported = unsupportedPart(piece, support, kernel);
   if (area === 0 || unsupported.length === 0) {
     return { overlapMm2, unsupportedShare: 0, reachMm: area === 0 ? null : 0, where: null, unsupported: [] };
   }
@@ -32,18 +39,26 @@ export function measureSupport(piece: Region, support: Region, kernel: Kernel): 
   if (overlapMm2 === 0) {
     return { overlapMm2, unsupportedShare, reachMm: null, where: regionCentroid(unsupported), unsupported };
   }
-  return { overlapMm2, unsupportedShare, unsupported, ...farthestReach(unsupported, support, kernel) };
+  return { overlapMm2, unsupportedShare, unsupported, ...farthestReach(piece, unsupported, support, kernel) };
 }
 
 /** Grows the support until it covers the rest, halving the interval; the last that stays out shows the place. */
-function farthestReach(unsupported: Region, support: Region, kernel: Kernel): { reachMm: number; where: Point | null } {
-  const box = boxOfRegion([...unsupported, ...support]);
-  let covered = box ? Math.hypot(box.width, box.height) : 0;
+function farthestReach(
+  piece: Region,
+  unsupported: Region,
+  support: Region,
+  kernel: Kernel,
+): { readonly reachMm: number; readonly where: Point | null } {
+  const box = boxOfRegion(piece) ?? { x: 0, y: 0, width: 0, height: 0 };
+  // A piece that touches its support can't reach farther from it than its own diagonal, nor is farther support of use.
+  const diagonal = Math.hypot(box.width, box.height);
+  const near = kernel.intersect(support, flattenPath(rectanglePath(boxGrow(box, diagonal))));
+  let covered = diagonal;
   let out = 0;
   let rest = unsupported;
   while (covered - out > reachStepMm) {
     const middle = (covered + out) / 2;
-    const left = kernel.difference(unsupported, kernel.offset(support, middle, "round"));
+    const left = kernel.difference(unsupported, kernel.offset(near, middle, "round"));
     if (left.length === 0) covered = middle;
     else {
       out = middle;

@@ -3,9 +3,7 @@ import type { PieceFigures } from "../stack/figures.ts";
 import type { RuleInput } from "./rule.ts";
 
 /** Layers with their pieces and the pieces' figures, in document order. */
-export function layersWithFigures(
-  input: Pick<RuleInput, "document" | "figures">,
-): {
+export function layersWithFigures(input: Pick<RuleInput, "document" | "figures">): {
   readonly layer: Layer;
   readonly level: number;
   readonly pieces: readonly { piece: Piece; figures: PieceFigures }[];

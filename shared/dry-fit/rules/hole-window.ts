@@ -31,7 +31,7 @@ export function windowOfHole(
     : holeMovementMm(fixed, hole, {
         expansionPerK: limits.expansionPerK,
         temperatureK: context.place === "outside" ? limits.temperatureOutsideK : limits.temperatureInsideK,
-        woodPerPoint: limits.woodPerPoint,
+        woodPerPoint: document.backer.stock.hardness === "softwood" ? limits.softwoodPerPoint : limits.hardwoodPerPoint,
         moisturePoints: limits.moisturePoints,
         // The grain of a plain board runs along its longer side (common practice).
         grainTurn: document.board.height > document.board.width ? 90 : 0,

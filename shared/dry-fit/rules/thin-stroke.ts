@@ -1,4 +1,4 @@
-import { measureSupport } from "../../bonds/support.ts";
+import { unsupportedPart } from "../../bonds/support.ts";
 import { boxesOverlap, boxOfRegion } from "../../geometry/box.ts";
 import type { Kernel } from "../../geometry/kernel.ts";
 import type { Region } from "../../geometry/path.ts";
@@ -65,7 +65,7 @@ function freePartOf(layer: Layer, level: number, figures: PieceFigures, input: R
   if (layer.hold.kind === "standoff") return figures.region;
   if (layer.hold.kind === "pocket") return [];
   const support = supportAt(input, level, figures.bottom.nominal);
-  return measureSupport(figures.region, support, input.kernel).unsupported;
+  return unsupportedPart(figures.region, support, input.kernel);
 }
 
 function reaches(place: ThinPlace, free: Region, kernel: Kernel): boolean {
