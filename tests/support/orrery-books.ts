@@ -1,5 +1,6 @@
 import { createRequire } from "node:module";
 import * as fontkit from "fontkit";
+import type { Finding } from "#shared/dry-fit/finding.ts";
 import { boxCentre, boxOfPath, boxUnion } from "#shared/geometry/box.ts";
 import type { Path, Placement, Point, Ring, Segment } from "#shared/geometry/path.ts";
 import { circlePath } from "#shared/geometry/shapes.ts";
@@ -11,6 +12,7 @@ import {
   type Layer,
   type MockupDocument,
 } from "#shared/mockup/document.ts";
+import type { FrozenNote, TitleBlock } from "#shared/mockup/snapshot.ts";
 
 /** An invented shop sign, rich enough to exercise the whole drawing: a disc on standoffs, rings and planets on it, letters on the board. */
 
@@ -215,3 +217,76 @@ export function orreryBooks(): MockupDocument {
     },
   } satisfies MockupDocument);
 }
+
+export const orreryTitleBlock: TitleBlock = {
+  owner: "Copperlark Signs",
+  client: "Orrery Books",
+  title: "Lobby sign, rings and planets",
+  number: "CL-0142",
+  revision: "B",
+  date: "2026-11-30",
+  createdBy: "Ada Fenn, bench 1",
+  documentType: "Proof drawing",
+  unit: "mm",
+};
+
+export const orreryNotes: readonly FrozenNote[] = [
+  {
+    number: 1,
+    kind: "must change",
+    state: "answered",
+    text: "Can the gold ring be a little wider? It gets lost from the door.",
+    author: "Tilda Marsh",
+    fromRevision: "A",
+    zone: "B3",
+  },
+  {
+    number: 2,
+    kind: "question",
+    state: "open",
+    text: "Will the caps be brushed or polished?",
+    author: "Tilda Marsh",
+    fromRevision: "A",
+    zone: "B3",
+  },
+  {
+    number: 3,
+    kind: "fine as is",
+    state: "settled",
+    text: "Letters read “Orrery Books”, no ampersand.",
+    author: "Tilda Marsh",
+    fromRevision: "A",
+    zone: null,
+  },
+];
+
+export const orreryFindings: readonly Finding[] = [
+  {
+    rule: 3,
+    title: "Thin stroke",
+    severity: "caution",
+    text: "The thinnest stroke of Orbit 3 is 2.6 mm; 3 mm is advised for a 3 mm sheet that stands free.",
+    layerKey: "C",
+    pieceIds: ["ring-3"],
+    holeId: null,
+    where: { x: 300, y: 118 },
+    value: 2.6,
+    limit: 3,
+    unit: "mm",
+    source: "common practice",
+  },
+  {
+    rule: 20,
+    title: "Locate",
+    severity: "caution",
+    text: "The chalk planets have no template. Say how the hand finds their place.",
+    layerKey: "F",
+    pieceIds: ["planet-chalk-1", "planet-chalk-2"],
+    holeId: null,
+    where: { x: 390, y: 120 },
+    value: null,
+    limit: null,
+    unit: null,
+    source: "our choice",
+  },
+];

@@ -1,0 +1,88 @@
+import type { Hold, Layer, MockupDocument } from "../mockup/document.ts";
+import type { Figures } from "../stack/figures.ts";
+import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
+import { formatMass } from "../units/mass.ts";
+
+/** A layer as the schedule lists it, lettered in the reader's unit. */
+export type ScheduleRow = {
+  readonly key: string;
+  readonly what: string;
+  readonly stock: string;
+  readonly thickness: string;
+  readonly heldBy: string;
+  readonly offset: string;
+  readonly topAt: string;
+  readonly pieces: string;
+  readonly mass: string;
+};
+
+const nothing = "–";
+
+/** What the pieces of a layer stand on, as their figures say; "nothing" is a finding's business, here it is a dash. */
+function supportOf(layer: Layer, figures: Figures): string {
+  const keys = figures.pieces.filter(({ layerKey }) => layerKey === layer.key).map(({ restsOn }) => restsOn[0]);
+  const known = [...new Set(keys.filter((key) => key !== undefined))].sort();
+  return known.length === 0 ? nothing : known.join(", ");
+}
+
+function heldBy(hold: Hold, support: string, unit: LengthUnit): string {
+  switch (hold.kind) {
+    case "bond":
+      return `bond on ${support}, ${hold.adhesive.name}`;
+    case "pocket":
+      return `pocket ${formatLength(hold.depth, unit)} deep in ${support}, ${hold.adhesive.name}`;
+    case "standoff": {
+      const count = hold.holes.length;
+      return `${count} ${count === 1 ? "standoff" : "standoffs"}, ${hold.hardware.name}`;
+    }
+  }
+}
+
+const hangings: Readonly<Record<MockupDocument["hanging"]["kind"], string>> = {
+  cleat: "cleat",
+  keyholes: "keyholes",
+  wire: "wire",
+  "screwed through": "screwed through",
+  none: "not chosen",
+};
+
+/** The schedule, backer first and then the layers from the wall outward. Hidden layers are part of the sign and stay in. */
+export function scheduleRows(document: MockupDocument, figures: Figures, unit: LengthUnit): ScheduleRow[] {
+  const { backer, hanging } = document;
+  const first: ScheduleRow = {
+    key: "A",
+    what: `Backer, ${backer.finish === "" ? "bare" : backer.finish}`,
+    stock: backer.stock.name,
+    thickness: formatLength(backer.thickness, unit),
+    heldBy: hangings[hanging.kind],
+    offset: nothing,
+    topAt: formatLength(figures.backerTop.nominal, unit),
+    pieces: "1",
+    mass: formatMass(figures.backerMassG, unit),
+  };
+  const layers = document.layers.map((layer): ScheduleRow => {
+    const own = figures.layers.find(({ key }) => key === layer.key);
+    return {
+      key: layer.key,
+      what: layer.name,
+      stock: layer.stock.name,
+      thickness: formatLength(layer.thickness, unit),
+      heldBy: heldBy(layer.hold, supportOf(layer, figures), unit),
+      offset: layer.hold.kind === "standoff" ? formatLength(layer.hold.offset, unit) : nothing,
+      topAt: own ? formatLength(own.top.nominal, unit) : nothing,
+      pieces: String(layer.pieces.length),
+      mass: own ? formatMass(own.massG, unit) : nothing,
+    };
+  });
+  return [first, ...layers];
+}
+
+/** Everything together, for the line under the schedule. */
+export function scheduleTotal(document: MockupDocument, figures: Figures, unit: LengthUnit): string {
+  const off = formatLengthWithUnit(figures.offWall.nominal, unit);
+  const behind = formatLengthWithUnit(document.hanging.gap, unit);
+  const gap = document.hanging.gap > 0 ? `, ${behind} of gap behind it included` : "";
+  const many = document.quantity > 1 ? ` ${document.quantity} signs.` : "";
+  return `Mass about ${formatMass(figures.massG, unit)} without hardware. Stands ${off} off the wall${gap}.${many}`;
+}
