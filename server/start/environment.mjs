@@ -1,6 +1,9 @@
+import { join } from "node:path";
+
 /**
  * @typedef {object} Parts
  * @property {import("./settings.mjs").Settings} settings
+ * @property {string} folder the data folder
  * @property {import("./data-folder.mjs").Secrets} secrets
  * @property {import("./postgres.mjs").RunningCluster | undefined} cluster undefined when DATABASE_URL was given
  * @property {NodeJS.ProcessEnv} env of the start script
@@ -12,7 +15,7 @@
  * @param {Parts} parts
  * @returns {NodeJS.ProcessEnv}
  */
-export function applicationEnv({ settings, secrets, cluster, env }) {
+export function applicationEnv({ settings, folder, secrets, cluster, env }) {
   return {
     ...env,
     ...(cluster === undefined ? {} : { DATABASE_URL: cluster.ownerUrl, APP_DATABASE_URL: cluster.appUrl }),
@@ -21,6 +24,7 @@ export function applicationEnv({ settings, secrets, cluster, env }) {
     HOST: settings.host,
     PUBLIC_URL: settings.publicUrl,
     FILES_DIR: settings.filesDir,
+    MAIL_SINK_DIR: env.MAIL_SINK_DIR || join(folder, "mail"),
     AUTH_SECRET: env.AUTH_SECRET || secrets.auth,
     DEMO: env.DEMO || (isLoopback(settings.host) && isLoopback(new URL(settings.publicUrl).hostname) ? "auto" : "off"),
   };

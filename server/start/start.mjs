@@ -46,7 +46,7 @@ async function serve({ root, folder, settings, ending, undo }) {
       `Database: ${cluster.data} on 127.0.0.1:${cluster.port}; its passwords are in ${join(folder, "secrets.json")}.`,
     );
   }
-  const env = applicationEnv({ settings, secrets: readOrMakeSecrets(folder), cluster, env: process.env });
+  const env = applicationEnv({ settings, folder, secrets: readOrMakeSecrets(folder), cluster, env: process.env });
   if (!env.APP_DATABASE_URL) {
     say("APP_DATABASE_URL is not set: the application runs with the role of DATABASE_URL, which owns the tables.");
   }

@@ -13,7 +13,7 @@ const cluster = {
 };
 
 function environment(env: NodeJS.ProcessEnv, args: string[] = []) {
-  return applicationEnv({ settings: readSettings("/checkout", args, env), secrets, cluster, env });
+  return applicationEnv({ settings: readSettings("/checkout", args, env), folder: "/kept", secrets, cluster, env });
 }
 
 describe("settings of a start", () => {
@@ -57,6 +57,7 @@ describe("the environment of the application", () => {
       AUTH_SECRET: "key-of-this-checkout",
       NODE_ENV: "production",
       PORT: "4600",
+      MAIL_SINK_DIR: "/kept/mail",
     });
     expect(environment({}, ["--dev"]).NODE_ENV).toBe("development");
   });
@@ -64,7 +65,7 @@ describe("the environment of the application", () => {
   it("leaves a database of the caller's own as it is", () => {
     const env = { DATABASE_URL: "postgres://db.example/x", AUTH_SECRET: "mine" };
     const settings = readSettings("/checkout", [], env);
-    const result = applicationEnv({ settings, secrets, cluster: undefined, env });
+    const result = applicationEnv({ settings, folder: "/kept", secrets, cluster: undefined, env });
     expect(result).toMatchObject({ DATABASE_URL: "postgres://db.example/x", AUTH_SECRET: "mine" });
     expect(result.APP_DATABASE_URL).toBeUndefined();
   });
