@@ -49,6 +49,13 @@ function holeSpread({ document }: DimensionInput, axis: "x" | "y"): { key: strin
   return null;
 }
 
+/** The length with what it measures before it; the length alone where only that has room. */
+function letteringOf({ from, to }: { from: number; to: number }, named: string, input: DimensionInput): string {
+  const length = formatLength(to - from, input.unit);
+  const whole = `${named}${length}`;
+  return dimensionFits({ from, to, text: whole }, input.paperScale) ? whole : length;
+}
+
 /** Edge of the board to the layer, the layer, the layer to the other edge. Steps of nothing are left out. */
 function chainDimensions(layer: Measured, axis: "x" | "y", at: number, input: DimensionInput): Dimension[] {
   const { board } = input.document;
@@ -69,7 +76,7 @@ function chainDimensions(layer: Measured, axis: "x" | "y", at: number, input: Di
       to: step.to,
       at,
       thing,
-      text: `${step.named}${formatLength(step.to - step.from, input.unit)}`,
+      text: letteringOf(step, step.named, input),
       overflow: step.overflow,
     }));
 }
@@ -89,7 +96,7 @@ function rowsOf(input: DimensionInput, axis: "x" | "y"): Dimension[] {
             to: holes.to,
             at: row(0),
             thing,
-            text: `${holes.key}  holes ${formatLength(holes.to - holes.from, input.unit)}`,
+            text: letteringOf(holes, `${holes.key}  holes `, input),
             overflow: "after",
           },
         ];

@@ -40,17 +40,34 @@ const padMm = 1.7;
 const lineMm = 4.5;
 const rowPadMm = 1.3;
 
-/** Numbers take what they need, words share the rest by what they would like to have. */
+/** Shares room among columns of words: who wants less than an even share gets what it wants, the others share the rest. */
+function shareRoom(wanted: readonly number[], room: number): number[] {
+  const given = new Map<number, number>();
+  let left = room;
+  for (const [rank, index] of wanted
+    .map((_, place) => place)
+    .sort((a, b) => (wanted[a] ?? 0) - (wanted[b] ?? 0))
+    .entries()) {
+    const even = left / (wanted.length - rank);
+    const width = Math.min(wanted[index] ?? 0, even);
+    given.set(index, width);
+    left -= width;
+  }
+  return wanted.map((_, index) => (given.get(index) ?? 0) + Math.max(0, left) / wanted.length);
+}
+
+/** Numbers take what they need, words share the rest. */
 function columnWidths(rows: readonly ScheduleRow[], widthMm: number): number[] {
   const wanted = columns.map(({ field, font }) => {
     const cells = rows.map((row) => textWidthMm(row[field], font, smallTextMm));
     return Math.max(textWidthMm(heads[field], "sans-semibold", smallTextMm), ...cells) + 2 * padMm;
   });
-  const sum = (wraps: boolean) =>
-    columns.reduce((total, column, index) => total + (column.wraps === wraps ? (wanted[index] ?? 0) : 0), 0);
-  const room = Math.max(0, widthMm - sum(false));
-  const words = sum(true);
-  return columns.map(({ wraps }, index) => (wraps ? (room * (wanted[index] ?? 0)) / words : (wanted[index] ?? 0)));
+  const numbers = columns.reduce((sum, { wraps }, index) => sum + (wraps ? 0 : (wanted[index] ?? 0)), 0);
+  const words = shareRoom(
+    wanted.filter((_, index) => columns[index]?.wraps),
+    Math.max(0, widthMm - numbers),
+  );
+  return columns.map(({ wraps }, index) => (wraps ? (words.shift() ?? 0) : (wanted[index] ?? 0)));
 }
 
 type DrawnRow = { readonly heightMm: number; readonly draw: (y: number) => Item[] };

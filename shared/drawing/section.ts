@@ -28,6 +28,8 @@ type Slab = { readonly key: string; readonly colour: string; readonly box: Box }
 const wallHatchMm = 3.4;
 const wallGapMm = 1.2;
 const labelPitchMm = 7;
+/** The first label stays this far below the board's upper edge: its heading must not rise into the dimensions. */
+const leastLabelMm = 3;
 
 function slabsOf({ document, figures, depthScale }: SectionInput): Slab[] {
   return document.layers.flatMap((layer): Slab[] => {
@@ -120,13 +122,16 @@ function drawStandoffs(
   return { barrels, caps };
 }
 
-/** Moves places that want to be nearer than `pitch` apart, keeping their order and staying near where they were. */
-export function spreadPlaces(wanted: readonly number[], pitch: number): number[] {
+/** Moves places that want to be nearer than `pitch` apart, keeping their order and staying near where they were, none below `least`. */
+export function spreadPlaces(
+  wanted: readonly number[],
+  { pitch, least }: { readonly pitch: number; readonly least: number },
+): number[] {
   const places: number[] = [];
   for (const place of wanted) places.push(Math.max(place, (places.at(-1) ?? Number.NEGATIVE_INFINITY) + pitch));
   const shift =
     places.reduce((sum, place, index) => sum + place - (wanted[index] ?? place), 0) / Math.max(1, places.length);
-  return places.map((place) => place - shift);
+  return places.map((place) => place - Math.min(shift, (places[0] ?? 0) - least));
 }
 
 type Label = { readonly key: string; readonly text: string; readonly foot: { readonly x: number; readonly y: number } };
@@ -142,21 +147,23 @@ function labelsOf(input: SectionInput, slabs: readonly Slab[]): Label[] {
       y: document.board.height - Math.min(8 * input.paperScale, document.board.height * 0.06),
     },
   };
+  const feet: number[] = [];
   const layers = figures.layers.flatMap((layer): Label[] => {
     const slab = slabs
       .filter(({ key }) => key === layer.key)
-      .sort((a, b) => b.box.x + b.box.width - a.box.x - a.box.width)[0];
+      .sort((a, b) => b.box.x + b.box.width - a.box.x - a.box.width)[0]?.box;
     if (!slab) return [];
-    return [
-      {
-        key: layer.key,
-        text: top(layer.top.nominal),
-        foot: { x: slab.box.x + slab.box.width * 0.7, y: slab.box.y + slab.box.height / 2 },
-      },
-    ];
+    // Leaders to layers of one middle would run into one point.
+    const heights = footShares.map((share) => slab.y + slab.height * share);
+    const clear = heights.find((y) => feet.every((foot) => Math.abs(foot - y) > 2.5 * input.paperScale));
+    const y = clear ?? slab.y + slab.height / 2;
+    feet.push(y);
+    return [{ key: layer.key, text: top(layer.top.nominal), foot: { x: slab.x + slab.width * 0.6, y } }];
   });
   return [...layers, backer].sort((a, b) => a.foot.y - b.foot.y || (a.key < b.key ? -1 : 1));
 }
+
+const footShares = [0.5, 0.25, 0.75, 0.1, 0.9, 0.4, 0.6];
 
 const labelTitle = "Top at";
 
@@ -197,9 +204,17 @@ export function drawSection(input: SectionInput): DisplayList {
     ...(document.hanging.gap > 0 ? [{ from: -document.hanging.gap, to: 0, thing: height + mm(4) }] : []),
     { from: -document.hanging.gap, to: deepest, thing: height + mm(4) },
   ];
+  const labels = labelsOf(input, slabs);
+  const places = spreadPlaces(
+    labels.map(({ foot }) => foot.y),
+    { pitch: mm(labelPitchMm), least: mm(leastLabelMm) },
+  );
+  // Lettering stands to the right of these short steps: whatever ends farther right goes in the nearer row, clear of it.
+  const byReach = (a: { to: number }, b: { to: number }) => b.to - a.to;
+  const under = Math.max(height + mm(4), (places.at(-1) ?? 0) + mm(2));
   const dimensions = [
-    ...above.map((step, index) => ({ ...step, at: -mm(dimensionRowMm * (index + 1)) })),
-    ...below.map((step, index) => ({ ...step, at: step.thing + mm(dimensionRowMm * (index + 1)) })),
+    ...above.sort(byReach).map((step, index) => ({ ...step, at: -mm(dimensionRowMm * (index + 1)) })),
+    ...below.sort(byReach).map((step, index) => ({ ...step, at: under + mm(dimensionRowMm * (index + 1)) })),
   ].map(({ from, to, at, thing }) => ({
     axis: "x" as const,
     from: from * depthScale,
@@ -209,11 +224,6 @@ export function drawSection(input: SectionInput): DisplayList {
     text: depthText(to - from),
     overflow: "after" as const,
   }));
-  const labels = labelsOf(input, slabs);
-  const places = spreadPlaces(
-    labels.map(({ foot }) => foot.y),
-    mm(labelPitchMm),
-  );
   const balloonX = deepest * depthScale + mm(9);
   const textX = balloonX + mm(4.4);
   const keys = labels.flatMap(({ key, text, foot }, index): Item[] => {
@@ -257,8 +267,8 @@ export function drawSection(input: SectionInput): DisplayList {
     ...dimensions.map(({ to, text }) => to + mm(textWidthMm(text, "serif", smallTextMm) + 7)),
   );
   const left = document.hanging.gap * depthScale + mm(wallHatchMm + wallGapMm + 3);
-  const top = mm(Math.max(dimensionRowMm * above.length + 5, 8)) + Math.max(0, -(places[0] ?? 0) + mm(9));
-  const lowest = Math.max(height + mm(4 + dimensionRowMm * below.length + 2.5), (places.at(-1) ?? 0) + mm(4));
+  const top = mm(Math.max(dimensionRowMm * above.length + 5, 8));
+  const lowest = under + mm(dimensionRowMm * below.length + 2.5);
   return {
     widthMm: left + widest,
     heightMm: top + lowest,

@@ -6,7 +6,7 @@ import { graphite, madder, ochre, oxblood, verdigris } from "./palette.ts";
 
 /** Stands on every sheet: what the figures are, and whose word comes first. */
 export const planningCaution =
-  "Figures are estimates for planning. Local codes and a licensed professional's judgment come first.";
+  "Figures are estimates for planning. Local codes and a licensed professional’s judgment come first.";
 
 const noteColours: Readonly<Record<FrozenNote["kind"], Colour>> = {
   "must change": madder,

@@ -5,9 +5,10 @@ import type { MockupDocument } from "../mockup/document.ts";
 import type { FrozenNote, TitleBlock } from "../mockup/snapshot.ts";
 import type { Figures } from "../stack/figures.ts";
 import { formatSize } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
 import { paperOf } from "../units/paper.ts";
 import { frameOf } from "../units/zones.ts";
-import { fineLineMm } from "./dimensions.ts";
+import { fineLineMm, type PaperScale } from "./dimensions.ts";
 import type { DrawingSheet, Item } from "./display-list.ts";
 import { type FlowLine, fillColumns, headingLines, paragraph } from "./flow.ts";
 import { graphite, rule } from "./palette.ts";
@@ -17,9 +18,9 @@ import { drawSheetFrame } from "./sheet-frame.ts";
 import { planningCaution, sheetTextLines } from "./sheet-text.ts";
 import { lineItem } from "./text-item.ts";
 import { drawTitleBlock, titleBlockHeightMm } from "./title-block.ts";
-import { drawViews, scaleOfViews } from "./views.ts";
+import { drawViews, scaleOfViews, type ViewsInput } from "./views.ts";
 
-export type PaperName = "A4" | "A3" | "Letter" | "Tabloid";
+export type Paper = "A4" | "A3" | "Letter" | "Tabloid";
 
 export type SheetsInput = {
   readonly titleBlock: TitleBlock;
@@ -31,7 +32,8 @@ export type SheetsInput = {
   readonly notes: readonly FrozenNote[];
   /** As they shall read, from the brief. */
   readonly words: string;
-  readonly paper: PaperName;
+  readonly unit: LengthUnit;
+  readonly paper: Paper;
 };
 
 const padMm = 5;
@@ -42,7 +44,7 @@ const mostColumnMm = 100;
 /** One sheet's places. */
 type Layout = { readonly size: { widthMm: number; heightMm: number }; readonly left: Box; readonly right: Box };
 
-function layoutOf(paper: PaperName): Layout {
+function layoutOf(paper: Paper): Layout {
   const upright = paperOf(paper);
   if (!upright) throw new Error(`No paper is called ${paper}.`);
   const size = { widthMm: upright.heightMm, heightMm: upright.widthMm };
@@ -71,8 +73,8 @@ function layScheduleBlock(
   at: { x: number; y: number },
   room: { widthMm: number; heightMm: number },
 ): Schedule {
-  const { document, figures, titleBlock } = input;
-  const total = paragraph(scheduleTotal(document, figures, titleBlock.unit), {
+  const { document, figures } = input;
+  const total = paragraph(scheduleTotal(document, figures, input.unit), {
     widthMm: room.widthMm,
     colour: graphite,
   });
@@ -102,6 +104,12 @@ function layScheduleBlock(
   };
 }
 
+/** Millimetres of the sign that make one on the sheets' paper: what elevation and section of the same set are lettered for. */
+export function paperScaleOf(input: Omit<ViewsInput, "kernel"> & { readonly paper: Paper }): PaperScale {
+  const picture = inner(layoutOf(input.paper).left);
+  return 1 / scaleOfViews(input, { widthMm: picture.width, heightMm: picture.height }).scale.factor;
+}
+
 /** The left part of a further sheet cut into columns as wide as the right one. */
 function textColumns(box: Box, widthMm: number): Box[] {
   const count = Math.max(1, Math.floor((box.width + 2 * padMm) / (widthMm + 2 * padMm)));
@@ -121,7 +129,7 @@ export function drawSheets(input: SheetsInput): DrawingSheet[] {
   const block = {
     titleBlock,
     scale: "1:1000",
-    size: formatSize(document.board.width, document.board.height, titleBlock.unit),
+    size: formatSize(document.board.width, document.board.height, input.unit),
     paper,
     sheet: 10,
     sheets: 10,
@@ -130,13 +138,12 @@ export function drawSheets(input: SheetsInput): DrawingSheet[] {
   const caution = paragraph(planningCaution, { widthMm: text.width, colour: graphite });
   const cautionMm = caution.reduce((sum, line) => sum + line.heightMm, 0);
   const notesBox = { ...text, height: right.height - titleMm - cautionMm - 2 * padMm };
-  const views = { ...input, unit: titleBlock.unit };
 
-  const rows = scheduleRows(document, input.figures, titleBlock.unit);
+  const rows = scheduleRows(document, input.figures, input.unit);
   const room = { widthMm: picture.width, heightMm: picture.height };
   const trial = layScheduleBlock(rows, input, { x: 0, y: 0 }, { ...room, heightMm: room.heightMm * 0.6 });
-  const alone = scaleOfViews(views, room);
-  const shared = scaleOfViews(views, { ...room, heightMm: room.heightMm - trial.heightMm - padMm });
+  const alone = scaleOfViews(input, room);
+  const shared = scaleOfViews(input, { ...room, heightMm: room.heightMm - trial.heightMm - padMm });
   const together = trial.rest.length === 0 && shared.fits && shared.scale.factor === alone.scale.factor;
   const { scale } = alone;
 
@@ -148,8 +155,8 @@ export function drawSheets(input: SheetsInput): DrawingSheet[] {
     const heightMm = room.heightMm - trial.heightMm - padMm;
     const at = { x: picture.x, y: picture.y + heightMm + padMm };
     const schedule = layScheduleBlock(rows, input, at, { ...room, heightMm: room.heightMm * 0.6 });
-    bodies.push([...drawViews(views, scale, { ...picture, ...room, heightMm }), ...schedule.items, ...first.items]);
-  } else bodies.push([...drawViews(views, scale, { ...picture, ...room }), ...first.items]);
+    bodies.push([...drawViews(input, scale, { ...picture, ...room, heightMm }), ...schedule.items, ...first.items]);
+  } else bodies.push([...drawViews(input, scale, { ...picture, ...room }), ...first.items]);
 
   let waiting: readonly ScheduleRow[] = together ? [] : rows;
   while (waiting.length > 0 || lines.length > 0) {

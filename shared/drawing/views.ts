@@ -9,6 +9,7 @@ import { dimensionMargins } from "./elevation-dimensions.ts";
 import { graphite } from "./palette.ts";
 import { drawSection } from "./section.ts";
 import { textItem } from "./text-item.ts";
+import { textWidthMm } from "./type.ts";
 
 export type ViewsInput = {
   readonly document: MockupDocument;
@@ -73,7 +74,9 @@ export function drawViews(
   });
   const heading = (text: string, after: string, x: number): Item[] => [
     textItem(text, { x, y: room.y + 5.5 }, { font: "serif-bold", sizeMm: 4.2 }),
-    ...(after === "" ? [] : [textItem(after, { x: x + text.length * 2.4 + 3, y: room.y + 5.5 }, { colour: graphite })]),
+    ...(after === ""
+      ? []
+      : [textItem(after, { x: x + textWidthMm(text, "serif-bold", 4.2) + 3, y: room.y + 5.5 }, { colour: graphite })]),
   ];
   return [
     ...heading("Front elevation", scale.name, room.x),
