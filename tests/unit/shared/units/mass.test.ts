@@ -1,0 +1,18 @@
+import { expect, it } from "vitest";
+import { formatMass } from "#shared/units/mass.ts";
+
+it.each([
+  { grams: 270, unit: "mm" as const, text: "0.27 kg" },
+  { grams: 3440, unit: "mm" as const, text: "3.44 kg" },
+  { grams: 10, unit: "mm" as const, text: "0.01 kg" },
+  { grams: 9.96, unit: "mm" as const, text: "10 g" },
+  { grams: 4.23, unit: "mm" as const, text: "4.2 g" },
+  { grams: 0, unit: "mm" as const, text: "0 g" },
+  { grams: 123_456, unit: "mm" as const, text: "123 kg" },
+  { grams: 453.59237, unit: "in" as const, text: "1 lb" },
+  { grams: 270, unit: "in" as const, text: "0.6 lb" },
+  { grams: 4.25, unit: "in" as const, text: "0.15 oz" },
+  { grams: Number.NaN, unit: "mm" as const, text: "–" },
+])("$grams g read $text", ({ grams, unit, text }) => {
+  expect(formatMass(grams, unit)).toBe(text);
+});
