@@ -18,7 +18,12 @@ const schema = z.object({
   WORKER: z.enum(["inside", "alone"]).default("inside"),
   LOG_LEVEL: z.enum(["trace", "debug", "info", "warn", "error", "silent"]).default("info"),
   CLIENT_DIR: z.string().default("dist/client"),
+  /** Whose X-Forwarded headers are believed: addresses and ranges as Express takes them. */
   TRUST_PROXY: z.string().default("loopback"),
+  /** Multiplies every rate limit, for tests and for shops behind one address. */
+  RATE_LIMIT_FACTOR: z.coerce.number().positive().default(1),
+  /** `auto` loads the demo shop into a database without a shop. */
+  DEMO: z.enum(["auto", "off"]).default("off"),
 });
 
 export type Environment = z.infer<typeof schema>;

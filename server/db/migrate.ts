@@ -31,6 +31,13 @@ grant usage, select on all sequences in schema public to ${role};
 grant select, insert, update, delete on all tables in schema graphile_worker to ${role};
 grant usage, select on all sequences in schema graphile_worker to ${role};
 grant execute on all functions in schema graphile_worker to ${role};
+do $$ declare guarded record; begin
+  -- The queue's tables show their rows to their owner only, unless a policy says otherwise.
+  for guarded in select relname from pg_class where relnamespace = 'graphile_worker'::regnamespace and relrowsecurity loop
+    execute format('drop policy if exists ${role}_works on graphile_worker.%I', guarded.relname);
+    execute format('create policy ${role}_works on graphile_worker.%I to ${role} using (true) with check (true)', guarded.relname);
+  end loop;
+end $$;
 `;
 
 /**

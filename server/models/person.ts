@@ -12,6 +12,8 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
   declare email: string;
   declare name: string;
   declare passwordHash: CreationOptional<string | null>;
+  /** When whoever set the password showed that they read this address; null when they only typed it. */
+  declare addressProvenAt: CreationOptional<Date | null>;
   declare createdAt: Date;
 }
 
@@ -22,6 +24,7 @@ export function initPerson(sequelize: Sequelize): void {
       email: DataTypes.TEXT,
       name: DataTypes.TEXT,
       passwordHash: DataTypes.TEXT,
+      addressProvenAt: DataTypes.DATE,
       createdAt: DataTypes.DATE,
     },
     { sequelize, tableName: "people" },

@@ -1,0 +1,60 @@
+import compression from "compression";
+import express, { type Express, Router } from "express";
+import { addArtwork } from "#shared/contracts/artworks.ts";
+import { saveMockup } from "#shared/contracts/mockups.ts";
+import { authentication } from "./auth/auth.ts";
+import { clientFiles } from "./http/client-files.ts";
+import type { Services } from "./http/context.ts";
+import { forgeryGuard } from "./http/forgery-guard.ts";
+import { limited } from "./http/limits.ts";
+import { answerProblems, noSuchAddress } from "./http/problems.ts";
+import { requestLog } from "./http/request-log.ts";
+import type { Registered } from "./http/route.ts";
+import { securityHeaders } from "./http/security-headers.ts";
+import { registerRoutes } from "./routes/index.ts";
+
+const smallBody = "256kb";
+/** A mockup of a few thousand pieces. */
+const mockupBody = "8mb";
+
+export type App = { readonly handler: Express; readonly registered: readonly Registered[] };
+
+/** The whole application as one request handler, and the list of its routes. */
+export function createApp(services: Services): App {
+  const { env, log } = services;
+  const app = express();
+  app.disable("x-powered-by");
+  app.set(
+    "trust proxy",
+    env.TRUST_PROXY.split(",").map((part) => part.trim()),
+  );
+  app.set("query parser", "simple");
+  app.use(requestLog(log));
+  app.use(securityHeaders(env));
+  app.use(compression());
+  app.use(["/api", "/auth"], forgeryGuard(env));
+
+  app.use("/auth", express.json({ limit: "16kb" }));
+  app.post("/auth/callback/password", limited("signIn", env), limited("account", env));
+  app.post("/auth/callback/link", limited("links", env));
+  app.use("/auth", authentication(services));
+
+  app.post("/api/register", limited("register", env));
+  app.post(["/api/links/inspect", "/api/invitations/accept", "/api/password/reset"], limited("links", env));
+  app.post(["/api/links/fresh", "/api/links/request", "/api/password/forgot"], limited("mails", env));
+  app.post("/api/account/password", limited("signIn", env));
+  app.get("/api/share/:token", limited("links", env));
+  app.post(addArtwork.path, limited("uploads", env));
+  app.put(saveMockup.path, express.json({ limit: mockupBody }));
+  app.use("/api", express.json({ limit: smallBody }));
+
+  const router = Router();
+  const registered: Registered[] = [];
+  registerRoutes({ router, services, registered });
+  app.use(router);
+  app.use("/api", noSuchAddress);
+  app.use(clientFiles(env));
+  app.use(noSuchAddress);
+  app.use(answerProblems);
+  return { handler: app, registered };
+}

@@ -1,0 +1,67 @@
+import { EventEmitter } from "node:events";
+import { Logger as QueueLogger, run, type TaskList, type WorkerEvents } from "graphile-worker";
+import pg from "pg";
+import type { Logger } from "pino";
+import { appDatabaseUrl } from "../env.ts";
+import type { Services } from "../http/context.ts";
+import { withoutSecrets } from "../http/without-secrets.ts";
+import { freeJobsOfTheDead } from "./free-jobs.ts";
+import type { JobName } from "./queue.ts";
+import { type Task, tasks } from "./tasks.ts";
+
+const concurrency = 2;
+
+export type RunningQueue = {
+  /** Takes no more jobs, finishes those it has, and lets go. */
+  readonly stop: () => Promise<void>;
+};
+
+/** Works on the queue inside this process, two jobs at a time. */
+export async function runQueue(services: Services): Promise<RunningQueue> {
+  const log = services.log.child({ part: "queue" });
+  const connectionString = appDatabaseUrl(services.env);
+  const pool = new pg.Pool({ connectionString, max: concurrency + 2 });
+  const lost = (error: Error): void => log.error({ err: error }, "The queue lost a connection");
+  pool.on("error", lost);
+  pool.on("connect", (client) => client.on("error", lost));
+  const events: WorkerEvents = new EventEmitter();
+  const presence = await freeJobsOfTheDead({ connectionString, events, log });
+  const runner = await run({
+    pgPool: pool,
+    concurrency,
+    noHandleSignals: true,
+    pollInterval: 2_000,
+    parsedCronItems: [],
+    taskList: taskListOf(services, log),
+    logger: new QueueLogger(
+      () => (level, message) => log[level === "warning" ? "warn" : level](withoutSecrets(message)),
+    ),
+    events,
+  });
+  events.on("job:error", ({ job, error }) => {
+    const fields = { err: error, task: job.task_identifier, attempt: job.attempts, of: job.max_attempts };
+    if (job.attempts >= job.max_attempts) log.error(fields, "A job failed for good");
+    else log.warn(fields, "A job failed and will be tried again");
+  });
+  return {
+    async stop() {
+      await runner.stop();
+      await presence.end();
+      await pool.end();
+    },
+  };
+}
+
+function taskListOf(services: Services, log: Logger): TaskList {
+  return Object.fromEntries(
+    Object.entries(tasks).map(([name, task]) => [
+      name,
+      async (payload: unknown) => {
+        const began = performance.now();
+        // The queue's payloads are only ever written by enqueue(), which checks them by type.
+        await (task as Task<JobName>)(services, payload as never);
+        log.info({ task: name, payload, ms: Math.round(performance.now() - began) }, "A job is done");
+      },
+    ]),
+  );
+}

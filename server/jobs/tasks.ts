@@ -1,0 +1,11 @@
+import type { Services } from "../http/context.ts";
+import type { JobName, JobPayloads } from "./queue.ts";
+
+/**
+ * Does one job. Running it again must change nothing more: a job that was cut off is run again. It throws when it
+ * should be tried later; what can't be mended by trying is written to the job's own row instead.
+ */
+export type Task<N extends JobName> = (services: Services, payload: JobPayloads[N]) => Promise<void>;
+
+/** Every job the queue knows. */
+export const tasks: { readonly [N in JobName]?: Task<N> } = {};
