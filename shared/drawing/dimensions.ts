@@ -1,7 +1,8 @@
 import type { Point } from "../geometry/path.ts";
-import type { Item } from "./display-list.ts";
+import { polygonRing } from "../geometry/shapes.ts";
+import type { Colour, Item } from "./display-list.ts";
 import { graphite, ink } from "./palette.ts";
-import { smallTextMm, textWidthMm } from "./type.ts";
+import { capHeightShare, smallTextMm, textWidthMm } from "./type.ts";
 
 /** Millimetres of the drawn plane that make one on paper: 5 at a scale of 1:5. Everything lettered or ruled is sized by it. */
 export type PaperScale = number;
@@ -43,25 +44,27 @@ export function dimensionFits(
   return Math.abs(to - from) >= (textWidthMm(text, dimensionFont, smallTextMm) + 1.6) * paperScale;
 }
 
+type DrawnDimension = { readonly lines: readonly Item[]; readonly lettering: readonly Item[] };
+
 /** One dimension with its extension lines, arrows and lettering (ISO 129-1: read from below and from the right, above the line). */
-export function drawDimension(dimension: Dimension, paperScale: PaperScale): Item[] {
-  const { axis, from, to, at, thing, text, overflow } = dimension;
+function layDimension(dimension: Dimension, paperScale: PaperScale, ground: Colour): DrawnDimension {
+  const { axis, from, to, at: across, thing, text, overflow } = dimension;
   const mm = (paper: number) => paper * paperScale;
   const place = (along: number, across: number): Point =>
     axis === "x" ? { x: along, y: across } : { x: across, y: along };
   const stroke = { colour: graphite, widthMm: mm(fineLineMm) };
   const line = (...points: Point[]): Item => ({ kind: "line", points, stroke });
-  const away = Math.sign(at - thing) || 1;
+  const away = Math.sign(across - thing) || 1;
   const extensions = [from, to].map((along) =>
-    line(place(along, thing + away * mm(extensionGapMm)), place(along, at + away * mm(extensionPastMm))),
+    line(place(along, thing + away * mm(extensionGapMm)), place(along, across + away * mm(extensionPastMm))),
   );
   const fits = dimensionFits(dimension, paperScale);
   const roomForArrows = Math.abs(to - from) >= mm(2 * arrowMm + 0.6);
   const arrow = (tip: number, direction: number) =>
     line(
-      place(tip - direction * mm(arrowMm), at - mm(arrowHalfMm)),
-      place(tip, at),
-      place(tip - direction * mm(arrowMm), at + mm(arrowHalfMm)),
+      place(tip - direction * mm(arrowMm), across - mm(arrowHalfMm)),
+      place(tip, across),
+      place(tip - direction * mm(arrowMm), across + mm(arrowHalfMm)),
     );
   const arrows = roomForArrows ? [arrow(from, -1), arrow(to, 1)] : [arrow(from, 1), arrow(to, -1)];
   const tail = roomForArrows ? 0 : mm(arrowMm + 1);
@@ -78,20 +81,48 @@ export function drawDimension(dimension: Dimension, paperScale: PaperScale): Ite
     under: [from - tail, to + tail],
   }[overflow];
   const under = !fits && overflow === "under";
-  const lift = under ? mm(textGapMm + smallTextMm * 0.743) : -mm(textGapMm);
-  return [
-    ...extensions,
-    line(place(ends[0] ?? from, at), place(ends[1] ?? to, at)),
-    ...arrows,
-    {
-      kind: "text",
-      text,
-      at: place(along, at + lift),
-      sizeMm: mm(smallTextMm),
-      font: dimensionFont,
-      colour: ink,
-      align: "middle",
-      ...(axis === "y" ? { turn: -90 } : {}),
-    },
-  ];
+  const lift = under ? mm(textGapMm + smallTextMm * capHeightShare) : -mm(textGapMm);
+  const at = place(along, across + lift);
+  const half = lettering / 2 + mm(0.5);
+  const [upper, lower] = [lift - mm(smallTextMm * capHeightShare + 0.25), lift + mm(0.25)];
+  return {
+    lines: [...extensions, line(place(ends[0] ?? from, across), place(ends[1] ?? to, across)), ...arrows],
+    lettering: [
+      {
+        kind: "path",
+        path: [
+          polygonRing([
+            place(along - half, across + upper),
+            place(along + half, across + upper),
+            place(along + half, across + lower),
+            place(along - half, across + lower),
+          ]),
+        ],
+        fill: ground,
+      },
+      {
+        kind: "text",
+        text,
+        at,
+        sizeMm: mm(smallTextMm),
+        font: dimensionFont,
+        colour: ink,
+        align: "middle",
+        ...(axis === "y" ? { turn: -90 } : {}),
+      },
+    ],
+  };
+}
+
+/**
+ * Dimensions of one view in a group that carries `id`. Where a line of one would run through the lettering of another, the line is
+ * broken: `ground` is the colour of the paper or wall behind.
+ */
+export function drawDimensions(
+  dimensions: readonly Dimension[],
+  { id, paperScale, ground }: { readonly id: string; readonly paperScale: PaperScale; readonly ground: Colour },
+): Item {
+  const laid = dimensions.map((dimension) => layDimension(dimension, paperScale, ground));
+  const items = [...laid.flatMap(({ lines }) => lines), ...laid.flatMap(({ lettering }) => lettering)];
+  return { kind: "group", id, x: 0, y: 0, scale: 1, items };
 }

@@ -4,8 +4,8 @@ import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
 import { formatLength } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
-import { type Dimension, dimensionFits, dimensionRowMm, drawDimension, type PaperScale } from "./dimensions.ts";
-import type { Item } from "./display-list.ts";
+import { type Dimension, dimensionFits, dimensionRowMm, drawDimensions, type PaperScale } from "./dimensions.ts";
+import type { Colour, Item } from "./display-list.ts";
 import { smallTextMm, textWidthMm } from "./type.ts";
 
 type DimensionInput = {
@@ -154,7 +154,12 @@ export function dimensionMargins(input: DimensionInput): { left: number; top: nu
 }
 
 /** Overall width above and height at the left; holes and the placing of the chief layers below and at the right. */
-export function drawElevationDimensions(input: DimensionInput): Item[] {
-  const dimensions = [...overallDimensions(input), ...rowsOf(input, "x"), ...rowsOf(input, "y")];
-  return dimensions.flatMap((dimension) => drawDimension(dimension, input.paperScale));
+export function drawElevationDimensions(input: DimensionInput & { readonly ground: Colour }): Item[] {
+  const { paperScale, ground } = input;
+  const views = [
+    { id: "dimension:overall", dimensions: overallDimensions(input) },
+    { id: "dimension:across", dimensions: rowsOf(input, "x") },
+    { id: "dimension:down", dimensions: rowsOf(input, "y") },
+  ];
+  return views.map(({ id, dimensions }) => drawDimensions(dimensions, { id, paperScale, ground }));
 }

@@ -9,7 +9,7 @@ import type { DisplayList, Item } from "./display-list.ts";
 import { dimensionMargins, drawElevationDimensions } from "./elevation-dimensions.ts";
 import { drawSolids, drawWallShadow } from "./elevation-pieces.ts";
 import { placedStandoffs } from "./hardware.ts";
-import { mixColours } from "./palette.ts";
+import { mixColours, sheetWhite } from "./palette.ts";
 import { woodGrain } from "./wood-grain.ts";
 
 export type ElevationInput = {
@@ -85,7 +85,9 @@ export function drawElevation(input: ElevationInput): DisplayList {
   const items = [
     ...ground,
     ...drawSolids(sign, { box, items: drawBoard(input, box) }),
-    ...(dimensions ? drawElevationDimensions(input) : []),
+    ...(dimensions
+      ? drawElevationDimensions({ ...input, ground: wall ? document.presentation.wall : sheetWhite })
+      : []),
   ];
   return {
     widthMm,

@@ -5,11 +5,11 @@ import type { Figures } from "../stack/figures.ts";
 import { formatLength } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { drawBalloon, drawLeader } from "./balloon.ts";
-import { dimensionRowMm, drawDimension, fineLineMm, outlineMm, type PaperScale } from "./dimensions.ts";
+import { dimensionRowMm, drawDimensions, fineLineMm, outlineMm, type PaperScale } from "./dimensions.ts";
 import type { DisplayList, Item } from "./display-list.ts";
 import { boardPlaneId } from "./elevation.ts";
 import { type PlacedStandoff, placedStandoffs } from "./hardware.ts";
-import { graphite, ink, mixColours } from "./palette.ts";
+import { graphite, ink, mixColours, sheetWhite } from "./palette.ts";
 import { capHeightShare, smallTextMm, textWidthMm } from "./type.ts";
 
 export type SectionInput = {
@@ -257,7 +257,7 @@ export function drawSection(input: SectionInput): DisplayList {
     ...metal.barrels,
     ...bodies,
     ...metal.caps,
-    ...dimensions.flatMap((dimension) => drawDimension(dimension, paperScale)),
+    drawDimensions(dimensions, { id: "dimension:depth", paperScale, ground: sheetWhite }),
     ...keys,
     heading,
   ];

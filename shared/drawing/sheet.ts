@@ -4,7 +4,7 @@ import type { Box } from "../geometry/path.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import type { FrozenNote, TitleBlock } from "../mockup/snapshot.ts";
 import type { Figures } from "../stack/figures.ts";
-import { formatSize } from "../units/format-length.ts";
+import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { paperOf } from "../units/paper.ts";
 import { frameOf } from "../units/zones.ts";
@@ -65,6 +65,12 @@ const inner = (box: Box): Box => ({
 });
 
 type Schedule = { readonly items: readonly Item[]; readonly heightMm: number; readonly rest: readonly ScheduleRow[] };
+
+/** The board's size for a narrow cell: it may break behind the cross only. */
+function sizeText({ board }: MockupDocument, unit: LengthUnit): string {
+  const [width, height] = [formatLength(board.width, unit), formatLengthWithUnit(board.height, unit)];
+  return [`${width} ×`, height].map((part) => part.replaceAll(" ", "\u00a0")).join(" ");
+}
 
 /** Heading, table and, under the last row, everything together; as much as fits into a height. */
 function layScheduleBlock(
@@ -129,7 +135,7 @@ export function drawSheets(input: SheetsInput): DrawingSheet[] {
   const block = {
     titleBlock,
     scale: "1:1000",
-    size: formatSize(document.board.width, document.board.height, input.unit),
+    size: sizeText(document, input.unit),
     paper,
     sheet: 10,
     sheets: 10,

@@ -44,14 +44,14 @@ function breakWord(word: string, fits: (text: string) => boolean): string[] {
   return [...parts, part];
 }
 
-/** Breaks text at spaces into lines no wider than `widthMm`; a newline starts a new line, an overlong word is cut. Empty text gives no lines. */
+/** Breaks text at spaces (not at no-break ones) into lines no wider than `widthMm`; a newline starts a new line, an overlong word is cut. Empty text gives no lines. */
 export function wrapText(text: string, font: Font, sizeMm: number, widthMm: number): string[] {
   const fits = (line: string) => textWidthMm(line, font, sizeMm) <= widthMm;
   const lines: string[] = [];
   if (text.trim() === "") return lines;
   for (const paragraph of text.split("\n")) {
     let line = "";
-    for (const word of paragraph.split(/\s+/).flatMap((each) => (fits(each) ? [each] : breakWord(each, fits)))) {
+    for (const word of paragraph.split(/[ \t\r]+/).flatMap((each) => (fits(each) ? [each] : breakWord(each, fits)))) {
       const longer = line === "" ? word : `${line} ${word}`;
       if (line !== "" && !fits(longer)) {
         lines.push(line);
