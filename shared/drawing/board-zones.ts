@@ -1,48 +1,47 @@
 import type { Point } from "../geometry/path.ts";
 import { columnFields, rowFields, type ZoneField, zoneOf } from "../units/zones.ts";
 import type { DrawingSheet, Item } from "./display-list.ts";
+import { boardPlaneId } from "./elevation.ts";
 
+/** How the board's plane lies on a sheet: paper mm = origin + board mm · scale. */
 type Plane = { readonly x: number; readonly y: number; readonly scale: number };
 
-/** Where the named plane lies on the paper: the first group of that id, however deep. */
-function planeOf(items: readonly Item[], id: string, outer: Plane): Plane | null {
+/** The first board plane among the items, which is the front elevation's; null on a sheet without one. */
+function boardPlane(items: readonly Item[], at: Plane = { x: 0, y: 0, scale: 1 }): Plane | null {
   for (const item of items) {
     if (item.kind === "clip") {
-      const found = planeOf(item.items, id, outer);
-      if (found) return found;
+      const inside = boardPlane(item.items, at);
+      if (inside) return inside;
     }
     if (item.kind !== "group") continue;
-    const plane = {
-      x: outer.x + item.x * outer.scale,
-      y: outer.y + item.y * outer.scale,
-      scale: outer.scale * item.scale,
-    };
-    const found = item.id === id ? plane : planeOf(item.items, id, plane);
-    if (found) return found;
+    const plane = { x: at.x + item.x * at.scale, y: at.y + item.y * at.scale, scale: at.scale * item.scale };
+    if (item.id === boardPlaneId) return plane;
+    const inside = boardPlane(item.items, plane);
+    if (inside) return inside;
   }
   return null;
 }
 
-const onPaper = (sheet: DrawingSheet, planeId: string) => planeOf(sheet.items, planeId, { x: 0, y: 0, scale: 1 });
-
-/** The sheet's zones in mm of the board that `planeId` names; null for a sheet that doesn't show it. */
-export function boardZones(
-  sheet: DrawingSheet,
-  planeId: string,
-): { readonly columns: ZoneField[]; readonly rows: ZoneField[] } | null {
-  const plane = onPaper(sheet, planeId);
-  if (plane === null) return null;
-  const along = (fields: readonly ZoneField[], origin: number) =>
-    fields.map(({ label, fromMm, toMm }) => ({
-      label,
-      fromMm: (fromMm - origin) / plane.scale,
-      toMm: (toMm - origin) / plane.scale,
-    }));
-  return { columns: along(columnFields(sheet), plane.x), rows: along(rowFields(sheet), plane.y) };
+/** The zone (ISO 5457) of a point of the board on the sheet that shows it, as "B3"; null when the sheet does not show the board there. */
+export function zoneOfBoardPoint(sheet: DrawingSheet, point: Point): string | null {
+  const plane = boardPlane(sheet.items);
+  return plane ? zoneOf({ x: plane.x + point.x * plane.scale, y: plane.y + point.y * plane.scale }, sheet) : null;
 }
 
-/** The zone of a spot of the board (mm) on its sheet, as "B3"; null when the sheet doesn't show the board or the spot is off it. */
-export function zoneOnBoard(sheet: DrawingSheet, planeId: string, spot: Point): string | null {
-  const plane = onPaper(sheet, planeId);
-  return plane && zoneOf({ x: plane.x + spot.x * plane.scale, y: plane.y + spot.y * plane.scale }, sheet);
+/** The sheet's zone fields in mm of the board, for a frame around the same picture elsewhere. */
+export function zonesOnBoard(sheet: DrawingSheet): { columns: ZoneField[]; rows: ZoneField[] } {
+  const plane = boardPlane(sheet.items);
+  if (!plane) return { columns: [], rows: [] };
+  const onBoard = (from: number) => (field: ZoneField) => ({
+    label: field.label,
+    fromMm: (field.fromMm - from) / plane.scale,
+    toMm: (field.toMm - from) / plane.scale,
+  });
+  return { columns: columnFields(sheet).map(onBoard(plane.x)), rows: rowFields(sheet).map(onBoard(plane.y)) };
+}
+
+/** Millimetres of the sign that make one on this sheet: 5 at 1:5. 1 when the sheet shows no board. */
+export function paperScaleOfSheet(sheet: DrawingSheet): number {
+  const plane = boardPlane(sheet.items);
+  return plane ? 1 / plane.scale : 1;
 }
