@@ -54,7 +54,7 @@ async function importInWorker(bytes: Uint8Array, options: ImportOptions): Promis
   const { worker, files } = idle ?? { worker: await startedWorker(), files: 0 };
   idle = undefined;
   const answer = await askWorker(worker, bytes, options.timeMs ?? artworkLimits.timeMs);
-  if (answer.kind === "outcome" && files + 1 < filesPerWorker) idle = { worker, files: files + 1 };
+  if (answer.kind === "outcome" && !answer.spent && files + 1 < filesPerWorker) idle = { worker, files: files + 1 };
   else await worker.terminate();
   if (answer.kind === "outcome") return answer.outcome;
   if (answer.kind === "late") return refused("import.too-slow");

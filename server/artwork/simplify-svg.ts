@@ -7,11 +7,15 @@ import type { WarningCode } from "#shared/artwork/warnings.ts";
 import { artworkFontFamily, loadArtworkFonts } from "./artwork-fonts.ts";
 
 let ready: Promise<void> | undefined;
+let broken = false;
+
+/** Whether the reader met a file that broke it: its memory can't be trusted any more, so its worker must end. */
+export const isReaderBroken = (): boolean => broken;
 
 /**
  * A guarded drawing as resvg's simplified SVG: groups, paths and their clips, masks and gradients, with text as outlines in
- * the shipped font. The WebAssembly build sees no files. Throws ArtworkRefused when the reader refuses the drawing; after a
- * WebAssembly.RuntimeError the reader is broken and the worker that holds it must go.
+ * the shipped font. The WebAssembly build sees no files. Throws ArtworkRefused when the reader refuses the drawing or
+ * breaks on it.
  */
 export async function simplifySvg(
   guarded: GuardedSvg,
@@ -36,9 +40,8 @@ export async function simplifySvg(
 
 function runReader(svg: string, fontBuffers: Uint8Array[]): string {
   const family = artworkFontFamily;
-  let reader: InstanceType<typeof Resvg> | undefined;
   try {
-    reader = new Resvg(svg, {
+    const reader = new Resvg(svg, {
       font: {
         fontBuffers,
         defaultFontFamily: family,
@@ -49,12 +52,13 @@ function runReader(svg: string, fontBuffers: Uint8Array[]): string {
         monospaceFamily: family,
       },
     });
-    return reader.toString();
+    const simplified = reader.toString();
+    reader.free();
+    return simplified;
   } catch (error) {
-    if (error instanceof WebAssembly.RuntimeError) throw error;
+    // A panic: what the reader holds can't even be freed.
+    if (error instanceof WebAssembly.RuntimeError) broken = true;
     throw new ArtworkRefused(refusalFor(error));
-  } finally {
-    reader?.free();
   }
 }
 

@@ -43,6 +43,9 @@ const dropped: Readonly<Record<string, WarningCode | null>> = {
   desc: null,
 };
 
+/** Attributes that hold numbers: a program that failed to work one out writes it as a word. */
+const measures = new Set("d points x y x1 y1 x2 y2 cx cy r rx ry width height transform".split(" "));
+
 /**
  * Reads an untrusted SVG text and writes it anew with what is safe to pass on.
  * Throws ArtworkRefused with svg.broken, svg.not-svg, svg.entities, svg.too-many-elements or svg.too-deep.
@@ -173,6 +176,7 @@ function keptAttributes(
     if (name === "style" || name === "fill" || name === "stroke" || name === "color") noteCss(value, warnings);
     if (name === "vector-effect" && value.trim() === "non-scaling-stroke") warnings.add("css.vector-effect");
     if (name === "transform-origin" && element !== "svg") warnings.add("css.transform-origin");
+    if (measures.has(name) && /NaN|Infinity|undefined|null/.test(value)) warnings.add("number.unreadable");
     const safe = withoutOutsideUrls(value);
     if (safe.found) warnings.add("reference.outside");
     kept.set(name, safe.text);

@@ -16,7 +16,8 @@ const refusalTexts = {
   "svg.not-svg": "The file is XML but not an SVG drawing. Export the logo as SVG and bring that one in.",
   "svg.entities":
     "The file builds its contents from entities, which we don't expand. Save it as plain SVG and try again.",
-  "svg.too-many-elements": "The file holds more than 100,000 elements. Simplify the drawing and export it again.",
+  "svg.too-many-elements":
+    "The file holds more than 100,000 elements, or repeats its symbols without an end. Simplify the drawing and export it again.",
   "svg.too-deep": "The file nests its groups more than 200 deep. Ungroup the drawing and export it again.",
   "svg.no-size":
     "The drawing's width or height is zero, so nothing of it shows. Set its page to the logo's size and export it again.",

@@ -26,6 +26,7 @@ const warningTexts = {
   "blend.ignored": "A blend mode was ignored: colours show as if painted plainly.",
   "frame.cut": "Parts of the drawing that lie outside its page were cut off, as a viewer would.",
   "shape.too-far": "A shape that reaches far outside the drawing was left out.",
+  "number.unreadable": "Some shapes hold numbers that can't be read, such as NaN, and were left out.",
   "css.var": "The file uses CSS variables, which we don't read: check the colours.",
   "css.media": "The file changes with the screen it is shown on (@media). The pieces show it without that.",
   "css.important": "The file uses !important in its styles, which we don't read: check the colours.",
