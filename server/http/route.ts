@@ -15,7 +15,9 @@ type Parsed<E extends Endpoint> = {
   query: z.output<E["query"]>;
   body: z.output<E["body"]>;
 };
-type Answer<E extends Endpoint> = E extends { form: "file" } ? FileAnswer : z.input<E["result"]> | FileAnswer;
+/** An endpoint whose result is nothing answers nothing, or a file. */
+type Answer<E extends Endpoint> =
+  undefined extends z.input<E["result"]> ? undefined | FileAnswer : z.input<E["result"]>;
 
 /** Who may reach the handler at all: anyone, someone signed in, or someone with a place in the shop of the address. */
 export type Reach = "anyone" | "signed in" | "insiders";

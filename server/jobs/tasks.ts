@@ -1,5 +1,8 @@
 import type { Services } from "../http/context.ts";
+import { importArtwork } from "./import-artwork.ts";
+import { makeCertificate } from "./make-certificate.ts";
 import type { JobName, JobPayloads } from "./queue.ts";
+import { renderProofOfRevision } from "./render-proof.ts";
 
 /**
  * Does one job. Running it again must change nothing more: a job that was cut off is run again. It throws when it
@@ -8,4 +11,8 @@ import type { JobName, JobPayloads } from "./queue.ts";
 export type Task<N extends JobName> = (services: Services, payload: JobPayloads[N]) => Promise<void>;
 
 /** Every job the queue knows. */
-export const tasks: { readonly [N in JobName]?: Task<N> } = {};
+export const tasks: { readonly [N in JobName]?: Task<N> } = {
+  "import-artwork": importArtwork,
+  "render-proof": renderProofOfRevision,
+  "make-certificate": makeCertificate,
+};

@@ -72,7 +72,7 @@ export const sheetSchema = z.strictObject({
       heldBy: z.string(),
       offset: z.string(),
       topAt: z.string(),
-      pieces: z.number().int(),
+      pieces: z.string(),
       mass: z.string(),
     }),
   ),
@@ -81,12 +81,9 @@ export const sheetSchema = z.strictObject({
   pieces: z.array(
     z.strictObject({ id: z.string(), name: z.string(), layerKey: z.string(), x: z.number(), y: z.number() }),
   ),
-  /** The zones of the printed sheet in mm of the board, so that the screen's frame says the same addresses as the paper's. */
-  zones: z
-    .strictObject({ columns: z.array(zoneField), rows: z.array(zoneField) })
-    .nullable()
-    .optional(),
   figures: z.strictObject({ massG: z.number(), depthMm: z.number(), offWallMm: z.number() }),
+  /** The zones of the paper sheet in mm of the board, so that the screen's frame says the same as the PDF. */
+  zones: z.strictObject({ columns: z.array(zoneField), rows: z.array(zoneField) }),
   words: z.string(),
   acknowledgements: z.array(z.strictObject({ id: z.string(), text: z.string() })),
   others: z.array(z.strictObject({ revisionId: z.uuid(), letter: z.string(), state: revisionState })),

@@ -1,4 +1,3 @@
-import { z } from "zod";
 import type { DisplayList, DrawingSheet } from "../drawing/display-list.ts";
 import type { Finding } from "../dry-fit/finding.ts";
 import type { Figures } from "../stack/figures.ts";
@@ -46,12 +45,11 @@ export type Snapshot = {
     /** Front elevation with dimensions, 1:1 in mm of the sign. */
     readonly elevation: DisplayList;
     readonly section: DisplayList;
+    /** The sign alone on its wall, without dimensions: for lists and the portfolio. */
+    readonly picture: DisplayList;
     readonly sheets: readonly DrawingSheet[];
   };
   /** SHA-256 of each artwork used, by artwork id. */
   readonly artworkHashes: Readonly<Record<string, string>>;
   readonly fontHashes: Readonly<Record<string, string>>;
 };
-
-/** What of a snapshot a reader needs to trust before showing it: the rest was made by us. */
-export const snapshotHead = z.object({ engineVersion: z.string() });

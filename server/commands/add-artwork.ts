@@ -1,0 +1,39 @@
+import { newId } from "../db/new-id.ts";
+import { notAllowed } from "../http/app-error.ts";
+import type { Context } from "../http/context.ts";
+import type { ReceivedFile } from "../http/uploads.ts";
+import { enqueue } from "../jobs/queue.ts";
+import { Artwork } from "../models/artwork.ts";
+import { isStaff } from "../policies/actor.ts";
+import { artworkPolicy } from "../policies/artwork.ts";
+import { findJob } from "../queries/find-job.ts";
+import { logEvent } from "./log-event.ts";
+import { storeReceivedFile } from "./store-file.ts";
+
+/** Keeps an SVG as it came and sets the queue to turn it into pieces. The caller has looked at its content. */
+export async function addArtwork(
+  context: Context,
+  { jobId, file }: { jobId: string; file: ReceivedFile },
+): Promise<Artwork> {
+  const { transaction, actor, now } = context;
+  const { job, facts } = await findJob(context, jobId, { lock: true });
+  if (!isStaff(actor) || !artworkPolicy.change(actor, facts))
+    throw notAllowed("Artwork is brought in by owners and makers.");
+  const stored = await storeReceivedFile(context, { shopId: job.shopId, file, mediaType: "image/svg+xml" });
+  const artwork = await Artwork.create(
+    {
+      id: newId(),
+      shopId: job.shopId,
+      jobId,
+      fileId: stored.id,
+      name: file.originalName,
+      state: "importing",
+      addedBy: actor.personId,
+      addedAt: now,
+    },
+    { transaction },
+  );
+  await enqueue(transaction, "import-artwork", { artworkId: artwork.id });
+  await logEvent(context, { shopId: job.shopId, jobId, kind: "artwork added", data: { name: artwork.name } });
+  return artwork;
+}

@@ -1,0 +1,31 @@
+import type { Services } from "../http/context.ts";
+import { Job } from "../models/job.ts";
+import { Revision } from "../models/revision.ts";
+import { logSystemEvent } from "./log-event.ts";
+import { refreshJob } from "./refresh-job.ts";
+
+/** The PDF could not be drawn: the revision is a draft again, with the reason, and what was out stays out. */
+export async function failIssue(
+  services: Services,
+  { revisionId, reason }: { revisionId: string; reason: string },
+): Promise<void> {
+  await services.sequelize.transaction(async (transaction) => {
+    const context = { transaction, now: new Date() };
+    const known = await Revision.findByPk(revisionId, {
+      attributes: ["id", "jobId"],
+      transaction,
+      rejectOnEmpty: true,
+    });
+    const job = await Job.findByPk(known.jobId, { transaction, lock: true, rejectOnEmpty: true });
+    const revision = await Revision.findOne({ where: { id: revisionId, state: "preparing" }, transaction });
+    if (!revision) return;
+    await revision.update({ state: "draft", failure: reason }, { transaction });
+    await logSystemEvent(context, {
+      shopId: job.shopId,
+      jobId: job.id,
+      kind: "revision failed",
+      data: { letter: revision.letter, reason },
+    });
+    await refreshJob(context, job);
+  });
+}

@@ -1,0 +1,128 @@
+import { buildSnapshot } from "#shared/drawing/build-snapshot.ts";
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
+import { canIssue } from "#shared/lifecycle/job-states.ts";
+import { letterToIssue } from "#shared/lifecycle/revision-row.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Snapshot } from "#shared/mockup/snapshot.ts";
+import { readDocument } from "#shared/mockup/upgrade.ts";
+import { loadKernel } from "../artwork/load-kernel.ts";
+import { newId } from "../db/new-id.ts";
+import { canonicalJson } from "../files/canonical-json.ts";
+import { sha256Hex } from "../files/sha256.ts";
+import { AppError, notAllowed, stale, wrongState } from "../http/app-error.ts";
+import type { Context } from "../http/context.ts";
+import { enqueue } from "../jobs/queue.ts";
+import { Revision } from "../models/revision.ts";
+import { Shop } from "../models/shop.ts";
+import { fontHashes } from "../pdf/font-hashes.ts";
+import { isStaff, type Staff } from "../policies/actor.ts";
+import { revisionPolicy } from "../policies/revision.ts";
+import { presentMockup } from "../presenters/mockup.ts";
+import { artworkHashes } from "../queries/artwork-hashes.ts";
+import { dryFitContext } from "../queries/dry-fit-context.ts";
+import { findJob } from "../queries/find-job.ts";
+import { findMockup } from "../queries/find-mockup.ts";
+import { notesToFreeze } from "../queries/list-notes.ts";
+import type { LoadedJob } from "../queries/load-jobs.ts";
+import { logEvent } from "./log-event.ts";
+import { refreshJob } from "./refresh-job.ts";
+
+/**
+ * Freezes the saved draft of that very version as the next letter and sets the queue to draw its PDF.
+ * Refuses when the draft has moved on, when the dry fit has stops, and while another revision is being prepared.
+ */
+export async function issueRevision(
+  context: Context,
+  { jobId, mockupVersion, message }: { jobId: string; mockupVersion: number; message: string },
+): Promise<{ loaded: LoadedJob; revision: Revision }> {
+  const { actor, transaction, now } = context;
+  const loaded = await findJob(context, jobId, { lock: true });
+  const { job, facts, revisions } = loaded;
+  if (!isStaff(actor) || !revisionPolicy.issue(actor, facts))
+    throw notAllowed("Revisions are issued by owners and makers.");
+  if (!canIssue(job.state, revisions)) {
+    const preparing = revisions.find(({ state }) => state === "preparing");
+    throw wrongState(
+      preparing
+        ? `${preparing.letter} is still being drawn. Wait for it.`
+        : `A job that is “${job.state}” takes no new revision.`,
+    );
+  }
+  const mockup = await findMockup(context, { shopId: job.shopId, jobId });
+  if (!mockup) throw wrongState("There is no mockup yet. Draw it first.");
+  if (mockup.version !== mockupVersion) {
+    throw stale(
+      "The mockup was saved again since. Look at it once more before you issue it.",
+      presentMockup(actor, loaded, mockup),
+    );
+  }
+  const letter = letterToIssue(revisions);
+  const document = savedDocument(mockup.document);
+  const snapshot = await freeze(context, { loaded, actor, document, letter });
+  const text = canonicalJson(snapshot);
+  const frozen = {
+    state: "preparing",
+    message,
+    snapshot: text,
+    snapshotSha256: sha256Hex(Buffer.from(text)),
+    issuedBy: actor.personId,
+    requestedAt: now,
+    failure: null,
+  } as const;
+  const draft = await Revision.findOne({ where: { jobId, shopId: job.shopId, state: "draft" }, transaction });
+  const revision = draft
+    ? await draft.update(frozen, { transaction })
+    : await Revision.create(
+        { id: newId(), shopId: job.shopId, jobId, letter, sequence: revisions.length + 1, ...frozen },
+        { transaction },
+      );
+  await enqueue(transaction, "render-proof", { revisionId: revision.id });
+  await logEvent(context, { shopId: job.shopId, jobId, kind: "revision preparing", data: { letter } });
+  return { loaded: await refreshJob(context, job), revision };
+}
+
+function savedDocument(text: string): MockupDocument {
+  const read = readDocument(JSON.parse(text));
+  if (!read.ok) throw new Error(`A saved mockup can't be read: ${read.reason}`);
+  return read.document;
+}
+
+async function freeze(
+  context: Context,
+  { loaded, actor, document, letter }: { loaded: LoadedJob; actor: Staff; document: MockupDocument; letter: string },
+): Promise<Snapshot> {
+  const { job, client } = loaded;
+  const shop = await Shop.findByPk(job.shopId, { transaction: context.transaction, rejectOnEmpty: true });
+  if (document.layers.every(({ pieces }) => pieces.length === 0))
+    throw wrongState("The mockup has no pieces yet. Bring in artwork first.");
+  const snapshot = buildSnapshot({
+    titleBlock: {
+      owner: shop.name,
+      client: client.name,
+      title: job.title,
+      number: job.number,
+      revision: letter,
+      date: context.now.toISOString().slice(0, 10),
+      createdBy: actor.name,
+      documentType: "Proof drawing",
+      unit: shop.unit,
+    },
+    document,
+    notes: await notesToFreeze(context, job.id),
+    words: job.brief.words,
+    limits: defaultLimits,
+    dryFit: await dryFitContext(context, { shop, place: job.brief.place ?? "inside" }),
+    paper: shop.paper,
+    artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
+    fontHashes: fontHashes(),
+    kernel: await loadKernel(),
+  });
+  const stops = snapshot.findings.filter(({ severity }) => severity === "stop");
+  if (stops.length > 0) {
+    throw new AppError("dry_fit_stops", {
+      detail: `${stops.length === 1 ? "One stop keeps" : `${stops.length} stops keep`} this from being issued: ${stops[0]?.text ?? ""}`,
+      extra: { findings: stops },
+    });
+  }
+  return snapshot;
+}

@@ -1,0 +1,35 @@
+import { importSvg } from "../artwork/import-svg.ts";
+import { logSystemEvent } from "../commands/log-event.ts";
+import type { Services } from "../http/context.ts";
+import { Artwork } from "../models/artwork.ts";
+
+/**
+ * Turns a kept SVG into pieces, or writes down why it can't be. An artwork that is no longer importing was done before.
+ * A file whose worker broke is refused like any other: trying again would break it again.
+ */
+export async function importArtwork(services: Services, { artworkId }: { artworkId: string }): Promise<void> {
+  const artwork = await Artwork.findOne({ where: { id: artworkId, state: "importing" }, include: ["file"] });
+  if (!artwork?.file) return;
+  const bytes = await services.storage.read(artwork.file.storageKey);
+  const outcome = await importSvg(bytes, {
+    onFault: (message) => services.log.error({ artworkId, fault: message }, "The artwork import broke"),
+  });
+  await services.sequelize.transaction(async (transaction) => {
+    const row = await Artwork.findOne({ where: { id: artworkId, state: "importing" }, transaction, lock: true });
+    if (!row) return;
+    const context = { transaction, now: new Date() };
+    const of = { shopId: row.shopId, jobId: row.jobId };
+    if (outcome.ok) {
+      const { pieces, ...summary } = outcome.artwork;
+      await row.update({ state: "ready", summary, pieces: JSON.stringify(pieces) }, { transaction });
+      await logSystemEvent(context, { ...of, kind: "artwork ready", data: { name: row.name, pieces: pieces.length } });
+    } else {
+      await row.update({ state: "refused", refusal: outcome.refusal }, { transaction });
+      await logSystemEvent(context, {
+        ...of,
+        kind: "artwork refused",
+        data: { name: row.name, reason: outcome.refusal.text },
+      });
+    }
+  });
+}

@@ -1,0 +1,5 @@
+import { type Actor, isStaff } from "./actor.ts";
+
+export const stockPolicy = {
+  see: (actor: Actor): boolean => isStaff(actor),
+};

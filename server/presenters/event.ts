@@ -1,0 +1,63 @@
+import type { z } from "zod";
+import type { eventSchema } from "#shared/contracts/jobs.ts";
+import type { Event, EventFacts, EventKind } from "../models/event.ts";
+
+/** What happened, in words. One line a kind, so that none is forgotten. */
+const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
+  "shop opened": ({ name }) => `Opened the shop ${name}`,
+  "member invited": ({ email, role }) => `Invited ${email} as ${role}`,
+  "invitation taken back": ({ email }) => `Took back the invitation to ${email}`,
+  "member joined": ({ role }) => `Joined as ${role}`,
+  "member removed": ({ name }) => `Removed ${name} from the team`,
+  "role changed": ({ name, from, to }) => `Changed ${name} from ${from} to ${to}`,
+  "shop changed": ({ fields }) => `Changed the shop's ${fields.join(", ")}`,
+  "client added": ({ name }) => `Added the client ${name}`,
+  "client changed": ({ name }) => `Changed the client ${name}`,
+  "contact added": ({ name, email }) => `Added the contact ${name}, ${email}`,
+  "contact changed": ({ name }) => `Changed the contact ${name}`,
+  "contact address changed": ({ name, from, to }) => `Changed the address of ${name} from ${from} to ${to}`,
+  "contact removed": ({ name }) => `Removed the contact ${name}`,
+  "contact sent a link": ({ name }) => `Sent ${name} a link`,
+  "job opened": ({ title }) => `Opened the job ${title}`,
+  "job changed": ({ fields }) => `Changed ${fields.join(", ")}`,
+  "job moved": ({ from, to, reason }) => `Moved the job from ${from} to ${to}${reason ? `: ${reason}` : ""}`,
+  "consent given": () => "Agreed that the piece may be shown in the portfolio",
+  "consent taken back": () => "Took back the consent to show the piece",
+  "artwork added": ({ name }) => `Brought in the artwork ${name}`,
+  "artwork ready": ({ name, pieces }) => `${name} became ${pieces} ${pieces === 1 ? "piece" : "pieces"}`,
+  "artwork refused": ({ name, reason }) => `${name} could not be taken: ${reason}`,
+  "artwork removed": ({ name }) => `Took the artwork ${name} off the job`,
+  "mockup begun": () => "Began the mockup",
+  "revision preparing": ({ letter }) => `Sent revision ${letter} to be drawn`,
+  "revision issued": ({ letter }) => `Revision ${letter} is out`,
+  "revision failed": ({ letter, reason }) => `The PDF of revision ${letter} failed: ${reason}`,
+  "revision withdrawn": ({ letter, reason }) => `Withdrew revision ${letter}: ${reason}`,
+  "revision opened": ({ letter }) => `Opened revision ${letter}`,
+  "revision asked": ({ letter, summary }) => `Asked for a revision of ${letter}${summary ? `: ${summary}` : ""}`,
+  "revision approved": ({ letter, typedName }) => `Approved revision ${letter}, signed ${typedName}`,
+  "certificate made": ({ letter }) => `The certificate of revision ${letter} is ready`,
+  "note added": ({ number, letter }) => `Left note ${number} on revision ${letter}`,
+  "note answered": ({ number }) => `Answered note ${number}`,
+  "note settled": ({ number }) => `Settled note ${number}`,
+  "note opened again": ({ number }) => `Opened note ${number} again`,
+  "share link made": ({ label }) => `Made the portfolio link ${label}`,
+  "share link revoked": ({ label }) => `Closed the portfolio link ${label}`,
+  "share link opened": ({ label }) => `Opened the portfolio link ${label}`,
+  "mail sent": ({ kind, to }) => `Mail went to ${to}: ${kind}`,
+  "mail refused": ({ kind, to, reason }) => `Mail to ${to} was refused (${kind}): ${reason}`,
+  "signed in": ({ by }) => `Signed in by ${by}`,
+};
+
+export function eventText<K extends EventKind>(kind: K, data: EventFacts[K]): string {
+  return words[kind](data);
+}
+
+export function presentEvent(event: Event): z.input<typeof eventSchema> {
+  return {
+    id: String(event.id),
+    at: event.at.toISOString(),
+    who: event.who,
+    kind: event.kind,
+    text: eventText(event.kind, event.data as EventFacts[typeof event.kind]),
+  };
+}

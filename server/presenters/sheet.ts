@@ -1,0 +1,62 @@
+import type { Revision as RevisionView, SheetView } from "#shared/contracts/revisions.ts";
+import { zonesOnBoard } from "#shared/drawing/board-zones.ts";
+import { scheduleRows } from "#shared/drawing/schedule.ts";
+import { visibleToClient } from "#shared/lifecycle/revision-states.ts";
+import { acknowledgementsOf } from "#shared/mockup/acknowledgements.ts";
+import type { Snapshot } from "#shared/mockup/snapshot.ts";
+import { type Actor, isStaff } from "../policies/actor.ts";
+import { isApprover } from "../policies/revision.ts";
+import { revisionFacts } from "../queries/find-revision.ts";
+import type { LoadedJob } from "../queries/load-jobs.ts";
+
+/** A revision as a drawing sheet. Everything drawn or computed comes from the frozen snapshot, nothing is worked out anew. */
+export function presentSheet(
+  actor: Actor,
+  {
+    loaded,
+    revision,
+    snapshot,
+    readerName,
+  }: { loaded: LoadedJob; revision: RevisionView; snapshot: Snapshot; readerName: string },
+): SheetView {
+  const { job, client, revisions } = loaded;
+  const { document, figures, titleBlock, drawing } = snapshot;
+  const first = drawing.sheets[0];
+  const names = new Map(
+    document.layers.flatMap(({ key, pieces }) => pieces.map(({ id, name }) => [id, { key, name }] as const)),
+  );
+  return {
+    revision,
+    job: {
+      id: job.id,
+      number: job.number,
+      title: titleBlock.title,
+      client: client.name,
+      shopName: titleBlock.owner,
+      unit: titleBlock.unit,
+    },
+    reader: {
+      name: readerName,
+      side: isStaff(actor) ? "shop" : "client",
+      approver: isApprover(actor, revisionFacts(loaded, { state: revision.state })),
+    },
+    elevation: drawing.elevation,
+    section: drawing.section,
+    schedule: scheduleRows(document, figures, titleBlock.unit),
+    board: { widthMm: document.board.width, heightMm: document.board.height },
+    zones: first ? zonesOnBoard(first) : { columns: [], rows: [] },
+    pieces: figures.pieces.map(({ pieceId, layerKey, centroid }) => ({
+      id: pieceId,
+      name: names.get(pieceId)?.name ?? "",
+      layerKey,
+      x: centroid.x,
+      y: centroid.y,
+    })),
+    figures: { massG: figures.massG, depthMm: figures.depth.nominal, offWallMm: figures.offWall.nominal },
+    words: snapshot.words,
+    acknowledgements: acknowledgementsOf({ document, figures, words: snapshot.words, unit: titleBlock.unit }),
+    others: revisions
+      .filter(({ id, state }) => id !== revision.id && (isStaff(actor) || visibleToClient(state)))
+      .map(({ id, letter, state }) => ({ revisionId: id, letter, state })),
+  };
+}

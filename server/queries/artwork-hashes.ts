@@ -1,0 +1,21 @@
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { ReadContext } from "../http/context.ts";
+import { Artwork } from "../models/artwork.ts";
+
+/** SHA-256 of the file of each artwork that the document draws from, by artwork id. */
+export async function artworkHashes(
+  { transaction }: ReadContext,
+  { shopId, document }: { shopId: string; document: MockupDocument },
+): Promise<Record<string, string>> {
+  const used = document.layers.flatMap(({ pieces }) =>
+    pieces.flatMap(({ source }) => (source.kind === "artwork" ? [source.artworkId] : [])),
+  );
+  const artworks = await Artwork.findAll({
+    where: { id: [...new Set(used)], shopId },
+    attributes: ["id"],
+    include: ["file"],
+    order: ["id"],
+    transaction,
+  });
+  return Object.fromEntries(artworks.flatMap(({ id, file }) => (file ? [[id, file.sha256]] : [])));
+}
