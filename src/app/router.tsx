@@ -1,6 +1,8 @@
+import type { ComponentType } from "react";
 import { createBrowserRouter, Outlet, ScrollRestoration } from "react-router-dom";
 import { ErrorScreen } from "./error-screen.tsx";
 import { NotFoundScreen } from "./not-found-screen.tsx";
+import { paths } from "./paths.ts";
 import { PlainLayout } from "./plain-layout.tsx";
 import { ShopLayout } from "./shop-layout.tsx";
 
@@ -13,7 +15,11 @@ function Root() {
   );
 }
 
-/** Each page is fetched when it is first opened. */
+/** A page that is fetched when it is first opened. */
+const page =
+  <Name extends string>(load: () => Promise<Record<Name, ComponentType>>, name: Name) =>
+  async () => ({ Component: (await load())[name] });
+
 export const router = createBrowserRouter([
   {
     element: <Root />,
@@ -22,7 +28,30 @@ export const router = createBrowserRouter([
     children: [
       {
         element: <PlainLayout />,
-        children: [{ path: "*", element: <NotFoundScreen /> }],
+        children: [
+          { path: paths.home(), lazy: page(() => import("./pages/home-page.tsx"), "HomePage") },
+          {
+            path: paths.signIn(),
+            lazy: page(() => import("./pages/sign-in-page.tsx"), "SignInPage"),
+          },
+          {
+            path: paths.register(),
+            lazy: page(() => import("./pages/register-page.tsx"), "RegisterPage"),
+          },
+          {
+            path: paths.forgotPassword(),
+            lazy: page(() => import("./pages/forgot-password-page.tsx"), "ForgotPasswordPage"),
+          },
+          {
+            path: paths.link(":token"),
+            lazy: page(() => import("./pages/link-page.tsx"), "LinkPage"),
+          },
+          {
+            path: paths.account(),
+            lazy: page(() => import("./pages/account-page.tsx"), "AccountPage"),
+          },
+          { path: "*", element: <NotFoundScreen /> },
+        ],
       },
       {
         path: "/shop/:shop",
@@ -31,7 +60,49 @@ export const router = createBrowserRouter([
           // Pages of a shop; a broken one leaves the header standing.
           {
             errorElement: <ErrorScreen />,
-            children: [{ path: "*", element: <NotFoundScreen /> }],
+            children: [
+              {
+                path: paths.bench(":shop"),
+                lazy: page(() => import("./pages/bench-page.tsx"), "BenchPage"),
+              },
+              {
+                path: paths.job(":shop", ":jobId"),
+                lazy: page(() => import("./pages/job-page.tsx"), "JobPage"),
+              },
+              {
+                path: paths.sheet(":shop", ":revisionId"),
+                lazy: page(() => import("./pages/sheet-page.tsx"), "SheetPage"),
+              },
+              {
+                path: paths.clients(":shop"),
+                lazy: page(() => import("./pages/clients-page.tsx"), "ClientsPage"),
+              },
+              {
+                path: paths.client(":shop", ":clientId"),
+                lazy: page(() => import("./pages/client-page.tsx"), "ClientPage"),
+              },
+              {
+                path: paths.portfolio(":shop"),
+                lazy: page(() => import("./pages/portfolio-page.tsx"), "PortfolioPage"),
+              },
+              {
+                path: paths.stock(":shop"),
+                lazy: page(() => import("./pages/stock-page.tsx"), "StockPage"),
+              },
+              {
+                path: paths.team(":shop"),
+                lazy: page(() => import("./pages/team-page.tsx"), "TeamPage"),
+              },
+              {
+                path: paths.shop(":shop"),
+                lazy: page(() => import("./pages/shop-page.tsx"), "ShopPage"),
+              },
+              {
+                path: paths.outgoingMail(":shop"),
+                lazy: page(() => import("./pages/outgoing-mail-page.tsx"), "OutgoingMailPage"),
+              },
+              { path: "*", element: <NotFoundScreen /> },
+            ],
           },
         ],
       },

@@ -1,0 +1,72 @@
+import { useQuery } from "@tanstack/react-query";
+import { useParams } from "react-router-dom";
+import { Skeleton } from "@/components/ui/skeleton.tsx";
+import { TextLink } from "@/components/ui/text-link.tsx";
+import { ArtworkPart } from "@/features/artwork/components/artwork-part.tsx";
+import { jobQuery } from "@/features/jobs/api/queries.ts";
+import { BriefPart } from "@/features/jobs/components/brief-part.tsx";
+import { ConsentPart } from "@/features/jobs/components/consent-part.tsx";
+import { EventLog } from "@/features/jobs/components/event-log.tsx";
+import { JobMoves } from "@/features/jobs/components/job-moves.tsx";
+import { NextStep } from "@/features/jobs/components/next-step.tsx";
+import { OpenNotes } from "@/features/jobs/components/open-notes.tsx";
+import { RevisionList } from "@/features/jobs/components/revision-list.tsx";
+import { formatDay, formatDue } from "@/lib/format.ts";
+import { useReader } from "@/lib/shop-context.ts";
+import { LoadProblem } from "../load-problem.tsx";
+import { Page } from "../page.tsx";
+import { paths } from "../paths.ts";
+
+export function JobPage() {
+  const { shop, side } = useReader();
+  const { jobId = "" } = useParams();
+  const query = useQuery(jobQuery(shop.slug, jobId));
+  if (query.isPending) {
+    return (
+      <Page title="Job">
+        <Skeleton label="Loading the job" rows={3} rowClassName="h-24" />
+      </Page>
+    );
+  }
+  if (query.isError) {
+    return <LoadProblem what="The job could not be loaded." error={query.error} onRetry={() => void query.refetch()} />;
+  }
+  const job = query.data;
+  const slug = shop.slug;
+  const staff = side === "shop";
+  return (
+    <Page
+      title={`${job.number}, ${job.title}`}
+      heading={job.title}
+      under={
+        <>
+          <span className="font-serif font-bold text-ink tabular-nums">{job.number}</span> for{" "}
+          {staff && shop.can.seeClients ? (
+            <TextLink to={paths.client(slug, job.client.id)}>{job.client.name}</TextLink>
+          ) : (
+            job.client.name
+          )}
+          {job.dueOn &&
+            `, ${staff ? formatDue(job.dueOn) : "planned for"} ${staff ? `(${formatDay(job.dueOn)})` : formatDay(job.dueOn)}`}
+        </>
+      }
+    >
+      <div className="space-y-9">
+        <NextStep job={job} shop={slug} side={side} />
+        <div className="grid gap-10 lg:grid-cols-[minmax(0,1.9fr)_minmax(0,1fr)] lg:gap-14">
+          <div className="min-w-0 space-y-10">
+            <RevisionList shop={slug} jobId={jobId} side={side} />
+            <ArtworkPart shop={slug} jobId={jobId} unit={shop.unit} mayAdd={job.can.editMockup || job.can.editBrief} />
+            <BriefPart shop={slug} unit={shop.unit} job={job} side={side} />
+          </div>
+          <div className="min-w-0 space-y-8">
+            <OpenNotes shop={slug} job={job} />
+            {staff && <JobMoves shop={slug} job={job} />}
+            <ConsentPart shop={slug} shopName={shop.name} job={job} side={side} />
+            {staff && <EventLog shop={slug} jobId={jobId} />}
+          </div>
+        </div>
+      </div>
+    </Page>
+  );
+}

@@ -1,0 +1,64 @@
+import { useQuery } from "@tanstack/react-query";
+import { Button } from "@/components/ui/button.tsx";
+import { Notice } from "@/components/ui/notice.tsx";
+import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
+import { Skeleton } from "@/components/ui/skeleton.tsx";
+import { messageOf } from "@/lib/form-problem.ts";
+import { formatInstant } from "@/lib/format.ts";
+import { useEndSession } from "../api/mutations.ts";
+import { sessionsQuery } from "../api/queries.ts";
+import { agentName } from "./agent-name.ts";
+
+/** Where one is signed in. Ending a session takes effect with its very next request. */
+export function SessionList() {
+  const sessions = useQuery(sessionsQuery);
+  const end = useEndSession();
+  if (sessions.isPending) return <Skeleton label="Loading where you are signed in" rows={2} />;
+  if (sessions.isError) {
+    return (
+      <ProblemNotice
+        what="The list could not be loaded."
+        error={sessions.error}
+        onRetry={() => void sessions.refetch()}
+      />
+    );
+  }
+  return (
+    <>
+      {end.isError && (
+        <Notice tone="error" className="mb-3">
+          {messageOf(end.error)}
+        </Notice>
+      )}
+      <ul className="border-t border-rule">
+        {sessions.data.items.map((session) => (
+          <li
+            key={session.id}
+            className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2 border-b border-rule py-3"
+          >
+            <span>
+              <span className="block font-semibold">{agentName(session.agent)}</span>
+              <span className="block text-sm text-graphite">
+                Signed in by {session.began === "link" ? "a mailed link" : "password"}{" "}
+                {formatInstant(session.createdAt)}, last seen {formatInstant(session.lastSeenAt)}
+              </span>
+            </span>
+            {session.current ? (
+              <span className="text-sm font-semibold text-verdigris">This one, here</span>
+            ) : (
+              <Button
+                size="small"
+                kind="danger"
+                aria-label={`End ${agentName(session.agent)}`}
+                busy={end.isPending && end.variables === session.id}
+                onClick={() => end.mutate(session.id)}
+              >
+                End
+              </Button>
+            )}
+          </li>
+        ))}
+      </ul>
+    </>
+  );
+}

@@ -1,0 +1,77 @@
+import { type DragEvent, useId, useRef, useState } from "react";
+import { Busy } from "@/components/ui/busy.tsx";
+import { Button } from "@/components/ui/button.tsx";
+import { Notice } from "@/components/ui/notice.tsx";
+import { cx } from "@/lib/cx.ts";
+import { useUpload } from "./use-upload.ts";
+
+/** Brings in an artwork file: chosen, or dropped on the frame. Shows how far it is, and why it was refused. */
+export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly jobId: string }) {
+  const input = useRef<HTMLInputElement>(null);
+  const id = useId();
+  const [over, setOver] = useState(false);
+  const { state, send, cancel } = useUpload(shop, jobId);
+  const sending = state.step === "sending";
+  const take = (files: FileList | null) => {
+    const file = files?.[0];
+    if (file && !sending) void send(file);
+  };
+  const handleDrop = (event: DragEvent) => {
+    event.preventDefault();
+    setOver(false);
+    take(event.dataTransfer.files);
+  };
+  return (
+    <fieldset
+      className={cx("min-w-0 border border-dashed px-4 py-4", over ? "border-indigo bg-linen" : "border-graphite")}
+      onDragOver={(event) => {
+        event.preventDefault();
+        setOver(true);
+      }}
+      onDragLeave={() => setOver(false)}
+      onDrop={handleDrop}
+    >
+      <legend className="sr-only">Bring in artwork</legend>
+      <input
+        ref={input}
+        id={id}
+        type="file"
+        aria-label="Artwork file"
+        accept=".svg,.png,.jpg,.jpeg,image/svg+xml,image/png,image/jpeg"
+        className="sr-only"
+        tabIndex={-1}
+        onChange={(event) => {
+          take(event.target.files);
+          // The same file can be chosen again after it was mended.
+          event.target.value = "";
+        }}
+      />
+      {state.step === "refused" && (
+        <Notice tone="error" title={`“${state.name}” was not taken`} className="mb-3">
+          {state.reason}
+        </Notice>
+      )}
+      {state.step === "cancelled" && (
+        <Notice tone="info" className="mb-3">
+          “{state.name}” was given up. Nothing of it was kept.
+        </Notice>
+      )}
+      {sending ? (
+        <div className="space-y-3">
+          <Busy
+            label={state.share < 1 ? `Sending “${state.name}”` : `Checking “${state.name}”`}
+            {...(state.share < 1 ? { share: state.share } : {})}
+          />
+          <Button size="small" onClick={cancel}>
+            Cancel
+          </Button>
+        </div>
+      ) : (
+        <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
+          <Button onClick={() => input.current?.click()}>Bring in a file</Button>
+          <p className="text-sm text-graphite">or drop it here. SVG; the file is kept as it came.</p>
+        </div>
+      )}
+    </fieldset>
+  );
+}

@@ -1,0 +1,53 @@
+import { useInfiniteQuery } from "@tanstack/react-query";
+import type { ReactNode } from "react";
+import { Button } from "@/components/ui/button.tsx";
+import { EmptyState } from "@/components/ui/empty-state.tsx";
+import { type JobFilter, jobsQuery } from "../api/queries.ts";
+import { JobRow } from "./job-row.tsx";
+import { MoveGroup } from "./move-group.tsx";
+
+const groups = [
+  { whoseMove: "ours", title: "Our move" },
+  { whoseMove: "client", title: "The client's move" },
+  { whoseMove: "nobody", title: "Nobody's move" },
+] as const;
+
+/** The staff's jobs in groups by whose move it is. */
+export function BenchLists({
+  shop,
+  filter,
+  onClear,
+  firstStep,
+}: {
+  readonly shop: string;
+  readonly filter: JobFilter;
+  readonly onClear: () => void;
+  /** How to open the first job, for an empty shop. */
+  readonly firstStep: ReactNode;
+}) {
+  const { whoseMove, ...rest } = filter;
+  const shown = groups.filter((group) => whoseMove === undefined || group.whoseMove === whoseMove);
+  const all = useInfiniteQuery(jobsQuery(shop, { ...rest, whoseMove: shown[0]?.whoseMove ?? "ours" }));
+  const counts = all.data?.pages[0]?.counts;
+  const nothing = counts !== undefined && shown.every((group) => counts[group.whoseMove] === 0);
+  if (nothing) {
+    return Object.keys(filter).some((name) => name !== "sort") ? (
+      <EmptyState title="No job matches" action={<Button onClick={onClear}>Show all jobs</Button>}>
+        Try fewer words, or take the filter away.
+      </EmptyState>
+    ) : (
+      <EmptyState title="No jobs yet" action={firstStep}>
+        A job begins with a client and what the sign is. Brief, artwork, mockup and proofs follow from there.
+      </EmptyState>
+    );
+  }
+  return (
+    <div className="space-y-9">
+      {shown.map((group) => (
+        <MoveGroup key={group.whoseMove} shop={shop} noun="job" filter={rest} {...group}>
+          {(job) => <JobRow key={job.id} job={job} shop={shop} />}
+        </MoveGroup>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,45 @@
+import { useState } from "react";
+import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
+import { Field } from "@/components/ui/field.tsx";
+
+const mmOf: Record<LengthUnit, number> = { mm: 1000, in: inchesToMm(12) };
+
+const shown = (mm: number | null, unit: LengthUnit): string =>
+  mm === null ? "" : String(Number((mm / mmOf[unit]).toFixed(2)));
+
+/** How far off the sign is read from, in metres or feet. `value` is in mm; NaN is something that is no number. */
+export function DistanceField({
+  label,
+  unit,
+  value,
+  onChange,
+  error,
+  readOnly,
+}: {
+  readonly label: string;
+  readonly unit: LengthUnit;
+  readonly value: number | null;
+  readonly onChange: (mm: number | null) => void;
+  readonly error?: string | undefined;
+  readonly readOnly?: boolean;
+}) {
+  const [text, setText] = useState<string | null>(null);
+  return (
+    <Field
+      label={label}
+      error={Number.isNaN(value) && text === null ? "Write a number, like 5." : error}
+      suffix={unit === "mm" ? "m" : "feet"}
+      inputMode="decimal"
+      autoComplete="off"
+      readOnly={readOnly}
+      value={text ?? (Number.isNaN(value) ? "?" : shown(value, unit))}
+      onFocus={() => setText(Number.isNaN(value) ? "" : shown(value, unit))}
+      onChange={(event) => {
+        const written = event.target.value.trim().replace(",", ".");
+        setText(event.target.value);
+        onChange(written === "" ? null : Number(written) * mmOf[unit]);
+      }}
+      onBlur={() => setText(null)}
+    />
+  );
+}
