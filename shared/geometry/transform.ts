@@ -63,9 +63,13 @@ export function pathTransform(path: Path, matrix: Matrix): Path {
 }
 
 export function segmentTransform(segment: Segment, matrix: Matrix): Segment {
-  const to = pointTransform(segment.to, matrix);
-  if (segment.kind === "line") return { kind: "line", to };
-  return { kind: "cubic", c1: pointTransform(segment.c1, matrix), c2: pointTransform(segment.c2, matrix), to };
+  return segmentMap(segment, (point) => pointTransform(point, matrix));
+}
+
+/** The segment with every point, handles too, replaced by what `change` makes of it. */
+export function segmentMap(segment: Segment, change: (point: Point) => Point): Segment {
+  if (segment.kind === "line") return { kind: "line", to: change(segment.to) };
+  return { kind: "cubic", c1: change(segment.c1), c2: change(segment.c2), to: change(segment.to) };
 }
 
 export function regionTransform(region: Region, matrix: Matrix): Region {
