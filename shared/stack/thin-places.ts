@@ -8,7 +8,9 @@ import { rectanglePath } from "../geometry/shapes.ts";
 
 export type ThinPlace = { readonly region: Region; readonly where: Point };
 
-/** The opened shape is grown by this, so that a stroke of just the limit passes in spite of the grid. */
+/** The first step takes this much less a side, so that a stroke of just the limit is left a line to grow from. */
+const leftMm = 0.005;
+/** The second step gives this much more a side, so that the grid takes no slivers along the edges. */
 const slackMm = 0.02;
 /** Less than this share of the limit's square is a rounded-off corner, not a stroke. */
 const smallestShare = 0.05;
@@ -19,8 +21,8 @@ const smallestShare = 0.05;
  */
 export function thinPlaces(region: Region, widthMm: number, kernel: Kernel): ThinPlace[] {
   if (region.length === 0 || !(widthMm > 0)) return [];
-  const eroded = kernel.offset(region, -widthMm / 2, "round");
-  const opened = kernel.offset(eroded, widthMm / 2 + slackMm, "mitre");
+  const half = Math.max(0, widthMm / 2 - leftMm);
+  const opened = kernel.offset(kernel.offset(region, -half, "round"), half + slackMm, "mitre");
   const lost = kernel.difference(region, opened);
   return connectedPieces(lost)
     .filter((part) => regionAreaMm2(part) > smallestShare * widthMm * widthMm)
