@@ -26,30 +26,19 @@ export const router = createBrowserRouter([
     errorElement: <ErrorScreen />,
     HydrateFallback: () => null,
     children: [
+      { path: paths.share(":token"), lazy: page(() => import("./pages/share-page.tsx"), "SharePage") },
       {
         element: <PlainLayout />,
         children: [
           { path: paths.home(), lazy: page(() => import("./pages/home-page.tsx"), "HomePage") },
-          {
-            path: paths.signIn(),
-            lazy: page(() => import("./pages/sign-in-page.tsx"), "SignInPage"),
-          },
-          {
-            path: paths.register(),
-            lazy: page(() => import("./pages/register-page.tsx"), "RegisterPage"),
-          },
+          { path: paths.signIn(), lazy: page(() => import("./pages/sign-in-page.tsx"), "SignInPage") },
+          { path: paths.register(), lazy: page(() => import("./pages/register-page.tsx"), "RegisterPage") },
           {
             path: paths.forgotPassword(),
             lazy: page(() => import("./pages/forgot-password-page.tsx"), "ForgotPasswordPage"),
           },
-          {
-            path: paths.link(":token"),
-            lazy: page(() => import("./pages/link-page.tsx"), "LinkPage"),
-          },
-          {
-            path: paths.account(),
-            lazy: page(() => import("./pages/account-page.tsx"), "AccountPage"),
-          },
+          { path: paths.link(":token"), lazy: page(() => import("./pages/link-page.tsx"), "LinkPage") },
+          { path: paths.account(), lazy: page(() => import("./pages/account-page.tsx"), "AccountPage") },
           { path: "*", element: <NotFoundScreen /> },
         ],
       },
@@ -61,22 +50,13 @@ export const router = createBrowserRouter([
           {
             errorElement: <ErrorScreen />,
             children: [
-              {
-                path: paths.bench(":shop"),
-                lazy: page(() => import("./pages/bench-page.tsx"), "BenchPage"),
-              },
-              {
-                path: paths.job(":shop", ":jobId"),
-                lazy: page(() => import("./pages/job-page.tsx"), "JobPage"),
-              },
+              { path: paths.bench(":shop"), lazy: page(() => import("./pages/bench-page.tsx"), "BenchPage") },
+              { path: paths.job(":shop", ":jobId"), lazy: page(() => import("./pages/job-page.tsx"), "JobPage") },
               {
                 path: paths.sheet(":shop", ":revisionId"),
                 lazy: page(() => import("./pages/sheet-page.tsx"), "SheetPage"),
               },
-              {
-                path: paths.clients(":shop"),
-                lazy: page(() => import("./pages/clients-page.tsx"), "ClientsPage"),
-              },
+              { path: paths.clients(":shop"), lazy: page(() => import("./pages/clients-page.tsx"), "ClientsPage") },
               {
                 path: paths.client(":shop", ":clientId"),
                 lazy: page(() => import("./pages/client-page.tsx"), "ClientPage"),
@@ -85,21 +65,16 @@ export const router = createBrowserRouter([
                 path: paths.portfolio(":shop"),
                 lazy: page(() => import("./pages/portfolio-page.tsx"), "PortfolioPage"),
               },
-              {
-                path: paths.stock(":shop"),
-                lazy: page(() => import("./pages/stock-page.tsx"), "StockPage"),
-              },
-              {
-                path: paths.team(":shop"),
-                lazy: page(() => import("./pages/team-page.tsx"), "TeamPage"),
-              },
-              {
-                path: paths.shop(":shop"),
-                lazy: page(() => import("./pages/shop-page.tsx"), "ShopPage"),
-              },
+              { path: paths.stock(":shop"), lazy: page(() => import("./pages/stock-page.tsx"), "StockPage") },
+              { path: paths.team(":shop"), lazy: page(() => import("./pages/team-page.tsx"), "TeamPage") },
+              { path: paths.shop(":shop"), lazy: page(() => import("./pages/shop-page.tsx"), "ShopPage") },
               {
                 path: paths.outgoingMail(":shop"),
                 lazy: page(() => import("./pages/outgoing-mail-page.tsx"), "OutgoingMailPage"),
+              },
+              {
+                path: "jobs/:jobId/compare",
+                lazy: page(() => import("./pages/compare-page.tsx"), "ComparePage"),
               },
               { path: "*", element: <NotFoundScreen /> },
             ],

@@ -19,6 +19,8 @@ type DrawingViewerProps = {
   readonly onPick?: ((id: string | null, at: { x: number; y: number }) => void) | undefined;
   /** What lies over the drawing in window px, as balloons. */
   readonly overlay?: (shown: DrawingView, room: Size, fit: DrawingView) => ReactNode;
+  /** What stands around the window, as zone marks; not clipped by it. */
+  readonly frame?: (shown: DrawingView, room: Size) => ReactNode;
   readonly className?: string;
 };
 
@@ -26,7 +28,8 @@ type DrawingViewerProps = {
 const Picture = memo(DrawingSvg);
 
 /** A drawing in a window: drag, wheel, two fingers, keys or the three words below it to look around. */
-export function DrawingViewer({ list, title, view, onView, fitTo, onPick, overlay, className }: DrawingViewerProps) {
+export function DrawingViewer(props: DrawingViewerProps) {
+  const { list, title, view, onView, fitTo, onPick, overlay, frame, className } = props;
   const element = useRef<HTMLDivElement>(null);
   const room = useRoom(element);
   const hintId = useId();
@@ -40,7 +43,8 @@ export function DrawingViewer({ list, title, view, onView, fitTo, onPick, overla
   }
 
   return (
-    <div className={cx("relative overflow-hidden", className)}>
+    <div className={cx("relative", className)}>
+      {room && frame?.(shown, room)}
       <div
         ref={element}
         role="application"

@@ -1,0 +1,106 @@
+import { useMemo, useRef, useState } from "react";
+import type { z } from "zod";
+import type { compareSchema } from "#shared/contracts/revisions.ts";
+import { Button } from "@/components/ui/button.tsx";
+import { TextLink } from "@/components/ui/text-link.tsx";
+import type { DrawingView } from "@/lib/drawing-view.ts";
+import { ChangeList } from "./change-list.tsx";
+import { ComparedPicture } from "./compared-picture.tsx";
+
+type ComparedPairProps = {
+  readonly pair: z.infer<typeof compareSchema>;
+  readonly pathOfSheet: (revisionId: string) => string;
+};
+
+const sides = [
+  { id: "elevation", label: "Front" },
+  { id: "section", label: "From the side" },
+] as const;
+
+/** Two letters side by side at one scale, and what changed in words. */
+export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
+  const [side, setSide] = useState<(typeof sides)[number]["id"]>("elevation");
+  const [view, setView] = useState<DrawingView | null>(null);
+  const [chosen, setChosen] = useState<number | null>(null);
+  const pictures = useRef<HTMLDivElement>(null);
+  const { before, after, changes } = pair;
+  const fitTo = useMemo(
+    () => ({
+      width: Math.max(before[side].widthMm, after[side].widthMm),
+      height: Math.max(before[side].heightMm, after[side].heightMm),
+    }),
+    [before, after, side],
+  );
+  const spot = side === "elevation" && chosen !== null ? (changes[chosen]?.where ?? null) : null;
+
+  function handleSide(next: typeof side) {
+    setSide(next);
+    setView(null);
+  }
+
+  function handleChoose(place: number | null) {
+    setChosen(place);
+    if (place === null) return;
+    handleSide("elevation");
+    pictures.current?.scrollIntoView({ block: "nearest" });
+  }
+
+  return (
+    <div className="border-y border-ink bg-sheet lg:grid lg:h-[max(36rem,calc(100dvh-13rem))] lg:grid-cols-[minmax(0,1fr)_22rem] lg:border-x">
+      <div ref={pictures} className="flex min-h-0 flex-col">
+        <p className="flex gap-2 border-b border-rule px-4 py-2">
+          {sides.map(({ id, label }) => (
+            <Button
+              key={id}
+              size="small"
+              aria-pressed={id === side}
+              className="aria-pressed:bg-linen"
+              onClick={() => handleSide(id)}
+            >
+              {label}
+            </Button>
+          ))}
+        </p>
+        <div className="grid min-h-0 flex-1 auto-rows-[19rem] lg:auto-rows-auto lg:grid-cols-2">
+          {[before, after].map((one, index) => (
+            <div
+              key={one.revision.id}
+              className={
+                index === 0 ? "min-h-0 lg:border-r lg:border-rule" : "min-h-0 border-t border-ink lg:border-t-0"
+              }
+            >
+              <ComparedPicture
+                list={one[side]}
+                title={`Revision ${one.revision.letter}, ${side === "elevation" ? "front" : "from the side"}`}
+                heading={
+                  <>
+                    <h2 className="font-serif text-base font-bold">
+                      Revision {one.revision.letter}{" "}
+                      <span className="font-sans text-fine font-normal text-graphite">{one.revision.state}</span>
+                    </h2>
+                    <TextLink className="text-sm" to={pathOfSheet(one.revision.id)}>
+                      Sheet {one.revision.letter}
+                    </TextLink>
+                  </>
+                }
+                fitTo={fitTo}
+                view={view}
+                onView={setView}
+                spot={spot}
+              />
+            </div>
+          ))}
+        </div>
+      </div>
+      <div className="border-t border-ink lg:min-h-0 lg:overflow-y-auto lg:border-t-0 lg:border-l">
+        <ChangeList
+          changes={changes}
+          before={before.revision.letter}
+          after={after.revision.letter}
+          chosen={chosen}
+          onChoose={handleChoose}
+        />
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,21 @@
+import type { SheetView } from "#shared/contracts/revisions.ts";
+import { formatLengthWithUnit } from "#shared/units/format-length.ts";
+import { formatMass } from "#shared/units/mass.ts";
+
+/** The words the sign reads, and how far it stands off the wall and what it weighs. */
+export function SheetFigures({ sheet }: { readonly sheet: Pick<SheetView, "figures" | "words" | "job"> }) {
+  const { figures, words, job } = sheet;
+  return (
+    <div className="space-y-1 text-sm text-graphite">
+      {words !== "" && (
+        <p>
+          It reads <q className="font-serif font-bold whitespace-pre-line text-ink">{words}</q>
+        </p>
+      )}
+      <p>
+        Stands {formatLengthWithUnit(figures.offWallMm, job.unit)} off the wall, weighs about{" "}
+        {formatMass(figures.massG, job.unit)}. Masses are estimates for planning.
+      </p>
+    </div>
+  );
+}
