@@ -1,4 +1,4 @@
-import type { Services } from "../http/context.ts";
+import type { Context } from "../http/context.ts";
 import { Job } from "../models/job.ts";
 import { Revision } from "../models/revision.ts";
 import { logSystemEvent } from "./log-event.ts";
@@ -6,26 +6,20 @@ import { refreshJob } from "./refresh-job.ts";
 
 /** The PDF could not be drawn: the revision is a draft again, with the reason, and what was out stays out. */
 export async function failIssue(
-  services: Services,
+  context: Pick<Context, "transaction" | "now">,
   { revisionId, reason }: { revisionId: string; reason: string },
 ): Promise<void> {
-  await services.sequelize.transaction(async (transaction) => {
-    const context = { transaction, now: new Date() };
-    const known = await Revision.findByPk(revisionId, {
-      attributes: ["id", "jobId"],
-      transaction,
-      rejectOnEmpty: true,
-    });
-    const job = await Job.findByPk(known.jobId, { transaction, lock: true, rejectOnEmpty: true });
-    const revision = await Revision.findOne({ where: { id: revisionId, state: "preparing" }, transaction });
-    if (!revision) return;
-    await revision.update({ state: "draft", failure: reason }, { transaction });
-    await logSystemEvent(context, {
-      shopId: job.shopId,
-      jobId: job.id,
-      kind: "revision failed",
-      data: { letter: revision.letter, reason },
-    });
-    await refreshJob(context, job);
+  const { transaction } = context;
+  const known = await Revision.findByPk(revisionId, { attributes: ["id", "jobId"], transaction, rejectOnEmpty: true });
+  const job = await Job.findByPk(known.jobId, { transaction, lock: true, rejectOnEmpty: true });
+  const revision = await Revision.findOne({ where: { id: revisionId, state: "preparing" }, transaction });
+  if (!revision) return;
+  await revision.update({ state: "draft", failure: reason }, { transaction });
+  await logSystemEvent(context, {
+    shopId: job.shopId,
+    jobId: job.id,
+    kind: "revision failed",
+    data: { letter: revision.letter, reason },
   });
+  await refreshJob(context, job);
 }

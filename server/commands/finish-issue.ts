@@ -1,5 +1,5 @@
 import { stateAfterLater } from "#shared/lifecycle/revision-states.ts";
-import type { Services } from "../http/context.ts";
+import type { Context } from "../http/context.ts";
 import { Job } from "../models/job.ts";
 import { Revision } from "../models/revision.ts";
 import { loadJobs } from "../queries/load-jobs.ts";
@@ -13,33 +13,27 @@ import { storeBytes } from "./store-file.ts";
  * Done twice it changes nothing the second time.
  */
 export async function finishIssue(
-  services: Services,
+  context: Pick<Context, "services" | "transaction" | "now">,
   { revisionId, pdf }: { revisionId: string; pdf: Uint8Array },
 ): Promise<void> {
-  await services.sequelize.transaction(async (transaction) => {
-    const context = { services, transaction, now: new Date() };
-    const known = await Revision.findByPk(revisionId, {
-      attributes: ["id", "jobId"],
-      transaction,
-      rejectOnEmpty: true,
-    });
-    const job = await Job.findByPk(known.jobId, { transaction, lock: true, rejectOnEmpty: true });
-    const [loaded] = await loadJobs(context, [job]);
-    const revision = loaded?.revisions.find(({ id }) => id === revisionId);
-    if (!loaded || revision?.state !== "preparing") return;
-    const file = await storeBytes(context, { shopId: job.shopId, bytes: pdf, mediaType: "application/pdf" });
-    for (const earlier of loaded.revisions) {
-      const state = stateAfterLater(earlier.state, "issued");
-      if (earlier.id !== revisionId && state !== earlier.state) await earlier.update({ state }, { transaction });
-    }
-    await revision.update({ state: "issued", pdfFileId: file.id, issuedAt: context.now }, { transaction });
-    await logSystemEvent(context, {
-      shopId: job.shopId,
-      jobId: job.id,
-      kind: "revision issued",
-      data: { letter: revision.letter },
-    });
-    await mailApprovers(context, loaded, { kind: "proof issued", data: { revisionId } });
-    await refreshJob(context, job);
+  const { transaction, now } = context;
+  const known = await Revision.findByPk(revisionId, { attributes: ["id", "jobId"], transaction, rejectOnEmpty: true });
+  const job = await Job.findByPk(known.jobId, { transaction, lock: true, rejectOnEmpty: true });
+  const [loaded] = await loadJobs(context, [job]);
+  const revision = loaded?.revisions.find(({ id }) => id === revisionId);
+  if (!loaded || revision?.state !== "preparing") return;
+  const file = await storeBytes(context, { shopId: job.shopId, bytes: pdf, mediaType: "application/pdf" });
+  for (const earlier of loaded.revisions) {
+    const state = stateAfterLater(earlier.state, "issued");
+    if (earlier.id !== revisionId && state !== earlier.state) await earlier.update({ state }, { transaction });
+  }
+  await revision.update({ state: "issued", pdfFileId: file.id, issuedAt: now }, { transaction });
+  await logSystemEvent(context, {
+    shopId: job.shopId,
+    jobId: job.id,
+    kind: "revision issued",
+    data: { letter: revision.letter },
   });
+  await mailApprovers(context, loaded, { kind: "proof issued", data: { revisionId } });
+  await refreshJob(context, job);
 }

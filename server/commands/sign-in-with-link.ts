@@ -15,7 +15,8 @@ export async function signInWithLink(
   try {
     return await sequelize.transaction(async (transaction) => {
       const link = await spendLink({ now, transaction }, { token, purpose: "sign in" });
-      const contact = await Contact.findOne({ where: { id: link.contactId ?? "", endedAt: null }, transaction });
+      const contact =
+        link.contactId && (await Contact.findOne({ where: { id: link.contactId, endedAt: null }, transaction }));
       const person = contact && (await Person.findByPk(contact.personId, { transaction }));
       // The contact may have been removed, or given another address, since the mail went out.
       if (!contact || !person || person.email !== link.address) throw new AppError("link_expired");

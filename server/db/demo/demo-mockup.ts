@@ -1,0 +1,121 @@
+import type { ArtworkPiece } from "#shared/artwork/imported-artwork.ts";
+import { boxOfPath } from "#shared/geometry/box.ts";
+import type { Path } from "#shared/geometry/path.ts";
+import { circlePath } from "#shared/geometry/shapes.ts";
+import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
+import {
+  standardAcrylics,
+  standardAdhesives,
+  standardStandoffs,
+  standardWoods,
+} from "#shared/materials/standard-stock.ts";
+import type { Acrylic, Adhesive, CapStud, Hold, Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
+import { emptyDocument } from "#shared/mockup/empty-document.ts";
+
+/** What the demo's documents are put together from: the standard stock, found by name. */
+function named<T>(list: readonly T[], name: string, nameOf: (one: T) => string): T {
+  const found = list.find((one) => nameOf(one) === name);
+  if (!found) throw new Error(`The standard stock has no ${name}.`);
+  return found;
+}
+export const acrylic = (name: string): Acrylic => named(standardAcrylics, name, (one) => one.acrylic.name).acrylic;
+export const standoff = (name: string): CapStud => named(standardStandoffs, name, (one) => one.name);
+const adhesive = (name: string): Adhesive => named(standardAdhesives, name, (one) => one.name);
+
+export const bondToAcrylic: Hold = { kind: "bond", adhesive: adhesive("Wicking cement") };
+export const bondToWood: Hold = { kind: "bond", adhesive: adhesive("Slow epoxy") };
+
+export function board(size: {
+  width: number;
+  height: number;
+  wood: string;
+  thickness: number;
+  finish: string;
+}): MockupDocument {
+  const { wood } = named(standardWoods, size.wood, (one) => one.wood.name);
+  const empty = emptyDocument({
+    backer: wood,
+    widthMm: size.width,
+    heightMm: size.height,
+    thicknessMm: size.thickness,
+  });
+  return { ...empty, backer: { ...empty.backer, finish: size.finish }, hanging: { kind: "cleat", gap: 12 } };
+}
+
+type ArtworkOnBoard = {
+  readonly artworkId: string;
+  readonly pieces: readonly ArtworkPiece[];
+  readonly at: { x: number; y: number };
+};
+
+/** The artwork's pieces of one colour, each about its own middle, with the artwork's upper left corner at `at` on the board. */
+export function piecesOfColour({ artworkId, pieces, at }: ArtworkOnBoard, colour: string, name: string): Piece[] {
+  return pieces
+    .filter((piece) => piece.colour === colour)
+    .map(({ index, path }, place) => {
+      const { x, y, width, height } = boxOfPath(path) ?? { x: 0, y: 0, width: 0, height: 0 };
+      const middle = { x: x + width / 2, y: y + height / 2 };
+      return {
+        id: `${artworkId.slice(0, 8)}-${index}`,
+        name: `${name} ${place + 1}`,
+        source: { kind: "artwork", artworkId, index, colour },
+        path: changeable(pathTransform(path, translateMatrix(-middle.x, -middle.y))),
+        placement: { x: at.x + middle.x, y: at.y + middle.y, turn: 0, scale: 1, mirrored: false },
+      };
+    });
+}
+
+/** A round plate. */
+export function disc(id: string, name: string, { x, y, radius }: { x: number; y: number; radius: number }): Piece {
+  return {
+    id,
+    name,
+    source: { kind: "plate" },
+    path: changeable(circlePath({ x: 0, y: 0 }, radius)),
+    placement: { x, y, turn: 0, scale: 1, mirrored: false },
+  };
+}
+
+export function layer(one: {
+  key: string;
+  name: string;
+  stock: string;
+  thickness: number;
+  hold: Hold;
+  pieces: Piece[];
+}): Layer {
+  return {
+    ...one,
+    stock: acrylic(one.stock),
+    locate: one.hold.kind === "standoff" ? "hole pattern" : "template",
+    hidden: false,
+  };
+}
+
+/** Four standoffs at the corners of a square around a middle, the first one fixed, the others with play. */
+export function fourStandoffs(
+  hardware: CapStud,
+  { x, y, reach, diameter }: { x: number; y: number; reach: number; diameter: number },
+): Hold {
+  const corners = [
+    [-1, -1],
+    [1, -1],
+    [1, 1],
+    [-1, 1],
+  ] as const;
+  return {
+    kind: "standoff",
+    hardware,
+    offset: hardware.barrelLength,
+    holes: corners.map(([dx, dy], index) => ({
+      id: `hole-${index + 1}`,
+      x: x + dx * reach,
+      y: y + dy * reach,
+      diameter,
+      fixed: index === 0,
+    })),
+  };
+}
+
+const changeable = (path: Path): Piece["path"] =>
+  path.map(({ start, segments }) => ({ start, segments: [...segments] }));
