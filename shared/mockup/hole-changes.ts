@@ -29,11 +29,11 @@ function changesOfHoles(layer: Layer, was: readonly Hole[], is: readonly Hole[],
   };
   say(
     is.filter((hole) => !old.has(hole.id)),
-    "come in",
+    "added",
   );
   say(
     was.filter((hole) => !now.has(hole.id)),
-    "gone",
+    "taken out",
   );
   say(
     pairs.filter(({ before, hole }) => before.x !== hole.x || before.y !== hole.y).map(({ hole }) => hole),

@@ -15,8 +15,11 @@ export function listLayerChanges(before: MockupDocument, after: MockupDocument, 
     else changes.push(onLayer(layer, "come", `new layer of ${layer.stock.name}, ${pieces(layer)}`));
   }
   const kept = new Set(after.layers.map((layer) => layer.key));
+  const keptPieces = new Set(after.layers.flatMap((layer) => layer.pieces.map((piece) => piece.id)));
   for (const layer of before.layers) {
-    if (!kept.has(layer.key)) changes.push(onLayer(layer, "gone", `the layer is gone`));
+    if (kept.has(layer.key)) continue;
+    const lost = layer.pieces.filter((piece) => !keptPieces.has(piece.id));
+    changes.push(onLayer(layer, "gone", `the layer is gone, with ${countOf(lost.length, "piece")}`));
   }
   const order = (document: MockupDocument, other: ReadonlyMap<string, Layer>) =>
     document.layers.map(({ key }) => key).filter((key) => other.has(key));

@@ -21,12 +21,16 @@ export function listPieceChanges(before: MockupDocument, after: MockupDocument, 
   for (const [id, is] of now) {
     const was = old.get(id);
     if (!was) {
-      if (before.layers.some((layer) => layer.key === is.layer.key)) add(is, { kind: "come", words: "come in" });
+      if (before.layers.some((layer) => layer.key === is.layer.key)) add(is, { kind: "come", words: "added" });
       continue;
     }
     for (const said of changesOfPiece(was, is, wording)) add(is, said);
   }
-  for (const [id, was] of old) if (!now.has(id)) add(was, { kind: "gone", words: "gone" });
+  // With a layer that is gone its pieces are gone too: the layer's entry counts them.
+  for (const [id, was] of old) {
+    if (now.has(id) || !after.layers.some((layer) => layer.key === was.layer.key)) continue;
+    add(was, { kind: "gone", words: "taken out" });
+  }
   return [...groups.values()].map(({ kind, words, layer, pieces }) => ({
     kind,
     text: `${layerWords(layer)}: ${namesOf(pieces)} ${words}`,

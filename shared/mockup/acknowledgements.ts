@@ -1,0 +1,48 @@
+import type { Figures } from "../stack/figures.ts";
+import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
+import type { MockupDocument } from "./document.ts";
+
+/** What an approver confirms, one tick each. */
+export type Acknowledgement = { readonly id: string; readonly text: string };
+
+/** Reads the drawing back to the approver: every line of the words, size, colours, hardware and what a yes means. */
+export function acknowledgementsOf({
+  document,
+  figures,
+  words,
+  unit,
+}: {
+  document: MockupDocument;
+  figures: Pick<Figures, "offWall">;
+  words: string;
+  unit: LengthUnit;
+}): Acknowledgement[] {
+  const { board, layers, quantity } = document;
+  const lines = words.split("\n").map((line) => line.trim());
+  const asked: Acknowledgement[] = lines.flatMap((line, index) =>
+    line ? [{ id: `words-${index + 1}`, text: `The words read exactly, letter by letter: “${line}”.` }] : [],
+  );
+  const offWall = formatLengthWithUnit(figures.offWall.nominal, unit);
+  asked.push({
+    id: "size",
+    text: `The size is ${formatSize(board.width, board.height, unit)} and it stands ${offWall} off the wall.`,
+  });
+  const colours = [...new Set(layers.map(({ stock }) => stock.name))];
+  if (colours.length > 0) {
+    asked.push({
+      id: "colours",
+      text: `The colours are ${colours.join(", ")} on ${document.backer.stock.name}. A screen shows them only nearly.`,
+    });
+  }
+  const hardware = layers.flatMap(({ hold }) =>
+    hold.kind === "standoff" && hold.holes.length > 0 ? [`${hold.holes.length} × ${hold.hardware.name}`] : [],
+  );
+  if (hardware.length > 0) asked.push({ id: "hardware", text: `The hardware is ${hardware.join(", ")}.` });
+  if (quantity > 1) asked.push({ id: "quantity", text: `${quantity} signs are made from this drawing.` });
+  asked.push({
+    id: "terms",
+    text: "Once it is cut and bonded a sign can't be changed. A later change is a new revision and may cost more.",
+  });
+  return asked;
+}
