@@ -156,24 +156,22 @@ export function drawSolids(input: SignInput, board: { readonly box: Box; readonl
     ...standoffs.flatMap((standoff) => standoffSolids(standoff, light, lineMm)),
   ];
   const casters: Caster[] = solids.filter(({ castsShadow }) => castsShadow);
-  const shadowOn = (level: number, clip: Path, receiver: Box): Item[] => {
+  const shadowOn = (level: number, clip: Path, receivers: readonly Box[]): Item[] => {
     const shadow = shadowItem({
       light,
       level,
-      receiver,
+      receivers,
       casters: casters.filter(({ top }) => top > level + levelStepMm),
     });
     return shadow ? [{ kind: "clip", clip, items: [shadow] }] : [];
   };
-  const items: Item[] = [...board.items, ...shadowOn(figures.backerTop.nominal, rectanglePath(board.box), board.box)];
+  const items: Item[] = [...board.items, ...shadowOn(figures.backerTop.nominal, rectanglePath(board.box), [board.box])];
   for (const level of levelsOf(solids)) {
     items.push(...groupedByLayer(level));
-    const surface = kernel.union(
-      level.filter((solid) => solid.items.length > 0).flatMap(({ region }) => region),
-      "nonzero",
-    );
-    const receiver = boxOfRegion(surface);
-    if (receiver) items.push(...shadowOn(level[0]?.top ?? 0, pathOfRegion(surface), receiver));
+    const regions = level.filter((solid) => solid.items.length > 0).map(({ region }) => region);
+    const surface = kernel.union(regions.flat(), "nonzero");
+    const receivers = regions.map(boxOfRegion).filter((box) => box !== null);
+    items.push(...shadowOn(level[0]?.top ?? 0, pathOfRegion(surface), receivers));
   }
   return items;
 }
@@ -196,6 +194,6 @@ export function drawWallShadow({ document, figures, standoffs }: SignInput, boar
       top: standoff.capTop,
     })),
   ];
-  const shadow = shadowItem({ light, level, receiver: wall, casters, strength: wallStrength });
+  const shadow = shadowItem({ light, level, receivers: [wall], casters, strength: wallStrength });
   return shadow ? [shadow] : [];
 }

@@ -75,14 +75,21 @@ function turnOver(cells: Float32Array, columns: number, rows: number): Float32Ar
 }
 
 /**
- * Blurs a mask in place by three box passes each way, which come within 1 % of a Gaussian of these sigmas (in cells): the
- * spread of a box of width w is w²/12, so each of the three is 2σ wide. Boxes of up to one cell change nothing and are left out.
+ * Width in cells of the three boxes that together spread like a Gaussian of `sigma` cells. A box of width w adds w²/12 to the
+ * variance; cells themselves add 1/12 when the outline is sampled, 1/12 in each pass and 1/6 when the result is read between them.
+ */
+const boxWidth = (sigma: number): number => Math.sqrt(Math.max(0, 4 * sigma * sigma - 2));
+
+/**
+ * Blurs a mask in place by three box passes each way, which come within 1 % of a Gaussian of these sigmas (in cells). Boxes of
+ * up to one cell change nothing and are left out.
  */
 export function blurMask({ cells, columns, rows }: Mask, sigmaColumns: number, sigmaRows: number): void {
-  if (2 * sigmaColumns > 1) blurRows(cells, columns, rows, 2 * sigmaColumns);
-  if (2 * sigmaRows > 1) {
+  const [across, down] = [boxWidth(sigmaColumns), boxWidth(sigmaRows)];
+  if (across > 1) blurRows(cells, columns, rows, across);
+  if (down > 1) {
     const turned = turnOver(cells, columns, rows);
-    blurRows(turned, rows, columns, 2 * sigmaRows);
+    blurRows(turned, rows, columns, down);
     cells.set(turnOver(turned, rows, columns));
   }
 }

@@ -1,4 +1,4 @@
-import { boxIntersection, boxOfPoints } from "../geometry/box.ts";
+import { boxGrow, boxIntersection, boxOfPoints, boxUnion } from "../geometry/box.ts";
 import type { Box, Point, Region } from "../geometry/path.ts";
 import { base64OfBytes } from "./base64.ts";
 import type { Item } from "./display-list.ts";
@@ -13,8 +13,8 @@ export type ShadowOptions = {
   readonly light: Light;
   /** Height of the surface that receives the shadow, above the back of the board. */
   readonly level: number;
-  /** Where that surface is; nothing is drawn outside this box. */
-  readonly receiver: Box;
+  /** Boxes of what lies at that height; the shadow is made for where casters reach into them. */
+  readonly receivers: readonly Box[];
   readonly casters: readonly Caster[];
   /** Opacity of a full shadow, 0 to 1; a wall far behind gets more of the room's light than the board. */
   readonly strength?: number;
@@ -160,7 +160,7 @@ function castersByTop({ casters, level }: ShadowOptions): Map<number, Caster[]> 
 
 /** The shadow on one level as a mask in the light's own axes; null when nothing falls on the receiver. */
 function levelMask(options: ShadowOptions): { frame: Frame; mask: Mask; reach: Box } | null {
-  const { light, level, receiver } = options;
+  const { light, level, receivers } = options;
   const groups = castersByTop(options);
   const sigmas = [...groups.keys()].map((top) => {
     const width = penumbraMm(top - level, light);
@@ -168,19 +168,19 @@ function levelMask(options: ShadowOptions): { frame: Frame; mask: Mask; reach: B
   });
   const most = Math.max(0, ...sigmas.map(({ along }) => along));
   const fall = shadowDirection(light);
-  // Where shadows can lie at all, on the board: every caster moved by its sweep, and three sigma more.
+  // Where shadows can lie at all, on the board: every caster moved by its sweep, and three sigma more, on what receives them.
   const touched = [...groups.values()].flat().flatMap(({ region, bottom, top }) => {
     const box = boxOfPoints(region.flat());
     if (!box) return [];
-    const sweep = [Math.max(bottom - level, 0), top - level].map((height) => shadowOffsetMm(height, light));
-    return sweep.flatMap((distance) => [
-      { x: box.x + fall.x * distance - 3 * most, y: box.y + fall.y * distance - 3 * most },
-      { x: box.x + box.width + fall.x * distance + 3 * most, y: box.y + box.height + fall.y * distance + 3 * most },
-    ]);
+    const moved = [Math.max(bottom - level, 0), top - level].map((height) => {
+      const distance = shadowOffsetMm(height, light);
+      return { ...box, x: box.x + fall.x * distance, y: box.y + fall.y * distance };
+    });
+    const swept = boxUnion(moved);
+    return swept ? receivers.map((receiver) => boxIntersection(boxGrow(swept, 3 * most), receiver)) : [];
   });
-  const around = boxOfPoints(touched);
-  const reach = around && boxIntersection(around, receiver);
-  if (!reach || reach.width <= 0 || reach.height <= 0) return null;
+  const reach = boxUnion(touched.filter((box) => box !== null && box.width > 0 && box.height > 0));
+  if (!reach) return null;
   const cell = cellMm(reach, Math.min(...sigmas.map(({ across }) => across)));
   const axes = { along: fall, across: { x: -fall.y, y: fall.x } };
   const corners = [0, 1, 2, 3].map((corner) =>
