@@ -1,0 +1,53 @@
+import { expect, it } from "vitest";
+import { colourAgainstArtwork } from "#shared/dry-fit/rules/colour-against-artwork.ts";
+import { standardAcrylics } from "#shared/materials/standard-stock.ts";
+import { buildLayer, buildSign, plate } from "../../../../support/build-sign.ts";
+import { findingsOf } from "../../../../support/dry-fit.ts";
+
+const grey = { ...(standardAcrylics[0]?.acrylic ?? missing()), name: "Grey", colour: "#808080" };
+function missing(): never {
+  throw new Error("There is no acrylic.");
+}
+const drawn = (id: string, colour: string) =>
+  plate(id, 20, 20, [100, 200], {
+    source: { kind: "artwork", artworkId: "6f1d3a52-8f0e-4c0b-9a51-0d3c5c1b7a10", index: 0, colour },
+  });
+const sign = (...colours: string[]) =>
+  buildSign([
+    buildLayer(
+      "B",
+      colours.map((colour, index) => drawn(`p${index}`, colour)),
+      { stock: grey },
+    ),
+  ]);
+
+// Greys differ in lightness only: ΔE00 = ΔL / (1 + 0.015 (L − 50)² / √(20 + (L − 50)²)), L the mean of both (Sharma, Wu, Dalal 2005). From #808080:
+// #858585 1.862, #868686 2.226, #8D8D8D 4.703, #8E8E8E 5.046.
+it.each([
+  { colour: "#808080", severity: null, deltaE: 0 },
+  { colour: "#858585", severity: null, deltaE: 0 },
+  { colour: "#868686", severity: "remark", deltaE: 2.226 },
+  { colour: "#8D8D8D", severity: "remark", deltaE: 4.703 },
+  { colour: "#8E8E8E", severity: "caution", deltaE: 5.046 },
+])("grey stock for artwork of $colour: $severity", async ({ colour, severity, deltaE }) => {
+  const findings = await findingsOf(colourAgainstArtwork, sign(colour));
+  expect(findings.map((finding) => finding.severity)).toEqual(severity ? [severity] : []);
+  for (const { value } of findings) expect(Math.abs((value ?? 0) - deltaE)).toBeLessThanOrEqual(0.006);
+});
+
+it("pieces of one colour are one finding, with a nearer stock where there is one", async () => {
+  const findings = await findingsOf(colourAgainstArtwork, sign("#B4523B", "#808080", "#B4523B"));
+  expect(findings).toMatchObject([{ rule: 23, severity: "caution", pieceIds: ["p0", "p2"], unit: "ΔE00", limit: 5 }]);
+  expect(findings[0]?.text).toContain("Rust comes nearer (ΔE00 0.0).");
+});
+
+it("offers none when nothing on hand comes nearer", async () => {
+  const [finding] = await findingsOf(colourAgainstArtwork, sign("#8E8E8E"), { context: { acrylics: [grey] } });
+  expect(finding?.text).not.toContain("comes nearer");
+});
+
+it("a plate has no artwork to differ from", async () => {
+  expect(
+    await findingsOf(colourAgainstArtwork, buildSign([buildLayer("B", [plate("p", 20, 20, [100, 200])])])),
+  ).toEqual([]);
+});
