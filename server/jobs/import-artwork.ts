@@ -1,5 +1,5 @@
 import { importSvg } from "../artwork/import-svg.ts";
-import { logSystemEvent } from "../commands/log-event.ts";
+import { finishImport } from "../commands/finish-import.ts";
 import type { Services } from "../http/context.ts";
 import { Artwork } from "../models/artwork.ts";
 
@@ -14,22 +14,7 @@ export async function importArtwork(services: Services, { artworkId }: { artwork
   const outcome = await importSvg(bytes, {
     onFault: (message) => services.log.error({ artworkId, fault: message }, "The artwork import broke"),
   });
-  await services.sequelize.transaction(async (transaction) => {
-    const row = await Artwork.findOne({ where: { id: artworkId, state: "importing" }, transaction, lock: true });
-    if (!row) return;
-    const context = { transaction, now: new Date() };
-    const of = { shopId: row.shopId, jobId: row.jobId };
-    if (outcome.ok) {
-      const { pieces, ...summary } = outcome.artwork;
-      await row.update({ state: "ready", summary, pieces: JSON.stringify(pieces) }, { transaction });
-      await logSystemEvent(context, { ...of, kind: "artwork ready", data: { name: row.name, pieces: pieces.length } });
-    } else {
-      await row.update({ state: "refused", refusal: outcome.refusal }, { transaction });
-      await logSystemEvent(context, {
-        ...of,
-        kind: "artwork refused",
-        data: { name: row.name, reason: outcome.refusal.text },
-      });
-    }
-  });
+  await services.sequelize.transaction((transaction) =>
+    finishImport({ transaction, now: new Date() }, { artworkId, outcome }),
+  );
 }

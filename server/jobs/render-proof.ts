@@ -13,14 +13,16 @@ export async function renderProofOfRevision(services: Services, { revisionId }: 
   const revision = await Revision.findOne({ where: { id: revisionId, state: "preparing" } });
   if (!revision) return;
   const outcome = await drawn(revision);
-  if (outcome.ok) await finishIssue(services, { revisionId, pdf: outcome.pdf });
-  else {
-    services.log.error({ err: outcome.error, revisionId }, "The PDF of a revision could not be drawn");
-    await failIssue(services, {
-      revisionId,
-      reason: "The drawing could not be made into a PDF. Nothing went out; issue it again or ask for help.",
-    });
-  }
+  if (!outcome.ok) services.log.error({ err: outcome.error, revisionId }, "The PDF of a revision could not be drawn");
+  await services.sequelize.transaction(async (transaction) => {
+    const context = { services, transaction, now: new Date() };
+    if (outcome.ok) await finishIssue(context, { revisionId, pdf: outcome.pdf });
+    else
+      await failIssue(context, {
+        revisionId,
+        reason: "The drawing could not be made into a PDF. Nothing went out; issue it again or ask for help.",
+      });
+  });
 }
 
 type Drawn = { readonly ok: true; readonly pdf: Uint8Array } | { readonly ok: false; readonly error: unknown };

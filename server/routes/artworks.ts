@@ -67,5 +67,6 @@ export function registerArtworkRoutes(routes: Routes): void {
 
   write(routes, contract.removeArtwork, async (context, { params }) => {
     await removeArtwork(context, params.artworkId);
+    return undefined;
   });
 }

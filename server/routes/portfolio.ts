@@ -38,6 +38,7 @@ export function registerPortfolioRoutes(routes: Routes): void {
 
   write(routes, contract.revokeShareLink, async (context, { params }) => {
     await revokeShareLink(context, params.linkId);
+    return undefined;
   });
 
   write(

@@ -25,7 +25,7 @@ export function orrerySign(artwork: DemoArtwork, { ringThickness }: { ringThickn
         name: "Night disc",
         stock: "Midnight",
         thickness: 4.5,
-        hold: fourStandoffs(standoff("Standoff 15 × 19"), { ...middle, reach: 81, diameter: 7.5 }),
+        hold: fourStandoffs(standoff("Standoff 19 × 19"), { ...middle, reach: 76, diameter: 11 }),
         pieces: [disc("night-disc", "Night disc", { ...middle, radius: 132 })],
       }),
       layer({

@@ -154,7 +154,7 @@ async function loadOrrery({ asMaker, asContact, dueIn }: DemoContexts, ids: Demo
     revisionId: second,
     kind: "question",
     text: "Will the caps be brushed or polished?",
-    anchor: { on: "spot", x: 381, y: 69, layerKey: "B", pieceId: null },
+    anchor: { on: "spot", x: 376, y: 74, layerKey: "B", pieceId: null },
     shopOnly: false,
   });
 }
