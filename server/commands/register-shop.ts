@@ -6,6 +6,7 @@ import type { Context } from "../http/context.ts";
 import { Membership } from "../models/membership.ts";
 import { Person } from "../models/person.ts";
 import { Shop } from "../models/shop.ts";
+import { loadStandardStock } from "./load-standard-stock.ts";
 import { logEvent } from "./log-event.ts";
 
 /**
@@ -32,6 +33,7 @@ export async function registerShop(
     },
     { transaction },
   );
+  await loadStandardStock({ shopId: shop.id, now, transaction });
   const membership = { id: newId(), shopId: shop.id, personId: person.id, role: "owner" as const, createdAt: now };
   await Membership.create(membership, { transaction });
   const actor = { kind: "person", personId: person.id, name: person.name, sessionId: "" } as const;

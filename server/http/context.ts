@@ -31,3 +31,9 @@ export type ReadContext = {
 
 /** A change: one transaction, committed before the answer is sent. */
 export type Context = ReadContext & { readonly transaction: Transaction };
+
+/** The shop of the address. Routes that only insiders reach always have one. */
+export function shopIdOf({ shop }: Pick<ReadContext, "shop">): string {
+  if (!shop) throw new Error("This address names no shop.");
+  return shop.id;
+}

@@ -126,7 +126,8 @@ export type Places = {
 };
 
 /** Every place the session opens. */
-export async function placesOf(live: LiveSession): Promise<Places> {
+export async function placesOf(live: LiveSession, transaction?: Transaction): Promise<Places> {
+  const within = transaction ? { transaction } : {};
   const { session, person } = live;
   const memberships =
     session.began === "password"
@@ -134,6 +135,7 @@ export async function placesOf(live: LiveSession): Promise<Places> {
           where: { personId: person.id, endedAt: null },
           include: [{ model: Shop, as: "shop" }],
           order: ["createdAt", "id"],
+          ...within,
         })
       : [];
   const contacts = speaksForClients(live)
@@ -144,6 +146,7 @@ export async function placesOf(live: LiveSession): Promise<Places> {
           { model: Client, as: "client" },
         ],
         order: ["createdAt", "id"],
+        ...within,
       })
     : [];
   return {

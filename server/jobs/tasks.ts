@@ -1,8 +1,9 @@
 import type { Services } from "../http/context.ts";
 import { importArtwork } from "./import-artwork.ts";
-import { makeCertificate } from "./make-certificate.ts";
+import { makeCertificateOfDecision } from "./make-certificate.ts";
 import type { JobName, JobPayloads } from "./queue.ts";
 import { renderProofOfRevision } from "./render-proof.ts";
+import { sendMail } from "./send-mail.ts";
 
 /**
  * Does one job. Running it again must change nothing more: a job that was cut off is run again. It throws when it
@@ -12,7 +13,8 @@ export type Task<N extends JobName> = (services: Services, payload: JobPayloads[
 
 /** Every job the queue knows. */
 export const tasks: { readonly [N in JobName]?: Task<N> } = {
+  "send-mail": sendMail,
   "import-artwork": importArtwork,
   "render-proof": renderProofOfRevision,
-  "make-certificate": makeCertificate,
+  "make-certificate": makeCertificateOfDecision,
 };

@@ -1,3 +1,4 @@
+import { z } from "zod";
 import { AppError } from "../http/app-error.ts";
 
 /** One page of a list and the cursor of the next, null at the end. */
@@ -15,10 +16,23 @@ export function readCursor(cursor: string | undefined, length: number): (string 
   const plain =
     Array.isArray(values) &&
     values.every((value) => value === null || typeof value === "string" || typeof value === "number");
-  if (!plain || values.length !== length)
-    throw new AppError("malformed_request", { detail: "This place in the list is not known. Start at its beginning." });
+  if (!plain || values.length !== length) throw unknownPlace();
   return values;
 }
+
+const unknownPlace = (): AppError =>
+  new AppError("malformed_request", { detail: "This place in the list is not known. Start at its beginning." });
+
+/** Reads the cursor of a list ordered by time and id back. */
+export function readTimeCursor(cursor: string | undefined): { at: string; id: string } | null {
+  const values = readCursor(cursor, 2);
+  if (values === null) return null;
+  const outcome = timePlace.safeParse({ at: values[0], id: values[1] });
+  if (!outcome.success) throw unknownPlace();
+  return outcome.data;
+}
+
+const timePlace = z.object({ at: z.iso.datetime(), id: z.uuid() });
 
 function parsed(cursor: string): unknown {
   try {

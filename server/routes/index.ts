@@ -1,16 +1,28 @@
 import type { Routes } from "../http/route.ts";
+import { registerAccountRoutes } from "./account.ts";
 import { registerArtworkRoutes } from "./artworks.ts";
+import { registerClientRoutes } from "./clients.ts";
 import { registerJobRoutes } from "./jobs.ts";
+import { registerLinkRoutes } from "./links.ts";
 import { registerMockupRoutes } from "./mockups.ts";
 import { registerNoteRoutes } from "./notes.ts";
+import { registerOutgoingMailRoutes } from "./outgoing-mail.ts";
 import { registerPortfolioRoutes } from "./portfolio.ts";
 import { registerRevisionRoutes } from "./revisions.ts";
+import { registerShopRoutes } from "./shop.ts";
 import { registerStockRoutes } from "./stock.ts";
 import { registerSystemRoutes } from "./system.ts";
+import { registerTeamRoutes } from "./team.ts";
 
 /** Every route of the application, one line a noun. */
 export function registerRoutes(routes: Routes): void {
   registerSystemRoutes(routes);
+  registerAccountRoutes(routes);
+  registerLinkRoutes(routes);
+  registerShopRoutes(routes);
+  registerTeamRoutes(routes);
+  registerClientRoutes(routes);
+  registerOutgoingMailRoutes(routes);
   registerArtworkRoutes(routes);
   registerJobRoutes(routes);
   registerMockupRoutes(routes);

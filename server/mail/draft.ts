@@ -1,0 +1,31 @@
+import type { OneTimeLink } from "../models/one-time-link.ts";
+import type { Letter } from "./letter.ts";
+
+/** A link that signs in, joins or sets a password: whom it is for and how long it holds. */
+export type LinkOrder = Pick<OneTimeLink, "purpose"> & {
+  readonly hours: number;
+  readonly contactId?: string;
+  readonly personId?: string;
+  readonly invitationId?: string;
+  readonly goTo: string | null;
+};
+
+/** A mail with all its words, but with the link still to be made. */
+export type Draft = {
+  readonly greeting: string;
+  readonly sender: string | null;
+  readonly letter: Omit<Letter, "button">;
+  /** Where the button leads: to a link of its own, to a page of the application, or there is no button. */
+  readonly button: { readonly label: string; readonly leadsTo: LinkOrder | string } | null;
+};
+
+/** How long each kind of link holds, in hours. */
+export const linkHours = { "sign in": 14 * 24, "join shop": 7 * 24, "new password": 1 } as const;
+
+export const linkRemarks = {
+  "sign in":
+    "The link signs you in without a password. It works once and holds for 14 days; after that its page sends you a fresh one.",
+  "join shop": "The link works once and holds for 7 days.",
+  "new password":
+    "The link works once and holds for one hour. If you did not ask for it, leave it be: your password stays as it is.",
+} as const;

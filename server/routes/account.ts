@@ -1,0 +1,46 @@
+import * as contract from "#shared/contracts/account.ts";
+import { endSession } from "../commands/end-session.ts";
+import { changePassword } from "../commands/set-password.ts";
+import { AppError, notFound } from "../http/app-error.ts";
+import type { ReadContext } from "../http/context.ts";
+import { type Routes, read, write } from "../http/route.ts";
+import type { LiveSession } from "../http/session.ts";
+import { presentMe } from "../presenters/me.ts";
+import { presentSession } from "../presenters/session.ts";
+import { liveSessionOf, liveSessionsOf, ownSession } from "../queries/live-sessions.ts";
+
+export function registerAccountRoutes(routes: Routes): void {
+  read(routes, contract.whoAmI, async (context) => presentMe(await ownSession(context)), { reach: "anyone" });
+
+  write(routes, contract.changeAccount, async (context, { body }) => {
+    const live = await signedIn(context);
+    await live.person.update({ name: body.name }, { transaction: context.transaction });
+    return presentMe(live, context.transaction);
+  });
+
+  write(routes, contract.changePassword, async (context, { body }) => {
+    const { person, session } = await signedIn(context);
+    await changePassword(context, { personId: person.id, sessionId: session.id, ...body });
+    return undefined;
+  });
+
+  read(routes, contract.listSessions, async (context) => {
+    const { person, session } = await signedIn(context);
+    const sessions = await liveSessionsOf(context, person.id);
+    return { items: sessions.map((each) => presentSession(each, { currentId: session.id })) };
+  });
+
+  write(routes, contract.endSession, async (context, { params }) => {
+    const { person } = await signedIn(context);
+    const session = await liveSessionOf(context, { personId: person.id, sessionId: params.sessionId });
+    if (!session) throw notFound("session");
+    await endSession({ sessionId: session.id, now: context.now, transaction: context.transaction });
+    return undefined;
+  });
+}
+
+async function signedIn(context: ReadContext): Promise<LiveSession> {
+  const live = await ownSession(context);
+  if (!live) throw new AppError("not_signed_in");
+  return live;
+}
