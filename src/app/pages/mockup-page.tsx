@@ -1,0 +1,72 @@
+import { useQuery, useQueryClient } from "@tanstack/react-query";
+import { useNavigate, useParams } from "react-router-dom";
+import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
+import { Skeleton } from "@/components/ui/skeleton.tsx";
+import { mockupQueries } from "@/features/mockup/api/queries.ts";
+import { MockupDesk } from "@/features/mockup/panels/mockup-desk.tsx";
+import { MockupReadOnly } from "@/features/mockup/panels/mockup-read-only.tsx";
+import { usePageTitle } from "@/lib/page-title.ts";
+import { useReader } from "@/lib/shop-context.ts";
+import { useMedia } from "@/lib/use-media.ts";
+import { HeaderTools } from "../header-tools.tsx";
+import { paths } from "../paths.ts";
+
+/** The mockup of a job: the desk where there is room for it and the right to change it, else a picture to look at. */
+export function MockupPage() {
+  const { jobId = "" } = useParams();
+  const { shop, person } = useReader();
+  const navigate = useNavigate();
+  const client = useQueryClient();
+  const isWide = useMedia("(min-width: 900px)");
+  const job = useQuery(mockupQueries.job(shop.slug, jobId));
+  const mockup = useQuery(mockupQueries.ofJob(shop.slug, jobId));
+  const stock = useQuery(mockupQueries.stock(shop.slug));
+  usePageTitle(job.data ? `${job.data.title}, mockup` : "Mockup");
+
+  const failed = [job, mockup, stock].find((query) => query.isError && query.data === undefined);
+  if (failed)
+    return (
+      <div className="mx-auto max-w-3xl px-4 py-8">
+        <ProblemNotice
+          what="The mockup could not be loaded."
+          error={failed.error}
+          onRetry={() => void failed.refetch()}
+        />
+      </div>
+    );
+  if (!job.data || !mockup.data || !stock.data)
+    return (
+      <div className="px-4 py-8 sm:px-6">
+        <Skeleton label="Loading the mockup" />
+      </div>
+    );
+  if (!mockup.data.can.edit || !isWide)
+    return (
+      <MockupReadOnly
+        unit={shop.unit}
+        job={job.data}
+        mockup={mockup.data}
+        why={
+          mockup.data.can.edit
+            ? "To change the mockup, open it in a window at least 900 px wide. Here it can be looked at."
+            : "You may look at this mockup. Owners and makers change it."
+        }
+      />
+    );
+  return (
+    <MockupDesk
+      key={jobId}
+      shop={shop.slug}
+      unit={shop.unit}
+      personId={person.id}
+      job={job.data}
+      mockup={mockup.data}
+      stock={stock.data}
+      jobPath={paths.job(shop.slug, jobId)}
+      // A window that is made narrow and wide again goes on from what was saved last.
+      onSaved={(saved) => client.setQueryData(mockupQueries.ofJob(shop.slug, jobId).queryKey, saved)}
+      onIssued={(revisionId) => void navigate(paths.sheet(shop.slug, revisionId))}
+      renderTools={(tools) => <HeaderTools>{tools}</HeaderTools>}
+    />
+  );
+}

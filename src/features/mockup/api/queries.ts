@@ -1,0 +1,59 @@
+import { queryOptions } from "@tanstack/react-query";
+import { type Artwork, getArtworkPieces, listArtworks } from "#shared/contracts/artworks.ts";
+import { getJob } from "#shared/contracts/jobs.ts";
+import { getMockup } from "#shared/contracts/mockups.ts";
+import { listStock, type StockItem } from "#shared/contracts/stock.ts";
+import { call } from "@/lib/api-client.ts";
+import { keys } from "@/lib/query-keys.ts";
+
+/** More pages than a shop has stock or a job has artwork: a list that never ends is a fault of ours. */
+const mostPages = 50;
+
+async function allPages<T>(page: (cursor: string | undefined) => Promise<{ items: T[]; next: string | null }>) {
+  const items: T[] = [];
+  let cursor: string | undefined;
+  for (let count = 0; count < mostPages; count++) {
+    const answer = await page(cursor);
+    items.push(...answer.items);
+    if (answer.next === null) break;
+    cursor = answer.next;
+  }
+  return items;
+}
+
+export const mockupQueries = {
+  /** Read once when the mockup is opened: from there on the screen holds the draft and saves it. */
+  ofJob: (shop: string, jobId: string) =>
+    queryOptions({
+      // Not below the job: what refreshes a job must not fetch a draft anew that is being worked on.
+      queryKey: ["mockup", shop, jobId],
+      queryFn: ({ signal }) => call(getMockup, { params: { shop, jobId }, signal }),
+      staleTime: Number.POSITIVE_INFINITY,
+      gcTime: 0,
+      refetchOnWindowFocus: false,
+      refetchOnReconnect: false,
+    }),
+  job: (shop: string, jobId: string) =>
+    queryOptions({
+      queryKey: keys.job(shop, jobId),
+      queryFn: ({ signal }) => call(getJob, { params: { shop, jobId }, signal }),
+    }),
+  stock: (shop: string) =>
+    queryOptions({
+      queryKey: [...keys.stock(shop), "all"],
+      queryFn: ({ signal }): Promise<StockItem[]> =>
+        allPages((cursor) => call(listStock, { params: { shop }, query: { limit: 100, cursor }, signal })),
+      staleTime: 60_000,
+    }),
+  artworks: (shop: string, jobId: string) =>
+    queryOptions({
+      queryKey: [...keys.job(shop, jobId), "artworks", "all"],
+      queryFn: ({ signal }): Promise<Artwork[]> =>
+        allPages((cursor) => call(listArtworks, { params: { shop, jobId }, query: { limit: 100, cursor }, signal })),
+    }),
+  pieces: (shop: string, artworkId: string) =>
+    queryOptions({
+      queryKey: ["artwork", shop, artworkId, "pieces"],
+      queryFn: ({ signal }) => call(getArtworkPieces, { params: { shop, artworkId }, signal }),
+    }),
+};

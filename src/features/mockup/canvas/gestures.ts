@@ -1,0 +1,120 @@
+import type { Canvas, TPointerEvent } from "fabric/es";
+import type { Point } from "#shared/geometry/path.ts";
+import { type DrawingView, spotOnDrawing, viewFollowing, viewScaled } from "@/lib/drawing-view.ts";
+
+/** What lies under a finger. */
+export type Touched = { readonly kind: "piece" | "hole"; readonly id: string };
+
+/** Keys held while pressing or dragging: `more` adds to what is chosen, `free` lets nothing catch. */
+export type Held = { readonly more: boolean; readonly free: boolean };
+
+/** What the canvas does for a gesture. Points are mm of the board, view and places px of the window. */
+export type GestureHost = {
+  readonly view: () => DrawingView;
+  readonly fit: () => DrawingView;
+  readonly showView: (view: DrawingView) => void;
+  readonly touched: (point: Point) => Touched | null;
+  /** Whether a drag from empty ground, or with the space bar down, looks around. */
+  readonly spaceDown: () => boolean;
+  readonly press: (touched: Touched | null, held: Held) => void;
+  readonly pressTwice: (touched: Touched) => void;
+  /** `by` is measured from where the hand took hold. False when nothing can be dragged. */
+  readonly drag: (touched: Touched, from: Point, by: { dx: number; dy: number }, held: Held) => void;
+  readonly drop: () => void;
+  readonly giveUp: () => void;
+};
+
+/** A hand that trembles by so many px still presses; more than that drags. */
+const dragFromPx = 4;
+const twiceWithinMs = 400;
+
+type Place = { readonly x: number; readonly y: number };
+type Pan = { readonly view: DrawingView; readonly from: ReadonlyMap<number, Place> };
+type Hold = { readonly touched: Touched; readonly place: Place; readonly point: Point; moved: boolean };
+
+/** Listens to a canvas and turns presses, drags, wheel and two fingers into what the host does. Gives back how to stop. */
+export function listenToCanvas(canvas: Canvas, host: GestureHost): () => void {
+  const fingers = new Map<number, Place>();
+  let pan: Pan | null = null;
+  let hold: Hold | null = null;
+  let lastPress: { id: string; at: number } | null = null;
+
+  const pointOf = (place: Place): Point => spotOnDrawing(host.view(), place);
+  const heldOf = (event: PointerEvent): Held => ({ more: event.shiftKey, free: event.altKey });
+
+  function letGo() {
+    if (hold?.moved) host.giveUp();
+    hold = null;
+  }
+
+  function handleDown({ e, viewportPoint }: { e: TPointerEvent; viewportPoint: Place }) {
+    if (!(e instanceof PointerEvent)) return;
+    const place = { x: viewportPoint.x, y: viewportPoint.y };
+    fingers.set(e.pointerId, place);
+    canvas.upperCanvasEl.setPointerCapture(e.pointerId);
+    const looksAround = e.button === 1 || host.spaceDown();
+    if (fingers.size > 1 || looksAround) {
+      letGo();
+      pan = { view: host.view(), from: new Map(fingers) };
+      return;
+    }
+    if (e.button !== 0) return;
+    const point = pointOf(place);
+    const touched = host.touched(point);
+    const twice = touched !== null && lastPress?.id === touched.id && e.timeStamp - lastPress.at < twiceWithinMs;
+    lastPress = touched === null ? null : { id: touched.id, at: e.timeStamp };
+    if (touched !== null && twice) host.pressTwice(touched);
+    else host.press(touched, heldOf(e));
+    if (touched === null) pan = { view: host.view(), from: new Map(fingers) };
+    else hold = { touched, place, point, moved: false };
+  }
+
+  function handleMove({ e, viewportPoint }: { e: TPointerEvent; viewportPoint: Place }) {
+    if (!(e instanceof PointerEvent) || !fingers.has(e.pointerId)) return;
+    const place = { x: viewportPoint.x, y: viewportPoint.y };
+    fingers.set(e.pointerId, place);
+    if (pan !== null) {
+      const ids = [...pan.from.keys()].filter((id) => fingers.has(id)).slice(0, 2);
+      const placesIn = (map: ReadonlyMap<number, Place>) => ids.flatMap((id) => map.get(id) ?? []);
+      host.showView(viewFollowing(pan.view, placesIn(pan.from), placesIn(fingers), host.fit()));
+      return;
+    }
+    if (hold === null) return;
+    if (!hold.moved && Math.hypot(place.x - hold.place.x, place.y - hold.place.y) < dragFromPx) return;
+    hold.moved = true;
+    const point = pointOf(place);
+    host.drag(hold.touched, hold.point, { dx: point.x - hold.point.x, dy: point.y - hold.point.y }, heldOf(e));
+  }
+
+  function handleUp({ e }: { e: TPointerEvent }) {
+    if (!(e instanceof PointerEvent) || !fingers.delete(e.pointerId)) return;
+    if (pan !== null) pan = fingers.size === 0 ? null : { view: host.view(), from: new Map(fingers) };
+    if (hold?.moved) host.drop();
+    hold = null;
+  }
+
+  function handleWheel({ e, viewportPoint }: { e: WheelEvent; viewportPoint: Place }) {
+    e.preventDefault();
+    const notch = e.deltaMode === WheelEvent.DOM_DELTA_PIXEL ? e.deltaY : e.deltaY * 33;
+    const factor = Math.exp(-notch * (e.ctrlKey ? 0.01 : 0.0018));
+    host.showView(viewScaled(host.view(), factor, viewportPoint, host.fit()));
+  }
+
+  function handleCancel() {
+    fingers.clear();
+    pan = null;
+    letGo();
+  }
+
+  const offs = [
+    canvas.on("mouse:down:before", handleDown),
+    canvas.on("mouse:move:before", handleMove),
+    canvas.on("mouse:up:before", handleUp),
+    canvas.on("mouse:wheel", handleWheel),
+  ];
+  canvas.upperCanvasEl.addEventListener("pointercancel", handleCancel);
+  return () => {
+    for (const off of offs) off();
+    canvas.upperCanvasEl.removeEventListener("pointercancel", handleCancel);
+  };
+}

@@ -1,0 +1,57 @@
+import type { DisplayList } from "#shared/drawing/display-list.ts";
+import { boardOriginOf } from "#shared/drawing/elevation.ts";
+import { smallTextMm } from "#shared/drawing/type.ts";
+import type { DrawingView, Size } from "@/lib/drawing-view.ts";
+
+/** Lettering on a screen that shows the whole board, in px of the em. */
+const letterPx = 13;
+/** What a mm of paper is on a screen that shows the whole board. */
+const pxPerPaperMm = letterPx / smallTextMm;
+const edgePx = 10;
+/** Kept free above, where the section beside it has its heading and one row of dimensions more. */
+const headingPx = 26;
+
+/** Room for dimensions around the board, in mm of paper: it does not change with the size of board or window. */
+export type PaperMargins = {
+  readonly left: number;
+  readonly top: number;
+  readonly right: number;
+  readonly bottom: number;
+};
+
+/** Three rows below and at the right, as most signs have them, for the time before the first picture. */
+export const usualMargins: PaperMargins = { left: 14, top: 14, right: 27, bottom: 30 };
+
+/** The margins of a picture of `drawElevation`, to half a mm so that the window stays still over changes that don't matter. */
+export function marginsOf(list: DisplayList, board: Size, paperScale: number): PaperMargins {
+  const origin = boardOriginOf(list) ?? { x: 0, y: 0 };
+  const paper = (mm: number) => Math.round((mm / paperScale) * 2) / 2;
+  return {
+    left: paper(origin.x),
+    top: paper(origin.y),
+    right: paper(list.widthMm - origin.x - board.width),
+    bottom: paper(list.heightMm - origin.y - board.height),
+  };
+}
+
+/** The view of a whole board with its dimensions in a window: where its upper left corner lies, and how large a mm is. */
+export function fitBoard(board: Size, margins: PaperMargins, room: Size): DrawingView {
+  const px = (paper: number) => paper * pxPerPaperMm;
+  const left = edgePx + px(margins.left);
+  const top = headingPx + edgePx + px(margins.top);
+  const across = room.width - left - edgePx - px(margins.right);
+  const down = room.height - top - edgePx - px(margins.bottom);
+  const scale = Math.max(0.01, Math.min(across / board.width, down / board.height));
+  return { scale, x: left + (across - board.width * scale) / 2, y: top + (down - board.height * scale) / 2 };
+}
+
+/** How many mm of the sign are one of paper, where a mm of the sign is `scale` px. */
+export function paperScaleAt(scale: number): number {
+  return Number((pxPerPaperMm / scale).toPrecision(3));
+}
+
+/** A view with a spot of the board in the middle, close enough to see it well. */
+export function viewAt(spot: { readonly x: number; readonly y: number }, fit: DrawingView, room: Size): DrawingView {
+  const scale = fit.scale * 3;
+  return { scale, x: room.width / 2 - spot.x * scale, y: room.height / 2 - spot.y * scale };
+}

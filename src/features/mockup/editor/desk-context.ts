@@ -1,0 +1,28 @@
+import { createContext, useContext } from "react";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Figures } from "#shared/stack/figures.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
+import type { Edit } from "../model/editor.ts";
+import type { Selection } from "../model/selection.ts";
+import type { StockChoices } from "../model/stock-choices.ts";
+
+/** What every panel of the mockup works on. */
+export type Desk = {
+  readonly document: MockupDocument;
+  readonly selection: Selection;
+  readonly unit: LengthUnit;
+  readonly stock: StockChoices;
+  /** Of the document, or of what it was a moment ago; null until they were first computed. */
+  readonly figures: Figures | null;
+  readonly edit: (edit: Edit) => void;
+  readonly choose: (selection: Selection) => void;
+};
+
+export const DeskContext = createContext<Desk | null>(null);
+
+/** The desk of the mockup that is open. Only below it. */
+export function useDesk(): Desk {
+  const desk = useContext(DeskContext);
+  if (desk === null) throw new Error("useDesk is used outside a mockup");
+  return desk;
+}

@@ -1,0 +1,22 @@
+import { loadKernel } from "@/lib/load-kernel.ts";
+import { drawPicture } from "./draw-picture.ts";
+import type { PictureAnswer, PictureOutcome, PictureRequest } from "./picture-messages.ts";
+
+/** Figures and pictures are made here, so that the page never waits for them. */
+addEventListener("message", (event: MessageEvent<PictureRequest>) => {
+  void answer(event.data);
+});
+
+async function answer({ sequence, ...input }: PictureRequest): Promise<void> {
+  const message: PictureAnswer = { sequence, outcome: await outcomeOf(input) };
+  postMessage(message);
+}
+
+async function outcomeOf(input: Omit<PictureRequest, "sequence">): Promise<PictureOutcome> {
+  try {
+    return { ok: true, picture: drawPicture(input, await loadKernel()) };
+  } catch (error) {
+    // The page says it in words; the cause is only of use to us.
+    return { ok: false, reason: error instanceof Error ? error.message : String(error) };
+  }
+}

@@ -1,0 +1,33 @@
+import type { DisplayList } from "#shared/drawing/display-list.ts";
+import type { Finding } from "#shared/dry-fit/finding.ts";
+import type { DryFitContext } from "#shared/dry-fit/rule.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Figures } from "#shared/stack/figures.ts";
+
+/** What a picture is made of. */
+export type PictureInput = {
+  readonly document: MockupDocument;
+  readonly context: DryFitContext;
+  /** Millimetres of the sign to one on paper: sizes lettering and lines for the window. */
+  readonly paperScale: number;
+  /** Whether to run the dry fit, too. Left out while something is dragged. */
+  readonly dryFit: boolean;
+};
+
+/** `fine` is the number of rules that found nothing. */
+export type DryFit = { readonly findings: readonly Finding[]; readonly fine: number };
+
+export type Picture = {
+  readonly figures: Figures;
+  readonly elevation: DisplayList;
+  /** null when the dry fit was left out. */
+  readonly dryFit: DryFit | null;
+};
+
+export type PictureOutcome =
+  | { readonly ok: true; readonly picture: Picture }
+  | { readonly ok: false; readonly reason: string };
+
+export type PictureRequest = PictureInput & { readonly sequence: number };
+export type PictureAnswer = { readonly sequence: number; readonly outcome: PictureOutcome };
+export type PictureResult = { readonly input: PictureInput; readonly outcome: PictureOutcome };

@@ -1,0 +1,48 @@
+import { boxUnion } from "#shared/geometry/box.ts";
+import type { Box } from "#shared/geometry/path.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Figures } from "#shared/stack/figures.ts";
+import type { Shift } from "./shifts.ts";
+
+/** The box around pieces, from figures and what was moved since they were computed; null for none. */
+export function boxOfChosen(
+  figures: Figures,
+  pieceIds: readonly string[],
+  shifts: ReadonlyMap<string, Shift>,
+): Box | null {
+  const chosen = new Set(pieceIds);
+  return boxUnion(
+    figures.pieces
+      .filter(({ pieceId }) => chosen.has(pieceId))
+      .map(({ pieceId, box }) => {
+        const { dx, dy } = shifts.get(pieceId) ?? { dx: 0, dy: 0 };
+        return { ...box, x: box.x + dx, y: box.y + dy };
+      }),
+  );
+}
+
+/** The boxes of all other layers, which moved pieces can be lined up with. A layer counts without the pieces that move. */
+export function boxesToLineUpWith(figures: Figures, movedIds: readonly string[]): Box[] {
+  const moved = new Set(movedIds);
+  return figures.layers.flatMap(({ key }) => {
+    const still = figures.pieces.filter(({ layerKey, pieceId }) => layerKey === key && !moved.has(pieceId));
+    return boxUnion(still.map(({ box }) => box)) ?? [];
+  });
+}
+
+export type HoleOnBoard = {
+  readonly id: string;
+  readonly x: number;
+  readonly y: number;
+  readonly capDiameter: number;
+};
+
+/** A hole by its id, with the diameter of the cap over it. */
+export function findHole(document: MockupDocument, holeId: string): HoleOnBoard | null {
+  for (const { hold } of document.layers) {
+    if (hold.kind !== "standoff") continue;
+    const hole = hold.holes.find(({ id }) => id === holeId);
+    if (hole) return { id: hole.id, x: hole.x, y: hole.y, capDiameter: hold.hardware.capDiameter };
+  }
+  return null;
+}

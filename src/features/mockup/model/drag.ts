@@ -1,0 +1,43 @@
+import type { CapStud, MockupDocument } from "#shared/mockup/document.ts";
+import type { Guide } from "./catch-guides.ts";
+import { setHole } from "./commands/holes.ts";
+import { movePieces } from "./commands/pieces.ts";
+import { raiseLayer } from "./commands/set-hold.ts";
+
+/** What a hand is moving, measured from where it took hold. */
+export type Drag =
+  | {
+      readonly kind: "pieces";
+      readonly pieceIds: readonly string[];
+      readonly dx: number;
+      readonly dy: number;
+      readonly guides: readonly Guide[];
+    }
+  | { readonly kind: "hole"; readonly holeId: string; readonly x: number; readonly y: number }
+  /** In the section: `hardware` when the offset caught on a barrel. */
+  | { readonly kind: "raise"; readonly key: string; readonly offset: number; readonly hardware: CapStud | undefined };
+
+/** The document as it would be if the hand let go now. */
+export function documentOfDrag(document: MockupDocument, drag: Drag | null): MockupDocument {
+  if (drag === null) return document;
+  switch (drag.kind) {
+    case "pieces":
+      return movePieces(document, drag);
+    case "hole":
+      return setHole(document, drag);
+    case "raise":
+      return raiseLayer(document, drag);
+  }
+}
+
+/** What letting go is called in the list of steps. */
+export function labelOfDrag(drag: Drag): string {
+  switch (drag.kind) {
+    case "pieces":
+      return "Move pieces";
+    case "hole":
+      return "Move a hole";
+    case "raise":
+      return `Raise ${drag.key}`;
+  }
+}

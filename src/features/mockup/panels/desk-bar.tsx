@@ -1,0 +1,62 @@
+import type { ReactNode } from "react";
+import { useDesk } from "../editor/desk-context.ts";
+import { centrePieces, turnPieces } from "../model/commands/pieces.ts";
+import { WordButton } from "./cell-controls.tsx";
+
+type DeskBarProps = {
+  readonly client: string;
+  readonly title: string;
+  readonly onBringIn: () => void;
+  readonly onPlate: () => void;
+  readonly onBoard: () => void;
+  readonly onKeys: () => void;
+};
+
+/** What can be brought in, and how what is chosen is set out. */
+export function DeskBar({ client, title, onBringIn, onPlate, onBoard, onKeys }: DeskBarProps) {
+  const { selection, edit } = useDesk();
+  const { pieceIds } = selection;
+  const idle = pieceIds.length === 0;
+  const centre = (way: "across" | "down") =>
+    edit({ label: `Centre ${way}`, change: (before) => centrePieces(before, { pieceIds, way }) });
+  const turn = (by: number) => edit({ label: "Turn pieces", change: (before) => turnPieces(before, { pieceIds, by }) });
+
+  return (
+    <div className="flex flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-1 sm:px-6">
+      <h1 className="font-sans text-sm text-ink">
+        {client}, {title}, <span className="font-semibold">mockup</span>
+      </h1>
+      <Group title="Bring in">
+        <WordButton onClick={onBringIn}>artwork</WordButton>
+        <WordButton onClick={onPlate}>a plate</WordButton>
+      </Group>
+      <Group title="Set out">
+        <WordButton disabled={idle} onClick={() => centre("across")}>
+          centre across
+        </WordButton>
+        <WordButton disabled={idle} onClick={() => centre("down")}>
+          centre down
+        </WordButton>
+        <WordButton disabled={idle} onClick={() => turn(-15)}>
+          turn left 15°
+        </WordButton>
+        <WordButton disabled={idle} onClick={() => turn(15)}>
+          turn right 15°
+        </WordButton>
+      </Group>
+      <span className="ml-auto flex items-center gap-2">
+        <WordButton onClick={onBoard}>Board</WordButton>
+        <WordButton onClick={onKeys}>Keys</WordButton>
+      </span>
+    </div>
+  );
+}
+
+function Group({ title, children }: { readonly title: string; readonly children: ReactNode }) {
+  return (
+    <fieldset className="flex flex-wrap items-center gap-x-2">
+      <legend className="float-left mr-2 text-sm font-semibold text-ink">{title}</legend>
+      {children}
+    </fieldset>
+  );
+}

@@ -1,0 +1,92 @@
+import { useState } from "react";
+import type { Job } from "#shared/contracts/jobs.ts";
+import { nextRevisionLetter } from "#shared/lifecycle/revision-letter.ts";
+import { Button } from "@/components/ui/button.tsx";
+import { counted } from "@/lib/format.ts";
+import type { Saving } from "../editor/use-autosave.ts";
+import type { DryFit } from "../engine/picture-messages.ts";
+import type { History } from "../model/history.ts";
+import { WordButton } from "./cell-controls.tsx";
+import { IssueDialog } from "./issue-dialog.tsx";
+import { SavedState } from "./saved-state.tsx";
+
+type DeskToolsProps = {
+  readonly shop: string;
+  readonly job: Job;
+  readonly mayIssue: boolean;
+  readonly saving: Saving;
+  readonly history: History;
+  readonly dryFit: DryFit | null;
+  /** Whether the dry fit is of the drawing as it is now. */
+  readonly isCurrent: boolean;
+  readonly onUndo: () => void;
+  readonly onRedo: () => void;
+  readonly onIssued: (revisionId: string) => void;
+};
+
+/** Saved or not, a step back and forward, and the one main action: to issue the mockup as the next revision. */
+export function DeskTools(props: DeskToolsProps) {
+  const { shop, job, mayIssue, saving, history, dryFit, isCurrent, onUndo, onRedo, onIssued } = props;
+  const [open, setOpen] = useState(false);
+  const letter = nextRevisionLetter(job.latest?.letter ?? null);
+  const why = whyNotToIssue({ dryFit, isCurrent, isEmpty: history.present.layers.length === 0 });
+  const lastStep = history.past.at(-1)?.label;
+  const nextStep = history.future[0]?.label;
+
+  return (
+    <>
+      <SavedState autosave={saving.autosave} keptHere={saving.keptHere} />
+      <WordButton disabled={lastStep === undefined} title={lastStep} onClick={onUndo}>
+        Undo
+      </WordButton>
+      <WordButton disabled={nextStep === undefined} title={nextStep} onClick={onRedo}>
+        Redo
+      </WordButton>
+      {mayIssue && (
+        <span className="flex items-center gap-3">
+          {why !== null && (
+            <span id="why-not-to-issue" className="max-w-56 text-fine text-graphite">
+              {why}
+            </span>
+          )}
+          <Button
+            kind="primary"
+            size="small"
+            disabled={why !== null}
+            aria-describedby={why === null ? undefined : "why-not-to-issue"}
+            onClick={() => setOpen(true)}
+          >
+            Issue revision {letter}
+          </Button>
+        </span>
+      )}
+      <IssueDialog
+        open={open}
+        onOpenChange={setOpen}
+        shop={shop}
+        jobId={job.id}
+        letter={letter}
+        client={job.client.name}
+        save={saving.saveNow}
+        onIssued={onIssued}
+      />
+    </>
+  );
+}
+
+/** Why a revision can't be issued now, in words; null when it can. */
+function whyNotToIssue({
+  dryFit,
+  isCurrent,
+  isEmpty,
+}: {
+  dryFit: DryFit | null;
+  isCurrent: boolean;
+  isEmpty: boolean;
+}) {
+  if (isEmpty) return "Nothing is on the board yet.";
+  if (dryFit === null) return "The dry fit is running.";
+  const stops = dryFit.findings.filter(({ severity }) => severity === "stop").length;
+  if (stops > 0) return `The dry fit has ${counted(stops, "stop")}.`;
+  return isCurrent ? null : "The dry fit is running.";
+}

@@ -1,0 +1,137 @@
+import type { Hold, Layer } from "#shared/mockup/document.ts";
+import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { cx } from "@/lib/cx.ts";
+import { useDesk } from "../editor/desk-context.ts";
+import { newId } from "../editor/new-id.ts";
+import { addHole, fixHole, proposeHoles, removeHole, setHole } from "../model/commands/holes.ts";
+import { boxOfPieces } from "../model/commands/pieces.ts";
+import { chooseHole } from "../model/selection.ts";
+import { CellLength, WordButton } from "./cell-controls.tsx";
+
+type HolesTableProps = { readonly layer: Layer; readonly hold: Extract<Hold, { kind: "standoff" }> };
+
+/** The standoff holes of a layer: where they are, how wide, and which one is fixed. */
+export function HolesTable({ layer, hold }: HolesTableProps) {
+  const { document, selection, edit, choose, unit } = useDesk();
+  const { key } = layer;
+
+  function add() {
+    const box = boxOfPieces(
+      document,
+      layer.pieces.map(({ id }) => id),
+    );
+    const at = box ?? { x: 0, y: 0, width: document.board.width, height: document.board.height };
+    const id = newId();
+    edit({
+      label: `Add a hole to ${key}`,
+      change: (before) => addHole(before, { key, id, x: at.x + at.width / 2, y: at.y + at.height / 2 }),
+      choose: (after) => chooseHole(after, id),
+    });
+  }
+
+  return (
+    <div>
+      <div className="flex flex-wrap items-baseline gap-x-3 pb-1">
+        <h3 className="font-serif text-sm font-bold text-ink">Holes of {key}</h3>
+        <WordButton onClick={add}>Add a hole</WordButton>
+        <WordButton
+          onClick={() => {
+            const id = newId();
+            edit({ label: `Propose holes in ${key}`, change: (before) => proposeHoles(before, { key, id }) });
+          }}
+        >
+          Propose holes near the corners
+        </WordButton>
+      </div>
+      {hold.holes.length === 0 ? (
+        <p className="text-sm text-graphite">No holes yet: nothing holds this layer. Add one, or have four proposed.</p>
+      ) : (
+        <Table caption={`Holes of ${key}`}>
+          <thead>
+            <tr>
+              {["Hole", `x, ${unit}`, `y, ${unit}`, `Diameter, ${unit}`, "Fixed"].map((head) => (
+                <HeadCell key={head} className="py-1.5">
+                  {head}
+                </HeadCell>
+              ))}
+              <HeadCell className="py-1.5">
+                <span className="sr-only">Removal</span>
+              </HeadCell>
+            </tr>
+          </thead>
+          <tbody>
+            {hold.holes.map((hole, index) => {
+              const title = `Hole ${index + 1}`;
+              const set = (to: { x?: number; y?: number; diameter?: number }) =>
+                edit({ label: `${title} of ${key}`, change: (before) => setHole(before, { holeId: hole.id, ...to }) });
+              return (
+                <tr key={hole.id} className={cx(selection.holeId === hole.id && "bg-indigo/8")}>
+                  <RowHead className="py-1">
+                    <WordButton
+                      aria-pressed={selection.holeId === hole.id}
+                      onClick={() => choose(chooseHole(document, hole.id))}
+                    >
+                      {title}
+                    </WordButton>
+                  </RowHead>
+                  <Cell className="w-28 py-1">
+                    <CellLength
+                      aria-label={`x of ${title}`}
+                      mm={hole.x}
+                      unit={unit}
+                      onCommit={(mm) => set({ x: mm })}
+                    />
+                  </Cell>
+                  <Cell className="w-28 py-1">
+                    <CellLength
+                      aria-label={`y of ${title}`}
+                      mm={hole.y}
+                      unit={unit}
+                      onCommit={(mm) => set({ y: mm })}
+                    />
+                  </Cell>
+                  <Cell className="w-28 py-1">
+                    <CellLength
+                      aria-label={`Diameter of ${title}`}
+                      mm={hole.diameter}
+                      unit={unit}
+                      onCommit={(mm) => set({ diameter: mm })}
+                    />
+                  </Cell>
+                  <Cell className="w-20 py-1">
+                    <input
+                      type="radio"
+                      name={`fixed hole of ${key}`}
+                      aria-label={`${title} is the fixed one`}
+                      checked={hole.fixed}
+                      onChange={() =>
+                        edit({
+                          label: `Fix ${title} of ${key}`,
+                          change: (before) => fixHole(before, { holeId: hole.id }),
+                        })
+                      }
+                      className="size-5 cursor-pointer accent-indigo"
+                    />
+                  </Cell>
+                  <Cell className="py-1">
+                    <WordButton
+                      aria-label={`Remove ${title}`}
+                      onClick={() =>
+                        edit({
+                          label: `Remove ${title} of ${key}`,
+                          change: (before) => removeHole(before, { holeId: hole.id }),
+                        })
+                      }
+                    >
+                      Remove
+                    </WordButton>
+                  </Cell>
+                </tr>
+              );
+            })}
+          </tbody>
+        </Table>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,77 @@
+import { formatLength } from "#shared/units/format-length.ts";
+import { Select } from "@/components/ui/select.tsx";
+import { useDesk } from "../editor/desk-context.ts";
+import type { HoldChoice } from "../model/commands/new-layer.ts";
+import { optionsOfHold } from "../model/stock-choices.ts";
+
+/** What a new layer is cut from and held by, as places in the stock lists. */
+export type LayerChoice = { readonly sheet: number; readonly thickness: number; readonly hold: number };
+
+type LayerFieldsProps = {
+  readonly choice: LayerChoice;
+  readonly onChange: (choice: LayerChoice) => void;
+  /** Ends each label for screen readers when there are several layers: "of #27314F". */
+  readonly of?: string;
+  readonly hint?: string;
+};
+
+/** Stock, thickness and hold of a layer that is to be made. */
+export function LayerFields({ choice, onChange, of = "", hint }: LayerFieldsProps) {
+  const { stock, unit } = useDesk();
+  const sheet = stock.acrylics[choice.sheet];
+  const label = (text: string) => (
+    <>
+      {text}
+      <span className="sr-only"> {of}</span>
+    </>
+  );
+
+  function changeSheet(index: number) {
+    const thicknesses = stock.acrylics[index]?.thicknessesMm ?? [];
+    const thickness = thicknesses.includes(choice.thickness) ? choice.thickness : (thicknesses[0] ?? choice.thickness);
+    onChange({ ...choice, sheet: index, thickness });
+  }
+
+  return (
+    <div className="grid gap-3 sm:grid-cols-[3fr_2fr_4fr]">
+      <Select
+        label={label("Stock")}
+        {...(hint ? { hint } : {})}
+        value={choice.sheet}
+        onChange={(event) => changeSheet(Number(event.target.value))}
+      >
+        {stock.acrylics.map(({ acrylic }, index) => (
+          <option key={`${acrylic.stockId} ${acrylic.name}`} value={index}>
+            {acrylic.name}
+          </option>
+        ))}
+      </Select>
+      <Select
+        label={label(`Thickness, ${unit}`)}
+        value={choice.thickness}
+        onChange={(event) => onChange({ ...choice, thickness: Number(event.target.value) })}
+      >
+        {(sheet?.thicknessesMm ?? []).map((thickness) => (
+          <option key={thickness} value={thickness}>
+            {formatLength(thickness, unit)}
+          </option>
+        ))}
+      </Select>
+      <Select
+        label={label("Held by")}
+        value={choice.hold}
+        onChange={(event) => onChange({ ...choice, hold: Number(event.target.value) })}
+      >
+        {optionsOfHold(stock).map((option, index) => (
+          <option key={nameOfHold(option)} value={index}>
+            {nameOfHold(option)}
+          </option>
+        ))}
+      </Select>
+    </div>
+  );
+}
+
+function nameOfHold(option: HoldChoice): string {
+  return option.kind === "bond" ? `bond, ${option.adhesive.name}` : option.hardware.name;
+}

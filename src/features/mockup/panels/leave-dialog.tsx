@@ -1,0 +1,28 @@
+import { useBlocker } from "react-router-dom";
+import { ConfirmDialog } from "@/components/ui/confirm-dialog.tsx";
+import type { Saving } from "../editor/use-autosave.ts";
+
+/** Asks before the mockup is left with work that can't be saved now. What can be saved is saved on the way out. */
+export function LeaveDialog({ saving }: { readonly saving: Saving }) {
+  const { state } = saving.autosave;
+  const stuck = state === "offline" || state === "refused" || state === "stale";
+  const blocker = useBlocker(
+    ({ currentLocation, nextLocation }) => stuck && currentLocation.pathname !== nextLocation.pathname,
+  );
+  return (
+    <ConfirmDialog
+      open={blocker.state === "blocked"}
+      onOpenChange={() => blocker.reset?.()}
+      title="Leave with unsaved work?"
+      action="Leave"
+      refuse="Stay"
+      onConfirm={() => blocker.proceed?.()}
+    >
+      <p>
+        {saving.keptHere
+          ? "The last changes are not on the server. They are kept on this device and offered when you open the mockup here again."
+          : "The last changes are not on the server, and this device has no room to keep them. They are lost when you leave."}
+      </p>
+    </ConfirmDialog>
+  );
+}

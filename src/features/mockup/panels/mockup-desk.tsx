@@ -1,0 +1,215 @@
+import { type ReactNode, useEffect, useEffectEvent, useMemo, useReducer, useRef, useState } from "react";
+import type { Job } from "#shared/contracts/jobs.ts";
+import type { Mockup } from "#shared/contracts/mockups.ts";
+import type { StockItem } from "#shared/contracts/stock.ts";
+import type { Finding } from "#shared/dry-fit/finding.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
+import type { DrawingView } from "@/lib/drawing-view.ts";
+import { useRoom } from "@/lib/use-room.ts";
+import { CanvasPanel } from "../canvas/canvas-panel.tsx";
+import { fitBoard, marginsOf, paperScaleAt, usualMargins, viewAt } from "../canvas/view-of-board.ts";
+import { type Desk, DeskContext } from "../editor/desk-context.ts";
+import { useAutosave } from "../editor/use-autosave.ts";
+import { useKeptDraft } from "../editor/use-kept-draft.ts";
+import { useUndoKeys } from "../editor/use-undo-keys.ts";
+import { useEngine } from "../engine/use-engine.ts";
+import { type Drag, documentOfDrag } from "../model/drag.ts";
+import { nextEditor, startEditor } from "../model/editor.ts";
+import { isSame } from "../model/same.ts";
+import { chooseLayer } from "../model/selection.ts";
+import { stockChoices } from "../model/stock-choices.ts";
+import { BoardDialog } from "./board-dialog.tsx";
+import { BringInDialog } from "./bring-in-dialog.tsx";
+import { DeskBar } from "./desk-bar.tsx";
+import { DeskTools } from "./desk-tools.tsx";
+import { FindingsPanel } from "./findings-panel.tsx";
+import { KeptDraftNotice } from "./kept-draft-notice.tsx";
+import { KeysDialog } from "./keys-dialog.tsx";
+import { LeaveDialog } from "./leave-dialog.tsx";
+import { PiecesPanel } from "./pieces-panel.tsx";
+import { PlateDialog } from "./plate-dialog.tsx";
+import { SchedulePanel } from "./schedule-panel.tsx";
+import { SectionPanel } from "./section-panel.tsx";
+import { StaleDialog } from "./stale-dialog.tsx";
+
+export type MockupDeskProps = {
+  readonly shop: string;
+  readonly unit: LengthUnit;
+  readonly personId: string;
+  readonly job: Job;
+  readonly mockup: Mockup;
+  readonly stock: readonly StockItem[];
+  /** The job's page, where artwork is added. */
+  readonly jobPath: string;
+  readonly onSaved: (mockup: Mockup) => void;
+  readonly onIssued: (revisionId: string) => void;
+  /** Puts the tools into the header of the page. */
+  readonly renderTools: (tools: ReactNode) => ReactNode;
+};
+
+type OpenDialog = "artwork" | "plate" | "board" | "keys" | null;
+
+/** The mockup at work: elevation and section above, schedule and dry fit below. */
+export function MockupDesk(props: MockupDeskProps) {
+  const { shop, unit, personId, job, mockup, jobPath, onSaved, onIssued, renderTools } = props;
+  const [editor, dispatch] = useReducer(nextEditor, mockup.document, startEditor);
+  const [drag, setDrag] = useState<Drag | null>(null);
+  const [view, setView] = useState<DrawingView | null>(null);
+  const [margins, setMargins] = useState(usualMargins);
+  const [finding, setFinding] = useState<Finding | null>(null);
+  const [dialog, setDialog] = useState<OpenDialog>(null);
+  const frame = useRef<HTMLDivElement>(null);
+  const room = useRoom(frame);
+  const document = editor.history.present;
+  const place = useMemo(() => ({ personId, shop, jobId: job.id }), [personId, shop, job.id]);
+  const saving = useAutosave({ mockup, document, place, onSaved });
+  const kept = useKeptDraft(place, mockup);
+  const stock = useMemo(() => stockChoices(props.stock), [props.stock]);
+
+  const { width, height } = document.board;
+  const fit = useMemo(
+    () => fitBoard({ width, height }, margins, room ?? { width: 1100, height: 520 }),
+    [width, height, margins, room],
+  );
+  const whereItHangs = job.brief.place ?? "inside";
+  const context = useMemo(
+    () => ({
+      unit,
+      place: whereItHangs,
+      acrylics: stock.acrylics.map(({ acrylic }) => acrylic),
+      barrels: stock.hardware,
+    }),
+    [unit, whereItHangs, stock],
+  );
+  const paperScale = paperScaleAt(fit.scale);
+  const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
+  const isDragging = drag !== null;
+  const input = useMemo(
+    () => ({ document: wanted, context, paperScale, dryFit: !isDragging }),
+    [wanted, context, paperScale, isDragging],
+  );
+  const { drawn, failure } = useEngine(room === null ? null : input);
+  const figures = drawn?.picture.figures ?? null;
+  const [dryFit, setDryFit] = useState(drawn?.picture.dryFit ?? null);
+  if (drawn?.picture.dryFit && drawn.picture.dryFit !== dryFit) setDryFit(drawn.picture.dryFit);
+  const isCurrent = drawn?.input === input;
+
+  // The window follows the rows of dimensions, but never under a hand that is dragging.
+  useEffect(() => {
+    if (drawn === null || isDragging) return;
+    const next = marginsOf(drawn.picture.elevation, drawn.input.document.board, drawn.input.paperScale);
+    setMargins((before) => (isSame(before, next) ? before : next));
+  }, [drawn, isDragging]);
+
+  const undoStep = useEffectEvent(() => dispatch({ kind: "undo" }));
+  const redoStep = useEffectEvent(() => dispatch({ kind: "redo" }));
+  useUndoKeys(undoStep, redoStep);
+
+  const desk = useMemo(
+    (): Desk => ({
+      document,
+      selection: editor.selection,
+      unit,
+      stock,
+      figures,
+      edit: (edit) => dispatch({ kind: "edit", ...edit }),
+      choose: (selection) => {
+        setFinding(null);
+        dispatch({ kind: "choose", selection });
+      },
+    }),
+    [document, editor.selection, unit, stock, figures],
+  );
+
+  function show(next: Finding) {
+    if (next.layerKey !== null) dispatch({ kind: "choose", selection: chooseLayer(document, next.layerKey) });
+    setFinding(next);
+    if (next.where !== null && room !== null) setView(viewAt(next.where, fit, room));
+    frame.current?.scrollIntoView({ block: "nearest" });
+  }
+
+  function keepTheirs() {
+    if (saving.autosave.state !== "stale") return;
+    const theirs = saving.autosave.newer.document;
+    saving.keepTheirs();
+    dispatch({ kind: "edit", label: "Keep the newer version", change: () => theirs });
+  }
+
+  const closeDialog = (open: boolean) => setDialog(open ? dialog : null);
+  return (
+    <DeskContext value={desk}>
+      {renderTools(
+        <DeskTools
+          shop={shop}
+          job={job}
+          mayIssue={mockup.can.issue}
+          saving={saving}
+          history={editor.history}
+          dryFit={dryFit}
+          isCurrent={isCurrent}
+          onUndo={() => dispatch({ kind: "undo" })}
+          onRedo={() => dispatch({ kind: "redo" })}
+          onIssued={onIssued}
+        />,
+      )}
+      <DeskBar
+        client={job.client.name}
+        title={job.title}
+        onBringIn={() => setDialog("artwork")}
+        onPlate={() => setDialog("plate")}
+        onBoard={() => setDialog("board")}
+        onKeys={() => setDialog("keys")}
+      />
+      {kept.draft && (
+        <KeptDraftNotice
+          draft={kept.draft}
+          version={mockup.version}
+          onTakeUp={() => {
+            const mine = kept.draft?.document;
+            kept.forget();
+            if (mine) dispatch({ kind: "edit", label: "Take up kept work", change: () => mine });
+          }}
+          onLeave={kept.forget}
+        />
+      )}
+      <div className="grid h-[max(26rem,calc(100dvh-22.5rem))] grid-cols-[minmax(0,1fr)_minmax(15rem,18.5rem)] border-b border-rule">
+        <CanvasPanel
+          drawn={drawn}
+          failure={failure}
+          drag={drag}
+          onDrag={setDrag}
+          view={view ?? fit}
+          fit={fit}
+          room={room}
+          onView={(next) => setView(next !== null && next.scale <= fit.scale * 1.001 ? null : next)}
+          spot={finding?.where ?? null}
+          frame={frame}
+        />
+        <SectionPanel drawn={drawn?.input.document ?? document} view={view ?? fit} drag={drag} onDrag={setDrag} />
+      </div>
+      <div className="grid grid-cols-[minmax(0,1fr)_minmax(18rem,26rem)]">
+        <div className="min-w-0">
+          <SchedulePanel onBoard={() => setDialog("board")} onBringIn={() => setDialog("artwork")} />
+          <PiecesPanel />
+        </div>
+        <FindingsPanel dryFit={dryFit} isCurrent={isCurrent} shown={finding} onShow={show} />
+      </div>
+      <BringInDialog
+        open={dialog === "artwork"}
+        onOpenChange={closeDialog}
+        shop={shop}
+        jobId={job.id}
+        jobPath={jobPath}
+      />
+      <PlateDialog open={dialog === "plate"} onOpenChange={closeDialog} />
+      <BoardDialog open={dialog === "board"} onOpenChange={closeDialog} />
+      <KeysDialog open={dialog === "keys"} onOpenChange={closeDialog} />
+      <StaleDialog
+        newer={saving.autosave.state === "stale" ? saving.autosave.newer : null}
+        onTheirs={keepTheirs}
+        onMine={saving.keepMine}
+      />
+      <LeaveDialog saving={saving} />
+    </DeskContext>
+  );
+}

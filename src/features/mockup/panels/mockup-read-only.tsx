@@ -1,0 +1,88 @@
+import { useMemo, useState } from "react";
+import type { Job } from "#shared/contracts/jobs.ts";
+import type { Mockup } from "#shared/contracts/mockups.ts";
+import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
+import { Notice } from "@/components/ui/notice.tsx";
+import { Skeleton } from "@/components/ui/skeleton.tsx";
+import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import type { DrawingView } from "@/lib/drawing-view.ts";
+import { DrawingViewer } from "@/lib/drawing-viewer.tsx";
+import { useEngine } from "../engine/use-engine.ts";
+
+type MockupReadOnlyProps = {
+  readonly unit: LengthUnit;
+  readonly job: Job;
+  readonly mockup: Mockup;
+  /** Why it can only be looked at. */
+  readonly why: string;
+};
+
+/** The mockup to look at: the picture and the schedule, for a narrow window and for those who may not change it. */
+export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) {
+  const [view, setView] = useState<DrawingView | null>(null);
+  const { document } = mockup;
+  const input = useMemo(
+    () => ({
+      document,
+      context: { unit, place: job.brief.place ?? ("inside" as const), acrylics: [], barrels: [] },
+      // Lettering of about 13 px in a window of 360 px.
+      paperScale: document.board.width / 68,
+      dryFit: false,
+    }),
+    [document, unit, job.brief.place],
+  );
+  const { drawn, failure } = useEngine(input);
+
+  return (
+    <div className="space-y-4 px-4 py-4 sm:px-6">
+      <h1 className="font-serif text-xl font-bold text-ink">
+        {job.client.name}, {job.title}, mockup
+      </h1>
+      <p className="text-base text-graphite">{why}</p>
+      {failure && (
+        <Notice tone="error" title="The drawing could not be made.">
+          {failure}
+        </Notice>
+      )}
+      {drawn === null && failure === null && <Skeleton label="Drawing the mockup" />}
+      {drawn && (
+        <>
+          <DrawingViewer
+            list={drawn.picture.elevation}
+            title="Elevation, from the front"
+            view={view}
+            onView={setView}
+            className="h-[60dvh] border border-rule bg-sheet"
+          />
+          <h2 className="font-serif text-base font-bold text-ink">Schedule</h2>
+          <Table caption="Layers from the wall outward">
+            <thead>
+              <tr>
+                {["Key", "What", "Stock", "Thick", "Held by", "Offset", "Top at", "Pieces", "Mass"].map((head) => (
+                  <HeadCell key={head}>{head}</HeadCell>
+                ))}
+              </tr>
+            </thead>
+            <tbody>
+              {scheduleRows(document, drawn.picture.figures, unit).map((row) => (
+                <tr key={row.key}>
+                  <RowHead>{row.key}</RowHead>
+                  <Cell>{row.what}</Cell>
+                  <Cell>{row.stock}</Cell>
+                  <Cell>{row.thickness}</Cell>
+                  <Cell>{row.heldBy}</Cell>
+                  <Cell>{row.offset}</Cell>
+                  <Cell>{row.topAt}</Cell>
+                  <Cell>{row.pieces}</Cell>
+                  <Cell className="whitespace-nowrap">{row.mass}</Cell>
+                </tr>
+              ))}
+            </tbody>
+          </Table>
+          <p className="text-fine text-graphite">{scheduleTotal(document, drawn.picture.figures, unit)}</p>
+        </>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,124 @@
+import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { cx } from "@/lib/cx.ts";
+import { useDesk } from "../editor/desk-context.ts";
+import { centrePieces, placePiece, removePieces } from "../model/commands/pieces.ts";
+import { chooseLayer, choosePiece } from "../model/selection.ts";
+import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
+import { HolesTable } from "./holes-table.tsx";
+import { nameOfPiece } from "./piece-name.ts";
+
+/** The pieces of the chosen layer as a list: what the canvas does by hand is done here in figures and by keyboard. */
+export function PiecesPanel() {
+  const { document, selection, edit, choose, unit } = useDesk();
+  const layer = document.layers.find(({ key }) => key === selection.layerKey);
+  if (!layer) return null;
+  const { key, name, pieces } = layer;
+  const all = pieces.length > 0 && pieces.every(({ id }) => selection.pieceIds.includes(id));
+
+  return (
+    <section aria-label={`Pieces of ${key}`} className="space-y-4 border-t border-rule px-4 pt-3 pb-6 sm:px-6">
+      <div className="flex flex-wrap items-baseline gap-x-4">
+        <h2 className="font-serif text-base font-bold text-ink">
+          Pieces of {key}, {name}
+        </h2>
+        <p className="text-fine text-graphite">
+          x and y are the middle of a piece, from the board’s upper left corner.
+        </p>
+        {!all && pieces.length > 0 && (
+          <WordButton onClick={() => choose(chooseLayer(document, key))}>Choose all of {key}</WordButton>
+        )}
+      </div>
+      {pieces.length === 0 ? (
+        <p className="text-sm text-graphite">This layer has no pieces left. Remove it, or undo.</p>
+      ) : (
+        <Table caption={`Pieces of ${key}`} className="max-h-80 overflow-y-auto">
+          <thead>
+            <tr>
+              {["Piece", `x, ${unit}`, `y, ${unit}`, "Turn, °", "Size, %"].map((head) => (
+                <HeadCell key={head} className="py-1.5">
+                  {head}
+                </HeadCell>
+              ))}
+              <HeadCell className="py-1.5">
+                <span className="sr-only">Place and removal</span>
+              </HeadCell>
+            </tr>
+          </thead>
+          <tbody>
+            {pieces.map((piece, index) => {
+              const { x, y, turn, scale } = piece.placement;
+              const title = nameOfPiece(piece, index);
+              const place = (to: { x?: number; y?: number; turn?: number; scale?: number }) =>
+                edit({ label: `Place ${title}`, change: (before) => placePiece(before, { pieceId: piece.id, ...to }) });
+              const pieceIds = [piece.id];
+              return (
+                <tr key={piece.id} className={cx(!all && selection.pieceIds.includes(piece.id) && "bg-indigo/8")}>
+                  <RowHead className="py-1">
+                    <WordButton
+                      aria-pressed={selection.pieceIds.includes(piece.id)}
+                      onClick={() => choose(choosePiece(document, piece.id))}
+                    >
+                      {title}
+                    </WordButton>
+                  </RowHead>
+                  <Cell className="w-28 py-1">
+                    <CellLength aria-label={`x of ${title}`} mm={x} unit={unit} onCommit={(mm) => place({ x: mm })} />
+                  </Cell>
+                  <Cell className="w-28 py-1">
+                    <CellLength aria-label={`y of ${title}`} mm={y} unit={unit} onCommit={(mm) => place({ y: mm })} />
+                  </Cell>
+                  <Cell className="w-24 py-1">
+                    <CellText
+                      aria-label={`Turn of ${title}`}
+                      inputMode="decimal"
+                      value={String(turn)}
+                      onCommit={(text) => takeNumber(text, (value) => place({ turn: value }))}
+                    />
+                  </Cell>
+                  <Cell className="w-24 py-1">
+                    <CellText
+                      aria-label={`Size of ${title}`}
+                      inputMode="decimal"
+                      value={String(Math.round(scale * 10_000) / 100)}
+                      onCommit={(text) => takeNumber(text, (value) => place({ scale: value / 100 }), 0.1)}
+                    />
+                  </Cell>
+                  <Cell className="py-1 whitespace-nowrap">
+                    <WordButton
+                      aria-label={`Centre ${title} on the board`}
+                      onClick={() =>
+                        edit({
+                          label: `Centre ${title}`,
+                          change: (before) => centrePieces(before, { pieceIds, way: "both" }),
+                        })
+                      }
+                    >
+                      Centre on board
+                    </WordButton>
+                    <WordButton
+                      aria-label={`Remove ${title}`}
+                      onClick={() =>
+                        edit({ label: `Remove ${title}`, change: (before) => removePieces(before, { pieceIds }) })
+                      }
+                    >
+                      Remove
+                    </WordButton>
+                  </Cell>
+                </tr>
+              );
+            })}
+          </tbody>
+        </Table>
+      )}
+      {layer.hold.kind === "standoff" && <HolesTable layer={layer} hold={layer.hold} />}
+    </section>
+  );
+}
+
+/** Reads a number as people write it, with a point or a comma. False when it is none or less than `least`. */
+function takeNumber(text: string, take: (value: number) => void, least = Number.NEGATIVE_INFINITY): boolean {
+  const value = Number(text.trim().replace(",", ".").replace("−", "-").replace(/[°%]$/, ""));
+  if (text.trim() === "" || !Number.isFinite(value) || value < least) return false;
+  take(value);
+  return true;
+}
