@@ -53,6 +53,10 @@ export const router = createBrowserRouter([
               { path: paths.bench(":shop"), lazy: page(() => import("./pages/bench-page.tsx"), "BenchPage") },
               { path: paths.job(":shop", ":jobId"), lazy: page(() => import("./pages/job-page.tsx"), "JobPage") },
               {
+                path: paths.mockup(":shop", ":jobId"),
+                lazy: page(() => import("./pages/mockup-page.tsx"), "MockupPage"),
+              },
+              {
                 path: paths.sheet(":shop", ":revisionId"),
                 lazy: page(() => import("./pages/sheet-page.tsx"), "SheetPage"),
               },
