@@ -1,5 +1,6 @@
 import { regionAreaMm2, regionCentroid } from "../geometry/area.ts";
 import { boxGrow, boxOfRegion } from "../geometry/box.ts";
+import { distanceToRegionEdgeMm } from "../geometry/contains.ts";
 import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Point, Region } from "../geometry/path.ts";
@@ -42,7 +43,10 @@ export function measureSupport(piece: Region, support: Region, kernel: Kernel): 
   return { overlapMm2, unsupportedShare, unsupported, ...farthestReach(piece, unsupported, support, kernel) };
 }
 
-/** Grows the support until it covers the rest, halving the interval; the last that stays out shows the place. */
+/**
+ * The farthest corner of what hangs over, as a rule. Where the middle of a bridge is farther still, the support is grown until it covers all,
+ * halving the interval; the last that stays out shows the place.
+ */
 function farthestReach(
   piece: Region,
   unsupported: Region,
@@ -53,18 +57,32 @@ function farthestReach(
   // A piece that touches its support can't reach farther from it than its own diagonal, nor is farther support of use.
   const diagonal = Math.hypot(box.width, box.height);
   const near = kernel.intersect(support, flattenPath(rectanglePath(boxGrow(box, diagonal))));
-  let covered = diagonal;
-  let out = 0;
-  let rest = unsupported;
+  let { reachMm: out, where } = farthestCorner(unsupported, near);
+  let covered = out + reachStepMm;
+  const leftAt = (distance: number) => kernel.difference(unsupported, kernel.offset(near, distance, "round"));
+  if (leftAt(covered).length === 0) return { reachMm: out, where };
+  covered = diagonal;
   while (covered - out > reachStepMm) {
     const middle = (covered + out) / 2;
-    const left = kernel.difference(unsupported, kernel.offset(near, middle, "round"));
+    const left = leftAt(middle);
     if (left.length === 0) covered = middle;
     else {
       out = middle;
-      rest = left;
+      // Several parts may reach equally far: the middle of one is a spot on the sign, the middle of all may be none.
+      where = regionCentroid(left.slice(0, 1));
     }
   }
-  // Several parts may reach equally far: the middle of one is a spot on the sign, the middle of all may be none.
-  return { reachMm: (covered + out) / 2, where: regionCentroid(rest.slice(0, 1)) };
+  return { reachMm: (covered + out) / 2, where };
+}
+
+function farthestCorner(unsupported: Region, support: Region): { reachMm: number; where: Point | null } {
+  let reachMm = 0;
+  let where: Point | null = null;
+  for (const corner of unsupported.flat()) {
+    const distance = distanceToRegionEdgeMm(support, corner);
+    if (distance <= reachMm) continue;
+    reachMm = distance;
+    where = corner;
+  }
+  return { reachMm, where };
 }

@@ -1,3 +1,4 @@
+import { boxesOverlap, boxGrow } from "../geometry/box.ts";
 import type { Region } from "../geometry/path.ts";
 import { lengthsEqual } from "../geometry/tolerance.ts";
 import type { PieceFigures } from "../stack/figures.ts";
@@ -13,12 +14,18 @@ export function piecesBelow({ document, figures }: Input, level: number): PieceF
   return figures.pieces.filter((piece) => keys.has(piece.layerKey));
 }
 
-/** Everything below `level` whose top lies at `height`: what a piece with its back there is carried by. */
-export function supportAt(input: Input, level: number, height: number): Region {
+/**
+ * What carries a piece of the layer at `level`: everything below it whose top lies where its back does. Left out is what lies
+ * farther from its box than its own diagonal, which can't carry it nor be what it reaches out from.
+ */
+export function supportOf(input: Input, level: number, { box, bottom }: PieceFigures): Region {
   const { document, figures, kernel } = input;
-  const pieces = piecesBelow(input, level).filter((piece) => lengthsEqual(piece.top.nominal, height));
+  const near = boxGrow(box, Math.hypot(box.width, box.height));
+  const pieces = piecesBelow(input, level).filter(
+    (piece) => lengthsEqual(piece.top.nominal, bottom.nominal) && boxesOverlap(piece.box, near),
+  );
   // The kernel's own rings run outlines one way and holes the other, so joining them by turns keeps a hole open only where nothing else lies.
-  const board = lengthsEqual(figures.backerTop.nominal, height)
+  const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal)
     ? kernel.union(boardRegion(document.board), "evenodd")
     : [];
   return kernel.union([...board, ...pieces.flatMap((piece) => piece.region)], "nonzero");

@@ -8,7 +8,7 @@ import { type ThinPlace, thinnestWidth, thinPlaces } from "../../stack/thin-plac
 import { formatFine } from "../../units/format-length.ts";
 import type { Finding, Severity } from "../finding.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
-import { supportAt } from "../under.ts";
+import { supportOf } from "../under.ts";
 import { layersWithFigures, pieceWords } from "../words.ts";
 
 const source = "common practice";
@@ -64,7 +64,7 @@ function checkPiece(layer: Layer, level: number, piece: Piece, figures: PieceFig
 function freePartOf(layer: Layer, level: number, figures: PieceFigures, input: RuleInput): Region {
   if (layer.hold.kind === "standoff") return figures.region;
   if (layer.hold.kind === "pocket") return [];
-  const support = supportAt(input, level, figures.bottom.nominal);
+  const support = supportOf(input, level, figures);
   return unsupportedPart(figures.region, support, input.kernel);
 }
 

@@ -2,7 +2,7 @@ import { measureSupport } from "../../bonds/support.ts";
 import { formatFine } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
-import { supportAt } from "../under.ts";
+import { supportOf } from "../under.ts";
 import { layersWithFigures, percentWords, pieceWords } from "../words.ts";
 
 const source = "common practice";
@@ -16,7 +16,7 @@ function check(input: RuleInput): Finding[] {
     if (layer.hold.kind !== "bond") return [];
     return pieces.flatMap(({ piece, figures }): Finding[] => {
       if (figures.areaMm2 === 0) return [];
-      const support = supportAt(input, level, figures.bottom.nominal);
+      const support = supportOf(input, level, figures);
       const { unsupportedShare, reachMm, where } = measureSupport(figures.region, support, kernel);
       const base = { layerKey: layer.key, pieceIds: [piece.id], where: where ?? figures.centroid, source };
       const name = pieceWords(layer, piece);
