@@ -36,9 +36,8 @@ async function serve({ root, folder, settings, ending, undo }) {
   await takeFolder(folder);
   undo.push(() => leaveFolder(folder));
   await refuseTakenPort(settings);
-  await ensurePackages(root);
 
-  ending.check();
+  // Before the packages: whoever must install PostgreSQL by hand learns it at once, not after a minute of npm.
   const cluster = process.env.DATABASE_URL ? undefined : await startDurableCluster(folder);
   if (cluster !== undefined) {
     undo.push(cluster.stop);
@@ -51,6 +50,8 @@ async function serve({ root, folder, settings, ending, undo }) {
     say("APP_DATABASE_URL is not set: the application runs with the role of DATABASE_URL, which owns the tables.");
   }
 
+  ending.check();
+  await ensurePackages(root);
   ending.check();
   if (!settings.isDev) await ensureBuild(root);
   ending.check();
