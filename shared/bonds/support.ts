@@ -1,17 +1,15 @@
 import { regionAreaMm2, regionCentroid } from "../geometry/area.ts";
-import { boxGrow, boxOfRegion } from "../geometry/box.ts";
+import { boxOfRegion } from "../geometry/box.ts";
 import { distanceToRegionEdgeMm } from "../geometry/contains.ts";
-import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Point, Region } from "../geometry/path.ts";
-import { rectanglePath } from "../geometry/shapes.ts";
 
 export type Support = {
   /** Area in mm² that lies on the support: what the adhesive holds by. */
   readonly overlapMm2: number;
   /** Share of the piece's area off its support, 0 to 1. A piece without area has nothing off it. */
   readonly unsupportedShare: number;
-  /** How far in mm the piece reaches from its support at most; null when it lies on none. */
+  /** How far in mm the piece reaches from where it is bonded at most; null when it lies on nothing. */
   readonly reachMm: number | null;
   /** Middle of what reaches farthest; null when nothing is unsupported. */
   readonly where: Point | null;
@@ -31,7 +29,8 @@ export function unsupportedPart(piece: Region, support: Region, kernel: Kernel):
 /** How a piece lies on what is under it. Both regions as the kernel gives them. */
 export function measureSupport(piece: Region, support: Region, kernel: Kernel): Support {
   const area = regionAreaMm2(piece);
-  const overlapMm2 = regionAreaMm2(kernel.intersect(piece, support));
+  const bonded = kernel.intersect(piece, support);
+  const overlapMm2 = regionAreaMm2(bonded);
   const unsupported = unsupportedPart(piece, support, kernel);
   if (area === 0 || unsupported.length === 0) {
     return { overlapMm2, unsupportedShare: 0, reachMm: area === 0 ? null : 0, where: null, unsupported: [] };
@@ -40,28 +39,24 @@ export function measureSupport(piece: Region, support: Region, kernel: Kernel): 
   if (overlapMm2 === 0) {
     return { overlapMm2, unsupportedShare, reachMm: null, where: regionCentroid(unsupported), unsupported };
   }
-  return { overlapMm2, unsupportedShare, unsupported, ...farthestReach(piece, unsupported, support, kernel) };
+  return { overlapMm2, unsupportedShare, unsupported, ...farthestReach(unsupported, bonded, kernel) };
 }
 
 /**
- * The farthest corner of what hangs over, as a rule. Where the middle of a bridge is farther still, the support is grown until it covers all,
+ * The farthest corner of what hangs over, as a rule. Where the middle of a bridge is farther still, what is bonded is grown until it covers all,
  * halving the interval; the last that stays out shows the place.
  */
 function farthestReach(
-  piece: Region,
   unsupported: Region,
-  support: Region,
+  bonded: Region,
   kernel: Kernel,
 ): { readonly reachMm: number; readonly where: Point | null } {
-  const box = boxOfRegion(piece) ?? { x: 0, y: 0, width: 0, height: 0 };
-  // A piece that touches its support can't reach farther from it than its own diagonal, nor is farther support of use.
-  const diagonal = Math.hypot(box.width, box.height);
-  const near = kernel.intersect(support, flattenPath(rectanglePath(boxGrow(box, diagonal))));
-  let { reachMm: out, where } = farthestCorner(unsupported, near);
+  let { reachMm: out, where } = farthestCorner(unsupported, bonded);
   let covered = out + reachStepMm;
-  const leftAt = (distance: number) => kernel.difference(unsupported, kernel.offset(near, distance, "round"));
+  const leftAt = (distance: number) => kernel.difference(unsupported, kernel.offset(bonded, distance, "round"));
   if (leftAt(covered).length === 0) return { reachMm: out, where };
-  covered = diagonal;
+  const box = boxOfRegion([...unsupported, ...bonded]);
+  covered = box ? Math.hypot(box.width, box.height) : out;
   while (covered - out > reachStepMm) {
     const middle = (covered + out) / 2;
     const left = leftAt(middle);

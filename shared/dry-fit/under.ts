@@ -1,4 +1,4 @@
-import { boxesOverlap, boxGrow } from "../geometry/box.ts";
+import { boxesOverlap } from "../geometry/box.ts";
 import type { Region } from "../geometry/path.ts";
 import { lengthsEqual } from "../geometry/tolerance.ts";
 import type { PieceFigures } from "../stack/figures.ts";
@@ -15,14 +15,13 @@ export function piecesBelow({ document, figures }: Input, level: number): PieceF
 }
 
 /**
- * What carries a piece of the layer at `level`: everything below it whose top lies where its back does. Left out is what lies
- * farther from its box than its own diagonal, which can't carry it nor be what it reaches out from.
+ * What carries a piece of the layer at `level`: everything below it whose top lies where its back does, as far as it can lie
+ * under the piece.
  */
 export function supportOf(input: Input, level: number, { box, bottom }: PieceFigures): Region {
   const { document, figures, kernel } = input;
-  const near = boxGrow(box, Math.hypot(box.width, box.height));
   const pieces = piecesBelow(input, level).filter(
-    (piece) => lengthsEqual(piece.top.nominal, bottom.nominal) && boxesOverlap(piece.box, near),
+    (piece) => lengthsEqual(piece.top.nominal, bottom.nominal) && boxesOverlap(piece.box, box),
   );
   // The kernel's own rings run outlines one way and holes the other, so joining them by turns keeps a hole open only where nothing else lies.
   const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal)

@@ -36,6 +36,11 @@ describe("a piece of 100 by 20", () => {
     expect(where?.x).toBeGreaterThan(99);
   });
 
+  it("that almost meets a second support reaches no less for it", () => {
+    const { reachMm } = measureSupport(piece, [...box(0, 0, 75, 20), ...box(101, 0, 75, 20)], kernel);
+    expect(Math.abs((reachMm ?? 0) - 25)).toBeLessThanOrEqual(0.06);
+  });
+
   it("that bridges two supports reaches to the middle of the bridge", () => {
     const ends = [...box(0, 0, 20, 20), ...box(80, 0, 20, 20)];
     const { unsupportedShare, reachMm, where } = measureSupport(piece, ends, kernel);

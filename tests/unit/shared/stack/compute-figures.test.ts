@@ -217,6 +217,18 @@ describe("areas and masses", () => {
     expect(computeFigures(sign, kernel).backerMassG).toBeCloseTo(boardG - cut, 3);
   });
 
+  it("a piece let in flush takes nothing out of itself", () => {
+    const sign = buildSign([buildLayer("B", [plate("b", 100, 50, [300, 200])], { hold: pocketHold(3) })]);
+    const piece = pieceOf(computeFigures(sign, kernel), "b");
+    expect(piece.top.nominal).toBe(18);
+    expect(piece.massG).toBeCloseTo(5000 * 3 * 1190e-6, 6);
+  });
+
+  it("a pocket deeper than the board takes out the board's thickness", () => {
+    const sign = buildSign([buildLayer("B", [plate("b", 100, 50, [300, 200])], { hold: pocketHold(40) })]);
+    expect(computeFigures(sign, kernel).backerMassG).toBeCloseTo((600 * 400 - 5000) * 18 * pineKgM3 * 1e-6, 6);
+  });
+
   it("a pocket deeper than the board never makes a mass negative", () => {
     const sign = buildSign([buildLayer("B", [plate("b", 700, 500, [300, 200])], { hold: pocketHold(40) })]);
     const figures = computeFigures(sign, kernel);
