@@ -56,7 +56,7 @@ function indexedPng(plane: Plane, palette: Uint8Array, alphas: Uint8Array | null
     chunk("IHDR", header),
     chunk("PLTE", palette),
     ...(alphas === null ? [] : [chunk("tRNS", alphas)]),
-    chunk("IDAT", zlibSync(filteredRows(plane), { level: 9 })),
+    chunk("IDAT", zlibSync(filteredRows(plane), { level: 6 })),
     chunk("IEND", new Uint8Array(0)),
   ];
   const png = new Uint8Array(parts.reduce((sum, part) => sum + part.length, 0));

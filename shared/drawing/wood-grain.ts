@@ -45,11 +45,23 @@ function grainAt(x: number, y: number, heightMm: number, seed: number): number {
 const shades = 20;
 const mostCells = 160_000;
 
+type GrainImage = Extract<Item, { kind: "image" }>;
+
+/** The last grain made. A mockup is drawn again at every step, nearly always on the same board. */
+let last: { readonly name: string; readonly image: GrainImage } | null = null;
+
 /**
  * Grain for a board as an image: pale, the wood's own colour in the middle, grain along the longer side. Pixels are longer along the
  * grain, where nothing changes fast. Same box, colour and seed, same bytes.
  */
-export function woodGrain(box: Box, colour: Colour, seed: number): Extract<Item, { kind: "image" }> {
+export function woodGrain(box: Box, colour: Colour, seed: number): GrainImage {
+  const name = [box.x, box.y, box.width, box.height, colour, seed].join(" ");
+  const image = last?.name === name ? last.image : makeGrain(box, colour, seed);
+  last = { name, image };
+  return image;
+}
+
+function makeGrain(box: Box, colour: Colour, seed: number): GrainImage {
   const upright = box.height > box.width;
   const along = upright ? box.height : box.width;
   const across = upright ? box.width : box.height;

@@ -158,7 +158,7 @@ describe("one sheet by three painters at 150 dpi", () => {
     ["canvas", "svg"],
     ["svg", "pdf"],
     ["canvas", "pdf"],
-  ] as const)("has its text in the same places by %s and %s: at most 1 %% differ with it", (one, other) => {
+  ] as const)("has its text in the same places by %s and %s: at most one pixel in a hundred differs with it", (one, other) => {
     expect(compare(one, other, false).share).toBeLessThanOrEqual(0.01);
   });
 
