@@ -43,8 +43,8 @@ export function measureSupport(piece: Region, support: Region, kernel: Kernel): 
 }
 
 /**
- * The farthest corner of what hangs over, as a rule. Where the middle of a bridge is farther still, what is bonded is grown until it covers all,
- * halving the interval; the last that stays out shows the place.
+ * The farthest corner of what hangs over, as a rule. Where the middle of a bridge is farther still, what is bonded is
+ * grown until it covers all, halving the interval; the last that stays out shows the place.
  */
 function farthestReach(
   unsupported: Region,

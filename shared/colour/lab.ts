@@ -17,8 +17,8 @@ export function labOf(colour: string): Lab {
 }
 
 /**
- * Colour difference ΔE00 between two CIELAB colours (Sharma, Wu, Dalal, Color Research and Application 30(1), 2005), with
- * kL = kC = kH = 1. The same in both orders.
+ * Colour difference ΔE00 between two CIELAB colours (Sharma, Wu, Dalal, Color Research and Application 30(1), 2005),
+ * with kL = kC = kH = 1. The same in both orders.
  */
 export function deltaE00(one: Lab, other: Lab): number {
   return difference(

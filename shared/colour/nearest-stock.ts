@@ -10,7 +10,9 @@ export function colourMatch(deltaE: number): ColourMatch {
   return deltaE <= 5 ? "visible" : "another colour";
 }
 
-/** The stock whose colour comes nearest by ΔE00, with the difference; the first of equals; null when there is no stock. */
+/**
+ * The stock whose colour comes nearest by ΔE00, with the difference; the first of equals; null when there is no stock.
+ */
 export function nearestStock<T extends { readonly colour: string }>(
   colour: string,
   stock: readonly T[],

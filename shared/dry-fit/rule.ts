@@ -5,7 +5,10 @@ import type { LengthUnit } from "../units/length.ts";
 import type { Finding } from "./finding.ts";
 import type { Limits } from "./limits.ts";
 
-/** What a dry fit knows besides the sign: how lengths are written, where it will hang, and what the shop can offer instead. */
+/**
+ * What a dry fit knows besides the sign: how lengths are written, where it will hang, and what the shop can offer
+ * instead.
+ */
 export type DryFitContext = {
   readonly unit: LengthUnit;
   readonly place: "inside" | "outside";

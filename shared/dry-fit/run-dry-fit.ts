@@ -5,8 +5,8 @@ import type { RuleInput } from "./rule.ts";
 const rank: Readonly<Record<Severity, number>> = { stop: 0, caution: 1, remark: 2 };
 
 /**
- * Every rule on one sign. The figures are the document's own. Stops first, then cautions, then remarks; within them by rule, and then from the
- * top of the board down and from left to right.
+ * Every rule on one sign. The figures are the document's own. Stops first, then cautions, then remarks; within them by
+ * rule, and then from the top of the board down and from left to right.
  */
 export function runDryFit(input: RuleInput): Finding[] {
   return rules.flatMap((rule) => rule.check(input)).toSorted(compareFindings);

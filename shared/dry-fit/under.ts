@@ -15,15 +15,16 @@ export function piecesBelow({ document, figures }: Input, level: number): PieceF
 }
 
 /**
- * What carries a piece of the layer at `level`: everything below it whose top lies where its back does, as far as it can lie
- * under the piece.
+ * What carries a piece of the layer at `level`: everything below it whose top lies where its back does, as far as it
+ * can lie under the piece.
  */
 export function supportOf(input: Input, level: number, { box, bottom }: PieceFigures): Region {
   const { document, figures, kernel } = input;
   const pieces = piecesBelow(input, level).filter(
     (piece) => lengthsEqual(piece.top.nominal, bottom.nominal) && boxesOverlap(piece.box, box),
   );
-  // The kernel's own rings run outlines one way and holes the other, so joining them by turns keeps a hole open only where nothing else lies.
+  // The kernel's own rings run outlines one way and holes the other, so joining them by turns keeps a hole open only
+  // where nothing else lies.
   const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal)
     ? kernel.union(boardRegion(document.board), "evenodd")
     : [];

@@ -11,8 +11,8 @@ export type Grip = {
 };
 
 /**
- * The grip of a cap standoff: stud length less the panel under the cap. At the thickest panel at least one stud diameter must
- * be in the barrel; at the thinnest the stud must not meet the screw's head, or the cap never tightens.
+ * The grip of a cap standoff: stud length less the panel under the cap. At the thickest panel at least one stud
+ * diameter must be in the barrel; at the thinnest the stud must not meet the screw's head, or the cap never tightens.
  */
 export function capStudGrip(
   hardware: {

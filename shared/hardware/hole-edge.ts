@@ -4,8 +4,9 @@ import type { Point, Region } from "../geometry/path.ts";
 type RoundHole = Point & { readonly diameter: number };
 
 /**
- * How near a hole comes to what bounds the piece it is drilled in, in mm: from its centre to the nearest edge (outline or cut-out),
- * and the web left between its rim and that edge or the rim of another hole, whichever is less. Null when the centre is not in the piece.
+ * How near a hole comes to what bounds the piece it is drilled in, in mm: from its centre to the nearest edge (outline
+ * or cut-out), and the web left between its rim and that edge or the rim of another hole, whichever is less. Null when
+ * the centre is not in the piece.
  */
 export function holeEdge(
   hole: RoundHole,

@@ -38,8 +38,9 @@ export function jobState({ briefComplete, revisions, setByStaff }: JobFacts): Jo
 }
 
 /**
- * Whether staff may set `to` on a job in state `from`. After approval the states are taken in order; any job not yet handed over can be put on
- * hold or cancelled. A job on hold is taken up again (its state then follows from the facts) or cancelled.
+ * Whether staff may set `to` on a job in state `from`. After approval the states are taken in order; any job not yet
+ * handed over can be put on hold or cancelled. A job on hold is taken up again (its state then follows from the facts)
+ * or cancelled.
  */
 export function canSetJobState(from: JobState, to: StaffState | "taken up again"): boolean {
   switch (to) {
@@ -58,7 +59,10 @@ export function canSetJobState(from: JobState, to: StaffState | "taken up again"
   }
 }
 
-/** Whether work on the mockup and new revisions make sense in this state. A job in build can still be changed: by a new revision. */
+/**
+ * Whether work on the mockup and new revisions make sense in this state. A job in build can still be changed: by a new
+ * revision.
+ */
 export function canIssue(state: JobState, revisions: readonly RevisionInRow[]): boolean {
   return isUnderWay(state) && !revisions.some((revision) => revision.state === "preparing");
 }

@@ -8,8 +8,8 @@ export type NoteKind = (typeof noteKinds)[number];
 export type NoteActor = { readonly side: "shop" | "client"; readonly isAuthor: boolean; readonly approving?: boolean };
 
 /**
- * Whether the note may go from one state to another: the shop answers an open one, its author settles it (or the approver in
- * approving), and either side opens an answered or settled one again.
+ * Whether the note may go from one state to another: the shop answers an open one, its author settles it (or the
+ * approver in approving), and either side opens an answered or settled one again.
  */
 export function canMoveNote(from: NoteState, to: NoteState, actor: NoteActor): boolean {
   if (from === to) return false;
@@ -18,7 +18,10 @@ export function canMoveNote(from: NoteState, to: NoteState, actor: NoteActor): b
   return true;
 }
 
-/** The state after a reply: an answer by the shop makes an open note answered, an answer by the client opens an answered one. */
+/**
+ * The state after a reply: an answer by the shop makes an open note answered, an answer by the client opens an answered
+ * one.
+ */
 export function noteStateAfterReply(state: NoteState, side: "shop" | "client"): NoteState {
   if (side === "shop") return state === "open" ? "answered" : state;
   return state === "answered" ? "open" : state;

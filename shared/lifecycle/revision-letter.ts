@@ -1,7 +1,10 @@
 /** The alphabet without I, O, Q, S, X and Z, which are mistaken for figures or for each other (ASME Y14.35). */
 const letters = "ABCDEFGHJKLMNPRTUVWY";
 
-/** The letter of the revision at `index`, from 0: A to Y, then AA, AB and so on (ASME Y14.35). Throws for what is no index. */
+/**
+ * The letter of the revision at `index`, from 0: A to Y, then AA, AB and so on (ASME Y14.35). Throws for what is no
+ * index.
+ */
 export function revisionLetter(index: number): string {
   if (!Number.isSafeInteger(index) || index < 0) throw new RangeError(`${index} is no place in a row of revisions.`);
   const last = letters[index % letters.length] ?? "";

@@ -10,8 +10,9 @@ export const revisionStates = [
 export type RevisionState = (typeof revisionStates)[number];
 
 /**
- * Every move there is. Preparing falls back to draft when the PDF fails; an issued revision, or one with a revision asked, is superseded when a
- * later one is issued; an approved one only when a later one is approved. Superseded and withdrawn are the end.
+ * Every move there is. Preparing falls back to draft when the PDF fails; an issued revision, or one with a revision
+ * asked, is superseded when a later one is issued; an approved one only when a later one is approved. Superseded and
+ * withdrawn are the end.
  */
 export const revisionArrows: Readonly<Record<RevisionState, readonly RevisionState[]>> = {
   draft: ["preparing"],
@@ -47,7 +48,9 @@ export function canWithdraw(state: RevisionState): boolean {
   return canMoveRevision(state, "withdrawn");
 }
 
-/** What becomes of an earlier revision when a later one of its job reaches `later`; the same state when nothing does. */
+/**
+ * What becomes of an earlier revision when a later one of its job reaches `later`; the same state when nothing does.
+ */
 export function stateAfterLater(earlier: RevisionState, later: RevisionState): RevisionState {
   if (later === "issued" && (earlier === "issued" || earlier === "revision asked")) return "superseded";
   if (later === "approved" && earlier === "approved") return "superseded";

@@ -14,8 +14,9 @@ export type BedFit = {
 const stepDegrees = 0.5;
 
 /**
- * The turn at which a piece goes on a bed with the least left over, tried in steps of half a degree. Null for a piece that
- * covers nothing. A fit that is found is a fit; one that exists between two steps only may be missed by some tenths of a mm.
+ * The turn at which a piece goes on a bed with the least left over, tried in steps of half a degree. Null for a piece
+ * that covers nothing. A fit that is found is a fit; one that exists between two steps only may be missed by some
+ * tenths of a mm.
  */
 export function fitOnBed(region: Region, bed: { readonly widthMm: number; readonly heightMm: number }): BedFit | null {
   const points = region.flat();

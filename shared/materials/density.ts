@@ -1,6 +1,6 @@
 /**
- * Density of wood in kg/m³ at a moisture content in percent: 1000 · G · (1 + M/100), with G the specific gravity at 12 %
- * moisture on oven-dry mass (Forest Products Laboratory, Wood Handbook, GTR-282, chapter 4).
+ * Density of wood in kg/m³ at a moisture content in percent: 1000 · G · (1 + M/100), with G the specific gravity at 12
+ * % moisture on oven-dry mass (Forest Products Laboratory, Wood Handbook, GTR-282, chapter 4).
  */
 export function woodDensityKgM3(gravity: number, moisturePercent: number): number {
   return 1000 * gravity * (1 + moisturePercent / 100);

@@ -3,7 +3,8 @@ import { flatHeadMm, woodScrewDiameterMm } from "./wood-screws.ts";
 
 /**
  * A generic stock list to start a shop with. Names are invented; a shop writes its own over them. Densities: acrylic
- * 1190 kg/m³ (ASTM D792); gravities of wood from the Wood Handbook, GTR-282, tables 5-3 (at 12 % moisture, on oven-dry mass).
+ * 1190 kg/m³ (ASTM D792); gravities of wood from the Wood Handbook, GTR-282, tables 5-3 (at 12 % moisture, on oven-dry
+ * mass).
  */
 
 export type AcrylicStock = { readonly acrylic: Acrylic; readonly thicknessesMm: readonly number[] };
@@ -98,8 +99,8 @@ export const standardScrews: readonly Screw[] = [12, 16, 19, 25].map((length) =>
 const floorThickness = 2.5;
 
 /**
- * Barrels whose bore passes a No. 6 head (7.09 mm); a threaded bush that goes in after the wood screw takes the thinner stud. Stud lengths suit the
- * sheets the barrel is meant for at both ends of their tolerance.
+ * Barrels whose bore passes a No. 6 head (7.09 mm); a threaded bush that goes in after the wood screw takes the thinner
+ * stud. Stud lengths suit the sheets the barrel is meant for at both ends of their tolerance.
  */
 function capStud(
   diameter: { readonly barrel: number; readonly stud: number; readonly capThickness: number },

@@ -18,7 +18,10 @@ export function woodScrewDiameterMm(gauge: number): number {
   return inchesToMm(0.06 + 0.013 * gauge);
 }
 
-/** Largest head diameter and the head's height in mm of a flat-head screw; null for a gauge that the table does not list. */
+/**
+ * Largest head diameter and the head's height in mm of a flat-head screw; null for a gauge that the table does not
+ * list.
+ */
 export function flatHeadMm(gauge: number): { readonly diameter: number; readonly height: number } | null {
   const inches = flatHeadInches.get(gauge);
   if (inches === undefined) return null;

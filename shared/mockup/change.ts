@@ -21,7 +21,10 @@ export type ChangeKind =
   | "come"
   | "gone";
 
-/** One difference between two documents, in words. `where` is a spot on the later board, or on the earlier one for what is gone. */
+/**
+ * One difference between two documents, in words. `where` is a spot on the later board, or on the earlier one for what
+ * is gone.
+ */
 export type Change = {
   readonly kind: ChangeKind;
   readonly text: string;

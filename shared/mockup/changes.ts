@@ -10,7 +10,8 @@ export type { Change, ChangeKind } from "./change.ts";
 
 /**
  * What changed from one document to another, in words: the whole sign first, then layer by layer from the wall outward.
- * Layers are matched by key, pieces and holes by id. No change, no entry; any difference that a client or a builder could see has one.
+ * Layers are matched by key, pieces and holes by id. No change, no entry; any difference that a client or a builder
+ * could see has one.
  */
 export function listChanges(before: MockupDocument, after: MockupDocument, unit: LengthUnit = "mm"): Change[] {
   const wording: Wording = { unit };

@@ -1,8 +1,8 @@
 import { documentVersion, type MockupDocument, type Wood } from "./document.ts";
 
 /**
- * A document with a plain board and nothing on it. Size in mm, as the brief states it or 600 by 400; light from the upper left
- * at 45°, seen from 3 m.
+ * A document with a plain board and nothing on it. Size in mm, as the brief states it or 600 by 400; light from the
+ * upper left at 45°, seen from 3 m.
  */
 export function emptyDocument(options: {
   readonly backer: Wood;

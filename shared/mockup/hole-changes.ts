@@ -3,7 +3,9 @@ import { type Change, countOf, type Wording } from "./change.ts";
 import type { Hole, Layer, MockupDocument } from "./document.ts";
 import { layerWords } from "./layer-changes.ts";
 
-/** What changed about the holes of layers on standoffs, matched by id. A layer has one entry for each sort of change. */
+/**
+ * What changed about the holes of layers on standoffs, matched by id. A layer has one entry for each sort of change.
+ */
 export function listHoleChanges(before: MockupDocument, after: MockupDocument, { unit }: Wording): Change[] {
   const old = new Map(before.layers.map((layer) => [layer.key, layer]));
   return after.layers.flatMap((layer) => {

@@ -8,9 +8,9 @@ import { computeMasses } from "./masses.ts";
 import { backerTopOf, rise, type StandingPiece, standPieces } from "./stand-pieces.ts";
 
 /**
- * Every figure of a sign: heights with their bands, areas, masses, depth. The document must have passed its schema; then every
- * figure is finite. An empty layer has the heights a piece lying on the backer would have. Figures are of one sign, whatever
- * the quantity. Hardware is counted but not weighed: its density is not stated.
+ * Every figure of a sign: heights with their bands, areas, masses, depth. The document must have passed its schema;
+ * then every figure is finite. An empty layer has the heights a piece lying on the backer would have. Figures are of
+ * one sign, whatever the quantity. Hardware is counted but not weighed: its density is not stated.
  */
 export function computeFigures(document: MockupDocument, kernel: Kernel): Figures {
   const standing = standPieces(document, kernel);

@@ -31,9 +31,10 @@ export function backerTopOf(document: MockupDocument): Banded {
 }
 
 /**
- * Every piece of the document at its height, layer by layer from the wall outward. A bonded piece stands on the highest thing under it, a piece in
- * a pocket that depth lower, a piece on standoffs the offset above what its barrels stand on (or, as long as it has no holes,
- * above the highest thing under it). A piece over nothing is taken as standing on the plane of the backer's face.
+ * Every piece of the document at its height, layer by layer from the wall outward. A bonded piece stands on the highest
+ * thing under it, a piece in a pocket that depth lower, a piece on standoffs the offset above what its barrels stand on
+ * (or, as long as it has no holes, above the highest thing under it). A piece over nothing is taken as standing on the
+ * plane of the backer's face.
  */
 export function standPieces(document: MockupDocument, kernel: Kernel): StandingPiece[] {
   const backerTop = backerTopOf(document);

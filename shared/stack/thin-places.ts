@@ -16,8 +16,9 @@ const slackMm = 0.02;
 const smallestShare = 0.05;
 
 /**
- * Where a region is narrower than `widthMm`: what an opening of that width takes away. The opening's second step is mitred,
- * so that corners of 45° and more are not taken for strokes; tips of 30° and less are, since there the material runs out.
+ * Where a region is narrower than `widthMm`: what an opening of that width takes away. The opening's second step is
+ * mitred, so that corners of 45° and more are not taken for strokes; tips of 30° and less are, since there the material
+ * runs out.
  */
 export function thinPlaces(region: Region, widthMm: number, kernel: Kernel): ThinPlace[] {
   if (region.length === 0 || !(widthMm > 0)) return [];
@@ -38,8 +39,8 @@ export function thinGaps(region: Region, widthMm: number, kernel: Kernel): ThinP
 }
 
 /**
- * The least width in mm that a region has in one of its thin places, to 0.02 mm, looked for up to `limitMm`. 0 where it runs out to a point;
- * null when nothing is thinner than the limit.
+ * The least width in mm that a region has in one of its thin places, to 0.02 mm, looked for up to `limitMm`. 0 where it
+ * runs out to a point; null when nothing is thinner than the limit.
  */
 export function thinnestWidth(
   region: Region,

@@ -3,8 +3,8 @@ import type { Kernel } from "../geometry/kernel.ts";
 import type { Box, Region } from "../geometry/path.ts";
 
 /**
- * Two outlines that share a strip narrower than twice this don't carry each other: neighbours in a drawing overlap by the
- * flattening's hundredths of a millimetre, and a saw or a laser takes more than that away.
+ * Two outlines that share a strip narrower than twice this don't carry each other: neighbours in a drawing overlap by
+ * the flattening's hundredths of a millimetre, and a saw or a laser takes more than that away.
  */
 const sliverMm = 0.05;
 

@@ -5,8 +5,8 @@ const noLength = "–";
 const sixteenths = 16;
 
 /**
- * A length as a drawing writes it: mm with one decimal at most and no unit, inches as fractions to 1/16 with the inch mark,
- * as 19.5 or 12 3/8″.
+ * A length as a drawing writes it: mm with one decimal at most and no unit, inches as fractions to 1/16 with the inch
+ * mark, as 19.5 or 12 3/8″.
  */
 export function formatLength(mm: number, unit: LengthUnit): string {
   if (!Number.isFinite(mm)) return noLength;

@@ -6,8 +6,8 @@ const pattern = new RegExp(
 );
 
 /**
- * Reads what a person typed into a length field: "600", "12,5", "60 cm", "12 3/8", "3/4″", "−1 1/2 in". A number without a
- * unit is in `unit`. Gives mm, or null when it is no length.
+ * Reads what a person typed into a length field: "600", "12,5", "60 cm", "12 3/8", "3/4″", "−1 1/2 in". A number
+ * without a unit is in `unit`. Gives mm, or null when it is no length.
  */
 export function parseLength(text: string, unit: LengthUnit): number | null {
   const found = pattern.exec(text.trim().toLowerCase());

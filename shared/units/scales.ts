@@ -15,8 +15,8 @@ export function preferredScales(unit: LengthUnit): readonly Scale[] {
 }
 
 /**
- * The largest preferred scale at which a thing of `widthMm` by `heightMm` fits into the space. `largest` caps it (1 keeps small
- * signs at full size). Null when it does not fit even at 1:1000, or when there is nothing to fit.
+ * The largest preferred scale at which a thing of `widthMm` by `heightMm` fits into the space. `largest` caps it (1
+ * keeps small signs at full size). Null when it does not fit even at 1:1000, or when there is nothing to fit.
  */
 export function largestScale(
   thing: { readonly widthMm: number; readonly heightMm: number },

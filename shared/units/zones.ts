@@ -31,8 +31,8 @@ export function rowFields(sheet: SheetSize): ZoneField[] {
 }
 
 /**
- * The zone of a point of the sheet in mm, as "B4". Points between frame and edge count to the nearest field; a point off the
- * sheet has none. A point on a line between two fields belongs to the later one.
+ * The zone of a point of the sheet in mm, as "B4". Points between frame and edge count to the nearest field; a point
+ * off the sheet has none. A point on a line between two fields belongs to the later one.
  */
 export function zoneOf(point: { readonly x: number; readonly y: number }, sheet: SheetSize): string | null {
   const inside = point.x >= 0 && point.y >= 0 && point.x <= sheet.widthMm && point.y <= sheet.heightMm;
@@ -42,7 +42,10 @@ export function zoneOf(point: { readonly x: number; readonly y: number }, sheet:
   return row && column ? `${row.label}${column.label}` : null;
 }
 
-/** An even number of fields, as many as come nearest to 50 mm each: A4 6 × 4, A3 8 × 6, A0 24 × 16, as ISO 5457 lists them. */
+/**
+ * An even number of fields, as many as come nearest to 50 mm each: A4 6 × 4, A3 8 × 6, A0 24 × 16, as ISO 5457 lists
+ * them.
+ */
 function fieldCount(sideMm: number): number {
   return 2 * Math.max(1, Math.round(sideMm / 2 / fieldMm));
 }

@@ -2,7 +2,8 @@ import fc from "fast-check";
 import { expect, it } from "vitest";
 import { largestScale, preferredScales } from "#shared/units/scales.ts";
 
-// ISO 5455:1979: 50:1 20:1 10:1 5:1 2:1, 1:1, and 1:2 1:5 1:10 and their tenfolds. From memory. 1:4 and 1:8: common practice in inches.
+// ISO 5455:1979: 50:1 20:1 10:1 5:1 2:1, 1:1, and 1:2 1:5 1:10 and their tenfolds. From memory. 1:4 and 1:8: common
+// practice in inches.
 it("the preferred scales are those of ISO 5455, with 1:4 and 1:8 for inches", () => {
   const names = (unit: "mm" | "in") => preferredScales(unit).map(({ name }) => name);
   expect(names("mm").slice(0, 9)).toEqual(["50:1", "20:1", "10:1", "5:1", "2:1", "1:1", "1:2", "1:5", "1:10"]);

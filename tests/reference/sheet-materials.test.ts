@@ -48,7 +48,8 @@ it.each([
   expect(sheetMassG(1_000_000, thickness, density) / 1000).toBeCloseTo(kg, 9);
 });
 
-// Forest Products Laboratory, Wood Handbook, GTR-190 and GTR-282, table 5-3; density at 12 % moisture by the handbook's chapter 4.
+// Forest Products Laboratory, Wood Handbook, GTR-190 and GTR-282, table 5-3; density at 12 % moisture by the handbook's
+// chapter 4.
 const species = rows("fpl-specific-gravity.csv").map((line) => {
   const [name = "", , , , gravity = "", density = ""] = line.replace(/"([^",]+), ([^"]+)"/, "$1 $2").split(",");
   return { name, gravity: Number(gravity), density: Number(density) };

@@ -1,8 +1,8 @@
 import { expect, it } from "vitest";
 import { columnFields, frameOf, rowFields, zoneOf } from "#shared/units/zones.ts";
 
-// ISO 5457:1999: fields of 50 mm from the axes of symmetry; A0 24 × 16, A1 16 × 12, A2 12 × 8, A3 8 × 6, A4 6 × 4 (long × short side).
-// From memory.
+// ISO 5457:1999: fields of 50 mm from the axes of symmetry; A0 24 × 16, A1 16 × 12, A2 12 × 8, A3 8 × 6, A4 6 × 4 (long
+// × short side). From memory.
 it.each([
   { name: "A4", long: 297, short: 210, fields: [6, 4] },
   { name: "A3", long: 420, short: 297, fields: [8, 6] },

@@ -10,7 +10,10 @@ import { layersWithFigures, layerWords } from "../words.ts";
 
 const source = "arithmetic";
 
-/** Rule 2: pieces of one layer, or the barrels of one panel, on different levels; and a panel that would run into what is under it. */
+/**
+ * Rule 2: pieces of one layer, or the barrels of one panel, on different levels; and a panel that would run into what
+ * is under it.
+ */
 export const mixedSupport: Rule = { number: 2, title: "Mixed support", check };
 
 function check(input: RuleInput): Finding[] {

@@ -74,7 +74,10 @@ function reaches(place: ThinPlace, free: Region, kernel: Kernel): boolean {
   return kernel.intersect(place.region, free).length > 0;
 }
 
-/** The thinnest of the places that matter: the region's own thinnest when it lies in one of them, else measured place by place. */
+/**
+ * The thinnest of the places that matter: the region's own thinnest when it lies in one of them, else measured place by
+ * place.
+ */
 function thinnestOf(
   places: readonly ThinPlace[],
   region: Region,

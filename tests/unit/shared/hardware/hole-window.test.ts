@@ -21,7 +21,8 @@ it("a hole of the upper limit, hard over to one side, is still covered by as muc
     fc.property(diameter, diameter, fc.double({ min: 0, max: 2, noNaN: true }), (passing, more, cover) => {
       const cap = passing + more;
       const { upper } = holeWindow({ passing, cap, barrel: cap, placingError: 0.5, movement: 0, cover });
-      // The stud touches the near side of the hole: the far side is the hole's width less the stud's half from the cap's middle.
+      // The stud touches the near side of the hole: the far side is the hole's width less the stud's half from the
+      // cap's middle.
       const farSide = upper - passing / 2;
       expect(cap / 2 - farSide).toBeCloseTo(cover, 6);
     }),
@@ -30,7 +31,8 @@ it("a hole of the upper limit, hard over to one side, is still covered by as muc
 
 const conditions = { expansionPerK: 7e-5, temperatureK: 20, woodPerPoint: 0.00212, moisturePoints: 4, grainTurn: 0 };
 
-// 200 mm: acrylic 200 · 7e-5 · 20 = 0.28 mm; eastern white pine across the grain 200 · 0.00212 · 4 = 1.696 mm (Wood Handbook, GTR-282, eq. 13-2).
+// 200 mm: acrylic 200 · 7e-5 · 20 = 0.28 mm; eastern white pine across the grain 200 · 0.00212 · 4 = 1.696 mm (Wood
+// Handbook, GTR-282, eq. 13-2).
 it.each([
   { direction: "along the grain", hole: { x: 200, y: 0 }, moves: 0.28 },
   { direction: "across the grain", hole: { x: 0, y: 200 }, moves: 1.976 },

@@ -29,8 +29,8 @@ const tip = (degrees: number): Region => {
   ];
 };
 
-// Limits as measured in the project's study of the method: bars of 1.99 mm are found at 2 mm, necks of 1.98, corners from 45° never,
-// tips of 30° and less always.
+// Limits as measured in the project's study of the method: bars of 1.99 mm are found at 2 mm, necks of 1.98, corners
+// from 45° never, tips of 30° and less always.
 describe("a stroke of 2 mm", () => {
   it.each([
     { name: "a bar of 1.9", region: () => bar(0, 0, 40, 1.9), found: 1 },

@@ -21,7 +21,8 @@ const sign = (...colours: string[]) =>
     ),
   ]);
 
-// Greys differ in lightness only: ΔE00 = ΔL / (1 + 0.015 (L − 50)² / √(20 + (L − 50)²)), L the mean of both (Sharma, Wu, Dalal 2005). From #808080:
+// Greys differ in lightness only: ΔE00 = ΔL / (1 + 0.015 (L − 50)² / √(20 + (L − 50)²)), L the mean of both (Sharma,
+// Wu, Dalal 2005). From #808080:
 // #858585 1.862, #868686 2.226, #8D8D8D 4.703, #8E8E8E 5.046.
 it.each([
   { colour: "#808080", severity: null, deltaE: 0 },

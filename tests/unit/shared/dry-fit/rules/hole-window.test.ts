@@ -29,7 +29,8 @@ describe("the fixed hole", () => {
   });
 });
 
-// 100 mm up: acrylic 100 · 7e-5 · 20 = 0.14, softwood across the grain 100 · 0.00267 · 4 = 1.068: lower = 6 + 2 · 1.208 = 8.416.
+// 100 mm up: acrylic 100 · 7e-5 · 20 = 0.14, softwood across the grain 100 · 0.00267 · 4 = 1.068: lower = 6 + 2 · 1.208
+// = 8.416.
 describe("a hole 100 mm across the grain from the fixed one", () => {
   const pair = (diameter: number) =>
     panel([hole("f", 300, 250, { diameter: 8, fixed: true }), hole("h", 300, 150, { diameter })]);
