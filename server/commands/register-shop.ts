@@ -66,10 +66,8 @@ const addressKnown = (): AppError =>
 
 /** An address for the shop: its name in plain letters, with a number when that is taken. */
 async function freeSlug(name: string, transaction: Transaction): Promise<string> {
-  const plain = name
-    .normalize("NFKD")
+  const plain = plainLetters(name)
     .toLowerCase()
-    .replace(/\p{M}/gu, "")
     .replace(/[^a-z0-9]+/g, "-")
     .slice(0, 50)
     .replace(/^-+|-+$/g, "");
@@ -80,10 +78,12 @@ async function freeSlug(name: string, transaction: Transaction): Promise<string>
   }
 }
 
+/** Without accents: Ü as U. */
+const plainLetters = (text: string): string => text.normalize("NFKD").replace(/\p{M}/gu, "");
+
 /** The initials of the name's words, as CL for Copper Lark; J for job when there are none. */
 function prefixOf(name: string): string {
-  const initials = name
-    .normalize("NFKD")
+  const initials = plainLetters(name)
     .toUpperCase()
     .split(/[^A-Z]+/)
     .map((word) => word.slice(0, 1))

@@ -52,7 +52,8 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
   };
 }
 
-function taskListOf(services: Services, log: Logger): TaskList {
+/** The tasks as the queue wants them; each success is logged. */
+export function taskListOf(services: Services, log: Logger): TaskList {
   return Object.fromEntries(
     Object.entries(tasks).map(([name, task]) => [
       name,
