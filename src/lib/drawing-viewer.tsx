@@ -43,44 +43,46 @@ export function DrawingViewer(props: DrawingViewerProps) {
   }
 
   return (
-    <div className={cx("relative", className)}>
-      {room && frame?.(shown, room)}
-      <div
-        ref={element}
-        role="application"
-        aria-label={`${title}, to look around in`}
-        aria-describedby={hintId}
-        onClickCapture={handleClickCapture}
-        {...gestures.windowProps}
-        className={cx(
-          "absolute inset-0 overflow-hidden -outline-offset-4",
-          view === null ? "touch-pan-y" : "touch-none",
-          onPick ? "cursor-crosshair" : view !== null && "cursor-grab",
-        )}
-      >
-        {room && (
-          <>
-            <div
-              className="absolute"
-              style={{
-                left: shown.x,
-                top: shown.y,
-                width: picture.width * shown.scale,
-                height: picture.height * shown.scale,
-              }}
-            >
-              <Picture
-                list={list}
-                title={title}
-                className="block h-full w-full select-none"
-                {...(onPick ? { onPick } : {})}
-              />
-            </div>
-            {overlay?.(shown, room, fit)}
-          </>
-        )}
+    <div className={cx("flex flex-col", className)}>
+      <div className="relative min-h-0 flex-1">
+        {room && frame?.(shown, room)}
+        <div
+          ref={element}
+          role="application"
+          aria-label={`${title}, to look around in`}
+          aria-describedby={hintId}
+          onClickCapture={handleClickCapture}
+          {...gestures.windowProps}
+          className={cx(
+            "absolute inset-0 overflow-hidden -outline-offset-4",
+            view === null ? "touch-pan-y" : "touch-none",
+            onPick ? "cursor-crosshair" : view !== null && "cursor-grab",
+          )}
+        >
+          {room && (
+            <>
+              <div
+                className="absolute"
+                style={{
+                  left: shown.x,
+                  top: shown.y,
+                  width: picture.width * shown.scale,
+                  height: picture.height * shown.scale,
+                }}
+              >
+                <Picture
+                  list={list}
+                  title={title}
+                  className="block h-full w-full select-none"
+                  {...(onPick ? { onPick } : {})}
+                />
+              </div>
+              {overlay?.(shown, room, fit)}
+            </>
+          )}
+        </div>
       </div>
-      <p className="absolute bottom-1.5 left-1.5 flex gap-1">
+      <p className="flex gap-1 px-2 pt-0.5 pb-2">
         <ViewButton label="Closer" about={title} onPress={() => gestures.step(1.6)} />
         <ViewButton label="Farther" about={title} idle={gestures.isWhole} onPress={() => gestures.step(1 / 1.6)} />
         <ViewButton label="Whole" about={title} idle={gestures.isWhole} onPress={() => onView(null)} />
@@ -106,13 +108,13 @@ function ViewButton({ label, about, idle = false, onPress }: ViewButtonProps) {
       type="button"
       aria-disabled={idle}
       onClick={idle ? undefined : onPress}
+      aria-label={`${label}: ${about}`}
       className={cx(
-        "min-h-8 rounded border bg-sheet/90 px-2 text-fine",
+        "min-h-8 rounded border bg-sheet px-2 text-fine",
         idle ? "border-rule text-graphite" : "cursor-pointer border-graphite text-ink hover:bg-linen",
       )}
     >
       {label}
-      <span className="sr-only">: {about}</span>
     </button>
   );
 }

@@ -51,7 +51,7 @@ export function SheetDecisions({ shop, revision, sheet, notes, proofAddress, isD
       <DecisionButtons
         revision={revision}
         reader={sheet.reader}
-        isWide={!isDesk}
+        isShort={!isDesk}
         onApprove={() => setOpen("approve")}
         onAsk={() => setOpen("ask")}
       />

@@ -92,6 +92,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
             room={room}
             selectedId={desk.selectedId}
             onSelect={handleSelect}
+            onView={setView}
             draft={draftSpot}
             isPlacing={desk.isPlacing}
           />

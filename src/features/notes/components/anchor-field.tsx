@@ -47,12 +47,17 @@ export function AnchorField({ anchor, pieces, error, isPlacing, onPlace, onAncho
   }
 
   return (
-    <div className="space-y-2">
-      <Button size="small" onClick={onPlace} aria-pressed={isPlacing}>
-        {anchor?.on === "spot" ? "Touch another spot" : "Touch the spot"}
+    <div className="flex items-start gap-2">
+      <Button className="mt-6 shrink-0 px-2! text-sm!" onClick={onPlace} aria-pressed={isPlacing}>
+        {anchor?.on === "spot" ? "Touch another" : "Touch the spot"}
       </Button>
-      {isPlacing && <p className="text-fine text-graphite">Touch the drawing where you mean. Escape leaves it.</p>}
-      <Select label="or choose" value={choice} error={error} onChange={(event) => handleChoice(event.target.value)}>
+      <Select
+        label="or choose from the list"
+        value={choice}
+        error={error}
+        className="flex-1"
+        onChange={(event) => handleChoice(event.target.value)}
+      >
         <option value="">Nothing chosen yet</option>
         {choice === touched && <option value={touched}>{touchedWords(anchor, pieces)}</option>}
         <option value={whole}>The whole sign</option>

@@ -1,7 +1,7 @@
-import { useMemo } from "react";
+import { useEffect, useEffectEvent, useMemo } from "react";
 import type { Note } from "#shared/contracts/notes.ts";
 import { cx } from "@/lib/cx.ts";
-import { type DrawingView, type Size, spotInWindow } from "@/lib/drawing-view.ts";
+import { type DrawingView, type Size, spotInWindow, viewShowing } from "@/lib/drawing-view.ts";
 import { balloonOffsets } from "../model/balloon-offsets.ts";
 import { balloonName, noteTone } from "../model/note-words.ts";
 import { toneText } from "./note-mark.tsx";
@@ -18,6 +18,7 @@ type BalloonsProps = {
   readonly room: Size;
   readonly selectedId: string | null;
   readonly onSelect: (noteId: string | null) => void;
+  readonly onView: (view: DrawingView) => void;
   /** The spot of a note that is being written, on the board in mm. */
   readonly draft: Spot | null;
   /** A spot is being chosen: balloons let the touch through. */
@@ -26,7 +27,7 @@ type BalloonsProps = {
 
 /** Numbered balloons with their leaders, laid over the drawing. Their size is the window's, not the drawing's. */
 export function Balloons(props: BalloonsProps) {
-  const { notes, origin, view, fit, room, selectedId, onSelect, draft, isPlacing } = props;
+  const { notes, origin, view, fit, room, selectedId, onSelect, onView, draft, isPlacing } = props;
   const pinned = useMemo(
     () => notes.flatMap((note) => (note.anchor.on === "spot" ? [{ note, at: onPicture(note.anchor, origin) }] : [])),
     [notes, origin],
@@ -39,6 +40,16 @@ export function Balloons(props: BalloonsProps) {
       ),
     [pinned, fit, room],
   );
+  const bringIntoView = useEffectEvent(() => {
+    const chosen = pinned.find(({ note }) => note.id === selectedId);
+    // The whole drawing shows every spot already.
+    const moved = chosen && view !== fit && viewShowing(view, chosen.at, room);
+    if (moved && moved !== view) onView(moved);
+  });
+  // Only a change of the choice moves the drawing: afterwards the reader may look elsewhere.
+  useEffect(() => {
+    if (selectedId !== null) bringIntoView();
+  }, [selectedId]);
   const shown = pinned.map(({ note, at }, index) => {
     const foot = spotInWindow(view, at);
     const { dx, dy } = offsets[index] ?? { dx: 46, dy: 0 };
@@ -51,6 +62,9 @@ export function Balloons(props: BalloonsProps) {
       <svg aria-hidden="true" className="absolute inset-0 h-full w-full">
         {shown.map(({ note, foot, head, tone }) => (
           <g key={note.id} className={tone}>
+            {/* A pale edge keeps the leader seen on a piece of its own colour. */}
+            <line x1={foot.x} y1={foot.y} x2={head.x} y2={head.y} className="stroke-sheet/80" strokeWidth={4} />
+            <circle cx={foot.x} cy={foot.y} r={4.5} className="fill-sheet/80" />
             <line
               x1={foot.x}
               y1={foot.y}
@@ -65,14 +79,15 @@ export function Balloons(props: BalloonsProps) {
             )}
           </g>
         ))}
-        {draftAt && (
-          <path
-            d={`M${draftAt.x - 14} ${draftAt.y}h28M${draftAt.x} ${draftAt.y - 14}v28`}
-            className="text-indigo"
-            stroke="currentColor"
-            strokeWidth={2}
-          />
-        )}
+        {draftAt &&
+          (["stroke-sheet", "stroke-indigo"] as const).map((colour, layer) => (
+            <path
+              key={colour}
+              d={`M${draftAt.x - 16} ${draftAt.y}h32M${draftAt.x} ${draftAt.y - 16}v32`}
+              className={colour}
+              strokeWidth={layer === 0 ? 7 : 2.5}
+            />
+          ))}
       </svg>
       {shown.map(({ note, head, tone }) => (
         <button

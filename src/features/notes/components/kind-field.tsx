@@ -17,13 +17,14 @@ export function KindField({ kind, error, onKind }: KindFieldProps) {
   return (
     <fieldset aria-describedby={error ? `${id}-error` : undefined}>
       <legend className="text-sm font-semibold">What kind of note</legend>
-      <div className="mt-1 space-y-1.5">
+      <div className="mt-1 grid grid-cols-3 border border-graphite bg-sheet">
         {kinds.map((each) => (
           <label
             key={each}
             className={cx(
-              "flex min-h-11 cursor-pointer items-center gap-3 rounded border bg-sheet px-3 py-1.5",
-              each === kind ? "border-ink" : "border-graphite",
+              "flex min-h-11 cursor-pointer items-center justify-center gap-1.5 border-graphite px-1 text-center text-sm leading-tight not-first:border-l",
+              "has-focus-visible:outline-2 has-focus-visible:outline-offset-2 has-focus-visible:outline-indigo",
+              each === kind ? "bg-ink font-semibold text-sheet" : "hover:bg-linen",
             )}
           >
             <input
@@ -33,16 +34,14 @@ export function KindField({ kind, error, onKind }: KindFieldProps) {
               checked={each === kind}
               aria-invalid={error ? true : undefined}
               onChange={() => onKind(each)}
-              className="size-5 shrink-0 cursor-pointer accent-indigo"
+              className="sr-only"
             />
-            <NoteMark tone={noteTone({ kind: each, state: "open" })} />
-            <span>
-              <span className="block text-sm font-semibold">{kindWords[each].word}</span>
-              <span className="block text-fine text-graphite">{kindWords[each].means}</span>
-            </span>
+            <NoteMark tone={noteTone({ kind: each, state: "open" })} className={each === kind && "text-sheet"} />
+            {kindWords[each].word}
           </label>
         ))}
       </div>
+      {kind !== null && <p className="mt-1 text-fine text-graphite">{kindWords[kind].means}</p>}
       {error && (
         <p id={`${id}-error`} className="mt-1 text-sm text-oxblood">
           {error}

@@ -63,7 +63,7 @@ export function NoteComposer(props: NoteComposerProps) {
       ref={form}
       onSubmit={handleSubmit}
       aria-labelledby={headingId}
-      className="space-y-4 bg-linen px-4 py-4"
+      className="space-y-3 bg-linen px-4 py-3"
       noValidate
     >
       <h3 id={headingId} className="font-serif text-base font-bold">
@@ -80,6 +80,7 @@ export function NoteComposer(props: NoteComposerProps) {
       <KindField kind={draft.kind} error={gaps.kind} onKind={(kind) => onDraft({ ...draft, kind })} />
       <TextArea
         label="Your note"
+        rows={2}
         value={draft.text}
         error={gaps.text}
         onChange={(event) => onDraft({ ...draft, text: event.target.value })}

@@ -60,9 +60,8 @@ export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelecte
         <div className="min-w-0 flex-1">
           <p className="whitespace-pre-wrap">{note.text}</p>
           <p className="mt-0.5 text-fine text-graphite">
-            <span className={cx("inline-flex items-center gap-1 font-semibold", toneText[tone])}>
-              <NoteMark tone={tone} />
-              {state}
+            <span className={cx("font-semibold", toneText[tone])}>
+              <NoteMark tone={tone} /> {state}
             </span>
             , {rest.join(", ")}
           </p>

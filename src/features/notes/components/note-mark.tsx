@@ -16,12 +16,12 @@ export const toneText: Readonly<Record<NoteTone, string>> = {
 };
 
 /** The drawn mark of a note's kind, or the tick of a settled one; the word stands beside it. */
-export function NoteMark({ tone, className }: { readonly tone: NoteTone; readonly className?: string }) {
+export function NoteMark({ tone, className }: { readonly tone: NoteTone; readonly className?: string | false }) {
   return (
     <svg
       aria-hidden="true"
       viewBox="0 0 16 16"
-      className={cx("inline-block size-3.5 shrink-0", toneText[tone], className)}
+      className={cx("inline-block size-3.5 shrink-0", className || toneText[tone])}
     >
       <path d={shapes[tone]} fill="none" stroke="currentColor" strokeWidth="1.8" strokeLinejoin="round" />
     </svg>

@@ -59,7 +59,7 @@ export function ElevationView(props: ElevationViewProps) {
         className="h-full"
       />
       {isPlacing && (
-        <div className="absolute inset-x-0 top-0 flex items-center justify-center gap-3 border-b border-indigo bg-sheet px-3 py-1.5 text-sm">
+        <div className="absolute inset-x-1.5 bottom-1.5 flex items-center justify-center gap-3 border border-indigo bg-sheet px-3 text-sm sm:left-auto">
           <span className="font-semibold text-indigo">Touch the spot you mean.</span>
           <button
             type="button"

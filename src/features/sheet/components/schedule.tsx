@@ -10,7 +10,7 @@ const withUnit = (length: string, unit: ScheduleProps["unit"]): string =>
 /** What the sign is made of, a row a layer from the wall outward. */
 export function ScheduleTable({ rows }: Pick<ScheduleProps, "rows">) {
   return (
-    <Table caption="Schedule">
+    <Table caption="Schedule" className="[&_td]:py-1 [&_th]:py-1">
       <thead>
         <tr>
           <HeadCell>Key</HeadCell>

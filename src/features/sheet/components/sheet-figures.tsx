@@ -6,7 +6,7 @@ import { formatMass } from "#shared/units/mass.ts";
 export function SheetFigures({ sheet }: { readonly sheet: Pick<SheetView, "figures" | "words" | "job"> }) {
   const { figures, words, job } = sheet;
   return (
-    <div className="space-y-1 text-sm text-graphite">
+    <div className="text-sm text-graphite lg:flex lg:flex-wrap lg:gap-x-4">
       {words !== "" && (
         <p>
           It reads <q className="font-serif font-bold whitespace-pre-line text-ink">{words}</q>

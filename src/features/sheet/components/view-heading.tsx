@@ -8,7 +8,7 @@ type ViewHeadingProps = {
 /** The name of a view on the sheet. */
 export function ViewHeading({ trade, plain = false, after }: ViewHeadingProps) {
   return (
-    <h2 className="bg-sheet/85 pr-2 font-serif text-base font-bold">
+    <h2 className="font-serif text-base font-bold">
       {trade}{" "}
       <span className="font-sans text-fine font-normal text-graphite">
         {plain && `(${plain})`}

@@ -22,26 +22,27 @@ function marksIn(fields: readonly Field[], origin: number, scale: number, moved:
   });
 }
 
-/** Zone letters and numbers round the drawing's window. They go along with the drawing, so that they are always the paper's. */
+/**
+ * Zone letters and numbers in the frame's band at the left and over the row (2.5rem) that names the view. They go along with
+ * the drawing, so that they are always the paper's.
+ */
 export function ZoneMarks({ zones, origin, view, room }: ZoneMarksProps) {
   const columns = marksIn(zones.columns, origin.x, view.scale, view.x, room.width);
   const rows = marksIn(zones.rows, origin.y, view.scale, view.y, room.height);
   return (
     <div aria-hidden="true" className="pointer-events-none font-serif text-fine leading-none text-graphite">
-      {(["-top-5", "-bottom-5"] as const).map((side) => (
-        <div key={side} className={`absolute inset-x-0 h-5 overflow-hidden ${side}`}>
-          {columns.map(({ label, at, end }) => (
-            <span key={label}>
-              <span className="absolute top-1 -translate-x-1/2" style={{ left: at }}>
-                {label}
-              </span>
-              {end < room.width - 1 && (
-                <span className="absolute inset-y-0 border-l border-graphite" style={{ left: end }} />
-              )}
+      <div className="absolute inset-x-0 -top-15 h-5 overflow-hidden">
+        {columns.map(({ label, at, end }) => (
+          <span key={label}>
+            <span className="absolute top-1 -translate-x-1/2" style={{ left: at }}>
+              {label}
             </span>
-          ))}
-        </div>
-      ))}
+            {end < room.width - 1 && (
+              <span className="absolute inset-y-0 border-l border-graphite" style={{ left: end }} />
+            )}
+          </span>
+        ))}
+      </div>
       <div className="absolute inset-y-0 -left-5 w-5 overflow-hidden">
         {rows.map(({ label, at, end }) => (
           <span key={label}>

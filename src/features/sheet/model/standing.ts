@@ -13,7 +13,7 @@ export function standingOf(revision: Decided, reader: SheetView["reader"]): Stan
     case "approved":
       return { words: revision.decision?.typedName ?? revision.decision?.by ?? "approved", tone: "settled" };
     case "revision asked":
-      return { words: "not yet: a revision is asked for", tone: "ours" };
+      return { words: "a revision is asked for", tone: "ours" };
     case "superseded":
       return { words: "nobody: superseded", tone: "quiet" };
     case "withdrawn":
