@@ -11,7 +11,7 @@ export function ErrorScreen() {
   usePageTitle("Something went wrong");
   if (isRouteErrorResponse(error) && error.status === 404) return <NotFoundScreen />;
   return (
-    <main className="mx-auto max-w-2xl px-5 py-16" role="alert">
+    <div className="mx-auto max-w-2xl px-5 py-16" role="alert">
       <h1 className="font-serif text-2xl font-bold text-ink">This page broke</h1>
       <p className="mt-3 text-base text-graphite">
         What was saved is safe. Loading the page again often helps; if it breaks again, go back to the start.
@@ -22,6 +22,6 @@ export function ErrorScreen() {
         </Button>
         <LinkButton to={paths.home()}>Go to the start</LinkButton>
       </div>
-    </main>
+    </div>
   );
 }

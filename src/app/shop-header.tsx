@@ -81,7 +81,7 @@ export function ShopHeader({
       </div>
       <div
         ref={slotRef}
-        className="flex w-full flex-wrap items-center gap-3 pb-2 empty:hidden lg:ml-auto lg:w-auto lg:pb-0"
+        className="flex w-full flex-wrap items-center gap-3 pb-2 empty:hidden lg:ml-auto lg:w-auto lg:pb-0 lg:empty:flex"
       />
     </header>
   );

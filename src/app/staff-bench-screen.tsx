@@ -28,7 +28,7 @@ export function StaffBenchScreen() {
     <Page
       title="Bench"
       heading={counts ? benchSentence(counts.ours) : "Bench"}
-      under={first && `First ${first.client.name}, ${first.title}: ${first.nextStep}`}
+      under={first && `Next: ${first.client.name}, ${first.title}. ${first.nextStep}.`}
       actions={<FilterBar filter={filter} onChange={change} />}
     >
       <HeaderTools>

@@ -34,6 +34,8 @@ export function JobPage() {
   const job = query.data;
   const slug = shop.slug;
   const staff = side === "shop";
+  // What is worked on now comes first.
+  const brief = <BriefPart key="brief" shop={slug} unit={shop.unit} job={job} side={side} />;
   return (
     <Page
       title={`${job.number}, ${job.title}`}
@@ -55,9 +57,10 @@ export function JobPage() {
         <NextStep job={job} shop={slug} side={side} />
         <div className="grid gap-10 lg:grid-cols-[minmax(0,1.9fr)_minmax(0,1fr)] lg:gap-14">
           <div className="min-w-0 space-y-10">
+            {job.state === "brief" && brief}
             <RevisionList shop={slug} jobId={jobId} side={side} />
             <ArtworkPart shop={slug} jobId={jobId} unit={shop.unit} mayAdd={job.can.editMockup || job.can.editBrief} />
-            <BriefPart shop={slug} unit={shop.unit} job={job} side={side} />
+            {job.state !== "brief" && brief}
           </div>
           <div className="min-w-0 space-y-8">
             <OpenNotes shop={slug} job={job} />

@@ -18,7 +18,8 @@ export function PortfolioPage() {
       title="Portfolio"
       under="Approved pieces to show to the next client, behind a link that ends by itself."
       actions={
-        chosen === null && (
+        chosen === null &&
+        url === null && (
           <Button kind="primary" onClick={() => setChosen([])}>
             Make a link
           </Button>

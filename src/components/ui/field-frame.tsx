@@ -56,5 +56,8 @@ export function FieldFrame({
   );
 }
 
+/** For typed controls; a browser counts every select as read-only. */
+export const typedClass = "read-only:bg-linen";
+
 export const controlClass =
-  "min-h-11 w-full min-w-0 rounded border border-graphite bg-sheet px-3 py-2 text-base text-ink placeholder:text-graphite aria-invalid:border-oxblood aria-invalid:border-2 disabled:border-rule disabled:bg-linen disabled:text-graphite read-only:bg-linen";
+  "min-h-11 w-full min-w-0 rounded border border-graphite bg-sheet px-3 py-2 text-base text-ink placeholder:text-graphite aria-invalid:border-oxblood aria-invalid:border-2 disabled:border-rule disabled:bg-linen disabled:text-graphite";

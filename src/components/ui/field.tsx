@@ -1,6 +1,6 @@
 import type { ComponentProps, ReactNode } from "react";
 import { cx } from "@/lib/cx.ts";
-import { controlClass, FieldFrame, type FieldFrameProps } from "./field-frame.tsx";
+import { controlClass, FieldFrame, type FieldFrameProps, typedClass } from "./field-frame.tsx";
 
 type FieldProps = Omit<ComponentProps<"input">, "className" | "id"> &
   FieldFrameProps & {
@@ -15,11 +15,11 @@ export function Field({ label, hint, error, className, labelHidden = false, suff
       {(ties) =>
         suffix ? (
           <span className="flex items-center gap-2">
-            <input {...input} {...ties} className={cx(controlClass, "tabular-nums")} />
+            <input {...input} {...ties} className={cx(controlClass, typedClass, "tabular-nums")} />
             <span className="text-sm text-graphite">{suffix}</span>
           </span>
         ) : (
-          <input {...input} {...ties} className={controlClass} />
+          <input {...input} {...ties} className={cx(controlClass, typedClass)} />
         )
       }
     </FieldFrame>

@@ -1,5 +1,6 @@
 import type { ComponentProps } from "react";
-import { controlClass, FieldFrame, type FieldFrameProps } from "./field-frame.tsx";
+import { cx } from "@/lib/cx.ts";
+import { controlClass, FieldFrame, type FieldFrameProps, typedClass } from "./field-frame.tsx";
 
 type TextAreaProps = Omit<ComponentProps<"textarea">, "className" | "id"> & FieldFrameProps;
 
@@ -7,7 +8,7 @@ type TextAreaProps = Omit<ComponentProps<"textarea">, "className" | "id"> & Fiel
 export function TextArea({ label, hint, error, className, labelHidden = false, rows = 3, ...area }: TextAreaProps) {
   return (
     <FieldFrame label={label} hint={hint} error={error} labelHidden={labelHidden} {...(className ? { className } : {})}>
-      {(ties) => <textarea {...area} {...ties} rows={rows} className={controlClass} />}
+      {(ties) => <textarea {...area} {...ties} rows={rows} className={cx(controlClass, typedClass)} />}
     </FieldFrame>
   );
 }

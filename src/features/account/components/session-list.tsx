@@ -7,7 +7,7 @@ import { messageOf } from "@/lib/form-problem.ts";
 import { formatInstant } from "@/lib/format.ts";
 import { useEndSession } from "../api/mutations.ts";
 import { sessionsQuery } from "../api/queries.ts";
-import { agentName } from "./agent-name.ts";
+import { deviceName } from "./device-name.ts";
 
 /** Where one is signed in. Ending a session takes effect with its very next request. */
 export function SessionList() {
@@ -36,12 +36,15 @@ export function SessionList() {
             key={session.id}
             className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2 border-b border-rule py-3"
           >
-            <span>
-              <span className="block font-semibold">{agentName(session.agent)}</span>
+            <span className="min-w-0 flex-1 basis-72">
+              <span className="block font-semibold">{deviceName(session.agent)}</span>
               <span className="block text-sm text-graphite">
                 Signed in by {session.began === "link" ? "a mailed link" : "password"}{" "}
                 {formatInstant(session.createdAt)}, last seen {formatInstant(session.lastSeenAt)}
               </span>
+              {session.agent !== "" && (
+                <span className="block text-fine break-words text-graphite">It calls itself: {session.agent}</span>
+              )}
             </span>
             {session.current ? (
               <span className="text-sm font-semibold text-verdigris">This one, here</span>
@@ -49,7 +52,7 @@ export function SessionList() {
               <Button
                 size="small"
                 kind="danger"
-                aria-label={`End ${agentName(session.agent)}`}
+                aria-label={`End ${deviceName(session.agent).toLowerCase()}, last seen ${formatInstant(session.lastSeenAt)}`}
                 busy={end.isPending && end.variables === session.id}
                 onClick={() => end.mutate(session.id)}
               >

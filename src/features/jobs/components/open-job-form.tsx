@@ -1,5 +1,6 @@
 import { zodResolver } from "@hookform/resolvers/zod";
-import { useQuery } from "@tanstack/react-query";
+import { keepPreviousData, useQuery } from "@tanstack/react-query";
+import { useState } from "react";
 import { useForm } from "react-hook-form";
 import { z } from "zod";
 import { addClient } from "#shared/contracts/clients.ts";
@@ -17,23 +18,18 @@ import { clientChoicesQuery } from "../api/queries.ts";
 const someoneNew = "new";
 
 /** A chosen client or a new one's name, with title and day as the request wants them. */
-const openJobForm = z.discriminatedUnion("clientId", [
-  z.strictObject({
-    clientId: z.literal(someoneNew),
-    name: addClient.body.shape.name,
-    title: openJob.body.shape.title,
-    dueOn: openJob.body.shape.dueOn,
-  }),
-  z.strictObject({
-    clientId: z.uuid("Choose a client."),
-    name: z.string(),
-    title: openJob.body.shape.title,
-    dueOn: openJob.body.shape.dueOn,
-  }),
-]);
+const openJobForm = openJob.body
+  .extend({ clientId: z.string().min(1, "Choose a client."), name: z.string() })
+  .superRefine(({ clientId, name }, context) => {
+    if (clientId !== someoneNew) return;
+    for (const { message } of addClient.body.shape.name.safeParse(name).error?.issues ?? []) {
+      context.addIssue({ code: "custom", path: ["name"], message });
+    }
+  });
 
 export function OpenJobForm({ shop, onOpened }: { readonly shop: string; readonly onOpened: (jobId: string) => void }) {
-  const clients = useQuery(clientChoicesQuery(shop, ""));
+  const [q, setQ] = useState("");
+  const clients = useQuery({ ...clientChoicesQuery(shop, q), placeholderData: keepPreviousData });
   const open = useOpenJob(shop);
   const form = useForm({
     resolver: zodResolver(openJobForm),
@@ -62,6 +58,15 @@ export function OpenJobForm({ shop, onOpened }: { readonly shop: string; readonl
   return (
     <form noValidate onSubmit={handleSubmit} className="space-y-4">
       {problem && <Notice tone="error">{problem}</Notice>}
+      {(q !== "" || clients.data.next !== null) && (
+        <Field
+          label="Find the client"
+          hint="The list below is long; a part of the name shortens it."
+          type="search"
+          value={q}
+          onChange={(event) => setQ(event.target.value)}
+        />
+      )}
       <Select label="Client" error={errors.clientId?.message} {...form.register("clientId")}>
         <option value="">Choose a client</option>
         <option value={someoneNew}>Someone new</option>

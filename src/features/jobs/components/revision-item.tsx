@@ -60,7 +60,7 @@ export function RevisionItem({
           {drawn && (
             <div className="mt-3 flex flex-wrap gap-2">
               <LinkButton size="small" to={paths.sheet(shop, revision.id)} aria-label={`Sheet of revision ${letter}`}>
-                Sheet
+                {side === "client" ? "Sheet (the drawing)" : "Sheet"}
               </LinkButton>
               {before && (
                 <LinkButton size="small" to={paths.compare(shop, revision.jobId, before.id, revision.id)}>
