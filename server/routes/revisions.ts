@@ -1,4 +1,6 @@
+import { Readable } from "node:stream";
 import * as contract from "#shared/contracts/revisions.ts";
+import { paintSvg } from "#shared/drawing/svg.ts";
 import { listChanges } from "#shared/mockup/changes.ts";
 import { approveRevision } from "../commands/approve-revision.ts";
 import { askForRevision } from "../commands/ask-for-revision.ts";
@@ -7,6 +9,7 @@ import { noteOpening } from "../commands/note-opening.ts";
 import { withdrawRevision } from "../commands/withdraw-revision.ts";
 import { notFound } from "../http/app-error.ts";
 import type { ReadContext } from "../http/context.ts";
+import { FileAnswer } from "../http/file-answer.ts";
 import { type Routes, read, write } from "../http/route.ts";
 import { isInsider } from "../policies/actor.ts";
 import { revisionPolicy } from "../policies/revision.ts";
@@ -74,6 +77,20 @@ export function registerRevisionRoutes(routes: Routes): void {
     return answerFile(context, file, {
       fileName: `${loaded.job.number}-${revision.letter}-certificate.pdf`,
       disposition: "inline",
+    });
+  });
+
+  read(routes, contract.getPicture, async (context, { params }) => {
+    const { revision } = await findRevision(context, params.revisionId, { withSnapshot: true });
+    const { titleBlock, drawing } = snapshotOf(revision);
+    const svg = Buffer.from(paintSvg(drawing.picture, { idPrefix: "", title: titleBlock.title }));
+    return new FileAnswer({
+      stream: Readable.from([svg]),
+      byteSize: svg.byteLength,
+      mediaType: "image/svg+xml",
+      fileName: `${titleBlock.number}-${revision.letter}.svg`,
+      disposition: "inline",
+      keepForSeconds: 3600,
     });
   });
 

@@ -151,6 +151,17 @@ export const getCertificate = endpoint({
   result: noContent,
   form: "file",
 });
+/** The sign on its wall as SVG, for lists. */
+export const getPicture = endpoint({
+  method: "GET",
+  path: "/api/shops/:shop/revisions/:revisionId/picture.svg",
+  summary: "The sign of a revision as a small picture",
+  params: oneRevision,
+  query: nothing,
+  body: nothing,
+  result: noContent,
+  form: "file",
+});
 export const withdrawRevision = endpoint({
   method: "POST",
   path: "/api/shops/:shop/revisions/:revisionId/withdraw",

@@ -1,4 +1,5 @@
 import type { z } from "zod";
+import { loadStandardStock } from "#server/commands/load-standard-stock.ts";
 import { addArtwork, artworkSchema, getArtworkPieces } from "#shared/contracts/artworks.ts";
 import { changeJob, type Job, openJob } from "#shared/contracts/jobs.ts";
 import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
@@ -6,7 +7,6 @@ import { getRevision, issueRevision, type Revision } from "#shared/contracts/rev
 import { boxOfPath } from "#shared/geometry/box.ts";
 import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import { loadStandardStock } from "#server/commands/load-standard-stock.ts";
 import type { TestApp } from "../app.ts";
 import { buildLayer, buildSign } from "../build-sign.ts";
 import { signInAs, signInByMail } from "../sign-in.ts";
@@ -26,7 +26,9 @@ export type World = {
 export async function buildWorld(app: TestApp, brief: { words?: string } = {}): Promise<World> {
   const owner = await buildMember();
   const { shop } = owner;
-  await app.services.sequelize.transaction((transaction) => loadStandardStock({ shopId: shop.id, now: new Date(), transaction }));
+  await app.services.sequelize.transaction((transaction) =>
+    loadStandardStock({ shopId: shop.id, now: new Date(), transaction }),
+  );
   const client = await buildClient({ shop });
   const approver = await buildContact({ client });
   const otherContact = await buildContact({ client });
@@ -38,11 +40,20 @@ export async function buildWorld(app: TestApp, brief: { words?: string } = {}): 
     otherContact: await signInByMail(app, otherContact),
   };
   const params = { shop: shop.slug };
-  const opened = await visitors.owner.get(openJob, { params, body: { clientId: client.id, title: "Lobby sign", dueOn: "2031-05-06" } });
+  const opened = await visitors.owner.get(openJob, {
+    params,
+    body: { clientId: client.id, title: "Lobby sign", dueOn: "2031-05-06" },
+  });
   const job = await visitors.owner.get(changeJob, {
     params: { ...params, jobId: opened.id },
     body: {
-      brief: { widthMm: 600, heightMm: 400, place: "inside", viewingDistanceMm: 4000, words: brief.words ?? "HERON & WEIR" },
+      brief: {
+        widthMm: 600,
+        heightMm: 400,
+        place: "inside",
+        viewingDistanceMm: 4000,
+        words: brief.words ?? "HERON & WEIR",
+      },
       approverIds: [approver.contact.id],
     },
   });
@@ -62,8 +73,14 @@ export const formWith = (name: string, content: string | Uint8Array<ArrayBuffer>
 export const artworksPath = ({ params, job }: World): string => `/api/shops/${params.shop}/jobs/${job.id}/artworks`;
 
 /** Brings in a file as the page does and waits until it has become pieces. */
-export async function buildArtwork(app: TestApp, world: World, svg = plainSvg()): Promise<z.output<typeof artworkSchema>> {
-  const { status, text } = await world.visitors.owner.send("POST", artworksPath(world), { body: formWith("logo.svg", svg) });
+export async function buildArtwork(
+  app: TestApp,
+  world: World,
+  svg = plainSvg(),
+): Promise<z.output<typeof artworkSchema>> {
+  const { status, text } = await world.visitors.owner.send("POST", artworksPath(world), {
+    body: formWith("logo.svg", svg),
+  });
   if (status !== (addArtwork.status ?? 200)) throw new Error(`The artwork was refused: ${status} ${text}`);
   await app.runJobs();
   return artworkSchema.parse(JSON.parse(text));
@@ -82,7 +99,10 @@ export async function signFromArtwork(world: World, artworkId: string, thickness
           id: `piece-${index}`,
           name: `Piece ${index}`,
           source: { kind: "artwork", artworkId, index, colour },
-          path: pathTransform(path, translateMatrix(-middle.x, -middle.y)).map(({ start, segments }) => ({ start, segments: [...segments] })),
+          path: pathTransform(path, translateMatrix(-middle.x, -middle.y)).map(({ start, segments }) => ({
+            start,
+            segments: [...segments],
+          })),
           placement: { x: 150 + middle.x, y: 150 + middle.y, turn: 0, scale: 1, mirrored: false },
         };
       }),
