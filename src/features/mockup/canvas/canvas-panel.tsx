@@ -2,7 +2,8 @@ import { type KeyboardEvent, type RefObject, useEffect, useEffectEvent, useId, u
 import type { Point } from "#shared/geometry/path.ts";
 import { type DrawingView, type Size, viewMoved, viewScaled } from "@/lib/drawing-view.ts";
 import { useDesk } from "../editor/desk-context.ts";
-import type { DrawnPicture } from "../engine/use-engine.ts";
+import type { Drawn } from "../engine/use-engine.ts";
+import { castShadows } from "../model/cast-shadows.ts";
 import { catchGuides } from "../model/catch-guides.ts";
 import { boxesToLineUpWith, boxOfChosen, findHole } from "../model/chosen-box.ts";
 import { removeHole, setHole } from "../model/commands/holes.ts";
@@ -18,7 +19,7 @@ import { ViewTools } from "./view-tools.tsx";
 
 type CanvasPanelProps = {
   /** The newest picture that could be made; null before the first. */
-  readonly drawn: DrawnPicture | null;
+  readonly drawn: Drawn | null;
   /** Why the newest one could not be made. */
   readonly failure: string | null;
   readonly drag: Drag | null;
@@ -47,23 +48,24 @@ const arrows = new Map<string, Point>([
 
 /** The elevation: the picture of the proof on a fabric canvas, with pieces and holes to take hold of. */
 export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onView, spot, frame }: CanvasPanelProps) {
-  const { document, figures, selection, edit, choose } = useDesk();
+  const { document, figures, figuresOf, selection, edit, choose } = useDesk();
   const place = useRef<HTMLDivElement>(null);
   const [scene, setScene] = useState<Scene | null>(null);
   const spaceDown = useSpaceBar(frame);
   const hintId = useId();
-  const picture = drawn?.picture ?? null;
+  const elevation = drawn?.elevation ?? null;
   const shownDocument = drawn?.input.document ?? document;
   const wanted = useMemo(() => (drag === null ? document : documentOfDrag(document, drag)), [document, drag]);
   const shifts = useMemo(() => shiftsBetween(shownDocument, wanted), [shownDocument, wanted]);
 
   const chosenBox = useMemo(
-    () => (figures === null ? null : boxOfChosen(figures, selection.pieceIds, shifts)),
-    [figures, selection.pieceIds, shifts],
+    () => figures && boxOfChosen(figures, selection.pieceIds, shiftsBetween(figuresOf, wanted)),
+    [figures, figuresOf, selection.pieceIds, wanted],
   );
+  const isLifted = drag?.kind === "pieces";
 
   /** The gesture asks for what is true when the hand moves, not for what was when it began to listen. */
-  const host = useEffectEvent(() => ({ document, figures, selection, view, fit, drag }));
+  const host = useEffectEvent(() => ({ document, figures, figuresOf, selection, view, fit }));
   const press = useEffectEvent((touched: { kind: "piece" | "hole"; id: string } | null, more: boolean) => {
     if (touched === null) choose(nothingChosen);
     else if (touched.kind === "hole") choose(chooseHole(document, touched.id));
@@ -114,7 +116,8 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
           return;
         }
         const { pieceIds } = now.selection;
-        const box = now.figures && boxOfChosen(now.figures, pieceIds, new Map());
+        const moved = shiftsBetween(now.figuresOf, now.document);
+        const box = now.figures && boxOfChosen(now.figures, pieceIds, moved);
         if (!box || !now.figures) return;
         const { width, height } = now.document.board;
         const others = [{ x: 0, y: 0, width, height }, ...boxesToLineUpWith(now.figures, pieceIds)];
@@ -135,10 +138,17 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
 
   const latestShifts = useEffectEvent(() => shifts);
   useEffect(() => {
-    if (scene !== null && picture !== null) void scene.show(picture.elevation, latestShifts());
-  }, [scene, picture]);
+    if (scene !== null && elevation !== null) void scene.show(elevation, latestShifts());
+  }, [scene, elevation]);
   useEffect(() => scene?.ground(document.presentation.wall), [scene, document.presentation.wall]);
   useEffect(() => scene?.shift(shifts), [scene, shifts]);
+  const latestShadows = useEffectEvent(() => figures && castShadows(document, figures));
+  // Until the picture has caught up with where they were put down, pieces keep the shadows they had in the hand.
+  const isSettled = shifts.size === 0;
+  useEffect(() => {
+    if (isLifted) scene?.lift(latestShadows());
+    else if (isSettled) scene?.lift(null);
+  }, [scene, isLifted, isSettled]);
   useEffect(() => {
     if (room !== null) scene?.look(view, room);
   }, [scene, view, room]);

@@ -15,7 +15,12 @@ import { ClippedItems } from "./clipped-items.ts";
 import type { Images } from "./load-images.ts";
 
 /** A fabric object with the id of the item that it shows, or of the one it belongs to, as the edge of a piece. */
-export type Painted = { readonly object: FabricObject; readonly id: string | null };
+export type Painted = {
+  readonly object: FabricObject;
+  readonly id: string | null;
+  /** A thing's own picture carries its name; an image without one is a shadow on something. */
+  readonly isShadow: boolean;
+};
 
 const families: Readonly<Record<Font, { readonly fontFamily: string; readonly fontWeight: string }>> = {
   serif: { fontFamily: "Merriweather", fontWeight: "400" },
@@ -40,13 +45,18 @@ export function paintItems(list: DisplayList, images: Images): Painted[] {
 
 function paintAll(items: readonly Item[], matrix: Matrix, images: Images, layer: string | null): Painted[] {
   let named: string | null = null;
+  let justNamed = false;
   return items.flatMap((item): Painted[] => {
     if (item.kind === "group") return paintAll(item.items, groupMatrixInside(matrix, item), images, item.id ?? layer);
-    if ("id" in item && item.id !== undefined) named = item.id;
-    // In a layer's group the unnamed lines after a piece are that piece's own.
-    const id = "id" in item && item.id !== undefined ? item.id : layer?.startsWith("layer:") ? named : null;
+    const own = "id" in item ? (item.id ?? null) : null;
+    if (own !== null) named = own;
+    // The unnamed lines after a piece, in its layer's group, are that piece's own; so is what is clipped right after any named thing.
+    const belongs = layer?.startsWith("layer:") || (item.kind === "clip" && justNamed);
+    const id = own ?? (belongs ? named : null);
+    justNamed = own !== null;
+    const isShadow = id === null && (item.kind === "image" || item.kind === "clip");
     const object = objectOf(item, matrix, images);
-    return object === null ? [] : [{ object, id }];
+    return object === null ? [] : [{ object, id, isShadow }];
   });
 }
 

@@ -1,12 +1,16 @@
-import { Canvas, cache, type FabricObject } from "fabric/es";
+import { Canvas, cache, type FabricObject, Shadow } from "fabric/es";
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
+import type { CastShadow } from "../model/cast-shadows.ts";
 import type { Shift } from "../model/shifts.ts";
 import { type Images, loadImages } from "./load-images.ts";
 import { type Marks, noMarks } from "./marks.ts";
-import { drawingFaces, paintItems } from "./paint-items.ts";
+import { drawingFaces, type Painted, paintItems } from "./paint-items.ts";
 import { paintMarks } from "./paint-marks.ts";
+
+/** As dark as the shadows of the drawing are at their darkest. */
+const castColour = "rgba(26, 18, 8, 0.46)";
 
 export type Scene = {
   readonly canvas: Canvas;
@@ -16,6 +20,8 @@ export type Scene = {
   readonly ground: (colour: string) => void;
   /** Moves what carries these ids from where the picture has it, until the next picture comes. */
   readonly shift: (shifts: ReadonlyMap<string, Shift>) => void;
+  /** Pieces in the hand throw the canvas's own rough shadows in place of the picture's; null gives those back. */
+  readonly lift: (shadows: ReadonlyMap<string, CastShadow> | null) => void;
   readonly mark: (marks: Marks) => void;
   /** The view is of the board: its upper left corner lies at x, y of the window. */
   readonly look: (view: DrawingView, room: Size) => void;
@@ -23,7 +29,7 @@ export type Scene = {
 };
 
 /** A shown object, with where the picture has it. */
-type Shown = { readonly object: FabricObject; readonly id: string | null; readonly left: number; readonly top: number };
+type Shown = Painted & { readonly left: number; readonly top: number };
 
 /** The only place that makes fabric objects. What they show comes in; nothing is ever read back from them. */
 export function createScene(host: HTMLElement): Scene {
@@ -42,6 +48,7 @@ export function createScene(host: HTMLElement): Scene {
   const letters = loadLetters();
   let shown: Shown[] = [];
   let marked: FabricObject[] = [];
+  let lifted: ReadonlyMap<string, CastShadow> | null = null;
   let images: Images = new Map();
   let turns = 0;
   let marks = noMarks;
@@ -55,14 +62,30 @@ export function createScene(host: HTMLElement): Scene {
     images = loaded;
     origin = boardOriginOf(list) ?? { x: 0, y: 0 };
     canvas.remove(...shown.map(({ object }) => object));
-    shown = paintItems(list, images).map(({ object, id }) => ({
-      object,
-      id,
-      left: object.left - origin.x,
-      top: object.top - origin.y,
+    shown = paintItems(list, images).map((painted) => ({
+      ...painted,
+      left: painted.object.left - origin.x,
+      top: painted.object.top - origin.y,
     }));
     canvas.insertAt(0, ...shown.map(({ object }) => object));
+    lift(lifted);
     shift(shifts);
+  }
+
+  function lift(shadows: ReadonlyMap<string, CastShadow> | null) {
+    lifted = shadows;
+    const first = new Set<string>();
+    for (const { object, id, isShadow } of shown) {
+      if (isShadow) object.visible = shadows === null;
+      // Only a piece's body throws a shadow, which is the first of what carries its name.
+      if (id === null || first.has(id)) continue;
+      first.add(id);
+      const cast = shadows?.get(id);
+      object.shadow = cast
+        ? new Shadow({ color: castColour, offsetX: cast.dx, offsetY: cast.dy, blur: cast.blur })
+        : null;
+    }
+    canvas.requestRenderAll();
   }
 
   function shift(shifts: ReadonlyMap<string, Shift>) {
@@ -104,7 +127,7 @@ export function createScene(host: HTMLElement): Scene {
     element.remove();
   }
 
-  return { canvas, show, ground, shift, mark, look, close };
+  return { canvas, show, ground, shift, lift, mark, look, close };
 }
 
 /** The drawing's faces, before anything is lettered in them: fabric remembers the widths of what it measured too early. */

@@ -9,7 +9,7 @@ const letterPx = 13;
 const pxPerPaperMm = letterPx / smallTextMm;
 const edgePx = 10;
 /** Kept free above, where the section beside it has its heading and one row of dimensions more. */
-const headingPx = 26;
+const headingPx = 50;
 
 /** Room for dimensions around the board, in mm of paper: it does not change with the size of board or window. */
 export type PaperMargins = {

@@ -14,6 +14,8 @@ export type Desk = {
   readonly stock: StockChoices;
   /** Of the document, or of what it was a moment ago; null until they were first computed. */
   readonly figures: Figures | null;
+  /** The document that the figures are of. */
+  readonly figuresOf: MockupDocument;
   readonly edit: (edit: Edit) => void;
   readonly choose: (selection: Selection) => void;
 };

@@ -5,11 +5,20 @@ import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { runDryFit } from "#shared/dry-fit/run-dry-fit.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
+import type { GrainCache } from "./grain-cache.ts";
 import type { DryFit, Picture, PictureInput } from "./picture-messages.ts";
 
-/** Figures, elevation and findings of a document: what the screen shows, from the code that draws the proof. */
-export function drawPicture({ document, context, paperScale, dryFit }: PictureInput, kernel: Kernel): Picture {
+/**
+ * Figures of a document and, when all is wanted, its elevation and findings: what the screen shows, from the code that
+ * draws the proof.
+ */
+export function drawPicture(
+  { document, context, paperScale, what }: PictureInput,
+  { kernel, grain }: { kernel: Kernel; grain: GrainCache },
+): Picture {
   const figures = computeFigures(document, kernel);
+  if (what === "figures") return { figures, drawing: null };
+  const texture = grain.find(document);
   const elevation = drawElevation({
     document,
     figures,
@@ -18,12 +27,11 @@ export function drawPicture({ document, context, paperScale, dryFit }: PictureIn
     dimensions: true,
     paperScale,
     wall: true,
+    ...(texture ? { texture } : {}),
   });
-  return {
-    figures,
-    elevation,
-    dryFit: dryFit ? fitOf(runDryFit({ document, figures, limits: defaultLimits, context, kernel })) : null,
-  };
+  grain.keep(document, elevation);
+  const findings = runDryFit({ document, figures, limits: defaultLimits, context, kernel });
+  return { figures, drawing: { elevation, dryFit: fitOf(findings) } };
 }
 
 function fitOf(findings: readonly Finding[]): DryFit {

@@ -10,8 +10,8 @@ export type PictureInput = {
   readonly context: DryFitContext;
   /** Millimetres of the sign to one on paper: sizes lettering and lines for the window. */
   readonly paperScale: number;
-  /** Whether to run the dry fit, too. Left out while something is dragged. */
-  readonly dryFit: boolean;
+  /** Under a hand that drags only figures are wanted: they take a small part of the time. */
+  readonly what: "all" | "figures";
 };
 
 /** `fine` is the number of rules that found nothing. */
@@ -19,9 +19,8 @@ export type DryFit = { readonly findings: readonly Finding[]; readonly fine: num
 
 export type Picture = {
   readonly figures: Figures;
-  readonly elevation: DisplayList;
-  /** null when the dry fit was left out. */
-  readonly dryFit: DryFit | null;
+  /** What else was wanted. */
+  readonly drawing: { readonly elevation: DisplayList; readonly dryFit: DryFit } | null;
 };
 
 export type PictureOutcome =

@@ -1,31 +1,39 @@
 import { useEffect, useEffectEvent, useRef, useState } from "react";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Figures } from "#shared/stack/figures.ts";
 import { createEngine, type Engine } from "./engine-client.ts";
 import type { Picture, PictureInput } from "./picture-messages.ts";
 
-/** A picture with what it was made of. */
-export type DrawnPicture = { readonly input: PictureInput; readonly picture: Picture };
+/** A drawing of a document, with what it was made of. */
+export type Drawn = { readonly input: PictureInput } & NonNullable<Picture["drawing"]>;
 
-type Drawn = {
-  /** The newest picture that could be made of the input or of what it was a moment ago. */
-  readonly drawn: DrawnPicture | null;
+type Engineering = {
+  /** The newest figures, and the document that they are of. */
+  readonly figures: { readonly figures: Figures; readonly of: MockupDocument } | null;
+  /** The newest drawing that could be made; it can be older than the figures. */
+  readonly drawn: Drawn | null;
   /** Why the newest one could not be made. */
   readonly failure: string | null;
 };
 
-/** Pictures of `input` from a worker, the newest that there is. null waits. */
-export function useEngine(input: PictureInput | null): Drawn {
-  const [drawn, setDrawn] = useState<Drawn>({ drawn: null, failure: null });
+/** Figures and drawings of `input` from a worker, the newest that there are. null waits. */
+export function useEngine(input: PictureInput | null): Engineering {
+  const [made, setMade] = useState<Engineering>({ figures: null, drawn: null, failure: null });
   const engine = useRef<Engine | null>(null);
   const latestInput = useEffectEvent(() => input);
 
   useEffect(() => {
     const worker = new Worker(new URL("./engine.worker.ts", import.meta.url), { type: "module", name: "engine" });
     worker.addEventListener("error", () =>
-      setDrawn((before) => ({ ...before, failure: "The part of the page that draws did not start." })),
+      setMade((before) => ({ ...before, failure: "The part of the page that draws did not start." })),
     );
     const started = createEngine(worker, ({ input: of, outcome }) => {
-      if (outcome.ok) setDrawn({ drawn: { input: of, picture: outcome.picture }, failure: null });
-      else setDrawn((before) => ({ ...before, failure: outcome.reason }));
+      setMade((before) => {
+        if (!outcome.ok) return { ...before, failure: outcome.reason };
+        const { figures, drawing } = outcome.picture;
+        const drawn = drawing === null ? before.drawn : { input: of, ...drawing };
+        return { figures: { figures, of: of.document }, drawn, failure: null };
+      });
     });
     engine.current = started;
     const waiting = latestInput();
@@ -42,5 +50,5 @@ export function useEngine(input: PictureInput | null): Drawn {
     asked.current = input;
     engine.current?.ask(input);
   }, [input]);
-  return drawn;
+  return made;
 }

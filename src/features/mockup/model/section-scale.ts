@@ -3,15 +3,18 @@ import type { Figures } from "#shared/stack/figures.ts";
 /** Paper mm that the section needs beside the depth itself: the wall's hatching, and balloons with their heights. */
 const besidePaperMm = 36;
 
+/** Scales that are easily said, so that the screen can state its own. */
+const steps = [12, 10, 8, 6, 5, 4, 3.5, 3, 2.5, 2, 1.5, 1.2, 1, 0.8, 0.6, 0.5, 0.4, 0.3, 0.2, 0.1];
+
 /**
  * How much larger depth is drawn than height, so that the stack fills a window `widthPx` wide that shows `scale` px for a mm
- * of height. Rounded down to a tenth, since the screen states it; never under a tenth.
+ * of height: the largest step that fits, never under a tenth.
  */
 export function depthScaleFor(
-  { figures, gap }: { figures: Figures; gap: number },
+  { figures, gap }: { figures: Pick<Figures, "depth">; gap: number },
   { widthPx, scale, paperScale }: { widthPx: number; scale: number; paperScale: number },
 ): number {
   const free = widthPx / scale - besidePaperMm * paperScale;
-  const deep = figures.depth.nominal + gap;
-  return Math.max(0.1, Math.floor((free / Math.max(1, deep)) * 10) / 10);
+  const deep = Math.max(1, figures.depth.nominal + gap);
+  return steps.find((step) => step * deep <= free) ?? 0.1;
 }

@@ -6,7 +6,7 @@ import { cx } from "@/lib/cx.ts";
 
 /** Reads as lettering in a table and shows by its underline that it can be changed. */
 const cellClass =
-  "min-h-8 w-full min-w-0 rounded-none border-0 border-b border-dotted border-graphite bg-transparent px-0.5 py-0.5 font-sans text-sm text-ink tabular-nums hover:border-solid hover:border-ink hover:bg-sheet focus:border-solid focus:bg-sheet aria-invalid:border-oxblood aria-invalid:text-oxblood disabled:border-transparent";
+  "h-7 w-full min-w-0 rounded-none border-0 border-b border-dotted border-graphite bg-transparent px-0.5 py-0 font-sans text-sm text-ink tabular-nums hover:border-solid hover:border-ink hover:bg-sheet focus:border-solid focus:bg-sheet aria-invalid:border-oxblood aria-invalid:text-oxblood disabled:border-transparent";
 
 type CellTextProps = Omit<ComponentProps<"input">, "value" | "onChange" | "onBlur" | "onKeyDown"> & {
   readonly value: string;
@@ -74,7 +74,7 @@ export function CellLength({ mm, unit, onCommit, ...input }: CellLengthProps) {
 /** One choice out of a few, in a cell. Options are the children. */
 export function CellSelect({ className, children, ...select }: ComponentProps<"select">) {
   return (
-    <select {...select} className={cx(cellClass, "cursor-pointer appearance-none truncate pr-4", className)}>
+    <select {...select} className={cx(cellClass, "cursor-pointer appearance-none truncate", className)}>
       {children}
     </select>
   );
@@ -87,7 +87,7 @@ export function WordButton({ className, type = "button", ...button }: ComponentP
       {...button}
       type={type}
       className={cx(
-        "min-h-8 cursor-pointer rounded px-1 text-left font-sans text-sm text-indigo underline underline-offset-4 hover:bg-linen hover:text-ink disabled:cursor-not-allowed disabled:text-graphite disabled:no-underline",
+        "min-h-7 cursor-pointer rounded px-1 text-left font-sans text-sm text-indigo underline underline-offset-4 hover:bg-linen hover:text-ink disabled:cursor-not-allowed disabled:text-graphite disabled:no-underline",
         className,
       )}
     />

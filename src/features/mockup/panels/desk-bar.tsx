@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 import { useDesk } from "../editor/desk-context.ts";
+import { withCarried } from "../model/carried.ts";
 import { centrePieces, turnPieces } from "../model/commands/pieces.ts";
 import { WordButton } from "./cell-controls.tsx";
 
@@ -14,9 +15,10 @@ type DeskBarProps = {
 
 /** What can be brought in, and how what is chosen is set out. */
 export function DeskBar({ client, title, onBringIn, onPlate, onBoard, onKeys }: DeskBarProps) {
-  const { selection, edit } = useDesk();
+  const { selection, figures, edit, choose } = useDesk();
   const { pieceIds } = selection;
   const idle = pieceIds.length === 0;
+  const carried = figures === null ? pieceIds : withCarried(figures, pieceIds);
   const centre = (way: "across" | "down") =>
     edit({ label: `Centre ${way}`, change: (before) => centrePieces(before, { pieceIds, way }) });
   const turn = (by: number) => edit({ label: "Turn pieces", change: (before) => turnPieces(before, { pieceIds, by }) });
@@ -42,6 +44,12 @@ export function DeskBar({ client, title, onBringIn, onPlate, onBoard, onKeys }: 
         </WordButton>
         <WordButton disabled={idle} onClick={() => turn(15)}>
           turn right 15°
+        </WordButton>
+        <WordButton
+          disabled={carried.length === pieceIds.length}
+          onClick={() => choose({ ...selection, pieceIds: carried })}
+        >
+          take along what stands on it
         </WordButton>
       </Group>
       <span className="ml-auto flex items-center gap-2">

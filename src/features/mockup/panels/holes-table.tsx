@@ -1,5 +1,5 @@
 import type { Hold, Layer } from "#shared/mockup/document.ts";
-import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
@@ -7,6 +7,7 @@ import { addHole, fixHole, proposeHoles, removeHole, setHole } from "../model/co
 import { boxOfPieces } from "../model/commands/pieces.ts";
 import { chooseHole } from "../model/selection.ts";
 import { CellLength, WordButton } from "./cell-controls.tsx";
+import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 
 type HolesTableProps = { readonly layer: Layer; readonly hold: Extract<Hold, { kind: "standoff" }> };
 
@@ -50,13 +51,11 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
           <thead>
             <tr>
               {["Hole", `x, ${unit}`, `y, ${unit}`, `Diameter, ${unit}`, "Fixed"].map((head) => (
-                <HeadCell key={head} className="py-1.5">
-                  {head}
-                </HeadCell>
+                <DeskHead key={head}>{head}</DeskHead>
               ))}
-              <HeadCell className="py-1.5">
+              <DeskHead>
                 <span className="sr-only">Removal</span>
-              </HeadCell>
+              </DeskHead>
             </tr>
           </thead>
           <tbody>
@@ -66,39 +65,39 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                 edit({ label: `${title} of ${key}`, change: (before) => setHole(before, { holeId: hole.id, ...to }) });
               return (
                 <tr key={hole.id} className={cx(selection.holeId === hole.id && "bg-indigo/8")}>
-                  <RowHead className="py-1">
+                  <DeskRowHead>
                     <WordButton
                       aria-pressed={selection.holeId === hole.id}
                       onClick={() => choose(chooseHole(document, hole.id))}
                     >
                       {title}
                     </WordButton>
-                  </RowHead>
-                  <Cell className="w-28 py-1">
+                  </DeskRowHead>
+                  <DeskCell className="w-28">
                     <CellLength
                       aria-label={`x of ${title}`}
                       mm={hole.x}
                       unit={unit}
                       onCommit={(mm) => set({ x: mm })}
                     />
-                  </Cell>
-                  <Cell className="w-28 py-1">
+                  </DeskCell>
+                  <DeskCell className="w-28">
                     <CellLength
                       aria-label={`y of ${title}`}
                       mm={hole.y}
                       unit={unit}
                       onCommit={(mm) => set({ y: mm })}
                     />
-                  </Cell>
-                  <Cell className="w-28 py-1">
+                  </DeskCell>
+                  <DeskCell className="w-28">
                     <CellLength
                       aria-label={`Diameter of ${title}`}
                       mm={hole.diameter}
                       unit={unit}
                       onCommit={(mm) => set({ diameter: mm })}
                     />
-                  </Cell>
-                  <Cell className="w-20 py-1">
+                  </DeskCell>
+                  <DeskCell className="w-20">
                     <input
                       type="radio"
                       name={`fixed hole of ${key}`}
@@ -112,8 +111,8 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       }
                       className="size-5 cursor-pointer accent-indigo"
                     />
-                  </Cell>
-                  <Cell className="py-1">
+                  </DeskCell>
+                  <DeskCell>
                     <WordButton
                       aria-label={`Remove ${title}`}
                       onClick={() =>
@@ -125,7 +124,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                     >
                       Remove
                     </WordButton>
-                  </Cell>
+                  </DeskCell>
                 </tr>
               );
             })}

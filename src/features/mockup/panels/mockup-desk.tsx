@@ -85,19 +85,16 @@ export function MockupDesk(props: MockupDeskProps) {
   const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
   const isDragging = drag !== null;
   const input = useMemo(
-    () => ({ document: wanted, context, paperScale, dryFit: !isDragging }),
+    () => ({ document: wanted, context, paperScale, what: isDragging ? ("figures" as const) : ("all" as const) }),
     [wanted, context, paperScale, isDragging],
   );
-  const { drawn, failure } = useEngine(room === null ? null : input);
-  const figures = drawn?.picture.figures ?? null;
-  const [dryFit, setDryFit] = useState(drawn?.picture.dryFit ?? null);
-  if (drawn?.picture.dryFit && drawn.picture.dryFit !== dryFit) setDryFit(drawn.picture.dryFit);
+  const { drawn, figures: made, failure } = useEngine(room === null ? null : input);
   const isCurrent = drawn?.input === input;
 
   // The window follows the rows of dimensions, but never under a hand that is dragging.
   useEffect(() => {
     if (drawn === null || isDragging) return;
-    const next = marginsOf(drawn.picture.elevation, drawn.input.document.board, drawn.input.paperScale);
+    const next = marginsOf(drawn.elevation, drawn.input.document.board, drawn.input.paperScale);
     setMargins((before) => (isSame(before, next) ? before : next));
   }, [drawn, isDragging]);
 
@@ -111,14 +108,15 @@ export function MockupDesk(props: MockupDeskProps) {
       selection: editor.selection,
       unit,
       stock,
-      figures,
+      figures: made?.figures ?? null,
+      figuresOf: made?.of ?? document,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
       choose: (selection) => {
         setFinding(null);
         dispatch({ kind: "choose", selection });
       },
     }),
-    [document, editor.selection, unit, stock, figures],
+    [document, editor.selection, unit, stock, made],
   );
 
   function show(next: Finding) {
@@ -145,7 +143,7 @@ export function MockupDesk(props: MockupDeskProps) {
           mayIssue={mockup.can.issue}
           saving={saving}
           history={editor.history}
-          dryFit={dryFit}
+          dryFit={drawn?.dryFit ?? null}
           isCurrent={isCurrent}
           onUndo={() => dispatch({ kind: "undo" })}
           onRedo={() => dispatch({ kind: "redo" })}
@@ -185,14 +183,14 @@ export function MockupDesk(props: MockupDeskProps) {
           spot={finding?.where ?? null}
           frame={frame}
         />
-        <SectionPanel drawn={drawn?.input.document ?? document} view={view ?? fit} drag={drag} onDrag={setDrag} />
+        <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
       </div>
-      <div className="grid grid-cols-[minmax(0,1fr)_minmax(18rem,26rem)]">
+      <div className="grid grid-cols-[minmax(0,1fr)_minmax(17rem,24rem)]">
         <div className="min-w-0">
           <SchedulePanel onBoard={() => setDialog("board")} onBringIn={() => setDialog("artwork")} />
           <PiecesPanel />
         </div>
-        <FindingsPanel dryFit={dryFit} isCurrent={isCurrent} shown={finding} onShow={show} />
+        <FindingsPanel dryFit={drawn?.dryFit ?? null} isCurrent={isCurrent} shown={finding} onShow={show} />
       </div>
       <BringInDialog
         open={dialog === "artwork"}

@@ -28,11 +28,11 @@ export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) 
       context: { unit, place: job.brief.place ?? ("inside" as const), acrylics: [], barrels: [] },
       // Lettering of about 13 px in a window of 360 px.
       paperScale: document.board.width / 68,
-      dryFit: false,
+      what: "all" as const,
     }),
     [document, unit, job.brief.place],
   );
-  const { drawn, failure } = useEngine(input);
+  const { drawn, figures, failure } = useEngine(input);
 
   return (
     <div className="space-y-4 px-4 py-4 sm:px-6">
@@ -46,10 +46,10 @@ export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) 
         </Notice>
       )}
       {drawn === null && failure === null && <Skeleton label="Drawing the mockup" />}
-      {drawn && (
+      {drawn && figures && (
         <>
           <DrawingViewer
-            list={drawn.picture.elevation}
+            list={drawn.elevation}
             title="Elevation, from the front"
             view={view}
             onView={setView}
@@ -65,7 +65,7 @@ export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) 
               </tr>
             </thead>
             <tbody>
-              {scheduleRows(document, drawn.picture.figures, unit).map((row) => (
+              {scheduleRows(document, figures.figures, unit).map((row) => (
                 <tr key={row.key}>
                   <RowHead>{row.key}</RowHead>
                   <Cell>{row.what}</Cell>
@@ -80,7 +80,7 @@ export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) 
               ))}
             </tbody>
           </Table>
-          <p className="text-fine text-graphite">{scheduleTotal(document, drawn.picture.figures, unit)}</p>
+          <p className="text-fine text-graphite">{scheduleTotal(document, figures.figures, unit)}</p>
         </>
       )}
     </div>

@@ -1,9 +1,10 @@
-import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { centrePieces, placePiece, removePieces } from "../model/commands/pieces.ts";
 import { chooseLayer, choosePiece } from "../model/selection.ts";
 import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
+import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 import { HolesTable } from "./holes-table.tsx";
 import { nameOfPiece } from "./piece-name.ts";
 
@@ -35,13 +36,11 @@ export function PiecesPanel() {
           <thead>
             <tr>
               {["Piece", `x, ${unit}`, `y, ${unit}`, "Turn, °", "Size, %"].map((head) => (
-                <HeadCell key={head} className="py-1.5">
-                  {head}
-                </HeadCell>
+                <DeskHead key={head}>{head}</DeskHead>
               ))}
-              <HeadCell className="py-1.5">
+              <DeskHead>
                 <span className="sr-only">Place and removal</span>
-              </HeadCell>
+              </DeskHead>
             </tr>
           </thead>
           <tbody>
@@ -53,37 +52,37 @@ export function PiecesPanel() {
               const pieceIds = [piece.id];
               return (
                 <tr key={piece.id} className={cx(!all && selection.pieceIds.includes(piece.id) && "bg-indigo/8")}>
-                  <RowHead className="py-1">
+                  <DeskRowHead>
                     <WordButton
                       aria-pressed={selection.pieceIds.includes(piece.id)}
                       onClick={() => choose(choosePiece(document, piece.id))}
                     >
                       {title}
                     </WordButton>
-                  </RowHead>
-                  <Cell className="w-28 py-1">
+                  </DeskRowHead>
+                  <DeskCell className="w-28">
                     <CellLength aria-label={`x of ${title}`} mm={x} unit={unit} onCommit={(mm) => place({ x: mm })} />
-                  </Cell>
-                  <Cell className="w-28 py-1">
+                  </DeskCell>
+                  <DeskCell className="w-28">
                     <CellLength aria-label={`y of ${title}`} mm={y} unit={unit} onCommit={(mm) => place({ y: mm })} />
-                  </Cell>
-                  <Cell className="w-24 py-1">
+                  </DeskCell>
+                  <DeskCell className="w-24">
                     <CellText
                       aria-label={`Turn of ${title}`}
                       inputMode="decimal"
                       value={String(turn)}
                       onCommit={(text) => takeNumber(text, (value) => place({ turn: value }))}
                     />
-                  </Cell>
-                  <Cell className="w-24 py-1">
+                  </DeskCell>
+                  <DeskCell className="w-24">
                     <CellText
                       aria-label={`Size of ${title}`}
                       inputMode="decimal"
                       value={String(Math.round(scale * 10_000) / 100)}
                       onCommit={(text) => takeNumber(text, (value) => place({ scale: value / 100 }), 0.1)}
                     />
-                  </Cell>
-                  <Cell className="py-1 whitespace-nowrap">
+                  </DeskCell>
+                  <DeskCell>
                     <WordButton
                       aria-label={`Centre ${title} on the board`}
                       onClick={() =>
@@ -103,7 +102,7 @@ export function PiecesPanel() {
                     >
                       Remove
                     </WordButton>
-                  </Cell>
+                  </DeskCell>
                 </tr>
               );
             })}

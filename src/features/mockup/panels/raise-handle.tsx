@@ -1,6 +1,6 @@
 import { type KeyboardEvent, type PointerEvent, useRef } from "react";
 import { boxUnion } from "#shared/geometry/box.ts";
-import type { Layer, MockupDocument } from "#shared/mockup/document.ts";
+import type { Layer } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
 import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
 import { cx } from "@/lib/cx.ts";
@@ -12,8 +12,6 @@ import { barrelLengths, catchBarrel, hardwareOfLength, nextBarrel } from "../mod
 
 type RaiseHandleProps = {
   readonly layer: Layer;
-  /** The document that the figures and the picture are of. */
-  readonly drawn: MockupDocument;
   readonly figures: Figures;
   readonly pxPerMm: number;
   readonly pxOfDepth: (mm: number) => number;
@@ -27,8 +25,8 @@ const mostOffsetMm = 1000;
 const fineStepMm = 0.5;
 
 /** Lies over a layer in the section: a standoff layer is dragged by it or moved by arrows, from barrel to barrel. */
-export function RaiseHandle({ layer, drawn, figures, pxPerMm, pxOfDepth, pxOfHeight, drag, onDrag }: RaiseHandleProps) {
-  const { document, edit, choose, selection, stock, unit } = useDesk();
+export function RaiseHandle({ layer, figures, pxPerMm, pxOfDepth, pxOfHeight, drag, onDrag }: RaiseHandleProps) {
+  const { document, figuresOf: drawn, edit, choose, selection, stock, unit } = useDesk();
   const from = useRef<{ x: number; offset: number } | null>(null);
   const { key, hold } = layer;
   const isChosen = selection.layerKey === key;
@@ -146,19 +144,21 @@ type CatchLinesProps = {
   readonly text: (length: number) => string;
 };
 
-/** The barrels in stock, as lines that a raised layer catches on. A label that would run into the one before is left out. */
+/** The barrels in stock, as lines that a raised layer catches on. Labels that would run into one another stand on two lines. */
 function CatchLines({ lengths, raised, pxOf, top, bottom, text }: CatchLinesProps) {
-  let free = Number.NEGATIVE_INFINITY;
-  const lines = lengths.map((length) => {
+  const lines = lengths.map((length, index) => {
     const x = pxOf(length);
-    const caught = Math.abs(length - raised) < 0.01;
-    const named = caught || x - free >= 24;
-    if (named) free = x;
-    return { length, x, caught, named };
+    const before = lengths[index - 1];
+    return {
+      length,
+      x,
+      caught: Math.abs(length - raised) < 0.01,
+      isNear: before !== undefined && x - pxOf(before) < 22,
+    };
   });
   return (
     <svg aria-hidden="true" className="pointer-events-none absolute inset-0 size-full overflow-visible text-ochre">
-      {lines.map(({ length, x, caught, named }) => (
+      {lines.map(({ length, x, caught, isNear }, index) => (
         <g key={length}>
           <line
             x1={x}
@@ -169,11 +169,15 @@ function CatchLines({ lengths, raised, pxOf, top, bottom, text }: CatchLinesProp
             strokeWidth={caught ? 1.5 : 1}
             strokeDasharray="2 3"
           />
-          {named && (
-            <text x={x} y={bottom + 16} textAnchor="middle" fill="currentColor" className="font-sans text-fine">
-              {text(length)}
-            </text>
-          )}
+          <text
+            x={x}
+            y={bottom + (isNear && index % 2 === 1 ? 29 : 16)}
+            textAnchor="middle"
+            fill="currentColor"
+            className={cx("font-sans text-fine", caught && "font-semibold")}
+          >
+            {text(length)}
+          </text>
         </g>
       ))}
     </svg>

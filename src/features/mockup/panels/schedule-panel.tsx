@@ -1,8 +1,10 @@
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
-import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { Table } from "@/components/ui/table.tsx";
 import { useDesk } from "../editor/desk-context.ts";
 import { setBoard } from "../model/commands/set-board.ts";
 import { CellText, Swatch, WordButton } from "./cell-controls.tsx";
+import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
+import { LayerTools } from "./layer-tools.tsx";
 import { ScheduleRow } from "./schedule-row.tsx";
 
 const heads = ["Key", "What", "Stock", "Thick", "Held by", "Offset", "Locate by", "Top at", "Pieces", "Mass"];
@@ -22,51 +24,40 @@ export function SchedulePanel({
 
   return (
     <section aria-label="Schedule" className="min-w-0 px-4 pt-2 pb-6 sm:px-6">
-      <h2 className="pb-1 font-serif text-base font-bold text-ink">Schedule</h2>
+      <div className="flex min-h-8 flex-wrap items-baseline justify-between gap-x-6">
+        <h2 className="font-serif text-base font-bold text-ink">Schedule</h2>
+        <LayerTools onBoard={onBoard} />
+      </div>
       <Table caption="Layers from the wall outward">
         <thead>
           <tr>
             {heads.map((head) => (
-              <HeadCell key={head} className="py-1.5">
-                {head}
-              </HeadCell>
+              <DeskHead key={head}>{head}</DeskHead>
             ))}
-            <HeadCell className="py-1.5">
-              <span className="sr-only">Order and removal</span>
-            </HeadCell>
           </tr>
         </thead>
         <tbody>
           <tr>
-            <RowHead className="py-1">A</RowHead>
-            <Cell className="py-1">
+            <DeskRowHead>A</DeskRowHead>
+            <DeskCell>
               <BackerName />
-            </Cell>
-            <Cell className="py-1">
+            </DeskCell>
+            <DeskCell>
               <span className="flex items-center gap-2">
                 <Swatch colour={stock.colour} />
                 {stock.name}
               </span>
-            </Cell>
-            <Cell className="py-1">{backer?.thickness ?? thickness}</Cell>
-            <Cell className="py-1">{backer?.heldBy}</Cell>
-            <Cell className="py-1">–</Cell>
-            <Cell className="py-1">–</Cell>
-            <Cell className="py-1">{backer?.topAt}</Cell>
-            <Cell className="py-1">{backer?.pieces}</Cell>
-            <Cell className="py-1 whitespace-nowrap">{backer?.mass}</Cell>
-            <Cell className="py-1">
-              <WordButton onClick={onBoard}>Board</WordButton>
-            </Cell>
+            </DeskCell>
+            <DeskCell>{backer?.thickness ?? thickness}</DeskCell>
+            <DeskCell>{backer?.heldBy}</DeskCell>
+            <DeskCell>–</DeskCell>
+            <DeskCell>–</DeskCell>
+            <DeskCell>{backer?.topAt}</DeskCell>
+            <DeskCell>{backer?.pieces}</DeskCell>
+            <DeskCell>{backer?.mass}</DeskCell>
           </tr>
-          {document.layers.map((layer, index) => (
-            <ScheduleRow
-              key={layer.key}
-              layer={layer}
-              figures={rows?.find(({ key }) => key === layer.key) ?? null}
-              isFirst={index === 0}
-              isLast={index === document.layers.length - 1}
-            />
+          {document.layers.map((layer) => (
+            <ScheduleRow key={layer.key} layer={layer} figures={rows?.find(({ key }) => key === layer.key) ?? null} />
           ))}
         </tbody>
       </Table>

@@ -1,18 +1,17 @@
 import type { ScheduleRow as RowFigures } from "#shared/drawing/schedule.ts";
 import { type Layer, locateSchema } from "#shared/mockup/document.ts";
 import { formatLength } from "#shared/units/format-length.ts";
-import { Cell, RowHead } from "@/components/ui/table.tsx";
+
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
-import { moveLayer, removeLayer } from "../model/commands/order-layers.ts";
 import { raiseLayer } from "../model/commands/set-hold.ts";
 import { setLayer } from "../model/commands/set-layer.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { catchBarrel } from "../model/snapping.ts";
 import { isSameStock, thicknessChoices, withCurrent } from "../model/stock-choices.ts";
 import { CellLength, CellSelect, CellText, Swatch } from "./cell-controls.tsx";
+import { DeskCell, DeskRowHead } from "./desk-table.tsx";
 import { HoldCell } from "./hold-cell.tsx";
-import { RowTools } from "./row-tools.tsx";
 
 /** An offset typed this near to a barrel in stock means that barrel. */
 const typedReachMm = 0.26;
@@ -21,12 +20,10 @@ type ScheduleRowProps = {
   readonly layer: Layer;
   /** null until they were first computed. */
   readonly figures: RowFigures | null;
-  readonly isFirst: boolean;
-  readonly isLast: boolean;
 };
 
 /** One layer in the schedule. Pressing its key chooses it. */
-export function ScheduleRow({ layer, figures, isFirst, isLast }: ScheduleRowProps) {
+export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
   const { document, edit, choose, selection, stock, unit } = useDesk();
   const { key, name, hold } = layer;
   const isChosen = selection.layerKey === key;
@@ -55,18 +52,18 @@ export function ScheduleRow({ layer, figures, isFirst, isLast }: ScheduleRowProp
         if (!isChosen) choose(chooseLayer(document, key));
       }}
     >
-      <RowHead className="py-1">
+      <DeskRowHead>
         <button
           type="button"
           aria-label={`Choose ${key}, ${name}`}
           aria-pressed={isChosen}
           onClick={() => choose(chooseLayer(document, key))}
-          className="min-h-8 min-w-8 cursor-pointer rounded border border-transparent text-left font-semibold underline decoration-dotted underline-offset-4 hover:bg-linen"
+          className="min-h-7 min-w-7 cursor-pointer rounded border border-transparent text-left font-semibold underline decoration-dotted underline-offset-4 hover:bg-linen"
         >
           {key}
         </button>
-      </RowHead>
-      <Cell className="min-w-36 py-1">
+      </DeskRowHead>
+      <DeskCell className="min-w-40">
         <CellText
           aria-label={`Name of ${key}`}
           maxLength={120}
@@ -77,8 +74,8 @@ export function ScheduleRow({ layer, figures, isFirst, isLast }: ScheduleRowProp
             return true;
           }}
         />
-      </Cell>
-      <Cell className="min-w-40 py-1">
+      </DeskCell>
+      <DeskCell className="min-w-36">
         <span className="flex items-center gap-2">
           <Swatch colour={layer.stock.colour} />
           <CellSelect
@@ -93,8 +90,8 @@ export function ScheduleRow({ layer, figures, isFirst, isLast }: ScheduleRowProp
             ))}
           </CellSelect>
         </span>
-      </Cell>
-      <Cell className="w-20 py-1">
+      </DeskCell>
+      <DeskCell className="min-w-16">
         <CellSelect
           aria-label={`Thickness of ${key}`}
           value={layer.thickness}
@@ -109,18 +106,18 @@ export function ScheduleRow({ layer, figures, isFirst, isLast }: ScheduleRowProp
             </option>
           ))}
         </CellSelect>
-      </Cell>
-      <Cell className="min-w-52 py-1">
+      </DeskCell>
+      <DeskCell className="w-1/4 min-w-44">
         <HoldCell layer={layer} />
-      </Cell>
-      <Cell className="w-20 py-1">
+      </DeskCell>
+      <DeskCell className="min-w-16">
         {hold.kind === "standoff" ? (
           <CellLength aria-label={`Offset of ${key}`} mm={hold.offset} unit={unit} onCommit={changeOffset} />
         ) : (
           "–"
         )}
-      </Cell>
-      <Cell className="w-32 py-1">
+      </DeskCell>
+      <DeskCell className="min-w-28">
         <CellSelect
           aria-label={`How ${key} is located`}
           value={layer.locate}
@@ -135,30 +132,10 @@ export function ScheduleRow({ layer, figures, isFirst, isLast }: ScheduleRowProp
             </option>
           ))}
         </CellSelect>
-      </Cell>
-      <Cell className="py-2">{figures?.topAt}</Cell>
-      <Cell className="py-2">{layer.pieces.length}</Cell>
-      <Cell className="py-2 whitespace-nowrap">{figures?.mass}</Cell>
-      <Cell className="py-1">
-        <RowTools
-          layer={layer}
-          isFirst={isFirst}
-          isLast={isLast}
-          onMove={(towards) =>
-            edit({
-              label: `Move ${key} towards the ${towards}`,
-              change: (before) => moveLayer(before, { key, towards }),
-            })
-          }
-          onHide={() =>
-            edit({
-              label: layer.hidden ? `Show ${key}` : `Hide ${key}`,
-              change: (before) => setLayer(before, { key, hidden: !layer.hidden }),
-            })
-          }
-          onRemove={() => edit({ label: `Remove ${key}`, change: (before) => removeLayer(before, { key }) })}
-        />
-      </Cell>
+      </DeskCell>
+      <DeskCell>{figures?.topAt}</DeskCell>
+      <DeskCell>{layer.pieces.length}</DeskCell>
+      <DeskCell>{figures?.mass}</DeskCell>
     </tr>
   );
 }

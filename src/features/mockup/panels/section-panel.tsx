@@ -1,7 +1,6 @@
-import { memo, useMemo, useRef } from "react";
+import { memo, useMemo, useRef, useState } from "react";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import { drawSection } from "#shared/drawing/section.ts";
-import type { MockupDocument } from "#shared/mockup/document.ts";
 import { DrawingSvg } from "@/lib/drawing-svg.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { useRoom } from "@/lib/use-room.ts";
@@ -13,8 +12,6 @@ import { chooseHole, chooseLayer } from "../model/selection.ts";
 import { RaiseHandle } from "./raise-handle.tsx";
 
 type SectionPanelProps = {
-  /** The document that the figures were computed for. */
-  readonly drawn: MockupDocument;
   readonly view: DrawingView;
   readonly drag: Drag | null;
   readonly onDrag: (drag: Drag | null) => void;
@@ -24,20 +21,20 @@ const Picture = memo(DrawingSvg);
 const insetPx = 10;
 
 /** The stack from the side, at the elevation's own vertical scale and place. Standoff layers are raised here. */
-export function SectionPanel({ drawn, view, drag, onDrag }: SectionPanelProps) {
-  const { document, figures, unit, choose } = useDesk();
+export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
+  const { document, figures, figuresOf: drawn, unit, choose } = useDesk();
   const element = useRef<HTMLDivElement>(null);
   const room = useRoom(element);
   const widthPx = room?.width ?? 300;
   const { scale } = view;
   const paperScale = paperScaleAt(scale);
-  const depthScale = useMemo(
-    () =>
-      figures === null
-        ? 1
-        : depthScaleFor({ figures, gap: drawn.hanging.gap }, { widthPx: widthPx - 2 * insetPx, scale, paperScale }),
-    [figures, drawn.hanging.gap, widthPx, scale, paperScale],
-  );
+  const wantedDepth =
+    figures === null
+      ? 1
+      : depthScaleFor({ figures, gap: drawn.hanging.gap }, { widthPx: widthPx - 2 * insetPx, scale, paperScale });
+  const [depthScale, setDepthScale] = useState(wantedDepth);
+  // Under a hand that raises a layer the scale stays, else the layer would run away from it.
+  if (drag === null && wantedDepth !== depthScale) setDepthScale(wantedDepth);
   const list = useMemo(
     () => (figures === null ? null : drawSection({ document: drawn, figures, unit, paperScale, depthScale })),
     [drawn, figures, unit, paperScale, depthScale],
@@ -78,7 +75,6 @@ export function SectionPanel({ drawn, view, drag, onDrag }: SectionPanelProps) {
             <RaiseHandle
               key={layer.key}
               layer={layer}
-              drawn={drawn}
               figures={figures}
               pxPerMm={depthScale * scale}
               pxOfDepth={pxOfDepth}
@@ -93,7 +89,7 @@ export function SectionPanel({ drawn, view, drag, onDrag }: SectionPanelProps) {
         <p className="text-fine text-graphite">drag a layer to raise it</p>
       </div>
       <p className="pointer-events-none absolute inset-x-0 bottom-0 bg-sheet/90 px-2.5 pb-1 text-fine text-graphite">
-        Heights as in the elevation, depths {depthScale.toFixed(1)} times as large
+        Depths {depthScale.toFixed(1)} times as large as heights
       </p>
     </section>
   );
