@@ -36,6 +36,12 @@ export function drawLeader(points: readonly Point[], paperScale: PaperScale): It
   if (!foot) return [];
   return [
     { kind: "line", points, stroke: { colour: graphite, widthMm: fineLineMm * paperScale } },
-    { kind: "path", path: circlePath(foot, 0.55 * paperScale), fill: graphite },
+    {
+      kind: "path",
+      path: circlePath(foot, 0.6 * paperScale),
+      fill: graphite,
+      // Dark parts would swallow a dark dot.
+      stroke: { colour: sheetWhite, widthMm: 0.18 * paperScale },
+    },
   ];
 }

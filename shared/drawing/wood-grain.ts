@@ -1,7 +1,7 @@
 import type { Box } from "../geometry/path.ts";
 import { base64OfBytes } from "./base64.ts";
 import type { Colour, Item } from "./display-list.ts";
-import { mixColours } from "./palette.ts";
+import { colourChannels, mixColours } from "./palette.ts";
 import { palettePng } from "./png.ts";
 
 /** A hash of a lattice point, 0 to 1 (integer mixing after Wang and Jenkins: multiply, shift, exclusive or). */
@@ -78,8 +78,11 @@ function makeGrain(box: Box, colour: Colour, seed: number): GrainImage {
       pixels[row * width + column] = Math.round(grainAt(alongAt, acrossAt, across, seed) * (shades - 1));
     }
   }
-  const light = mixColours(colour, "#FFFFFF", 0.42);
-  const dark = mixColours(colour, "#7A5424", 0.3);
+  // Pale wood is told by its dark lines, dark wood by light ones that must not turn it grey.
+  const [red, green, blue] = colourChannels(colour);
+  const brightness = (0.3 * red + 0.59 * green + 0.11 * blue) / 255;
+  const light = mixColours(colour, mixColours(colour, "#FFF4E0", 0.9), 0.04 + 0.7 * brightness ** 2);
+  const dark = mixColours(colour, mixColours(colour, "#3A2408", 0.65), 0.22 + 0.1 * brightness);
   const colours = Array.from({ length: shades }, (_, index) => mixColours(light, dark, index / (shades - 1)));
   return { kind: "image", box, pngBase64: base64OfBytes(palettePng({ width, height, pixels }, colours)) };
 }

@@ -8,8 +8,10 @@ import { computeFigures } from "#shared/stack/compute-figures.ts";
 import { orreryBooks } from "../../../support/orrery-books.ts";
 
 let kernel: Kernel;
+let rich: DisplayList;
 beforeAll(async () => {
   kernel = await loadKernel();
+  rich = draw(orreryBooks());
 });
 
 const draw = (document: MockupDocument, options: { dimensions?: boolean; wall?: boolean; unit?: "mm" | "in" } = {}) =>
@@ -34,7 +36,7 @@ const textsOf = (list: DisplayList) =>
 describe("the elevation of a rich sign", () => {
   it("names every piece, hole, layer and the board", () => {
     const document = orreryBooks();
-    const ids = new Set(idsOf(draw(document)));
+    const ids = new Set(idsOf(rich));
     const pieces = document.layers.flatMap((layer) => layer.pieces.map(({ id }) => id));
     expect(pieces).toHaveLength(19);
     for (const id of [...pieces, "hole:h1", "hole:h4", "layer:B", "layer:G", "board", "board-plane"]) {
@@ -43,21 +45,19 @@ describe("the elevation of a rich sign", () => {
   });
 
   it("draws what is higher later: board, disc, rings on it, planet on a ring", () => {
-    const ids = idsOf(draw(orreryBooks()));
+    const ids = idsOf(rich);
     const order = ["board", "letter-1", "disc", "ring-1", "planet-rust"].map((id) => ids.indexOf(id));
     expect(order).toEqual([...order].sort((a, b) => a - b));
     expect(order).not.toContain(-1);
   });
 
   it("casts one shadow on each level that has something above it: board, disc, rings", () => {
-    const images = everyItem(draw(orreryBooks()).items).filter(
-      (item) => item.kind === "image" && item.opacity !== undefined,
-    );
+    const images = everyItem(rich.items).filter((item) => item.kind === "image" && item.opacity !== undefined);
     expect(images).toHaveLength(3);
   });
 
   it("dimensions the board, the chief layers and the holes in mm", () => {
-    const texts = textsOf(draw(orreryBooks()));
+    const texts = textsOf(rich);
     // 600 by 400; the disc 260 wide at (170, 30); hole centres 159.8 apart (113 mm from the middle at 45 degrees).
     expect(texts).toEqual(expect.arrayContaining(["600", "400", "B  260", "170", "30", "110", "B  holes 159.8"]));
   });
@@ -68,13 +68,13 @@ describe("the elevation of a rich sign", () => {
   });
 
   it("groups dimensions under names by which they can be left out", () => {
-    const names = idsOf(draw(orreryBooks())).filter((id) => id.startsWith("dimension:"));
+    const names = idsOf(rich).filter((id) => id.startsWith("dimension:"));
     expect(names).toEqual(["dimension:overall", "dimension:across", "dimension:down"]);
     expect(idsOf(draw(orreryBooks(), { dimensions: false })).some((id) => id.startsWith("dimension:"))).toBe(false);
   });
 
   it("says where the board lies, and keeps it inside the picture", () => {
-    const list = draw(orreryBooks());
+    const list = rich;
     const origin = boardOriginOf(list);
     expect(origin?.x).toBeGreaterThan(40);
     expect((origin?.x ?? 0) + 600).toBeLessThan(list.widthMm);
@@ -82,7 +82,7 @@ describe("the elevation of a rich sign", () => {
   });
 
   it("is the same each time", () => {
-    expect(JSON.stringify(draw(orreryBooks()))).toBe(JSON.stringify(draw(orreryBooks())));
+    expect(JSON.stringify(draw(orreryBooks()))).toBe(JSON.stringify(rich));
   });
 
   it("leaves hidden layers out, with what they would have thrown", () => {
