@@ -18,13 +18,13 @@ import { simplifyRing } from "./simplify-ring.ts";
 const slimmestMm = 0.02;
 /** A tenth of the flattening tolerance: takes out what the kernel's grid and cuts left on straight lines, and no curve. */
 const simplifyToleranceMm = 0.002;
-const fitToleranceMm = flatteningToleranceMm;
+const fitToleranceMm = 0.03;
 
 /**
  * The patches of a drawing as pieces in mm: translucent rests mixed with white, each connected area on its own, by colour
  * (most area first) and within a colour from top to bottom and left to right. `mmPerWork` leads from the working plane to
  * mm. Outlines are the flattened ones with curves fitted again, so that few numbers say them and they stay smooth when the piece
- * grows: within 0.045 mm of the drawn curves on the working plane.
+ * grows: within 0.05 mm of the drawn curves on the working plane.
  */
 export function artworkPieces(
   kernel: Kernel,

@@ -1,4 +1,5 @@
 import { boxesOverlap, boxOfRegion } from "../geometry/box.ts";
+import { joinAbutting } from "../geometry/join-abutting.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Box, Region } from "../geometry/path.ts";
 import { isInvisible, isOpaque, type Rgba, rgbaKey, rgbaOver } from "./rgba.ts";
@@ -45,7 +46,7 @@ export function paintOver(kernel: Kernel, below: Layer, top: Layer): Layer {
     const covers = top.filter(
       (cover) => boxesOverlap(cover.box, patch.box) && !(cover.key === patch.key && isOpaque(cover.colour)),
     );
-    add(patch.colour, covers.length === 0 ? patch.region : kernel.difference(patch.region, regionOf(covers)));
+    add(patch.colour, covers.length === 0 ? patch.region : kernel.difference(patch.region, regionOf(kernel, covers)));
     for (const cover of covers) {
       if (isOpaque(cover.colour)) continue;
       add(rgbaOver(cover.colour, patch.colour), kernel.intersect(patch.region, cover.region));
@@ -55,7 +56,7 @@ export function paintOver(kernel: Kernel, below: Layer, top: Layer): Layer {
     if (!translucent.includes(patch)) add(patch.colour, patch.region);
     else {
       const bases = below.filter((base) => boxesOverlap(base.box, patch.box));
-      add(patch.colour, bases.length === 0 ? patch.region : kernel.difference(patch.region, regionOf(bases)));
+      add(patch.colour, bases.length === 0 ? patch.region : kernel.difference(patch.region, regionOf(kernel, bases)));
     }
   }
   return layerOf(kernel, [...parts.values()]);
@@ -71,9 +72,12 @@ export function fadeLayer(layer: Layer, factor: number): Layer {
   return layer.flatMap((patch) => patchLayer({ ...patch.colour, a: patch.colour.a * factor }, patch.region));
 }
 
-/** All a layer covers, whatever the colour. Patches don't overlap, so their rings together are the region. */
-export function regionOf(layer: Layer): Region {
-  return layer.length === 1 && layer[0] ? layer[0].region : layer.flatMap((patch) => patch.region);
+/** All a layer covers, whatever the colour. */
+function regionOf(kernel: Kernel, layer: Layer): Region {
+  return joinAbutting(
+    kernel,
+    layer.map((patch) => patch.region),
+  );
 }
 
 /** Joins the regions of each colour into one patch without inner seams. */
@@ -81,10 +85,7 @@ export function layerOf(
   kernel: Kernel,
   parts: readonly { readonly colour: Rgba; readonly regions: readonly Region[] }[],
 ): Layer {
-  return parts.flatMap(({ colour, regions }) => {
-    const [only] = regions;
-    return patchLayer(colour, regions.length === 1 && only ? only : kernel.union(regions.flat(), "nonzero"));
-  });
+  return parts.flatMap(({ colour, regions }) => patchLayer(colour, joinAbutting(kernel, regions)));
 }
 
 /** Neighbours in paint order of one opaque colour become one layer by a single union. */

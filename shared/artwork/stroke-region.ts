@@ -2,7 +2,7 @@ import { segmentPoints } from "../geometry/flatten.ts";
 import type { Cap, Join, Kernel } from "../geometry/kernel.ts";
 import type { Region } from "../geometry/path.ts";
 import type { Subpath } from "../geometry/path-text.ts";
-import { type StrokePoint, strokeParts } from "../geometry/stroke-parts.ts";
+import { type StrokePoint, strokeParts, withoutPinholes } from "../geometry/stroke-parts.ts";
 import { flatteningToleranceMm } from "../geometry/tolerance.ts";
 import {
   type Matrix,
@@ -15,6 +15,9 @@ import {
 } from "../geometry/transform.ts";
 import type { ArtworkBudget } from "./budget.ts";
 import { dashLine } from "./dashes.ts";
+
+/** Finer than for fills: the pen magnifies what the chords leave out, and curves are fitted to the outline again. */
+const lineToleranceMm = flatteningToleranceMm / 4;
 
 export type StrokeStyle = {
   readonly width: number;
@@ -57,7 +60,7 @@ export function strokeRegion(
       ? dashes.flatMap((dash) => strokeParts(dash, { ...pen, closed: false }))
       : strokeParts(line, { ...pen, closed: subpath.closed });
   });
-  const outline = kernel.union(parts, "nonzero");
+  const outline = withoutPinholes(kernel.union(parts, "nonzero"));
   if (plain) return outline;
   return kernel.union(regionTransform(outline, matrixMultiply(matrix, scaleMatrix(1 / stretch))), "evenodd");
 }
@@ -69,7 +72,7 @@ function linePoints(subpath: Subpath, matrix: Matrix): StrokePoint[] | null {
   const points: StrokePoint[] = [from];
   for (const original of subpath.segments) {
     const segment = segmentTransform(original, matrix);
-    const next = segmentPoints(from, segment, flatteningToleranceMm);
+    const next = segmentPoints(from, segment, lineToleranceMm);
     for (const [index, point] of next.entries())
       points.push(index < next.length - 1 ? { ...point, smooth: true } : point);
     from = segment.to;

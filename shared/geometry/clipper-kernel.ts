@@ -1,10 +1,10 @@
-import type { JoinType, MainModule, PathsD } from "clipper2-wasm/dist/clipper2z";
+import type { JoinType, MainModule, Paths64 } from "clipper2-wasm/dist/clipper2z";
 import type { FillRule, Join, Kernel } from "./kernel.ts";
 import type { Polygon, Region } from "./path.ts";
-import { strokeParts } from "./stroke-parts.ts";
+import { strokeParts, withoutPinholes } from "./stroke-parts.ts";
 
-/** Decimals of the kernel's grid: 3 is 0.001 mm. */
-const gridDecimals = 3;
+/** Steps of the kernel's grid in a mm. The module's own calls for decimals round to 1/1024 instead, so we scale ourselves. */
+const stepsPerMm = 1000;
 const arcToleranceMm = 0.01;
 const mitreLimit = 4;
 /** Far beyond any sign, and well inside what the 64-bit grid and its products can hold. */
@@ -27,11 +27,11 @@ export function clipperKernel(clipper: MainModule): Kernel {
     subject: Region,
     clip: Region,
   ): Region => {
-    const a = toPaths(clipper, subject);
+    const a = toGrid(clipper, subject);
     try {
-      const b = toPaths(clipper, clip);
+      const b = toGrid(clipper, clip);
       try {
-        return takeRegion(clipper.BooleanOpD(type, fillRules[rule], a, b, gridDecimals));
+        return takeRegion(clipper, clipper.BooleanOp64(type, fillRules[rule], a, b));
       } finally {
         b.delete();
       }
@@ -51,59 +51,59 @@ export function clipperKernel(clipper: MainModule): Kernel {
       // An offset of rings whose direction does not say which is a hole is wrong without a sound, so they are oriented first.
       const oriented = union(region, "evenodd");
       if (oriented.length === 0 || distanceMm === 0) return oriented;
-      const paths = toPaths(clipper, oriented);
+      const paths = toGrid(clipper, oriented);
       try {
+        const { EndType } = clipper;
+        const steps = distanceMm * stepsPerMm;
+        const arcs = arcToleranceMm * stepsPerMm;
         return takeRegion(
-          clipper.InflatePathsD(
-            paths,
-            distanceMm,
-            joins[join],
-            clipper.EndType.Polygon,
-            mitreLimit,
-            gridDecimals,
-            arcToleranceMm,
-          ),
+          clipper,
+          clipper.InflatePaths64(paths, steps, joins[join], EndType.Polygon, mitreLimit, arcs),
         );
       } finally {
         paths.delete();
       }
     },
-    strokeOutline: (line, options) => union(strokeParts(line, options), "nonzero"),
+    strokeOutline: (line, options) => withoutPinholes(union(strokeParts(line, options), "nonzero")),
   };
 }
 
-function toPaths(clipper: MainModule, region: Region): PathsD {
+function toGrid(clipper: MainModule, region: Region): Paths64 {
   const paths = new clipper.PathsD();
-  for (const polygon of region) {
-    if (polygon.length < 3) continue;
-    // The module holds a point as x, y and a label.
-    const numbers = new Float64Array(polygon.length * 3);
-    for (const [index, { x, y }] of polygon.entries()) {
-      if (!(Math.abs(x) <= largestCoordinateMm && Math.abs(y) <= largestCoordinateMm)) {
-        paths.delete();
-        throw new RangeError(`A point at ${x}, ${y} lies outside what the geometry kernel takes.`);
+  try {
+    for (const polygon of region) {
+      if (polygon.length < 3) continue;
+      // The module holds a point as x, y and a label.
+      const numbers = new Float64Array(polygon.length * 3);
+      for (const [index, { x, y }] of polygon.entries()) {
+        if (!(Math.abs(x) <= largestCoordinateMm && Math.abs(y) <= largestCoordinateMm))
+          throw new RangeError(`A point at ${x}, ${y} lies outside what the geometry kernel takes.`);
+        numbers[index * 3] = Math.round(x * stepsPerMm);
+        numbers[index * 3 + 1] = Math.round(y * stepsPerMm);
       }
-      numbers[index * 3] = x;
-      numbers[index * 3 + 1] = y;
+      const path = new clipper.PathD();
+      path.assign(numbers);
+      paths.push_back(path);
+      path.delete();
     }
-    const path = new clipper.PathD();
-    path.assign(numbers);
-    paths.push_back(path);
-    path.delete();
+    return clipper.PathsDToPaths64(paths);
+  } finally {
+    paths.delete();
   }
-  return paths;
 }
 
-/** Copies the rings out of the module's memory and frees them. */
-function takeRegion(paths: PathsD): Region {
+/** Copies the rings out of the module's memory, in mm, and frees them. */
+function takeRegion(clipper: MainModule, onGrid: Paths64): Region {
+  const paths = clipper.Paths64ToPathsD(onGrid);
+  onGrid.delete();
   const region: Polygon[] = [];
   const count = paths.size();
   for (let index = 0; index < count; index++) {
     const path = paths.get(index);
     const numbers = path.view();
     const polygon = Array.from({ length: numbers.length / 3 }, (_, point) => ({
-      x: numbers[point * 3] ?? 0,
-      y: numbers[point * 3 + 1] ?? 0,
+      x: (numbers[point * 3] ?? 0) / stepsPerMm,
+      y: (numbers[point * 3 + 1] ?? 0) / stepsPerMm,
     }));
     path.delete();
     if (polygon.length >= 3) region.push(polygon);

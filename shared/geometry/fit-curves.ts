@@ -23,8 +23,9 @@ export function fitCurves(
   if (points.length === 2 || points.every((point) => distanceToSegmentMm(point, first, last) <= toleranceMm / 4))
     return [{ kind: "line", to: last }];
 
-  const start = options.start ?? endDirection(points);
-  const end = options.end ?? endDirection(points.toReversed());
+  const reach = 10 * toleranceMm;
+  const start = options.start ?? endDirection(points, reach);
+  const end = options.end ?? endDirection(points.toReversed(), reach);
   let parameters = chordParameters(points);
   let cubic = leastSquares(points, parameters, start, end);
   let worst = worstPoint(points, parameters, cubic);
@@ -35,26 +36,47 @@ export function fitCurves(
   }
   if (worst.error <= toleranceMm) return [{ kind: "cubic", c1: cubic[1], c2: cubic[2], to: last }];
 
-  const before = points[worst.index - 1] ?? first;
-  const after = points[worst.index + 1] ?? last;
-  const through = unit({ x: after.x - before.x, y: after.y - before.y });
+  const through = middleDirection(points, worst.index, reach);
   return [
     ...fitCurves(points.slice(0, worst.index + 1), { toleranceMm, start, end: scaled(through, -1) }),
     ...fitCurves(points.slice(worst.index), { toleranceMm, start: through, end }),
   ];
 }
 
-/** The direction in which a parabola through the first three points leaves the first. */
-function endDirection(points: readonly Point[]): Point {
-  const [a, b, c] = points;
-  if (!a || !b) return { x: 1, y: 0 };
-  if (!c) return unit(subtract(b, a));
-  const d1 = Math.hypot(b.x - a.x, b.y - a.y);
+/**
+ * The direction in which a parabola through the first point and two others leaves it. The others lie `reach` and twice that away,
+ * where the run is long enough: nearer ones would make a direction of what the grid and the flattening added.
+ */
+function endDirection(points: readonly Point[], reach: number): Point {
+  const [a, near] = points;
+  if (!a || !near) return { x: 1, y: 0 };
+  const away = (point: Point) => Math.hypot(point.x - a.x, point.y - a.y);
+  const first = points.findIndex((point) => away(point) >= reach);
+  const b = points[first];
+  const c = b && points.slice(first + 1).find((point) => away(point) >= 2 * away(b));
+  if (!b || !c) return unit(subtract(b ?? points[points.length >> 1] ?? near, a));
+  const d1 = away(b);
   const d2 = Math.hypot(c.x - b.x, c.y - b.y);
   const wa = -(2 * d1 + d2) / (d1 * (d1 + d2));
   const wb = (d1 + d2) / (d1 * d2);
   const wc = -d1 / (d2 * (d1 + d2));
   return unit({ x: wa * a.x + wb * b.x + wc * c.x, y: wa * a.y + wb * b.y + wc * c.y });
+}
+
+/** The direction in which the run passes a point, from points at least `reach` away on both sides where there are any. */
+function middleDirection(points: readonly Point[], index: number, reach: number): Point {
+  const at = points[index] ?? origin;
+  const isFar = (point: Point) => Math.hypot(point.x - at.x, point.y - at.y) >= reach;
+  const before = points.slice(0, index).findLast(isFar) ?? points[0] ?? at;
+  const after = points.slice(index + 1).find(isFar) ?? points.at(-1) ?? at;
+  const chord = unit(subtract(after, before));
+  // Of unequal distances the nearer says more: the directions to both sides, each weighted with the other's length.
+  const back = subtract(at, before);
+  const forth = subtract(after, at);
+  const backLength = Math.hypot(back.x, back.y);
+  const forthLength = Math.hypot(forth.x, forth.y);
+  if (backLength === 0 || forthLength === 0) return chord;
+  return unit(plus(scaled(back, forthLength / backLength), scaled(forth, backLength / forthLength)));
 }
 
 function chordParameters(points: readonly Point[]): number[] {

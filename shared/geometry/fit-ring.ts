@@ -17,20 +17,14 @@ const tangentRadians = (8 * Math.PI) / 180;
 export function fitRing(ring: Polygon, toleranceMm: number): Ring {
   if (ring.length < 6) return polygonRing(ring);
   const breaks = breaksOf(ring, toleranceMm);
-  const starts = breaks.length > 0 ? breaks : [{ index: 0, before: null, after: null }];
+  const starts = breaks.length > 0 ? breaks : quarters(ring);
   const segments: Segment[] = [];
   for (const [place, from] of starts.entries()) {
     const next = starts[(place + 1) % starts.length] ?? from;
-    const length = (next.index - from.index + ring.length - 1) % ring.length;
-    const run = Array.from({ length: length + 2 }, (_, step) => pointAt(ring, from.index + step));
-    const closed = breaks.length === 0 ? throughStart(ring) : null;
-    segments.push(
-      ...fitCurves(run, {
-        toleranceMm,
-        start: closed ?? from.after,
-        end: closed ? minus(closed) : next.before && minus(next.before),
-      }),
-    );
+    // Back to the same place means once around.
+    const steps = (next.index - from.index + ring.length) % ring.length || ring.length;
+    const run = Array.from({ length: steps + 1 }, (_, step) => pointAt(ring, from.index + step));
+    segments.push(...fitCurves(run, { toleranceMm, start: from.after, end: next.before && minus(next.before) }));
   }
   const fitted: Ring = { start: pointAt(ring, starts[0]?.index ?? 0), segments };
   const area = Math.abs(signedRingArea(flattenRing(fitted, toleranceMm)) - signedRingArea(ring));
@@ -64,9 +58,19 @@ function breaksOf(ring: Polygon, toleranceMm: number): Break[] {
   return breaks;
 }
 
-/** The direction in which a ring without corners passes its first point. */
-function throughStart(ring: Polygon): Point {
-  return direction(pointAt(ring, -1), pointAt(ring, 1));
+/** Four places about as far apart along a ring without corners, each with the one direction in which the ring passes it. */
+function quarters(ring: Polygon): Break[] {
+  const quarter = perimeter(ring) / 4;
+  const found: Break[] = [];
+  let travelled = 0;
+  for (let index = 0; index < ring.length && found.length < 4; index++) {
+    if (travelled >= found.length * quarter) {
+      const passing = direction(pointAt(ring, index - 1), pointAt(ring, index + 1));
+      found.push({ index, before: passing, after: passing });
+    }
+    travelled += distance(pointAt(ring, index), pointAt(ring, index + 1));
+  }
+  return found;
 }
 
 function turn(a: Point, b: Point, c: Point): number {

@@ -16,9 +16,9 @@ export type Kernel = {
   readonly difference: (a: Region, b: Region) => Region;
   /** Grows (positive) or shrinks (negative) a region that went through `union` before. Arc tolerance 0.01 mm, mitre limit 4. */
   readonly offset: (region: Region, distanceMm: number, join: Join) => Region;
-  /** The area an open or closed line covers when drawn with a pen of `widthMm`. */
+  /** The area an open or closed line covers when drawn with a pen of `widthMm`. Points marked `smooth` are joined round whatever the join. */
   readonly strokeOutline: (
-    line: readonly { readonly x: number; readonly y: number }[],
+    line: readonly { readonly x: number; readonly y: number; readonly smooth?: boolean }[],
     options: { closed: boolean; widthMm: number; join: Join | "bevel"; cap: Cap; mitreLimit: number },
   ) => Region;
 };

@@ -15,6 +15,16 @@ export type StrokeOptions = {
 
 /** How far a chord of a round join or cap may run inside the true arc. */
 const arcToleranceMm = 0.01;
+/** How far joins and caps reach into the boxes they adjoin. */
+const overlapMm = 0.05;
+
+/** Holes no larger than this, in mm², come from rounding to the kernel's grid where three parts meet. */
+const gridHoleMm2 = 2e-5;
+
+/** The united parts without the pinholes that rounding leaves between them. */
+export function withoutPinholes(outline: Region): Region {
+  return outline.filter((ring) => signedRingArea(ring) < -gridHoleMm2 || signedRingArea(ring) > 0);
+}
 
 /**
  * The shapes whose union (non-zero) is the stroke of `line` in mm as SVG 2, section 13.7 "Computing the shape of the
@@ -29,12 +39,18 @@ export function strokeParts(line: readonly StrokePoint[], options: StrokeOptions
   if (!first) return [];
   if (points.length === 1) return dot(first, half, options.cap);
 
-  const closed = options.closed && points.length > 2;
+  const { closed } = options;
   const parts: Polygon[] = [];
+  const overlap = Math.min(overlapMm, half / 2);
   const edges = closed ? points.length : points.length - 1;
   const directions = Array.from({ length: edges }, (_, index) =>
     direction(at(points, index), at(points, (index + 1) % points.length)),
   );
+  const lengths = directions.map((_, index) => {
+    const from = at(points, index);
+    const to = at(points, (index + 1) % points.length);
+    return Math.hypot(to.x - from.x, to.y - from.y);
+  });
   for (const [index, along] of directions.entries()) {
     const from = at(points, index);
     const to = at(points, (index + 1) % points.length);
@@ -42,20 +58,33 @@ export function strokeParts(line: readonly StrokePoint[], options: StrokeOptions
     parts.push([plus(from, side), minus(from, side), minus(to, side), plus(to, side)]);
     if (closed || index > 0) {
       const before = at(directions, (index + edges - 1) % edges);
-      const corner = joinPart(from, before, along, half, from.smooth ? "round" : options.join, options.mitreLimit);
+      const corner = joinPart(from, before, along, {
+        half,
+        join: from.smooth ? "round" : options.join,
+        limit: options.mitreLimit,
+        overlap: Math.min(overlap, at(lengths, index) / 2, at(lengths, (index + edges - 1) % edges) / 2),
+      });
       if (corner) parts.push(corner);
     }
   }
   if (!closed) {
-    const start = capPart(first, negated(at(directions, 0)), half, options.cap);
-    const end = capPart(at(points, points.length - 1), at(directions, edges - 1), half, options.cap);
+    const cap = (end: Point, outward: Point, length: number) =>
+      capPart(end, outward, { half, cap: options.cap, overlap: Math.min(overlap, length / 2) });
+    const start = cap(first, scaled(at(directions, 0), -1), at(lengths, 0));
+    const end = cap(at(points, points.length - 1), at(directions, edges - 1), at(lengths, edges - 1));
     if (start) parts.push(start);
     if (end) parts.push(end);
   }
   return parts.map((part) => (signedRingArea(part) < 0 ? part.toReversed() : part));
 }
 
-function joinPart(corner: Point, before: Point, after: Point, half: number, join: Join | "bevel", limit: number) {
+function joinPart(
+  corner: Point,
+  before: Point,
+  after: Point,
+  options: { half: number; join: Join | "bevel"; limit: number; overlap: number },
+): Polygon | null {
+  const { half, join, limit, overlap } = options;
   const cross = before.x * after.y - before.y * after.x;
   const dot = before.x * after.x + before.y * after.y;
   if (Math.abs(cross) < 1e-9 && dot > 0) return null;
@@ -63,32 +92,39 @@ function joinPart(corner: Point, before: Point, after: Point, half: number, join
   const outward = cross > 0 ? -1 : 1;
   const a = { x: -before.y * half * outward, y: before.x * half * outward };
   const b = { x: -after.y * half * outward, y: after.x * half * outward };
-  if (join === "round") return [corner, ...arc(corner, a, b, half, dot)];
+  // Reaching a little into both boxes, or rounding to the grid would leave slits along their ends.
+  const inset = 1 - overlap / half;
+  const into = [
+    plus(plus(corner, scaled(b, inset)), scaled(after, overlap)),
+    plus(corner, scaled(after, overlap)),
+    plus(corner, scaled(direction(before, after), overlap)),
+    plus(corner, scaled(before, -overlap)),
+    plus(plus(corner, scaled(a, inset)), scaled(before, -overlap)),
+  ];
+  if (join === "round") return [...into, ...arc(corner, a, half, -outward * Math.acos(Math.max(-1, Math.min(1, dot))))];
   if (join === "mitre" && Math.abs(cross) >= 1e-9) {
     // Length of the mitre over the stroke's width is 1 / sin(half of the angle between the edges); dot = -cos of that angle.
     const ratioSquared = 2 / (1 + dot);
     if (ratioSquared <= limit * limit) {
       const reach = 1 / (1 + dot);
-      return [
-        corner,
-        plus(corner, a),
-        { x: corner.x + (a.x + b.x) * reach, y: corner.y + (a.y + b.y) * reach },
-        plus(corner, b),
-      ];
+      return [...into, plus(corner, a), plus(corner, scaled(plus(a, b), reach)), plus(corner, b)];
     }
   }
-  return [corner, plus(corner, a), plus(corner, b)];
+  return [...into, plus(corner, a), plus(corner, b)];
 }
 
-function capPart(end: Point, outward: Point, half: number, cap: Cap): Polygon | null {
+function capPart(end: Point, outward: Point, options: { half: number; cap: Cap; overlap: number }): Polygon | null {
+  const { half, cap, overlap } = options;
   if (cap === "butt") return null;
   const side = { x: -outward.y * half, y: outward.x * half };
+  const back = scaled(outward, -overlap);
+  const inset = scaled(side, 1 - overlap / half);
+  const base = [plus(minus(end, inset), back), plus(plus(end, inset), back)];
   if (cap === "square") {
-    const reach = { x: outward.x * half, y: outward.y * half };
-    return [plus(end, side), minus(end, side), plus(minus(end, side), reach), plus(plus(end, side), reach)];
+    const reach = scaled(outward, half);
+    return [...base, plus(end, side), plus(plus(end, side), reach), plus(minus(end, side), reach), minus(end, side)];
   }
-  const tip = { x: outward.x * half, y: outward.y * half };
-  return [...arc(end, side, tip, half, 0), ...arc(end, tip, negated(side), half, 0).slice(1)];
+  return [...base, ...arc(end, side, half, -Math.PI)];
 }
 
 function dot(centre: Point, half: number, cap: Cap): Region {
@@ -113,20 +149,14 @@ function dot(centre: Point, half: number, cap: Cap): Region {
   ];
 }
 
-/** Points of the shorter arc about `centre` from `centre + a` to `centre + b`, both ends included. */
-function arc(centre: Point, a: Point, b: Point, radius: number, cosine: number): Point[] {
-  const angle = Math.acos(Math.max(-1, Math.min(1, cosine)));
-  const steps = arcSteps(angle, radius);
-  const way = a.x * b.y - a.y * b.x < 0 ? -1 : 1;
-  const points: Point[] = [plus(centre, a)];
-  for (let step = 1; step < steps; step++) {
-    const turn = (way * angle * step) / steps;
-    const cos = Math.cos(turn);
-    const sin = Math.sin(turn);
-    points.push({ x: centre.x + a.x * cos - a.y * sin, y: centre.y + a.x * sin + a.y * cos });
-  }
-  points.push(plus(centre, b));
-  return points;
+/** Points of an arc about `centre` that starts at `centre + from` and turns by `angle`, both ends included. */
+function arc(centre: Point, from: Point, radius: number, angle: number): Point[] {
+  const steps = arcSteps(Math.abs(angle), radius);
+  return Array.from({ length: steps + 1 }, (_, step) => {
+    const cos = Math.cos((angle * step) / steps);
+    const sin = Math.sin((angle * step) / steps);
+    return { x: centre.x + from.x * cos - from.y * sin, y: centre.y + from.x * sin + from.y * cos };
+  });
 }
 
 function arcSteps(angle: number, radius: number): number {
@@ -154,7 +184,7 @@ function direction(from: Point, to: Point): Point {
 
 const plus = (a: Point, b: Point): Point => ({ x: a.x + b.x, y: a.y + b.y });
 const minus = (a: Point, b: Point): Point => ({ x: a.x - b.x, y: a.y - b.y });
-const negated = (a: Point): Point => ({ x: -a.x, y: -a.y });
+const scaled = (a: Point, factor: number): Point => ({ x: a.x * factor, y: a.y * factor });
 
 function at<T>(list: readonly T[], index: number): T {
   const item = list[index];
