@@ -99,7 +99,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
         )}
       />
     ),
-    section: <SectionView sheet={sheet} />,
+    section: <SectionView sheet={sheet} isBeside={isDesk} />,
     schedule: isDesk ? <ScheduleTable rows={sheet.schedule} /> : <ScheduleList rows={sheet.schedule} unit={job.unit} />,
     figures: <SheetFigures sheet={sheet} />,
     notes: (

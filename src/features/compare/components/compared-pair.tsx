@@ -1,9 +1,12 @@
 import { useMemo, useRef, useState } from "react";
 import type { z } from "zod";
 import type { compareSchema } from "#shared/contracts/revisions.ts";
+import type { DisplayList } from "#shared/drawing/display-list.ts";
+import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
+import { alignPictures } from "../model/align-pictures.ts";
 import { ChangeList } from "./change-list.tsx";
 import { ComparedPicture } from "./compared-picture.tsx";
 
@@ -24,14 +27,12 @@ export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
   const [chosen, setChosen] = useState<number | null>(null);
   const pictures = useRef<HTMLDivElement>(null);
   const { before, after, changes } = pair;
-  const fitTo = useMemo(
-    () => ({
-      width: Math.max(before[side].widthMm, after[side].widthMm),
-      height: Math.max(before[side].heightMm, after[side].heightMm),
-    }),
-    [before, after, side],
-  );
-  const spot = side === "elevation" && chosen !== null ? (changes[chosen]?.where ?? null) : null;
+  const aligned = useMemo(() => {
+    const placed = (list: DisplayList) => ({ list, origin: boardOriginOf(list) ?? { x: 0, y: 0 } });
+    return alignPictures(placed(before[side]), placed(after[side]));
+  }, [before, after, side]);
+  const where = side === "elevation" && chosen !== null ? changes[chosen]?.where : null;
+  const spot = where ? { x: where.x + aligned.origin.x, y: where.y + aligned.origin.y } : null;
 
   function handleSide(next: typeof side) {
     setSide(next);
@@ -62,7 +63,10 @@ export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
           ))}
         </p>
         <div className="grid min-h-0 flex-1 auto-rows-[19rem] lg:auto-rows-auto lg:grid-cols-2">
-          {[before, after].map((one, index) => (
+          {[
+            { ...before, list: aligned.before },
+            { ...after, list: aligned.after },
+          ].map((one, index) => (
             <div
               key={one.revision.id}
               className={
@@ -70,7 +74,7 @@ export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
               }
             >
               <ComparedPicture
-                list={one[side]}
+                list={one.list}
                 title={`Revision ${one.revision.letter}, ${side === "elevation" ? "front" : "from the side"}`}
                 heading={
                   <>
@@ -83,7 +87,6 @@ export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
                     </TextLink>
                   </>
                 }
-                fitTo={fitTo}
                 view={view}
                 onView={setView}
                 spot={spot}

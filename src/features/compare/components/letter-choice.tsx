@@ -1,6 +1,5 @@
 import type { Revision } from "#shared/contracts/revisions.ts";
 import { Select } from "@/components/ui/select.tsx";
-import { formatDay } from "@/lib/format.ts";
 
 type LetterChoiceProps = {
   readonly label: string;
@@ -14,10 +13,9 @@ export function LetterChoice({ label, revisions, chosen, onChoose }: LetterChoic
   return (
     <Select label={label} value={chosen} onChange={(event) => onChoose(event.target.value)} className="min-w-0 flex-1">
       {!revisions.some(({ id }) => id === chosen) && <option value={chosen}>Choose a letter</option>}
-      {revisions.map(({ id, letter, state, issuedAt }) => (
+      {revisions.map(({ id, letter, state }) => (
         <option key={id} value={id}>
-          Revision {letter}, {state}
-          {issuedAt === null ? "" : `, ${formatDay(issuedAt)}`}
+          {letter}, {state}
         </option>
       ))}
     </Select>

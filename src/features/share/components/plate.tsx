@@ -18,15 +18,17 @@ export function Plate({ piece, number, unit }: PlateProps) {
     <article id={plateId(number)} aria-labelledby={`${plateId(number)}-title`} className="break-inside-avoid">
       <figure>
         <div className="border border-ink bg-sheet p-2 sm:p-3">
-          <div className="border border-rule p-2 sm:p-6">
-            <DrawingSvg
-              list={elevation}
-              title={`${title}, from the front`}
-              className="mx-auto block h-auto max-h-[74dvh] w-full"
-            />
+          <div className="items-center gap-6 border border-rule p-2 sm:flex sm:p-6">
+            <div className="min-w-0" style={{ flex: `${elevation.widthMm} 1 0` }}>
+              <DrawingSvg list={elevation} title={`${title}, from the front`} className="block h-auto w-full" />
+            </div>
+            {/* Widths shared out by mm give both views one scale. */}
+            <div className="mx-auto mt-4 w-44 min-w-0 sm:m-0 sm:w-auto" style={{ flex: `${section.widthMm} 1 0` }}>
+              <DrawingSvg list={section} title={`${title}, from the side`} className="block h-auto w-full" />
+            </div>
           </div>
         </div>
-        <figcaption className="mt-4 grid gap-x-10 gap-y-5 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto]">
+        <figcaption className="mt-4 grid gap-x-10 gap-y-5 sm:grid-cols-2">
           <div>
             <p className="font-serif text-fine text-graphite">Plate {romanNumber(number)}</p>
             <h2 id={`${plateId(number)}-title`} className="font-serif text-2xl font-bold">
@@ -52,10 +54,6 @@ export function Plate({ piece, number, unit }: PlateProps) {
               </dd>
             </div>
           </dl>
-          <div className="w-40">
-            <p className="text-fine text-graphite">Section, from the side</p>
-            <DrawingSvg list={section} title={`${title}, from the side`} className="mt-1 block h-56 w-full" />
-          </div>
         </figcaption>
       </figure>
     </article>

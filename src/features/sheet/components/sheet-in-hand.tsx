@@ -47,7 +47,11 @@ export function SheetInHand({ parts, tools, tab, onTab, shape }: SheetInHandProp
             <div className="px-4 py-3">{parts.figures}</div>
           </>
         ) : (
-          <div className="max-h-[56dvh]" style={{ height: `calc(${Math.min(1.2, shape)} * 100vw)` }}>
+          <div
+            className={tab === "front" ? "max-h-[58dvh]" : "h-[58dvh]"}
+            // The row of words under the drawing takes 2.75rem.
+            style={tab === "front" ? { height: `calc(${Math.min(1.2, shape)} * 100vw + 2.75rem)` } : undefined}
+          >
             {tab === "front" ? parts.elevation : parts.section}
           </div>
         )}

@@ -59,7 +59,8 @@ export function StandingBanner({
           <>
             {isHeld(revision) && current && (
               <Notice tone="caution" title={`Do not cut: ${current.letter} is out.`} className="mb-2">
-                Revision {letter} holds until {current.letter} is approved or withdrawn. {wayOn}
+                Revision {letter} stays the approved one, but wait until {current.letter} is approved or withdrawn.{" "}
+                {wayOn}
               </Notice>
             )}
             <Notice tone="done" title={`Revision ${letter} is approved.`}>

@@ -9,14 +9,21 @@ const looks: Readonly<Record<StandingTone, { readonly text: string; readonly mar
 };
 
 /** Where the revision stands, as a word and a drawn mark. */
-export function StandingWords({ standing }: { readonly standing: Standing }) {
+export function StandingWords({
+  standing,
+  isAlone = false,
+}: {
+  readonly standing: Standing;
+  /** Nothing beside it says "Approved by". */
+  readonly isAlone?: boolean;
+}) {
   const { text, mark } = looks[standing.tone];
   return (
     <span className={cx("font-semibold", text)}>
       <svg aria-hidden="true" viewBox="0 0 16 16" className="mr-1.5 inline-block size-3.5 align-[-0.1em]">
         <path d={mark} fill="none" stroke="currentColor" strokeWidth="1.7" strokeLinejoin="round" />
       </svg>
-      {standing.words}
+      {isAlone ? standing.alone : standing.words}
     </span>
   );
 }

@@ -2,30 +2,30 @@ import type { Revision, SheetView } from "#shared/contracts/revisions.ts";
 
 export type StandingTone = "waiting" | "ours" | "settled" | "quiet";
 
-/** What the title block's "Approved by" says, and how it is set. */
-export type Standing = { readonly words: string; readonly tone: StandingTone };
+/** What the title block's "Approved by" says, how it is set, and the same as a sentence of its own. */
+export type Standing = { readonly words: string; readonly alone: string; readonly tone: StandingTone };
 
 type Decided = Pick<Revision, "state" | "decision" | "letter">;
 
 /** Where a revision stands, as the reader is to be told. */
 export function standingOf(revision: Decided, reader: SheetView["reader"]): Standing {
+  const same = (words: string, tone: StandingTone): Standing => ({ words, alone: words, tone });
   switch (revision.state) {
-    case "approved":
-      return { words: revision.decision?.typedName ?? revision.decision?.by ?? "approved", tone: "settled" };
+    case "approved": {
+      const name = revision.decision?.typedName ?? revision.decision?.by ?? "the client";
+      return { words: name, alone: `approved by ${name}`, tone: "settled" };
+    }
     case "revision asked":
-      return { words: "a revision is asked for", tone: "ours" };
+      return same("a revision is asked for", "ours");
     case "superseded":
-      return { words: "nobody: superseded", tone: "quiet" };
     case "withdrawn":
-      return { words: "nobody: withdrawn", tone: "quiet" };
+      return { words: `nobody: ${revision.state}`, alone: revision.state, tone: "quiet" };
     case "issued":
-      if (reader.side === "shop") return { words: "waiting for the client", tone: "waiting" };
-      return reader.approver
-        ? { words: "waiting for you", tone: "waiting" }
-        : { words: "waiting for your approver", tone: "waiting" };
+      if (reader.side === "shop") return same("waiting for the client", "waiting");
+      return same(reader.approver ? "waiting for you" : "waiting for your approver", "waiting");
     case "draft":
     case "preparing":
-      return { words: "not out yet", tone: "quiet" };
+      return same("not out yet", "quiet");
   }
 }
 

@@ -10,7 +10,11 @@ it.each([
   { reader: colleague, words: "waiting for your approver" },
   { reader: maker, words: "waiting for the client" },
 ])("an issued revision tells $reader.name: $words", ({ reader, words }) => {
-  expect(standingOf({ state: "issued", decision: null, letter: "B" }, reader)).toEqual({ words, tone: "waiting" });
+  expect(standingOf({ state: "issued", decision: null, letter: "B" }, reader)).toEqual({
+    words,
+    alone: words,
+    tone: "waiting",
+  });
 });
 
 it("an approved revision shows the name that was typed, not the account's", () => {
@@ -24,6 +28,7 @@ it("an approved revision shows the name that was typed, not the account's", () =
   } as const;
   expect(standingOf({ state: "approved", decision, letter: "B" }, maker)).toEqual({
     words: "Cleo J. Marsh",
+    alone: "approved by Cleo J. Marsh",
     tone: "settled",
   });
 });
