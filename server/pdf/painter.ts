@@ -1,5 +1,4 @@
 import {
-  appendBezierCurve,
   beginText,
   clipEvenOdd,
   closePath,
@@ -7,41 +6,30 @@ import {
   drawObject,
   endPath,
   endText,
-  LineCapStyle,
-  LineJoinStyle,
   lineTo,
   moveTo,
-  PDFArray,
   PDFBool,
   PDFDocument,
   type PDFFont,
-  PDFHexString,
   type PDFImage,
   PDFName,
-  PDFNumber,
-  PDFOperator,
-  PDFOperatorNames,
+  type PDFOperator,
   type PDFPage,
   PDFStream,
   popGraphicsState,
   pushGraphicsState,
-  rgb,
-  setDashPattern,
   setFillingColor,
   setFontAndSize,
   setGraphicsState,
-  setLineCap,
-  setLineJoin,
   setLineWidth,
   setStrokingColor,
   setTextMatrix,
   stroke as strokePath,
 } from "pdf-lib";
 import { bytesOfBase64 } from "#shared/drawing/base64.ts";
-import type { Colour, DisplayList, Item, Stroke } from "#shared/drawing/display-list.ts";
-import { colourChannels } from "#shared/drawing/palette.ts";
-import type { Path } from "#shared/geometry/path.ts";
-import { embedCut, fontkit, glyphsOfRun, type Run, runsOfText, type SetGlyph } from "./fonts.ts";
+import type { DisplayList, Item } from "#shared/drawing/display-list.ts";
+import { embedCut, fontkit, glyphsOfRun, type Run, runsOfText } from "./fonts.ts";
+import { colourOf, lineItemOperators, pathItemOperators, pathOperators, saved, showGlyphs } from "./operators.ts";
 
 /** 72 points an inch (ISO 32000-1, 8.3.2.3). */
 export const pointsPerMm = 72 / 25.4;
@@ -51,33 +39,6 @@ type ImageItem = Extract<Item, { kind: "image" }>;
 
 /** Width a character that no font holds is given, and the box drawn in its place, in thousandths of the em. */
 const missingAdvance = 700;
-
-const colourOf = (colour: Colour) => {
-  const [red, green, blue] = colourChannels(colour);
-  return rgb(red / 255, green / 255, blue / 255);
-};
-
-function pathOperators(path: Path): PDFOperator[] {
-  return path.flatMap((ring) => [
-    moveTo(ring.start.x, ring.start.y),
-    ...ring.segments.map((segment) =>
-      segment.kind === "line"
-        ? lineTo(segment.to.x, segment.to.y)
-        : appendBezierCurve(segment.c1.x, segment.c1.y, segment.c2.x, segment.c2.y, segment.to.x, segment.to.y),
-    ),
-    closePath(),
-  ]);
-}
-
-function strokeOperators(stroke: Stroke): PDFOperator[] {
-  return [
-    setStrokingColor(colourOf(stroke.colour)),
-    setLineWidth(stroke.widthMm),
-    setLineCap(stroke.cap === "round" ? LineCapStyle.Round : LineCapStyle.Butt),
-    setLineJoin(LineJoinStyle.Round),
-    ...(stroke.dashMm === undefined ? [] : [setDashPattern([...stroke.dashMm], 0)]),
-  ];
-}
 
 /**
  * Writes display lists into one PDF document with operators of its own: pdf-lib's helpers fill by the nonzero rule only.
@@ -244,36 +205,4 @@ export class PdfPainter {
     }
     return [...operators, popGraphicsState()];
   }
-}
-
-const saved = (operators: readonly PDFOperator[]) => [pushGraphicsState(), ...operators, popGraphicsState()];
-
-function pathItemOperators(item: Extract<Item, { kind: "path" }>): PDFOperator[] {
-  const outline = pathOperators(item.path);
-  const fill =
-    item.fill === undefined
-      ? []
-      : [setFillingColor(colourOf(item.fill)), ...outline, PDFOperator.of(PDFOperatorNames.FillEvenOdd)];
-  const line = item.stroke === undefined ? [] : [...strokeOperators(item.stroke), ...outline, strokePath()];
-  return [...fill, ...line];
-}
-
-function lineItemOperators(item: Extract<Item, { kind: "line" }>): PDFOperator[] {
-  const points = item.points.map((point, index) => (index === 0 ? moveTo(point.x, point.y) : lineTo(point.x, point.y)));
-  return points.length < 2 ? [] : [...strokeOperators(item.stroke), ...points, strokePath()];
-}
-
-/** One TJ: the glyphs four hexadecimal digits each, with the kerning between them in thousandths of the em. */
-function showGlyphs(document: PDFDocument, encoded: PDFHexString, glyphs: readonly SetGlyph[]): PDFOperator {
-  const codes = encoded.asString();
-  const array = PDFArray.withContext(document.context);
-  let together = "";
-  for (const [index, { kern }] of glyphs.entries()) {
-    together += codes.slice(index * 4, index * 4 + 4);
-    if (Math.abs(kern) < 0.5 && index < glyphs.length - 1) continue;
-    array.push(PDFHexString.of(together));
-    if (index < glyphs.length - 1) array.push(PDFNumber.of(-Math.round(kern)));
-    together = "";
-  }
-  return PDFOperator.of(PDFOperatorNames.ShowTextAdjusted, [array]);
 }

@@ -11,7 +11,8 @@ import type { Figures } from "../stack/figures.ts";
 import type { Item } from "./display-list.ts";
 import { discRegion, drawCap, type PlacedStandoff } from "./hardware.ts";
 import { mixColours } from "./palette.ts";
-import { type Caster, shadowItem } from "./shadow.ts";
+import { shadowItem } from "./shadow.ts";
+import type { Caster } from "./shadow-sweep.ts";
 
 /** One thing of the picture: what draws it, what it covers and between which heights it stands. */
 type Solid = {

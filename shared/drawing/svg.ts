@@ -37,6 +37,11 @@ function strokeAttributes(stroke: Stroke): Record<string, string> {
   };
 }
 
+/** Fill and line let through one after the other, as the other painters do it, not as one picture. */
+function pathOpacity(opacity: number): Record<string, string> {
+  return { "fill-opacity": mmText(opacity), "stroke-opacity": mmText(opacity) };
+}
+
 /** Turns a display list into SVG elements, 1 user unit a millimetre. Ids of items become `data-id`. */
 export function svgTree(list: DisplayList, { idPrefix, title }: SvgOptions): SvgNode {
   let clips = 0;
@@ -57,7 +62,7 @@ export function svgTree(list: DisplayList, { idPrefix, title }: SvgOptions): Svg
               fill: item.fill ?? "none",
               "fill-rule": "evenodd",
               ...(item.stroke === undefined ? {} : strokeAttributes(item.stroke)),
-              ...(item.opacity === undefined ? {} : { opacity: mmText(item.opacity) }),
+              ...(item.opacity === undefined ? {} : pathOpacity(item.opacity)),
             },
             children: [],
           },

@@ -14,6 +14,7 @@ type DrawingSvgProps = {
 const reactNames: Readonly<Record<string, string>> = {
   "clip-path": "clipPath",
   "clip-rule": "clipRule",
+  "fill-opacity": "fillOpacity",
   "fill-rule": "fillRule",
   "font-family": "fontFamily",
   "font-size": "fontSize",
@@ -23,6 +24,7 @@ const reactNames: Readonly<Record<string, string>> = {
   "stroke-dasharray": "strokeDasharray",
   "stroke-linecap": "strokeLinecap",
   "stroke-linejoin": "strokeLinejoin",
+  "stroke-opacity": "strokeOpacity",
   "stroke-width": "strokeWidth",
   "text-anchor": "textAnchor",
 };

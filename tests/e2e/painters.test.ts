@@ -158,9 +158,12 @@ describe("one sheet by three painters at 150 dpi", () => {
     ["canvas", "svg"],
     ["svg", "pdf"],
     ["canvas", "pdf"],
-  ] as const)("has its text in the same places by %s and %s: at most one pixel in a hundred differs with it", (one, other) => {
-    expect(compare(one, other, false).share).toBeLessThanOrEqual(0.01);
-  });
+  ] as const)(
+    "has its text in the same places by %s and %s: at most one pixel in a hundred differs with it",
+    (one, other) => {
+      expect(compare(one, other, false).share).toBeLessThanOrEqual(0.01);
+    },
+  );
 
   it("is told apart from one without shadows", async () => {
     pictures.set("unlit", await svgPicture({ ...sheet, items: withoutShadows(sheet.items) }));

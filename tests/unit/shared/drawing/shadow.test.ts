@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { penumbraMm, shadowOffsetMm } from "#shared/drawing/light.ts";
-import { type Caster, shadowItem, shadowPlane } from "#shared/drawing/shadow.ts";
+import { shadowItem, shadowPlane } from "#shared/drawing/shadow.ts";
+import type { Caster } from "#shared/drawing/shadow-sweep.ts";
 import type { Box, Region } from "#shared/geometry/path.ts";
 
 const receiver: Box = { x: 0, y: 0, width: 200, height: 200 };

@@ -56,6 +56,7 @@ describe("paintSvg", () => {
     const path = parsed().querySelector("path[data-id]");
     expect(path?.getAttribute("data-id")).toBe('disc "1" <&>');
     expect(path?.getAttribute("fill-rule")).toBe("evenodd");
+    expect(path?.getAttribute("fill-opacity")).toBe("0.5");
     expect(path?.getAttribute("stroke-dasharray")).toBe("3 1.5");
   });
 
