@@ -1,0 +1,215 @@
+import * as account from "#shared/contracts/account.ts";
+import * as artworks from "#shared/contracts/artworks.ts";
+import * as clients from "#shared/contracts/clients.ts";
+import type { Endpoint } from "#shared/contracts/endpoint.ts";
+import * as jobs from "#shared/contracts/jobs.ts";
+import * as mockups from "#shared/contracts/mockups.ts";
+import * as notes from "#shared/contracts/notes.ts";
+import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
+import * as portfolio from "#shared/contracts/portfolio.ts";
+import * as revisions from "#shared/contracts/revisions.ts";
+import * as shop from "#shared/contracts/shop.ts";
+import * as stock from "#shared/contracts/stock.ts";
+import * as system from "#shared/contracts/system.ts";
+import type { PolicyWorld } from "./policy-world.ts";
+
+/** Who asks, in the order of the table's columns. */
+export const actors = [
+  "owner",
+  "maker",
+  "rep",
+  "approver",
+  "other contact",
+  "contact of another client",
+  "owner of another shop",
+  "contact of another shop",
+  "nobody",
+] as const;
+export type ActorName = (typeof actors)[number];
+
+/** y: may. n: sees it but may not (not_allowed). -: not found. o: asked to sign in. */
+export type Verdict = "y" | "n" | "-" | "o";
+
+export type PolicyRow = {
+  readonly endpoint: Endpoint;
+  /** A verdict an actor. */
+  readonly verdicts: string;
+  readonly given?: (world: PolicyWorld) => { params?: unknown; query?: unknown; body?: unknown };
+};
+
+const row = (endpoint: Endpoint, verdicts: string, given?: PolicyRow["given"]): PolicyRow =>
+  given ? { endpoint, verdicts, given } : { endpoint, verdicts };
+
+const anyone = "y y y y y y y y y";
+const signedIn = "y y y y y y y y o";
+const staff = "y y y - - - - - o";
+const staffOnVisible = "y y y n n - - - o";
+const insiders = "y y y y y y - - o";
+const owners = "y - - - - - - - o";
+const makers = "y y n - - - - - o";
+const makersOnVisible = "y y n n n - - - o";
+const readers = "y y y y y - - - o";
+const approvers = "n n n y n - - - o";
+
+const job = (world: PolicyWorld) => ({ params: { ...world.params, jobId: world.jobId } });
+const revision = (world: PolicyWorld) => ({ params: { ...world.params, revisionId: world.revisionId } });
+const artwork = (world: PolicyWorld) => ({ params: { ...world.params, artworkId: world.artworkId } });
+const inShop = (world: PolicyWorld) => ({ params: world.params });
+const unknownToken = "A".repeat(43);
+
+/** PRODUCT's "who may do what", a line a route. */
+export const policyTable: readonly PolicyRow[] = [
+  row(system.health, anyone),
+  row(system.ready, anyone),
+  row(system.openApi, anyone),
+  row(account.whoAmI, anyone),
+  row(account.registerShop, anyone, (world) => ({
+    body: {
+      shopName: "A shop",
+      name: "A person",
+      email: `new${world.next()}@people.example`,
+      password: "a long enough password",
+    },
+  })),
+  row(account.inspectLink, anyone, () => ({ body: { token: unknownToken } })),
+  row(account.sendFreshLink, anyone, () => ({ body: { token: unknownToken } })),
+  row(account.requestLink, anyone, () => ({ body: { email: "nobody@people.example" } })),
+  row(account.forgotPassword, anyone, () => ({ body: { email: "nobody@people.example" } })),
+  // Whoever holds a token may use it; one that was never made is not found, whoever asks.
+  row(account.acceptInvitation, "- - - - - - - - -", () => ({
+    body: { token: unknownToken, name: "A", password: "a long enough password" },
+  })),
+  row(account.resetPassword, "- - - - - - - - -", () => ({
+    body: { token: unknownToken, password: "a long enough password" },
+  })),
+  row(account.changeAccount, signedIn, (world) => ({ body: { name: `Name ${world.next()}` } })),
+  row(account.changePassword, signedIn, () => ({
+    body: { current: "not the password", password: "a long enough password" },
+  })),
+  row(account.listSessions, signedIn),
+  row(account.endSession, "- - - - - - - - o", (world) => ({ params: { sessionId: world.someoneElsesSessionId } })),
+
+  row(shop.getShop, insiders, inShop),
+  row(shop.changeShop, "y n n n n n - - o", (world) => ({ ...inShop(world), body: { paper: "A4" } })),
+  row(shop.listMembers, owners, inShop),
+  row(shop.listInvitations, owners, inShop),
+  row(shop.inviteMember, owners, (world) => ({
+    ...inShop(world),
+    body: { email: `invited${world.next()}@people.example`, role: "rep" },
+  })),
+  row(shop.revokeInvitation, owners, (world) => ({ params: { ...world.params, invitationId: world.invitationId } })),
+  row(shop.changeMember, owners, (world) => ({
+    params: { ...world.params, memberId: world.spareMemberId },
+    body: { role: "maker" },
+  })),
+  row(shop.removeMember, owners, (world) => ({ params: { ...world.params, memberId: world.spareMemberId } })),
+
+  row(clients.listClients, staff, inShop),
+  row(clients.getClient, staff, (world) => ({ params: { ...world.params, clientId: world.clientId } })),
+  row(clients.addClient, staff, (world) => ({ ...inShop(world), body: { name: `Client ${world.next()}` } })),
+  row(clients.changeClient, staff, (world) => ({
+    params: { ...world.params, clientId: world.clientId },
+    body: { remarks: "Early deliveries." },
+  })),
+  row(clients.addContact, staff, (world) => ({
+    params: { ...world.params, clientId: world.clientId },
+    body: { name: "A contact", email: `contact${world.next()}@people.example` },
+  })),
+  row(clients.changeContact, staff, (world) => ({
+    params: { ...world.params, contactId: world.spareContactId },
+    body: { name: "Another name" },
+  })),
+  row(clients.inviteContact, staff, (world) => ({ params: { ...world.params, contactId: world.spareContactId } })),
+  row(clients.removeContact, staff, (world) => ({
+    params: { ...world.params, contactId: world.contactIdsToRemove.pop() },
+  })),
+
+  row(outgoingMail.listOutgoingMail, owners, inShop),
+  row(outgoingMail.getOutgoingMail, owners, (world) => ({ params: { ...world.params, mailId: world.mailId } })),
+
+  row(jobs.listJobs, insiders, inShop),
+  row(jobs.getJob, readers, job),
+  row(jobs.openJob, "y y y n n n - - o", (world) => ({
+    ...inShop(world),
+    body: { clientId: world.clientId, title: "Another sign" },
+  })),
+  row(jobs.changeJob, staffOnVisible, (world) => ({ ...job(world), body: { title: "Lobby sign" } })),
+  row(jobs.moveJob, makersOnVisible, (world) => ({
+    params: { ...world.params, jobId: world.toMoveJobId },
+    body: { to: "cancelled" },
+  })),
+  row(jobs.setConsent, "n n n y y - - - o", (world) => ({ ...job(world), body: { given: true } })),
+  row(jobs.listEvents, staff, job),
+
+  row(artworks.listArtworks, staff, job),
+  row(artworks.addArtwork, makers, job),
+  row(artworks.getArtwork, staff, artwork),
+  row(artworks.getArtworkPieces, staff, artwork),
+  row(artworks.getArtworkFile, staff, artwork),
+  row(artworks.setTrueSize, makers, (world) => ({ ...artwork(world), body: { side: "width", lengthMm: 200 } })),
+  row(artworks.removeArtwork, makers, (world) => ({
+    params: { ...world.params, artworkId: world.artworkIdsToRemove.pop() },
+  })),
+
+  row(mockups.getMockup, staff, job),
+  row(mockups.saveMockup, makers, (world) => ({
+    params: { ...world.params, jobId: world.toSaveJobId },
+    body: { version: 0, document: world.document },
+  })),
+
+  row(revisions.listRevisions, readers, job),
+  row(revisions.issueRevision, makersOnVisible, (world) => ({ ...job(world), body: { mockupVersion: 1 } })),
+  row(revisions.getRevision, readers, revision),
+  row(revisions.getSheet, readers, revision),
+  row(revisions.getProof, readers, revision),
+  row(revisions.getPicture, readers, revision),
+  row(revisions.getCertificate, readers, (world) => ({
+    params: { ...world.params, revisionId: world.certifiedRevisionId },
+  })),
+  row(revisions.withdrawRevision, makersOnVisible, (world) => ({
+    params: { ...world.params, revisionId: world.toWithdrawRevisionId },
+    body: { reason: "Wrong size." },
+  })),
+  row(revisions.askForRevision, approvers, (world) => ({
+    params: { ...world.params, revisionId: world.toAskRevisionId },
+    body: { summary: "Wider." },
+  })),
+  row(revisions.approveRevision, approvers, (world) => ({
+    params: { ...world.params, revisionId: world.toApproveRevisionId },
+    body: { typedName: "A. Person", acknowledgedIds: world.acknowledgedIds, pdfSha256: world.toApprovePdfSha256 },
+  })),
+  row(revisions.compareRevisions, readers, (world) => ({
+    ...job(world),
+    query: { before: world.revisionId, after: world.revisionId },
+  })),
+
+  row(notes.listNotes, readers, revision),
+  row(notes.addNote, readers, (world) => ({
+    ...revision(world),
+    body: { text: "A little larger?", kind: "question", anchor: { on: "whole" } },
+  })),
+  row(notes.replyToNote, readers, (world) => ({
+    params: { ...world.params, noteId: world.noteId },
+    body: { text: "We can." },
+  })),
+  // Left by the approver, so only they settle it.
+  row(notes.setNoteState, approvers, (world) => ({
+    params: { ...world.params, noteId: world.noteId },
+    body: { state: "settled" },
+  })),
+
+  row(portfolio.listPortfolioPieces, staff, inShop),
+  row(portfolio.listShareLinks, staff, inShop),
+  row(portfolio.makeShareLink, "y n y - - - - - o", (world) => ({
+    ...inShop(world),
+    body: { label: "For a client", jobIds: [world.showableJobId] },
+  })),
+  row(portfolio.revokeShareLink, "y n y - - - - - o", (world) => ({
+    params: { ...world.params, linkId: world.spareShareLinkId },
+  })),
+  row(portfolio.openShareLink, anyone, (world) => ({ params: { token: world.liveShareToken } })),
+
+  row(stock.listStock, staff, inShop),
+];
+
+export const routeName = ({ method, path }: Endpoint): string => `${method} ${path}`;
