@@ -2,10 +2,11 @@ import { runMigrations } from "graphile-worker";
 import type { Sequelize } from "sequelize";
 import { SequelizeStorage, Umzug } from "umzug";
 import { connect } from "./connection.ts";
+import type { Migration } from "./migration.ts";
 import { migrations } from "./migrations/list.ts";
 
 /** Umzug over our migrations; each runs in a transaction of its own. */
-export function migrator(sequelize: Sequelize) {
+export function migrator(sequelize: Sequelize, steps: readonly Migration[] = migrations) {
   const within = (run: (sql: (text: string) => Promise<void>) => Promise<void>) =>
     sequelize.transaction((transaction) =>
       run(async (text) => {
@@ -13,7 +14,7 @@ export function migrator(sequelize: Sequelize) {
       }),
     );
   return new Umzug({
-    migrations: migrations.map(({ name, up, down }) => ({ name, up: () => within(up), down: () => within(down) })),
+    migrations: steps.map(({ name, up, down }) => ({ name, up: () => within(up), down: () => within(down) })),
     storage: new SequelizeStorage({ sequelize, tableName: "migrations" }),
     logger: undefined,
   });

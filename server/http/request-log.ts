@@ -3,6 +3,7 @@ import type { IncomingMessage, ServerResponse } from "node:http";
 import type { Request, RequestHandler } from "express";
 import type { Logger } from "pino";
 import { type Options, pinoHttp } from "pino-http";
+import { describeError } from "../log.ts";
 import { withoutSecrets } from "./without-secrets.ts";
 
 /**
@@ -17,14 +18,17 @@ export function requestLog(log: Logger): RequestHandler {
       response.setHeader("X-Request-Id", id);
       return id;
     },
+    // The library's own would add headers, and the statements in database errors.
+    wrapSerializers: false,
     serializers: {
-      req: ({ raw }: { raw: Request }) => ({
-        id: raw.id,
-        method: raw.method,
-        url: withoutSecrets(raw.originalUrl ?? raw.url),
-        from: raw.ip,
+      req: (request: Request) => ({
+        id: request.id,
+        method: request.method,
+        url: withoutSecrets(request.originalUrl ?? request.url),
+        from: request.ip,
       }),
-      res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
+      res: ({ statusCode }: ServerResponse) => ({ statusCode }),
+      err: describeError,
     },
     customLogLevel: (_request, response, error) => (error || response.statusCode >= 500 ? "error" : "info"),
     autoLogging: { ignore: (request) => /^\/(assets\/|api\/(health|ready)$)/.test(request.url ?? "") },
