@@ -8,6 +8,7 @@ import { ArtworkBudget } from "./budget.ts";
 import type { GuardedSvg } from "./guard-svg.ts";
 import type { ImportedArtwork } from "./imported-artwork.ts";
 import { clipLayer } from "./layer.ts";
+import { artworkLimits } from "./limits.ts";
 import { ArtworkRefused } from "./refusals.ts";
 import { readSvgElements } from "./svg-element.ts";
 import { readViewBox, viewportOf } from "./viewport.ts";
@@ -32,6 +33,8 @@ export function importDrawing(
   kernel: Kernel,
 ): ImportedArtwork {
   const { root, byId } = readSvgElements(simplified);
+  // The walk counts too, but a drawing of far too many paths need not be walked first.
+  if (simplified.split("<path ").length - 1 > artworkLimits.paths) throw new ArtworkRefused("svg.too-many-paths");
   const settled = readViewBox(root.attributes.viewBox);
   const viewport = settled && viewportOf(original.root, settled);
   if (!viewport) throw new ArtworkRefused("svg.no-size");

@@ -86,7 +86,8 @@ async function judgeSet({ folder, seed }: (typeof sets)[number]): Promise<Judged
   const sample = drawSample(names, filesPerSet, seed);
   const read = sample.map((file) => ({ file, original: readFileSync(join(path, file), "utf8") }));
   const outcomes: ImportOutcome[] = [];
-  for (const { original } of read) outcomes.push(await importSvg(new TextEncoder().encode(original)));
+  for (const { original } of read)
+    outcomes.push(await importSvg(new TextEncoder().encode(original), { timeMs: 60_000 }));
   const scores = await inkAgreements(
     browser,
     read.map(({ original }, index) => {
