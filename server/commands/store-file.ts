@@ -42,10 +42,12 @@ async function store(
   const id = newId();
   const storageKey = `${shopId}/${id}`;
   await keep(storageKey);
-  const [row] = await StoredFile.findOrCreate({
-    where: { shopId, sha256 },
-    defaults: { id, shopId, sha256, byteSize, mediaType, storageKey, createdAt: now },
+  // Not findOrCreate: it makes a temporary function, which the application's role may not.
+  await StoredFile.bulkCreate([{ id, shopId, sha256, byteSize, mediaType, storageKey, createdAt: now }], {
+    ignoreDuplicates: true,
     transaction,
   });
+  const row = await StoredFile.findOne({ where: { shopId, sha256 }, transaction });
+  if (!row) throw new Error("A stored file just made is not there.");
   return row;
 }
