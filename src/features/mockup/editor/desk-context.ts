@@ -12,6 +12,8 @@ export type Desk = {
   readonly selection: Selection;
   readonly unit: LengthUnit;
   readonly stock: StockChoices;
+  /** Where the sign will hang, as the brief says. */
+  readonly place: "inside" | "outside";
   /** Of the document, or of what it was a moment ago; null until they were first computed. */
   readonly figures: Figures | null;
   /** The document that the figures are of. */

@@ -1,56 +1,64 @@
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
+import { windowOfHole } from "#shared/dry-fit/rules/hole-window.ts";
+import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { boxCentre, boxOfRegion } from "#shared/geometry/box.ts";
 import { distanceToRegionEdgeMm, regionContains } from "#shared/geometry/contains.ts";
 import { flattenPath } from "#shared/geometry/flatten.ts";
 import type { Point, Region } from "#shared/geometry/path.ts";
 import { placeRegion } from "#shared/geometry/placement.ts";
 import { holeWindow } from "#shared/hardware/hole-window.ts";
-import type { CapStud, Hole, Layer } from "#shared/mockup/document.ts";
-import { coordinateOf, mostHoles } from "./limits.ts";
+import type { CapStud, Hold, Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
+import { coordinateOf, lengthOf, mostHoles } from "./limits.ts";
+import { withFields } from "./same.ts";
 
 /** Coarse: a proposal is looked at and moved, and a layer can have hundreds of pieces. */
 const flatnessMm = 0.2;
 /** How many places are tried on the way from a corner to the middle. */
 const tries = 60;
 
+/** What a hole's window depends on besides the layer: the board under it, and where the sign will hang. */
+export type Place = { readonly document: MockupDocument; readonly place: "inside" | "outside" };
+
 /**
  * Holes towards the four corners of each piece of a layer, as far out as the cap and the rule for holes near an edge
  * allow. A piece too small for four gets fewer; the first hole of the layer is the fixed one.
  */
-export function propose(layer: Layer, { hardware, id }: { hardware: CapStud; id: string }): Hole[] {
-  const { fixed, play } = holeDiameters(hardware);
-  const edge = Math.max(2 * play, hardware.capDiameter / 2 + 2, play / 2 + layer.thickness);
+export function propose(layer: Layer, { hardware, id, ...where }: { hardware: CapStud; id: string } & Place): Hole[] {
+  const { lower, upper } = holeWindow({ ...usual, ...passing(hardware), movement: 0 });
+  const widest = Math.max(lower, upper);
+  const edge = Math.max(2 * widest, hardware.capDiameter / 2 + 2, widest / 2 + layer.thickness);
   const apart = 2 * hardware.capDiameter;
-  const points = layer.pieces.flatMap((piece) =>
-    corners(placeRegion(flattenPath(piece.path, flatnessMm), piece.placement), edge, apart),
-  );
-  const places = points.map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) })).filter(isPoint);
-  return places.slice(0, mostHoles).map(({ x, y }, index) => ({
-    id: `${id}-${index + 1}`,
-    x,
-    y,
-    diameter: index === 0 ? fixed : play,
-    fixed: index === 0,
-  }));
+  const places = layer.pieces
+    .flatMap((piece) => corners(placeRegion(flattenPath(piece.path, flatnessMm), piece.placement), edge, apart))
+    .map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) }))
+    .filter(isPoint)
+    .slice(0, mostHoles)
+    .map(({ x, y }, index) => ({ id: `${id}-${index + 1}`, x, y, diameter: lower, fixed: index === 0 }));
+  return fitDiameters({ kind: "standoff", hardware, offset: hardware.barrelLength, holes: places }, where);
+}
+
+/**
+ * The holes of a layer with diameters in mm that have play and hide under the cap: the middle of each hole's window, to a
+ * tenth, and the least of it for the fixed one. Where no hole can do both it hides, and the dry fit says what is missing.
+ */
+export function fitDiameters(hold: Extract<Hold, { kind: "standoff" }>, { document, place }: Place): Hole[] {
+  const context = { ...usualContext, place };
+  return hold.holes.map((hole) => {
+    const { lower, upper } = windowOfHole(hold, hole, { document, limits: defaultLimits, context });
+    // The fixed hole holds the place, so it has the least play there is.
+    const wanted = hole.fixed ? lower : Math.round(((lower + upper) / 2) * 10) / 10;
+    return withFields(hole, { diameter: lengthOf(Math.min(upper, Math.max(lower, wanted))) ?? hole.diameter });
+  });
+}
+
+const usual = { placingError: defaultLimits.placingErrorMm, cover: defaultLimits.coverMm };
+
+function passing({ studDiameter, capDiameter, barrelDiameter }: CapStud) {
+  return { passing: studDiameter, cap: capDiameter, barrel: barrelDiameter };
 }
 
 function isPoint(place: { x: number | null; y: number | null }): place is Point {
   return place.x !== null && place.y !== null;
-}
-
-/**
- * Hole diameters in mm for a proposal, before the panel's movement is known: half a millimetre of play each side for the
- * fixed hole, and for the others the middle of what still hides under the cap with 1 mm of cover (common practice).
- */
-export function holeDiameters({ studDiameter, capDiameter, barrelDiameter }: CapStud): { fixed: number; play: number } {
-  const { lower, upper } = holeWindow({
-    passing: studDiameter,
-    cap: capDiameter,
-    barrel: barrelDiameter,
-    placingError: 0.5,
-    movement: 0,
-    cover: 1,
-  });
-  return { fixed: lower, play: Math.max(lower, Math.round(lower + upper) / 2) };
 }
 
 function corners(region: Region, edge: number, apart: number): Point[] {

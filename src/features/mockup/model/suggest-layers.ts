@@ -1,6 +1,7 @@
 import { type ColourMatch, nearestStock } from "#shared/colour/nearest-stock.ts";
 import type { Artwork } from "#shared/contracts/artworks.ts";
-import type { StockChoices } from "./stock-choices.ts";
+import type { Adhesive } from "#shared/mockup/document.ts";
+import { optionsOfHold, type StockChoices } from "./stock-choices.ts";
 
 /** What is proposed for one colour of an artwork: the nearest sheet, by its place in the stock list. */
 export type SuggestedLayer = {
@@ -39,4 +40,20 @@ export function suggestLayers(colours: Artwork["colours"], acrylics: StockChoice
         },
       ];
     });
+}
+
+/** Families in the order in which they are proposed: for acrylic on wood and for acrylic on acrylic (common practice). */
+const familiesFor = {
+  wood: ["epoxy", "neutral silicone", "cyanoacrylate", "high-bond tape"],
+  acrylic: ["bodied cement", "solvent cement", "epoxy"],
+} as const satisfies Record<string, readonly Adhesive["family"][]>;
+
+/** The place in `optionsOfHold` of the adhesive proposed for a layer bonded on wood or on acrylic; the first hold when none suits. */
+export function suggestHold(stock: StockChoices, on: keyof typeof familiesFor): number {
+  const options = optionsOfHold(stock);
+  for (const family of familiesFor[on]) {
+    const index = options.findIndex((option) => option.kind === "bond" && option.adhesive.family === family);
+    if (index >= 0) return index;
+  }
+  return 0;
 }

@@ -80,14 +80,20 @@ export function CellSelect({ className, children, ...select }: ComponentProps<"s
   );
 }
 
-/** A word to press in a cell or a bar. */
-export function WordButton({ className, type = "button", ...button }: ComponentProps<"button">) {
+type WordButtonProps = ComponentProps<"button"> & {
+  /** Within a sentence it is as high as its line. */
+  readonly inText?: boolean;
+};
+
+/** A word to press in a cell, a bar or a sentence. */
+export function WordButton({ className, type = "button", inText = false, ...button }: WordButtonProps) {
   return (
     <button
       {...button}
       type={type}
       className={cx(
-        "min-h-7 cursor-pointer rounded px-1 text-left font-sans text-sm text-indigo underline underline-offset-4 hover:bg-linen hover:text-ink disabled:cursor-not-allowed disabled:text-graphite disabled:no-underline",
+        "cursor-pointer rounded text-left font-sans text-sm text-indigo underline underline-offset-4 hover:bg-linen hover:text-ink disabled:cursor-not-allowed disabled:text-graphite disabled:no-underline",
+        inText ? "inline" : "min-h-7 px-1",
         className,
       )}
     />

@@ -1,5 +1,6 @@
 import { useQueryClient } from "@tanstack/react-query";
 import { useMemo, useState } from "react";
+import type { ColourMatch } from "#shared/colour/nearest-stock.ts";
 import type { Artwork } from "#shared/contracts/artworks.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { Checkbox } from "@/components/ui/checkbox.tsx";
@@ -12,22 +13,34 @@ import { newId } from "../editor/new-id.ts";
 import { bringInArtwork, type ColourChoice } from "../model/commands/bring-in-artwork.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { optionsOfHold, type StockChoices } from "../model/stock-choices.ts";
-import { type SuggestedLayer, suggestLayers } from "../model/suggest-layers.ts";
+import { type SuggestedLayer, suggestHold, suggestLayers } from "../model/suggest-layers.ts";
 import { Swatch } from "./cell-controls.tsx";
 import { type LayerChoice, LayerFields } from "./layer-fields.tsx";
 
-type Row = SuggestedLayer & LayerChoice & { readonly wanted: boolean; readonly solid: boolean };
+type Row = Omit<SuggestedLayer & LayerChoice, "hold"> & {
+  /** null until the hold was chosen by hand: it then follows what the layer will lie on. */
+  readonly hold: number | null;
+  readonly wanted: boolean;
+  readonly solid: boolean;
+};
+
+const matchWords: Record<ColourMatch, string> = {
+  same: "the same",
+  close: "close",
+  visible: "a visible difference",
+  "another colour": "another colour",
+};
 
 type ColourChoicesProps = { readonly shop: string; readonly artwork: Artwork; readonly onDone: () => void };
 
 /** The colours of one artwork with what is proposed for each. */
 export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
-  const { stock, edit } = useDesk();
+  const { stock, place, edit } = useDesk();
   const client = useQueryClient();
   const proposed = useMemo(
     () =>
       suggestLayers(artwork.colours, stock.acrylics).map(
-        (layer): Row => ({ ...layer, hold: 0, wanted: true, solid: false }),
+        (layer): Row => ({ ...layer, hold: null, wanted: true, solid: false }),
       ),
     [artwork.colours, stock.acrylics],
   );
@@ -35,6 +48,8 @@ export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
   const [busy, setBusy] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
   const wanted = rows.filter((row) => row.wanted);
+  const hasPlate = wanted.some((row) => row.solid);
+  const holdOf = (row: Row) => row.hold ?? suggestHold(stock, hasPlate && !row.solid ? "acrylic" : "wood");
 
   function change(colour: string, fields: Partial<Row>) {
     setRows((before) => before.map((row) => (row.colour === colour ? { ...row, ...fields } : row)));
@@ -48,12 +63,12 @@ export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
       // Solid plates lie under what is bonded on them.
       const choices = wanted
         .toSorted((a, b) => Number(b.solid) - Number(a.solid))
-        .flatMap((row) => choiceOf(row, stock));
+        .flatMap((row) => choiceOf(row, holdOf(row), stock));
       const id = newId();
       edit({
         label: `Bring in ${artwork.name}`,
         change: (before) =>
-          bringInArtwork(before, { artwork: { artworkId: artwork.id, widthMm, heightMm, pieces }, choices, id }),
+          bringInArtwork(before, { artwork: { artworkId: artwork.id, widthMm, heightMm, pieces }, choices, id, place }),
         choose: (after) => chooseLayer(after, after.layers.at(-1)?.key ?? ""),
       });
       onDone();
@@ -88,10 +103,12 @@ export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
               <>
                 <LayerFields
                   of={`of ${row.colour}`}
-                  choice={row}
-                  onChange={(choice) => change(row.colour, choice)}
+                  choice={{ ...row, hold: holdOf(row) }}
+                  onChange={({ sheet, thickness, hold }) =>
+                    change(row.colour, { sheet, thickness, ...(hold === holdOf(row) ? {} : { hold }) })
+                  }
                   {...(row.sheet === sheetOf(proposed, row.colour)
-                    ? { hint: `ΔE00 ${row.deltaE.toFixed(1)}, ${row.match}` }
+                    ? { hint: `${matchWords[row.match]}, ΔE00 ${row.deltaE.toFixed(1)}` }
                     : {})}
                 />
                 <Checkbox
@@ -124,9 +141,9 @@ function sheetOf(rows: readonly Row[], colour: string): number | undefined {
   return rows.find((row) => row.colour === colour)?.sheet;
 }
 
-function choiceOf(row: Row, stock: StockChoices): ColourChoice[] {
+function choiceOf(row: Row, holdIndex: number, stock: StockChoices): ColourChoice[] {
   const sheet = stock.acrylics[row.sheet];
-  const hold = optionsOfHold(stock)[row.hold];
+  const hold = optionsOfHold(stock)[holdIndex];
   if (!sheet || !hold) return [];
   const { colour, thickness, solid } = row;
   return [{ colour, thickness, solid, hold, stock: sheet.acrylic, name: sheet.acrylic.name }];

@@ -56,7 +56,7 @@ export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPane
               <span className="min-w-0 text-ink">
                 {finding.text}{" "}
                 {(finding.where !== null || finding.layerKey !== null) && (
-                  <WordButton className="min-h-0" aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>
+                  <WordButton inText aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>
                     Show
                   </WordButton>
                 )}

@@ -3,7 +3,7 @@ import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
-import { addHole, fixHole, proposeHoles, removeHole, setHole } from "../model/commands/holes.ts";
+import { addHole, fitHoles, fixHole, proposeHoles, removeHole, setHole } from "../model/commands/holes.ts";
 import { boxOfPieces } from "../model/commands/pieces.ts";
 import { chooseHole } from "../model/selection.ts";
 import { CellLength, WordButton } from "./cell-controls.tsx";
@@ -13,7 +13,7 @@ type HolesTableProps = { readonly layer: Layer; readonly hold: Extract<Hold, { k
 
 /** The standoff holes of a layer: where they are, how wide, and which one is fixed. */
 export function HolesTable({ layer, hold }: HolesTableProps) {
-  const { document, selection, edit, choose, unit } = useDesk();
+  const { document, selection, edit, choose, unit, place } = useDesk();
   const { key } = layer;
 
   function add() {
@@ -25,7 +25,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
     const id = newId();
     edit({
       label: `Add a hole to ${key}`,
-      change: (before) => addHole(before, { key, id, x: at.x + at.width / 2, y: at.y + at.height / 2 }),
+      change: (before) => addHole(before, { key, id, place, x: at.x + at.width / 2, y: at.y + at.height / 2 }),
       choose: (after) => chooseHole(after, id),
     });
   }
@@ -38,10 +38,18 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
         <WordButton
           onClick={() => {
             const id = newId();
-            edit({ label: `Propose holes in ${key}`, change: (before) => proposeHoles(before, { key, id }) });
+            edit({ label: `Propose holes in ${key}`, change: (before) => proposeHoles(before, { key, id, place }) });
           }}
         >
           Propose holes near the corners
+        </WordButton>
+        <WordButton
+          title="Wide enough to have play, narrow enough to hide under the cap"
+          onClick={() =>
+            edit({ label: `Fit the holes of ${key}`, change: (before) => fitHoles(before, { key, place }) })
+          }
+        >
+          Fit the diameters
         </WordButton>
       </div>
       {hold.holes.length === 0 ? (

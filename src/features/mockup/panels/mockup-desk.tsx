@@ -108,6 +108,7 @@ export function MockupDesk(props: MockupDeskProps) {
       selection: editor.selection,
       unit,
       stock,
+      place: whereItHangs,
       figures: made?.figures ?? null,
       figuresOf: made?.of ?? document,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
@@ -116,7 +117,7 @@ export function MockupDesk(props: MockupDeskProps) {
         dispatch({ kind: "choose", selection });
       },
     }),
-    [document, editor.selection, unit, stock, made],
+    [document, editor.selection, unit, stock, whereItHangs, made],
   );
 
   function show(next: Finding) {

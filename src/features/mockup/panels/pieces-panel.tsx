@@ -32,7 +32,7 @@ export function PiecesPanel() {
       {pieces.length === 0 ? (
         <p className="text-sm text-graphite">This layer has no pieces left. Remove it, or undo.</p>
       ) : (
-        <Table caption={`Pieces of ${key}`} className="max-h-80 overflow-y-auto">
+        <Table caption={`Places of the pieces of ${key}`} className="max-h-80 overflow-y-auto">
           <thead>
             <tr>
               {["Piece", `x, ${unit}`, `y, ${unit}`, "Turn, °", "Size, %"].map((head) => (

@@ -29,7 +29,7 @@ export function PlateDialog({ open, onOpenChange }: PlateDialogProps) {
 }
 
 function PlateForm({ onDone }: { readonly onDone: () => void }) {
-  const { document, stock, unit, edit } = useDesk();
+  const { document, stock, unit, place, edit } = useDesk();
   const half = Math.round(Math.min(document.board.width, document.board.height) / 2);
   const [kind, setKind] = useState<"circle" | "rectangle">("circle");
   const [name, setName] = useState("Plate");
@@ -56,7 +56,7 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
     edit({
       label: "Add a plate",
       change: (before) =>
-        addPlate(before, { shape, id, name, stock: sheet.acrylic, thickness: choice.thickness, hold }),
+        addPlate(before, { shape, id, place, name, stock: sheet.acrylic, thickness: choice.thickness, hold }),
       choose: (after) => chooseLayer(after, after.layers.at(-1)?.key ?? ""),
     });
     onDone();

@@ -108,7 +108,7 @@ export function RaiseHandle({ layer, figures, pxPerMm, pxOfDepth, pxOfHeight, dr
       <div
         role="slider"
         tabIndex={0}
-        aria-label={`Offset of ${key}, ${layer.name}`}
+        aria-label={`Raise ${key}, ${layer.name}`}
         aria-orientation="horizontal"
         aria-valuemin={0}
         aria-valuemax={mostOffsetMm}

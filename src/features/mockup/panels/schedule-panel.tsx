@@ -63,8 +63,11 @@ export function SchedulePanel({
       </Table>
       {document.layers.length === 0 && (
         <p className="py-4 text-base text-graphite">
-          Nothing is on the board yet. <WordButton onClick={onBringIn}>Bring in artwork</WordButton> to make a layer of
-          each of its colours, or add a plate.
+          Nothing is on the board yet.{" "}
+          <WordButton inText className="text-base" onClick={onBringIn}>
+            Bring in artwork
+          </WordButton>{" "}
+          to make a layer of each of its colours, or add a plate.
         </p>
       )}
       {figures !== null && (

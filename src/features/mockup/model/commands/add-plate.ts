@@ -3,6 +3,7 @@ import { circlePath, rectanglePath } from "#shared/geometry/shapes.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nextFreeKeys } from "../layer-key.ts";
 import { lengthOf, mostLayers, roundMm } from "../limits.ts";
+import type { Place } from "../propose-holes.ts";
 import { type NewLayer, newLayer } from "./new-layer.ts";
 
 export type PlateShape =
@@ -12,7 +13,7 @@ export type PlateShape =
 /** Adds a layer of one plate in the middle of the board, nearest the viewer. Impossible sizes add nothing. */
 export function addPlate(
   document: MockupDocument,
-  { shape, id, ...layer }: NewLayer & { shape: PlateShape; id: string },
+  { shape, id, place, ...layer }: NewLayer & { shape: PlateShape; id: string; place: Place["place"] },
 ): MockupDocument {
   const path = pathOf(shape);
   const [key] = nextFreeKeys(document, 1);
@@ -30,7 +31,10 @@ export function addPlate(
       mirrored: false,
     },
   };
-  return { ...document, layers: [...document.layers, newLayer(key, layer, [piece], `${id}-h`)] };
+  return {
+    ...document,
+    layers: [...document.layers, newLayer(layer, { key, pieces: [piece], id: `${id}-h`, document, place })],
+  };
 }
 
 function pathOf(shape: PlateShape): Path | null {

@@ -1,24 +1,32 @@
 import type { Point } from "#shared/geometry/path.ts";
 import type { Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
 import { coordinateOf, lengthOf, mostHoles } from "../limits.ts";
-import { holeDiameters, propose } from "../propose-holes.ts";
+import { fitDiameters, type Place, propose } from "../propose-holes.ts";
 import { isSame, withFields } from "../same.ts";
 import { changeLayer, changeLayers } from "./change-layer.ts";
 
-/** Puts a hole into a standoff layer. The first one is the fixed one. */
+type Where = { readonly key: string; readonly place: Place["place"] };
+
+/** Puts a hole into a standoff layer, as wide as its window asks for. The first one is the fixed one. */
 export function addHole(
   document: MockupDocument,
-  { key, id, x, y }: { key: string; id: string } & Point,
+  { key, id, x, y, place }: Where & { id: string } & Point,
 ): MockupDocument {
   const holeX = coordinateOf(x);
   const holeY = coordinateOf(y);
   if (holeX === null || holeY === null) return document;
-  return changeHoles(document, key, (holes, hardware) => {
-    if (holes.length >= mostHoles) return holes;
-    const { fixed, play } = holeDiameters(hardware);
-    const first = holes.length === 0;
-    return [...holes, { id, x: holeX, y: holeY, diameter: first ? fixed : play, fixed: first }];
+  return changeHoles(document, key, (hold) => {
+    if (hold.holes.length >= mostHoles) return hold.holes;
+    const added = { id, x: holeX, y: holeY, diameter: hold.hardware.studDiameter, fixed: hold.holes.length === 0 };
+    const holes = [...hold.holes, added];
+    const fitted = fitDiameters({ ...hold, holes }, { document, place }).at(-1) ?? added;
+    return [...hold.holes, fitted];
   });
+}
+
+/** Gives every hole of a layer a diameter that has play and hides under the cap, where there is one. */
+export function fitHoles(document: MockupDocument, { key, place }: Where): MockupDocument {
+  return changeHoles(document, key, (hold) => fitDiameters(hold, { document, place }));
 }
 
 /** Sets a hole's place and diameter in mm. */
@@ -26,7 +34,7 @@ export function setHole(
   document: MockupDocument,
   { holeId, ...fields }: { holeId: string; x?: number; y?: number; diameter?: number },
 ): MockupDocument {
-  return changeHolesOfAll(document, (holes) =>
+  return changeHolesOfAll(document, ({ holes }) =>
     holes.map((hole) =>
       hole.id === holeId
         ? withFields(hole, {
@@ -41,7 +49,7 @@ export function setHole(
 
 /** Takes a hole out. When it was the fixed one, the next hole of the layer becomes it. */
 export function removeHole(document: MockupDocument, { holeId }: { holeId: string }): MockupDocument {
-  return changeHolesOfAll(document, (holes) => {
+  return changeHolesOfAll(document, ({ holes }) => {
     const left = holes.filter((hole) => hole.id !== holeId);
     const [first, ...rest] = left;
     if (left.length === holes.length || !first || left.some((hole) => hole.fixed)) return left;
@@ -51,7 +59,7 @@ export function removeHole(document: MockupDocument, { holeId }: { holeId: strin
 
 /** Makes one hole of a layer the fixed one, from which the others move. */
 export function fixHole(document: MockupDocument, { holeId }: { holeId: string }): MockupDocument {
-  return changeHolesOfAll(document, (holes) =>
+  return changeHolesOfAll(document, ({ holes }) =>
     holes.some((hole) => hole.id === holeId)
       ? holes.map((hole) => withFields(hole, { fixed: hole.id === holeId }))
       : holes,
@@ -59,14 +67,14 @@ export function fixHole(document: MockupDocument, { holeId }: { holeId: string }
 }
 
 /** Replaces a layer's holes by ones towards the corners of its pieces, with ids made from `id`. */
-export function proposeHoles(document: MockupDocument, { key, id }: { key: string; id: string }): MockupDocument {
-  return changeLayer(document, key, (layer) => withHoles(layer, (_, hardware) => propose(layer, { hardware, id })));
+export function proposeHoles(document: MockupDocument, { key, id, place }: Where & { id: string }): MockupDocument {
+  return changeLayer(document, key, (layer) =>
+    withHoles(layer, ({ hardware }) => propose(layer, { hardware, id, document, place })),
+  );
 }
 
-type ChangeHoles = (
-  holes: readonly Hole[],
-  hardware: Extract<Layer["hold"], { kind: "standoff" }>["hardware"],
-) => readonly Hole[];
+type Standoffs = Extract<Layer["hold"], { kind: "standoff" }>;
+type ChangeHoles = (hold: Standoffs) => readonly Hole[];
 
 function changeHoles(document: MockupDocument, key: string, change: ChangeHoles): MockupDocument {
   return changeLayer(document, key, (layer) => withHoles(layer, change));
@@ -78,6 +86,6 @@ function changeHolesOfAll(document: MockupDocument, change: ChangeHoles): Mockup
 
 function withHoles(layer: Layer, change: ChangeHoles): Layer {
   if (layer.hold.kind !== "standoff") return layer;
-  const holes = change(layer.hold.holes, layer.hold.hardware);
+  const holes = change(layer.hold);
   return isSame(holes, layer.hold.holes) ? layer : { ...layer, hold: { ...layer.hold, holes: [...holes] } };
 }

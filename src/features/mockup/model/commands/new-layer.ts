@@ -1,6 +1,6 @@
-import type { Acrylic, Adhesive, CapStud, Hold, Layer, Piece } from "#shared/mockup/document.ts";
+import type { Acrylic, Adhesive, CapStud, Layer, Piece } from "#shared/mockup/document.ts";
 import { nameOf } from "../limits.ts";
-import { propose } from "../propose-holes.ts";
+import { type Place, propose } from "../propose-holes.ts";
 
 /** How a new layer is to be held: what it is bonded with, or what it stands on. */
 export type HoldChoice =
@@ -15,7 +15,10 @@ export type NewLayer = {
 };
 
 /** A layer from what was chosen for it. Hole ids are made from `id`. */
-export function newLayer(key: string, { name, stock, thickness, hold }: NewLayer, pieces: Piece[], id: string): Layer {
+export function newLayer(
+  { name, stock, thickness, hold }: NewLayer,
+  { key, pieces, id, ...where }: { key: string; pieces: Piece[]; id: string } & Place,
+): Layer {
   const bare: Layer = {
     key,
     name: nameOf(name) ?? `Layer ${key}`,
@@ -29,12 +32,6 @@ export function newLayer(key: string, { name, stock, thickness, hold }: NewLayer
     pieces,
     hidden: false,
   };
-  if (hold.kind === "bond") return bare;
-  const held: Hold = {
-    kind: "standoff",
-    hardware: hold.hardware,
-    offset: hold.hardware.barrelLength,
-    holes: propose(bare, { hardware: hold.hardware, id }),
-  };
-  return { ...bare, hold: held };
+  if (hold.kind === "bond" || bare.hold.kind !== "standoff") return bare;
+  return { ...bare, hold: { ...bare.hold, holes: propose(bare, { hardware: hold.hardware, id, ...where }) } };
 }

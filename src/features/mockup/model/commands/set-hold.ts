@@ -1,6 +1,6 @@
 import type { Adhesive, CapStud, MockupDocument } from "#shared/mockup/document.ts";
 import { mostOffsetMm, roundMm } from "../limits.ts";
-import { propose } from "../propose-holes.ts";
+import { type Place, propose } from "../propose-holes.ts";
 import { isSame, withFields } from "../same.ts";
 import { changeLayer } from "./change-layer.ts";
 
@@ -22,13 +22,13 @@ export function bondLayer(
  */
 export function standLayer(
   document: MockupDocument,
-  { key, hardware, id }: { key: string; hardware: CapStud; id: string },
+  { key, hardware, id, place }: { key: string; hardware: CapStud; id: string; place: Place["place"] },
 ): MockupDocument {
   return changeLayer(document, key, (layer) => {
     const offset = hardware.barrelLength;
     if (layer.hold.kind === "standoff")
       return withFields(layer, { hold: withFields(layer.hold, { hardware, offset }) });
-    const holes = propose(layer, { hardware, id });
+    const holes = propose(layer, { hardware, id, document, place });
     return { ...layer, hold: { kind: "standoff", hardware, offset, holes }, locate: "hole pattern" };
   });
 }

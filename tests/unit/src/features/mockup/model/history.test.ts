@@ -49,6 +49,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
         (document, id) =>
           addPlate(document, {
             shape: round ? { kind: "circle", diameter: width } : { kind: "rectangle", width, height },
+            place: "inside",
             id,
             name,
             stock: sheet,
@@ -89,6 +90,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
             hold: { kind: "bond", adhesive: cement },
             solid,
           })),
+          place: "inside",
           id,
         }),
   ),
@@ -140,7 +142,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
   fc.record({ key, hardware }).map(
     (args): Edit =>
       (document, id) =>
-        standLayer(document, { ...args, id }),
+        standLayer(document, { ...args, place: "inside", id }),
   ),
   key.map(
     (layerKey): Edit =>
@@ -155,7 +157,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
   fc.record({ key, x: number, y: number }).map(
     (args): Edit =>
       (document, id) =>
-        addHole(document, { ...args, id }),
+        addHole(document, { ...args, place: "inside", id }),
   ),
   fc.record({ pick: fc.nat(5), x: number, diameter: number }).map(
     ({ pick, ...to }): Edit =>
@@ -175,7 +177,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
   key.map(
     (layerKey): Edit =>
       (document, id) =>
-        proposeHoles(document, { key: layerKey, id }),
+        proposeHoles(document, { key: layerKey, place: "inside", id }),
   ),
   fc
     .record({

@@ -13,6 +13,7 @@ import { barrel, brass, cement, emptyMockup, midnight } from "../sample-mockup.t
 
 const disc = addPlate(emptyMockup(), {
   shape: { kind: "circle", diameter: 200 },
+  place: "inside",
   id: "disc",
   name: "Disc",
   stock: midnight,
@@ -21,6 +22,7 @@ const disc = addPlate(emptyMockup(), {
 });
 const document = addPlate(disc, {
   shape: { kind: "circle", diameter: 40 },
+  place: "inside",
   id: "sun",
   name: "Sun",
   stock: brass,
