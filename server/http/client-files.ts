@@ -1,8 +1,21 @@
+import type { ServerResponse } from "node:http";
 import { join, resolve } from "node:path";
 import express, { Router } from "express";
 import type { Environment } from "../env.ts";
 
 const loopbackNames = new Set(["localhost", "127.0.0.1", "[::1]"]);
+
+/**
+ * The geometry kernel's glue makes functions from text when it loads. That is allowed inside its own worker alone, which has no
+ * page, no cookies to read and nothing to fetch but its code; pages stay under the strict policy.
+ */
+function allowKernel(response: ServerResponse, path: string): void {
+  if (!/[\\/]engine\.worker-[\w-]+\.js$/.test(path)) return;
+  response.setHeader(
+    "Content-Security-Policy",
+    "default-src 'none'; script-src 'self' 'wasm-unsafe-eval' 'unsafe-eval'; connect-src 'self'",
+  );
+}
 
 /** The built browser application: hashed files for a year, and its one page for every address that is not a file. */
 export function clientFiles({ CLIENT_DIR, PUBLIC_URL }: Pick<Environment, "CLIENT_DIR" | "PUBLIC_URL">): Router {
@@ -16,7 +29,15 @@ export function clientFiles({ CLIENT_DIR, PUBLIC_URL }: Pick<Environment, "CLIEN
     if (strays && request.method === "GET") return response.redirect(302, home.origin + request.originalUrl);
     next();
   });
-  router.use("/assets", express.static(join(root, "assets"), { immutable: true, maxAge: "1y", fallthrough: false }));
+  router.use(
+    "/assets",
+    express.static(join(root, "assets"), {
+      immutable: true,
+      maxAge: "1y",
+      fallthrough: false,
+      setHeaders: allowKernel,
+    }),
+  );
   router.use(express.static(root, { index: false, maxAge: "1h" }));
   router.get(/^(?!\/(?:api|auth)(?:\/|$)).*/, (_request, response) => {
     response.setHeader("Cache-Control", "no-store");
