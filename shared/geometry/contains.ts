@@ -19,11 +19,6 @@ export function ringContains(ring: Polygon, { x, y }: Point): boolean {
   return inside;
 }
 
-/** Whether a point is on an edge of the ring, within `toleranceMm`. */
-export function ringTouches(ring: Polygon, point: Point, toleranceMm: number): boolean {
-  return distanceToRingMm(ring, point) <= toleranceMm;
-}
-
 /** Shortest distance in mm from a point to the edges of a region, inside or out; Infinity for an empty one. */
 export function distanceToRegionEdgeMm(region: Region, point: Point): number {
   return region.reduce((least, ring) => Math.min(least, distanceToRingMm(ring, point)), Number.POSITIVE_INFINITY);

@@ -11,9 +11,6 @@ import {
   translateMatrix,
 } from "./transform.ts";
 
-/** Where a piece is when nothing has been done to it. */
-export const identityPlacement: Placement = { x: 0, y: 0, turn: 0, scale: 1, mirrored: false };
-
 /** The map from a piece's own plane to the board: mirrored left to right, scaled, turned clockwise, then moved. */
 export function placementMatrix({ x, y, turn, scale, mirrored }: Placement): Matrix {
   const sized = scaleMatrix(mirrored ? -scale : scale, scale);
