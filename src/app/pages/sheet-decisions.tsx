@@ -1,6 +1,7 @@
 import { lazy, Suspense, useState } from "react";
 import type { Note } from "#shared/contracts/notes.ts";
 import type { Revision, SheetView } from "#shared/contracts/revisions.ts";
+import { asksAtApproval, waitsOnShop } from "#shared/lifecycle/note-states.ts";
 import { DecisionButtons } from "@/features/decisions/components/decision-buttons.tsx";
 import { StandingWords } from "@/features/sheet/components/standing-words.tsx";
 import { standingOf } from "@/features/sheet/model/standing.ts";
@@ -29,8 +30,6 @@ export function SheetDecisions({ shop, revision, sheet, notes, proofAddress, isD
   const [open, setOpen] = useState<"approve" | "ask" | null>(null);
   const pathOfSheet = (revisionId: string) => paths.sheet(shop, revisionId);
   const close = () => setOpen(null);
-  const asking = notes.filter(({ state, kind, shopOnly }) => state !== "settled" && kind !== "fine as is" && !shopOnly);
-  const openNotes = asking.filter(({ kind, state }) => kind === "must change" && state === "open");
 
   function handleDecided() {
     close();
@@ -61,7 +60,7 @@ export function SheetDecisions({ shop, revision, sheet, notes, proofAddress, isD
             shop={shop}
             revision={revision}
             sheet={sheet}
-            openNotes={openNotes}
+            openNotes={notes.filter(asksAtApproval)}
             proofAddress={proofAddress}
             pathOfSheet={pathOfSheet}
             onClose={close}
@@ -74,7 +73,7 @@ export function SheetDecisions({ shop, revision, sheet, notes, proofAddress, isD
             shop={shop}
             shopName={sheet.job.shopName}
             revision={revision}
-            openNotes={asking.filter(({ state, side }) => state === "open" && side === "client")}
+            openNotes={notes.filter(waitsOnShop)}
             pathOfSheet={pathOfSheet}
             onClose={close}
             onAsked={handleDecided}

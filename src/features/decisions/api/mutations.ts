@@ -1,24 +1,33 @@
 import { useMutation, useQueryClient } from "@tanstack/react-query";
 import { approveRevision, askForRevision, type Revision } from "#shared/contracts/revisions.ts";
-import { call } from "@/lib/api-client.ts";
+import { ApiProblem, call } from "@/lib/api-client.ts";
+import { keys } from "@/lib/query-keys.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
 import type { Approval } from "../model/approval.ts";
 
-function useDecisionLanding(shop: string) {
+function useDecisionLanding(shop: string, { id }: Pick<Revision, "id">) {
   const client = useQueryClient();
-  return (revision: Revision) => {
-    client.setQueryData(revisionKeys.revision(shop, revision.id), revision);
-    // A decision settles notes, and moves the job wherever it is listed.
-    return Promise.all([
-      client.invalidateQueries({ queryKey: revisionKeys.notes(shop, revision.id) }),
-      client.invalidateQueries({ queryKey: ["shop", shop, "job"] }),
-      client.invalidateQueries({ queryKey: ["shop", shop, "jobs"] }),
-    ]);
+  const read = (queryKey: readonly unknown[]) => client.invalidateQueries({ queryKey });
+  return {
+    onSuccess: (revision: Revision) => {
+      client.setQueryData(revisionKeys.revision(shop, id), revision);
+      // A decision settles notes, and moves the job wherever it is listed.
+      return Promise.all([
+        read(revisionKeys.notes(shop, id)),
+        read(keys.job(shop, revision.jobId)),
+        read(keys.jobs(shop)),
+      ]);
+    },
+    // What stood in the way happened meanwhile: another letter, another note. The page must show it.
+    onError: (error: Error) =>
+      error instanceof ApiProblem && error.code === "wrong_state"
+        ? Promise.all([read(revisionKeys.notes(shop, id)), read(revisionKeys.revision(shop, id))])
+        : undefined,
   };
 }
 
 export function useApprove(shop: string, revision: Pick<Revision, "id">) {
-  const onSuccess = useDecisionLanding(shop);
+  const landing = useDecisionLanding(shop, revision);
   return useMutation({
     mutationFn: ({
       acknowledgedIds,
@@ -37,15 +46,15 @@ export function useApprove(shop: string, revision: Pick<Revision, "id">) {
           consentToPortfolio,
         },
       }),
-    onSuccess,
+    ...landing,
   });
 }
 
 export function useAskForRevision(shop: string, revision: Pick<Revision, "id">) {
-  const onSuccess = useDecisionLanding(shop);
+  const landing = useDecisionLanding(shop, revision);
   return useMutation({
     mutationFn: (summary: string) =>
       call(askForRevision, { params: { shop, revisionId: revision.id }, body: { summary } }),
-    onSuccess,
+    ...landing,
   });
 }

@@ -29,6 +29,7 @@ export function ApproveDialog(props: ApproveDialogProps) {
   const [tried, setTried] = useState(false);
   const approve = useApprove(shop, revision);
   const form = useRef<HTMLFormElement>(null);
+  const isSent = useRef(false);
   const errorId = useId();
   const { pdfSha256 } = revision;
   const asked = { acknowledgements: sheet.acknowledgements, notes: openNotes };
@@ -42,15 +43,24 @@ export function ApproveDialog(props: ApproveDialogProps) {
 
   function handleSubmit(event: FormEvent) {
     event.preventDefault();
-    // The Enter key sends a form whose button is busy.
-    if (approve.isPending) return;
+    // A second press or the Enter key can come before the button is drawn as busy.
+    if (isSent.current) return;
     setTried(true);
     if (stopped || pdfSha256 === null) return;
     if (!isComplete(gaps)) {
       requestAnimationFrame(() => form.current?.querySelector<HTMLElement>("[aria-invalid]")?.focus());
       return;
     }
-    approve.mutate({ ...approval, typedName: approval.typedName.trim(), pdfSha256 }, { onSuccess: onApproved });
+    isSent.current = true;
+    approve.mutate(
+      { ...approval, typedName: approval.typedName.trim(), pdfSha256 },
+      {
+        onSuccess: onApproved,
+        onError: () => {
+          isSent.current = false;
+        },
+      },
+    );
   }
 
   return (

@@ -1,4 +1,4 @@
-import { type FormEvent, useState } from "react";
+import { type FormEvent, useRef, useState } from "react";
 import type { Revision } from "#shared/contracts/revisions.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { Dialog } from "@/components/ui/dialog.tsx";
@@ -23,19 +23,24 @@ type AskDialogProps = {
 export function AskDialog({ shop, shopName, revision, openNotes, pathOfSheet, onClose, onAsked }: AskDialogProps) {
   const [summary, setSummary] = useSessionText(`standproud:ask:${revision.id}`);
   const [tried, setTried] = useState(false);
+  const isSent = useRef(false);
   const ask = useAskForRevision(shop, revision);
   const isMissing = openNotes.length === 0 && summary.trim() === "";
 
   function handleSubmit(event: FormEvent) {
     event.preventDefault();
-    // The Enter key sends a form whose button is busy.
-    if (ask.isPending) return;
+    // A second press can come before the button is drawn as busy.
+    if (isSent.current) return;
     setTried(true);
     if (isMissing) return;
+    isSent.current = true;
     ask.mutate(summary, {
       onSuccess: () => {
         setSummary("");
         onAsked();
+      },
+      onError: () => {
+        isSent.current = false;
       },
     });
   }

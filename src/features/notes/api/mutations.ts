@@ -1,6 +1,7 @@
 import { type InfiniteData, useMutation, useQueryClient } from "@tanstack/react-query";
 import { addNote, type Note, replyToNote, setNoteState } from "#shared/contracts/notes.ts";
 import { call } from "@/lib/api-client.ts";
+import { keys } from "@/lib/query-keys.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
 import type { NoteDraft } from "../model/note-draft.ts";
 import { noteQueries } from "./queries.ts";
@@ -33,6 +34,7 @@ function useNoteLanding(shop: string, revisionId: string) {
     return Promise.all([
       client.invalidateQueries({ queryKey: revisionKeys.notes(shop, revisionId) }),
       client.invalidateQueries({ queryKey: revisionKeys.revision(shop, revisionId) }),
+      client.invalidateQueries({ queryKey: keys.jobs(shop) }),
     ]);
   };
 }

@@ -30,6 +30,7 @@ export function NoteComposer(props: NoteComposerProps) {
   const [tried, setTried] = useState(false);
   const add = useAddNote(shop, revisionId);
   const form = useRef<HTMLFormElement>(null);
+  const isSent = useRef(false);
   const headingId = useId();
   const gaps: DraftGaps = tried ? draftGaps(draft) : {};
   const hasSpot = draft.anchor?.on === "spot";
@@ -41,7 +42,8 @@ export function NoteComposer(props: NoteComposerProps) {
 
   function handleSubmit(event: FormEvent) {
     event.preventDefault();
-    if (add.isPending) return;
+    // A second press can come before the button is drawn as busy.
+    if (isSent.current) return;
     setTried(true);
     const { kind, anchor } = draft;
     if (kind === null || anchor === null || Object.keys(draftGaps(draft)).length > 0) {
@@ -49,11 +51,15 @@ export function NoteComposer(props: NoteComposerProps) {
       requestAnimationFrame(() => form.current?.querySelector<HTMLElement>("[aria-invalid]")?.focus());
       return;
     }
+    isSent.current = true;
     add.mutate(
       { ...draft, kind, anchor },
       {
         onSuccess: (note) =>
           onAdded(note.id, `Note ${note.number} is on the drawing${note.zone === null ? "" : `, zone ${note.zone}`}.`),
+        onError: () => {
+          isSent.current = false;
+        },
       },
     );
   }

@@ -1,4 +1,4 @@
-import { type FormEvent, useState } from "react";
+import { type FormEvent, useRef, useState } from "react";
 import type { Note } from "#shared/contracts/notes.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
@@ -18,17 +18,23 @@ type ReplyFormProps = {
 export function ReplyForm({ shop, revisionId, note, onDone }: ReplyFormProps) {
   const [text, setText] = useSessionText(`standproud:reply:${note.id}`);
   const [isEmpty, setEmpty] = useState(false);
+  const isSent = useRef(false);
   const reply = useReplyToNote(shop, revisionId, note.id);
 
   function handleSubmit(event: FormEvent) {
     event.preventDefault();
-    if (reply.isPending) return;
+    // A second press can come before the button is drawn as busy.
+    if (isSent.current) return;
     setEmpty(text.trim() === "");
     if (text.trim() === "") return;
+    isSent.current = true;
     reply.mutate(text, {
       onSuccess: () => {
         setText("");
         onDone();
+      },
+      onError: () => {
+        isSent.current = false;
       },
     });
   }

@@ -3,18 +3,22 @@ import { getRevision, getSheet, type Revision } from "#shared/contracts/revision
 import { call } from "@/lib/api-client.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
 
-const pollMs = 2000;
+const preparingPollMs = 2000;
+const certificatePollMs = 5000;
 
 /** A revision whose PDF is not stored yet, so that there is no sheet to show. */
 export const isUnready = ({ state }: Pick<Revision, "state">): boolean => state === "preparing" || state === "draft";
 
 export const sheetQueries = {
-  /** Asked again while it is being prepared. */
+  /** Asked again while its PDF or, once it is approved, its certificate is being made. */
   revision: (shop: string, revisionId: string) =>
     queryOptions({
       queryKey: revisionKeys.revision(shop, revisionId),
       queryFn: ({ signal }) => call(getRevision, { params: { shop, revisionId }, signal }),
-      refetchInterval: ({ state }) => (state.data?.state === "preparing" ? pollMs : false),
+      refetchInterval: ({ state: { data } }) => {
+        if (data?.state === "preparing") return preparingPollMs;
+        return data?.state === "approved" && data.decision?.hasCertificate === false ? certificatePollMs : false;
+      },
     }),
   sheet: (shop: string, revisionId: string) =>
     queryOptions({
