@@ -3,12 +3,20 @@ import { readFileSync } from "node:fs";
 import { setTimeout as pause } from "node:timers/promises";
 import { errorCode } from "./problem.mjs";
 
-/** @type {Set<import("node:child_process").ChildProcess>} */
-const running = new Set();
+const interruptPatienceMs = 5_000;
 
-/** Asks every program that run() is waiting for to end; each run() then resolves with its code. */
+/** @type {Set<import("node:child_process").ChildProcess>} */
+const interruptible = new Set();
+
+/**
+ * Asks every program that run() is waiting for to end, and kills after five seconds what did not: npm, for one, goes
+ * on for minutes on a slow disk. Each run() then resolves with its code. Programs that run apart finish their work.
+ */
 export function interruptRunning() {
-  for (const child of running) child.kill("SIGTERM");
+  const children = [...interruptible];
+  for (const child of children) child.kill("SIGTERM");
+  const late = () => children.filter((child) => interruptible.has(child)).map((child) => child.kill("SIGKILL"));
+  setTimeout(late, interruptPatienceMs).unref();
 }
 
 /**
@@ -36,14 +44,14 @@ export function run(command, args, { cwd, env = process.env, input, shown = fals
     const output = shown ? "inherit" : "pipe";
     const stdin = input === undefined ? "ignore" : "pipe";
     const child = spawn(command, args, { cwd, env, detached: apart, stdio: [stdin, output, output] });
-    running.add(child);
+    if (!apart) interruptible.add(child);
     /** @type {Buffer[]} */
     const written = [];
     child.stdout?.on("data", (chunk) => written.push(chunk));
     child.stderr?.on("data", (chunk) => written.push(chunk));
     child.on("error", (error) => resolve({ code: 127, output: `${command}: ${error.message}\n` }));
     child.on("close", (code) => {
-      running.delete(child);
+      interruptible.delete(child);
       resolve({ code: code ?? 128, output: Buffer.concat(written).toString("utf8") });
     });
     // A program that ends without reading its input closes the pipe; its exit code tells that story.
