@@ -164,7 +164,7 @@ function keptAttributes(
       // A link of an `a` leads somewhere but draws nothing.
       if (element === "a") continue;
       if (staysInside(value)) kept.set("xlink:href", value);
-      else warnings.add("reference.outside");
+      else warnings.add(element === "image" && /^\s*data:/i.test(value) ? "image.left-out" : "reference.outside");
       continue;
     }
     if (name === "xml:space") kept.set(name, value);

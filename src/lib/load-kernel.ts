@@ -5,7 +5,10 @@ import type { Kernel } from "#shared/geometry/kernel.ts";
 
 let loading: Promise<Kernel> | undefined;
 
-/** The geometry kernel in the browser, fetched once per page; a failed fetch is tried again at the next call. */
+/**
+ * The geometry kernel in the browser, fetched once; a failed fetch is tried again at the next call. Its glue makes functions
+ * from text, which the pages' content policy forbids: load it in the engine's worker only.
+ */
 export function loadKernel(): Promise<Kernel> {
   loading ??= createClipper({ locateFile: () => wasmUrl })
     .then(clipperKernel)

@@ -86,6 +86,10 @@ describe("references", () => {
       text: " a { fill: url(#g); mask: none }",
       found: true,
     });
+    expect(withoutOutsideUrls("@font-face { src: url(data:font/woff2;base64,AAAA) }")).toEqual({
+      text: "@font-face { src: none }",
+      found: false,
+    });
     expect(withoutOutsideUrls("fill:url( '#g' )")).toEqual({ text: "fill:url( '#g' )", found: false });
   });
 });
