@@ -29,6 +29,7 @@ export function presentShop(
       seeClients: clientPolicy.list(actor),
       seeStock: stockPolicy.see(actor),
       seePortfolio: portfolioPolicy.see(actor),
+      sharePortfolio: portfolioPolicy.share(actor),
       seeOutgoingMail: shopPolicy.seeOutgoingMail(actor, { shopId, keepsMail }),
     },
   };

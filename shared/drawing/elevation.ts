@@ -9,6 +9,7 @@ import type { DisplayList, Item } from "./display-list.ts";
 import { dimensionMargins, drawElevationDimensions } from "./elevation-dimensions.ts";
 import { drawSolids, drawWallShadow } from "./elevation-pieces.ts";
 import { placedStandoffs } from "./hardware.ts";
+import { shadowOffsetMm } from "./light.ts";
 import { mixColours, sheetWhite } from "./palette.ts";
 import { woodGrain } from "./wood-grain.ts";
 
@@ -32,6 +33,14 @@ export const boardPlaneId = "board-plane";
 
 /** Share of the longer side that is left around a sign without dimensions. */
 const bareMargin = 0.09;
+
+/** Room around a sign without dimensions: a share of its longer side, or what the board's shadow on the wall needs if that is more. */
+function bareMarginMm({ document, figures }: Pick<ElevationInput, "document" | "figures">): number {
+  const { board, hanging, presentation } = document;
+  const longer = Math.max(board.width, board.height);
+  const fall = shadowOffsetMm(figures.backerTop.nominal + hanging.gap, presentation.light);
+  return Math.max(longer * bareMargin, Math.min(fall * 1.35, longer / 2));
+}
 
 /** Where the board's upper left corner lies in a picture made by `drawElevation` or `drawSection`; null in any other. */
 export function boardOriginOf(list: DisplayList): Point | null {
@@ -64,7 +73,7 @@ export function drawElevation(input: ElevationInput): DisplayList {
   const { document, figures, kernel, dimensions, paperScale, wall } = input;
   const { width, height } = document.board;
   const box = { x: 0, y: 0, width, height };
-  const bare = Math.max(width, height) * bareMargin;
+  const bare = bareMarginMm(input);
   const margins = dimensions ? dimensionMargins(input) : { left: bare, top: bare, right: bare, bottom: bare };
   const widthMm = margins.left + width + margins.right;
   const heightMm = margins.top + height + margins.bottom;

@@ -18,6 +18,7 @@ export function PortfolioPage() {
       title="Portfolio"
       under="Approved pieces to show to the next client, behind a link that ends by itself."
       actions={
+        can.sharePortfolio &&
         chosen === null &&
         url === null && (
           <Button kind="primary" onClick={() => setChosen([])}>
@@ -46,7 +47,7 @@ export function PortfolioPage() {
           <h2 id="links" className="mb-3 font-serif text-lg font-bold">
             Links
           </h2>
-          <LinkList shop={slug} />
+          <LinkList shop={slug} mayClose={can.sharePortfolio} />
         </section>
       </div>
     </Page>

@@ -4,7 +4,7 @@ import { paths } from "@/app/paths.ts";
 import { LetterMark, type MarkTone } from "@/components/ui/letter-mark.tsx";
 import { cx } from "@/lib/cx.ts";
 import { daysUntil, formatDue, formatInstant } from "@/lib/format.ts";
-import { BoardMark } from "./board-mark.tsx";
+import { SignPicture } from "./sign-picture.tsx";
 
 const toneOf = ({ whoseMove, state }: BenchRow): MarkTone =>
   whoseMove === "nobody"
@@ -22,7 +22,7 @@ export function JobRow({ job, shop }: { readonly job: BenchRow; readonly shop: s
     <li className="relative border-b border-rule hover:bg-linen">
       <div className="grid grid-cols-[1fr_auto] items-center gap-x-4 gap-y-1 py-3 lg:grid-cols-[104px_5.5rem_minmax(0,1.3fr)_minmax(0,1.6fr)_minmax(0,1fr)_7.5rem] lg:gap-x-5 lg:px-1">
         <div className="hidden lg:block">
-          <BoardMark name={job.client.name} />
+          <SignPicture shop={shop} revisionId={job.latest?.revisionId ?? null} name={job.client.name} />
         </div>
         <p className="font-serif text-sm font-bold text-ink tabular-nums">{job.number}</p>
         <p className="order-first col-span-2 min-w-0 lg:order-none lg:col-span-1">

@@ -3,13 +3,13 @@ import type { BenchRow } from "#shared/contracts/jobs.ts";
 import { paths } from "@/app/paths.ts";
 import { LetterMark } from "@/components/ui/letter-mark.tsx";
 import { formatDay } from "@/lib/format.ts";
-import { BoardMark } from "./board-mark.tsx";
+import { SignPicture } from "./sign-picture.tsx";
 
 /** One of the client's own jobs, in plain words. */
 export function SignCard({ job, shop }: { readonly job: BenchRow; readonly shop: string }) {
   return (
     <li className="relative flex gap-4 border-b border-rule py-4 hover:bg-linen">
-      <BoardMark name={job.title} />
+      <SignPicture shop={shop} revisionId={job.latest?.revisionId ?? null} name={job.title} />
       <div className="min-w-0">
         <Link
           to={paths.job(shop, job.id)}

@@ -20,7 +20,7 @@ const stateWords = ({ state, expiresAt }: ShareLink): string =>
   state === "live" ? `open until ${formatDay(expiresAt)}` : state === "expired" ? "run out" : "closed";
 
 /** Links made so far: for whom, what they show, how often they were opened. */
-export function LinkList({ shop }: { readonly shop: string }) {
+export function LinkList({ shop, mayClose }: { readonly shop: string; readonly mayClose: boolean }) {
   const [closing, setClosing] = useState<ShareLink | null>(null);
   const links = useInfiniteQuery(shareLinksQuery(shop));
   const revoke = useRevokeShareLink(shop);
@@ -55,7 +55,7 @@ export function LinkList({ shop }: { readonly shop: string }) {
                   : "not opened yet"}
               </p>
             </div>
-            {link.state === "live" && (
+            {mayClose && link.state === "live" && (
               <Button
                 size="small"
                 kind="danger"

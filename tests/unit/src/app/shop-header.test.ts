@@ -8,6 +8,7 @@ const all = {
   seeClients: true,
   seeStock: true,
   seePortfolio: true,
+  sharePortfolio: true,
   seeOutgoingMail: true,
 };
 const shop = { slug: "s", name: "S", unit: "mm", jobPrefix: "S", paper: "A4", demo: false, can: all } as const;
