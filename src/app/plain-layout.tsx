@@ -16,7 +16,7 @@ export function PlainLayout() {
       <header className="border-b border-rule px-4 py-1 sm:px-6">
         <Wordmark />
       </header>
-      <main className="mx-auto w-full max-w-2xl sm:px-4 sm:py-12">
+      <main tabIndex={-1} className="mx-auto w-full max-w-2xl sm:px-4 sm:py-12">
         <div className="relative sm:border sm:border-ink sm:bg-sheet sm:p-1.5">
           {marks.map((mark) => (
             <span key={mark} aria-hidden="true" className={`absolute hidden bg-ink sm:block ${mark}`} />

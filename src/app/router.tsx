@@ -5,8 +5,10 @@ import { NotFoundScreen } from "./not-found-screen.tsx";
 import { paths } from "./paths.ts";
 import { PlainLayout } from "./plain-layout.tsx";
 import { ShopLayout } from "./shop-layout.tsx";
+import { useFocusOnMove } from "./use-focus-on-move.ts";
 
 function Root() {
+  useFocusOnMove();
   return (
     <>
       <ScrollRestoration />

@@ -59,7 +59,15 @@ export function JobPage() {
           <div className="min-w-0 space-y-10">
             {job.state === "brief" && brief}
             <RevisionList shop={slug} jobId={jobId} side={side} />
-            <ArtworkPart shop={slug} jobId={jobId} unit={shop.unit} mayAdd={job.can.editMockup || job.can.editBrief} />
+            {/* A client sees artwork only while the brief is theirs to fill in. */}
+            {(staff || job.can.editBrief) && (
+              <ArtworkPart
+                shop={slug}
+                jobId={jobId}
+                unit={shop.unit}
+                mayAdd={job.can.editMockup || job.can.editBrief}
+              />
+            )}
             {job.state !== "brief" && brief}
           </div>
           <div className="min-w-0 space-y-8">

@@ -7,6 +7,7 @@ import { LengthField } from "@/components/ui/length-field.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { Select } from "@/components/ui/select.tsx";
 import { TextArea } from "@/components/ui/text-area.tsx";
+import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
 import { ApproverChoice } from "./approver-choice.tsx";
 import { DistanceField } from "./distance-field.tsx";
 import { useBriefForm } from "./use-brief-form.ts";
@@ -31,6 +32,7 @@ export function BriefForm({
   const inBrief = errors.brief;
   return (
     <form noValidate onSubmit={handleSubmit} className="space-y-4">
+      <UnsavedGuard when={isDirty && !busy} what="The brief" />
       {problem && <Notice tone="error">{problem}</Notice>}
       {side === "shop" && (
         <div className="grid gap-4 sm:grid-cols-[minmax(0,1fr)_12rem]">
