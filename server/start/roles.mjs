@@ -23,8 +23,16 @@ alter role ${role} login nosuperuser nocreatedb nocreaterole nobypassrls norepli
 
 /** SQL for psql that makes the database when it is missing; only the two roles may enter it. */
 export const databaseSql = `select 'create database ${databaseName} owner ${ownerRole}' where not exists (select from pg_database where datname = '${databaseName}') \\gexec
-revoke all on database ${databaseName} from public;
-grant connect on database ${databaseName} to ${appRole};`;
+${databaseRightsSql(databaseName)}`;
+
+/**
+ * SQL that lets only the two roles into a database. The application's role may make temporary objects there: Sequelize
+ * finds or creates a row by a function of the session's own.
+ * @param {string} database a plain name
+ */
+export function databaseRightsSql(database) {
+  return `revoke all on database ${database} from public; grant connect, temporary on database ${database} to ${appRole};`;
+}
 
 /**
  * The address of a database on loopback.

@@ -127,6 +127,7 @@ describe.each(starters)("the durable cluster, started by %s", (starter) => {
       { rolname: "standproud_app", ...plain },
       { rolname: "standproud_owner", ...plain },
     ]);
+    await query(started.appUrl, "create temporary table short_lived (id int)");
     await expect(query(started.appUrl, "create table mine (id int)")).rejects.toThrow(
       "permission denied for schema public",
     );

@@ -1,5 +1,5 @@
 import { randomBytes } from "node:crypto";
-import { appRole, ownerRole } from "#server/start/roles.mjs";
+import { appRole, databaseRightsSql, ownerRole } from "#server/start/roles.mjs";
 import { runOnCluster, templateName, testUrl } from "./template-database.ts";
 
 export type TestDatabase = {
@@ -25,7 +25,11 @@ export async function createTestDatabase({ poolMax = 1 }: { poolMax?: number } =
     );
   }
   const name = `test_${randomBytes(8).toString("hex")}`;
-  await runOnCluster(clusterUrl, [`create database ${name} template ${templateName} owner ${ownerRole}`]);
+  await runOnCluster(clusterUrl, [
+    `create database ${name} template ${templateName} owner ${ownerRole}`,
+    // A copy keeps the rights on everything inside it, but not those on the database itself.
+    databaseRightsSql(name),
+  ]);
   return {
     ownerUrl: testUrl(clusterUrl, ownerRole, name),
     appUrl: testUrl(clusterUrl, appRole, name),

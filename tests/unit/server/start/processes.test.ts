@@ -12,10 +12,11 @@ it("collects what a program writes, on both streams, and its code", async () => 
 });
 
 it("passes input and exactly the environment it was given", async () => {
-  const script = 'process.stdin.on("data", (d) => process.stdout.write(`${d}|${process.env.A}|${process.env.HOME}`));';
+  const script =
+    'process.stdin.on("data", (d) => process.stdout.write([d, process.env.A, process.env.HOME ?? "none"].join("|")));';
   expect(await run(...node(script), { input: "words", env: { A: "1" } })).toEqual({
     code: 0,
-    output: "words|1|undefined",
+    output: "words|1|none",
   });
 });
 
