@@ -10,6 +10,7 @@ const no = {
   seeClients: false,
   seeStock: false,
   seePortfolio: false,
+  sharePortfolio: false,
   seeOutgoingMail: false,
 };
 const shop: Shop = {
