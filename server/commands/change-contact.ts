@@ -1,6 +1,7 @@
 import type { Context } from "../http/context.ts";
 import type { Contact } from "../models/contact.ts";
 import { findContact } from "../queries/find-client.ts";
+import { refuseMoreMail } from "../queries/has-enough-mail.ts";
 import { refuseSecond } from "./add-contact.ts";
 import { endSessionsWithoutPlace } from "./end-sessions.ts";
 import { findOrCreatePerson } from "./find-or-create-person.ts";
@@ -55,6 +56,7 @@ export async function removeContact(context: Context, contactId: string): Promis
 export async function inviteContact(context: Context, contactId: string): Promise<void> {
   const { id, shopId, personId, name, person } = await findContact(context, contactId);
   const address = person?.email ?? "";
+  await refuseMoreMail(context, address, "sign in link");
   await queueMail(context, { kind: "sign in link", address, shopId, recipientId: personId, data: { contactId: id } });
   await logEvent(context, { shopId, kind: "contact sent a link", data: { name } });
 }

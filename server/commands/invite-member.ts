@@ -6,6 +6,7 @@ import { Invitation } from "../models/invitation.ts";
 import { Membership } from "../models/membership.ts";
 import { Person } from "../models/person.ts";
 import { Shop } from "../models/shop.ts";
+import { refuseMoreMail } from "../queries/has-enough-mail.ts";
 import { killLinks } from "./kill-links.ts";
 import { logEvent } from "./log-event.ts";
 import { queueMail } from "./queue-mail.ts";
@@ -31,6 +32,7 @@ export async function inviteMember(
     ? await open.update(facts, { transaction })
     : await Invitation.create({ id: newId(), shopId, email, ...facts }, { transaction });
   await killLinks(context, { invitationId: invitation.id });
+  await refuseMoreMail(context, email, "invitation");
   await queueMail(context, { kind: "invitation", address: email, shopId, data: { invitationId: invitation.id } });
   await logEvent(context, { shopId, kind: "member invited", data: { email, role } });
   return invitation;

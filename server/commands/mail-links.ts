@@ -1,22 +1,20 @@
-import { Op, type Transaction } from "sequelize";
+import type { Transaction } from "sequelize";
 import { tokenHash } from "../auth/tokens.ts";
 import { Contact } from "../models/contact.ts";
 import { Invitation } from "../models/invitation.ts";
 import { OneTimeLink } from "../models/one-time-link.ts";
-import { type MailKind, OutgoingMail } from "../models/outgoing-mail.ts";
+import { OutgoingMail } from "../models/outgoing-mail.ts";
 import { Person } from "../models/person.ts";
+import { hasEnoughMail } from "../queries/has-enough-mail.ts";
 import { killLinks } from "./kill-links.ts";
 import { queueMail } from "./queue-mail.ts";
 
 type At = { readonly now: Date; readonly transaction: Transaction };
 
-/** How many mails of one kind an address gets in an hour, however often somebody asks. */
-const mailsAnHour = 5;
-
 /** Mails a sign-in link to the contact of an address, one for each shop they are a contact of. None when unknown. */
 export async function mailSignInLinks(at: At, email: string): Promise<void> {
   const person = await Person.findOne({ where: { email }, transaction: at.transaction });
-  if (!person || (await hasEnough(at, email, "sign in link"))) return;
+  if (!person || (await hasEnoughMail(at, email, "sign in link"))) return;
   const contacts = await Contact.findAll({
     where: { personId: person.id, endedAt: null },
     order: ["createdAt", "id"],
@@ -31,7 +29,7 @@ export async function mailSignInLinks(at: At, email: string): Promise<void> {
 /** Mails a link that sets a new password. Nothing when the address is unknown. */
 export async function mailPasswordLink(at: At, email: string): Promise<void> {
   const person = await Person.findOne({ where: { email }, transaction: at.transaction });
-  if (!person || (await hasEnough(at, email, "new password"))) return;
+  if (!person || (await hasEnoughMail(at, email, "new password"))) return;
   const data = { personId: person.id };
   await queueMail(at, { kind: "new password", address: email, shopId: null, recipientId: person.id, data });
 }
@@ -64,7 +62,8 @@ async function freshSignIn(at: At, link: OneTimeLink): Promise<void> {
       include: [{ model: Person, as: "person" }],
       transaction,
     }));
-  if (!contact || contact.person?.email !== link.address || (await hasEnough(at, link.address, "sign in link"))) return;
+  if (!contact || contact.person?.email !== link.address || (await hasEnoughMail(at, link.address, "sign in link")))
+    return;
   await OneTimeLink.update(
     { killedAt: at.now },
     { where: { contactId: contact.id, goTo: link.goTo ?? null, spentAt: null, killedAt: null }, transaction },
@@ -88,7 +87,7 @@ async function freshInvitation(at: At, { invitationId, address }: OneTimeLink): 
       where: { id: invitationId, email: address, acceptedAt: null, revokedAt: null },
       transaction: at.transaction,
     }));
-  if (!invitation || (await hasEnough(at, address, "invitation"))) return;
+  if (!invitation || (await hasEnoughMail(at, address, "invitation"))) return;
   await killLinks(at, { invitationId: invitation.id });
   await queueMail(at, {
     kind: "invitation",
@@ -96,10 +95,4 @@ async function freshInvitation(at: At, { invitationId, address }: OneTimeLink): 
     shopId: invitation.shopId,
     data: { invitationId: invitation.id },
   });
-}
-
-async function hasEnough({ now, transaction }: At, address: string, kind: MailKind): Promise<boolean> {
-  const since = new Date(now.getTime() - 3_600_000);
-  const sent = await OutgoingMail.count({ where: { address, kind, createdAt: { [Op.gt]: since } }, transaction });
-  return sent >= mailsAnHour;
 }

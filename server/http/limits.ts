@@ -14,7 +14,7 @@ const byAccount = (request: Request): string => {
 
 const limits = {
   signIn: { minutes: 15, times: 30, by: byAddress },
-  account: { minutes: 15, times: 20, by: byAccount },
+  account: { minutes: 15, times: 50, by: byAccount },
   register: { minutes: 60, times: 10, by: byAddress },
   links: { minutes: 15, times: 60, by: byAddress },
   mails: { minutes: 15, times: 15, by: byAddress },

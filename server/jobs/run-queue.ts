@@ -1,5 +1,5 @@
 import { EventEmitter } from "node:events";
-import { Logger as QueueLogger, run, type TaskList, type WorkerEvents } from "graphile-worker";
+import { type JobHelpers, Logger as QueueLogger, run, type TaskList, type WorkerEvents } from "graphile-worker";
 import pg from "pg";
 import type { Logger } from "pino";
 import { appDatabaseUrl } from "../env.ts";
@@ -10,6 +10,8 @@ import type { JobName } from "./queue.ts";
 import { type Task, tasks } from "./tasks.ts";
 
 const concurrency = 2;
+/** What the queue tells of jobs is said below in our own words, so here it is for finding faults in the queue itself. */
+const levels = { error: "error", warning: "warn", info: "debug", debug: "trace" } as const;
 
 export type RunningQueue = {
   /** Takes no more jobs, finishes those it has, and lets go. */
@@ -25,6 +27,11 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
   pool.on("error", lost);
   pool.on("connect", (client) => client.on("error", lost));
   const events: WorkerEvents = new EventEmitter();
+  events.on("job:error", ({ job, error }) => {
+    const fields = { err: error, task: job.task_identifier, attempt: job.attempts, of: job.max_attempts };
+    if (job.attempts >= job.max_attempts) log.error(fields, "A job failed for good");
+    else log.warn(fields, "A job failed and will be tried again");
+  });
   const presence = await freeJobsOfTheDead({ connectionString, events, log });
   const runner = await run({
     pgPool: pool,
@@ -33,15 +40,8 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
     pollInterval: 2_000,
     parsedCronItems: [],
     taskList: taskListOf(services, log),
-    logger: new QueueLogger(
-      () => (level, message) => log[level === "warning" ? "warn" : level](withoutSecrets(message)),
-    ),
+    logger: new QueueLogger(() => (level, message) => log[levels[level]](withoutSecrets(message))),
     events,
-  });
-  events.on("job:error", ({ job, error }) => {
-    const fields = { err: error, task: job.task_identifier, attempt: job.attempts, of: job.max_attempts };
-    if (job.attempts >= job.max_attempts) log.error(fields, "A job failed for good");
-    else log.warn(fields, "A job failed and will be tried again");
   });
   return {
     async stop() {
@@ -57,10 +57,10 @@ export function taskListOf(services: Services, log: Logger): TaskList {
   return Object.fromEntries(
     Object.entries(tasks).map(([name, task]) => [
       name,
-      async (payload: unknown) => {
+      async (payload: unknown, { job }: JobHelpers) => {
         const began = performance.now();
         // The queue's payloads are only ever written by enqueue(), which checks them by type.
-        await (task as Task<JobName>)(services, payload as never);
+        await (task as Task<JobName>)(services, payload as never, { isLast: job.attempts >= job.max_attempts });
         log.info({ task: name, payload, ms: Math.round(performance.now() - began) }, "A job is done");
       },
     ]),

@@ -162,7 +162,7 @@ describe("what can't be read", () => {
 
 describe("rate limits", () => {
   it.each([
-    { path: "/auth/callback/password", body: { email: "a@b.example", password: "x" }, times: 20 },
+    { path: "/auth/callback/password", body: { email: "a@b.example", password: "x" }, times: 30 },
     { path: "/api/register", body: {}, times: 10 },
     { path: "/api/links/request", body: {}, times: 15 },
     { path: "/api/links/inspect", body: {}, times: 60 },

@@ -27,36 +27,17 @@ async function aboutRevision({ data, shopId }: OutgoingMail, transaction: Transa
 
 const titleOf = ({ job }: About): string => `“${job.title}” (${job.number})`;
 
-/** To an approver, with a link that signs in and leads to the sheet. Not sent when the revision was withdrawn meanwhile. */
+/** To an approver. */
 export async function proofIssued(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
-  const found = await recipientContact(mail, transaction);
   const about = await aboutRevision(mail, transaction);
-  if (!found || !about || !visibleToClient(about.revision.state)) return null;
-  const { contact } = found;
+  if (!about) return null;
   const { revision, shop } = about;
-  return {
-    greeting: contact.name,
-    sender: shop.name,
-    letter: {
-      subject: `Revision ${revision.letter} of ${titleOf(about)} is ready to look at`,
-      paragraphs: [`${shop.name} has drawn revision ${revision.letter} of ${titleOf(about)} for you.`],
-      ...(revision.message ? { quote: revision.message } : {}),
-      after: [
-        "Look at it closely, leave notes at the very spot, and then approve it or ask for a revision.",
-        linkRemarks["sign in"],
-      ],
-    },
-    button: {
-      label: "Open the sheet",
-      leadsTo: {
-        purpose: "sign in",
-        hours: linkHours["sign in"],
-        contactId: contact.id,
-        personId: contact.personId,
-        goTo: pages.sheet(shop.slug, revision.id),
-      },
-    },
-  };
+  return toContact(mail, transaction, about, {
+    subject: `Revision ${revision.letter} of ${titleOf(about)} is ready to look at`,
+    paragraphs: [`${shop.name} has drawn revision ${revision.letter} of ${titleOf(about)} for you.`],
+    ...(revision.message ? { quote: revision.message } : {}),
+    after: ["Look at it closely, leave notes at the very spot, and then approve it or ask for a revision."],
+  });
 }
 
 export async function revisionAsked(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
@@ -89,7 +70,10 @@ export async function noteAdded(mail: OutgoingMail, transaction: Transaction): P
   const { noteId } = mail.data;
   const note = about && noteId && (await Note.findOne({ where: { id: noteId, shopId: about.shop.id }, transaction }));
   if (!about || !note) return null;
-  return toStaff(mail, transaction, about, {
+  const isForClient = mail.data.contactId !== undefined;
+  if (isForClient && note.shopOnly) return null;
+  const write = isForClient ? toContact : toStaff;
+  return write(mail, transaction, about, {
     subject: `Note ${note.number} on ${titleOf(about)}, revision ${about.revision.letter}`,
     paragraphs: [
       `${note.authorName} left note ${note.number} on revision ${about.revision.letter} of ${titleOf(about)}.`,
@@ -97,6 +81,33 @@ export async function noteAdded(mail: OutgoingMail, transaction: Transaction): P
     quote: note.text,
     after: [],
   });
+}
+
+/** With a link that signs in and leads to the sheet. Not once the revision was withdrawn, or the contact is none any more. */
+async function toContact(
+  mail: OutgoingMail,
+  transaction: Transaction,
+  { revision, shop }: About,
+  letter: Draft["letter"],
+): Promise<Draft | null> {
+  const found = await recipientContact(mail, transaction);
+  if (!found || !visibleToClient(revision.state)) return null;
+  const { contact } = found;
+  return {
+    greeting: contact.name,
+    sender: shop.name,
+    letter: { ...letter, after: [...letter.after, linkRemarks["sign in"]] },
+    button: {
+      label: "Open the sheet",
+      leadsTo: {
+        purpose: "sign in",
+        hours: linkHours["sign in"],
+        contactId: contact.id,
+        personId: contact.personId,
+        goTo: pages.sheet(shop.slug, revision.id),
+      },
+    },
+  };
 }
 
 /** Staff sign in with a password, so their mails lead to the plain page. Only to someone still on the team. */
