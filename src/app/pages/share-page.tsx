@@ -19,7 +19,7 @@ export function SharePage() {
   if (book.data) return <PlateBook book={book.data} />;
   const { error } = book;
   if (error instanceof ApiProblem && closedCodes.has(error.code)) {
-    return <ClosedBook hasRunOut={error.code === "link_expired"} />;
+    return <ClosedBook wasOpen={error.code === "link_expired" || error.code === "link_spent"} />;
   }
   return (
     <main className="mx-auto w-full max-w-5xl px-4 py-16 sm:px-8">

@@ -1,5 +1,6 @@
 import type { Revision, SheetView } from "#shared/contracts/revisions.ts";
 import { TextLink } from "@/components/ui/text-link.tsx";
+import { comparedWith, compareLetters } from "../model/compared-with.ts";
 
 type SheetToolsProps = {
   readonly revision: Revision;
@@ -13,23 +14,10 @@ type SheetToolsProps = {
 const linkClass =
   "inline-flex min-h-8 cursor-pointer items-center text-indigo underline underline-offset-4 hover:text-ink";
 
-/** Letters in the order they are given: A to Y, then AA. */
-const byLetter = (a: { letter: string }, b: { letter: string }) =>
-  a.letter.length - b.letter.length || (a.letter < b.letter ? -1 : 1);
-
-/** The other letter that this one is best compared with: the one before it, else the one after it. */
-export function comparedWith(
-  letter: string,
-  others: readonly { readonly revisionId: string; readonly letter: string }[],
-): { readonly revisionId: string; readonly letter: string } | null {
-  const sorted = [...others].filter((other) => other.letter !== letter).sort(byLetter);
-  return sorted.findLast((other) => byLetter(other, { letter }) < 0) ?? sorted[0] ?? null;
-}
-
 /** What can be done with the sheet beside deciding: dimensions, comparing, the PDF. */
 export function SheetTools({ revision, others, proofAddress, pathOfCompare, dimensions }: SheetToolsProps) {
   const other = comparedWith(revision.letter, others);
-  const earlierFirst = other && byLetter(other, revision) < 0;
+  const earlierFirst = other && compareLetters(other, revision) < 0;
   return (
     <>
       {dimensions && (
