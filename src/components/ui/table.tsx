@@ -1,4 +1,4 @@
-import type { ComponentProps, ReactNode } from "react";
+import { type ComponentProps, type ReactNode, useLayoutEffect, useRef, useState } from "react";
 import { cx } from "@/lib/cx.ts";
 
 /** A table as a schedule on a drawing. It scrolls by itself when the window is too narrow. */
@@ -13,8 +13,24 @@ export function Table({
   readonly className?: string;
   readonly children: ReactNode;
 }) {
+  const region = useRef<HTMLElement>(null);
+  const [scrolls, setScrolls] = useState(false);
+
+  useLayoutEffect(() => {
+    const watched = region.current;
+    if (!watched) return;
+    const observer = new ResizeObserver(() =>
+      setScrolls(watched.scrollWidth > watched.clientWidth || watched.scrollHeight > watched.clientHeight),
+    );
+    observer.observe(watched);
+    for (const child of watched.children) observer.observe(child);
+    return () => observer.disconnect();
+  }, []);
+
+  // What is cut off can then be reached by the arrow keys, too.
+  const byKeys = scrolls ? { tabIndex: 0 } : {};
   return (
-    <section aria-label={caption} className={cx("relative overflow-x-auto", className)}>
+    <section ref={region} aria-label={caption} {...byKeys} className={cx("relative overflow-x-auto", className)}>
       <table className="w-full border-collapse text-left font-sans text-sm tabular-nums">
         <caption className={captionHidden ? "sr-only" : "pb-2 text-left font-serif text-lg font-bold text-ink"}>
           {caption}

@@ -19,6 +19,9 @@ export type PaperMargins = {
   readonly bottom: number;
 };
 
+/** Below the board the section beside it has two rows of dimensions from the wall and a line that states its scale. */
+const sectionBottom = 27;
+
 /** Three rows below and at the right, as most signs have them, for the time before the first picture. */
 export const usualMargins: PaperMargins = { left: 14, top: 14, right: 27, bottom: 30 };
 
@@ -30,7 +33,7 @@ export function marginsOf(list: DisplayList, board: Size, paperScale: number): P
     left: paper(origin.x),
     top: paper(origin.y),
     right: paper(list.widthMm - origin.x - board.width),
-    bottom: paper(list.heightMm - origin.y - board.height),
+    bottom: Math.max(sectionBottom, paper(list.heightMm - origin.y - board.height)),
   };
 }
 

@@ -13,7 +13,7 @@ export function ViewTools({ view, fit, room, onView }: ViewToolsProps) {
   const isWhole = view.scale <= fit.scale * 1.001;
   const middle = { x: (room?.width ?? 0) / 2, y: (room?.height ?? 0) / 2 };
   return (
-    <p className="absolute bottom-1.5 left-1.5 flex gap-1">
+    <p className="absolute top-2 left-2 flex gap-1">
       <ViewButton label="Closer" onPress={() => onView(viewScaled(view, 1.6, middle, fit))} />
       <ViewButton label="Farther" idle={isWhole} onPress={() => onView(viewScaled(view, 1 / 1.6, middle, fit))} />
       <ViewButton label="Whole board" onPress={() => onView(null)} />

@@ -13,7 +13,7 @@ import type { DryFit, Picture, PictureInput } from "./picture-messages.ts";
  * draws the proof.
  */
 export function drawPicture(
-  { document, context, paperScale, what }: PictureInput,
+  { document, context, paperScale, dimensions, what }: PictureInput,
   { kernel, grain }: { kernel: Kernel; grain: GrainCache },
 ): Picture {
   const figures = computeFigures(document, kernel);
@@ -24,7 +24,7 @@ export function drawPicture(
     figures,
     kernel,
     unit: context.unit,
-    dimensions: true,
+    dimensions,
     paperScale,
     wall: true,
     ...(texture ? { texture } : {}),

@@ -10,6 +10,8 @@ export type PictureInput = {
   readonly context: DryFitContext;
   /** Millimetres of the sign to one on paper: sizes lettering and lines for the window. */
   readonly paperScale: number;
+  /** Dimension lines around the board, or the sign alone. */
+  readonly dimensions: boolean;
   /** Under a hand that drags only figures are wanted: they take a small part of the time. */
   readonly what: "all" | "figures";
 };

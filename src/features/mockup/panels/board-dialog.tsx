@@ -4,11 +4,12 @@ import { formatLength } from "#shared/units/format-length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { Dialog } from "@/components/ui/dialog.tsx";
 import { Field } from "@/components/ui/field.tsx";
+import { LengthField } from "@/components/ui/length-field.tsx";
 import { Select } from "@/components/ui/select.tsx";
 import { useDesk } from "../editor/desk-context.ts";
 import { type BoardFields, setBoard } from "../model/commands/set-board.ts";
+import { type Bounds, boundsProblem, isWithinBounds } from "../model/length-bounds.ts";
 import { isSameStock, thicknessChoices, withCurrent } from "../model/stock-choices.ts";
-import { LengthField } from "./length-field.tsx";
 
 type BoardDialogProps = { readonly open: boolean; readonly onOpenChange: (open: boolean) => void };
 
@@ -38,11 +39,27 @@ const lights = [
   { azimuth: 315, text: "from the upper left" },
 ] as const;
 
+type LengthName = "width" | "height" | "gap" | "viewingDistance";
+type Lengths = Readonly<Record<LengthName, number | null>>;
+
+const bounds: Readonly<Record<LengthName, Bounds>> = {
+  width: { least: 20, most: 10_000 },
+  height: { least: 20, most: 10_000 },
+  gap: { least: 0, most: 500 },
+  viewingDistance: { least: 100, most: 200_000 },
+};
+const lengthNames = Object.keys(bounds) as LengthName[];
+
 function BoardForm({ onDone }: { readonly onDone: () => void }) {
   const { document, stock, unit, edit } = useDesk();
   const { board, backer, hanging, presentation, quantity } = document;
   const [fields, setFields] = useState<BoardFields>({});
-  const [wrong, setWrong] = useState<ReadonlySet<string>>(new Set());
+  const [lengths, setLengths] = useState<Lengths>({
+    width: board.width,
+    height: board.height,
+    gap: hanging.gap,
+    viewingDistance: presentation.viewingDistance,
+  });
   const woods = withCurrent(
     stock.woods.map(({ wood }) => wood),
     backer.stock,
@@ -53,25 +70,44 @@ function BoardForm({ onDone }: { readonly onDone: () => void }) {
   const azimuth = fields.light?.azimuth ?? presentation.light.azimuth;
 
   const set = (more: BoardFields) => setFields((before) => ({ ...before, ...more }));
-  const setLength = (name: "width" | "height" | "viewingDistance" | "gap") => (mm: number | null) => {
-    setWrong((before) => new Set([...before].filter((other) => other !== name).concat(mm === null ? [name] : [])));
-    if (mm === null) return;
-    if (name === "gap") set({ hanging: { kind: fields.hanging?.kind ?? hanging.kind, gap: mm } });
-    else set({ [name]: mm });
-  };
+  const fits = lengthNames.every((name) => isWithinBounds(lengths[name], bounds[name]));
+  const lengthField = (name: LengthName, label: string) => (
+    <LengthField
+      label={label}
+      unit={unit}
+      value={lengths[name]}
+      onChange={(mm) => setLengths((before) => ({ ...before, [name]: mm }))}
+      error={boundsProblem(lengths[name], bounds[name], unit)}
+    />
+  );
+
+  function change() {
+    const { gap, ...sizes } = lengths;
+    if (!fits || gap === null || sizes.width === null || sizes.height === null || sizes.viewingDistance === null)
+      return;
+    const { width, height, viewingDistance } = sizes;
+    const all = {
+      ...fields,
+      width,
+      height,
+      viewingDistance,
+      hanging: { kind: fields.hanging?.kind ?? hanging.kind, gap },
+    };
+    edit({ label: "Change the board", change: (before) => setBoard(before, all) });
+    onDone();
+  }
 
   return (
     <form
       className="space-y-4"
       onSubmit={(event) => {
         event.preventDefault();
-        edit({ label: "Change the board", change: (before) => setBoard(before, fields) });
-        onDone();
+        change();
       }}
     >
       <div className="grid gap-3 sm:grid-cols-2">
-        <LengthField label="Width" mm={board.width} unit={unit} least={20} onChange={setLength("width")} />
-        <LengthField label="Height" mm={board.height} unit={unit} least={20} onChange={setLength("height")} />
+        {lengthField("width", "Width")}
+        {lengthField("height", "Height")}
         <Select
           label="Wood"
           value={woods.findIndex((one) => isSameStock(one, wood))}
@@ -116,7 +152,7 @@ function BoardForm({ onDone }: { readonly onDone: () => void }) {
           value={fields.hanging?.kind ?? hanging.kind}
           onChange={(event) => {
             const chosen = hangings.find(({ kind }) => kind === event.target.value);
-            if (chosen) set({ hanging: { kind: chosen.kind, gap: fields.hanging?.gap ?? hanging.gap } });
+            if (chosen) set({ hanging: { kind: chosen.kind, gap: hanging.gap } });
           }}
         >
           {hangings.map(({ kind, text }) => (
@@ -125,14 +161,7 @@ function BoardForm({ onDone }: { readonly onDone: () => void }) {
             </option>
           ))}
         </Select>
-        <LengthField
-          label="Gap behind the board"
-          mm={hanging.gap}
-          unit={unit}
-          least={0}
-          most={500}
-          onChange={setLength("gap")}
-        />
+        {lengthField("gap", "Gap behind the board")}
         <Select
           label="Light"
           value={azimuth}
@@ -147,14 +176,7 @@ function BoardForm({ onDone }: { readonly onDone: () => void }) {
             </option>
           ))}
         </Select>
-        <LengthField
-          label="Seen from"
-          mm={presentation.viewingDistance}
-          unit={unit}
-          least={100}
-          most={200_000}
-          onChange={setLength("viewingDistance")}
-        />
+        {lengthField("viewingDistance", "Seen from")}
         <Field
           label="Wall colour"
           type="color"
@@ -164,7 +186,7 @@ function BoardForm({ onDone }: { readonly onDone: () => void }) {
       </div>
       <div className="flex flex-wrap justify-end gap-3">
         <Button onClick={onDone}>Cancel</Button>
-        <Button type="submit" disabled={wrong.size > 0}>
+        <Button type="submit" disabled={!fits}>
           Change the board
         </Button>
       </div>

@@ -22,7 +22,11 @@ type FindingsPanelProps = {
 /** What the dry fit found, worst first, each with the way to the spot. */
 export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPanelProps) {
   return (
-    <section aria-label="Dry fit" aria-busy={!isCurrent} className="min-w-0 border-rule px-4 pt-2 pb-6 lg:border-l">
+    <section
+      aria-label="Dry fit"
+      aria-busy={!isCurrent}
+      className="min-w-0 border-rule px-4 pt-2 pb-6 max-[1200px]:border-t min-[1200px]:border-l"
+    >
       <h2 className="font-serif text-base font-bold text-ink">
         Dry fit{" "}
         <span role="status" className="font-sans text-sm font-normal text-graphite">

@@ -85,7 +85,13 @@ export function MockupDesk(props: MockupDeskProps) {
   const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
   const isDragging = drag !== null;
   const input = useMemo(
-    () => ({ document: wanted, context, paperScale, what: isDragging ? ("figures" as const) : ("all" as const) }),
+    () => ({
+      document: wanted,
+      context,
+      paperScale,
+      dimensions: true,
+      what: isDragging ? ("figures" as const) : ("all" as const),
+    }),
     [wanted, context, paperScale, isDragging],
   );
   const { drawn, figures: made, failure } = useEngine(room === null ? null : input);
@@ -186,7 +192,7 @@ export function MockupDesk(props: MockupDeskProps) {
         />
         <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
       </div>
-      <div className="grid grid-cols-[minmax(0,1fr)_minmax(17rem,24rem)]">
+      <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_minmax(17rem,24rem)]">
         <div className="min-w-0">
           <SchedulePanel onBoard={() => setDialog("board")} onBringIn={() => setDialog("artwork")} />
           <PiecesPanel />

@@ -1,13 +1,17 @@
-import { useMemo, useState } from "react";
+import { useMemo, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
+import { usualContext } from "#shared/dry-fit/usual-context.ts";
+import { formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Notice } from "@/components/ui/notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { DrawingViewer } from "@/lib/drawing-viewer.tsx";
+import { useRoom } from "@/lib/use-room.ts";
+import { fitBoard, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
 import { useEngine } from "../engine/use-engine.ts";
 
 type MockupReadOnlyProps = {
@@ -21,16 +25,25 @@ type MockupReadOnlyProps = {
 /** The mockup to look at: the picture and the schedule, for a narrow window and for those who may not change it. */
 export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) {
   const [view, setView] = useState<DrawingView | null>(null);
+  const frame = useRef<HTMLDivElement>(null);
+  const room = useRoom(frame);
   const { document } = mockup;
+  const { width, height } = document.board;
+  // On a phone dimension lines would leave no room for the sign; its size stands under it in words.
+  const dimensions = room !== null && room.width >= 600;
+  const paperScale = room === null ? null : paperScaleAt(fitBoard({ width, height }, usualMargins, room).scale);
   const input = useMemo(
-    () => ({
-      document,
-      context: { unit, place: job.brief.place ?? ("inside" as const), acrylics: [], barrels: [] },
-      // Lettering of about 13 px in a window of 360 px.
-      paperScale: document.board.width / 68,
-      what: "all" as const,
-    }),
-    [document, unit, job.brief.place],
+    () =>
+      paperScale === null
+        ? null
+        : {
+            document,
+            context: { ...usualContext, unit },
+            paperScale,
+            dimensions,
+            what: "all" as const,
+          },
+    [document, unit, paperScale, dimensions],
   );
   const { drawn, figures, failure } = useEngine(input);
 
@@ -45,16 +58,21 @@ export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) 
           {failure}
         </Notice>
       )}
-      {drawn === null && failure === null && <Skeleton label="Drawing the mockup" />}
-      {drawn && figures && (
-        <>
+      <div ref={frame} className="h-[56dvh] border border-rule bg-sheet">
+        {drawn === null && failure === null && <Skeleton label="Drawing the mockup" />}
+        {drawn && (
           <DrawingViewer
             list={drawn.elevation}
             title="Elevation, from the front"
             view={view}
             onView={setView}
-            className="h-[60dvh] border border-rule bg-sheet"
+            className="h-full"
           />
+        )}
+      </div>
+      {drawn && figures && (
+        <>
+          <p className="text-sm text-graphite">Board {formatSize(width, height, unit)}</p>
           <h2 className="font-serif text-base font-bold text-ink">Schedule</h2>
           <Table caption="Layers from the wall outward">
             <thead>

@@ -2,15 +2,16 @@ import { useState } from "react";
 import { Button } from "@/components/ui/button.tsx";
 import { Dialog } from "@/components/ui/dialog.tsx";
 import { Field } from "@/components/ui/field.tsx";
+import { LengthField } from "@/components/ui/length-field.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { Select } from "@/components/ui/select.tsx";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
 import { addPlate } from "../model/commands/add-plate.ts";
+import { boundsProblem, isWithinBounds } from "../model/length-bounds.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { optionsOfHold } from "../model/stock-choices.ts";
 import { type LayerChoice, LayerFields } from "./layer-fields.tsx";
-import { LengthField } from "./length-field.tsx";
 
 type PlateDialogProps = { readonly open: boolean; readonly onOpenChange: (open: boolean) => void };
 
@@ -27,6 +28,8 @@ export function PlateDialog({ open, onOpenChange }: PlateDialogProps) {
     </Dialog>
   );
 }
+
+const plateBounds = { least: 1, most: 5000 };
 
 function PlateForm({ onDone }: { readonly onDone: () => void }) {
   const { document, stock, unit, place, edit } = useDesk();
@@ -49,9 +52,11 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
       </Notice>
     );
 
+  const fits = isWithinBounds(width, plateBounds) && (kind === "circle" || isWithinBounds(height, plateBounds));
+
   function add() {
-    if (!sheet || !hold || width === null || height === null) return;
-    const shape = kind === "circle" ? { kind, diameter: width } : { kind, width, height };
+    if (!sheet || !hold || !fits) return;
+    const shape = kind === "circle" ? { kind, diameter: width } : { kind, width, height: height ?? width };
     const id = newId();
     edit({
       label: "Add a plate",
@@ -81,18 +86,26 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
         </Select>
         <Field label="Name" maxLength={120} value={name} onChange={(event) => setName(event.target.value)} />
         <LengthField
-          key={kind}
           label={kind === "circle" ? "Diameter" : "Width"}
-          mm={width ?? half}
           unit={unit}
+          value={width}
           onChange={setWidth}
+          error={boundsProblem(width, plateBounds, unit)}
         />
-        {kind === "rectangle" && <LengthField label="Height" mm={height ?? half} unit={unit} onChange={setHeight} />}
+        {kind === "rectangle" && (
+          <LengthField
+            label="Height"
+            unit={unit}
+            value={height}
+            onChange={setHeight}
+            error={boundsProblem(height, plateBounds, unit)}
+          />
+        )}
       </div>
       <LayerFields choice={choice} onChange={setChoice} />
       <div className="flex flex-wrap justify-end gap-3">
         <Button onClick={onDone}>Cancel</Button>
-        <Button type="submit" disabled={width === null || height === null}>
+        <Button type="submit" disabled={!fits}>
           Add the plate
         </Button>
       </div>
