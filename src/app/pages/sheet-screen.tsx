@@ -27,7 +27,7 @@ type SheetScreenProps = { readonly shop: string; readonly revision: Revision; re
 /** The sheet with its notes and decisions, on a desk or in the hand. */
 export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
   const { job, reader } = sheet;
-  const isDesk = useMedia("(min-width: 64rem)");
+  const isDesk = useMedia("(min-width: 72rem)");
   const [view, setView] = useState<DrawingView | null>(null);
   const [showDimensions, setShowDimensions] = useState(true);
   const [tab, setTab] = useState<SheetTab>("front");

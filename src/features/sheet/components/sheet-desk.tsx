@@ -24,7 +24,7 @@ export function SheetDesk({ parts, elevationHeading, sectionHeading, scheduleHea
   return (
     <div className="relative mb-4 border border-ink bg-sheet p-5">
       <div className="grid min-h-[calc(100dvh-11.75rem)] grid-cols-[minmax(0,1fr)_23.5rem]">
-        <div className="grid min-h-0 grid-rows-[minmax(24rem,1fr)_auto]">
+        <div className="grid min-h-0 grid-cols-[minmax(0,1fr)] grid-rows-[minmax(24rem,1fr)_auto]">
           <div
             className="grid min-h-0"
             style={{
