@@ -5,7 +5,7 @@ import { newId } from "../db/new-id.ts";
 import { invalid, notAllowed, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { Note } from "../models/note.ts";
-import { isInsider, isStaff } from "../policies/actor.ts";
+import { isInsider, isStaff, nameAt } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findRevision } from "../queries/find-revision.ts";
 import { logEvent } from "./log-event.ts";
@@ -48,7 +48,7 @@ export async function addNote(
       side: isStaff(actor) ? "shop" : "client",
       shopOnly,
       authorId: actor.personId,
-      authorName: actor.name,
+      authorName: nameAt(actor, job.clientId),
       createdAt: now,
     },
     { transaction },

@@ -23,7 +23,7 @@ export type Approval = {
 export async function approveRevision(context: Context, approval: Approval): Promise<void> {
   const { transaction, now } = context;
   const decidable = await findDecidable(context, approval.revisionId);
-  const { revision, loaded, contactId } = decidable;
+  const { revision, loaded, contact } = decidable;
   const { job } = loaded;
   if (approval.pdfSha256 !== decidable.pdfSha256)
     throw wrongState("The PDF you were shown is not the one that was issued. Open the sheet again.");
@@ -39,7 +39,7 @@ export async function approveRevision(context: Context, approval: Approval): Pro
     summary: "",
   });
   if (approval.consentToPortfolio && job.consentAt === null) {
-    await job.update({ consentAt: now, consentBy: contactId }, { transaction });
+    await job.update({ consentAt: now, consentBy: contact.contactId }, { transaction });
     await logEvent(context, { shopId: job.shopId, jobId: job.id, kind: "consent given", data: {} });
   }
   await enqueue(transaction, "make-certificate", { decisionId: decision.id });

@@ -1,3 +1,4 @@
+import { Op } from "sequelize";
 import { invalid } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { Note } from "../models/note.ts";
@@ -16,7 +17,7 @@ export async function askForRevision(
   const { revision, loaded } = decidable;
   const { job } = loaded;
   const open = await Note.count({
-    where: { shopId: job.shopId, jobId: job.id, side: "client", state: "open" },
+    where: { shopId: job.shopId, jobId: job.id, side: "client", state: "open", kind: { [Op.ne]: "fine as is" } },
     transaction,
   });
   if (open === 0 && summary === "")

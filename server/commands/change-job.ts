@@ -16,32 +16,40 @@ export type JobChange = {
   readonly approverIds?: readonly string[] | undefined;
 };
 
-/** Changes title, due day, brief and approvers; what is not named stays. */
+/** The fields of the brief as the log names them. */
+const briefWords: Readonly<Record<keyof Brief, string>> = {
+  widthMm: "width",
+  heightMm: "height",
+  place: "place",
+  wall: "wall",
+  viewingDistanceMm: "viewing distance",
+  lighting: "lighting",
+  quantity: "quantity",
+  brandColours: "brand colours",
+  about: "what it is about",
+  words: "words",
+};
+
+/** Changes title, due day, brief and approvers; what is not named stays. The log names what is other than before. */
 export async function changeJob(context: Context, jobId: string, change: JobChange): Promise<LoadedJob> {
   const { transaction, actor } = context;
   const { job, facts, approvers } = await findJob(context, jobId, { lock: true });
   if (!jobPolicy.editBrief(actor, facts)) throw notAllowed("The brief is the shop's to change.");
   const given = Object.fromEntries(Object.entries(change.brief ?? {}).filter(([, value]) => value !== undefined));
-  const fields = [...Object.keys(given)];
-  if (change.title !== undefined) fields.push("title");
-  if (change.dueOn !== undefined) fields.push("due day");
-  await job.update(
-    {
-      title: change.title ?? job.title,
-      dueOn: change.dueOn === undefined ? job.dueOn : change.dueOn,
-      brief: { ...job.brief, ...given },
-    },
-    { transaction },
-  );
+  const next = {
+    title: change.title ?? job.title,
+    dueOn: change.dueOn === undefined ? job.dueOn : change.dueOn,
+    brief: { ...job.brief, ...given },
+  };
+  const names = Object.keys(briefWords) as (keyof Brief)[];
+  const fields = names.filter((name) => next.brief[name] !== job.brief[name]).map((name) => briefWords[name]);
+  if (next.title !== job.title) fields.push("title");
+  if (next.dueOn !== job.dueOn) fields.push("due day");
+  await job.update(next, { transaction });
   if (change.approverIds) {
-    await setApprovers(context, {
-      shopId: job.shopId,
-      clientId: job.clientId,
-      jobId,
-      contactIds: [...new Set(change.approverIds)],
-    });
-    if (approvers.map(({ contactId }) => contactId).join() !== [...change.approverIds].sort().join())
-      fields.push("approvers");
+    const contactIds = [...new Set(change.approverIds)].sort();
+    await setApprovers(context, { shopId: job.shopId, clientId: job.clientId, jobId, contactIds });
+    if (approvers.map(({ contactId }) => contactId).join() !== contactIds.join()) fields.push("approvers");
   }
   if (fields.length > 0) await logEvent(context, { shopId: job.shopId, jobId, kind: "job changed", data: { fields } });
   return refreshJob(context, job);

@@ -6,13 +6,13 @@ import type { Context } from "../http/context.ts";
 import { Decision } from "../models/decision.ts";
 import { StoredFile } from "../models/stored-file.ts";
 import { type ContactActor, contactAt } from "../policies/actor.ts";
-import { revisionPolicy } from "../policies/revision.ts";
+import { revisionPolicy, takesDecisions } from "../policies/revision.ts";
 import { findRevision, type LoadedRevision } from "../queries/find-revision.ts";
 
 /** A revision that the actor, one of its approvers, may decide on now; its job's row is locked. */
 export type Decidable = LoadedRevision & {
   readonly actor: ContactActor;
-  readonly contactId: string;
+  readonly contact: NonNullable<ReturnType<typeof contactAt>>;
   readonly pdfSha256: string;
 };
 
@@ -28,8 +28,7 @@ export async function findDecidable(context: Context, revisionId: string): Promi
   if (actor.kind !== "contact" || !contact || !revisionPolicy.decide(actor, facts)) {
     throw notAllowed("Only the approvers named in the brief decide on a revision.");
   }
-  if (loaded.job.state === "on hold" || loaded.job.state === "cancelled")
-    throw wrongState(`This job is ${loaded.job.state}. Ask the shop.`);
+  if (!takesDecisions(loaded.job.state)) throw wrongState(`This job is ${loaded.job.state}. Ask the shop.`);
   if (!canDecide(revision.state)) {
     const out = revisionOut(loaded.revisions);
     const current = out && out.id !== revision.id ? { revisionId: out.id, letter: out.letter } : null;
@@ -43,13 +42,13 @@ export async function findDecidable(context: Context, revisionId: string): Promi
     transaction,
   });
   if (!pdf) throw notFound("revision");
-  return { ...found, actor, contactId: contact.contactId, pdfSha256: pdf.sha256 };
+  return { ...found, actor, contact, pdfSha256: pdf.sha256 };
 }
 
 /** Writes the decision for good. Two at the same moment: the second finds the state changed, and the database takes one row only. */
 export function recordDecision(
   context: Context,
-  { revision, actor, contactId, pdfSha256 }: Decidable,
+  { revision, actor, contact, pdfSha256 }: Decidable,
   said: Pick<Decision, "kind" | "typedName" | "acknowledgements" | "summary">,
 ): Promise<Decision> {
   if (!revision.snapshotSha256) throw new AppError("internal");
@@ -59,9 +58,9 @@ export function recordDecision(
       shopId: revision.shopId,
       jobId: revision.jobId,
       revisionId: revision.id,
-      contactId,
+      contactId: contact.contactId,
       personId: actor.personId,
-      byName: actor.name,
+      byName: contact.name,
       pdfSha256,
       snapshotSha256: revision.snapshotSha256,
       address: context.address,

@@ -7,16 +7,22 @@ import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
 
-/** Moves a job on after approval, holds it, takes it up again or cancels it. Taken up again, it is where it was held. */
+/**
+ * Moves a job on after approval, holds it, takes it up again or cancels it. Taken up again, it is where it was held.
+ * While a revision is being drawn a job is neither held nor cancelled: the mail that it is out would follow.
+ */
 export async function moveJob(
   context: Context,
   jobId: string,
   { to, reason }: { to: StaffState | "taken up again"; reason: string },
 ): Promise<LoadedJob> {
-  const { job, facts } = await findJob(context, jobId, { lock: true });
+  const { job, facts, revisions } = await findJob(context, jobId, { lock: true });
   if (!jobPolicy.move(context.actor, facts)) throw notAllowed("Owners and makers move a job on.");
   const from = job.state;
   if (!canSetJobState(from, to)) throw wrongState(`A job that is “${from}” can't become “${to}”.`);
+  const preparing = revisions.find((revision) => revision.state === "preparing");
+  if (preparing && (to === "on hold" || to === "cancelled"))
+    throw wrongState(`${preparing.letter} is being drawn. Wait until it is out.`);
   const state = to === "taken up again" ? (job.heldFrom ?? "mockup") : to;
   await job.update({ state, heldFrom: to === "on hold" ? holdable(from) : null }, { transaction: context.transaction });
   await logEvent(context, { shopId: job.shopId, jobId, kind: "job moved", data: { from, to, reason } });

@@ -17,7 +17,11 @@ export async function openShareLink(context: Context, token: string): Promise<{ 
   const jobIds = (link.pieces ?? []).map(({ jobId }) => jobId);
   const pieces = await findShowable({ ...context, shop: { id: shop.id, slug: shop.slug } }, jobIds);
   if (link.openings === 0)
-    await logEvent(context, { shopId: shop.id, kind: "share link opened", data: { label: link.label } });
+    // Whoever opens it is a guest here, also when signed in at another shop.
+    await logEvent(
+      { ...context, actor: { kind: "nobody" } },
+      { shopId: shop.id, kind: "share link opened", data: { label: link.label } },
+    );
   await link.increment("openings", { transaction });
   await link.update({ lastOpenedAt: now }, { transaction });
   return { shop, pieces: pieces.sort((a, b) => jobIds.indexOf(a.job.id) - jobIds.indexOf(b.job.id)) };

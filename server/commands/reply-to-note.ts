@@ -3,7 +3,7 @@ import { newId } from "../db/new-id.ts";
 import { notAllowed, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { Reply } from "../models/reply.ts";
-import { isInsider, isStaff } from "../policies/actor.ts";
+import { isInsider, isStaff, nameAt } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findNote } from "../queries/find-note.ts";
 import { logEvent } from "./log-event.ts";
@@ -25,7 +25,7 @@ export async function replyToNote(context: Context, { noteId, text }: { noteId: 
       text,
       side,
       authorId: actor.personId,
-      authorName: actor.name,
+      authorName: nameAt(actor, on.loaded.job.clientId),
       createdAt: now,
     },
     { transaction },

@@ -33,7 +33,7 @@ export async function storeBytes(
  * nothing names, never a row that names nothing.
  */
 async function store(
-  { transaction, now }: Storing,
+  { services, transaction, now }: Storing,
   { shopId, sha256, byteSize, mediaType }: { shopId: string; sha256: string; byteSize: number; mediaType: string },
   keep: (key: string) => Promise<void>,
 ): Promise<StoredFile> {
@@ -49,5 +49,7 @@ async function store(
   });
   const row = await StoredFile.findOne({ where: { shopId, sha256 }, transaction });
   if (!row) throw new Error("A stored file just made is not there.");
+  // Another request brought the same bytes at the same moment and was first.
+  if (row.id !== id) await services.storage.remove(storageKey);
   return row;
 }

@@ -9,7 +9,10 @@ import { sendMail } from "./send-mail.ts";
  * Does one job. Running it again must change nothing more: a job that was cut off is run again. It throws when it
  * should be tried later; what can't be mended by trying is written to the job's own row instead.
  */
-export type Task<N extends JobName> = (services: Services, payload: JobPayloads[N]) => Promise<void>;
+export type Task<N extends JobName> = (services: Services, payload: JobPayloads[N], attempt: Attempt) => Promise<void>;
+
+/** Which try this is. After the last one nobody tries again, so what waits for the job has to be told. */
+export type Attempt = { readonly isLast: boolean };
 
 /** Every job the queue knows. */
 export const tasks: { readonly [N in JobName]?: Task<N> } = {

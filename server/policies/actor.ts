@@ -40,6 +40,11 @@ export function isInsider(actor: Actor): actor is Insider {
   return actor.kind === "staff" || actor.kind === "contact";
 }
 
+/** The actor's name as that client's people know it: one person may be written differently at two clients. */
+export function nameAt(actor: Insider, clientId: string): string {
+  return contactAt(actor, clientId)?.name ?? actor.name;
+}
+
 /** The actor's contact at that client, if there is one. */
 export function contactAt(
   actor: Actor,

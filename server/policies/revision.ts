@@ -1,3 +1,4 @@
+import type { JobState } from "#shared/lifecycle/job-states.ts";
 import { canDecide, canWithdraw, type RevisionState, visibleToClient } from "#shared/lifecycle/revision-states.ts";
 import { type Actor, contactAt, isStaff } from "./actor.ts";
 
@@ -17,6 +18,9 @@ export const isApprover = (actor: Actor, revision: RevisionFacts): boolean => {
   const contact = ofClient(actor, revision) ? contactAt(actor, revision.clientId) : null;
   return contact !== null && revision.approverIds.includes(contact.contactId);
 };
+
+/** While a job is stopped nobody decides on its revisions. */
+export const takesDecisions = (job: JobState): boolean => job !== "on hold" && job !== "cancelled";
 
 const mayIssue = (actor: Actor, job: { readonly shopId: string }): boolean =>
   isStaff(actor, "owner", "maker") && actor.shopId === job.shopId;

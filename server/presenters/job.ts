@@ -1,8 +1,8 @@
 import type { BenchRow, Job as JobView } from "#shared/contracts/jobs.ts";
-import { canIssue } from "#shared/lifecycle/job-states.ts";
-import { revisionApproved } from "#shared/lifecycle/revision-row.ts";
+import { canIssue, type JobState } from "#shared/lifecycle/job-states.ts";
+import { type RevisionInRow, revisionApproved, revisionOut } from "#shared/lifecycle/revision-row.ts";
 import { visibleToClient } from "#shared/lifecycle/revision-states.ts";
-import { type MoveFacts, whoseMove } from "#shared/lifecycle/whose-move.ts";
+import { type Move, type MoveFacts, whoseMove } from "#shared/lifecycle/whose-move.ts";
 import type { Event } from "../models/event.ts";
 import { type Actor, isStaff } from "../policies/actor.ts";
 import { jobPolicy } from "../policies/job.ts";
@@ -21,13 +21,14 @@ export function presentBenchRow(actor: Actor, loaded: LoadedJob, { move, openNot
   const latest = seen.at(-1) ?? null;
   const approved = revisionApproved(seen);
   const event = isStaff(actor) && lastEvent ? presentEvent(lastEvent) : null;
+  const told = whoseMove(isStaff(actor) ? move : { ...move, revisions: seen });
   return {
     id: job.id,
     number: job.number,
     title: job.title,
     state: job.state,
-    whoseMove: job.whoseMove,
-    nextStep: isStaff(actor) ? whoseMove(move).reason : clientStep(loaded, latest?.letter ?? ""),
+    whoseMove: told.move,
+    nextStep: isStaff(actor) ? told.reason : clientStep(job.state, revisionOut(seen), told.move),
     client: { id: client.id, name: client.name },
     dueOn: job.dueOn,
     latest: latest ? { revisionId: latest.id, letter: latest.letter, state: latest.state } : null,
@@ -60,19 +61,9 @@ export function presentJob(actor: Actor, loaded: LoadedJob, extras: JobExtras): 
   };
 }
 
-/** One sentence for the client, about what the client can see. */
-function clientStep({ job }: LoadedJob, letter: string): string {
-  switch (job.state) {
-    case "out for proof":
-      return job.whoseMove === "client"
-        ? `Revision ${letter} waits for your decision`
-        : "The shop is answering your notes";
-    case "revision asked":
-      return "The shop is working on the revision you asked for";
-    case "approved":
-      return `You approved revision ${letter}, the build is next`;
-    case "in build":
-      return "Your sign is being built";
+/** One sentence for the client, about the revision that the client sees out. */
+function clientStep(state: JobState, out: RevisionInRow | null, move: Move): string {
+  switch (state) {
     case "handed over":
     case "closed":
       return "Your sign has been handed over";
@@ -81,6 +72,13 @@ function clientStep({ job }: LoadedJob, letter: string): string {
     case "cancelled":
       return "This job was cancelled";
     default:
+      if (out?.state === "issued")
+        return move === "client"
+          ? `Revision ${out.letter} waits for your decision`
+          : "The shop is answering your notes";
+      if (out?.state === "revision asked") return "The shop is working on the revision you asked for";
+      if (out && state === "in build") return "Your sign is being built";
+      if (out) return `You approved revision ${out.letter}, the build is next`;
       return "The shop is working on the next proof";
   }
 }

@@ -6,7 +6,7 @@ import type { Revision } from "../models/revision.ts";
 import type { StoredFile } from "../models/stored-file.ts";
 import { type Actor, isStaff } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
-import { revisionPolicy } from "../policies/revision.ts";
+import { revisionPolicy, takesDecisions } from "../policies/revision.ts";
 import { revisionFacts } from "../queries/find-revision.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 
@@ -55,7 +55,7 @@ export function presentRevision(
         : null,
     can: {
       note: notePolicy.add(actor, facts),
-      decide: revisionPolicy.mayDecideNow(actor, facts),
+      decide: takesDecisions(loaded.job.state) && revisionPolicy.mayDecideNow(actor, facts),
       withdraw: revisionPolicy.mayWithdrawNow(actor, facts),
       download: pdf !== null,
     },

@@ -2,7 +2,7 @@ import { literal, Op } from "sequelize";
 import type { ReadContext } from "../http/context.ts";
 import { Artwork } from "../models/artwork.ts";
 import { artworkColumns } from "./find-artwork.ts";
-import { readCursor } from "./page.ts";
+import { readTimeCursor } from "./page.ts";
 
 /** Up to `limit + 1` artworks of a job, newest first. */
 export async function listArtworks(
@@ -10,12 +10,12 @@ export async function listArtworks(
   jobId: string,
   { cursor, limit }: { cursor?: string | undefined; limit: number },
 ): Promise<Artwork[]> {
-  const after = readCursor(cursor, 2);
+  const after = readTimeCursor(cursor);
   return Artwork.findAll({
     where: {
       [Op.and]: [
         { shopId: shop?.id ?? "", jobId, removedAt: null },
-        ...(after ? [literal(`("Artwork"."added_at", "Artwork"."id") < (:addedAt, :id)`)] : []),
+        ...(after ? [literal(`("Artwork"."added_at", "Artwork"."id") < (:at, :id)`)] : []),
       ],
     },
     attributes: artworkColumns,
@@ -25,7 +25,7 @@ export async function listArtworks(
       ["id", "desc"],
     ],
     limit: limit + 1,
-    replacements: after ? { addedAt: after[0], id: after[1] } : {},
+    replacements: { ...after },
     transaction,
   });
 }

@@ -1,7 +1,8 @@
 import { literal, Op, type WhereOptions } from "sequelize";
+import { z } from "zod";
 import { type ReadContext, shopIdOf } from "../http/context.ts";
 import { Client } from "../models/client.ts";
-import { readCursor } from "./page.ts";
+import { places, readCursor } from "./page.ts";
 
 const byName = literal('lower("Client"."name")');
 
@@ -10,14 +11,14 @@ export function listClients(
   context: ReadContext,
   { cursor, limit, q }: { cursor?: string | undefined; limit: number; q?: string | undefined },
 ): Promise<Client[]> {
-  const after = readCursor(cursor, 1);
+  const after = readCursor(cursor, z.tuple([places.id]));
   const wanted = q?.trim();
   const shopId = shopIdOf(context);
   const conditions: WhereOptions[] = [{ shopId }];
   if (after) {
     conditions.push(
       literal(`(lower("Client"."name"), "Client"."id") > (
-        select lower(before.name), before.id from clients before where before.shop_id = :shopId and before.id::text = :id)`),
+        select lower(before.name), before.id from clients before where before.shop_id = :shopId and before.id = :id)`),
     );
   }
   if (wanted) {
@@ -32,7 +33,7 @@ export function listClients(
     where: { [Op.and]: conditions },
     replacements: {
       shopId,
-      id: String(after?.[0] ?? ""),
+      id: after?.[0] ?? null,
       q: `%${(wanted ?? "").replace(/[\\%_]/g, "\\$&")}%`,
     },
     order: [byName, "id"],

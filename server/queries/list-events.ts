@@ -1,7 +1,8 @@
 import { Op } from "sequelize";
+import { z } from "zod";
 import type { ReadContext } from "../http/context.ts";
 import { Event } from "../models/event.ts";
-import { readCursor } from "./page.ts";
+import { places, readCursor } from "./page.ts";
 
 /** Up to `limit + 1` events of a job of this shop, newest first. */
 export async function listEvents(
@@ -9,9 +10,9 @@ export async function listEvents(
   jobId: string,
   { cursor, limit }: { cursor?: string | undefined; limit: number },
 ): Promise<Event[]> {
-  const after = readCursor(cursor, 1);
+  const after = readCursor(cursor, z.tuple([places.bigNumber]));
   return Event.findAll({
-    where: { shopId: shop?.id ?? "", jobId, ...(after ? { id: { [Op.lt]: String(after[0]) } } : {}) },
+    where: { shopId: shop?.id ?? "", jobId, ...(after ? { id: { [Op.lt]: after[0] } } : {}) },
     order: [["id", "desc"]],
     limit: limit + 1,
     transaction,

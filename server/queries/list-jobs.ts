@@ -1,43 +1,22 @@
-import { literal, Op, type WhereOptions } from "sequelize";
-import type { z } from "zod";
+import { col, fn, literal, Op, type WhereOptions } from "sequelize";
+import { z } from "zod";
 import type { listJobs as contract } from "#shared/contracts/jobs.ts";
 import type { ReadContext } from "../http/context.ts";
 import { Client } from "../models/client.ts";
 import { Job } from "../models/job.ts";
 import type { Actor } from "../policies/actor.ts";
+import { type Move, moveFor, orderOf } from "./job-order.ts";
 import { readCursor } from "./page.ts";
 
 type Query = z.output<typeof contract.query>;
 
-/** The ordering of each list as SQL expressions; the job's id breaks ties. */
-const orders = {
-  due: {
-    by: [
-      `case "Job"."whose_move" when 'ours' then 0 when 'client' then 1 else 2 end`,
-      `coalesce("Job"."due_on", '9999-12-31')`,
-    ],
-    down: false,
-    place: (job: Job) => [
-      job.whoseMove === "ours" ? 0 : job.whoseMove === "client" ? 1 : 2,
-      job.dueOn ?? "9999-12-31",
-      job.id,
-    ],
-  },
-  number: { by: [`"Job"."number"`], down: true, place: (job: Job) => [job.number, job.id] },
-  newest: { by: [`"Job"."created_at"`], down: true, place: (job: Job) => [job.createdAt.toISOString(), job.id] },
-} as const;
-
-/** Where a row stands in the list, for the cursor. */
-export function placeInJobs(sort: Query["sort"], job: Job): (string | number)[] {
-  return [...orders[sort].place(job)];
-}
-
 /** Up to `limit + 1` jobs of the shop that the actor may see. */
 export async function listJobs({ shop, actor, transaction }: ReadContext, query: Query): Promise<Job[]> {
-  const { by, down } = orders[query.sort];
+  const { by, down, place } = orderOf(query.sort, actor);
   const keys = [...by, `"Job"."id"`];
-  const after = readCursor(query.cursor, keys.length);
-  const replacements: Record<string, string | number | null> = { q: `%${(query.q ?? "").replace(/[\\%_]/g, "\\$&")}%` };
+  const after = readCursor(query.cursor, place);
+  const wanted = query.q?.trim() ?? "";
+  const replacements: Record<string, string | number> = { q: `%${wanted.replace(/[\\%_]/g, "\\$&")}%` };
   after?.forEach((value, index) => {
     replacements[`after${index}`] = value;
   });
@@ -46,10 +25,10 @@ export async function listJobs({ shop, actor, transaction }: ReadContext, query:
     conditions.push(
       literal(`(${keys.join(", ")}) ${down ? "<" : ">"} (${after.map((_, index) => `:after${index}`).join(", ")})`),
     );
-  if (query.whoseMove) conditions.push({ whoseMove: query.whoseMove });
+  if (query.whoseMove) conditions.push(literal(`${moveFor(actor)} = '${query.whoseMove}'`));
   if (query.state) conditions.push({ state: query.state });
   if (query.clientId) conditions.push({ clientId: query.clientId });
-  if (query.q?.trim()) {
+  if (wanted) {
     conditions.push(
       literal(
         `("Job"."number" ilike :q or "Job"."title" ilike :q or "client"."name" ilike :q or "Job"."brief"->>'words' ilike :q)`,
@@ -73,8 +52,18 @@ export async function countMoves({
   actor,
   transaction,
 }: ReadContext): Promise<{ ours: number; client: number; nobody: number }> {
-  const rows = await Job.count({ where: visibleJobs(actor, shop?.id ?? ""), group: ["whose_move"], transaction });
-  const of = (move: string) => rows.find((row) => row.whose_move === move)?.count ?? 0;
+  const rows = await Job.findAll({
+    where: visibleJobs(actor, shop?.id ?? ""),
+    attributes: [
+      [literal(moveFor(actor)), "move"],
+      [fn("count", col("id")), "count"],
+    ],
+    group: ["move"],
+    raw: true,
+    transaction,
+  });
+  const counted = z.array(z.object({ move: z.string(), count: z.coerce.number() })).parse(rows);
+  const of = (move: Move) => counted.find((row) => row.move === move)?.count ?? 0;
   return { ours: of("ours"), client: of("client"), nobody: of("nobody") };
 }
 

@@ -1,11 +1,12 @@
 import { Op } from "sequelize";
+import { z } from "zod";
 import type { FrozenNote } from "#shared/mockup/snapshot.ts";
 import type { ReadContext } from "../http/context.ts";
 import { Note } from "../models/note.ts";
 import { Reply } from "../models/reply.ts";
 import { Revision } from "../models/revision.ts";
 import { isStaff } from "../policies/actor.ts";
-import { readCursor } from "./page.ts";
+import { places, readCursor } from "./page.ts";
 
 const withReplies = [
   { model: Reply, as: "replies", separate: true, order: ["createdAt", "id"] as string[] },
@@ -21,13 +22,13 @@ export async function listNotes(
   revision: Revision,
   { cursor, limit }: { cursor?: string | undefined; limit: number },
 ): Promise<Note[]> {
-  const after = readCursor(cursor, 1);
+  const after = readCursor(cursor, z.tuple([places.count]));
   return Note.findAll({
     where: {
       shopId: revision.shopId,
       jobId: revision.jobId,
       ...(isStaff(actor) ? {} : { shopOnly: false }),
-      ...(after ? { number: { [Op.gt]: Number(after[0]) } } : {}),
+      ...(after ? { number: { [Op.gt]: after[0] } } : {}),
       [Op.or]: [
         { revisionId: revision.id },
         { "$revision.sequence$": { [Op.lt]: revision.sequence }, state: { [Op.ne]: "settled" } },

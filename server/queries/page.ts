@@ -9,30 +9,35 @@ export function cursorOf(values: readonly (string | number | null)[]): string {
   return Buffer.from(JSON.stringify(values)).toString("base64url");
 }
 
-/** Reads a cursor of `length` values back. A cursor we did not make is a bad request. */
-export function readCursor(cursor: string | undefined, length: number): (string | number | null)[] | null {
+/** What a cursor of each kind of list holds. The bounds are those of the columns they are compared with. */
+export const places = {
+  instant: z.iso.datetime().refine((text) => text >= "1900"),
+  day: z.iso.date().refine((text) => text >= "1900"),
+  count: z.int().min(0).max(2_147_483_647),
+  id: z.uuid(),
+  text: z.string().max(200),
+  /** Of a row that the database numbers. */
+  bigNumber: z.string().regex(/^\d{1,18}$/),
+} as const;
+
+const timePlace = z.tuple([places.instant, places.id]);
+
+/** Reads a cursor back. One that we did not make, or made for another list, is a bad request. */
+export function readCursor<T>(cursor: string | undefined, place: z.ZodType<T>): T | null {
   if (cursor === undefined) return null;
-  const values = parsed(cursor);
-  const plain =
-    Array.isArray(values) &&
-    values.every((value) => value === null || typeof value === "string" || typeof value === "number");
-  if (!plain || values.length !== length) throw unknownPlace();
-  return values;
-}
-
-const unknownPlace = (): AppError =>
-  new AppError("malformed_request", { detail: "This place in the list is not known. Start at its beginning." });
-
-/** Reads the cursor of a list ordered by time and id back. */
-export function readTimeCursor(cursor: string | undefined): { at: string; id: string } | null {
-  const values = readCursor(cursor, 2);
-  if (values === null) return null;
-  const outcome = timePlace.safeParse({ at: values[0], id: values[1] });
-  if (!outcome.success) throw unknownPlace();
+  const outcome = place.safeParse(parsed(cursor));
+  if (!outcome.success)
+    throw new AppError("malformed_request", {
+      detail: "This place in the list is not known. Start at its beginning.",
+    });
   return outcome.data;
 }
 
-const timePlace = z.object({ at: z.iso.datetime(), id: z.uuid() });
+/** Reads the cursor of a list ordered by time and id back. */
+export function readTimeCursor(cursor: string | undefined): { at: string; id: string } | null {
+  const values = readCursor(cursor, timePlace);
+  return values && { at: values[0], id: values[1] };
+}
 
 function parsed(cursor: string): unknown {
   try {

@@ -4,7 +4,7 @@ import type { Client } from "../models/client.ts";
 import { Job } from "../models/job.ts";
 import { Revision } from "../models/revision.ts";
 import { ShareLink } from "../models/share-link.ts";
-import { readCursor } from "./page.ts";
+import { readTimeCursor } from "./page.ts";
 
 type PageQuery = { readonly cursor?: string | undefined; readonly limit: number };
 
@@ -16,13 +16,13 @@ export async function listApprovedPieces(
   { shop, transaction }: ReadContext,
   { cursor, limit }: PageQuery,
 ): Promise<ApprovedPiece[]> {
-  const after = readCursor(cursor, 2);
+  const after = readTimeCursor(cursor);
   const jobs = await Job.findAll({
     where: {
       [Op.and]: [
         { shopId: shop?.id ?? "" },
         literal(`exists (select 1 from revisions r where r.job_id = "Job"."id" and r.state = 'approved')`),
-        ...(after ? [literal(`("Job"."created_at", "Job"."id") < (:createdAt, :id)`)] : []),
+        ...(after ? [literal(`("Job"."created_at", "Job"."id") < (:at, :id)`)] : []),
       ],
     },
     include: ["client"],
@@ -31,7 +31,7 @@ export async function listApprovedPieces(
       ["id", "desc"],
     ],
     limit: limit + 1,
-    replacements: after ? { createdAt: after[0], id: after[1] } : {},
+    replacements: { ...after },
     transaction,
   });
   return piecesOf(jobs, await approvedRevisions({ transaction }, jobs));
@@ -69,12 +69,12 @@ export async function listShareLinks(
   { shop, transaction }: ReadContext,
   { cursor, limit }: PageQuery,
 ): Promise<ShareLink[]> {
-  const after = readCursor(cursor, 2);
+  const after = readTimeCursor(cursor);
   return ShareLink.findAll({
     where: {
       [Op.and]: [
         { shopId: shop?.id ?? "" },
-        ...(after ? [literal(`("ShareLink"."created_at", "ShareLink"."id") < (:createdAt, :id)`)] : []),
+        ...(after ? [literal(`("ShareLink"."created_at", "ShareLink"."id") < (:at, :id)`)] : []),
       ],
     },
     include: withPieces,
@@ -83,7 +83,7 @@ export async function listShareLinks(
       ["id", "desc"],
     ],
     limit: limit + 1,
-    replacements: after ? { createdAt: after[0], id: after[1] } : {},
+    replacements: { ...after },
     transaction,
   });
 }

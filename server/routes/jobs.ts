@@ -9,9 +9,10 @@ import { isStaff } from "../policies/actor.ts";
 import { jobPolicy } from "../policies/job.ts";
 import { presentEvent } from "../presenters/event.ts";
 import { findJob } from "../queries/find-job.ts";
+import { placeInJobs } from "../queries/job-order.ts";
 import { benchRows, jobView } from "../queries/job-view.ts";
 import { listEvents } from "../queries/list-events.ts";
-import { countMoves, listJobs, placeInJobs } from "../queries/list-jobs.ts";
+import { countMoves, listJobs } from "../queries/list-jobs.ts";
 import { loadJobs } from "../queries/load-jobs.ts";
 import { cursorOf, pageOf } from "../queries/page.ts";
 
@@ -19,10 +20,15 @@ export function registerJobRoutes(routes: Routes): void {
   read(routes, contract.listJobs, async (context, { query }) => {
     const jobs = await listJobs(context, query);
     const shown = jobs.slice(0, query.limit);
-    const last = shown.at(-1);
+    const items = await benchRows(context, await loadJobs(context, shown));
+    const job = shown.at(-1);
+    const move = items.at(-1)?.whoseMove;
     return {
-      items: await benchRows(context, await loadJobs(context, shown)),
-      next: jobs.length > query.limit && last ? cursorOf(placeInJobs(query.sort, last)) : null,
+      items,
+      next:
+        jobs.length > query.limit && job && move
+          ? cursorOf(placeInJobs(query.sort, { actor: context.actor, job, move }))
+          : null,
       counts: await countMoves(context),
     };
   });

@@ -1,3 +1,4 @@
+import { z } from "zod";
 import * as contract from "#shared/contracts/outgoing-mail.ts";
 import { notFound } from "../http/app-error.ts";
 import { type ReadContext, shopIdOf } from "../http/context.ts";
@@ -5,12 +6,12 @@ import { type Routes, read } from "../http/route.ts";
 import type { MailSink } from "../mail/sink.ts";
 import { shopPolicy } from "../policies/shop.ts";
 import { presentMail, presentMailRow } from "../presenters/outgoing-mail.ts";
-import { pageOf, readCursor } from "../queries/page.ts";
+import { pageOf, places, readCursor } from "../queries/page.ts";
 
 export function registerOutgoingMailRoutes(routes: Routes): void {
   read(routes, contract.listOutgoingMail, async (context, { query }) => {
-    const before = readCursor(query.cursor, 1)?.[0] ?? null;
-    const page = { shopId: shopIdOf(context), limit: query.limit + 1, before: before === null ? null : String(before) };
+    const before = readCursor(query.cursor, z.tuple([places.text]))?.[0] ?? null;
+    const page = { shopId: shopIdOf(context), limit: query.limit + 1, before };
     return pageOf(await openSink(context).list(page), query.limit, presentMailRow, ({ id }) => [id]);
   });
 

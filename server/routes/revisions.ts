@@ -1,4 +1,5 @@
 import { Readable } from "node:stream";
+import { z } from "zod";
 import * as contract from "#shared/contracts/revisions.ts";
 import { paintSvg } from "#shared/drawing/svg.ts";
 import { listChanges } from "#shared/mockup/changes.ts";
@@ -11,26 +12,26 @@ import { notFound } from "../http/app-error.ts";
 import type { ReadContext } from "../http/context.ts";
 import { FileAnswer } from "../http/file-answer.ts";
 import { type Routes, read, write } from "../http/route.ts";
-import { isInsider } from "../policies/actor.ts";
+import { isInsider, nameAt } from "../policies/actor.ts";
 import { revisionPolicy } from "../policies/revision.ts";
 import { presentSheet } from "../presenters/sheet.ts";
 import { answerFile } from "../queries/answer-file.ts";
 import { findCertificateFile, findProofFile } from "../queries/find-files.ts";
 import { findJob } from "../queries/find-job.ts";
 import { findRevision, revisionFacts } from "../queries/find-revision.ts";
-import { cursorOf, readCursor } from "../queries/page.ts";
+import { cursorOf, places, readCursor } from "../queries/page.ts";
 import { revisionView, revisionViews } from "../queries/revision-view.ts";
 import { snapshotOf } from "../queries/snapshot-of.ts";
 
 export function registerRevisionRoutes(routes: Routes): void {
   read(routes, contract.listRevisions, async (context, { params, query }) => {
     const loaded = await findJob(context, params.jobId);
-    const after = readCursor(query.cursor, 1);
+    const after = readCursor(query.cursor, z.tuple([places.count]));
     const seen = loaded.revisions
       .filter(
         (revision) =>
           revisionPolicy.see(context.actor, revisionFacts(loaded, revision)) &&
-          (!after || revision.sequence < Number(after[0])),
+          (!after || revision.sequence < after[0]),
       )
       .reverse();
     const shown = seen.slice(0, query.limit);
@@ -56,7 +57,7 @@ export function registerRevisionRoutes(routes: Routes): void {
       loaded,
       revision: await revisionView(context, loaded, revision),
       snapshot: snapshotOf(revision),
-      readerName: isInsider(context.actor) ? context.actor.name : "",
+      readerName: isInsider(context.actor) ? nameAt(context.actor, loaded.job.clientId) : "",
     });
   });
 

@@ -9,10 +9,6 @@ import { pageOf } from "../queries/page.ts";
 export function registerStockRoutes(routes: Routes): void {
   read(routes, contract.listStock, async (context, { query }) => {
     if (!stockPolicy.see(context.actor)) throw notFound("stock");
-    return pageOf(await listStock(context, query), query.limit, presentStockItem, ({ kind, name, id }) => [
-      kind,
-      name.toLowerCase(),
-      id,
-    ]);
+    return pageOf(await listStock(context, query), query.limit, presentStockItem, ({ id }) => [id]);
   });
 }

@@ -16,12 +16,15 @@ export const password = z
   .min(10, "A password has at least 10 characters.")
   .max(200, "A password has at most 200 characters.");
 export const instant = z.iso.datetime();
-export const day = z.iso.date();
+/** A calendar day of four-digit years that every part of ours can store. */
+export const day = z.iso
+  .date({ error: "Write a day that exists, like 2031-05-06.", abort: true })
+  .refine((text) => text >= "1900", "Write a day after 1900.");
 /** The secret part of a mailed or shared link. */
 export const token = z.string().regex(/^[A-Za-z0-9_-]{43}$/, "This link is not complete. Open it from the mail again.");
 export const sha256 = z.string().regex(/^[0-9a-f]{64}$/);
-/** C0 controls other than tab and line feed never belong in text that people typed. */
-const controls = /(?![\t\n])\p{Cc}/u;
+/** Controls other than tab and line feed never belong in text that people typed, nor half a surrogate pair. */
+const controls = /(?![\t\n])[\p{Cc}\p{Cs}]/u;
 export const writtenText = (longest: number) =>
   z
     .string()
@@ -43,6 +46,6 @@ export const writtenLine = (longest: number, whenEmpty: string) =>
     .trim()
     .min(1, whenEmpty)
     .max(longest, `At most ${longest} characters.`)
-    .refine((text) => !/\p{Cc}/u.test(text), "Remove the control characters.");
+    .refine((text) => !/[\p{Cc}\p{Cs}]/u.test(text), "Remove the control characters.");
 
 export const personName = writtenLine(120, "Write a name.");
