@@ -7,7 +7,12 @@ const mayPass = (error: unknown): boolean =>
 
 export const queryClient = new QueryClient({
   defaultOptions: {
-    queries: { staleTime: 10_000, retry: (failures, error) => failures < 2 && mayPass(error) },
-    mutations: { retry: false },
+    // Without a network a request fails and says so; by default it would wait in silence.
+    queries: {
+      networkMode: "always",
+      staleTime: 10_000,
+      retry: (failures, error) => failures < 2 && mayPass(error),
+    },
+    mutations: { networkMode: "always", retry: false },
   },
 });

@@ -3,9 +3,15 @@ export function Busy({ label, share }: { readonly label: string; readonly share?
   const percent = share === undefined ? undefined : Math.round(share * 100);
   return (
     <div className="space-y-1.5">
-      <p role="status" className="text-sm text-graphite">
-        {label}
-        {percent !== undefined && <span className="tabular-nums"> {percent} %</span>}
+      <p className="text-sm text-graphite">
+        <span role="status">{label}</span>
+        {/* Read out at each step it would drown everything else; the bar tells it to whoever asks. */}
+        {percent !== undefined && (
+          <span aria-hidden="true" className="tabular-nums">
+            {" "}
+            {percent} %
+          </span>
+        )}
       </p>
       <progress
         aria-label={label}

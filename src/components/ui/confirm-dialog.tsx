@@ -2,6 +2,7 @@ import { AlertDialog } from "radix-ui";
 import type { ReactNode } from "react";
 import { Button } from "./button.tsx";
 import { Notice } from "./notice.tsx";
+import { useReturnFocus } from "./use-return-focus.ts";
 
 type ConfirmDialogProps = {
   readonly open: boolean;
@@ -33,11 +34,15 @@ export function ConfirmDialog({
   error = null,
   onConfirm,
 }: ConfirmDialogProps) {
+  const focus = useReturnFocus();
   return (
     <AlertDialog.Root open={open} onOpenChange={onOpenChange}>
       <AlertDialog.Portal>
         <AlertDialog.Overlay className="fixed inset-0 z-40 bg-ink/40" />
-        <AlertDialog.Content className="fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] max-w-lg -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6">
+        <AlertDialog.Content
+          {...focus}
+          className="fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] max-w-lg -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6"
+        >
           <AlertDialog.Title className="font-serif text-xl font-bold text-ink">{title}</AlertDialog.Title>
           <AlertDialog.Description asChild>
             <div className="mt-2 space-y-3 text-base text-ink">{children}</div>

@@ -1,5 +1,6 @@
 import { Dialog as Primitive } from "radix-ui";
 import type { ReactNode } from "react";
+import { useReturnFocus } from "./use-return-focus.ts";
 
 type DialogProps = {
   readonly open: boolean;
@@ -11,11 +12,13 @@ type DialogProps = {
 
 /** A sheet laid over the page. Traps the focus and gives it back; Escape and the ground behind it close it. */
 export function Dialog({ open, onOpenChange, title, description, children }: DialogProps) {
+  const focus = useReturnFocus();
   return (
     <Primitive.Root open={open} onOpenChange={onOpenChange}>
       <Primitive.Portal>
         <Primitive.Overlay className="fixed inset-0 z-40 bg-ink/40" />
         <Primitive.Content
+          {...focus}
           {...(description ? {} : { "aria-describedby": undefined })}
           className="fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] max-w-xl -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6"
         >

@@ -23,9 +23,10 @@ export function useSpendLink() {
   return useMutation({ mutationFn: (token: string) => signInWithLink(token), onSuccess: forget });
 }
 
+/** Signs out and stays on the page, which asks anew who is there. */
 export function useSignOutHere() {
-  const forget = useForget();
-  return useMutation({ mutationFn: signOut, onSuccess: forget });
+  const client = useQueryClient();
+  return useMutation({ mutationFn: signOut, onSuccess: () => client.resetQueries() });
 }
 
 export const useRequestLink = () =>

@@ -1,62 +1,10 @@
 import { describe, expect, it } from "vitest";
 import type { Job } from "#shared/contracts/jobs.ts";
 import { nextActionOf } from "@/features/jobs/components/next-action.ts";
+import { all, buildJob, none } from "./build-job.ts";
 
 const jobId = "00000000-0000-4000-8000-000000000142";
 const revisionId = "00000000-0000-4000-8000-000000000302";
-const all = {
-  editBrief: true,
-  editMockup: true,
-  seeMockup: true,
-  issue: true,
-  move: true,
-  seeShopOnly: true,
-  giveConsent: false,
-  share: true,
-};
-const none = {
-  editBrief: false,
-  editMockup: false,
-  seeMockup: false,
-  issue: false,
-  move: false,
-  seeShopOnly: false,
-  giveConsent: false,
-  share: false,
-};
-
-const buildJob = (change: Partial<Job>): Job => ({
-  id: jobId,
-  number: "CL-0142",
-  title: "Lobby sign",
-  state: "mockup",
-  whoseMove: "ours",
-  nextStep: "",
-  client: { id: jobId, name: "Orrery Books" },
-  dueOn: null,
-  brief: {
-    widthMm: null,
-    heightMm: null,
-    place: null,
-    wall: "",
-    viewingDistanceMm: null,
-    lighting: "",
-    quantity: 1,
-    brandColours: "",
-    about: "",
-    words: "",
-  },
-  briefMissing: [],
-  approvers: [],
-  latest: null,
-  approved: null,
-  openNotes: 0,
-  consent: { given: false, at: null },
-  lastEvent: null,
-  createdAt: "2026-11-30T09:00:00.000Z",
-  can: all,
-  ...change,
-});
 const latest = { revisionId, letter: "B", state: "issued" };
 const sheet = `/shop/s/sheets/${revisionId}`;
 const mockup = `/shop/s/jobs/${jobId}/mockup`;

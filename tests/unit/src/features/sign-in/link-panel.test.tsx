@@ -22,12 +22,17 @@ const open: Link = {
 };
 let link = open;
 let refused = false;
+let me = nobody;
 let server: Awaited<ReturnType<typeof startAnswers>>;
 
 beforeAll(async () => {
   server = await startAnswers(({ path }) => {
     if (path === "/api/links/inspect") return { status: 200, json: link };
-    if (path === "/api/me") return { status: 200, json: nobody };
+    if (path === "/api/me") return { status: 200, json: me };
+    if (path === "/auth/signout") {
+      me = nobody;
+      return { status: 200, json: { url: "http://x.example/" } };
+    }
     if (path === "/auth/csrf") return { status: 200, json: { csrfToken: "t0" } };
     if (path === "/api/links/fresh") return { status: 202 };
     if (path === "/api/invitations/accept") {
@@ -40,6 +45,7 @@ afterAll(() => server.end());
 beforeEach(() => {
   link = open;
   refused = false;
+  me = nobody;
   server.asked.length = 0;
 });
 
@@ -119,5 +125,18 @@ describe("the page of a mailed link", () => {
     await openPage();
     const way = [...document.querySelectorAll("a")].find((a) => a.textContent === "Sign in to accept");
     expect(way?.getAttribute("href")).toBe("/sign-in?next=%2Flink%2Fsecret-of-the-link");
+  });
+
+  it("lets someone else's session go, and then asks who is there", async () => {
+    link = { ...open, purpose: "join shop", knownPerson: true };
+    me = {
+      ...nobody,
+      person: { id: "p1", name: "Ida Fenn", email: "ida@saltgrass.example", hasPassword: true },
+      session: "password",
+    };
+    await openPage();
+    await until(() => document.body.textContent?.includes("You are signed in as ida@saltgrass.example."));
+    await press(button("That is not me"));
+    await until(() => document.body.textContent?.includes("Sign in with it to accept."));
   });
 });
