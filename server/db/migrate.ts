@@ -1,21 +1,49 @@
 import { runMigrations } from "graphile-worker";
-import type { Sequelize } from "sequelize";
-import { SequelizeStorage, Umzug } from "umzug";
+import { QueryTypes, type Sequelize } from "sequelize";
+import { Umzug } from "umzug";
 import { connect } from "./connection.ts";
 import type { Migration } from "./migration.ts";
 import { migrations } from "./migrations/list.ts";
 
-/** Umzug over our migrations; each runs in a transaction of its own. */
+/**
+ * Umzug over our migrations. Each runs in one transaction together with the note that it was run, so that a process
+ * killed in the middle leaves either both or nothing; two processes at once take turns.
+ */
 export function migrator(sequelize: Sequelize, steps: readonly Migration[] = migrations) {
-  const within = (run: (sql: (text: string) => Promise<void>) => Promise<void>) =>
-    sequelize.transaction((transaction) =>
-      run(async (text) => {
+  const inTurn = (name: string, { isUp }: { isUp: boolean }, run: Migration["up"]): Promise<void> =>
+    sequelize.transaction(async (transaction) => {
+      await sequelize.query("select pg_advisory_xact_lock(hashtext('standproud migrations'))", { transaction });
+      const [noted] = await sequelize.query(
+        isUp
+          ? "insert into migrations (name) values (:name) on conflict do nothing returning name"
+          : "delete from migrations where name = :name returning name",
+        { replacements: { name }, transaction },
+      );
+      // Another process did it while this one waited.
+      if (noted.length === 0) return;
+      await run(async (text) => {
         await sequelize.query(text, { transaction });
-      }),
-    );
+      });
+    });
   return new Umzug({
-    migrations: steps.map(({ name, up, down }) => ({ name, up: () => within(up), down: () => within(down) })),
-    storage: new SequelizeStorage({ sequelize, tableName: "migrations" }),
+    migrations: steps.map(({ name, up, down }) => ({
+      name,
+      up: () => inTurn(name, { isUp: true }, up),
+      down: () => inTurn(name, { isUp: false }, down),
+    })),
+    storage: {
+      async executed() {
+        await sequelize.query(
+          "select pg_advisory_xact_lock(hashtext('standproud migrations')); create table if not exists migrations (name text primary key)",
+        );
+        const rows = await sequelize.query<{ name: string }>("select name from migrations order by name", {
+          type: QueryTypes.SELECT,
+        });
+        return rows.map(({ name }) => name);
+      },
+      logMigration: async () => undefined,
+      unlogMigration: async () => undefined,
+    },
     logger: undefined,
   });
 }

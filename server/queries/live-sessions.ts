@@ -6,28 +6,35 @@ import { Session } from "../models/session.ts";
 
 const live = (personId: string, now: Date) => ({ personId, endedAt: null, expiresAt: { [Op.gt]: now } });
 
-/** Where a person is signed in, the newest first; what nobody could need more than a hundred of. */
-export function liveSessionsOf({ now, transaction }: ReadContext, personId: string): Promise<Session[]> {
+/** A session begun by a mailed link looks after its like only: whoever reads a client's mail is not yet its person. */
+const within = ({ person, session }: LiveSession, now: Date) => ({
+  ...live(person.id, now),
+  ...(session.began === "link" ? { began: "link" as const } : {}),
+});
+
+/** Where the person of a session is signed in, the newest first; nobody needs more than a hundred. */
+export function liveSessionsOf({ now, transaction }: ReadContext, own: LiveSession): Promise<Session[]> {
   const order: [string, string][] = [
     ["createdAt", "DESC"],
     ["id", "DESC"],
   ];
-  return Session.findAll({ where: live(personId, now), order, limit: 100, transaction });
+  return Session.findAll({ where: within(own, now), order, limit: 100, transaction });
 }
 
-/** One live session of a person; null when it is someone else's, or ended. */
+/** One of them; null when it is someone else's, or ended. */
 export function liveSessionOf(
   { now, transaction }: ReadContext,
-  { personId, sessionId }: { personId: string; sessionId: string },
+  own: LiveSession,
+  sessionId: string,
 ): Promise<Session | null> {
-  return Session.findOne({ where: { ...live(personId, now), id: sessionId }, transaction });
+  return Session.findOne({ where: { ...within(own, now), id: sessionId }, transaction });
 }
 
 /** The session a request came with and its person; null when nobody is signed in. */
 export async function ownSession(context: ReadContext): Promise<LiveSession | null> {
-  const { actor, transaction } = context;
+  const { actor, now, transaction } = context;
   if (actor.kind === "nobody") return null;
-  const session = await liveSessionOf(context, actor);
+  const session = await Session.findOne({ where: { ...live(actor.personId, now), id: actor.sessionId }, transaction });
   const person = session && (await Person.findByPk(session.personId, { transaction }));
   return session && person ? { session, person } : null;
 }

@@ -1,10 +1,11 @@
 import * as contract from "#shared/contracts/account.ts";
 import { endSession } from "../commands/end-session.ts";
 import { changePassword } from "../commands/set-password.ts";
-import { AppError, notFound } from "../http/app-error.ts";
+import { AppError, notAllowed, notFound } from "../http/app-error.ts";
 import type { ReadContext } from "../http/context.ts";
 import { type Routes, read, write } from "../http/route.ts";
 import type { LiveSession } from "../http/session.ts";
+import { accountPolicy } from "../policies/account.ts";
 import { presentMe } from "../presenters/me.ts";
 import { presentSession } from "../presenters/session.ts";
 import { liveSessionOf, liveSessionsOf, ownSession } from "../queries/live-sessions.ts";
@@ -14,6 +15,9 @@ export function registerAccountRoutes(routes: Routes): void {
 
   write(routes, contract.changeAccount, async (context, { body }) => {
     const live = await signedIn(context);
+    if (!accountPolicy.rename({ began: live.session.began, hasPassword: live.person.passwordHash !== null })) {
+      throw notAllowed("Sign in with your password to change your name.");
+    }
     await live.person.update({ name: body.name }, { transaction: context.transaction });
     return presentMe(live, context.transaction);
   });
@@ -25,14 +29,13 @@ export function registerAccountRoutes(routes: Routes): void {
   });
 
   read(routes, contract.listSessions, async (context) => {
-    const { person, session } = await signedIn(context);
-    const sessions = await liveSessionsOf(context, person.id);
-    return { items: sessions.map((each) => presentSession(each, { currentId: session.id })) };
+    const own = await signedIn(context);
+    const sessions = await liveSessionsOf(context, own);
+    return { items: sessions.map((each) => presentSession(each, { currentId: own.session.id })) };
   });
 
   write(routes, contract.endSession, async (context, { params }) => {
-    const { person } = await signedIn(context);
-    const session = await liveSessionOf(context, { personId: person.id, sessionId: params.sessionId });
+    const session = await liveSessionOf(context, await signedIn(context), params.sessionId);
     if (!session) throw notFound("session");
     await endSession({ sessionId: session.id, now: context.now, transaction: context.transaction });
     return undefined;

@@ -187,6 +187,10 @@ describe("whom a session speaks for", () => {
     expect(me.contactOf).toEqual([{ shop: shop.slug, shopName: shop.name, client: "Tern & Daughters" }]);
     expect((await byLink.get(getShop, { params: { shop: shop.slug } })).can.manageTeam).toBe(false);
     const byPassword = await signInAs(app, { email });
+    expect((await byLink.refusal(changeAccount, { body: { name: "Reader" } })).code).toBe("not_allowed");
+    const staffSession = (await byPassword.get(listSessions)).items.find(({ began }) => began === "password")?.id ?? "";
+    expect((await byLink.get(listSessions)).items.map(({ began }) => began)).toEqual(["link"]);
+    expect((await byLink.refusal(endSession, { params: { sessionId: staffSession } })).code).toBe("not_found");
     expect((await byPassword.get(getShop, { params: { shop: shop.slug } })).can.manageTeam).toBe(true);
   });
 

@@ -56,6 +56,19 @@ describe("migrations", () => {
     expect(await schema()).toEqual(before);
   });
 
+  it("are run once when two processes start at the same moment", async () => {
+    const empty = await createTestDatabase();
+    const both = [connect(empty.ownerUrl, { poolMax: 1 }), connect(empty.ownerUrl, { poolMax: 1 })] as const;
+    try {
+      await migrator(both[0]).down({ to: 0 });
+      await Promise.all(both.map((sequelize) => migrator(sequelize).up()));
+      expect((await migrator(both[1]).executed()).map(({ name }) => name)).toEqual(migrations.map(({ name }) => name));
+    } finally {
+      await Promise.all(both.map((sequelize) => sequelize.close()));
+      await empty.drop();
+    }
+  });
+
   it("leave nothing of a step that fails half way", async () => {
     const sequelize = connect(database.ownerUrl, { poolMax: 1 });
     try {
