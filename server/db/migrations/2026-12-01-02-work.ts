@@ -28,7 +28,8 @@ create table jobs (
   check ((state = 'on hold') = (held_from is not null)),
   check ((consent_at is null) = (consent_by is null))
 );
-create index jobs_by_due on jobs (shop_id, whose_move, due_on, id);
+-- As queries/job-order.ts sorts them for staff.
+create index jobs_by_due on jobs (shop_id, (case whose_move when 'ours' then 0 when 'client' then 1 when 'nobody' then 2 end), coalesce(due_on, '9999-12-31'), id);
 create index jobs_by_newest on jobs (shop_id, created_at, id);
 create index jobs_of_client on jobs (shop_id, client_id, created_at, id);
 
