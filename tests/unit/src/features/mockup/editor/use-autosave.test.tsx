@@ -1,0 +1,125 @@
+// @vitest-environment jsdom
+import { act } from "react";
+import { afterEach, beforeEach, describe, expect, it } from "vitest";
+import type { Mockup } from "#shared/contracts/mockups.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import { findDraft } from "@/features/mockup/editor/kept-draft.ts";
+import { type Saving, useAutosave } from "@/features/mockup/editor/use-autosave.ts";
+import { type Answer, startAnswers } from "../../../support/answers.ts";
+import { render, until } from "../../../support/render.tsx";
+import { emptyMockup } from "../sample-mockup.ts";
+
+const place = { personId: "p1", shop: "copperlark-signs", jobId: "0b8f7c52-2c1e-4a55-9d55-0a2c5a1f9c11" };
+const start: Mockup = {
+  version: 3,
+  document: emptyMockup(),
+  savedAt: null,
+  savedBy: null,
+  can: { edit: true, issue: true },
+};
+const edited = emptyMockup({ quantity: 2 });
+const saved = (version: number, document: MockupDocument): Mockup => ({
+  ...start,
+  version,
+  document,
+  savedAt: "2026-03-04T09:41:00.000Z",
+  savedBy: "Robin",
+});
+
+let saving: Saving;
+function Desk({ document }: { document: MockupDocument }) {
+  saving = useAutosave({ mockup: start, document, place, onSaved: () => undefined });
+  return null;
+}
+
+let answers: Awaited<ReturnType<typeof startAnswers>>;
+let answer: (body: unknown) => Answer;
+let desk: Awaited<ReturnType<typeof render>>;
+beforeEach(async () => {
+  window.localStorage.clear();
+  answer = () => ({ status: 200, json: saved(4, edited) });
+  answers = await startAnswers(({ body }) => answer(body));
+  desk = await render(<Desk document={start.document} />);
+});
+afterEach(async () => {
+  await desk.end();
+  answers.end();
+});
+
+/** The answer comes while the page goes on drawing, so it is waited for outside of the act that asks. */
+async function saveNow(): Promise<number | null> {
+  const answered: (number | null)[] = [];
+  await act(async () => {
+    void saving.saveNow().then((version) => answered.push(version));
+  });
+  await until(() => answered.length > 0);
+  return answered[0] ?? null;
+}
+
+describe("saving what is on the desk", () => {
+  it("sends the edit with the version it began from, and is saved at the answer's version", async () => {
+    await desk.redraw(<Desk document={edited} />);
+    expect(saving.unsaved).toBe(true);
+    await until(() => saving.autosave.state === "saved" && saving.autosave.version === 4);
+    expect(answers.asked).toHaveLength(1);
+    expect(answers.asked[0]).toMatchObject({ method: "PUT", body: { version: 3, document: { quantity: 2 } } });
+    expect(saving.unsaved).toBe(false);
+  });
+
+  it("stops at a newer version, keeps the work here, and saves over it when told to keep mine", async () => {
+    const newer = saved(9, emptyMockup({ quantity: 7 }));
+    answer = () => ({
+      status: 409,
+      json: { type: "/problems/stale", title: "Stale", status: 409, code: "stale", extra: { newer } },
+    });
+    await desk.redraw(<Desk document={edited} />);
+    await until(() => saving.autosave.state === "stale");
+    expect(findDraft(window.localStorage, place)?.document).toEqual(edited);
+    answer = () => ({ status: 200, json: saved(10, edited) });
+    await act(async () => saving.keepMine());
+    await until(() => saving.autosave.state === "saved");
+    expect(answers.asked.at(-1)).toMatchObject({ body: { version: 9, document: { quantity: 2 } } });
+    expect(findDraft(window.localStorage, place)).toBeNull();
+  });
+
+  it("keeps the work here while the server can't be reached, and saves once it is back", async () => {
+    answer = () => ({ status: 503, json: {} });
+    await desk.redraw(<Desk document={edited} />);
+    await until(() => saving.autosave.state === "offline");
+    expect(findDraft(window.localStorage, place)?.version).toBe(3);
+    answer = () => ({ status: 200, json: saved(4, edited) });
+    await act(async () => window.dispatchEvent(new Event("online")));
+    await until(() => saving.autosave.state === "saved");
+    expect(findDraft(window.localStorage, place)).toBeNull();
+  });
+
+  it("saves at once when a revision is to be issued, and says so when that can't be done", async () => {
+    await desk.redraw(<Desk document={edited} />);
+    expect(await saveNow()).toBe(4);
+    answer = () => ({
+      status: 403,
+      json: {
+        type: "/problems/not_allowed",
+        title: "You may look, but not do this.",
+        status: 403,
+        code: "not_allowed",
+      },
+    });
+    await desk.redraw(<Desk document={emptyMockup({ quantity: 5 })} />);
+    expect(await saveNow()).toBeNull();
+    expect(saving.autosave).toMatchObject({ state: "refused", why: "You may look, but not do this." });
+  });
+
+  it("asks the browser to hold the page while there is unsaved work", async () => {
+    const leave = () => {
+      const event = new Event("beforeunload", { cancelable: true });
+      window.dispatchEvent(event);
+      return event.defaultPrevented;
+    };
+    expect(leave()).toBe(false);
+    await desk.redraw(<Desk document={edited} />);
+    expect(leave()).toBe(true);
+    await until(() => saving.autosave.state === "saved" && saving.autosave.version === 4);
+    expect(leave()).toBe(false);
+  });
+});
