@@ -7,6 +7,7 @@ import { email, token as linkToken } from "#shared/contracts/common.ts";
 import { endSession } from "../commands/end-session.ts";
 import { signInWithLink } from "../commands/sign-in-with-link.ts";
 import { signInWithPassword } from "../commands/sign-in-with-password.ts";
+import { notFound } from "../http/app-error.ts";
 import type { Services } from "../http/context.ts";
 import { liveSession, readSession, sessionCookie, usesSecureCookies } from "../http/session.ts";
 
@@ -26,11 +27,18 @@ const passwordFields = z.object({ email, password: z.string().min(1).max(200) })
 const linkFields = z.object({ token: linkToken });
 const longestSessionS = 30 * 24 * 3600;
 
+/**
+ * What of Auth.js is reached from outside, letter for letter. It reads an address more leniently than the router does
+ * (empty parts are skipped), so that anything else would be a way round the limits on these.
+ */
+const reachable = new Set(["/csrf", "/session", "/signout", "/callback/password", "/callback/link"]);
+
 /** Sign-in and sign-out under /auth, with the public address in place of whatever host the request names. */
 export function authentication(services: Services): RequestHandler {
   const home = new URL(services.env.PUBLIC_URL);
   const handle = ExpressAuth(configOf(services));
   return (request, response, next) => {
+    if (!reachable.has(request.path)) return next(notFound("page"));
     request.headers.host = home.host;
     Object.defineProperty(request, "protocol", { value: home.protocol.slice(0, -1) });
     response.setHeader("Cache-Control", "no-store");
