@@ -159,10 +159,23 @@ describe("removing a member", () => {
     const second = await buildMember({ shop: first.shop });
     const [one, two] = [await signInAs(app, first), await signInAs(app, second)];
     const shop = first.shop.slug;
-    const answers = await Promise.all([
+    const { sequelize } = app.services;
+    // Holds both rows until both requests have begun, so that they really meet.
+    const holding = await sequelize.transaction();
+    const where = { shopId: first.shop.id };
+    await Membership.findAll({ where, lock: holding.LOCK.UPDATE, transaction: holding });
+    const asked = Promise.all([
       one.ask(removeMember, { params: { shop, memberId: second.membership.id } }),
       two.ask(removeMember, { params: { shop, memberId: first.membership.id } }),
     ]);
+    for (let waiting = 0, round = 0; waiting < 2 && round < 1000; round += 1) {
+      const [rows] = await sequelize.query(
+        "select count(*)::int as n from pg_stat_activity where datname = current_database() and wait_event_type = 'Lock'",
+      );
+      waiting = (rows[0] as { n: number }).n;
+    }
+    await holding.commit();
+    const answers = await asked;
     expect(answers.filter(({ status }) => status === 204)).toHaveLength(1);
     expect(await Membership.count({ where: { shopId: first.shop.id, role: "owner", endedAt: null } })).toBe(1);
   });
