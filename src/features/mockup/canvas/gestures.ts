@@ -1,6 +1,6 @@
 import type { Canvas, TPointerEvent } from "fabric/es";
 import type { Point } from "#shared/geometry/path.ts";
-import { type DrawingView, spotOnDrawing, viewFollowing, viewScaled } from "@/lib/drawing-view.ts";
+import { type DrawingView, spotOnDrawing, viewFollowing } from "@/lib/drawing-view.ts";
 
 /** What lies under a finger. */
 export type Touched = { readonly kind: "piece" | "hole"; readonly id: string };
@@ -8,18 +8,23 @@ export type Touched = { readonly kind: "piece" | "hole"; readonly id: string };
 /** Keys held while pressing or dragging: `more` adds to what is chosen, `free` lets nothing catch. */
 export type Held = { readonly more: boolean; readonly free: boolean };
 
+/** A place in the window, px. */
+type Place = { readonly x: number; readonly y: number };
+
 /** What the canvas does for a gesture. Points are mm of the board, view and places px of the window. */
 export type GestureHost = {
   readonly view: () => DrawingView;
   readonly fit: () => DrawingView;
   readonly showView: (view: DrawingView) => void;
+  /** Looks closer or farther about a place. False when there is nothing to change, so that the page may scroll. */
+  readonly zoom: (factor: number, about: Place) => boolean;
   readonly touched: (point: Point) => Touched | null;
   /** Whether a drag from empty ground, or with the space bar down, looks around. */
   readonly spaceDown: () => boolean;
   readonly press: (touched: Touched | null, held: Held) => void;
   readonly pressTwice: (touched: Touched) => void;
-  /** `by` is measured from where the hand took hold. False when nothing can be dragged. */
-  readonly drag: (touched: Touched, from: Point, by: { dx: number; dy: number }, held: Held) => void;
+  /** `by` is mm from where the hand took hold. */
+  readonly drag: (touched: Touched, by: { dx: number; dy: number }, held: Held) => void;
   readonly drop: () => void;
   readonly giveUp: () => void;
 };
@@ -28,7 +33,6 @@ export type GestureHost = {
 const dragFromPx = 4;
 const twiceWithinMs = 400;
 
-type Place = { readonly x: number; readonly y: number };
 type Pan = { readonly view: DrawingView; readonly from: ReadonlyMap<number, Place> };
 type Hold = { readonly touched: Touched; readonly place: Place; readonly point: Point; moved: boolean };
 
@@ -83,7 +87,7 @@ export function listenToCanvas(canvas: Canvas, host: GestureHost): () => void {
     if (!hold.moved && Math.hypot(place.x - hold.place.x, place.y - hold.place.y) < dragFromPx) return;
     hold.moved = true;
     const point = pointOf(place);
-    host.drag(hold.touched, hold.point, { dx: point.x - hold.point.x, dy: point.y - hold.point.y }, heldOf(e));
+    host.drag(hold.touched, { dx: point.x - hold.point.x, dy: point.y - hold.point.y }, heldOf(e));
   }
 
   function handleUp({ e }: { e: TPointerEvent }) {
@@ -94,10 +98,9 @@ export function listenToCanvas(canvas: Canvas, host: GestureHost): () => void {
   }
 
   function handleWheel({ e, viewportPoint }: { e: WheelEvent; viewportPoint: Place }) {
-    e.preventDefault();
     const notch = e.deltaMode === WheelEvent.DOM_DELTA_PIXEL ? e.deltaY : e.deltaY * 33;
     const factor = Math.exp(-notch * (e.ctrlKey ? 0.01 : 0.0018));
-    host.showView(viewScaled(host.view(), factor, viewportPoint, host.fit()));
+    if (host.zoom(factor, { x: viewportPoint.x, y: viewportPoint.y })) e.preventDefault();
   }
 
   function handleCancel() {

@@ -1,20 +1,21 @@
 import { useEffect } from "react";
 
-/** Ctrl Z and Ctrl Shift Z (or Y), with the Command key on a Mac, wherever the focus is but in a field: there they are the field's own. */
-export function useUndoKeys(undo: () => void, redo: () => void): void {
+/**
+ * Ctrl Z and Ctrl Shift Z (or Y), with the Command key on a Mac, wherever the focus is but in a field, where they are the
+ * field's own. `step` must stay the same function, as a reducer's dispatch does.
+ */
+export function useUndoKeys(step: (action: { readonly kind: "undo" | "redo" }) => void): void {
   useEffect(() => {
     const listen = (event: KeyboardEvent) => {
       if (!(event.ctrlKey || event.metaKey) || event.altKey || isField(event.target)) return;
       const key = event.key.toLowerCase();
-      const isRedo = key === "y" || (key === "z" && event.shiftKey);
-      if (!isRedo && key !== "z") return;
+      if (key !== "z" && key !== "y") return;
       event.preventDefault();
-      if (isRedo) redo();
-      else undo();
+      step({ kind: key === "y" || event.shiftKey ? "redo" : "undo" });
     };
     window.addEventListener("keydown", listen);
     return () => window.removeEventListener("keydown", listen);
-  }, [undo, redo]);
+  }, [step]);
 }
 
 function isField(target: EventTarget | null): boolean {

@@ -3,18 +3,16 @@ import { useDesk } from "../editor/desk-context.ts";
 import { withCarried } from "../model/carried.ts";
 import { centrePieces, turnPieces } from "../model/commands/pieces.ts";
 import { WordButton } from "./cell-controls.tsx";
+import type { DeskDialog } from "./desk-dialogs.tsx";
 
 type DeskBarProps = {
   readonly client: string;
   readonly title: string;
-  readonly onBringIn: () => void;
-  readonly onPlate: () => void;
-  readonly onBoard: () => void;
-  readonly onKeys: () => void;
+  readonly onOpen: (dialog: DeskDialog) => void;
 };
 
 /** What can be brought in, and how what is chosen is set out. */
-export function DeskBar({ client, title, onBringIn, onPlate, onBoard, onKeys }: DeskBarProps) {
+export function DeskBar({ client, title, onOpen }: DeskBarProps) {
   const { selection, figures, edit, choose } = useDesk();
   const { pieceIds } = selection;
   const idle = pieceIds.length === 0;
@@ -25,12 +23,16 @@ export function DeskBar({ client, title, onBringIn, onPlate, onBoard, onKeys }: 
 
   return (
     <div className="flex flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-1 sm:px-6">
-      <h1 className="font-sans text-sm text-ink">
-        {client}, {title}, <span className="font-semibold">mockup</span>
+      <h1 className="flex max-w-72 min-w-0 font-sans text-sm text-ink" title={`${client}, ${title}`}>
+        <span className="truncate">
+          {client}, {title}
+        </span>
+        <span className="whitespace-pre">, </span>
+        <span className="font-semibold">mockup</span>
       </h1>
       <Group title="Bring in">
-        <WordButton onClick={onBringIn}>artwork</WordButton>
-        <WordButton onClick={onPlate}>a plate</WordButton>
+        <WordButton onClick={() => onOpen("artwork")}>artwork</WordButton>
+        <WordButton onClick={() => onOpen("plate")}>a plate</WordButton>
       </Group>
       <Group title="Set out">
         <WordButton disabled={idle} onClick={() => centre("across")}>
@@ -53,8 +55,8 @@ export function DeskBar({ client, title, onBringIn, onPlate, onBoard, onKeys }: 
         </WordButton>
       </Group>
       <span className="ml-auto flex items-center gap-2">
-        <WordButton onClick={onBoard}>Board</WordButton>
-        <WordButton onClick={onKeys}>Keys</WordButton>
+        <WordButton onClick={() => onOpen("board")}>Board</WordButton>
+        <WordButton onClick={() => onOpen("keys")}>Keys</WordButton>
       </span>
     </div>
   );

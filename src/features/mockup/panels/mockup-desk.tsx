@@ -1,4 +1,4 @@
-import { type ReactNode, useEffect, useEffectEvent, useMemo, useReducer, useRef, useState } from "react";
+import { type ReactNode, useMemo, useReducer, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
@@ -7,27 +7,23 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { useRoom } from "@/lib/use-room.ts";
 import { CanvasPanel } from "../canvas/canvas-panel.tsx";
-import { fitBoard, marginsOf, paperScaleAt, usualMargins, viewAt } from "../canvas/view-of-board.ts";
+import { viewAt } from "../canvas/view-of-board.ts";
 import { type Desk, DeskContext } from "../editor/desk-context.ts";
 import { useAutosave } from "../editor/use-autosave.ts";
 import { useKeptDraft } from "../editor/use-kept-draft.ts";
 import { useUndoKeys } from "../editor/use-undo-keys.ts";
-import { useEngine } from "../engine/use-engine.ts";
-import { type Drag, documentOfDrag } from "../model/drag.ts";
+import { useDeskPicture } from "../engine/use-desk-picture.ts";
+import type { Drag } from "../model/drag.ts";
 import { nextEditor, startEditor } from "../model/editor.ts";
-import { isSame } from "../model/same.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { stockChoices } from "../model/stock-choices.ts";
-import { BoardDialog } from "./board-dialog.tsx";
-import { BringInDialog } from "./bring-in-dialog.tsx";
 import { DeskBar } from "./desk-bar.tsx";
+import { type DeskDialog, DeskDialogs } from "./desk-dialogs.tsx";
 import { DeskTools } from "./desk-tools.tsx";
 import { FindingsPanel } from "./findings-panel.tsx";
 import { KeptDraftNotice } from "./kept-draft-notice.tsx";
-import { KeysDialog } from "./keys-dialog.tsx";
 import { LeaveDialog } from "./leave-dialog.tsx";
 import { PiecesPanel } from "./pieces-panel.tsx";
-import { PlateDialog } from "./plate-dialog.tsx";
 import { SchedulePanel } from "./schedule-panel.tsx";
 import { SectionPanel } from "./section-panel.tsx";
 import { StaleDialog } from "./stale-dialog.tsx";
@@ -47,17 +43,14 @@ export type MockupDeskProps = {
   readonly renderTools: (tools: ReactNode) => ReactNode;
 };
 
-type OpenDialog = "artwork" | "plate" | "board" | "keys" | null;
-
 /** The mockup at work: elevation and section above, schedule and dry fit below. */
 export function MockupDesk(props: MockupDeskProps) {
   const { shop, unit, personId, job, mockup, jobPath, onSaved, onIssued, renderTools } = props;
   const [editor, dispatch] = useReducer(nextEditor, mockup.document, startEditor);
   const [drag, setDrag] = useState<Drag | null>(null);
   const [view, setView] = useState<DrawingView | null>(null);
-  const [margins, setMargins] = useState(usualMargins);
   const [finding, setFinding] = useState<Finding | null>(null);
-  const [dialog, setDialog] = useState<OpenDialog>(null);
+  const [dialog, setDialog] = useState<DeskDialog | null>(null);
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
   const document = editor.history.present;
@@ -66,11 +59,6 @@ export function MockupDesk(props: MockupDeskProps) {
   const kept = useKeptDraft(place, mockup);
   const stock = useMemo(() => stockChoices(props.stock), [props.stock]);
 
-  const { width, height } = document.board;
-  const fit = useMemo(
-    () => fitBoard({ width, height }, margins, room ?? { width: 1100, height: 520 }),
-    [width, height, margins, room],
-  );
   const whereItHangs = job.brief.place ?? "inside";
   const context = useMemo(
     () => ({
@@ -81,32 +69,8 @@ export function MockupDesk(props: MockupDeskProps) {
     }),
     [unit, whereItHangs, stock],
   );
-  const paperScale = paperScaleAt(fit.scale);
-  const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
-  const isDragging = drag !== null;
-  const input = useMemo(
-    () => ({
-      document: wanted,
-      context,
-      paperScale,
-      dimensions: true,
-      what: isDragging ? ("figures" as const) : ("all" as const),
-    }),
-    [wanted, context, paperScale, isDragging],
-  );
-  const { drawn, figures: made, failure } = useEngine(room === null ? null : input);
-  const isCurrent = drawn?.input === input;
-
-  // The window follows the rows of dimensions, but never under a hand that is dragging.
-  useEffect(() => {
-    if (drawn === null || isDragging) return;
-    const next = marginsOf(drawn.elevation, drawn.input.document.board, drawn.input.paperScale);
-    setMargins((before) => (isSame(before, next) ? before : next));
-  }, [drawn, isDragging]);
-
-  const undoStep = useEffectEvent(() => dispatch({ kind: "undo" }));
-  const redoStep = useEffectEvent(() => dispatch({ kind: "redo" }));
-  useUndoKeys(undoStep, redoStep);
+  const { fit, drawn, figures, failure, isCurrent } = useDeskPicture({ document, drag, context, room });
+  useUndoKeys(dispatch);
 
   const desk = useMemo(
     (): Desk => ({
@@ -115,15 +79,15 @@ export function MockupDesk(props: MockupDeskProps) {
       unit,
       stock,
       place: whereItHangs,
-      figures: made?.figures ?? null,
-      figuresOf: made?.of ?? document,
+      figures: figures?.figures ?? null,
+      figuresOf: figures?.of ?? document,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
       choose: (selection) => {
         setFinding(null);
         dispatch({ kind: "choose", selection });
       },
     }),
-    [document, editor.selection, unit, stock, whereItHangs, made],
+    [document, editor.selection, unit, stock, whereItHangs, figures],
   );
 
   function show(next: Finding) {
@@ -140,7 +104,6 @@ export function MockupDesk(props: MockupDeskProps) {
     dispatch({ kind: "edit", label: "Keep the newer version", change: () => theirs });
   }
 
-  const closeDialog = (open: boolean) => setDialog(open ? dialog : null);
   return (
     <DeskContext value={desk}>
       {renderTools(
@@ -157,14 +120,7 @@ export function MockupDesk(props: MockupDeskProps) {
           onIssued={onIssued}
         />,
       )}
-      <DeskBar
-        client={job.client.name}
-        title={job.title}
-        onBringIn={() => setDialog("artwork")}
-        onPlate={() => setDialog("plate")}
-        onBoard={() => setDialog("board")}
-        onKeys={() => setDialog("keys")}
-      />
+      <DeskBar client={job.client.name} title={job.title} onOpen={setDialog} />
       {kept.draft && (
         <KeptDraftNotice
           draft={kept.draft}
@@ -199,16 +155,7 @@ export function MockupDesk(props: MockupDeskProps) {
         </div>
         <FindingsPanel dryFit={drawn?.dryFit ?? null} isCurrent={isCurrent} shown={finding} onShow={show} />
       </div>
-      <BringInDialog
-        open={dialog === "artwork"}
-        onOpenChange={closeDialog}
-        shop={shop}
-        jobId={job.id}
-        jobPath={jobPath}
-      />
-      <PlateDialog open={dialog === "plate"} onOpenChange={closeDialog} />
-      <BoardDialog open={dialog === "board"} onOpenChange={closeDialog} />
-      <KeysDialog open={dialog === "keys"} onOpenChange={closeDialog} />
+      <DeskDialogs open={dialog} onClose={() => setDialog(null)} shop={shop} jobId={job.id} jobPath={jobPath} />
       <StaleDialog
         newer={saving.autosave.state === "stale" ? saving.autosave.newer : null}
         onTheirs={keepTheirs}

@@ -1,0 +1,44 @@
+import { useEffect, useMemo, useState } from "react";
+import type { DryFitContext } from "#shared/dry-fit/rule.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Size } from "@/lib/drawing-view.ts";
+import { fitBoard, marginsOf, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
+import { type Drag, documentOfDrag } from "../model/drag.ts";
+import { isSame } from "../model/same.ts";
+import { useEngine } from "./use-engine.ts";
+
+type Wanted = {
+  readonly document: MockupDocument;
+  readonly drag: Drag | null;
+  readonly context: DryFitContext;
+  /** The window of the elevation; null before it was measured. */
+  readonly room: Size | null;
+};
+
+/** The size that a window is taken to have before it was measured, px. */
+const usualRoom = { width: 1100, height: 520 };
+
+/** Figures, elevation and dry fit of the desk, and the view that shows the whole board with its dimensions. */
+export function useDeskPicture({ document, drag, context, room }: Wanted) {
+  const [margins, setMargins] = useState(usualMargins);
+  const { width, height } = document.board;
+  const fit = useMemo(() => fitBoard({ width, height }, margins, room ?? usualRoom), [width, height, margins, room]);
+  const paperScale = paperScaleAt(fit.scale);
+  const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
+  const what = drag === null ? "all" : "figures";
+  const input = useMemo(
+    () => ({ document: wanted, context, paperScale, dimensions: true, what }) as const,
+    [wanted, context, paperScale, what],
+  );
+  const { drawn, figures, failure } = useEngine(room === null ? null : input);
+
+  // The window follows the rows of dimensions, but never under a hand that is dragging.
+  const isDragging = drag !== null;
+  useEffect(() => {
+    if (drawn === null || isDragging) return;
+    const next = marginsOf(drawn.elevation, drawn.input.document.board, drawn.input.paperScale);
+    setMargins((before) => (isSame(before, next) ? before : next));
+  }, [drawn, isDragging]);
+
+  return { fit, drawn, figures, failure, isCurrent: drawn?.input === input };
+}
