@@ -69,10 +69,11 @@ export async function addNote(
 function refuseUnknownSpot(anchor: Anchor, snapshot: Snapshot | null): void {
   if (anchor.on === "whole" || !snapshot) return;
   const { layers, board } = snapshot.document;
-  const layerKnown =
-    anchor.layerKey === null || anchor.layerKey === "A" || layers.some(({ key }) => key === anchor.layerKey);
+  const { layerKey, pieceId } = anchor;
+  const layerKnown = layerKey === null || layerKey === "A" || layers.some(({ key }) => key === layerKey);
   const pieceKnown =
-    anchor.pieceId === null || layers.some(({ pieces }) => pieces.some(({ id }) => id === anchor.pieceId));
+    pieceId === null ||
+    layers.some(({ key, pieces }) => (layerKey ?? key) === key && pieces.some(({ id }) => id === pieceId));
   if (!layerKnown || !pieceKnown) throw invalid([{ pointer: "/anchor", detail: "That piece is not on this drawing." }]);
   const margin = Math.max(board.width, board.height);
   const near =

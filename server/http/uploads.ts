@@ -49,7 +49,7 @@ function refusalOf(error: unknown, maxBytes: number): unknown {
       : error;
   }
   if (error.code === "LIMIT_FILE_SIZE") {
-    return new AppError("too_large", { detail: `Files up to ${Math.floor(maxBytes / 1_048_576)} MB can be taken.` });
+    return new AppError("too_large", { detail: `Files up to ${Math.floor(maxBytes / 1_000_000)} MB can be taken.` });
   }
   return new AppError("malformed_request", { detail: "Send one file at a time, and nothing beside it." });
 }
@@ -57,6 +57,6 @@ function refusalOf(error: unknown, maxBytes: number): unknown {
 /** The last part of the name, without control characters, for showing only. */
 function plainName(name: string): string {
   const last = name.split(/[\\/]/).at(-1) ?? "";
-  const plain = last.replace(/\p{C}/gu, "").trim().slice(-120);
-  return plain || "artwork";
+  const plain = last.replace(/\p{C}/gu, "").trim();
+  return [...plain].slice(-120).join("") || "artwork";
 }
