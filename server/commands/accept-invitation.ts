@@ -6,6 +6,7 @@ import { Invitation } from "../models/invitation.ts";
 import { Membership } from "../models/membership.ts";
 import { Person } from "../models/person.ts";
 import { Shop } from "../models/shop.ts";
+import { ownSession } from "../queries/live-sessions.ts";
 import { findOrCreatePerson } from "./find-or-create-person.ts";
 import { killLinks } from "./kill-links.ts";
 import { logEvent } from "./log-event.ts";
@@ -14,7 +15,7 @@ import { spendLink } from "./spend-link.ts";
 type Newcomer = { name?: string | undefined; password?: string | undefined };
 
 /**
- * Joins the shop of an invitation. Someone with a password must be signed in with the invited address; anyone else
+ * Joins the shop of an invitation. Someone with a password must be signed in by it as the invited address; anyone else
  * gives a name and a password. Whatever is refused leaves the link unspent, since all of it is one transaction.
  */
 export async function acceptInvitation(
@@ -44,11 +45,15 @@ export async function acceptInvitation(
 }
 
 async function invitee(context: Context, email: string, { name, password }: Newcomer): Promise<Person> {
-  const { actor, now, transaction } = context;
+  const { now, transaction } = context;
   const known = await Person.findOne({ where: { email }, transaction });
   if (known?.passwordHash) {
-    if (actor.kind === "nobody" || actor.personId !== known.id) {
-      throw new AppError("not_signed_in", { detail: `Sign in as ${email}, then open the link again.` });
+    const own = await ownSession(context);
+    // A session begun by a link shows the mail twice and the password never.
+    if (own?.person.id !== known.id || own.session.began !== "password") {
+      throw new AppError("not_signed_in", {
+        detail: `Sign in as ${email} with the password, then open the link again.`,
+      });
     }
     // They hold both the password and the mail.
     return known.update({ addressProvenAt: known.addressProvenAt ?? now }, { transaction });

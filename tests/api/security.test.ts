@@ -1,38 +1,40 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { Person } from "#server/models/person.ts";
+import { acceptInvitation, registerShop, whoAmI } from "#shared/contracts/account.ts";
+import { inviteMember } from "#shared/contracts/shop.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
+import { buildClient, buildContact } from "../support/factories/client.ts";
 import { buildMember } from "../support/factories/member.ts";
-import { testPassword } from "../support/factories/person.ts";
-import type { Answer, Visitor } from "../support/visitor.ts";
+import { caughtMails, tokenIn } from "../support/mail.ts";
+import { signInAs, signInByMail } from "../support/sign-in.ts";
 
-let limited: TestApp;
+let app: TestApp;
 beforeAll(async () => {
-  limited = await startTestApp({ env: { RATE_LIMIT_FACTOR: "1" } });
+  app = await startTestApp();
 });
-afterAll(() => limited.stop());
+afterAll(() => app.stop());
 
-/** A guess at a password, from an address of the guesser's choice. */
-async function guess(
-  visitor: Visitor,
-  { email, password, path = "/auth/callback/password", from = "203.0.113.1" }: Record<string, string>,
-): Promise<Answer> {
-  const { csrfToken } = JSON.parse((await visitor.send("GET", "/auth/csrf")).text) as { csrfToken: string };
-  return visitor.send("POST", path, {
-    body: { email, password, csrfToken },
-    headers: { "X-Forwarded-For": from, "X-Auth-Return-Redirect": "1" },
-  });
-}
+describe("an address that somebody else opened an account with", () => {
+  it("is not proven by its reader accepting an invitation while signed in by a link", async () => {
+    const email = "harbour.master@quay.example";
+    const password = "squatting-here";
+    await app.visitor().get(registerShop, { body: { shopName: "Squat", name: "S. Quat", email, password } });
+    const squatter = app.visitor();
+    await squatter.signIn("password", { email, password });
+    const person = await Person.findOne({ where: { email }, rejectOnEmpty: true });
+    await buildContact({ client: await buildClient(), person });
+    const reader = await signInByMail(app, { email });
 
-describe("guessing a password", () => {
-  it.each([
-    "/auth//callback/password",
-    "/auth/callback//password",
-    "/auth/callback/password//",
-    "/auth/signin/password",
-  ])("finds no way round the limits by %s", async (path) => {
-    const { email } = await buildMember();
-    const visitor = limited.visitor();
-    const answer = await guess(visitor, { email, password: testPassword, path });
-    expect(answer.status).toBe(404);
-    expect(visitor.cookies.has("authjs.session-token")).toBe(false);
+    const owner = await buildMember();
+    const inviter = await signInAs(app, owner);
+    await inviter.get(inviteMember, { params: { shop: owner.shop.slug }, body: { email, role: "owner" } });
+    await app.runJobs();
+    const mail = (await caughtMails(app)).find(({ to }) => to === email);
+    const body = { token: tokenIn(mail?.text ?? "") };
+    expect((await reader.refusal(acceptInvitation, { body })).code).toBe("not_signed_in");
+
+    const { memberOf, contactOf } = await squatter.get(whoAmI);
+    expect(memberOf.map(({ shopName }) => shopName)).toEqual(["Squat"]);
+    expect(contactOf).toEqual([]);
   });
 });

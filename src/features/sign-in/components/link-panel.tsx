@@ -88,7 +88,7 @@ export function LinkPanel({ token }: { readonly token: string }) {
         </p>
         {!knownPerson ? (
           <JoinForm token={token} shopName={shop} onJoined={(slug) => go(paths.bench(slug))} />
-        ) : me.data.person === null ? (
+        ) : me.data.person === null || me.data.session !== "password" ? (
           <>
             <p className="mb-4 text-base">This address has a password already. Sign in with it to accept.</p>
             <LinkButton kind="primary" to={signInTo(paths.link(token))}>

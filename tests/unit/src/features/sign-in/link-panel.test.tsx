@@ -120,8 +120,13 @@ describe("the page of a mailed link", () => {
     });
   });
 
-  it("asks someone known to sign in first, and comes back to the link", async () => {
+  it.each([
+    { who: "nobody is signed in", session: null },
+    { who: "a mailed link signed them in", session: "link" as const },
+  ])("asks someone known for their password when $who, and comes back to the link", async ({ session }) => {
     link = { ...open, purpose: "join shop", knownPerson: true };
+    const person = { id: "p1", name: "Ida Fenn", email: "ida@saltgrass.example", hasPassword: true };
+    me = session ? { ...nobody, person, session } : nobody;
     await openPage();
     const way = [...document.querySelectorAll("a")].find((a) => a.textContent === "Sign in to accept");
     expect(way?.getAttribute("href")).toBe("/sign-in?next=%2Flink%2Fsecret-of-the-link");

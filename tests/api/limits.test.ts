@@ -1,0 +1,38 @@
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { startTestApp, type TestApp } from "../support/app.ts";
+import { buildMember } from "../support/factories/member.ts";
+import { testPassword } from "../support/factories/person.ts";
+import type { Answer, Visitor } from "../support/visitor.ts";
+
+let app: TestApp;
+beforeAll(async () => {
+  app = await startTestApp({ env: { RATE_LIMIT_FACTOR: "1" } });
+});
+afterAll(() => app.stop());
+
+/** A guess at a password, from an address of the guesser's choice. */
+async function guess(
+  visitor: Visitor,
+  { email, password, path = "/auth/callback/password", from = "203.0.113.1" }: Record<string, string>,
+): Promise<Answer> {
+  const { csrfToken } = JSON.parse((await visitor.send("GET", "/auth/csrf")).text) as { csrfToken: string };
+  return visitor.send("POST", path, {
+    body: { email, password, csrfToken },
+    headers: { "X-Forwarded-For": from, "X-Auth-Return-Redirect": "1" },
+  });
+}
+
+describe("guessing a password", () => {
+  it.each([
+    "/auth//callback/password",
+    "/auth/callback//password",
+    "/auth/callback/password//",
+    "/auth/signin/password",
+  ])("finds no way round the limits by %s", async (path) => {
+    const { email } = await buildMember();
+    const visitor = app.visitor();
+    const answer = await guess(visitor, { email, password: testPassword, path });
+    expect(answer.status).toBe(404);
+    expect(visitor.cookies.has("authjs.session-token")).toBe(false);
+  });
+});
