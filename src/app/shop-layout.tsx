@@ -32,8 +32,9 @@ export function ShopLayout() {
   if (error) {
     return (
       <PlainHeader>
+        <h1 className="mb-4 font-serif text-2xl font-bold text-ink">The shop could not be loaded</h1>
         <ProblemNotice
-          what="The shop could not be loaded."
+          what="What was saved is safe."
           error={error}
           onRetry={() => void (me.error ? me.refetch() : shop.refetch())}
         />
