@@ -3,6 +3,7 @@ import { createServer } from "node:http";
 import type { AddressInfo } from "node:net";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
+import { setTimeout } from "node:timers/promises";
 import { Logger, runOnce } from "graphile-worker";
 import pg from "pg";
 import { createApp } from "#server/app.ts";
@@ -86,15 +87,23 @@ export async function startTestApp({
       );
       return rows;
     },
-    runJobs: () =>
-      runOnce({
+    async runJobs() {
+      await runOnce({
         pgPool: pool,
         taskList: taskListOf(services, log),
         parsedCronItems: [],
         noHandleSignals: true,
         // Failures are kept in the job's row, where tests read them.
         logger: new Logger(() => () => undefined),
-      }),
+      });
+      // It resolves while the last job's row is still being written.
+      for (let round = 0; round < 200; round += 1) {
+        const { rows } = await pool.query("select 1 from graphile_worker.jobs where locked_at is not null limit 1");
+        if (rows.length === 0) return;
+        await setTimeout(10);
+      }
+      throw new Error("A job is held although nobody works on it.");
+    },
     async stop() {
       await new Promise<void>((resolve) => {
         server.close(() => resolve());
