@@ -36,3 +36,18 @@ describe("guessing a password", () => {
     expect(visitor.cookies.has("authjs.session-token")).toBe(false);
   });
 });
+
+describe("an account that is guessed at by opening shops with its address", () => {
+  it("counts each guess, from wherever it comes", async () => {
+    const { email } = await buildMember();
+    const body = { shopName: "Guess", name: "G. Uess", email: email.toUpperCase(), password: "not the password" };
+    const statuses: number[] = [];
+    for (let time = 0; time < 50; time += 1) {
+      const headers = { "X-Forwarded-For": `198.51.100.${Math.floor(time / 10)}` };
+      statuses.push((await app.visitor().send("POST", "/api/register", { body, headers })).status);
+    }
+    expect(new Set(statuses)).toEqual(new Set([409]));
+    const answer = await guess(app.visitor(), { email, password: testPassword, from: "198.51.100.99" });
+    expect(answer.status).toBe(429);
+  });
+});
