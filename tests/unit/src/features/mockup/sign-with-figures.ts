@@ -61,12 +61,14 @@ export function signWithFigures() {
     hold: { kind: "bond", adhesive: cement },
     place: "inside",
   });
-  // Brought-in pieces are named after their place in the artwork; here they have short names.
+  // No job has this artwork, so that the sign can be saved in any: the ring becomes a plate with a short name.
   const document: MockupDocument = {
     ...sign,
     layers: sign.layers.map((layer) => ({
       ...layer,
-      pieces: layer.pieces.map((piece) => (piece.id === "ring-1" ? { ...piece, id: "ring" } : piece)),
+      pieces: layer.pieces.map((piece) =>
+        piece.id === "ring-1" ? { ...piece, id: "ring", source: { kind: "plate" as const } } : piece,
+      ),
     })),
   };
   return {

@@ -1,0 +1,145 @@
+import type { Browser, Page } from "playwright-core";
+import { afterAll, beforeAll, describe, expect, it, vi } from "vitest";
+import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
+import { startTestApp, type TestApp } from "../support/app.ts";
+import { launchBrowser } from "../support/browser.ts";
+import { entrance } from "../support/drivers/entrance.ts";
+import { mockup } from "../support/drivers/mockup.ts";
+import { buildMember } from "../support/factories/member.ts";
+import { testPassword } from "../support/factories/person.ts";
+import { buildWorld, type World } from "../support/factories/work.ts";
+import { type Seat, takeSeat } from "../support/seat.ts";
+import { patienceMs } from "../support/served-app.ts";
+import { signWithFigures } from "../unit/src/features/mockup/sign-with-figures.ts";
+
+/** What hands do at the mockup's desk: dragging on the canvas, two people at one mockup, a lost connection. */
+
+let app: TestApp;
+let browser: Browser;
+let world: World;
+let owner: Seat;
+let maker: Seat;
+
+const jobParams = () => ({ ...world.params, jobId: world.job.id });
+const address = () => `/shop/${world.params.shop}/jobs/${world.job.id}/mockup`;
+const onServer = () => world.visitors.owner.get(getMockup, { params: jobParams() });
+const holds = (locator: ReturnType<Page["locator"]>, value: string) =>
+  vi.waitFor(async () => expect(await locator.inputValue()).toBe(value), { timeout: patienceMs, interval: 100 });
+
+async function sit(email: string): Promise<Seat> {
+  const seat = await takeSeat(browser, { baseUrl: app.baseUrl, size: "desk" });
+  await entrance(seat.page).signIn({ email, password: testPassword });
+  return seat;
+}
+
+/** Opens the mockup and waits for the first dry fit, so that the picture is there. */
+async function openDesk({ page, open }: Seat) {
+  await open(address());
+  await page.locator('section[aria-label="Dry fit"][aria-busy="false"]').waitFor();
+  return mockup(page);
+}
+
+/** Has the middle of the board shown in the middle of the canvas, and tells how many px a mm is there. */
+async function lookAtMiddle(page: Page) {
+  await mockup(page)
+    .dryFit()
+    .getByRole("button", { name: /^Show: Locate/ })
+    .first()
+    .click();
+  const canvas = await page.getByRole("application", { name: /elevation/i }).boundingBox();
+  const disc = await page.getByRole("slider", { name: /^Raise B,/ }).boundingBox();
+  if (canvas === null || disc === null) throw new Error("The canvas or the section is not there.");
+  // The handle lies round the disc of 275 mm with 4 px to spare on each side.
+  return { x: canvas.x + canvas.width / 2, y: canvas.y + canvas.height / 2, pxPerMm: (disc.height - 8) / 275 };
+}
+
+beforeAll(async () => {
+  [app, browser] = await Promise.all([startTestApp({ poolMax: 8 }), launchBrowser()]);
+  world = await buildWorld(app);
+  const { document } = signWithFigures();
+  await world.visitors.owner.get(saveMockup, { params: jobParams(), body: { version: 0, document } });
+  const { email } = await buildMember({ shop: world.owner.shop, role: "maker" });
+  [owner, maker] = await Promise.all([sit(world.owner.email), sit(email)]);
+}, 120_000);
+
+afterAll(async () => {
+  await browser?.close();
+  await app?.stop();
+});
+
+describe("the canvas", () => {
+  it("takes hold of the piece nearest the viewer, and a drag is one step", async () => {
+    const { page } = owner;
+    const desk = await openDesk(owner);
+    const { x, y, pxPerMm } = await lookAtMiddle(page);
+    await page.mouse.move(x, y);
+    await page.keyboard.down("Alt");
+    await page.mouse.down();
+    await page.mouse.move(x + 40, y, { steps: 3 });
+    await page.mouse.move(x + 90, y - 30, { steps: 5 });
+    await page.mouse.up();
+    await page.keyboard.up("Alt");
+    const across = page.getByLabel("x of Plate", { exact: true });
+    const down = page.getByLabel("y of Plate", { exact: true });
+    await vi.waitFor(async () => expect(Number(await across.inputValue())).toBeCloseTo(300 + 90 / pxPerMm, 0));
+    expect(Number(await down.inputValue())).toBeCloseTo(200 - 30 / pxPerMm, 0);
+    expect(await page.getByRole("region", { name: "Pieces of D", exact: true }).isVisible()).toBe(true);
+    await desk.undo().click();
+    await holds(across, "300");
+    expect(await desk.undo().isDisabled()).toBe(true);
+  });
+
+  it("lets go of a drag at Escape and leaves everything where it was", async () => {
+    const { page } = owner;
+    const desk = await openDesk(owner);
+    const { x, y } = await lookAtMiddle(page);
+    await page.mouse.move(x, y);
+    await page.mouse.down();
+    await page.mouse.move(x + 70, y + 40, { steps: 5 });
+    await page.keyboard.press("Escape");
+    await page.mouse.up();
+    await holds(page.getByLabel("x of Plate", { exact: true }), "300");
+    expect(await desk.undo().isDisabled()).toBe(true);
+  });
+});
+
+describe("two people at one mockup", () => {
+  it("are told, and the second keeps theirs with Undo bringing back the own work, or saves over it", async () => {
+    const first = await openDesk(owner);
+    const second = await openDesk(maker);
+    await first.write("Name of C", "Outer ring");
+    await vi.waitFor(async () => expect((await onServer()).document.layers[1]?.name).toBe("Outer ring"), patienceMs);
+
+    await second.write("Name of D", "Evening sun");
+    const asks = maker.page.getByRole("alertdialog", { name: "Someone saved a newer version" });
+    await asks.getByRole("button", { name: "Keep theirs" }).click();
+    await holds(second.cell("Name of C"), "Outer ring");
+    await holds(second.cell("Name of D"), "Sun");
+    await second.undo().click();
+    await holds(second.cell("Name of D"), "Evening sun");
+    await vi.waitFor(async () => expect((await onServer()).document.layers[2]?.name).toBe("Evening sun"), patienceMs);
+
+    await first.write("Name of B", "Sky");
+    await owner.page.getByRole("alertdialog").getByRole("button", { name: "Keep mine" }).click();
+    await vi.waitFor(async () => expect((await onServer()).document.layers[0]?.name).toBe("Sky"), patienceMs);
+    expect((await onServer()).document.layers[2]?.name).toBe("Sun");
+  });
+});
+
+describe("a lost connection", () => {
+  it("keeps the work on the device, offers it when the mockup is opened again, and saves it", async () => {
+    const { page, context } = owner;
+    const desk = await openDesk(owner);
+    await page.route(/\/mockup$/, (route) => (route.request().method() === "PUT" ? route.abort() : route.continue()));
+    await desk.write("Name of D", "Kept sun");
+    await page.getByText("No connection. Kept on this device").waitFor();
+    await page.close();
+    expect((await onServer()).document.layers[2]?.name).toBe("Sun");
+
+    const again = await context.newPage();
+    await again.goto(address());
+    await again.getByText(/was kept on this device and never saved/).waitFor();
+    await again.getByRole("button", { name: "Take it up" }).click();
+    await vi.waitFor(async () => expect((await onServer()).document.layers[2]?.name).toBe("Kept sun"), patienceMs);
+  });
+});
