@@ -17,6 +17,10 @@ export async function changeShop(
   const fields = shop.changed();
   if (!fields) return shop;
   await shop.save({ transaction });
-  await logEvent(context, { shopId, kind: "shop changed", data: { fields: [...fields] } });
+  await logEvent(context, {
+    shopId,
+    kind: "shop changed",
+    data: { fields: fields.map((field) => (field === "jobPrefix" ? "job numbers" : field)) },
+  });
   return shop;
 }

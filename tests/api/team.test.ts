@@ -222,7 +222,7 @@ describe("the shop", () => {
     expect(bad.errors?.map(({ pointer }) => pointer)).toEqual(["/jobPrefix", "/paper", "/colour"]);
     const changed = await visitor.get(changeShop, { params, body: { unit: "in", jobPrefix: "OAK" } });
     expect(changed).toMatchObject({ name: shop.name, unit: "in", jobPrefix: "OAK", paper: "A4" });
-    expect(await logOf(shop.id)).toEqual([{ kind: "shop changed", data: { fields: ["unit", "jobPrefix"] } }]);
+    expect(await logOf(shop.id)).toEqual([{ kind: "shop changed", data: { fields: ["unit", "job numbers"] } }]);
   });
 
   it("says to each reader what they may do", async () => {
