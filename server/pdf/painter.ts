@@ -68,15 +68,18 @@ export class PdfPainter {
     page.pushOperators(
       pushGraphicsState(),
       concatTransformationMatrix(pointsPerMm, 0, 0, -pointsPerMm, 0, list.heightMm * pointsPerMm),
-      ...operators,
-      popGraphicsState(),
     );
+    // Each operator becomes an argument, and a call takes only as many as the stack holds.
+    for (const operator of operators) page.pushOperators(operator);
+    page.pushOperators(popGraphicsState());
     return page;
   }
 
   private async itemsOperators(page: PDFPage, items: readonly Item[]): Promise<PDFOperator[]> {
     const operators: PDFOperator[] = [];
-    for (const item of items) operators.push(...(await this.itemOperators(page, item)));
+    for (const item of items) {
+      for (const operator of await this.itemOperators(page, item)) operators.push(operator);
+    }
     return operators;
   }
 

@@ -56,6 +56,17 @@ describe("paths", () => {
     expect(at(20, 30)).toEqual([255, 255, 255]);
   });
 
+  it("are drawn whole however long they are, and however many", async () => {
+    const points = Array.from({ length: 200_000 }, (_, index) => ({ x: (index % 600) / 10, y: 10 + (index % 2) }));
+    const stroke = { colour: "#27304F", widthMm: 0.2 } as const;
+    const group: Item = { kind: "group", x: 0, y: 0, scale: 1, items: [{ kind: "line", points, stroke }] };
+    const { at } = await pictureOf([
+      group,
+      { kind: "path", path: rectanglePath({ x: 50, y: 30, width: 8, height: 8 }), fill: "#27304F" },
+    ]);
+    expect(at(54, 34)).toEqual([39, 48, 79]);
+  });
+
   it("let through what their opacity says", async () => {
     const { at } = await pictureOf([
       { kind: "path", path: rectanglePath({ x: 0, y: 0, width: 30, height: 40 }), fill: "#000000", opacity: 0.4 },
