@@ -1,5 +1,6 @@
 import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { useNavigate, useParams } from "react-router-dom";
+import type { Role } from "#shared/contracts/account.ts";
 import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { mockupQueries } from "@/features/mockup/api/queries.ts";
@@ -14,7 +15,7 @@ import { paths } from "../paths.ts";
 /** The mockup of a job: the desk where there is room for it and the right to change it, else a picture to look at. */
 export function MockupPage() {
   const { jobId = "" } = useParams();
-  const { shop, person } = useReader();
+  const { shop, person, role } = useReader();
   const navigate = useNavigate();
   const client = useQueryClient();
   const isWide = useMedia("(min-width: 900px)");
@@ -46,11 +47,7 @@ export function MockupPage() {
         unit={shop.unit}
         job={job.data}
         mockup={mockup.data}
-        why={
-          mockup.data.can.edit
-            ? "To change the mockup, open it in a window at least 900 px wide. Here it can be looked at."
-            : "You may look at this mockup. Owners and makers change it."
-        }
+        why={whyNotToChange({ mayEdit: mockup.data.can.edit, role })}
       />
     );
   return (
@@ -69,4 +66,11 @@ export function MockupPage() {
       renderTools={(tools) => <HeaderTools>{tools}</HeaderTools>}
     />
   );
+}
+
+function whyNotToChange({ mayEdit, role }: { mayEdit: boolean; role: Role | null }): string {
+  if (mayEdit) return "To change the mockup, open it in a window at least 900 px wide. Here it can be looked at.";
+  if (role === "owner" || role === "maker")
+    return "The job’s state lets nobody change the mockup now. It can be looked at.";
+  return "You may look at this mockup. Owners and makers change it.";
 }
