@@ -31,6 +31,7 @@ async function changeAddress(context: Context, contact: Contact, email: string):
   const { transaction } = context;
   const { shopId, clientId, name, personId: oldPersonId } = contact;
   const from = contact.person?.email ?? "";
+  await refuseMoreMail(context, from, "address changed");
   const person = await findOrCreatePerson(context, { email, name });
   await refuseSecond({ clientId, person, transaction });
   await contact.update({ personId: person.id }, { transaction });

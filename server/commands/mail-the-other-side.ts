@@ -3,13 +3,14 @@ import type { Context } from "../http/context.ts";
 import { Contact } from "../models/contact.ts";
 import { Membership } from "../models/membership.ts";
 import type { MailData, MailKind } from "../models/outgoing-mail.ts";
+import { hasEnoughMail } from "../queries/has-enough-mail.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { queueMail } from "./queue-mail.ts";
 
 type News = { readonly kind: MailKind; readonly data: MailData };
 type Sender = Pick<Context, "actor" | "now" | "transaction">;
 
-/** Tells the shop what the client did, and the client's approvers what the shop did. */
+/** Tells the shop what the client did, and the client's approvers what the shop did. Whoever got enough within the hour is not mailed again. */
 export async function mailTheOtherSide(context: Sender, loaded: LoadedJob, news: News): Promise<void> {
   if (context.actor.kind === "contact") await mailShop(context, loaded, news);
   else await mailApprovers(context, loaded, news);
@@ -28,7 +29,7 @@ export async function mailShop({ actor, ...context }: Sender, { job }: LoadedJob
     transaction: context.transaction,
   });
   for (const { person } of members) {
-    if (!person) continue;
+    if (!person || (await hasEnoughMail(context, person.email, news.kind))) continue;
     await queueMail(context, {
       ...news,
       address: person.email,
@@ -52,7 +53,7 @@ export async function mailApprovers(
     transaction: context.transaction,
   });
   for (const { id, person } of contacts) {
-    if (!person) continue;
+    if (!person || (await hasEnoughMail(context, person.email, news.kind))) continue;
     await queueMail(context, {
       kind: news.kind,
       data: { ...news.data, contactId: id },

@@ -142,6 +142,19 @@ describe("a contact's new address", () => {
     expect((await caughtMails(app)).filter(({ to }) => to === email)).toHaveLength(1);
   });
 
+  it("is not turned to and fro to fill a mailbox: the sixth time within the hour it is refused", async () => {
+    const { contact, email, shop, rep } = await repWithContact();
+    const params = { shop: shop.slug, contactId: contact.id };
+    const other = `other.${email}`;
+    for (let time = 0; time < 5; time += 1) {
+      await rep.get(changeContact, { params, body: { email: other } });
+      await rep.get(changeContact, { params, body: { email } });
+    }
+    expect((await rep.refusal(changeContact, { params, body: { email: other } })).code).toBe("too_many_requests");
+    expect(await OutgoingMail.count({ where: { address: email, kind: "address changed" } })).toBe(5);
+    expect((await rep.get(changeContact, { params, body: { name: "Still There" } })).email).toBe(email);
+  });
+
   it("may not be one that the client has already", async () => {
     const { contact, client, shop, rep } = await repWithContact();
     const twin = await buildContact({ client });

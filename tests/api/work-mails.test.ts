@@ -90,6 +90,15 @@ describe("a note", () => {
     expect(tokenIn(mail.text)).toHaveLength(43);
     expect((await caughtMails(app)).some(({ source }) => source.includes("pays late"))).toBe(false);
   });
+
+  it("fills no mailbox: past thirty within the hour it stands on the sheet only", async () => {
+    const where = { address: world.approver.email, kind: "note added" as const };
+    const body = { kind: "question" as const, text: "And this?", anchor };
+    for (let number = 0; number < 32; number += 1) {
+      await world.visitors.maker.get(addNote, { params: noteParams(), body });
+    }
+    expect(await OutgoingMail.count({ where })).toBe(30);
+  });
 });
 
 describe("a revision that was asked for", () => {
