@@ -1,15 +1,19 @@
 import { createReadStream } from "node:fs";
-import { mkdir, open, readdir, readFile, rename, rm, stat, unlink } from "node:fs/promises";
+import { chmod, mkdir, open, readdir, readFile, rename, rm, stat, unlink } from "node:fs/promises";
 import { dirname, join, resolve } from "node:path";
 import type { Storage } from "./storage.ts";
 
 const keyForm = /^[a-z0-9][a-z0-9/-]{0,120}$/;
 
-/** Files on the local disk below `root`. */
+/** Clients' artwork and proofs are nobody else's on this machine. */
+const ownFile = 0o600;
+const ownFolder = 0o700;
+
+/** Files on the local disk below `root`, for this process's user alone. */
 export async function openDiskStorage(root: string): Promise<Storage> {
   const base = resolve(root);
   const quarantineDir = join(base, "quarantine");
-  await mkdir(quarantineDir, { recursive: true });
+  await mkdir(quarantineDir, { recursive: true, mode: ownFolder });
   await emptyLeftovers(quarantineDir);
 
   const pathOf = (key: string): string => {
@@ -19,7 +23,8 @@ export async function openDiskStorage(root: string): Promise<Storage> {
 
   async function settle(temporaryPath: string, key: string): Promise<void> {
     const path = pathOf(key);
-    await mkdir(dirname(path), { recursive: true });
+    await mkdir(dirname(path), { recursive: true, mode: ownFolder });
+    await chmod(temporaryPath, ownFile);
     await flush(temporaryPath);
     await rename(temporaryPath, path);
     await flush(dirname(path));
@@ -30,7 +35,7 @@ export async function openDiskStorage(root: string): Promise<Storage> {
     keepFile: (key, temporaryPath) => settle(temporaryPath, key),
     async keepBytes(key, bytes) {
       const temporaryPath = join(quarantineDir, `kept-${key.replaceAll("/", "-")}-${process.pid}-${Date.now()}`);
-      const file = await open(temporaryPath, "wx", 0o600);
+      const file = await open(temporaryPath, "wx", ownFile);
       try {
         await file.writeFile(bytes);
       } finally {
