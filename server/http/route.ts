@@ -131,13 +131,18 @@ function parsed(schema: Any, value: unknown, within: string): unknown {
   // A malformed id in the address is an address of nothing.
   if (within === "params") throw notFound("page");
   throw invalid(
-    outcome.error.issues.flatMap((issue) =>
-      issue.code === "unrecognized_keys"
-        ? issue.keys.map((key) => ({ pointer: pointerOf([...issue.path, key]), detail: "This field is not known." }))
-        : [{ pointer: pointerOf(issue.path), detail: issue.message }],
-    ),
+    outcome.error.issues
+      .flatMap((issue) =>
+        issue.code === "unrecognized_keys"
+          ? issue.keys.map((key) => ({ pointer: pointerOf([...issue.path, key]), detail: "This field is not known." }))
+          : [{ pointer: pointerOf(issue.path), detail: issue.message }],
+      )
+      .slice(0, mostFaults),
   );
 }
+
+/** Nobody mends more at once, and the answer must not outgrow the question. */
+const mostFaults = 50;
 
 /** JSON pointer (RFC 6901). */
 function pointerOf(path: readonly PropertyKey[]): string {
@@ -152,8 +157,8 @@ async function send(response: Response, endpoint: Endpoint, answer: unknown, mod
     response.setHeader("Content-Length", answer.byteSize);
     response.setHeader("X-Content-Type-Options", "nosniff");
     response.setHeader("Content-Disposition", `${answer.disposition}; filename*=UTF-8''${headerText(answer.fileName)}`);
-    if (answer.disposition === "attachment")
-      response.setHeader("Content-Security-Policy", "sandbox; default-src 'none'");
+    const policy = policyOf(answer);
+    if (policy) response.setHeader("Content-Security-Policy", policy);
     await stream(answer, response);
     return;
   }
@@ -164,6 +169,14 @@ async function send(response: Response, endpoint: Endpoint, answer: unknown, mod
   }
   // Outside production a field too many in an answer fails here, before it can leak.
   response.json(mode === "production" ? answer : endpoint.result.parse(answer));
+}
+
+/** Files run nothing and fetch nothing. A PDF shown in the page keeps the pages' policy: browsers' readers don't work in a sandbox. */
+function policyOf({ disposition, mediaType }: FileAnswer): string | null {
+  if (disposition === "attachment") return "sandbox; default-src 'none'";
+  return mediaType === "application/pdf"
+    ? null
+    : "sandbox; default-src 'none'; img-src data:; style-src 'unsafe-inline'";
 }
 
 /** Sends the bytes as fast as the reader takes them. A reader who leaves in the middle is no failure of ours. */

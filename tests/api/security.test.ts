@@ -1,10 +1,14 @@
+import { readdir, stat } from "node:fs/promises";
+import { join } from "node:path";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { Person } from "#server/models/person.ts";
 import { acceptInvitation, registerShop, whoAmI } from "#shared/contracts/account.ts";
+import { getPicture } from "#shared/contracts/revisions.ts";
 import { inviteMember } from "#shared/contracts/shop.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildClient, buildContact } from "../support/factories/client.ts";
 import { buildMember } from "../support/factories/member.ts";
+import { buildRevision, buildWorld } from "../support/factories/work.ts";
 import { caughtMails, tokenIn } from "../support/mail.ts";
 import { signInAs, signInByMail } from "../support/sign-in.ts";
 
@@ -36,5 +40,50 @@ describe("an address that somebody else opened an account with", () => {
     const { memberOf, contactOf } = await squatter.get(whoAmI);
     expect(memberOf.map(({ shopName }) => shopName)).toEqual(["Squat"]);
     expect(contactOf).toEqual([]);
+  });
+});
+
+describe("a large body", () => {
+  it("is not read for somebody without a session", async () => {
+    const path = "/api/shops/any/jobs/11111111-1111-4111-8111-111111111111/mockup";
+    const headers = { "Content-Type": "application/json" };
+    const body = `{"version":0,"document":"${"x".repeat(1_000_000)}`;
+    const answer = await app.visitor().send("PUT", path, { body, headers });
+    expect(JSON.parse(answer.text)).toMatchObject({ code: "not_signed_in" });
+    const visitor = await signInAs(app, await buildMember());
+    expect(JSON.parse((await visitor.send("PUT", path, { body, headers })).text).code).toBe("malformed_request");
+  });
+
+  it("that is wrong all over is answered with its first fifty faults", async () => {
+    const fields = Object.fromEntries(Array.from({ length: 10_000 }, (_, index) => [`f${index}`, 0]));
+    const answer = await app.visitor().send("POST", "/api/links/request", { body: fields });
+    const { code, errors } = JSON.parse(answer.text) as { code: string; errors: { pointer: string }[] };
+    expect(code).toBe("validation_failed");
+    expect(errors).toHaveLength(50);
+    expect(errors[0]?.pointer).toBe("/email");
+    expect(errors[49]?.pointer).toBe("/f48");
+  });
+});
+
+describe("what is kept", () => {
+  it("is on the disk for the server's own user alone, and the picture of a sign runs nothing", async () => {
+    const world = await buildWorld(app);
+    const revision = await buildRevision(app, world);
+    const open: string[] = [];
+    const walk = async (folder: string): Promise<void> => {
+      for (const entry of await readdir(folder, { withFileTypes: true })) {
+        const path = join(folder, entry.name);
+        if (((await stat(path)).mode & 0o077) !== 0) open.push(path);
+        if (entry.isDirectory()) await walk(path);
+      }
+    };
+    await walk(app.services.env.FILES_DIR);
+    expect(open).toEqual([]);
+    expect(await readdir(join(app.services.env.FILES_DIR, "kept"))).toEqual([world.owner.shop.id]);
+
+    const params = { ...world.params, revisionId: revision.id };
+    const picture = await world.visitors.rep.ask(getPicture, { params });
+    expect(picture.headers.get("content-type")).toBe("image/svg+xml");
+    expect(picture.headers.get("content-security-policy")).toMatch(/^sandbox; default-src 'none'/);
   });
 });
