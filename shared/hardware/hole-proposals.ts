@@ -1,0 +1,86 @@
+import { boxCentre, boxOfRegion } from "../geometry/box.ts";
+import { distanceToRegionEdgeMm, regionContains } from "../geometry/contains.ts";
+import type { Point, Region } from "../geometry/path.ts";
+import { isShorter } from "../geometry/tolerance.ts";
+
+/** Where a hole may be. All mm. */
+export type HoleConstraints = {
+  /** From a hole's middle to the nearest edge of the piece. */
+  readonly edge: number;
+  /** From a hole's middle to the next one's. */
+  readonly apart: number;
+  /**
+   * Discs round the hole that must lie on one level: the cap's over what lies on the piece, the barrel's foot over what
+   * lies under it. A disc may not cross the outlines.
+   */
+  readonly level: readonly { readonly outlines: Region; readonly diameter: number }[];
+};
+
+/** How many places are tried on the way from a corner to the middle. */
+const tries = 60;
+/** No piece takes more holes than this; a wrong pitch must not fill it. */
+const mostHoles = 400;
+
+/** Whether a hole may be there. */
+export function mayHoleBeAt(point: Point, piece: Region, { edge, level }: HoleConstraints): boolean {
+  if (!(regionContains(piece, point) && !isShorter(distanceToRegionEdgeMm(piece, point), edge))) return false;
+  return level.every(({ outlines, diameter }) => !isShorter(distanceToRegionEdgeMm(outlines, point), diameter / 2));
+}
+
+/**
+ * Holes towards the four corners of a piece's box, as far out as they may be: upper left, upper right, lower left, lower
+ * right. A piece that has no room for four gets fewer; one without room gets none.
+ */
+export function cornerHoles(piece: Region, constraints: HoleConstraints): Point[] {
+  const box = boxOfRegion(piece);
+  if (!box) return [];
+  const middle = boxCentre(box);
+  const found: Point[] = [];
+  for (const [dx, dy] of [
+    [-1, -1],
+    [1, -1],
+    [-1, 1],
+    [1, 1],
+  ] as const) {
+    const corner = { x: middle.x + (dx * box.width) / 2, y: middle.y + (dy * box.height) / 2 };
+    for (let step = 1; step <= tries; step++) {
+      const part = step / tries;
+      const point = { x: corner.x + (middle.x - corner.x) * part, y: corner.y + (middle.y - corner.y) * part };
+      if (!mayHoleBeAt(point, piece, constraints)) continue;
+      if (isApart(point, found, constraints.apart)) found.push(point);
+      break;
+    }
+  }
+  return found;
+}
+
+/**
+ * Holes in rows and columns over a piece's box, evenly, no further than `pitch` mm from each other along x and y, the
+ * outer ones at the edge distance. Places where no hole may be are left out. Row by row from the top.
+ */
+export function evenHoles(piece: Region, constraints: HoleConstraints, pitch: number): Point[] {
+  const box = boxOfRegion(piece);
+  if (!box || !(pitch > 0)) return [];
+  const columns = evenPlaces(box.x + constraints.edge, box.x + box.width - constraints.edge, pitch);
+  const rows = evenPlaces(box.y + constraints.edge, box.y + box.height - constraints.edge, pitch);
+  const found: Point[] = [];
+  for (const y of rows) {
+    for (const x of columns) {
+      const point = { x, y };
+      if (found.length >= mostHoles) return found;
+      if (mayHoleBeAt(point, piece, constraints) && isApart(point, found, constraints.apart)) found.push(point);
+    }
+  }
+  return found;
+}
+
+/** Both ends and as many between as the pitch asks for; the middle where the ends have crossed. */
+function evenPlaces(from: number, to: number, pitch: number): number[] {
+  if (!(to > from)) return [(from + to) / 2];
+  const gaps = Math.min(mostHoles, Math.ceil((to - from) / pitch - 1e-9));
+  return Array.from({ length: gaps + 1 }, (_, index) => from + ((to - from) * index) / gaps);
+}
+
+function isApart(point: Point, others: readonly Point[], apart: number): boolean {
+  return others.every((other) => !isShorter(Math.hypot(other.x - point.x, other.y - point.y), apart));
+}
