@@ -46,7 +46,12 @@ export default defineConfig({
       },
       {
         extends: true,
-        test: { name: "reference", include: ["tests/reference/**/*.test.ts"], testTimeout: 120 * seconds },
+        test: {
+          name: "reference",
+          include: ["tests/reference/**/*.test.ts"],
+          globalSetup: "tests/support/reference-table.ts",
+          testTimeout: 120 * seconds,
+        },
       },
       withDatabase("api", 30 * seconds, 0),
       withDatabase("db", 60 * seconds, 0),
