@@ -9,7 +9,7 @@ export const referenceJson = (name: string): unknown => JSON.parse(textOf(name))
 /** A table of tests/fixtures/reference in CSV: one record a row, by the names of the first line. Lines with # are notes. */
 export function referenceCsv(name: string): Readonly<Record<string, string>>[] {
   const [head = [], ...rows] = textOf(name)
-    .split("\n")
+    .split(/\r?\n/)
     .filter((line) => line && !line.startsWith("#"))
     .map(cellsOf);
   return rows.map((cells) => Object.fromEntries(head.map((column, index) => [column, cells[index] ?? ""])));
