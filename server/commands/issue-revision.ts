@@ -1,14 +1,11 @@
-import { buildSnapshot } from "#shared/drawing/build-snapshot.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { canIssue } from "#shared/lifecycle/job-states.ts";
 import { letterToIssue } from "#shared/lifecycle/revision-row.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import type { Snapshot } from "#shared/mockup/snapshot.ts";
 import { readDocument } from "#shared/mockup/upgrade.ts";
-import { loadKernel } from "../artwork/load-kernel.ts";
 import { newId } from "../db/new-id.ts";
-import { canonicalJson } from "../files/canonical-json.ts";
-import { sha256Hex } from "../files/sha256.ts";
+import { freezeDrawing } from "../drawing/draw.ts";
+import type { Frozen } from "../drawing/drawing-worker.ts";
 import { AppError, notAllowed, stale, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { enqueue } from "../jobs/queue.ts";
@@ -58,13 +55,12 @@ export async function issueRevision(
   }
   const letter = letterToIssue(revisions);
   const document = savedDocument(mockup.document);
-  const snapshot = await freeze(context, { loaded, actor, document, letter });
-  const text = canonicalJson(snapshot);
+  const { text, sha256 } = await freeze(context, { loaded, actor, document, letter });
   const frozen = {
     state: "preparing",
     message,
     snapshot: text,
-    snapshotSha256: sha256Hex(Buffer.from(text)),
+    snapshotSha256: sha256,
     issuedBy: actor.personId,
     requestedAt: now,
     failure: null,
@@ -90,12 +86,12 @@ function savedDocument(text: string): MockupDocument {
 async function freeze(
   context: Context,
   { loaded, actor, document, letter }: { loaded: LoadedJob; actor: Staff; document: MockupDocument; letter: string },
-): Promise<Snapshot> {
+): Promise<Frozen> {
   const { job, client } = loaded;
   const shop = await Shop.findByPk(job.shopId, { transaction: context.transaction, rejectOnEmpty: true });
   if (document.layers.every(({ pieces }) => pieces.length === 0))
     throw wrongState("The mockup has no pieces yet. Bring in artwork first.");
-  const snapshot = buildSnapshot({
+  const frozen = await freezeDrawing({
     titleBlock: {
       owner: shop.name,
       client: client.name,
@@ -115,14 +111,13 @@ async function freeze(
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
     fontHashes: fontHashes(),
-    kernel: await loadKernel(),
   });
-  const stops = snapshot.findings.filter(({ severity }) => severity === "stop");
+  const { stops } = frozen;
   if (stops.length > 0) {
     throw new AppError("dry_fit_stops", {
       detail: `${stops.length === 1 ? "One stop keeps" : `${stops.length} stops keep`} this from being issued: ${stops[0]?.text ?? ""}`,
       extra: { findings: stops },
     });
   }
-  return snapshot;
+  return frozen;
 }

@@ -1,8 +1,8 @@
 import { failIssue } from "../commands/fail-issue.ts";
 import { finishIssue } from "../commands/finish-issue.ts";
+import { drawProof } from "../drawing/draw.ts";
 import type { Services } from "../http/context.ts";
 import { Revision } from "../models/revision.ts";
-import { renderProof } from "../pdf/proof.ts";
 import { snapshotOf } from "../queries/snapshot-of.ts";
 import type { Attempt } from "./tasks.ts";
 
@@ -45,7 +45,7 @@ type Drawn = { readonly ok: true; readonly pdf: Uint8Array } | { readonly ok: fa
 
 async function drawn(revision: Revision): Promise<Drawn> {
   try {
-    return { ok: true, pdf: await renderProof(snapshotOf(revision), revision.snapshotSha256 ?? "") };
+    return { ok: true, pdf: await drawProof(snapshotOf(revision), revision.snapshotSha256 ?? "") };
   } catch (error) {
     return { ok: false, error };
   }

@@ -13,6 +13,7 @@ export const serverEntries = {
   worker: "server/worker.ts",
   migrate: "server/migrate.ts",
   "import-worker": "server/artwork/import-worker.ts",
+  "drawing-worker": "server/drawing/drawing-worker.ts",
 };
 
 /**

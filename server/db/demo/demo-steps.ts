@@ -13,12 +13,12 @@ import { issueRevision } from "../../commands/issue-revision.ts";
 import { makeCertificate } from "../../commands/make-certificate.ts";
 import { openJob } from "../../commands/open-job.ts";
 import { saveMockup } from "../../commands/save-mockup.ts";
+import { drawProof } from "../../drawing/draw.ts";
 import type { Context } from "../../http/context.ts";
 import { Decision } from "../../models/decision.ts";
 import { Revision } from "../../models/revision.ts";
 import { Shop } from "../../models/shop.ts";
 import { StoredFile } from "../../models/stored-file.ts";
-import { renderProof } from "../../pdf/proof.ts";
 import { snapshotOf } from "../../queries/snapshot-of.ts";
 import { newId } from "../new-id.ts";
 import type { DemoArtwork } from "./demo-signs.ts";
@@ -69,7 +69,7 @@ export async function demoIssue(
 ): Promise<string> {
   await saveMockup(context, { jobId, version: version - 1, document });
   const { revision } = await issueRevision(context, { jobId, mockupVersion: version, message });
-  const pdf = await renderProof(snapshotOf(revision), revision.snapshotSha256 ?? "");
+  const pdf = await drawProof(snapshotOf(revision), revision.snapshotSha256 ?? "");
   await finishIssue(context, { revisionId: revision.id, pdf });
   return revision.id;
 }

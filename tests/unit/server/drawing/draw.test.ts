@@ -1,0 +1,81 @@
+import { afterAll, describe, expect, it } from "vitest";
+import { loadKernel } from "#server/artwork/load-kernel.ts";
+import { drawProof, freezeDrawing, stopDrawing } from "#server/drawing/draw.ts";
+import type { FreezeInput } from "#server/drawing/drawing-worker.ts";
+import { canonicalJson } from "#server/files/canonical-json.ts";
+import { sha256Hex } from "#server/files/sha256.ts";
+import { renderProof } from "#server/pdf/proof.ts";
+import { buildSnapshot } from "#shared/drawing/build-snapshot.ts";
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
+import { usualContext } from "#shared/dry-fit/usual-context.ts";
+import { buildLayer, buildSign, plate } from "../../../support/build-sign.ts";
+import { orreryTitleBlock } from "../../../support/orrery-books.ts";
+
+afterAll(stopDrawing);
+
+const inputOf = (width: number): FreezeInput => ({
+  titleBlock: orreryTitleBlock,
+  document: buildSign([buildLayer("B", [plate("p1", width, 40, [200, 200])])]),
+  notes: [],
+  words: "",
+  limits: defaultLimits,
+  dryFit: usualContext,
+  paper: "A3",
+  artworkHashes: {},
+  fontHashes: {},
+});
+const frozenHere = async (input: FreezeInput): Promise<string> =>
+  canonicalJson(buildSnapshot({ ...input, kernel: await loadKernel() }));
+
+describe("freezing in a thread of its own", () => {
+  it("gives the very text that this thread would, and leaves this one free meanwhile", async () => {
+    let turns = 0;
+    let done = false;
+    const turn = (): void => {
+      turns += 1;
+      if (!done) setTimeout(turn, 1);
+    };
+    turn();
+    const { text, sha256, stops } = await freezeDrawing(inputOf(90)).finally(() => {
+      done = true;
+    });
+    // Computed in this thread it would be none between the two lines.
+    expect(turns).toBeGreaterThan(5);
+    expect(text).toBe(await frozenHere(inputOf(90)));
+    expect(sha256).toBe(sha256Hex(text));
+    expect(stops).toEqual([]);
+  });
+
+  it("tells the stops of the dry fit", async () => {
+    const { stops } = await freezeDrawing(inputOf(5000));
+    expect(stops.map(({ severity }) => severity)).toContain("stop");
+  });
+
+  it("is given up in words when it takes too long, and the next one is drawn", async () => {
+    await expect(freezeDrawing(inputOf(91), { timeMs: 1 })).rejects.toMatchObject({ code: "too_large" });
+    expect((await freezeDrawing(inputOf(92))).text).toContain('"p1"');
+  });
+
+  it("lets three wait and sends the fourth away", async () => {
+    const asked = [93, 94, 95].map((width) => freezeDrawing(inputOf(width)));
+    await expect(freezeDrawing(inputOf(96))).rejects.toMatchObject({ code: "too_many_requests" });
+    const texts = (await Promise.all(asked)).map(({ text }) => text);
+    expect(new Set(texts).size).toBe(3);
+    expect((await freezeDrawing(inputOf(96))).text).toContain('"p1"');
+  });
+});
+
+describe("drawing a proof in a thread of its own", () => {
+  it("gives the very bytes that this thread would", async () => {
+    const snapshot = buildSnapshot({ ...inputOf(90), kernel: await loadKernel() });
+    const sha256 = "ab".repeat(32);
+    expect(Buffer.from(await drawProof(snapshot, sha256)).equals(await renderProof(snapshot, sha256))).toBe(true);
+  });
+
+  it("fails for a snapshot that can't be drawn, and draws the next", async () => {
+    const snapshot = buildSnapshot({ ...inputOf(90), kernel: await loadKernel() });
+    const broken = { ...snapshot, titleBlock: { ...snapshot.titleBlock, date: "no day" } };
+    await expect(drawProof(broken, "")).rejects.toThrow("The drawing broke");
+    expect((await drawProof(snapshot, "")).subarray(0, 5)).toEqual(new Uint8Array(Buffer.from("%PDF-")));
+  });
+});
