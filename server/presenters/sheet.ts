@@ -23,7 +23,9 @@ export function presentSheet(
   const { document, figures, titleBlock, drawing } = snapshot;
   const first = drawing.sheets[0];
   const names = new Map(
-    document.layers.flatMap(({ key, pieces }) => pieces.map(({ id, name }) => [id, { key, name }] as const)),
+    document.layers.flatMap(({ name: layerName, pieces }) =>
+      pieces.map(({ id, name }, index) => [id, name || numbered(layerName, { index, of: pieces.length })] as const),
+    ),
   );
   return {
     revision,
@@ -47,7 +49,7 @@ export function presentSheet(
     zones: first ? zonesOnBoard(first) : { columns: [], rows: [] },
     pieces: figures.pieces.map(({ pieceId, layerKey, centroid }) => ({
       id: pieceId,
-      name: names.get(pieceId)?.name ?? "",
+      name: names.get(pieceId) ?? "",
       layerKey,
       x: centroid.x,
       y: centroid.y,
@@ -60,3 +62,7 @@ export function presentSheet(
       .map(({ id, letter, state }) => ({ revisionId: id, letter, state })),
   };
 }
+
+/** A piece without a name of its own is called after its layer, which the reader finds in the schedule. */
+const numbered = (layerName: string, { index, of }: { index: number; of: number }): string =>
+  of === 1 ? layerName : `${layerName} ${index + 1}`;

@@ -10,7 +10,8 @@ export const queryClient = new QueryClient({
     // Without a network a request fails and says so; by default it would wait in silence.
     queries: {
       networkMode: "always",
-      staleTime: 10_000,
+      // As long as a screen takes to come together, so that its parts ask once; a screen opened anew asks again.
+      staleTime: 2_000,
       retry: (failures, error) => failures < 2 && mayPass(error),
     },
     mutations: { networkMode: "always", retry: false },
