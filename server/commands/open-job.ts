@@ -1,3 +1,4 @@
+import { emptyBrief } from "#shared/contracts/jobs.ts";
 import { newId } from "../db/new-id.ts";
 import { notFound } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
@@ -25,18 +26,7 @@ export async function openJob(
       number: `${shop.jobPrefix}-${String(shop.nextJobNumber).padStart(4, "0")}`,
       title,
       dueOn,
-      brief: {
-        widthMm: null,
-        heightMm: null,
-        place: null,
-        wall: "",
-        viewingDistanceMm: null,
-        lighting: "",
-        quantity: 1,
-        brandColours: "",
-        about: "",
-        words: "",
-      },
+      brief: emptyBrief,
       state: "brief",
       whoseMove: "ours",
       createdBy: personId,

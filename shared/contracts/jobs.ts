@@ -1,19 +1,9 @@
 import { z } from "zod";
+import { jobStates, staffStates } from "../lifecycle/job-states.ts";
 import { day, inShop, instant, nothing, pageOf, pageQuery, writtenLine, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
-export const jobState = z.enum([
-  "brief",
-  "mockup",
-  "out for proof",
-  "revision asked",
-  "approved",
-  "in build",
-  "handed over",
-  "closed",
-  "on hold",
-  "cancelled",
-]);
+export const jobState = z.enum(jobStates);
 export const move = z.enum(["ours", "client", "nobody"]);
 
 const lengthMm = z.number().finite().positive().max(10_000);
@@ -33,6 +23,20 @@ export const briefSchema = z.strictObject({
   words: writtenText(1000),
 });
 export type Brief = z.infer<typeof briefSchema>;
+
+/** What a job begins with. */
+export const emptyBrief: Brief = {
+  widthMm: null,
+  heightMm: null,
+  place: null,
+  wall: "",
+  viewingDistanceMm: null,
+  lighting: "",
+  quantity: 1,
+  brandColours: "",
+  about: "",
+  words: "",
+};
 
 const title = writtenLine(160, "Say what the sign is.");
 
@@ -140,7 +144,7 @@ export const moveJob = endpoint({
   params: oneJob,
   query: nothing,
   body: z.strictObject({
-    to: z.enum(["in build", "handed over", "closed", "on hold", "cancelled", "taken up again"]),
+    to: z.enum([...staffStates, "taken up again"]),
     reason: writtenText(400).default(""),
   }),
   result: jobSchema,

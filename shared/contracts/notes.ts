@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { noteKinds, noteStates } from "../lifecycle/note-states.ts";
 import { inShop, instant, nothing, pageOf, pageQuery, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -17,8 +18,8 @@ export const anchorSchema = z.discriminatedUnion("on", [
 ]);
 export type Anchor = z.infer<typeof anchorSchema>;
 
-export const noteKind = z.enum(["must change", "question", "fine as is"]);
-export const noteState = z.enum(["open", "answered", "settled"]);
+export const noteKind = z.enum(noteKinds);
+export const noteState = z.enum(noteStates);
 
 export const replySchema = z.strictObject({
   id: z.uuid(),

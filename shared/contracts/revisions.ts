@@ -1,19 +1,12 @@
 import { z } from "zod";
 import type { DisplayList } from "../drawing/display-list.ts";
 import type { Finding } from "../dry-fit/finding.ts";
+import { revisionStates } from "../lifecycle/revision-states.ts";
 import type { Change } from "../mockup/changes.ts";
 import { inShop, instant, noContent, nothing, pageOf, pageQuery, personName, sha256, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
-export const revisionState = z.enum([
-  "draft",
-  "preparing",
-  "issued",
-  "approved",
-  "revision asked",
-  "superseded",
-  "withdrawn",
-]);
+export const revisionState = z.enum(revisionStates);
 
 export const decisionSchema = z.strictObject({
   kind: z.enum(["approved", "revision asked"]),

@@ -1,4 +1,4 @@
-import type { Job } from "#shared/contracts/jobs.ts";
+import { emptyBrief, type Job } from "#shared/contracts/jobs.ts";
 
 const jobId = "00000000-0000-4000-8000-000000000142";
 /** All that staff may do. */
@@ -33,18 +33,7 @@ export const buildJob = (change: Partial<Job>): Job => ({
   nextStep: "",
   client: { id: jobId, name: "Orrery Books" },
   dueOn: null,
-  brief: {
-    widthMm: null,
-    heightMm: null,
-    place: null,
-    wall: "",
-    viewingDistanceMm: null,
-    lighting: "",
-    quantity: 1,
-    brandColours: "",
-    about: "",
-    words: "",
-  },
+  brief: emptyBrief,
   briefMissing: [],
   approvers: [],
   latest: null,
