@@ -1,6 +1,7 @@
 import { visibleToClient } from "#shared/lifecycle/revision-states.ts";
 import type { Context } from "../http/context.ts";
 import { Event } from "../models/event.ts";
+import { Job } from "../models/job.ts";
 import type { LoadedRevision } from "../queries/find-revision.ts";
 import { logEvent } from "./log-event.ts";
 
@@ -15,7 +16,11 @@ export async function noteOpening(context: Context, { revision, loaded }: Loaded
     personId: actor.personId,
     data: { letter: revision.letter },
   };
-  if (await Event.findOne({ where, attributes: ["id"], transaction })) return;
+  const known = () => Event.findOne({ where, attributes: ["id"], transaction });
+  if (await known()) return;
+  // Two pages of one reader may open at the same moment; the job's row lets one write after the other.
+  await Job.findByPk(loaded.job.id, { attributes: ["id"], transaction, lock: true });
+  if (await known()) return;
   await logEvent(context, {
     shopId: revision.shopId,
     jobId: loaded.job.id,

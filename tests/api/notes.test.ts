@@ -18,7 +18,7 @@ import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
 import { approve } from "../support/decide.ts";
 import { buildClient, buildContact } from "../support/factories/client.ts";
-import { buildJob } from "../support/factories/job.ts";
+import { buildIssued } from "../support/factories/issued.ts";
 import { buildRevision, buildWorld, type World } from "../support/factories/work.ts";
 import { lastLogLine } from "../support/job-log.ts";
 import { caughtMails } from "../support/mail.ts";
@@ -28,9 +28,11 @@ import type { Visitor } from "../support/visitor.ts";
 
 let app: TestApp;
 let world: World;
+let template: string;
 beforeAll(async () => {
   app = await startTestApp();
   world = await buildWorld(app);
+  template = await issueNext(world, 90);
 });
 afterAll(() => app.stop());
 
@@ -50,10 +52,7 @@ const notesOf = async (own: World, visitor: Visitor, revisionId: string) =>
   (await visitor.get(listNotes, { params: at(own, revisionId) })).items;
 
 /** A job with revision A out: a board of 600 by 400 mm with one plate. */
-async function issued(width = 90): Promise<{ own: World; revisionId: string }> {
-  const own = await buildJob(world);
-  return { own, revisionId: await issueNext(own, width) };
-}
+const issued = () => buildIssued(app, world, template);
 const issueNext = async (own: World, width: number): Promise<string> =>
   (await buildRevision(app, own, { document: buildSign([buildLayer("B", [plate("p1", width, 40, [200, 200])])]) })).id;
 
@@ -80,6 +79,7 @@ describe("a note", () => {
     const second = await say(own, own.visitors.maker, revisionId, { anchor: spot(600, 400) });
     expect(second).toMatchObject({ number: 2, side: "shop", can: { reply: true, settle: true } });
     expect((await say(own, own.visitors.otherContact, revisionId)).zone).toBeNull();
+    expect(await lastLogLine(own.job.id)).toMatch(/: Left note 3 on revision A$/);
 
     // The sheet says which millimetres of the board lie in which zone; the note says the same.
     const { zones } = await own.visitors.approver.get(getSheet, { params: at(own, revisionId) });
@@ -100,7 +100,6 @@ describe("a note", () => {
     expect(sentTo(first.id)).toHaveLength(3);
     expect(sentTo(first.id)).toContain(own.owner.email);
     expect(sentTo(second.id)).toEqual([own.approver.email]);
-    expect(await lastLogLine(own.job.id)).toMatch(/: Left note 3 on revision A$/);
     const job = await own.visitors.owner.get(getJob, { params: { ...own.params, jobId: own.job.id } });
     expect(job).toMatchObject({ openNotes: 3, whoseMove: "ours", nextStep: "2 notes open, answer them or issue B" });
   });

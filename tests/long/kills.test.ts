@@ -1,0 +1,42 @@
+import { setTimeout as pause } from "node:timers/promises";
+import { afterAll, beforeAll, expect, it } from "vitest";
+import { plainSvg } from "../support/factories/work.ts";
+import { type KillableServer, prepareServer } from "../support/killable-server.ts";
+import { seededRandom } from "../support/seeded-random.ts";
+import { openShopUnderFire, type ShopUnderFire } from "../support/shop-under-fire.ts";
+
+const kills = 50;
+const random = seededRandom(4600);
+
+let server: KillableServer;
+let shop: ShopUnderFire;
+beforeAll(async () => {
+  server = await prepareServer();
+  await server.start();
+  shop = await openShopUnderFire(server);
+});
+afterAll(async () => {
+  await shop.close();
+  await server.clear();
+});
+
+it("fifty kills at random moments lose nothing that was acknowledged and leave nothing half done", async () => {
+  for (let round = 1; round <= kills; round += 1) {
+    const work = Promise.all([
+      shop.issue(80 + round),
+      shop.bringIn(plainSvg().replace("<svg ", `<svg id="round${round}" `)),
+    ]);
+    // From before the first request is read until after the PDF and its mail are done.
+    await pause(random() ** 2 * 4_000);
+    await server.kill();
+    await work;
+    await server.start();
+    await shop.settled();
+    await shop.expectWhole();
+  }
+  const { revisionIds, artworks } = shop.acknowledged;
+  process.stdout.write(
+    `${kills} kills; acknowledged before them: ${revisionIds.size} issues, ${artworks.size} uploads.\n`,
+  );
+  expect(revisionIds.size + artworks.size).toBeGreaterThan(kills / 2);
+});
