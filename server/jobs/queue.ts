@@ -9,6 +9,9 @@ export type JobPayloads = {
 };
 export type JobName = keyof JobPayloads;
 
+/** What may take long: one of each kind at a time, so that a shop that brings much does not hold up the mails of all. */
+const oneAtATime: ReadonlySet<JobName> = new Set(["import-artwork", "render-proof"]);
+
 /**
  * Adds a job in the very transaction of the change that causes it: rolled back together, committed together.
  * The key makes asking twice the same as asking once. Retried with growing pauses, 8 tries.
@@ -20,8 +23,8 @@ export async function enqueue<N extends JobName>(
 ): Promise<void> {
   const key = `${name}:${Object.values(payload).join(":")}`;
   await sequelizeOf(transaction).query(
-    "select graphile_worker.add_job($1::text, payload := $2::json, job_key := $3::text, max_attempts := 8)",
-    { bind: [name, JSON.stringify(payload), key], transaction },
+    "select graphile_worker.add_job($1::text, payload := $2::json, queue_name := $3::text, job_key := $4::text, max_attempts := 8)",
+    { bind: [name, JSON.stringify(payload), oneAtATime.has(name) ? name : null, key], transaction },
   );
 }
 

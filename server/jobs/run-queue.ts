@@ -9,7 +9,8 @@ import { freeJobsOfTheDead } from "./free-jobs.ts";
 import type { JobName } from "./queue.ts";
 import { type Task, tasks } from "./tasks.ts";
 
-const concurrency = 2;
+/** One more than there are kinds of heavy work, so that mails always find a free hand. */
+export const concurrency = 3;
 /** What the queue tells of jobs is said below in our own words, so here it is for finding faults in the queue itself. */
 const levels = { error: "error", warning: "warn", info: "debug", debug: "trace" } as const;
 
@@ -18,7 +19,7 @@ export type RunningQueue = {
   readonly stop: () => Promise<void>;
 };
 
-/** Works on the queue inside this process, two jobs at a time. */
+/** Works on the queue inside this process, a few jobs at a time. */
 export async function runQueue(services: Services): Promise<RunningQueue> {
   const log = services.log.child({ part: "queue" });
   const connectionString = appDatabaseUrl(services.env);
