@@ -65,7 +65,7 @@ const bytesOf = async (page: Page, name: string | RegExp): Promise<Buffer> => {
 const sha256 = (bytes: Buffer): string => createHash("sha256").update(bytes).digest("hex");
 /** Waits for words on a screen; the assertion tells what stood there instead. */
 const shows = (locator: ReturnType<Page["locator"]>, words: string | RegExp) =>
-  vi.waitFor(async () => expect(await locator.innerText()).toMatch(words), { timeout: patienceMs, interval: 100 });
+  vi.waitFor(async () => expect(await locator.textContent()).toMatch(words), { timeout: patienceMs, interval: 100 });
 const counts = (locator: ReturnType<Page["locator"]>, count: number) =>
   vi.waitFor(async () => expect(await locator.count()).toBe(count), { timeout: patienceMs, interval: 100 });
 /** Waits for what a field holds. */
@@ -110,7 +110,7 @@ describe("the round trip from artwork to an approved proof", () => {
       await entrance(newcomer.page).join(link, { shopName, ...person });
       await shows(entrance(newcomer.page).heading(), /No move is ours/);
     }
-    expect(await maker.page.getByRole("navigation", { name: "Shop" }).innerText()).not.toContain("Team");
+    expect(await maker.page.getByRole("navigation", { name: "Shop" }).textContent()).not.toContain("Team");
   });
 
   it("takes the brief and the artwork at its true size", async () => {
@@ -299,7 +299,7 @@ describe("the round trip from artwork to an approved proof", () => {
       const guest = await seat(size);
       await guest.open(link);
       await shows(guest.page.getByRole("main"), /Fenwood Signs[\s\S]*Shop sign, sunflower[\s\S]*600 × 400 mm/);
-      expect(await guest.page.getByRole("main").innerText()).not.toMatch(/petals|Odile|SHA|sunfield\.example/);
+      expect(await guest.page.getByRole("main").textContent()).not.toMatch(/petals|Odile|SHA|sunfield\.example/);
       expect(guest.faults).toEqual([]);
       await guest.leave();
     }

@@ -1,3 +1,6 @@
+import { cp, mkdtemp, rm } from "node:fs/promises";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
 import { vi } from "vitest";
 import { loadDemo } from "#server/db/demo/load-demo.ts";
 import { runQueue } from "#server/jobs/run-queue.ts";
@@ -19,7 +22,10 @@ export const patienceMs = 25_000;
  * demo shop is in it.
  */
 export async function startServedApp({ demo = false }: { demo?: boolean } = {}): Promise<ServedApp> {
-  const app = await startTestApp({ poolMax: 8 });
+  // Pages fetch their parts when they are first opened: a build that begins meanwhile must not take them away.
+  const clientDir = await mkdtemp(join(tmpdir(), "standproud-client-"));
+  await cp("dist/client", clientDir, { recursive: true });
+  const app = await startTestApp({ poolMax: 8, env: { CLIENT_DIR: clientDir } });
   if (demo) await loadDemo(app.services);
   const queue = await runQueue(app.services);
   const mailTo = (address: string, subject: RegExp): Promise<Caught> =>
@@ -47,6 +53,7 @@ export async function startServedApp({ demo = false }: { demo?: boolean } = {}):
     async stop() {
       await queue.stop();
       await app.stop();
+      await rm(clientDir, { recursive: true, force: true });
     },
   };
 }

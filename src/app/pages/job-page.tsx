@@ -65,7 +65,7 @@ export function JobPage() {
                 shop={slug}
                 jobId={jobId}
                 unit={shop.unit}
-                mayAdd={job.can.editMockup || job.can.editBrief}
+                mayAdd={staff ? job.can.editMockup : job.can.editBrief}
               />
             )}
             {job.state !== "brief" && brief}

@@ -2,6 +2,7 @@ import { useInfiniteQuery } from "@tanstack/react-query";
 import type { ReactNode } from "react";
 import { Button } from "@/components/ui/button.tsx";
 import { EmptyState } from "@/components/ui/empty-state.tsx";
+import { itemsOf } from "@/lib/pages-query.ts";
 import { type JobFilter, jobsQuery } from "../api/queries.ts";
 import { JobRow } from "./job-row.tsx";
 import { MoveGroup } from "./move-group.tsx";
@@ -27,10 +28,14 @@ export function BenchLists({
 }) {
   const { whoseMove, ...rest } = filter;
   const shown = groups.filter((group) => whoseMove === undefined || group.whoseMove === whoseMove);
-  const all = useInfiniteQuery(jobsQuery(shop, { ...rest, whoseMove: shown[0]?.whoseMove ?? "ours" }));
-  const counts = all.data?.pages[0]?.counts;
-  const nothing = counts !== undefined && shown.every((group) => counts[group.whoseMove] === 0);
-  if (nothing) {
+  // The very lists that the groups show: the counts that come with them are of all jobs, whatever is filtered.
+  const lists = {
+    ours: useInfiniteQuery(jobsQuery(shop, { ...rest, whoseMove: "ours" })),
+    client: useInfiniteQuery(jobsQuery(shop, { ...rest, whoseMove: "client" })),
+    nobody: useInfiniteQuery(jobsQuery(shop, { ...rest, whoseMove: "nobody" })),
+  };
+  const isEmpty = ({ data }: (typeof lists)["ours"]) => data !== undefined && itemsOf(data).length === 0;
+  if (shown.every((group) => isEmpty(lists[group.whoseMove]))) {
     return Object.keys(filter).some((name) => name !== "sort") ? (
       <EmptyState title="No job matches" action={<Button onClick={onClear}>Show all jobs</Button>}>
         Try fewer words, or take the filter away.

@@ -39,12 +39,16 @@ export function MoveGroup({
   }
   const rows = itemsOf(jobs.data);
   if (rows.length === 0) return null;
+  const isNarrowed = filter.q !== undefined || filter.state !== undefined || filter.clientId !== undefined;
   const total = jobs.data.pages[0]?.counts[whoseMove] ?? rows.length;
+  const count = isNarrowed
+    ? `${counted(rows.length, noun)}${jobs.hasNextPage ? " and more" : ""}`
+    : counted(total, noun);
   return (
     <section>
       <h2 className="flex items-baseline gap-3">
         <span className={cx("font-serif text-lg font-bold", tones[whoseMove])}>{title}</span>
-        <span className="font-sans text-fine text-graphite">{counted(total, noun)}</span>
+        <span className="font-sans text-fine text-graphite">{count}</span>
       </h2>
       <ul className="mt-2 border-t border-rule lg:border-t-0">{rows.map(children)}</ul>
       <ShowMore query={jobs} what={`${noun}s`} />
