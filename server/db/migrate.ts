@@ -48,14 +48,18 @@ export function migrator(sequelize: Sequelize, steps: readonly Migration[] = mig
   });
 }
 
-/** What the app's role may do: read and write rows, never own, empty or alter tables, never touch what is kept. */
+/**
+ * What the app's role may do: read and write rows, never own, empty or alter tables, never touch what is kept. It deletes
+ * nothing but the naming of an approver; what people wrote stays as they wrote it.
+ */
 const grants = (role: string) => `
 grant usage on schema public, graphile_worker to ${role};
-grant select, insert, update, delete on all tables in schema public to ${role};
-revoke update, delete on events, decisions, certificates from ${role};
-revoke delete on revisions from ${role};
-revoke update on stored_files from ${role};
-revoke insert, update, delete on migrations from ${role};
+grant select, insert, update on all tables in schema public to ${role};
+revoke delete on all tables in schema public from ${role};
+grant delete on job_approvers to ${role};
+revoke update on events, decisions, certificates, stored_files, notes, replies from ${role};
+grant update (state) on notes to ${role};
+revoke insert, update on migrations from ${role};
 grant usage, select on all sequences in schema public to ${role};
 grant select, insert, update, delete on all tables in schema graphile_worker to ${role};
 grant usage, select on all sequences in schema graphile_worker to ${role};

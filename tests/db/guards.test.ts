@@ -263,7 +263,8 @@ describe("shops", () => {
 
   it("a job that anything hangs on is not deleted with its history", async () => {
     const { job } = await buildWork();
-    expect(await refusal(app, "delete from jobs where id = $1", [job])).toBe(foreignKey);
+    expect(await refusal(owner, "delete from jobs where id = $1", [job])).toBe(foreignKey);
+    expect(await refusal(app, "delete from jobs where id = $1", [job])).toBe(notPermitted);
   });
 });
 
@@ -277,6 +278,13 @@ describe("the application's role", () => {
     "create table mine (id integer)",
     "update migrations set name = 'x'",
     "delete from migrations",
+    "delete from notes",
+    "delete from people",
+    "delete from stored_files",
+    "delete from outgoing_mails",
+    "update notes set text = 'x'",
+    "update notes set author_name = 'x'",
+    "update replies set text = 'x'",
     "create or replace function refuse_change() returns trigger language plpgsql as $$ begin return new; end $$",
     "set session_replication_role = replica",
     "set role standproud_owner",
