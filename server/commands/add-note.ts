@@ -8,6 +8,7 @@ import { Note } from "../models/note.ts";
 import { isInsider, isStaff, nameAt } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findRevision } from "../queries/find-revision.ts";
+import { snapshotOf } from "../queries/snapshot-of.ts";
 import { logEvent } from "./log-event.ts";
 import { mailTheOtherSide } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
@@ -31,9 +32,9 @@ export async function addNote(
     throw wrongState(`Revision ${revision.letter} is ${revision.state} and takes no more notes.`);
   if (shopOnly && !notePolicy.addShopOnly(actor, facts))
     throw notAllowed("Notes for the shop alone are left by the shop.");
-  const snapshot = JSON.parse(revision.snapshot ?? "null") as Snapshot | null;
+  const snapshot = snapshotOf(revision);
   refuseUnknownSpot(anchor, snapshot);
-  const sheet = snapshot?.drawing.sheets[0];
+  const sheet = snapshot.drawing.sheets[0];
   const note = await Note.create(
     {
       id: newId(),
@@ -66,8 +67,8 @@ export async function addNote(
 }
 
 /** A note pinned to a piece or layer that the drawing does not have would point nowhere. */
-function refuseUnknownSpot(anchor: Anchor, snapshot: Snapshot | null): void {
-  if (anchor.on === "whole" || !snapshot) return;
+function refuseUnknownSpot(anchor: Anchor, snapshot: Snapshot): void {
+  if (anchor.on === "whole") return;
   const { layers, board } = snapshot.document;
   const { layerKey, pieceId } = anchor;
   const layerKnown = layerKey === null || layerKey === "A" || layers.some(({ key }) => key === layerKey);

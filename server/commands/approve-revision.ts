@@ -1,10 +1,10 @@
 import { asksAtApproval } from "#shared/lifecycle/note-states.ts";
 import { acknowledgementsOf } from "#shared/mockup/acknowledgements.ts";
-import type { Snapshot } from "#shared/mockup/snapshot.ts";
 import { invalid, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { enqueue } from "../jobs/queue.ts";
 import { Note } from "../models/note.ts";
+import { snapshotOf } from "../queries/snapshot-of.ts";
 import { type Decidable, findDecidable, recordDecision } from "./decide.ts";
 import { logEvent } from "./log-event.ts";
 import { mailShop } from "./mail-the-other-side.ts";
@@ -54,7 +54,7 @@ export async function approveRevision(context: Context, approval: Approval): Pro
 }
 
 function acknowledgedTexts({ revision, loaded }: Decidable, ids: readonly string[]): string[] {
-  const { document, figures, words, titleBlock } = JSON.parse(revision.snapshot ?? "") as Snapshot;
+  const { document, figures, words, titleBlock } = snapshotOf(revision);
   const asked = acknowledgementsOf({ document, figures, words, unit: titleBlock.unit });
   const missing = asked.filter(({ id }) => !ids.includes(id));
   if (missing.length > 0) {

@@ -19,8 +19,9 @@ export const isApprover = (actor: Actor, revision: RevisionFacts): boolean => {
   return contact !== null && revision.approverIds.includes(contact.contactId);
 };
 
-/** While a job is stopped nobody decides on its revisions. */
-export const takesDecisions = (job: JobState): boolean => job !== "on hold" && job !== "cancelled";
+/** While a job is stopped, or once it is over, nobody decides on its revisions. */
+export const takesDecisions = (job: JobState): boolean =>
+  job !== "on hold" && job !== "cancelled" && job !== "handed over" && job !== "closed";
 
 const mayIssue = (actor: Actor, job: { readonly shopId: string }): boolean =>
   isStaff(actor, "owner", "maker") && actor.shopId === job.shopId;

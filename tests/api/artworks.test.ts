@@ -1,4 +1,5 @@
-import { readdir } from "node:fs/promises";
+import { once } from "node:events";
+import { readdir, readlink } from "node:fs/promises";
 import { connect } from "node:net";
 import { join } from "node:path";
 import { afterAll, afterEach, beforeAll, describe, expect, it } from "vitest";
@@ -41,6 +42,13 @@ afterEach(async () => {
   expect(await quarantined()).toEqual([]);
 });
 
+/** Kept files that this process, the application among it, holds open. */
+const openedFiles = async (): Promise<string[]> => {
+  const links = await Promise.all(
+    (await readdir("/proc/self/fd")).map((fd) => readlink(`/proc/self/fd/${fd}`).catch(() => "")),
+  );
+  return links.filter((path) => path.includes("/kept/"));
+};
 const svgOf = (content: string) =>
   `<svg xmlns="http://www.w3.org/2000/svg" width="100mm" height="50mm" viewBox="0 0 100 50">${content}</svg>`;
 let drawn = 0;
@@ -111,6 +119,25 @@ describe("bringing in artwork", () => {
     expect(headers.get("cache-control")).toBe("no-store");
     // RFC 8187: these signs are no attr-char and must be written as bytes.
     expect(headers.get("content-disposition")).toBe("attachment; filename*=UTF-8''it%27s%20%281%29%2A.svg");
+    await app.runJobs();
+  });
+
+  it("lets a reader leave in the middle of the file, and lets go of it", async () => {
+    const own = await buildJob(world);
+    const big = svgOf(`<!--${"x".repeat(9_000_000)}--><path d="M0 0h9v9z"/>`);
+    const added = artworkSchema.parse(JSON.parse((await bringIn(own, formWith("big.svg", big))).text));
+    const { hostname, port } = new URL(app.baseUrl);
+    const cookie = [...own.visitors.rep.cookies].map(([key, value]) => `${key}=${value}`).join("; ");
+    const socket = connect(Number(port), hostname);
+    socket.write(
+      `GET /api/shops/${own.params.shop}/artworks/${added.id}/file HTTP/1.1\r\nHost: ${hostname}:${port}\r\nCookie: ${cookie}\r\n\r\n`,
+    );
+    await once(socket, "data");
+    socket.pause();
+    await expect.poll(openedFiles, { timeout: 10_000 }).toHaveLength(1);
+    socket.destroy();
+    await expect.poll(openedFiles, { timeout: 10_000 }).toEqual([]);
+    expect(app.logged.filter((line) => line.includes("A request failed"))).toEqual([]);
     await app.runJobs();
   });
 

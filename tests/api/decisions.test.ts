@@ -10,6 +10,7 @@ import { changeJob, getJob, moveJob, setConsent } from "#shared/contracts/jobs.t
 import { addNote, type Note as NoteView, replyToNote } from "#shared/contracts/notes.ts";
 import { approveRevision, askForRevision, getCertificate, getProof, getRevision } from "#shared/contracts/revisions.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
+import { breakSnapshot } from "../support/break-snapshot.ts";
 import { buildCapStud, buildLayer, buildSign, disc, hole, plate, standoffHold } from "../support/build-sign.ts";
 import { approvalOf, approve, revisionNow } from "../support/decide.ts";
 import { buildIssued } from "../support/factories/issued.ts";
@@ -286,6 +287,29 @@ describe("approving", () => {
     expect((await own.visitors.approver.get(getRevision, { params: at(own, revisionId) })).can.decide).toBe(false);
     await own.visitors.owner.get(moveJob, { params: of(own), body: { to: "taken up again" } });
     expect((await approve(own, revisionId)).state).toBe("approved");
+  });
+
+  it("is refused once the job is handed over", async () => {
+    const { own, revisionId: aId } = await issued();
+    await approve(own, aId);
+    await own.visitors.maker.get(moveJob, { params: of(own), body: { to: "in build" } });
+    const bId = await issueNext(own, 95);
+    await own.visitors.maker.get(moveJob, { params: of(own), body: { to: "handed over" } });
+    expect(await refused(own, bId, {})).toMatchObject({
+      code: "wrong_state",
+      detail: "This job is handed over. Ask the shop.",
+    });
+    expect((await revisionNow(own, aId)).state).toBe("approved");
+  });
+
+  it("is refused when the frozen text is not what was hashed", async () => {
+    const { own, revisionId } = await issued();
+    const body = await approvalOf(own, revisionId);
+    await breakSnapshot(app.database, revisionId);
+    const problem = await own.visitors.approver.refusal(approveRevision, { params: at(own, revisionId), body });
+    expect(problem.code).toBe("internal");
+    expect(problem.detail).toBeUndefined();
+    await expectUndecided(own, revisionId);
   });
 
   it("keeps A approved while B is out, and supersedes it when B is approved", async () => {
