@@ -1,5 +1,5 @@
 import type { Snapshot } from "#shared/mockup/snapshot.ts";
-import { AppError } from "../http/app-error.ts";
+import { AppError, wrongState } from "../http/app-error.ts";
 import { type Outcome, type WorkerInTurn, workerInTurn } from "../threads/worker-in-turn.ts";
 import type { DrawingAnswer, DrawingQuestion, FreezeInput, Frozen } from "./drawing-worker.ts";
 
@@ -15,7 +15,10 @@ const questionsEach = 50;
 const freezer: WorkerInTurn<DrawingQuestion, DrawingAnswer> = workerInTurn(program, { questionsEach });
 const painter: WorkerInTurn<DrawingQuestion, DrawingAnswer> = workerInTurn(program, { questionsEach });
 
-/** What a revision freezes. Throws too_large when that takes too long, and too_many_requests while others are being worked out. */
+/**
+ * What a revision freezes. Throws too_large when that takes too long, wrong_state for a piece out of all reach, and too_many_requests
+ * while others are being worked out.
+ */
 export async function freezeDrawing(
   input: FreezeInput,
   { timeMs = drawingLimits.freezeMs }: { timeMs?: number } = {},
@@ -27,6 +30,8 @@ export async function freezeDrawing(
   }
   const told = await freezer.ask({ what: "freeze", input }, { timeMs });
   if (told.kind === "answer" && told.answer.what === "freeze") return told.answer.frozen;
+  if (told.kind === "answer" && told.answer.what === "out of reach")
+    throw wrongState("A piece reaches far beyond the board. Bring it back, or make it smaller, and issue it then.");
   if (told.kind === "late") {
     throw new AppError("too_large", {
       detail:

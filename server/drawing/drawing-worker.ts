@@ -1,5 +1,6 @@
 import { buildSnapshot } from "#shared/drawing/build-snapshot.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
+import { OutOfReach } from "#shared/geometry/clipper-kernel.ts";
 import type { Snapshot } from "#shared/mockup/snapshot.ts";
 import { loadKernel } from "../artwork/load-kernel.ts";
 import { canonicalJson } from "../files/canonical-json.ts";
@@ -18,17 +19,24 @@ export type DrawingQuestion =
   | { readonly what: "proof"; readonly snapshot: Snapshot; readonly sha256: string };
 export type DrawingAnswer =
   | { readonly what: "freeze"; readonly frozen: Frozen }
+  /** A piece reaches farther than geometry can be computed. */
+  | { readonly what: "out of reach" }
   | { readonly what: "proof"; readonly pdf: Uint8Array };
 
 answerQuestions<DrawingQuestion, DrawingAnswer>(async (question) =>
   question.what === "freeze"
-    ? { what: "freeze", frozen: freeze({ ...question.input, kernel: await loadKernel() }) }
+    ? freeze({ ...question.input, kernel: await loadKernel() })
     : { what: "proof", pdf: await renderProof(question.snapshot, question.sha256) },
 );
 
-function freeze(input: Parameters<typeof buildSnapshot>[0]): Frozen {
-  const snapshot = buildSnapshot(input);
-  const text = canonicalJson(snapshot);
-  const stops = snapshot.findings.filter(({ severity }) => severity === "stop");
-  return { text, sha256: sha256Hex(text), stops };
+function freeze(input: Parameters<typeof buildSnapshot>[0]): DrawingAnswer {
+  try {
+    const snapshot = buildSnapshot(input);
+    const text = canonicalJson(snapshot);
+    const stops = snapshot.findings.filter(({ severity }) => severity === "stop");
+    return { what: "freeze", frozen: { text, sha256: sha256Hex(text), stops } };
+  } catch (error) {
+    if (error instanceof OutOfReach) return { what: "out of reach" };
+    throw error;
+  }
 }

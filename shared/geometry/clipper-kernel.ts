@@ -68,6 +68,11 @@ export function clipperKernel(clipper: MainModule): Kernel {
   };
 }
 
+/** A shape reaches farther than the kernel's grid. */
+export class OutOfReach extends RangeError {
+  override readonly name = "OutOfReach";
+}
+
 function toGrid(clipper: MainModule, region: Region): Paths64 {
   const paths = new clipper.PathsD();
   try {
@@ -77,7 +82,7 @@ function toGrid(clipper: MainModule, region: Region): Paths64 {
       const numbers = new Float64Array(polygon.length * 3);
       for (const [index, { x, y }] of polygon.entries()) {
         if (!(Math.abs(x) <= largestCoordinateMm && Math.abs(y) <= largestCoordinateMm))
-          throw new RangeError(`A point at ${x}, ${y} lies outside what the geometry kernel takes.`);
+          throw new OutOfReach(`A point at ${x}, ${y} lies outside what the geometry kernel takes.`);
         numbers[index * 3] = Math.round(x * stepsPerMm);
         numbers[index * 3 + 1] = Math.round(y * stepsPerMm);
       }

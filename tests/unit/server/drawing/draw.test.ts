@@ -51,6 +51,12 @@ describe("freezing in a thread of its own", () => {
     expect(stops.map(({ severity }) => severity)).toContain("stop");
   });
 
+  it("refuses in words what reaches farther than geometry can be computed", async () => {
+    const placement = { x: 0, y: 0, turn: 13, scale: 1000, mirrored: false };
+    const document = buildSign([buildLayer("B", [plate("p1", 9000, 9000, [0, 0], { placement })])]);
+    await expect(freezeDrawing({ ...inputOf(90), document })).rejects.toMatchObject({ code: "wrong_state" });
+  });
+
   it("is given up in words when it takes too long, and the next one is drawn", async () => {
     await expect(freezeDrawing(inputOf(91), { timeMs: 1 })).rejects.toMatchObject({ code: "too_large" });
     expect((await freezeDrawing(inputOf(92))).text).toContain('"p1"');
