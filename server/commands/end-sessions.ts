@@ -5,15 +5,13 @@ import { Session } from "../models/session.ts";
 
 type At = { readonly now: Date; readonly transaction: Transaction };
 
-/** Ends a person's sessions at once, all of them or all but one. */
+/** Ends a person's sessions at once: all of them, all but one, or those that began in one way. */
 export async function endSessionsOf(
   { now, transaction }: At,
-  { personId, except }: { personId: string; except?: string },
+  { personId, except, began }: { personId: string; except?: string; began?: Session["began"] },
 ): Promise<void> {
-  await Session.update(
-    { endedAt: now },
-    { where: { personId, endedAt: null, ...(except ? { id: { [Op.ne]: except } } : {}) }, transaction },
-  );
+  const which = { ...(except ? { id: { [Op.ne]: except } } : {}), ...(began ? { began } : {}) };
+  await Session.update({ endedAt: now }, { where: { personId, endedAt: null, ...which }, transaction });
 }
 
 /**

@@ -38,5 +38,7 @@ export async function changePassword(
   }
   await person.update({ passwordHash: await hashPassword(password) }, { transaction });
   await killLinks(context, { personId, purpose: "new password" });
-  await endSessionsOf(context, { personId, except: sessionId });
+  // Whoever has not shown that they read the mail does not sign out those who do.
+  const among = person.addressProvenAt ? {} : ({ began: "password" } as const);
+  await endSessionsOf(context, { personId, except: sessionId, ...among });
 }

@@ -6,10 +6,13 @@ import { Session } from "../models/session.ts";
 
 const live = (personId: string, now: Date) => ({ personId, endedAt: null, expiresAt: { [Op.gt]: now } });
 
-/** A session begun by a mailed link looks after its like only: whoever reads a client's mail is not yet its person. */
+/**
+ * A session looks after its like only until its person has shown both the password and the mail: whoever reads a client's
+ * mail is not yet its person, nor is whoever typed an address.
+ */
 const within = ({ person, session }: LiveSession, now: Date) => ({
   ...live(person.id, now),
-  ...(session.began === "link" ? { began: "link" as const } : {}),
+  ...(session.began === "link" || person.addressProvenAt === null ? { began: session.began } : {}),
 });
 
 /** Where the person of a session is signed in, the newest first; nobody needs more than a hundred. */

@@ -4,7 +4,15 @@ import { QueryTypes } from "sequelize";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { concurrency } from "#server/jobs/run-queue.ts";
 import { Person } from "#server/models/person.ts";
-import { acceptInvitation, registerShop, requestLink, whoAmI } from "#shared/contracts/account.ts";
+import {
+  acceptInvitation,
+  changePassword,
+  endSession,
+  listSessions,
+  registerShop,
+  requestLink,
+  whoAmI,
+} from "#shared/contracts/account.ts";
 import { getPicture } from "#shared/contracts/revisions.ts";
 import { inviteMember } from "#shared/contracts/shop.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
@@ -39,6 +47,15 @@ describe("an address that somebody else opened an account with", () => {
     const mail = (await caughtMails(app)).find(({ to }) => to === email);
     const body = { token: tokenIn(mail?.text ?? "") };
     expect((await reader.refusal(acceptInvitation, { body })).code).toBe("not_signed_in");
+
+    // Nor does the squatter see or end where the reader is signed in.
+    const seen = (await squatter.get(listSessions)).items;
+    expect(seen.map(({ began }) => began)).toEqual(["password"]);
+    const { id: sessionId } = (await reader.get(listSessions)).items[0] ?? { id: "" };
+    expect((await squatter.refusal(endSession, { params: { sessionId } })).code).toBe("not_found");
+    const change = { current: password, password: "squatting-still" };
+    await squatter.get(changePassword, { body: change });
+    expect((await reader.get(whoAmI)).session).toBe("link");
 
     const { memberOf, contactOf } = await squatter.get(whoAmI);
     expect(memberOf.map(({ shopName }) => shopName)).toEqual(["Squat"]);
