@@ -8,6 +8,7 @@ import { BriefPart } from "@/features/jobs/components/brief-part.tsx";
 import { ConsentPart } from "@/features/jobs/components/consent-part.tsx";
 import { EventLog } from "@/features/jobs/components/event-log.tsx";
 import { JobMoves } from "@/features/jobs/components/job-moves.tsx";
+import { nextActionOf, wayToMockup } from "@/features/jobs/components/next-action.ts";
 import { NextStep } from "@/features/jobs/components/next-step.tsx";
 import { OpenNotes } from "@/features/jobs/components/open-notes.tsx";
 import { RevisionList } from "@/features/jobs/components/revision-list.tsx";
@@ -34,6 +35,9 @@ export function JobPage() {
   const job = query.data;
   const slug = shop.slug;
   const staff = side === "shop";
+  const mockup = staff ? wayToMockup(job, slug) : null;
+  const next = nextActionOf(job, slug, side);
+  const leadsToMockup = next?.kind === "go" && next.to === mockup?.to;
   // What is worked on now comes first.
   const brief = <BriefPart key="brief" shop={slug} unit={shop.unit} job={job} side={side} />;
   return (
@@ -58,7 +62,7 @@ export function JobPage() {
         <div className="grid gap-10 lg:grid-cols-[minmax(0,1.9fr)_minmax(0,1fr)] lg:gap-14">
           <div className="min-w-0 space-y-10">
             {job.state === "brief" && brief}
-            <RevisionList shop={slug} jobId={jobId} side={side} />
+            <RevisionList shop={slug} jobId={jobId} side={side} mockup={leadsToMockup ? null : mockup} />
             {/* A client sees artwork only while the brief is theirs to fill in. */}
             {(staff || job.can.editBrief) && (
               <ArtworkPart

@@ -46,6 +46,7 @@ export function MockupPage() {
       <MockupReadOnly
         unit={shop.unit}
         job={job.data}
+        jobPath={paths.job(shop.slug, jobId)}
         mockup={mockup.data}
         why={whyNotToChange({ mayEdit: mockup.data.can.edit, role })}
       />

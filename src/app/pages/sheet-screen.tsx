@@ -139,6 +139,8 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
       others={sheet.others}
       proofAddress={proofAddress}
       pathOfCompare={(before, after) => paths.compare(shop, job.id, before, after)}
+      jobPath={paths.job(shop, job.id)}
+      mockupPath={isClient ? null : paths.mockup(shop, job.id)}
       dimensions={
         hasDimensions(sheet.elevation)
           ? { shown: showDimensions, onToggle: () => setShowDimensions((shown) => !shown) }

@@ -22,9 +22,8 @@ export function nextActionOf(job: Job, shop: string, side: "shop" | "client"): N
       ? { kind: "part", label: "Fill in the brief", id: "brief" }
       : seeSheet;
   }
-  const mockup: NextAction = can.seeMockup
-    ? { kind: "go", label: can.editMockup ? "Open the mockup" : "Look at the mockup", to: paths.mockup(shop, job.id) }
-    : null;
+  const way = wayToMockup(job, shop);
+  const mockup: NextAction = way && { kind: "go", ...way };
   switch (job.state) {
     case "brief":
       return can.editBrief ? { kind: "part", label: "Fill in the brief", id: "brief" } : mockup;
@@ -47,4 +46,10 @@ export function nextActionOf(job: Job, shop: string, side: "shop" | "client"): N
     default:
       return null;
   }
+}
+
+/** How a reader gets from a job to its mockup, whatever its next step is; null for those who do not see mockups. */
+export function wayToMockup({ id, can }: Job, shop: string): { readonly label: string; readonly to: string } | null {
+  if (!can.seeMockup) return null;
+  return { label: can.editMockup ? "Open the mockup" : "Look at the mockup", to: paths.mockup(shop, id) };
 }

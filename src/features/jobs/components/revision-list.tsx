@@ -2,6 +2,7 @@ import { useInfiniteQuery } from "@tanstack/react-query";
 import { useState } from "react";
 import type { Revision } from "#shared/contracts/revisions.ts";
 import { EmptyState } from "@/components/ui/empty-state.tsx";
+import { LinkButton } from "@/components/ui/link-button.tsx";
 import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { ShowMore } from "@/components/ui/show-more.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
@@ -17,10 +18,13 @@ export function RevisionList({
   shop,
   jobId,
   side,
+  mockup,
 }: {
   readonly shop: string;
   readonly jobId: string;
   readonly side: "shop" | "client";
+  /** The way to the mockup, where the next step does not lead there. */
+  readonly mockup: { readonly label: string; readonly to: string } | null;
 }) {
   const [withdrawing, setWithdrawing] = useState<Revision | null>(null);
   const revisions = useInfiniteQuery({
@@ -30,9 +34,16 @@ export function RevisionList({
   const rows = itemsOf(revisions.data);
   return (
     <section aria-labelledby="revisions">
-      <h2 id="revisions" className="mb-3 font-serif text-lg font-bold">
-        {side === "client" ? "Drawings" : "Revisions"}
-      </h2>
+      <div className="mb-3 flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
+        <h2 id="revisions" className="font-serif text-lg font-bold">
+          {side === "client" ? "Drawings" : "Revisions"}
+        </h2>
+        {mockup && (
+          <LinkButton size="small" to={mockup.to}>
+            {mockup.label}
+          </LinkButton>
+        )}
+      </div>
       {revisions.isPending ? (
         <Skeleton label="Loading the revisions" rows={2} rowClassName="h-24" />
       ) : revisions.isError ? (

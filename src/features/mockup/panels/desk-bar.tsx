@@ -1,4 +1,5 @@
 import type { ReactNode } from "react";
+import { TextLink } from "@/components/ui/text-link.tsx";
 import { useDesk } from "../editor/desk-context.ts";
 import { withCarried } from "../model/carried.ts";
 import { centrePieces, turnPieces } from "../model/commands/pieces.ts";
@@ -8,11 +9,12 @@ import type { DeskDialog } from "./desk-dialogs.tsx";
 type DeskBarProps = {
   readonly client: string;
   readonly title: string;
+  readonly jobPath: string;
   readonly onOpen: (dialog: DeskDialog) => void;
 };
 
 /** What can be brought in, and how what is chosen is set out. */
-export function DeskBar({ client, title, onOpen }: DeskBarProps) {
+export function DeskBar({ client, title, jobPath, onOpen }: DeskBarProps) {
   const { selection, figures, edit, choose } = useDesk();
   const { pieceIds } = selection;
   const idle = pieceIds.length === 0;
@@ -23,12 +25,14 @@ export function DeskBar({ client, title, onOpen }: DeskBarProps) {
 
   return (
     <div className="flex flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-1 sm:px-6">
-      <h1 className="flex max-w-72 min-w-0 font-sans text-sm text-ink" title={`${client}, ${title}`}>
-        <span className="truncate">
+      <h1
+        className="flex max-w-80 min-w-0 gap-1.5 font-sans text-sm text-ink min-[1600px]:max-w-2xl"
+        title={`${client}, ${title}`}
+      >
+        <span className="shrink-0 font-semibold">Mockup of</span>
+        <TextLink to={jobPath} className="truncate">
           {client}, {title}
-        </span>
-        <span className="whitespace-pre">, </span>
-        <span className="font-semibold">mockup</span>
+        </TextLink>
       </h1>
       <Group title="Bring in">
         <WordButton onClick={() => onOpen("artwork")}>artwork</WordButton>

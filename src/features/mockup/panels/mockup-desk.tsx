@@ -120,7 +120,7 @@ export function MockupDesk(props: MockupDeskProps) {
           onIssued={onIssued}
         />,
       )}
-      <DeskBar client={job.client.name} title={job.title} onOpen={setDialog} />
+      <DeskBar client={job.client.name} title={job.title} jobPath={jobPath} onOpen={setDialog} />
       {kept.draft && (
         <KeptDraftNotice
           draft={kept.draft}

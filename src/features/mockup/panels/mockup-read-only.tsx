@@ -8,6 +8,7 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import { Notice } from "@/components/ui/notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { TextLink } from "@/components/ui/text-link.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { DrawingViewer } from "@/lib/drawing-viewer.tsx";
 import { useRoom } from "@/lib/use-room.ts";
@@ -17,13 +18,14 @@ import { useEngine } from "../engine/use-engine.ts";
 type MockupReadOnlyProps = {
   readonly unit: LengthUnit;
   readonly job: Job;
+  readonly jobPath: string;
   readonly mockup: Mockup;
   /** Why it can only be looked at. */
   readonly why: string;
 };
 
 /** The mockup to look at: the picture and the schedule, for a narrow window and for those who may not change it. */
-export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) {
+export function MockupReadOnly({ unit, job, jobPath, mockup, why }: MockupReadOnlyProps) {
   const [view, setView] = useState<DrawingView | null>(null);
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
@@ -52,7 +54,9 @@ export function MockupReadOnly({ unit, job, mockup, why }: MockupReadOnlyProps) 
       <h1 className="font-serif text-xl font-bold text-ink">
         {job.client.name}, {job.title}, mockup
       </h1>
-      <p className="text-base text-graphite">{why}</p>
+      <p className="text-base text-graphite">
+        {why} <TextLink to={jobPath}>To the job</TextLink>
+      </p>
       {failure && (
         <Notice tone="error" title="The drawing could not be made.">
           {failure}

@@ -7,6 +7,9 @@ type SheetToolsProps = {
   readonly others: SheetView["others"];
   readonly proofAddress: string;
   readonly pathOfCompare: (before: string, after: string) => string;
+  readonly jobPath: string;
+  /** null for a reader who does not see mockups. */
+  readonly mockupPath: string | null;
   /** null when the drawing does not name its dimensions. */
   readonly dimensions: { readonly shown: boolean; readonly onToggle: () => void } | null;
 };
@@ -14,8 +17,9 @@ type SheetToolsProps = {
 const linkClass =
   "inline-flex min-h-8 cursor-pointer items-center text-indigo underline underline-offset-4 hover:text-ink";
 
-/** What can be done with the sheet beside deciding: dimensions, comparing, the PDF. */
-export function SheetTools({ revision, others, proofAddress, pathOfCompare, dimensions }: SheetToolsProps) {
+/** What can be done with the sheet beside deciding: dimensions, comparing, the PDF, and the ways on from here. */
+export function SheetTools(props: SheetToolsProps) {
+  const { revision, others, proofAddress, pathOfCompare, jobPath, mockupPath, dimensions } = props;
   const other = comparedWith(revision.letter, others);
   const earlierFirst = other && compareLetters(other, revision) < 0;
   return (
@@ -40,6 +44,14 @@ export function SheetTools({ revision, others, proofAddress, pathOfCompare, dime
           Download PDF
         </a>
       )}
+      {mockupPath !== null && (
+        <TextLink className={linkClass} to={mockupPath}>
+          To the mockup
+        </TextLink>
+      )}
+      <TextLink className={linkClass} to={jobPath}>
+        To the job
+      </TextLink>
     </>
   );
 }

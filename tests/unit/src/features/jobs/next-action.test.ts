@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { Job } from "#shared/contracts/jobs.ts";
-import { nextActionOf } from "@/features/jobs/components/next-action.ts";
+import { nextActionOf, wayToMockup } from "@/features/jobs/components/next-action.ts";
 import { all, buildJob, none } from "./build-job.ts";
 
 const jobId = "00000000-0000-4000-8000-000000000142";
@@ -73,5 +73,21 @@ describe("nextActionOf, for the client", () => {
   });
   it("is nothing before there is a drawing", () => {
     expect(nextActionOf(buildJob({ can: none }), "s", "client")).toBeNull();
+  });
+});
+
+describe("wayToMockup", () => {
+  it("stays open while a proof is out, so that the next letter can be issued", () => {
+    const job = buildJob({ state: "out for proof", whoseMove: "ours", latest, openNotes: 1 });
+    expect(nextActionOf(job, "s", "shop")).toMatchObject({ to: sheet });
+    expect(wayToMockup(job, "s")).toEqual({ label: "Open the mockup", to: mockup });
+  });
+
+  it("is a look for those who may not change it, and none for those who see no mockups", () => {
+    expect(wayToMockup(buildJob({ can: { ...all, editMockup: false } }), "s")).toEqual({
+      label: "Look at the mockup",
+      to: mockup,
+    });
+    expect(wayToMockup(buildJob({ can: none }), "s")).toBeNull();
   });
 });
