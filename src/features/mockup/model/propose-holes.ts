@@ -6,6 +6,7 @@ import { distanceToRegionEdgeMm, regionContains } from "#shared/geometry/contain
 import { flattenPath } from "#shared/geometry/flatten.ts";
 import type { Point, Region } from "#shared/geometry/path.ts";
 import { placeRegion } from "#shared/geometry/placement.ts";
+import { isShorter } from "#shared/geometry/tolerance.ts";
 import { holeWindow } from "#shared/hardware/hole-window.ts";
 import type { CapStud, Hold, Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
 import { coordinateOf, lengthOf, mostHoles } from "./limits.ts";
@@ -16,32 +17,59 @@ const flatnessMm = 0.2;
 /** How many places are tried on the way from a corner to the middle. */
 const tries = 60;
 
+type StandoffHold = Extract<Hold, { kind: "standoff" }>;
+
 /** What a hole's window depends on besides the layer: the board under it, and where the sign will hang. */
 export type Place = { readonly document: MockupDocument; readonly place: "inside" | "outside" };
 
 /**
  * Holes towards the four corners of each piece of a layer, as far out as the cap and the rule for holes near an edge
- * allow. A piece too small for four gets fewer; the first hole of the layer is the fixed one.
+ * allow. On a layer of one piece they come nearer each other until the panel's movement leaves each of them a diameter
+ * that hides. A piece too small for four gets fewer; the first hole of the layer is the fixed one.
  */
 export function propose(layer: Layer, { hardware, id, ...where }: { hardware: CapStud; id: string } & Place): Hole[] {
   const { lower, upper } = holeWindow({ ...usual, ...passing(hardware), movement: 0 });
   const widest = Math.max(lower, upper);
   const edge = Math.max(2 * widest, hardware.capDiameter / 2 + 2, widest / 2 + layer.thickness);
   const apart = 2 * hardware.capDiameter;
-  const places = layer.pieces
-    .flatMap((piece) => corners(placeRegion(flattenPath(piece.path, flatnessMm), piece.placement), edge, apart))
-    .map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) }))
-    .filter(isPoint)
-    .slice(0, mostHoles)
-    .map(({ x, y }, index) => ({ id: `${id}-${index + 1}`, x, y, diameter: lower, fixed: index === 0 }));
-  return fitDiameters({ kind: "standoff", hardware, offset: hardware.barrelLength, holes: places }, where);
+  const regions = layer.pieces.map((piece) => placeRegion(flattenPath(piece.path, flatnessMm), piece.placement));
+  const holesFrom = (first: number): StandoffHold => {
+    const holes = regions
+      .flatMap((region) => corners(region, { edge, apart, first }))
+      .map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) }))
+      .filter(isPoint)
+      .slice(0, mostHoles)
+      .map(({ x, y }, index) => ({ id: `${id}-${index + 1}`, x, y, diameter: lower, fixed: index === 0 }));
+    return { kind: "standoff", hardware, offset: hardware.barrelLength, holes };
+  };
+  const outermost = holesFrom(1);
+  return fitDiameters(regions.length === 1 ? nearEnough(outermost, holesFrom, where) : outermost, where);
+}
+
+/** The outermost holes that all have a window, as many as there are outermost; the outermost of all where none have. */
+function nearEnough(outermost: StandoffHold, holesFrom: (first: number) => StandoffHold, where: Place): StandoffHold {
+  for (let first = 1; first < tries; first++) {
+    const hold = holesFrom(first);
+    if (hold.holes.length < outermost.holes.length) break;
+    if (hold.holes.every((hole) => hasWindow(hold, hole, where))) return hold;
+  }
+  return outermost;
+}
+
+function hasWindow(hold: StandoffHold, hole: Hole, { document, place }: Place): boolean {
+  const { lower, upper } = windowOfHole(hold, hole, {
+    document,
+    limits: defaultLimits,
+    context: { ...usualContext, place },
+  });
+  return !isShorter(upper, lower);
 }
 
 /**
  * The holes of a layer with diameters in mm that have play and hide under the cap: the middle of each hole's window, to a
  * tenth, and the least of it for the fixed one. Where no hole can do both it hides, and the dry fit says what is missing.
  */
-export function fitDiameters(hold: Extract<Hold, { kind: "standoff" }>, { document, place }: Place): Hole[] {
+export function fitDiameters(hold: StandoffHold, { document, place }: Place): Hole[] {
   const context = { ...usualContext, place };
   return hold.holes.map((hole) => {
     const { lower, upper } = windowOfHole(hold, hole, { document, limits: defaultLimits, context });
@@ -61,7 +89,8 @@ function isPoint(place: { x: number | null; y: number | null }): place is Point 
   return place.x !== null && place.y !== null;
 }
 
-function corners(region: Region, edge: number, apart: number): Point[] {
+/** `first` is the place to begin at on the way from a corner to the middle, from 1. */
+function corners(region: Region, { edge, apart, first }: { edge: number; apart: number; first: number }): Point[] {
   const box = boxOfRegion(region);
   if (!box) return [];
   const middle = boxCentre(box);
@@ -73,7 +102,7 @@ function corners(region: Region, edge: number, apart: number): Point[] {
     [1, 1],
   ] as const) {
     const corner = { x: middle.x + (dx * box.width) / 2, y: middle.y + (dy * box.height) / 2 };
-    for (let step = 1; step <= tries; step++) {
+    for (let step = first; step <= tries; step++) {
       const part = step / tries;
       const point = { x: corner.x + (middle.x - corner.x) * part, y: corner.y + (middle.y - corner.y) * part };
       if (!regionContains(region, point) || distanceToRegionEdgeMm(region, point) < edge) continue;

@@ -114,22 +114,51 @@ describe("bringing in artwork", () => {
 });
 
 describe("holding a layer", () => {
-  it("proposes four holes far out on a disc's diagonals, the first fixed and the others with play", () => {
+  it("proposes four holes on a disc's diagonals, the first fixed and each other one with a window", () => {
     const holes = holesOf(discOnStandoffs());
-    expect(holes.map(({ fixed, diameter }) => [fixed, diameter])).toEqual([
-      // 5 mm stud, half a millimetre a side: 6. A cap of 15 with 1 mm of cover hides up to 9. 165 mm along the grain move by
-      // 165 · 7e-5 · 20 = 0.23, so the window begins at 6.46; across it wood moves by more than any hole could take: hide.
-      [true, 6],
-      [false, 7.7],
-      [false, 9],
-      [false, 9],
+    // 5 mm stud, half a millimetre a side: 6. A cap of 15 with 1 mm of cover hides up to 9, so a hole may move by 1.5 mm at
+    // most. Across the grain of pine that is 1.5 / (7e-5 · 20 + 0.00267 · 4) = 124.2 mm from the fixed one, and the first
+    // place on the way in from the corners that is near enough lies 61.875 mm off the middle. Movement: 0.173 along, 1.495
+    // across and 1.180 mm on the diagonal; 1.495 leaves 8.99 to 9.
+    expect(holes.map(({ x, y, fixed, diameter }) => [x - 300, y - 200, fixed, diameter])).toEqual([
+      [-61.875, -61.875, true, 6],
+      [61.875, -61.875, false, 7.7],
+      [-61.875, 61.875, false, 9],
+      [61.875, 61.875, false, 8.7],
     ]);
-    for (const { x, y } of holes) {
+  });
+
+  it("proposes holes as far out as the cap allows where the panel moves little", () => {
+    const small = addPlate(emptyMockup(), {
+      shape: { kind: "circle", diameter: 120 },
+      place: "inside",
+      id: "disc",
+      name: "Small disc",
+      stock: midnight,
+      thickness: 4.5,
+      hold: { kind: "standoff", hardware: barrel(19) },
+    });
+    for (const { x, y } of holesOf(small)) {
       const fromMiddle = Math.hypot(x - 300, y - 200);
-      expect(fromMiddle).toBeGreaterThan(115);
+      expect(fromMiddle).toBeGreaterThan(39);
       // Centre at least two hole diameters from the edge.
-      expect(fromMiddle).toBeLessThanOrEqual(137.5 - 15);
+      expect(fromMiddle).toBeLessThanOrEqual(60 - 18);
     }
+  });
+
+  it("proposes the outermost holes where no place gives every one a window", () => {
+    const thin = { ...barrel(19), capDiameter: 7, barrelDiameter: 7 };
+    // A cap of 7 over a 5 mm stud hides up to 5 mm: no hole with play can hide, wherever it is.
+    const holes = holesOf(
+      standLayer(bondLayer(discOnStandoffs(), { key: "B", adhesive: epoxy }), {
+        key: "B",
+        hardware: thin,
+        place: "inside",
+        id: "h",
+      }),
+    );
+    expect(holes).toHaveLength(4);
+    for (const { x, y } of holes) expect(Math.hypot(x - 300, y - 200)).toBeGreaterThan(115);
   });
 
   it("goes from bond to standoffs and back, changing how the place is found", () => {
