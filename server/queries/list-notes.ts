@@ -2,6 +2,7 @@ import { Op } from "sequelize";
 import { z } from "zod";
 import type { FrozenNote } from "#shared/mockup/snapshot.ts";
 import type { ReadContext } from "../http/context.ts";
+import { Event } from "../models/event.ts";
 import { Note } from "../models/note.ts";
 import { Reply } from "../models/reply.ts";
 import { Revision } from "../models/revision.ts";
@@ -15,7 +16,8 @@ const withReplies = [
 
 /**
  * Up to `limit + 1` notes that stand on a revision, by number: its own and, from earlier ones, those not settled before it
- * (carried over). Shop-only notes are left out for a client.
+ * (carried over; one that is settled here stays, so that it can be seen and opened again). Shop-only notes are left out for
+ * a client.
  */
 export async function listNotes(
   { actor, transaction }: ReadContext,
@@ -31,7 +33,10 @@ export async function listNotes(
       ...(after ? { number: { [Op.gt]: after[0] } } : {}),
       [Op.or]: [
         { revisionId: revision.id },
-        { "$revision.sequence$": { [Op.lt]: revision.sequence }, state: { [Op.ne]: "settled" } },
+        {
+          "$revision.sequence$": { [Op.lt]: revision.sequence },
+          [Op.or]: [{ state: { [Op.ne]: "settled" } }, { number: await numbersSettledOn(revision, transaction) }],
+        },
       ],
     },
     include: withReplies,
@@ -40,6 +45,19 @@ export async function listNotes(
     subQuery: false,
     transaction,
   });
+}
+
+/** Numbers of the notes that somebody settled once the drawing of this revision was frozen. */
+async function numbersSettledOn(
+  { shopId, jobId, requestedAt }: Revision,
+  transaction: ReadContext["transaction"],
+): Promise<number[]> {
+  const events = await Event.findAll({
+    where: { shopId, jobId, kind: "note settled", at: { [Op.gte]: requestedAt } },
+    attributes: ["data"],
+    transaction,
+  });
+  return events.flatMap(({ data }) => ("number" in data ? [data.number] : []));
 }
 
 /** The note of this shop with replies and its revision's letter; null when there is none. */

@@ -320,7 +320,13 @@ describe("notes of earlier revisions", () => {
     expect((await notesOf(own, approver, aId)).map(({ number }) => number)).toEqual([1, 2]);
     expect((await reply(own, maker, open.id)).state).toBe("answered");
     expect((await move(own, approver, open.id, "settled")).status).toBe(200);
-    expect((await notesOf(own, approver, bId)).map(({ number }) => number)).toEqual([3]);
+    const onBNow = await notesOf(own, approver, bId);
+    expect(onBNow.map(({ number, state, can }) => [number, state, can.reopen])).toEqual([
+      [1, "settled", true],
+      [3, "open", false],
+    ]);
+    const cId = await issueNext(own, 100);
+    expect((await notesOf(own, approver, cId)).map(({ number }) => number)).toEqual([3]);
     const problem = await approver.refusal(addNote, {
       params: at(own, aId),
       body: { text: "Late", kind: "question", anchor: { on: "whole" } },
