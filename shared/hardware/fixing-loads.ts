@@ -63,7 +63,10 @@ export function fixingLoads(panel: {
   );
 }
 
-/** Share of what a fixing may carry that a load takes up; more than 1 is too much. Null when it may carry nothing. */
-export function usedShare(loadN: number, allowableN: number): number | null {
-  return allowableN > 0 ? loadN / allowableN : null;
+/** Share of what a fixing may carry that a load takes up, both in N; more than 1 is too much. */
+export function usedShare(loadN: number, allowableN: number): Outcome<number> {
+  return checked(
+    { loadN: [loadN, { least: 0, most: 1e9 }], allowableN: [allowableN, { least: 1e-3, most: 1e9 }] },
+    () => loadN / allowableN,
+  );
 }

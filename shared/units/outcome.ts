@@ -1,5 +1,5 @@
-/** Values that a calculation takes: from `least` (from just over it when `open`) to `most`, both in the value's unit. */
-export type Range = { readonly least: number; readonly most: number; readonly open?: boolean };
+/** Values that a calculation takes, both ends included, in the value's unit. */
+export type Range = { readonly least: number; readonly most: number };
 
 /** An input that a calculation can't take. A value that is no number lies in no range. */
 export type OutOfRange = { readonly field: string; readonly value: number; readonly range: Range };
@@ -7,12 +7,15 @@ export type OutOfRange = { readonly field: string; readonly value: number; reado
 /** What a calculation gives: its value, or which of its inputs lies out of range. */
 export type Outcome<T> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly reason: OutOfRange };
 
-/** Lengths of parts and signs in mm: more than nothing, up to 10 m, which is what a document takes too. */
-export const lengthRange: Range = { least: 0, most: 10_000, open: true };
+/**
+ * Lengths of parts and signs in mm: from a thousandth, the step of the geometry kernel, up to 10 m, which is what a
+ * document takes too.
+ */
+export const lengthRange: Range = { least: 0.001, most: 10_000 };
 /** Lengths in mm that may also be nothing. */
 export const spanRange: Range = { least: 0, most: 10_000 };
 /** Distances in mm from which a sign is read: up to 1 km. */
-export const distanceRange: Range = { least: 0, most: 1_000_000, open: true };
+export const distanceRange: Range = { least: 0.001, most: 1_000_000 };
 /** A part of a whole. */
 export const shareRange: Range = { least: 0, most: 1 };
 /** Forces in N, up to a tonne's weight. */
@@ -31,6 +34,6 @@ export function checked<T>(
   return { ok: true, value: compute() };
 }
 
-function isInRange(value: number, { least, most, open }: Range): boolean {
-  return value <= most && (open ? value > least : value >= least);
+function isInRange(value: number, { least, most }: Range): boolean {
+  return value >= least && value <= most;
 }

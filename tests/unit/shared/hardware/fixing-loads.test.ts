@@ -57,8 +57,8 @@ describe("what a panel asks of its fixings", () => {
   });
 
   it("takes up a share of what is allowed; nothing can be taken up where nothing is", () => {
-    expect(usedShare(50, 200)).toBe(0.25);
-    expect(usedShare(50, 0)).toBeNull();
+    expect(resultOf(usedShare(50, 200))).toBe(0.25);
+    expect(usedShare(50, 0)).toMatchObject({ ok: false, reason: { field: "allowableN" } });
   });
 });
 

@@ -1,0 +1,21 @@
+import { readdirSync, readFileSync } from "node:fs";
+import { expect, it } from "vitest";
+
+const shared = new URL("../../../../shared/", import.meta.url);
+const read = (path: string) => readFileSync(new URL(path, shared), "utf8");
+const filesIn = (folder: string) => readdirSync(new URL(`${folder}/`, shared)).filter((name) => name.endsWith(".ts"));
+
+const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour"];
+/** Parts of calculations that are explained with the ones that use them. */
+const parts = ["legibility/accessible-limits.ts", "pieces/area-moments.ts", "pieces/same-outline.ts"];
+
+it("every calculation of a subject is explained, or is a part of one that is", () => {
+  const explained = new Set(
+    filesIn("calculations").flatMap((name) =>
+      [...read(`calculations/${name}`).matchAll(/from "\.\.\/([^"]+)"/g)].map(([, path]) => path ?? ""),
+    ),
+  );
+  const modules = subjects.flatMap((subject) => filesIn(subject).map((name) => `${subject}/${name}`));
+  expect(modules.length).toBeGreaterThan(35);
+  expect(modules.filter((path) => !explained.has(path)).toSorted()).toEqual(parts);
+});
