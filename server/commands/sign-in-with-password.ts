@@ -14,6 +14,9 @@ export async function signInWithPassword(
   const matches = await isPassword(person?.passwordHash ?? null, password);
   if (!person || !matches) return null;
   return sequelize.transaction(async (transaction) => {
+    // A change of the password ends all sessions; one that began beside it would outlive it.
+    const where = { id: person.id, passwordHash: person.passwordHash };
+    if (!(await Person.findOne({ where, lock: transaction.LOCK.SHARE, transaction }))) return null;
     const now = new Date();
     const session = await beginSession({ now, transaction }, { personId: person.id, began: "password", ...browser });
     for (const actor of await placesIn({ session, person }, transaction)) {

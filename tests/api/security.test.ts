@@ -1,9 +1,12 @@
 import { readdir, stat } from "node:fs/promises";
 import { join } from "node:path";
+import { setTimeout } from "node:timers/promises";
+import pg from "pg";
 import { QueryTypes } from "sequelize";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { concurrency } from "#server/jobs/run-queue.ts";
 import { Person } from "#server/models/person.ts";
+import { Session } from "#server/models/session.ts";
 import {
   acceptInvitation,
   changePassword,
@@ -19,6 +22,7 @@ import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
 import { buildClient, buildContact } from "../support/factories/client.ts";
 import { buildMember } from "../support/factories/member.ts";
+import { testPassword } from "../support/factories/person.ts";
 import { artworksPath, buildRevision, buildWorld, formWith, plainSvg } from "../support/factories/work.ts";
 import { caughtMails, tokenIn } from "../support/mail.ts";
 import { signInAs, signInByMail } from "../support/sign-in.ts";
@@ -61,6 +65,39 @@ describe("an address that somebody else opened an account with", () => {
     expect(memberOf.map(({ shopName }) => shopName)).toEqual(["Squat"]);
     expect(contactOf).toEqual([]);
   });
+});
+
+describe("a password that is being changed", () => {
+  it("lets nobody in who typed the old one a moment before", async () => {
+    const { email, person } = await buildMember();
+    const owner = new pg.Client({ connectionString: app.database.ownerUrl });
+    await owner.connect();
+    try {
+      await owner.query("begin");
+      await owner.query("update people set password_hash = 'changed' where id = $1", [person.id]);
+      // It reads the old hash, which is not gone yet, and finds it right.
+      const visitor = app.visitor();
+      const signedIn = visitor.signIn("password", { email, password: testPassword });
+      await untilSomebodyWaits(owner);
+      await owner.query("commit");
+      expect((await signedIn).searchParams.get("error")).toBe("CredentialsSignin");
+      expect(await Session.count({ where: { personId: person.id } })).toBe(0);
+    } finally {
+      await owner.end();
+    }
+  });
+
+  /** Until another connection to this database waits for a row. */
+  async function untilSomebodyWaits(client: pg.Client): Promise<void> {
+    for (let round = 0; round < 500; round += 1) {
+      const { rows } = await client.query(
+        "select 1 from pg_locks where not granted and pid in (select pid from pg_stat_activity where datname = current_database())",
+      );
+      if (rows.length > 0) return;
+      await setTimeout(10);
+    }
+    throw new Error("Nobody waits for the row.");
+  }
 });
 
 describe("a large body", () => {
