@@ -1,10 +1,12 @@
 import { useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import { nextRevisionLetter } from "#shared/lifecycle/revision-letter.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { counted } from "@/lib/format.ts";
 import type { Saving } from "../editor/use-autosave.ts";
 import type { DryFit } from "../engine/picture-messages.ts";
+import { againstBrief } from "../model/against-brief.ts";
 import type { History } from "../model/history.ts";
 import { WordButton } from "./cell-controls.tsx";
 import { IssueDialog } from "./issue-dialog.tsx";
@@ -12,6 +14,7 @@ import { SavedState } from "./saved-state.tsx";
 
 type DeskToolsProps = {
   readonly shop: string;
+  readonly unit: LengthUnit;
   readonly job: Job;
   readonly mayIssue: boolean;
   readonly saving: Saving;
@@ -26,7 +29,7 @@ type DeskToolsProps = {
 
 /** Saved or not, a step back and forward, and the one main action: to issue the mockup as the next revision. */
 export function DeskTools(props: DeskToolsProps) {
-  const { shop, job, mayIssue, saving, history, dryFit, isCurrent, onUndo, onRedo, onIssued } = props;
+  const { shop, unit, job, mayIssue, saving, history, dryFit, isCurrent, onUndo, onRedo, onIssued } = props;
   const [open, setOpen] = useState(false);
   const letter = nextRevisionLetter(job.latest?.letter ?? null);
   const why = whyNotToIssue({ dryFit, isCurrent, isEmpty: history.present.layers.length === 0 });
@@ -66,7 +69,8 @@ export function DeskTools(props: DeskToolsProps) {
         shop={shop}
         jobId={job.id}
         letter={letter}
-        client={job.client.name}
+        approvers={job.approvers.map(({ name }) => name)}
+        differences={againstBrief(job.brief, history.present, unit)}
         save={saving.saveNow}
         onIssued={onIssued}
       />

@@ -12,29 +12,42 @@ type IssueDialogProps = {
   readonly shop: string;
   readonly jobId: string;
   readonly letter: string;
-  readonly client: string;
+  /** Who is to approve, and gets the mail. */
+  readonly approvers: readonly string[];
+  /** Where the mockup is not what the brief asks for, a sentence each. */
+  readonly differences: readonly string[];
   /** Saves what is on the desk and gives its version; null when it could not be saved. */
   readonly save: () => Promise<number | null>;
   readonly onIssued: (revisionId: string) => void;
 };
 
 /** Freezes the saved mockup as the next revision, with a few words to the client. */
-export function IssueDialog({ open, onOpenChange, letter, client, ...rest }: IssueDialogProps) {
+export function IssueDialog({ open, onOpenChange, letter, approvers, ...rest }: IssueDialogProps) {
   return (
     <Dialog
       open={open}
       onOpenChange={onOpenChange}
       title={`Issue revision ${letter}`}
-      description={`The mockup is frozen as it stands and drawn as a proof. ${client} gets a mail with a link once the proof is ready.`}
+      description={`The mockup is frozen as it stands and drawn as a proof. ${whoIsMailed(approvers)}`}
     >
       <IssueForm {...rest} letter={letter} onCancel={() => onOpenChange(false)} />
     </Dialog>
   );
 }
 
-type IssueFormProps = Omit<IssueDialogProps, "open" | "onOpenChange" | "client"> & { readonly onCancel: () => void };
+/** Only those whom the brief names are mailed. */
+function whoIsMailed(approvers: readonly string[]): string {
+  const last = approvers.at(-1);
+  if (last === undefined)
+    return "The brief names nobody who approves, so nobody gets a mail. Name someone there first.";
+  const others = approvers.slice(0, -1).join(", ");
+  const names = others === "" ? last : `${others} and ${last}`;
+  return `${names} ${others === "" ? "gets" : "get"} a mail with a link once the proof is ready.`;
+}
 
-function IssueForm({ shop, jobId, letter, save, onIssued, onCancel }: IssueFormProps) {
+type IssueFormProps = Omit<IssueDialogProps, "open" | "onOpenChange" | "approvers"> & { readonly onCancel: () => void };
+
+function IssueForm({ shop, jobId, letter, differences, save, onIssued, onCancel }: IssueFormProps) {
   const [message, setMessage] = useState("");
   const [problem, setProblem] = useState<string | null>(null);
   const [saving, setSaving] = useState(false);
@@ -63,6 +76,15 @@ function IssueForm({ shop, jobId, letter, save, onIssued, onCancel }: IssueFormP
         void send();
       }}
     >
+      {differences.length > 0 && (
+        <Notice tone="caution" title="Not what the brief asks for">
+          <ul className="space-y-0.5 text-sm">
+            {differences.map((sentence) => (
+              <li key={sentence}>{sentence}</li>
+            ))}
+          </ul>
+        </Notice>
+      )}
       <TextArea
         label="Message to the client"
         hint="Optional. It stands in the mail and on the sheet."

@@ -109,6 +109,7 @@ export function MockupDesk(props: MockupDeskProps) {
       {renderTools(
         <DeskTools
           shop={shop}
+          unit={unit}
           job={job}
           mayIssue={mockup.can.issue}
           saving={saving}
