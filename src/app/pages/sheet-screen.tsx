@@ -169,6 +169,11 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
             {job.shopName} for {job.client}. You are reading as {reader.name}
             {isClient ? `, for ${job.client}${reader.approver ? ", who decides" : ""}` : `, of ${job.shopName}`}.
           </p>
+          {revision.message && (
+            <p className="mt-1 max-w-3xl text-sm whitespace-pre-line text-ink">
+              {revision.issuedBy}: “{revision.message}”
+            </p>
+          )}
         </div>
         {isDesk && <div className="flex flex-wrap gap-x-5">{tools}</div>}
       </div>
