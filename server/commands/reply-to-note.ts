@@ -7,6 +7,7 @@ import { isInsider, isStaff, nameAt } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findNote } from "../queries/find-note.ts";
 import { logEvent } from "./log-event.ts";
+import { mailTheOtherSide } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
 
 /** Answers a note. The shop's answer makes an open note answered; the client's opens an answered one again. */
@@ -17,7 +18,7 @@ export async function replyToNote(context: Context, { noteId, text }: { noteId: 
   if (!notePolicy.reply(actor, on.facts, note))
     throw wrongState(`Revision ${on.revision.letter} is ${on.revision.state}: its notes are closed.`);
   const side = isStaff(actor) ? "shop" : "client";
-  await Reply.create(
+  const reply = await Reply.create(
     {
       id: newId(),
       shopId: note.shopId,
@@ -34,5 +35,9 @@ export async function replyToNote(context: Context, { noteId, text }: { noteId: 
   if (state !== note.state) await note.update({ state }, { transaction });
   const kind = state === "open" && side === "client" ? "note opened again" : "note answered";
   await logEvent(context, { shopId: note.shopId, jobId: note.jobId, kind, data: { number: note.number } });
+  if (!note.shopOnly) {
+    const data = { revisionId: on.revision.id, noteId, replyId: reply.id };
+    await mailTheOtherSide(context, on.loaded, { kind: "note answered", data });
+  }
   await refreshJob(context, on.loaded.job);
 }

@@ -2,7 +2,7 @@ import type { Transaction } from "sequelize";
 import type { MailKind, OutgoingMail } from "../models/outgoing-mail.ts";
 import type { Draft } from "./draft.ts";
 import { addressChanged, invitation, newPassword, signInLink } from "./templates/people.ts";
-import { approved, noteAdded, proofIssued, revisionAsked } from "./templates/work.ts";
+import { approved, noteAdded, noteAnswered, proofIssued, revisionAsked } from "./templates/work.ts";
 
 const templates: Record<MailKind, (mail: OutgoingMail, transaction: Transaction) => Promise<Draft | null>> = {
   "sign in link": signInLink,
@@ -13,6 +13,7 @@ const templates: Record<MailKind, (mail: OutgoingMail, transaction: Transaction)
   "revision asked": revisionAsked,
   approved,
   "note added": noteAdded,
+  "note answered": noteAnswered,
 };
 
 /** The words of a mail from the rows as they are now; null when it should not be sent any more. */

@@ -16,7 +16,8 @@ export type MailKind =
   | "address changed"
   | "revision asked"
   | "approved"
-  | "note added";
+  | "note added"
+  | "note answered";
 
 /** Ids of what the mail is about. Never a token: those are made when the mail is sent. */
 export type MailData = {
@@ -25,6 +26,7 @@ export type MailData = {
   personId?: string;
   revisionId?: string;
   noteId?: string;
+  replyId?: string;
 };
 
 export class OutgoingMail extends Model<InferAttributes<OutgoingMail>, InferCreationAttributes<OutgoingMail>> {

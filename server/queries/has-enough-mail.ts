@@ -10,6 +10,7 @@ const mailsAnHour: Readonly<Record<MailKind, number>> = {
   "address changed": 5,
   "proof issued": 30,
   "note added": 30,
+  "note answered": 30,
   "revision asked": 30,
   approved: 30,
 };

@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { queueMail } from "#server/commands/queue-mail.ts";
 import { OutgoingMail } from "#server/models/outgoing-mail.ts";
 import { inspectLink, sendFreshLink, whoAmI } from "#shared/contracts/account.ts";
-import { addNote } from "#shared/contracts/notes.ts";
+import { addNote, listNotes, replyToNote } from "#shared/contracts/notes.ts";
 import { askForRevision, type Revision } from "#shared/contracts/revisions.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildRevision, buildWorld, type World } from "../support/factories/work.ts";
@@ -89,6 +89,27 @@ describe("a note", () => {
     const mail = await mailAbout(world.approver.email, "Note 2");
     expect(tokenIn(mail.text)).toHaveLength(43);
     expect((await caughtMails(app)).some(({ source }) => source.includes("pays late"))).toBe(false);
+  });
+
+  it("that is answered is mailed to the other side with both wordings; one for the shop alone to nobody", async () => {
+    const { maker, approver } = world.visitors;
+    const { items } = await maker.get(listNotes, { params: noteParams() });
+    const [ofClient, , shopOnly] = items;
+    if (!ofClient || !shopOnly) throw new Error("The notes above are missing.");
+    const to = (noteId: string) => ({ ...world.params, noteId });
+    await maker.get(replyToNote, { params: to(ofClient.id), body: { text: "Widened by 5 mm." } });
+    await maker.get(replyToNote, { params: to(shopOnly.id), body: { text: "Ask for a deposit" } });
+    const subject = `Answer to note 1 on “Lobby sign” (${world.job.number}), revision A`;
+    const mail = await mailAbout(world.approver.email, "Answer to note 1");
+    expect(mail.subject).toBe(subject);
+    expect(mail.text).toContain("answered note 1 (“Wider <gap>, please”)");
+    expect(mail.text).toContain("> Widened by 5 mm.");
+    expect((await app.visitor().get(inspectLink, { body: { token: tokenIn(mail.text) } })).goTo).toBe(sheetPath());
+    await approver.get(replyToNote, { params: to(ofClient.id), body: { text: "Thank you." } });
+    const back = await mailAbout(world.owner.email, "Answer to note 1");
+    expect(back.text).toContain("> Thank you.");
+    expect(back.text).not.toContain("/link/");
+    expect((await caughtMails(app)).some(({ source }) => source.includes("deposit"))).toBe(false);
   });
 
   it("fills no mailbox: past thirty within the hour it stands on the sheet only", async () => {

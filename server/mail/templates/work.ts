@@ -6,6 +6,7 @@ import { Membership } from "../../models/membership.ts";
 import { Note } from "../../models/note.ts";
 import type { OutgoingMail } from "../../models/outgoing-mail.ts";
 import { Person } from "../../models/person.ts";
+import { Reply } from "../../models/reply.ts";
 import { Revision } from "../../models/revision.ts";
 import { Shop } from "../../models/shop.ts";
 import { type Draft, linkHours, linkRemarks } from "../draft.ts";
@@ -81,6 +82,31 @@ export async function noteAdded(mail: OutgoingMail, transaction: Transaction): P
     quote: note.text,
     after: [],
   });
+}
+
+export async function noteAnswered(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
+  const about = await aboutRevision(mail, transaction);
+  const { noteId, replyId } = mail.data;
+  if (!about || !noteId || !replyId) return null;
+  const shopId = about.shop.id;
+  const note = await Note.findOne({ where: { id: noteId, shopId }, transaction });
+  const reply = await Reply.findOne({ where: { id: replyId, noteId, shopId }, transaction });
+  if (!note || !reply) return null;
+  const isForClient = mail.data.contactId !== undefined;
+  if (isForClient && note.shopOnly) return null;
+  const write = isForClient ? toContact : toStaff;
+  return write(mail, transaction, about, {
+    subject: `Answer to note ${note.number} on ${titleOf(about)}, revision ${about.revision.letter}`,
+    paragraphs: [`${reply.authorName} answered note ${note.number} (“${opening(note.text)}”) on ${titleOf(about)}.`],
+    quote: reply.text,
+    after: [],
+  });
+}
+
+/** As much of a note as tells it from the others. */
+function opening(text: string): string {
+  const line = text.replace(/\s+/g, " ").trim();
+  return line.length > 80 ? `${line.slice(0, 79).trimEnd()}…` : line;
 }
 
 /** With a link that signs in and leads to the sheet. Not once the revision was withdrawn, or the contact is none any more. */
