@@ -15,7 +15,7 @@ export type ServedApp = Pick<TestApp, "baseUrl" | "services" | "logged" | "visit
 };
 
 /** As long as anything may take on a machine that is busy with other tests. */
-export const patienceMs = 25_000;
+export const patienceMs = 45_000;
 
 /**
  * The application as people meet it: the built client, the server on a free port, and the queue at work. With `demo` the
