@@ -90,10 +90,10 @@ export function MockupReadOnly({ unit, job, jobPath, mockup, why }: MockupReadOn
               {scheduleRows(document, figures.figures, unit).map((row) => (
                 <tr key={row.key}>
                   <RowHead>{row.key}</RowHead>
-                  <Cell>{row.what}</Cell>
+                  <Cell className="min-w-32">{row.what}</Cell>
                   <Cell>{row.stock}</Cell>
                   <Cell>{row.thickness}</Cell>
-                  <Cell>{row.heldBy}</Cell>
+                  <Cell className="min-w-44">{row.heldBy}</Cell>
                   <Cell>{row.offset}</Cell>
                   <Cell>{row.topAt}</Cell>
                   <Cell>{row.pieces}</Cell>
