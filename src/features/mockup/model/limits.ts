@@ -4,6 +4,12 @@ export const mostLayers = 60;
 export const mostPieces = 2000;
 export const mostHoles = 1000;
 export const mostOffsetMm = 1000;
+export const offsetBounds = { least: 0, most: mostOffsetMm } as const;
+export const coordinateBounds = { least: -longestMm, most: longestMm } as const;
+/** Our choice: no drill of a sign shop makes a smaller or a wider hole. */
+export const holeBounds = { least: 0.5, most: 100 } as const;
+/** Sizes of a piece against its artwork, as a share. */
+export const scaleBounds = { least: 0.001, most: 1000 } as const;
 
 /** Lengths are kept to a thousandth of a millimetre, the kernel's grid, so that sums of small moves leave no dust. */
 export function roundMm(value: number): number {

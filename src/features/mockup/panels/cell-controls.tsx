@@ -1,8 +1,10 @@
-import { type ComponentProps, type KeyboardEvent, useState } from "react";
+import { Popover } from "radix-ui";
+import { type ComponentProps, type KeyboardEvent, useId, useState } from "react";
 import { formatLength } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { parseLength } from "#shared/units/parse-length.ts";
 import { cx } from "@/lib/cx.ts";
+import { type Bounds, boundsProblem } from "../model/length-bounds.ts";
 
 /** Reads as lettering in a table and shows by its underline that it can be changed. */
 const cellClass =
@@ -10,20 +12,24 @@ const cellClass =
 
 type CellTextProps = Omit<ComponentProps<"input">, "value" | "onChange" | "onBlur" | "onKeyDown"> & {
   readonly value: string;
-  /** What was typed, on Enter or when the field is left. False when it can't be taken: the field then shows what was there. */
-  readonly onCommit: (text: string) => boolean;
+  /** What was typed, on Enter or when the field is left. Gives why it can't be taken, or null when it was. */
+  readonly onCommit: (text: string) => string | null;
 };
 
-/** A line of text in a cell: Enter or leaving takes it, Escape puts back what was there. */
+/**
+ * A line of text in a cell: Enter or leaving takes it, Escape puts back what was there. What can't be taken is said below
+ * the cell; left with it, the field shows the drawing's own value again, and the words stay until the next press or key.
+ */
 export function CellText({ value, onCommit, className, ...input }: CellTextProps) {
   const [draft, setDraft] = useState<string | null>(null);
-  const [refused, setRefused] = useState(false);
+  const [refusal, setRefusal] = useState<string | null>(null);
+  const refusalId = useId();
 
   function take() {
     if (draft === null) return;
-    const taken = draft === value || onCommit(draft);
-    setRefused(!taken);
-    if (taken) setDraft(null);
+    const why = draft === value ? null : onCommit(draft);
+    setRefusal(why);
+    if (why === null) setDraft(null);
   }
 
   function handleKeyDown(event: KeyboardEvent<HTMLInputElement>) {
@@ -31,42 +37,67 @@ export function CellText({ value, onCommit, className, ...input }: CellTextProps
     if (event.key !== "Escape" || draft === null) return;
     event.stopPropagation();
     setDraft(null);
-    setRefused(false);
+    setRefusal(null);
   }
 
   function handleBlur() {
     take();
-    // Left with something that can't be taken, the field shows the drawing's own value again.
     setDraft(null);
-    setRefused(false);
   }
 
   return (
-    <input
-      {...input}
-      value={draft ?? value}
-      aria-invalid={refused || undefined}
-      onChange={(event) => setDraft(event.target.value)}
-      onKeyDown={handleKeyDown}
-      onBlur={handleBlur}
-      className={cx(cellClass, className)}
-    />
+    <Popover.Root open={refusal !== null} onOpenChange={(open) => open || setRefusal(null)}>
+      <Popover.Anchor asChild>
+        <input
+          {...input}
+          value={draft ?? value}
+          aria-invalid={(draft !== null && refusal !== null) || undefined}
+          aria-describedby={refusal === null ? undefined : refusalId}
+          onChange={(event) => {
+            setDraft(event.target.value);
+            setRefusal(null);
+          }}
+          onKeyDown={handleKeyDown}
+          onBlur={handleBlur}
+          className={cx(cellClass, className)}
+        />
+      </Popover.Anchor>
+      <Popover.Portal>
+        <Popover.Content
+          id={refusalId}
+          role="alert"
+          align="start"
+          side="bottom"
+          sideOffset={4}
+          // The words are read where the hand is: the focus stays in the cell, or goes where it was going.
+          onOpenAutoFocus={(event) => event.preventDefault()}
+          onCloseAutoFocus={(event) => event.preventDefault()}
+          onFocusOutside={(event) => event.preventDefault()}
+          className="z-40 max-w-72 border-l-4 border-oxblood bg-sheet px-3 py-2 text-sm text-oxblood outline outline-rule"
+        >
+          {refusal}
+        </Popover.Content>
+      </Popover.Portal>
+    </Popover.Root>
   );
 }
 
 type CellLengthProps = Omit<CellTextProps, "value" | "onCommit"> & {
   readonly mm: number;
   readonly unit: LengthUnit;
+  readonly bounds: Bounds;
   readonly onCommit: (mm: number) => void;
 };
 
-/** A length in a cell, in the shop's unit; anything that is no length is put back. */
-export function CellLength({ mm, unit, onCommit, ...input }: CellLengthProps) {
-  function handleCommit(text: string): boolean {
+/** A length in a cell, in the shop's unit and within bounds. */
+export function CellLength({ mm, unit, bounds, onCommit, ...input }: CellLengthProps) {
+  function handleCommit(text: string): string | null {
     const length = parseLength(text, unit);
-    if (length === null) return false;
+    if (length === null) return `Write a length, like ${unit === "mm" ? "19 or 2.5 cm" : "3/4 or 19 mm"}.`;
+    const problem = boundsProblem(length, bounds, unit);
+    if (problem !== undefined) return problem;
     onCommit(length);
-    return true;
+    return null;
   }
   return <CellText {...input} inputMode="decimal" value={formatLength(mm, unit)} onCommit={handleCommit} />;
 }

@@ -57,7 +57,7 @@ export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPane
                 </svg>
                 {look.word}
               </span>
-              <span className="min-w-0 text-ink">
+              <span className="min-w-0 wrap-anywhere text-ink">
                 {finding.text}{" "}
                 {(finding.where !== null || finding.layerKey !== null) && (
                   <WordButton inText aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>

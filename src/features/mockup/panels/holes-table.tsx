@@ -5,6 +5,7 @@ import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
 import { addHole, fitHoles, fixHole, proposeHoles, removeHole, setHole } from "../model/commands/holes.ts";
 import { boxOfPieces } from "../model/commands/pieces.ts";
+import { coordinateBounds, holeBounds } from "../model/limits.ts";
 import { chooseHole } from "../model/selection.ts";
 import { CellLength, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
@@ -86,6 +87,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       aria-label={`x of ${title}`}
                       mm={hole.x}
                       unit={unit}
+                      bounds={coordinateBounds}
                       onCommit={(mm) => set({ x: mm })}
                     />
                   </DeskCell>
@@ -94,6 +96,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       aria-label={`y of ${title}`}
                       mm={hole.y}
                       unit={unit}
+                      bounds={coordinateBounds}
                       onCommit={(mm) => set({ y: mm })}
                     />
                   </DeskCell>
@@ -102,6 +105,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       aria-label={`Diameter of ${title}`}
                       mm={hole.diameter}
                       unit={unit}
+                      bounds={holeBounds}
                       onCommit={(mm) => set({ diameter: mm })}
                     />
                   </DeskCell>

@@ -2,6 +2,7 @@ import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { centrePieces, placePiece, removePieces } from "../model/commands/pieces.ts";
+import { coordinateBounds, scaleBounds } from "../model/limits.ts";
 import { chooseLayer, choosePiece } from "../model/selection.ts";
 import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
@@ -19,7 +20,7 @@ export function PiecesPanel() {
   return (
     <section aria-label={`Pieces of ${key}`} className="space-y-4 border-t border-rule px-4 pt-3 pb-6 sm:px-6">
       <div className="flex flex-wrap items-baseline gap-x-4">
-        <h2 className="font-serif text-base font-bold text-ink">
+        <h2 className="min-w-0 font-serif text-base font-bold wrap-anywhere text-ink">
           Pieces of {key}, {name}
         </h2>
         <p className="text-fine text-graphite">
@@ -61,17 +62,34 @@ export function PiecesPanel() {
                     </WordButton>
                   </DeskRowHead>
                   <DeskCell className="w-28">
-                    <CellLength aria-label={`x of ${title}`} mm={x} unit={unit} onCommit={(mm) => place({ x: mm })} />
+                    <CellLength
+                      aria-label={`x of ${title}`}
+                      mm={x}
+                      unit={unit}
+                      bounds={coordinateBounds}
+                      onCommit={(mm) => place({ x: mm })}
+                    />
                   </DeskCell>
                   <DeskCell className="w-28">
-                    <CellLength aria-label={`y of ${title}`} mm={y} unit={unit} onCommit={(mm) => place({ y: mm })} />
+                    <CellLength
+                      aria-label={`y of ${title}`}
+                      mm={y}
+                      unit={unit}
+                      bounds={coordinateBounds}
+                      onCommit={(mm) => place({ y: mm })}
+                    />
                   </DeskCell>
                   <DeskCell className="w-24">
                     <CellText
                       aria-label={`Turn of ${title}`}
                       inputMode="decimal"
                       value={String(turn)}
-                      onCommit={(text) => takeNumber(text, (value) => place({ turn: value }))}
+                      onCommit={(text) => {
+                        const value = readNumber(text);
+                        if (value === null) return "Write degrees, like 15 or −7.5.";
+                        place({ turn: value });
+                        return null;
+                      }}
                     />
                   </DeskCell>
                   <DeskCell className="w-24">
@@ -79,7 +97,13 @@ export function PiecesPanel() {
                       aria-label={`Size of ${title}`}
                       inputMode="decimal"
                       value={String(Math.round(scale * 10_000) / 100)}
-                      onCommit={(text) => takeNumber(text, (value) => place({ scale: value / 100 }), 0.1)}
+                      onCommit={(text) => {
+                        const share = (readNumber(text) ?? 0) / 100;
+                        if (share < scaleBounds.least || share > scaleBounds.most)
+                          return "Write a percentage over 0, like 80 or 125.";
+                        place({ scale: share });
+                        return null;
+                      }}
                     />
                   </DeskCell>
                   <DeskCell>
@@ -114,10 +138,8 @@ export function PiecesPanel() {
   );
 }
 
-/** Reads a number as people write it, with a point or a comma. False when it is none or less than `least`. */
-function takeNumber(text: string, take: (value: number) => void, least = Number.NEGATIVE_INFINITY): boolean {
+/** A number as people write it, with a point or a comma; null when it is none. */
+function readNumber(text: string): number | null {
   const value = Number(text.trim().replace(",", ".").replace("−", "-").replace(/[°%]$/, ""));
-  if (text.trim() === "" || !Number.isFinite(value) || value < least) return false;
-  take(value);
-  return true;
+  return text.trim() === "" || !Number.isFinite(value) ? null : value;
 }

@@ -92,7 +92,7 @@ function BackerName() {
         value={document.backer.finish}
         onCommit={(finish) => {
           edit({ label: "Finish the backer", change: (before) => setBoard(before, { finish }) });
-          return true;
+          return null;
         }}
       />
     </span>

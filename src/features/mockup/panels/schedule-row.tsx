@@ -6,6 +6,7 @@ import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { raiseLayer } from "../model/commands/set-hold.ts";
 import { setLayer } from "../model/commands/set-layer.ts";
+import { offsetBounds } from "../model/limits.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { catchBarrel } from "../model/snapping.ts";
 import { isSameStock, thicknessChoices, withCurrent } from "../model/stock-choices.ts";
@@ -69,9 +70,9 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           maxLength={120}
           value={name}
           onCommit={(text) => {
-            if (text.trim() === "") return false;
+            if (text.trim() === "") return "Give the layer a name.";
             edit({ label: `Rename ${key}`, change: (before) => setLayer(before, { key, name: text }) });
-            return true;
+            return null;
           }}
         />
       </DeskCell>
@@ -112,7 +113,13 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
       </DeskCell>
       <DeskCell className="min-w-16">
         {hold.kind === "standoff" ? (
-          <CellLength aria-label={`Offset of ${key}`} mm={hold.offset} unit={unit} onCommit={changeOffset} />
+          <CellLength
+            aria-label={`Offset of ${key}`}
+            mm={hold.offset}
+            unit={unit}
+            bounds={offsetBounds}
+            onCommit={changeOffset}
+          />
         ) : (
           "–"
         )}
