@@ -72,11 +72,24 @@ describe("a typed length", () => {
     { text: ".5", unit: "in" as const, mm: 12.7 },
     { text: "−1 1/2 in", unit: "in" as const, mm: -38.1 },
     { text: "-0", unit: "mm" as const, mm: 0 },
+    { text: "3/8", unit: "mm" as const, mm: 9.525 },
+    { text: "12 3/8", unit: "mm" as const, mm: 314.325 },
+    { text: "1.2 m", unit: "mm" as const, mm: 1200 },
+    { text: "2'", unit: "mm" as const, mm: 609.6 },
+    { text: "2'6\"", unit: "in" as const, mm: 762 },
+    { text: "2'-6 1/2", unit: "in" as const, mm: 774.7 },
+    { text: "-1 ft 6 in", unit: "mm" as const, mm: -457.2 },
+    { text: "2′ 6″", unit: "mm" as const, mm: 762 },
+    { text: "6''", unit: "mm" as const, mm: 152.4 },
+    { text: "1 foot", unit: "in" as const, mm: 304.8 },
   ])("$text in $unit is $mm mm", ({ text, unit, mm }) => {
     expect(parseLength(text, unit)).toBeCloseTo(mm, 9);
   });
 
-  it.each(["", "wide", "12 3/", "1/0", "1 2 3", "12mm3", "1e3", "NaN", "--3"])("%j is none", (text) => {
-    expect(parseLength(text, "mm")).toBeNull();
-  });
+  it.each(["", "wide", "12 3/", "1/0", "1 2 3", "12mm3", "1e3", "NaN", "--3", "2'6 mm", "'6", "2'2'", "1/0 ft"])(
+    "%j is none",
+    (text) => {
+      expect(parseLength(text, "mm")).toBeNull();
+    },
+  );
 });
