@@ -22,14 +22,13 @@ afterAll(async () => {
 
 it("fifty kills at random moments lose nothing that was acknowledged and leave nothing half done", async () => {
   for (let round = 1; round <= kills; round += 1) {
-    const work = Promise.all([
-      shop.issue(80 + round),
-      shop.bringIn(plainSvg().replace("<svg ", `<svg id="round${round}" `)),
-    ]);
-    // From before the first request is read until after the PDF and its mail are done.
-    await pause(random() ** 2 * 4_000);
+    const issuing = shop.issue(80 + round);
+    const bringing = shop.bringIn(plainSvg().replace("<svg ", `<svg id="round${round}" `));
+    // In two rounds of three the revision is acknowledged first, so that the kill meets its PDF, its keeping or its mail.
+    if (round % 3 !== 0) await issuing;
+    await pause(random() * 1_500);
     await server.kill();
-    await work;
+    await Promise.all([issuing, bringing]);
     await server.start();
     await shop.settled();
     await shop.expectWhole();
@@ -38,5 +37,6 @@ it("fifty kills at random moments lose nothing that was acknowledged and leave n
   process.stdout.write(
     `${kills} kills; acknowledged before them: ${revisionIds.size} issues, ${artworks.size} uploads.\n`,
   );
-  expect(revisionIds.size + artworks.size).toBeGreaterThan(kills / 2);
+  expect(revisionIds.size).toBeGreaterThan(kills / 2);
+  expect(artworks.size).toBeGreaterThan(kills / 2);
 });

@@ -1,5 +1,5 @@
 import { type ChildProcess, spawn } from "node:child_process";
-import { mkdtemp, rm } from "node:fs/promises";
+import { cp, mkdtemp, rm } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { checkoutOf } from "#server/start/data-folder.mjs";
@@ -25,6 +25,10 @@ export type KillableServer = {
 export async function prepareServer(): Promise<KillableServer> {
   const database = await createTestDatabase();
   const folder = await mkdtemp(join(tmpdir(), "standproud-kill-"));
+  const root = checkoutOf(import.meta.url);
+  // A copy, so that a build beside this test can't pull the bundle away between two starts.
+  const bundle = await mkdtemp(join(root, "dist", "under-fire-"));
+  await cp(join(root, "dist", "server"), bundle, { recursive: true });
   const port = await findFreePort();
   const baseUrl = `http://127.0.0.1:${port}`;
   const filesDir = join(folder, "files");
@@ -59,8 +63,8 @@ export async function prepareServer(): Promise<KillableServer> {
     kill,
     printed: () => output,
     async start() {
-      const started = spawn(process.execPath, ["--enable-source-maps", "dist/server/index.mjs"], {
-        cwd: checkoutOf(import.meta.url),
+      const started = spawn(process.execPath, ["--enable-source-maps", join(bundle, "index.mjs")], {
+        cwd: root,
         env,
         stdio: ["ignore", "pipe", "pipe"],
       });
@@ -79,6 +83,7 @@ export async function prepareServer(): Promise<KillableServer> {
       await kill();
       await database.drop();
       await rm(folder, { recursive: true, force: true });
+      await rm(bundle, { recursive: true, force: true });
     },
   };
 }
