@@ -3,6 +3,7 @@ import fc from "fast-check";
 import { expect, it } from "vitest";
 import { z } from "zod";
 import { deltaE00, labOf } from "#shared/colour/lab.ts";
+import { checkReference } from "../support/check-reference.ts";
 
 const read = (name: string): unknown =>
   JSON.parse(readFileSync(new URL(`../fixtures/reference/${name}`, import.meta.url), "utf8"));
@@ -18,8 +19,9 @@ it("the table has its 34 pairs", () => {
 it.each(pairs)("ΔE00 of (%f %f %f) and (%f %f %f) is %f in both orders", (L1, a1, b1, L2, a2, b2, expected) => {
   const one = { L: L1, a: a1, b: b1 };
   const other = { L: L2, a: a2, b: b2 };
-  expect(Math.abs(deltaE00(one, other) - expected)).toBeLessThanOrEqual(5e-5);
-  expect(Math.abs(deltaE00(other, one) - expected)).toBeLessThanOrEqual(5e-5);
+  const row = { source: "Sharma, Wu, Dalal 2005, table I", expected, within: 5e-5 };
+  checkReference({ ...row, what: `ΔE00 of ${L1} ${a1} ${b1} and ${L2} ${a2} ${b2}`, got: deltaE00(one, other) });
+  checkReference({ ...row, what: `ΔE00 of ${L2} ${a2} ${b2} and ${L1} ${a1} ${b1}`, got: deltaE00(other, one) });
 });
 
 // IEC 61966-2-1 and CIE 15, D65, 2 degrees; to 0.01.
@@ -29,9 +31,10 @@ const colours = z
 
 it.each(colours)("$srgb is Lab $Lab_D65", ({ srgb, Lab_D65: [L, a, b] }) => {
   const lab = labOf(srgb);
-  expect(Math.abs(lab.L - L)).toBeLessThanOrEqual(0.01);
-  expect(Math.abs(lab.a - a)).toBeLessThanOrEqual(0.01);
-  expect(Math.abs(lab.b - b)).toBeLessThanOrEqual(0.01);
+  const row = { source: "IEC 61966-2-1, CIE 15", within: 0.01 };
+  checkReference({ ...row, what: `L* of ${srgb}`, expected: L, got: lab.L });
+  checkReference({ ...row, what: `a* of ${srgb}`, expected: a, got: lab.a });
+  checkReference({ ...row, what: `b* of ${srgb}`, expected: b, got: lab.b });
 });
 
 it("a colour does not differ from itself, and differs the same both ways", () => {

@@ -8,6 +8,7 @@ import type { Kernel } from "#shared/geometry/kernel.ts";
 import type { Polygon } from "#shared/geometry/path.ts";
 import { circleKappa, circlePath, ellipsePath, rectanglePath, roundedRectanglePath } from "#shared/geometry/shapes.ts";
 import { regionTransform, rotateMatrix } from "#shared/geometry/transform.ts";
+import { checkReference } from "../support/check-reference.ts";
 
 // Source: elementary plane geometry, the Steiner formula for parallel bodies, and the cubic approximation of the circle
 // (T. Dokken et al., Computer Aided Geometric Design 7, 1990), collected in tests/fixtures/reference/geometry-cases.json.
@@ -40,8 +41,9 @@ describe("areas and lengths", () => {
       x: 50 + Math.cos((2 * Math.PI * k) / n),
       y: -20 + Math.sin((2 * Math.PI * k) / n),
     }));
-    expect(regionAreaMm2([ring])).toBeCloseTo(area, 9);
-    expect(regionPerimeterMm([ring])).toBeCloseTo(perimeter, 9);
+    const row = { source: "plane geometry", within: 5e-10 };
+    checkReference({ ...row, what: `area of ${n} corners`, expected: area, got: regionAreaMm2([ring]) });
+    checkReference({ ...row, what: `edge of ${n} corners`, expected: perimeter, got: regionPerimeterMm([ring]) });
     expect(regionCentroid([ring])?.x).toBeCloseTo(50, 9);
   });
 
@@ -111,11 +113,20 @@ describe("offsets", () => {
     { name: "hexagon R1", ring: hexagon, d: 1, round: 11.73966886494311, mitre: 12.06217782649107 },
     { name: "L", ring: ell, d: 1, round: 117.92699081698724, mitre: 119 },
     { name: "L", ring: ell, d: 2, round: 166.70796326794897, mitre: 171 },
-  ])("$name grown by $d measures $round round and $mitre mitred", ({ ring, d, round, mitre }) => {
+  ])("$name grown by $d measures $round round and $mitre mitred", ({ name, ring, d, round, mitre }) => {
     // Chords of arcs within 0.01 mm lose at most 2/3 of that times the length of the arcs; the grid adds 0.0005 mm of edge.
     const arcs = 2 * Math.PI * d * 1.25;
-    expect(Math.abs(regionAreaMm2(kernel.offset([ring], d, "round")) - round)).toBeLessThan(0.01 * arcs + 0.02);
-    expect(Math.abs(regionAreaMm2(kernel.offset([ring], d, "mitre")) - mitre)).toBeLessThan(0.02);
+    const grown = (join: "round" | "mitre") => regionAreaMm2(kernel.offset([ring], d, join));
+    const source = "plane geometry, parallel bodies";
+    const within = 0.01 * arcs + 0.02;
+    checkReference({ what: `${name} grown by ${d}, round`, source, expected: round, got: grown("round"), within });
+    checkReference({
+      what: `${name} grown by ${d}, mitred`,
+      source,
+      expected: mitre,
+      got: grown("mitre"),
+      within: 0.02,
+    });
   });
 
   it.each([

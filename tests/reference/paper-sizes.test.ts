@@ -2,6 +2,7 @@ import { readFileSync } from "node:fs";
 import { expect, it } from "vitest";
 import { mmToPt } from "#shared/units/length.ts";
 import { paperSizes, usualPaper } from "#shared/units/paper.ts";
+import { checkReference } from "../support/check-reference.ts";
 
 // ISO 216:2007 and ANSI/ASME Y14.1; points at 72 to the inch of 25.4 mm (ISO 32000-1, 8.3.2.3).
 const table = readFileSync(new URL("../fixtures/reference/paper-sizes.csv", import.meta.url), "utf8")
@@ -36,8 +37,14 @@ it("knows at least the five sizes of ISO 216 and the five of ANSI/ASME Y14.1", (
 it.each(paperSizes)("$name has the size that the standard lists", (size) => {
   const row = table.find(({ name, standard }) => name === size.name && standard === size.standard);
   expect(row).toMatchObject({ widthMm: size.widthMm, heightMm: size.heightMm });
-  expect(mmToPt(size.widthMm)).toBeCloseTo(row?.widthPt ?? 0, 3);
-  expect(mmToPt(size.heightMm)).toBeCloseTo(row?.heightPt ?? 0, 3);
+  const points = { source: `${size.standard}, ISO 32000-1`, within: 5e-4 };
+  checkReference({ ...points, what: `${size.name}, wide, pt`, expected: row?.widthPt ?? 0, got: mmToPt(size.widthMm) });
+  checkReference({
+    ...points,
+    what: `${size.name}, high, pt`,
+    expected: row?.heightPt ?? 0,
+    got: mmToPt(size.heightMm),
+  });
 });
 
 it("proofs are drawn on A3 or Tabloid, lying", () => {

@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { penumbraMm, shadowDirection, shadowOffsetMm } from "#shared/drawing/light.ts";
 import reference from "../fixtures/reference/shadow-penumbra.json" with { type: "json" };
+import { checkReference } from "../support/check-reference.ts";
 
 /** Source, as the file says: geometrical optics, similar triangles. Cases are for light that meets the wall head-on. */
 const discs = reference.cases.flatMap(({ s_mm, d_mm, g_mm, penumbra_mm }) =>
@@ -16,7 +17,9 @@ describe("the half-shadow of a disc source, p = s g / d", () => {
     "source $s_mm at $d_mm, edge $g_mm before the wall: $penumbra_mm mm",
     ({ s_mm, d_mm, g_mm, penumbra_mm }) => {
       const light = { azimuth: 30, elevation: 90, angularSize: s_mm / d_mm };
-      expect(penumbraMm(g_mm, light).along).toBeCloseTo(penumbra_mm, 6);
+      const got = penumbraMm(g_mm, light).along;
+      const what = `half-shadow of ${s_mm} mm at ${d_mm}, ${g_mm} mm off`;
+      checkReference({ what, source: "similar triangles", expected: penumbra_mm, got, within: 5e-7 });
       expect(penumbraMm(g_mm, light).across).toBeCloseTo(penumbra_mm, 6);
     },
   );
@@ -31,7 +34,9 @@ describe("the offset of a shadow, g tan θ with θ from head-on", () => {
   it.each(reference.offset)(
     "θ $theta_deg°, edge $g_mm before the wall: $offset_mm mm",
     ({ theta_deg, g_mm, offset_mm }) => {
-      expect(shadowOffsetMm(g_mm, { azimuth: 0, elevation: 90 - theta_deg, angularSize: 0 })).toBeCloseTo(offset_mm, 4);
+      const got = shadowOffsetMm(g_mm, { azimuth: 0, elevation: 90 - theta_deg, angularSize: 0 });
+      const what = `shadow at ${theta_deg}°, ${g_mm} mm off`;
+      checkReference({ what, source: "similar triangles", expected: offset_mm, got, within: 5e-5 });
     },
   );
 });

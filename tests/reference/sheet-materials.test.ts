@@ -3,6 +3,7 @@ import { expect, it } from "vitest";
 import { sheetMassG, woodDensityKgM3 } from "#shared/materials/density.ts";
 import { sheetBand } from "#shared/materials/sheet-tolerance.ts";
 import { standardAcrylics, standardWoods } from "#shared/materials/standard-stock.ts";
+import { checkReference } from "../support/check-reference.ts";
 
 const rows = (name: string) =>
   readFileSync(new URL(`../fixtures/reference/${name}`, import.meta.url), "utf8")
@@ -19,8 +20,9 @@ it.each(
 )("cast acrylic of $thickness mm measures $least to $most mm", ({ thickness, least, most }) => {
   const band = sheetBand("cast", thickness);
   expect(band.nominal).toBe(thickness);
-  expect(band.least).toBeCloseTo(least, 9);
-  expect(band.most).toBeCloseTo(most, 9);
+  const source = "ISO 7823-1";
+  checkReference({ what: `cast ${thickness} mm, least`, source, expected: least, got: band.least, within: 1e-9 });
+  checkReference({ what: `cast ${thickness} mm, most`, source, expected: most, got: band.most, within: 1e-9 });
 });
 
 // ISO 7823-2: ±10 % under 3 mm, ±5 % from 3 mm.
@@ -31,8 +33,9 @@ it.each([
   { thickness: 10, least: 9.5, most: 10.5 },
 ])("extruded acrylic of $thickness mm measures $least to $most mm", ({ thickness, least, most }) => {
   const band = sheetBand("extruded", thickness);
-  expect(band.least).toBeCloseTo(least, 9);
-  expect(band.most).toBeCloseTo(most, 9);
+  const source = "ISO 7823-2";
+  checkReference({ what: `extruded ${thickness} mm, least`, source, expected: least, got: band.least, within: 1e-9 });
+  checkReference({ what: `extruded ${thickness} mm, most`, source, expected: most, got: band.most, within: 1e-9 });
 });
 
 it("a foil thinner than its tolerance can't be thinner than nothing", () => {
@@ -45,7 +48,14 @@ it.each([
   { thickness: 6, kg: 7.14 },
 ])("a square metre of $thickness mm acrylic weighs $kg kg", ({ thickness, kg }) => {
   const density = standardAcrylics[0]?.acrylic.densityKgM3 ?? 0;
-  expect(sheetMassG(1_000_000, thickness, density) / 1000).toBeCloseTo(kg, 9);
+  const got = sheetMassG(1_000_000, thickness, density) / 1000;
+  checkReference({
+    what: `a square metre of ${thickness} mm, kg`,
+    source: "ASTM D792",
+    expected: kg,
+    got,
+    within: 1e-9,
+  });
 });
 
 // Forest Products Laboratory, Wood Handbook, GTR-190 and GTR-282, table 5-3; density at 12 % moisture by the handbook's
@@ -55,8 +65,10 @@ const species = rows("fpl-specific-gravity.csv").map((line) => {
   return { name, gravity: Number(gravity), density: Number(density) };
 });
 
-it.each(species)("$name of G $gravity weighs $density kg/m³ at 12 %", ({ gravity, density }) => {
-  expect(Math.round(woodDensityKgM3(gravity, 12))).toBe(density);
+it.each(species)("$name of G $gravity weighs $density kg/m³ at 12 %", ({ name, gravity, density }) => {
+  const source = "Wood Handbook GTR-190, table 5-3";
+  const got = woodDensityKgM3(gravity, 12);
+  checkReference({ what: `density of ${name}, kg/m³`, source, expected: density, got, within: 0.5 });
 });
 
 it.each([
