@@ -80,6 +80,13 @@ describe("the room left in the wood", () => {
     },
   );
 
+  it("counts the hole of a blind stud, which is deeper than its stud", () => {
+    const reach = resultOf(screwReach({ kind: "blindStud", length: 30, offset: 19 }));
+    const room = resultOf(reachRoom(reach, { slat: 0, substrate: 18, ...usualWood }));
+    expect(room.leftMm).toBeCloseTo(3.7, 9);
+    expect(room.pastSlatMm).toBeCloseTo(11, 9);
+  });
+
   it("counts the deepest for breaking through and the shallowest for holding", () => {
     const room = resultOf(reachRoom(deep(15.9, 14.1), { slat: 8, substrate: 12, ...usualWood }));
     expect(room.leftMm).toBeCloseTo(1.8, 9);
