@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { pathSchema } from "../mockup/document.ts";
-import { inShop, instant, noContent, nothing, pageOf, pageQuery, sha256 } from "./common.ts";
+import { inShop, instant, lengthMm, noContent, nothing, pageOf, pageQuery, sha256 } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
 const box = z.strictObject({ x: z.number(), y: z.number(), width: z.number(), height: z.number() });
@@ -91,7 +91,7 @@ export const setTrueSize = endpoint({
   summary: "Choose the true size by one dimension",
   params: oneArtwork,
   query: nothing,
-  body: z.strictObject({ side: z.enum(["width", "height"]), lengthMm: z.number().finite().positive().max(10_000) }),
+  body: z.strictObject({ side: z.enum(["width", "height"]), lengthMm }),
   result: artworkSchema,
 });
 export const removeArtwork = endpoint({

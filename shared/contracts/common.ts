@@ -49,3 +49,6 @@ export const writtenLine = (longest: number, whenEmpty: string) =>
     .refine((text) => !/[\p{Cc}\p{Cs}]/u.test(text), "Remove the control characters.");
 
 export const personName = writtenLine(120, "Write a name.");
+
+/** A length of a sign or a piece in mm, as a form takes it. */
+export const lengthMm = z.number().finite().positive("Write a length over 0.").max(10_000, "At most 10 m (32 feet).");

@@ -1,12 +1,12 @@
 import { z } from "zod";
 import { jobStates, staffStates } from "../lifecycle/job-states.ts";
-import { day, inShop, instant, nothing, pageOf, pageQuery, writtenLine, writtenText } from "./common.ts";
+import { day, inShop, instant, lengthMm, nothing, pageOf, pageQuery, writtenLine, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
 export const jobState = z.enum(jobStates);
 export const move = z.enum(["ours", "client", "nobody"]);
 
-const lengthMm = z.number().finite().positive().max(10_000);
+const howMany = "Write a whole number from 1 to 1000.";
 
 /** What the sign is to be. Every field may be missing until the brief is complete. */
 export const briefSchema = z.strictObject({
@@ -14,9 +14,14 @@ export const briefSchema = z.strictObject({
   heightMm: lengthMm.nullable(),
   place: z.enum(["inside", "outside"]).nullable(),
   wall: writtenText(400),
-  viewingDistanceMm: z.number().finite().positive().max(200_000).nullable(),
+  viewingDistanceMm: z
+    .number()
+    .finite()
+    .positive("Write a distance over 0.")
+    .max(200_000, "At most 200 m (656 feet).")
+    .nullable(),
   lighting: writtenText(400),
-  quantity: z.number().int().min(1).max(1000),
+  quantity: z.number(howMany).int(howMany).min(1, howMany).max(1000, howMany),
   brandColours: writtenText(400),
   about: writtenText(2000),
   /** The words exactly as they shall read, a line a line. */

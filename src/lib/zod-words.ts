@@ -7,9 +7,12 @@ z.config({
   customError: (issue) => {
     if (issue.code === "invalid_type")
       return issue.input === undefined || issue.input === null ? "Fill this in." : "This can't be read. Check it.";
-    if (issue.code === "too_small") return issue.origin === "string" ? "Fill this in." : "This is too small.";
+    if (issue.code === "too_small")
+      return issue.origin === "string"
+        ? "Fill this in."
+        : `${issue.inclusive ? "At least" : "Over"} ${String(issue.minimum)}.`;
     if (issue.code === "too_big")
-      return issue.origin === "string" ? `At most ${String(issue.maximum)} characters.` : "This is too large.";
+      return `At most ${String(issue.maximum)}${issue.origin === "string" ? " characters" : ""}.`;
     if (issue.code === "invalid_format" || issue.code === "invalid_value") return "This can't be read. Check it.";
     return undefined;
   },

@@ -9,6 +9,7 @@ import { Select } from "@/components/ui/select.tsx";
 import { TextArea } from "@/components/ui/text-area.tsx";
 import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
 import { ApproverChoice } from "./approver-choice.tsx";
+import { dayHint } from "./day-hint.ts";
 import { DistanceField } from "./distance-field.tsx";
 import { useBriefForm } from "./use-brief-form.ts";
 
@@ -37,12 +38,18 @@ export function BriefForm({
       {side === "shop" && (
         <div className="grid gap-4 sm:grid-cols-[minmax(0,1fr)_12rem]">
           <Field label="What the sign is" error={errors.title?.message} {...register("title")} />
-          <Field label="Due on" type="date" error={errors.dueOn?.message} {...register("dueOn", emptyAsNull)} />
+          <Field
+            label="Due on"
+            type="date"
+            hint={dayHint(form.watch("dueOn"))}
+            error={errors.dueOn?.message}
+            {...register("dueOn", emptyAsNull)}
+          />
         </div>
       )}
       <TextArea
         label="The words exactly as they shall read"
-        hint="A line a line, with every comma and capital. The client reads them back when approving."
+        hint="One line here for each line of the sign, with every comma and capital. The client reads them back when approving."
         error={inBrief?.words?.message}
         {...register("brief.words")}
       />

@@ -24,22 +24,28 @@ export function DistanceField({
   readonly readOnly?: boolean;
 }) {
   const [text, setText] = useState<string | null>(null);
+  const [typing, setTyping] = useState(false);
+  const unreadable = Number.isNaN(value);
   return (
     <Field
       label={label}
-      error={Number.isNaN(value) && text === null ? "Write a number, like 5." : error}
+      error={unreadable && !typing ? "Write a number, like 5." : error}
       suffix={unit === "mm" ? "m" : "feet"}
       inputMode="decimal"
       autoComplete="off"
       readOnly={readOnly}
-      value={text ?? (Number.isNaN(value) ? "?" : shown(value, unit))}
-      onFocus={() => setText(Number.isNaN(value) ? "" : shown(value, unit))}
+      value={text ?? shown(value, unit)}
+      onFocus={() => setTyping(true)}
       onChange={(event) => {
         const written = event.target.value.trim().replace(",", ".");
         setText(event.target.value);
         onChange(written === "" ? null : Number(written) * mmOf[unit]);
       }}
-      onBlur={() => setText(null)}
+      onBlur={() => {
+        setTyping(false);
+        // What can't be read stays as it was typed, to be mended.
+        if (!unreadable) setText(null);
+      }}
     />
   );
 }

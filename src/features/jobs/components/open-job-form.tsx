@@ -14,6 +14,7 @@ import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { useSend } from "@/lib/use-send.ts";
 import { useOpenJob } from "../api/mutations.ts";
 import { clientChoicesQuery } from "../api/queries.ts";
+import { dayHint } from "./day-hint.ts";
 
 const someoneNew = "new";
 
@@ -88,7 +89,7 @@ export function OpenJobForm({ shop, onOpened }: { readonly shop: string; readonl
       />
       <Field
         label="Due on"
-        hint="The hard date, if there is one."
+        hint={dayHint(form.watch("dueOn"), "The hard date, if there is one.")}
         type="date"
         error={errors.dueOn?.message}
         {...form.register("dueOn", { setValueAs: (text: string | null) => (text === "" ? null : text) })}

@@ -97,6 +97,39 @@ describe("the brief's form", () => {
     expect(sent()).toEqual([]);
   });
 
+  it("keeps a distance that can't be read, to be mended, and says how to write one", async () => {
+    await openForm();
+    await type(field("Read from how far"), "4 paces");
+    expect(field("Read from how far").value).toBe("4 paces");
+    await until(() => document.body.textContent?.includes("Write a number, like 5."));
+    await type(field("Read from how far"), "4,5");
+    expect(field("Read from how far").value).toBe("4.5");
+    await press(button("Save the brief"));
+    await until(() => sent().length > 0);
+    expect(sent()).toEqual([{ brief: { viewingDistanceMm: 4500 } }]);
+  });
+
+  it.each([
+    { label: "How many", text: "0", words: "Write a whole number from 1 to 1000." },
+    { label: "How many", text: "", words: "Write a whole number from 1 to 1000." },
+    { label: "How many", text: "1.5", words: "Write a whole number from 1 to 1000." },
+    { label: "Width", text: "-5", words: "Write a length over 0." },
+    { label: "Height", text: "99999", words: "At most 10 m (32 feet)." },
+    { label: "Read from how far", text: "0", words: "Write a distance over 0." },
+  ])('says what $label takes when "$text" is written', async ({ label, text, words }) => {
+    await openForm();
+    await type(field(label), text);
+    await press(button("Save the brief"));
+    await until(() => document.body.textContent?.includes(words));
+    expect(sent()).toEqual([]);
+  });
+
+  it("asks about a due day that is past", async () => {
+    await openForm();
+    await type(field("Due on"), "2020-01-01");
+    await until(() => document.body.textContent?.includes("That day is past. Is the year right?"));
+  });
+
   it("puts the server's refusal under its field and keeps what was typed", async () => {
     const errors = [{ pointer: "/brief/widthMm", detail: "Wider than any bed of this shop." }];
     answer = {
