@@ -88,7 +88,7 @@ function stepBeforeProof({ revisions, briefComplete, briefSent }: MoveFacts, nex
   }
   if (briefComplete) return { move: "ours", reason: "Brief is complete, start the mockup", action: "start the mockup" };
   if (briefSent) return { move: "client", reason: "The brief is with the client", action: "wait for the brief" };
-  return { move: "ours", reason: "Brief has gaps, fill it in or send it to the client", action: "fill in the brief" };
+  return { move: "ours", reason: "Brief has gaps, fill it in", action: "fill in the brief" };
 }
 
 function stepAfterApproval(facts: MoveFacts): NextStep {

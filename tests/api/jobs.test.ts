@@ -75,7 +75,7 @@ describe("opening a job", () => {
       title: "Fascia",
       state: "brief",
       whoseMove: "ours",
-      nextStep: "Brief has gaps, fill it in or send it to the client",
+      nextStep: "Brief has gaps, fill it in",
       client: { id: client.id, name: "Linden Dairy" },
       dueOn: null,
       briefMissing: [

@@ -70,7 +70,7 @@ describe("whose move it is", () => {
     });
     const own = { ...world, job: opened };
     await expectRows(own, {
-      shop: { state: "brief", whoseMove: "ours", nextStep: "Brief has gaps, fill it in or send it to the client" },
+      shop: { state: "brief", whoseMove: "ours", nextStep: "Brief has gaps, fill it in" },
       client: null,
     });
 

@@ -30,7 +30,7 @@ it.each<{ when: string; given: Partial<MoveFacts>; move: Move; reason: string; a
     when: "the brief has gaps and was not sent",
     given: { briefComplete: false },
     move: "ours",
-    reason: "Brief has gaps, fill it in or send it to the client",
+    reason: "Brief has gaps, fill it in",
     action: "fill in the brief",
   },
   {
