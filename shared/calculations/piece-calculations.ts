@@ -14,6 +14,7 @@ import { faceMatters } from "../pieces/handed-pieces.ts";
 import { mirrorLine, mirrorToleranceMm } from "../pieces/mirror-symmetry.ts";
 import { nearTwins, usualTwinLimits } from "../pieces/near-twins.ts";
 import { smallPieceMm, smallPieces } from "../pieces/small-pieces.ts";
+import { thinnestGap } from "../pieces/thinnest-gap.ts";
 import { thinnestWidth } from "../stack/thin-places.ts";
 import { bandSum, exactly } from "../units/banded.ts";
 import { type CalculationGroup, present, worked } from "./calculation.ts";
@@ -138,9 +139,17 @@ export const pieceCalculations: CalculationGroup = {
           [...box(0, 0, 10, 10), ...box(10, 5 - neck / 2, 8, neck), ...box(18, 0, 10, 10)],
           "nonzero",
         );
+        const slot = 1.2;
+        const twoBars = kernel.union([...box(0, 0, 20, 20), ...box(20 + slot, 0, 20, 20)], "nonzero");
         return worked(
-          [["Two blocks with a neck of", neck, "mm"]],
-          [["Thinnest stroke", present(thinnestWidth(dumbbell, 3, kernel)).widthMm, "mm"]],
+          [
+            ["Two blocks with a neck of", neck, "mm"],
+            ["Two bars with a slot of", slot, "mm"],
+          ],
+          [
+            ["Thinnest stroke", present(thinnestWidth(dumbbell, 3, kernel)).widthMm, "mm"],
+            ["Thinnest gap", present(thinnestGap(twoBars, 3, kernel)).widthMm, "mm"],
+          ],
         );
       },
     },

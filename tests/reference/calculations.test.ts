@@ -26,7 +26,7 @@ const stated: Readonly<Record<string, Readonly<Record<string, string | readonly 
   mass: { Mass: [3.57, 1e-9] },
   // Wood Handbook, table 5-3: G 0.35; 1000 · 0.35 · 1.12.
   "wood-density": { Density: [392, 0.5] },
-  "thinnest-stroke": { "Thinnest stroke": [1.5, 0.03] },
+  "thinnest-stroke": { "Thinnest stroke": [1.5, 0.03], "Thinnest gap": [1.2, 0.03] },
   "smallest-box": { Length: [100, 1e-6], Width: [40, 1e-6], Area: [4000, 1e-6] },
   nodes: { Nodes: [4, 0] },
   "mirror-line": { "The wedge's face": "handed", "The L's mirror line": [45, 0.01] },

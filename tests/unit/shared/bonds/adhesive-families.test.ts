@@ -62,6 +62,14 @@ describe("a pair", () => {
     if (!fit.fits) expect(fit.why).toMatch(/\.$/);
   });
 
+  it.each(["solvent cement", "bodied cement"] as const)(
+    "of a coated back with %s is told what to take instead",
+    (family) => {
+      const fit = pairFit(family, "acrylic", "coated back");
+      expect(fit.fits ? "" : fit.why).toMatch(/Solvent lifts paint and mirror backs.*silicone.*tape/);
+    },
+  );
+
   it("on a finished face says that the bond is as strong as the finish", () => {
     const fit = pairFit("high-bond tape", "acrylic", "finished wood");
     expect(fit).toMatchObject({ fits: true, remarks: ["A bond on a finished face is as strong as the finish."] });

@@ -15,6 +15,8 @@ describe("sag", () => {
     expect(at(300, 200)).toMatchObject({ kind: "figure", upperEstimate: true });
     expect(at(300, 300)).toMatchObject({ kind: "figure", upperEstimate: false });
     expect(at(200, 300)).toEqual(at(300, 200));
+    const square = at(300, 300);
+    expect(at(300, 200)).toEqual({ ...square, upperEstimate: true });
   });
 
   it("doubles under a lasting load, when acrylic has half its modulus", () => {
