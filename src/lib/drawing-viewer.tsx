@@ -3,6 +3,7 @@ import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { cx } from "./cx.ts";
 import { DrawingSvg } from "./drawing-svg.tsx";
 import { type DrawingView, type Size, viewFit } from "./drawing-view.ts";
+import { isLegible, legibleAt } from "./legible-drawing.ts";
 import { useDrawingGestures } from "./use-drawing-gestures.ts";
 import { useRoom } from "./use-room.ts";
 
@@ -36,6 +37,9 @@ export function DrawingViewer(props: DrawingViewerProps) {
   const picture = useMemo(() => ({ width: list.widthMm, height: list.heightMm }), [list]);
   const fit = useMemo(() => viewFit(fitTo ?? picture, room ?? { width: 1, height: 1 }), [fitTo, picture, room]);
   const shown = view ?? fit;
+  // Two pictures and no more: a new one at each step of a pinch would have to be drawn anew.
+  const isClose = isLegible(list, shown.scale);
+  const drawn = useMemo(() => (isClose ? list : legibleAt(list, fit.scale)), [list, isClose, fit.scale]);
   const gestures = useDrawingGestures({ element, picture: fitTo ?? picture, room, fit, view: shown, onView });
 
   function handleClickCapture(event: MouseEvent) {
@@ -71,9 +75,9 @@ export function DrawingViewer(props: DrawingViewerProps) {
                 }}
               >
                 <Picture
-                  list={list}
+                  list={drawn}
                   title={title}
-                  className="block h-full w-full select-none"
+                  className="block h-full w-full overflow-visible select-none"
                   {...(onPick ? { onPick } : {})}
                 />
               </div>
@@ -110,7 +114,7 @@ function ViewButton({ label, about, idle = false, onPress }: ViewButtonProps) {
       onClick={idle ? undefined : onPress}
       aria-label={`${label}: ${about}`}
       className={cx(
-        "min-h-8 rounded border bg-sheet px-2 text-fine",
+        "min-h-8 rounded border bg-sheet px-2 text-fine pointer-coarse:min-h-11 pointer-coarse:px-3",
         idle ? "border-rule text-graphite" : "cursor-pointer border-graphite text-ink hover:bg-linen",
       )}
     >

@@ -14,7 +14,7 @@ const kinds: Record<ButtonKind, string> = {
 
 const sizes: Record<ButtonSize, string> = {
   normal: "min-h-11 px-4 py-2 text-base",
-  small: "min-h-9 px-3 py-1 text-sm",
+  small: "min-h-9 px-3 py-1 text-sm pointer-coarse:min-h-11",
 };
 
 export const buttonClass = (kind: ButtonKind, size: ButtonSize): string =>

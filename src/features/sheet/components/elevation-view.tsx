@@ -64,9 +64,9 @@ export function ElevationView(props: ElevationViewProps) {
           <button
             type="button"
             onClick={onLeavePlacing}
-            className="min-h-9 cursor-pointer text-indigo underline underline-offset-4"
+            className="min-h-9 cursor-pointer text-indigo underline underline-offset-4 pointer-coarse:min-h-11"
           >
-            Leave (Escape)
+            Leave<span className="pointer-coarse:hidden"> (Escape)</span>
           </button>
         </div>
       )}

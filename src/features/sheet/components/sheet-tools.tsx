@@ -15,7 +15,7 @@ type SheetToolsProps = {
 };
 
 const linkClass =
-  "inline-flex min-h-8 cursor-pointer items-center text-indigo underline underline-offset-4 hover:text-ink";
+  "inline-flex min-h-8 pointer-coarse:min-h-11 cursor-pointer items-center text-indigo underline underline-offset-4 hover:text-ink";
 
 /** What can be done with the sheet beside deciding: dimensions, comparing, the PDF, and the ways on from here. */
 export function SheetTools(props: SheetToolsProps) {
