@@ -205,7 +205,7 @@ describe("the round trip from artwork to an approved proof", () => {
     await sheet(page).isOut();
     await shows(
       sheet(page).reader(),
-      /Fenwood Signs for Sunfield Seeds\. You are reading as Odile Marsh, for Sunfield Seeds, who decides\./,
+      /Fenwood Signs for Sunfield Seeds\. You are reading as Odile Marsh, who decides\./,
     );
   });
 

@@ -44,7 +44,7 @@ export function SheetDecisions({ shop, revision, sheet, notes, proofAddress, isD
           <span className="font-serif font-bold">
             {sheet.job.number}, revision {revision.letter}
           </span>
-          <StandingWords isAlone standing={standingOf(revision, sheet.reader)} />
+          <StandingWords isAlone standing={standingOf(revision, sheet.reader, notes.filter(waitsOnShop).length)} />
         </p>
       )}
       <DecisionButtons

@@ -1,5 +1,6 @@
 import { useMemo, useRef, useState } from "react";
 import { getCertificate, getProof, type Revision, type SheetView } from "#shared/contracts/revisions.ts";
+import { waitsOnShop } from "#shared/lifecycle/note-states.ts";
 import { useNotes } from "@/features/notes/api/queries.ts";
 import { Balloons } from "@/features/notes/components/balloons.tsx";
 import { NoteComposer } from "@/features/notes/components/note-composer.tsx";
@@ -117,6 +118,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
         pieceNames={pieceNames}
         selectedId={desk.selectedId}
         onSelect={handleSelect}
+        onTakeUpAgain={desk.takeUpAgain}
         composer={composer || null}
       />
     ),
@@ -131,7 +133,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
         onDecided={() => banner.current?.focus()}
       />
     ),
-    titleBlock: <TitleBlock sheet={sheet} revision={revision} />,
+    titleBlock: <TitleBlock sheet={sheet} revision={revision} toAnswer={notes.filter(waitsOnShop).length} />,
   };
   const tools = (
     <SheetTools
@@ -167,7 +169,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
           </h1>
           <p className="text-sm text-graphite">
             {job.shopName} for {job.client}. You are reading as {reader.name}
-            {isClient ? `, for ${job.client}${reader.approver ? ", who decides" : ""}` : `, of ${job.shopName}`}.
+            {isClient ? (reader.approver ? ", who decides" : `, of ${job.client}`) : `, of ${job.shopName}`}.
           </p>
           {revision.message && (
             <p className="mt-1 max-w-3xl text-sm whitespace-pre-line text-ink">

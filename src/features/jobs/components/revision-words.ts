@@ -16,7 +16,7 @@ export const revisionTone: Record<State, MarkTone> = {
 const shopWords: Record<State, string> = {
   draft: "Draft: its PDF could not be made",
   preparing: "Preparing: the PDF is being made",
-  issued: "Issued, waiting on the client",
+  issued: "Out with the client",
   approved: "Approved",
   "revision asked": "Revision asked",
   superseded: "Superseded by a later letter",
@@ -24,7 +24,7 @@ const shopWords: Record<State, string> = {
 };
 
 const clientWords: Partial<Record<State, string>> = {
-  issued: "Waits for your answer",
+  issued: "The newest, to look at",
   approved: "Approved: this one gets built",
   "revision asked": "You asked for a change",
   superseded: "Replaced by a newer one",

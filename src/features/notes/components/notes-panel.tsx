@@ -20,6 +20,8 @@ type NotesPanelProps = {
   readonly pieceNames: ReadonlyMap<string, string>;
   readonly selectedId: string | null;
   readonly onSelect: (noteId: string | null) => void;
+  /** Brings back the note that was left just now; null when there is none. */
+  readonly onTakeUpAgain: (() => void) | null;
   /** The note being written, at the head of the list. */
   readonly composer: ReactNode;
 };
@@ -27,7 +29,7 @@ type NotesPanelProps = {
 /** The margin of the sheet: every note by its number, open ones and settled ones. */
 export function NotesPanel(props: NotesPanelProps) {
   const { shop, revisionId, letter, notes, isLoading, isWhole, error, onRetry, canNote, onAdd } = props;
-  const { pieceNames, selectedId, onSelect, composer } = props;
+  const { pieceNames, selectedId, onSelect, onTakeUpAgain, composer } = props;
   return (
     <section aria-labelledby="notes-heading">
       <div className="flex items-center justify-between gap-3 px-4 pt-3 pb-2">
@@ -41,6 +43,14 @@ export function NotesPanel(props: NotesPanelProps) {
         )}
       </div>
       {composer}
+      {onTakeUpAgain !== null && !composer && (
+        <p role="status" className="flex flex-wrap items-center gap-x-3 bg-linen px-4 py-1 text-sm">
+          The note was left.
+          <Button kind="bare" size="small" onClick={onTakeUpAgain}>
+            Take it up again
+          </Button>
+        </p>
+      )}
       {isLoading && (
         <div className="px-4 py-3">
           <Skeleton label="Loading the notes" rows={3} rowClassName="h-16" />

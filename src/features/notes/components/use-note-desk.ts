@@ -9,6 +9,8 @@ export function useNoteDesk(revisionId: string) {
   const [isPlacing, setPlacing] = useState(false);
   const [selectedId, setSelectedId] = useState<string | null>(null);
   const [said, setSaid] = useState("");
+  /** A note that was left with words in it, until the next one is begun. */
+  const [left, setLeft] = useState<NoteDraft | null>(null);
 
   useEffect(() => {
     if (!isPlacing) return;
@@ -21,6 +23,7 @@ export function useNoteDesk(revisionId: string) {
 
   function begin() {
     setSelectedId(null);
+    setLeft(null);
     setDraft(draft ?? emptyDraft);
     setPlacing(true);
   }
@@ -36,13 +39,23 @@ export function useNoteDesk(revisionId: string) {
     if (next.anchor !== null) setPlacing(false);
   }
 
-  function leave() {
+  function close() {
     setDraft(null);
     setPlacing(false);
   }
 
+  function leave() {
+    setLeft(draft !== null && draft.text.trim() !== "" ? draft : null);
+    close();
+  }
+
+  function takeUpAgain() {
+    setDraft(left);
+    setLeft(null);
+  }
+
   function land(noteId: string, words: string) {
-    leave();
+    close();
     setSelectedId(noteId);
     setSaid(words);
     // The form that had the focus is gone; the new line takes it once it is drawn.
@@ -58,6 +71,7 @@ export function useNoteDesk(revisionId: string) {
     place,
     change,
     leave,
+    takeUpAgain: left === null ? null : takeUpAgain,
     land,
     startPlacing: () => setPlacing(true),
     stopPlacing: () => setPlacing(false),

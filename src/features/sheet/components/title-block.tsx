@@ -9,10 +9,12 @@ import { StandingWords } from "./standing-words.tsx";
 type TitleBlockProps = {
   readonly sheet: Pick<SheetView, "job" | "reader" | "board">;
   readonly revision: Revision;
+  /** Notes that wait on the shop. */
+  readonly toAnswer: number;
 };
 
 /** The drawing's title block, with the fields of ISO 7200. */
-export function TitleBlock({ sheet, revision }: TitleBlockProps) {
+export function TitleBlock({ sheet, revision, toAnswer }: TitleBlockProps) {
   const { job, board, reader } = sheet;
   const decision = revision.decision;
   return (
@@ -36,7 +38,7 @@ export function TitleBlock({ sheet, revision }: TitleBlockProps) {
         {revision.issuedBy}, {job.shopName}
       </Cell>
       <Cell name="Approved by" wide={3}>
-        <StandingWords standing={standingOf(revision, reader)} />
+        <StandingWords standing={standingOf(revision, reader, toAnswer)} />
         {revision.state === "approved" && decision && <span className="block">{formatDay(decision.at)}</span>}
       </Cell>
     </dl>

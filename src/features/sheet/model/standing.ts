@@ -7,8 +7,8 @@ export type Standing = { readonly words: string; readonly alone: string; readonl
 
 type Decided = Pick<Revision, "state" | "decision" | "letter">;
 
-/** Where a revision stands, as the reader is to be told. */
-export function standingOf(revision: Decided, reader: SheetView["reader"]): Standing {
+/** Where a revision stands, as the reader is to be told. `toAnswer` counts the notes that wait on the shop. */
+export function standingOf(revision: Decided, reader: SheetView["reader"], toAnswer = 0): Standing {
   const same = (words: string, tone: StandingTone): Standing => ({ words, alone: words, tone });
   switch (revision.state) {
     case "approved": {
@@ -21,6 +21,8 @@ export function standingOf(revision: Decided, reader: SheetView["reader"]): Stan
     case "withdrawn":
       return { words: `nobody: ${revision.state}`, alone: revision.state, tone: "quiet" };
     case "issued":
+      if (toAnswer > 0 && reader.side === "shop") return same("notes to answer", "ours");
+      if (toAnswer > 0) return same("the shop is answering", "waiting");
       if (reader.side === "shop") return same("waiting for the client", "waiting");
       return same(reader.approver ? "waiting for you" : "waiting for your approver", "waiting");
     case "draft":

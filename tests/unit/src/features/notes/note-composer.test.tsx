@@ -25,6 +25,11 @@ function Desk({ isStaff }: { readonly isStaff: boolean }) {
       <button type="button" onClick={() => desk.place({ x: 12.3, y: 45.6, pieceId: "p1", layerKey: "C" })}>
         Drawing
       </button>
+      {desk.takeUpAgain && (
+        <button type="button" onClick={desk.takeUpAgain}>
+          Take it up again
+        </button>
+      )}
       <output>{desk.isPlacing ? "cross-hair" : "no cross-hair"}</output>
       {desk.draft && (
         <NoteComposer
@@ -153,4 +158,17 @@ it("offers a note for the shop alone to staff only", async () => {
   await show(false);
   await press(button("Add a note"));
   expect(document.body.textContent).not.toContain("Shop only");
+});
+
+it("gives back a note that was left with words in it, and offers nothing for an empty one", async () => {
+  await show();
+  await press(button("Add a note"));
+  await press(button("Leave it"));
+  expect(document.body.textContent).not.toContain("Take it up again");
+  await press(button("Add a note"));
+  await write("Wider, please");
+  await press(button("Leave it"));
+  expect(document.querySelector("form")).toBeNull();
+  await press(button("Take it up again"));
+  expect(document.querySelector("textarea")?.value).toBe("Wider, please");
 });

@@ -17,6 +17,18 @@ it.each([
   });
 });
 
+it.each([
+  { reader: approver, words: "the shop is answering", tone: "waiting" },
+  { reader: colleague, words: "the shop is answering", tone: "waiting" },
+  { reader: maker, words: "notes to answer", tone: "ours" },
+])("an issued revision with a note that waits on the shop tells $reader.name: $words", ({ reader, words, tone }) => {
+  expect(standingOf({ state: "issued", decision: null, letter: "B" }, reader, 1)).toEqual({
+    words,
+    alone: words,
+    tone,
+  });
+});
+
 it("an approved revision shows the name that was typed, not the account's", () => {
   const decision = {
     kind: "approved",
