@@ -6,7 +6,15 @@ import { Dialog } from "@/components/ui/dialog.tsx";
 import { Field } from "@/components/ui/field.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { useApprove } from "../api/mutations.ts";
-import { type Approval, approvalGaps, emptyApproval, isComplete, isStopped, shortHash } from "../model/approval.ts";
+import {
+  type Approval,
+  approvalGaps,
+  emptyApproval,
+  isAnotherName,
+  isComplete,
+  isStopped,
+  shortHash,
+} from "../model/approval.ts";
 import { DecisionProblem } from "./decision-problem.tsx";
 import { type OpenNote, OpenNoteQuestion } from "./open-note-question.tsx";
 
@@ -27,6 +35,8 @@ export function ApproveDialog(props: ApproveDialogProps) {
   const { shop, revision, sheet, openNotes, proofAddress, pathOfSheet, onClose, onApproved, onAskInstead } = props;
   const [approval, setApproval] = useState<Approval>(emptyApproval);
   const [tried, setTried] = useState(false);
+  /** The unexpected name about which the reader was asked. */
+  const [askedName, setAskedName] = useState<string | null>(null);
   const approve = useApprove(shop, revision);
   const form = useRef<HTMLFormElement>(null);
   const isSent = useRef(false);
@@ -36,6 +46,8 @@ export function ApproveDialog(props: ApproveDialogProps) {
   const gaps = approvalGaps(approval, asked);
   const shown = tried ? gaps : { acknowledgements: [], notes: [], typedName: false };
   const stopped = isStopped(approval, openNotes);
+  const typedName = approval.typedName.trim();
+  const isAskedName = askedName !== null && askedName === typedName;
 
   function change(part: Partial<Approval>) {
     setApproval((before) => ({ ...before, ...part }));
@@ -51,9 +63,13 @@ export function ApproveDialog(props: ApproveDialogProps) {
       requestAnimationFrame(() => form.current?.querySelector<HTMLElement>("[aria-invalid]")?.focus());
       return;
     }
+    if (isAnotherName(typedName, sheet.reader.name) && !isAskedName) {
+      setAskedName(typedName);
+      return;
+    }
     isSent.current = true;
     approve.mutate(
-      { ...approval, typedName: approval.typedName.trim(), pdfSha256 },
+      { ...approval, typedName, pdfSha256 },
       {
         onSuccess: onApproved,
         onError: () => {
@@ -115,7 +131,7 @@ export function ApproveDialog(props: ApproveDialogProps) {
 
         <Field
           label="Your name, typed as your signature"
-          hint={`You are reading as ${sheet.reader.name}.`}
+          hint={`You are ${sheet.reader.name} here.`}
           autoComplete="name"
           maxLength={120}
           value={approval.typedName}
@@ -151,6 +167,12 @@ export function ApproveDialog(props: ApproveDialogProps) {
             Ask for a revision: your open notes go along.
           </Notice>
         )}
+        {isAskedName && !stopped && (
+          <Notice tone="caution" title={`This page knows you as ${sheet.reader.name}.`}>
+            You typed “{typedName}”. If you are {sheet.reader.name}, sign with that name. If you are someone else, leave
+            it to {sheet.reader.name}, or ask {sheet.job.shopName} for a link of your own.
+          </Notice>
+        )}
         {approve.isError && (
           <DecisionProblem error={approve.error} what="It was not approved." pathOfSheet={pathOfSheet} />
         )}
@@ -162,6 +184,7 @@ export function ApproveDialog(props: ApproveDialogProps) {
           ) : (
             <Button type="submit" kind="approve" busy={approve.isPending} disabled={pdfSha256 === null}>
               Approve revision {revision.letter}
+              {isAskedName && ` as ${typedName}`}
             </Button>
           )}
           <Button onClick={onClose} disabled={approve.isPending}>

@@ -36,6 +36,21 @@ export const isStopped = (approval: Approval, notes: readonly Asked[]): boolean 
 export const isComplete = (gaps: ApprovalGaps): boolean =>
   gaps.acknowledgements.length === 0 && gaps.notes.length === 0 && !gaps.typedName;
 
+/** The words of a name, without case and accents. */
+const wordsOfName = (name: string): string[] =>
+  name
+    .normalize("NFD")
+    .replace(/\p{M}/gu, "")
+    .toLowerCase()
+    .split(/[^\p{L}\p{N}]+/u)
+    .filter((word) => word !== "");
+
+/** Whether a typed name shares no word with the reader's own: then somebody else may be signing. Initials alone are no word. */
+export function isAnotherName(typed: string, own: string): boolean {
+  const known = wordsOfName(own);
+  return !wordsOfName(typed).some((word) => known.includes(word));
+}
+
 /** The first and last figures of a hash, in fours, as people compare them: "3f9a 22c1 … 07be". */
 export function shortHash(sha256: string): string {
   return `${sha256.slice(0, 4)} ${sha256.slice(4, 8)} … ${sha256.slice(-4)}`;

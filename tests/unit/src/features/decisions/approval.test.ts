@@ -3,6 +3,7 @@ import {
   approvalGaps,
   currentOf,
   emptyApproval,
+  isAnotherName,
   isComplete,
   isStopped,
   shortHash,
@@ -59,4 +60,17 @@ it.each([undefined, {}, { current: null }, { current: "B" }, { current: { revisi
 it("the current letter is read from the answer", () => {
   const current = { revisionId: "6d5f1a7e-31c7-4a6d-8f0e-b8f2f1f0a922", letter: "C" };
   expect(currentOf({ current })).toEqual(current);
+});
+
+it.each([
+  { typed: "Cleo Marsh", own: "Cleo Marsh", another: false },
+  { typed: "  cleo  MARSH ", own: "Cleo Marsh", another: false },
+  { typed: "C. J. Marsh", own: "Cleo Marsh", another: false },
+  { typed: "Cléo", own: "Cleo Marsh", another: false },
+  { typed: "Marsh-Hale", own: "Cleo Marsh", another: false },
+  { typed: "Somebody Else", own: "Cleo Marsh", another: true },
+  { typed: "C. M.", own: "Cleo Marsh", another: true },
+  { typed: "…", own: "Cleo Marsh", another: true },
+])("“$typed” signing for $own is another's name: $another", ({ typed, own, another }) => {
+  expect(isAnotherName(typed, own)).toBe(another);
 });

@@ -121,6 +121,18 @@ it("sends the hash of the PDF that was shown, the ticked lines and the name, onc
   ]);
 });
 
+it("asks once before it signs with a name that is not the reader's", async () => {
+  const { handleApproved } = await open();
+  await fillIn();
+  await type(input("input[autocomplete=name]"), "Somebody Else");
+  await submit();
+  expect(document.body.textContent).toContain("This page knows you as Cleo Marsh.");
+  expect(sent()).toEqual([]);
+  await press(button("Approve revision B as Somebody Else"));
+  await until(() => handleApproved.mock.calls.length > 0);
+  expect(sent()).toMatchObject([{ body: { typedName: "Somebody Else" } }]);
+});
+
 it("asks of each open must-change note whether it is settled, and sends those that are", async () => {
   const { handleApproved } = await open([note]);
   await fillIn();
