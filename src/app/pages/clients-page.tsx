@@ -5,6 +5,7 @@ import { Field } from "@/components/ui/field.tsx";
 import { AddClientDialog } from "@/features/clients/components/add-client-dialog.tsx";
 import { ClientList } from "@/features/clients/components/client-list.tsx";
 import { useShop } from "@/lib/shop-context.ts";
+import { NotFoundScreen } from "../not-found-screen.tsx";
 import { Page } from "../page.tsx";
 import { paths } from "../paths.ts";
 
@@ -14,6 +15,7 @@ export function ClientsPage() {
   const [adding, setAdding] = useState(false);
   const [search, setSearch] = useSearchParams();
   const q = search.get("q") ?? "";
+  if (!shop.can.seeClients) return <NotFoundScreen />;
   const addButton = (
     <Button kind="primary" onClick={() => setAdding(true)}>
       Add a client

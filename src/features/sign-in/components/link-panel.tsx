@@ -6,6 +6,7 @@ import { LinkButton } from "@/components/ui/link-button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
+import { ApiProblem } from "@/lib/api-client.ts";
 import { messageOf } from "@/lib/form-problem.ts";
 import { meQuery } from "@/lib/me.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
@@ -30,6 +31,7 @@ export function LinkPanel({ token }: { readonly token: string }) {
   const leave = useSignOutHere();
   const go = (path: string | null) => void navigate(localPath(path) ?? paths.home(), { replace: true });
 
+  if (link.error instanceof ApiProblem && link.error.code === "validation_failed") return <UnknownLink />;
   if (link.isPending || me.isPending) return <Skeleton label="Reading the link" rows={2} />;
   if (link.isError || me.isError) {
     return (
@@ -46,19 +48,7 @@ export function LinkPanel({ token }: { readonly token: string }) {
   const { state, purpose, shopName, addressHint, knownPerson, role, goTo } = link.data;
   const shop = shopName ?? "the shop";
 
-  if (state === "unknown") {
-    return (
-      <>
-        <Heading>This link is not known</Heading>
-        <p className="text-base text-graphite">
-          It may have been cut short on its way. Open it from the mail again, or ask for a new one on the sign-in page.
-        </p>
-        <LinkButton className="mt-5" kind="primary" to={paths.signIn()}>
-          Go to sign-in
-        </LinkButton>
-      </>
-    );
-  }
+  if (state === "unknown") return <UnknownLink />;
   if (state !== "open") {
     return (
       <>
@@ -66,6 +56,14 @@ export function LinkPanel({ token }: { readonly token: string }) {
         <p className="mb-5 text-base text-graphite">
           Each link opens the door once and for a limited time, so that an old mail opens nothing. Nothing is lost.
         </p>
+        {purpose === "sign in" && me.data.person !== null && (
+          <div className="mb-6">
+            <p className="mb-3 text-base">You are still signed in here as {me.data.person.email}.</p>
+            <Button kind="primary" onClick={() => go(goTo)}>
+              Go on
+            </Button>
+          </div>
+        )}
         <FreshLink token={token} addressHint={addressHint} />
       </>
     );
@@ -142,6 +140,21 @@ export function LinkPanel({ token }: { readonly token: string }) {
           Open {shop}
         </Button>
       )}
+    </>
+  );
+}
+
+/** A link that nobody made, or only a part of one. */
+function UnknownLink() {
+  return (
+    <>
+      <Heading>This link is not known</Heading>
+      <p className="text-base text-graphite">
+        It may have been cut short on its way. Open it from the mail again, or ask for a new one on the sign-in page.
+      </p>
+      <LinkButton className="mt-5" kind="primary" to={paths.signIn()}>
+        Go to sign-in
+      </LinkButton>
     </>
   );
 }

@@ -20,13 +20,24 @@ const open: Link = {
   role: null,
   goTo: "/shop/copperlark-signs/bench",
 };
+const notWhole = {
+  type: "/problems/validation_failed",
+  title: "Check the highlighted fields.",
+  status: 422,
+  code: "validation_failed",
+  errors: [{ pointer: "/token", detail: "This link is not complete. Open it from the mail again." }],
+  instance: "/api/links/inspect",
+  requestId: "r1",
+};
 let link = open;
 let refused = false;
+let isWhole = true;
 let me = nobody;
 let server: Awaited<ReturnType<typeof startAnswers>>;
 
 beforeAll(async () => {
   server = await startAnswers(({ path }) => {
+    if (path === "/api/links/inspect" && !isWhole) return { status: 422, json: notWhole };
     if (path === "/api/links/inspect") return { status: 200, json: link };
     if (path === "/api/me") return { status: 200, json: me };
     if (path === "/auth/signout") {
@@ -45,6 +56,7 @@ afterAll(() => server.end());
 beforeEach(() => {
   link = open;
   refused = false;
+  isWhole = true;
   me = nobody;
   server.asked.length = 0;
 });
@@ -100,6 +112,33 @@ describe("the page of a mailed link", () => {
     await press(button("Send a fresh one to the same address"));
     await until(() => document.body.textContent?.includes("A fresh link is on its way"));
     expect(writes()).toEqual([{ method: "POST", path: "/api/links/fresh", body: { token: "secret-of-the-link" } }]);
+  });
+
+  it("says of a link that was cut short what to do, and nothing of fields", async () => {
+    isWhole = false;
+    await openPage();
+    expect(document.querySelector("h1")?.textContent).toBe("This link is not known");
+    expect(document.body.textContent).not.toContain("fields");
+    expect(document.querySelector("a")?.getAttribute("href")).toBe("/sign-in");
+  });
+
+  it("lets those who are still signed in go on from a used link", async () => {
+    link = { ...open, state: "spent" };
+    me = {
+      ...nobody,
+      person: {
+        id: "00000000-0000-4000-8000-000000000007",
+        name: "Ines Calloway",
+        email: "client@orrery.example",
+        hasPassword: false,
+      },
+      session: "link",
+    };
+    const where = await openPage();
+    expect(document.body.textContent).toContain("still signed in here as client@orrery.example");
+    await press(button("Go on"));
+    await until(() => where() === "/shop/copperlark-signs/bench");
+    expect(writes()).toEqual([]);
   });
 
   it("lets someone new join with name and password, and signs them in", async () => {
