@@ -1,8 +1,10 @@
+import { useQuery } from "@tanstack/react-query";
 import type { ReactNode, RefCallback } from "react";
 import { NavLink, useNavigate } from "react-router-dom";
 import { Button } from "@/components/ui/button.tsx";
 import { Menu, MenuItem, MenuLabel, MenuRule } from "@/components/ui/menu.tsx";
 import { cx } from "@/lib/cx.ts";
+import { meQuery } from "@/lib/me.ts";
 import type { Reader } from "@/lib/shop-context.ts";
 import { paths } from "./paths.ts";
 import { useSignOut } from "./use-sign-out.ts";
@@ -41,6 +43,8 @@ export function ShopHeader({
   const navigate = useNavigate();
   const signOut = useSignOut();
   const places = placesOf(reader);
+  const me = useQuery(meQuery).data;
+  const hasOtherPlaces = me !== undefined && me.memberOf.length + me.contactOf.length > 1;
   return (
     <header className="flex flex-wrap items-center gap-x-6 border-b border-rule px-4 py-1 sm:px-6">
       <Wordmark />
@@ -65,8 +69,8 @@ export function ShopHeader({
         >
           <MenuLabel>
             {reader.side === "client"
-              ? `${reader.client}, at ${reader.shop.name}`
-              : `${reader.shop.name}, ${reader.role}`}
+              ? `${reader.person.name} for ${reader.client}, at ${reader.shop.name}`
+              : `${reader.person.name}, ${reader.role} of ${reader.shop.name}`}
           </MenuLabel>
           {places.map(({ label, to }) => (
             <MenuItem key={to} className="lg:hidden" onSelect={() => void navigate(to)}>
@@ -75,7 +79,9 @@ export function ShopHeader({
           ))}
           <MenuRule />
           <MenuItem onSelect={() => void navigate(paths.account())}>Account</MenuItem>
-          <MenuItem onSelect={() => void navigate(paths.home(), { state: { choose: true } })}>Other places</MenuItem>
+          {hasOtherPlaces && (
+            <MenuItem onSelect={() => void navigate(paths.home(), { state: { choose: true } })}>Other places</MenuItem>
+          )}
           <MenuItem onSelect={() => signOut.mutate()}>Sign out</MenuItem>
         </Menu>
       </div>

@@ -70,7 +70,7 @@ export async function invitation(mail: OutgoingMail, transaction: Transaction): 
     letter: {
       subject: `Join ${shop.name}`,
       paragraphs: [`${by} asks you to join ${shop.name} as ${invited.role}.`],
-      after: [linkRemarks["join shop"], "If you do not know them, leave this mail be."],
+      after: [linkRemarks["join shop"], "If you do not know them, you need not do anything."],
     },
     button: {
       label: "Join the shop",

@@ -7,8 +7,10 @@ import { TextLink } from "@/components/ui/text-link.tsx";
 import { compareQueries } from "@/features/compare/api/queries.ts";
 import { ComparedPair } from "@/features/compare/components/compared-pair.tsx";
 import { LetterChoice } from "@/features/compare/components/letter-choice.tsx";
+import { jobQuery } from "@/features/jobs/api/queries.ts";
 import { ApiProblem } from "@/lib/api-client.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
+import { useReader } from "@/lib/shop-context.ts";
 import { NotFoundScreen } from "../not-found-screen.tsx";
 import { paths } from "../paths.ts";
 
@@ -16,6 +18,8 @@ import { paths } from "../paths.ts";
 export function ComparePage() {
   const { shop = "", jobId = "" } = useParams();
   const [search, setSearch] = useSearchParams();
+  const { side } = useReader();
+  const job = useQuery(jobQuery(shop, jobId));
   const revisions = useQuery(compareQueries.revisions(shop, jobId));
   // A draft and one being prepared have no drawing that could be looked at.
   const shown = (revisions.data ?? []).filter(({ state }) => state !== "draft" && state !== "preparing");
@@ -39,19 +43,22 @@ export function ComparePage() {
         <div className="mr-auto">
           <h1 className="font-serif text-xl font-bold">Compare</h1>
           <p className="text-sm text-graphite">
-            Two letters at one scale, and what changed. <TextLink to={paths.job(shop, jobId)}>To the job</TextLink>
+            {job.data && <b className="font-semibold text-ink">{job.data.title}: </b>}
+            two revisions at one scale, and what changed. <TextLink to={paths.job(shop, jobId)}>To the job</TextLink>
           </p>
         </div>
         {revisions.data && shown.length > 1 && (
           <div className="flex w-full gap-3 lg:w-[34rem]">
             <LetterChoice
               label="Before"
+              side={side}
               revisions={shown}
               chosen={before}
               onChoose={(id) => choose({ before: id, after: id === after ? before : after })}
             />
             <LetterChoice
               label="After"
+              side={side}
               revisions={shown}
               chosen={after}
               onChoose={(id) => choose({ before: id === before ? after : before, after: id })}
@@ -62,7 +69,7 @@ export function ComparePage() {
       {error ? (
         <div className="px-4 lg:px-0">
           <ProblemNotice
-            what="The two letters could not be compared."
+            what="The two revisions could not be compared."
             error={error}
             onRetry={() => void Promise.all([revisions.refetch(), pair.refetch()])}
           />
@@ -71,17 +78,18 @@ export function ComparePage() {
         <ComparedPair
           key={`${before} ${after}`}
           pair={pair.data}
+          side={side}
           pathOfSheet={(revisionId) => paths.sheet(shop, revisionId)}
         />
       ) : revisions.data && (before === "" || before === after) ? (
         <div className="px-4 lg:px-0">
-          <EmptyState title="There is one letter only so far">
+          <EmptyState title="There is one revision only so far">
             When the next revision is issued, the two can be laid side by side here.
           </EmptyState>
         </div>
       ) : (
         <div className="px-4 lg:px-0">
-          <Skeleton label="Loading the two letters" rows={1} rowClassName="h-[60dvh]" />
+          <Skeleton label="Loading the two revisions" rows={1} rowClassName="h-[60dvh]" />
         </div>
       )}
     </div>

@@ -43,7 +43,12 @@ export function SessionList() {
                 {formatInstant(session.createdAt)}, last seen {formatInstant(session.lastSeenAt)}
               </span>
               {session.agent !== "" && (
-                <span className="block text-fine break-words text-graphite">It calls itself: {session.agent}</span>
+                <details className="text-fine text-graphite">
+                  <summary className="inline-flex min-h-8 cursor-pointer items-center underline underline-offset-4 pointer-coarse:min-h-11">
+                    Not sure which one that is?
+                  </summary>
+                  <span className="block break-words">It calls itself: {session.agent}</span>
+                </details>
               )}
             </span>
             {session.current ? (

@@ -111,6 +111,7 @@ export function ContactList({ shop, client }: { readonly shop: string; readonly 
           onOpenChange={close}
           title={`Remove ${open.contact.name}?`}
           action={`Remove ${open.contact.name}`}
+          refuse={`Keep ${open.contact.name}`}
           busy={remove.isPending}
           error={remove.isError ? messageOf(remove.error) : null}
           onConfirm={() =>

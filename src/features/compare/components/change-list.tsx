@@ -22,7 +22,7 @@ export function ChangeList({ changes, before, after, chosen, onChoose }: ChangeL
       </h2>
       {changes.length === 0 ? (
         <p className="px-4 pb-4 text-sm text-graphite">
-          Nothing about the sign changed between these two letters. Notes and wording of the letter may have.
+          Nothing about the sign changed between these two revisions. Notes and the message that came along may have.
         </p>
       ) : (
         <ol className="border-t border-rule">

@@ -6,12 +6,15 @@ import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
+import { revisionStateWord, type Side } from "@/lib/revision-state.ts";
 import { alignPictures } from "../model/align-pictures.ts";
 import { ChangeList } from "./change-list.tsx";
 import { ComparedPicture } from "./compared-picture.tsx";
 
 type ComparedPairProps = {
   readonly pair: z.infer<typeof compareSchema>;
+  /** Who reads. */
+  readonly side: Side;
   readonly pathOfSheet: (revisionId: string) => string;
 };
 
@@ -21,7 +24,7 @@ const sides = [
 ] as const;
 
 /** Two letters side by side at one scale, and what changed in words. */
-export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
+export function ComparedPair({ pair, side: reader, pathOfSheet }: ComparedPairProps) {
   const [side, setSide] = useState<(typeof sides)[number]["id"]>("elevation");
   const [view, setView] = useState<DrawingView | null>(null);
   const [chosen, setChosen] = useState<number | null>(null);
@@ -80,7 +83,9 @@ export function ComparedPair({ pair, pathOfSheet }: ComparedPairProps) {
                   <>
                     <h2 className="font-serif text-base font-bold">
                       Revision {one.revision.letter}{" "}
-                      <span className="font-sans text-fine font-normal text-graphite">{one.revision.state}</span>
+                      <span className="font-sans text-fine font-normal text-graphite">
+                        {revisionStateWord(one.revision.state, reader)}
+                      </span>
                     </h2>
                     <TextLink className="text-sm" to={pathOfSheet(one.revision.id)}>
                       Sheet {one.revision.letter}

@@ -50,7 +50,7 @@ export function AskDialog({ shop, shopName, revision, openNotes, pathOfSheet, on
       open
       onOpenChange={(open) => !open && !ask.isPending && onClose()}
       title={`Ask for a revision of ${revision.letter}`}
-      description={`${shopName} changes the drawing and sends you the next letter. Nothing is cut meanwhile.`}
+      description={`${shopName} changes the drawing and sends you the next revision. Nothing is cut meanwhile.`}
     >
       <form onSubmit={handleSubmit} className="space-y-4" noValidate>
         {openNotes.length > 0 && (

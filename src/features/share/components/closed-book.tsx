@@ -4,7 +4,7 @@ export function ClosedBook({ wasOpen }: { readonly wasOpen: boolean }) {
     <main className="mx-auto w-full max-w-2xl px-4 py-20 text-center sm:px-8 sm:py-32">
       <div className="border-y border-ink py-12">
         <h1 className="font-serif text-3xl font-black">
-          {wasOpen ? "This link is no longer open" : "There is no book at this address"}
+          {wasOpen ? "This link is no longer open" : "There is no portfolio at this address"}
         </h1>
         <p className="mx-auto mt-4 max-w-md text-graphite">
           {wasOpen

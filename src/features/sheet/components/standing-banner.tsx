@@ -50,7 +50,7 @@ export function StandingBanner({
             )}
             {decision?.summary && <p className="whitespace-pre-wrap">“{decision.summary}”</p>}
             <p>
-              {shopName} answers the notes and issues the next letter. {wayOn}
+              {shopName} answers the notes and issues the next revision. {wayOn}
             </p>
           </Notice>
         );

@@ -93,6 +93,7 @@ export function MemberList({ shop }: { readonly shop: string }) {
           }}
           title={`Remove ${removing.name}?`}
           action={`Remove ${removing.name}`}
+          refuse={`Keep ${removing.name}`}
           busy={remove.isPending}
           error={remove.isError ? messageOf(remove.error) : null}
           onConfirm={() => remove.mutate(removing.id, { onSuccess: () => setRemoving(null) })}
