@@ -26,12 +26,12 @@ function check(input: RuleInput): Finding[] {
       const nearer = nearestStock(colour, context.acrylics);
       const offer =
         nearer && nearer.deltaE < deltaE - 0.05
-          ? ` ${nearer.stock.name} comes nearer (ΔE00 ${nearer.deltaE.toFixed(1)}).`
+          ? ` ${nearer.stock.name} comes nearer (${nearer.deltaE.toFixed(1)}).`
           : "";
       return [
         foundBy(colourAgainstArtwork, {
           severity,
-          text: `${layer.stock.name} (${layer.stock.colour}) of ${layerWords(layer)} is ΔE00 ${deltaE.toFixed(1)} from the artwork's ${colour}. ${looks}${offer}`,
+          text: `${layer.stock.name} (${layer.stock.colour}) of ${layerWords(layer)} differs from the artwork's ${colour} by ${deltaE.toFixed(1)} (CIEDE2000). ${looks}${offer}`,
           layerKey: layer.key,
           pieceIds: drawn.map(({ piece }) => piece.id),
           where: drawn[0]?.figures.centroid ?? null,
