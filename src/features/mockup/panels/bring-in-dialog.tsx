@@ -1,6 +1,8 @@
 import { useQuery } from "@tanstack/react-query";
 import { useState } from "react";
 import type { Artwork } from "#shared/contracts/artworks.ts";
+import { formatSize } from "#shared/units/format-length.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
 import { Dialog } from "@/components/ui/dialog.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
@@ -41,7 +43,7 @@ function ArtworkChoice({
   onDone,
 }: Omit<BringInDialogProps, "open" | "onOpenChange"> & { onDone: () => void }) {
   const artworks = useQuery(mockupQueries.artworks(shop, jobId));
-  const { stock } = useDesk();
+  const { stock, unit } = useDesk();
   const [chosen, setChosen] = useState<string | null>(null);
 
   if (artworks.isPending) return <Skeleton label="Loading the artwork" />;
@@ -76,18 +78,18 @@ function ArtworkChoice({
         <Select label="Artwork" value={artwork.id} onChange={(event) => setChosen(event.target.value)}>
           {ready.map((one) => (
             <option key={one.id} value={one.id}>
-              {nameOf(one)}
+              {nameOf(one, unit)}
             </option>
           ))}
         </Select>
       )}
-      {ready.length === 1 && <p className="text-base font-semibold">{nameOf(artwork)}</p>}
+      {ready.length === 1 && <p className="text-base font-semibold">{nameOf(artwork, unit)}</p>}
       <ColourChoices key={artwork.id} shop={shop} artwork={artwork} onDone={onDone} />
     </div>
   );
 }
 
-function nameOf({ name, widthMm, heightMm }: Artwork): string {
+function nameOf({ name, widthMm, heightMm }: Artwork, unit: LengthUnit): string {
   if (widthMm === null || heightMm === null) return name;
-  return `${name}, ${Math.round(widthMm)} × ${Math.round(heightMm)} mm`;
+  return `${name}, ${formatSize(widthMm, heightMm, unit)}`;
 }
