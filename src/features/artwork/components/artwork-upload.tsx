@@ -3,18 +3,19 @@ import { Busy } from "@/components/ui/busy.tsx";
 import { Button } from "@/components/ui/button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { cx } from "@/lib/cx.ts";
+import { useDropsKeptOut } from "./use-drops-kept-out.ts";
 import { useUpload } from "./use-upload.ts";
 
-/** Brings in an artwork file: chosen, or dropped on the frame. Shows how far it is, and why it was refused. */
+/** Brings in artwork files: chosen, or dropped on the frame. Shows how far they are, and why one was refused. */
 export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly jobId: string }) {
   const input = useRef<HTMLInputElement>(null);
   const id = useId();
   const [over, setOver] = useState(false);
-  const { state, send, cancel } = useUpload(shop, jobId);
+  const { state, refusals, send, cancel } = useUpload(shop, jobId);
+  useDropsKeptOut();
   const sending = state.step === "sending";
   const take = (files: FileList | null) => {
-    const file = files?.[0];
-    if (file && !sending) void send(file);
+    if (files && files.length > 0 && !sending) void send([...files]);
   };
   const handleDrop = (event: DragEvent) => {
     event.preventDefault();
@@ -36,6 +37,7 @@ export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly
         ref={input}
         id={id}
         type="file"
+        multiple
         aria-label="Artwork file"
         accept=".svg,.png,.jpg,.jpeg,image/svg+xml,image/png,image/jpeg"
         className="sr-only"
@@ -46,11 +48,11 @@ export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly
           event.target.value = "";
         }}
       />
-      {state.step === "refused" && (
-        <Notice tone="error" title={`“${state.name}” was not taken`} className="mb-3">
-          {state.reason}
+      {refusals.map(({ id: refusal, name, reason }) => (
+        <Notice key={refusal} tone="error" title={`“${name}” was not taken`} className="mb-3">
+          {reason}
         </Notice>
-      )}
+      ))}
       {state.step === "cancelled" && (
         <Notice tone="info" className="mb-3">
           “{state.name}” was given up. Nothing of it was kept.

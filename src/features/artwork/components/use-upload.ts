@@ -2,22 +2,23 @@ import { useEffect, useRef, useState } from "react";
 import { messageOf } from "@/lib/form-problem.ts";
 import { useAddArtwork } from "../api/mutations.ts";
 
+export type Refusal = { readonly id: number; readonly name: string; readonly reason: string };
+
 export type UploadState =
   | { readonly step: "idle" }
   | { readonly step: "sending"; readonly name: string; readonly share: number }
-  | { readonly step: "refused"; readonly name: string; readonly reason: string }
   | { readonly step: "cancelled"; readonly name: string };
 
-/** Sends one file at a time, with its progress and a way to give it up. Leaving the page gives it up too. */
+/** Sends files one after another, with their progress and a way to give them up. Leaving the page gives them up too. */
 export function useUpload(shop: string, jobId: string) {
   const [state, setState] = useState<UploadState>({ step: "idle" });
+  const [refusals, setRefusals] = useState<readonly Refusal[]>([]);
   const controller = useRef<AbortController | null>(null);
   const add = useAddArtwork(shop, jobId);
   useEffect(() => () => controller.current?.abort(), []);
 
-  const send = async (file: File) => {
-    const own = new AbortController();
-    controller.current = own;
+  /** Whether it was not given up. */
+  const sendOne = async (file: File, own: AbortController): Promise<boolean> => {
     setState({ step: "sending", name: file.name, share: 0 });
     try {
       await add.mutateAsync({
@@ -25,14 +26,22 @@ export function useUpload(shop: string, jobId: string) {
         signal: own.signal,
         onProgress: (share) => setState({ step: "sending", name: file.name, share }),
       });
-      setState({ step: "idle" });
     } catch (error) {
-      setState(
-        own.signal.aborted
-          ? { step: "cancelled", name: file.name }
-          : { step: "refused", name: file.name, reason: messageOf(error) },
-      );
+      if (own.signal.aborted) {
+        setState({ step: "cancelled", name: file.name });
+        return false;
+      }
+      setRefusals((before) => [...before, { id: before.length, name: file.name, reason: messageOf(error) }]);
     }
+    return true;
   };
-  return { state, send, cancel: () => controller.current?.abort() };
+
+  const send = async (files: readonly File[]) => {
+    const own = new AbortController();
+    controller.current = own;
+    setRefusals([]);
+    for (const file of files) if (!(await sendOne(file, own))) return;
+    setState({ step: "idle" });
+  };
+  return { state, refusals, send, cancel: () => controller.current?.abort() };
 }
