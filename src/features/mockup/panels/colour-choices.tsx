@@ -25,10 +25,10 @@ type Row = Omit<SuggestedLayer & LayerChoice, "hold"> & {
 };
 
 const matchWords: Record<ColourMatch, string> = {
-  same: "the same",
-  close: "close",
-  visible: "a visible difference",
-  "another colour": "another colour",
+  same: "the colour of the artwork",
+  close: "close to the artwork",
+  visible: "off the artwork, it shows side by side",
+  "another colour": "another colour than the artwork",
 };
 
 type ColourChoicesProps = { readonly shop: string; readonly artwork: Artwork; readonly onDone: () => void };
@@ -107,9 +107,7 @@ export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
                   onChange={({ sheet, thickness, hold }) =>
                     change(row.colour, { sheet, thickness, ...(hold === holdOf(row) ? {} : { hold }) })
                   }
-                  {...(row.sheet === sheetOf(proposed, row.colour)
-                    ? { hint: `${matchWords[row.match]}, ΔE00 ${row.deltaE.toFixed(1)}` }
-                    : {})}
+                  {...(row.sheet === sheetOf(proposed, row.colour) ? { hint: matchWords[row.match] } : {})}
                 />
                 <Checkbox
                   label="Close its openings"

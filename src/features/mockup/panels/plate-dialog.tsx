@@ -7,10 +7,11 @@ import { Notice } from "@/components/ui/notice.tsx";
 import { Select } from "@/components/ui/select.tsx";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
-import { addPlate } from "../model/commands/add-plate.ts";
+import { addPlate, type PlateOrder } from "../model/commands/add-plate.ts";
 import { boundsProblem, isWithinBounds } from "../model/length-bounds.ts";
-import { chooseLayer } from "../model/selection.ts";
+import { choosePiece } from "../model/selection.ts";
 import { optionsOfHold } from "../model/stock-choices.ts";
+import { suggestHold } from "../model/suggest-layers.ts";
 import { type LayerChoice, LayerFields } from "./layer-fields.tsx";
 
 type PlateDialogProps = { readonly open: boolean; readonly onOpenChange: (open: boolean) => void };
@@ -22,7 +23,7 @@ export function PlateDialog({ open, onOpenChange }: PlateDialogProps) {
       open={open}
       onOpenChange={onOpenChange}
       title="Add a plate"
-      description="It comes to the middle of the board, nearest the viewer."
+      description="It comes to the middle of the board."
     >
       <PlateForm onDone={() => onOpenChange(false)} />
     </Dialog>
@@ -41,8 +42,10 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
   const [choice, setChoice] = useState<LayerChoice>(() => ({
     sheet: 0,
     thickness: stock.acrylics[0]?.thicknessesMm[0] ?? 3,
-    hold: 0,
+    hold: suggestHold(stock, "wood"),
   }));
+  const isFirst = document.layers.length === 0;
+  const [nearest, setNearest] = useState<PlateOrder>("wall");
   const sheet = stock.acrylics[choice.sheet];
   const hold = optionsOfHold(stock)[choice.hold];
   if (!sheet || !hold)
@@ -61,8 +64,8 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
     edit({
       label: "Add a plate",
       change: (before) =>
-        addPlate(before, { shape, id, place, name, stock: sheet.acrylic, thickness: choice.thickness, hold }),
-      choose: (after) => chooseLayer(after, after.layers.at(-1)?.key ?? ""),
+        addPlate(before, { shape, id, place, name, stock: sheet.acrylic, thickness: choice.thickness, hold, nearest }),
+      choose: (after) => choosePiece(after, id),
     });
     onDone();
   }
@@ -100,6 +103,16 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
             onChange={setHeight}
             error={boundsProblem(height, plateBounds, unit)}
           />
+        )}
+        {!isFirst && (
+          <Select
+            label="Where it lies"
+            value={nearest}
+            onChange={(event) => setNearest(event.target.value === "viewer" ? "viewer" : "wall")}
+          >
+            <option value="wall">under the other layers</option>
+            <option value="viewer">over the other layers</option>
+          </Select>
         )}
       </div>
       <LayerFields choice={choice} onChange={setChoice} />

@@ -2,7 +2,7 @@ import type { Path } from "#shared/geometry/path.ts";
 import { circlePath, rectanglePath } from "#shared/geometry/shapes.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nextFreeKeys } from "../layer-key.ts";
-import { lengthOf, mostLayers, roundMm } from "../limits.ts";
+import { lengthOf, mostLayers, nameOf, roundMm } from "../limits.ts";
 import type { Place } from "../propose-holes.ts";
 import { type NewLayer, newLayer } from "./new-layer.ts";
 
@@ -10,17 +10,26 @@ export type PlateShape =
   | { readonly kind: "rectangle"; readonly width: number; readonly height: number }
   | { readonly kind: "circle"; readonly diameter: number };
 
-/** Adds a layer of one plate in the middle of the board, nearest the viewer. Impossible sizes add nothing. */
+/** Nearest the wall, so that the other layers come to lie on it, or nearest the viewer. */
+export type PlateOrder = "wall" | "viewer";
+
+/** Adds a layer of one plate in the middle of the board. The plate bears the layer's name. Impossible sizes add nothing. */
 export function addPlate(
   document: MockupDocument,
-  { shape, id, place, ...layer }: NewLayer & { shape: PlateShape; id: string; place: Place["place"] },
+  {
+    shape,
+    id,
+    place,
+    nearest = "viewer",
+    ...fields
+  }: NewLayer & { shape: PlateShape; id: string; place: Place["place"]; nearest?: PlateOrder },
 ): MockupDocument {
   const path = pathOf(shape);
   const [key] = nextFreeKeys(document, 1);
   if (!path || !key || document.layers.length >= mostLayers) return document;
   const piece: Piece = {
     id,
-    name: "Plate",
+    name: nameOf(fields.name) ?? "Plate",
     source: { kind: "plate" },
     path: path.map(({ start, segments }) => ({ start, segments: [...segments] })),
     placement: {
@@ -31,10 +40,8 @@ export function addPlate(
       mirrored: false,
     },
   };
-  return {
-    ...document,
-    layers: [...document.layers, newLayer(layer, { key, pieces: [piece], id: `${id}-h`, document, place })],
-  };
+  const layer = newLayer(fields, { key, pieces: [piece], id: `${id}-h`, document, place });
+  return { ...document, layers: nearest === "wall" ? [layer, ...document.layers] : [...document.layers, layer] };
 }
 
 function pathOf(shape: PlateShape): Path | null {

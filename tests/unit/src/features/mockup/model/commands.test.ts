@@ -113,6 +113,39 @@ describe("bringing in artwork", () => {
   });
 });
 
+describe("adding a plate", () => {
+  const plate = (nearest?: "wall" | "viewer") =>
+    addPlate(discOnStandoffs(), {
+      shape: { kind: "rectangle", width: 300, height: 120 },
+      place: "inside",
+      id: "plate",
+      name: " Ground ",
+      stock: chalk,
+      thickness: 3,
+      hold: { kind: "bond", adhesive: epoxy },
+      ...(nearest ? { nearest } : {}),
+    });
+
+  it("lays it under or over the layers there are, with the next free key", () => {
+    expect(plate("wall").layers.map(({ key }) => key)).toEqual(["C", "B"]);
+    expect(plate("viewer").layers.map(({ key }) => key)).toEqual(["B", "C"]);
+    expect(plate().layers.map(({ key }) => key)).toEqual(["B", "C"]);
+  });
+
+  it("gives the plate the layer's name", () => {
+    expect(plate().layers[1]).toMatchObject({ name: "Ground", pieces: [{ id: "plate", name: "Ground" }] });
+  });
+});
+
+describe("changing a layer's stock", () => {
+  it("changes a name that was only the stock's, and leaves one that somebody gave", () => {
+    const document = discOnStandoffs();
+    const named = setLayer(document, { key: "B", name: midnight.name });
+    expect(setLayer(named, { key: "B", stock: brass }).layers[0]).toMatchObject({ name: "Brass", stock: brass });
+    expect(setLayer(document, { key: "B", stock: brass }).layers[0]).toMatchObject({ name: "Night disc" });
+  });
+});
+
 describe("holding a layer", () => {
   it("proposes four holes on a disc's diagonals, the first fixed and each other one with a window", () => {
     const holes = holesOf(discOnStandoffs());
