@@ -1,5 +1,6 @@
 import { type RefObject, useId, useRef } from "react";
 import type { Point } from "#shared/geometry/path.ts";
+import { Busy } from "@/components/ui/busy.tsx";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
 import type { Drawn } from "../engine/use-engine.ts";
 import type { Drag } from "../model/drag.ts";
@@ -53,6 +54,11 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
         10; Delete removes it. Plus and minus look closer and farther, 0 shows the whole board.
       </p>
       <ViewTools view={view} fit={fit} room={room} onView={onView} />
+      {drawn === null && failure === null && (
+        <div className="pointer-events-none absolute inset-0 flex items-center justify-center">
+          <Busy label="Drawing the sign" />
+        </div>
+      )}
       {failure !== null && (
         <p role="alert" className="absolute inset-x-4 bottom-4 border-l-4 border-oxblood bg-sheet p-3 text-sm">
           The drawing could not be made: {failure} Your work is kept. Undo the last step, or load the page again.

@@ -32,8 +32,13 @@ export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPane
         <span role="status" className="font-sans text-sm font-normal text-graphite">
           {dryFit === null ? "is running" : summaryOf(dryFit)}
         </span>
+        {dryFit !== null && !isCurrent && (
+          <span aria-hidden="true" className="font-sans text-sm font-normal text-graphite">
+            , looking again …
+          </span>
+        )}
       </h2>
-      {dryFit?.findings.length === 0 && (
+      {isCurrent && dryFit?.findings.length === 0 && (
         <p className="pt-2 text-sm text-graphite">Nothing found. Test on scrap all the same.</p>
       )}
       <ul className="pt-1">
