@@ -29,9 +29,26 @@ export function mayHoleBeAt(point: Point, piece: Region, { edge, level }: HoleCo
 
 /**
  * Holes towards the four corners of a piece's box, as far out as they may be: upper left, upper right, lower left, lower
- * right. A piece that has no room for four gets fewer; one without room gets none.
+ * right. A piece that has no room for four gets fewer; one without room gets none. `fits` may ask for more of them all,
+ * as that each still has a window when the panel moves: then they come nearer each other until it says yes, and stay
+ * outermost when it never does without losing a hole.
  */
-export function cornerHoles(piece: Region, constraints: HoleConstraints): Point[] {
+export function cornerHoles(
+  piece: Region,
+  constraints: HoleConstraints,
+  fits: (holes: readonly Point[]) => boolean = () => true,
+): Point[] {
+  const outermost = cornersFrom(piece, constraints, 1);
+  for (let first = 1; first <= tries; first++) {
+    const holes = cornersFrom(piece, constraints, first);
+    if (holes.length < outermost.length) break;
+    if (fits(holes)) return holes;
+  }
+  return outermost;
+}
+
+/** Corners from the `first` of the places on the way to the middle. */
+function cornersFrom(piece: Region, constraints: HoleConstraints, first: number): Point[] {
   const box = boxOfRegion(piece);
   if (!box) return [];
   const middle = boxCentre(box);
@@ -43,7 +60,7 @@ export function cornerHoles(piece: Region, constraints: HoleConstraints): Point[
     [1, 1],
   ] as const) {
     const corner = { x: middle.x + (dx * box.width) / 2, y: middle.y + (dy * box.height) / 2 };
-    for (let step = 1; step <= tries; step++) {
+    for (let step = first; step <= tries; step++) {
       const part = step / tries;
       const point = { x: corner.x + (middle.x - corner.x) * part, y: corner.y + (middle.y - corner.y) * part };
       if (!mayHoleBeAt(point, piece, constraints)) continue;

@@ -36,6 +36,16 @@ describe("holes towards the corners", () => {
     expect(cornerHoles(piece, usual)).toHaveLength(count);
   });
 
+  it("come nearer each other until they fit, and stay outermost when they never do", () => {
+    const across = (holes: readonly { x: number }[]) => (holes[1]?.x ?? 0) - (holes[0]?.x ?? 0);
+    const near = cornerHoles(panel, usual, (holes) => across(holes) <= 150);
+    expect(near).toHaveLength(4);
+    expect(across(near)).toBeLessThanOrEqual(150);
+    // One step further out they did not fit.
+    expect(across(near)).toBeGreaterThan(150 - 300 / 60);
+    expect(cornerHoles(panel, usual, () => false)).toEqual(cornerHoles(panel, usual));
+  });
+
   it("keep a barrel on one level", () => {
     // Something ends at x 40 under the panel: a barrel of 15 mm may not stand across that line.
     const holes = cornerHoles(panel, { ...usual, level: [{ outlines: box(-100, -100, 140, 400), diameter: 15 }] });
