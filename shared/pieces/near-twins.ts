@@ -7,10 +7,15 @@ import { centred, isWithin } from "./same-outline.ts";
 export type TwinPiece = { readonly id: string; readonly region: Region };
 
 export type NearTwins =
-  /** It goes into its own place turned by 180° and looks right, but is not. */
-  | { readonly kind: "turned"; readonly id: string }
-  /** Each goes into the other's place and looks right, but is not; `turn` is 180 when only upside down. */
-  | { readonly kind: "exchanged"; readonly ids: readonly [string, string]; readonly turn: 0 | 180 };
+  /** Each goes into its own place turned by 180° and looks right, but is not. */
+  | { readonly kind: "turned"; readonly ids: readonly string[] }
+  /** Any of `ids` goes into the place of any of `others` and looks right, but is not; `turn` is 180 when only upside down. */
+  | {
+      readonly kind: "exchanged";
+      readonly ids: readonly string[];
+      readonly others: readonly string[];
+      readonly turn: 0 | 180;
+    };
 
 export type TwinLimits = {
   /** Outlines that differ by no more than this are the same piece: exchanging them changes nothing. */
@@ -25,53 +30,66 @@ export const usualTwinLimits: TwinLimits = { sameMm: 0.1, alikeMm: 0.75, alikeSh
 
 /**
  * Pieces of one stock that are alike but not the same: on their own turned by 180° (H, S, 8), or one in another's place.
- * In the order of the pieces. Pieces are compared with the middles of their boxes on each other.
+ * Pieces are compared with the middles of their boxes on each other; the same ones stand together, so that a hundred equal
+ * dots are compared once. In the order of the pieces.
  */
 export function nearTwins(
   pieces: readonly TwinPiece[],
   kernel: Kernel,
   limits: TwinLimits = usualTwinLimits,
 ): NearTwins[] {
-  const shapes = pieces.flatMap(({ id, region }) => shapeOf(id, region));
+  const shapes = shapesOf(pieces, limits, kernel);
   const found: NearTwins[] = [];
   for (const [index, one] of shapes.entries()) {
-    if (areNear(one.upright, one.turned, alikeMm(one, limits), limits, kernel))
-      found.push({ kind: "turned", id: one.id });
+    if (areNear(one.upright, one.turned, alikeMm(one, limits), limits, kernel)) {
+      found.push({ kind: "turned", ids: one.ids });
+    }
     for (const other of shapes.slice(index + 1)) {
       const alike = Math.min(alikeMm(one, limits), alikeMm(other, limits));
       if (!sizesAreAlike(one, other, alike)) continue;
       const turn = exchangeTurn(one, other, alike, limits, kernel);
-      if (turn !== null) found.push({ kind: "exchanged", ids: [one.id, other.id], turn });
+      if (turn !== null) found.push({ kind: "exchanged", ids: one.ids, others: other.ids, turn });
     }
   }
   return found;
 }
 
+/** Pieces that are the same lying as they do, by the outline of the first of them. */
 type Shape = {
-  readonly id: string;
+  readonly ids: readonly string[];
   readonly width: number;
   readonly height: number;
   readonly upright: Region;
   readonly turned: Region;
 };
 
-function shapeOf(id: string, region: Region): Shape[] {
-  const box = boxOfRegion(region);
-  if (!box) return [];
-  return [{ id, width: box.width, height: box.height, upright: centred(region), turned: centred(region, 180) }];
+function shapesOf(pieces: readonly TwinPiece[], limits: TwinLimits, kernel: Kernel): Shape[] {
+  const shapes: (Omit<Shape, "ids"> & { ids: string[] })[] = [];
+  for (const { id, region } of pieces) {
+    const box = boxOfRegion(region);
+    if (!box) continue;
+    const upright = centred(region);
+    const shape = { ids: [id], width: box.width, height: box.height, upright, turned: centred(region, 180) };
+    const same = shapes.find(
+      (known) => sizesAreAlike(known, shape, limits.sameMm) && isWithin(known.upright, upright, limits.sameMm, kernel),
+    );
+    if (same) same.ids.push(id);
+    else shapes.push(shape);
+  }
+  return shapes;
 }
 
-function alikeMm({ width, height }: Shape, limits: TwinLimits): number {
+type Size = Pick<Shape, "width" | "height">;
+
+function alikeMm({ width, height }: Size, limits: TwinLimits): number {
   return Math.max(limits.alikeMm, limits.alikeShare * Math.max(width, height));
 }
 
-function sizesAreAlike(one: Shape, other: Shape, alike: number): boolean {
+function sizesAreAlike(one: Size, other: Size, alike: number): boolean {
   return Math.abs(one.width - other.width) <= 2 * alike && Math.abs(one.height - other.height) <= 2 * alike;
 }
 
 function exchangeTurn(one: Shape, other: Shape, alike: number, limits: TwinLimits, kernel: Kernel): 0 | 180 | null {
-  // A piece that is the same either way round may be exchanged without harm.
-  if (isWithin(one.upright, other.upright, limits.sameMm, kernel)) return null;
   if (isWithin(one.upright, other.upright, alike, kernel)) return 0;
   return areNear(one.upright, other.turned, alike, limits, kernel) ? 180 : null;
 }

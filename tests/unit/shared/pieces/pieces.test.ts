@@ -149,20 +149,20 @@ describe("near twins", () => {
   const aitch = (raised: number) => joined(box(0, 0, 12, 80), box(48, 0, 12, 80), box(0, 34 - raised, 60, 12));
 
   it("are discs of 20 and 21 mm, but not of 20 and 24, nor two of 20", () => {
-    expect(twins(disc(10), at(disc(10.5), 50))).toEqual([{ kind: "exchanged", ids: ["0", "1"], turn: 0 }]);
+    expect(twins(disc(10), at(disc(10.5), 50))).toEqual([{ kind: "exchanged", ids: ["0"], others: ["1"], turn: 0 }]);
     expect(twins(disc(10), at(disc(12), 50))).toEqual([]);
     expect(twins(disc(10), at(disc(10), 50.0004))).toEqual([]);
   });
 
   it("are an H whose bar is a little high, upside down, but not one whose bar is in the middle or far up", () => {
-    expect(twins(aitch(1))).toEqual([{ kind: "turned", id: "0" }]);
+    expect(twins(aitch(1))).toEqual([{ kind: "turned", ids: ["0"] }]);
     expect(twins(aitch(0))).toEqual([]);
     expect(twins(aitch(8))).toEqual([]);
   });
 
   it("are an 8 with a smaller upper half, turned", () => {
     const eight = joined(disc(18.8, 0, 0), disc(20, 0, 34));
-    expect(twins(eight)).toEqual([{ kind: "turned", id: "0" }]);
+    expect(twins(eight)).toEqual([{ kind: "turned", ids: ["0"] }]);
   });
 
   it("are wedges that look alike only upside down", () => {
@@ -174,9 +174,16 @@ describe("near twins", () => {
         { x: 0, y: 30 },
       ],
     ];
-    expect(twins(wedge(10), moved(wedge(11), 180))).toEqual([{ kind: "exchanged", ids: ["0", "1"], turn: 180 }]);
+    expect(twins(wedge(10), moved(wedge(11), 180))).toEqual([
+      { kind: "exchanged", ids: ["0"], others: ["1"], turn: 180 },
+    ]);
     // The very same wedge upside down can't come into the wrong place.
     expect(twins(wedge(10), moved(wedge(10), 180))).toEqual([]);
+  });
+
+  it("name all of the equal ones together", () => {
+    const row = [disc(10), at(disc(10.5), 50), at(disc(10), 100), at(disc(10.5), 150), at(disc(10), 200)];
+    expect(twins(...row)).toEqual([{ kind: "exchanged", ids: ["0", "2", "4"], others: ["1", "3"], turn: 0 }]);
   });
 
   it("do not come of pieces that cover nothing", () => {
