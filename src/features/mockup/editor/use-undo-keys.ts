@@ -1,8 +1,8 @@
 import { useEffect } from "react";
 
 /**
- * Ctrl Z and Ctrl Shift Z (or Y), with the Command key on a Mac, wherever the focus is but in a field, where they are the
- * field's own. `step` must stay the same function, as a reducer's dispatch does.
+ * Ctrl Z and Ctrl Shift Z (or Y), with the Command key on a Mac, wherever the focus is but in a field that is being typed
+ * in, where they are the field's own. A cell that nothing was typed in since it was taken says so by data-untouched. `step` must stay the same function, as a reducer's dispatch does.
  */
 export function useUndoKeys(step: (action: { readonly kind: "undo" | "redo" }) => void): void {
   useEffect(() => {
@@ -19,5 +19,8 @@ export function useUndoKeys(step: (action: { readonly kind: "undo" | "redo" }) =
 }
 
 function isField(target: EventTarget | null): boolean {
-  return target instanceof HTMLElement && target.closest("input:not([type=radio]), textarea, [role=dialog]") !== null;
+  return (
+    target instanceof HTMLElement &&
+    target.closest("input:not([type=radio], [data-untouched]), textarea, [role=dialog]") !== null
+  );
 }

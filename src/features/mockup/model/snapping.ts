@@ -1,4 +1,11 @@
 import type { CapStud } from "#shared/mockup/document.ts";
+import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
+
+/**
+ * An offset typed this near to a barrel in stock, in mm, means that barrel. In inches it is half of the sixteenth that
+ * lengths are read to: 1″ is what a 25 mm barrel is called there.
+ */
+export const typedReachMm: Readonly<Record<LengthUnit, number>> = { mm: 0.26, in: inchesToMm(1 / 32) };
 
 /** Barrel lengths in stock, each once, shortest first. */
 export function barrelLengths(stock: readonly CapStud[]): number[] {

@@ -51,6 +51,8 @@ export function CellText({ value, onCommit, className, ...input }: CellTextProps
         <input
           {...input}
           value={draft ?? value}
+          // Nothing typed: undo is the desk's, not the field's.
+          data-untouched={draft === null || undefined}
           aria-invalid={(draft !== null && refusal !== null) || undefined}
           aria-describedby={refusal === null ? undefined : refusalId}
           onChange={(event) => {

@@ -8,14 +8,11 @@ import { raiseLayer } from "../model/commands/set-hold.ts";
 import { setLayer } from "../model/commands/set-layer.ts";
 import { offsetBounds } from "../model/limits.ts";
 import { chooseLayer } from "../model/selection.ts";
-import { catchBarrel } from "../model/snapping.ts";
+import { catchBarrel, typedReachMm } from "../model/snapping.ts";
 import { isSameStock, thicknessChoices, withCurrent } from "../model/stock-choices.ts";
 import { CellLength, CellSelect, CellText, Swatch } from "./cell-controls.tsx";
 import { DeskCell, DeskRowHead } from "./desk-table.tsx";
 import { HoldCell } from "./hold-cell.tsx";
-
-/** An offset typed this near to a barrel in stock means that barrel. */
-const typedReachMm = 0.26;
 
 type ScheduleRowProps = {
   readonly layer: Layer;
@@ -41,7 +38,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
 
   function changeOffset(offset: number) {
     if (hold.kind !== "standoff") return;
-    const caught = catchBarrel(offset, { stock: stock.hardware, current: hold.hardware, reachMm: typedReachMm });
+    const caught = catchBarrel(offset, { stock: stock.hardware, current: hold.hardware, reachMm: typedReachMm[unit] });
     edit({ label: `Raise ${key}`, change: (before) => raiseLayer(before, { key, ...caught }) });
   }
 

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { barrelLengths, catchBarrel, nextBarrel } from "@/features/mockup/model/snapping.ts";
+import { barrelLengths, catchBarrel, nextBarrel, typedReachMm } from "@/features/mockup/model/snapping.ts";
 import { barrel } from "../sample-mockup.ts";
 
 const brassFinish = "#C8993A";
@@ -35,6 +35,18 @@ describe("raising a layer", () => {
 
   it("leaves the hardware alone between barrels", () => {
     expect(catchBarrel(22, { stock, current: barrel(19), reachMm: 1.5 }).hardware).toBeUndefined();
+  });
+
+  it.each([
+    { typed: 12.7, unit: "in", barrelMm: 12 },
+    { typed: 19.05, unit: "in", barrelMm: 19 },
+    { typed: 25.4, unit: "in", barrelMm: 25 },
+    { typed: 22.225, unit: "in", barrelMm: undefined },
+    { typed: 19.2, unit: "mm", barrelMm: 19 },
+    { typed: 25.4, unit: "mm", barrelMm: undefined },
+  ] as const)("means the barrel that reads alike when $typed mm is typed in $unit", ({ typed, unit, barrelMm }) => {
+    const caught = catchBarrel(typed, { stock, current: barrel(19), reachMm: typedReachMm[unit] });
+    expect(caught.hardware?.barrelLength).toBe(barrelMm);
   });
 
   it("steps to the next barrel up and down", () => {
