@@ -64,7 +64,7 @@ function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
   const hides = `${mm(Math.min(hardware.capDiameter, hardware.barrelDiameter))} cap`;
   const play = `${mm(input.limits.placingErrorMm)} placing error a side and ${mm(movement)} of movement`;
   if (isShorter(upper, lower)) {
-    const text = `No hole of ${layerWords(layer)} can be right here: the ${stud} needs ${mm(lower)} for ${play}, but from ${mm(upper)} on the hole shows round the ${hides}. Take a wider cap or set the fixed hole nearer.`;
+    const text = `No hole of ${layerWords(layer)} can be right here: the ${stud} needs ${mm(lower)} for ${play}, but from ${mm(upper)} on the hole shows round the ${hides}. Take a wider cap, or bring this hole and the fixed one nearer each other.`;
     return [foundBy(holeWindow, { ...base, text, value: lower, limit: upper })];
   }
   if (isShorter(hole.diameter, lower)) {
