@@ -1,0 +1,322 @@
+import type { Locator, Page } from "playwright-core";
+import { paths } from "@/app/paths.ts";
+import type { SeatSize } from "./seat.ts";
+
+/** Who looks: the demo shop's staff, two contacts of its clients, somebody without a session, the owner of an empty shop. */
+export type Who = "owner" | "maker" | "rep" | "client" | "captain" | "nobody" | "newcomer";
+
+export type Screen = {
+  readonly who: Who;
+  readonly name: string;
+  /** Whose address it is in the list of all addresses. */
+  readonly at: keyof typeof paths;
+  readonly path: () => string;
+  /** What has to stand there before the screen is looked at. */
+  readonly ready: (page: Page) => Locator;
+  /** What is opened on the screen. */
+  readonly open?: (page: Page) => Promise<void>;
+  readonly only?: SeatSize;
+};
+
+export const shop = "copperlark-signs";
+/** What the demo shop turned out to hold: jobs by number, sheets by number and letter, addresses by name. */
+export const state = {
+  jobs: new Map<string, string>(),
+  sheets: new Map<string, string>(),
+  links: new Map<string, string>(),
+};
+const found = (map: ReadonlyMap<string, string>, key: string): string => {
+  const value = map.get(key);
+  if (value === undefined) throw new Error(`The demo shop has no ${key}.`);
+  return value;
+};
+export const jobOf = (number: string) => found(state.jobs, number);
+export const sheetOf = (name: string) => found(state.sheets, name);
+const linkOf = (name: string) => found(state.links, name);
+
+const heading = (name: string | RegExp) => (page: Page) => page.getByRole("heading", { level: 1, name });
+const text = (words: string | RegExp) => (page: Page) => page.getByText(words).first();
+const group = (title: string) => (page: Page) => page.getByRole("heading", { level: 2, name: new RegExp(`^${title}`) });
+const picture = (name: string | RegExp) => (page: Page) => page.getByRole("img", { name }).first();
+const drawn = (page: Page) => page.getByRole("region", { name: "Dry fit" }).getByText(/\d+ fine/);
+const press = (name: string | RegExp) => (page: Page) => page.getByRole("button", { name }).first().click();
+const openDialog = (name: string | RegExp) => async (page: Page) => {
+  await press(name)(page);
+  await page.getByRole("dialog").waitFor();
+};
+
+export const screens: readonly Screen[] = [
+  { who: "nobody", name: "sign-in", at: "signIn", path: paths.signIn, ready: heading("Sign in") },
+  { who: "nobody", name: "home", at: "home", path: paths.home, ready: heading("Sign in") },
+  { who: "nobody", name: "register", at: "register", path: paths.register, ready: text("Open the shop") },
+  { who: "nobody", name: "forgot", at: "forgotPassword", path: paths.forgotPassword, ready: heading(/password/i) },
+  { who: "nobody", name: "link-open", at: "link", path: () => linkOf("open"), ready: text(/^Open Copperlark/) },
+  { who: "nobody", name: "link-spent", at: "link", path: () => linkOf("spent"), ready: heading(/has been used/) },
+  {
+    who: "nobody",
+    name: "link-unknown",
+    at: "link",
+    path: () => paths.link("x".repeat(43)),
+    ready: heading(/is not known/),
+  },
+  { who: "nobody", name: "link-join", at: "link", path: () => linkOf("join"), ready: heading(/^Join/) },
+  { who: "nobody", name: "share", at: "share", path: () => linkOf("share"), ready: picture(/./) },
+  { who: "nobody", name: "share-closed", at: "share", path: () => linkOf("closed"), ready: heading(/no longer open/) },
+  { who: "nobody", name: "nowhere", at: "home", path: () => "/no/such/page", ready: heading(/./) },
+
+  { who: "owner", name: "bench", at: "bench", path: () => paths.bench(shop), ready: group("Our move") },
+  {
+    who: "owner",
+    name: "open-job",
+    at: "bench",
+    path: () => paths.bench(shop),
+    ready: group("Our move"),
+    open: openDialog("Open a job"),
+  },
+  {
+    who: "owner",
+    name: "bench-nothing-found",
+    at: "bench",
+    path: () => `${paths.bench(shop)}?q=zzzz`,
+    ready: text("No job matches"),
+  },
+  { who: "owner", name: "job-out", at: "job", path: () => paths.job(shop, jobOf("142")), ready: text("Revision B:") },
+  {
+    who: "owner",
+    name: "job-approved",
+    at: "job",
+    path: () => paths.job(shop, jobOf("135")),
+    ready: text("Certificate"),
+  },
+  { who: "owner", name: "job-mockup", at: "job", path: () => paths.job(shop, jobOf("139")), ready: text("wheat.svg") },
+  {
+    who: "owner",
+    name: "sheet",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+  },
+  {
+    who: "owner",
+    name: "sheet-superseded",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 A")),
+    ready: text("Revision A is superseded."),
+  },
+  {
+    who: "owner",
+    name: "compare",
+    at: "compare",
+    path: () => paths.compare(shop, jobOf("142"), sheetOf("142 A"), sheetOf("142 B")),
+    ready: picture("Revision B, front"),
+  },
+  { who: "owner", name: "clients", at: "clients", path: () => paths.clients(shop), ready: text("Orrery Books") },
+  {
+    who: "owner",
+    name: "client",
+    at: "client",
+    path: () => paths.client(shop, found(state.links, "client")),
+    ready: text("client@orrery.example"),
+  },
+  { who: "owner", name: "stock", at: "stock", path: () => paths.stock(shop), ready: text("Midnight") },
+  { who: "owner", name: "team", at: "team", path: () => paths.team(shop), ready: text("maker@copperlark.example") },
+  { who: "owner", name: "shop", at: "shop", path: () => paths.shop(shop), ready: heading(/./) },
+  { who: "owner", name: "mail", at: "outgoingMail", path: () => paths.outgoingMail(shop), ready: text("Look again") },
+  {
+    who: "owner",
+    name: "mail-open",
+    at: "outgoingMail",
+    path: () => paths.outgoingMail(shop),
+    ready: text("Look again"),
+    open: async (page) => {
+      await page
+        .getByRole("link", { name: /^Revision B of “Lobby sign/ })
+        .first()
+        .click();
+      await page.getByRole("link", { name: "Open the link" }).waitFor();
+    },
+  },
+  { who: "owner", name: "account", at: "account", path: paths.account, ready: text("Where you are signed in") },
+  { who: "owner", name: "nowhere", at: "bench", path: () => `/shop/${shop}/nothing`, ready: heading(/./) },
+
+  {
+    who: "maker",
+    name: "mockup",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("142")),
+    ready: drawn,
+    only: "desk",
+  },
+  {
+    who: "maker",
+    name: "mockup",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("142")),
+    ready: picture(/elevation/i),
+    only: "phone",
+  },
+  {
+    who: "maker",
+    name: "mockup-empty",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("139")),
+    ready: drawn,
+    only: "desk",
+  },
+  {
+    who: "maker",
+    name: "mockup-bring-in",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("139")),
+    ready: text("Nothing is on the board yet."),
+    open: async (page) => {
+      await page.getByRole("button", { name: "artwork" }).first().click();
+      await page.getByRole("button", { name: /^Bring in \d/ }).waitFor();
+    },
+    only: "desk",
+  },
+  {
+    who: "maker",
+    name: "mockup-layer",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("142")),
+    ready: drawn,
+    open: press(/^Choose B,/),
+    only: "desk",
+  },
+  {
+    who: "maker",
+    name: "mockup-issue",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("137")),
+    ready: drawn,
+    open: openDialog(/^Issue revision/),
+    only: "desk",
+  },
+  {
+    who: "rep",
+    name: "mockup-look-only",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("142")),
+    ready: picture(/elevation/i),
+  },
+  { who: "rep", name: "job", at: "job", path: () => paths.job(shop, jobOf("137")), ready: text("Revision B:") },
+  {
+    who: "rep",
+    name: "portfolio",
+    at: "portfolio",
+    path: () => paths.portfolio(shop),
+    ready: picture(/Boat rack plates/),
+  },
+  {
+    who: "rep",
+    name: "portfolio-link",
+    at: "portfolio",
+    path: () => paths.portfolio(shop),
+    ready: picture(/Boat rack plates/),
+    open: press("Make a link"),
+  },
+
+  {
+    who: "client",
+    name: "bench",
+    at: "bench",
+    path: () => paths.bench(shop),
+    ready: text("Lobby sign, rings and planets"),
+  },
+  { who: "client", name: "job", at: "job", path: () => paths.job(shop, jobOf("142")), ready: text("Revision B:") },
+  {
+    who: "client",
+    name: "sheet",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+  },
+  {
+    who: "client",
+    name: "sheet-note",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+    open: press("Add a note"),
+  },
+  {
+    who: "client",
+    name: "sheet-ask",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+    open: openDialog("Ask for a revision"),
+  },
+  {
+    who: "client",
+    name: "sheet-approve",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+    open: openDialog(/^Approve/),
+  },
+  {
+    who: "client",
+    name: "sheet-side",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+    open: (page) => page.getByRole("tab", { name: "From the side" }).click(),
+    only: "phone",
+  },
+  {
+    who: "client",
+    name: "sheet-materials",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("142 B")),
+    ready: picture("Front elevation"),
+    open: (page) => page.getByRole("tab", { name: "Materials" }).click(),
+    only: "phone",
+  },
+  {
+    who: "client",
+    name: "compare",
+    at: "compare",
+    path: () => paths.compare(shop, jobOf("142"), sheetOf("142 A"), sheetOf("142 B")),
+    ready: picture("Revision B, front"),
+  },
+  { who: "client", name: "account", at: "account", path: paths.account, ready: text("Where you are signed in") },
+  {
+    who: "client",
+    name: "not-theirs",
+    at: "team",
+    path: () => paths.team(shop),
+    ready: heading(/./),
+  },
+  {
+    who: "captain",
+    name: "sheet-approved",
+    at: "sheet",
+    path: () => paths.sheet(shop, sheetOf("135 A")),
+    ready: text("Revision A is approved."),
+  },
+  {
+    who: "captain",
+    name: "job-approved",
+    at: "job",
+    path: () => paths.job(shop, jobOf("135")),
+    ready: text("Certificate"),
+  },
+
+  { who: "newcomer", name: "bench", at: "bench", path: () => linkOf("new bench"), ready: text("Open the first job") },
+  {
+    who: "newcomer",
+    name: "clients",
+    at: "clients",
+    path: () => linkOf("new clients"),
+    ready: text("Add the first client"),
+  },
+  {
+    who: "newcomer",
+    name: "portfolio",
+    at: "portfolio",
+    path: () => linkOf("new portfolio"),
+    ready: text("No approved piece yet"),
+  },
+];
