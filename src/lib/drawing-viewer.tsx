@@ -3,7 +3,7 @@ import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { cx } from "./cx.ts";
 import { DrawingSvg } from "./drawing-svg.tsx";
 import { type DrawingView, type Size, viewFit } from "./drawing-view.ts";
-import { isLegible, legibleAt } from "./legible-drawing.ts";
+import { isCrowded, isLegible, legibleAt, withOverallAlone } from "./legible-drawing.ts";
 import { useDrawingGestures } from "./use-drawing-gestures.ts";
 import { useRoom } from "./use-room.ts";
 
@@ -34,12 +34,17 @@ export function DrawingViewer(props: DrawingViewerProps) {
   const element = useRef<HTMLDivElement>(null);
   const room = useRoom(element);
   const hintId = useId();
-  const picture = useMemo(() => ({ width: list.widthMm, height: list.heightMm }), [list]);
-  const fit = useMemo(() => viewFit(fitTo ?? picture, room ?? { width: 1, height: 1 }), [fitTo, picture, room]);
+  const crowded = isCrowded(list, viewFit(fitTo ?? sizeOf(list), room ?? noRoom).scale);
+  const spared = useMemo(
+    () => (crowded ? withOverallAlone(list, { cropped: fitTo === undefined }) : list),
+    [list, crowded, fitTo],
+  );
+  const fit = useMemo(() => viewFit(fitTo ?? sizeOf(spared), room ?? noRoom), [fitTo, spared, room]);
   const shown = view ?? fit;
   // Two pictures and no more: a new one at each step of a pinch would have to be drawn anew.
   const isClose = isLegible(list, shown.scale);
-  const drawn = useMemo(() => (isClose ? list : legibleAt(list, fit.scale)), [list, isClose, fit.scale]);
+  const drawn = useMemo(() => (isClose ? list : legibleAt(spared, fit.scale)), [list, spared, isClose, fit.scale]);
+  const picture = sizeOf(drawn);
   const gestures = useDrawingGestures({ element, picture: fitTo ?? picture, room, fit, view: shown, onView });
 
   function handleClickCapture(event: MouseEvent) {
@@ -97,6 +102,11 @@ export function DrawingViewer(props: DrawingViewerProps) {
     </div>
   );
 }
+
+/** Before the window was measured. */
+const noRoom: Size = { width: 1, height: 1 };
+
+const sizeOf = ({ widthMm, heightMm }: DisplayList): Size => ({ width: widthMm, height: heightMm });
 
 type ViewButtonProps = {
   readonly label: string;

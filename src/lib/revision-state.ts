@@ -5,7 +5,7 @@ export type Side = "shop" | "client";
 const clientWords: Partial<Record<Revision["state"], string>> = {
   issued: "the newest",
   superseded: "replaced",
-  "revision asked": "change asked for",
+  "revision asked": "to change",
 };
 
 /** A revision's state as one word or two beside its letter: the shop's own words, or plain ones for the client. */

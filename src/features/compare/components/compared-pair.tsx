@@ -87,7 +87,10 @@ export function ComparedPair({ pair, side: reader, pathOfSheet }: ComparedPairPr
                         {revisionStateWord(one.revision.state, reader)}
                       </span>
                     </h2>
-                    <TextLink className="text-sm" to={pathOfSheet(one.revision.id)}>
+                    <TextLink
+                      className="inline-flex min-h-8 items-center text-sm pointer-coarse:min-h-11"
+                      to={pathOfSheet(one.revision.id)}
+                    >
                       Sheet {one.revision.letter}
                     </TextLink>
                   </>

@@ -4,7 +4,16 @@ import { messageOf } from "@/lib/form-problem.ts";
 import { useSendFreshLink } from "../api/mutations.ts";
 
 /** For a link that no longer holds: a fresh one goes to the address the old one went to, nowhere else. */
-export function FreshLink({ token, addressHint }: { readonly token: string; readonly addressHint: string | null }) {
+export function FreshLink({
+  token,
+  addressHint,
+  isOnlyWay = true,
+}: {
+  readonly token: string;
+  readonly addressHint: string | null;
+  /** Nothing else on the page leads on. */
+  readonly isOnlyWay?: boolean;
+}) {
   const send = useSendFreshLink();
   if (send.isSuccess) {
     return (
@@ -17,7 +26,7 @@ export function FreshLink({ token, addressHint }: { readonly token: string; read
   return (
     <div className="space-y-4">
       {send.isError && <Notice tone="error">{messageOf(send.error)}</Notice>}
-      <Button kind="primary" busy={send.isPending} onClick={() => send.mutate(token)}>
+      <Button kind={isOnlyWay ? "primary" : "outline"} busy={send.isPending} onClick={() => send.mutate(token)}>
         Send a fresh one to the same address
       </Button>
       {addressHint && <p className="text-sm text-graphite">It goes to {addressHint}.</p>}

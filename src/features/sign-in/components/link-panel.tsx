@@ -50,21 +50,22 @@ export function LinkPanel({ token }: { readonly token: string }) {
 
   if (state === "unknown") return <UnknownLink />;
   if (state !== "open") {
+    const mayGoOn = purpose === "sign in" && me.data.person !== null;
     return (
       <>
         <Heading>{state === "spent" ? "This link has been used" : "This link has run out"}</Heading>
         <p className="mb-5 text-base text-graphite">
           Each link opens the door once and for a limited time, so that an old mail opens nothing. Nothing is lost.
         </p>
-        {purpose === "sign in" && me.data.person !== null && (
+        {mayGoOn && (
           <div className="mb-6">
-            <p className="mb-3 text-base">You are still signed in here as {me.data.person.email}.</p>
+            <p className="mb-3 text-base">You are still signed in here as {me.data.person?.email}.</p>
             <Button kind="primary" onClick={() => go(goTo)}>
               Go on
             </Button>
           </div>
         )}
-        <FreshLink token={token} addressHint={addressHint} />
+        <FreshLink token={token} addressHint={addressHint} isOnlyWay={!mayGoOn} />
       </>
     );
   }

@@ -1,6 +1,6 @@
 import { expect, it } from "vitest";
 import type { DisplayList, Item } from "#shared/drawing/display-list.ts";
-import { isLegible, legibleAt } from "@/lib/legible-drawing.ts";
+import { isCrowded, isLegible, legibleAt, withOverallAlone } from "@/lib/legible-drawing.ts";
 
 const text = (sizeMm: number, words: string): Item => ({
   kind: "text",
@@ -12,11 +12,19 @@ const text = (sizeMm: number, words: string): Item => ({
   align: "middle",
 });
 const group = (id: string, ...items: Item[]): Item => ({ kind: "group", id, x: 0, y: 0, scale: 1, items });
+const line: Item = {
+  kind: "line",
+  points: [
+    { x: 10, y: 300 },
+    { x: 480, y: 20 },
+  ],
+  stroke: { colour: "#1F1D1A", widthMm: 1 },
+};
 const picture: DisplayList = {
   widthMm: 600,
   heightMm: 400,
   items: [
-    group("dimension:overall", text(20, "600")),
+    group("dimension:overall", text(20, "600"), line),
     group("dimension:across", text(20, "168")),
     group("dimension:down", text(20, "18")),
     group("labels", text(20, "A")),
@@ -48,12 +56,27 @@ it("grows lettering that is a little too small, and keeps every dimension", () =
   ]);
 });
 
-it("keeps the overall dimensions alone where larger lettering would crowd", () => {
+it("keeps the overall dimensions alone where larger lettering would crowd, and ends where they end", () => {
+  expect(isCrowded(picture, 0.5)).toBe(false);
+  expect(isCrowded(picture, 0.25)).toBe(true);
+  const alone = withOverallAlone(picture, { cropped: true });
+  expect(lettering(alone.items)).toEqual([
+    ["600", 20],
+    ["A", 20],
+  ]);
+  // The overall line ends at 480, 300; as much is kept beside it as the lettering is high.
+  expect([alone.widthMm, alone.heightMm]).toEqual([500, 320]);
+  const whole = withOverallAlone(picture, { cropped: false });
+  expect([whole.widthMm, whole.heightMm]).toEqual([600, 400]);
   // 12.5 px at 0.25 px a mm are 50 mm; labels grow by three tenths at most, or they would leave their circles.
-  expect(lettering(legibleAt(picture, 0.25).items)).toEqual([
+  expect(lettering(legibleAt(alone, 0.25).items)).toEqual([
     ["600", 50],
     ["A", 26],
   ]);
+});
+
+it("leaves a drawing without overall dimensions whole, however small", () => {
+  expect(isCrowded({ ...picture, items: picture.items.slice(1) }, 0.01)).toBe(false);
 });
 
 it("counts a group's own scale", () => {
