@@ -2,6 +2,7 @@ import { Controller } from "react-hook-form";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
+import { DistanceField } from "@/components/ui/distance-field.tsx";
 import { Field } from "@/components/ui/field.tsx";
 import { LengthField } from "@/components/ui/length-field.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
@@ -10,7 +11,6 @@ import { TextArea } from "@/components/ui/text-area.tsx";
 import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
 import { ApproverChoice } from "./approver-choice.tsx";
 import { dayHint } from "./day-hint.ts";
-import { DistanceField } from "./distance-field.tsx";
 import { useBriefForm } from "./use-brief-form.ts";
 
 const emptyAsNull = { setValueAs: (text: string | null) => (text === "" ? null : text) };

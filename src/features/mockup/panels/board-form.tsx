@@ -2,6 +2,7 @@ import { useState } from "react";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { formatLength } from "#shared/units/format-length.ts";
 import { Button } from "@/components/ui/button.tsx";
+import { DistanceField } from "@/components/ui/distance-field.tsx";
 import { Field } from "@/components/ui/field.tsx";
 import { LengthField } from "@/components/ui/length-field.tsx";
 import { Select } from "@/components/ui/select.tsx";
@@ -38,6 +39,8 @@ const bounds: Readonly<Record<LengthName, Bounds>> = {
 };
 const lengthNames = Object.keys(bounds) as LengthName[];
 
+const isCount = (value: number): boolean => Number.isInteger(value) && value >= 1 && value <= 1000;
+
 /** Size, wood and hanging of the board, and the light it is shown in. One step for all of it. */
 export function BoardForm({ onDone }: { readonly onDone: () => void }) {
   const { document, stock, unit, edit } = useDesk();
@@ -59,7 +62,8 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
   const azimuth = fields.light?.azimuth ?? presentation.light.azimuth;
 
   const set = (more: BoardFields) => setFields((before) => ({ ...before, ...more }));
-  const fits = lengthNames.every((name) => isWithinBounds(lengths[name], bounds[name]));
+  const fits =
+    isCount(fields.quantity ?? quantity) && lengthNames.every((name) => isWithinBounds(lengths[name], bounds[name]));
   const lengthField = (name: LengthName, label: string) => (
     <LengthField
       label={label}
@@ -88,6 +92,7 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
 
   return (
     <form
+      noValidate
       className="space-y-4"
       onSubmit={(event) => {
         event.preventDefault();
@@ -133,7 +138,8 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
           type="number"
           min={1}
           max={1000}
-          value={fields.quantity ?? quantity}
+          value={Number.isNaN(fields.quantity) ? "" : (fields.quantity ?? quantity)}
+          error={isCount(fields.quantity ?? quantity) ? undefined : "Write a whole number from 1 to 1000."}
           onChange={(event) => set({ quantity: event.target.valueAsNumber })}
         />
         <Select
@@ -165,7 +171,17 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
             </option>
           ))}
         </Select>
-        {lengthField("viewingDistance", "Seen from")}
+        <DistanceField
+          label="Seen from"
+          unit={unit}
+          value={lengths.viewingDistance}
+          onChange={(mm) => setLengths((before) => ({ ...before, viewingDistance: mm }))}
+          error={
+            isWithinBounds(lengths.viewingDistance, bounds.viewingDistance)
+              ? undefined
+              : `From ${unit === "mm" ? "0.1 to 200 m" : "1/3 to 656 feet"}.`
+          }
+        />
         <Field
           label="Wall colour"
           type="color"

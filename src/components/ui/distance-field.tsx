@@ -1,6 +1,6 @@
 import { useState } from "react";
 import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
-import { Field } from "@/components/ui/field.tsx";
+import { Field } from "./field.tsx";
 
 const mmOf: Record<LengthUnit, number> = { mm: 1000, in: inchesToMm(12) };
 
