@@ -6,7 +6,12 @@ type BoardDialogProps = { readonly open: boolean; readonly onOpenChange: (open: 
 /** The board in a dialog. */
 export function BoardDialog({ open, onOpenChange }: BoardDialogProps) {
   return (
-    <Dialog open={open} onOpenChange={onOpenChange} title="Board">
+    <Dialog
+      open={open}
+      onOpenChange={onOpenChange}
+      title="Board"
+      description="What lies on it keeps its place from the middle."
+    >
       <BoardForm onDone={() => onOpenChange(false)} />
     </Dialog>
   );

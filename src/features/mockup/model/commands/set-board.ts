@@ -1,6 +1,7 @@
 import type { MockupDocument, Wood } from "#shared/mockup/document.ts";
 import { lengthOf } from "../limits.ts";
 import { withFields } from "../same.ts";
+import { movePieces } from "./pieces.ts";
 
 export type BoardFields = {
   readonly width?: number;
@@ -15,8 +16,20 @@ export type BoardFields = {
   readonly viewingDistance?: number;
 };
 
-/** Sets what is given of the board, its backer, hanging and showing. A value that a document can't hold is left as it was. */
+/**
+ * Sets what is given of the board, its backer, hanging and showing. A value that a document can't hold is left as it was.
+ * A board of another size grows or shrinks about its middle: what is centred on it stays so.
+ */
 export function setBoard(document: MockupDocument, fields: BoardFields): MockupDocument {
+  const changed = withBoardFields(document, fields);
+  return movePieces(changed, {
+    pieceIds: document.layers.flatMap(({ pieces }) => pieces.map(({ id }) => id)),
+    dx: (changed.board.width - document.board.width) / 2,
+    dy: (changed.board.height - document.board.height) / 2,
+  });
+}
+
+function withBoardFields(document: MockupDocument, fields: BoardFields): MockupDocument {
   const { board, backer, hanging, presentation, quantity } = document;
   return withFields(document, {
     board: withFields(board, {

@@ -146,6 +146,21 @@ describe("changing a layer's stock", () => {
   });
 });
 
+describe("changing the board's size", () => {
+  it("keeps pieces and holes at their places from its middle", () => {
+    const before = discOnStandoffs();
+    const after = setBoard(before, { width: 630, height: 380 });
+    expect(after.board).toMatchObject({ width: 630, height: 380 });
+    expect(after.layers[0]?.pieces[0]?.placement).toMatchObject({ x: 315, y: 190 });
+    expect(holesOf(after).map(({ x, y }) => [x, y])).toEqual(holesOf(before).map(({ x, y }) => [x + 15, y - 10]));
+  });
+
+  it("moves nothing when only the wood changes", () => {
+    const before = discOnStandoffs();
+    expect(setBoard(before, { thickness: 25 }).layers).toBe(before.layers);
+  });
+});
+
 describe("holding a layer", () => {
   it("proposes four holes on a disc's diagonals, the first fixed and each other one with a window", () => {
     const holes = holesOf(discOnStandoffs());
