@@ -105,11 +105,15 @@ export type PairFit =
   | { readonly fits: false; readonly why: string };
 
 const onFinish = "A bond on a finished face is as strong as the finish.";
+const onCoating = "A bond on a painted or mirrored back is as strong as the coating.";
 
 /** Whether a family bonds two surfaces, the same in both orders. */
 export function pairFit(family: Family, one: Surface, other: Surface): PairFit {
   const surfaces = [one, other];
-  const remarks = surfaces.includes("finished wood") ? [onFinish] : [];
+  const remarks = [
+    ...(surfaces.includes("finished wood") ? [onFinish] : []),
+    ...(surfaces.includes("coated back") ? [onCoating] : []),
+  ];
   switch (family) {
     case "solvent cement":
     case "bodied cement":
@@ -121,9 +125,6 @@ export function pairFit(family: Family, one: Surface, other: Surface): PairFit {
       }
       return { fits: true, remarks: [] };
     case "cyanoacrylate":
-      if (surfaces.includes("coated back")) {
-        return { fits: false, why: "Its bond ends at the paint or mirror, and its fume can cloud them." };
-      }
       return { fits: true, remarks: [...remarks, ...(surfaces.some(isWood) ? ["On wood take a thick one."] : [])] };
     case "epoxy":
       if (surfaces.every((surface) => surface === "acrylic")) {

@@ -1,12 +1,13 @@
 import { describe, expect, it } from "vitest";
 import { z } from "zod";
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { deflectionOf } from "#shared/plates/deflection.ts";
 import { pushDeflection } from "#shared/plates/push.ts";
 import { acrylicSheet, ownWeight, rigidityNmm, type Sheet } from "#shared/plates/rigidity.ts";
 import { type Support, sag } from "#shared/plates/sag.ts";
 import { checkReference } from "../support/check-reference.ts";
 import { cornerPlate } from "../support/corner-plate.ts";
-import { referenceJson, resultOf } from "../support/reference-data.ts";
+import { referenceCsv, referenceJson, resultOf } from "../support/reference-data.ts";
 
 const { table, worked } = z
   .object({
@@ -161,6 +162,17 @@ describe("a plate on four corner points, by the Ritz method", () => {
     expect(cornerPlate({ ratio, poisson: 0.37, load: "even" })).toBeLessThanOrEqual(0.0255);
     expect(cornerPlate({ ratio, poisson: 0.37, load: "middle" })).toBeLessThanOrEqual(Math.max(0.0391, 0.0242 * ratio));
   });
+});
+
+// ISO 527 and ASTM D696 as in the data pages of the table: 2.8 to 3.3 GPa, 70e-6 per K.
+it("acrylic is as stiff and grows as much as the table of sheets says", () => {
+  const row = referenceCsv("sheet-materials.csv").find(({ material }) => material === "acrylic (PMMA) cast sheet");
+  const [least = 0, most = 0] = (row?.E_GPa ?? "").split("-").map(Number);
+  expect(acrylicSheet.modulus / 1000).toBeGreaterThanOrEqual(least);
+  expect(acrylicSheet.modulus / 1000).toBeLessThanOrEqual(most);
+  const expected = Number.parseFloat(row?.["CTE_1e-6_per_K"] ?? "");
+  const got = defaultLimits.expansionPerK * 1e6;
+  checkReference({ what: "expansion of cast acrylic, 1e-6/K", source: "ASTM D696", expected, got, within: 1e-9 });
 });
 
 it("a push on a long strip is that on a beam: P a³/(48 E I)", () => {

@@ -48,7 +48,7 @@ describe("a pair", () => {
     { family: "solvent cement", one: "acrylic", other: "coated back", fits: false },
     { family: "bodied cement", one: "coated back", other: "raw wood", fits: false },
     { family: "cyanoacrylate", one: "acrylic", other: "finished wood", fits: true },
-    { family: "cyanoacrylate", one: "coated back", other: "raw wood", fits: false },
+    { family: "cyanoacrylate", one: "coated back", other: "raw wood", fits: true },
     { family: "epoxy", one: "acrylic", other: "raw wood", fits: true },
     { family: "epoxy", one: "acrylic", other: "acrylic", fits: false },
     { family: "neutral silicone", one: "coated back", other: "finished wood", fits: true },
@@ -73,6 +73,10 @@ describe("a pair", () => {
   it("on a finished face says that the bond is as strong as the finish", () => {
     const fit = pairFit("high-bond tape", "acrylic", "finished wood");
     expect(fit).toMatchObject({ fits: true, remarks: ["A bond on a finished face is as strong as the finish."] });
+    expect(pairFit("epoxy", "coated back", "raw wood")).toMatchObject({
+      fits: true,
+      remarks: ["A bond on a painted or mirrored back is as strong as the coating."],
+    });
   });
 });
 
