@@ -375,7 +375,7 @@ describe("the sheet", () => {
     expect(sheet.job).toMatchObject({ title: "Lobby sign", number: own.job.number, unit: "mm" });
     expect(sheet.words).toBe("HERON & WEIR");
     expect(sheet.board).toEqual({ widthMm: 600, heightMm: 400 });
-    expect(sheet.pieces).toEqual([{ id: "p1", name: "", layerKey: "B", x: 200, y: 200 }]);
+    expect(sheet.pieces).toEqual([{ id: "p1", name: "Layer B", layerKey: "B", x: 200, y: 200 }]);
     expect(sheet.zones.columns.map(({ label }) => label)).toEqual(["1", "2", "3", "4", "5", "6"]);
     expect(sheet.acknowledgements[0]).toEqual({
       id: "words-1",

@@ -19,6 +19,8 @@ import { popplerText } from "./poppler.ts";
 import { runSql } from "./run-sql.ts";
 import { type Answer, Visitor } from "./visitor.ts";
 
+/** One address gets no more proofs than this within the hour, however many are issued. */
+const mostMails = 30;
 /** Long enough for the queue to take back what a killed process held. */
 const patienceMs = 60_000;
 
@@ -43,6 +45,7 @@ export async function openShopUnderFire(server: KillableServer) {
   await visitor.get(changeJob, { params: jobParams, body: { approverIds: [approver.contact.id] } });
 
   const acknowledged = { revisionIds: new Set<string>(), artworks: new Map<string, string>() };
+  const whole = new Set<string>();
   const files = `/api/shops/${params.shop}/jobs/${jobId}/artworks`;
 
   /** Saves a sign of its own and issues it. Undefined when the server died before it answered. */
@@ -74,8 +77,8 @@ export async function openShopUnderFire(server: KillableServer) {
     await expect.poll(waiting, { timeout: patienceMs, interval: 200 }).toEqual([]);
   }
 
-  /** Everything acknowledged is there, everything that is there is whole. */
-  async function expectWhole(): Promise<void> {
+  /** Everything acknowledged is there, everything that is there is whole. Bytes found whole before are read again only with `again`. */
+  async function expectWhole({ again = false }: { again?: boolean } = {}): Promise<void> {
     const revisions = await allPages((cursor) =>
       visitor.get(listRevisions, { params: jobParams, query: { limit: 100, ...cursor } }),
     );
@@ -84,10 +87,12 @@ export async function openShopUnderFire(server: KillableServer) {
     if (newest) expect(newest.state).toBe("issued");
     expect(older.every(({ state }) => state === "superseded")).toBe(true);
     for (const { id, pdfSha256, snapshotSha256 } of revisions) {
+      if (whole.has(id) && !again) continue;
+      whole.add(id);
       const { status, bytes } = await download(getProof.path.replace(":shop", params.shop).replace(":revisionId", id));
       expect(status).toBe(200);
       expect(sha256Hex(bytes)).toBe(pdfSha256);
-      if (id === newest?.id) expect(await popplerText(bytes, "pdfinfo")).toContain(`sha256:${snapshotSha256}`);
+      expect(await popplerText(bytes, "pdfinfo")).toContain(`sha256:${snapshotSha256}`);
     }
     const artworks = await allPages((cursor) =>
       visitor.get(listArtworks, { params: jobParams, query: { limit: 100, ...cursor } }),
@@ -96,6 +101,8 @@ export async function openShopUnderFire(server: KillableServer) {
       expect(artworks.find((one) => one.id === id)).toMatchObject({ state: "ready", sha256: sha256Hex(svg) });
     for (const { id, state, sha256 } of artworks) {
       expect(state).toBe("ready");
+      if (whole.has(id) && !again) continue;
+      whole.add(id);
       const file = await download(getArtworkFile.path.replace(":shop", params.shop).replace(":artworkId", id));
       expect(sha256Hex(file.bytes)).toBe(sha256);
     }
@@ -112,7 +119,7 @@ export async function openShopUnderFire(server: KillableServer) {
       `select (select count(*)::int from events where kind = 'revision issued') as issued,
               (select count(*)::int from outgoing_mails where kind = 'proof issued' and state in ('sent', 'dropped')) as mails`,
     );
-    expect(counted).toEqual([{ issued: revisions, mails: revisions }]);
+    expect(counted).toEqual([{ issued: revisions, mails: Math.min(revisions, mostMails) }]);
   }
 
   async function download(path: string): Promise<{ status: number; bytes: Uint8Array }> {
