@@ -9,8 +9,8 @@ export type JobPayloads = {
 };
 export type JobName = keyof JobPayloads;
 
-/** What may take long: one of each kind at a time, so that a shop that brings much does not hold up the mails of all. */
-const oneAtATime: ReadonlySet<JobName> = new Set(["import-artwork", "render-proof"]);
+/** What may take long. Jobs of these kinds carry their name as a flag, by which the queue passes them over while one is under way. */
+export const heavyJobs: ReadonlySet<string> = new Set<JobName>(["import-artwork", "render-proof"]);
 
 /**
  * Adds a job in the very transaction of the change that causes it: rolled back together, committed together.
@@ -23,8 +23,8 @@ export async function enqueue<N extends JobName>(
 ): Promise<void> {
   const key = `${name}:${Object.values(payload).join(":")}`;
   await sequelizeOf(transaction).query(
-    "select graphile_worker.add_job($1::text, payload := $2::json, queue_name := $3::text, job_key := $4::text, max_attempts := 8)",
-    { bind: [name, JSON.stringify(payload), oneAtATime.has(name) ? name : null, key], transaction },
+    "select graphile_worker.add_job($1::text, payload := $2::json, flags := $3::text[], job_key := $4::text, max_attempts := 8)",
+    { bind: [name, JSON.stringify(payload), heavyJobs.has(name) ? [name] : null, key], transaction },
   );
 }
 

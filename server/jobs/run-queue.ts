@@ -6,11 +6,11 @@ import { appDatabaseUrl } from "../env.ts";
 import type { Services } from "../http/context.ts";
 import { withoutSecrets } from "../http/without-secrets.ts";
 import { freeJobsOfTheDead } from "./free-jobs.ts";
-import type { JobName } from "./queue.ts";
+import { heavyJobs, type JobName } from "./queue.ts";
 import { type Task, tasks } from "./tasks.ts";
 
-/** One more than there are kinds of heavy work, so that mails always find a free hand. */
-export const concurrency = 3;
+/** One more than there are kinds of heavy work, so that mails find a free hand however much one shop brings. */
+const concurrency = heavyJobs.size + 1;
 /** What the queue tells of jobs is said below in our own words, so here it is for finding faults in the queue itself. */
 const levels = { error: "error", warning: "warn", info: "debug", debug: "trace" } as const;
 
@@ -33,6 +33,7 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
     if (job.attempts >= job.max_attempts) log.error(fields, "A job failed for good");
     else log.warn(fields, "A job failed and will be tried again");
   });
+  const { taskList, underWay } = watched(taskListOf(services, log), heavyJobs);
   const presence = await freeJobsOfTheDead({ connectionString, events, log });
   const runner = await run({
     pgPool: pool,
@@ -40,7 +41,8 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
     noHandleSignals: true,
     pollInterval: 2_000,
     parsedCronItems: [],
-    taskList: taskListOf(services, log),
+    forbiddenFlags: underWay,
+    taskList,
     logger: new QueueLogger(() => (level, message) => log[levels[level]](withoutSecrets(message))),
     events,
   });
@@ -50,6 +52,29 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
       await presence.end();
       await pool.end();
     },
+  };
+}
+
+/** The same tasks, and which of the watched ones are under way. */
+export function watched(
+  tasks: TaskList,
+  names: ReadonlySet<string>,
+): { readonly taskList: TaskList; readonly underWay: () => string[] } {
+  const running: string[] = [];
+  const watch = (name: string, task: TaskList[string]): TaskList[string] =>
+    names.has(name)
+      ? async (payload, helpers) => {
+          running.push(name);
+          try {
+            return await task?.(payload, helpers);
+          } finally {
+            running.splice(running.indexOf(name), 1);
+          }
+        }
+      : task;
+  return {
+    taskList: Object.fromEntries(Object.entries(tasks).map(([name, task]) => [name, watch(name, task)])),
+    underWay: () => [...new Set(running)],
   };
 }
 
