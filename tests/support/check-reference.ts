@@ -15,7 +15,7 @@ type Row = {
 
 /** Expects a computed value to be the published one, and puts both into the table at the end of the reference run. */
 export function checkReference({ what, source, expected, got, within }: Row): void {
-  writeRow([what, source, text(expected), text(got)]);
+  writeRow([source, what, text(expected), text(got)]);
   // The hair is for the two sides' own last digits.
   const off = Math.abs(got - expected);
   expect(off, `${what}: ${got} is ${off} off ${expected}`).toBeLessThanOrEqual(within + 1e-12 * Math.abs(expected));
@@ -23,7 +23,7 @@ export function checkReference({ what, source, expected, got, within }: Row): vo
 
 /** The same for words, as a verdict. */
 export function checkReferenceWord(row: Pick<Row, "what" | "source"> & { expected: string; got: string }): void {
-  writeRow([row.what, row.source, row.expected, row.got]);
+  writeRow([row.source, row.what, row.expected, row.got]);
   expect(row.got, row.what).toBe(row.expected);
 }
 

@@ -25,6 +25,10 @@ export function teardown(): void {
   const rows = existsSync(file) ? readFileSync(file, "utf8").trimEnd().split("\n") : [];
   rmSync(folder, { recursive: true });
   if (rows.length === 0) return;
-  const sorted = rows.map((row) => row.split("\t")).sort(([a = ""], [b = ""]) => (a < b ? -1 : a > b ? 1 : 0));
-  printTable(`Against the world outside: ${rows.length} values`, [["what", "source", "expected", "got"], ...sorted]);
+  // Source last, since it is the widest; rows of one source together.
+  const table = rows
+    .sort()
+    .map((row) => row.split("\t"))
+    .map(([source = "", what = "", expected = "", got = ""]) => [what, expected, got, source]);
+  printTable(`Against the world outside: ${rows.length} values`, [["what", "expected", "got", "source"], ...table]);
 }
