@@ -95,6 +95,9 @@ export function DrawingViewer(props: DrawingViewerProps) {
         <ViewButton label="Closer" about={title} onPress={() => gestures.step(1.6)} />
         <ViewButton label="Farther" about={title} idle={gestures.isWhole} onPress={() => gestures.step(1 / 1.6)} />
         <ViewButton label="Whole" about={title} idle={gestures.isWhole} onPress={() => onView(null)} />
+        {drawn !== list && spared !== list && (
+          <span className="self-center pl-1.5 text-fine text-graphite">Closer shows every dimension.</span>
+        )}
       </p>
       <p id={hintId} className="sr-only">
         Plus and minus look closer and farther, arrows move, 0 shows the whole drawing.
