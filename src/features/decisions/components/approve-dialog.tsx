@@ -65,6 +65,8 @@ export function ApproveDialog(props: ApproveDialogProps) {
     }
     if (isAnotherName(typedName, sheet.reader.name) && !isAskedName) {
       setAskedName(typedName);
+      // The question stands under the name, which may lie above what a phone shows.
+      form.current?.querySelector<HTMLElement>("[autocomplete=name]")?.focus();
       return;
     }
     isSent.current = true;
@@ -138,6 +140,12 @@ export function ApproveDialog(props: ApproveDialogProps) {
           error={shown.typedName ? "Type your name." : undefined}
           onChange={(event) => change({ typedName: event.target.value })}
         />
+        {isAskedName && !stopped && (
+          <Notice tone="caution" title={`This page knows you as ${sheet.reader.name}.`}>
+            You typed “{typedName}”. If you are {sheet.reader.name}, sign with that name. If you are someone else, leave
+            it to {sheet.reader.name}, or ask {sheet.job.shopName} for a link of your own.
+          </Notice>
+        )}
         <Checkbox
           label={`${sheet.job.shopName} may show this sign in its portfolio`}
           hint="If you like. It changes nothing about the sign, and you can take it back."
@@ -165,12 +173,6 @@ export function ApproveDialog(props: ApproveDialogProps) {
         {stopped && (
           <Notice tone="caution" title="Then this is not the one to approve.">
             Ask for a revision: your open notes go along.
-          </Notice>
-        )}
-        {isAskedName && !stopped && (
-          <Notice tone="caution" title={`This page knows you as ${sheet.reader.name}.`}>
-            You typed “{typedName}”. If you are {sheet.reader.name}, sign with that name. If you are someone else, leave
-            it to {sheet.reader.name}, or ask {sheet.job.shopName} for a link of your own.
           </Notice>
         )}
         {approve.isError && (
