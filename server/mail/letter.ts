@@ -44,20 +44,20 @@ export function letterText({ paragraphs, quote, button, after }: Letter, { greet
 export function letterHtml({ paragraphs, quote, button, after }: Letter, { greeting, sender }: LetterFrame): string {
   const paragraph = (text: string): string => `<p>${escapeHtml(text)}</p>`;
   const link = button
-    ? `<p><a href="${escapeHtml(button.url)}" style="display:inline-block;padding:10px 16px;background:#1f3a4d;color:#ffffff;text-decoration:none">${escapeHtml(button.label)}</a></p>
+    ? `<p><a href="${escapeHtml(button.url)}" style="display:inline-block;padding:10px 16px;background:#96372b;color:#ffffff;text-decoration:none">${escapeHtml(button.label)}</a></p>
 <p style="font-size:13px">Or open this address: ${escapeHtml(button.url)}</p>`
     : "";
   const parts = [
     paragraph(`Hello ${headerLine(greeting)},`),
     ...paragraphs.map(paragraph),
     quote
-      ? `<blockquote style="margin:0 0 1em;padding-left:12px;border-left:3px solid #8a8f94">${escapeHtml(quote).replaceAll("\n", "<br>")}</blockquote>`
+      ? `<blockquote style="margin:0 0 1em;padding-left:12px;border-left:3px solid #d8cfbd">${escapeHtml(quote).replaceAll("\n", "<br>")}</blockquote>`
       : "",
     link,
     ...after.map(paragraph),
     paragraph(headerLine(sender)),
   ];
-  return `<!doctype html><html lang="en"><body style="font-family:sans-serif;font-size:15px;line-height:1.5;color:#1c1c1c;max-width:36em">
+  return `<!doctype html><html lang="en"><body style="font-family:sans-serif;font-size:16px;line-height:1.5;color:#1f1d1a;max-width:36em">
 ${parts.filter(Boolean).join("\n")}
 </body></html>
 `;

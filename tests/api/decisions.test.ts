@@ -18,6 +18,7 @@ import { buildJob } from "../support/factories/job.ts";
 import { buildMember } from "../support/factories/member.ts";
 import { buildRevision, buildWorld, type World } from "../support/factories/work.ts";
 import { lastLogLine, logKinds } from "../support/job-log.ts";
+import { caughtMails } from "../support/mail.ts";
 import { popplerText } from "../support/poppler.ts";
 import { runSql } from "../support/run-sql.ts";
 import { signInAs } from "../support/sign-in.ts";
@@ -117,6 +118,12 @@ describe("approving", () => {
     expect(kinds.slice(-3)).toEqual(["revision opened", "revision approved", "certificate made"]);
     const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "approved" } });
     expect(mails.map(({ state }) => state)).toEqual(["sent", "sent", "sent"]);
+    const told = (await caughtMails(app)).find(
+      ({ to, subject }) => to === own.owner.email && /^Approved/.test(subject),
+    );
+    expect(told?.text).toMatch(
+      new RegExp(`^${own.approver.contact.name} approved revision A of .*, signed “Ada Quill”\\.$`, "m"),
+    );
   });
 
   it("makes the certificate once, however often its job runs", async () => {

@@ -57,11 +57,11 @@ export async function approved(mail: OutgoingMail, transaction: Transaction): Pr
   const about = await aboutRevision(mail, transaction);
   const decision = about && (await Decision.findOne({ where: { revisionId: about.revision.id }, transaction }));
   if (!about || !decision) return null;
+  const { typedName, byName } = decision;
+  const signature = typedName === null || typedName === byName ? "" : `, signed “${typedName}”`;
   return toStaff(mail, transaction, about, {
     subject: `Approved: ${titleOf(about)}, revision ${about.revision.letter}`,
-    paragraphs: [
-      `${decision.typedName ?? decision.byName} approved revision ${about.revision.letter} of ${titleOf(about)}.`,
-    ],
+    paragraphs: [`${decision.byName} approved revision ${about.revision.letter} of ${titleOf(about)}${signature}.`],
     after: [],
   });
 }
