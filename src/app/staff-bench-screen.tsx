@@ -2,6 +2,7 @@ import { useInfiniteQuery } from "@tanstack/react-query";
 import { useCallback, useState } from "react";
 import { useNavigate } from "react-router-dom";
 import { Button } from "@/components/ui/button.tsx";
+import { TextLink } from "@/components/ui/text-link.tsx";
 import { jobsQuery } from "@/features/bench/api/queries.ts";
 import { useBenchFilter } from "@/features/bench/components/bench-filter.ts";
 import { BenchLists } from "@/features/bench/components/bench-lists.tsx";
@@ -43,7 +44,20 @@ export function StaffBenchScreen() {
         shop={shop.slug}
         filter={filter}
         onClear={clear}
-        firstStep={shop.can.openJob && <Button onClick={() => setOpening(true)}>Open the first job</Button>}
+        firstStep={
+          shop.can.openJob && (
+            <>
+              <Button onClick={() => setOpening(true)}>Open the first job</Button>
+              {shop.can.changeShop && (
+                <p className="mt-5 max-w-prose text-base text-graphite">
+                  Before that, say whether you measure in mm or inches and on which paper proofs go out, under{" "}
+                  <TextLink to={paths.shop(shop.slug)}>Shop</TextLink>, and invite who works with you, under{" "}
+                  <TextLink to={paths.team(shop.slug)}>Team</TextLink>.
+                </p>
+              )}
+            </>
+          )
+        }
       />
       <OpenJobDialog
         shop={shop.slug}
