@@ -11,10 +11,13 @@ import { StockItem } from "../models/stock-item.ts";
 /** Puts the generic stock list on a shop's shelf, so that a new shop has something to draw with. */
 export async function loadStandardStock({
   shopId,
+  counted = null,
   now,
   transaction,
 }: {
   shopId: string;
+  /** How many of each standoff are on hand; a new shop has not counted yet. */
+  counted?: number | null;
   now: Date;
   transaction: Transaction;
 }): Promise<void> {
@@ -38,7 +41,7 @@ export async function loadStandardStock({
         kind: "hardware" as const,
         name: hardware.name,
         properties: { hardware },
-        quantity: 24,
+        quantity: counted,
       })),
       ...standardAdhesives.map((adhesive) => ({
         ...base(),

@@ -47,7 +47,7 @@ function inputOf(
     number: titleBlock.number,
     revision: titleBlock.revision,
     typedName: decision.typedName ?? "",
-    email,
+    signedInAs: `${decision.byName}, ${email}`,
     acknowledgements: JSON.parse(decision.acknowledgements ?? "[]") as string[],
     decidedAt: `${decision.decidedAt.toISOString().slice(0, 19).replace("T", " ")} UTC`,
     pdfSha256: decision.pdfSha256,

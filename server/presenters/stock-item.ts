@@ -14,6 +14,6 @@ export function presentStockItem({ id, name, kind, properties, quantity }: Stock
     kind,
     [material]: { ...held, stockId: id },
     ...(kind === "acrylic" || kind === "wood" ? { thicknessesMm: properties.thicknessesMm } : {}),
-    ...(kind === "hardware" ? { quantity: quantity ?? 0 } : {}),
+    ...(kind === "hardware" ? { quantity } : {}),
   });
 }

@@ -7,7 +7,12 @@ const base = { id: z.uuid(), name: z.string() };
 export const stockItemSchema = z.discriminatedUnion("kind", [
   z.strictObject({ ...base, kind: z.literal("acrylic"), acrylic: acrylicSchema, thicknessesMm: z.array(z.number()) }),
   z.strictObject({ ...base, kind: z.literal("wood"), wood: woodSchema, thicknessesMm: z.array(z.number()) }),
-  z.strictObject({ ...base, kind: z.literal("hardware"), hardware: capStudSchema, quantity: z.number().int() }),
+  z.strictObject({
+    ...base,
+    kind: z.literal("hardware"),
+    hardware: capStudSchema,
+    /** Null until somebody has counted. */ quantity: z.number().int().nullable(),
+  }),
   z.strictObject({ ...base, kind: z.literal("adhesive"), adhesive: adhesiveSchema }),
 ]);
 export type StockItem = z.infer<typeof stockItemSchema>;

@@ -17,7 +17,8 @@ export type CertificateInput = {
   readonly revision: string;
   /** As the approver typed it. */
   readonly typedName: string;
-  readonly email: string;
+  /** Name and address of the contact whose session it was. */
+  readonly signedInAs: string;
   /** Each sentence that was ticked. */
   readonly acknowledgements: readonly string[];
   /** Date and time with its zone, as "2026-12-01 10:12:45 +01:00 (Europe/Berlin)". */
@@ -45,7 +46,7 @@ function rowsOf(input: CertificateInput): Row[] {
     { label: "Number", value: input.number },
     { label: "Revision", value: input.revision },
     { label: "Approved by", value: input.typedName },
-    { label: "Signed in as", value: input.email },
+    { label: "Signed in as", value: input.signedInAs },
     { label: "Date and time", value: input.decidedAt },
   ];
 }

@@ -14,7 +14,7 @@ import type { DemoIds } from "./load-demo-people.ts";
 export async function loadDemoWork(owner: Context, ids: DemoIds): Promise<void> {
   const { transaction, now } = owner;
   const contexts = contextsOf(owner, ids);
-  await loadStandardStock({ shopId: ids.shopId, now, transaction });
+  await loadStandardStock({ shopId: ids.shopId, counted: 24, now, transaction });
   await loadRackPlates(contexts, ids);
   await loadBoathouse(contexts, ids);
   await loadBakehouse(contexts, ids);

@@ -39,7 +39,7 @@ export function stockFacts(item: StockItem, unit: LengthUnit): StockFacts {
         colour: item.hardware.finish,
         swatch: "metal",
         what: `barrel ${formatLengthWithUnit(item.hardware.barrelLength, unit)}, cap ${formatLengthWithUnit(item.hardware.capDiameter, unit)} across, screw ${item.hardware.screw.name}`,
-        amount: `${item.quantity} on hand`,
+        amount: item.quantity === null ? "not counted yet" : `${item.quantity} on hand`,
       };
     case "adhesive":
       return { colour: null, swatch: "sheet", what: item.adhesive.family, amount: "" };

@@ -12,7 +12,7 @@ const input = {
   number: "CL-0142",
   revision: "B",
   typedName: "Tilda Marsh",
-  email: "client@orrery.example",
+  signedInAs: "Ines Calloway, client@orrery.example",
   acknowledgements: ["I have checked the spelling of every word.", "I have checked sizes, colours and heights."],
   decidedAt: "2026-12-01 10:12:45 +01:00 (Europe/Berlin)",
   pdfSha256: "9f86d081884c7d659a2feaa0c55ad015a3bf4f1b2b0b822cd15d6c15b0f00a08",
