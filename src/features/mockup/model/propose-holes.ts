@@ -1,12 +1,11 @@
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { windowOfHole } from "#shared/dry-fit/rules/hole-window.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
-import { boxCentre, boxOfRegion } from "#shared/geometry/box.ts";
-import { distanceToRegionEdgeMm, regionContains } from "#shared/geometry/contains.ts";
 import { flattenPath } from "#shared/geometry/flatten.ts";
-import type { Point, Region } from "#shared/geometry/path.ts";
+import type { Point } from "#shared/geometry/path.ts";
 import { placeRegion } from "#shared/geometry/placement.ts";
 import { isShorter } from "#shared/geometry/tolerance.ts";
+import { cornerHoles } from "#shared/hardware/hole-proposals.ts";
 import { holeWindow } from "#shared/hardware/hole-window.ts";
 import type { CapStud, Hold, Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
 import { coordinateOf, lengthOf, mostHoles } from "./limits.ts";
@@ -14,8 +13,6 @@ import { withFields } from "./same.ts";
 
 /** Coarse: a proposal is looked at and moved, and a layer can have hundreds of pieces. */
 const flatnessMm = 0.2;
-/** How many places are tried on the way from a corner to the middle. */
-const tries = 60;
 
 type StandoffHold = Extract<Hold, { kind: "standoff" }>;
 
@@ -33,27 +30,21 @@ export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Ca
   const edge = Math.max(2 * widest, hardware.capDiameter / 2 + 2, widest / 2 + layer.thickness);
   const apart = 2 * hardware.capDiameter;
   const regions = layer.pieces.map((piece) => placeRegion(flattenPath(piece.path, flatnessMm), piece.placement));
-  const holesFrom = (first: number): StandoffHold => {
-    const holes = regions
-      .flatMap((region) => corners(region, { edge, apart, first }))
+  const holdWith = (points: readonly Point[]): StandoffHold => {
+    const holes = points
       .map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) }))
       .filter(isPoint)
       .slice(0, mostHoles)
       .map(({ x, y }, index) => ({ id: `${id}-${index + 1}`, x, y, diameter: lower, fixed: index === 0 }));
     return { kind: "standoff", hardware, offset: hardware.barrelLength, holes };
   };
-  const outermost = holesFrom(1);
-  return fitDiameters(regions.length === 1 ? nearEnough(outermost, holesFrom, where) : outermost, where);
-}
-
-/** The outermost holes that all have a window, as many as there are outermost; the outermost of all where none have. */
-function nearEnough(outermost: StandoffHold, holesFrom: (first: number) => StandoffHold, where: Place): StandoffHold {
-  for (let first = 1; first < tries; first++) {
-    const hold = holesFrom(first);
-    if (hold.holes.length < outermost.holes.length) break;
-    if (hold.holes.every((hole) => hasWindow(hold, hole, where))) return hold;
-  }
-  return outermost;
+  // Pieces of one layer are bound to one fixed hole: coming nearer its own middle helps a single one only.
+  const allHaveWindow = (points: readonly Point[]): boolean => {
+    const hold = holdWith(points);
+    return regions.length > 1 || hold.holes.every((hole) => hasWindow(hold, hole, where));
+  };
+  const constraints = { edge, apart, level: [] };
+  return fitDiameters(holdWith(regions.flatMap((region) => cornerHoles(region, constraints, allHaveWindow))), where);
 }
 
 function hasWindow(hold: StandoffHold, hole: Hole, { document, place }: Place): boolean {
@@ -87,28 +78,4 @@ function passing({ studDiameter, capDiameter, barrelDiameter }: CapStud) {
 
 function isPoint(place: { x: number | null; y: number | null }): place is Point {
   return place.x !== null && place.y !== null;
-}
-
-/** `first` is the place to begin at on the way from a corner to the middle, from 1. */
-function corners(region: Region, { edge, apart, first }: { edge: number; apart: number; first: number }): Point[] {
-  const box = boxOfRegion(region);
-  if (!box) return [];
-  const middle = boxCentre(box);
-  const found: Point[] = [];
-  for (const [dx, dy] of [
-    [-1, -1],
-    [1, -1],
-    [-1, 1],
-    [1, 1],
-  ] as const) {
-    const corner = { x: middle.x + (dx * box.width) / 2, y: middle.y + (dy * box.height) / 2 };
-    for (let step = first; step <= tries; step++) {
-      const part = step / tries;
-      const point = { x: corner.x + (middle.x - corner.x) * part, y: corner.y + (middle.y - corner.y) * part };
-      if (!regionContains(region, point) || distanceToRegionEdgeMm(region, point) < edge) continue;
-      if (found.every((other) => Math.hypot(other.x - point.x, other.y - point.y) >= apart)) found.push(point);
-      break;
-    }
-  }
-  return found;
 }
