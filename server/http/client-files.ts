@@ -6,11 +6,11 @@ import type { Environment } from "../env.ts";
 const loopbackNames = new Set(["localhost", "127.0.0.1", "[::1]"]);
 
 /**
- * The geometry kernel's glue makes functions from text when it loads. That is allowed inside its own worker alone, which has no
- * page, no cookies to read and nothing to fetch but its code; pages stay under the strict policy.
+ * The geometry kernel's glue makes functions from text when it loads. That is allowed inside its own workers alone, which have no
+ * page, no cookies to read and nothing to fetch but their code; pages stay under the strict policy.
  */
 function allowKernel(response: ServerResponse, path: string): void {
-  if (!/[\\/]engine\.worker-[\w-]+\.js$/.test(path)) return;
+  if (!/[\\/](?:engine|examples)\.worker-[\w-]+\.js$/.test(path)) return;
   response.setHeader(
     "Content-Security-Policy",
     "default-src 'none'; script-src 'self' 'wasm-unsafe-eval' 'unsafe-eval'; connect-src 'self'",

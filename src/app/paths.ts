@@ -21,6 +21,9 @@ export const paths = {
   team: (shop: string) => `/shop/${shop}/team`,
   shop: (shop: string) => `/shop/${shop}/shop`,
   outgoingMail: (shop: string) => `/shop/${shop}/outgoing-mail`,
+  /** All calculations, or one of them by its id. */
+  howWeWorkItOut: (shop: string, calculation?: string) =>
+    `/shop/${shop}/how-we-work-it-out${calculation === undefined ? "" : `#${calculation}`}`,
 } as const;
 
 /** Sign-in that leads back to where the reader was going. */

@@ -79,6 +79,10 @@ export const router = createBrowserRouter([
                 lazy: page(() => import("./pages/outgoing-mail-page.tsx"), "OutgoingMailPage"),
               },
               {
+                path: paths.howWeWorkItOut(":shop"),
+                lazy: page(() => import("./pages/how-we-work-it-out-page.tsx"), "HowWeWorkItOutPage"),
+              },
+              {
                 path: "jobs/:jobId/compare",
                 lazy: page(() => import("./pages/compare-page.tsx"), "ComparePage"),
               },

@@ -78,6 +78,11 @@ export function ShopHeader({
             </MenuItem>
           ))}
           <MenuRule />
+          {reader.side === "shop" && (
+            <MenuItem onSelect={() => void navigate(paths.howWeWorkItOut(reader.shop.slug))}>
+              How we work it out
+            </MenuItem>
+          )}
           <MenuItem onSelect={() => void navigate(paths.account())}>Account</MenuItem>
           {hasOtherPlaces && (
             <MenuItem onSelect={() => void navigate(paths.home(), { state: { choose: true } })}>Other places</MenuItem>

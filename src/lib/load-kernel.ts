@@ -7,7 +7,7 @@ let loading: Promise<Kernel> | undefined;
 
 /**
  * The geometry kernel in the browser, fetched once; a failed fetch is tried again at the next call. Its glue makes functions
- * from text, which the pages' content policy forbids: load it in the engine's worker only.
+ * from text, which the pages' content policy forbids: load it in the workers that the server lets do so only.
  */
 export function loadKernel(): Promise<Kernel> {
   loading ??= createClipper({ locateFile: () => wasmUrl })

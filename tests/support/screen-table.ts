@@ -136,6 +136,39 @@ export const screens: readonly Screen[] = [
       await page.getByRole("link", { name: "Open the link" }).waitFor();
     },
   },
+  {
+    who: "owner",
+    name: "how-we-work-it-out",
+    at: "howWeWorkItOut",
+    path: () => paths.howWeWorkItOut(shop),
+    ready: (page) => page.getByRole("row", { name: "At the thinnest 2.3 mm" }),
+  },
+  {
+    who: "owner",
+    name: "how-we-work-it-out-one",
+    at: "howWeWorkItOut",
+    path: () => paths.howWeWorkItOut(shop, "hole-window"),
+    ready: (page) => page.getByRole("article", { name: /Hole window$/ }).getByRole("row", { name: "From 6.5 mm" }),
+    only: "desk",
+  },
+  {
+    who: "owner",
+    name: "how-we-work-it-out-nothing-found",
+    at: "howWeWorkItOut",
+    path: () => paths.howWeWorkItOut(shop),
+    ready: heading("How we work it out"),
+    open: async (page) => {
+      await page.getByLabel("Find a calculation").fill("zzzz");
+      await page.getByText("No calculation has").waitFor();
+    },
+  },
+  {
+    who: "client",
+    name: "how-we-work-it-out-not-theirs",
+    at: "howWeWorkItOut",
+    path: () => paths.howWeWorkItOut(shop),
+    ready: heading(/not/i),
+  },
   { who: "owner", name: "account", at: "account", path: paths.account, ready: text("Where you are signed in") },
   { who: "owner", name: "nowhere", at: "bench", path: () => `/shop/${shop}/nothing`, ready: heading(/./) },
 

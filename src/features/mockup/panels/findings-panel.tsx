@@ -1,6 +1,9 @@
 import type { Finding, Severity } from "#shared/dry-fit/finding.ts";
+import { paths } from "@/app/paths.ts";
+import { TextLink } from "@/components/ui/text-link.tsx";
 import { cx } from "@/lib/cx.ts";
 import { counted } from "@/lib/format.ts";
+import { useShop } from "@/lib/shop-context.ts";
 import type { DryFit } from "../engine/picture-messages.ts";
 import { WordButton } from "./cell-controls.tsx";
 
@@ -21,6 +24,7 @@ type FindingsPanelProps = {
 
 /** What the dry fit found, worst first, each with the way to the spot. */
 export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPanelProps) {
+  const { slug } = useShop();
   return (
     <section
       aria-label="Dry fit"
@@ -77,6 +81,11 @@ export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPane
           );
         })}
       </ul>
+      <p className="pt-3 text-sm">
+        <TextLink to={paths.howWeWorkItOut(slug)} target="_blank">
+          How we work it out<span className="sr-only">, in a new tab</span>
+        </TextLink>
+      </p>
     </section>
   );
 }
