@@ -80,7 +80,7 @@ export const pieceCalculations: CalculationGroup = {
         const region = ell(kernel);
         const centroid = present(regionCentroid(region));
         return worked(
-          [["An L of 10 × 10 less 5 × 5", "", "mm"]],
+          [["An L", "10 × 10 less 5 × 5", "mm"]],
           [
             ["Area", regionAreaMm2(region), "mm²"],
             ["Edge", regionPerimeterMm(region), "mm"],

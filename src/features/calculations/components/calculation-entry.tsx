@@ -1,7 +1,7 @@
 import type { Calculation, WorkedExample } from "#shared/calculations/calculation.ts";
 import { cx } from "@/lib/cx.ts";
 import { ExampleTable, type ShownOutcome } from "./example-table.tsx";
-import { StatusMark } from "./source-status.tsx";
+import { StatusMark, saysOnly } from "./source-status.tsx";
 
 type CalculationEntryProps = {
   readonly number: string;
@@ -35,7 +35,7 @@ export function CalculationEntry({ number, calculation, outcome, isMeant }: Calc
           <dt className="text-graphite">Source</dt>
           <dd className="max-w-prose text-ink">
             <StatusMark status={source.status} />
-            <span className="block">{source.text}</span>
+            {!saysOnly(source.text, source.status) && <span className="block">{source.text}</span>}
           </dd>
           <dt className="text-graphite">Limits</dt>
           <dd className="max-w-prose text-ink">{limits}</dd>

@@ -3,12 +3,14 @@ import type { CalculationGroup, SourceStatus } from "#shared/calculations/calcul
 import { Button } from "@/components/ui/button.tsx";
 import { EmptyState } from "@/components/ui/empty-state.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
+import { TextLink } from "@/components/ui/text-link.tsx";
 import { counted } from "@/lib/format.ts";
 import type { ExamplesState } from "../engine/use-worked-examples.ts";
 import { findCalculations, type NumberedGroup, numbered } from "../model/find-calculations.ts";
 import { CalculationEntry } from "./calculation-entry.tsx";
-import { CalculationIndex, groupAnchor } from "./calculation-index.tsx";
+import { CalculationIndex, groupAnchor, indexAnchor } from "./calculation-index.tsx";
 import type { ShownOutcome } from "./example-table.tsx";
+import { SheetBlock } from "./sheet-block.tsx";
 import { StatusKey } from "./source-status.tsx";
 import { useShownAnchor } from "./use-shown-anchor.ts";
 
@@ -21,7 +23,7 @@ type CalculationSheetProps = {
 /** Every calculation as a reference sheet: what the marks mean, an index, and the entries by group. */
 export function CalculationSheet({ groups, state, onComputeAgain }: CalculationSheetProps) {
   const [query, setQuery] = useState("");
-  const meant = useShownAnchor();
+  const meant = useShownAnchor(state.step);
   const all = numbered(groups);
   const found = findCalculations(all, query);
   return (
@@ -84,14 +86,19 @@ export function CalculationSheet({ groups, state, onComputeAgain }: CalculationS
       <div aria-busy={state.step === "computing"}>
         {found.map(({ number, title, entries }) => (
           <section key={number} aria-labelledby={groupAnchor(number)} className="mt-12">
-            <h2
-              id={groupAnchor(number)}
-              tabIndex={-1}
-              className="flex scroll-mt-4 gap-3 border-b-2 border-ink pb-2 font-serif text-xl font-bold text-ink"
-            >
-              <span className="tabular-nums text-graphite">{number}</span>
-              {title}
-            </h2>
+            <div className="flex items-end justify-between gap-4 border-b-2 border-ink pb-2">
+              <h2
+                id={groupAnchor(number)}
+                tabIndex={-1}
+                className="flex scroll-mt-4 gap-3 font-serif text-xl font-bold text-ink"
+              >
+                <span className="tabular-nums text-graphite">{number}</span>
+                {title}
+              </h2>
+              <TextLink to={{ hash: indexAnchor }} className="py-1 text-sm">
+                Index
+              </TextLink>
+            </div>
             {entries.map(({ number: place, calculation }) => (
               <CalculationEntry
                 key={calculation.id}
@@ -104,6 +111,7 @@ export function CalculationSheet({ groups, state, onComputeAgain }: CalculationS
           </section>
         ))}
       </div>
+      <SheetBlock total={countOf(all)} state={state} />
     </>
   );
 }

@@ -43,7 +43,7 @@ export function ExampleTable({ of, outcome }: { readonly of: string; readonly ou
           <Row key={quantity.name} quantity={quantity} />
         ))}
       </tbody>
-      <tbody className="border-t border-ink">
+      <tbody>
         {gives.map((quantity) => (
           <Row key={quantity.name} quantity={quantity} isResult />
         ))}
@@ -61,7 +61,7 @@ function Row({
 }) {
   const ink = isResult ? "font-semibold text-ink" : "text-graphite";
   return (
-    <tr className="border-b border-rule align-baseline">
+    <tr className={cx("border-b border-rule align-baseline", !isResult && "last:border-ink")}>
       <th scope="row" className={cx("py-1 pr-3 font-sans", isResult ? ink : "font-normal text-graphite")}>
         {name}
       </th>

@@ -12,7 +12,7 @@ const looks: Readonly<Record<SourceStatus, Look>> = {
     mark: "M2.5 2.5h7l4 4v7h-11zM9.5 2.5v4h4M5 9h6M5 11.5h6",
   },
   calculated: {
-    word: "Arithmetic",
+    word: "Calculated",
     meaning: "follows from geometry, counting or statics alone",
     text: "text-indigo",
     mark: "M2 14L14 2v12zM10.5 14v-3.5H14",
@@ -37,7 +37,10 @@ const looks: Readonly<Record<SourceStatus, Look>> = {
   },
 };
 
-export const statuses = Object.keys(looks).filter((key): key is SourceStatus => key in looks);
+const statuses = Object.keys(looks).filter((key): key is SourceStatus => key in looks);
+
+/** Whether a source's text says no more than its status. */
+export const saysOnly = (text: string, status: SourceStatus): boolean => text === looks[status].word;
 
 /** How sure a rule is, in a word with its mark. */
 export function StatusMark({ status }: { readonly status: SourceStatus }) {

@@ -1,18 +1,29 @@
-import { useEffect } from "react";
+import { useEffect, useEffectEvent } from "react";
 import { useLocation } from "react-router-dom";
+import type { ExamplesState } from "../engine/use-worked-examples.ts";
 
 /**
  * Brings the part that the address names into view and gives it the focus, also when the page came later than the
- * address or the same link is pressed again. Gives back the part's id, or null.
+ * address or the same link is pressed again. Examples that come in above push it away: then it is brought back, unless
+ * the reader has gone on. Gives back the part's id, or "" for none.
  */
-export function useShownAnchor(): string | null {
-  const { hash, key } = useLocation();
-  const id = hash === "" ? null : decodeURIComponent(hash.slice(1));
-  // The key changes when the same place is asked for again.
+export function useShownAnchor(step: ExamplesState["step"]): string {
+  const location = useLocation();
+  const id = idOf(location);
+  const bringBack = useEffectEvent(() => {
+    const part = document.getElementById(id);
+    if (part === document.activeElement) part?.scrollIntoView();
+  });
+
   useEffect(() => {
-    const part = id === null || key === "" ? null : document.getElementById(id);
+    const part = document.getElementById(idOf(location));
     part?.scrollIntoView();
     part?.focus({ preventScroll: true });
-  }, [id, key]);
+  }, [location]);
+  useEffect(() => {
+    if (step === "computed") bringBack();
+  }, [step]);
   return id;
 }
+
+const idOf = ({ hash }: { readonly hash: string }): string => hash.slice(1);

@@ -39,6 +39,6 @@ it("no calculation has the id of another part of the page", () => {
   expect(new Set(ids).size).toBe(ids.length);
   for (const id of ids) {
     expect(id).toMatch(/^[a-z][a-z0-9-]*$/);
-    expect(id).not.toMatch(/^(content|sources|find-calculation|group-\d+)$/);
+    expect(id).not.toMatch(/^(content|index|sources|find-calculation|group-\d+)$/);
   }
 });
