@@ -79,8 +79,8 @@ describe("the canvas", () => {
     await page.mouse.move(x + 90, y - 30, { steps: 5 });
     await page.mouse.up();
     await page.keyboard.up("Alt");
-    const across = page.getByLabel("x of Plate", { exact: true });
-    const down = page.getByLabel("y of Plate", { exact: true });
+    const across = page.getByLabel("x of Sun", { exact: true });
+    const down = page.getByLabel("y of Sun", { exact: true });
     await vi.waitFor(async () => expect(Number(await across.inputValue())).toBeCloseTo(300 + 90 / pxPerMm, 0));
     expect(Number(await down.inputValue())).toBeCloseTo(200 - 30 / pxPerMm, 0);
     expect(await page.getByRole("region", { name: "Pieces of D", exact: true }).isVisible()).toBe(true);
@@ -98,7 +98,7 @@ describe("the canvas", () => {
     await page.mouse.move(x + 70, y + 40, { steps: 5 });
     await page.keyboard.press("Escape");
     await page.mouse.up();
-    await holds(page.getByLabel("x of Plate", { exact: true }), "300");
+    await holds(page.getByLabel("x of Sun", { exact: true }), "300");
     expect(await desk.undo().isDisabled()).toBe(true);
   });
 });
