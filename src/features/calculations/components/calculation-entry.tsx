@@ -21,7 +21,7 @@ export function CalculationEntry({ number, calculation, outcome, isMeant }: Calc
       aria-labelledby={`${id}-title`}
       className={cx(
         "scroll-mt-4 grid gap-x-10 gap-y-4 border-b border-rule py-5 lg:grid-cols-[3rem_minmax(0,1fr)_22rem]",
-        isMeant && "bg-indigo/8 outline-8 outline-indigo/8",
+        isMeant && "-mx-3 bg-indigo/8 px-3",
       )}
     >
       <p className="hidden font-serif text-base tabular-nums text-graphite lg:block">{number}</p>
@@ -44,7 +44,9 @@ export function CalculationEntry({ number, calculation, outcome, isMeant }: Calc
         </dl>
       </div>
       <div className="min-w-0">
-        <p className="pb-1 text-fine font-semibold text-graphite">Worked example, computed now</p>
+        <p className="pb-1 text-fine font-semibold text-graphite">
+          {typeof outcome === "object" ? "Worked example, computed now" : "Worked example"}
+        </p>
         <ExampleTable of={title} outcome={outcome} />
       </div>
     </article>
