@@ -16,8 +16,8 @@ function withDatabase(name: string, timeout: number, groupOrder: number): TestPr
       globalSetup: "tests/support/global-setup.ts",
       testTimeout: timeout,
       hookTimeout: Math.max(timeout, 60 * seconds),
-      // Browser tests bring a server and a browser each: one file at a time, after all others.
-      ...(groupOrder === 0 ? {} : { maxWorkers: 1 }),
+      // Browser tests bring a server and a browser each and come after all others; the long ones run alone.
+      ...(groupOrder === 0 ? {} : { maxWorkers: name === "e2e" ? 3 : 1 }),
       sequence: { groupOrder },
     },
   };
@@ -29,7 +29,8 @@ export default defineConfig({
   build: { outDir: "dist/client", sourcemap: true, target: "es2022", chunkSizeWarningLimit: 700 },
   server: { proxy: { "/api": appUrl, "/auth": appUrl } },
   test: {
-    maxWorkers: 2,
+    // More than there are cores: most of the time a test waits for the database, a browser or a thread.
+    maxWorkers: 4,
     projects: [
       {
         extends: true,
