@@ -17,7 +17,7 @@ function withDatabase(name: string, timeout: number, groupOrder: number): TestPr
       testTimeout: timeout,
       hookTimeout: Math.max(timeout, 60 * seconds),
       // Browser tests bring a server and a browser each and come after all others; the long ones run alone.
-      ...(groupOrder === 0 ? {} : { maxWorkers: name === "e2e" ? 3 : 1 }),
+      ...(groupOrder === 0 ? {} : { maxWorkers: name === "e2e" ? 2 : 1 }),
       sequence: { groupOrder },
     },
   };

@@ -103,6 +103,13 @@ export function listenToCanvas(canvas: Canvas, host: GestureHost): () => void {
     if (host.zoom(factor, { x: viewportPoint.x, y: viewportPoint.y })) e.preventDefault();
   }
 
+  /** Lets go at once: a move still on its way must not take hold again. */
+  function handleKey(event: KeyboardEvent) {
+    if (event.key !== "Escape" || hold === null) return;
+    event.stopPropagation();
+    letGo();
+  }
+
   function handleCancel() {
     fingers.clear();
     pan = null;
@@ -116,8 +123,11 @@ export function listenToCanvas(canvas: Canvas, host: GestureHost): () => void {
     canvas.on("mouse:wheel", handleWheel),
   ];
   canvas.upperCanvasEl.addEventListener("pointercancel", handleCancel);
+  // Before anyone else hears of it, wherever the focus is.
+  window.addEventListener("keydown", handleKey, true);
   return () => {
     for (const off of offs) off();
     canvas.upperCanvasEl.removeEventListener("pointercancel", handleCancel);
+    window.removeEventListener("keydown", handleKey, true);
   };
 }
