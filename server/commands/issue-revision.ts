@@ -1,4 +1,3 @@
-import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { canIssue } from "#shared/lifecycle/job-states.ts";
 import { letterToIssue } from "#shared/lifecycle/revision-row.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
@@ -18,6 +17,7 @@ import { presentMockup } from "../presenters/mockup.ts";
 import { artworkHashes } from "../queries/artwork-hashes.ts";
 import { dryFitContext } from "../queries/dry-fit-context.ts";
 import { findJob } from "../queries/find-job.ts";
+import { limitsOf } from "../queries/find-limits.ts";
 import { findMockup } from "../queries/find-mockup.ts";
 import { notesToFreeze } from "../queries/list-notes.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
@@ -106,8 +106,8 @@ async function freeze(
     document,
     notes: await notesToFreeze(context, job.id),
     words: job.brief.words,
-    limits: defaultLimits,
-    dryFit: await dryFitContext(context, { shop, place: job.brief.place ?? "inside" }),
+    limits: await limitsOf(context, shop.id),
+    dryFit: await dryFitContext(context, { shop, brief: job.brief }),
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
     fontHashes: fontHashes(),

@@ -16,6 +16,7 @@ import { Revision } from "./revision.ts";
 import { ShareLink } from "./share-link.ts";
 import { ShareLinkPiece } from "./share-link-piece.ts";
 import { Shop } from "./shop.ts";
+import { ShopLimits } from "./shop-limits.ts";
 import { StoredFile } from "./stored-file.ts";
 
 declare module "./membership.ts" {
@@ -61,6 +62,11 @@ declare module "./artwork.ts" {
 }
 declare module "./mockup.ts" {
   interface Mockup {
+    saver?: NonAttribute<Person>;
+  }
+}
+declare module "./shop-limits.ts" {
+  interface ShopLimits {
     saver?: NonAttribute<Person>;
   }
 }
@@ -117,6 +123,7 @@ export function associate(): void {
   Artwork.belongsTo(StoredFile, { as: "file", foreignKey: "fileId" });
   Artwork.belongsTo(Person, { as: "adder", foreignKey: "addedBy" });
   Mockup.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
+  ShopLimits.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   Revision.belongsTo(Job, { as: "job", foreignKey: "jobId" });
   Revision.belongsTo(StoredFile, { as: "pdf", foreignKey: "pdfFileId" });
   Revision.belongsTo(Person, { as: "issuer", foreignKey: "issuedBy" });

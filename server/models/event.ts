@@ -19,6 +19,7 @@ export type EventFacts = {
   "member removed": { name: string };
   "role changed": { name: string; from: string; to: string };
   "shop changed": { fields: string[] };
+  "limits changed": { changes: { limit: string; from: number; to: number }[] };
   "client added": { name: string };
   "client changed": { name: string };
   "contact added": { name: string; email: string };

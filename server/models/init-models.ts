@@ -21,12 +21,14 @@ import { initSession } from "./session.ts";
 import { initShareLink } from "./share-link.ts";
 import { initShareLinkPiece } from "./share-link-piece.ts";
 import { initShop } from "./shop.ts";
+import { initShopLimits } from "./shop-limits.ts";
 import { initStockItem } from "./stock-item.ts";
 import { initStoredFile } from "./stored-file.ts";
 
 /** Binds every model to a connection. Models are singletons of the process: one database a process. */
 export function initModels(sequelize: Sequelize): void {
   initShop(sequelize);
+  initShopLimits(sequelize);
   initPerson(sequelize);
   initMembership(sequelize);
   initInvitation(sequelize);

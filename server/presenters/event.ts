@@ -1,5 +1,7 @@
 import type { z } from "zod";
 import type { eventSchema } from "#shared/contracts/jobs.ts";
+import { describeLimit, limitKeys } from "#shared/dry-fit/limit-descriptions.ts";
+import { formatLimit } from "#shared/dry-fit/limit-units.ts";
 import type { Event, EventFacts, EventKind } from "../models/event.ts";
 
 /** What happened, in words. One line a kind, so that none is forgotten. */
@@ -11,6 +13,7 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "member removed": ({ name }) => `Removed ${name} from the team`,
   "role changed": ({ name, from, to }) => `Changed ${name} from ${from} to ${to}`,
   "shop changed": ({ fields }) => `Changed the shop's ${fields.join(", ")}`,
+  "limits changed": ({ changes }) => `Changed limits of the dry fit: ${changes.map(limitChange).join("; ")}`,
   "client added": ({ name }) => `Added the client ${name}`,
   "client changed": ({ name }) => `Changed the client ${name}`,
   "contact added": ({ name, email }) => `Added the contact ${name}, ${email}`,
@@ -47,6 +50,14 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "mail refused": ({ kind, to, reason }) => `Mail to ${to} was refused (${kind}): ${reason}`,
   "signed in": ({ by }) => `Signed in by ${by}`,
 };
+
+/** A limit that there is no more keeps the name it was stored under. */
+function limitChange({ limit, from, to }: EventFacts["limits changed"]["changes"][number]): string {
+  const key = limitKeys.find((known) => known === limit);
+  if (key === undefined) return `${limit} from ${from} to ${to}`;
+  const { label, unit } = describeLimit(key);
+  return `${label} from ${formatLimit(from, unit, "mm")} to ${formatLimit(to, unit, "mm")}`;
+}
 
 export function eventText<K extends EventKind>(kind: K, data: EventFacts[K]): string {
   return words[kind](data);

@@ -3,6 +3,7 @@ import { registerAccountRoutes } from "./account.ts";
 import { registerArtworkRoutes } from "./artworks.ts";
 import { registerClientRoutes } from "./clients.ts";
 import { registerJobRoutes } from "./jobs.ts";
+import { registerLimitRoutes } from "./limits.ts";
 import { registerLinkRoutes } from "./links.ts";
 import { registerMockupRoutes } from "./mockups.ts";
 import { registerNoteRoutes } from "./notes.ts";
@@ -20,6 +21,7 @@ export function registerRoutes(routes: Routes): void {
   registerAccountRoutes(routes);
   registerLinkRoutes(routes);
   registerShopRoutes(routes);
+  registerLimitRoutes(routes);
   registerTeamRoutes(routes);
   registerClientRoutes(routes);
   registerOutgoingMailRoutes(routes);

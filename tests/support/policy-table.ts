@@ -3,6 +3,7 @@ import * as artworks from "#shared/contracts/artworks.ts";
 import * as clients from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
+import * as limits from "#shared/contracts/limits.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
@@ -11,6 +12,7 @@ import * as revisions from "#shared/contracts/revisions.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import type { PolicyWorld } from "./policy-world.ts";
 
 /** Who asks, in the order of the table's columns. */
@@ -103,6 +105,12 @@ export const policyTable: readonly PolicyRow[] = [
     body: { role: "maker" },
   })),
   row(shop.removeMember, owners, (world) => ({ params: { ...world.params, memberId: world.spareMemberId } })),
+
+  row(limits.getLimits, staff, inShop),
+  row(limits.changeLimits, "y n n - - - - - o", (world) => ({
+    ...inShop(world),
+    body: { version: 0, limits: defaultLimits },
+  })),
 
   row(clients.listClients, staff, inShop),
   row(clients.getClient, staff, (world) => ({ params: { ...world.params, clientId: world.clientId } })),
