@@ -2,7 +2,7 @@ import type { Transaction } from "sequelize";
 import {
   standardAcrylics,
   standardAdhesives,
-  standardStandoffs,
+  standardHardware,
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
 import { newId } from "../db/new-id.ts";
@@ -36,7 +36,7 @@ export async function loadStandardStock({
         name: wood.name,
         properties: { wood, thicknessesMm },
       })),
-      ...standardStandoffs.map((hardware) => ({
+      ...standardHardware.map((hardware) => ({
         ...base(),
         kind: "hardware" as const,
         name: hardware.name,

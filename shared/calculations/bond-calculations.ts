@@ -54,7 +54,7 @@ export const bondCalculations: CalculationGroup = {
         const bond = {
           longest: 300,
           one: { perK: defaultLimits.expansionPerK, perPoint: 0 },
-          other: { perK: 0, perPoint: defaultLimits.softwoodPerPoint },
+          other: { perK: 0, perPoint: 0.00267 },
           temperatureK: defaultLimits.temperatureInsideK,
           moisturePoints: defaultLimits.moisturePoints,
         };

@@ -95,7 +95,7 @@ export const holeCalculations: CalculationGroup = {
         const conditions = {
           expansionPerK: defaultLimits.expansionPerK,
           temperatureK: defaultLimits.temperatureInsideK,
-          woodPerPoint: defaultLimits.softwoodPerPoint,
+          woodPerPoint: 0.00267,
           moisturePoints: defaultLimits.moisturePoints,
           grainTurn: 0,
         };

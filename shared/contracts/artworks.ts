@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { pathSchema } from "../mockup/document.ts";
+import { pathSchema } from "../mockup/schema-parts.ts";
 import { inShop, instant, lengthMm, noContent, nothing, pageOf, pageQuery, sha256 } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 

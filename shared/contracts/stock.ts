@@ -1,5 +1,6 @@
 import { z } from "zod";
-import { acrylicSchema, adhesiveSchema, capStudSchema, woodSchema } from "../mockup/document.ts";
+import { hardwareSchema } from "../mockup/hardware-schemas.ts";
+import { acrylicSchema, adhesiveSchema, woodSchema } from "../mockup/stock-schemas.ts";
 import { inShop, nothing, pageOf, pageQuery } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -10,7 +11,7 @@ export const stockItemSchema = z.discriminatedUnion("kind", [
   z.strictObject({
     ...base,
     kind: z.literal("hardware"),
-    hardware: capStudSchema,
+    hardware: hardwareSchema,
     /** Null until somebody has counted. */ quantity: z.number().int().nullable(),
   }),
   z.strictObject({ ...base, kind: z.literal("adhesive"), adhesive: adhesiveSchema }),

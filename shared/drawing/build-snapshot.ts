@@ -1,6 +1,7 @@
 import type { Limits } from "../dry-fit/limits.ts";
 import type { DryFitContext } from "../dry-fit/rule.ts";
 import { runDryFit } from "../dry-fit/run-dry-fit.ts";
+import { type FrozenSetAside, matchSetAsides, openFindings, setAsidesInForce } from "../dry-fit/set-aside.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import { engineVersion, type FrozenNote, type Snapshot, type TitleBlock } from "../mockup/snapshot.ts";
@@ -18,6 +19,7 @@ export function buildSnapshot({
   words,
   limits,
   dryFit,
+  setAsides,
   paper,
   artworkHashes,
   fontHashes,
@@ -29,6 +31,8 @@ export function buildSnapshot({
   words: string;
   limits: Limits;
   dryFit: DryFitContext;
+  /** All of the job; those that are bound to what is found are frozen. */
+  setAsides: readonly FrozenSetAside[];
   paper: Paper;
   artworkHashes: Readonly<Record<string, string>>;
   fontHashes: Readonly<Record<string, string>>;
@@ -37,7 +41,19 @@ export function buildSnapshot({
   const { unit } = titleBlock;
   const figures = computeFigures(document, kernel);
   const findings = runDryFit({ document, figures, limits, context: dryFit, kernel });
-  const sheets = drawSheets({ titleBlock, document, figures, findings, notes, words, unit, paper, kernel });
+  const standings = matchSetAsides(findings, setAsides);
+  // What the shop has set aside is the shop's affair: the sheets, which go to the client, are drawn without it.
+  const sheets = drawSheets({
+    titleBlock,
+    document,
+    figures,
+    findings: openFindings(standings),
+    notes,
+    words,
+    unit,
+    paper,
+    kernel,
+  });
   const paperScale = sheets[0] ? paperScaleOfSheet(sheets[0]) : 1;
   const view = { document, figures, kernel, unit, paperScale };
   return {
@@ -46,6 +62,7 @@ export function buildSnapshot({
     document,
     figures,
     findings,
+    setAside: setAsidesInForce(standings),
     notes,
     words,
     drawing: {

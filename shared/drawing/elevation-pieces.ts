@@ -5,11 +5,11 @@ import type { Kernel } from "../geometry/kernel.ts";
 import type { Box, Path, Region } from "../geometry/path.ts";
 import { pathOfRegion } from "../geometry/path-of-region.ts";
 import { placePath } from "../geometry/placement.ts";
-import { circlePath, rectanglePath } from "../geometry/shapes.ts";
+import { circlePath } from "../geometry/shapes.ts";
 import type { Acrylic, Layer, MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
 import type { Item } from "./display-list.ts";
-import { discRegion, drawCap, type PlacedStandoff } from "./hardware.ts";
+import { type Cylinder, discRegion, drawFront, type PlacedStandoff } from "./hardware.ts";
 import { mixColours } from "./palette.ts";
 import { shadowItem } from "./shadow.ts";
 import type { Caster } from "./shadow-sweep.ts";
@@ -89,24 +89,16 @@ function pieceSolids(document: MockupDocument, figures: Figures, lineMm: number)
 }
 
 function standoffSolids(standoff: PlacedStandoff, light: { azimuth: number }, lineMm: number): Solid[] {
-  const { layerKey, hardware, hole, foot, panelBack, panelFace, capTop } = standoff;
-  const barrel = {
+  const { layerKey, hole, barrel, front } = standoff;
+  const solid = ({ diameter, from, to }: Cylinder, items: readonly Item[]): Solid => ({
     layerKey,
-    items: [],
-    region: discRegion(hole, hardware.barrelDiameter),
-    bottom: foot,
-    top: panelBack,
+    items,
+    region: discRegion(hole, diameter),
+    bottom: from,
+    top: to,
     castsShadow: true,
-  };
-  const cap = {
-    layerKey,
-    items: drawCap(standoff, light, lineMm),
-    region: discRegion(hole, hardware.capDiameter),
-    bottom: panelFace,
-    top: capTop,
-    castsShadow: true,
-  };
-  return [barrel, cap];
+  });
+  return [solid(barrel, []), ...(front ? [solid(front, drawFront(standoff, light, lineMm))] : [])];
 }
 
 /** Heights that differ by less than this are one level. */
@@ -149,7 +141,10 @@ export type SignInput = {
  * All that stands before the backer, lowest first, each level followed by the shadow that falls on it. The backer's own picture and shadow
  * come from `board`. Everything is in the board's own mm.
  */
-export function drawSolids(input: SignInput, board: { readonly box: Box; readonly items: readonly Item[] }): Item[] {
+export function drawSolids(
+  input: SignInput,
+  board: { readonly box: Box; readonly outline: Path; readonly items: readonly Item[] },
+): Item[] {
   const { document, figures, kernel, standoffs, lineMm } = input;
   const { light } = document.presentation;
   const solids = [
@@ -166,7 +161,7 @@ export function drawSolids(input: SignInput, board: { readonly box: Box; readonl
     });
     return shadow ? [{ kind: "clip", clip, items: [shadow] }] : [];
   };
-  const items: Item[] = [...board.items, ...shadowOn(figures.backerTop.nominal, rectanglePath(board.box), [board.box])];
+  const items: Item[] = [...board.items, ...shadowOn(figures.backerTop.nominal, board.outline, [board.box])];
   for (const level of levelsOf(solids)) {
     items.push(...groupedByLayer(level));
     const regions = level.filter((solid) => solid.items.length > 0).map(({ region }) => region);
@@ -180,20 +175,18 @@ export function drawSolids(input: SignInput, board: { readonly box: Box; readonl
 const wallStrength = 0.26;
 
 /** The board's own shadow on the wall behind it; nothing when it lies flat against the wall and throws none. */
-export function drawWallShadow({ document, figures, standoffs }: SignInput, board: Box, wall: Box): Item[] {
+export function drawWallShadow({ document, figures, standoffs }: SignInput, board: Path, wall: Box): Item[] {
   const { light } = document.presentation;
   const level = -document.hanging.gap;
   const pieces = figures.pieces.filter(({ layerKey }) =>
     document.layers.some(({ key, hidden }) => key === layerKey && !hidden),
   );
   const casters: Caster[] = [
-    { region: flattenPath(rectanglePath(board)), bottom: 0, top: figures.backerTop.nominal },
+    { region: flattenPath(board), bottom: 0, top: figures.backerTop.nominal },
     ...pieces.map(({ region, bottom, top }) => ({ region, bottom: bottom.nominal, top: top.nominal })),
-    ...standoffs.map((standoff) => ({
-      region: discRegion(standoff.hole, standoff.hardware.capDiameter),
-      bottom: standoff.panelFace,
-      top: standoff.capTop,
-    })),
+    ...standoffs.flatMap(({ hole, front }) =>
+      front ? [{ region: discRegion(hole, front.diameter), bottom: front.from, top: front.to }] : [],
+    ),
   ];
   const shadow = shadowItem({ light, level, receivers: [wall], casters, strength: wallStrength });
   return shadow ? [shadow] : [];

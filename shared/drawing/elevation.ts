@@ -1,7 +1,8 @@
 import type { Kernel } from "../geometry/kernel.ts";
-import type { Box, Point } from "../geometry/path.ts";
+import type { Box, Path, Point } from "../geometry/path.ts";
 import { rectanglePath } from "../geometry/shapes.ts";
 import type { MockupDocument } from "../mockup/document.ts";
+import { boardPath } from "../stack/board-outline.ts";
 import type { Figures } from "../stack/figures.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { outlineMm, type PaperScale } from "./dimensions.ts";
@@ -48,11 +49,12 @@ export function boardOriginOf(list: DisplayList): Point | null {
   return plane?.kind === "group" ? { x: plane.x, y: plane.y } : null;
 }
 
-function drawBoard({ document, texture, paperScale }: ElevationInput, box: Box): Item[] {
-  const outline = rectanglePath(box);
+function drawBoard({ document, texture, paperScale }: ElevationInput, box: Box, outline: Path): Item[] {
   const { colour, name } = document.backer.stock;
   const seed = [...name].reduce((sum, character) => (sum * 31 + (character.codePointAt(0) ?? 0)) % 9973, 17);
-  const face: Item = texture ? { kind: "image", box, pngBase64: texture.pngBase64 } : woodGrain(box, colour, seed);
+  const face: Item = texture
+    ? { kind: "image", box, pngBase64: texture.pngBase64 }
+    : woodGrain(box, colour, seed, document.backer.grainTurn);
   return [
     { kind: "path", id: "board", path: outline, fill: colour },
     { kind: "clip", clip: outline, items: [face] },
@@ -73,6 +75,7 @@ export function drawElevation(input: ElevationInput): DisplayList {
   const { document, figures, kernel, dimensions, paperScale, wall } = input;
   const { width, height } = document.board;
   const box = { x: 0, y: 0, width, height };
+  const outline = boardPath(document.board);
   const bare = bareMarginMm(input);
   const margins = dimensions ? dimensionMargins(input) : { left: bare, top: bare, right: bare, bottom: bare };
   const widthMm = margins.left + width + margins.right;
@@ -88,12 +91,12 @@ export function drawElevation(input: ElevationInput): DisplayList {
   const ground: Item[] = wall
     ? [
         { kind: "path", path: rectanglePath(wallBox), fill: document.presentation.wall },
-        ...drawWallShadow(sign, box, wallBox),
+        ...drawWallShadow(sign, outline, wallBox),
       ]
     : [];
   const items = [
     ...ground,
-    ...drawSolids(sign, { box, items: drawBoard(input, box) }),
+    ...drawSolids(sign, { box, outline, items: drawBoard(input, box, outline) }),
     ...(dimensions
       ? drawElevationDimensions({ ...input, ground: wall ? document.presentation.wall : sheetWhite })
       : []),

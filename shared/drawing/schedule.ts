@@ -1,4 +1,5 @@
 import type { Hold, Layer, MockupDocument } from "../mockup/document.ts";
+import { finishWords } from "../mockup/finish-words.ts";
 import type { Figures } from "../stack/figures.ts";
 import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
@@ -29,7 +30,7 @@ function supportOf(layer: Layer, figures: Figures): string {
 function heldBy(hold: Hold, support: string, unit: LengthUnit): string {
   switch (hold.kind) {
     case "bond":
-      return `bond on ${support}, ${hold.adhesive.name}`;
+      return `bond on ${support}, ${hold.tack ? `${hold.tack.name}, then ` : ""}${hold.adhesive.name}`;
     case "pocket":
       return `pocket ${formatLength(hold.depth, unit)} deep in ${support}, ${hold.adhesive.name}`;
     case "standoff": {
@@ -44,6 +45,7 @@ const hangings: Readonly<Record<MockupDocument["hanging"]["kind"], string>> = {
   keyholes: "keyholes",
   wire: "wire",
   "screwed through": "screwed through",
+  "through standoffs": "through its standoffs",
   none: "not chosen",
 };
 
@@ -52,7 +54,7 @@ export function scheduleRows(document: MockupDocument, figures: Figures, unit: L
   const { backer, hanging } = document;
   const first: ScheduleRow = {
     key: "A",
-    what: `Backer, ${backer.finish === "" ? "bare" : backer.finish}`,
+    what: `Backer, ${finishWords(backer.finish)}`,
     stock: backer.stock.name,
     thickness: formatLength(backer.thickness, unit),
     heldBy: hangings[hanging.kind],

@@ -5,7 +5,7 @@ import type { Figures } from "../stack/figures.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { fineLineMm, outlineMm, type PaperScale } from "./dimensions.ts";
 import type { Item } from "./display-list.ts";
-import type { PlacedStandoff } from "./hardware.ts";
+import type { Cylinder, PlacedStandoff } from "./hardware.ts";
 import { graphite, ink, mixColours } from "./palette.ts";
 
 export type SectionInput = {
@@ -99,19 +99,19 @@ export function drawStandoffs(
   const heights = new Set<string>();
   const barrels: Item[] = [];
   const caps: Item[] = [];
-  for (const { hole, layerKey, hardware, foot, panelBack, panelFace, capTop } of standoffs) {
+  for (const { hole, layerKey, hardware, barrel, front } of standoffs) {
     const name = `${layerKey} ${hole.y.toFixed(1)}`;
     if (heights.has(name)) continue;
     heights.add(name);
-    const metal = (from: number, to: number, diameter: number): Item => ({
+    const metal = ({ diameter, from, to }: Cylinder): Item => ({
       kind: "path",
       id: `hole:${hole.id}`,
       path: rectanglePath(box(from * depthScale, hole.y - diameter / 2, (to - from) * depthScale, diameter)),
       fill: mixColours(hardware.finish, "#FFFFFF", 0.25),
       stroke: { colour: ink, widthMm: fineLineMm * paperScale },
     });
-    if (panelBack > foot) barrels.push(metal(foot, panelBack, hardware.barrelDiameter));
-    caps.push(metal(panelFace, capTop, hardware.capDiameter));
+    if (barrel.to > barrel.from) barrels.push(metal(barrel));
+    if (front) caps.push(metal(front));
   }
   return { barrels, caps };
 }

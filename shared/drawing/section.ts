@@ -33,10 +33,11 @@ export function drawSection(input: SectionInput): DisplayList {
     { from: 0, to: figures.backerTop.nominal, thing: 0 },
     ...standoffs
       .filter(
-        ({ foot, panelBack }, index) =>
-          panelBack > foot && standoffs.findIndex((other) => other.layerKey === standoffs[index]?.layerKey) === index,
+        ({ barrel }, index) =>
+          barrel.to > barrel.from &&
+          standoffs.findIndex((other) => other.layerKey === standoffs[index]?.layerKey) === index,
       )
-      .map(({ foot, panelBack }) => ({ from: foot, to: panelBack, thing: 0 })),
+      .map(({ barrel }) => ({ from: barrel.from, to: barrel.to, thing: 0 })),
   ];
   const below = [
     ...(document.hanging.gap > 0 ? [{ from: -document.hanging.gap, to: 0, thing: height + mm(4) }] : []),

@@ -51,18 +51,19 @@ type GrainImage = Extract<Item, { kind: "image" }>;
 let last: { readonly name: string; readonly image: GrainImage } | null = null;
 
 /**
- * Grain for a board as an image: pale, the wood's own colour in the middle, grain along the longer side. Pixels are longer along the
+ * Grain for a board as an image: pale, the wood's own colour in the middle, grain along x, or along y from 45 to 135 degrees. Pixels are longer along the
  * grain, where nothing changes fast. Same box, colour and seed, same bytes.
  */
-export function woodGrain(box: Box, colour: Colour, seed: number): GrainImage {
-  const name = [box.x, box.y, box.width, box.height, colour, seed].join(" ");
-  const image = last?.name === name ? last.image : makeGrain(box, colour, seed);
+export function woodGrain(box: Box, colour: Colour, seed: number, grainTurn: number): GrainImage {
+  const name = [box.x, box.y, box.width, box.height, colour, seed, grainTurn].join(" ");
+  const image = last?.name === name ? last.image : makeGrain(box, colour, seed, grainTurn);
   last = { name, image };
   return image;
 }
 
-function makeGrain(box: Box, colour: Colour, seed: number): GrainImage {
-  const upright = box.height > box.width;
+function makeGrain(box: Box, colour: Colour, seed: number, grainTurn: number): GrainImage {
+  // A plain board is sawn along its grain; what lies aslant is drawn the nearer way.
+  const upright = grainTurn > 45 && grainTurn < 135;
   const along = upright ? box.height : box.width;
   const across = upright ? box.width : box.height;
   const acrossMm = Math.max(0.6, Math.sqrt((along * across) / (4 * mostCells)));

@@ -19,13 +19,7 @@ export const limitsSchema = z.strictObject({
   expansionPerK: z.number().finite().min(0).max(0.001).default(7e-5),
   temperatureInsideK: z.number().finite().min(0).max(100).default(20),
   temperatureOutsideK: z.number().finite().min(0).max(100).default(40),
-  /**
-   * Movement of the backer across the grain per point of moisture: the most of the usual softwoods (Douglas-fir,
-   * 0.00267) and hardwoods (red oak, 0.00369), flatsawn (Wood Handbook, GTR-282, table 13-5). The span of 4 points is
-   * our choice.
-   */
-  softwoodPerPoint: z.number().finite().min(0).max(0.01).default(0.00267),
-  hardwoodPerPoint: z.number().finite().min(0).max(0.01).default(0.00369),
+  /** Movement of the backer: how far its moisture goes either way. Our choice. */
   moisturePoints: z.number().finite().min(0).max(20).default(4),
   /** Rule 7: from a hole's centre to the nearest edge in hole diameters, and the web in sheet thicknesses. */
   edgeDiameters: z.number().finite().min(0).max(10).default(2),

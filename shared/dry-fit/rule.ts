@@ -1,9 +1,11 @@
 import type { Kernel } from "../geometry/kernel.ts";
-import type { Acrylic, CapStud, MockupDocument } from "../mockup/document.ts";
+import type { Stock } from "../materials/stock.ts";
+import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { Finding } from "./finding.ts";
 import type { Limits } from "./limits.ts";
+import type { Mend } from "./mend.ts";
 
 /**
  * What a dry fit knows besides the sign: how lengths are written, where it will hang, and what the shop can offer
@@ -12,10 +14,14 @@ import type { Limits } from "./limits.ts";
 export type DryFitContext = {
   readonly unit: LengthUnit;
   readonly place: "inside" | "outside";
-  /** Acrylics on hand, for a nearer colour. */
-  readonly acrylics: readonly Acrylic[];
-  /** Standoffs on hand, for the nearest barrel. */
-  readonly barrels: readonly CapStud[];
+  /** What the brief says of the place: people walk past it, stand under it, or it has electrical parts. */
+  readonly walkway: boolean;
+  readonly overhead: boolean;
+  readonly electrical: boolean;
+  /** The words as they shall read, a line a line; empty when the brief states none. */
+  readonly words: string;
+  /** What the shop has on hand. */
+  readonly stock: Stock;
 };
 
 export type RuleInput = {
@@ -31,6 +37,8 @@ export type Rule = {
   readonly number: number;
   readonly title: string;
   readonly check: (input: RuleInput) => Finding[];
+  /** Changes of the document that mend a finding of this rule, best first; none when only the maker can decide. */
+  readonly mends?: (finding: Finding, input: RuleInput) => Mend[];
 };
 
 /** A finding of `rule` with what it does not state left out. */

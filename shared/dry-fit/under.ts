@@ -25,9 +25,7 @@ export function supportOf(input: Input, level: number, { box, bottom }: PieceFig
   );
   // The kernel's own rings run outlines one way and holes the other, so joining them by turns keeps a hole open only
   // where nothing else lies.
-  const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal)
-    ? kernel.union(boardRegion(document.board), "evenodd")
-    : [];
+  const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal) ? boardRegion(document.board, kernel) : [];
   return kernel.union([...board, ...pieces.flatMap((piece) => piece.region)], "nonzero");
 }
 
@@ -41,7 +39,7 @@ export function topUnderDisc(
   const tops = piecesBelow(input, level)
     .filter((piece) => areasTouch(foot, piece, input.kernel))
     .map((piece) => piece.top.nominal);
-  if (areasTouch(foot, spreadOf(boardRegion(input.document.board)), input.kernel)) {
+  if (areasTouch(foot, spreadOf(boardRegion(input.document.board, input.kernel)), input.kernel)) {
     tops.push(input.figures.backerTop.nominal);
   }
   return tops.length > 0 ? Math.max(...tops) : null;

@@ -1,10 +1,13 @@
-import { standardAcrylics, standardStandoffs } from "../materials/standard-stock.ts";
+import { standardStock } from "../materials/standard-stock.ts";
 import type { DryFitContext } from "./rule.ts";
 
 /** A shop that works in mm, inside, with the standard stock. */
 export const usualContext: DryFitContext = {
   unit: "mm",
   place: "inside",
-  acrylics: standardAcrylics.map(({ acrylic }) => acrylic),
-  barrels: standardStandoffs,
+  walkway: false,
+  overhead: false,
+  electrical: false,
+  words: "",
+  stock: standardStock,
 };

@@ -1,4 +1,6 @@
-import type { Acrylic, Adhesive, CapStud, Wood } from "../mockup/document.ts";
+import type { Acrylic, Adhesive, CapStud, Hardware, Screw, Wood } from "../mockup/document.ts";
+import type { AcrylicStock, Stock, WoodStock } from "./stock.ts";
+import { woodMovementOf } from "./wood-movement.ts";
 import { flatHeadMm, woodScrewDiameterMm } from "./wood-screws.ts";
 
 /**
@@ -6,10 +8,6 @@ import { flatHeadMm, woodScrewDiameterMm } from "./wood-screws.ts";
  * 1190 kg/m³ (ASTM D792); gravities of wood from the Wood Handbook, GTR-282, tables 5-3 (at 12 % moisture, on oven-dry
  * mass).
  */
-
-export type AcrylicStock = { readonly acrylic: Acrylic; readonly thicknessesMm: readonly number[] };
-export type WoodStock = { readonly wood: Wood; readonly thicknessesMm: readonly number[] };
-export type Screw = CapStud["screw"];
 
 const acrylicDensityKgM3 = 1190;
 
@@ -30,7 +28,7 @@ function acrylic(
     facesDiffer,
     densityKgM3: acrylicDensityKgM3,
   };
-  return { acrylic: stock, thicknessesMm };
+  return { acrylic: stock, thicknessesMm, sheets: [] };
 }
 
 const usual = [3, 4.5, 6] as const;
@@ -59,26 +57,40 @@ export const standardAcrylics: readonly AcrylicStock[] = [
   acrylic("Mirror, silver", "#C9CED2", [3], { look: "mirror", process: "extruded", facesDiffer: true }),
 ];
 
+/** Flatsawn, as most boards are sold. The species is the one whose movement the Wood Handbook lists. */
 function wood(
   name: string,
   colour: string,
+  species: string,
   gravity: number,
   hardness: Wood["hardness"],
   thicknessesMm: readonly number[],
 ): WoodStock {
   // 8 % is what furniture wood settles at in heated rooms (Wood Handbook, GTR-282, chapter 13).
-  return { wood: { kind: "wood", stockId: null, name, colour, gravity, moisturePercent: 8, hardness }, thicknessesMm };
+  const movement = woodMovementOf(species);
+  if (!movement) throw new Error(`No movement is known for ${species}.`);
+  const stock: Wood = {
+    kind: "wood",
+    stockId: null,
+    name,
+    colour,
+    gravity,
+    moisturePercent: 8,
+    hardness,
+    movementPerPoint: movement.tangential,
+  };
+  return { wood: stock, thicknessesMm };
 }
 
 export const standardWoods: readonly WoodStock[] = [
-  wood("Eastern white pine", "#E6CFA4", 0.35, "softwood", [12, 18, 25]),
-  wood("Ponderosa pine", "#E2C697", 0.4, "softwood", [18, 25]),
-  wood("Black walnut", "#6B4A33", 0.55, "hardwood", [12, 18, 25]),
-  wood("Hard maple", "#E3CFAE", 0.63, "hardwood", [12, 18, 25]),
-  wood("Black cherry", "#A8683F", 0.5, "hardwood", [18, 25]),
-  wood("Red oak", "#C49A6C", 0.63, "hardwood", [18, 25]),
-  wood("White ash", "#D8C3A0", 0.6, "hardwood", [18, 25]),
-  wood("Basswood", "#E5D5B5", 0.37, "hardwood", [12, 18]),
+  wood("Eastern white pine", "#E6CFA4", "eastern white pine", 0.35, "softwood", [12, 18, 25]),
+  wood("Ponderosa pine", "#E2C697", "ponderosa pine", 0.4, "softwood", [18, 25]),
+  wood("Black walnut", "#6B4A33", "black walnut", 0.55, "hardwood", [12, 18, 25]),
+  wood("Hard maple", "#E3CFAE", "sugar (hard) maple", 0.63, "hardwood", [12, 18, 25]),
+  wood("Black cherry", "#A8683F", "black cherry", 0.5, "hardwood", [18, 25]),
+  wood("Red oak", "#C49A6C", "red oak, commercial", 0.63, "hardwood", [18, 25]),
+  wood("White ash", "#D8C3A0", "white ash", 0.6, "hardwood", [18, 25]),
+  wood("Basswood", "#E5D5B5", "American basswood", 0.37, "hardwood", [12, 18]),
 ];
 
 function screw(gauge: number, length: number): Screw {
@@ -86,6 +98,8 @@ function screw(gauge: number, length: number): Screw {
   if (!head) throw new Error(`No head is known for a No. ${gauge} screw.`);
   return {
     name: `No. ${gauge} × ${length}, flat head`,
+    gauge,
+    head: "flat",
     diameter: woodScrewDiameterMm(gauge),
     length,
     headDiameter: head.diameter,
@@ -93,7 +107,7 @@ function screw(gauge: number, length: number): Screw {
   };
 }
 
-export const standardScrews: readonly Screw[] = [12, 16, 19, 25].map((length) => screw(6, length));
+export const standardScrews: readonly Screw[] = [12, 16, 19, 25, 32, 38, 45].map((length) => screw(6, length));
 
 /** The floor is thick enough for a No. 6 head to be countersunk flush in it. */
 const floorThickness = 2.5;
@@ -139,6 +153,56 @@ export const standardStandoffs: readonly CapStud[] = [
   capStud(stout, 25, 18),
 ];
 
+const through = (barrelLength: number, length: number): Hardware => ({
+  kind: "throughScrew",
+  stockId: null,
+  name: `Spacer 12 × ${barrelLength}, capped screw`,
+  finish: "#C3C1BA",
+  barrelDiameter: 12,
+  barrelLength,
+  boreDiameter: 4.5,
+  washerThickness: 0.5,
+  cap: { diameter: 14, thickness: 4 },
+  screw: screw(6, length),
+});
+
+const blind = (barrelLength: number, studLength: number): Hardware => ({
+  kind: "blindStud",
+  stockId: null,
+  name: `Hidden stud 10 × ${barrelLength}`,
+  finish: "#C3C1BA",
+  barrelDiameter: 10,
+  barrelLength,
+  studDiameter: 4,
+  studLength,
+});
+
+const edge = (barrelLength: number, slotWidth: number): Hardware => ({
+  kind: "edgeGrip",
+  stockId: null,
+  name: `Edge grip 16 × ${barrelLength}`,
+  finish: "#C3C1BA",
+  barrelDiameter: 16,
+  barrelLength,
+  floorThickness,
+  floorHole: 4,
+  countersunk: true,
+  slotWidth,
+  gripDepth: 5,
+  height: barrelLength + slotWidth + 3,
+  screw: screw(6, 16),
+});
+
+export const standardHardware: readonly Hardware[] = [
+  ...standardStandoffs,
+  through(12, 38),
+  through(19, 45),
+  blind(6, 20),
+  blind(12, 26),
+  edge(12, 6.8),
+  edge(19, 6.8),
+];
+
 export const standardAdhesives: readonly Adhesive[] = [
   { stockId: null, name: "Wicking cement", family: "solvent cement" },
   { stockId: null, name: "Bodied cement", family: "bodied cement" },
@@ -148,3 +212,12 @@ export const standardAdhesives: readonly Adhesive[] = [
   { stockId: null, name: "High-bond tape", family: "high-bond tape" },
   { stockId: null, name: "Wood glue", family: "wood glue" },
 ];
+
+/** All of it, uncounted. */
+export const standardStock: Stock = {
+  acrylics: standardAcrylics,
+  woods: standardWoods,
+  hardware: standardHardware.map((hardware) => ({ hardware, quantity: null })),
+  screws: standardScrews,
+  adhesives: standardAdhesives,
+};

@@ -2,6 +2,7 @@ import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { type Change, sameThing, type Wording } from "./change.ts";
 import type { MockupDocument } from "./document.ts";
+import { finishWords } from "./finish-words.ts";
 import { listHoleChanges } from "./hole-changes.ts";
 import { listLayerChanges } from "./layer-changes.ts";
 import { listPieceChanges } from "./piece-changes.ts";
@@ -40,7 +41,10 @@ function listSignChanges(before: MockupDocument, after: MockupDocument, { unit }
   if (before.board.width !== after.board.width || before.board.height !== after.board.height) {
     say("board", `Board ${size(before)} becomes ${size(after)}`);
   }
-  if (before.board.outline !== after.board.outline || before.board.measures !== after.board.measures) {
+  if (!sameThing(before.board.outline, after.board.outline)) {
+    say("board", `Outline of the board: ${before.board.outline.kind} becomes ${after.board.outline.kind}`);
+  }
+  if (before.board.measures !== after.board.measures) {
     say("board", `The board's measures mean ${after.board.measures}, not ${before.board.measures}`);
   }
   const [was, is] = [before.backer, after.backer];
@@ -48,15 +52,21 @@ function listSignChanges(before: MockupDocument, after: MockupDocument, { unit }
   if (was.thickness !== is.thickness) {
     say("backer", `Backer ${length(was.thickness)} thick becomes ${length(is.thickness)}`);
   }
-  if (was.finish !== is.finish) {
-    say("backer", `Finish of the backer: ${was.finish || "none"} becomes ${is.finish || "none"}`);
-  }
+  if (was.grainTurn !== is.grainTurn) say("backer", `Grain turned ${was.grainTurn}° becomes ${is.grainTurn}°`);
+  const [wasFinish, isFinish] = [finishWords(was.finish), finishWords(is.finish)];
+  if (wasFinish !== isFinish) say("backer", `Finish of the backer: ${wasFinish} becomes ${isFinish}`);
+  else if (!sameThing(was.finish, is.finish)) say("backer", `Finish of the backer: ${isFinish}, other details`);
   if (before.hanging.kind !== after.hanging.kind) {
     say("hanging", `Hanging: ${before.hanging.kind} becomes ${after.hanging.kind}`);
   }
   if (before.hanging.gap !== after.hanging.gap) {
     say("hanging", `Gap to the wall ${length(before.hanging.gap)} becomes ${length(after.hanging.gap)}`);
   }
+  if (before.hanging.pose !== after.hanging.pose) {
+    say("hanging", `The sign is ${before.hanging.pose}, then ${after.hanging.pose}`);
+  }
+  if (before.hanging.carriesKg !== after.hanging.carriesKg) say("hanging", "Other load stated for the wall's fixing");
+  if (!sameThing(before.hanging.points, after.hanging.points)) say("hanging", "The wall's fixings are set otherwise");
   if (before.quantity !== after.quantity) say("quantity", `Quantity ${before.quantity} becomes ${after.quantity}`);
   if (before.presentation.wall !== after.presentation.wall) {
     say("presentation", `Wall shown ${before.presentation.wall} becomes ${after.presentation.wall}`);

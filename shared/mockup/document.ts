@@ -1,28 +1,19 @@
 import { z } from "zod";
+import { type capStudSchema, hardwareSchema } from "./hardware-schemas.ts";
+import { colour, coordinate, id, length, name, pathSchema, point } from "./schema-parts.ts";
+import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema } from "./stock-schemas.ts";
 
 /**
  * The mockup document: what a maker edits, a revision freezes and every figure is computed from.
  * Lengths mm, angles degrees, x right and y down from the board's upper left corner, z from the back of the board to the viewer.
  * A changed meaning gets a new version and a step in upgrade.ts; old documents are never rewritten in place.
  */
-export const documentVersion = 1;
+export const documentVersion = 2;
 
-/** Largest sign, piece or offset we take. Beyond it figures mean nothing and the canvas can't show them. */
-const longestMm = 10_000;
-const length = z.number().finite().positive().max(longestMm);
-const coordinate = z.number().finite().min(-longestMm).max(longestMm);
+/** Nothing smaller is a board: figures and shadows of one have no meaning. */
+const leastBoardMm = 20;
+const boardSide = length.min(leastBoardMm, `A board is at least ${leastBoardMm} mm wide and high.`);
 const key = z.string().regex(/^[A-Z]{1,2}$/, "A layer's key is one or two capital letters.");
-const id = z.string().min(1).max(64);
-const name = z.string().trim().min(1).max(120);
-const colour = z.string().regex(/^#[0-9A-F]{6}$/, "A colour is # and six hexadecimal digits in capitals.");
-
-const point = z.strictObject({ x: coordinate, y: coordinate });
-const segment = z.discriminatedUnion("kind", [
-  z.strictObject({ kind: z.literal("line"), to: point }),
-  z.strictObject({ kind: z.literal("cubic"), c1: point, c2: point, to: point }),
-]);
-const ring = z.strictObject({ start: point, segments: z.array(segment).min(1).max(100_000) });
-export const pathSchema = z.array(ring).max(10_000);
 
 export const placementSchema = z.strictObject({
   x: coordinate,
@@ -32,77 +23,31 @@ export const placementSchema = z.strictObject({
   mirrored: z.boolean(),
 });
 
-/** Sheet acrylic as it was when it was chosen: a later change of the stock list does not change a drawing. */
-export const acrylicSchema = z.strictObject({
-  kind: z.literal("acrylic"),
-  stockId: z.uuid().nullable(),
-  name,
-  colour,
-  look: z.enum(["opaque", "frosted", "clear", "mirror"]),
-  process: z.enum(["cast", "extruded"]),
-  facesDiffer: z.boolean(),
-  densityKgM3: z.number().finite().positive().max(25_000),
-});
-
-export const woodSchema = z.strictObject({
-  kind: z.literal("wood"),
-  stockId: z.uuid().nullable(),
-  name,
-  colour,
-  /** Specific gravity at 12 % moisture on oven-dry mass, as the Wood Handbook lists it. */
-  gravity: z.number().finite().positive().max(1.5),
-  moisturePercent: z.number().finite().min(0).max(30),
-  hardness: z.enum(["softwood", "hardwood"]),
-});
-
-export const adhesiveSchema = z.strictObject({
-  stockId: z.uuid().nullable(),
-  name,
-  family: z.enum([
-    "solvent cement",
-    "bodied cement",
-    "cyanoacrylate",
-    "epoxy",
-    "neutral silicone",
-    "high-bond tape",
-    "wood glue",
-  ]),
-});
-
-export const capStudSchema = z.strictObject({
-  kind: z.literal("capStud"),
-  stockId: z.uuid().nullable(),
-  name,
-  finish: colour,
-  barrelDiameter: length,
-  /** Bore depth plus floor thickness: the height the panel's back stands above the wood. */
-  barrelLength: length,
-  boreDiameter: length,
-  boreDepth: length,
-  floorThickness: length,
-  floorHole: length,
-  countersunk: z.boolean(),
-  studDiameter: length,
-  studLength: length,
-  capDiameter: length,
-  capThickness: length,
-  screw: z.strictObject({ name, diameter: length, length, headDiameter: length, headHeight: length }),
-});
-
-/** A hole in the pieces of a standoff layer. One hole of a layer is the fixed one, the others have play. */
+/**
+ * Place of a standoff. Where its kind passes the panel a hole of that diameter is drilled there; else the diameter says
+ * nothing. One hole of a layer is the fixed one, the others have play.
+ */
 export const holeSchema = z.strictObject({ id, x: coordinate, y: coordinate, diameter: length, fixed: z.boolean() });
 
 export const holdSchema = z.discriminatedUnion("kind", [
-  z.strictObject({ kind: z.literal("bond"), adhesive: adhesiveSchema }),
+  z.strictObject({
+    kind: z.literal("bond"),
+    adhesive: adhesiveSchema,
+    /** What holds the place first, where the joint is made in two steps. */
+    tack: adhesiveSchema.nullable(),
+  }),
   z.strictObject({
     kind: z.literal("pocket"),
     depth: length,
     clearance: z.number().finite().min(0).max(5),
     adhesive: adhesiveSchema,
+    cut: z.enum(["routed", "engraved"]),
+    /** Of the round bit that cuts it; 0 for a beam or a square corner. */
+    bitRadius: z.number().finite().min(0).max(25),
   }),
   z.strictObject({
     kind: z.literal("standoff"),
-    hardware: capStudSchema,
+    hardware: hardwareSchema,
     offset: z.number().finite().min(0).max(1000),
     holes: z.array(holeSchema).max(1000),
   }),
@@ -118,6 +63,8 @@ export const pieceSchema = z.strictObject({
   /** In the piece's own plane, about its own origin: the centre of its box when it was brought in. */
   path: pathSchema,
   placement: placementSchema,
+  /** What it reads as, a letter or a word; empty for what is no lettering. */
+  reads: z.string().trim().max(120),
 });
 
 export const locateSchema = z.enum(["pocket", "scored line", "template", "hole pattern", "none"]);
@@ -129,29 +76,46 @@ export const layerSchema = z.strictObject({
   thickness: length.max(100),
   hold: holdSchema,
   locate: locateSchema,
+  /** On which face the film is marked, so that no piece is laid face down. */
+  marked: z.enum(["front", "back", "not stated"]),
   pieces: z.array(pieceSchema).max(2000),
   hidden: z.boolean(),
+});
+
+export const boardSchema = z.strictObject({
+  /** Within width and height. A path is in mm on the board, its box the board's. */
+  outline: z.discriminatedUnion("kind", [
+    z.strictObject({ kind: z.literal("rectangle") }),
+    z.strictObject({ kind: z.literal("rounded"), radius: length }),
+    z.strictObject({ kind: z.literal("ellipse") }),
+    z.strictObject({ kind: z.literal("path"), path: pathSchema.min(1) }),
+  ]),
+  width: boardSide,
+  height: boardSide,
+  measures: z.enum(["body", "overall"]),
 });
 
 export const documentSchema = z
   .strictObject({
     version: z.literal(documentVersion),
-    board: z.strictObject({
-      outline: z.literal("rectangle"),
-      width: length,
-      height: length,
-      measures: z.enum(["body", "overall"]),
-    }),
+    board: boardSchema,
     hanging: z.strictObject({
-      kind: z.enum(["cleat", "keyholes", "wire", "screwed through", "none"]),
+      kind: z.enum(["cleat", "keyholes", "wire", "screwed through", "through standoffs", "none"]),
       gap: z.number().finite().min(0).max(500),
+      pose: z.enum(["upright", "tilted", "lying"]),
+      /** What the shop states that the wall's fixing carries, kg; null until it does. */
+      carriesKg: z.number().finite().positive().max(10_000).nullable(),
+      /** Where the wall's fixings are, on the board. */
+      points: z.array(point).max(50),
     }),
     quantity: z.int().min(1).max(1000),
     backer: z.strictObject({
       kind: z.literal("plain"),
       stock: woodSchema,
       thickness: length.max(200),
-      finish: z.string().trim().max(200),
+      /** The way the grain runs, degrees clockwise from the x axis. */
+      grainTurn: z.number().finite().min(0).max(180),
+      finish: z.array(coatSchema).max(12),
     }),
     /** From the wall outward. Key A is the backer's, layers start at B. */
     layers: z.array(layerSchema).max(60),
@@ -193,7 +157,11 @@ export type Layer = z.infer<typeof layerSchema>;
 export type Piece = z.infer<typeof pieceSchema>;
 export type Hold = z.infer<typeof holdSchema>;
 export type Hole = z.infer<typeof holeSchema>;
+export type Board = z.infer<typeof boardSchema>;
+export type Hardware = z.infer<typeof hardwareSchema>;
 export type CapStud = z.infer<typeof capStudSchema>;
+export type Screw = z.infer<typeof screwSchema>;
+export type Coat = z.infer<typeof coatSchema>;
 export type Acrylic = z.infer<typeof acrylicSchema>;
 export type Wood = z.infer<typeof woodSchema>;
 export type Adhesive = z.infer<typeof adhesiveSchema>;

@@ -16,14 +16,14 @@ export function emptyDocument(options: {
   return {
     version: documentVersion,
     board: {
-      outline: "rectangle",
+      outline: { kind: "rectangle" },
       width: options.widthMm ?? 600,
       height: options.heightMm ?? 400,
       measures: "overall",
     },
-    hanging: { kind: "none", gap: 0 },
+    hanging: { kind: "none", gap: 0, pose: "upright", carriesKg: null, points: [] },
     quantity: options.quantity ?? 1,
-    backer: { kind: "plain", stock: options.backer, thickness: options.thicknessMm ?? 18, finish: "" },
+    backer: { kind: "plain", stock: options.backer, thickness: options.thicknessMm ?? 18, grainTurn: 0, finish: [] },
     layers: [],
     presentation: {
       wall: options.wall ?? "#EFE9DC",

@@ -40,7 +40,7 @@ export function holdWords(hold: Hold, { unit }: Wording): string {
   const length = (mm: number) => formatLengthWithUnit(mm, unit);
   switch (hold.kind) {
     case "bond":
-      return `bonded with ${hold.adhesive.name}`;
+      return `bonded with ${hold.tack ? `${hold.tack.name}, then ` : ""}${hold.adhesive.name}`;
     case "pocket":
       return `let in ${length(hold.depth)} deep with ${hold.adhesive.name}`;
     case "standoff":
@@ -64,6 +64,7 @@ function changesOfLayer(was: Layer, is: Layer, wording: Wording): Change[] {
     say("thickness", `thickness ${length(was.thickness)} becomes ${length(is.thickness)}`);
   changes.push(...changesOfHold(was.hold, is, wording));
   if (was.locate !== is.locate) say("hold", `place found by ${locateWords(was)} becomes ${locateWords(is)}`);
+  if (was.marked !== is.marked) say("layer", `film marked on the ${was.marked} becomes on the ${is.marked}`);
   if (was.hidden !== is.hidden) say("layer", is.hidden ? "hidden in the mockup" : "shown in the mockup again");
   return changes;
 }

@@ -1,10 +1,11 @@
 import type { DisplayList, DrawingSheet } from "../drawing/display-list.ts";
 import type { Finding } from "../dry-fit/finding.ts";
+import type { FrozenSetAside } from "../dry-fit/set-aside.ts";
 import type { Figures } from "../stack/figures.ts";
 import type { MockupDocument } from "./document.ts";
 
 /** Changes when the engine computes or draws anything differently, so that a frozen drawing says what made it. */
-export const engineVersion = "1";
+export const engineVersion = "2";
 
 /** What the sheet's lettering says beside the picture. Fields after ISO 7200. */
 export type TitleBlock = {
@@ -38,6 +39,11 @@ export type Snapshot = {
   readonly document: MockupDocument;
   readonly figures: Figures;
   readonly findings: readonly Finding[];
+  /**
+   * Which of them the shop had set aside, and why. Missing in what was frozen before there were any. It never leaves the
+   * shop: what goes to a client says nothing of it.
+   */
+  readonly setAside?: readonly FrozenSetAside[];
   readonly notes: readonly FrozenNote[];
   /** Words as they shall read, from the brief. */
   readonly words: string;

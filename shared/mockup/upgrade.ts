@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import { documentSchema, documentVersion, type MockupDocument } from "./document.ts";
+import { upgradeFrom1 } from "./upgrade-from-1.ts";
 
 export type ReadOutcome =
   | { readonly ok: true; readonly document: MockupDocument }
@@ -8,8 +9,8 @@ export type ReadOutcome =
 /** Turns a document of one version into the next one, as plain JSON: what an old version held has no type any more. */
 export type UpgradeStep = (old: Readonly<Record<string, unknown>>) => Record<string, unknown>;
 
-/** By the version a step starts from. Version 1 is the first, so there is none yet. */
-const steps: Readonly<Record<number, UpgradeStep>> = {};
+/** By the version a step starts from. */
+const steps: Readonly<Record<number, UpgradeStep>> = { 1: upgradeFrom1 };
 
 /**
  * A stored document in today's version. The stored text itself stays as it was. Refused with the reason when it is no

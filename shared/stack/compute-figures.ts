@@ -1,5 +1,8 @@
 import { regionAreaMm2, regionCentroid, regionPerimeterMm } from "../geometry/area.ts";
 import type { Kernel } from "../geometry/kernel.ts";
+import { nodeCount } from "../geometry/node-count.ts";
+import { smallestBox } from "../geometry/smallest-box.ts";
+import { frontHeightMm } from "../hardware/standoff-parts.ts";
 import { sheetBand } from "../materials/sheet-tolerance.ts";
 import type { Layer, MockupDocument } from "../mockup/document.ts";
 import { type Banded, bandHighest, bandLowest, bandSum, exactly } from "../units/banded.ts";
@@ -18,7 +21,7 @@ export function computeFigures(document: MockupDocument, kernel: Kernel): Figure
   const backerTop = backerTopOf(document);
   const pieces = standing.map((one) => pieceFigures(one, masses.pieces.get(one.piece.id) ?? 0));
   const layers = document.layers.map((layer) => layerFigures(layer, pieces, backerTop));
-  const depth = bandHighest([backerTop, ...standing.map(topWithCap)]) ?? backerTop;
+  const depth = bandHighest([backerTop, ...standing.map(topWithFront)]) ?? backerTop;
   return {
     backerTop,
     backerMassG: masses.backer,
@@ -44,6 +47,8 @@ function pieceFigures(one: StandingPiece, massG: number): PieceFigures {
     centroid: regionCentroid(one.region) ?? { x, y },
     areaMm2: regionAreaMm2(one.region),
     perimeterMm: regionPerimeterMm(one.region),
+    smallestBox: smallestBox(one.region),
+    nodes: nodeCount(one.piece.path),
     restsOn: one.restsOn,
     bottom: one.bottom,
     top: one.top,
@@ -66,8 +71,10 @@ function layerFigures(layer: Layer, all: readonly PieceFigures[], backerTop: Ban
   };
 }
 
-/** The cap of a standoff stands on the face of the piece its stud passes. */
-function topWithCap({ layer, holes, top }: StandingPiece): Banded {
+/** The front of a standoff lies on the face of the piece it holds, or reaches round its edge. */
+function topWithFront({ layer, holes, base, top }: StandingPiece): Banded {
   if (layer.hold.kind !== "standoff" || holes.length === 0) return top;
-  return bandSum(top, exactly(layer.hold.hardware.capThickness));
+  const { hardware } = layer.hold;
+  const front = frontHeightMm(hardware, top.nominal - base.nominal) - (top.nominal - base.nominal);
+  return bandSum(top, exactly(front));
 }

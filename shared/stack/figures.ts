@@ -1,4 +1,5 @@
 import type { Box, Point, Region } from "../geometry/path.ts";
+import type { SmallestBox } from "../geometry/smallest-box.ts";
 import type { Banded } from "../units/banded.ts";
 
 export type { Banded };
@@ -12,6 +13,10 @@ export type PieceFigures = {
   readonly centroid: Point;
   readonly areaMm2: number;
   readonly perimeterMm: number;
+  /** The smallest box round it, turned as need be; null when it covers nothing. */
+  readonly smallestBox: SmallestBox | null;
+  /** Nodes of its outline as drawn. */
+  readonly nodes: number;
   /** What it stands on: layer keys below it, highest first; "A" is the backer; none when it stands on nothing. */
   readonly restsOn: readonly string[];
   /** Height of its back and its face above the back of the board. */

@@ -3,6 +3,7 @@ import { boxesOverlap } from "../geometry/box.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Region } from "../geometry/path.ts";
 import { lengthsEqual } from "../geometry/tolerance.ts";
+import { passesPanel } from "../hardware/standoff-parts.ts";
 import { sheetMassG, woodDensityKgM3 } from "../materials/density.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import { boardRegion, discsRegion } from "./piece-region.ts";
@@ -60,7 +61,9 @@ export function computeMasses(
   for (const one of standing) {
     const { thickness, stock } = one.layer;
     const drilled: Region =
-      one.holes.length > 0 ? kernel.difference(one.region, discsRegion(one.holes, kernel)) : one.region;
+      one.holes.length > 0 && one.layer.hold.kind === "standoff" && passesPanel(one.layer.hold.hardware)
+        ? kernel.difference(one.region, discsRegion(one.holes, kernel))
+        : one.region;
     const pockets = pocketVolume(
       { region: drilled, box: one.box, level: one.level, face: one.top.nominal, thickness },
       cuts,
@@ -71,11 +74,11 @@ export function computeMasses(
   }
   const { board, backer } = document;
   const face = {
-    ...spreadOf(boardRegion(board)),
+    ...spreadOf(boardRegion(board, kernel)),
     level: -1,
     face: backerTopOf(document).nominal,
     thickness: backer.thickness,
   };
-  const volume = Math.max(0, board.width * board.height * backer.thickness - pocketVolume(face, cuts, kernel));
+  const volume = Math.max(0, regionAreaMm2(face.region) * backer.thickness - pocketVolume(face, cuts, kernel));
   return { pieces, backer: sheetMassG(volume, 1, woodDensityKgM3(backer.stock.gravity, backer.stock.moisturePercent)) };
 }

@@ -2,16 +2,18 @@ import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Path, Placement, Point, Region } from "../geometry/path.ts";
 import { placePath } from "../geometry/placement.ts";
-import { circlePath, rectanglePath } from "../geometry/shapes.ts";
+import { circlePath } from "../geometry/shapes.ts";
+import type { Board } from "../mockup/document.ts";
+import { boardPath } from "./board-outline.ts";
 
 /** A piece's outline on the board, flattened to 0.02 mm, as non-crossing rings; empty when it covers nothing. */
 export function pieceRegion(piece: { readonly path: Path; readonly placement: Placement }, kernel: Kernel): Region {
   return kernel.union(flattenPath(placePath(piece.path, piece.placement)), "evenodd");
 }
 
-/** The board's face. */
-export function boardRegion(board: { readonly width: number; readonly height: number }): Region {
-  return flattenPath(rectanglePath({ x: 0, y: 0, width: board.width, height: board.height }));
+/** The board's face, flattened to 0.02 mm, as non-crossing rings. */
+export function boardRegion(board: Board, kernel: Kernel): Region {
+  return kernel.union(flattenPath(boardPath(board)), "evenodd");
 }
 
 /** Discs of one diameter each, joined. */

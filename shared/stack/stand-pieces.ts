@@ -1,13 +1,11 @@
-import { regionContains } from "../geometry/contains.ts";
+import { pocketDepthToleranceMm } from "../bonds/pocket-floor.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import { sheetBand } from "../materials/sheet-tolerance.ts";
 import type { Hold, Hole, Layer, MockupDocument, Piece } from "../mockup/document.ts";
 import { type Banded, bandHighest, bandSum, exactly } from "../units/banded.ts";
+import { holdsPiece } from "./held-piece.ts";
 import { boardRegion, discsRegion, pieceRegion } from "./piece-region.ts";
 import { areasTouch, type Spread, spreadOf } from "./touching.ts";
-
-/** How far a pocket's depth may be off, mm (common practice for routed and engraved pockets). */
-const pocketDepthTolerance = 0.2;
 
 /** A piece at its height. */
 export type StandingPiece = Spread & {
@@ -38,14 +36,13 @@ export function backerTopOf(document: MockupDocument): Banded {
  */
 export function standPieces(document: MockupDocument, kernel: Kernel): StandingPiece[] {
   const backerTop = backerTopOf(document);
-  const board = spreadOf(boardRegion(document.board));
+  const board = spreadOf(boardRegion(document.board, kernel));
   const standing: StandingPiece[] = [];
   for (const [level, layer] of document.layers.entries()) {
     const below = standing.slice();
     for (const piece of layer.pieces) {
       const region = pieceRegion(piece, kernel);
-      const holes =
-        layer.hold.kind === "standoff" ? layer.hold.holes.filter((hole) => regionContains(region, hole)) : [];
+      const holes = heldBy(layer.hold, region);
       const foot = footOf(layer.hold, holes, region, kernel);
       const under = thingsUnder(foot, below, { region: board, top: backerTop }, kernel);
       const base = bandHighest(under.map((thing) => thing.top)) ?? backerTop;
@@ -58,6 +55,10 @@ export function standPieces(document: MockupDocument, kernel: Kernel): StandingP
   return standing;
 }
 
+function heldBy(hold: Hold, region: Spread["region"]): readonly Hole[] {
+  return hold.kind === "standoff" ? hold.holes.filter((hole) => holdsPiece(hold.hardware, region, hole)) : [];
+}
+
 /** How far a hold lifts a piece over what it stands on. */
 export function rise(hold: Hold): Banded {
   switch (hold.kind) {
@@ -66,8 +67,8 @@ export function rise(hold: Hold): Banded {
     case "pocket":
       return {
         nominal: -hold.depth,
-        least: -hold.depth - pocketDepthTolerance,
-        most: -hold.depth + pocketDepthTolerance,
+        least: -hold.depth - pocketDepthToleranceMm,
+        most: -hold.depth + pocketDepthToleranceMm,
       };
     case "standoff":
       return exactly(hold.offset);

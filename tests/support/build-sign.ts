@@ -9,6 +9,7 @@ import {
 import {
   type CapStud,
   documentSchema,
+  type Hardware,
   type Hold,
   type Hole,
   type Layer,
@@ -37,6 +38,7 @@ export function buildPiece(id: string, path: Path, overrides: Partial<Piece> & {
     source: { kind: "plate" },
     path: changeable(path),
     placement: { x: at[0], y: at[1], turn: 0, scale: 1, mirrored: false },
+    reads: "",
     ...rest,
   };
 }
@@ -49,13 +51,15 @@ export const plate = (id: string, width: number, height: number, at: [number, nu
 export const disc = (id: string, radius: number, at: [number, number], rest: Partial<Piece> = {}) =>
   buildPiece(id, circlePath({ x: 0, y: 0 }, radius), { at, ...rest });
 
-export const bondHold: Hold = { kind: "bond", adhesive: first(standardAdhesives) };
+export const bondHold: Hold = { kind: "bond", adhesive: first(standardAdhesives), tack: null };
 
 export const pocketHold = (depth: number, clearance = 0): Hold => ({
   kind: "pocket",
   depth,
   clearance,
   adhesive: first(standardAdhesives),
+  cut: "engraved",
+  bitRadius: 0,
 });
 
 /** 15 mm barrels, 12 mm long, 5 mm stud, unless overridden. */
@@ -73,7 +77,7 @@ export const hole = (id: string, x: number, y: number, rest: Partial<Hole> = {})
   ...rest,
 });
 
-export const standoffHold = (holes: Hole[], hardware: CapStud = buildCapStud(), offset?: number): Hold => ({
+export const standoffHold = (holes: Hole[], hardware: Hardware = buildCapStud(), offset?: number): Hold => ({
   kind: "standoff",
   hardware,
   offset: offset ?? hardware.barrelLength,
@@ -90,6 +94,7 @@ export function buildLayer(key: string, pieces: Piece[], overrides: Partial<Laye
     hold: bondHold,
     locate: "template",
     pieces,
+    marked: "not stated",
     hidden: false,
     ...overrides,
   };

@@ -81,6 +81,7 @@ function pieceOf(id: string, name: string, path: Path, colour: string): Layer["p
       segments: [...ring.segments],
     })),
     placement,
+    reads: "",
   };
 }
 
@@ -104,16 +105,26 @@ const capStud: CapStud = {
   studLength: 12,
   capDiameter: 18,
   capThickness: 4,
-  screw: { name: "No. 6 × 16 pan head", diameter: 3.5, length: 16, headDiameter: 6.9, headHeight: 2.1 },
+  screw: {
+    name: "No. 6 × 16 pan head",
+    gauge: 6,
+    head: "pan",
+    diameter: 3.5,
+    length: 16,
+    headDiameter: 6.9,
+    headHeight: 2.1,
+  },
 };
 
 const bond: Layer["hold"] = {
   kind: "bond",
   adhesive: { stockId: null, name: "Thick cyanoacrylate", family: "cyanoacrylate" },
+  tack: null,
 };
 const cement: Layer["hold"] = {
   kind: "bond",
   adhesive: { stockId: null, name: "Bodied acrylic cement", family: "bodied cement" },
+  tack: null,
 };
 
 const middle: Point = { x: 300, y: 160 };
@@ -133,7 +144,7 @@ function layer(
   thickness: number,
   rest: Pick<Layer, "hold" | "locate" | "pieces">,
 ): Layer {
-  return { key, name, stock, thickness, hidden: false, ...rest };
+  return { key, name, stock, thickness, marked: "back", hidden: false, ...rest };
 }
 
 /** The document of "Orrery Books": a pine board of 600 by 400 mm, layers B to G. Fresh at every call. */
@@ -153,9 +164,9 @@ export function orreryBooks(): MockupDocument {
   const planet = (id: string, name: string, at: Point, radius: number, colour: string) =>
     pieceOf(id, name, circlePath(at, radius), colour);
   return documentSchema.parse({
-    version: 1,
-    board: { outline: "rectangle", width: 600, height: 400, measures: "body" },
-    hanging: { kind: "cleat", gap: 6 },
+    version: 2,
+    board: { outline: { kind: "rectangle" }, width: 600, height: 400, measures: "body" },
+    hanging: { kind: "cleat", gap: 6, pose: "upright", carriesKg: 20, points: [] },
     quantity: 1,
     backer: {
       kind: "plain",
@@ -167,9 +178,15 @@ export function orreryBooks(): MockupDocument {
         gravity: 0.35,
         moisturePercent: 9,
         hardness: "softwood",
+        movementPerPoint: 0.00212,
       },
       thickness: 20,
-      finish: "Pale wash, two coats of clear satin",
+      grainTurn: 0,
+      finish: [
+        { kind: "stain", name: "Pale wash", colour: "#F2E9D8", strength: 0.25, dryingHours: 6 },
+        { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 2 },
+        { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 12 },
+      ],
     },
     layers: [
       layer("B", "Night disc", acrylic("Midnight, gloss", navy), 4.5, {

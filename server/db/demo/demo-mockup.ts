@@ -9,7 +9,7 @@ import {
   standardStandoffs,
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
-import type { Acrylic, Adhesive, CapStud, Hold, Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
+import type { Acrylic, Adhesive, CapStud, Coat, Hold, Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { emptyDocument } from "#shared/mockup/empty-document.ts";
 
 /** What the demo's documents are put together from: the standard stock, found by name. */
@@ -22,15 +22,31 @@ export const acrylic = (name: string): Acrylic => named(standardAcrylics, name, 
 export const standoff = (name: string): CapStud => named(standardStandoffs, name, (one) => one.name);
 const adhesive = (name: string): Adhesive => named(standardAdhesives, name, (one) => one.name);
 
-export const bondToAcrylic: Hold = { kind: "bond", adhesive: adhesive("Wicking cement") };
-export const bondToWood: Hold = { kind: "bond", adhesive: adhesive("Slow epoxy") };
+export const bondToAcrylic: Hold = { kind: "bond", adhesive: adhesive("Wicking cement"), tack: null };
+export const bondToWood: Hold = { kind: "bond", adhesive: adhesive("Slow epoxy"), tack: null };
+
+const sanded: Coat = { kind: "sanding", grit: 180 };
+export const paleWash: Coat[] = [
+  sanded,
+  { kind: "stain", name: "Pale wash", colour: "#F2E9D8", strength: 0.25, dryingHours: 6 },
+  { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 2 },
+  { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 12 },
+];
+export const hardOil: Coat[] = [
+  sanded,
+  { kind: "clear coat", name: "Hard oil", base: "oil or shellac", dryingHours: 24 },
+];
+export const clearCoat: Coat[] = [
+  sanded,
+  { kind: "clear coat", name: "Clear matt", base: "water-borne", dryingHours: 12 },
+];
 
 export function board(size: {
   width: number;
   height: number;
   wood: string;
   thickness: number;
-  finish: string;
+  finish: Coat[];
 }): MockupDocument {
   const { wood } = named(standardWoods, size.wood, (one) => one.wood.name);
   const empty = emptyDocument({
@@ -39,7 +55,11 @@ export function board(size: {
     heightMm: size.height,
     thicknessMm: size.thickness,
   });
-  return { ...empty, backer: { ...empty.backer, finish: size.finish }, hanging: { kind: "cleat", gap: 12 } };
+  return {
+    ...empty,
+    backer: { ...empty.backer, finish: size.finish },
+    hanging: { ...empty.hanging, kind: "cleat", gap: 12, carriesKg: 20 },
+  };
 }
 
 type ArtworkOnBoard = {
@@ -61,6 +81,7 @@ export function piecesOfColour({ artworkId, pieces, at }: ArtworkOnBoard, colour
         source: { kind: "artwork", artworkId, index, colour },
         path: changeable(pathTransform(path, translateMatrix(-middle.x, -middle.y))),
         placement: { x: at.x + middle.x, y: at.y + middle.y, turn: 0, scale: 1, mirrored: false },
+        reads: "",
       };
     });
 }
@@ -73,6 +94,7 @@ export function disc(id: string, name: string, { x, y, radius }: { x: number; y:
     source: { kind: "plate" },
     path: changeable(circlePath({ x: 0, y: 0 }, radius)),
     placement: { x, y, turn: 0, scale: 1, mirrored: false },
+    reads: "",
   };
 }
 
@@ -88,6 +110,7 @@ export function layer(one: {
     ...one,
     stock: acrylic(one.stock),
     locate: one.hold.kind === "standoff" ? "hole pattern" : "template",
+    marked: "back",
     hidden: false,
   };
 }

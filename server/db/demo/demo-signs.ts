@@ -4,9 +4,12 @@ import {
   board,
   bondToAcrylic,
   bondToWood,
+  clearCoat,
   disc,
   fourStandoffs,
+  hardOil,
   layer,
+  paleWash,
   piecesOfColour,
   standoff,
 } from "./demo-mockup.ts";
@@ -18,7 +21,7 @@ export function orrerySign(artwork: DemoArtwork, { ringThickness }: { ringThickn
   const on = { ...artwork, at: { x: 40, y: 38 } };
   const middle = { x: 300, y: 150 };
   return {
-    ...board({ width: 600, height: 400, wood: "Eastern white pine", thickness: 18, finish: "pale wash" }),
+    ...board({ width: 600, height: 400, wood: "Eastern white pine", thickness: 18, finish: paleWash }),
     layers: [
       layer({
         key: "B",
@@ -84,7 +87,7 @@ export function orrerySign(artwork: DemoArtwork, { ringThickness }: { ringThickn
 export function oarsSign(artwork: DemoArtwork, { width }: { width: number }): MockupDocument {
   const on = { ...artwork, at: { x: (width - 420) / 2, y: 40 } };
   return {
-    ...board({ width, height: 360, wood: "Red oak", thickness: 20, finish: "hard oil" }),
+    ...board({ width, height: 360, wood: "Red oak", thickness: 20, finish: hardOil }),
     layers: [
       layer({
         key: "B",
@@ -109,7 +112,7 @@ export function oarsSign(artwork: DemoArtwork, { width }: { width: number }): Mo
 /** A small plate: letters bonded to a board. */
 export function rackSign(artwork: DemoArtwork): MockupDocument {
   return {
-    ...board({ width: 240, height: 130, wood: "Eastern white pine", thickness: 18, finish: "clear coat" }),
+    ...board({ width: 240, height: 130, wood: "Eastern white pine", thickness: 18, finish: clearCoat }),
     quantity: 6,
     layers: [
       layer({

@@ -23,7 +23,8 @@ function check(input: RuleInput): Finding[] {
       if (deltaE <= limits.colourRemark) return [];
       const severity = deltaE > limits.colourCaution ? "caution" : "remark";
       const looks = severity === "caution" ? "That is another colour." : "Side by side it shows.";
-      const nearer = nearestStock(colour, context.acrylics);
+      const acrylics = context.stock.acrylics.map(({ acrylic }) => acrylic);
+      const nearer = nearestStock(colour, acrylics);
       const offer =
         nearer && nearer.deltaE < deltaE - 0.05
           ? ` ${nearer.stock.name} comes nearer (${nearer.deltaE.toFixed(1)}).`

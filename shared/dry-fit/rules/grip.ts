@@ -1,10 +1,11 @@
-import { regionContains } from "../../geometry/contains.ts";
 import { isShorter, lengthsEqual } from "../../geometry/tolerance.ts";
 import { barrelAddsUp, nearestBarrel } from "../../hardware/barrel-offset.ts";
 import { capStudGrip } from "../../hardware/grip.ts";
+import { heldOffsetMm } from "../../hardware/standoff-parts.ts";
 import { sheetBand } from "../../materials/sheet-tolerance.ts";
-import type { CapStud, Hole, Layer } from "../../mockup/document.ts";
+import type { Hardware, Hole, Layer } from "../../mockup/document.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
+import { holdsPiece } from "../../stack/held-piece.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -23,31 +24,33 @@ function check(input: RuleInput): Finding[] {
     return [
       ...checkOffset(layer, hardware, offset, input),
       ...checkGrip(layer, hardware, holes, input),
-      ...checkHeld(layer, holes, figures),
+      ...checkHeld(layer, hardware, holes, figures),
     ];
   });
 }
 
-function checkOffset(layer: Layer, hardware: CapStud, offset: number, { context, figures }: RuleInput): Finding[] {
+function checkOffset(layer: Layer, hardware: Hardware, offset: number, { context, figures }: RuleInput): Finding[] {
   const mm = (length: number) => formatLengthWithUnit(length, context.unit);
   const where = figures.pieces.find((piece) => piece.layerKey === layer.key)?.centroid ?? null;
   const base = { severity: "stop" as const, layerKey: layer.key, where, unit: "mm", source };
-  if (!barrelAddsUp(hardware)) {
+  if (hardware.kind === "capStud" && !barrelAddsUp(hardware)) {
     const sum = hardware.boreDepth + hardware.floorThickness;
     const text = `The barrel of ${hardware.name} is ${mm(hardware.barrelLength)} long, but its bore and floor make ${mm(sum)}: one of its measures is wrong.`;
     return [foundBy(grip, { ...base, text, value: sum, limit: hardware.barrelLength })];
   }
-  if (lengthsEqual(offset, hardware.barrelLength, 0.05)) return [];
-  const alike = context.barrels.filter((barrel) => barrel.barrelDiameter === hardware.barrelDiameter);
-  const other = nearestBarrel(offset, alike.length > 0 ? alike : context.barrels);
+  const held = heldOffsetMm(hardware);
+  if (held === null || lengthsEqual(offset, held, 0.05)) return [];
+  const barrels = context.stock.hardware.map((one) => one.hardware).filter(({ kind }) => kind === hardware.kind);
+  const alike = barrels.filter((barrel) => barrel.barrelDiameter === hardware.barrelDiameter);
+  const other = nearestBarrel(offset, alike.length > 0 ? alike : barrels);
   const offer = other ? ` The nearest barrel on hand is ${mm(other.barrelLength)}.` : "";
-  const text = `${layerWords(layer)} is drawn ${mm(offset)} off, but its barrel is ${mm(hardware.barrelLength)} long, and that is where the panel comes to lie.${offer}`;
-  return [foundBy(grip, { ...base, text, value: offset, limit: hardware.barrelLength })];
+  const text = `${layerWords(layer)} is drawn ${mm(offset)} off, but its barrel holds it at ${mm(held)}, and that is where the panel comes to lie.${offer}`;
+  return [foundBy(grip, { ...base, text, value: offset, limit: held })];
 }
 
-function checkGrip(layer: Layer, hardware: CapStud, holes: readonly Hole[], { context }: RuleInput): Finding[] {
+function checkGrip(layer: Layer, hardware: Hardware, holes: readonly Hole[], { context }: RuleInput): Finding[] {
   const [first] = holes;
-  if (!first) return [];
+  if (!first || hardware.kind !== "capStud") return [];
   const mm = (length: number) => formatFine(length, context.unit);
   const { least, most, needed, room } = capStudGrip(hardware, sheetBand(layer.stock.process, layer.thickness));
   const base = {
@@ -69,8 +72,13 @@ function checkGrip(layer: Layer, hardware: CapStud, holes: readonly Hole[], { co
   return [];
 }
 
-function checkHeld(layer: Layer, holes: readonly Hole[], pieces: readonly PieceFigures[]): Finding[] {
-  const loose = pieces.filter((piece) => !holes.some((hole) => regionContains(piece.region, hole)));
+function checkHeld(
+  layer: Layer,
+  hardware: Hardware,
+  holes: readonly Hole[],
+  pieces: readonly PieceFigures[],
+): Finding[] {
+  const loose = pieces.filter((piece) => !holes.some((hole) => holdsPiece(hardware, piece.region, hole)));
   const [first] = loose;
   if (!first) return [];
   const which = loose.length === 1 ? "A piece" : `${loose.length} pieces`;

@@ -1,7 +1,8 @@
 import { isShorter } from "../../geometry/tolerance.ts";
 import { fixedPoint, holeMovementMm } from "../../hardware/hole-movement.ts";
-import { holeWindow as windowOf } from "../../hardware/hole-window.ts";
-import type { Hole, Layer } from "../../mockup/document.ts";
+import { holeWindowOfKind } from "../../hardware/hole-window-of-kind.ts";
+import { panelHoleOf } from "../../hardware/panel-hole.ts";
+import type { Hardware, Hole, Layer } from "../../mockup/document.ts";
 import { formatFine } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -18,12 +19,12 @@ function check(input: RuleInput): Finding[] {
   );
 }
 
-/** The window of one hole of a layer on cap standoffs, with the movement it allows for. */
+/** The window of one hole of a layer with the movement it allows for; null where nothing passes the panel. */
 export function windowOfHole(
   hold: Extract<Layer["hold"], { kind: "standoff" }>,
   hole: Hole,
   { document, limits, context }: Pick<RuleInput, "document" | "limits" | "context">,
-): { readonly lower: number; readonly upper: number; readonly movement: number } {
+): { readonly lower: number; readonly upper: number; readonly movement: number } | null {
   const { hardware, holes } = hold;
   const fixed = fixedPoint(holes) ?? hole;
   const movement = hole.fixed
@@ -31,26 +32,25 @@ export function windowOfHole(
     : holeMovementMm(fixed, hole, {
         expansionPerK: limits.expansionPerK,
         temperatureK: context.place === "outside" ? limits.temperatureOutsideK : limits.temperatureInsideK,
-        woodPerPoint: document.backer.stock.hardness === "softwood" ? limits.softwoodPerPoint : limits.hardwoodPerPoint,
+        woodPerPoint: document.backer.stock.movementPerPoint,
         moisturePoints: limits.moisturePoints,
-        // The grain of a plain board runs along its longer side (common practice).
-        grainTurn: document.board.height > document.board.width ? 90 : 0,
+        grainTurn: document.backer.grainTurn,
       });
-  const window = windowOf({
-    passing: hardware.studDiameter,
-    cap: hardware.capDiameter,
-    barrel: hardware.barrelDiameter,
+  const window = holeWindowOfKind(panelHoleOf(hardware), {
     placingError: limits.placingErrorMm,
     movement,
     cover: limits.coverMm,
   });
-  return { ...window, movement };
+  return window && { ...window, movement };
 }
 
 function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
   if (layer.hold.kind !== "standoff") return [];
   const { hardware } = layer.hold;
-  const { lower, upper, movement } = windowOfHole(layer.hold, hole, input);
+  const window = windowOfHole(layer.hold, hole, input);
+  const passing = passingOf(hardware);
+  if (!window || !passing) return [];
+  const { lower, upper, movement } = window;
   const mm = (length: number) => formatFine(length, input.context.unit);
   const base = {
     severity: "stop" as const,
@@ -60,8 +60,8 @@ function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
     unit: "mm",
     source,
   };
-  const stud = `${mm(hardware.studDiameter)} stud`;
-  const hides = `${mm(Math.min(hardware.capDiameter, hardware.barrelDiameter))} cap`;
+  const stud = `${mm(passing.diameter)} ${passing.what}`;
+  const hides = `${mm(Math.min(passing.cover, hardware.barrelDiameter))} ${passing.coverWhat}`;
   const play = `${mm(input.limits.placingErrorMm)} placing error a side and ${mm(movement)} of movement`;
   if (isShorter(upper, lower)) {
     const text = `No hole of ${layerWords(layer)} can be right here: the ${stud} needs ${mm(lower)} for ${play}, but from ${mm(upper)} on the hole shows round the ${hides}. Take a wider cap, or bring this hole and the fixed one nearer each other.`;
@@ -76,4 +76,23 @@ function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
     return [foundBy(holeWindow, { ...base, text, value: hole.diameter, limit: upper })];
   }
   return [];
+}
+
+/** What goes through the panel and what hides its hole, in words. */
+function passingOf(
+  hardware: Hardware,
+): { readonly diameter: number; readonly what: string; readonly cover: number; readonly coverWhat: string } | null {
+  switch (hardware.kind) {
+    case "capStud":
+      return { diameter: hardware.studDiameter, what: "stud", cover: hardware.capDiameter, coverWhat: "cap" };
+    case "throughScrew": {
+      const { screw, cap } = hardware;
+      const hidden = cap !== null && cap.diameter > screw.headDiameter;
+      const cover = hidden ? cap.diameter : screw.headDiameter;
+      return { diameter: screw.diameter, what: "screw", cover, coverWhat: hidden ? "cap" : "head" };
+    }
+    case "blindStud":
+    case "edgeGrip":
+      return null;
+  }
 }

@@ -13,14 +13,15 @@ function check(input: RuleInput): Finding[] {
   const mm = (length: number) => formatFine(length, input.context.unit);
   return layersWithFigures(input).flatMap(({ layer }) => {
     const { hold } = layer;
-    if (hold.kind !== "standoff") return [];
+    if (hold.kind !== "standoff" || hold.hardware.kind !== "capStud") return [];
     const [hole] = hold.holes;
-    return screwMisfits(hold.hardware).map(({ at, hasMm, needsMm }) => {
+    const { hardware } = hold;
+    return screwMisfits(hardware).map(({ at, hasMm, needsMm }) => {
       const part =
         at === "bore" ? `head is ${mm(needsMm)} wide, the bore` : `shank is ${mm(needsMm)} thick, the floor's hole`;
       return foundBy(screwInBarrel, {
         severity: "stop",
-        text: `${hold.hardware.screw.name} does not go into ${hold.hardware.name} of ${layerWords(layer)}: its ${part} ${mm(hasMm)}.`,
+        text: `${hardware.screw.name} does not go into ${hardware.name} of ${layerWords(layer)}: its ${part} ${mm(hasMm)}.`,
         layerKey: layer.key,
         where: hole ? { x: hole.x, y: hole.y } : null,
         value: hasMm,

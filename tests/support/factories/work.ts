@@ -104,6 +104,7 @@ export async function signFromArtwork(world: World, artworkId: string, thickness
             segments: [...segments],
           })),
           placement: { x: 150 + middle.x, y: 150 + middle.y, turn: 0, scale: 1, mirrored: false },
+          reads: "",
         };
       }),
       { thickness },

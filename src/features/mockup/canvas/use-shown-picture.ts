@@ -58,7 +58,7 @@ export function useShownPicture(scene: Scene | null, { drawn, drag, view, room, 
     const hole = holeId === null ? null : findHole(wanted, holeId);
     scene?.mark({
       chosen: chosenBox === null ? [] : [chosenBox],
-      hole: hole === null ? null : { x: hole.x, y: hole.y, diameter: hole.capDiameter },
+      hole: hole === null ? null : { x: hole.x, y: hole.y, diameter: hole.seenDiameter },
       guides: drag?.kind === "pieces" ? drag.guides : [],
       spot,
     });

@@ -1,5 +1,6 @@
 import { boxUnion } from "#shared/geometry/box.ts";
 import type { Box } from "#shared/geometry/path.ts";
+import { seenDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
 import type { Shift } from "./shifts.ts";
@@ -34,15 +35,15 @@ export type HoleOnBoard = {
   readonly id: string;
   readonly x: number;
   readonly y: number;
-  readonly capDiameter: number;
+  readonly seenDiameter: number;
 };
 
-/** A hole by its id, with the diameter of the cap over it. */
+/** A hole by its id, with the diameter of what is seen of it. */
 export function findHole(document: MockupDocument, holeId: string): HoleOnBoard | null {
   for (const { hold } of document.layers) {
     if (hold.kind !== "standoff") continue;
     const hole = hold.holes.find(({ id }) => id === holeId);
-    if (hole) return { id: hole.id, x: hole.x, y: hole.y, capDiameter: hold.hardware.capDiameter };
+    if (hole) return { id: hole.id, x: hole.x, y: hole.y, seenDiameter: seenDiameterMm(hold.hardware) };
   }
   return null;
 }

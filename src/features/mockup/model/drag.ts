@@ -1,4 +1,4 @@
-import type { CapStud, MockupDocument } from "#shared/mockup/document.ts";
+import type { Hardware, MockupDocument } from "#shared/mockup/document.ts";
 import type { Guide } from "./catch-guides.ts";
 import { setHole } from "./commands/holes.ts";
 import { movePieces } from "./commands/pieces.ts";
@@ -15,7 +15,7 @@ export type Drag =
     }
   | { readonly kind: "hole"; readonly holeId: string; readonly x: number; readonly y: number }
   /** In the section: `hardware` when the offset caught on a barrel. */
-  | { readonly kind: "raise"; readonly key: string; readonly offset: number; readonly hardware: CapStud | undefined };
+  | { readonly kind: "raise"; readonly key: string; readonly offset: number; readonly hardware: Hardware | undefined };
 
 /** The document as it would be if the hand let go now. */
 export function documentOfDrag(document: MockupDocument, drag: Drag | null): MockupDocument {

@@ -1,6 +1,7 @@
 import { boxGrow } from "#shared/geometry/box.ts";
 import { distanceToRegionEdgeMm, regionContains } from "#shared/geometry/contains.ts";
 import type { Point } from "#shared/geometry/path.ts";
+import { seenDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
 
@@ -32,7 +33,7 @@ export function holeAt(document: MockupDocument, layerKey: string | null, point:
   const layer = document.layers.find(({ key }) => key === layerKey);
   if (!layer || layer.hidden || layer.hold.kind !== "standoff") return null;
   const { hardware, holes } = layer.hold;
-  const reach = Math.max(hardware.capDiameter, hardware.barrelDiameter) / 2;
+  const reach = Math.max(seenDiameterMm(hardware), hardware.barrelDiameter) / 2;
   return holes.find(({ x, y }) => Math.hypot(x - point.x, y - point.y) <= reach)?.id ?? null;
 }
 

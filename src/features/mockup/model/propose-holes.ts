@@ -6,8 +6,10 @@ import type { Point } from "#shared/geometry/path.ts";
 import { placeRegion } from "#shared/geometry/placement.ts";
 import { isShorter } from "#shared/geometry/tolerance.ts";
 import { cornerHoles } from "#shared/hardware/hole-proposals.ts";
-import { holeWindow } from "#shared/hardware/hole-window.ts";
-import type { CapStud, Hold, Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
+import { holeWindowOfKind } from "#shared/hardware/hole-window-of-kind.ts";
+import { panelHoleOf } from "#shared/hardware/panel-hole.ts";
+import { passingDiameterMm, seenDiameterMm, usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
+import type { Hardware, Hold, Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
 import { coordinateOf, lengthOf, mostHoles } from "./limits.ts";
 import { withFields } from "./same.ts";
 
@@ -24,11 +26,13 @@ export type Place = { readonly document: MockupDocument; readonly place: "inside
  * allow. On a layer of one piece they come nearer each other until the panel's movement leaves each of them a diameter
  * that hides. A piece too small for four gets fewer; the first hole of the layer is the fixed one.
  */
-export function propose(layer: Layer, { hardware, id, ...where }: { hardware: CapStud; id: string } & Place): Hole[] {
-  const { lower, upper } = holeWindow({ ...usual, ...passing(hardware), movement: 0 });
-  const widest = Math.max(lower, upper);
-  const edge = Math.max(2 * widest, hardware.capDiameter / 2 + 2, widest / 2 + layer.thickness);
-  const apart = 2 * hardware.capDiameter;
+export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Hardware; id: string } & Place): Hole[] {
+  const window = holeWindowOfKind(panelHoleOf(hardware), { ...usual, movement: 0 });
+  const lower = window?.lower ?? passingDiameterMm(hardware);
+  const widest = window ? Math.max(window.lower, window.upper) : 0;
+  const seen = seenDiameterMm(hardware);
+  const edge = Math.max(2 * widest, seen / 2 + 2, widest / 2 + layer.thickness);
+  const apart = 2 * seen;
   const regions = layer.pieces.map((piece) => placeRegion(flattenPath(piece.path, flatnessMm), piece.placement));
   const holdWith = (points: readonly Point[]): StandoffHold => {
     const holes = points
@@ -36,7 +40,7 @@ export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Ca
       .filter(isPoint)
       .slice(0, mostHoles)
       .map(({ x, y }, index) => ({ id: `${id}-${index + 1}`, x, y, diameter: lower, fixed: index === 0 }));
-    return { kind: "standoff", hardware, offset: hardware.barrelLength, holes };
+    return { kind: "standoff", hardware, offset: usualOffsetMm(hardware), holes };
   };
   // Pieces of one layer are bound to one fixed hole: coming nearer its own middle helps a single one only.
   const allHaveWindow = (points: readonly Point[]): boolean => {
@@ -48,12 +52,12 @@ export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Ca
 }
 
 function hasWindow(hold: StandoffHold, hole: Hole, { document, place }: Place): boolean {
-  const { lower, upper } = windowOfHole(hold, hole, {
+  const window = windowOfHole(hold, hole, {
     document,
     limits: defaultLimits,
     context: { ...usualContext, place },
   });
-  return !isShorter(upper, lower);
+  return !window || !isShorter(window.upper, window.lower);
 }
 
 /**
@@ -63,7 +67,9 @@ function hasWindow(hold: StandoffHold, hole: Hole, { document, place }: Place): 
 export function fitDiameters(hold: StandoffHold, { document, place }: Place): Hole[] {
   const context = { ...usualContext, place };
   return hold.holes.map((hole) => {
-    const { lower, upper } = windowOfHole(hold, hole, { document, limits: defaultLimits, context });
+    const window = windowOfHole(hold, hole, { document, limits: defaultLimits, context });
+    if (!window) return hole;
+    const { lower, upper } = window;
     // The fixed hole holds the place, so it has the least play there is.
     const wanted = hole.fixed ? lower : Math.round(((lower + upper) / 2) * 10) / 10;
     return withFields(hole, { diameter: lengthOf(Math.min(upper, Math.max(lower, wanted))) ?? hole.diameter });
@@ -71,10 +77,6 @@ export function fitDiameters(hold: StandoffHold, { document, place }: Place): Ho
 }
 
 const usual = { placingError: defaultLimits.placingErrorMm, cover: defaultLimits.coverMm };
-
-function passing({ studDiameter, capDiameter, barrelDiameter }: CapStud) {
-  return { passing: studDiameter, cap: capDiameter, barrel: barrelDiameter };
-}
 
 function isPoint(place: { x: number | null; y: number | null }): place is Point {
   return place.x !== null && place.y !== null;

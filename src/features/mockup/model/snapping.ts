@@ -1,4 +1,5 @@
-import type { CapStud } from "#shared/mockup/document.ts";
+import { heldOffsetMm } from "#shared/hardware/standoff-parts.ts";
+import type { Hardware } from "#shared/mockup/document.ts";
 import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
 
 /**
@@ -8,8 +9,8 @@ import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
 export const typedReachMm: Readonly<Record<LengthUnit, number>> = { mm: 0.26, in: inchesToMm(1 / 32) };
 
 /** Barrel lengths in stock, each once, shortest first. */
-export function barrelLengths(stock: readonly CapStud[]): number[] {
-  return [...new Set(stock.map((hardware) => hardware.barrelLength))].sort((a, b) => a - b);
+export function barrelLengths(stock: readonly Hardware[]): number[] {
+  return [...new Set(stock.map(heldOffsetMm))].filter((length) => length !== null).sort((a, b) => a - b);
 }
 
 /**
@@ -18,15 +19,15 @@ export function barrelLengths(stock: readonly CapStud[]): number[] {
  */
 export function catchBarrel(
   offset: number,
-  { stock, current, reachMm }: { stock: readonly CapStud[]; current: CapStud; reachMm: number },
-): { offset: number; hardware: CapStud | undefined } {
+  { stock, current, reachMm }: { stock: readonly Hardware[]; current: Hardware; reachMm: number },
+): { offset: number; hardware: Hardware | undefined } {
   const nearest = nearestTo(offset, barrelLengths([...stock, current]));
   if (nearest === undefined || Math.abs(nearest - offset) > reachMm) return { offset, hardware: undefined };
   return { offset: nearest, hardware: hardwareOfLength(nearest, stock, current) };
 }
 
 /** The barrel length next above or below `offset`, for steps by key; undefined past the last one. */
-export function nextBarrel(offset: number, stock: readonly CapStud[], direction: "up" | "down"): number | undefined {
+export function nextBarrel(offset: number, stock: readonly Hardware[], direction: "up" | "down"): number | undefined {
   const lengths = barrelLengths(stock);
   return direction === "up"
     ? lengths.find((length) => length > offset + 0.001)
@@ -34,13 +35,15 @@ export function nextBarrel(offset: number, stock: readonly CapStud[], direction:
 }
 
 /** The hardware with this barrel length that is most like `current`. */
-export function hardwareOfLength(length: number, stock: readonly CapStud[], current: CapStud): CapStud | undefined {
-  if (current.barrelLength === length) return current;
-  const likeness = (hardware: CapStud) =>
-    (hardware.barrelDiameter === current.barrelDiameter ? 2 : 0) + (hardware.finish === current.finish ? 1 : 0);
-  let best: CapStud | undefined;
+export function hardwareOfLength(length: number, stock: readonly Hardware[], current: Hardware): Hardware | undefined {
+  if (heldOffsetMm(current) === length) return current;
+  const likeness = (hardware: Hardware) =>
+    (hardware.kind === current.kind ? 4 : 0) +
+    (hardware.barrelDiameter === current.barrelDiameter ? 2 : 0) +
+    (hardware.finish === current.finish ? 1 : 0);
+  let best: Hardware | undefined;
   for (const hardware of stock)
-    if (hardware.barrelLength === length && (!best || likeness(hardware) > likeness(best))) best = hardware;
+    if (heldOffsetMm(hardware) === length && (!best || likeness(hardware) > likeness(best))) best = hardware;
   return best;
 }
 

@@ -1,5 +1,7 @@
 import type { StockItem } from "#shared/contracts/stock.ts";
-import type { Acrylic, Adhesive, CapStud, Hold, Wood } from "#shared/mockup/document.ts";
+import { standardScrews } from "#shared/materials/standard-stock.ts";
+import type { Stock } from "#shared/materials/stock.ts";
+import type { Acrylic, Adhesive, Hardware, Hold, Wood } from "#shared/mockup/document.ts";
 import type { HoldChoice } from "./commands/new-layer.ts";
 import { isSame } from "./same.ts";
 
@@ -7,9 +9,12 @@ import { isSame } from "./same.ts";
 export type StockChoices = {
   readonly acrylics: readonly { readonly acrylic: Acrylic; readonly thicknessesMm: readonly number[] }[];
   readonly woods: readonly { readonly wood: Wood; readonly thicknessesMm: readonly number[] }[];
-  readonly hardware: readonly CapStud[];
+  readonly hardware: readonly Hardware[];
   readonly adhesives: readonly Adhesive[];
 };
+
+/** Hardware is offered by kind, the usual one first. */
+const kinds: readonly Hardware["kind"][] = ["capStud", "throughScrew", "blindStud", "edgeGrip"];
 
 export function stockChoices(items: readonly StockItem[]): StockChoices {
   return {
@@ -25,8 +30,27 @@ export function stockChoices(items: readonly StockItem[]): StockChoices {
     ),
     hardware: items
       .flatMap((item) => (item.kind === "hardware" ? [{ ...item.hardware, stockId: item.id }] : []))
-      .sort((a, b) => a.barrelLength - b.barrelLength || (a.name < b.name ? -1 : 1)),
+      .sort(
+        (a, b) =>
+          kinds.indexOf(a.kind) - kinds.indexOf(b.kind) ||
+          a.barrelLength - b.barrelLength ||
+          (a.name < b.name ? -1 : 1),
+      ),
     adhesives: items.flatMap((item) => (item.kind === "adhesive" ? [{ ...item.adhesive, stockId: item.id }] : [])),
+  };
+}
+
+/** The stock as the dry fit looks at it. */
+export function stockOnHand(items: readonly StockItem[]): Stock {
+  const { acrylics, woods, adhesives } = stockChoices(items);
+  return {
+    acrylics: acrylics.map((one) => ({ ...one, sheets: [] })),
+    woods,
+    hardware: items.flatMap((item) =>
+      item.kind === "hardware" ? [{ hardware: { ...item.hardware, stockId: item.id }, quantity: item.quantity }] : [],
+    ),
+    screws: standardScrews,
+    adhesives,
   };
 }
 

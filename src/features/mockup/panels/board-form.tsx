@@ -1,5 +1,6 @@
 import { useState } from "react";
 import type { MockupDocument } from "#shared/mockup/document.ts";
+import { finishWords } from "#shared/mockup/finish-words.ts";
 import { formatLength } from "#shared/units/format-length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { DistanceField } from "@/components/ui/distance-field.tsx";
@@ -17,6 +18,7 @@ const hangings: readonly { kind: MockupDocument["hanging"]["kind"]; text: string
   { kind: "keyholes", text: "keyholes" },
   { kind: "wire", text: "wire" },
   { kind: "screwed through", text: "screwed through" },
+  { kind: "through standoffs", text: "through its standoffs" },
 ];
 
 /** Where the light comes from, as people say it. Degrees clockwise from the top. */
@@ -84,7 +86,7 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
       width,
       height,
       viewingDistance,
-      hanging: { kind: fields.hanging?.kind ?? hanging.kind, gap },
+      hanging: { ...hanging, ...fields.hanging, gap },
     };
     edit({ label: "Change the board", change: (before) => setBoard(before, all) });
     onDone();
@@ -129,9 +131,13 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
         </Select>
         <Field
           label="Finish"
-          maxLength={200}
-          value={fields.finish ?? backer.finish}
-          onChange={(event) => set({ finish: event.target.value })}
+          maxLength={120}
+          value={(fields.finish ?? backer.finish).length === 0 ? "" : finishWords(fields.finish ?? backer.finish)}
+          onChange={(event) =>
+            set({
+              finish: event.target.value === "" ? [] : [{ kind: "other", name: event.target.value, dryingHours: 0 }],
+            })
+          }
         />
         <Field
           label="Quantity"
@@ -147,7 +153,7 @@ export function BoardForm({ onDone }: { readonly onDone: () => void }) {
           value={fields.hanging?.kind ?? hanging.kind}
           onChange={(event) => {
             const chosen = hangings.find(({ kind }) => kind === event.target.value);
-            if (chosen) set({ hanging: { kind: chosen.kind, gap: hanging.gap } });
+            if (chosen) set({ hanging: { ...hanging, kind: chosen.kind } });
           }}
         >
           {hangings.map(({ kind, text }) => (

@@ -16,7 +16,7 @@ import { useDeskPicture } from "../engine/use-desk-picture.ts";
 import type { Drag } from "../model/drag.ts";
 import { nextEditor, startEditor } from "../model/editor.ts";
 import { chooseLayer } from "../model/selection.ts";
-import { stockChoices } from "../model/stock-choices.ts";
+import { stockChoices, stockOnHand } from "../model/stock-choices.ts";
 import { DeskBar } from "./desk-bar.tsx";
 import { type DeskDialog, DeskDialogs } from "./desk-dialogs.tsx";
 import { DeskTools } from "./desk-tools.tsx";
@@ -64,10 +64,13 @@ export function MockupDesk(props: MockupDeskProps) {
     () => ({
       unit,
       place: whereItHangs,
-      acrylics: stock.acrylics.map(({ acrylic }) => acrylic),
-      barrels: stock.hardware,
+      walkway: false,
+      overhead: false,
+      electrical: false,
+      words: job.brief.words,
+      stock: stockOnHand(props.stock),
     }),
-    [unit, whereItHangs, stock],
+    [unit, whereItHangs, job.brief.words, props.stock],
   );
   const { fit, drawn, figures, failure, isCurrent } = useDeskPicture({ document, drag, context, room });
   useUndoKeys(dispatch);

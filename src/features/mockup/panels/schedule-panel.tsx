@@ -1,4 +1,6 @@
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
+import type { Coat } from "#shared/mockup/document.ts";
+import { finishWords } from "#shared/mockup/finish-words.ts";
 import { Table } from "@/components/ui/table.tsx";
 import { useDesk } from "../editor/desk-context.ts";
 import { setBoard } from "../model/commands/set-board.ts";
@@ -82,16 +84,18 @@ export function SchedulePanel({
 /** The backer's finish is what tells it apart in the schedule, so it is written here. */
 function BackerName() {
   const { document, edit } = useDesk();
+  const bare = document.backer.finish.length === 0;
   return (
     <span className="flex items-center gap-1">
       Backer,
       <CellText
         aria-label="Finish of the backer"
         placeholder="bare"
-        maxLength={200}
-        value={document.backer.finish}
+        maxLength={120}
+        value={bare ? "" : finishWords(document.backer.finish)}
         onCommit={(finish) => {
-          edit({ label: "Finish the backer", change: (before) => setBoard(before, { finish }) });
+          const coats: Coat[] = finish === "" ? [] : [{ kind: "other", name: finish, dryingHours: 0 }];
+          edit({ label: "Finish the backer", change: (before) => setBoard(before, { finish: coats }) });
           return null;
         }}
       />

@@ -1,4 +1,5 @@
 import type { StockItem } from "#shared/contracts/stock.ts";
+import type { Hardware } from "#shared/mockup/document.ts";
 import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 
@@ -38,10 +39,25 @@ export function stockFacts(item: StockItem, unit: LengthUnit): StockFacts {
       return {
         colour: item.hardware.finish,
         swatch: "metal",
-        what: `barrel ${formatLengthWithUnit(item.hardware.barrelLength, unit)}, cap ${formatLengthWithUnit(item.hardware.capDiameter, unit)} across, screw ${item.hardware.screw.name}`,
+        what: hardwareWords(item.hardware, unit),
         amount: item.quantity === null ? "not counted yet" : `${item.quantity} on hand`,
       };
     case "adhesive":
       return { colour: null, swatch: "sheet", what: item.adhesive.family, amount: "" };
+  }
+}
+
+function hardwareWords(hardware: Hardware, unit: LengthUnit): string {
+  const length = (mm: number) => formatLengthWithUnit(mm, unit);
+  const barrel = `barrel ${length(hardware.barrelLength)}`;
+  switch (hardware.kind) {
+    case "capStud":
+      return `${barrel}, cap ${length(hardware.capDiameter)} across, screw ${hardware.screw.name}`;
+    case "throughScrew":
+      return `loose spacer ${length(hardware.barrelLength)}, screw ${hardware.screw.name} through the panel`;
+    case "blindStud":
+      return `hidden stud ${length(hardware.studLength)} long, ${barrel}`;
+    case "edgeGrip":
+      return `grips the edge, slot ${length(hardware.slotWidth)}, ${barrel}`;
   }
 }

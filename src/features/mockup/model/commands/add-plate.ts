@@ -1,7 +1,7 @@
 import type { Path } from "#shared/geometry/path.ts";
 import { circlePath, rectanglePath } from "#shared/geometry/shapes.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
-import { nextFreeKeys } from "../layer-key.ts";
+import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
 import { lengthOf, mostLayers, nameOf, roundMm } from "../limits.ts";
 import type { Place } from "../propose-holes.ts";
 import { type NewLayer, newLayer } from "./new-layer.ts";
@@ -39,6 +39,7 @@ export function addPlate(
       scale: 1,
       mirrored: false,
     },
+    reads: "",
   };
   const layer = newLayer(fields, { key, pieces: [piece], id: `${id}-h`, document, place });
   return { ...document, layers: nearest === "wall" ? [layer, ...document.layers] : [...document.layers, layer] };

@@ -2,7 +2,7 @@ import type { ArtworkPiece } from "#shared/artwork/imported-artwork.ts";
 import { boxCentre } from "#shared/geometry/box.ts";
 import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
-import { nextFreeKeys } from "../layer-key.ts";
+import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
 import { coordinateOf, mostLayers, mostPieces, roundMm } from "../limits.ts";
 import type { Place } from "../propose-holes.ts";
 import { withoutOpenings } from "../without-openings.ts";
@@ -70,5 +70,6 @@ function pieceOf(
       segments: [...segments],
     })),
     placement: { x, y, turn: 0, scale: 1, mirrored: false },
+    reads: "",
   };
 }

@@ -1,4 +1,5 @@
 import type { Point } from "#shared/geometry/path.ts";
+import { passingDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
 import { coordinateOf, lengthOf, mostHoles } from "../limits.ts";
 import { fitDiameters, type Place, propose } from "../propose-holes.ts";
@@ -17,7 +18,13 @@ export function addHole(
   if (holeX === null || holeY === null) return document;
   return changeHoles(document, key, (hold) => {
     if (hold.holes.length >= mostHoles) return hold.holes;
-    const added = { id, x: holeX, y: holeY, diameter: hold.hardware.studDiameter, fixed: hold.holes.length === 0 };
+    const added = {
+      id,
+      x: holeX,
+      y: holeY,
+      diameter: passingDiameterMm(hold.hardware),
+      fixed: hold.holes.length === 0,
+    };
     const holes = [...hold.holes, added];
     const fitted = fitDiameters({ ...hold, holes }, { document, place }).at(-1) ?? added;
     return [...hold.holes, fitted];

@@ -1,11 +1,12 @@
-import type { Acrylic, Adhesive, CapStud, Layer, Piece } from "#shared/mockup/document.ts";
+import { usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
+import type { Acrylic, Adhesive, Hardware, Layer, Piece } from "#shared/mockup/document.ts";
 import { nameOf } from "../limits.ts";
 import { type Place, propose } from "../propose-holes.ts";
 
 /** How a new layer is to be held: what it is bonded with, or what it stands on. */
 export type HoldChoice =
   | { readonly kind: "bond"; readonly adhesive: Adhesive }
-  | { readonly kind: "standoff"; readonly hardware: CapStud };
+  | { readonly kind: "standoff"; readonly hardware: Hardware };
 
 export type NewLayer = {
   readonly name: string;
@@ -26,9 +27,10 @@ export function newLayer(
     thickness,
     hold:
       hold.kind === "bond"
-        ? hold
-        : { kind: "standoff", hardware: hold.hardware, offset: hold.hardware.barrelLength, holes: [] },
+        ? { kind: "bond", adhesive: hold.adhesive, tack: null }
+        : { kind: "standoff", hardware: hold.hardware, offset: usualOffsetMm(hold.hardware), holes: [] },
     locate: hold.kind === "bond" ? "none" : "hole pattern",
+    marked: "not stated",
     pieces,
     hidden: false,
   };

@@ -1,4 +1,4 @@
-import type { MockupDocument, Wood } from "#shared/mockup/document.ts";
+import type { Coat, MockupDocument, Wood } from "#shared/mockup/document.ts";
 import { lengthOf } from "../limits.ts";
 import { withFields } from "../same.ts";
 import { movePieces } from "./pieces.ts";
@@ -8,7 +8,8 @@ export type BoardFields = {
   readonly height?: number;
   readonly stock?: Wood;
   readonly thickness?: number;
-  readonly finish?: string;
+  readonly grainTurn?: number;
+  readonly finish?: readonly Coat[];
   readonly hanging?: MockupDocument["hanging"];
   readonly quantity?: number;
   readonly wall?: string;
@@ -39,7 +40,8 @@ function withBoardFields(document: MockupDocument, fields: BoardFields): MockupD
     backer: withFields(backer, {
       stock: fields.stock ?? backer.stock,
       thickness: lengthOf(fields.thickness ?? backer.thickness, 200) ?? backer.thickness,
-      finish: (fields.finish ?? backer.finish).trim().slice(0, 200).trim(),
+      grainTurn: isWithin(fields.grainTurn ?? -1, 0, 180) ? (fields.grainTurn ?? backer.grainTurn) : backer.grainTurn,
+      finish: fields.finish ? [...fields.finish].slice(0, 12) : backer.finish,
     }),
     hanging: fields.hanging && isWithin(fields.hanging.gap, 0, 500) ? fields.hanging : hanging,
     quantity:

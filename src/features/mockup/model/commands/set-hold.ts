@@ -1,4 +1,5 @@
-import type { Adhesive, CapStud, MockupDocument } from "#shared/mockup/document.ts";
+import { usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
+import type { Adhesive, Hardware, MockupDocument } from "#shared/mockup/document.ts";
 import { mostOffsetMm, roundMm } from "../limits.ts";
 import { type Place, propose } from "../propose-holes.ts";
 import { isSame, withFields } from "../same.ts";
@@ -12,7 +13,7 @@ export function bondLayer(
   return changeLayer(document, key, (layer) => {
     if (layer.hold.kind === "bond" && isSame(layer.hold.adhesive, adhesive)) return layer;
     const locate = layer.locate === "hole pattern" ? "none" : layer.locate;
-    return { ...layer, hold: { kind: "bond", adhesive }, locate };
+    return { ...layer, hold: { kind: "bond", adhesive, tack: null }, locate };
   });
 }
 
@@ -22,10 +23,10 @@ export function bondLayer(
  */
 export function standLayer(
   document: MockupDocument,
-  { key, hardware, id, place }: { key: string; hardware: CapStud; id: string; place: Place["place"] },
+  { key, hardware, id, place }: { key: string; hardware: Hardware; id: string; place: Place["place"] },
 ): MockupDocument {
   return changeLayer(document, key, (layer) => {
-    const offset = hardware.barrelLength;
+    const offset = usualOffsetMm(hardware);
     if (layer.hold.kind === "standoff")
       return withFields(layer, { hold: withFields(layer.hold, { hardware, offset }) });
     const holes = propose(layer, { hardware, id, document, place });
@@ -39,7 +40,7 @@ export function standLayer(
  */
 export function raiseLayer(
   document: MockupDocument,
-  { key, offset, hardware }: { key: string; offset: number; hardware?: CapStud | undefined },
+  { key, offset, hardware }: { key: string; offset: number; hardware?: Hardware | undefined },
 ): MockupDocument {
   if (!Number.isFinite(offset)) return document;
   const held = roundMm(Math.min(mostOffsetMm, Math.max(0, offset)));

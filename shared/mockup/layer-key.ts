@@ -1,4 +1,4 @@
-import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { MockupDocument } from "./document.ts";
 
 /** B to Z, then BA, BB …: A is the backer's. I and O are left out, they read as 1 and 0 (common practice, no source). */
 const letters = "ABCDEFGHJKLMNPQRSTUVWXYZ".split("");

@@ -1,0 +1,132 @@
+import type { Hold, Hole, Layer, MockupDocument } from "../mockup/document.ts";
+import { nextFreeKeys } from "../mockup/layer-key.ts";
+import type { Mend, MendStep } from "./mend.ts";
+
+/**
+ * The document after a mend; the same object when none of its steps finds what it is about, as after that was deleted.
+ */
+export function applyMend(document: MockupDocument, mend: Mend): MockupDocument {
+  return mend.steps.reduce(applyStep, document);
+}
+
+function applyStep(document: MockupDocument, step: MendStep): MockupDocument {
+  switch (step.kind) {
+    case "hole diameter":
+      return changeHole(document, step, (hole) => ({ ...hole, diameter: step.diameter }));
+    case "hole place":
+      return changeHole(document, step, (hole) => ({ ...hole, x: step.x, y: step.y }));
+    case "fixed hole":
+      return changeStandoff(document, step.layerKey, (hold) => ({
+        ...hold,
+        holes: hold.holes.map((hole) => ({ ...hole, fixed: hole.id === step.holeId })),
+      }));
+    case "offset":
+      return changeStandoff(document, step.layerKey, (hold) => ({ ...hold, offset: step.offset }));
+    case "hardware":
+      return changeStandoff(document, step.layerKey, (hold) => ({
+        ...hold,
+        hardware: step.hardware,
+        offset: step.offset,
+      }));
+    case "screw":
+      return changeStandoff(document, step.layerKey, (hold) =>
+        hold.hardware.kind === "blindStud" ? hold : { ...hold, hardware: { ...hold.hardware, screw: step.screw } },
+      );
+    case "adhesive":
+      return changeLayer(document, step.layerKey, (layer) =>
+        layer.hold.kind === "standoff" ? layer : { ...layer, hold: { ...layer.hold, adhesive: step.adhesive } },
+      );
+    case "locate":
+      return changeLayer(document, step.layerKey, (layer) => ({ ...layer, locate: step.locate }));
+    case "marked":
+      return changeLayer(document, step.layerKey, (layer) => ({ ...layer, marked: step.marked }));
+    case "stock":
+      return changeLayer(document, step.layerKey, (layer) => ({ ...layer, stock: step.stock }));
+    case "thickness":
+      return changeLayer(document, step.layerKey, (layer) => ({ ...layer, thickness: step.thickness }));
+    case "pocket":
+      return changeLayer(document, step.layerKey, (layer) =>
+        layer.hold.kind === "pocket"
+          ? { ...layer, hold: { ...layer.hold, depth: step.depth, clearance: step.clearance } }
+          : layer,
+      );
+    case "move pieces":
+      return changePieces(document, step.pieceIds, (piece) => ({
+        ...piece,
+        placement: { ...piece.placement, x: piece.placement.x + step.dx, y: piece.placement.y + step.dy },
+      }));
+    case "drop pieces":
+      return changePieces(document, step.pieceIds, () => null);
+    case "reads":
+      return changePieces(document, [step.pieceId], (piece) => ({ ...piece, reads: step.reads }));
+    case "split layer":
+      return splitLayer(document, step.layerKey, step.pieceIds);
+  }
+}
+
+type Piece = Layer["pieces"][number];
+type StandoffHold = Extract<Hold, { kind: "standoff" }>;
+
+function changeLayer(document: MockupDocument, key: string, change: (layer: Layer) => Layer): MockupDocument {
+  const changed = document.layers.map((layer) => (layer.key === key ? change(layer) : layer));
+  return changed.every((layer, index) => layer === document.layers[index])
+    ? document
+    : { ...document, layers: changed };
+}
+
+function changeStandoff(
+  document: MockupDocument,
+  key: string,
+  change: (hold: StandoffHold) => StandoffHold,
+): MockupDocument {
+  return changeLayer(document, key, (layer) => {
+    if (layer.hold.kind !== "standoff") return layer;
+    const hold = change(layer.hold);
+    return hold === layer.hold ? layer : { ...layer, hold };
+  });
+}
+
+function changeHole(
+  document: MockupDocument,
+  { layerKey, holeId }: { readonly layerKey: string; readonly holeId: string },
+  change: (hole: Hole) => Hole,
+): MockupDocument {
+  return changeStandoff(document, layerKey, (hold) =>
+    hold.holes.some(({ id }) => id === holeId)
+      ? { ...hold, holes: hold.holes.map((hole) => (hole.id === holeId ? change(hole) : hole)) }
+      : hold,
+  );
+}
+
+function changePieces(
+  document: MockupDocument,
+  ids: readonly string[],
+  change: (piece: Piece) => Piece | null,
+): MockupDocument {
+  const chosen = new Set(ids);
+  return document.layers
+    .filter(({ pieces }) => pieces.some(({ id }) => chosen.has(id)))
+    .reduce(
+      (now, { key }) =>
+        changeLayer(now, key, (layer) => ({
+          ...layer,
+          pieces: layer.pieces.flatMap((piece) => {
+            const next = chosen.has(piece.id) ? change(piece) : piece;
+            return next ? [next] : [];
+          }),
+        })),
+      document,
+    );
+}
+
+function splitLayer(document: MockupDocument, key: string, pieceIds: readonly string[]): MockupDocument {
+  const layer = document.layers.find((one) => one.key === key);
+  const [newKey] = nextFreeKeys(document, 1);
+  const chosen = new Set(pieceIds);
+  const taken = layer?.pieces.filter(({ id }) => chosen.has(id)) ?? [];
+  if (!layer || !newKey || taken.length === 0 || taken.length === layer.pieces.length) return document;
+  const left = { ...layer, pieces: layer.pieces.filter(({ id }) => !chosen.has(id)) };
+  const hold: Hold = layer.hold.kind === "standoff" ? { ...layer.hold, holes: [] } : layer.hold;
+  const split: Layer = { ...layer, key: newKey, name: `${layer.name}, split`.slice(0, 120), hold, pieces: taken };
+  return { ...document, layers: document.layers.flatMap((one) => (one === layer ? [left, split] : [one])) };
+}

@@ -1,0 +1,20 @@
+import { z } from "zod";
+
+/** Largest sign, piece or offset we take, mm. Beyond it figures mean nothing and the canvas can't show them. */
+export const longestMm = 10_000;
+
+export const length = z.number().finite().positive().max(longestMm);
+export const coordinate = z.number().finite().min(-longestMm).max(longestMm);
+export const id = z.string().min(1).max(64);
+export const name = z.string().trim().min(1).max(120);
+export const colour = z.string().regex(/^#[0-9A-F]{6}$/, "A colour is # and six hexadecimal digits in capitals.");
+export const stockId = z.uuid().nullable();
+
+export const point = z.strictObject({ x: coordinate, y: coordinate });
+
+const segment = z.discriminatedUnion("kind", [
+  z.strictObject({ kind: z.literal("line"), to: point }),
+  z.strictObject({ kind: z.literal("cubic"), c1: point, c2: point, to: point }),
+]);
+const ring = z.strictObject({ start: point, segments: z.array(segment).min(1).max(100_000) });
+export const pathSchema = z.array(ring).max(10_000);
