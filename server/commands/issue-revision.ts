@@ -1,11 +1,10 @@
 import { canIssue } from "#shared/lifecycle/job-states.ts";
 import { letterToIssue } from "#shared/lifecycle/revision-row.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import { readDocument } from "#shared/mockup/upgrade.ts";
 import { newId } from "../db/new-id.ts";
 import { freezeDrawing } from "../drawing/draw.ts";
 import type { Frozen } from "../drawing/drawing-worker.ts";
-import { AppError, notAllowed, stale, wrongState } from "../http/app-error.ts";
+import { AppError, notAllowed, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { enqueue } from "../jobs/queue.ts";
 import { Revision } from "../models/revision.ts";
@@ -13,20 +12,19 @@ import { Shop } from "../models/shop.ts";
 import { fontHashes } from "../pdf/font-hashes.ts";
 import { isStaff, type Staff } from "../policies/actor.ts";
 import { revisionPolicy } from "../policies/revision.ts";
-import { presentMockup } from "../presenters/mockup.ts";
 import { artworkHashes } from "../queries/artwork-hashes.ts";
-import { dryFitContext } from "../queries/dry-fit-context.ts";
+import { dryFitInput } from "../queries/dry-fit-input.ts";
 import { findJob } from "../queries/find-job.ts";
-import { limitsOf } from "../queries/find-limits.ts";
-import { findMockup } from "../queries/find-mockup.ts";
 import { notesToFreeze } from "../queries/list-notes.ts";
+import { setAsidesToFreeze } from "../queries/list-set-asides.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
+import { draftToJudge } from "./draft-to-judge.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
 
 /**
  * Freezes the saved draft of that very version as the next letter and sets the queue to draw its PDF.
- * Refuses when the draft has moved on, when the dry fit has stops, and while another revision is being prepared.
+ * Refuses when the draft has moved on, when the dry fit has stops that nobody set aside, and while another revision is being prepared.
  */
 export async function issueRevision(
   context: Context,
@@ -45,16 +43,12 @@ export async function issueRevision(
         : `A job that is “${job.state}” takes no new revision.`,
     );
   }
-  const mockup = await findMockup(context, { shopId: job.shopId, jobId });
-  if (!mockup) throw wrongState("There is no mockup yet. Draw it first.");
-  if (mockup.version !== mockupVersion) {
-    throw stale(
-      "The mockup was saved again since. Look at it once more before you issue it.",
-      presentMockup(actor, loaded, mockup),
-    );
-  }
+  const document = await draftToJudge(context, {
+    loaded,
+    mockupVersion,
+    whenStale: "The mockup was saved again since. Look at it once more before you issue it.",
+  });
   const letter = letterToIssue(revisions);
-  const document = savedDocument(mockup.document);
   const { text, sha256 } = await freeze(context, { loaded, actor, document, letter });
   const frozen = {
     state: "preparing",
@@ -77,12 +71,6 @@ export async function issueRevision(
   return { loaded: await refreshJob(context, job), revision };
 }
 
-function savedDocument(text: string): MockupDocument {
-  const read = readDocument(JSON.parse(text));
-  if (!read.ok) throw new Error(`A saved mockup can't be read: ${read.reason}`);
-  return read.document;
-}
-
 async function freeze(
   context: Context,
   { loaded, actor, document, letter }: { loaded: LoadedJob; actor: Staff; document: MockupDocument; letter: string },
@@ -91,6 +79,7 @@ async function freeze(
   const shop = await Shop.findByPk(job.shopId, { transaction: context.transaction, rejectOnEmpty: true });
   if (document.layers.every(({ pieces }) => pieces.length === 0))
     throw wrongState("The mockup has no pieces yet. Bring in artwork first.");
+  const { limits, context: dryFit } = await dryFitInput(context, { shop, job, document });
   const frozen = await freezeDrawing({
     titleBlock: {
       owner: shop.name,
@@ -106,8 +95,9 @@ async function freeze(
     document,
     notes: await notesToFreeze(context, job.id),
     words: job.brief.words,
-    limits: await limitsOf(context, shop.id),
-    dryFit: await dryFitContext(context, { shop, brief: job.brief }),
+    limits,
+    dryFit,
+    setAsides: await setAsidesToFreeze(context, job.id),
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
     fontHashes: fontHashes(),

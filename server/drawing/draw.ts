@@ -1,7 +1,8 @@
+import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Snapshot } from "#shared/mockup/snapshot.ts";
 import { AppError, wrongState } from "../http/app-error.ts";
 import { type Outcome, type WorkerInTurn, workerInTurn } from "../threads/worker-in-turn.ts";
-import type { DrawingAnswer, DrawingQuestion, FreezeInput, Frozen } from "./drawing-worker.ts";
+import type { CheckInput, DrawingAnswer, DrawingQuestion, FreezeInput, Frozen } from "./drawing-worker.ts";
 
 /**
  * A large sign takes seconds to compute and to draw; in a thread of its own it keeps nobody else waiting, and it can be ended.
@@ -19,26 +20,39 @@ const painter: WorkerInTurn<DrawingQuestion, DrawingAnswer> = workerInTurn(progr
  * What a revision freezes. Throws too_large when that takes too long, wrong_state for a piece out of all reach, and too_many_requests
  * while others are being worked out.
  */
-export async function freezeDrawing(
-  input: FreezeInput,
-  { timeMs = drawingLimits.freezeMs }: { timeMs?: number } = {},
-): Promise<Frozen> {
+export async function freezeDrawing(input: FreezeInput, options: { timeMs?: number } = {}): Promise<Frozen> {
+  const answer = await askFreezer({ what: "freeze", input }, options);
+  if (answer.what !== "freeze") throw new Error(`Asked to freeze, the drawing worker answered ${answer.what}.`);
+  return answer.frozen;
+}
+
+/** What the dry fit finds. Throws as freezeDrawing does: it waits in the same line. */
+export async function checkDrawing(input: CheckInput, options: { timeMs?: number } = {}): Promise<readonly Finding[]> {
+  const answer = await askFreezer({ what: "check", input }, options);
+  if (answer.what !== "check") throw new Error(`Asked for a dry fit, the drawing worker answered ${answer.what}.`);
+  return answer.findings;
+}
+
+async function askFreezer(
+  question: DrawingQuestion,
+  { timeMs = drawingLimits.freezeMs }: { timeMs?: number },
+): Promise<DrawingAnswer> {
   if (freezer.waiting() >= drawingLimits.freezesWaiting) {
     throw new AppError("too_many_requests", {
-      detail: "Other revisions are being issued right now. Try again in a minute; nothing is lost.",
+      detail: "Other mockups are being worked out right now. Try again in a minute; nothing is lost.",
     });
   }
-  const told = await freezer.ask({ what: "freeze", input }, { timeMs });
-  if (told.kind === "answer" && told.answer.what === "freeze") return told.answer.frozen;
-  if (told.kind === "answer" && told.answer.what === "out of reach")
-    throw wrongState("A piece reaches far beyond the board. Bring it back, or make it smaller, and issue it then.");
+  const told = await freezer.ask(question, { timeMs });
   if (told.kind === "late") {
     throw new AppError("too_large", {
       detail:
         "This mockup has more in it than can be drawn in half a minute. Take pieces off, or give them simpler outlines.",
     });
   }
-  throw faultOf(told);
+  if (told.kind !== "answer") throw faultOf(told);
+  if (told.answer.what === "out of reach")
+    throw wrongState("A piece reaches far beyond the board. Bring it back, or make it smaller, and try again then.");
+  return told.answer;
 }
 
 /** The proof's PDF, drawn from the frozen snapshot. Throws when it can't be drawn. */

@@ -37,6 +37,8 @@ export type EventFacts = {
   "artwork refused": { name: string; reason: string };
   "artwork removed": { name: string };
   "mockup begun": Record<string, never>;
+  "finding set aside": { finding: string; reason: string };
+  "set-aside taken back": { finding: string };
   "revision preparing": { letter: string };
   "revision issued": { letter: string };
   "revision failed": { letter: string; reason: string };

@@ -18,6 +18,7 @@ import { initPerson } from "./person.ts";
 import { initReply } from "./reply.ts";
 import { initRevision } from "./revision.ts";
 import { initSession } from "./session.ts";
+import { initSetAside } from "./set-aside.ts";
 import { initShareLink } from "./share-link.ts";
 import { initShareLinkPiece } from "./share-link-piece.ts";
 import { initShop } from "./shop.ts";
@@ -50,6 +51,7 @@ export function initModels(sequelize: Sequelize): void {
   initShareLink(sequelize);
   initShareLinkPiece(sequelize);
   initStockItem(sequelize);
+  initSetAside(sequelize);
   initEvent(sequelize);
   associate();
 }

@@ -31,6 +31,8 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "artwork refused": ({ name, reason }) => `${name} could not be taken: ${reason}`,
   "artwork removed": ({ name }) => `Took the artwork ${name} off the job`,
   "mockup begun": () => "Began the mockup",
+  "finding set aside": ({ finding, reason }) => `Set aside the ${finding}: ${reason}`,
+  "set-aside taken back": ({ finding }) => `Took back the setting aside of the ${finding}`,
   "revision preparing": ({ letter }) => `Sent revision ${letter} to be drawn`,
   "revision issued": ({ letter }) => `Revision ${letter} is out`,
   "revision failed": ({ letter, reason }) => `The PDF of revision ${letter} failed: ${reason}`,

@@ -10,6 +10,7 @@ import { registerNoteRoutes } from "./notes.ts";
 import { registerOutgoingMailRoutes } from "./outgoing-mail.ts";
 import { registerPortfolioRoutes } from "./portfolio.ts";
 import { registerRevisionRoutes } from "./revisions.ts";
+import { registerSetAsideRoutes } from "./set-asides.ts";
 import { registerShopRoutes } from "./shop.ts";
 import { registerStockRoutes } from "./stock.ts";
 import { registerSystemRoutes } from "./system.ts";
@@ -31,5 +32,6 @@ export function registerRoutes(routes: Routes): void {
   registerNoteRoutes(routes);
   registerPortfolioRoutes(routes);
   registerRevisionRoutes(routes);
+  registerSetAsideRoutes(routes);
   registerStockRoutes(routes);
 }

@@ -9,6 +9,9 @@ export type BoundFinding = Pick<
 /** A finding that somebody set aside, as it was at that moment. `at` is an ISO instant. */
 export type SetAside = { readonly finding: BoundFinding; readonly at: string };
 
+/** As a revision freezes it: with the reason, and the id and name of who set it aside. */
+export type FrozenSetAside = SetAside & { readonly reason: string; readonly by: string; readonly name: string };
+
 /** A finding and what stands against it. At most one of the two is there. */
 export type Standing<F extends BoundFinding = Finding, S extends SetAside = SetAside> = {
   readonly finding: F;
@@ -78,8 +81,13 @@ export function matchSetAsides<F extends BoundFinding, S extends SetAside>(
 }
 
 /** Findings that nothing stands against. A stop among them keeps a revision from being issued. */
-export function openFindings<F extends BoundFinding>(standings: readonly Standing<F>[]): F[] {
+export function openFindings<F extends BoundFinding>(standings: readonly Standing<F, SetAside>[]): F[] {
   return standings.flatMap(({ finding, setAside }) => (setAside === null ? [finding] : []));
+}
+
+/** What is set aside and found, each once, in the order of the findings. */
+export function setAsidesInForce<S extends SetAside>(standings: readonly Standing<BoundFinding, S>[]): S[] {
+  return [...new Set(standings.flatMap(({ setAside }) => setAside ?? []))];
 }
 
 /** In whole hundredths, so that 0.1 + 0.2 and 0.3 are one value. */

@@ -148,7 +148,7 @@ describe("what is kept", () => {
     expect(await refusal(app, "delete from revisions")).toBe(notPermitted);
   });
 
-  it.each(["events", "decisions", "certificates", "stored_files", "revisions"])(
+  it.each(["events", "decisions", "certificates", "stored_files", "revisions", "set_asides"])(
     "%s are never emptied, not even along with others",
     async (table) => {
       expect(await refusal(owner, `truncate ${table} cascade`)).toBe(restricted);
@@ -220,6 +220,83 @@ describe("a revision", () => {
   }
 });
 
+const checkFails = "23514";
+const insertSetAside = `insert into set_asides (id, shop_id, job_id, rule, severity, binding_sha256, finding, reason,
+  set_aside_by, set_aside_name, set_aside_role, set_aside_at)
+  values ($1, $2, $3, $4, $5, $6, '{"rule":1}', $7, $8, 'P', $9, now())`;
+const setAsideRow = (
+  { shop, job, person }: Pick<Work, "shop" | "job" | "person">,
+  overrides: { id?: string; rule?: number; severity?: string; binding?: string; reason?: string; role?: string } = {},
+): unknown[] => {
+  const row = { id: randomUUID(), rule: 1, severity: "stop", binding: hash, reason: "As meant", role: "maker" };
+  const { id, rule, severity, binding, reason, role } = { ...row, ...overrides };
+  return [id, shop, job, rule, severity, binding, reason, person, role];
+};
+
+describe("what was set aside", () => {
+  it("is never deleted, and changed only once: by being taken back", async () => {
+    const work = await buildWork();
+    const id = randomUUID();
+    expect(await refusal(app, insertSetAside, setAsideRow(work, { id }))).toBe("not refused");
+    for (const change of [
+      "reason = 'other'",
+      "finding = '{}'",
+      "rule = 2",
+      "severity = 'caution'",
+      "binding_sha256 = repeat('f', 64)",
+      "set_aside_name = 'Q'",
+      "set_aside_role = 'owner'",
+      "set_aside_at = now() + interval '1 day'",
+    ]) {
+      const code = await refusal(owner, `update set_asides set ${change} where id = $1`, [id]);
+      expect({ change, code }).toEqual({ change, code: restricted });
+    }
+    expect(await refusal(owner, "delete from set_asides")).toBe(restricted);
+    const takeBack =
+      "update set_asides set taken_back_by = $2, taken_back_name = 'P', taken_back_at = now() where id = $1";
+    expect(await refusal(app, "update set_asides set taken_back_at = now() where id = $1", [id])).toBe(checkFails);
+    expect(await refusal(app, takeBack, [id, work.person])).toBe("not refused");
+    expect(await refusal(app, takeBack, [id, work.person])).toBe(restricted);
+    const undo =
+      "update set_asides set taken_back_by = null, taken_back_name = null, taken_back_at = null where id = $1";
+    expect(await refusal(owner, undo, [id])).toBe(restricted);
+  });
+
+  it("stands once for what it is bound to, until it is taken back", async () => {
+    const work = await buildWork();
+    const id = randomUUID();
+    await app.query(insertSetAside, setAsideRow(work, { id }));
+    expect(await refusal(app, insertSetAside, setAsideRow(work))).toBe("23505");
+    expect(await refusal(app, insertSetAside, setAsideRow(work, { binding: "f".repeat(64) }))).toBe("not refused");
+    expect(await refusal(app, insertSetAside, setAsideRow(await buildWork()))).toBe("not refused");
+    await app.query(
+      "update set_asides set taken_back_by = $2, taken_back_name = 'P', taken_back_at = now() where id = $1",
+      [id, work.person],
+    );
+    expect(await refusal(app, insertSetAside, setAsideRow(work))).toBe("not refused");
+  });
+
+  it.each([
+    { what: "no reason", row: { reason: "" } },
+    { what: "a blank one", row: { reason: " \t\n    " } },
+    { what: "two letters of one", row: { reason: "ok" } },
+    { what: "more than 500", row: { reason: "x".repeat(501) } },
+    { what: "a safety stop by a maker", row: { rule: 36 } },
+    { what: "a rep", row: { role: "rep" } },
+    { what: "an unknown severity", row: { severity: "hint" } },
+  ])("is refused with $what", async ({ row }) => {
+    expect(await refusal(app, insertSetAside, setAsideRow(await buildWork(), row))).toBe(checkFails);
+  });
+
+  it.each([10, 12, 36, 38])("a stop of rule %i was set aside by an owner, a caution of it by either", async (rule) => {
+    const work = await buildWork();
+    expect(await refusal(app, insertSetAside, setAsideRow(work, { rule }))).toBe(checkFails);
+    expect(await refusal(app, insertSetAside, setAsideRow(work, { rule, role: "owner" }))).toBe("not refused");
+    const caution = { rule, severity: "caution", binding: "f".repeat(64) };
+    expect(await refusal(app, insertSetAside, setAsideRow(work, caution))).toBe("not refused");
+  });
+});
+
 describe("shops", () => {
   it("no row can point into another shop", async () => {
     const mine = await buildWork();
@@ -251,6 +328,7 @@ describe("shops", () => {
         "insert into events (shop_id, job_id, at, kind, side, who) values ($1, $2, now(), 'x', 'shop', 'P')",
         [mine.shop, theirs.job],
       ],
+      [insertSetAside, setAsideRow({ ...mine, job: theirs.job })],
       [
         "insert into outgoing_mails (id, shop_id, job_id, kind, address, created_at) values ($1, $2, $3, 'x', 'a@b.example', now())",
         [randomUUID(), mine.shop, theirs.job],
@@ -285,6 +363,9 @@ describe("the application's role", () => {
     "update notes set text = 'x'",
     "update notes set author_name = 'x'",
     "update replies set text = 'x'",
+    "update set_asides set reason = 'other'",
+    "update set_asides set finding = '{}'",
+    "delete from set_asides",
     "create or replace function refuse_change() returns trigger language plpgsql as $$ begin return new; end $$",
     "set session_replication_role = replica",
     "set role standproud_owner",

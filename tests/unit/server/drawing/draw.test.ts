@@ -1,6 +1,6 @@
 import { afterAll, describe, expect, it } from "vitest";
 import { loadKernel } from "#server/artwork/load-kernel.ts";
-import { drawProof, freezeDrawing, stopDrawing } from "#server/drawing/draw.ts";
+import { checkDrawing, drawProof, freezeDrawing, stopDrawing } from "#server/drawing/draw.ts";
 import type { FreezeInput } from "#server/drawing/drawing-worker.ts";
 import { canonicalJson } from "#server/files/canonical-json.ts";
 import { sha256Hex } from "#server/files/sha256.ts";
@@ -8,6 +8,7 @@ import { renderProof } from "#server/pdf/proof.ts";
 import { buildSnapshot } from "#shared/drawing/build-snapshot.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
+import type { Snapshot } from "#shared/mockup/snapshot.ts";
 import { buildLayer, buildSign, plate } from "../../../support/build-sign.ts";
 import { orreryTitleBlock } from "../../../support/orrery-books.ts";
 
@@ -20,6 +21,7 @@ const inputOf = (width: number): FreezeInput => ({
   words: "",
   limits: defaultLimits,
   dryFit: usualContext,
+  setAsides: [],
   paper: "A3",
   artworkHashes: {},
   fontHashes: {},
@@ -49,6 +51,36 @@ describe("freezing in a thread of its own", () => {
   it("tells the stops of the dry fit", async () => {
     const { stops } = await freezeDrawing(inputOf(5000));
     expect(stops.map(({ severity }) => severity)).toContain("stop");
+  });
+
+  it("freezes what was set aside with its reason, is stopped by it no more, and draws it on no sheet", async () => {
+    const { stops } = await freezeDrawing(inputOf(5000));
+    const reason = "The client wants it to hang over";
+    const setAsides = stops.map((finding) => ({
+      finding,
+      reason,
+      by: "p",
+      name: "Ada Maker",
+      at: "2026-12-01T09:00:00Z",
+    }));
+    const elsewhere = setAsides.map((one) => ({ ...one, finding: { ...one.finding, layerKey: "Z" } }));
+    const frozen = await freezeDrawing({ ...inputOf(5000), setAsides: [...elsewhere, ...setAsides] });
+    expect(frozen.stops).toEqual([]);
+    const snapshot = JSON.parse(frozen.text) as Snapshot;
+    expect(snapshot.setAside).toEqual(JSON.parse(JSON.stringify(setAsides)));
+    expect(snapshot.findings).toEqual(expect.arrayContaining([...stops]));
+    const drawn = JSON.stringify(snapshot.drawing);
+    expect(JSON.stringify((JSON.parse((await freezeDrawing(inputOf(5000))).text) as Snapshot).drawing)).toContain(
+      "Stop:",
+    );
+    for (const word of ["Stop:", reason, "Ada Maker"]) expect(drawn).not.toContain(word);
+  });
+
+  it("works the dry fit out alone, and finds what freezing finds", async () => {
+    const { dryFit: context, document, limits } = inputOf(5000);
+    const findings = await checkDrawing({ document, limits, context });
+    expect(findings).toEqual((JSON.parse((await freezeDrawing(inputOf(5000))).text) as Snapshot).findings);
+    expect(findings.length).toBeGreaterThan(0);
   });
 
   it("refuses in words what reaches farther than geometry can be computed", async () => {
