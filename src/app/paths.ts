@@ -20,6 +20,7 @@ export const paths = {
   stock: (shop: string) => `/shop/${shop}/stock`,
   team: (shop: string) => `/shop/${shop}/team`,
   shop: (shop: string) => `/shop/${shop}/shop`,
+  limits: (shop: string) => `/shop/${shop}/limits`,
   outgoingMail: (shop: string) => `/shop/${shop}/outgoing-mail`,
   /** All calculations, or one of them by its id. */
   howWeWorkItOut: (shop: string, calculation?: string) =>

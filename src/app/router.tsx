@@ -74,6 +74,7 @@ export const router = createBrowserRouter([
               { path: paths.stock(":shop"), lazy: page(() => import("./pages/stock-page.tsx"), "StockPage") },
               { path: paths.team(":shop"), lazy: page(() => import("./pages/team-page.tsx"), "TeamPage") },
               { path: paths.shop(":shop"), lazy: page(() => import("./pages/shop-page.tsx"), "ShopPage") },
+              { path: paths.limits(":shop"), lazy: page(() => import("./pages/limits-page.tsx"), "LimitsPage") },
               {
                 path: paths.outgoingMail(":shop"),
                 lazy: page(() => import("./pages/outgoing-mail-page.tsx"), "OutgoingMailPage"),

@@ -11,5 +11,6 @@ export const keys = {
   stock: (shop: string) => ["stock", shop] as const,
   portfolio: (shop: string) => ["portfolio", shop] as const,
   shareLinks: (shop: string) => ["share links", shop] as const,
+  limits: (shop: string) => ["limits", shop] as const,
   outgoingMail: (shop: string) => ["outgoing mail", shop] as const,
 } as const;

@@ -1,5 +1,5 @@
-import { useEffect, useState } from "react";
-import { formatLength } from "#shared/units/format-length.ts";
+import { type Ref, useEffect, useState } from "react";
+import { formatFine, formatLength } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { parseLength } from "#shared/units/parse-length.ts";
 import { Field } from "./field.tsx";
@@ -15,16 +15,31 @@ type LengthFieldProps = {
   readonly error?: string | undefined;
   readonly disabled?: boolean;
   readonly name?: string;
+  /** Shows what a sixteenth of an inch is too coarse for: hundredths of a mm, thousandths of an inch. */
+  readonly fine?: boolean;
+  readonly ref?: Ref<HTMLInputElement>;
 };
 
 /** A length as people write it: 600, 60 cm, 23 5/8. Keeps what was typed until the field is left. */
-export function LengthField({ label, unit, value, onChange, onBlur, hint, error, disabled, name }: LengthFieldProps) {
+export function LengthField({
+  label,
+  unit,
+  value,
+  onChange,
+  onBlur,
+  hint,
+  error,
+  disabled,
+  name,
+  fine = false,
+  ref,
+}: LengthFieldProps) {
   const [text, setText] = useState("");
   const [typing, setTyping] = useState(false);
   const unreadable = Number.isNaN(value);
   useEffect(() => {
-    if (!typing && !unreadable) setText(value === null ? "" : formatLength(value, unit));
-  }, [typing, unreadable, value, unit]);
+    if (!typing && !unreadable) setText(value === null ? "" : written(value, unit, fine));
+  }, [typing, unreadable, value, unit, fine]);
   return (
     <Field
       label={label}
@@ -37,6 +52,7 @@ export function LengthField({ label, unit, value, onChange, onBlur, hint, error,
       autoComplete="off"
       disabled={disabled}
       name={name}
+      ref={ref}
       value={text}
       onFocus={() => setTyping(true)}
       onChange={(event) => {
@@ -50,4 +66,9 @@ export function LengthField({ label, unit, value, onChange, onBlur, hint, error,
       }}
     />
   );
+}
+
+/** Without the unit that stands beside the field. */
+function written(mm: number, unit: LengthUnit, fine: boolean): string {
+  return fine ? formatFine(mm, unit).replace(/ mm$/, "") : formatLength(mm, unit);
 }
