@@ -6,6 +6,7 @@ import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { mockupQueries } from "@/features/mockup/api/queries.ts";
 import { MockupDesk } from "@/features/mockup/panels/mockup-desk.tsx";
 import { MockupReadOnly } from "@/features/mockup/panels/mockup-read-only.tsx";
+import { limitsQuery } from "@/lib/limits-query.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
 import { useReader } from "@/lib/shop-context.ts";
 import { useMedia } from "@/lib/use-media.ts";
@@ -22,9 +23,10 @@ export function MockupPage() {
   const job = useQuery(mockupQueries.job(shop.slug, jobId));
   const mockup = useQuery(mockupQueries.ofJob(shop.slug, jobId));
   const stock = useQuery(mockupQueries.stock(shop.slug));
+  const limits = useQuery(limitsQuery(shop.slug));
   usePageTitle(job.data ? `${job.data.title}, mockup` : "Mockup");
 
-  const failed = [job, mockup, stock].find((query) => query.isError && query.data === undefined);
+  const failed = [job, mockup, stock, limits].find((query) => query.isError && query.data === undefined);
   if (failed)
     return (
       <div className="mx-auto max-w-3xl px-4 py-8">
@@ -35,7 +37,7 @@ export function MockupPage() {
         />
       </div>
     );
-  if (!job.data || !mockup.data || !stock.data)
+  if (!job.data || !mockup.data || !stock.data || !limits.data)
     return (
       <div className="px-4 py-8 sm:px-6">
         <Skeleton label="Loading the mockup" />
@@ -48,6 +50,7 @@ export function MockupPage() {
         job={job.data}
         jobPath={paths.job(shop.slug, jobId)}
         mockup={mockup.data}
+        limits={limits.data.limits}
         why={whyNotToChange({ mayEdit: mockup.data.can.edit, role })}
       />
     );
@@ -60,6 +63,7 @@ export function MockupPage() {
       job={job.data}
       mockup={mockup.data}
       stock={stock.data}
+      limits={limits.data.limits}
       jobPath={paths.job(shop.slug, jobId)}
       // A window that is made narrow and wide again goes on from what was saved last.
       onSaved={(saved) => client.setQueryData(mockupQueries.ofJob(shop.slug, jobId).queryKey, saved)}

@@ -3,6 +3,7 @@ import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import type { Edit } from "../model/editor.ts";
+import type { Site } from "../model/propose-holes.ts";
 import type { Selection } from "../model/selection.ts";
 import type { StockChoices } from "../model/stock-choices.ts";
 
@@ -12,8 +13,7 @@ export type Desk = {
   readonly selection: Selection;
   readonly unit: LengthUnit;
   readonly stock: StockChoices;
-  /** Where the sign will hang, as the brief says. */
-  readonly place: "inside" | "outside";
+  readonly site: Site;
   /** Of the document, or of what it was a moment ago; null until they were first computed. */
   readonly figures: Figures | null;
   /** The document that the figures are of. */

@@ -1,7 +1,6 @@
 import { drawElevation } from "#shared/drawing/elevation.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import { rules } from "#shared/dry-fit/index.ts";
-import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { runDryFit } from "#shared/dry-fit/run-dry-fit.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
@@ -13,7 +12,7 @@ import type { DryFit, Picture, PictureInput } from "./picture-messages.ts";
  * draws the proof.
  */
 export function drawPicture(
-  { document, context, paperScale, dimensions, what }: PictureInput,
+  { document, context, limits, paperScale, dimensions, what }: PictureInput,
   { kernel, grain }: { kernel: Kernel; grain: GrainCache },
 ): Picture {
   const figures = computeFigures(document, kernel);
@@ -30,7 +29,7 @@ export function drawPicture(
     ...(texture ? { texture } : {}),
   });
   grain.keep(document, elevation);
-  const findings = runDryFit({ document, figures, limits: defaultLimits, context, kernel });
+  const findings = runDryFit({ document, figures, limits, context, kernel });
   return { figures, drawing: { elevation, dryFit: fitOf(findings) } };
 }
 

@@ -1,5 +1,6 @@
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
+import type { Limits } from "#shared/dry-fit/limits.ts";
 import type { DryFitContext } from "#shared/dry-fit/rule.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
@@ -8,6 +9,7 @@ import type { Figures } from "#shared/stack/figures.ts";
 export type PictureInput = {
   readonly document: MockupDocument;
   readonly context: DryFitContext;
+  readonly limits: Limits;
   /** Millimetres of the sign to one on paper: sizes lettering and lines for the window. */
   readonly paperScale: number;
   /** Dimension lines around the board, or the sign alone. */

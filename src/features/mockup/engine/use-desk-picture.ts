@@ -1,4 +1,5 @@
 import { useEffect, useMemo, useState } from "react";
+import type { Limits } from "#shared/dry-fit/limits.ts";
 import type { DryFitContext } from "#shared/dry-fit/rule.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Size } from "@/lib/drawing-view.ts";
@@ -11,6 +12,7 @@ type Wanted = {
   readonly document: MockupDocument;
   readonly drag: Drag | null;
   readonly context: DryFitContext;
+  readonly limits: Limits;
   /** The window of the elevation; null before it was measured. */
   readonly room: Size | null;
 };
@@ -19,7 +21,7 @@ type Wanted = {
 const usualRoom = { width: 1100, height: 520 };
 
 /** Figures, elevation and dry fit of the desk, and the view that shows the whole board with its dimensions. */
-export function useDeskPicture({ document, drag, context, room }: Wanted) {
+export function useDeskPicture({ document, drag, context, limits, room }: Wanted) {
   const [margins, setMargins] = useState(usualMargins);
   const { width, height } = document.board;
   const fit = useMemo(() => fitBoard({ width, height }, margins, room ?? usualRoom), [width, height, margins, room]);
@@ -27,8 +29,8 @@ export function useDeskPicture({ document, drag, context, room }: Wanted) {
   const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
   const what = drag === null ? "all" : "figures";
   const input = useMemo(
-    () => ({ document: wanted, context, paperScale, dimensions: true, what }) as const,
-    [wanted, context, paperScale, what],
+    () => ({ document: wanted, context, limits, paperScale, dimensions: true, what }) as const,
+    [wanted, context, limits, paperScale, what],
   );
   const { drawn, figures, failure } = useEngine(room === null ? null : input);
 

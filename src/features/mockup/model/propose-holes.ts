@@ -1,4 +1,4 @@
-import { defaultLimits } from "#shared/dry-fit/limits.ts";
+import type { Limits } from "#shared/dry-fit/limits.ts";
 import { windowOfHole } from "#shared/dry-fit/rules/hole-window.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { flattenPath } from "#shared/geometry/flatten.ts";
@@ -18,20 +18,31 @@ const flatnessMm = 0.2;
 
 type StandoffHold = Extract<Hold, { kind: "standoff" }>;
 
-/** What a hole's window depends on besides the layer: the board under it, and where the sign will hang. */
-export type Place = { readonly document: MockupDocument; readonly place: "inside" | "outside" };
+/** Where the sign will hang, and the limits that the shop works to. */
+export type Site = { readonly place: "inside" | "outside"; readonly limits: Limits };
+/** What a hole's window depends on besides the layer: the board under it, and the site. */
+type Where = { readonly document: MockupDocument; readonly site: Site };
 
 /**
  * Holes towards the four corners of each piece of a layer, as far out as the cap and the rule for holes near an edge
  * allow. On a layer of one piece they come nearer each other until the panel's movement leaves each of them a diameter
  * that hides. A piece too small for four gets fewer; the first hole of the layer is the fixed one.
  */
-export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Hardware; id: string } & Place): Hole[] {
-  const window = holeWindowOfKind(panelHoleOf(hardware), { ...usual, movement: 0 });
+export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Hardware; id: string } & Where): Hole[] {
+  const { limits } = where.site;
+  const window = holeWindowOfKind(panelHoleOf(hardware), {
+    placingError: limits.placingErrorMm,
+    cover: limits.coverMm,
+    movement: 0,
+  });
   const lower = window?.lower ?? passingDiameterMm(hardware);
   const widest = window ? Math.max(window.lower, window.upper) : 0;
   const seen = seenDiameterMm(hardware);
-  const edge = Math.max(2 * widest, seen / 2 + 2, widest / 2 + layer.thickness);
+  const edge = Math.max(
+    limits.edgeDiameters * widest,
+    seen / 2 + 2,
+    widest / 2 + limits.webThicknesses * layer.thickness,
+  );
   const apart = 2 * seen;
   const regions = layer.pieces.map((piece) => placeRegion(flattenPath(piece.path, flatnessMm), piece.placement));
   const holdWith = (points: readonly Point[]): StandoffHold => {
@@ -51,12 +62,8 @@ export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Ha
   return fitDiameters(holdWith(regions.flatMap((region) => cornerHoles(region, constraints, allHaveWindow))), where);
 }
 
-function hasWindow(hold: StandoffHold, hole: Hole, { document, place }: Place): boolean {
-  const window = windowOfHole(hold, hole, {
-    document,
-    limits: defaultLimits,
-    context: { ...usualContext, place },
-  });
+function hasWindow(hold: StandoffHold, hole: Hole, where: Where): boolean {
+  const window = windowOn(where, hold, hole);
   return !window || !isShorter(window.upper, window.lower);
 }
 
@@ -64,10 +71,9 @@ function hasWindow(hold: StandoffHold, hole: Hole, { document, place }: Place): 
  * The holes of a layer with diameters in mm that have play and hide under the cap: the middle of each hole's window, to a
  * tenth, and the least of it for the fixed one. Where no hole can do both it hides, and the dry fit says what is missing.
  */
-export function fitDiameters(hold: StandoffHold, { document, place }: Place): Hole[] {
-  const context = { ...usualContext, place };
+export function fitDiameters(hold: StandoffHold, where: Where): Hole[] {
   return hold.holes.map((hole) => {
-    const window = windowOfHole(hold, hole, { document, limits: defaultLimits, context });
+    const window = windowOn(where, hold, hole);
     if (!window) return hole;
     const { lower, upper } = window;
     // The fixed hole holds the place, so it has the least play there is.
@@ -76,7 +82,9 @@ export function fitDiameters(hold: StandoffHold, { document, place }: Place): Ho
   });
 }
 
-const usual = { placingError: defaultLimits.placingErrorMm, cover: defaultLimits.coverMm };
+function windowOn({ document, site: { place, limits } }: Where, hold: StandoffHold, hole: Hole) {
+  return windowOfHole(hold, hole, { document, limits, context: { ...usualContext, place } });
+}
 
 function isPoint(place: { x: number | null; y: number | null }): place is Point {
   return place.x !== null && place.y !== null;

@@ -35,7 +35,7 @@ type ColourChoicesProps = { readonly shop: string; readonly artwork: Artwork; re
 
 /** The colours of one artwork with what is proposed for each. */
 export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
-  const { stock, place, edit } = useDesk();
+  const { stock, site, edit } = useDesk();
   const client = useQueryClient();
   const proposed = useMemo(
     () =>
@@ -68,7 +68,7 @@ export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
       edit({
         label: `Bring in ${artwork.name}`,
         change: (before) =>
-          bringInArtwork(before, { artwork: { artworkId: artwork.id, widthMm, heightMm, pieces }, choices, id, place }),
+          bringInArtwork(before, { artwork: { artworkId: artwork.id, widthMm, heightMm, pieces }, choices, id, site }),
         choose: (after) => chooseLayer(after, after.layers.at(-1)?.key ?? ""),
       });
       onDone();

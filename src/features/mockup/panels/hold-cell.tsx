@@ -9,7 +9,7 @@ import { CellSelect } from "./cell-controls.tsx";
 
 /** How a layer is held: an adhesive it is bonded with, or the standoff hardware it stands on. */
 export function HoldCell({ layer }: { readonly layer: Layer }) {
-  const { edit, stock, unit, place } = useDesk();
+  const { edit, stock, unit, site } = useDesk();
   const { key, hold } = layer;
   const choices = holdChoices(stock, hold);
   const count = hold.kind === "standoff" ? hold.holes.length : 0;
@@ -23,7 +23,7 @@ export function HoldCell({ layer }: { readonly layer: Layer }) {
       const id = newId();
       edit({
         label: `Stand ${key} off`,
-        change: (before) => standLayer(before, { key, hardware: choice.hardware, id, place }),
+        change: (before) => standLayer(before, { key, hardware: choice.hardware, id, site }),
       });
     }
   }

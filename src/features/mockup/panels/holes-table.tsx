@@ -14,7 +14,7 @@ type HolesTableProps = { readonly layer: Layer; readonly hold: Extract<Hold, { k
 
 /** The standoff holes of a layer: where they are, how wide, and which one is fixed. */
 export function HolesTable({ layer, hold }: HolesTableProps) {
-  const { document, selection, edit, choose, unit, place } = useDesk();
+  const { document, selection, edit, choose, unit, site } = useDesk();
   const { key } = layer;
 
   function add() {
@@ -26,7 +26,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
     const id = newId();
     edit({
       label: `Add a hole to ${key}`,
-      change: (before) => addHole(before, { key, id, place, x: at.x + at.width / 2, y: at.y + at.height / 2 }),
+      change: (before) => addHole(before, { key, id, site, x: at.x + at.width / 2, y: at.y + at.height / 2 }),
       choose: (after) => chooseHole(after, id),
     });
   }
@@ -39,7 +39,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
         <WordButton
           onClick={() => {
             const id = newId();
-            edit({ label: `Propose holes in ${key}`, change: (before) => proposeHoles(before, { key, id, place }) });
+            edit({ label: `Propose holes in ${key}`, change: (before) => proposeHoles(before, { key, id, site }) });
           }}
         >
           Propose holes near the corners
@@ -47,7 +47,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
         <WordButton
           title="Wide enough to have play, narrow enough to hide under the cap"
           onClick={() =>
-            edit({ label: `Fit the holes of ${key}`, change: (before) => fitHoles(before, { key, place }) })
+            edit({ label: `Fit the holes of ${key}`, change: (before) => fitHoles(before, { key, site }) })
           }
         >
           Fit the diameters

@@ -3,6 +3,7 @@ import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
+import type { Limits } from "#shared/dry-fit/limits.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { useRoom } from "@/lib/use-room.ts";
@@ -35,6 +36,8 @@ export type MockupDeskProps = {
   readonly job: Job;
   readonly mockup: Mockup;
   readonly stock: readonly StockItem[];
+  /** What the shop's dry fit keeps to. */
+  readonly limits: Limits;
   /** The job's page, where artwork is added. */
   readonly jobPath: string;
   readonly onSaved: (mockup: Mockup) => void;
@@ -45,7 +48,7 @@ export type MockupDeskProps = {
 
 /** The mockup at work: elevation and section above, schedule and dry fit below. */
 export function MockupDesk(props: MockupDeskProps) {
-  const { shop, unit, personId, job, mockup, jobPath, onSaved, onIssued, renderTools } = props;
+  const { shop, unit, personId, job, mockup, limits, jobPath, onSaved, onIssued, renderTools } = props;
   const [editor, dispatch] = useReducer(nextEditor, mockup.document, startEditor);
   const [drag, setDrag] = useState<Drag | null>(null);
   const [view, setView] = useState<DrawingView | null>(null);
@@ -72,7 +75,7 @@ export function MockupDesk(props: MockupDeskProps) {
     }),
     [unit, whereItHangs, job.brief.words, props.stock],
   );
-  const { fit, drawn, figures, failure, isCurrent } = useDeskPicture({ document, drag, context, room });
+  const { fit, drawn, figures, failure, isCurrent } = useDeskPicture({ document, drag, context, limits, room });
   useUndoKeys(dispatch);
 
   const desk = useMemo(
@@ -81,7 +84,7 @@ export function MockupDesk(props: MockupDeskProps) {
       selection: editor.selection,
       unit,
       stock,
-      place: whereItHangs,
+      site: { place: whereItHangs, limits },
       figures: figures?.figures ?? null,
       figuresOf: figures?.of ?? document,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
@@ -90,7 +93,7 @@ export function MockupDesk(props: MockupDeskProps) {
         dispatch({ kind: "choose", selection });
       },
     }),
-    [document, editor.selection, unit, stock, whereItHangs, figures],
+    [document, editor.selection, unit, stock, whereItHangs, limits, figures],
   );
 
   function show(next: Finding) {

@@ -2,6 +2,7 @@ import { useMemo, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
+import type { Limits } from "#shared/dry-fit/limits.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
@@ -20,12 +21,13 @@ type MockupReadOnlyProps = {
   readonly job: Job;
   readonly jobPath: string;
   readonly mockup: Mockup;
+  readonly limits: Limits;
   /** Why it can only be looked at. */
   readonly why: string;
 };
 
 /** The mockup to look at: the picture and the schedule, for a narrow window and for those who may not change it. */
-export function MockupReadOnly({ unit, job, jobPath, mockup, why }: MockupReadOnlyProps) {
+export function MockupReadOnly({ unit, job, jobPath, mockup, limits, why }: MockupReadOnlyProps) {
   const [view, setView] = useState<DrawingView | null>(null);
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
@@ -41,11 +43,12 @@ export function MockupReadOnly({ unit, job, jobPath, mockup, why }: MockupReadOn
         : {
             document,
             context: { ...usualContext, unit },
+            limits,
             paperScale,
             dimensions,
             what: "all" as const,
           },
-    [document, unit, paperScale, dimensions],
+    [document, unit, limits, paperScale, dimensions],
   );
   const { drawn, figures, failure } = useEngine(input);
 

@@ -33,7 +33,7 @@ export function PlateDialog({ open, onOpenChange }: PlateDialogProps) {
 const plateBounds = { least: 1, most: 5000 };
 
 function PlateForm({ onDone }: { readonly onDone: () => void }) {
-  const { document, stock, unit, place, edit } = useDesk();
+  const { document, stock, unit, site, edit } = useDesk();
   const half = Math.round(Math.min(document.board.width, document.board.height) / 2);
   const [kind, setKind] = useState<"circle" | "rectangle">("circle");
   const [name, setName] = useState("Plate");
@@ -64,7 +64,7 @@ function PlateForm({ onDone }: { readonly onDone: () => void }) {
     edit({
       label: "Add a plate",
       change: (before) =>
-        addPlate(before, { shape, id, place, name, stock: sheet.acrylic, thickness: choice.thickness, hold, nearest }),
+        addPlate(before, { shape, id, site, name, stock: sheet.acrylic, thickness: choice.thickness, hold, nearest }),
       choose: (after) => choosePiece(after, id),
     });
     onDone();

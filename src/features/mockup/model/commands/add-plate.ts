@@ -3,7 +3,7 @@ import { circlePath, rectanglePath } from "#shared/geometry/shapes.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
 import { lengthOf, mostLayers, nameOf, roundMm } from "../limits.ts";
-import type { Place } from "../propose-holes.ts";
+import type { Site } from "../propose-holes.ts";
 import { type NewLayer, newLayer } from "./new-layer.ts";
 
 export type PlateShape =
@@ -19,10 +19,10 @@ export function addPlate(
   {
     shape,
     id,
-    place,
+    site,
     nearest = "viewer",
     ...fields
-  }: NewLayer & { shape: PlateShape; id: string; place: Place["place"]; nearest?: PlateOrder },
+  }: NewLayer & { shape: PlateShape; id: string; site: Site; nearest?: PlateOrder },
 ): MockupDocument {
   const path = pathOf(shape);
   const [key] = nextFreeKeys(document, 1);
@@ -41,7 +41,7 @@ export function addPlate(
     },
     reads: "",
   };
-  const layer = newLayer(fields, { key, pieces: [piece], id: `${id}-h`, document, place });
+  const layer = newLayer(fields, { key, pieces: [piece], id: `${id}-h`, document, site });
   return { ...document, layers: nearest === "wall" ? [layer, ...document.layers] : [...document.layers, layer] };
 }
 

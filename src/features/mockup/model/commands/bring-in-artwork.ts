@@ -4,7 +4,7 @@ import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
 import { coordinateOf, mostLayers, mostPieces, roundMm } from "../limits.ts";
-import type { Place } from "../propose-holes.ts";
+import type { Site } from "../propose-holes.ts";
 import { withoutOpenings } from "../without-openings.ts";
 import { type NewLayer, newLayer } from "./new-layer.ts";
 
@@ -32,8 +32,8 @@ export function bringInArtwork(
     artwork,
     choices,
     id,
-    place,
-  }: { artwork: ArtworkToBringIn; choices: readonly ColourChoice[]; id: string; place: Place["place"] },
+    site,
+  }: { artwork: ArtworkToBringIn; choices: readonly ColourChoice[]; id: string; site: Site },
 ): MockupDocument {
   const dx = document.board.width / 2 - artwork.widthMm / 2;
   const dy = document.board.height / 2 - artwork.heightMm / 2;
@@ -47,7 +47,7 @@ export function bringInArtwork(
       .filter((piece) => piece !== null);
     const key = keys[layers.length - document.layers.length];
     if (pieces.length === 0 || key === undefined || layers.length >= mostLayers) continue;
-    layers.push(newLayer(choice, { key, pieces, id: `${id}-h${order + 1}`, document, place }));
+    layers.push(newLayer(choice, { key, pieces, id: `${id}-h${order + 1}`, document, site }));
   }
   return layers.length === document.layers.length ? document : { ...document, layers };
 }

@@ -2,16 +2,16 @@ import type { Point } from "#shared/geometry/path.ts";
 import { passingDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
 import { coordinateOf, lengthOf, mostHoles } from "../limits.ts";
-import { fitDiameters, type Place, propose } from "../propose-holes.ts";
+import { fitDiameters, propose, type Site } from "../propose-holes.ts";
 import { isSame, withFields } from "../same.ts";
 import { changeLayer, changeLayers } from "./change-layer.ts";
 
-type Where = { readonly key: string; readonly place: Place["place"] };
+type Where = { readonly key: string; readonly site: Site };
 
 /** Puts a hole into a standoff layer, as wide as its window asks for. The first one is the fixed one. */
 export function addHole(
   document: MockupDocument,
-  { key, id, x, y, place }: Where & { id: string } & Point,
+  { key, id, x, y, site }: Where & { id: string } & Point,
 ): MockupDocument {
   const holeX = coordinateOf(x);
   const holeY = coordinateOf(y);
@@ -26,14 +26,14 @@ export function addHole(
       fixed: hold.holes.length === 0,
     };
     const holes = [...hold.holes, added];
-    const fitted = fitDiameters({ ...hold, holes }, { document, place }).at(-1) ?? added;
+    const fitted = fitDiameters({ ...hold, holes }, { document, site }).at(-1) ?? added;
     return [...hold.holes, fitted];
   });
 }
 
 /** Gives every hole of a layer a diameter that has play and hides under the cap, where there is one. */
-export function fitHoles(document: MockupDocument, { key, place }: Where): MockupDocument {
-  return changeHoles(document, key, (hold) => fitDiameters(hold, { document, place }));
+export function fitHoles(document: MockupDocument, { key, site }: Where): MockupDocument {
+  return changeHoles(document, key, (hold) => fitDiameters(hold, { document, site }));
 }
 
 /** Sets a hole's place and diameter in mm. */
@@ -74,9 +74,9 @@ export function fixHole(document: MockupDocument, { holeId }: { holeId: string }
 }
 
 /** Replaces a layer's holes by ones towards the corners of its pieces, with ids made from `id`. */
-export function proposeHoles(document: MockupDocument, { key, id, place }: Where & { id: string }): MockupDocument {
+export function proposeHoles(document: MockupDocument, { key, id, site }: Where & { id: string }): MockupDocument {
   return changeLayer(document, key, (layer) =>
-    withHoles(layer, ({ hardware }) => propose(layer, { hardware, id, document, place })),
+    withHoles(layer, ({ hardware }) => propose(layer, { hardware, id, document, site })),
   );
 }
 

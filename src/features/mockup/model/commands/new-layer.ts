@@ -1,7 +1,7 @@
 import { usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
-import type { Acrylic, Adhesive, Hardware, Layer, Piece } from "#shared/mockup/document.ts";
+import type { Acrylic, Adhesive, Hardware, Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nameOf } from "../limits.ts";
-import { type Place, propose } from "../propose-holes.ts";
+import { propose, type Site } from "../propose-holes.ts";
 
 /** How a new layer is to be held: what it is bonded with, or what it stands on. */
 export type HoldChoice =
@@ -18,7 +18,7 @@ export type NewLayer = {
 /** A layer from what was chosen for it. Hole ids are made from `id`. */
 export function newLayer(
   { name, stock, thickness, hold }: NewLayer,
-  { key, pieces, id, ...where }: { key: string; pieces: Piece[]; id: string } & Place,
+  { key, pieces, id, ...where }: { key: string; pieces: Piece[]; id: string; document: MockupDocument; site: Site },
 ): Layer {
   const bare: Layer = {
     key,

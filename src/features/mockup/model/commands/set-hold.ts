@@ -1,7 +1,7 @@
 import { usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
 import type { Adhesive, Hardware, MockupDocument } from "#shared/mockup/document.ts";
 import { mostOffsetMm, roundMm } from "../limits.ts";
-import { type Place, propose } from "../propose-holes.ts";
+import { propose, type Site } from "../propose-holes.ts";
 import { isSame, withFields } from "../same.ts";
 import { changeLayer } from "./change-layer.ts";
 
@@ -23,13 +23,13 @@ export function bondLayer(
  */
 export function standLayer(
   document: MockupDocument,
-  { key, hardware, id, place }: { key: string; hardware: Hardware; id: string; place: Place["place"] },
+  { key, hardware, id, site }: { key: string; hardware: Hardware; id: string; site: Site },
 ): MockupDocument {
   return changeLayer(document, key, (layer) => {
     const offset = usualOffsetMm(hardware);
     if (layer.hold.kind === "standoff")
       return withFields(layer, { hold: withFields(layer.hold, { hardware, offset }) });
-    const holes = propose(layer, { hardware, id, document, place });
+    const holes = propose(layer, { hardware, id, document, site });
     return { ...layer, hold: { kind: "standoff", hardware, offset, holes }, locate: "hole pattern" };
   });
 }

@@ -6,6 +6,7 @@ import { computeFigures } from "#shared/stack/compute-figures.ts";
 import { addPlate } from "@/features/mockup/model/commands/add-plate.ts";
 import { bringInArtwork } from "@/features/mockup/model/commands/bring-in-artwork.ts";
 import { barrel, brass, cement, chalk, emptyMockup, midnight } from "./sample-mockup.ts";
+import { inside } from "./sites.ts";
 
 const artworkId = "0b8f7c52-2c1e-4a55-9d55-0a2c5a1f9c11";
 
@@ -21,7 +22,7 @@ export function signWithFigures() {
     stock: midnight,
     thickness: 4.5,
     hold: { kind: "standoff", hardware: barrel(19) },
-    place: "inside",
+    site: inside,
   });
   const middle = { x: 110, y: 110 };
   const withRing = bringInArtwork(disc, {
@@ -50,7 +51,7 @@ export function signWithFigures() {
       },
     ],
     id: "ring",
-    place: "inside",
+    site: inside,
   });
   const sign = addPlate(withRing, {
     shape: { kind: "circle", diameter: 40 },
@@ -59,7 +60,7 @@ export function signWithFigures() {
     stock: chalk,
     thickness: 3,
     hold: { kind: "bond", adhesive: cement },
-    place: "inside",
+    site: inside,
   });
   // No job has this artwork, so that the sign can be saved in any: the ring becomes a plate with a short name.
   const document: MockupDocument = {

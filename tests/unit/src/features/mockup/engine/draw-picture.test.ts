@@ -2,6 +2,7 @@ import createClipper from "clipper2-wasm";
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Item } from "#shared/drawing/display-list.ts";
 import { rules } from "#shared/dry-fit/index.ts";
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { clipperKernel } from "#shared/geometry/clipper-kernel.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
@@ -16,7 +17,14 @@ beforeAll(async () => {
   kernel = clipperKernel(await createClipper());
 });
 
-const input = { document, context: usualContext, paperScale: 5, dimensions: true, what: "all" as const };
+const input = {
+  document,
+  context: usualContext,
+  limits: defaultLimits,
+  paperScale: 5,
+  dimensions: true,
+  what: "all" as const,
+};
 const idsOf = (items: readonly Item[]): string[] =>
   items.flatMap((item) => [
     ...("id" in item && item.id !== undefined ? [item.id] : []),

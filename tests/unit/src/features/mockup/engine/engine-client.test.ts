@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { createEngine } from "@/features/mockup/engine/engine-client.ts";
 import type { PictureAnswer, PictureInput, PictureRequest } from "@/features/mockup/engine/picture-messages.ts";
@@ -24,6 +25,7 @@ function startPort() {
 const input = (quantity: number): PictureInput => ({
   document: emptyMockup({ quantity }),
   context: usualContext,
+  limits: defaultLimits,
   paperScale: 5,
   dimensions: true,
   what: "all",

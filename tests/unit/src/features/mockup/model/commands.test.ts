@@ -18,6 +18,7 @@ import { setBoard } from "@/features/mockup/model/commands/set-board.ts";
 import { bondLayer, raiseLayer, standLayer } from "@/features/mockup/model/commands/set-hold.ts";
 import { setLayer } from "@/features/mockup/model/commands/set-layer.ts";
 import { barrel, brass, cement, chalk, emptyMockup, epoxy, midnight } from "../sample-mockup.ts";
+import { inside } from "../sites.ts";
 
 const artworkId = "0b8f7c52-2c1e-4a55-9d55-0a2c5a1f9c11";
 
@@ -25,7 +26,7 @@ const artworkId = "0b8f7c52-2c1e-4a55-9d55-0a2c5a1f9c11";
 function discOnStandoffs(): MockupDocument {
   return addPlate(emptyMockup(), {
     shape: { kind: "circle", diameter: 275 },
-    place: "inside",
+    site: inside,
     id: "disc",
     name: "Night disc",
     stock: midnight,
@@ -68,7 +69,7 @@ describe("bringing in artwork", () => {
     const document = bringInArtwork(emptyMockup(), {
       artwork,
       choices: [choice("#EEEEEE"), choice("#111111"), choice("#999999")],
-      place: "inside",
+      site: inside,
       id: "in",
     });
     expect(document.layers.map(({ key, name, pieces }) => [key, name, pieces.length])).toEqual([
@@ -84,12 +85,12 @@ describe("bringing in artwork", () => {
   it("takes the next free keys, over gaps and without I and O", () => {
     let document = emptyMockup();
     for (let step = 0; step < 8; step++)
-      document = bringInArtwork(document, { artwork, choices: [choice("#EEEEEE")], place: "inside", id: `in${step}` });
+      document = bringInArtwork(document, { artwork, choices: [choice("#EEEEEE")], site: inside, id: `in${step}` });
     document = removeLayer(document, { key: "D" });
     document = bringInArtwork(document, {
       artwork,
       choices: [choice("#EEEEEE"), choice("#111111")],
-      place: "inside",
+      site: inside,
       id: "last",
     });
     expect(document.layers.map(({ key }) => key).join("")).toBe("BCEFGHJDK");
@@ -106,7 +107,7 @@ describe("bringing in artwork", () => {
     const document = bringInArtwork(emptyMockup(), {
       artwork: { ...artwork, pieces: [plate, square(1, "#111111", 40, 40, 20)] },
       choices: [choice("#111111", { solid: true })],
-      place: "inside",
+      site: inside,
       id: "in",
     });
     expect(document.layers[0]?.pieces.map(({ path }) => path.length)).toEqual([1]);
@@ -117,7 +118,7 @@ describe("adding a plate", () => {
   const plate = (nearest?: "wall" | "viewer") =>
     addPlate(discOnStandoffs(), {
       shape: { kind: "rectangle", width: 300, height: 120 },
-      place: "inside",
+      site: inside,
       id: "plate",
       name: " Ground ",
       stock: chalk,
@@ -179,7 +180,7 @@ describe("holding a layer", () => {
   it("proposes holes as far out as the cap allows where the panel moves little", () => {
     const small = addPlate(emptyMockup(), {
       shape: { kind: "circle", diameter: 120 },
-      place: "inside",
+      site: inside,
       id: "disc",
       name: "Small disc",
       stock: midnight,
@@ -201,7 +202,7 @@ describe("holding a layer", () => {
       standLayer(bondLayer(discOnStandoffs(), { key: "B", adhesive: epoxy }), {
         key: "B",
         hardware: thin,
-        place: "inside",
+        site: inside,
         id: "h",
       }),
     );
@@ -212,7 +213,7 @@ describe("holding a layer", () => {
   it("goes from bond to standoffs and back, changing how the place is found", () => {
     const bonded = addPlate(emptyMockup(), {
       shape: { kind: "rectangle", width: 200, height: 80 },
-      place: "inside",
+      site: inside,
       id: "plate",
       name: " Lettering ",
       stock: chalk,
@@ -220,10 +221,10 @@ describe("holding a layer", () => {
       hold: { kind: "bond", adhesive: cement },
     });
     expect(bonded.layers[0]).toMatchObject({ name: "Lettering", locate: "none" });
-    const stood = standLayer(bonded, { key: "B", hardware: barrel(25), place: "inside", id: "h" });
+    const stood = standLayer(bonded, { key: "B", hardware: barrel(25), site: inside, id: "h" });
     expect(stood.layers[0]).toMatchObject({ locate: "hole pattern", hold: { kind: "standoff", offset: 25 } });
     expect(holesOf(stood)).toHaveLength(4);
-    const other = standLayer(stood, { key: "B", hardware: barrel(12), place: "inside", id: "again" });
+    const other = standLayer(stood, { key: "B", hardware: barrel(12), site: inside, id: "again" });
     expect(holesOf(other)).toBe(holesOf(stood));
     expect(other.layers[0]?.hold).toMatchObject({ offset: 12 });
     const back = bondLayer(other, { key: "B", adhesive: epoxy });
@@ -240,7 +241,7 @@ describe("holding a layer", () => {
   });
 
   it("adds, moves, fixes and removes holes, always with one fixed", () => {
-    let document = addHole(discOnStandoffs(), { key: "B", place: "inside", id: "fifth", x: 300, y: 200 });
+    let document = addHole(discOnStandoffs(), { key: "B", site: inside, id: "fifth", x: 300, y: 200 });
     document = setHole(document, { holeId: "fifth", x: 310.5, diameter: 8 });
     expect(holesOf(document)[4]).toEqual({ id: "fifth", x: 310.5, y: 200, diameter: 8, fixed: false });
     document = fixHole(document, { holeId: "fifth" });
@@ -248,7 +249,7 @@ describe("holding a layer", () => {
     document = removeHole(document, { holeId: "fifth" });
     expect(holesOf(document).map(({ fixed }) => fixed)).toEqual([true, false, false, false]);
     expect(removeHole(document, { holeId: "fifth" })).toBe(document);
-    expect(holesOf(proposeHoles(document, { key: "B", place: "inside", id: "new" })).map(({ id }) => id)).toEqual([
+    expect(holesOf(proposeHoles(document, { key: "B", site: inside, id: "new" })).map(({ id }) => id)).toEqual([
       "new-1",
       "new-2",
       "new-3",
@@ -261,7 +262,7 @@ describe("pieces", () => {
   const two = () =>
     addPlate(discOnStandoffs(), {
       shape: { kind: "rectangle", width: 60, height: 20 },
-      place: "inside",
+      site: inside,
       id: "bar",
       name: "Bar",
       stock: brass,
@@ -313,7 +314,7 @@ describe("what changes nothing gives the same document", () => {
     ["the same name with blanks", setLayer(document, { key: "B", name: "  Night disc " })],
     ["an empty name", setLayer(document, { key: "B", name: " " })],
     ["a thickness over 100 mm", setLayer(document, { key: "B", thickness: 101 })],
-    ["the same hardware", standLayer(document, { key: "B", hardware: barrel(19), place: "inside", id: "x" })],
+    ["the same hardware", standLayer(document, { key: "B", hardware: barrel(19), site: inside, id: "x" })],
     ["the same offset", raiseLayer(document, { key: "B", offset: 19 })],
     ["moving the last layer to the viewer", moveLayer(document, { key: "B", towards: "viewer" })],
     ["removing a layer that is not there", removeLayer(document, { key: "Z" })],
@@ -324,7 +325,7 @@ describe("what changes nothing gives the same document", () => {
       "a plate of no size",
       addPlate(document, {
         shape: { kind: "circle", diameter: 0 },
-        place: "inside",
+        site: inside,
         id: "p",
         name: "P",
         stock: brass,
@@ -341,7 +342,7 @@ describe("the order of layers", () => {
   it("changes places and keeps keys", () => {
     const document = addPlate(discOnStandoffs(), {
       shape: { kind: "circle", diameter: 40 },
-      place: "inside",
+      site: inside,
       id: "sun",
       name: "Sun",
       stock: brass,

@@ -7,6 +7,7 @@ import { nextEditor, startEditor } from "@/features/mockup/model/editor.ts";
 import { depthScaleFor } from "@/features/mockup/model/section-scale.ts";
 import { chooseLayer } from "@/features/mockup/model/selection.ts";
 import { barrel, emptyMockup, midnight } from "../sample-mockup.ts";
+import { inside } from "../sites.ts";
 
 const sign = addPlate(emptyMockup(), {
   shape: { kind: "circle", diameter: 200 },
@@ -15,7 +16,7 @@ const sign = addPlate(emptyMockup(), {
   stock: midnight,
   thickness: 5,
   hold: { kind: "standoff", hardware: barrel(19) },
-  place: "inside",
+  site: inside,
 });
 
 describe("the editor", () => {

@@ -10,10 +10,11 @@ import {
   nothingChosen,
 } from "@/features/mockup/model/selection.ts";
 import { barrel, brass, cement, emptyMockup, midnight } from "../sample-mockup.ts";
+import { inside } from "../sites.ts";
 
 const disc = addPlate(emptyMockup(), {
   shape: { kind: "circle", diameter: 200 },
-  place: "inside",
+  site: inside,
   id: "disc",
   name: "Disc",
   stock: midnight,
@@ -22,7 +23,7 @@ const disc = addPlate(emptyMockup(), {
 });
 const document = addPlate(disc, {
   shape: { kind: "circle", diameter: 40 },
-  place: "inside",
+  site: inside,
   id: "sun",
   name: "Sun",
   stock: brass,
