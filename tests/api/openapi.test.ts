@@ -4,11 +4,13 @@ import * as artworks from "#shared/contracts/artworks.ts";
 import * as clients from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
+import * as limits from "#shared/contracts/limits.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
 import * as revisions from "#shared/contracts/revisions.ts";
+import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
@@ -33,11 +35,13 @@ const modules = [
   artworks,
   clients,
   jobs,
+  limits,
   mockups,
   notes,
   outgoingMail,
   portfolio,
   revisions,
+  setAsides,
   shop,
   stock,
   system,

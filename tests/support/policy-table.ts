@@ -9,6 +9,7 @@ import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
 import * as revisions from "#shared/contracts/revisions.ts";
+import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
@@ -163,6 +164,15 @@ export const policyTable: readonly PolicyRow[] = [
   row(mockups.saveMockup, makers, (world) => ({
     params: { ...world.params, jobId: world.toSaveJobId },
     body: { version: 0, document: world.document },
+  })),
+
+  row(setAsides.listSetAsides, staff, job),
+  row(setAsides.setAsideFinding, makers, (world) => ({
+    params: { ...world.params, jobId: world.toFit.jobId },
+    body: { mockupVersion: 1, finding: world.toFit.finding, reason: "A jig finds the place" },
+  })),
+  row(setAsides.takeBackSetAside, makers, (world) => ({
+    params: { ...world.params, jobId: world.toFit.jobId, setAsideId: world.toFit.setAsideId },
   })),
 
   row(revisions.listRevisions, readers, job),

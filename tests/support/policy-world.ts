@@ -2,14 +2,18 @@ import { newId } from "#server/db/new-id.ts";
 import { Artwork } from "#server/models/artwork.ts";
 import { Session } from "#server/models/session.ts";
 import { changeJob, openJob, setConsent } from "#shared/contracts/jobs.ts";
+import { saveMockup } from "#shared/contracts/mockups.ts";
 import { addNote } from "#shared/contracts/notes.ts";
 import { listOutgoingMail } from "#shared/contracts/outgoing-mail.ts";
 import { makeShareLink } from "#shared/contracts/portfolio.ts";
 import { approveRevision, getRevision, getSheet, type Revision } from "#shared/contracts/revisions.ts";
+import { setAsideFinding } from "#shared/contracts/set-asides.ts";
 import { inviteMember } from "#shared/contracts/shop.ts";
+import { boundFinding } from "#shared/dry-fit/set-aside.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { TestApp } from "./app.ts";
-import { buildSign } from "./build-sign.ts";
+import { buildLayer, buildSign, plate } from "./build-sign.ts";
+import { dryFitOf } from "./dry-fit.ts";
 import { buildClient, buildContact } from "./factories/client.ts";
 import { buildMember } from "./factories/member.ts";
 import { buildPerson } from "./factories/person.ts";
@@ -58,6 +62,8 @@ export async function buildPolicyWorld(app: TestApp) {
   });
   await app.runJobs();
   const toSave = await visitors.owner.get(openJob, { params, body: { clientId, title: "To save" } });
+
+  const toFit = await jobWithFindings(visitors.owner, params, clientId);
 
   const shareLink = async () =>
     visitors.owner.get(makeShareLink, { params, body: { label: "A link", jobIds: [showable.world.job.id], days: 7 } });
@@ -108,6 +114,7 @@ export async function buildPolicyWorld(app: TestApp) {
       "",
     toMoveJobId: toMove.world.job.id,
     toSaveJobId: toSave.id,
+    toFit,
     acknowledgedIds,
     artworkId: main.id,
     noteId: note.id,
@@ -124,6 +131,24 @@ export async function buildPolicyWorld(app: TestApp) {
     document,
     next: unique,
   };
+}
+
+/** A job whose saved draft has two findings: one to set aside, and one that is. */
+async function jobWithFindings(owner: Visitor, params: World["params"], clientId: string) {
+  const { id: jobId, brief } = await owner.get(openJob, { params, body: { clientId, title: "To fit" } });
+  const document = buildSign(
+    ["B", "C"].map((key, index) => {
+      const [x, y] = [150 + 250 * index, 200] as const;
+      return buildLayer(key, [plate(`p${key}`, 90, 40, [x, y])], { locate: "none" });
+    }),
+  );
+  await owner.get(saveMockup, { params: { ...params, jobId }, body: { version: 0, document } });
+  const findings = await dryFitOf(document, { context: { words: brief.words } });
+  const [finding, other] = findings.filter(({ rule }) => rule === 20).map(boundFinding);
+  if (!finding || !other) throw new Error("Nothing is found on this sign.");
+  const body = { mockupVersion: 1, finding: other, reason: "A jig finds the place" };
+  const { id: setAsideId } = await owner.get(setAsideFinding, { params: { ...params, jobId }, body });
+  return { jobId, finding, setAsideId };
 }
 
 /** As many as there are actors. */
