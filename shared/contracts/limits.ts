@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { checkLimits } from "../dry-fit/check-limits.ts";
+import { crossedLimits } from "../dry-fit/check-limits.ts";
 import { limitsSchema } from "../dry-fit/limits.ts";
 import { inShop, instant, nothing } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
@@ -43,7 +43,7 @@ export const changeLimits = endpoint({
   body: z.strictObject({
     version: z.number().int().min(0),
     limits: wholeSet.superRefine((limits, context) => {
-      for (const { key, detail } of checkLimits(limits, "mm"))
+      for (const { key, detail } of crossedLimits(limits, "mm"))
         context.addIssue({ code: "custom", path: [key], message: detail });
     }),
   }),

@@ -22,14 +22,16 @@ export function checkLimits(limits: WrittenLimits, unit: LengthUnit): LimitFault
     return detail === null ? [] : [{ key, detail }];
   });
   const faulty = new Set(alone.map(({ key }) => key));
-  const order = limitOrders.filter(([low, high]) => !faulty.has(low) && !faulty.has(high));
-  return [
-    ...alone,
-    ...order.flatMap(([low, high]): LimitFault[] => {
-      const most = limits[high];
-      return most === null || (limits[low] ?? 0) <= most ? [] : [{ key: low, detail: tooLate(high, most, unit) }];
-    }),
-  ];
+  return [...alone, ...crossedLimits(limits, unit).filter(({ key }) => !faulty.has(key))];
+}
+
+/** The pairs of which the first is over the second. What is empty or no number is over nothing. */
+export function crossedLimits(limits: WrittenLimits, unit: LengthUnit): LimitFault[] {
+  return limitOrders.flatMap(([low, high]): LimitFault[] => {
+    const [value, most] = [limits[low], limits[high]];
+    const isOver = value !== null && most !== null && value > most;
+    return isOver ? [{ key: low, detail: tooLate(high, most, unit) }] : [];
+  });
 }
 
 /**

@@ -121,6 +121,41 @@ export const screens: readonly Screen[] = [
   { who: "owner", name: "stock", at: "stock", path: () => paths.stock(shop), ready: text("Midnight") },
   { who: "owner", name: "team", at: "team", path: () => paths.team(shop), ready: text("maker@copperlark.example") },
   { who: "owner", name: "shop", at: "shop", path: () => paths.shop(shop), ready: heading(/./) },
+  {
+    who: "owner",
+    name: "limits",
+    at: "limits",
+    path: () => paths.limits(shop),
+    ready: (page) => page.getByLabel("Reach over its support"),
+  },
+  {
+    who: "owner",
+    name: "limits-refused",
+    at: "limits",
+    path: () => paths.limits(shop),
+    ready: (page) => page.getByLabel("Reach over its support"),
+    open: async (page) => {
+      await page.getByLabel("Area off its support, for a caution").fill("45");
+      await page.getByLabel("Cover of cap and barrel over the hole's edge").fill("wide");
+      await page.getByLabel("Width of the bed").fill("1220");
+      await press("Save the limits")(page);
+      await page.getByText("Not over 30 %").waitFor();
+    },
+  },
+  {
+    who: "rep",
+    name: "limits-to-read",
+    at: "limits",
+    path: () => paths.limits(shop),
+    ready: text("You may look at the limits. Owners set them."),
+  },
+  {
+    who: "client",
+    name: "limits-not-theirs",
+    at: "limits",
+    path: () => paths.limits(shop),
+    ready: heading(/not/i),
+  },
   { who: "owner", name: "mail", at: "outgoingMail", path: () => paths.outgoingMail(shop), ready: text("Look again") },
   {
     who: "owner",
