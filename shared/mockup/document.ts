@@ -11,7 +11,7 @@ import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema
 export const documentVersion = 2;
 
 /** Nothing smaller is a board: figures and shadows of one have no meaning. */
-const leastBoardMm = 20;
+export const leastBoardMm = 20;
 const boardSide = length.min(leastBoardMm, `A board is at least ${leastBoardMm} mm wide and high.`);
 const key = z.string().regex(/^[A-Z]{1,2}$/, "A layer's key is one or two capital letters.");
 

@@ -1,5 +1,6 @@
+import { longestMm } from "#shared/mockup/schema-parts.ts";
+
 /** The bounds of the document's schema, for commands that hold a value inside instead of refusing it. */
-export const longestMm = 10_000;
 export const mostLayers = 60;
 export const mostPieces = 2000;
 export const mostHoles = 1000;
@@ -24,10 +25,10 @@ export function coordinateOf(value: number): number | null {
 }
 
 /** A length over 0 and up to `most` mm, rounded; null when it is not one. */
-export function lengthOf(value: number, most = longestMm): number | null {
+export function lengthOf(value: number, most = longestMm, least = 0): number | null {
   if (!Number.isFinite(value)) return null;
   const rounded = roundMm(value);
-  return rounded > 0 && rounded <= most ? rounded : null;
+  return rounded > 0 && rounded >= least && rounded <= most ? rounded : null;
 }
 
 /** Degrees clockwise, 0 up to 360, to a hundredth; null for what is no number. */

@@ -1,6 +1,5 @@
 import type { StockItem } from "#shared/contracts/stock.ts";
-import { standardScrews } from "#shared/materials/standard-stock.ts";
-import type { Stock } from "#shared/materials/stock.ts";
+import { stockOfItems } from "#shared/contracts/stock-on-hand.ts";
 import type { Acrylic, Adhesive, Hardware, Hold, Wood } from "#shared/mockup/document.ts";
 import type { HoldChoice } from "./commands/new-layer.ts";
 import { isSame } from "./same.ts";
@@ -40,19 +39,8 @@ export function stockChoices(items: readonly StockItem[]): StockChoices {
   };
 }
 
-/** The stock as the dry fit looks at it. */
-export function stockOnHand(items: readonly StockItem[]): Stock {
-  const { acrylics, woods, adhesives } = stockChoices(items);
-  return {
-    acrylics: acrylics.map((one) => ({ ...one, sheets: [] })),
-    woods,
-    hardware: items.flatMap((item) =>
-      item.kind === "hardware" ? [{ hardware: { ...item.hardware, stockId: item.id }, quantity: item.quantity }] : [],
-    ),
-    screws: standardScrews,
-    adhesives,
-  };
-}
+/** The stock as the dry fit looks at it, here and on the server. */
+export const stockOnHand = stockOfItems;
 
 /** The same sheet, wood, adhesive or hardware, whichever row of the stock list it was taken from. */
 export function isSameStock<T extends { readonly stockId: string | null }>(a: T, b: T): boolean {

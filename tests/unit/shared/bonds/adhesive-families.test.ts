@@ -7,7 +7,7 @@ import {
   tackAndWick,
   waitingHours,
 } from "#shared/bonds/adhesive-families.ts";
-import { adhesiveSchema } from "#shared/mockup/document.ts";
+import { adhesiveSchema } from "#shared/mockup/stock-schemas.ts";
 
 const families: readonly Family[] = adhesiveSchema.shape.family.options;
 const surfaces: readonly Surface[] = ["acrylic", "coated back", "raw wood", "finished wood"];

@@ -7,7 +7,14 @@ const filesIn = (folder: string) => readdirSync(new URL(`${folder}/`, shared)).f
 
 const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour"];
 /** Parts of calculations that are explained with the ones that use them. */
-const parts = ["legibility/accessible-limits.ts", "pieces/area-moments.ts", "pieces/same-outline.ts"];
+const parts = [
+  "hardware/check-hardware.ts",
+  "hardware/panel-hole.ts",
+  "hardware/standoff-parts.ts",
+  "legibility/accessible-limits.ts",
+  "pieces/area-moments.ts",
+  "pieces/same-outline.ts",
+];
 
 it("every calculation of a subject is explained, or is a part of one that is", () => {
   const explained = new Set(

@@ -72,7 +72,7 @@ describe("the section", () => {
   });
 
   it("of a bare board has no depth but its own", () => {
-    const list = draw(1, { ...orreryBooks(), layers: [], hanging: { kind: "none", gap: 0 } });
+    const list = draw(1, { ...orreryBooks(), layers: [], hanging: { ...orreryBooks().hanging, kind: "none", gap: 0 } });
     expect(textBoxesOf(list).map(({ text }) => text)).toEqual(["20", "20", "A", "20", "Top at"]);
   });
 });

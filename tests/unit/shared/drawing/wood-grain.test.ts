@@ -27,30 +27,31 @@ function roughness(png: PNG, box: { width: number; height: number }) {
 
 describe("wood grain", () => {
   it("has the same bytes for the same board, also after another one was drawn", () => {
-    const first = woodGrain(board, pine, 7);
-    const other = woodGrain({ ...board, width: 500 }, pine, 7);
+    const first = woodGrain(board, pine, 7, 0);
+    const other = woodGrain({ ...board, width: 500 }, pine, 7, 0);
     expect(other.pngBase64).not.toBe(first.pngBase64);
-    expect(woodGrain({ ...board }, pine, 7)).toEqual(first);
-    expect(woodGrain(board, pine, 8).pngBase64).not.toBe(first.pngBase64);
+    expect(woodGrain({ ...board }, pine, 7, 0)).toEqual(first);
+    expect(woodGrain(board, pine, 8, 0).pngBase64).not.toBe(first.pngBase64);
   });
 
   it.each([
     { colour: pine, red: 230, name: "pine" },
     { colour: "#6B4A32", red: 107, name: "walnut" },
   ])("keeps $name's own colour on the whole", ({ colour, red }) => {
-    expect(Math.abs(mean(read(woodGrain(board, colour, 7)), 0) - red)).toBeLessThan(14);
+    expect(Math.abs(mean(read(woodGrain(board, colour, 7, 0)), 0) - red)).toBeLessThan(14);
   });
 
   it.each([
-    { box: board, along: "x", across: "y" },
-    { box: { ...board, width: 300 }, along: "y", across: "x" },
-  ] as const)("runs along $along on a board of $box.width by $box.height", ({ box, along, across }) => {
-    const rough = roughness(read(woodGrain(box, pine, 7)), box);
+    { turn: 0, along: "x", across: "y" },
+    { turn: 90, along: "y", across: "x" },
+    { turn: 180, along: "x", across: "y" },
+  ] as const)("turned $turn° runs along $along", ({ turn, along, across }) => {
+    const rough = roughness(read(woodGrain(board, pine, 7, turn)), board);
     expect(rough[across]).toBeGreaterThan(4 * rough[along]);
   });
 
   it("stays small on the largest board", () => {
-    const png = read(woodGrain({ ...board, width: 10_000, height: 10_000 }, pine, 7));
+    const png = read(woodGrain({ ...board, width: 10_000, height: 10_000 }, pine, 7, 0));
     expect(png.width * png.height).toBeLessThan(170_000);
   });
 });

@@ -99,7 +99,7 @@ it("the same sign gives the same findings, and layers that are moved as one give
           { hold: held },
         ),
       ),
-      { board: { outline: "rectangle", width: 3000, height: 3000, measures: "body" } },
+      { board: { outline: { kind: "rectangle" }, width: 3000, height: 3000, measures: "body" } },
     );
   await fc.assert(
     fc.asyncProperty(layers, fc.integer({ min: 0, max: 1000 }), async (drawn, shift) => {

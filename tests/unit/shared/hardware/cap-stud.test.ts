@@ -3,6 +3,7 @@ import { barrelAddsUp, nearestBarrel } from "#shared/hardware/barrel-offset.ts";
 import { capStudGrip } from "#shared/hardware/grip.ts";
 import { holeEdge } from "#shared/hardware/hole-edge.ts";
 import { screwMisfits } from "#shared/hardware/screw-fit.ts";
+import type { CapStud } from "#shared/mockup/document.ts";
 import { buildCapStud } from "../../../support/build-sign.ts";
 
 describe("the grip", () => {
@@ -46,7 +47,15 @@ describe("the barrel", () => {
 });
 
 describe("the screw", () => {
-  const screw = { name: "No. 6", diameter: 3.5052, length: 16, headDiameter: 7.0866, headHeight: 2.06 };
+  const screw: CapStud["screw"] = {
+    name: "No. 6",
+    gauge: 6,
+    head: "flat",
+    diameter: 3.5052,
+    length: 16,
+    headDiameter: 7.0866,
+    headHeight: 2.06,
+  };
   it.each([
     { floorHole: 4, boreDiameter: 7.5, misfits: [] },
     { floorHole: 3.5052, boreDiameter: 7.0866, misfits: [] },

@@ -7,18 +7,20 @@ import { sheetBand } from "#shared/materials/sheet-tolerance.ts";
 import {
   standardAcrylics,
   standardAdhesives,
+  standardHardware,
   standardScrews,
   standardStandoffs,
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
-import { acrylicSchema, adhesiveSchema, capStudSchema, woodSchema } from "#shared/mockup/document.ts";
+import { hardwareSchema } from "#shared/mockup/hardware-schemas.ts";
+import { acrylicSchema, adhesiveSchema, woodSchema } from "#shared/mockup/stock-schemas.ts";
 
 describe("every entry of the stock list passes the document's schema", () => {
   it.each(standardAcrylics.map(({ acrylic }) => acrylic))("$name", (acrylic) => {
     expect(acrylicSchema.parse(acrylic)).toEqual(acrylic);
   });
   it.each(standardWoods.map(({ wood }) => wood))("$name", (wood) => expect(woodSchema.parse(wood)).toEqual(wood));
-  it.each(standardStandoffs)("$name", (standoff) => expect(capStudSchema.parse(standoff)).toEqual(standoff));
+  it.each(standardHardware)("$name", (hardware) => expect(hardwareSchema.parse(hardware)).toEqual(hardware));
   it.each(standardAdhesives)("$name", (adhesive) => expect(adhesiveSchema.parse(adhesive)).toEqual(adhesive));
 });
 
@@ -26,7 +28,7 @@ it("names are used once, and thicknesses go up", () => {
   const names = [
     ...standardAcrylics.map(({ acrylic }) => acrylic.name),
     ...standardWoods.map(({ wood }) => wood.name),
-    ...standardStandoffs.map(({ name }) => name),
+    ...standardHardware.map(({ name }) => name),
     ...standardAdhesives.map(({ name }) => name),
   ];
   expect(new Set(names).size).toBe(names.length);
@@ -45,7 +47,7 @@ it("standoffs come in two diameters and three lengths, screws in four", () => {
     "19 × 19",
     "19 × 25",
   ]);
-  expect(standardScrews.map(({ length }) => length)).toEqual([12, 16, 19, 25]);
+  expect(standardScrews.map(({ length }) => length)).toEqual([12, 16, 19, 25, 32, 38, 45]);
 });
 
 describe.each(standardStandoffs)("$name", (standoff) => {

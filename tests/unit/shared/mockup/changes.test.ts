@@ -48,6 +48,7 @@ it("a document does not differ from itself, nor from a copy out of other stock e
 });
 
 describe("the whole sign", () => {
+  const oil = { kind: "clear coat" as const, name: "Oil", base: "oil or shellac" as const, dryingHours: 12 };
   const walnut = standardWoods[2]?.wood ?? before.backer.stock;
   it.each([
     { change: { board: { ...before.board, width: 650 } }, text: "Board 600 × 400 mm becomes 650 × 400 mm" },
@@ -60,10 +61,24 @@ describe("the whole sign", () => {
       text: "Backer of Eastern white pine becomes Black walnut",
     },
     { change: { backer: { ...before.backer, thickness: 25 } }, text: "Backer 18 mm thick becomes 25 mm" },
-    { change: { backer: { ...before.backer, finish: "Oil" } }, text: "Finish of the backer: none becomes Oil" },
+    {
+      change: { backer: { ...before.backer, finish: [oil, oil] } },
+      text: "Finish of the backer: bare becomes Oil, 2 coats",
+    },
+    { change: { backer: { ...before.backer, grainTurn: 90 } }, text: "Grain turned 0° becomes 90°" },
+    {
+      change: { board: { ...before.board, outline: { kind: "ellipse" as const } } },
+      text: "Outline of the board: rectangle becomes ellipse",
+    },
+    { change: { hanging: { ...before.hanging, pose: "lying" as const } }, text: "The sign is upright, then lying" },
+    { change: { hanging: { ...before.hanging, carriesKg: 5 } }, text: "Other load stated for the wall's fixing" },
+    {
+      change: { hanging: { ...before.hanging, points: [{ x: 300, y: 40 }] } },
+      text: "The wall's fixings are set otherwise",
+    },
     { change: { quantity: 3 }, text: "Quantity 1 becomes 3" },
-    { change: { hanging: { kind: "cleat" as const, gap: 0 } }, text: "Hanging: none becomes cleat" },
-    { change: { hanging: { kind: "none" as const, gap: 6 } }, text: "Gap to the wall 0 mm becomes 6 mm" },
+    { change: { hanging: { ...before.hanging, kind: "cleat" as const } }, text: "Hanging: none becomes cleat" },
+    { change: { hanging: { ...before.hanging, gap: 6 } }, text: "Gap to the wall 0 mm becomes 6 mm" },
     {
       change: { presentation: { ...before.presentation, viewingDistance: 6000 } },
       text: "Viewing distance 3000 mm becomes 6000 mm",
@@ -130,7 +145,7 @@ describe("a layer", () => {
     const epoxy = standardAdhesives[3];
     if (!epoxy) throw new Error("There is no epoxy.");
     const texts = (was: Layer["hold"], is: Layer["hold"]) => listChanges(glued(was), glued(is)).map(({ text }) => text);
-    expect(texts(bondHold, { kind: "bond", adhesive: epoxy })).toEqual([
+    expect(texts(bondHold, { kind: "bond", adhesive: epoxy, tack: null })).toEqual([
       "B, Night disc: bonded with Wicking cement becomes bonded with Slow epoxy",
     ]);
     expect(texts(pocketHold(2), pocketHold(2.5))).toEqual([

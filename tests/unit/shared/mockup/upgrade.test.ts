@@ -1,5 +1,6 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
+import { z } from "zod";
 import { documentVersion } from "#shared/mockup/document.ts";
 import { readDocument, upgradeTo } from "#shared/mockup/upgrade.ts";
 import { buildLayer, buildSign, plate } from "../../../support/build-sign.ts";
@@ -11,12 +12,38 @@ it.each(Array.from({ length: documentVersion }, (_, index) => index + 1))(
   "the kept sample of version %i opens",
   (version) => {
     const read = readDocument(sample(version));
-    expect(read).toMatchObject({
-      ok: true,
-      document: { version: documentVersion, layers: [{ key: "B" }, { key: "C" }] },
-    });
+    expect(read).toMatchObject({ ok: true, document: { version: documentVersion } });
+    if (read.ok) expect(read.document.layers.map(({ key }) => key).slice(0, 2)).toEqual(["B", "C"]);
   },
 );
+
+it("a document of version 1 keeps what it said and gets what it meant", () => {
+  const read = readDocument(sample(1));
+  if (!read.ok) throw new Error(read.reason);
+  const { board, backer, hanging, layers } = read.document;
+  expect(board.outline).toEqual({ kind: "rectangle" });
+  expect(hanging).toEqual({ kind: "cleat", gap: 6, pose: "upright", carriesKg: null, points: [] });
+  expect(backer).toMatchObject({ grainTurn: 0, finish: [], stock: { movementPerPoint: 0.00267 } });
+  expect(
+    layers.every(({ marked, pieces }) => marked === "not stated" && pieces.every(({ reads }) => reads === "")),
+  ).toBe(true);
+  expect(layers[0]?.hold).toMatchObject({ hardware: { screw: { gauge: 6, head: "flat" } } });
+  expect(layers[1]?.hold).toMatchObject({ kind: "pocket", cut: "engraved", bitRadius: 0 });
+});
+
+it("a finish in words is kept as it was written, and an upright board's grain stays upright", () => {
+  const old = sample(1);
+  const first = z.looseObject({ board: z.looseObject({}), backer: z.looseObject({}) }).parse(old);
+  const read = readDocument({
+    ...first,
+    board: { ...first.board, width: 300, height: 500 },
+    backer: { ...first.backer, finish: " Oil, two coats " },
+  });
+  expect(read).toMatchObject({
+    ok: true,
+    document: { backer: { grainTurn: 90, finish: [{ kind: "other", name: "Oil, two coats", dryingHours: 0 }] } },
+  });
+});
 
 it("a document of today's version is read as it is", () => {
   const document = buildSign([buildLayer("B", [plate("b", 10, 10, [5, 5])])]);

@@ -36,7 +36,10 @@ const boardG = 600 * 400 * 18 * pineKgM3 * 1e-6;
 
 describe("an empty board", () => {
   it("has its own thickness and mass, and nothing more", () => {
-    const figures = computeFigures(buildSign([], { hanging: { kind: "cleat", gap: 6 } }), kernel);
+    const figures = computeFigures(
+      buildSign([], { hanging: { kind: "cleat", gap: 6, pose: "upright", carriesKg: null, points: [] } }),
+      kernel,
+    );
     expect(figures).toMatchObject({
       backerTop: { nominal: 18, least: 18, most: 18 },
       depth: { nominal: 18, least: 18, most: 18 },
@@ -271,7 +274,7 @@ describe("odd input", () => {
   it("every figure of the largest sign there may be is finite", () => {
     const sign = buildSign(
       [buildLayer("B", [plate("b", 10_000, 10_000, [5000, 5000])], { thickness: 100, hold: bondHold })],
-      { board: { outline: "rectangle", width: 10_000, height: 10_000, measures: "body" } },
+      { board: { outline: { kind: "rectangle" }, width: 10_000, height: 10_000, measures: "body" } },
     );
     const figures = computeFigures(sign, kernel);
     expect(figures.pieces[0]?.areaMm2).toBeCloseTo(1e8, 0);
@@ -304,7 +307,7 @@ describe("laws", () => {
           { thickness, hold: held },
         ),
       ),
-      { board: { outline: "rectangle", width: 2000, height: 2000, measures: "body" } },
+      { board: { outline: { kind: "rectangle" }, width: 2000, height: 2000, measures: "body" } },
     );
 
   it("bands are in order, masses are not negative, and the whole is the sum of its parts", () => {

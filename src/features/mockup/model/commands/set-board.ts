@@ -1,4 +1,7 @@
 import type { Coat, MockupDocument, Wood } from "#shared/mockup/document.ts";
+import { leastBoardMm } from "#shared/mockup/document.ts";
+
+import { longestMm } from "#shared/mockup/schema-parts.ts";
 import { lengthOf } from "../limits.ts";
 import { withFields } from "../same.ts";
 import { movePieces } from "./pieces.ts";
@@ -34,8 +37,8 @@ function withBoardFields(document: MockupDocument, fields: BoardFields): MockupD
   const { board, backer, hanging, presentation, quantity } = document;
   return withFields(document, {
     board: withFields(board, {
-      width: lengthOf(fields.width ?? board.width) ?? board.width,
-      height: lengthOf(fields.height ?? board.height) ?? board.height,
+      width: lengthOf(fields.width ?? board.width, longestMm, leastBoardMm) ?? board.width,
+      height: lengthOf(fields.height ?? board.height, longestMm, leastBoardMm) ?? board.height,
     }),
     backer: withFields(backer, {
       stock: fields.stock ?? backer.stock,

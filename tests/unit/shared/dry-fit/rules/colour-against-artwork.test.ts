@@ -1,6 +1,6 @@
 import { expect, it } from "vitest";
 import { colourAgainstArtwork } from "#shared/dry-fit/rules/colour-against-artwork.ts";
-import { standardAcrylics } from "#shared/materials/standard-stock.ts";
+import { standardAcrylics, standardStock } from "#shared/materials/standard-stock.ts";
 import { buildLayer, buildSign, plate } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
 
@@ -45,7 +45,9 @@ it("pieces of one colour are one finding, with a nearer stock where there is one
 });
 
 it("offers none when nothing on hand comes nearer", async () => {
-  const [finding] = await findingsOf(colourAgainstArtwork, sign("#8E8E8E"), { context: { acrylics: [grey] } });
+  const [finding] = await findingsOf(colourAgainstArtwork, sign("#8E8E8E"), {
+    context: { stock: { ...standardStock, acrylics: [{ acrylic: grey, thicknessesMm: [3], sheets: [] }] } },
+  });
   expect(finding?.text).not.toContain("comes nearer");
 });
 

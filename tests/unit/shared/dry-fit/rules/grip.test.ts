@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { grip } from "#shared/dry-fit/rules/grip.ts";
+import { standardStock } from "#shared/materials/standard-stock.ts";
 import type { CapStud } from "#shared/mockup/document.ts";
 import {
   buildCapStud,
@@ -56,9 +57,11 @@ describe("the offset", () => {
     const [finding] = await findingsOf(grip, panel({ studLength: 12 }, 5, 18));
     expect(finding).toMatchObject({ severity: "stop", value: 18, limit: 12, where: { x: 300, y: 200 } });
     expect(finding?.text).toBe(
-      "B, Layer B is drawn 18 mm off, but its barrel is 12 mm long, and that is where the panel comes to lie. The nearest barrel on hand is 19 mm.",
+      "B, Layer B is drawn 18 mm off, but its barrel holds it at 12 mm, and that is where the panel comes to lie. The nearest barrel on hand is 19 mm.",
     );
-    const [without] = await findingsOf(grip, panel({ studLength: 12 }, 5, 18), { context: { barrels: [] } });
+    const [without] = await findingsOf(grip, panel({ studLength: 12 }, 5, 18), {
+      context: { stock: { ...standardStock, hardware: [] } },
+    });
     expect(without?.text).not.toContain("on hand");
   });
 

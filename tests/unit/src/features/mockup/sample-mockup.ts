@@ -20,6 +20,7 @@ export const pine: Wood = {
   gravity: 0.35,
   moisturePercent: 8,
   hardness: "softwood",
+  movementPerPoint: 0.00212,
 };
 export const cement: Adhesive = { stockId: null, name: "Bodied cement", family: "bodied cement" };
 export const epoxy: Adhesive = { stockId: null, name: "Two-part epoxy", family: "epoxy" };
@@ -42,18 +43,26 @@ export function barrel(barrelLength: number, fields: Partial<CapStud> = {}): Cap
     studLength: 12,
     capDiameter: 15,
     capThickness: 5,
-    screw: { name: "No. 6 × 16", diameter: 3.51, length: 16, headDiameter: 6.8, headHeight: 2.06 },
+    screw: {
+      name: "No. 6 × 16",
+      gauge: 6,
+      head: "flat",
+      diameter: 3.51,
+      length: 16,
+      headDiameter: 6.8,
+      headHeight: 2.06,
+    },
     ...fields,
   };
 }
 
 export function emptyMockup(fields: Partial<MockupDocument> = {}): MockupDocument {
   return {
-    version: 1,
-    board: { outline: "rectangle", width: 600, height: 400, measures: "body" },
-    hanging: { kind: "cleat", gap: 8 },
+    version: 2,
+    board: { outline: { kind: "rectangle" }, width: 600, height: 400, measures: "body" },
+    hanging: { kind: "cleat", gap: 8, pose: "upright", carriesKg: null, points: [] },
     quantity: 1,
-    backer: { kind: "plain", stock: pine, thickness: 20, finish: "" },
+    backer: { kind: "plain", stock: pine, thickness: 20, grainTurn: 0, finish: [] },
     layers: [],
     presentation: {
       wall: "#EFE8DA",

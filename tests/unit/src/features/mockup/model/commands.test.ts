@@ -166,14 +166,14 @@ describe("holding a layer", () => {
   it("proposes four holes on a disc's diagonals, the first fixed and each other one with a window", () => {
     const holes = holesOf(discOnStandoffs());
     // 5 mm stud, half a millimetre a side: 6. A cap of 15 with 1 mm of cover hides up to 9, so a hole may move by 1.5 mm at
-    // most. Across the grain of pine that is 1.5 / (7e-5 · 20 + 0.00267 · 4) = 124.2 mm from the fixed one, and the first
-    // place on the way in from the corners that is near enough lies 61.875 mm off the middle. Movement: 0.173 along, 1.495
-    // across and 1.180 mm on the diagonal; 1.495 leaves 8.99 to 9.
+    // most. Across the grain of pine that is 1.5 / (7e-5 · 20 + 0.00212 · 4) = 151.8 mm from the fixed one, and the first
+    // place on the way in from the corners that is near enough lies 75.625 mm off the middle. Movement: 0.212 along, 1.494
+    // across and 1.206 mm on the diagonal; 1.494 leaves 8.99 to 9.
     expect(holes.map(({ x, y, fixed, diameter }) => [x - 300, y - 200, fixed, diameter])).toEqual([
-      [-61.875, -61.875, true, 6],
-      [61.875, -61.875, false, 7.7],
-      [-61.875, 61.875, false, 9],
-      [61.875, 61.875, false, 8.7],
+      [-75.625, -75.625, true, 6],
+      [75.625, -75.625, false, 7.7],
+      [-75.625, 75.625, false, 9],
+      [75.625, 75.625, false, 8.7],
     ]);
   });
 

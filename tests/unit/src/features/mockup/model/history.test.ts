@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { rectanglePath } from "#shared/geometry/shapes.ts";
-import { documentSchema, type MockupDocument } from "#shared/mockup/document.ts";
+import { type Coat, documentSchema, type MockupDocument } from "#shared/mockup/document.ts";
 import { addPlate } from "@/features/mockup/model/commands/add-plate.ts";
 import { bringInArtwork } from "@/features/mockup/model/commands/bring-in-artwork.ts";
 import { addHole, fixHole, proposeHoles, removeHole, setHole } from "@/features/mockup/model/commands/holes.ts";
@@ -19,10 +19,12 @@ import { bondLayer, raiseLayer, standLayer } from "@/features/mockup/model/comma
 import { setLayer } from "@/features/mockup/model/commands/set-layer.ts";
 import { commit, mostSteps, redo, startHistory, undo } from "@/features/mockup/model/history.ts";
 import { barrel, brass, cement, chalk, emptyMockup, midnight, pine } from "../sample-mockup.ts";
+import { inside } from "../sites.ts";
 
 type Edit = (document: MockupDocument, id: string) => MockupDocument;
 
 /** Any number a field could be given, the impossible ones too. */
+const oil: Coat = { kind: "clear coat", name: "Oil", base: "oil or shellac", dryingHours: 12 };
 const number = fc.oneof(fc.double({ min: -12_000, max: 12_000 }), fc.integer({ min: -50, max: 900 }), fc.double());
 const key = fc.constantFrom("B", "C", "D", "E", "F", "Z");
 const stock = fc.constantFrom(midnight, brass, chalk);
@@ -49,7 +51,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
         (document, id) =>
           addPlate(document, {
             shape: round ? { kind: "circle", diameter: width } : { kind: "rectangle", width, height },
-            place: "inside",
+            site: inside,
             id,
             name,
             stock: sheet,
@@ -90,7 +92,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
             hold: { kind: "bond", adhesive: cement },
             solid,
           })),
-          place: "inside",
+          site: inside,
           id,
         }),
   ),
@@ -142,7 +144,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
   fc.record({ key, hardware }).map(
     (args): Edit =>
       (document, id) =>
-        standLayer(document, { ...args, place: "inside", id }),
+        standLayer(document, { ...args, site: inside, id }),
   ),
   key.map(
     (layerKey): Edit =>
@@ -157,7 +159,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
   fc.record({ key, x: number, y: number }).map(
     (args): Edit =>
       (document, id) =>
-        addHole(document, { ...args, place: "inside", id }),
+        addHole(document, { ...args, site: inside, id }),
   ),
   fc.record({ pick: fc.nat(5), x: number, diameter: number }).map(
     ({ pick, ...to }): Edit =>
@@ -177,7 +179,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
   key.map(
     (layerKey): Edit =>
       (document, id) =>
-        proposeHoles(document, { key: layerKey, place: "inside", id }),
+        proposeHoles(document, { key: layerKey, site: inside, id }),
   ),
   fc
     .record({
@@ -186,7 +188,8 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
       thickness: number,
       quantity: number,
       viewingDistance: number,
-      finish: fc.string(),
+      grainTurn: number,
+      finish: fc.array(fc.constant(oil), { maxLength: 20 }),
     })
     .map(
       (fields): Edit =>
