@@ -13,6 +13,9 @@ export type WrittenLimits = Readonly<Record<LimitKey, number | null>>;
 export const limitOrders: readonly (readonly [low: LimitKey, high: LimitKey])[] = [
   ["unsupportedCaution", "unsupportedStop"],
   ["colourRemark", "colourCaution"],
+  ["rigidBondMm", "gapFillingBondMm"],
+  ["pocketGapLeastMm", "pocketGapMostMm"],
+  ["twinSameMm", "twinAlikeMm"],
 ];
 
 /** Every fault of a whole set, each limit at most once, in the order of the schema; lengths in words are in `unit`. */
