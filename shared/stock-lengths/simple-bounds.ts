@@ -1,0 +1,51 @@
+import { countPieces, type Packing } from "./packing.ts";
+
+/** No packing costs less: all lengths, setups left out, at the cheapest rate a length. */
+export function lengthBound({ items, bars }: Packing): number {
+  // Whole numbers throughout, so that a sum that comes out even is not rounded up.
+  const length = items.reduce((sum, { size, demand }) => sum + BigInt(size) * BigInt(demand), 0n);
+  let least: bigint | null = null;
+  for (const { cost, room } of bars) {
+    const needed = (length * BigInt(cost) + BigInt(room) - 1n) / BigInt(room);
+    if (least === null || needed < least) least = needed;
+  }
+  return Number(least ?? 0n);
+}
+
+/**
+ * No packing into bars of one length costs less: pieces longer than half a bar can't share one, and for every k up to half a bar
+ * those longer than the bar less k leave no room for what is k or longer (bound L2 of S. Martello and P. Toth, Discrete
+ * Applied Mathematics 28(1), 1990). 0 with several lengths.
+ */
+export function longPiecesBound(packing: Packing): number {
+  const [bar, ...others] = packing.bars;
+  if (!bar || others.length > 0) return 0;
+  const { room, cost } = bar;
+  const sizes = packing.items.toSorted((a, b) => b.size - a.size);
+  // Counts and lengths of the pieces longer than each, longest first.
+  const counts = [0];
+  const lengths = [0];
+  for (const { size, demand } of sizes) {
+    counts.push((counts.at(-1) ?? 0) + demand);
+    lengths.push((lengths.at(-1) ?? 0) + size * demand);
+  }
+  const placeOf = (isBefore: (size: number) => boolean) => {
+    const at = sizes.findIndex(({ size }) => !isBefore(size));
+    return at < 0 ? sizes.length : at;
+  };
+  const half = placeOf((size) => 2 * size > room);
+  let most = counts[half] ?? 0;
+  for (const { size: k } of sizes.slice(half)) {
+    const alone = placeOf((size) => size > room - k);
+    const upTo = placeOf((size) => size >= k);
+    const between = counts[half] ?? 0;
+    const length = (lengths[upTo] ?? 0) - (lengths[alone] ?? 0);
+    const free = (between - (counts[alone] ?? 0)) * room;
+    most = Math.max(most, between + Math.max(0, Math.ceil((length - free) / room - 1e-12)));
+  }
+  return most * cost;
+}
+
+/** More than any packing costs that leaves no bar empty. */
+export const moreThanAny = (packing: Packing): number =>
+  countPieces(packing) * Math.max(...packing.bars.map(({ cost }) => cost)) + 1;
