@@ -2,7 +2,7 @@ import { buildSnapshot } from "#shared/drawing/build-snapshot.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { RuleInput } from "#shared/dry-fit/rule.ts";
 import { runDryFit } from "#shared/dry-fit/run-dry-fit.ts";
-import { matchSetAsides, openFindings } from "#shared/dry-fit/set-aside.ts";
+import { matchSetAsides, openStops } from "#shared/dry-fit/set-aside.ts";
 import { OutOfReach } from "#shared/geometry/clipper-kernel.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import type { Snapshot } from "#shared/mockup/snapshot.ts";
@@ -44,8 +44,7 @@ answerQuestions<DrawingQuestion, DrawingAnswer>(async (question) => {
 function freeze(input: Parameters<typeof buildSnapshot>[0]): DrawingAnswer {
   const snapshot = buildSnapshot(input);
   const text = canonicalJson(snapshot);
-  const open = openFindings(matchSetAsides(snapshot.findings, input.setAsides));
-  const stops = open.filter(({ severity }) => severity === "stop");
+  const stops = openStops(matchSetAsides(snapshot.findings, input.setAsides));
   return { what: "freeze", frozen: { text, sha256: sha256Hex(text), stops } };
 }
 

@@ -80,9 +80,14 @@ export function matchSetAsides<F extends BoundFinding, S extends SetAside>(
   });
 }
 
-/** Findings that nothing stands against. A stop among them keeps a revision from being issued. */
+/** Findings that nothing stands against. */
 export function openFindings<F extends BoundFinding>(standings: readonly Standing<F, SetAside>[]): F[] {
   return standings.flatMap(({ finding, setAside }) => (setAside === null ? [finding] : []));
+}
+
+/** What keeps a revision from being issued. */
+export function openStops<F extends BoundFinding>(standings: readonly Standing<F, SetAside>[]): F[] {
+  return openFindings(standings).filter(({ severity }) => severity === "stop");
 }
 
 /** What is set aside and found, each once, in the order of the findings. */

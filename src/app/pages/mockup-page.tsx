@@ -46,11 +46,13 @@ export function MockupPage() {
   if (!mockup.data.can.edit || !isWide)
     return (
       <MockupReadOnly
+        shop={shop.slug}
         unit={shop.unit}
         job={job.data}
         jobPath={paths.job(shop.slug, jobId)}
         mockup={mockup.data}
         limits={limits.data.limits}
+        stock={stock.data}
         why={whyNotToChange({ mayEdit: mockup.data.can.edit, role })}
       />
     );

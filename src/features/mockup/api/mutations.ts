@@ -1,5 +1,7 @@
 import { useMutation, useQueryClient } from "@tanstack/react-query";
+import type { z } from "zod";
 import { issueRevision } from "#shared/contracts/revisions.ts";
+import { setAsideFinding, takeBackSetAside } from "#shared/contracts/set-asides.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
@@ -16,5 +18,24 @@ export function useIssueRevision(shop: string, jobId: string) {
         client.invalidateQueries({ queryKey: keys.jobs(shop) }),
         client.invalidateQueries({ queryKey: revisionKeys.ofJob(shop, jobId) }),
       ]),
+  });
+}
+
+/** Sets a finding of the saved draft aside. Whoever was first, the list is read anew: it may have been someone else. */
+export function useSetAside(shop: string, jobId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: z.input<typeof setAsideFinding.body>) =>
+      call(setAsideFinding, { params: { shop, jobId }, body }),
+    onSettled: () => client.invalidateQueries({ queryKey: keys.job(shop, jobId) }),
+  });
+}
+
+/** Lets a finding that was set aside stand again. */
+export function useTakeBack(shop: string, jobId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (setAsideId: string) => call(takeBackSetAside, { params: { shop, jobId, setAsideId } }),
+    onSettled: () => client.invalidateQueries({ queryKey: keys.job(shop, jobId) }),
   });
 }

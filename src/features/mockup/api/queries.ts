@@ -2,6 +2,7 @@ import { queryOptions } from "@tanstack/react-query";
 import { type Artwork, getArtworkPieces, listArtworks } from "#shared/contracts/artworks.ts";
 import { getJob } from "#shared/contracts/jobs.ts";
 import { getMockup } from "#shared/contracts/mockups.ts";
+import { listSetAsides, type SetAside } from "#shared/contracts/set-asides.ts";
 import { listStock, type StockItem } from "#shared/contracts/stock.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
@@ -44,6 +45,12 @@ export const mockupQueries = {
       queryFn: ({ signal }): Promise<StockItem[]> =>
         allPages((cursor) => call(listStock, { params: { shop }, query: { limit: 100, cursor }, signal })),
       staleTime: 60_000,
+    }),
+  setAsides: (shop: string, jobId: string) =>
+    queryOptions({
+      queryKey: [...keys.job(shop, jobId), "set-asides"],
+      queryFn: ({ signal }): Promise<SetAside[]> =>
+        allPages((cursor) => call(listSetAsides, { params: { shop, jobId }, query: { limit: 100, cursor }, signal })),
     }),
   artworks: (shop: string, jobId: string) =>
     queryOptions({

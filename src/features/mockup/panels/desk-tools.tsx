@@ -1,11 +1,13 @@
 import { useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
+import type { Finding } from "#shared/dry-fit/finding.ts";
+import { openStops } from "#shared/dry-fit/set-aside.ts";
 import { nextRevisionLetter } from "#shared/lifecycle/revision-letter.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { counted } from "@/lib/format.ts";
 import type { Saving } from "../editor/use-autosave.ts";
-import type { DryFit } from "../engine/picture-messages.ts";
+import type { DeskStanding } from "../editor/use-standings.ts";
 import { againstBrief } from "../model/against-brief.ts";
 import type { History } from "../model/history.ts";
 import { WordButton } from "./cell-controls.tsx";
@@ -19,7 +21,8 @@ type DeskToolsProps = {
   readonly mayIssue: boolean;
   readonly saving: Saving;
   readonly history: History;
-  readonly dryFit: DryFit | null;
+  /** null until the dry fit has run and what is set aside is known. */
+  readonly standings: readonly DeskStanding[] | null;
   /** Whether the dry fit is of the drawing as it is now. */
   readonly isCurrent: boolean;
   readonly onUndo: () => void;
@@ -29,10 +32,11 @@ type DeskToolsProps = {
 
 /** Saved or not, a step back and forward, and the one main action: to issue the mockup as the next revision. */
 export function DeskTools(props: DeskToolsProps) {
-  const { shop, unit, job, mayIssue, saving, history, dryFit, isCurrent, onUndo, onRedo, onIssued } = props;
+  const { shop, unit, job, mayIssue, saving, history, standings, isCurrent, onUndo, onRedo, onIssued } = props;
   const [open, setOpen] = useState(false);
   const letter = nextRevisionLetter(job.latest?.letter ?? null);
-  const why = whyNotToIssue({ dryFit, isCurrent, isEmpty: history.present.layers.length === 0 });
+  const stops = standings && openStops(standings);
+  const why = whyNotToIssue({ stops, isCurrent, isEmpty: history.present.layers.length === 0 });
   const lastStep = history.past.at(-1)?.label;
   const nextStep = history.future[0]?.label;
 
@@ -71,6 +75,7 @@ export function DeskTools(props: DeskToolsProps) {
         letter={letter}
         approvers={job.approvers.map(({ name }) => name)}
         differences={againstBrief(job.brief, history.present, unit)}
+        standings={standings ?? []}
         save={saving.saveNow}
         onIssued={onIssued}
       />
@@ -80,17 +85,16 @@ export function DeskTools(props: DeskToolsProps) {
 
 /** Why a revision can't be issued now, in words; null when it can. */
 function whyNotToIssue({
-  dryFit,
+  stops,
   isCurrent,
   isEmpty,
 }: {
-  dryFit: DryFit | null;
+  stops: readonly Finding[] | null;
   isCurrent: boolean;
   isEmpty: boolean;
 }) {
   if (isEmpty) return "Nothing is on the board yet.";
-  if (dryFit === null) return "The dry fit is running.";
-  const stops = dryFit.findings.filter(({ severity }) => severity === "stop").length;
-  if (stops > 0) return `The dry fit has ${counted(stops, "stop")}.`;
+  if (stops === null) return "The dry fit is running.";
+  if (stops.length > 0) return `The dry fit has ${counted(stops.length, "stop")}.`;
   return isCurrent ? null : "The dry fit is running.";
 }

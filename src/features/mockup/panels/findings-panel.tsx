@@ -1,86 +1,89 @@
+import { useEffect, useRef, useState } from "react";
 import type { Finding, Severity } from "#shared/dry-fit/finding.ts";
 import { paths } from "@/app/paths.ts";
+import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import { cx } from "@/lib/cx.ts";
 import { counted } from "@/lib/format.ts";
 import { useShop } from "@/lib/shop-context.ts";
+import type { SettingAside } from "../editor/use-setting-aside.ts";
+import type { DeskStanding, Standings } from "../editor/use-standings.ts";
 import type { DryFit } from "../engine/picture-messages.ts";
-import { WordButton } from "./cell-controls.tsx";
-
-const looks: Record<Severity, { word: string; text: string; mark: string }> = {
-  stop: { word: "Stop", text: "text-oxblood", mark: "M5 1.5h6l3.5 3.5v6L11 14.5H5L1.5 11V5zM5 8h6" },
-  caution: { word: "Caution", text: "text-ochre", mark: "M8 1.8L15 14H1zM8 6.2v4M8 11.6v1.2" },
-  remark: { word: "Remark", text: "text-graphite", mark: "M8 1.5a6.5 6.5 0 110 13 6.5 6.5 0 010-13M8 7v4.5M8 4.4v1.2" },
-};
+import { keyedStandings } from "../model/keyed-standings.ts";
+import { FindingItem } from "./finding-item.tsx";
+import { SetAsideList } from "./set-aside-list.tsx";
 
 type FindingsPanelProps = {
   /** null until the first run. */
   readonly dryFit: DryFit | null;
+  readonly standings: Standings;
   /** Whether the findings are of the drawing as it is now. */
   readonly isCurrent: boolean;
-  readonly shown: Finding | null;
-  readonly onShow: (finding: Finding) => void;
+  readonly shown?: Finding | null;
+  readonly onShow?: (finding: Finding) => void;
+  /** Missing where the mockup is only looked at. */
+  readonly settingAside?: SettingAside;
+  readonly className?: string;
 };
 
-/** What the dry fit found, worst first, each with the way to the spot. */
-export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPanelProps) {
+/** What the dry fit found, worst first, each with the way to the spot; below it what was set aside. */
+export function FindingsPanel(props: FindingsPanelProps) {
+  const { dryFit, standings: known, isCurrent, shown = null, onShow, settingAside, className } = props;
   const { slug } = useShop();
+  const landing = useLanding();
+  const standings = known.standings ?? [];
+  const standing = standings.filter(({ setAside }) => setAside === null);
+  const ready = dryFit !== null && known.standings !== null;
+
   return (
-    <section
-      aria-label="Dry fit"
-      aria-busy={!isCurrent}
-      className="min-w-0 border-rule px-4 pt-2 pb-6 max-[1200px]:border-t min-[1200px]:border-l"
-    >
-      <h2 className="font-serif text-base font-bold text-ink">
+    <section aria-label="Dry fit" aria-busy={!(isCurrent && ready)} className={cx("min-w-0 px-4 pt-2 pb-6", className)}>
+      <h2 ref={landing.open} tabIndex={-1} className="font-serif text-base font-bold text-ink">
         Dry fit{" "}
         <span role="status" className="font-sans text-sm font-normal text-graphite">
-          {dryFit === null ? "is running" : summaryOf(dryFit)}
+          {ready ? summaryOf(standings, dryFit.fine) : "is running"}
         </span>
-        {dryFit !== null && !isCurrent && (
+        {ready && !isCurrent && (
           <span aria-hidden="true" className="font-sans text-sm font-normal text-graphite">
             , looking again …
           </span>
         )}
       </h2>
-      {isCurrent && dryFit?.findings.length === 0 && (
+      {known.failure !== null && (
+        <ProblemNotice what="What was set aside could not be loaded." error={known.failure} onRetry={known.retry} />
+      )}
+      {isCurrent && ready && standings.length === 0 && (
         <p className="pt-2 text-sm text-graphite">Nothing found. Test on scrap all the same.</p>
       )}
       <ul className="pt-1">
-        {dryFit?.findings.map((finding) => {
-          const look = looks[finding.severity];
-          return (
-            <li
-              key={keyOf(finding)}
-              className={cx("flex gap-3 border-b border-rule py-2 text-sm", finding === shown && "bg-indigo/8")}
-            >
-              <span className={cx("flex w-20 shrink-0 items-start gap-1.5 font-semibold", look.text)}>
-                <svg
-                  aria-hidden="true"
-                  viewBox="0 0 16 16"
-                  className="mt-0.5 size-3.5 shrink-0"
-                  fill="none"
-                  stroke="currentColor"
-                  strokeWidth="1.4"
-                >
-                  <path d={look.mark} />
-                </svg>
-                {look.word}
-              </span>
-              <span className="min-w-0 wrap-anywhere text-ink">
-                {finding.text}{" "}
-                {(finding.where !== null || finding.layerKey !== null) && (
-                  <WordButton inText aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>
-                    Show
-                  </WordButton>
-                )}
-                <span className="block text-fine text-graphite">
-                  {finding.title}, {finding.source}
-                </span>
-              </span>
-            </li>
-          );
-        })}
+        {keyedStandings(standing).map((one) => (
+          <FindingItem
+            key={one.key}
+            standing={one}
+            isShown={one.finding === shown}
+            onShow={onShow}
+            onSetAside={
+              settingAside &&
+              (async (finding, reason) => {
+                const problem = await settingAside.setAside(finding, reason);
+                if (problem === null) landing.go("aside");
+                return problem;
+              })
+            }
+          />
+        ))}
       </ul>
+      <SetAsideList
+        standings={standings}
+        heading={landing.aside}
+        onTakeBack={
+          settingAside &&
+          (async (setAside) => {
+            const problem = await settingAside.takeBack(setAside);
+            if (problem === null) landing.go("open");
+            return problem;
+          })
+        }
+      />
       <p className="pt-3 text-sm">
         <TextLink to={paths.howWeWorkItOut(slug)} target="_blank">
           How we work it out<span className="sr-only">, in a new tab</span>
@@ -90,18 +93,30 @@ export function FindingsPanel({ dryFit, isCurrent, shown, onShow }: FindingsPane
   );
 }
 
-function summaryOf({ findings, fine }: DryFit): string {
-  const count = (severity: Severity) => findings.filter((finding) => finding.severity === severity).length;
+/** What was pressed has gone into the other list: the focus follows to that list's head, once the list is there. */
+function useLanding() {
+  const open = useRef<HTMLHeadingElement>(null);
+  const aside = useRef<HTMLHeadingElement>(null);
+  const [to, setTo] = useState<"open" | "aside" | null>(null);
+  useEffect(() => {
+    const head = to === "open" ? open.current : to === "aside" ? aside.current : null;
+    if (head === null) return;
+    head.focus();
+    setTo(null);
+  });
+  return { open, aside, go: setTo };
+}
+
+function summaryOf(standings: readonly DeskStanding[], fine: number): string {
+  const count = (severity: Severity) =>
+    standings.filter(({ finding, setAside }) => setAside === null && finding.severity === severity).length;
+  const aside = standings.filter(({ setAside }) => setAside !== null).length;
   const parts = [
     count("stop") > 0 && counted(count("stop"), "stop"),
     count("caution") > 0 && counted(count("caution"), "caution"),
     count("remark") > 0 && counted(count("remark"), "remark"),
+    aside > 0 && `${aside} set aside`,
     `${fine} fine`,
   ];
   return parts.filter(Boolean).join(", ");
-}
-
-/** What tells a finding from all others of the same run. */
-function keyOf({ rule, layerKey, pieceIds, holeId, where, text }: Finding): string {
-  return [rule, layerKey, pieceIds.join(" "), holeId, where?.x, where?.y, text].join("|");
 }

@@ -1,10 +1,13 @@
 import { useState } from "react";
+import { openStops } from "#shared/dry-fit/set-aside.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { Dialog } from "@/components/ui/dialog.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { TextArea } from "@/components/ui/text-area.tsx";
 import { messageOf } from "@/lib/form-problem.ts";
 import { useIssueRevision } from "../api/mutations.ts";
+import type { DeskStanding } from "../editor/use-standings.ts";
+import { IssueHindrances } from "./issue-hindrances.tsx";
 
 type IssueDialogProps = {
   readonly open: boolean;
@@ -16,6 +19,8 @@ type IssueDialogProps = {
   readonly approvers: readonly string[];
   /** Where the mockup is not what the brief asks for, a sentence each. */
   readonly differences: readonly string[];
+  /** What the dry fit found and what stands against it. */
+  readonly standings: readonly DeskStanding[];
   /** Saves what is on the desk and gives its version; null when it could not be saved. */
   readonly save: () => Promise<number | null>;
   readonly onIssued: (revisionId: string) => void;
@@ -47,7 +52,7 @@ function whoIsMailed(approvers: readonly string[]): string {
 
 type IssueFormProps = Omit<IssueDialogProps, "open" | "onOpenChange" | "approvers"> & { readonly onCancel: () => void };
 
-function IssueForm({ shop, jobId, letter, differences, save, onIssued, onCancel }: IssueFormProps) {
+function IssueForm({ shop, jobId, letter, differences, standings, save, onIssued, onCancel }: IssueFormProps) {
   const [message, setMessage] = useState("");
   const [problem, setProblem] = useState<string | null>(null);
   const [saving, setSaving] = useState(false);
@@ -76,6 +81,7 @@ function IssueForm({ shop, jobId, letter, differences, save, onIssued, onCancel 
         void send();
       }}
     >
+      <IssueHindrances standings={standings} />
       {differences.length > 0 && (
         <Notice tone="caution" title="Not what the brief asks for">
           <ul className="space-y-0.5 text-sm">
@@ -100,7 +106,12 @@ function IssueForm({ shop, jobId, letter, differences, save, onIssued, onCancel 
       )}
       <div className="flex flex-wrap justify-end gap-3">
         <Button onClick={onCancel}>Cancel</Button>
-        <Button kind="primary" type="submit" busy={saving || issue.isPending}>
+        <Button
+          kind="primary"
+          type="submit"
+          disabled={openStops(standings).length > 0}
+          busy={saving || issue.isPending}
+        >
           Issue {letter}
         </Button>
       </div>

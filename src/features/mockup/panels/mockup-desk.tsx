@@ -12,12 +12,15 @@ import { viewAt } from "../canvas/view-of-board.ts";
 import { type Desk, DeskContext } from "../editor/desk-context.ts";
 import { useAutosave } from "../editor/use-autosave.ts";
 import { useKeptDraft } from "../editor/use-kept-draft.ts";
+import { useSettingAside } from "../editor/use-setting-aside.ts";
+import { useStandings } from "../editor/use-standings.ts";
 import { useUndoKeys } from "../editor/use-undo-keys.ts";
 import { useDeskPicture } from "../engine/use-desk-picture.ts";
 import type { Drag } from "../model/drag.ts";
+import { dryFitContextOf } from "../model/dry-fit-context.ts";
 import { nextEditor, startEditor } from "../model/editor.ts";
 import { chooseLayer } from "../model/selection.ts";
-import { stockChoices, stockOnHand } from "../model/stock-choices.ts";
+import { stockChoices } from "../model/stock-choices.ts";
 import { DeskBar } from "./desk-bar.tsx";
 import { type DeskDialog, DeskDialogs } from "./desk-dialogs.tsx";
 import { DeskTools } from "./desk-tools.tsx";
@@ -64,18 +67,12 @@ export function MockupDesk(props: MockupDeskProps) {
 
   const whereItHangs = job.brief.place ?? "inside";
   const context = useMemo(
-    () => ({
-      unit,
-      place: whereItHangs,
-      walkway: false,
-      overhead: false,
-      electrical: false,
-      words: job.brief.words,
-      stock: stockOnHand(props.stock),
-    }),
-    [unit, whereItHangs, job.brief.words, props.stock],
+    () => dryFitContextOf({ unit, brief: job.brief, stock: props.stock }),
+    [unit, job.brief, props.stock],
   );
   const { fit, drawn, figures, failure, isCurrent } = useDeskPicture({ document, drag, context, limits, room });
+  const standings = useStandings({ shop, jobId: job.id }, drawn?.dryFit.findings ?? null);
+  const settingAside = useSettingAside({ shop, jobId: job.id, save: saving.saveNow });
   useUndoKeys(dispatch);
 
   const desk = useMemo(
@@ -120,7 +117,7 @@ export function MockupDesk(props: MockupDeskProps) {
           mayIssue={mockup.can.issue}
           saving={saving}
           history={editor.history}
-          dryFit={drawn?.dryFit ?? null}
+          standings={standings.standings}
           isCurrent={isCurrent}
           onUndo={() => dispatch({ kind: "undo" })}
           onRedo={() => dispatch({ kind: "redo" })}
@@ -160,7 +157,15 @@ export function MockupDesk(props: MockupDeskProps) {
           <SchedulePanel onBoard={() => setDialog("board")} onBringIn={() => setDialog("artwork")} />
           <PiecesPanel />
         </div>
-        <FindingsPanel dryFit={drawn?.dryFit ?? null} isCurrent={isCurrent} shown={finding} onShow={show} />
+        <FindingsPanel
+          dryFit={drawn?.dryFit ?? null}
+          standings={standings}
+          isCurrent={isCurrent}
+          shown={finding}
+          onShow={show}
+          settingAside={settingAside}
+          className="border-rule max-[1200px]:border-t min-[1200px]:border-l"
+        />
       </div>
       <DeskDialogs open={dialog} onClose={() => setDialog(null)} shop={shop} jobId={job.id} jobPath={jobPath} />
       <StaleDialog

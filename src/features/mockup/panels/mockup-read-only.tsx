@@ -1,9 +1,9 @@
 import { useMemo, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
+import type { StockItem } from "#shared/contracts/stock.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
-import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Notice } from "@/components/ui/notice.tsx";
@@ -14,20 +14,25 @@ import type { DrawingView } from "@/lib/drawing-view.ts";
 import { DrawingViewer } from "@/lib/drawing-viewer.tsx";
 import { useRoom } from "@/lib/use-room.ts";
 import { fitBoard, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
+import { useStandings } from "../editor/use-standings.ts";
 import { useEngine } from "../engine/use-engine.ts";
+import { dryFitContextOf } from "../model/dry-fit-context.ts";
+import { FindingsPanel } from "./findings-panel.tsx";
 
 type MockupReadOnlyProps = {
+  readonly shop: string;
   readonly unit: LengthUnit;
   readonly job: Job;
   readonly jobPath: string;
   readonly mockup: Mockup;
   readonly limits: Limits;
+  readonly stock: readonly StockItem[];
   /** Why it can only be looked at. */
   readonly why: string;
 };
 
-/** The mockup to look at: the picture and the schedule, for a narrow window and for those who may not change it. */
-export function MockupReadOnly({ unit, job, jobPath, mockup, limits, why }: MockupReadOnlyProps) {
+/** The mockup to look at: the picture, the schedule and the dry fit, for a narrow window and for those who may not change it. */
+export function MockupReadOnly({ shop, unit, job, jobPath, mockup, limits, stock, why }: MockupReadOnlyProps) {
   const [view, setView] = useState<DrawingView | null>(null);
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
@@ -42,15 +47,16 @@ export function MockupReadOnly({ unit, job, jobPath, mockup, limits, why }: Mock
         ? null
         : {
             document,
-            context: { ...usualContext, unit },
+            context: dryFitContextOf({ unit, brief: job.brief, stock }),
             limits,
             paperScale,
             dimensions,
             what: "all" as const,
           },
-    [document, unit, limits, paperScale, dimensions],
+    [document, unit, job.brief, stock, limits, paperScale, dimensions],
   );
   const { drawn, figures, failure } = useEngine(input);
+  const standings = useStandings({ shop, jobId: job.id }, drawn?.dryFit.findings ?? null);
 
   return (
     <div className="space-y-4 px-4 py-4 sm:px-6">
@@ -106,6 +112,12 @@ export function MockupReadOnly({ unit, job, jobPath, mockup, limits, why }: Mock
             </tbody>
           </Table>
           <p className="text-fine text-graphite">{scheduleTotal(document, figures.figures, unit)}</p>
+          <FindingsPanel
+            dryFit={drawn.dryFit}
+            standings={standings}
+            isCurrent={drawn.input === input}
+            className="-mx-4 max-w-3xl sm:-mx-6 sm:px-6"
+          />
         </>
       )}
     </div>

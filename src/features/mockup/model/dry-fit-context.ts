@@ -1,0 +1,26 @@
+import type { Brief } from "#shared/contracts/jobs.ts";
+import type { StockItem } from "#shared/contracts/stock.ts";
+import type { DryFitContext } from "#shared/dry-fit/rule.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
+import { stockOnHand } from "./stock-choices.ts";
+
+/** What the dry fit knows besides the sign, as the server puts it together when it issues. */
+export function dryFitContextOf({
+  unit,
+  brief,
+  stock,
+}: {
+  unit: LengthUnit;
+  brief: Pick<Brief, "place" | "words">;
+  stock: readonly StockItem[];
+}): DryFitContext {
+  return {
+    unit,
+    place: brief.place ?? "inside",
+    walkway: false,
+    overhead: false,
+    electrical: false,
+    words: brief.words,
+    stock: stockOnHand(stock),
+  };
+}

@@ -1,0 +1,84 @@
+import { useEffect, useRef, useState } from "react";
+import type { Role } from "#shared/contracts/account.ts";
+import type { Finding } from "#shared/dry-fit/finding.ts";
+import { maySetAside } from "#shared/dry-fit/set-aside.ts";
+import { wakingWords } from "#shared/dry-fit/waking-words.ts";
+import { cx } from "@/lib/cx.ts";
+import { formatDay } from "@/lib/format.ts";
+import { useReader } from "@/lib/shop-context.ts";
+import type { DeskStanding } from "../editor/use-standings.ts";
+import { WordButton } from "./cell-controls.tsx";
+import { SeverityWord } from "./finding-look.tsx";
+import { SetAsideForm } from "./set-aside-form.tsx";
+
+type FindingItemProps = {
+  readonly standing: DeskStanding;
+  readonly isShown: boolean;
+  /** Missing where there is nothing to show it on. */
+  readonly onShow?: ((finding: Finding) => void) | undefined;
+  /** Sets it aside and gives what stood in the way, or null; missing where the mockup is only looked at. */
+  readonly onSetAside?: ((finding: Finding, reason: string) => Promise<string | null>) | undefined;
+};
+
+/** A finding that stands: what, where, and what can be done about it. */
+export function FindingItem({ standing: { finding, woken }, isShown, onShow, onSetAside }: FindingItemProps) {
+  const { role, shop } = useReader();
+  const hasPlace = finding.where !== null || finding.layerKey !== null;
+  return (
+    <li className={cx("flex gap-3 border-b border-rule py-2 text-sm", isShown && "bg-indigo/8")}>
+      <SeverityWord severity={finding.severity} />
+      <div className="min-w-0 flex-1 wrap-anywhere text-ink">
+        {finding.text}{" "}
+        {hasPlace && onShow && (
+          <WordButton inText aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>
+            Show
+          </WordButton>
+        )}
+        <span className="block text-fine text-graphite">
+          {finding.title}, {finding.source}
+        </span>
+        {woken && (
+          <p className="mt-1 border-l-2 border-ochre pl-2 text-fine text-graphite">
+            {woken.by} set this aside on {formatDay(woken.at)}: “{woken.reason}”{" "}
+            <span className="text-ink">{wakingWords(woken.finding, finding, shop.unit)}</span>
+          </p>
+        )}
+        {onSetAside && (
+          <WaysToSetAside finding={finding} role={role} onSend={(reason) => onSetAside(finding, reason)} />
+        )}
+      </div>
+    </li>
+  );
+}
+
+type WaysProps = {
+  readonly finding: Finding;
+  readonly role: Role | null;
+  readonly onSend: (reason: string) => Promise<string | null>;
+};
+
+/** The word to press, the form that it opens, or whose it is. */
+function WaysToSetAside({ finding, role, onSend }: WaysProps) {
+  const [isAsking, setAsking] = useState(false);
+  const opener = useRef<HTMLButtonElement>(null);
+  const wasAsking = useRef(false);
+  useEffect(() => {
+    if (wasAsking.current && !isAsking) opener.current?.focus();
+    wasAsking.current = isAsking;
+  }, [isAsking]);
+
+  if (role === null || role === "rep") return null;
+  if (!maySetAside(role, finding))
+    return <p className="mt-1 text-fine text-graphite">A stop about safety: only an owner can set it aside.</p>;
+  if (isAsking) return <SetAsideForm finding={finding} onSend={onSend} onCancel={() => setAsking(false)} />;
+  return (
+    <WordButton
+      ref={opener}
+      className="-ml-1 block"
+      aria-label={`Set aside: ${finding.title}`}
+      onClick={() => setAsking(true)}
+    >
+      Set aside …
+    </WordButton>
+  );
+}
