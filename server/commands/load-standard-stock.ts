@@ -3,12 +3,38 @@ import {
   standardAcrylics,
   standardAdhesives,
   standardHardware,
+  standardScrews,
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
 import { newId } from "../db/new-id.ts";
 import { StockItem } from "../models/stock-item.ts";
 
-/** Puts the generic stock list on a shop's shelf, so that a new shop has something to draw with. */
+type StockRow = Pick<StockItem, "kind" | "name" | "properties">;
+
+const usualRows: readonly StockRow[] = [
+  ...standardAcrylics.map(({ acrylic, thicknessesMm, sheets }) => ({
+    kind: "acrylic" as const,
+    name: acrylic.name,
+    properties: { acrylic, thicknessesMm, sheets },
+  })),
+  ...standardWoods.map(({ wood, thicknessesMm }) => ({
+    kind: "wood" as const,
+    name: wood.name,
+    properties: { wood, thicknessesMm },
+  })),
+  ...standardHardware.map((hardware) => ({ kind: "hardware" as const, name: hardware.name, properties: { hardware } })),
+  ...standardScrews.map((screw) => ({ kind: "screw" as const, name: screw.name, properties: { screw } })),
+  ...standardAdhesives.map((adhesive) => ({
+    kind: "adhesive" as const,
+    name: adhesive.name,
+    properties: { adhesive },
+  })),
+];
+
+/**
+ * Puts what is missing of the generic stock list on a shop's shelf, so that it has something to draw with; says how many
+ * that were. A name that the shop knows, in stock or taken out, is left as it is.
+ */
 export async function loadStandardStock({
   shopId,
   counted = null,
@@ -16,40 +42,26 @@ export async function loadStandardStock({
   transaction,
 }: {
   shopId: string;
-  /** How many of each standoff are on hand; a new shop has not counted yet. */
+  /** How many of each standoff and screw are on hand; a new shop has not counted yet. */
   counted?: number | null;
   now: Date;
   transaction: Transaction;
-}): Promise<void> {
-  const base = () => ({ id: newId(), shopId, createdAt: now });
+}): Promise<number> {
+  const known = await StockItem.findAll({ where: { shopId }, attributes: ["kind", "name"], transaction });
+  const names = new Set(known.map(placeOf));
+  const missing = usualRows.filter((row) => !names.has(placeOf(row)));
   await StockItem.bulkCreate(
-    [
-      ...standardAcrylics.map(({ acrylic, thicknessesMm }) => ({
-        ...base(),
-        kind: "acrylic" as const,
-        name: acrylic.name,
-        properties: { acrylic, thicknessesMm },
-      })),
-      ...standardWoods.map(({ wood, thicknessesMm }) => ({
-        ...base(),
-        kind: "wood" as const,
-        name: wood.name,
-        properties: { wood, thicknessesMm },
-      })),
-      ...standardHardware.map((hardware) => ({
-        ...base(),
-        kind: "hardware" as const,
-        name: hardware.name,
-        properties: { hardware },
-        quantity: counted,
-      })),
-      ...standardAdhesives.map((adhesive) => ({
-        ...base(),
-        kind: "adhesive" as const,
-        name: adhesive.name,
-        properties: { adhesive },
-      })),
-    ],
+    missing.map((row) => ({
+      ...row,
+      id: newId(),
+      shopId,
+      quantity: row.kind === "hardware" || row.kind === "screw" ? counted : null,
+      createdAt: now,
+    })),
     { transaction },
   );
+  return missing.length;
 }
+
+/** A name stands once in its kind, whatever its capitals. */
+const placeOf = ({ kind, name }: Pick<StockRow, "kind" | "name">): string => `${kind} ${name.toLowerCase()}`;

@@ -20,6 +20,12 @@ export type EventFacts = {
   "role changed": { name: string; from: string; to: string };
   "shop changed": { fields: string[] };
   "limits changed": { changes: { limit: string; from: number; to: number }[] };
+  "stock added": { name: string };
+  "stock changed": { name: string };
+  "stock counted": { name: string; from: number | null; to: number | null };
+  "stock taken out": { name: string };
+  "stock brought back": { name: string };
+  "usual stock added": { count: number };
   "client added": { name: string };
   "client changed": { name: string };
   "contact added": { name: string; email: string };

@@ -6,17 +6,19 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
+import type { StockKind } from "#shared/contracts/stock-entry.ts";
 
-/** The stock's own record: a material or part as shared/mockup/document.ts has it, with the thicknesses on hand. */
+/** The stock's own record: a material or part as shared/mockup/document.ts has it, with the thicknesses and sheets on hand. */
 export type StockProperties = Readonly<Record<string, unknown>>;
 
 export class StockItem extends Model<InferAttributes<StockItem>, InferCreationAttributes<StockItem>> {
   declare id: string;
   declare shopId: string;
-  declare kind: "acrylic" | "wood" | "hardware" | "adhesive";
+  declare kind: StockKind;
   declare name: string;
   declare properties: StockProperties;
   declare quantity: CreationOptional<number | null>;
+  declare version: CreationOptional<number>;
   declare createdAt: Date;
   declare retiredAt: CreationOptional<Date | null>;
 }
@@ -30,6 +32,7 @@ export function initStockItem(sequelize: Sequelize): void {
       name: DataTypes.TEXT,
       properties: DataTypes.JSONB,
       quantity: DataTypes.INTEGER,
+      version: { type: DataTypes.INTEGER, defaultValue: 1 },
       createdAt: DataTypes.DATE,
       retiredAt: DataTypes.DATE,
     },

@@ -14,6 +14,12 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "role changed": ({ name, from, to }) => `Changed ${name} from ${from} to ${to}`,
   "shop changed": ({ fields }) => `Changed the shop's ${fields.join(", ")}`,
   "limits changed": ({ changes }) => `Changed limits of the dry fit: ${changes.map(limitChange).join("; ")}`,
+  "stock added": ({ name }) => `Added ${name} to the stock`,
+  "stock changed": ({ name }) => `Changed ${name} in the stock`,
+  "stock counted": ({ name, from, to }) => `Counted ${name}: ${countedAs(to)}, ${countedAs(from)} before`,
+  "stock taken out": ({ name }) => `Took ${name} out of the stock`,
+  "stock brought back": ({ name }) => `Brought ${name} back into the stock`,
+  "usual stock added": ({ count }) => `Added ${count} of the usual stock list`,
   "client added": ({ name }) => `Added the client ${name}`,
   "client changed": ({ name }) => `Changed the client ${name}`,
   "contact added": ({ name, email }) => `Added the contact ${name}, ${email}`,
@@ -52,6 +58,8 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "mail refused": ({ kind, to, reason }) => `Mail to ${to} was refused (${kind}): ${reason}`,
   "signed in": ({ by }) => `Signed in by ${by}`,
 };
+
+const countedAs = (quantity: number | null): string => (quantity === null ? "not counted" : String(quantity));
 
 /** A limit that there is no more keeps the name it was stored under. */
 function limitChange({ limit, from, to }: EventFacts["limits changed"]["changes"][number]): string {

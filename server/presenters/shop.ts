@@ -28,6 +28,7 @@ export function presentShop(
       openJob: jobPolicy.open(actor),
       seeClients: clientPolicy.list(actor),
       seeStock: stockPolicy.see(actor),
+      changeStock: stockPolicy.change(actor),
       seePortfolio: portfolioPolicy.see(actor),
       sharePortfolio: portfolioPolicy.share(actor),
       seeOutgoingMail: shopPolicy.seeOutgoingMail(actor, { shopId, keepsMail }),

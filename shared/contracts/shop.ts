@@ -19,6 +19,7 @@ export const shopSchema = z.strictObject({
     openJob: z.boolean(),
     seeClients: z.boolean(),
     seeStock: z.boolean(),
+    changeStock: z.boolean(),
     seePortfolio: z.boolean(),
     sharePortfolio: z.boolean(),
     seeOutgoingMail: z.boolean(),

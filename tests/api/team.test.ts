@@ -236,6 +236,7 @@ describe("the shop", () => {
       openJob: true,
       seeClients: true,
       seeStock: true,
+      changeStock: false,
       seePortfolio: true,
       sharePortfolio: true,
       seeOutgoingMail: false,

@@ -58,6 +58,7 @@ const job = (world: PolicyWorld) => ({ params: { ...world.params, jobId: world.j
 const revision = (world: PolicyWorld) => ({ params: { ...world.params, revisionId: world.revisionId } });
 const artwork = (world: PolicyWorld) => ({ params: { ...world.params, artworkId: world.artworkId } });
 const inShop = (world: PolicyWorld) => ({ params: world.params });
+const epoxyNamed = (name: string) => ({ kind: "adhesive", adhesive: { name, family: "epoxy" } });
 const unknownToken = "A".repeat(43);
 
 /** PRODUCT's "who may do what", a line a route. */
@@ -228,6 +229,23 @@ export const policyTable: readonly PolicyRow[] = [
   row(portfolio.openShareLink, anyone, (world) => ({ params: { token: world.liveShareToken } })),
 
   row(stock.listStock, staff, inShop),
+  row(stock.addStockItem, makers, (world) => ({
+    ...inShop(world),
+    body: { entry: epoxyNamed(`Epoxy ${world.next()}`) },
+  })),
+  row(stock.changeStockItem, makers, (world) => ({
+    params: { ...world.params, itemId: world.adhesiveId },
+    body: { version: 1, entry: epoxyNamed(`Epoxy ${world.next()}`) },
+  })),
+  row(stock.countStockItem, makers, (world) => ({
+    params: { ...world.params, itemId: world.screwId },
+    body: { version: 1, quantity: 40 },
+  })),
+  row(stock.setStockState, makers, (world) => ({
+    params: { ...world.params, itemId: world.adhesiveId },
+    body: { state: "retired" },
+  })),
+  row(stock.addUsualStock, makers, inShop),
 ];
 
 export const routeName = ({ method, path }: Endpoint): string => `${method} ${path}`;

@@ -9,6 +9,7 @@ import { makeShareLink } from "#shared/contracts/portfolio.ts";
 import { approveRevision, getRevision, getSheet, type Revision } from "#shared/contracts/revisions.ts";
 import { setAsideFinding } from "#shared/contracts/set-asides.ts";
 import { inviteMember } from "#shared/contracts/shop.ts";
+import { listStock } from "#shared/contracts/stock.ts";
 import { boundFinding } from "#shared/dry-fit/set-aside.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { TestApp } from "./app.ts";
@@ -75,6 +76,8 @@ export async function buildPolicyWorld(app: TestApp) {
   });
   const spareMember = await buildMember({ shop: owner.shop, role: "rep" });
   const mails = await visitors.owner.get(listOutgoingMail, { params });
+  const stockItemOf = async (kind: "adhesive" | "screw") =>
+    (await visitors.owner.get(listStock, { params, query: { kind, limit: 1 } })).items[0]?.id ?? "";
   const someone = await buildPerson();
   await signInAs(app, someone);
   const someonesSession = await Session.findOne({ where: { personId: someone.id }, rejectOnEmpty: true });
@@ -125,6 +128,8 @@ export async function buildPolicyWorld(app: TestApp) {
     contactIdsToRemove: await eachTime(async () => (await buildContact({ client: approver.client })).contact.id),
     artworkIdsToRemove: await eachTime(() => copyOfArtwork(main.id)),
     mailId: mails.items[0]?.id ?? "",
+    adhesiveId: await stockItemOf("adhesive"),
+    screwId: await stockItemOf("screw"),
     someoneElsesSessionId: someonesSession.id,
     liveShareToken: tokenOf(live.url),
     spareShareLinkId: spare.link.id,

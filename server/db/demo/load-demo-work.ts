@@ -1,6 +1,5 @@
 import { addNote } from "../../commands/add-note.ts";
 import { askForRevision } from "../../commands/ask-for-revision.ts";
-import { loadStandardStock } from "../../commands/load-standard-stock.ts";
 import { replyToNote } from "../../commands/reply-to-note.ts";
 import type { Context } from "../../http/context.ts";
 import { Shop } from "../../models/shop.ts";
@@ -8,13 +7,14 @@ import { contextsOf, type DemoContexts } from "./demo-actors.ts";
 import { oarsSvg, orrerySvg, rackSvg, wheatSvg } from "./demo-artwork.ts";
 import { oarsSign, orrerySign, rackSign } from "./demo-signs.ts";
 import { demoApproval, demoArtwork, demoIssue, demoJob } from "./demo-steps.ts";
+import { loadDemoStock } from "./demo-stock.ts";
 import type { DemoIds } from "./load-demo-people.ts";
 
 /** Fills the demo shop: stock, and a job in each state that a visitor wants to see. */
 export async function loadDemoWork(owner: Context, ids: DemoIds): Promise<void> {
   const { transaction, now } = owner;
   const contexts = contextsOf(owner, ids);
-  await loadStandardStock({ shopId: ids.shopId, counted: 24, now, transaction });
+  await loadDemoStock({ shopId: ids.shopId, now, transaction });
   await loadRackPlates(contexts, ids);
   await loadBoathouse(contexts, ids);
   await loadBakehouse(contexts, ids);

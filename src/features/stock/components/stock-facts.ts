@@ -1,12 +1,13 @@
 import type { StockItem } from "#shared/contracts/stock.ts";
-import type { Hardware } from "#shared/mockup/document.ts";
-import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
+import type { SheetsOnHand } from "#shared/materials/stock.ts";
+import type { Hardware, Screw } from "#shared/mockup/document.ts";
+import { formatFine, formatLength, formatLengthWithUnit, formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 
 /** Thicknesses on hand as one phrase: "3, 5, 8 mm". */
 const thicknesses = (mm: readonly number[], unit: LengthUnit): string =>
   mm.length === 0
-    ? "none on hand"
+    ? "no thickness"
     : `${mm.map((length) => formatLength(length, unit)).join(", ")}${unit === "mm" ? " mm" : ""}`;
 
 export type StockFacts = {
@@ -14,8 +15,10 @@ export type StockFacts = {
   readonly swatch: "sheet" | "wood" | "metal";
   /** What it is, in a phrase. */
   readonly what: string;
-  /** How much or how thick. */
+  /** How thick, or how many. */
   readonly amount: string;
+  /** What is on hand of it beyond that, a line each. */
+  readonly more: readonly string[];
 };
 
 /** What the stock list shows of an item. */
@@ -27,24 +30,47 @@ export function stockFacts(item: StockItem, unit: LengthUnit): StockFacts {
         swatch: "sheet",
         what: `${item.acrylic.look}, ${item.acrylic.process}${item.acrylic.facesDiffer ? ", faces differ" : ""}`,
         amount: thicknesses(item.thicknessesMm, unit),
+        more: item.sheets.map((sheet) => sheetWords(sheet, unit)),
       };
     case "wood":
       return {
         colour: item.wood.colour,
         swatch: "wood",
-        what: `${item.wood.hardness}, ${item.wood.moisturePercent} % moisture`,
+        what: `${item.wood.hardness}, ${item.wood.moisturePercent} % moisture, gravity ${item.wood.gravity}`,
         amount: thicknesses(item.thicknessesMm, unit),
+        more: [],
       };
     case "hardware":
       return {
         colour: item.hardware.finish,
         swatch: "metal",
         what: hardwareWords(item.hardware, unit),
-        amount: item.quantity === null ? "not counted yet" : `${item.quantity} on hand`,
+        amount: quantityWords(item.quantity),
+        more: [],
+      };
+    case "screw":
+      return {
+        colour: null,
+        swatch: "metal",
+        what: screwWords(item.screw, unit),
+        amount: quantityWords(item.quantity),
+        more: [],
       };
     case "adhesive":
-      return { colour: null, swatch: "sheet", what: item.adhesive.family, amount: "" };
+      return { colour: null, swatch: "sheet", what: item.adhesive.family, amount: "", more: [] };
   }
+}
+
+const quantityWords = (quantity: number | null): string =>
+  quantity === null ? "not counted yet" : `${quantity} on hand`;
+
+function sheetWords({ thicknessMm, widthMm, heightMm, quantity }: SheetsOnHand, unit: LengthUnit): string {
+  const count = quantity === null ? "not counted" : quantity === 0 ? "none left" : `${quantity} on hand`;
+  return `${formatSize(widthMm, heightMm, unit)}, ${formatLengthWithUnit(thicknessMm, unit)} thick: ${count}`;
+}
+
+function screwWords({ head, diameter, length }: Screw, unit: LengthUnit): string {
+  return `${head} head, ${formatFine(diameter, unit)} thick, ${formatLengthWithUnit(length, unit)} long`;
 }
 
 function hardwareWords(hardware: Hardware, unit: LengthUnit): string {
@@ -56,7 +82,7 @@ function hardwareWords(hardware: Hardware, unit: LengthUnit): string {
     case "throughScrew":
       return `loose spacer ${length(hardware.barrelLength)}, screw ${hardware.screw.name} through the panel`;
     case "blindStud":
-      return `hidden stud ${length(hardware.studLength)} long, ${barrel}`;
+      return `hidden stud ${length(hardware.studLength)} long${hardware.barrelLength > 0 ? `, ${barrel}` : ""}`;
     case "edgeGrip":
       return `grips the edge, slot ${length(hardware.slotWidth)}, ${barrel}`;
   }

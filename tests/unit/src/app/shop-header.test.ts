@@ -7,6 +7,7 @@ const all = {
   openJob: true,
   seeClients: true,
   seeStock: true,
+  changeStock: true,
   seePortfolio: true,
   sharePortfolio: true,
   seeOutgoingMail: true,

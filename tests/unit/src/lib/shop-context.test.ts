@@ -9,6 +9,7 @@ const no = {
   openJob: false,
   seeClients: false,
   seeStock: false,
+  changeStock: false,
   seePortfolio: false,
   sharePortfolio: false,
   seeOutgoingMail: false,

@@ -11,21 +11,24 @@ import { suggestHold, suggestLayers } from "@/features/mockup/model/suggest-laye
 import { barrel, brass, cement, chalk, epoxy, midnight, pine } from "../sample-mockup.ts";
 
 const id = (digit: number) => `00000000-0000-4000-8000-00000000000${digit}`;
+const kept = { version: 1, retiredAt: null };
 const items: StockItem[] = [
-  { id: id(1), name: midnight.name, kind: "acrylic", acrylic: midnight, thicknessesMm: [6, 4.5] },
-  { id: id(2), name: brass.name, kind: "acrylic", acrylic: brass, thicknessesMm: [2, 3] },
+  { ...kept, id: id(1), name: midnight.name, kind: "acrylic", acrylic: midnight, thicknessesMm: [6, 4.5], sheets: [] },
+  { ...kept, id: id(2), name: brass.name, kind: "acrylic", acrylic: brass, thicknessesMm: [2, 3], sheets: [] },
   {
+    ...kept,
     id: id(3),
     name: "Clear",
     kind: "acrylic",
     acrylic: { ...chalk, name: "Clear", colour: "#C99A33", look: "clear" },
     thicknessesMm: [3],
+    sheets: [],
   },
-  { id: id(4), name: "Long", kind: "hardware", hardware: barrel(25), quantity: 4 },
-  { id: id(5), name: "Short", kind: "hardware", hardware: barrel(12), quantity: 4 },
-  { id: id(6), name: cement.name, kind: "adhesive", adhesive: cement },
-  { id: id(7), name: epoxy.name, kind: "adhesive", adhesive: epoxy },
-  { id: id(8), name: pine.name, kind: "wood", wood: pine, thicknessesMm: [18] },
+  { ...kept, id: id(4), name: "Long", kind: "hardware", hardware: barrel(25), quantity: 4 },
+  { ...kept, id: id(5), name: "Short", kind: "hardware", hardware: barrel(12), quantity: 4 },
+  { ...kept, id: id(6), name: cement.name, kind: "adhesive", adhesive: cement },
+  { ...kept, id: id(7), name: epoxy.name, kind: "adhesive", adhesive: epoxy },
+  { ...kept, id: id(8), name: pine.name, kind: "wood", wood: pine, thicknessesMm: [18] },
 ];
 const stock = stockChoices(items);
 
