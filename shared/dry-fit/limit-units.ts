@@ -40,7 +40,7 @@ export function formatLimit(stored: number, unit: LimitUnit, lengthUnit: LengthU
   return `${shownFigure(stored, unit)}${suffix === "" ? "" : joined}`;
 }
 
-/** Without what binary adds in the sixteenth digit: 0.07 · 100 is 7. */
-function tidy(value: number): number {
+/** Without what binary adds in the sixteenth digit: 0.07 · 100 is 7, and 48 inches are 1219.2 mm. */
+export function tidy(value: number): number {
   return Number(value.toPrecision(12));
 }

@@ -1,7 +1,7 @@
 import { type Control, Controller } from "react-hook-form";
 import type { WrittenLimits } from "#shared/dry-fit/check-limits.ts";
 import type { DescribedLimit } from "#shared/dry-fit/limit-descriptions.ts";
-import { isLength } from "#shared/dry-fit/limit-units.ts";
+import { isLength, tidy } from "#shared/dry-fit/limit-units.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { LengthField } from "@/components/ui/length-field.tsx";
@@ -22,7 +22,14 @@ export function LimitField({ limit, unit, fault, control }: LimitFieldProps) {
       name={`limits.${limit.key}`}
       render={({ field: { name: _, ...field } }) =>
         isLength(limit.unit) ? (
-          <LengthField {...field} label={limit.label} unit={unit} fine={limit.unit === "small length"} error={fault} />
+          <LengthField
+            {...field}
+            onChange={(mm) => field.onChange(mm === null ? null : tidy(mm))}
+            label={limit.label}
+            unit={unit}
+            fine={limit.unit === "small length"}
+            error={fault}
+          />
         ) : (
           <FigureField {...field} label={limit.label} unit={limit.unit} error={fault} />
         )

@@ -4,9 +4,10 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
-import { capitalised, counted } from "@/lib/format.ts";
+import { counted } from "@/lib/format.ts";
 import { LimitField } from "./limit-field.tsx";
 import { LimitGroups } from "./limit-groups.tsx";
+import { LimitIndex } from "./limit-index.tsx";
 import { LimitRow } from "./limit-row.tsx";
 import { NewerLimits } from "./newer-limits.tsx";
 import { useLimitsForm } from "./use-limits-form.ts";
@@ -33,7 +34,7 @@ export function LimitsForm({ shop, unit, set, explanationOf }: LimitsFormProps) 
         <p role="status" className="text-base text-ink">
           {own.length === 0
             ? "Every limit is at its default."
-            : `${capitalised(counted(own.length, "limit is", "limits are"))} of the shop’s own, of ${limitKeys.length}.`}
+            : `${own.length} of ${limitKeys.length} limits ${own.length === 1 ? "is" : "are"} the shop’s own.`}
         </p>
         {own.length > 1 && (
           <Button kind="bare" size="small" onClick={() => back(own)}>
@@ -41,6 +42,7 @@ export function LimitsForm({ shop, unit, set, explanationOf }: LimitsFormProps) 
           </Button>
         )}
       </div>
+      <LimitIndex />
       <LimitGroups explanationOf={explanationOf}>
         {(limit) => (
           <LimitRow
@@ -66,7 +68,7 @@ export function LimitsForm({ shop, unit, set, explanationOf }: LimitsFormProps) 
             {limits.saved
               ? "Saved. Mockups keep to them from now on; sheets already issued stay as they are."
               : changed.length > 0
-                ? `${capitalised(counted(changed.length, "change"))} not saved yet.`
+                ? `${counted(changed.length, "change")} not saved yet.`
                 : ""}
           </p>
         </div>

@@ -2,6 +2,7 @@ import type { LimitSet } from "#shared/contracts/limits.ts";
 import { formatLimit } from "#shared/dry-fit/limit-units.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { LimitGroups } from "./limit-groups.tsx";
+import { LimitIndex } from "./limit-index.tsx";
 import { LimitRow } from "./limit-row.tsx";
 
 type LimitsToReadProps = {
@@ -15,6 +16,7 @@ export function LimitsToRead({ unit, set, explanationOf }: LimitsToReadProps) {
   return (
     <>
       <p className="text-base text-ink">You may look at the limits. Owners set them.</p>
+      <LimitIndex />
       <LimitGroups explanationOf={explanationOf}>
         {(limit) => (
           <LimitRow
