@@ -36,6 +36,10 @@ function applyStep(document: MockupDocument, step: MendStep): MockupDocument {
       return changeLayer(document, step.layerKey, (layer) =>
         layer.hold.kind === "standoff" ? layer : { ...layer, hold: { ...layer.hold, adhesive: step.adhesive } },
       );
+    case "tack":
+      return changeLayer(document, step.layerKey, (layer) =>
+        layer.hold.kind === "bond" ? { ...layer, hold: { ...layer.hold, tack: step.tack } } : layer,
+      );
     case "locate":
       return changeLayer(document, step.layerKey, (layer) => ({ ...layer, locate: step.locate }));
     case "marked":

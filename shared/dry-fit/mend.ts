@@ -15,6 +15,7 @@ export type MendStep =
   | { readonly kind: "hardware"; readonly layerKey: string; readonly hardware: Hardware; readonly offset: number }
   | { readonly kind: "screw"; readonly layerKey: string; readonly screw: Screw }
   | { readonly kind: "adhesive"; readonly layerKey: string; readonly adhesive: Adhesive }
+  | { readonly kind: "tack"; readonly layerKey: string; readonly tack: Adhesive | null }
   | { readonly kind: "locate"; readonly layerKey: string; readonly locate: Layer["locate"] }
   | { readonly kind: "marked"; readonly layerKey: string; readonly marked: Layer["marked"] }
   | { readonly kind: "stock"; readonly layerKey: string; readonly stock: Acrylic }

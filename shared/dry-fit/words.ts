@@ -24,6 +24,32 @@ export function pieceWords(layer: Layer, piece: Piece): string {
   return piece.name ? `${piece.name} (${layer.key})` : `A piece of ${layer.key}, ${layer.name},`;
 }
 
+/** How many names a finding gives before it only counts. */
+const mostNames = 3;
+
+/** Names of pieces in a sentence, the first few and how many more; empty when none has a name. */
+export function namesWords(pieces: readonly Pick<Piece, "name">[]): string {
+  const names = pieces.map(({ name }) => name).filter((name) => name !== "");
+  const said = names.slice(0, mostNames);
+  const more = pieces.length - said.length;
+  return said.length === 0 || more === 0 ? said.join(", ") : `${said.join(", ")} and ${more} more`;
+}
+
+/** Pieces of one layer at the head of a sentence: "Letter 1 (G)", "5 pieces of G, Lettering (Ring 1, Ring 2 and 3 more)". */
+export function piecesWords(layer: Layer, pieces: readonly { readonly piece: Piece }[]): string {
+  const [first] = pieces;
+  if (first && pieces.length === 1) return pieceWords(layer, first.piece);
+  const names = namesWords(pieces.map(({ piece }) => piece));
+  return `${pieces.length} pieces of ${layerWords(layer)}${names === "" ? "" : ` (${names})`}`;
+}
+
+/** A waiting time: "15 minutes", "24 hours", "3 days". */
+export function hoursWords(hours: number): string {
+  const whole = (count: number, one: string) => `${Number(count.toFixed(1))} ${count === 1 ? one : `${one}s`}`;
+  if (hours < 1) return whole(Math.round(hours * 60), "minute");
+  return hours > 48 ? whole(hours / 24, "day") : whole(hours, "hour");
+}
+
 export const layerWords = (layer: Layer): string => `${layer.key}, ${layer.name}`;
 
 export const percentWords = (share: number): string => `${Number((share * 100).toFixed(1))} %`;
