@@ -1,0 +1,256 @@
+// @vitest-environment jsdom
+import { QueryClient, QueryClientProvider } from "@tanstack/react-query";
+import { act } from "react";
+import { MemoryRouter } from "react-router-dom";
+import { afterEach, beforeEach, describe, expect, it } from "vitest";
+import type { Role } from "#shared/contracts/account.ts";
+import type { SetAside } from "#shared/contracts/set-asides.ts";
+import type { Finding } from "#shared/dry-fit/finding.ts";
+import { boundFinding } from "#shared/dry-fit/set-aside.ts";
+import { useSettingAside } from "@/features/mockup/editor/use-setting-aside.ts";
+import { useStandings } from "@/features/mockup/editor/use-standings.ts";
+import { FindingsPanel } from "@/features/mockup/panels/findings-panel.tsx";
+import { type Reader, ReaderContext } from "@/lib/shop-context.ts";
+import { type Asked, startAnswers } from "../../support/answers.ts";
+import { button, press, render, until } from "../../support/render.tsx";
+
+const jobId = "00000000-0000-4000-8000-000000000007";
+const place = { shop: "copperlark-signs", jobId };
+const thin: Finding = {
+  rule: 3,
+  title: "Thin stroke",
+  severity: "stop",
+  text: "Ring of C is 1.82 mm at its thinnest.",
+  layerKey: "C",
+  pieceIds: ["ring"],
+  holeId: null,
+  where: { x: 10, y: 20 },
+  value: 1.82,
+  limit: 2,
+  unit: "mm",
+  source: "common practice",
+};
+const heavy: Finding = { ...thin, rule: 36, title: "Hanging", text: "The fixing carries 20 kg.", layerKey: null };
+const asideOf = (finding: Finding, id = "00000000-0000-4000-8000-0000000000a1"): SetAside => ({
+  id,
+  finding: boundFinding(finding),
+  reason: "Drawn so by the client",
+  by: "Ada Maker",
+  at: "2026-12-01T09:00:00.000Z",
+  can: { takeBack: true },
+});
+
+let kept: SetAside[];
+let refusal: { code: string; detail: string } | null;
+let server: Awaited<ReturnType<typeof startAnswers>>;
+function answer({ method, path, body }: Asked) {
+  if (method === "GET") return { status: 200, json: { items: kept, next: null } };
+  if (refusal) return { status: 409, json: { type: "/problems/x", title: "No.", status: 409, ...refusal } };
+  if (method === "DELETE") kept = kept.filter(({ id }) => !path.endsWith(id));
+  else kept = [{ ...asideOf(thin), ...(body as Pick<SetAside, "finding" | "reason">) }, ...kept];
+  return method === "DELETE" ? { status: 204 } : { status: 201, json: kept[0] };
+}
+beforeEach(async () => {
+  kept = [];
+  refusal = null;
+  server = await startAnswers(answer);
+});
+afterEach(() => server.end());
+const written = () => server.asked.filter(({ method }) => method !== "GET");
+
+type Given = { findings: readonly Finding[]; role?: Role; editing?: boolean; save?: () => Promise<number | null> };
+
+function Panel({ findings, editing = true, save = async () => 4 }: Given) {
+  const standings = useStandings(place, findings);
+  const settingAside = useSettingAside({ ...place, save });
+  return (
+    <FindingsPanel
+      dryFit={{ findings, fine: 9 }}
+      standings={standings}
+      isCurrent
+      onShow={() => undefined}
+      {...(editing ? { settingAside } : {})}
+    />
+  );
+}
+
+const reader = (role: Role): Reader => ({
+  shop: {
+    slug: place.shop,
+    name: "Copperlark Signs",
+    unit: "mm",
+    jobPrefix: "CL",
+    paper: "A3",
+    demo: false,
+    can: {
+      changeShop: false,
+      manageTeam: false,
+      openJob: true,
+      seeClients: true,
+      seeStock: true,
+      changeStock: false,
+      seePortfolio: true,
+      sharePortfolio: false,
+      seeOutgoingMail: false,
+    },
+  },
+  person: {
+    id: "00000000-0000-4000-8000-000000000001",
+    name: "Ada Maker",
+    email: "ada@copperlark.example",
+    hasPassword: true,
+  },
+  side: "shop",
+  role,
+  client: null,
+});
+const page = (given: Given, client: QueryClient) => (
+  <MemoryRouter>
+    <QueryClientProvider client={client}>
+      <ReaderContext value={reader(given.role ?? "maker")}>
+        <Panel {...given} />
+      </ReaderContext>
+    </QueryClientProvider>
+  </MemoryRouter>
+);
+async function show(given: Given) {
+  const client = new QueryClient({ defaultOptions: { queries: { retry: false } } });
+  const { redraw } = await render(page(given, client));
+  await until(() => document.querySelector('[aria-busy="false"]'));
+  return (next: Given) => redraw(page(next, client));
+}
+
+const says = (text: string) => document.body.textContent?.includes(text) ?? false;
+const summary = () => document.querySelector("h2 [role=status]")?.textContent;
+const asideRegion = () => document.querySelector('section[aria-label="Set aside"]');
+const area = (): HTMLTextAreaElement => {
+  const found = document.querySelector("textarea");
+  if (!found) throw new Error("no form is open");
+  return found;
+};
+async function write(text: string) {
+  await act(async () => {
+    // React listens to the element's own setter, so the text goes in past it.
+    Object.getOwnPropertyDescriptor(HTMLTextAreaElement.prototype, "value")?.set?.call(area(), text);
+    area().dispatchEvent(new Event("input", { bubbles: true }));
+  });
+}
+const buttonNames = () => [...document.querySelectorAll("button")].map((one) => one.textContent);
+
+describe("setting a finding aside", () => {
+  it("asks why, sends the saved version's finding, and moves it below with reason, name and day", async () => {
+    await show({ findings: [thin] });
+    expect(summary()).toBe("1 stop, 9 fine");
+    await press(button("Set aside: Thin stroke"));
+    expect(document.activeElement).toBe(area());
+    await write("Drawn so by the client");
+    await press(button("Set aside"));
+    await until(() => asideRegion());
+    expect(written()).toEqual([
+      {
+        method: "POST",
+        path: `/api/shops/copperlark-signs/jobs/${jobId}/set-asides`,
+        body: { mockupVersion: 4, finding: boundFinding(thin), reason: "Drawn so by the client" },
+      },
+    ]);
+    expect(asideRegion()?.textContent).toContain("“Drawn so by the client”Ada Maker, 1 Dec 2026");
+    expect(summary()).toBe("1 set aside, 9 fine");
+    await until(() => document.activeElement === asideRegion()?.querySelector("h3"));
+  });
+
+  it("sends nothing without a reason, and gives the focus back when it is left by Escape", async () => {
+    await show({ findings: [thin] });
+    await press(button("Set aside: Thin stroke"));
+    await write("  ok ");
+    await press(button("Set aside"));
+    expect(says("Say why, in a few words.")).toBe(true);
+    expect(area().getAttribute("aria-invalid")).toBe("true");
+    await act(async () => area().dispatchEvent(new KeyboardEvent("keydown", { key: "Escape", bubbles: true })));
+    expect(document.querySelector("textarea")).toBeNull();
+    expect(document.activeElement).toBe(button("Set aside: Thin stroke"));
+    expect(written()).toEqual([]);
+  });
+
+  it("says under the reason what the server refused, and keeps what was written", async () => {
+    refusal = { code: "already_exists", detail: "Ben Owner has set this aside already: as meant" };
+    await show({ findings: [thin] });
+    await press(button("Set aside: Thin stroke"));
+    await write("Drawn so by the client");
+    await press(button("Set aside"));
+    await until(() => says("Ben Owner has set this aside already: as meant"));
+    expect(area().value).toBe("Drawn so by the client");
+  });
+
+  it("sends nothing when the mockup could not be saved", async () => {
+    await show({ findings: [thin], save: async () => null });
+    await press(button("Set aside: Thin stroke"));
+    await write("Drawn so by the client");
+    await press(button("Set aside"));
+    await until(() => says("The mockup could not be saved, so nothing was set aside."));
+    expect(written()).toEqual([]);
+  });
+});
+
+describe("what was set aside", () => {
+  it("stands again when its value changes, says what it was, and keeps a form open meanwhile", async () => {
+    kept = [asideOf(thin)];
+    const redraw = await show({ findings: [thin] });
+    expect(summary()).toBe("1 set aside, 9 fine");
+    await redraw({ findings: [{ ...thin, value: 1.64 }] });
+    expect(summary()).toBe("1 stop, 9 fine");
+    expect(asideRegion()).toBeNull();
+    expect(says("Ada Maker set this aside on 1 Dec 2026: “Drawn so by the client”")).toBe(true);
+    expect(says("The value was 1.82 mm then, it is 1.64 mm now.")).toBe(true);
+    await press(button("Set aside: Thin stroke"));
+    await write("Thinner still");
+    await redraw({ findings: [{ ...thin, value: 1.5 }] });
+    expect(area().value).toBe("Thinner still");
+    expect(says("it is 1.5 mm now.")).toBe(true);
+  });
+
+  it("is taken back with a press, and the focus goes to what stands", async () => {
+    kept = [asideOf(thin)];
+    await show({ findings: [thin] });
+    await press(button("Take back: Thin stroke"));
+    await until(() => asideRegion() === null);
+    expect(written()).toEqual([
+      {
+        method: "DELETE",
+        path: `/api/shops/copperlark-signs/jobs/${jobId}/set-asides/${asideOf(thin).id}`,
+        body: null,
+      },
+    ]);
+    expect(summary()).toBe("1 stop, 9 fine");
+    await until(() => document.activeElement === document.querySelector("h2"));
+  });
+});
+
+describe("who is offered what", () => {
+  it("a maker is told that a safety stop is an owner's, and an owner may", async () => {
+    await show({ findings: [thin, heavy], role: "maker" });
+    expect(buttonNames().filter((name) => name?.startsWith("Set aside"))).toHaveLength(1);
+    expect(says("A stop about safety: only an owner can set it aside.")).toBe(true);
+    await show({ findings: [thin, heavy], role: "owner" });
+    expect(buttonNames().filter((name) => name?.startsWith("Set aside"))).toHaveLength(2);
+    expect(says("only an owner")).toBe(false);
+  });
+
+  it("a rep, and whoever only looks at it, reads it all and is offered nothing", async () => {
+    kept = [asideOf(thin)];
+    await show({ findings: [thin, heavy], role: "rep" });
+    expect(asideRegion()?.textContent).toContain("Drawn so by the client");
+    expect(buttonNames().filter((name) => name?.startsWith("Set aside"))).toEqual([]);
+    expect(says("only an owner")).toBe(false);
+    await show({ findings: [thin, heavy], role: "owner", editing: false });
+    expect(asideRegion()?.textContent).toContain("Ada Maker, 1 Dec 2026");
+    expect(buttonNames().filter((name) => /^(Set aside|Take back)/.test(name ?? ""))).toEqual([]);
+  });
+});
+
+it("lets every finding stand, and says so, when what is set aside can't be loaded", async () => {
+  server.end();
+  server = await startAnswers(() => ({ status: 500 }));
+  await show({ findings: [thin] });
+  expect(summary()).toBe("1 stop, 9 fine");
+  expect(says("What was set aside could not be loaded.")).toBe(true);
+});
