@@ -1,7 +1,7 @@
 import { regionAreaMm2, regionCentroid } from "../geometry/area.ts";
 import { boxOfRegion } from "../geometry/box.ts";
 import { distanceToRegionEdgeMm } from "../geometry/contains.ts";
-import type { Kernel } from "../geometry/kernel.ts";
+import { type Kernel, remembered } from "../geometry/kernel.ts";
 import type { Point, Region } from "../geometry/path.ts";
 
 export type Support = {
@@ -22,12 +22,22 @@ const reachStepMm = 0.05;
 
 /** What of a piece lies on nothing, slivers along its edge left out; empty when all of it is carried. */
 export function unsupportedPart(piece: Region, support: Region, kernel: Kernel): Region {
+  return remembered(kernel, [...piece, ...support], `unsupported ${piece.length}`, () =>
+    offSupport(piece, support, kernel),
+  );
+}
+
+function offSupport(piece: Region, support: Region, kernel: Kernel): Region {
   const off = kernel.difference(piece, support);
   return off.length > 0 && kernel.offset(off, -sliverMm, "round").length > 0 ? off : [];
 }
 
 /** How a piece lies on what is under it. Both regions as the kernel gives them. */
 export function measureSupport(piece: Region, support: Region, kernel: Kernel): Support {
+  return remembered(kernel, [...piece, ...support], `support ${piece.length}`, () => lieOn(piece, support, kernel));
+}
+
+function lieOn(piece: Region, support: Region, kernel: Kernel): Support {
   const area = regionAreaMm2(piece);
   const bonded = kernel.intersect(piece, support);
   const overlapMm2 = regionAreaMm2(bonded);

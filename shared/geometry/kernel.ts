@@ -21,4 +21,11 @@ export type Kernel = {
     line: readonly { readonly x: number; readonly y: number; readonly smooth?: boolean }[],
     options: { closed: boolean; widthMm: number; join: Join | "bevel"; cap: Cap; mitreLimit: number },
   ) => Region;
+  /** A kernel that remembers gives back what was made before of the very same objects under the same name. */
+  readonly remember?: <T>(of: readonly object[], what: string, make: () => T) => T;
 };
+
+/** What `make` gives, or what it gave before where the kernel remembers. Whatever it depends on must stand in `of` or `what`. */
+export function remembered<T>(kernel: Kernel, of: readonly object[], what: string, make: () => T): T {
+  return kernel.remember ? kernel.remember(of, what, make) : make();
+}

@@ -1,5 +1,5 @@
 import { regionAreaMm2, regionCentroid, regionPerimeterMm } from "../geometry/area.ts";
-import type { Kernel } from "../geometry/kernel.ts";
+import { type Kernel, remembered } from "../geometry/kernel.ts";
 import { nodeCount } from "../geometry/node-count.ts";
 import { smallestBox } from "../geometry/smallest-box.ts";
 import { frontHeightMm } from "../hardware/standoff-parts.ts";
@@ -19,7 +19,7 @@ export function computeFigures(document: MockupDocument, kernel: Kernel): Figure
   const standing = standPieces(document, kernel);
   const masses = computeMasses(document, standing, kernel);
   const backerTop = backerTopOf(document);
-  const pieces = standing.map((one) => pieceFigures(one, masses.pieces.get(one.piece.id) ?? 0));
+  const pieces = standing.map((one) => pieceFigures(one, masses.pieces.get(one.piece.id) ?? 0, kernel));
   const layers = document.layers.map((layer) => layerFigures(layer, pieces, backerTop));
   const depth = bandHighest([backerTop, ...standing.map(topWithFront)]) ?? backerTop;
   return {
@@ -37,17 +37,22 @@ export function computeFigures(document: MockupDocument, kernel: Kernel): Figure
   };
 }
 
-function pieceFigures(one: StandingPiece, massG: number): PieceFigures {
+function pieceFigures(one: StandingPiece, massG: number, kernel: Kernel): PieceFigures {
   const { x, y } = one.piece.placement;
+  const { region } = one;
+  const measures = remembered(kernel, region, "measures", () => ({
+    centroid: regionCentroid(region),
+    areaMm2: regionAreaMm2(region),
+    perimeterMm: regionPerimeterMm(region),
+    smallestBox: smallestBox(region),
+  }));
   return {
     pieceId: one.piece.id,
     layerKey: one.layer.key,
-    region: one.region,
+    region,
+    ...measures,
     box: one.box ?? { x, y, width: 0, height: 0 },
-    centroid: regionCentroid(one.region) ?? { x, y },
-    areaMm2: regionAreaMm2(one.region),
-    perimeterMm: regionPerimeterMm(one.region),
-    smallestBox: smallestBox(one.region),
+    centroid: measures.centroid ?? { x, y },
     nodes: nodeCount(one.piece.path),
     restsOn: one.restsOn,
     bottom: one.bottom,

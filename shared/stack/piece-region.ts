@@ -1,5 +1,5 @@
 import { flattenPath } from "../geometry/flatten.ts";
-import type { Kernel } from "../geometry/kernel.ts";
+import { type Kernel, remembered } from "../geometry/kernel.ts";
 import type { Path, Placement, Point, Region } from "../geometry/path.ts";
 import { placePath } from "../geometry/placement.ts";
 import { circlePath } from "../geometry/shapes.ts";
@@ -8,18 +8,24 @@ import { boardPath } from "./board-outline.ts";
 
 /** A piece's outline on the board, flattened to 0.02 mm, as non-crossing rings; empty when it covers nothing. */
 export function pieceRegion(piece: { readonly path: Path; readonly placement: Placement }, kernel: Kernel): Region {
-  return kernel.union(flattenPath(placePath(piece.path, piece.placement)), "evenodd");
+  const { path, placement } = piece;
+  return remembered(kernel, [path, placement], "piece region", () =>
+    kernel.union(flattenPath(placePath(path, placement)), "evenodd"),
+  );
 }
 
 /** The board's face, flattened to 0.02 mm, as non-crossing rings. */
 export function boardRegion(board: Board, kernel: Kernel): Region {
-  return kernel.union(flattenPath(boardPath(board)), "evenodd");
+  return remembered(kernel, [board], "board region", () => kernel.union(flattenPath(boardPath(board)), "evenodd"));
 }
 
 /** Discs of one diameter each, joined. */
 export function discsRegion(discs: readonly (Point & { readonly diameter: number })[], kernel: Kernel): Region {
-  return kernel.union(
-    discs.flatMap((disc) => flattenPath(circlePath(disc, disc.diameter / 2))),
-    "nonzero",
+  const which = discs.map(({ x, y, diameter }) => `${x} ${y} ${diameter}`).join(", ");
+  return remembered(kernel, [], `discs ${which}`, () =>
+    kernel.union(
+      discs.flatMap((disc) => flattenPath(circlePath(disc, disc.diameter / 2))),
+      "nonzero",
+    ),
   );
 }

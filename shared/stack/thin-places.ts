@@ -2,7 +2,7 @@ import { regionAreaMm2, regionCentroid } from "../geometry/area.ts";
 import { boxGrow, boxOfRegion } from "../geometry/box.ts";
 import { connectedPieces } from "../geometry/connected.ts";
 import { flattenPath } from "../geometry/flatten.ts";
-import type { Kernel } from "../geometry/kernel.ts";
+import { type Kernel, remembered } from "../geometry/kernel.ts";
 import type { Point, Region } from "../geometry/path.ts";
 import { rectanglePath } from "../geometry/shapes.ts";
 
@@ -22,6 +22,10 @@ const smallestShare = 0.05;
  */
 export function thinPlaces(region: Region, widthMm: number, kernel: Kernel): ThinPlace[] {
   if (region.length === 0 || !(widthMm > 0)) return [];
+  return remembered(kernel, region, `thin places ${widthMm}`, () => lostToOpening(region, widthMm, kernel));
+}
+
+function lostToOpening(region: Region, widthMm: number, kernel: Kernel): ThinPlace[] {
   const half = Math.max(0, widthMm / 2 - leftMm);
   const opened = kernel.offset(kernel.offset(region, -half, "round"), half + slackMm, "mitre");
   const lost = kernel.difference(region, opened);
@@ -43,6 +47,14 @@ export function thinGaps(region: Region, widthMm: number, kernel: Kernel): ThinP
  * runs out to a point; null when nothing is thinner than the limit.
  */
 export function thinnestWidth(
+  region: Region,
+  limitMm: number,
+  kernel: Kernel,
+): { readonly widthMm: number; readonly where: Point } | null {
+  return remembered(kernel, region, `thinnest width ${limitMm}`, () => searchThinnest(region, limitMm, kernel));
+}
+
+function searchThinnest(
   region: Region,
   limitMm: number,
   kernel: Kernel,

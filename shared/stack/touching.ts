@@ -1,5 +1,5 @@
 import { boxesOverlap, boxOfRegion } from "../geometry/box.ts";
-import type { Kernel } from "../geometry/kernel.ts";
+import { type Kernel, remembered } from "../geometry/kernel.ts";
 import type { Box, Region } from "../geometry/path.ts";
 
 /**
@@ -15,6 +15,8 @@ export const spreadOf = (region: Region): Spread => ({ region, box: boxOfRegion(
 /** Whether two outlines lie over each other by more than a sliver. */
 export function areasTouch(a: Spread, b: Spread, kernel: Kernel): boolean {
   if (!a.box || !b.box || !boxesOverlap(a.box, b.box)) return false;
-  const shared = kernel.intersect(a.region, b.region);
-  return shared.length > 0 && kernel.offset(shared, -sliverMm, "round").length > 0;
+  return remembered(kernel, [...a.region, ...b.region], `touch ${a.region.length}`, () => {
+    const shared = kernel.intersect(a.region, b.region);
+    return shared.length > 0 && kernel.offset(shared, -sliverMm, "round").length > 0;
+  });
 }
