@@ -11,6 +11,7 @@ const largest = 500;
 
 type ThroughScrew = Extract<Hardware, { kind: "throughScrew" }>;
 type EdgeGrip = Extract<Hardware, { kind: "edgeGrip" }>;
+/** At a field, or at one within it after a dot. */
 type Say = (field: string, detail: string) => void;
 type Written = (mm: number) => string;
 
@@ -20,7 +21,7 @@ type Written = (mm: number) => string;
  */
 export function checkHardware(hardware: Hardware, unit: LengthUnit): StockFault[] {
   const faults: StockFault[] = [];
-  const say: Say = (field, detail) => faults.push({ path: [field], detail });
+  const say: Say = (field, detail) => faults.push({ path: field.split("."), detail });
   const written: Written = (mm) => formatFine(mm, unit);
   for (const [field, value] of Object.entries(hardware)) {
     if (typeof value === "number" && value > largest) say(field, `At most ${written(largest)}.`);
@@ -91,7 +92,7 @@ function checkThroughScrew(hardware: ThroughScrew, say: Say, written: Written) {
   if (!isShorter(boreDiameter, barrelDiameter))
     say("barrelDiameter", `The spacer is wider than its bore of ${written(boreDiameter)}.`);
   if (cap && isShorter(cap.diameter, screw.headDiameter))
-    say("cap", `The cap goes over the screw's head of ${written(screw.headDiameter)}.`);
+    say("cap.diameter", `The cap goes over the screw's head of ${written(screw.headDiameter)}.`);
   if (!isShorter(barrelLength + washerThickness, screw.length)) {
     const passed = written(barrelLength + washerThickness);
     say(
