@@ -12,10 +12,10 @@ export function wakingWords(then: BoundFinding, now: BoundFinding, unit: LengthU
   return sentences[0] ?? "What the dry fit says of it has changed since.";
 }
 
-/** A measured value with its unit, lengths as the shop writes them; null for none. */
+/** A measured value that does not break from its unit, lengths as the shop writes them; null for none. */
 export function measureWords(value: number | null, valueUnit: string | null, unit: LengthUnit): string | null {
   if (value === null) return null;
-  if (valueUnit === "mm") return formatFine(value, unit);
   const number = String(Math.round(value * 100) / 100);
-  return valueUnit === null ? number : `${number} ${valueUnit}`;
+  const words = valueUnit === "mm" ? formatFine(value, unit) : valueUnit === null ? number : `${number} ${valueUnit}`;
+  return words.replaceAll(" ", "\u00a0");
 }

@@ -10,6 +10,7 @@ import type { DeskStanding } from "../editor/use-standings.ts";
 import { WordButton } from "./cell-controls.tsx";
 import { SeverityWord } from "./finding-look.tsx";
 import { SetAsideForm } from "./set-aside-form.tsx";
+import { ShowFinding } from "./show-finding.tsx";
 
 type FindingItemProps = {
   readonly standing: DeskStanding;
@@ -23,17 +24,11 @@ type FindingItemProps = {
 /** A finding that stands: what, where, and what can be done about it. */
 export function FindingItem({ standing: { finding, woken }, isShown, onShow, onSetAside }: FindingItemProps) {
   const { role, shop } = useReader();
-  const hasPlace = finding.where !== null || finding.layerKey !== null;
   return (
     <li className={cx("flex gap-3 border-b border-rule py-2 text-sm", isShown && "bg-indigo/8")}>
       <SeverityWord severity={finding.severity} />
       <div className="min-w-0 flex-1 wrap-anywhere text-ink">
-        {finding.text}{" "}
-        {hasPlace && onShow && (
-          <WordButton inText aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>
-            Show
-          </WordButton>
-        )}
+        {finding.text} <ShowFinding finding={finding} onShow={onShow} />
         <span className="block text-fine text-graphite">
           {finding.title}, {finding.source}
         </span>

@@ -75,6 +75,7 @@ export function FindingsPanel(props: FindingsPanelProps) {
       <SetAsideList
         standings={standings}
         heading={landing.aside}
+        onShow={onShow}
         onTakeBack={
           settingAside &&
           (async (setAside) => {

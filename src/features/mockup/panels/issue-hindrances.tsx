@@ -30,7 +30,7 @@ export function IssueHindrances({ standings }: IssueHindrancesProps) {
               <li key={key}>
                 {finding.text}
                 <span className="block text-graphite">
-                  “{setAside.reason}” {setAside.by}
+                  “{setAside.reason}”, {setAside.by}
                 </span>
               </li>
             ))}

@@ -15,6 +15,8 @@ const thin: BoundFinding = {
   unit: "mm",
 };
 
+const breaking = (text: string): string => text.replaceAll("\u00a0", " ");
+
 describe("what woke a finding", () => {
   it.each<{ now: Partial<BoundFinding>; unit?: "mm" | "in"; words: string }>([
     { now: { value: 1.64 }, words: "The value was 1.82 mm then, it is 1.64 mm now." },
@@ -26,7 +28,13 @@ describe("what woke a finding", () => {
     // Less than a thousandth of an inch apart: both would read alike.
     { now: { value: 1.83 }, unit: "in", words: "What the dry fit says of it has changed since." },
   ])("$now in $unit: $words", ({ now, unit = "mm", words }) => {
-    expect(wakingWords(thin, { ...thin, ...now }, unit)).toBe(words);
+    expect(breaking(wakingWords(thin, { ...thin, ...now }, unit))).toBe(words);
+  });
+
+  it("keeps a value and its unit on one line", () => {
+    expect(wakingWords(thin, { ...thin, value: 1.64 }, "mm")).toBe(
+      "The value was 1.82\u00a0mm then, it is 1.64\u00a0mm now.",
+    );
   });
 
   it("is a plain number for what is counted", () => {

@@ -120,7 +120,7 @@ async function show(given: Given) {
   return (next: Given) => redraw(page(next, client));
 }
 
-const says = (text: string) => document.body.textContent?.includes(text) ?? false;
+const says = (text: string) => document.body.textContent?.replaceAll("\u00a0", " ").includes(text) ?? false;
 const summary = () => document.querySelector("h2 [role=status]")?.textContent;
 const asideRegion = () => document.querySelector('section[aria-label="Set aside"]');
 const area = (): HTMLTextAreaElement => {

@@ -67,7 +67,7 @@ it("names each stop in the way, and can't be sent", async () => {
 it("says what is set aside, why and by whom, and who will not see it", async () => {
   await show([standing(thin, aside), standing({ ...grip, severity: "remark" })]);
   expect(says("1 finding set aside")).toBe(true);
-  expect(says("Ring of C is 1.82 mm at its thinnest.“Drawn so by the client” Ada Maker")).toBe(true);
+  expect(says("Ring of C is 1.82 mm at its thinnest.“Drawn so by the client”, Ada Maker")).toBe(true);
   expect(says("The client’s sheet does not show them.")).toBe(true);
   expect(says("in the way")).toBe(false);
   expect(button("Issue B").disabled).toBe(false);
