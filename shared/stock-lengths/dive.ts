@@ -55,7 +55,10 @@ export function diveForPacking(
       const times = Math.floor(value + 1e-6);
       return times > 0 ? [{ pattern, times }] : [];
     });
-    if (whole.length > 0 && detours === 0) return dive(withoutUses(rest, whole), [...taken, ...whole], 0);
+    if (whole.length > 0 && detours === 0) {
+      dive(withoutUses(rest, whole), [...taken, ...whole], 0);
+      return;
+    }
     const choices = values.toSorted((a, b) => b.value - a.value || compare(a.pattern, b.pattern)).slice(0, mostChoices);
     for (const [order, { pattern }] of choices.entries()) {
       if (order > detours) return;

@@ -40,7 +40,7 @@ export function packingOfJob(job: CuttingJob): JobPacking {
   for (const { family } of taken) if (family) setups[family.index] = stepsUp(family.cutRunMm);
   const spare = Math.min(...taken.map(({ kerfMm }) => stepsUp(kerfMm)));
   const rooms = job.stock.map(({ lengthMm }) =>
-    Math.floor((valueOf(usableLengthMm({ lengthMm, ...job.saw })) + hairMm) * stepsPerMm),
+    Math.floor((soundValue(usableLengthMm({ lengthMm, ...job.saw })) + hairMm) * stepsPerMm),
   );
   const costKind = costKindOf(job);
   const costs = job.stock.map(
@@ -91,8 +91,8 @@ function takenParts({ parts, saw, widthMm }: CuttingJob): TakenPart[] {
   const families = new Map<string, number>();
   return parts.map((part) => {
     const { start, end, lengthMm } = part;
-    const kerfMm = valueOf(kerfAlongMm(saw.kerfMm, Math.min(start.angle, end.angle)));
-    const run = valueOf(cutRunMm(widthMm, start.angle));
+    const kerfMm = soundValue(kerfAlongMm(saw.kerfMm, Math.min(start.angle, end.angle)));
+    const run = soundValue(cutRunMm(widthMm, start.angle));
     // Shorter than its own mitre it is no parallelogram.
     if (!saw.nests || !hasParallelCuts(part) || lengthMm <= run + hairMm) return { part, kerfMm, family: null };
     const key = `${start.angle}:${start.longPoint}`;
@@ -103,7 +103,7 @@ function takenParts({ parts, saw, widthMm }: CuttingJob): TakenPart[] {
 }
 
 /** The value of an outcome that the job's check has made sure of. */
-export function valueOf<T>(outcome: Outcome<T>): T {
+export function soundValue<T>(outcome: Outcome<T>): T {
   if (outcome.ok) return outcome.value;
   throw new RangeError(`The job was not checked: ${outcome.reason.field}.`);
 }

@@ -78,5 +78,5 @@ function emptyPlan(job: CuttingJob): CuttingPlan {
 
 function shortOfBars({ stock }: CuttingJob): string {
   const count = stock.reduce((sum, { onHand }) => sum + (onHand ?? 0), 0);
-  return `No way was found to cut all parts from the ${count} bars on hand. Add a stock length that can be bought, or more bars.`;
+  return `No way was found to cut all parts from the ${count === 1 ? "one bar" : `${count} bars`} on hand. Add a stock length that can be bought, or more bars.`;
 }
