@@ -15,7 +15,10 @@ const overlapMm = 0.01;
 const gridMm = 0.001;
 
 /** A part of a strip, and how far it runs along it. */
-type Part = { readonly region: Region; readonly start: number; readonly end: number };
+type Part = { readonly region: Region; readonly start: number; readonly end: number; readonly width: number };
+
+/** Parts that come out of one slat. */
+type Group = Omit<Part, "region"> & { readonly parts: readonly Part[] };
 
 /**
  * The slats of one side of a board of any outline, by clipping: each strip is one slat, or several where the board and its
@@ -43,10 +46,15 @@ export function slatsOnOutline(
     });
 }
 
-/** From long point to long point of the shortest slat that is left of each strip's parts: what a start is chosen by. */
-export function trimmedLengths(side: Side, design: SlatDesign, body: Region, kernel: Kernel): number[] {
+/** Length and width of each slat after trimming, without the slats themselves: what a start is chosen by. */
+export function trimmedSizes(
+  side: Side,
+  design: SlatDesign,
+  body: Region,
+  kernel: Kernel,
+): { readonly length: number; readonly width: number }[] {
   return [...partsByStrip(body, side, design, kernel).values()].flatMap((parts) =>
-    joinedAlong(parts).map(({ start, end }) => end - start),
+    joinedAlong(parts).map(({ start, end, width }) => ({ length: end - start, width })),
   );
 }
 
@@ -79,23 +87,28 @@ function partsByStrip(region: Region, side: Side, design: SlatDesign, kernel: Ke
       const at = boxOfRegion([piece.flat().map((point) => alongSlats(side.fromBoard(point), design.angle))]);
       if (!at) continue;
       const strip = Math.floor((at.y + at.height / 2 - zero) / pitch);
-      found.set(strip, [...(found.get(strip) ?? []), { region: piece, start: at.x, end: at.x + at.width }]);
+      found.set(strip, [
+        ...(found.get(strip) ?? []),
+        { region: piece, start: at.x, end: at.x + at.width, width: at.height },
+      ]);
     }
   }
   return found;
 }
 
 /** Parts that lie beside each other along a strip, joined: they come out of one slat. From the near end on. */
-function joinedAlong(
-  parts: readonly Part[],
-): { readonly parts: readonly Part[]; readonly start: number; readonly end: number }[] {
-  const groups: { parts: Part[]; start: number; end: number }[] = [];
+function joinedAlong(parts: readonly Part[]): Group[] {
+  const groups: (Group & { readonly parts: Part[] })[] = [];
   for (const part of parts.toSorted((a, b) => a.start - b.start || a.end - b.end)) {
     const last = groups.at(-1);
-    if (last && part.start < last.end - overlapMm) {
-      last.parts.push(part);
-      last.end = Math.max(last.end, part.end);
-    } else groups.push({ parts: [part], start: part.start, end: part.end });
+    const joins = last !== undefined && part.start < last.end - overlapMm;
+    if (joins) groups.pop();
+    groups.push({
+      parts: joins ? [...last.parts, part] : [part],
+      start: joins ? last.start : part.start,
+      end: joins ? Math.max(last.end, part.end) : part.end,
+      width: joins ? Math.max(last.width, part.width) : part.width,
+    });
   }
   return groups;
 }
