@@ -1,27 +1,57 @@
 import type { Rule } from "./rule.ts";
+import { adhesiveFits } from "./rules/adhesive-fits.ts";
 import { bed } from "./rules/bed.ts";
+import { bondMismatch } from "./rules/bond-mismatch.ts";
 import { colourAgainstArtwork } from "./rules/colour-against-artwork.ts";
+import { contrast } from "./rules/contrast.ts";
+import { dropOuts } from "./rules/drop-outs.ts";
 import { grip } from "./rules/grip.ts";
+import { handed } from "./rules/handed.ts";
+import { hanging } from "./rules/hanging.ts";
 import { holeToEdge } from "./rules/hole-to-edge.ts";
 import { holeWindow } from "./rules/hole-window.ts";
+import { licensedPractice } from "./rules/licensed-practice.ts";
 import { locate } from "./rules/locate.ts";
 import { mixedSupport } from "./rules/mixed-support.ts";
 import { outsideBoard } from "./rules/outside-board.ts";
+import { pocket } from "./rules/pocket.ts";
+import { protrusion } from "./rules/protrusion.ts";
+import { readingDistance } from "./rules/reading-distance.ts";
 import { screwInBarrel } from "./rules/screw-in-barrel.ts";
+import { smallPieces } from "./rules/small-pieces.ts";
+import { stockOnHand } from "./rules/stock-on-hand.ts";
+import { thinGap } from "./rules/thin-gap.ts";
 import { thinStroke } from "./rules/thin-stroke.ts";
+import { twins } from "./rules/twins.ts";
 import { unsupported } from "./rules/unsupported.ts";
+import { wordsAgainstBrief } from "./rules/words-against-brief.ts";
 
 /** Every rule there is. A new one is added here and nowhere else. */
 export const rules: readonly Rule[] = [
   unsupported,
   mixedSupport,
   thinStroke,
+  thinGap,
+  dropOuts,
   holeWindow,
   holeToEdge,
   grip,
   screwInBarrel,
+  bondMismatch,
+  adhesiveFits,
+  pocket,
   locate,
   bed,
+  stockOnHand,
   colourAgainstArtwork,
+  readingDistance,
+  contrast,
+  wordsAgainstBrief,
   outsideBoard,
+  smallPieces,
+  handed,
+  twins,
+  hanging,
+  protrusion,
+  licensedPractice,
 ];

@@ -4,6 +4,7 @@ import type { PieceFigures } from "../../stack/figures.ts";
 import { areasTouch } from "../../stack/touching.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
+import type { Mend } from "../mend.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 import { piecesBelow, topUnderDisc } from "../under.ts";
 import { layersWithFigures, layerWords } from "../words.ts";
@@ -14,7 +15,7 @@ const source = "arithmetic";
  * Rule 2: pieces of one layer, or the barrels of one panel, on different levels; and a panel that would run into what
  * is under it.
  */
-export const mixedSupport: Rule = { number: 2, title: "Mixed support", check };
+export const mixedSupport: Rule = { number: 2, title: "Mixed support", check, mends };
 
 function check(input: RuleInput): Finding[] {
   return layersWithFigures(input).flatMap(({ layer, level, pieces }) => {
@@ -27,16 +28,39 @@ function check(input: RuleInput): Finding[] {
   });
 }
 
-function piecesOnLevels(layer: Layer, pieces: readonly PieceFigures[], { context }: RuleInput): Finding[] {
+/** As many layers as a document takes. */
+const mostLayers = 60;
+
+/** A layer for each of the smaller groups; what else stands in the way is the maker's to decide. */
+function mends(finding: Finding, input: RuleInput): Mend[] {
+  const found = layersWithFigures(input).find(({ layer }) => layer.key === finding.layerKey);
+  if (!found || finding.holeId !== null) return [];
+  const { layer, pieces } = found;
+  const [, ...others] = levelGroups(pieces.map(({ figures }) => figures));
+  const ids = others.map((group) => group.map(({ pieceId }) => pieceId));
+  if (others.length === 0 || !isSameSet(ids.flat(), finding.pieceIds)) return [];
+  if (input.document.layers.length + others.length > mostLayers) return [];
+  const label = others.length === 1 ? "Split the layer" : `Split the layer in ${others.length + 1}`;
+  return [{ label, steps: ids.map((pieceIds) => ({ kind: "split layer", layerKey: layer.key, pieceIds })) }];
+}
+
+const isSameSet = (a: readonly string[], b: readonly string[]): boolean =>
+  a.length === b.length && a.every((one) => b.includes(one));
+
+/** Pieces by the height of their backs, the largest group first, of equal ones the one that comes first. */
+function levelGroups(pieces: readonly PieceFigures[]): PieceFigures[][] {
   const groups: PieceFigures[][] = [];
   for (const piece of pieces) {
     const group = groups.find(([first]) => first && lengthsEqual(first.bottom.nominal, piece.bottom.nominal));
     if (group) group.push(piece);
     else groups.push([piece]);
   }
-  if (groups.length < 2) return [];
-  // The smaller groups are the ones to take out of the layer; of equal ones those that come later.
-  const [most, ...others] = groups.toSorted((a, b) => b.length - a.length);
+  return groups.toSorted((a, b) => b.length - a.length);
+}
+
+function piecesOnLevels(layer: Layer, pieces: readonly PieceFigures[], { context }: RuleInput): Finding[] {
+  // The smaller groups are the ones to take out of the layer.
+  const [most, ...others] = levelGroups(pieces);
   const first = others[0]?.[0];
   if (!most?.[0] || !first) return [];
   const levels = [most, ...others].map((group) => {

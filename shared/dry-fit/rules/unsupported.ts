@@ -1,6 +1,7 @@
 import { measureSupport } from "../../bonds/support.ts";
 import { formatFine } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
+import { moveOntoSupport } from "../mends/move-onto-support.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 import { supportOf } from "../under.ts";
 import { layersWithFigures, percentWords, pieceWords } from "../words.ts";
@@ -8,7 +9,7 @@ import { layersWithFigures, percentWords, pieceWords } from "../words.ts";
 const source = "common practice";
 
 /** Rule 1: a bonded piece that hangs over what it is bonded to. */
-export const unsupported: Rule = { number: 1, title: "Unsupported", check };
+export const unsupported: Rule = { number: 1, title: "Unsupported", check, mends: moveOntoSupport };
 
 function check(input: RuleInput): Finding[] {
   const { limits, kernel, context } = input;
