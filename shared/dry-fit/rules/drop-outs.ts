@@ -1,6 +1,6 @@
 import { boxContains } from "../../geometry/box.ts";
 import { regionContains } from "../../geometry/contains.ts";
-import type { Kernel } from "../../geometry/kernel.ts";
+import { type Kernel, remembered } from "../../geometry/kernel.ts";
 import type { Point } from "../../geometry/path.ts";
 import { countOf } from "../../mockup/change.ts";
 import type { Layer } from "../../mockup/document.ts";
@@ -44,7 +44,8 @@ export function measurePlateIslands({ region }: Pick<PieceFigures, "region">): r
 
 /** Islands of a sheet that a piece is cut out of as a template; they depend on its region alone. */
 export function measureTemplateIslands({ region }: Pick<PieceFigures, "region">, kernel: Kernel): readonly DropOut[] {
-  return templateIslands(region, kernel);
+  if (region.length < 2) return [];
+  return remembered(kernel, region, "template islands", () => templateIslands(region, kernel));
 }
 
 type Places = { readonly piece: PieceWithFigures; readonly places: readonly Point[] };
@@ -87,10 +88,12 @@ function found(layer: Layer, all: readonly Places[], words: Words, { context }: 
   const places = some.flatMap((one) => one.places);
   const [first] = places;
   if (!first) return [];
-  const listed = places
-    .slice(0, mostPlaces)
-    .map(({ x, y }) => `${formatLength(x, context.unit)} | ${formatLengthWithUnit(y, context.unit)}`);
-  const more = places.length > listed.length ? ` and ${places.length - listed.length} more` : "";
+  // Rings about one middle have their islands there, one in the other.
+  const spots = [
+    ...new Set(places.map(({ x, y }) => `${formatLength(x, context.unit)} | ${formatLengthWithUnit(y, context.unit)}`)),
+  ];
+  const listed = spots.slice(0, mostPlaces);
+  const more = spots.length > listed.length ? ` and ${spots.length - listed.length} more places` : "";
   const pieces = some.map(({ piece }) => piece);
   return [
     foundBy(dropOuts, {

@@ -1,6 +1,7 @@
-import type { Kernel } from "../../geometry/kernel.ts";
+import { type Kernel, remembered } from "../../geometry/kernel.ts";
 import type { Region } from "../../geometry/path.ts";
 import { passesPanel } from "../../hardware/standoff-parts.ts";
+import { countOf } from "../../mockup/change.ts";
 import type { Layer } from "../../mockup/document.ts";
 import { mirrorLine } from "../../pieces/mirror-symmetry.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
@@ -25,7 +26,7 @@ export const handed: Rule = {
 
 /** Whether a piece fits its place with one face up only; it depends on the piece's region alone. */
 export function measureHanded({ region }: Pick<PieceFigures, "region">, toleranceMm: number, kernel: Kernel): boolean {
-  return isHanded(region, toleranceMm, kernel);
+  return remembered(kernel, region, `handed ${toleranceMm}`, () => isHanded(region, toleranceMm, kernel));
 }
 
 function isHanded(region: Region, toleranceMm: number, kernel: Kernel): boolean {
@@ -60,7 +61,7 @@ function isHandedInLayer({ hold }: Layer, figures: PieceFigures, { limits, kerne
   if (measureHanded(figures, limits.mirrorMm, kernel)) return true;
   if (hold.kind !== "standoff" || hold.holes.length === 0 || !passesPanel(hold.hardware)) return false;
   const drilled = kernel.difference(figures.region, discsRegion(hold.holes, kernel));
-  return isHanded(drilled, limits.mirrorMm, kernel);
+  return measureHanded({ region: drilled }, limits.mirrorMm, kernel);
 }
 
 function factWords(layer: Layer, count: number, oneWay: readonly PieceWithFigures[]): string {
@@ -70,7 +71,7 @@ function factWords(layer: Layer, count: number, oneWay: readonly PieceWithFigure
   const handedWords =
     oneWay.length === 0
       ? ""
-      : `${oneWay.length} of ${count} in ${layerWords(layer)}${listed} ${fits} with one face up only.`;
+      : `${oneWay.length === count ? countOf(count, "piece") : `${oneWay.length} of ${countOf(count, "piece")}`} of ${layerWords(layer)}${listed} ${fits} with one face up only.`;
   const faces = `The two faces of ${layer.stock.name} look different`;
   if (!layer.stock.facesDiffer) return handedWords;
   return oneWay.length === 0 ? `${faces}: ${count} of ${layerWords(layer)}.` : `${handedWords} ${faces}.`;

@@ -1,6 +1,6 @@
 import { bindingCorners, pocketGapMm } from "../../bonds/pocket-fit.ts";
 import { pocketDepthToleranceMm, pocketFloor } from "../../bonds/pocket-floor.ts";
-import type { Kernel } from "../../geometry/kernel.ts";
+import { type Kernel, remembered } from "../../geometry/kernel.ts";
 import type { Point } from "../../geometry/path.ts";
 import { isShorter } from "../../geometry/tolerance.ts";
 import { sheetBand } from "../../materials/sheet-tolerance.ts";
@@ -96,7 +96,9 @@ export function measureBinding(
   fit: { readonly gapMm: number; readonly bitRadius: number },
   kernel: Kernel,
 ): Point[] {
-  return bindingCorners(region, fit.gapMm, fit.bitRadius, kernel);
+  const { gapMm, bitRadius } = fit;
+  const make = () => bindingCorners(region, gapMm, bitRadius, kernel);
+  return remembered(kernel, region, `binding corners ${gapMm} ${bitRadius}`, make);
 }
 
 function checkCorners(

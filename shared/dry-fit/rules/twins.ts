@@ -1,3 +1,4 @@
+import { countOf } from "../../mockup/change.ts";
 import type { Layer, Piece } from "../../mockup/document.ts";
 import { type NearTwins, nearTwins } from "../../pieces/near-twins.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
@@ -26,12 +27,12 @@ function check(input: RuleInput): Finding[] {
     const alike = cuts.filter(({ piece }) => ids.has(piece.id));
     const [first] = alike;
     if (!first) return [];
-    const sheet = `${first.layer.stock.name}, ${formatLengthWithUnit(first.layer.thickness, context.unit)},`;
+    const sheet = `${first.layer.stock.name} (${formatLengthWithUnit(first.layer.thickness, context.unit)})`;
     const oneLayer = alike.every(({ layer }) => layer.key === first.layer.key);
     return [
       foundBy(twins, {
         severity: "remark",
-        text: `${alike.length === 1 ? "1 piece" : `${alike.length} pieces`} of ${sheet} can be laid wrong and look right: ${groupWords(found, alike)}. Mark each with its place, and which way is up.`,
+        text: `${countOf(alike.length, "piece")} of ${sheet} can be laid wrong and look right: ${groupWords(found, alike)}. Mark each with its place, and which way is up.`,
         layerKey: oneLayer ? first.layer.key : null,
         pieceIds: alike.map(({ piece }) => piece.id),
         where: first.figures.centroid,
