@@ -27,6 +27,9 @@ const briefWords: Readonly<Record<keyof Brief, string>> = {
   quantity: "quantity",
   brandColours: "brand colours",
   about: "what it is about",
+  walkway: "whether people pass it",
+  overhead: "whether it hangs overhead",
+  electrical: "whether it has electrical parts",
   words: "words",
 };
 

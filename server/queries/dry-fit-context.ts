@@ -14,9 +14,9 @@ export async function dryFitContext(
   return {
     unit: shop.unit,
     place: brief.place ?? "inside",
-    walkway: false,
-    overhead: false,
-    electrical: false,
+    walkway: brief.walkway,
+    overhead: brief.overhead,
+    electrical: brief.electrical,
     words: brief.words,
     stock: stockOfItems((await wholeStock(context, shop.id)).map(presentStockItem)),
   };

@@ -24,6 +24,10 @@ export const briefSchema = z.strictObject({
   quantity: z.number(howMany).int(howMany).min(1, howMany).max(1000, howMany),
   brandColours: writtenText(400),
   about: writtenText(2000),
+  /** What asks for more than a drawing: people pass within reach, stand under it, or it has lights and wires. */
+  walkway: z.boolean(),
+  overhead: z.boolean(),
+  electrical: z.boolean(),
   /** The words exactly as they shall read, a line a line. */
   words: writtenText(1000),
 });
@@ -40,6 +44,9 @@ export const emptyBrief: Brief = {
   quantity: 1,
   brandColours: "",
   about: "",
+  walkway: false,
+  overhead: false,
+  electrical: false,
   words: "",
 };
 

@@ -2,20 +2,26 @@ import type { Rule } from "./rule.ts";
 import { adhesiveFits } from "./rules/adhesive-fits.ts";
 import { bed } from "./rules/bed.ts";
 import { bondMismatch } from "./rules/bond-mismatch.ts";
+import { breakThrough } from "./rules/break-through.ts";
+import { capOnLevel } from "./rules/cap-on-level.ts";
 import { colourAgainstArtwork } from "./rules/colour-against-artwork.ts";
 import { contrast } from "./rules/contrast.ts";
 import { dropOuts } from "./rules/drop-outs.ts";
+import { footOnWood } from "./rules/foot-on-wood.ts";
+import { freeToMove } from "./rules/free-to-move.ts";
 import { grip } from "./rules/grip.ts";
 import { handed } from "./rules/handed.ts";
 import { hanging } from "./rules/hanging.ts";
 import { holeToEdge } from "./rules/hole-to-edge.ts";
 import { holeWindow } from "./rules/hole-window.ts";
 import { licensedPractice } from "./rules/licensed-practice.ts";
+import { load } from "./rules/load.ts";
 import { locate } from "./rules/locate.ts";
 import { mixedSupport } from "./rules/mixed-support.ts";
 import { outsideBoard } from "./rules/outside-board.ts";
 import { pocket } from "./rules/pocket.ts";
 import { protrusion } from "./rules/protrusion.ts";
+import { pushAndSag } from "./rules/push-and-sag.ts";
 import { readingDistance } from "./rules/reading-distance.ts";
 import { screwInBarrel } from "./rules/screw-in-barrel.ts";
 import { smallPieces } from "./rules/small-pieces.ts";
@@ -37,6 +43,12 @@ export const rules: readonly Rule[] = [
   holeToEdge,
   grip,
   screwInBarrel,
+  breakThrough,
+  load,
+  capOnLevel,
+  footOnWood,
+  pushAndSag,
+  freeToMove,
   bondMismatch,
   adhesiveFits,
   pocket,

@@ -19,7 +19,9 @@ const groups = {
   bed: "Bed of the machine",
   stock: "Stock on hand",
   colour: "Colour against artwork",
+  lettering: "Lettering",
   pieces: "Small, handed and similar pieces",
+  hanging: "Hanging and safety",
 } as const;
 
 type LimitDescription = {
@@ -321,6 +323,20 @@ const descriptions: Readonly<Record<LimitKey, LimitDescription>> = {
     unit: "colour difference",
     why: "Common practice: over 5 it is another colour.",
   },
+  contrastRatio: {
+    group: "lettering",
+    rules: [25],
+    label: "Contrast of lettering, as a ratio",
+    unit: "to one",
+    why: "WCAG 2.2, 1.4.11, asks 3 to 1 of shapes on a screen; signs are held to it as common practice.",
+  },
+  contrastPoints: {
+    group: "lettering",
+    rules: [25],
+    label: "Contrast of lettering, in light reflectance",
+    unit: "points",
+    why: "30 points are taken for adequate (BS 8300-2).",
+  },
   smallPieceMm: {
     group: "pieces",
     rules: [28],
@@ -355,6 +371,27 @@ const descriptions: Readonly<Record<LimitKey, LimitDescription>> = {
     label: "Difference that an eye overlooks, of the longer side",
     unit: "percent",
     why: "Our choice, where it is more than the length above.",
+  },
+  unweighedShare: {
+    group: "hanging",
+    rules: [36, 38],
+    label: "Hardware, adhesive and finish over the mass worked out",
+    unit: "percent",
+    why: "Our choice: nobody states their density.",
+  },
+  heaviestKg: {
+    group: "hanging",
+    rules: [38],
+    label: "Mass that the shop hangs by itself",
+    unit: "kilograms",
+    why: "Our choice. Over it a licensed professional is asked, and the local code comes first.",
+  },
+  protrusionMm: {
+    group: "hanging",
+    rules: [37],
+    label: "Reach off the wall over a walkway",
+    unit: "length",
+    why: "4 in (2010 ADA Standards, 307, from memory). Local rules come first.",
   },
 };
 

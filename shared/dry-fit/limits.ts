@@ -68,6 +68,9 @@ export const limitsSchema = z.strictObject({
   /** Rule 23: ΔE00 of stock against artwork. */
   colourRemark: z.number().finite().min(0).max(100).default(2),
   colourCaution: z.number().finite().min(0).max(100).default(5),
+  /** Rule 25: how lettering stands out: WCAG's ratio, and points of light reflectance. */
+  contrastRatio: z.number().finite().min(1).max(21).default(3),
+  contrastPoints: z.number().finite().min(0).max(100).default(30),
   /** Rule 28: a piece whose longer side is under it is lost easily. */
   smallPieceMm: mm.default(8),
   /** Rule 29: how far a piece and its mirror image may differ and still fit. Our choice. */
@@ -76,6 +79,11 @@ export const limitsSchema = z.strictObject({
   twinSameMm: mm.default(0.1),
   twinAlikeMm: mm.default(0.75),
   twinAlikeShare: share.default(0.04),
+  /** Rules 36 and 38: hardware, adhesive and finish over the mass that is worked out, and what is too heavy for the shop alone. Our choice. */
+  unweighedShare: share.default(0.2),
+  heaviestKg: z.number().finite().positive().max(10_000).default(25),
+  /** Rule 37: how far a sign may reach out over a walkway (4 in, 2010 ADA Standards, 307, from memory). */
+  protrusionMm: mm.default(102),
 });
 
 export type Limits = z.infer<typeof limitsSchema>;

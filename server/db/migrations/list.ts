@@ -6,6 +6,16 @@ import { provenAddresses } from "./2026-12-01-04-proven-addresses.ts";
 import { setAsides } from "./2026-12-01-05-set-asides.ts";
 import { shopLimits } from "./2026-12-01-06-shop-limits.ts";
 import { stock } from "./2026-12-01-07-stock.ts";
+import { briefPlace } from "./2026-12-01-08-brief-place.ts";
 
 /** Every migration in order. A new one goes to the end. */
-export const migrations: readonly Migration[] = [people, work, guards, provenAddresses, setAsides, shopLimits, stock];
+export const migrations: readonly Migration[] = [
+  people,
+  work,
+  guards,
+  provenAddresses,
+  setAsides,
+  shopLimits,
+  stock,
+  briefPlace,
+];

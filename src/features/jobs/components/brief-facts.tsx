@@ -13,6 +13,16 @@ export function BriefFacts({ job, unit }: { readonly job: Job; readonly unit: Le
     ["Place", brief.place],
     ["The wall", brief.wall],
     [
+      "Asks for care",
+      [
+        brief.walkway && "people walk past it within reach",
+        brief.overhead && "hangs over where people stand or walk",
+        brief.electrical && "has electrical parts",
+      ]
+        .filter(Boolean)
+        .join("; "),
+    ],
+    [
       "Read from",
       brief.viewingDistanceMm !== null &&
         (unit === "mm"

@@ -2,6 +2,7 @@ import { Controller } from "react-hook-form";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
+import { Checkbox } from "@/components/ui/checkbox.tsx";
 import { DistanceField } from "@/components/ui/distance-field.tsx";
 import { Field } from "@/components/ui/field.tsx";
 import { LengthField } from "@/components/ui/length-field.tsx";
@@ -109,6 +110,16 @@ export function BriefForm({
           )}
         />
       </div>
+      <fieldset>
+        <legend className="text-sm text-graphite">What asks for more care</legend>
+        <Checkbox
+          label="People walk past it within reach"
+          hint="How far it stands off the wall is then checked."
+          {...register("brief.walkway")}
+        />
+        <Checkbox label="It hangs over where people stand or walk" {...register("brief.overhead")} />
+        <Checkbox label="It has lights or other electrical parts" {...register("brief.electrical")} />
+      </fieldset>
       <div className="grid gap-4 sm:grid-cols-2">
         <TextArea
           label="The wall"

@@ -11,15 +11,15 @@ export function dryFitContextOf({
   stock,
 }: {
   unit: LengthUnit;
-  brief: Pick<Brief, "place" | "words">;
+  brief: Brief;
   stock: readonly StockItem[];
 }): DryFitContext {
   return {
     unit,
     place: brief.place ?? "inside",
-    walkway: false,
-    overhead: false,
-    electrical: false,
+    walkway: brief.walkway,
+    overhead: brief.overhead,
+    electrical: brief.electrical,
     words: brief.words,
     stock: stockOnHand(stock),
   };

@@ -54,8 +54,8 @@ it("what is remembered gives the same figures and findings as working all out an
   fc.assert(
     fc.property(
       fc.array(fc.tuple(fc.nat(edits.length - 1), fc.double({ min: 0, max: 0.999, noNaN: true })), {
-        minLength: 3,
-        maxLength: 6,
+        minLength: 2,
+        maxLength: 4,
       }),
       (steps) => {
         const kernel = rememberingKernel(plain);
@@ -69,6 +69,6 @@ it("what is remembered gives the same figures and findings as working all out an
         }
       },
     ),
-    { numRuns: 12 },
+    { numRuns: 4 },
   );
 });

@@ -1,0 +1,67 @@
+import type { Layer, Piece } from "../mockup/document.ts";
+import type { PieceFigures } from "../stack/figures.ts";
+import type { RuleInput } from "./rule.ts";
+import { layersWithFigures } from "./words.ts";
+
+/** A piece that reads as something. */
+export type Letter = { readonly layer: Layer; readonly piece: Piece; readonly figures: PieceFigures };
+
+/** Every piece that reads, in document order; what covers nothing reads as nothing. */
+export function lettersOf(input: Pick<RuleInput, "document" | "figures">): Letter[] {
+  return layersWithFigures(input).flatMap(({ layer, pieces }) =>
+    pieces.flatMap(({ piece, figures }) =>
+      piece.reads !== "" && figures.areaMm2 > 0 ? [{ layer, piece, figures }] : [],
+    ),
+  );
+}
+
+/** Letters as tall as capitals: capitals, figures, and small ones with an ascender. */
+const tall = /[\p{Lu}\p{Nd}bdfhklt&]/u;
+/** What goes below the line makes the box taller than the letter. */
+const below = /[gjpqyQ,;ç]/u;
+
+/**
+ * The height in mm that the letters of a layer are read by: the least of its pieces that are as tall as a capital, or of
+ * all when none is. An upright piece's own box; a turned one's smallest box.
+ */
+export function letterHeightMm(
+  letters: readonly Letter[],
+): { readonly heightMm: number; readonly letter: Letter } | null {
+  const clear = letters.filter(({ piece }) => tall.test(piece.reads) && !below.test(piece.reads));
+  let least: { heightMm: number; letter: Letter } | null = null;
+  for (const letter of clear.length > 0 ? clear : letters) {
+    const heightMm = heightOf(letter);
+    if (heightMm > 0 && (!least || heightMm < least.heightMm)) least = { heightMm, letter };
+  }
+  return least;
+}
+
+function heightOf({ piece, figures }: Letter): number {
+  const upright = Math.abs(piece.placement.turn % 180) < 1;
+  if (upright) return figures.box.height;
+  const { smallestBox } = figures;
+  return smallestBox ? Math.max(smallestBox.width, smallestBox.length) : figures.box.height;
+}
+
+/**
+ * What the letters read in lines from the top, each from left to right: a letter belongs to the line whose middle lies
+ * within half its height. Spaces between words are not told.
+ */
+export function linesOf(letters: readonly Letter[]): Letter[][] {
+  const lines: { middle: number; height: number; letters: Letter[] }[] = [];
+  const fromTop = letters.toSorted((a, b) => a.figures.box.y - b.figures.box.y || a.figures.box.x - b.figures.box.x);
+  for (const letter of fromTop) {
+    const { y, height } = letter.figures.box;
+    const middle = y + height / 2;
+    const line = lines.find((one) => Math.abs(one.middle - middle) <= Math.max(one.height, height) / 2);
+    if (!line) lines.push({ middle, height, letters: [letter] });
+    else {
+      line.letters.push(letter);
+      if (height > line.height) {
+        line.height = height;
+        line.middle = middle;
+      }
+    }
+  }
+  return lines.map((line) => line.letters.toSorted((a, b) => a.figures.box.x - b.figures.box.x));
+}
