@@ -4,7 +4,6 @@ import type { LengthUnit } from "../units/length.ts";
 /** Figures that are no lengths: what stands after them, and how many of it make one of what is stored. */
 export const figureUnits = {
   percent: { suffix: "%", perStored: 100 },
-  "percent per point": { suffix: "% per point", perStored: 100 },
   expansion: { suffix: "µm per m and K", perStored: 1e6 },
   kelvin: { suffix: "K", perStored: 1 },
   points: { suffix: "points", perStored: 1 },

@@ -34,8 +34,7 @@ function RuleNumber({ rule, to }: { readonly rule: number; readonly to: string |
   if (to === null) return <span className="inline-block py-2">Rule {rule}</span>;
   return (
     <TextLink to={to} className="inline-block py-2">
-      Rule {rule}
-      <span className="sr-only">, how we work it out</span>
+      Rule {rule} <span className="sr-only">how we work it out</span>
     </TextLink>
   );
 }

@@ -28,7 +28,12 @@ export function LimitsForm({ shop, unit, set, explanationOf }: LimitsFormProps) 
     for (const key of keys) form.setValue(`limits.${key}`, describeLimit(key).usual, { shouldValidate: true });
   };
   return (
-    <form noValidate onSubmit={limits.handleSubmit} aria-label="Limits of the dry fit" className="scroll-pb-24">
+    <form
+      noValidate
+      onSubmit={limits.handleSubmit}
+      aria-label="Limits of the dry fit"
+      className="[&_:is(a,button,input)]:scroll-mb-32"
+    >
       <UnsavedGuard when={changed.length > 0 && !busy} what="The shop’s set of limits" />
       <div className="flex min-h-11 flex-wrap items-center gap-x-6 gap-y-1">
         <p role="status" className="text-base text-ink">
@@ -67,9 +72,12 @@ export function LimitsForm({ shop, unit, set, explanationOf }: LimitsFormProps) 
           <p role="status" className="text-sm text-graphite">
             {limits.saved
               ? "Saved. Mockups keep to them from now on; sheets already issued stay as they are."
-              : changed.length > 0
-                ? `${counted(changed.length, "change")} not saved yet.`
-                : ""}
+              : [
+                  changed.length > 0 && `${counted(changed.length, "change")} not saved yet.`,
+                  limits.toMend > 0 && `${counted(limits.toMend, "limit")} to mend first.`,
+                ]
+                  .filter(Boolean)
+                  .join(" ")}
           </p>
         </div>
       </div>

@@ -53,12 +53,14 @@ export function useLimitsForm(shop: string, unit: LengthUnit, set: LimitSet) {
   // A pair's fault goes when either of the two is mended, so all of them are looked at anew with each change.
   const faults = form.formState.isSubmitted ? checkLimits(written, unit) : [];
   const refused = form.formState.errors.limits;
+  const faultOf = (key: LimitKey): string | undefined =>
+    faults.find((fault) => fault.key === key)?.detail ??
+    (refused?.[key]?.type === "server" ? refused[key].message : undefined);
   return {
     ...send,
     form,
-    faultOf: (key: LimitKey): string | undefined =>
-      faults.find((fault) => fault.key === key)?.detail ??
-      (refused?.[key]?.type === "server" ? refused[key].message : undefined),
+    faultOf,
+    toMend: limitKeys.filter((key) => faultOf(key) !== undefined).length,
     written,
     changed,
     saved: change.isSuccess && changed.length === 0,

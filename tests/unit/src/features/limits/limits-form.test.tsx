@@ -113,6 +113,7 @@ describe("the limits as a form", () => {
     await says("Not over 30 %, which is “Area off its support, for a stop”.");
     expect(page()).toContain("Fill this in.");
     expect(page()).toContain("From 0 K to 100 K.");
+    expect(page()).toContain("3 changes not saved yet. 3 limits to mend first.");
     expect(sent()).toEqual([]);
     expect(field("Area off its support, for a caution").getAttribute("aria-invalid")).toBe("true");
     await type(field("Area off its support, for a stop"), "50");
