@@ -67,7 +67,7 @@ export const loadCalculations: CalculationGroup = {
     {
       id: "screw-lateral",
       title: "A load across a screw",
-      formula: `K · D² newtons, K by kind of wood and specific gravity; over ${lateralSafety} for what may be put on. Less in proportion under 7 D in the wood, nothing under 4 D.`,
+      formula: `K · D² newtons, K by kind of wood and specific gravity; over ${lateralSafety} for what may be put on. Less in proportion under 7 D in the wood; under 4 D that is an estimate.`,
       source: {
         text: "Wood Handbook before 1991, table 8-4, and National Design Specification before 1991",
         status: "from memory",

@@ -32,7 +32,8 @@ export const screwCalculations: CalculationGroup = {
       source: { text: "Arithmetic; one stud diameter is common practice", status: "common practice" },
       limits: "Sheet thickness between the tolerances of ISO 7823.",
       example: () => {
-        const stud = { studLength: 12, studDiameter: 5, boreDepth: 9.5, countersunk: true, screw: { headHeight: 2 } };
+        const screw = { head: "flat", headHeight: 2 } as const;
+        const stud = { studLength: 12, studDiameter: 5, boreDepth: 9.5, countersunk: true, screw };
         const grip = capStudGrip(stud, sheetBand("cast", 5));
         return worked(
           [

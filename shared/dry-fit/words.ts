@@ -1,4 +1,4 @@
-import type { Layer, Piece } from "../mockup/document.ts";
+import type { Hardware, Layer, Piece } from "../mockup/document.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import type { RuleInput } from "./rule.ts";
 
@@ -53,3 +53,10 @@ export function hoursWords(hours: number): string {
 export const layerWords = (layer: Layer): string => `${layer.key}, ${layer.name}`;
 
 export const percentWords = (share: number): string => `${Number((share * 100).toFixed(1))} %`;
+
+/** What of a standoff goes into the wood, in a sentence. */
+export const fixingWords = (hardware: Hardware): string =>
+  hardware.kind === "blindStud" ? `the stud of ${hardware.name}` : `${hardware.screw.name} in ${hardware.name}`;
+
+/** A force to a tenth of a newton. */
+export const newtonWords = (force: number): string => `${Number(force.toFixed(1))} N`;

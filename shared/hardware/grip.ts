@@ -1,3 +1,4 @@
+import type { Screw } from "../mockup/document.ts";
 import type { Banded } from "../units/banded.ts";
 
 /** How much of a cap's stud is in the barrel, and how much must and may be, in mm. */
@@ -10,9 +11,17 @@ export type Grip = {
   readonly room: number;
 };
 
+/** What of a screw's head stands above a barrel's floor, mm: only a flat one in a countersunk floor is flush with it. */
+export function headAboveFloorMm(
+  countersunk: boolean,
+  { head, headHeight }: Pick<Screw, "head" | "headHeight">,
+): number {
+  return countersunk && head === "flat" ? 0 : headHeight;
+}
+
 /**
- * The grip of a cap standoff: stud length less the panel under the cap. At the thickest panel at least one stud
- * diameter must be in the barrel; at the thinnest the stud must not meet the screw's head, or the cap never tightens.
+ * The grip of a cap standoff: stud length less the panel under the cap. At the thickest panel at least so many stud
+ * diameters must be in the barrel (one: common practice); at the thinnest the stud must not meet the screw's head, or the cap never tightens.
  */
 export function capStudGrip(
   hardware: {
@@ -20,16 +29,15 @@ export function capStudGrip(
     readonly studDiameter: number;
     readonly boreDepth: number;
     readonly countersunk: boolean;
-    readonly screw: { readonly headHeight: number };
+    readonly screw: Pick<Screw, "head" | "headHeight">;
   },
   panel: Banded,
+  gripDiameters = 1,
 ): Grip {
-  // A flat head in a countersunk floor is flush with it; on a plain floor it stands up in the bore.
-  const headAboveFloor = hardware.countersunk ? 0 : hardware.screw.headHeight;
   return {
     least: hardware.studLength - panel.most,
     most: hardware.studLength - panel.least,
-    needed: hardware.studDiameter,
-    room: hardware.boreDepth - headAboveFloor,
+    needed: gripDiameters * hardware.studDiameter,
+    room: hardware.boreDepth - headAboveFloorMm(hardware.countersunk, hardware.screw),
   };
 }

@@ -27,9 +27,12 @@ export function screwWithdrawalN(screw: {
 }
 
 /** Allowable withdrawal in N: the ultimate load over 5.5, as the National Design Specification's 2850 G² D has it. */
-export function allowableWithdrawalN(screw: Parameters<typeof screwWithdrawalN>[0]): Outcome<number> {
+export function allowableWithdrawalN(
+  screw: Parameters<typeof screwWithdrawalN>[0],
+  divisor: number = withdrawalSafety,
+): Outcome<number> {
   const ultimate = screwWithdrawalN(screw);
-  return ultimate.ok ? { ok: true, value: ultimate.value / withdrawalSafety } : ultimate;
+  return ultimate.ok ? { ok: true, value: ultimate.value / divisor } : ultimate;
 }
 
 /** Gauges for which the formula was found, by the screw's length in inches (Wood Handbook, chapter 8; from memory). */

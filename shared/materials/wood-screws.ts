@@ -1,4 +1,4 @@
-import { inchesToMm } from "../units/length.ts";
+import { inchesToMm, mmToInches } from "../units/length.ts";
 
 /** Largest flat-head diameter in inches by gauge, measured at the sharp edge, 82° head (ASME B18.6.1). */
 const flatHeadInches: ReadonlyMap<number, number> = new Map([
@@ -16,6 +16,11 @@ const flatHeadInches: ReadonlyMap<number, number> = new Map([
 /** Basic diameter in mm of a wood screw of that gauge: 0.060 + 0.013 n inches (ASME B18.6.1). */
 export function woodScrewDiameterMm(gauge: number): number {
   return inchesToMm(0.06 + 0.013 * gauge);
+}
+
+/** The gauge whose screw comes nearest to a diameter in mm, for screws that are not made by number; 0 at the least. */
+export function nearestGauge(diameterMm: number): number {
+  return Math.max(0, Math.round((mmToInches(diameterMm) - 0.06) / 0.013));
 }
 
 /**

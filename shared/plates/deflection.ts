@@ -22,9 +22,15 @@ export function deflectionOf(mm: number, thickness: number, upperEstimate: boole
   return mm <= most ? { kind: "figure", mm, upperEstimate } : { kind: "beyond the theory", overMm: most };
 }
 
-/** What a sheet of that longest spacing may bend before it is a caution: the larger of 1 mm and a/300 (our choice). */
-export function deflectionLimitMm(spacing: number): Outcome<number> {
-  return checked({ spacing: [spacing, lengthRange] }, () => Math.max(1, spacing / 300));
+/** The usual limits of bending, mm and as a part of the spacing (our choice). */
+export const usualBend = { mm: 1, part: 300 } as const;
+
+/** What a sheet of that longest spacing may bend before it is a caution: the larger of a length and a part of the spacing. */
+export function deflectionLimitMm(
+  spacing: number,
+  { mm, part }: { mm: number; part: number } = usualBend,
+): Outcome<number> {
+  return checked({ spacing: [spacing, lengthRange] }, () => Math.max(mm, spacing / part));
 }
 
 /** Whether it bends too far. Beyond the theory it counts as too far: nobody can say that it does not. */

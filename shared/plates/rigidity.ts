@@ -13,7 +13,7 @@ export function rigidityNmm({ modulus, thickness, poisson }: Sheet): number {
 }
 
 /** Standard gravity in m/s² (NIST SP 811). */
-const standardGravity = 9.80665;
+export const standardGravity = 9.80665;
 
 /** A lying sheet's own weight in N/mm²: thickness in mm, density in kg/m³. */
 export function ownWeight(thickness: number, densityKgM3: number): number {

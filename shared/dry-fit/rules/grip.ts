@@ -1,37 +1,33 @@
-import { isShorter, lengthsEqual } from "../../geometry/tolerance.ts";
+import { lengthsEqual } from "../../geometry/tolerance.ts";
 import { barrelAddsUp, nearestBarrel } from "../../hardware/barrel-offset.ts";
-import { capStudGrip } from "../../hardware/grip.ts";
 import { heldOffsetMm } from "../../hardware/standoff-parts.ts";
-import { sheetBand } from "../../materials/sheet-tolerance.ts";
-import type { Hardware, Hole, Layer } from "../../mockup/document.ts";
-import type { PieceFigures } from "../../stack/figures.ts";
-import { holdsPiece } from "../../stack/held-piece.ts";
+import type { Hardware } from "../../mockup/document.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
+import { type GripFault, gripFault, overlapFault } from "../grip-fault.ts";
+import { gripMends } from "../mends/grip-mends.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
-import { layersWithFigures, layerWords } from "../words.ts";
+import { fixingPlaces } from "../screw-at.ts";
+import { pieceAt, type StandoffLayer, standoffLayers } from "../standoff-layers.ts";
+import { layerWords } from "../words.ts";
 
-const source = "arithmetic";
+const source = "arithmetic; how much grip is enough is common practice";
 
-/** Rule 8: the cap tightens, the barrel is as long as the offset, and every piece has a standoff to hold it. */
-export const grip: Rule = { number: 8, title: "Grip", check };
+/** Rule 8: a standoff grips, it is as high as the offset, and every piece has one to hold it. */
+export const grip: Rule = { number: 8, title: "Grip", check, mends: gripMends };
 
 function check(input: RuleInput): Finding[] {
-  return layersWithFigures(input).flatMap(({ layer, pieces }) => {
-    if (layer.hold.kind !== "standoff") return [];
-    const { hardware, holes, offset } = layer.hold;
-    const figures = pieces.map((one) => one.figures);
-    return [
-      ...checkOffset(layer, hardware, offset, input),
-      ...checkGrip(layer, hardware, holes, input),
-      ...checkHeld(layer, hardware, holes, figures),
-    ];
-  });
+  return standoffLayers(input).flatMap((standing) => [
+    ...checkOffset(standing, input),
+    ...checkGrip(standing, input),
+    ...checkHeld(standing),
+  ]);
 }
 
-function checkOffset(layer: Layer, hardware: Hardware, offset: number, { context, figures }: RuleInput): Finding[] {
+function checkOffset({ layer, hold, pieces }: StandoffLayer, { context }: RuleInput): Finding[] {
+  const { hardware, offset } = hold;
   const mm = (length: number) => formatLengthWithUnit(length, context.unit);
-  const where = figures.pieces.find((piece) => piece.layerKey === layer.key)?.centroid ?? null;
+  const where = pieces[0]?.centroid ?? null;
   const base = { severity: "stop" as const, layerKey: layer.key, where, unit: "mm", source };
   if (hardware.kind === "capStud" && !barrelAddsUp(hardware)) {
     const sum = hardware.boreDepth + hardware.floorThickness;
@@ -48,37 +44,66 @@ function checkOffset(layer: Layer, hardware: Hardware, offset: number, { context
   return [foundBy(grip, { ...base, text, value: offset, limit: held })];
 }
 
-function checkGrip(layer: Layer, hardware: Hardware, holes: readonly Hole[], { context }: RuleInput): Finding[] {
-  const [first] = holes;
-  if (!first || hardware.kind !== "capStud") return [];
-  const mm = (length: number) => formatFine(length, context.unit);
-  const { least, most, needed, room } = capStudGrip(hardware, sheetBand(layer.stock.process, layer.thickness));
-  const base = {
-    severity: "stop" as const,
-    layerKey: layer.key,
-    where: { x: first.x, y: first.y },
-    unit: "mm",
-    source,
-  };
-  const stud = `The ${mm(hardware.studLength)} stud of ${hardware.name}`;
-  if (isShorter(least, needed)) {
-    const text = `${stud} has ${mm(Math.max(0, least))} left in the barrel when the sheet of ${layerWords(layer)} is at its thickest; one stud diameter, ${mm(needed)}, is the least. The cap pulls out.`;
-    return [foundBy(grip, { ...base, text, value: least, limit: needed })];
+/** Standoffs that fail alike are one finding, at the first of them; those of an edge grip depend on their place. */
+function checkGrip(standing: StandoffLayer, input: RuleInput): Finding[] {
+  const { layer, hold } = standing;
+  const { hardware, offset } = hold;
+  const found = new Map<string, Finding>();
+  for (const { hole, piece, stack } of fixingPlaces(standing, input)) {
+    const faults = [
+      gripFault(hardware, { stack, offset }, input.limits),
+      overlapFault(hardware, piece, hole, input.limits),
+    ];
+    for (const fault of faults) {
+      if (!fault) continue;
+      const finding = foundBy(grip, {
+        severity: "stop",
+        text: textOf(fault, hardware, layerWords(layer), (length) => formatFine(length, input.context.unit)),
+        layerKey: layer.key,
+        holeId: hole.id,
+        where: { x: hole.x, y: hole.y },
+        value: fault.valueMm,
+        limit: fault.limitMm,
+        unit: "mm",
+        source,
+      });
+      if (!found.has(finding.text)) found.set(finding.text, finding);
+    }
   }
-  if (isShorter(room, most)) {
-    const text = `${stud} reaches ${mm(most)} into the barrel when the sheet of ${layerWords(layer)} is at its thinnest, but the bore has ${mm(room)} before the screw's head. The cap never tightens.`;
-    return [foundBy(grip, { ...base, text, value: most, limit: room })];
-  }
-  return [];
+  return [...found.values()];
 }
 
-function checkHeld(
-  layer: Layer,
+function textOf(
+  { kind, valueMm, limitMm }: GripFault,
   hardware: Hardware,
-  holes: readonly Hole[],
-  pieces: readonly PieceFigures[],
-): Finding[] {
-  const loose = pieces.filter((piece) => !holes.some((hole) => holdsPiece(hardware, piece.region, hole)));
+  layer: string,
+  mm: (length: number) => string,
+) {
+  const value = mm(Math.max(0, valueMm));
+  const limit = mm(limitMm);
+  const stud = "studLength" in hardware ? `The ${mm(hardware.studLength)} stud of ${hardware.name}` : "";
+  switch (kind) {
+    case "stud too short":
+      return `${stud} has ${value} left in the barrel when the sheet of ${layer} is at its thickest; ${limit} is the least. The cap pulls out.`;
+    case "stud too long":
+      return `${stud} reaches ${value} into the barrel when the sheet of ${layer} is at its thinnest, but the bore has ${limit} before the screw's head. The cap never tightens.`;
+    case "stud not in the wood":
+      return `${stud} comes ${value} into the wood under ${layer}; ${limit} is the least that glue holds it by.`;
+    case "slot too narrow":
+      return `The slot of ${hardware.name} is ${value} wide; the sheet of ${layer} can measure ${limit}, and then it does not go in.`;
+    case "slot too wide":
+      return `The slot of ${hardware.name} is ${value} wider than the sheet of ${layer} at its thinnest; up to ${limit} a gasket or set screw takes up. The panel rattles.`;
+    case "overlap too small":
+      return `An edge grip reaches ${value} over the edge of ${layer}; ${limit} is the least. The panel slips out.`;
+    case "overlap too deep":
+      return `An edge grip is set ${value} over the edge of ${layer}, but its slot is only ${limit} deep: the panel does not go in.`;
+  }
+}
+
+function checkHeld(standing: StandoffLayer): Finding[] {
+  const { layer, hold, pieces } = standing;
+  const held = new Set(hold.holes.map((hole) => pieceAt(standing, hole)?.pieceId));
+  const loose = pieces.filter(({ pieceId }) => !held.has(pieceId));
   const [first] = loose;
   if (!first) return [];
   const which = loose.length === 1 ? "A piece" : `${loose.length} pieces`;

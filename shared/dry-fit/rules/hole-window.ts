@@ -1,53 +1,27 @@
 import { isShorter } from "../../geometry/tolerance.ts";
-import { fixedPoint, holeMovementMm } from "../../hardware/hole-movement.ts";
-import { holeWindowOfKind } from "../../hardware/hole-window-of-kind.ts";
-import { panelHoleOf } from "../../hardware/panel-hole.ts";
-import type { Hardware, Hole, Layer } from "../../mockup/document.ts";
+import type { Hardware, Hole } from "../../mockup/document.ts";
 import { formatFine } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
+import { holeWindowMends } from "../mends/hole-window-mends.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
-import { layersWithFigures, layerWords } from "../words.ts";
+import { type StandoffLayer, standoffLayers } from "../standoff-layers.ts";
+import { isEmptyWindow, windowOfHole } from "../window-of-hole.ts";
+import { layerWords } from "../words.ts";
 
 const source = "arithmetic; play and cover are common practice";
 
 /** Rule 6: a hole wide enough for its stud to move and narrow enough to hide under its cap. */
-export const holeWindow: Rule = { number: 6, title: "Hole window", check };
+export const holeWindow: Rule = { number: 6, title: "Hole window", check, mends: holeWindowMends };
 
 function check(input: RuleInput): Finding[] {
-  return layersWithFigures(input).flatMap(({ layer }) =>
-    layer.hold.kind === "standoff" ? layer.hold.holes.flatMap((hole) => checkHole(layer, hole, input)) : [],
+  return standoffLayers(input).flatMap((standing) =>
+    standing.hold.holes.flatMap((hole) => checkHole(standing, hole, input)),
   );
 }
 
-/** The window of one hole of a layer with the movement it allows for; null where nothing passes the panel. */
-export function windowOfHole(
-  hold: Extract<Layer["hold"], { kind: "standoff" }>,
-  hole: Hole,
-  { document, limits, context }: Pick<RuleInput, "document" | "limits" | "context">,
-): { readonly lower: number; readonly upper: number; readonly movement: number } | null {
-  const { hardware, holes } = hold;
-  const fixed = fixedPoint(holes) ?? hole;
-  const movement = hole.fixed
-    ? 0
-    : holeMovementMm(fixed, hole, {
-        expansionPerK: limits.expansionPerK,
-        temperatureK: context.place === "outside" ? limits.temperatureOutsideK : limits.temperatureInsideK,
-        woodPerPoint: document.backer.stock.movementPerPoint,
-        moisturePoints: limits.moisturePoints,
-        grainTurn: document.backer.grainTurn,
-      });
-  const window = holeWindowOfKind(panelHoleOf(hardware), {
-    placingError: limits.placingErrorMm,
-    movement,
-    cover: limits.coverMm,
-  });
-  return window && { ...window, movement };
-}
-
-function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
-  if (layer.hold.kind !== "standoff") return [];
-  const { hardware } = layer.hold;
-  const window = windowOfHole(layer.hold, hole, input);
+function checkHole({ layer, hold }: StandoffLayer, hole: Hole, input: RuleInput): Finding[] {
+  const { hardware } = hold;
+  const window = windowOfHole(hold, hole, input);
   const passing = passingOf(hardware);
   if (!window || !passing) return [];
   const { lower, upper, movement } = window;
@@ -63,7 +37,7 @@ function checkHole(layer: Layer, hole: Hole, input: RuleInput): Finding[] {
   const stud = `${mm(passing.diameter)} ${passing.what}`;
   const hides = `${mm(Math.min(passing.cover, hardware.barrelDiameter))} ${passing.coverWhat}`;
   const play = `${mm(input.limits.placingErrorMm)} placing error a side and ${mm(movement)} of movement`;
-  if (isShorter(upper, lower)) {
+  if (isEmptyWindow(window)) {
     const text = `No hole of ${layerWords(layer)} can be right here: the ${stud} needs ${mm(lower)} for ${play}, but from ${mm(upper)} on the hole shows round the ${hides}. Take a wider cap, or bring this hole and the fixed one nearer each other.`;
     return [foundBy(holeWindow, { ...base, text, value: lower, limit: upper })];
   }

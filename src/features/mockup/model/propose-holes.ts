@@ -1,6 +1,6 @@
 import type { Limits } from "#shared/dry-fit/limits.ts";
-import { windowOfHole } from "#shared/dry-fit/rules/hole-window.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
+import { windowOfHole } from "#shared/dry-fit/window-of-hole.ts";
 import { flattenPath } from "#shared/geometry/flatten.ts";
 import type { Point } from "#shared/geometry/path.ts";
 import { placeRegion } from "#shared/geometry/placement.ts";

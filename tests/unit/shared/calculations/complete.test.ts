@@ -9,6 +9,9 @@ const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour
 /** Parts of calculations that are explained with the ones that use them. */
 const parts = [
   "hardware/check-hardware.ts",
+  "hardware/driven-of.ts",
+  "hardware/nearest-place.ts",
+  "hardware/over-panel.ts",
   "hardware/panel-hole.ts",
   "hardware/standoff-parts.ts",
   "legibility/accessible-limits.ts",

@@ -10,7 +10,13 @@ describe("the grip", () => {
   const panel = { nominal: 5, least: 4.1, most: 5.9 };
 
   it("is the stud less the panel, at its thickest and its thinnest", () => {
-    const stud = { studLength: 12, studDiameter: 5, boreDepth: 9.5, countersunk: true, screw: { headHeight: 2 } };
+    const stud: Parameters<typeof capStudGrip>[0] = {
+      studLength: 12,
+      studDiameter: 5,
+      boreDepth: 9.5,
+      countersunk: true,
+      screw: { head: "flat", headHeight: 2 },
+    };
     const grip = capStudGrip(stud, panel);
     expect(grip.least).toBeCloseTo(6.1, 9);
     expect(grip.most).toBeCloseTo(7.9, 9);
@@ -18,7 +24,13 @@ describe("the grip", () => {
   });
 
   it("has less room over a head that stands on a plain floor", () => {
-    const stud = { studLength: 12, studDiameter: 5, boreDepth: 9.5, countersunk: false, screw: { headHeight: 2 } };
+    const stud: Parameters<typeof capStudGrip>[0] = {
+      studLength: 12,
+      studDiameter: 5,
+      boreDepth: 9.5,
+      countersunk: false,
+      screw: { head: "flat", headHeight: 2 },
+    };
     expect(capStudGrip(stud, panel).room).toBe(7.5);
   });
 });

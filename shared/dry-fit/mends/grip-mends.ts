@@ -1,0 +1,57 @@
+import { barrelAddsUp } from "../../hardware/barrel-offset.ts";
+import { heldOffsetMm, usualOffsetMm } from "../../hardware/standoff-parts.ts";
+import type { Hardware } from "../../mockup/document.ts";
+import { formatLengthWithUnit } from "../../units/format-length.ts";
+import type { Finding } from "../finding.ts";
+import { gripFault, overlapFault } from "../grip-fault.ts";
+import type { Mend } from "../mend.ts";
+import type { RuleInput } from "../rule.ts";
+import { fixingPlaces } from "../screw-at.ts";
+import { type StandoffLayer, standoffLayerOf } from "../standoff-layers.ts";
+import { hardwareLike, hardwareMend } from "./hardware-mend.ts";
+import { moveHoleMends } from "./move-hole.ts";
+
+/**
+ * An offset that no barrel makes goes to the barrel, or the barrel goes to it. A stud or a slot that does not grip is
+ * changed for stock that does; an edge grip that misses its edge is moved.
+ */
+export function gripMends(finding: Finding, input: RuleInput): Mend[] {
+  const standing = standoffLayerOf(input, finding.layerKey);
+  if (!standing || finding.unit !== "mm") return [];
+  const fitting = hardwareLike(standing, input).filter(
+    (hardware) => gripsAll(standing, hardware, input) && (hardware.kind !== "capStud" || barrelAddsUp(hardware)),
+  );
+  if (finding.holeId === null) return offsetMends(standing, fitting, input);
+  const { hold, layer, pieces } = standing;
+  const hole = hold.holes.find(({ id }) => id === finding.holeId);
+  const misses = hole && pieces.some((piece) => overlapFault(hold.hardware, piece, hole, input.limits));
+  const place = hole && fixingPlaces(standing, input).find((one) => one.hole.id === hole.id);
+  const loose = place && gripFault(hold.hardware, { stack: place.stack, offset: hold.offset }, input.limits);
+  if (!loose) return misses ? moveHoleMends({ ...finding, layerKey: layer.key }, input) : [];
+  const [best] = fitting;
+  return best ? [hardwareMend(standing, best, input)] : [];
+}
+
+function offsetMends(standing: StandoffLayer, fitting: readonly Hardware[], input: RuleInput): Mend[] {
+  const { hardware } = standing.hold;
+  const held = heldOffsetMm(hardware);
+  const sound = held !== null && (hardware.kind !== "capStud" || barrelAddsUp(hardware));
+  const [nearest] = fitting.filter((other) => !sound || usualOffsetMm(other) !== held);
+  const toBarrel: Mend[] = sound
+    ? [
+        {
+          label: `Set it ${formatLengthWithUnit(held, input.context.unit)} off`,
+          steps: [{ kind: "offset", layerKey: standing.layer.key, offset: held }],
+        },
+      ]
+    : [];
+  return [...toBarrel, ...(nearest ? [hardwareMend(standing, nearest, input)] : [])];
+}
+
+function gripsAll(standing: StandoffLayer, hardware: Hardware, input: RuleInput): boolean {
+  const offset = usualOffsetMm(hardware);
+  const { hold } = standing;
+  return fixingPlaces({ ...standing, hold: { ...hold, hardware } }, input).every(
+    ({ stack }) => gripFault(hardware, { stack, offset }, input.limits) === null,
+  );
+}

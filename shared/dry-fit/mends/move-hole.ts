@@ -1,0 +1,73 @@
+import type { Point } from "../../geometry/path.ts";
+import { isShorter } from "../../geometry/tolerance.ts";
+import { edgeOverlapMm } from "../../hardware/edge-grip.ts";
+import { nearestPlace } from "../../hardware/nearest-place.ts";
+import { seenDiameterMm } from "../../hardware/standoff-parts.ts";
+import type { Hole } from "../../mockup/document.ts";
+import { formatFine } from "../../units/format-length.ts";
+import type { Finding } from "../finding.ts";
+import { footGround, footShare } from "../foot-share.ts";
+import { holeEdgeFault } from "../hole-edge-fault.ts";
+import type { Mend, MendStep } from "../mend.ts";
+import { frontAt, thingsOver } from "../on-panel.ts";
+import type { RuleInput } from "../rule.ts";
+import { pieceAt, type StandoffLayer, standoffLayerOf } from "../standoff-layers.ts";
+import { intoWindow, isEmptyWindow, windowOfHole } from "../window-of-hole.ts";
+
+/**
+ * Moves a finding's hole to the nearest place where it keeps off the edges, its front lies on one level and its foot
+ * stands on what the barrels stand on, as wide as it has to be there. None when there is no such place near by.
+ */
+export function moveHoleMends({ layerKey, holeId }: Finding, input: RuleInput): Mend[] {
+  const standing = standoffLayerOf(input, layerKey);
+  const hole = standing?.hold.holes.find(({ id }) => id === holeId);
+  if (!standing || !hole) return [];
+  const fits = fitsAt(standing, hole, input);
+  const place = nearestPlace(hole, fits);
+  if (!place) return [];
+  const { key } = standing.layer;
+  const { diameter } = movedTo(standing, hole, place, input);
+  const steps: MendStep[] = [{ kind: "hole place", layerKey: key, holeId: hole.id, ...place }];
+  if (diameter !== hole.diameter) steps.push({ kind: "hole diameter", layerKey: key, holeId: hole.id, diameter });
+  const far = formatFine(Math.hypot(place.x - hole.x, place.y - hole.y), input.context.unit);
+  return [{ label: `Move it by ${far}`, steps }];
+}
+
+/** The hole at another place, as wide as its window there asks for; as wide as it was where there is none. */
+function movedTo({ hold }: StandoffLayer, hole: Hole, place: Point, input: RuleInput): Hole {
+  const moved = { ...hole, x: place.x, y: place.y };
+  const holes = hold.holes.map((one) => (one.id === hole.id ? moved : one));
+  const window = windowOfHole({ hardware: hold.hardware, holes }, moved, input);
+  return window && !isEmptyWindow(window) ? { ...moved, diameter: intoWindow(hole.diameter, window) } : moved;
+}
+
+function fitsAt(standing: StandoffLayer, hole: Hole, input: RuleInput): (place: Point) => boolean {
+  const { hold, level, pieces } = standing;
+  const { limits } = input;
+  const { hardware } = hold;
+  const held = pieceAt(standing, hole);
+  const surroundings = new Map(
+    pieces.map((piece) => [
+      piece.pieceId,
+      { things: thingsOver(input, level, piece), ground: footGround(standing, piece, input) },
+    ]),
+  );
+  const apart = Math.max(hardware.barrelDiameter, seenDiameterMm(hardware));
+  const others = hold.holes.filter((other) => other.id !== hole.id);
+  return (place) => {
+    if (others.some((other) => isShorter(Math.hypot(other.x - place.x, other.y - place.y), apart))) return false;
+    const moved = movedTo(standing, hole, place, input);
+    const piece = pieceAt(standing, moved);
+    if (!piece || (held && held.pieceId !== piece.pieceId)) return false;
+    if (holeEdgeFault(standing, moved, limits)) return false;
+    if (hardware.kind === "edgeGrip") {
+      const overlap = edgeOverlapMm(hardware.barrelDiameter, piece.region, place);
+      if (isShorter(overlap, limits.edgeGripMm) || isShorter(hardware.gripDepth, overlap)) return false;
+    }
+    const around = surroundings.get(piece.pieceId);
+    if (!around) return false;
+    const { over, under } = frontAt(place, { hold, piece, things: around.things, clearanceMm: limits.capClearanceMm });
+    if (over.length > 0 || under.length > 0) return false;
+    return !isShorter(footShare(place, hardware.barrelDiameter, around.ground, input), limits.footShare);
+  };
+}

@@ -1,0 +1,68 @@
+import { drivenOf } from "../hardware/driven-of.ts";
+import { reachRoom, screwReach } from "../hardware/screw-reach.ts";
+import type { Hardware, Hole } from "../mockup/document.ts";
+import type { PieceFigures } from "../stack/figures.ts";
+import { type Banded, bandSum, exactly } from "../units/banded.ts";
+import { frontAt, thingsOver } from "./on-panel.ts";
+import type { RuleInput } from "./rule.ts";
+import { footHeightMm, pieceAt, type StandoffLayer } from "./standoff-layers.ts";
+import { type WoodAt, type WoodGround, woodAt, woodGround } from "./wood-at.ts";
+
+/** A standoff where it stands, with the wood under it and what lies under its front. */
+export type FixingPlace = {
+  readonly hole: Hole;
+  readonly piece: PieceFigures;
+  readonly stack: Banded;
+  readonly wood: WoodAt | null;
+  /** From what the barrel stands on down to the wood's face; less than nothing where it stands in a recess. */
+  readonly gapMm: number;
+};
+
+/** Every standoff of a layer that holds a piece, in the order of its holes. */
+export function fixingPlaces(
+  standing: StandoffLayer,
+  input: RuleInput,
+  ground: WoodGround = woodGround(input),
+): FixingPlace[] {
+  const { hold, level } = standing;
+  const overOf = new Map<string, ReturnType<typeof thingsOver>>();
+  return hold.holes.flatMap((hole) => {
+    const piece = pieceAt(standing, hole);
+    if (!piece) return [];
+    const things = overOf.get(piece.pieceId) ?? thingsOver(input, level, piece);
+    overOf.set(piece.pieceId, things);
+    const { stack } = frontAt(hole, { hold, piece, things, clearanceMm: input.limits.capClearanceMm });
+    const wood = woodAt(input, ground, hole);
+    const gapMm = wood ? footHeightMm(hold, piece) - wood.face : 0;
+    return [{ hole, piece, stack, wood, gapMm }];
+  });
+}
+
+export type Driven = {
+  /** How deep the point comes below the wood's face, mm. */
+  readonly point: Banded;
+  /** How deep the wood may be opened, and what is left of that; less than nothing breaks through. */
+  readonly mostMm: number;
+  readonly leftMm: number;
+  /** How much of it is in wood at the least, mm; nothing or less when it does not get there. */
+  readonly inWoodMm: number;
+};
+
+/** How a standoff's screw or stud sits in the wood at its place; null beside the board, or for measures out of range. */
+export function drivenAt(
+  { wood, stack, gapMm }: Pick<FixingPlace, "wood" | "stack" | "gapMm">,
+  hardware: Hardware,
+  { offset, limits }: { offset: number; limits: RuleInput["limits"] },
+): Driven | null {
+  if (!wood) return null;
+  const reach = screwReach(drivenOf(hardware, { stack, offset }));
+  if (!reach.ok) return null;
+  const under = exactly(-gapMm);
+  const point = bandSum(reach.value.point, under);
+  const opened = bandSum(reach.value.opened, under);
+  const { slat, substrate } = wood;
+  const room = reachRoom({ point, opened }, { slat, substrate, sanding: limits.sandingMm, skin: limits.skinMm });
+  if (!room.ok) return null;
+  const { mostMm, leftMm } = room.value;
+  return { point, mostMm, leftMm, inWoodMm: point.least - (wood.face - wood.top) };
+}
