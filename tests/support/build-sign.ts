@@ -51,13 +51,20 @@ export const plate = (id: string, width: number, height: number, at: [number, nu
 export const disc = (id: string, radius: number, at: [number, number], rest: Partial<Piece> = {}) =>
   buildPiece(id, circlePath({ x: 0, y: 0 }, radius), { at, ...rest });
 
-export const bondHold: Hold = { kind: "bond", adhesive: first(standardAdhesives), tack: null };
+/** Holds on acrylic and on wood, and gives with both. */
+const tape = (() => {
+  const found = standardAdhesives.find(({ family }) => family === "high-bond tape");
+  if (!found) throw new Error("The standard stock has no tape.");
+  return found;
+})();
+
+export const bondHold: Hold = { kind: "bond", adhesive: tape, tack: null };
 
 export const pocketHold = (depth: number, clearance = 0): Hold => ({
   kind: "pocket",
   depth,
   clearance,
-  adhesive: first(standardAdhesives),
+  adhesive: tape,
   cut: "engraved",
   bitRadius: 0,
 });

@@ -1,6 +1,7 @@
 import { drawElevation } from "#shared/drawing/elevation.ts";
-import type { Finding } from "#shared/dry-fit/finding.ts";
 import { rules } from "#shared/dry-fit/index.ts";
+import { listMends } from "#shared/dry-fit/list-mends.ts";
+import type { RuleInput } from "#shared/dry-fit/rule.ts";
 import { runDryFit } from "#shared/dry-fit/run-dry-fit.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
@@ -29,11 +30,18 @@ export function drawPicture(
     ...(texture ? { texture } : {}),
   });
   grain.keep(document, elevation);
-  const findings = runDryFit({ document, figures, limits, context, kernel });
-  return { figures, drawing: { elevation, dryFit: fitOf(findings) } };
+  return { figures, drawing: { elevation, dryFit: fitOf({ document, figures, limits, context, kernel }) } };
 }
 
-function fitOf(findings: readonly Finding[]): DryFit {
+/** Worst first, so what is left without mends on a sign full of findings is the least of them. */
+const mostMended = 60;
+
+function fitOf(input: RuleInput): DryFit {
+  const findings = runDryFit(input);
   const found = new Set(findings.map(({ rule }) => rule));
-  return { findings, fine: rules.filter(({ number }) => !found.has(number)).length };
+  return {
+    findings,
+    mends: findings.map((finding, index) => (index < mostMended ? listMends(finding, input) : [])),
+    fine: rules.filter(({ number }) => !found.has(number)).length,
+  };
 }

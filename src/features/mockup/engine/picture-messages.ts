@@ -1,6 +1,7 @@
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
+import type { Mend } from "#shared/dry-fit/mend.ts";
 import type { DryFitContext } from "#shared/dry-fit/rule.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
@@ -18,8 +19,12 @@ export type PictureInput = {
   readonly what: "all" | "figures";
 };
 
-/** `fine` is the number of rules that found nothing. */
-export type DryFit = { readonly findings: readonly Finding[]; readonly fine: number };
+/** `fine` is the number of rules that found nothing; `mends` stand in the order of the findings. */
+export type DryFit = {
+  readonly findings: readonly Finding[];
+  readonly mends: readonly (readonly Mend[])[];
+  readonly fine: number;
+};
 
 export type Picture = {
   readonly figures: Figures;

@@ -1,6 +1,7 @@
 import { useEffect, useRef, useState } from "react";
 import type { Role } from "#shared/contracts/account.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
+import type { Mend } from "#shared/dry-fit/mend.ts";
 import { maySetAside } from "#shared/dry-fit/set-aside.ts";
 import { wakingWords } from "#shared/dry-fit/waking-words.ts";
 import { cx } from "@/lib/cx.ts";
@@ -17,12 +18,22 @@ type FindingItemProps = {
   readonly isShown: boolean;
   /** Missing where there is nothing to show it on. */
   readonly onShow?: ((finding: Finding) => void) | undefined;
+  /** What a press would change about the drawing. */
+  readonly mends: readonly Mend[];
+  readonly onMend?: ((mend: Mend) => void) | undefined;
   /** Sets it aside and gives what stood in the way, or null; missing where the mockup is only looked at. */
   readonly onSetAside?: ((finding: Finding, reason: string) => Promise<string | null>) | undefined;
 };
 
 /** A finding that stands: what, where, and what can be done about it. */
-export function FindingItem({ standing: { finding, woken }, isShown, onShow, onSetAside }: FindingItemProps) {
+export function FindingItem({
+  standing: { finding, woken },
+  isShown,
+  onShow,
+  mends,
+  onMend,
+  onSetAside,
+}: FindingItemProps) {
   const { role, shop } = useReader();
   return (
     <li className={cx("flex gap-3 border-b border-rule py-2 text-sm", isShown && "bg-indigo/8")}>
@@ -36,6 +47,15 @@ export function FindingItem({ standing: { finding, woken }, isShown, onShow, onS
           <p className="mt-1 border-l-2 border-ochre pl-2 text-fine text-graphite">
             {woken.by} set this aside on {formatDay(woken.at)}: “{woken.reason}”{" "}
             <span className="text-ink">{wakingWords(woken.finding, finding, shop.unit)}</span>
+          </p>
+        )}
+        {onMend && mends.length > 0 && (
+          <p className="flex flex-wrap gap-x-3">
+            {mends.map((mend) => (
+              <WordButton key={mend.label} className="-ml-1" onClick={() => onMend(mend)}>
+                {mend.label}
+              </WordButton>
+            ))}
           </p>
         )}
         {onSetAside && (

@@ -1,5 +1,6 @@
 import { useEffect, useRef, useState } from "react";
 import type { Finding, Severity } from "#shared/dry-fit/finding.ts";
+import type { Mend } from "#shared/dry-fit/mend.ts";
 import { paths } from "@/app/paths.ts";
 import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
@@ -22,17 +23,20 @@ type FindingsPanelProps = {
   readonly shown?: Finding | null;
   readonly onShow?: (finding: Finding) => void;
   /** Missing where the mockup is only looked at. */
+  readonly onMend?: (mend: Mend) => void;
+  /** Missing where the mockup is only looked at. */
   readonly settingAside?: SettingAside;
   readonly className?: string;
 };
 
 /** What the dry fit found, worst first, each with the way to the spot; below it what was set aside. */
 export function FindingsPanel(props: FindingsPanelProps) {
-  const { dryFit, standings: known, isCurrent, shown = null, onShow, settingAside, className } = props;
+  const { dryFit, standings: known, isCurrent, shown = null, onShow, onMend, settingAside, className } = props;
   const { slug } = useShop();
   const landing = useLanding();
   const standings = known.standings ?? [];
   const standing = standings.filter(({ setAside }) => setAside === null);
+  const mends = new Map(dryFit?.findings.map((finding, index) => [finding, dryFit.mends[index] ?? []]));
   const ready = dryFit !== null && known.standings !== null;
 
   return (
@@ -61,6 +65,8 @@ export function FindingsPanel(props: FindingsPanelProps) {
             standing={one}
             isShown={one.finding === shown}
             onShow={onShow}
+            mends={isCurrent ? (mends.get(one.finding) ?? []) : []}
+            onMend={onMend}
             onSetAside={
               settingAside &&
               (async (finding, reason) => {

@@ -2,6 +2,7 @@ import { type ReactNode, useMemo, useReducer, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
+import { applyMend } from "#shared/dry-fit/apply-mend.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
@@ -163,6 +164,7 @@ export function MockupDesk(props: MockupDeskProps) {
           isCurrent={isCurrent}
           shown={finding}
           onShow={show}
+          onMend={(mend) => dispatch({ kind: "edit", label: mend.label, change: (before) => applyMend(before, mend) })}
           settingAside={settingAside}
           className="border-rule max-[1200px]:border-t min-[1200px]:border-l"
         />

@@ -43,14 +43,20 @@ it("the default limits are those that the shop starts with", () => {
 
 const good = () =>
   buildSign([
-    buildLayer("B", [plate("panel", 200, 100, [300, 150])], {
+    buildLayer("B", [plate("panel", 104, 104, [300, 150])], {
       thickness: 4.5,
       hold: standoffHold(
-        [hole("h1", 220, 150, { fixed: true, diameter: 7.5 }), hole("h2", 380, 150, { diameter: 7.5 })],
+        // 70 mm apart, so that a push in the middle bends it by less than 1 mm.
+        [
+          hole("h1", 265, 115, { fixed: true, diameter: 7.5 }),
+          hole("h2", 335, 115, { diameter: 7.5 }),
+          hole("h3", 265, 185, { diameter: 7.5 }),
+          hole("h4", 335, 185, { diameter: 7.5 }),
+        ],
         buildCapStud(),
       ),
     }),
-    buildLayer("C", [disc("sun", 20, [300, 150])], { hold: cemented, marked: "back" }),
+    buildLayer("C", [disc("sun", 20, [300, 150])], { marked: "back" }),
   ]);
 const hung = (sign: MockupDocument): MockupDocument => ({
   ...sign,
@@ -83,6 +89,8 @@ it("findings come stops first, then by rule, then from the top down and from lef
     "caution 27 left",
     "caution 27 right",
     "caution 27 low",
+    "caution 36 ",
+    "remark 18 ",
   ]);
 });
 

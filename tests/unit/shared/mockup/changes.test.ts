@@ -120,7 +120,7 @@ describe("a layer", () => {
     },
     {
       layer: night({ hold: bondHold }),
-      texts: ["B, Night disc: on Standoff 15 × 12 becomes bonded with Wicking cement"],
+      texts: ["B, Night disc: on Standoff 15 × 12 becomes bonded with High-bond tape"],
     },
     { layer: night({ locate: "none" }), texts: ["B, Night disc: place found by template becomes nothing"] },
     { layer: night({ hidden: true }), texts: ["B, Night disc: hidden in the mockup"] },
@@ -146,13 +146,13 @@ describe("a layer", () => {
     if (!epoxy) throw new Error("There is no epoxy.");
     const texts = (was: Layer["hold"], is: Layer["hold"]) => listChanges(glued(was), glued(is)).map(({ text }) => text);
     expect(texts(bondHold, { kind: "bond", adhesive: epoxy, tack: null })).toEqual([
-      "B, Night disc: bonded with Wicking cement becomes bonded with Slow epoxy",
+      "B, Night disc: bonded with High-bond tape becomes bonded with Slow epoxy",
     ]);
     expect(texts(pocketHold(2), pocketHold(2.5))).toEqual([
-      "B, Night disc: let in 2 mm deep with Wicking cement becomes let in 2.5 mm deep with Wicking cement",
+      "B, Night disc: let in 2 mm deep with High-bond tape becomes let in 2.5 mm deep with High-bond tape",
     ]);
     expect(texts(pocketHold(2, 0.1), pocketHold(2, 0.2))).toEqual([
-      "B, Night disc: let in 2 mm deep with Wicking cement: other measures",
+      "B, Night disc: let in 2 mm deep with High-bond tape: other measures",
     ]);
   });
 

@@ -6,6 +6,7 @@ import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import type { Role } from "#shared/contracts/account.ts";
 import type { SetAside } from "#shared/contracts/set-asides.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
+import type { Mend } from "#shared/dry-fit/mend.ts";
 import { boundFinding } from "#shared/dry-fit/set-aside.ts";
 import { useSettingAside } from "@/features/mockup/editor/use-setting-aside.ts";
 import { useStandings } from "@/features/mockup/editor/use-standings.ts";
@@ -58,18 +59,26 @@ beforeEach(async () => {
 afterEach(() => server.end());
 const written = () => server.asked.filter(({ method }) => method !== "GET");
 
-type Given = { findings: readonly Finding[]; role?: Role; editing?: boolean; save?: () => Promise<number | null> };
+type Given = {
+  findings: readonly Finding[];
+  mends?: readonly Mend[];
+  onMend?: (mend: Mend) => void;
+  role?: Role;
+  editing?: boolean;
+  save?: () => Promise<number | null>;
+};
 
-function Panel({ findings, editing = true, save = async () => 4 }: Given) {
+function Panel({ findings, mends = [], onMend, editing = true, save = async () => 4 }: Given) {
   const standings = useStandings(place, findings);
   const settingAside = useSettingAside({ ...place, save });
   return (
     <FindingsPanel
-      dryFit={{ findings, fine: 9 }}
+      dryFit={{ findings, mends: findings.map(() => mends), fine: 9 }}
       standings={standings}
       isCurrent
       onShow={() => undefined}
       {...(editing ? { settingAside } : {})}
+      {...(onMend ? { onMend } : {})}
     />
   );
 }
@@ -136,6 +145,21 @@ async function write(text: string) {
   });
 }
 const buttonNames = () => [...document.querySelectorAll("button")].map((one) => one.textContent);
+
+it("offers what mends a finding, and hands over the one that is pressed", async () => {
+  const pressed: Mend[] = [];
+  const mends: Mend[] = [
+    { label: "Move it in by 2 mm", steps: [{ kind: "move pieces", pieceIds: ["p"], dx: 2, dy: 0 }] },
+    { label: "Take 6 mm sheet", steps: [{ kind: "thickness", layerKey: "B", thickness: 6 }] },
+  ];
+  const redraw = await show({ findings: [thin], mends, onMend: (mend) => pressed.push(mend) });
+  expect(buttonNames()).toEqual(expect.arrayContaining(["Move it in by 2 mm", "Take 6 mm sheet"]));
+  const second = [...document.querySelectorAll("button")].find(({ textContent }) => textContent === "Take 6 mm sheet");
+  await act(async () => second?.click());
+  expect(pressed).toEqual([mends[1]]);
+  await redraw({ findings: [thin], mends });
+  expect(buttonNames()).not.toContain("Take 6 mm sheet");
+});
 
 describe("setting a finding aside", () => {
   it("asks why, sends the saved version's finding, and moves it below with reason, name and day", async () => {
