@@ -162,6 +162,31 @@ describe("who may set aside", () => {
     }
   });
 
+  it("the stop of a sign that hangs outside is an owner's to set aside, and a maker issues it then", async () => {
+    const own = await buildJob(world, { brief: { place: "outside" } });
+    const document = hanging(300);
+    const mockupVersion = await save(own, document);
+    const findings = await dryFitOf(document, { context: { place: "outside", words: own.job.brief.words } });
+    const [outside] = findings.filter(({ rule }) => rule === 38).map(boundFinding);
+    if (!outside) throw new Error("Nobody is asked about a sign outside.");
+    await setOthersAside(own, document, mockupVersion);
+    const issue = { params: of(own), body: { mockupVersion } };
+    expect(await own.visitors.maker.refusal(issueRevision, issue)).toMatchObject({
+      code: "dry_fit_stops",
+      extra: { findings: [{ rule: 38, text: outside.text }] },
+    });
+    const body = { mockupVersion, finding: outside, reason: "Ada Beam, licensed, has seen the wall" };
+    expect((await own.visitors.maker.refusal(setAsideFinding, { params: of(own), body })).code).toBe("not_allowed");
+    // What is not a stop in the request is not found: it can't be smuggled past.
+    const milder = { ...body, finding: { ...outside, severity: "caution" as const } };
+    expect((await own.visitors.maker.refusal(setAsideFinding, { params: of(own), body: milder })).code).toBe(
+      "wrong_state",
+    );
+    const { id } = await own.visitors.owner.get(setAsideFinding, { params: of(own), body });
+    expect(await SetAside.findByPk(id)).toMatchObject({ rule: 38, severity: "stop", setAsideRole: "owner" });
+    expect((await own.visitors.maker.get(issueRevision, issue)).state).toBe("preparing");
+  });
+
   it("what is set aside on a job is no affair of its client, nor of another job", async () => {
     const { own, given } = await hangingJob();
     const { id } = await own.visitors.maker.get(setAsideFinding, given);

@@ -5,6 +5,7 @@ import AxeBuilder from "@axe-core/playwright";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, expect, it, vi } from "vitest";
 import { saveMockup } from "#shared/contracts/mockups.ts";
+import { standardAdhesives } from "#shared/materials/standard-stock.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { launchBrowser } from "../support/browser.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
@@ -44,9 +45,12 @@ beforeAll(async () => {
   [app, browser] = await Promise.all([startTestApp({ poolMax: 8 }), launchBrowser()]);
   world = await buildWorld(app);
   // Bonded, with nothing to find the place by: a caution. Half over the board's edge: a stop and a caution.
+  const adhesive = standardAdhesives.find(({ family }) => family === "epoxy");
+  if (!adhesive) throw new Error("The standard stock has an epoxy.");
+  const hold = { kind: "bond", adhesive, tack: null } as const;
   const document = buildSign([
-    buildLayer("B", [plate("disc", 200, 150, [300, 200])], { name: "Disc", locate: "none" }),
-    buildLayer("C", [plate("arm", 100, 50, [0, 60], { name: "Arm" })], { name: "Arms" }),
+    buildLayer("B", [plate("disc", 200, 150, [300, 200])], { name: "Disc", hold, locate: "none" }),
+    buildLayer("C", [plate("arm", 100, 50, [0, 60], { name: "Arm" })], { name: "Arms", hold }),
   ]);
   const params = { ...world.params, jobId: world.job.id };
   await world.visitors.owner.get(saveMockup, { params, body: { version: 0, document } });
