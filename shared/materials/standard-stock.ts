@@ -153,6 +153,7 @@ export const standardStandoffs: readonly CapStud[] = [
   capStud(stout, 25, 18),
 ];
 
+/** The screw suits 3 and 4.5 mm sheets over a board of 18 mm. */
 const through = (barrelLength: number, length: number): Hardware => ({
   kind: "throughScrew",
   stockId: null,
@@ -177,10 +178,11 @@ const blind = (barrelLength: number, studLength: number): Hardware => ({
   studLength,
 });
 
-const edge = (barrelLength: number, slotWidth: number): Hardware => ({
+/** The slot takes cast sheet of that thickness at its thickest (ISO 7823-1), a gasket what is left. */
+const edge = (barrelLength: number, sheet: number, slotWidth: number): Hardware => ({
   kind: "edgeGrip",
   stockId: null,
-  name: `Edge grip 16 × ${barrelLength}`,
+  name: `Edge grip 16 × ${barrelLength}, ${sheet} mm sheet`,
   finish: "#C3C1BA",
   barrelDiameter: 16,
   barrelLength,
@@ -195,12 +197,14 @@ const edge = (barrelLength: number, slotWidth: number): Hardware => ({
 
 export const standardHardware: readonly Hardware[] = [
   ...standardStandoffs,
-  through(12, 38),
-  through(19, 45),
+  through(12, 25),
+  through(19, 32),
   blind(6, 20),
   blind(12, 26),
-  edge(12, 6.8),
-  edge(19, 6.8),
+  edge(12, 4.5, 5.5),
+  edge(19, 4.5, 5.5),
+  edge(12, 6, 7.2),
+  edge(19, 6, 7.2),
 ];
 
 export const standardAdhesives: readonly Adhesive[] = [

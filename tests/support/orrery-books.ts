@@ -157,7 +157,7 @@ export function orreryBooks(): MockupDocument {
       id: `h${index + 1}`,
       x: Math.round(x * 10) / 10,
       y: Math.round(y * 10) / 10,
-      diameter: 8,
+      diameter: index === 0 ? 8 : 8.4,
       fixed: index === 0,
     };
   });
@@ -173,12 +173,12 @@ export function orreryBooks(): MockupDocument {
       stock: {
         kind: "wood",
         stockId: null,
-        name: "Eastern white pine",
+        name: "Eastern white pine, quartersawn",
         colour: "#E6D3AC",
         gravity: 0.35,
         moisturePercent: 9,
         hardness: "softwood",
-        movementPerPoint: 0.00212,
+        movementPerPoint: 0.00071,
       },
       thickness: 20,
       grainTurn: 0,

@@ -81,8 +81,8 @@ function findingOf(
       : `more than ${mm(value)} (half its thickness, where the theory ends)`;
   const text =
     document.hanging.pose === "upright"
-      ? `${layerWords(layer)} gives way by ${far} when it is pushed with ${newtonWords(limits.pushN)} between its standoffs; ${mm(limitMm)} is the limit. It feels loose, and touches what is under it the sooner.`
-      : `${layerWords(layer)} sags by ${far} between its standoffs under its own weight in the long run; ${mm(limitMm)} is the limit, and more is seen.`;
+      ? `${layerWords(layer)} gives way by ${far} when it is pushed with ${newtonWords(limits.pushN)} between its standoffs; ${mm(limitMm)} is the limit. Thicker sheet or standoffs nearer each other make it stiffer.`
+      : `${layerWords(layer)} sags by ${far} between its standoffs under its own weight in the long run; ${mm(limitMm)} is the limit, over which it is seen. Thicker sheet or standoffs nearer each other make it stiffer.`;
   return [
     foundBy(pushAndSag, {
       severity: "caution",
