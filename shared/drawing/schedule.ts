@@ -1,6 +1,7 @@
 import type { Hold, Layer, MockupDocument } from "../mockup/document.ts";
 import { finishWords } from "../mockup/finish-words.ts";
 import type { Figures } from "../stack/figures.ts";
+import { type BandWording, formatBand } from "../units/format-band.ts";
 import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { formatMass } from "../units/mass.ts";
@@ -50,7 +51,12 @@ const hangings: Readonly<Record<MockupDocument["hanging"]["kind"], string>> = {
 };
 
 /** The schedule, backer first and then the layers from the wall outward. Hidden layers are part of the sign and stay in. */
-export function scheduleRows(document: MockupDocument, figures: Figures, unit: LengthUnit): ScheduleRow[] {
+export function scheduleRows(
+  document: MockupDocument,
+  figures: Figures,
+  unit: LengthUnit,
+  heights: BandWording = "nominal",
+): ScheduleRow[] {
   const { backer, hanging } = document;
   const first: ScheduleRow = {
     key: "A",
@@ -59,7 +65,7 @@ export function scheduleRows(document: MockupDocument, figures: Figures, unit: L
     thickness: formatLength(backer.thickness, unit),
     heldBy: hangings[hanging.kind],
     offset: nothing,
-    topAt: formatLength(figures.backerTop.nominal, unit),
+    topAt: formatBand(figures.backerTop, unit, heights),
     pieces: "1",
     mass: formatMass(figures.backerMassG, unit),
   };
@@ -72,7 +78,7 @@ export function scheduleRows(document: MockupDocument, figures: Figures, unit: L
       thickness: formatLength(layer.thickness, unit),
       heldBy: heldBy(layer.hold, supportOf(layer, figures), unit),
       offset: layer.hold.kind === "standoff" ? formatLength(layer.hold.offset, unit) : nothing,
-      topAt: own ? formatLength(own.top.nominal, unit) : nothing,
+      topAt: own ? formatBand(own.top, unit, heights) : nothing,
       pieces: String(layer.pieces.length),
       mass: own ? formatMass(own.massG, unit) : nothing,
     };

@@ -2,6 +2,7 @@ import type { Box } from "../geometry/path.ts";
 import { rectanglePath } from "../geometry/shapes.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
+import type { BandWording } from "../units/format-band.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { fineLineMm, outlineMm, type PaperScale } from "./dimensions.ts";
 import type { Item } from "./display-list.ts";
@@ -16,6 +17,8 @@ export type SectionInput = {
   readonly paperScale: PaperScale;
   /** How much larger depth is drawn than height: 1 on paper, where both are true; more on a screen, which says so. */
   readonly depthScale: number;
+  /** Whether tops are lettered with the bands that the sheets' tolerances leave; nominal when not said. */
+  readonly heights?: BandWording;
 };
 
 /** What of one layer shows from the side: boxes of depth by height, joined where pieces overlap. */

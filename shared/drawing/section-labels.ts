@@ -1,4 +1,5 @@
-import { formatLength } from "../units/format-length.ts";
+import type { Banded } from "../units/banded.ts";
+import { formatBand } from "../units/format-band.ts";
 import { balloonRadiusMm, drawBalloon, drawLeader } from "./balloon.ts";
 import type { Item } from "./display-list.ts";
 import { graphite } from "./palette.ts";
@@ -28,11 +29,11 @@ const labelTitle = "Top at";
 type Label = { readonly key: string; readonly text: string; readonly foot: { readonly x: number; readonly y: number } };
 
 function labelsOf(input: SectionInput, slabs: readonly Slab[]): Label[] {
-  const { document, figures, unit, depthScale } = input;
-  const top = (mm: number) => formatLength(mm, unit);
+  const { document, figures, unit, depthScale, heights = "nominal" } = input;
+  const top = (band: Banded) => formatBand(band, unit, heights);
   const backer: Label = {
     key: "A",
-    text: top(figures.backerTop.nominal),
+    text: top(figures.backerTop),
     foot: {
       x: figures.backerTop.nominal * depthScale * 0.5,
       y: document.board.height - Math.min(8 * input.paperScale, document.board.height * 0.06),
@@ -49,7 +50,7 @@ function labelsOf(input: SectionInput, slabs: readonly Slab[]): Label[] {
     const clear = heights.find((y) => feet.every((foot) => Math.abs(foot - y) > 2.5 * input.paperScale));
     const y = clear ?? slab.y + slab.height / 2;
     feet.push(y);
-    return [{ key: layer.key, text: top(layer.top.nominal), foot: { x: slab.x + slab.width * 0.6, y } }];
+    return [{ key: layer.key, text: top(layer.top), foot: { x: slab.x + slab.width * 0.6, y } }];
   });
   return [...layers, backer].sort((a, b) => a.foot.y - b.foot.y || (a.key < b.key ? -1 : 1));
 }

@@ -1,6 +1,7 @@
 import { createContext, useContext } from "react";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
+import type { BandWording } from "#shared/units/format-band.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import type { Edit } from "../model/editor.ts";
 import type { Site } from "../model/propose-holes.ts";
@@ -14,6 +15,9 @@ export type Desk = {
   readonly unit: LengthUnit;
   readonly stock: StockChoices;
   readonly site: Site;
+  /** How heights are lettered in schedule and section. */
+  readonly heights: BandWording;
+  readonly letterHeights: (heights: BandWording) => void;
   /** Of the document, or of what it was a moment ago; null until they were first computed. */
   readonly figures: Figures | null;
   /** The document that the figures are of. */

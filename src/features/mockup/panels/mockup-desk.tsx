@@ -5,6 +5,7 @@ import type { StockItem } from "#shared/contracts/stock.ts";
 import { applyMend } from "#shared/dry-fit/apply-mend.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
+import type { BandWording } from "#shared/units/format-band.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { useRoom } from "@/lib/use-room.ts";
@@ -58,6 +59,7 @@ export function MockupDesk(props: MockupDeskProps) {
   const [view, setView] = useState<DrawingView | null>(null);
   const [finding, setFinding] = useState<Finding | null>(null);
   const [dialog, setDialog] = useState<DeskDialog | null>(null);
+  const [heights, letterHeights] = useState<BandWording>("nominal");
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
   const document = editor.history.present;
@@ -83,6 +85,8 @@ export function MockupDesk(props: MockupDeskProps) {
       unit,
       stock,
       site: { place: whereItHangs, limits },
+      heights,
+      letterHeights,
       figures: figures?.figures ?? null,
       figuresOf: figures?.of ?? document,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
@@ -91,7 +95,7 @@ export function MockupDesk(props: MockupDeskProps) {
         dispatch({ kind: "choose", selection });
       },
     }),
-    [document, editor.selection, unit, stock, whereItHangs, limits, figures],
+    [document, editor.selection, unit, stock, whereItHangs, limits, heights, figures],
   );
 
   function show(next: Finding) {

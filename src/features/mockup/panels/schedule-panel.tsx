@@ -19,8 +19,8 @@ export function SchedulePanel({
   readonly onBoard: () => void;
   readonly onBringIn: () => void;
 }) {
-  const { document, figures, unit } = useDesk();
-  const rows = figures === null ? null : scheduleRows(document, figures, unit);
+  const { document, figures, unit, heights, letterHeights } = useDesk();
+  const rows = figures === null ? null : scheduleRows(document, figures, unit, heights);
   const backer = rows?.[0];
   const { stock, thickness } = document.backer;
 
@@ -74,7 +74,14 @@ export function SchedulePanel({
       )}
       {figures !== null && (
         <p className="pt-2 text-fine text-graphite">
-          {scheduleTotal(document, figures, unit)} Figures are estimates for planning.
+          {scheduleTotal(document, figures, unit)} Figures are estimates for planning.{" "}
+          <WordButton
+            inText
+            aria-pressed={heights === "with bands"}
+            onClick={() => letterHeights(heights === "nominal" ? "with bands" : "nominal")}
+          >
+            {heights === "nominal" ? "Show heights with their tolerances" : "Show heights as they are meant"}
+          </WordButton>
         </p>
       )}
     </section>

@@ -22,7 +22,7 @@ const insetPx = 10;
 
 /** The stack from the side, at the elevation's own vertical scale and place. Standoff layers are raised here. */
 export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
-  const { document, figures, figuresOf: drawn, unit, choose } = useDesk();
+  const { document, figures, figuresOf: drawn, unit, heights, choose } = useDesk();
   const element = useRef<HTMLDivElement>(null);
   const room = useRoom(element);
   const widthPx = room?.width ?? 300;
@@ -31,13 +31,16 @@ export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
   const wantedDepth =
     figures === null
       ? 1
-      : depthScaleFor({ figures, gap: drawn.hanging.gap }, { widthPx: widthPx - 2 * insetPx, scale, paperScale });
+      : depthScaleFor(
+          { figures, gap: drawn.hanging.gap },
+          { widthPx: widthPx - 2 * insetPx, scale, paperScale, heights },
+        );
   const [depthScale, setDepthScale] = useState(wantedDepth);
   // Under a hand that raises a layer the scale stays, else the layer would run away from it.
   if (drag === null && wantedDepth !== depthScale) setDepthScale(wantedDepth);
   const list = useMemo(
-    () => (figures === null ? null : drawSection({ document: drawn, figures, unit, paperScale, depthScale })),
-    [drawn, figures, unit, paperScale, depthScale],
+    () => (figures === null ? null : drawSection({ document: drawn, figures, unit, paperScale, depthScale, heights })),
+    [drawn, figures, unit, paperScale, depthScale, heights],
   );
   const origin = (list && boardOriginOf(list)) ?? { x: 0, y: 0 };
   const pxOfDepth = (mm: number) => insetPx + (origin.x + mm * depthScale) * scale;
