@@ -1,5 +1,6 @@
 import type { LengthUnit } from "../units/length.ts";
-import { describeLimit, type LimitKey, limitKeys } from "./limit-descriptions.ts";
+import { describeLimit, limitKeys } from "./limit-descriptions.ts";
+import type { LimitKey } from "./limit-texts/limit-text.ts";
 import { formatLimit } from "./limit-units.ts";
 import { type Limits, limitsSchema } from "./limits.ts";
 

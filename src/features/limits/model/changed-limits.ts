@@ -1,5 +1,6 @@
 import type { WrittenLimits } from "#shared/dry-fit/check-limits.ts";
-import { type LimitKey, limitKeys } from "#shared/dry-fit/limit-descriptions.ts";
+import { limitKeys } from "#shared/dry-fit/limit-descriptions.ts";
+import type { LimitKey } from "#shared/dry-fit/limit-texts/limit-text.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
 
 /** The limits that are written otherwise than they were. */

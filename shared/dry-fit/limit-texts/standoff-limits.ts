@@ -1,0 +1,103 @@
+import type { LimitTexts } from "./limit-text.ts";
+
+/** The limits of standoffs: grip, screws, caps, feet, push and sag. */
+export const standoffLimits = {
+  gripDiameters: {
+    group: "grip",
+    rules: [8],
+    label: "Cap's stud in the barrel",
+    unit: "diameters",
+    why: "Common practice, counted in diameters of the stud. With less the cap pulls out.",
+  },
+  studDiameters: {
+    group: "grip",
+    rules: [8],
+    label: "Glued stud in the wood",
+    unit: "diameters",
+    why: "Common practice, counted in diameters of the stud.",
+  },
+  slotPlayMm: {
+    group: "grip",
+    rules: [8],
+    label: "Slot of an edge grip wider than the sheet, at most",
+    unit: "small length",
+    why: "Common practice. A gasket or a set screw takes up that much, at the sheet's thinnest.",
+  },
+  edgeGripMm: {
+    group: "grip",
+    rules: [8],
+    label: "Slot of an edge grip over the panel's edge",
+    unit: "small length",
+    why: "Common practice, after the panel has moved away from it.",
+  },
+  sandingMm: {
+    group: "screws",
+    rules: [10],
+    label: "Taken off the wood by sanding",
+    unit: "small length",
+    why: "Common practice.",
+  },
+  skinMm: {
+    group: "screws",
+    rules: [10],
+    label: "Wood left under a point",
+    unit: "small length",
+    why: "Common practice. With less a point bulges or shows at the back.",
+  },
+  lateralDivisor: {
+    group: "screws",
+    rules: [12],
+    label: "Load across a screw, divided by",
+    unit: "number",
+    why: "Our choice. The handbook's load is one at about 0.4 mm of slip.",
+  },
+  withdrawalDivisor: {
+    group: "screws",
+    rules: [12],
+    label: "Load that pulls a screw out, divided by",
+    unit: "number",
+    why: "The National Design Specification leaves 5.5 between the two published formulas. Not under 5.",
+  },
+  unprovenLoadShare: {
+    group: "screws",
+    rules: [12],
+    label: "Share of an unproven load, for a caution",
+    unit: "percent",
+    why: "Our choice. Outside the published range a load is an estimate; under this share of it even a poor one will do.",
+  },
+  capClearanceMm: {
+    group: "caps",
+    rules: [13],
+    label: "Round a cap to what lies beside it",
+    unit: "small length",
+    why: "Common practice, for a notch too.",
+  },
+  footShare: {
+    group: "caps",
+    rules: [14],
+    label: "Foot of a barrel on what it stands on",
+    unit: "percent",
+    why: "Common practice. With less it tilts as the screw is tightened.",
+  },
+  pushN: {
+    group: "stiffness",
+    rules: [15],
+    label: "Push by hand on a hanging panel",
+    unit: "newtons",
+    why: "Our choice: about what a hand leans with.",
+  },
+  bendMm: {
+    group: "stiffness",
+    rules: [15],
+    label: "Giving way or sagging, at most",
+    unit: "small length",
+    why: "Our choice. The larger of this and the part of the spacing holds.",
+  },
+  bendPart: {
+    group: "stiffness",
+    rules: [15],
+    label: "The same as a part of the spacing: one in",
+    unit: "number",
+    why: "Our choice.",
+  },
+} as const satisfies LimitTexts;
