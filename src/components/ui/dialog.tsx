@@ -1,5 +1,6 @@
 import { Dialog as Primitive } from "radix-ui";
 import type { ReactNode } from "react";
+import { cx } from "@/lib/cx.ts";
 import { useReturnFocus } from "./use-return-focus.ts";
 
 type DialogProps = {
@@ -7,11 +8,13 @@ type DialogProps = {
   readonly onOpenChange: (open: boolean) => void;
   readonly title: string;
   readonly description?: ReactNode;
+  /** For a form beside a drawing. */
+  readonly size?: "normal" | "wide";
   readonly children?: ReactNode;
 };
 
 /** A sheet laid over the page. Traps the focus and gives it back; Escape and the ground behind it close it. */
-export function Dialog({ open, onOpenChange, title, description, children }: DialogProps) {
+export function Dialog({ open, onOpenChange, title, description, size = "normal", children }: DialogProps) {
   const focus = useReturnFocus();
   return (
     <Primitive.Root open={open} onOpenChange={onOpenChange}>
@@ -20,7 +23,10 @@ export function Dialog({ open, onOpenChange, title, description, children }: Dia
         <Primitive.Content
           {...focus}
           {...(description ? {} : { "aria-describedby": undefined })}
-          className="fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] max-w-xl -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6"
+          className={cx(
+            "fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6",
+            size === "wide" ? "max-w-3xl" : "max-w-xl",
+          )}
         >
           <div className="flex items-start justify-between gap-4">
             <Primitive.Title className="font-serif text-xl font-bold text-ink">{title}</Primitive.Title>

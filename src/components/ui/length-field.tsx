@@ -10,6 +10,7 @@ type LengthFieldProps = {
   /** mm; null is empty, NaN is something that is no length. */
   readonly value: number | null;
   readonly onChange: (mm: number | null) => void;
+  readonly onFocus?: () => void;
   readonly onBlur?: () => void;
   readonly hint?: string;
   readonly error?: string | undefined;
@@ -26,6 +27,7 @@ export function LengthField({
   unit,
   value,
   onChange,
+  onFocus,
   onBlur,
   hint,
   error,
@@ -54,7 +56,10 @@ export function LengthField({
       name={name}
       ref={ref}
       value={text}
-      onFocus={() => setTyping(true)}
+      onFocus={() => {
+        setTyping(true);
+        onFocus?.();
+      }}
       onChange={(event) => {
         setText(event.target.value);
         const trimmed = event.target.value.trim();
