@@ -33,6 +33,54 @@ const stated: Readonly<Record<string, Readonly<Record<string, string | readonly 
   "near-twins": { "Near twins": [1, 0] },
   "drop-outs": { Islands: [1, 0] },
   "small-pieces": { Small: "dot" },
+  // Two right halves of 209.55: a/sin 45 and w · cot 45 more; the rest measured by clipping.
+  "slat-lengths": {
+    "Slats a side": [13, 0],
+    "A full one, long point to long point": [334.45, 0.005],
+    "along either edge": [209.55 * Math.SQRT2, 1e-6],
+    "The shortest": [64.45, 0.005],
+  },
+  // The ellipse, of four cubics 0.028 % too large.
+  "slat-outlines": { "Slats and spine cover": [Math.PI * 300 * 250 * 1.00028, 30] },
+  "slat-start": {
+    "Shortest from the corner": [8.49, 0.005],
+    "Slivers from the corner": [2, 0],
+    "Slivers from the start chosen": [0, 0],
+  },
+  "saw-settings": { "Asked of it": [60, 0] },
+  // 3 mm at 45° is 4.24.
+  "slat-stock": {
+    "Kerf along the slat": [3 * Math.SQRT2, 1e-9],
+    Alone: [334.45 + 4.24, 0.01],
+    "Nested, each": [212.55 * Math.SQRT2, 1e-6],
+    "Once a bar": [38.1, 1e-9],
+  },
+  "slat-brads": {
+    "Slats that none fits in": [0, 0],
+    "Too near the trim line": [0, 0],
+    "Past the slat": [6.5, 1e-9],
+    "Left before it shows": [3.2, 1e-9],
+  },
+  "slat-hold": { "Into the substrate": [3.5, 1e-9], "Only the slat holds it": "yes" },
+  // A band of 6 through the middle of a disc of 15.
+  "foot-on-slats": { "On wood": [0.5046, 0.001], "Over an open joint": "yes" },
+  "slat-glue": { Glued: [457.2 * 482.6, 1e-3], Glue: [44.129, 0.001] },
+  // Wood Handbook, equation 13-2: 1.06 mm for 100 mm of eastern white pine, 6 to 11 %.
+  "slat-movement": {
+    "One slat grows": [1.06, 1e-9],
+    "All, over the width, at 45°": [457.2 * 0.00212 * 5 * 0.5, 1e-9],
+    "Hollow side": "back",
+  },
+  // √(640² + 440²).
+  frame: {
+    "Long point": [640, 1e-9],
+    "Short point": [600, 1e-9],
+    "Saw setting": [45, 1e-9],
+    Diagonal: [776.66, 0.005],
+    "Body when 600 is the whole sign": [560, 0],
+  },
+  "frame-cover": { "Bare at the back": [1, 1e-9], "Flush at": [20.7, 1e-9] },
+  "frame-brads": { "Into the edge": [10.5, 1e-9], "Above the back": [6, 1e-9] },
   support: { Bonded: [3200, 1e-6], "Off its support": [0.2, 1e-6], "Reaches over": [20, 0.05] },
   // 150 · (7e-5 · 20 + 0.00267 · 4).
   "movement-mismatch": { "They part by": [1.812, 1e-9], "Rigid adhesives allow": [0.1, 0], "Gap-filling ones": [1, 0] },
@@ -95,6 +143,30 @@ const stated: Readonly<Record<string, Readonly<Record<string, string | readonly 
   "colour-difference": { ΔE00: [2.0425, 5e-5], "They look": "visible" },
   // IEC 61966-2-1, CIE 15.
   lightness: { "L*": [53.24, 0.01], "a*": [80.09, 0.01], "b*": [67.2, 0.01] },
+  "kerf-along": { "Kerf along the bar": [4.24, 0.005], "The cut runs": [38.1, 1e-9] },
+  // 2440 · 0.9 − 10.
+  "usable-bar": { "Can be used": [2186, 1e-9] },
+  // 5 · (240√2 − 40 + 3√2) + 40.
+  "nested-slats": { "They take": [1558.2695, 5e-5] },
+  // Textbook example of the cutting-stock problem; optimum proved by a solver, 73 · 5600 − 407160.
+  "stock-lengths": { Bars: [73, 0], "No plan needs fewer than": [73, 0], "Left over": [1640, 1e-9] },
+  // 0.36 m² · 1.15 · 42.00 = 17.388.
+  "cost-line": { Quantity: [0.414, 1e-12], Amount: "17.39\u00a0EUR" },
+  // 22.5 + 5.4 + 10 minutes at a euro each.
+  "machine-minutes": { Minutes: [37.9, 1e-12], Amount: "37.90\u00a0EUR" },
+  // 126 min at 48.00 are 100.80; 35 % of it 35.28; 19 % of 136.08 25.8552; a third of each 33.60 + 11.76 + 8.62.
+  "cost-total": {
+    "Marked up by": "35.28\u00a0EUR",
+    Taxed: "25.86\u00a0EUR",
+    Total: "161.94\u00a0EUR",
+    "Per sign": "53.98\u00a0EUR",
+  },
+  // ISO 4217: 2 digits, none, 3.
+  "minor-units": {
+    "In euros": "1\u00a0234.50\u00a0EUR",
+    "Digits of the yen": [0, 0],
+    "Digits of the Bahraini dinar": [3, 0],
+  },
   shadow: { Falls: [12, 1e-9], "Soft along": [1.2, 1e-9], "Soft across": [12 * 0.05 * Math.SQRT2, 1e-9] },
   // ISO 5455, ISO 5457 (8 × 6 fields on A3), ASME Y14.35.
   scale: { Scale: "1:2" },
