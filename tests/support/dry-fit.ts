@@ -19,7 +19,8 @@ export async function dryFitOf(document: MockupDocument, options: Options = {}):
   return runDryFit(await inputOf(document, options));
 }
 
-async function inputOf(document: MockupDocument, { limits, context }: Options) {
+/** What a rule is given of a sign. */
+export async function inputOf(document: MockupDocument, { limits, context }: Options) {
   const kernel = await loadKernel();
   return {
     document,

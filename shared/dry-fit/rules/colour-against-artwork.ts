@@ -63,5 +63,5 @@ function mends(finding: Finding, { document, limits, context }: RuleInput): Mend
   if (!lengthsEqual(nearest.thicknessMm, layer.thickness)) {
     steps.push({ kind: "thickness", layerKey: layer.key, thickness: nearest.thicknessMm });
   }
-  return [{ label: `Take ${nearest.stock.name} (ΔE00 ${nearest.deltaE.toFixed(1)})`, steps }];
+  return [{ label: `Take ${nearest.stock.name} (CIEDE2000 ${nearest.deltaE.toFixed(1)})`, steps }];
 }

@@ -52,7 +52,7 @@ function checkSheet({ layer, pieces }: CutLayer, { context }: RuleInput): Findin
   if (!entry) {
     const nearest = nearestSheet({ ...layer.stock, thicknessMm: layer.thickness }, acrylics);
     const offer = nearest
-      ? ` ${nearest.stock.name} in ${mm(nearest.thicknessMm)} comes nearest (ΔE00 ${nearest.deltaE.toFixed(1)}).`
+      ? ` ${nearest.stock.name} in ${mm(nearest.thicknessMm)} comes nearest (CIEDE2000 ${nearest.deltaE.toFixed(1)}).`
       : ` Nothing on hand looks ${layer.stock.look}.`;
     return [
       foundBy(stockOnHand, {
