@@ -6,6 +6,10 @@ export const mostPieces = 2000;
 export const mostHoles = 1000;
 export const mostOffsetMm = 1000;
 export const offsetBounds = { least: 0, most: mostOffsetMm } as const;
+/** Pockets, as the document takes them; our choice within it for the depth. */
+export const pocketDepthBounds = { least: 0.1, most: 100 } as const;
+export const clearanceBounds = { least: 0, most: 5 } as const;
+export const bitRadiusBounds = { least: 0, most: 25 } as const;
 export const coordinateBounds = { least: -longestMm, most: longestMm } as const;
 /** Our choice: no drill of a sign shop makes a smaller or a wider hole. */
 export const holeBounds = { least: 0.5, most: 100 } as const;

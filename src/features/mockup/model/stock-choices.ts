@@ -68,6 +68,7 @@ export function optionsOfHold({
   return [
     ...adhesives.map((adhesive) => ({ kind: "bond" as const, adhesive })),
     ...hardware.map((one) => ({ kind: "standoff" as const, hardware: one })),
+    ...adhesives.map((adhesive) => ({ kind: "pocket" as const, adhesive })),
   ];
 }
 

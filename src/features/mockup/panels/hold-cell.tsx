@@ -1,13 +1,15 @@
+import { heldOffsetMm } from "#shared/hardware/standoff-parts.ts";
 import type { Layer } from "#shared/mockup/document.ts";
 import { formatLengthWithUnit } from "#shared/units/format-length.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
 import type { HoldChoice } from "../model/commands/new-layer.ts";
-import { bondLayer, standLayer } from "../model/commands/set-hold.ts";
+import { bondLayer, letInLayer, standLayer } from "../model/commands/set-hold.ts";
 import { holdChoices, isSameStock } from "../model/stock-choices.ts";
 import { CellSelect } from "./cell-controls.tsx";
 
-/** How a layer is held: an adhesive it is bonded with, or the standoff hardware it stands on. */
+/** How a layer is held: an adhesive it is bonded or let in with, or the standoff hardware it stands on. */
 export function HoldCell({ layer }: { readonly layer: Layer }) {
   const { edit, stock, unit, site } = useDesk();
   const { key, hold } = layer;
@@ -17,26 +19,29 @@ export function HoldCell({ layer }: { readonly layer: Layer }) {
   function change(index: number) {
     const choice = choices[index];
     if (!choice) return;
-    if (choice.kind === "bond")
-      edit({ label: `Bond ${key}`, change: (before) => bondLayer(before, { key, adhesive: choice.adhesive }) });
-    else {
+    if (choice.kind === "standoff") {
       const id = newId();
       edit({
         label: `Stand ${key} off`,
         change: (before) => standLayer(before, { key, hardware: choice.hardware, id, site }),
       });
+      return;
     }
+    const { kind, adhesive } = choice;
+    edit({
+      label: kind === "bond" ? `Bond ${key}` : `Let ${key} in`,
+      change: (before) => (kind === "bond" ? bondLayer : letInLayer)(before, { key, adhesive }),
+    });
   }
 
-  const option = (choice: HoldChoice, index: number) =>
-    choice.kind === "bond" ? (
-      <option key={`bond ${choice.adhesive.stockId} ${choice.adhesive.name}`} value={index}>
-        bond, {choice.adhesive.name}
-      </option>
-    ) : (
-      <option key={`standoff ${choice.hardware.stockId} ${choice.hardware.name}`} value={index}>
-        {choice.hardware.name}, {formatLengthWithUnit(choice.hardware.barrelLength, unit)} barrel
-      </option>
+  const options = (kind: HoldChoice["kind"]) =>
+    choices.map(
+      (choice, index) =>
+        choice.kind === kind && (
+          <option key={`${kind} ${idOf(choice)}`} value={index}>
+            {wordsOf(choice, unit)}
+          </option>
+        ),
     );
 
   return (
@@ -47,19 +52,28 @@ export function HoldCell({ layer }: { readonly layer: Layer }) {
         value={choices.findIndex((choice) => isChoiceOf(choice, layer))}
         onChange={(event) => change(Number(event.target.value))}
       >
-        {hold.kind === "pocket" && <option value={-1}>pocket, {hold.adhesive.name}</option>}
-        <optgroup label="Bonded">
-          {choices.map((choice, index) => choice.kind === "bond" && option(choice, index))}
-        </optgroup>
-        <optgroup label="On standoffs">
-          {choices.map((choice, index) => choice.kind === "standoff" && option(choice, index))}
-        </optgroup>
+        <optgroup label="Bonded">{options("bond")}</optgroup>
+        <optgroup label="Let in">{options("pocket")}</optgroup>
+        <optgroup label="On standoffs">{options("standoff")}</optgroup>
       </CellSelect>
     </span>
   );
 }
 
+const idOf = (choice: HoldChoice): string => {
+  const { stockId, name } = choice.kind === "standoff" ? choice.hardware : choice.adhesive;
+  return `${stockId} ${name}`;
+};
+
+function wordsOf(choice: HoldChoice, unit: LengthUnit): string {
+  if (choice.kind !== "standoff") return `${choice.kind}, ${choice.adhesive.name}`;
+  const held = heldOffsetMm(choice.hardware);
+  return held === null
+    ? `${choice.hardware.name}, any offset`
+    : `${choice.hardware.name}, stands ${formatLengthWithUnit(held, unit)} off`;
+}
+
 function isChoiceOf(choice: HoldChoice, { hold }: Layer): boolean {
-  if (choice.kind === "bond") return hold.kind === "bond" && isSameStock(choice.adhesive, hold.adhesive);
-  return hold.kind === "standoff" && isSameStock(choice.hardware, hold.hardware);
+  if (choice.kind === "standoff") return hold.kind === "standoff" && isSameStock(choice.hardware, hold.hardware);
+  return hold.kind === choice.kind && isSameStock(choice.adhesive, hold.adhesive);
 }

@@ -73,5 +73,5 @@ export function LayerFields({ choice, onChange, of = "", hint }: LayerFieldsProp
 }
 
 function nameOfHold(option: HoldChoice): string {
-  return option.kind === "bond" ? `bond, ${option.adhesive.name}` : option.hardware.name;
+  return option.kind === "standoff" ? option.hardware.name : `${option.kind}, ${option.adhesive.name}`;
 }

@@ -28,6 +28,7 @@ import { type DeskDialog, DeskDialogs } from "./desk-dialogs.tsx";
 import { DeskTools } from "./desk-tools.tsx";
 import { FindingsPanel } from "./findings-panel.tsx";
 import { KeptDraftNotice } from "./kept-draft-notice.tsx";
+import { LayerDetails } from "./layer-details.tsx";
 import { LeaveDialog } from "./leave-dialog.tsx";
 import { PiecesPanel } from "./pieces-panel.tsx";
 import { SchedulePanel } from "./schedule-panel.tsx";
@@ -160,6 +161,7 @@ export function MockupDesk(props: MockupDeskProps) {
       <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_minmax(17rem,24rem)]">
         <div className="min-w-0">
           <SchedulePanel onBoard={() => setDialog("board")} onBringIn={() => setDialog("artwork")} />
+          <LayerDetails />
           <PiecesPanel />
         </div>
         <FindingsPanel

@@ -2,12 +2,14 @@ import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { centrePieces, placePiece, removePieces } from "../model/commands/pieces.ts";
+import { setReads } from "../model/commands/set-reads.ts";
 import { coordinateBounds, scaleBounds } from "../model/limits.ts";
 import { chooseLayer, choosePiece } from "../model/selection.ts";
 import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 import { HolesTable } from "./holes-table.tsx";
 import { nameOfPiece } from "./piece-name.ts";
+import { WordsOfLayer } from "./words-of-layer.tsx";
 
 /** The pieces of the chosen layer as a list: what the canvas does by hand is done here in figures and by keyboard. */
 export function PiecesPanel() {
@@ -30,13 +32,14 @@ export function PiecesPanel() {
           <WordButton onClick={() => choose(chooseLayer(document, key))}>Choose all of {key}</WordButton>
         )}
       </div>
+      {pieces.length > 1 && <WordsOfLayer layer={layer} />}
       {pieces.length === 0 ? (
         <p className="text-sm text-graphite">This layer has no pieces left. Remove it, or undo.</p>
       ) : (
         <Table caption={`Places of the pieces of ${key}`} className="max-h-80 overflow-y-auto">
           <thead>
             <tr>
-              {["Piece", `x, ${unit}`, `y, ${unit}`, "Turn, °", "Size, %"].map((head) => (
+              {["Piece", `x, ${unit}`, `y, ${unit}`, "Turn, °", "Size, %", "Reads"].map((head) => (
                 <DeskHead key={head}>{head}</DeskHead>
               ))}
               <DeskHead>
@@ -102,6 +105,19 @@ export function PiecesPanel() {
                         if (share < scaleBounds.least || share > scaleBounds.most)
                           return "Write a percentage over 0, like 80 or 125.";
                         place({ scale: share });
+                        return null;
+                      }}
+                    />
+                  </DeskCell>
+                  <DeskCell className="w-24">
+                    <CellText
+                      aria-label={`What ${title} reads`}
+                      placeholder="nothing"
+                      maxLength={120}
+                      value={piece.reads}
+                      onCommit={(text) => {
+                        const reads = new Map([[piece.id, text]]);
+                        edit({ label: `Read ${title}`, change: (before) => setReads(before, reads) });
                         return null;
                       }}
                     />

@@ -8,6 +8,7 @@ export type LayerFields = {
   readonly stock?: Acrylic;
   readonly thickness?: number;
   readonly locate?: Locate;
+  readonly marked?: Layer["marked"];
   readonly hidden?: boolean;
 };
 
@@ -22,6 +23,7 @@ export function setLayer(document: MockupDocument, { key, ...fields }: LayerFiel
       stock: fields.stock ?? layer.stock,
       thickness: lengthOf(fields.thickness ?? layer.thickness, 100) ?? layer.thickness,
       locate: fields.locate ?? layer.locate,
+      marked: fields.marked ?? layer.marked,
       hidden: fields.hidden ?? layer.hidden,
     }),
   );

@@ -47,11 +47,21 @@ describe("stock to choose from", () => {
     expect(thicknessChoices([3, 6], 4.5)).toEqual([3, 4.5, 6]);
   });
 
-  it("offers both ways to hold a layer, with the present one among them", () => {
+  it("offers every way to hold a layer, with the present one among them", () => {
     const choices = holdChoices(stock, { kind: "standoff", hardware: barrel(19), offset: 19, holes: [] });
     expect(
-      choices.map((choice) => (choice.kind === "bond" ? choice.adhesive.name : choice.hardware.barrelLength)),
-    ).toEqual(["Bodied cement", "Two-part epoxy", 19, 12, 25]);
+      choices.map((choice) =>
+        choice.kind === "standoff" ? choice.hardware.barrelLength : `${choice.kind} ${choice.adhesive.name}`,
+      ),
+    ).toEqual([
+      "bond Bodied cement",
+      "bond Two-part epoxy",
+      19,
+      12,
+      25,
+      "pocket Bodied cement",
+      "pocket Two-part epoxy",
+    ]);
   });
 });
 
