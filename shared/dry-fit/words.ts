@@ -1,3 +1,4 @@
+import { countOf } from "../mockup/change.ts";
 import type { Hardware, Layer, Piece } from "../mockup/document.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import type { RuleInput } from "./rule.ts";

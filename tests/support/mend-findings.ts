@@ -6,7 +6,8 @@ import { subjectKey } from "#shared/dry-fit/set-aside.ts";
 import { documentSchema, type MockupDocument } from "#shared/mockup/document.ts";
 import { findingsOf, inputOf } from "./dry-fit.ts";
 
-const nameOf = (finding: Finding): string => `${finding.severity} ${subjectKey(finding)}`;
+/** What a finding is about, and against which limit: a rule may find two faults of one thing. */
+const nameOf = (finding: Finding): string => `${finding.severity} ${subjectKey(finding)} ${finding.limit}`;
 
 /**
  * Every mend that a rule offers on a sign, tried: after it the finding is gone and the document still passes its schema.

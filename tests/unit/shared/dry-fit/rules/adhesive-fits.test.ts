@@ -21,6 +21,10 @@ const bond = (family: Adhesive["family"], tack: Adhesive | null = null): Hold =>
   adhesive: adhesive(family),
   tack,
 });
+const pocketWith = (family: Adhesive["family"]): Hold => {
+  const hold = pocketHold(2, 0.1);
+  return hold.kind === "pocket" ? { ...hold, adhesive: adhesive(family) } : hold;
+};
 const clear: Coat = { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 12 };
 const onWood = (hold: Hold, finish: Coat[] = [], stock = sheet("Midnight")) => {
   const sign = buildSign([buildLayer("B", [plate("p", 15, 15, [300, 200])], { hold, stock })]);
@@ -106,15 +110,13 @@ describe("the remark", () => {
 });
 
 describe("solvent in a pocket", () => {
-  const pocketIn = (family: Adhesive["family"]): Hold => ({ ...pocketHold(2, 0.1), adhesive: adhesive(family) });
-
   it("of acrylic can craze it", async () => {
-    expect(await severitiesOf(onAcrylic(pocketIn("solvent cement")), "C")).toEqual(["caution", "remark"]);
-    expect(await severitiesOf(onAcrylic(pocketIn("cyanoacrylate")), "C")).toEqual(["remark"]);
+    expect(await severitiesOf(onAcrylic(pocketWith("solvent cement")), "C")).toEqual(["caution", "remark"]);
+    expect(await severitiesOf(onAcrylic(pocketWith("cyanoacrylate")), "C")).toEqual(["remark"]);
   });
 
   it("of finished wood meets raw wood", async () => {
-    const [finding] = await findingsOf(adhesiveFits, onWood(pocketIn("neutral silicone"), [clear]));
+    const [finding] = await findingsOf(adhesiveFits, onWood(pocketWith("neutral silicone"), [clear]));
     expect(finding?.text).toContain("Seal raw wood first");
   });
 });
@@ -135,7 +137,7 @@ describe("mends", () => {
     },
     {
       what: "cement in a pocket",
-      sign: onAcrylic({ ...pocketHold(2, 0.1), adhesive: adhesive("bodied cement") }),
+      sign: onAcrylic(pocketWith("bodied cement")),
       labels: [[], ["Take Thick cyanoacrylate"], []],
     },
   ])("of $what: the first on hand that fits", async ({ sign, labels }) => {

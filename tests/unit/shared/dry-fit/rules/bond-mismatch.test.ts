@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { bondMismatch } from "#shared/dry-fit/rules/bond-mismatch.ts";
 import { standardAdhesives, standardStock } from "#shared/materials/standard-stock.ts";
 import type { Adhesive, Hold, MockupDocument } from "#shared/mockup/document.ts";
-import { buildLayer, buildPiece, buildSign, disc, plate, pocketHold } from "../../../../support/build-sign.ts";
+import { buildLayer, buildPiece, buildSign, disc, plate } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
 import { triedMends } from "../../../../support/mend-findings.ts";
 
@@ -17,6 +17,14 @@ const bond = (family: Adhesive["family"], tack: Adhesive | null = null): Hold =>
   tack,
 });
 const rigid = bond("cyanoacrylate");
+const inPocket: Hold = {
+  kind: "pocket",
+  depth: 2,
+  clearance: 0,
+  adhesive: adhesive("cyanoacrylate"),
+  cut: "engraved",
+  bitRadius: 0,
+};
 /** A plate of that size on a pine board whose grain runs along x. */
 const signOf = (width: number, height: number, hold: Hold = rigid, rest: Partial<MockupDocument> = {}) =>
   buildSign([buildLayer("B", [plate("p", width, height, [300, 200])], { hold })], rest);
@@ -85,8 +93,7 @@ describe("on pine", () => {
   });
 
   it("a pocket's adhesive is asked the same", async () => {
-    const hold = { ...pocketHold(2), adhesive: adhesive("cyanoacrylate") };
-    expect(await findingsOf(bondMismatch, signOf(20, 40, hold))).toMatchObject([{ value: 0.2 }]);
+    expect(await findingsOf(bondMismatch, signOf(20, 40, inPocket))).toMatchObject([{ value: 0.2 }]);
   });
 });
 
@@ -111,7 +118,7 @@ describe("mends", () => {
   it.each([
     { hold: rigid, height: 40, label: "Take Slow epoxy" },
     { hold: bond("cyanoacrylate", adhesive("cyanoacrylate")), height: 150, label: "Take Slow epoxy, without a tack" },
-    { hold: { ...pocketHold(2), adhesive: adhesive("cyanoacrylate") }, height: 80, label: "Take Slow epoxy" },
+    { hold: inPocket, height: 80, label: "Take Slow epoxy" },
   ])("takes the first on hand that bonds both and gives enough", async ({ hold, height, label }) => {
     expect((await triedMends(bondMismatch, signOf(20, height, hold))).labels).toEqual([[label]]);
   });
