@@ -24,4 +24,5 @@ export const calculationOfRule: Readonly<Record<number, string>> = {
   28: "small-pieces",
   29: "mirror-line",
   30: "near-twins",
+  36: "mass",
 };

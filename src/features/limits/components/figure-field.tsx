@@ -23,7 +23,7 @@ export function FigureField({ label, unit, value, onChange, onBlur, error, ref }
     <Field
       label={label}
       error={unreadable && !typing ? "Write a number, like 2.5." : error}
-      suffix={figureUnits[unit].suffix}
+      suffix={<span className="whitespace-nowrap">{figureUnits[unit].suffix}</span>}
       inputMode="decimal"
       autoComplete="off"
       ref={ref}
