@@ -3,6 +3,7 @@ import { colourAgainstArtwork } from "#shared/dry-fit/rules/colour-against-artwo
 import { standardAcrylics, standardStock } from "#shared/materials/standard-stock.ts";
 import { buildLayer, buildSign, plate } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
+import { triedMends } from "../../../../support/mend-findings.ts";
 
 const grey = { ...(standardAcrylics[0]?.acrylic ?? missing()), name: "Grey", colour: "#808080" };
 function missing(): never {
@@ -55,4 +56,26 @@ it("a plate has no artwork to differ from", async () => {
   expect(
     await findingsOf(colourAgainstArtwork, buildSign([buildLayer("B", [plate("p", 20, 20, [100, 200])])])),
   ).toEqual([]);
+});
+
+it.each([
+  { colour: "#B4523B", labels: [["Take Rust (CIEDE2000 0.0)"]] },
+  { colour: "#4C7A3F", labels: [[expect.stringMatching(/^Take Fern/)]] },
+  { colour: "#C8992F", labels: [["Take Brass (CIEDE2000 0.0)"]] },
+  { colour: "#FF00FF", labels: [[]] },
+])(
+  "artwork of $colour is mended with the nearest sheet when that is near enough: $labels",
+  async ({ colour, labels }) => {
+    expect((await triedMends(colourAgainstArtwork, sign(colour))).labels).toEqual(labels);
+  },
+);
+
+it("a sheet that looks otherwise is no mend, and one of another thickness brings it along", async () => {
+  const thick = { ...sign("#D58C8C") };
+  const layers = thick.layers.map((layer) => ({ ...layer, thickness: 6 }));
+  const rose = standardStock.acrylics.filter(({ acrylic }) => acrylic.name === "Rose" || acrylic.look === "mirror");
+  const options = { context: { stock: { ...standardStock, acrylics: rose } } };
+  const { labels, mended } = await triedMends(colourAgainstArtwork, { ...thick, layers }, options);
+  expect(labels).toEqual([["Take Rose (CIEDE2000 0.0)"]]);
+  expect(mended[0]?.layers[0]).toMatchObject({ thickness: 4.5, stock: { name: "Rose" } });
 });

@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { mixedSupport } from "#shared/dry-fit/rules/mixed-support.ts";
 import { buildCapStud, buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
+import { triedMends } from "../../../../support/mend-findings.ts";
 
 const base = buildLayer("B", [plate("base", 100, 100, [150, 200])], { thickness: 6 });
 
@@ -77,4 +78,35 @@ describe("a panel on standoffs", () => {
 
 it("an empty layer has nothing that could differ", async () => {
   expect(await findingsOf(mixedSupport, buildSign([buildLayer("B", [], { hold: standoffHold([]) })]))).toEqual([]);
+});
+
+describe("mends", () => {
+  const on = (id: string, x: number) => plate(id, 20, 20, [x, 200]);
+
+  it("takes the fewer into a layer of their own", async () => {
+    const sign = buildSign([base, buildLayer("C", [on("on", 150), on("l", 50), on("r", 300)])]);
+    const { labels, mended } = await triedMends(mixedSupport, sign);
+    expect(labels).toEqual([["Split the layer"]]);
+    expect(mended[0]?.layers.map(({ key, pieces }) => [key, pieces.map(({ id }) => id)])).toEqual([
+      ["B", ["base"]],
+      ["C", ["l", "r"]],
+      ["D", ["on"]],
+    ]);
+  });
+
+  it("makes a layer for each level", async () => {
+    const thick = buildLayer("C", [plate("thick", 100, 100, [400, 200])], { thickness: 10 });
+    const sign = buildSign([base, thick, buildLayer("D", [on("a", 50), on("b", 150), on("c", 400), on("d", 280)])]);
+    const { labels, mended } = await triedMends(mixedSupport, sign);
+    expect(labels).toEqual([["Split the layer in 3"]]);
+    expect(mended[0]?.layers.map(({ pieces }) => pieces.length)).toEqual([1, 1, 2, 1, 1]);
+    for (const after of mended) expect(await findingsOf(mixedSupport, after)).toEqual([]);
+  });
+
+  it("leaves barrels on two levels to the maker", async () => {
+    const panel = buildLayer("C", [plate("panel", 300, 80, [200, 200])], {
+      hold: standoffHold([hole("h1", 150, 200), hole("h2", 330, 200)]),
+    });
+    expect((await triedMends(mixedSupport, buildSign([base, panel]))).labels).toEqual([[]]);
+  });
 });
