@@ -3,6 +3,7 @@ import { circlePath, rectanglePath } from "#shared/geometry/shapes.ts";
 import {
   standardAcrylics,
   standardAdhesives,
+  standardHardware,
   standardStandoffs,
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
@@ -74,6 +75,18 @@ export const buildCapStud = (overrides: Partial<CapStud> = {}): CapStud => ({
   ...first(standardStandoffs),
   ...overrides,
 });
+
+/** The first of its kind in the standard stock, 12 mm high: a spacer of 12, a stud of 10, a holder of 16 mm. */
+export function buildHardware<K extends Hardware["kind"]>(
+  kind: K,
+  overrides: Partial<Extract<Hardware, { kind: K }>> = {},
+): Extract<Hardware, { kind: K }> {
+  const found = standardHardware.find(
+    (one): one is Extract<Hardware, { kind: K }> => one.kind === kind && one.barrelLength === 12,
+  );
+  if (!found) throw new Error(`The standard stock has no ${kind}.`);
+  return { ...found, ...overrides };
+}
 
 export const hole = (id: string, x: number, y: number, rest: Partial<Hole> = {}): Hole => ({
   id,

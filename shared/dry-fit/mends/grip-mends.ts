@@ -3,7 +3,7 @@ import { heldOffsetMm, usualOffsetMm } from "../../hardware/standoff-parts.ts";
 import type { Hardware } from "../../mockup/document.ts";
 import { formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
-import { gripFault, overlapFault } from "../grip-fault.ts";
+import { gripFault } from "../grip-fault.ts";
 import type { Mend } from "../mend.ts";
 import type { RuleInput } from "../rule.ts";
 import { fixingPlaces } from "../screw-at.ts";
@@ -22,12 +22,8 @@ export function gripMends(finding: Finding, input: RuleInput): Mend[] {
     (hardware) => gripsAll(standing, hardware, input) && (hardware.kind !== "capStud" || barrelAddsUp(hardware)),
   );
   if (finding.holeId === null) return offsetMends(standing, fitting, input);
-  const { hold, layer, pieces } = standing;
-  const hole = hold.holes.find(({ id }) => id === finding.holeId);
-  const misses = hole && pieces.some((piece) => overlapFault(hold.hardware, piece, hole, input.limits));
-  const place = hole && fixingPlaces(standing, input).find((one) => one.hole.id === hole.id);
-  const loose = place && gripFault(hold.hardware, { stack: place.stack, offset: hold.offset }, input.limits);
-  if (!loose) return misses ? moveHoleMends({ ...finding, layerKey: layer.key }, input) : [];
+  // An edge grip beside its place is a matter of the piece whose edge it misses.
+  if (finding.pieceIds.length > 0) return moveHoleMends(finding, input);
   const [best] = fitting;
   return best ? [hardwareMend(standing, best, input)] : [];
 }

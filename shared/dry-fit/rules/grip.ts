@@ -50,16 +50,18 @@ function checkGrip(standing: StandoffLayer, input: RuleInput): Finding[] {
   const { hardware, offset } = hold;
   const found = new Map<string, Finding>();
   for (const { hole, piece, stack } of fixingPlaces(standing, input)) {
-    const faults = [
-      gripFault(hardware, { stack, offset }, input.limits),
-      overlapFault(hardware, piece, hole, input.limits),
-    ];
-    for (const fault of faults) {
+    const loose = gripFault(hardware, { stack, offset }, input.limits);
+    const misses = overlapFault(hardware, piece, hole, input.limits);
+    for (const { fault, pieceIds } of [
+      { fault: loose, pieceIds: [] },
+      { fault: misses, pieceIds: [piece.pieceId] },
+    ]) {
       if (!fault) continue;
       const finding = foundBy(grip, {
         severity: "stop",
         text: textOf(fault, hardware, layerWords(layer), (length) => formatFine(length, input.context.unit)),
         layerKey: layer.key,
+        pieceIds,
         holeId: hole.id,
         where: { x: hole.x, y: hole.y },
         value: fault.valueMm,

@@ -1,9 +1,10 @@
 import { describe, expect, it } from "vitest";
 import { grip } from "#shared/dry-fit/rules/grip.ts";
 import { standardStock } from "#shared/materials/standard-stock.ts";
-import type { CapStud } from "#shared/mockup/document.ts";
+import type { CapStud, Hardware } from "#shared/mockup/document.ts";
 import {
   buildCapStud,
+  buildHardware,
   buildLayer,
   buildSign,
   disc,
@@ -88,5 +89,88 @@ describe("a piece without a standoff", () => {
   it("is found before any hole is set, without a word on the grip", async () => {
     const sign = buildSign([buildLayer("B", [plate("p", 60, 60, [300, 200])], { hold: standoffHold([]) })]);
     expect(await findingsOf(grip, sign)).toMatchObject([{ pieceIds: ["p"], value: 1 }]);
+  });
+});
+
+describe("a cap that lies on a piece bonded to the panel", () => {
+  const clad = (studLength: number) =>
+    buildSign([...panel({ studLength }).layers, buildLayer("C", [plate("badge", 60, 60, [300, 200])])]);
+
+  it("leaves less of its stud in the barrel: 5.9 and 3.7 mm at their thickest", async () => {
+    expect(await findingsOf(grip, clad(14.6))).toEqual([]);
+    expect(await findingsOf(grip, clad(14.5))).toMatchObject([{ value: 4.9, limit: 5, holeId: "h" }]);
+  });
+});
+
+it("asks for as many stud diameters as the shop does, and a pan head in a countersunk floor stands in the way", async () => {
+  expect(await findingsOf(grip, panel({ studLength: 13 }), { limits: { gripDiameters: 1.4 } })).toEqual([]);
+  expect(await findingsOf(grip, panel({ studLength: 13 }), { limits: { gripDiameters: 1.5 } })).toHaveLength(1);
+  const screw = { ...buildCapStud().screw, head: "pan" as const };
+  expect(await findingsOf(grip, panel({ studLength: 13, screw }))).toMatchObject([{ limit: expect.closeTo(7.44, 2) }]);
+});
+
+const heldBy = (hardware: Hardware, thickness: number, holes = [hole("h", 300, 200)], offset?: number) =>
+  buildSign([
+    buildLayer("B", [plate("panel", 200, 100, [300, 200])], {
+      thickness,
+      hold: standoffHold(holes, hardware, offset),
+    }),
+  ]);
+
+describe("a glued stud", () => {
+  it.each([
+    // 4 mm thick: 8 mm of it in the wood.
+    { studLength: 20, count: 0 },
+    { studLength: 19.9, count: 1 },
+  ])("of $studLength mm over a spacer of 12: $count", async ({ studLength, count }) => {
+    const findings = await findingsOf(grip, heldBy(buildHardware("blindStud", { studLength }), 3));
+    expect(findings).toHaveLength(count);
+    for (const finding of findings) {
+      expect(finding).toMatchObject({ value: 7.9, limit: 8 });
+      expect(finding.text).toContain("comes 7.9 mm into the wood");
+    }
+  });
+
+  it("without a spacer is as far off as the maker says", async () => {
+    const glued = buildHardware("blindStud", { barrelLength: 0, studLength: 20 });
+    expect(await findingsOf(grip, heldBy(glued, 3, [hole("h", 300, 200)], 9))).toEqual([]);
+    expect(await findingsOf(grip, heldBy(buildHardware("blindStud"), 3, [hole("h", 300, 200)], 9))).toMatchObject([
+      { value: 9, limit: 12 },
+    ]);
+  });
+});
+
+it("a screw through panel and spacer holds it the washer's thickness higher", async () => {
+  const hardware = buildHardware("throughScrew");
+  expect(await findingsOf(grip, heldBy(hardware, 3, [hole("h", 300, 200)], 12.5))).toEqual([]);
+  expect(await findingsOf(grip, heldBy(hardware, 3, [hole("h", 300, 200)], 12))).toMatchObject([{ limit: 12.5 }]);
+});
+
+// Cast 4.5 mm measures 3.65 to 5.35. The panel's left edge is at x 200, a holder reaches 8 mm.
+describe("an edge grip", () => {
+  const at = (x: number, slotWidth = 5.5) => heldBy(buildHardware("edgeGrip", { slotWidth }), 4.5, [hole("h", x, 200)]);
+
+  it.each([
+    { slotWidth: 5.34, value: 5.34, limit: 5.35 },
+    { slotWidth: 5.35, value: null, limit: null },
+    { slotWidth: 6.15, value: null, limit: null },
+    { slotWidth: 6.17, value: 2.52, limit: 2.5 },
+  ])("with a slot of $slotWidth: $value", async ({ slotWidth, value, limit }) => {
+    const findings = await findingsOf(grip, at(197, slotWidth));
+    expect(findings.map(({ value: got, limit: bound }) => [got, Number(bound?.toFixed(2))])).toEqual(
+      value === null ? [] : [[value, limit]],
+    );
+  });
+
+  it.each([
+    { x: 197, value: null },
+    { x: 195, value: null },
+    { x: 194.9, value: 2.9 },
+    { x: 197.5, value: null },
+    { x: 197.6, value: 5.6 },
+    { x: 300, value: 58 },
+  ])("with its middle at $x: $value over the edge", async ({ x, value }) => {
+    const findings = await findingsOf(grip, at(x));
+    expect(findings.map((finding) => finding.value)).toEqual(value === null ? [] : [value]);
   });
 });

@@ -1,7 +1,7 @@
-import { expect, it } from "vitest";
+import { describe, expect, it } from "vitest";
 import { holeToEdge } from "#shared/dry-fit/rules/hole-to-edge.ts";
-import type { Hole } from "#shared/mockup/document.ts";
-import { buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
+import type { Hardware, Hole } from "#shared/mockup/document.ts";
+import { buildHardware, buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
 
 /** A panel from x = 200 to 400 and y = 150 to 250. */
@@ -37,4 +37,28 @@ it("a hole beside the piece holds nothing", async () => {
   const findings = await findingsOf(holeToEdge, panel([hole("h", 100, 200)]));
   expect(findings).toMatchObject([{ severity: "stop", holeId: "h", value: null, pieceIds: [] }]);
   expect(findings[0]?.text).toContain("lies in no piece of the layer");
+});
+
+describe("standoffs that do not pass the panel", () => {
+  const held = (hardware: Hardware, x: number) =>
+    buildSign([
+      buildLayer("B", [plate("panel", 200, 100, [300, 200])], { hold: standoffHold([hole("h", x, 200)], hardware) }),
+    ]);
+
+  it.each([
+    { x: 205, value: null },
+    { x: 204.9, value: 4.9 },
+  ])("a stud with a foot of 10 mm at $x looks out or not", async ({ x, value }) => {
+    const findings = await findingsOf(holeToEdge, held(buildHardware("blindStud"), x));
+    expect(findings.map((finding) => finding.value)).toEqual(value === null ? [] : [value]);
+  });
+
+  it.each([
+    { x: 192, count: 0 },
+    { x: 191.9, count: 1 },
+  ])("an edge grip with its middle at $x reaches the edge at 200 or not", async ({ x, count }) => {
+    const findings = await findingsOf(holeToEdge, held(buildHardware("edgeGrip"), x));
+    expect(findings).toHaveLength(count);
+    for (const { text } of findings) expect(text).toMatch(/^A standoff of B, Layer B lies in no piece/);
+  });
 });

@@ -1,7 +1,15 @@
 import { expect, it } from "vitest";
 import { screwInBarrel } from "#shared/dry-fit/rules/screw-in-barrel.ts";
 import type { CapStud } from "#shared/mockup/document.ts";
-import { buildCapStud, buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
+import {
+  buildCapStud,
+  buildHardware,
+  buildLayer,
+  buildSign,
+  hole,
+  plate,
+  standoffHold,
+} from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
 
 const panel = (hardware: Partial<CapStud>) =>
@@ -30,4 +38,18 @@ it("names the screw, the barrel and both measures", async () => {
   expect(finding?.text).toBe(
     "No. 6 × 16, flat head does not go into Standoff 15 × 12 of B, Layer B: its head is 7.09 mm wide, the bore 6 mm.",
   );
+});
+
+it.each([
+  { hardware: buildHardware("edgeGrip"), values: [] },
+  { hardware: buildHardware("edgeGrip", { floorHole: 3.5 }), values: [3.5] },
+  { hardware: buildHardware("throughScrew", { boreDiameter: 3.51 }), values: [] },
+  { hardware: buildHardware("throughScrew", { boreDiameter: 3.5 }), values: [3.5] },
+  { hardware: buildHardware("blindStud"), values: [] },
+])("$hardware.name of another kind: $values", async ({ hardware, values }) => {
+  const sign = buildSign([
+    buildLayer("B", [plate("panel", 200, 100, [300, 200])], { hold: standoffHold([hole("h", 300, 200)], hardware) }),
+  ]);
+  const findings = await findingsOf(screwInBarrel, sign);
+  expect(findings.map(({ value }) => value)).toEqual(values);
 });
