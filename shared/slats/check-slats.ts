@@ -9,6 +9,8 @@ export const slatAngleRange: Range = { least: 15, most: 90 };
 const narrowestMm = 1;
 export const mostSlats = 2_000;
 const mostOutlinePoints = 20_000;
+/** Most parts that an outline may cut strips into: beyond it clipping takes minutes. */
+const mostParts = 20_000;
 /** What must be left of a board on each side of a spine, mm. Our choice. */
 const leastReachMm = 1;
 
@@ -37,10 +39,12 @@ export function checkedSlats<T>(board: SlatBoard, design: SlatDesign, compute: (
     () => null,
   );
   if (!sizes.ok) return sizes;
+  const outlined = checked(outlineMeasures(board), () => null);
+  if (!outlined.ok) return outlined;
   return checked(
     {
-      ...outlineMeasures(board),
       slats: [roughCount(board, design), { least: 0, most: mostSlats }],
+      outlineParts: [roughParts(board, design), { least: 0, most: mostParts }],
     },
     compute,
   );
@@ -68,4 +72,18 @@ function roughCount({ width, height }: SlatBoard, { pattern, angle, slatWidth, g
   const { sin, cos } = slopeOf(angle);
   const along = (height + 2 * overhang) * sin + (width + 2 * overhang) * cos * (pattern === "single" ? 1 : 0.5);
   return (pattern === "single" ? 1 : 2) * Math.ceil(along / (slatWidth + gap));
+}
+
+/** Parts that an outline can cut the strips into at most: each crosses it twice. */
+function roughParts({ outline }: SlatBoard, { angle, slatWidth, gap }: SlatDesign): number {
+  const { sin, cos } = slopeOf(angle);
+  let across = 0;
+  for (const ring of outline ?? []) {
+    let previous = ring.at(-1);
+    for (const point of ring) {
+      if (previous) across += Math.abs(point.x - previous.x) * cos + Math.abs(point.y - previous.y) * sin;
+      previous = point;
+    }
+  }
+  return Math.ceil(across / (slatWidth + gap) / 2);
 }

@@ -28,9 +28,10 @@ export type StartChoice = {
 
 /** A hand lays a slat so exactly, mm: a start must hold that far either way. Our choice. */
 const layingErrorMm = 0.5;
-/** Starts that are tried besides the exact ones, evenly over one pitch. */
+/** Starts that are tried besides the exact ones, evenly over one pitch; fewer where an outline has many points. */
 const triesOnRectangle = 60;
 const triesOnOutline = 24;
+const pointsForAllTries = 2_000;
 
 /**
  * The start that leaves the longest shortest slat, and of those that leave no sliver the one with the widest narrow slat. It
@@ -42,7 +43,7 @@ export function chooseStart(board: SlatBoard, design: SlatDesign, kernel: Kernel
   return checkedSlats(board, design, () => {
     const measure = measureOf(board, design, kernel);
     const exact = board.outline ? [] : exactStarts(board, design);
-    const tries = board.outline ? triesOnOutline : triesOnRectangle;
+    const tries = triesOn(board);
     const pitch = pitchMm(design);
     const even = Array.from({ length: tries }, (_, index) => (index * pitch) / tries);
     const heights = [...exact, ...even].map((height) => tenths(height - pitch * Math.floor(height / pitch)));
@@ -56,6 +57,12 @@ export function chooseStart(board: SlatBoard, design: SlatDesign, kernel: Kernel
       isSliverFree: best.measure.slivers === 0 && best.length === design.slatWidth,
     };
   });
+}
+
+function triesOn({ outline }: SlatBoard): number {
+  if (!outline) return triesOnRectangle;
+  const points = outline.reduce((count, ring) => count + ring.length, 0);
+  return Math.max(4, Math.min(triesOnOutline, Math.floor((triesOnOutline * pointsForAllTries) / points)));
 }
 
 type Rated = { readonly measure: StartMeasure; readonly length: number; readonly width: number };

@@ -33,6 +33,8 @@ export function slatRefusalWords({ field, value, range }: OutOfRange, unit: Leng
     return `That is about ${value} slats, and a board takes ${range.most} at most: choose wider ones or a wider gap.`;
   if (field === "outlinePoints")
     return `The board's outline has ${value} points: it takes ${range.least} to ${range.most}. Simplify it.`;
+  if (field === "outlineParts")
+    return "The board's outline is too jagged for slats this narrow: simplify it, or choose wider ones.";
   if (field === "slatWidth" && value > range.most)
     return `A slat of ${mm(value)} is wider than the board: choose ${mm(range.most)} at most.`;
   if (field === "gap" && value > range.most)

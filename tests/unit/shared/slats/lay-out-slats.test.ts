@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { beforeAll, describe, expect, it } from "vitest";
 import { loadKernel } from "#server/artwork/load-kernel.ts";
-import { regionAreaMm2 } from "#shared/geometry/area.ts";
+import { regionAreaMm2, signedRingArea } from "#shared/geometry/area.ts";
 import { connectedPieces } from "#shared/geometry/connected.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import { layOutSlats } from "#shared/slats/lay-out-slats.ts";
@@ -122,6 +122,41 @@ describe("a board of 457.2 × 482.6 with 38.1 slats at 45 degrees to a spine of 
   });
 });
 
+describe("a spine off the middle", () => {
+  it("to the left is the mirror image of one to the right, with the corner of the wider side as its start", () => {
+    const [right, left] = [lay({ spineOffset: 60 }), lay({ spineOffset: -60 })];
+    expect(left.startHeight).toBe(right.startHeight);
+    expect(left.startHeight).toBeCloseTo(-(209.55 + 60), 9);
+    const mirrored = left.slats.filter(({ side }) => side === "left").map(({ longPoint }) => longPoint);
+    expect(mirrored).toEqual(
+      right.slats.filter(({ side }) => side === "right").map(({ longPoint }) => expect.closeTo(longPoint, 9)),
+    );
+  });
+});
+
+describe("slats as they are laid", () => {
+  const cases = [...Object.keys(outlines), ""].flatMap((name) =>
+    (["spine", "mitred", "single"] as const).map((pattern) => ({
+      name: name || "rectangle",
+      outline: outlines[name],
+      pattern,
+    })),
+  );
+  it.each(cases)("$pattern on $name: no two lie on each other", ({ outline, pattern }) => {
+    const board = outline ? { width: 600, height: 500, outline } : usualBoard;
+    const { slats, spine } = lay({ pattern, overhang: 30, angle: 52 }, board);
+    const pieces = [...slats, ...(spine ? [spine] : [])].map(({ untrimmed }) => untrimmed);
+    const area = pieces.reduce((sum, piece) => sum + regionAreaMm2([piece]), 0);
+    const joined = regionAreaMm2(
+      kernel.union(
+        pieces.map((piece) => (signedRingArea(piece) < 0 ? piece.toReversed() : piece)),
+        "nonzero",
+      ),
+    );
+    expect(Math.abs(area - joined)).toBeLessThan(pieces.length * 2);
+  });
+});
+
 describe("other patterns", () => {
   it("mitred to each other have no spine and reach to the middle", () => {
     const { slats, spine } = lay({ pattern: "mitred" });
@@ -230,9 +265,29 @@ describe("bad input", () => {
     expect(refused({ slatWidth: 457.2 })).toBeNull();
   });
 
+  it("takes as many slats as there may be, on an outline with as many points", () => {
+    const points = Array.from({ length: 19_000 }, (_, index) => {
+      const turned = (index / 19_000) * 2 * Math.PI;
+      const radius = 2400 + 60 * Math.sin(turned * 900);
+      return { x: 2500 + radius * Math.cos(turned), y: 2500 + radius * Math.sin(turned) };
+    });
+    const { slats } = lay(
+      { slatWidth: 8, spineWidth: 8, overhang: 20 },
+      { width: 5000, height: 5000, outline: [points] },
+    );
+    expect(slats.length).toBeGreaterThan(1000);
+    expect(slats.length).toBeLessThanOrEqual(2000);
+  });
+
   it("refuses a comb whose teeth part the slats into more than 2,000", () => {
     const teeth = Array.from({ length: 300 }, (_, tooth) => rectangle(tooth * 2, 0, tooth * 2 + 1, 500));
     expect(refused({ pattern: "single", angle: 90 }, { width: 600, height: 500, outline: teeth })).toBe("slats");
+  });
+
+  it("refuses an outline so jagged that clipping would take minutes", () => {
+    const jagged = Array.from({ length: 12_000 }, (_, index) => ({ x: index / 4, y: index % 2 === 0 ? 0 : 2900 }));
+    const board = { width: 3000, height: 3000, outline: [[...jagged, { x: 3000, y: 3000 }, { x: 0, y: 3000 }]] };
+    expect(refused({ pattern: "single", angle: 90 }, board)).toBe("outlineParts");
   });
 
   const number = fc.oneof(

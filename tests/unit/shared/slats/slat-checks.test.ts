@@ -301,6 +301,11 @@ describe("words of refusal", () => {
       board: { width: 1.5 },
       text: "The board is too narrow for slats on both sides of a spine.",
     },
+    {
+      change: { slatWidth: 2 },
+      board: { outline: [Array.from({ length: 5000 }, (_, index) => ({ x: index / 20, y: (index % 2) * 400 }))] },
+      text: "The board's outline is too jagged for slats this narrow: simplify it, or choose wider ones.",
+    },
     { change: {}, board: { outline: [] }, text: "The board's outline has 0 points: it takes 3 to 20000. Simplify it." },
   ])("$text", ({ change, board, text }) => {
     expect(words(change, board)).toBe(text);
