@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import type { openShareLink, portfolioPieceSchema, shareLinkSchema } from "#shared/contracts/portfolio.ts";
+import { faceStock } from "#shared/stack/backer.ts";
 import type { ShareLink } from "../models/share-link.ts";
 import type { Shop } from "../models/shop.ts";
 import type { ApprovedPiece } from "../queries/portfolio.ts";
@@ -50,7 +51,7 @@ export function presentSharedPieces(
         widthMm: board.width,
         heightMm: board.height,
         offWallMm: figures.offWall.nominal,
-        materials: [...new Set([backer.stock.name, ...layers.map(({ stock }) => `${stock.name} acrylic`)])],
+        materials: [...new Set([faceStock(backer).name, ...layers.map(({ stock }) => `${stock.name} acrylic`)])],
         elevation: drawing.picture,
         section: drawing.section,
       };

@@ -2,6 +2,7 @@ import type { Kernel } from "../geometry/kernel.ts";
 import type { Box, Path, Point } from "../geometry/path.ts";
 import { rectanglePath } from "../geometry/shapes.ts";
 import type { MockupDocument } from "../mockup/document.ts";
+import { faceStock } from "../stack/backer.ts";
 import { boardPath } from "../stack/board-outline.ts";
 import type { Figures } from "../stack/figures.ts";
 import type { LengthUnit } from "../units/length.ts";
@@ -50,7 +51,7 @@ export function boardOriginOf(list: DisplayList): Point | null {
 }
 
 function drawBoard({ document, texture, paperScale }: ElevationInput, box: Box, outline: Path): Item[] {
-  const { colour, name } = document.backer.stock;
+  const { colour, name } = faceStock(document.backer);
   const seed = [...name].reduce((sum, character) => (sum * 31 + (character.codePointAt(0) ?? 0)) % 9973, 17);
   const face: Item = texture
     ? { kind: "image", box, pngBase64: texture.pngBase64 }

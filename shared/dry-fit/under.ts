@@ -1,8 +1,9 @@
 import { boxesOverlap } from "../geometry/box.ts";
 import type { Region } from "../geometry/path.ts";
 import { lengthsEqual } from "../geometry/tolerance.ts";
+import { faceRegion } from "../stack/backer.ts";
 import type { PieceFigures } from "../stack/figures.ts";
-import { boardRegion, discsRegion } from "../stack/piece-region.ts";
+import { discsRegion } from "../stack/piece-region.ts";
 import { areasTouch, spreadOf } from "../stack/touching.ts";
 import type { RuleInput } from "./rule.ts";
 
@@ -25,7 +26,7 @@ export function supportOf(input: Input, level: number, { box, bottom }: PieceFig
   );
   // The kernel's own rings run outlines one way and holes the other, so joining them by turns keeps a hole open only
   // where nothing else lies.
-  const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal) ? boardRegion(document.board, kernel) : [];
+  const board = lengthsEqual(figures.backerTop.nominal, bottom.nominal) ? faceRegion(document, kernel) : [];
   return kernel.union([...board, ...pieces.flatMap((piece) => piece.region)], "nonzero");
 }
 
@@ -39,7 +40,7 @@ export function topUnderDisc(
   const tops = piecesBelow(input, level)
     .filter((piece) => areasTouch(foot, piece, input.kernel))
     .map((piece) => piece.top.nominal);
-  if (areasTouch(foot, spreadOf(boardRegion(input.document.board, input.kernel)), input.kernel)) {
+  if (areasTouch(foot, spreadOf(faceRegion(input.document, input.kernel)), input.kernel)) {
     tops.push(input.figures.backerTop.nominal);
   }
   return tops.length > 0 ? Math.max(...tops) : null;

@@ -40,5 +40,6 @@ export function woodAt(
   if (!regionContains(board, place)) return null;
   const face = figures.backerTop.nominal;
   const floors = letIn.filter(({ region }) => regionContains(region, place)).map(({ bottom }) => bottom.nominal);
-  return { face, top: Math.min(face, ...floors), slat: 0, substrate: document.backer.thickness };
+  const { thickness, slats } = document.backer;
+  return { face, top: Math.min(face, ...floors), slat: slats?.thickness ?? 0, substrate: thickness };
 }

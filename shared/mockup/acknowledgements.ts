@@ -1,3 +1,4 @@
+import { faceStock } from "../stack/backer.ts";
 import type { Figures } from "../stack/figures.ts";
 import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
@@ -32,7 +33,7 @@ export function acknowledgementsOf({
   if (colours.length > 0) {
     asked.push({
       id: "colours",
-      text: `The colours are ${colours.join(", ")} on ${document.backer.stock.name}. A screen shows them only nearly.`,
+      text: `The colours are ${colours.join(", ")} on ${faceStock(document.backer).name}. A screen shows them only nearly.`,
     });
   }
   const hardware = layers.flatMap(({ hold }) =>

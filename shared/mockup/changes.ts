@@ -52,6 +52,13 @@ function listSignChanges(before: MockupDocument, after: MockupDocument, { unit }
   if (was.thickness !== is.thickness) {
     say("backer", `Backer ${length(was.thickness)} thick becomes ${length(is.thickness)}`);
   }
+  if (was.slats === null && is.slats !== null) say("backer", `Slats of ${is.slats.stock.name} are laid on the backer`);
+  else if (was.slats !== null && is.slats === null) say("backer", "The slats are taken off the backer");
+  else if (!sameThing(was.slats, is.slats)) say("backer", "The slats are laid otherwise");
+  if (before.frame === null && after.frame !== null)
+    say("backer", `A frame of ${after.frame.stock.name} goes round it`);
+  else if (before.frame !== null && after.frame === null) say("backer", "The frame is gone");
+  else if (!sameThing(before.frame, after.frame)) say("backer", "The frame is made otherwise");
   if (was.grainTurn !== is.grainTurn) say("backer", `Grain turned ${was.grainTurn}° becomes ${is.grainTurn}°`);
   const [wasFinish, isFinish] = [finishWords(was.finish), finishWords(is.finish)];
   if (wasFinish !== isFinish) say("backer", `Finish of the backer: ${wasFinish} becomes ${isFinish}`);

@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { type capStudSchema, hardwareSchema } from "./hardware-schemas.ts";
-import { colour, coordinate, id, length, name, pathSchema, point } from "./schema-parts.ts";
+import { colour, coordinate, id, length, longestMm, name, pathSchema, point } from "./schema-parts.ts";
 import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema } from "./stock-schemas.ts";
 
 /**
@@ -8,7 +8,7 @@ import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema
  * Lengths mm, angles degrees, x right and y down from the board's upper left corner, z from the back of the board to the viewer.
  * A changed meaning gets a new version and a step in upgrade.ts; old documents are never rewritten in place.
  */
-export const documentVersion = 2;
+export const documentVersion = 3;
 
 /** Nothing smaller is a board: figures and shadows of one have no meaning. */
 export const leastBoardMm = 20;
@@ -90,9 +90,39 @@ export const boardSchema = z.strictObject({
     z.strictObject({ kind: z.literal("ellipse") }),
     z.strictObject({ kind: z.literal("path"), path: pathSchema.min(1) }),
   ]),
+  /** Of the body, without a frame. */
   width: boardSide,
   height: boardSide,
+  /** Which of the two the brief states. */
   measures: z.enum(["body", "overall"]),
+});
+
+/** Slats as shared/slats lays them; lengths mm, angles degrees. What can't be laid is a finding, not a refusal. */
+export const slatsSchema = z.strictObject({
+  stock: woodSchema,
+  thickness: length.max(100),
+  pattern: z.enum(["spine", "mitred", "single"]),
+  /** Between slat and spine, or the upright where there is none. */
+  angle: z.number().finite().min(15).max(90),
+  slatWidth: length,
+  gap: z.number().finite().min(0).max(longestMm),
+  spineWidth: length,
+  spineOffset: coordinate,
+  start: z.discriminatedUnion("kind", [
+    z.strictObject({ kind: z.literal("corner") }),
+    z.strictObject({ kind: z.literal("height"), height: coordinate }),
+  ]),
+  direction: z.enum(["up", "down"]),
+  overhang: z.number().finite().min(0).max(1000),
+});
+
+/** Round the body, its back level with the backer's. */
+export const frameSchema = z.strictObject({
+  stock: woodSchema,
+  width: length.max(500),
+  depth: length.max(500),
+  /** In the corners: mitred, or butted with the uprights running through. */
+  mitred: z.boolean(),
 });
 
 export const documentSchema = z
@@ -109,14 +139,17 @@ export const documentSchema = z
       points: z.array(point).max(50),
     }),
     quantity: z.int().min(1).max(1000),
+    /** A plank, or under slats the substrate that they are glued on and screws bite in. */
     backer: z.strictObject({
-      kind: z.literal("plain"),
       stock: woodSchema,
       thickness: length.max(200),
       /** The way the grain runs, degrees clockwise from the x axis. */
       grainTurn: z.number().finite().min(0).max(180),
+      slats: slatsSchema.nullable(),
+      /** Of what is seen: the plank, or the slats. */
       finish: z.array(coatSchema).max(12),
     }),
+    frame: frameSchema.nullable(),
     /** From the wall outward. Key A is the backer's, layers start at B. */
     layers: z.array(layerSchema).max(60),
     presentation: z.strictObject({
@@ -157,6 +190,9 @@ export type Layer = z.infer<typeof layerSchema>;
 export type Piece = z.infer<typeof pieceSchema>;
 export type Hold = z.infer<typeof holdSchema>;
 export type Hole = z.infer<typeof holeSchema>;
+export type Backer = MockupDocument["backer"];
+export type Slats = z.infer<typeof slatsSchema>;
+export type FrameOfSign = z.infer<typeof frameSchema>;
 export type Board = z.infer<typeof boardSchema>;
 export type Hardware = z.infer<typeof hardwareSchema>;
 export type CapStud = z.infer<typeof capStudSchema>;

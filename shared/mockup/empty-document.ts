@@ -23,7 +23,8 @@ export function emptyDocument(options: {
     },
     hanging: { kind: "none", gap: 0, pose: "upright", carriesKg: null, points: [] },
     quantity: options.quantity ?? 1,
-    backer: { kind: "plain", stock: options.backer, thickness: options.thicknessMm ?? 18, grainTurn: 0, finish: [] },
+    backer: { stock: options.backer, thickness: options.thicknessMm ?? 18, grainTurn: 0, slats: null, finish: [] },
+    frame: null,
     layers: [],
     presentation: {
       wall: options.wall ?? "#EFE9DC",

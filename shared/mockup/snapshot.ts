@@ -5,7 +5,7 @@ import type { Figures } from "../stack/figures.ts";
 import type { MockupDocument } from "./document.ts";
 
 /** Changes when the engine computes or draws anything differently, so that a frozen drawing says what made it. */
-export const engineVersion = "2";
+export const engineVersion = "3";
 
 /** What the sheet's lettering says beside the picture. Fields after ISO 7200. */
 export type TitleBlock = {

@@ -21,7 +21,8 @@ export function computeFigures(document: MockupDocument, kernel: Kernel): Figure
   const backerTop = backerTopOf(document);
   const pieces = standing.map((one) => pieceFigures(one, masses.pieces.get(one.piece.id) ?? 0, kernel));
   const layers = document.layers.map((layer) => layerFigures(layer, pieces, backerTop));
-  const depth = bandHighest([backerTop, ...standing.map(topWithFront)]) ?? backerTop;
+  const depth =
+    bandHighest([backerTop, exactly(document.frame?.depth ?? 0), ...standing.map(topWithFront)]) ?? backerTop;
   return {
     backerTop,
     backerMassG: masses.backer,

@@ -1,11 +1,12 @@
-import { regionAreaMm2 } from "../geometry/area.ts";
+import { regionAreaMm2, signedRingArea } from "../geometry/area.ts";
 import { boxesOverlap } from "../geometry/box.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Region } from "../geometry/path.ts";
 import { lengthsEqual } from "../geometry/tolerance.ts";
 import { passesPanel } from "../hardware/standoff-parts.ts";
 import { sheetMassG, woodDensityKgM3 } from "../materials/density.ts";
-import type { MockupDocument } from "../mockup/document.ts";
+import type { MockupDocument, Wood } from "../mockup/document.ts";
+import { backerThicknessMm, faceRegion, faceStock, frameOf } from "./backer.ts";
 import { boardRegion, discsRegion } from "./piece-region.ts";
 import { backerTopOf, type StandingPiece } from "./stand-pieces.ts";
 import { type Spread, spreadOf } from "./touching.ts";
@@ -72,13 +73,28 @@ export function computeMasses(
     const volume = Math.max(0, regionAreaMm2(drilled) * thickness - pockets);
     pieces.set(one.piece.id, sheetMassG(volume, 1, stock.densityKgM3));
   }
-  const { board, backer } = document;
-  const face = {
-    ...spreadOf(boardRegion(board, kernel)),
-    level: -1,
-    face: backerTopOf(document).nominal,
-    thickness: backer.thickness,
-  };
-  const volume = Math.max(0, regionAreaMm2(face.region) * backer.thickness - pocketVolume(face, cuts, kernel));
-  return { pieces, backer: sheetMassG(volume, 1, woodDensityKgM3(backer.stock.gravity, backer.stock.moisturePercent)) };
+  const { backer } = document;
+  const region = faceRegion(document, kernel);
+  const thickness = backerThicknessMm(backer);
+  const face = { ...spreadOf(region), level: -1, face: backerTopOf(document).nominal, thickness };
+  const pockets = pocketVolume(face, cuts, kernel);
+  return { pieces, backer: Math.max(0, woodMasses(document, kernel) - massOf(faceStock(backer), pockets)) };
+}
+
+const massOf = ({ gravity, moisturePercent }: Wood, volumeMm3: number): number =>
+  sheetMassG(volumeMm3, 1, woodDensityKgM3(gravity, moisturePercent));
+
+/** Plank or substrate, slats and frame, grams, without what pockets take. Slats that can't be laid count as a full face. */
+function woodMasses(document: MockupDocument, kernel: Kernel): number {
+  const { board, backer, frame } = document;
+  const boardMm2 = regionAreaMm2(boardRegion(board, kernel));
+  const plank = massOf(backer.stock, boardMm2 * backer.thickness);
+  const { slats } = backer;
+  const faceMm2 = regionAreaMm2(faceRegion(document, kernel));
+  const laid = slats ? massOf(slats.stock, faceMm2 * (backerThicknessMm(backer) - backer.thickness)) : 0;
+  const round = frameOf(document, kernel);
+  const frameMm2 = round?.ok
+    ? round.value.members.reduce((sum, { outline }) => sum + Math.abs(signedRingArea(outline)), 0)
+    : 0;
+  return plank + laid + (frame ? massOf(frame.stock, frameMm2 * frame.depth) : 0);
 }

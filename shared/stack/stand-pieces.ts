@@ -3,8 +3,9 @@ import type { Kernel } from "../geometry/kernel.ts";
 import { sheetBand } from "../materials/sheet-tolerance.ts";
 import type { Hold, Hole, Layer, MockupDocument, Piece } from "../mockup/document.ts";
 import { type Banded, bandHighest, bandSum, exactly } from "../units/banded.ts";
+import { backerThicknessMm, faceRegion } from "./backer.ts";
 import { holdsPiece } from "./held-piece.ts";
-import { boardRegion, discsRegion, pieceRegion } from "./piece-region.ts";
+import { discsRegion, pieceRegion } from "./piece-region.ts";
 import { areasTouch, type Spread, spreadOf } from "./touching.ts";
 
 /** A piece at its height. */
@@ -23,9 +24,9 @@ export type StandingPiece = Spread & {
   readonly top: Banded;
 };
 
-/** The face of the backer above its back. A plain board is planed to its thickness, so its band is nothing. */
+/** The face of the backer above its back. Boards are planed to their thickness, so their band is nothing. */
 export function backerTopOf(document: MockupDocument): Banded {
-  return exactly(document.backer.thickness);
+  return exactly(backerThicknessMm(document.backer));
 }
 
 /**
@@ -36,7 +37,7 @@ export function backerTopOf(document: MockupDocument): Banded {
  */
 export function standPieces(document: MockupDocument, kernel: Kernel): StandingPiece[] {
   const backerTop = backerTopOf(document);
-  const board = spreadOf(boardRegion(document.board, kernel));
+  const board = spreadOf(faceRegion(document, kernel));
   const standing: StandingPiece[] = [];
   for (const [level, layer] of document.layers.entries()) {
     const below = standing.slice();

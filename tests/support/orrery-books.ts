@@ -164,12 +164,11 @@ export function orreryBooks(): MockupDocument {
   const planet = (id: string, name: string, at: Point, radius: number, colour: string) =>
     pieceOf(id, name, circlePath(at, radius), colour);
   return documentSchema.parse({
-    version: 2,
+    version: 3,
     board: { outline: { kind: "rectangle" }, width: 600, height: 400, measures: "body" },
     hanging: { kind: "cleat", gap: 6, pose: "upright", carriesKg: 20, points: [] },
     quantity: 1,
     backer: {
-      kind: "plain",
       stock: {
         kind: "wood",
         stockId: null,
@@ -182,12 +181,14 @@ export function orreryBooks(): MockupDocument {
       },
       thickness: 20,
       grainTurn: 0,
+      slats: null,
       finish: [
         { kind: "stain", name: "Pale wash", colour: "#F2E9D8", strength: 0.25, dryingHours: 6 },
         { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 2 },
         { kind: "clear coat", name: "Clear satin", base: "water-borne", dryingHours: 12 },
       ],
     },
+    frame: null,
     layers: [
       layer("B", "Night disc", acrylic("Midnight, gloss", navy), 4.5, {
         hold: { kind: "standoff", hardware: capStud, offset: 19, holes },

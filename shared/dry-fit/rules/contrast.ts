@@ -3,6 +3,7 @@ import { finishedWood } from "../../colour/finished-wood.ts";
 import { type Lab, labOf } from "../../colour/lab.ts";
 import { lrvOfLightness, luminanceContrast } from "../../colour/lrv.ts";
 import type { Coat, MockupDocument } from "../../mockup/document.ts";
+import { faceStock } from "../../stack/backer.ts";
 import type { Finding } from "../finding.ts";
 import { type Letter, lettersOf } from "../lettering.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -70,7 +71,8 @@ function checkLetters(letters: readonly Letter[], { document, limits }: RuleInpu
 function groundOf(document: MockupDocument, key: string): Ground {
   const layer = document.layers.find((one) => one.key === key);
   if (layer) return { name: layer.stock.name, colour: layer.stock.colour, lab: labOf(layer.stock.colour) };
-  const { stock, finish } = document.backer;
+  const { finish } = document.backer;
+  const stock = faceStock(document.backer);
   const bare = labOf(stock.colour);
   const coats = finish.flatMap(finishCoat);
   const finished = finishedWood(bare, coats);

@@ -23,7 +23,7 @@ export function createGrainCache(): GrainCache {
 
 /** All that the grain depends on. */
 function nameOf({ board, backer }: MockupDocument): string {
-  return [board.width, board.height, backer.stock.colour, backer.stock.name, backer.grainTurn].join("|");
+  return [board.width, board.height, backer.stock.colour, backer.stock.name, backer.grainTurn, JSON.stringify(backer.slats)].join("|");
 }
 
 /** The image that is clipped to the board, right after the board itself; undefined when the picture has none. */

@@ -7,7 +7,7 @@ import {
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
 import { listChanges } from "#shared/mockup/changes.ts";
-import type { Layer, MockupDocument } from "#shared/mockup/document.ts";
+import type { FrameOfSign, Layer, MockupDocument, Slats } from "#shared/mockup/document.ts";
 import {
   bondHold,
   buildLayer,
@@ -48,8 +48,22 @@ it("a document does not differ from itself, nor from a copy out of other stock e
 });
 
 describe("the whole sign", () => {
-  const oil = { kind: "clear coat" as const, name: "Oil", base: "oil or shellac" as const, dryingHours: 12 };
   const walnut = standardWoods[2]?.wood ?? before.backer.stock;
+  const slats: Slats = {
+    stock: walnut,
+    thickness: 9,
+    pattern: "spine",
+    angle: 45,
+    slatWidth: 38,
+    gap: 0,
+    spineWidth: 38,
+    spineOffset: 0,
+    start: { kind: "corner" },
+    direction: "up",
+    overhang: 6,
+  };
+  const frame: FrameOfSign = { stock: walnut, width: 19, depth: 26, mitred: true };
+  const oil = { kind: "clear coat" as const, name: "Oil", base: "oil or shellac" as const, dryingHours: 12 };
   it.each([
     { change: { board: { ...before.board, width: 650 } }, text: "Board 600 × 400 mm becomes 650 × 400 mm" },
     {
@@ -76,6 +90,11 @@ describe("the whole sign", () => {
       change: { hanging: { ...before.hanging, points: [{ x: 300, y: 40 }] } },
       text: "The wall's fixings are set otherwise",
     },
+    {
+      change: { backer: { ...before.backer, slats } },
+      text: "Slats of Black walnut are laid on the backer",
+    },
+    { change: { frame }, text: "A frame of Black walnut goes round it" },
     { change: { quantity: 3 }, text: "Quantity 1 becomes 3" },
     { change: { hanging: { ...before.hanging, kind: "cleat" as const } }, text: "Hanging: none becomes cleat" },
     { change: { hanging: { ...before.hanging, gap: 6 } }, text: "Gap to the wall 0 mm becomes 6 mm" },

@@ -31,6 +31,12 @@ it("a document of version 1 keeps what it said and gets what it meant", () => {
   expect(layers[1]?.hold).toMatchObject({ kind: "pocket", cut: "engraved", bitRadius: 0 });
 });
 
+it("a plank of version 2 has no slats and no frame", () => {
+  const read = readDocument(sample(2));
+  expect(read).toMatchObject({ ok: true, document: { backer: { slats: null, thickness: 18 }, frame: null } });
+  if (read.ok) expect(read.document.backer).not.toHaveProperty("kind");
+});
+
 it("a finish in words is kept as it was written, and an upright board's grain stays upright", () => {
   const old = sample(1);
   const first = z.looseObject({ board: z.looseObject({}), backer: z.looseObject({}) }).parse(old);

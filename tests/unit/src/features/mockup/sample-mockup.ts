@@ -58,11 +58,12 @@ export function barrel(barrelLength: number, fields: Partial<CapStud> = {}): Cap
 
 export function emptyMockup(fields: Partial<MockupDocument> = {}): MockupDocument {
   return {
-    version: 2,
+    version: 3,
     board: { outline: { kind: "rectangle" }, width: 600, height: 400, measures: "body" },
     hanging: { kind: "cleat", gap: 8, pose: "upright", carriesKg: null, points: [] },
     quantity: 1,
-    backer: { kind: "plain", stock: pine, thickness: 20, grainTurn: 0, finish: [] },
+    backer: { stock: pine, thickness: 20, grainTurn: 0, slats: null, finish: [] },
+    frame: null,
     layers: [],
     presentation: {
       wall: "#EFE8DA",
