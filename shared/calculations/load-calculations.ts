@@ -1,10 +1,14 @@
+import { fixingAllowable } from "../hardware/fixing-allowable.ts";
 import { fixingLoads, fixingRows, weightN } from "../hardware/fixing-loads.ts";
 import { allowableLateralN, lateralSafety, screwLateral } from "../hardware/lateral.ts";
 import { nearestDrillMm, pilotHoleMm } from "../hardware/pilot-hole.ts";
 import { allowableWithdrawalN, screwWithdrawalN, withdrawalSafety } from "../hardware/withdrawal.ts";
+import { standardStandoffs } from "../materials/standard-stock.ts";
 import { rootDiameterMm } from "../materials/wood-screw-threads.ts";
 import { woodScrewDiameterMm } from "../materials/wood-screws.ts";
 import { type Deflection, deflectionLimitMm } from "../plates/deflection.ts";
+import { holdingPattern } from "../plates/holding-pattern.ts";
+import { longestSpanMm } from "../plates/longest-span.ts";
 import { pushDeflection, usualPushN } from "../plates/push.ts";
 import { acrylicSheet, lastingShare, ownWeight } from "../plates/rigidity.ts";
 import { sag } from "../plates/sag.ts";
@@ -90,6 +94,37 @@ export const loadCalculations: CalculationGroup = {
       },
     },
     {
+      id: "fixing-allowable",
+      title: "What one standoff may carry",
+      formula:
+        "Across: its screw's K D², in proportion under 7 D in the wood. Along: 108.25 G² D L, L thread in the wood, two thirds of the screw at the most. Each over its divisor.",
+      source: {
+        text: "Wood Handbook and National Design Specification, as the two before; from memory in parts",
+        status: "from memory",
+      },
+      limits:
+        "Outside the published range (under 4 D, a size that was not tested, a glued stud, wood lighter than the table) it is an estimate of ours, and a caution from a share of it on.",
+      example: () => {
+        const hardware = present(standardStandoffs[0] ?? null);
+        const inWood = hardware.screw.length - hardware.floorThickness;
+        const wood = { gravity: 0.35, hardness: "softwood" } as const;
+        const divisors = { lateral: lateralSafety, withdrawal: withdrawalSafety };
+        const may = resultOf(fixingAllowable(hardware, wood, inWood, divisors));
+        return worked(
+          [
+            ["Screw", hardware.screw.name],
+            ["Specific gravity", wood.gravity],
+            ["In the wood", inWood, "mm"],
+          ],
+          [
+            ["Across it", may.lateralN, "N"],
+            ["Along it", may.withdrawalN, "N"],
+            ["Estimate, for it is", may.unproven.join(", ")],
+          ],
+        );
+      },
+    },
+    {
       id: "fixing-loads",
       title: "What a hanging panel asks of its fixings",
       formula:
@@ -161,6 +196,28 @@ export const loadCalculations: CalculationGroup = {
             ["Push", usualPushN, "N"],
           ],
           [["Gives way", figureMm(resultOf(pushDeflection(sheet, spacing, usualPushN))), "mm"]],
+        );
+      },
+    },
+    {
+      id: "longest-span",
+      title: "Longest span between standoffs",
+      formula:
+        "Four in a rectangle: its longer side. Others: the longest side of the shape round them or, if longer, the longest step needed to reach them all.",
+      source: { text: "Geometry; shortest steps after R. C. Prim, 1957", status: "calculated" },
+      limits: "An upper estimate where they stand in no rectangle; the sheet is then taken as a strip.",
+      example: () => {
+        const six = [0, 150, 300].flatMap((x) => [0, 200].map((y) => ({ x, y })));
+        const four = six.filter(({ x }) => x !== 150);
+        return worked(
+          [
+            ["Columns apart", 150, "mm"],
+            ["Rows apart", 200, "mm"],
+          ],
+          [
+            ["Two rows of three", longestSpanMm(six), "mm"],
+            ["Their four corners", present(holdingPattern(four, 5)).longer, "mm"],
+          ],
         );
       },
     },

@@ -1,4 +1,7 @@
+import { flattenPath } from "../geometry/flatten.ts";
+import { rectanglePath } from "../geometry/shapes.ts";
 import { nearestBarrel } from "../hardware/barrel-offset.ts";
+import { edgeOverlapMm, slotPlayMm } from "../hardware/edge-grip.ts";
 import { capStudGrip } from "../hardware/grip.ts";
 import { screwMisfits } from "../hardware/screw-fit.ts";
 import { leastHoldMm, reachRoom, screwReach, usualWood } from "../hardware/screw-reach.ts";
@@ -46,6 +49,35 @@ export const screwCalculations: CalculationGroup = {
             ["Needed", grip.needed, "mm"],
             ["Grip at the most", grip.most, "mm"],
             ["Room", grip.room, "mm"],
+          ],
+        );
+      },
+    },
+    {
+      id: "edge-grip",
+      title: "An edge grip on its sheet",
+      formula:
+        "Slot − sheet: at the thickest nothing or more, at the thinnest what a gasket takes up. Half the holder − its middle's distance from the edge: how far it reaches over.",
+      source: {
+        text: "Arithmetic; sheet by ISO 7823-1; how much is enough is common practice",
+        status: "common practice",
+      },
+      limits: "Round holders with their middle outside the panel.",
+      example: () => {
+        const sheet = sheetBand("cast", 6);
+        const { thickest, thinnest } = slotPlayMm(7.2, sheet);
+        const panel = flattenPath(rectanglePath({ x: 0, y: 0, width: 200, height: 100 }));
+        return worked(
+          [
+            ["Slot", 7.2, "mm"],
+            ["Sheet", sheet.nominal, "mm"],
+            ["Holder", 16, "mm"],
+            ["Its middle outside", 3, "mm"],
+          ],
+          [
+            ["Play at the thickest", thickest, "mm"],
+            ["Play at the thinnest", thinnest, "mm"],
+            ["Over the edge", edgeOverlapMm(16, panel, { x: -3, y: 50 }), "mm"],
           ],
         );
       },

@@ -120,6 +120,15 @@ const stated: Readonly<Record<string, Readonly<Record<string, string | readonly 
   },
   // Wood Handbook before 1991, table 8-4: 23.17 · 4.1656².
   "screw-lateral": { "Load of the table": [402.05, 0.005], "May be put on": [201.03, 0.005] },
+  // ISO 7823-1: 6 mm is 5 to 7; the holder reaches 8 mm, its middle 3 outside.
+  "edge-grip": { "Play at the thickest": [0.2, 1e-9], "Play at the thinnest": [2.2, 1e-9], "Over the edge": [5, 1e-9] },
+  // 23.17 · 3.5052² · 13.5/(7 · 3.5052)/2 and 108.25 · 0.35² · 3.5052 · (2/3 · 16)/5.5; 13.5 mm are 3.85 D.
+  "fixing-allowable": {
+    "Across it": [78.31, 0.005],
+    "Along it": [90.15, 0.005],
+    "Estimate, for it is": "shallow",
+  },
+  "longest-span": { "Two rows of three": [200, 1e-9], "Their four corners": [300, 1e-9] },
   "fixing-loads": { "Across each": [4.903325, 1e-6], "Along each of the upper row": [1.0542149, 1e-6] },
   // Timoshenko's grid of points, calculated.
   sag: { Sag: [1.1358, 5e-5] },
