@@ -48,7 +48,10 @@ describe("a mitred frame round a rectangle", () => {
 
   it("is true when both diagonals are √(640² + 440²)", () => {
     const { diagonals } = mitred(board);
-    expect(diagonals.map(({ lengthMm }) => lengthMm)).toEqual([expect.closeTo(776.6595, 3), expect.closeTo(776.6595, 3)]);
+    expect(diagonals.map(({ lengthMm }) => lengthMm)).toEqual([
+      expect.closeTo(776.6595, 3),
+      expect.closeTo(776.6595, 3),
+    ]);
   });
 
   it.each([{ turned: false }, { turned: true }])("does not mind which way the outline runs: $turned", ({ turned }) => {
