@@ -3,7 +3,7 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import { cx } from "@/lib/cx.ts";
 import { useMedia } from "@/lib/use-media.ts";
 import type { Matter } from "../model/section-bodies.ts";
-import { type LaidDimension, layOutSection } from "../model/section-layout.ts";
+import { digitWidth, type LaidDimension, layOutSection } from "../model/section-layout.ts";
 import { standoffSection } from "../model/standoff-section.ts";
 import type { WrittenHardware } from "../model/written.ts";
 
@@ -27,7 +27,7 @@ export function StandoffDrawing({
   });
   const words = laid.dimensions.map(({ number, label, text }) => `${number} ${label}${text === "" ? "" : `: ${text}`}`);
   return (
-    <figure className="border border-rule bg-paper p-2">
+    <figure className="top-0 z-10 border border-rule bg-paper p-2 md:sticky">
       <svg
         role="img"
         aria-label={`The standoff in section. ${words.join("; ")}.`}
@@ -52,6 +52,9 @@ export function StandoffDrawing({
           strokeDasharray="14 3 2 3"
           fill="none"
         />
+        {laid.dimensions.map(({ field, helpers }) => (
+          <HelperLines key={field} helpers={helpers} isActive={field === active} />
+        ))}
         {laid.dimensions.map((dimension) => (
           <DimensionMark key={dimension.field} dimension={dimension} isActive={dimension.field === active} />
         ))}
@@ -68,7 +71,7 @@ const fills: Readonly<Record<Matter, string>> = {
   panel: "fill-sheet",
   metal: "fill-rule",
   hollow: "fill-sheet",
-  screw: "fill-graphite",
+  screw: "fill-rule",
 };
 
 const isCut = (matter: Matter): boolean => matter === "wood" || matter === "panel" || matter === "metal";
@@ -85,26 +88,30 @@ function Hatching({ id, turn }: { readonly id: string; readonly turn: number }) 
 type Line = LaidDimension["line"];
 const endsOf = ({ from, to }: Line) => ({ x1: from.x, y1: from.y, x2: to.x, y2: to.y });
 
+/** Below all labels, so that none is crossed out. */
+function HelperLines({ helpers, isActive }: { readonly helpers: readonly Line[]; readonly isActive: boolean }) {
+  return helpers.map((helper) => (
+    <line
+      key={`${helper.from.x} ${helper.to.x}`}
+      {...endsOf(helper)}
+      className={isActive ? "stroke-indigo" : "stroke-graphite"}
+      strokeWidth={isActive ? 1.25 : 0.6}
+    />
+  ));
+}
+
 function DimensionMark({ dimension, isActive }: { readonly dimension: LaidDimension; readonly isActive: boolean }) {
-  const { number, text, line, helpers, balloon } = dimension;
+  const { number, text, line, balloon } = dimension;
   const stroke = isActive ? "stroke-indigo" : "stroke-graphite";
   return (
     <g strokeWidth={isActive ? 2 : 1}>
-      {helpers.map((helper) => (
-        <line
-          key={`${helper.from.x} ${helper.to.x}`}
-          {...endsOf(helper)}
-          className={stroke}
-          strokeWidth={isActive ? 1.25 : 0.6}
-        />
-      ))}
       <line {...endsOf(line)} className={stroke} />
       <Arrow at={line.from} away={line.to} isActive={isActive} />
       <Arrow at={line.to} away={line.from} isActive={isActive} />
       <rect
         x={balloon.x}
         y={balloon.y - 9}
-        width={text === "" ? 0 : 14 + text.length * 7.4}
+        width={text === "" ? 0 : 14 + text.length * digitWidth}
         height="18"
         className="fill-paper"
       />

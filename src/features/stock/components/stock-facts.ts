@@ -65,8 +65,8 @@ const quantityWords = (quantity: number | null): string =>
   quantity === null ? "not counted yet" : `${quantity} on hand`;
 
 function sheetWords({ thicknessMm, widthMm, heightMm, quantity }: SheetsOnHand, unit: LengthUnit): string {
-  const count = quantity === null ? "not counted" : quantity === 0 ? "none left" : `${quantity} on hand`;
-  return `${formatSize(widthMm, heightMm, unit)}, ${formatLengthWithUnit(thicknessMm, unit)} thick: ${count}`;
+  const count = quantity === null ? "not counted" : quantity === 0 ? "none left" : String(quantity);
+  return `${formatLengthWithUnit(thicknessMm, unit)}, ${formatSize(widthMm, heightMm, unit)}: ${count}`;
 }
 
 function screwWords({ head, diameter, length }: Screw, unit: LengthUnit): string {

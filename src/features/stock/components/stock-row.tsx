@@ -17,7 +17,7 @@ export function StockRow({
   const { colour, swatch, what, amount, more } = stockFacts(item, unit);
   return (
     <li className="flex flex-wrap items-start gap-x-4 gap-y-2 border-b border-rule py-2.5 lg:flex-nowrap">
-      {colour && <Swatch colour={colour} kind={swatch} />}
+      {colour ? <Swatch colour={colour} kind={swatch} /> : <span className="hidden w-10 shrink-0 sm:block" />}
       <div className="grid min-w-0 flex-1 gap-x-6 pt-0.5 sm:grid-cols-[minmax(0,1fr)_minmax(0,1.2fr)_minmax(0,1fr)]">
         <p className="font-semibold">{item.name}</p>
         <p className="text-sm text-graphite">{what}</p>
@@ -30,7 +30,7 @@ export function StockRow({
           ))}
         </div>
       </div>
-      {children && <div className="flex w-full flex-wrap gap-2 lg:w-auto lg:min-w-64 lg:justify-end">{children}</div>}
+      {children && <div className="flex w-full flex-wrap gap-2 lg:w-64 lg:shrink-0 lg:justify-end">{children}</div>}
     </li>
   );
 }

@@ -35,7 +35,7 @@ export function WoodFields({
       <div className="grid gap-4 sm:grid-cols-[minmax(0,1fr)_12rem]">
         <Select
           label="Species"
-          hint="Fills in gravity, movement, hardness and a usual colour as the Wood Handbook has them."
+          hint="Fills in gravity, movement and hardness from the Wood Handbook, and a usual colour."
           value={listed?.species ?? ""}
           onChange={(event) => handleSpecies(event.target.value, listed?.sawn ?? "flatsawn")}
         >
@@ -86,7 +86,7 @@ export function WoodFields({
         />
         <NumberField
           label="Movement across the grain"
-          suffix="% a point"
+          suffix="%"
           hint="For each point of moisture it gains or loses."
           value={percentOf(wood.movementPerPoint)}
           onChange={(percent) => change({ movementPerPoint: shareOf(percent) })}

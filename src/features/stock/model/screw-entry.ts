@@ -16,15 +16,23 @@ type Change = { readonly [K in keyof WrittenScrew]?: WrittenScrew[K] };
 export function changeScrew(before: WrittenScrew, change: Change, unit: LengthUnit): WrittenScrew {
   const after = { ...before, ...change };
   const byNumber = "gauge" in change && after.gauge !== null ? { diameter: woodScrewDiameterMm(after.gauge) } : {};
-  const head = ("gauge" in change || "head" in change) && after.head === "flat" ? headOf(after.gauge) : {};
+  const head = "gauge" in change || "head" in change ? headAfter(before, after) : {};
   const filled = { ...after, ...byNumber, ...head };
   const isOwnName = before.name !== "" && before.name !== usualName(before, unit);
   return "name" in change || isOwnName ? filled : { ...filled, name: usualName(filled, unit) };
 }
 
-function headOf(gauge: number | null): Pick<Screw, "headDiameter" | "headHeight"> | Record<string, never> {
-  const head = gauge === null ? null : flatHeadMm(gauge);
-  return head ? { headDiameter: head.diameter, headHeight: head.height } : {};
+/** The table's head for the new number; a head that was the table's for the old one goes with it. */
+function headAfter(before: WrittenScrew, after: WrittenScrew): Partial<WrittenScrew> {
+  const known = headOf(after);
+  if (known) return known;
+  const old = headOf(before);
+  return old && old.headDiameter === after.headDiameter ? { headDiameter: null, headHeight: null } : {};
+}
+
+function headOf({ gauge, head }: WrittenScrew): Pick<Screw, "headDiameter" | "headHeight"> | null {
+  const found = gauge === null || head !== "flat" ? null : flatHeadMm(gauge);
+  return found && { headDiameter: found.diameter, headHeight: found.height };
 }
 
 /** "No. 6 × 16, flat head"; empty while there is too little to name it by. */

@@ -33,7 +33,7 @@ const margin = 14;
 const rowHeight = 26;
 const balloonRadius = 10;
 /** Of a figure at 13 px, a little generously. */
-const digitWidth = 7.4;
+export const digitWidth = 8.2;
 const gap = 8;
 
 /** Places a section and its dimensions in a drawing of that width, so that no label lies on another. */

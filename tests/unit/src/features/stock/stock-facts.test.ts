@@ -51,17 +51,13 @@ describe("stockFacts", () => {
       swatch: "sheet",
       what: "mirror, cast, faces differ",
       amount: "3, 5, 12.7 mm",
-      more: [
-        "1220 × 610 mm, 3 mm thick: 2 on hand",
-        "610 × 610 mm, 5 mm thick: none left",
-        "610 × 305 mm, 12.7 mm thick: not counted",
-      ],
+      more: ["3 mm, 1220 × 610 mm: 2", "5 mm, 610 × 610 mm: none left", "12.7 mm, 610 × 305 mm: not counted"],
     });
   });
   it("says them in inches", () => {
     const { amount, more } = stockFacts(acrylic, "in");
     expect(amount).toBe("1/8″, 3/16″, 1/2″");
-    expect(more[0]).toBe("48 1/16″ × 24″, 1/8″ thick: 2 on hand");
+    expect(more[0]).toBe("1/8″, 48 1/16″ × 24″: 2");
   });
   it("says what a screw is and how many there are", () => {
     expect(stockFacts(screw, "mm")).toMatchObject({
