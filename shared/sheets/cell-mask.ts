@@ -7,6 +7,9 @@ export type CellMask = {
   readonly runColumns: Int16Array;
   readonly runStarts: Int16Array;
   readonly runEnds: Int16Array;
+  /** By column: its first touched row and the end of its last run; both 0 for a column that is not touched. */
+  readonly lows: Int16Array;
+  readonly highs: Int16Array;
 };
 
 /** The grid a mask is drawn on: the direction a sheet is filled along is u, the other v. */
@@ -22,21 +25,24 @@ const grazing = 1e-6;
 export function cellMask(region: Region, origin: { readonly x: number; readonly y: number }, cell: CellSize): CellMask {
   const spans = touchedSpans(region, origin, cell);
   const runs: { column: number; start: number; end: number }[] = [];
-  let rows = 0;
+  const lows = new Int16Array(spans.length);
+  const highs = new Int16Array(spans.length);
   for (const [column, list] of spans.entries()) {
-    for (const run of joinSpans(list)) {
-      runs.push({ column, ...run });
-      rows = Math.max(rows, run.end);
-    }
+    const joined = joinSpans(list);
+    for (const run of joined) runs.push({ column, ...run });
+    lows[column] = joined[0]?.start ?? 0;
+    highs[column] = joined.at(-1)?.end ?? 0;
   }
   // Long runs collide most, so they are asked first.
   runs.sort((a, b) => b.end - b.start - (a.end - a.start) || a.column - b.column || a.start - b.start);
   return {
     columns: spans.length,
-    rows,
+    rows: highs.reduce((most, end) => Math.max(most, end), 0),
     runColumns: Int16Array.from(runs, (run) => run.column),
     runStarts: Int16Array.from(runs, (run) => run.start),
     runEnds: Int16Array.from(runs, (run) => run.end),
+    lows,
+    highs,
   };
 }
 

@@ -1,8 +1,7 @@
 import { regionAreaMm2, regionPerimeterMm } from "../geometry/area.ts";
-import { boxOfPath } from "../geometry/box.ts";
 import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
-import type { Path, Region } from "../geometry/path.ts";
+import type { Path, Point, Region } from "../geometry/path.ts";
 import { lengthToleranceMm } from "../geometry/tolerance.ts";
 import { numberProblem } from "../units/number-problem.ts";
 import type { Range } from "../units/outcome.ts";
@@ -21,6 +20,8 @@ const offcutRange: Range = { least: 1, most: 20_000 };
 const turnRange: Range = { least: -360, most: 360 };
 const stepRange: Range = { least: 1, most: 360 };
 const quantityRange: Range = { least: 1, most: mostCopies };
+/** A kind of which there is none left may stay in the list. */
+const stockRange: Range = { least: 0, most: mostCopies };
 const effortRange: Range = { least: 0, most: 1000 };
 /** Farther than this from its origin nothing of a sign or a sheet lies, mm. */
 const reachMm = 100_000;
@@ -53,8 +54,7 @@ export function checkNumbers({ pieces, stock, rules, seed, effort }: NestingRequ
       });
   }
   for (const [index, { name, quantity, grainTurn }] of stock.entries()) {
-    if (quantity !== null)
-      count(`stock.${index}.quantity`, `The quantity of ${name}`, quantity, { least: 0, most: mostCopies });
+    if (quantity !== null) count(`stock.${index}.quantity`, `The quantity of ${name}`, quantity, stockRange);
     check(`stock.${index}.grainTurn`, `The grain of ${name}`, grainTurn, turnRange, "°");
   }
   const copies = pieces.reduce((sum, { quantity }) => sum + (Number.isFinite(quantity) ? quantity : 0), 0);
@@ -104,11 +104,13 @@ export function checkOutline(
   path: Path,
   kernel: Kernel,
 ): { readonly ok: true; readonly region: Region } | { readonly ok: false; readonly words: string } {
-  const points = path.flatMap(({ start, segments }) => [start, ...segments.map(({ to }) => to)]);
-  if (points.length === 0) return { ok: false, words: `${name} has no outline.` };
-  const box = boxOfPath(path);
-  const corners = box ? [box.x, box.y, box.x + box.width, box.y + box.height] : [];
-  if (!corners.every((value) => Math.abs(value) <= reachMm))
+  if (path.length === 0) return { ok: false, words: `${name} has no outline.` };
+  const isInReach = ({ x, y }: Point) => Math.abs(x) <= reachMm && Math.abs(y) <= reachMm;
+  const points = path.flatMap(({ start, segments }) => [
+    start,
+    ...segments.flatMap((segment) => (segment.kind === "line" ? [segment.to] : [segment.c1, segment.c2, segment.to])),
+  ]);
+  if (!points.every(isInReach))
     return { ok: false, words: `The outline of ${name} has points that are no numbers or lie too far out.` };
   const flat = flattenPath(path);
   const region = kernel.union(flat, "evenodd");

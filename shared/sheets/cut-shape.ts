@@ -32,8 +32,11 @@ export function cutShape(piece: SheetPiece, region: Region, halfGapMm: number, k
 }
 
 /** The shape in every way that is tried on a sheet with that grain, the wanted side first. */
-export function laidShapes(shape: CutShape, grainTurn: number): readonly LaidShape[] {
-  const turns = turnsToTry(shape.region, shape.piece.turns, grainTurn);
+export function laidShapes(
+  shape: CutShape,
+  options: { readonly grainTurn: number; readonly freeTurns: number },
+): readonly LaidShape[] {
+  const turns = turnsToTry(shape.region, shape.piece.turns, options);
   const sides = shape.piece.mayMirror ? [false, true] : [false];
   return sides.flatMap((mirrored) => turns.map((turn) => layShape(shape, turn, mirrored)));
 }

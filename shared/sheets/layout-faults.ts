@@ -1,4 +1,3 @@
-import { regionAreaMm2 } from "../geometry/area.ts";
 import { boxContains, boxesOverlap, boxGrow } from "../geometry/box.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Box, Region } from "../geometry/path.ts";
@@ -9,8 +8,6 @@ import type { SheetField } from "./sheet-field.ts";
 
 /** What the kernel's grid of 0.001 mm and its flattened arcs may take from a gap, mm. */
 const slackMm = 0.005;
-/** Overlaps smaller than this are rounding, mm². */
-const leastOverlapMm2 = 0.001;
 
 /**
  * The copies of one field that must not stay: those that reach over its margin, and of two that are nearer than the gap
@@ -26,7 +23,7 @@ export function layoutFaults(
   const within = field.allowed ? kernel.offset(field.region, slackMm - marginMm, "round") : null;
   const grown = new Map<LaidShape, Region>();
   const grownOf = (laid: LaidShape): Region => {
-    const known = grown.get(laid) ?? kernel.offset(laid.region, Math.max(0, gapMm - slackMm), "round");
+    const known = grown.get(laid) ?? kernel.offset(laid.region, gapMm - slackMm, "round");
     grown.set(laid, known);
     return known;
   };
@@ -35,8 +32,7 @@ export function layoutFaults(
     .sort((a, b) => a.box.x - b.box.x || a.copy.item.index - b.copy.item.index);
   for (const { copy, box } of bodies) {
     if (!boxContains(boxGrow(field.inner, slackMm), box)) faults.add(copy);
-    else if (within && regionAreaMm2(kernel.difference(onSheet(copy, copy.laid.region), within)) > leastOverlapMm2)
-      faults.add(copy);
+    else if (within && kernel.difference(onSheet(copy, copy.laid.region), within).length > 0) faults.add(copy);
   }
   for (const [index, one] of bodies.entries()) {
     const reach = boxGrow(one.box, gapMm);
@@ -46,8 +42,7 @@ export function layoutFaults(
       if (!other || other.box.x >= reach.x + reach.width) break;
       if (faults.has(one.copy) || faults.has(other.copy) || !boxesOverlap(reach, other.box)) continue;
       const overlap = kernel.intersect(region, onSheet(other.copy, other.copy.laid.region));
-      if (regionAreaMm2(overlap) > leastOverlapMm2)
-        faults.add(one.copy.item.index > other.copy.item.index ? one.copy : other.copy);
+      if (overlap.length > 0) faults.add(one.copy.item.index > other.copy.item.index ? one.copy : other.copy);
     }
   }
   return faults;

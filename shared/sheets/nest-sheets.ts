@@ -1,5 +1,6 @@
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Region } from "../geometry/path.ts";
+import { smallestBox } from "../geometry/smallest-box.ts";
 import { checkNumbers, checkOutline, type NestingProblem } from "./check-nesting.ts";
 import { areaOf, chooseSheets, type SheetKind } from "./choose-sheets.ts";
 import { type CutShape, cutShape } from "./cut-shape.ts";
@@ -42,13 +43,15 @@ export function nestSheets(request: NestingRequest, control: NestingControl, ker
 
   const chosen = chooseSheets(toLay, kinds, shapes, filler, { seed: request.seed, shouldStop });
   const { open } = chosen;
-  const searched = filler.fill(toLay, open, {
-    probes: request.effort * filler.probesPerSecond,
-    seed: request.seed,
-    shouldStop,
-    onProgress: (done, best) => control.onProgress?.({ done, ...progressOf(best, open, shapes) }),
-  });
-  const filling = better(searched, chosen.filling, open, shapes);
+  const search = (): Filling =>
+    filler.fill(toLay, open, {
+      probes: request.effort * filler.probesPerSecond,
+      seed: request.seed,
+      shouldStop,
+      onProgress: (done, best) => control.onProgress?.({ done, ...progressOf(best, open, shapes) }),
+    });
+  const isOver = request.effort === 0 || shouldStop();
+  const filling = isOver ? chosen.filling : better(search(), chosen.filling, open, shapes);
   const { sheets, laid, faulty } = nestedSheets(filling, open, shapes, rules, kernel);
   const consumed = consumedMm2(laid, open);
   return {
@@ -99,14 +102,25 @@ function readRequest(request: NestingRequest, kernel: Kernel): ReadRequest {
   return problems.length > 0 ? { ok: false, problems } : { ok: true, kinds, regions, remarks };
 }
 
-/** Rectangles on rectangles have a way of their own, which is exact and quicker. */
+/**
+ * Rectangles on rectangles have a way of their own, which is exact and quicker. It lays them along the sheet's sides; one
+ * that may be turned freely and fits only aslant needs the other.
+ */
 function fillerFor(shapes: readonly CutShape[], kinds: readonly SheetKind[], gapMm: number, kernel: Kernel): Filler {
   const isAllRectangles = kinds.every(
     ({ stock, fields }) =>
       fields.every(({ allowed }) => allowed === null) &&
       shapes.every((shape) => sidesAlongAxes(shape, stock.grainTurn).length > 0),
   );
-  return isAllRectangles ? rectangleFiller(shapes, gapMm) : shapeFiller(shapes, gapMm / 2, kernel);
+  if (!isAllRectangles) return shapeFiller(shapes, gapMm / 2, kernel);
+  const straight = rectangleFiller(shapes, gapMm);
+  const fields = kinds.flatMap((kind) => kind.fields);
+  const mayFitAslant = shapes.some(({ piece, region }, shape) => {
+    if (piece.turns.kind !== "free" || fields.some((field) => straight.fits(shape, field))) return false;
+    const length = smallestBox(region)?.length ?? 0;
+    return fields.some(({ inner }) => length < Math.hypot(inner.width, inner.height));
+  });
+  return mayFitAslant ? shapeFiller(shapes, gapMm / 2, kernel) : straight;
 }
 
 function itemsOf(shapes: readonly CutShape[]): Item[] {

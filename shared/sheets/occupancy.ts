@@ -28,23 +28,26 @@ export function stamp(grid: Occupancy, mask: CellMask, column: number, row: numb
     const base = (column + (mask.runColumns[run] ?? 0)) * grid.rows + row;
     grid.taken.fill(value, base + (mask.runStarts[run] ?? 0), base + (mask.runEnds[run] ?? 0));
   }
-  refreshJumps(grid, column, Math.min(grid.columns, column + mask.columns));
+  for (let at = 0; at < mask.columns; at++)
+    refreshJumps(grid, column + at, row + (mask.lows[at] ?? 0), row + (mask.highs[at] ?? 0));
 }
 
-/** Works the jumps of the columns from `from` up to but not including `to` out again. Changes the grid. */
-export function refreshJumps(grid: Occupancy, from: number, to: number): void {
-  const { rows, taken, jumps } = grid;
-  for (let column = from; column < to; column++) {
-    const base = column * rows;
-    let nextTaken = rows;
-    let runEnd = rows;
-    for (let row = rows - 1; row >= 0; row--) {
-      if (taken[base + row] === 1) {
-        if (nextTaken !== row + 1) runEnd = row + 1;
-        nextTaken = row;
-        jumps[base + row] = -runEnd;
-      } else jumps[base + row] = nextTaken;
+/** Works the jumps of a column out again after its cells changed from row `low` up to but not including `high`. Changes the grid. */
+export function refreshJumps({ rows, taken, jumps }: Occupancy, column: number, low: number, high: number): void {
+  const base = column * rows;
+  const above = high < rows ? (jumps[base + high] ?? rows) : rows;
+  let nextTaken = above < 0 ? high : above;
+  let runEnd = above < 0 ? -above : rows;
+  for (let row = high - 1; row >= 0; row--) {
+    let jump = nextTaken;
+    if (taken[base + row] === 1) {
+      if (nextTaken !== row + 1) runEnd = row + 1;
+      nextTaken = row;
+      jump = -runEnd;
     }
+    // Below the change, a cell whose jump stays leaves those before it as they are.
+    if (row < low && jumps[base + row] === jump) return;
+    jumps[base + row] = jump;
   }
 }
 

@@ -2,13 +2,24 @@ import type { Region } from "../geometry/path.ts";
 import { smallestBox } from "../geometry/smallest-box.ts";
 import type { AllowedTurns } from "./nesting.ts";
 
-/** Turns tried of a piece that may be turned freely: this many, evenly spaced from the turn at which its box is smallest. */
-const freeTurns = 16;
+/** How many turns of a piece that may be turned freely are tried: fewer where there are many pieces to choose from. */
+export function freeTurnsFor(pieces: number): number {
+  if (pieces <= 200) return 16;
+  return pieces <= 800 ? 8 : 4;
+}
+
 /** Of a piece that may be turned in steps no more than these are tried. */
 const mostTurns = 72;
 
-/** The turns of a piece that are tried on a sheet, in degrees from 0 up to 360, none twice. */
-export function turnsToTry(region: Region, allowed: AllowedTurns, grainTurn: number): readonly number[] {
+/**
+ * The turns of a piece that are tried on a sheet, in degrees from 0 up to 360, none twice. Those of a piece that may be
+ * turned freely are spaced evenly from the turn at which its box is smallest.
+ */
+export function turnsToTry(
+  region: Region,
+  allowed: AllowedTurns,
+  { grainTurn, freeTurns }: { readonly grainTurn: number; readonly freeTurns: number },
+): readonly number[] {
   if (allowed.kind === "free") {
     const along = smallestBox(region)?.turn ?? 0;
     return Array.from({ length: freeTurns }, (_, index) => wholeTurn((index * 360) / freeTurns - along));

@@ -35,6 +35,13 @@ export function fillRoom(
   const steps: Step[] = [{ v: 0, wide: room.wide, u: 0 }];
   const laid: LaidRectangle[] = [];
   const seen = new Int32Array(waysOf.length).fill(-1);
+  const copies = new Int32Array(waysOf.length);
+  let kindsLeft = 0;
+  for (const rectangle of order) {
+    const kind = kinds[rectangle] ?? 0;
+    if (copies[kind] === 0) kindsLeft++;
+    copies[kind] = (copies[kind] ?? 0) + 1;
+  }
   let turn = 0;
   while (order.length > 0) {
     const at = lowestStep(steps);
@@ -46,11 +53,14 @@ export function fillRoom(
     let bestPlace = -1;
     let bestWay: RectangleWay | null = null;
     turn++;
-    for (let place = 0; place < order.length && best < mostFitting; place++) {
+    let kindsSeen = 0;
+    let place = 0;
+    for (; place < order.length && best < mostFitting && kindsSeen < kindsLeft; place++) {
       const rectangle = order[place] ?? 0;
       const kind = kinds[rectangle] ?? 0;
       if (seen[kind] === turn) continue;
       seen[kind] = turn;
+      kindsSeen++;
       for (const way of waysOf[kind] ?? []) {
         meter.probes++;
         if (way.wide > step.wide + hair || step.u + way.long > room.long + hair) continue;
@@ -62,11 +72,16 @@ export function fillRoom(
         }
       }
     }
+    // Passing over copies of a kind that was seen costs something too.
+    meter.probes += place >> 3;
     if (!bestWay) {
       if (!raise(steps, at)) break;
       continue;
     }
     const [rectangle = 0] = order.splice(bestPlace, 1);
+    const kind = kinds[rectangle] ?? 0;
+    copies[kind] = (copies[kind] ?? 0) - 1;
+    if (copies[kind] === 0) kindsLeft--;
     const toRight = standsRight(bestWay, step.wide, left, right);
     const v = toRight ? step.v + step.wide - bestWay.wide : step.v;
     laid.push({ rectangle, way: bestWay, u: step.u, v });

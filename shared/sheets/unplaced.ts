@@ -52,11 +52,10 @@ function reasonWords(reason: UnplacedReason, shape: CutShape, copies: number, fi
 
 /** The smallest box that the piece has in the turns it may take. */
 function sizeOf(shape: CutShape): string {
-  const boxes = turnsToTry(shape.region, shape.piece.turns, 0).map((turn) => layShape(shape, turn, false).box);
-  const box = boxes.reduce(
-    (a, b) => (b.width * b.height < a.width * a.height ? b : a),
-    boxes[0] ?? nothing,
+  const boxes = turnsToTry(shape.region, shape.piece.turns, { grainTurn: 0, freeTurns: 16 }).map(
+    (turn) => layShape(shape, turn, false).box,
   );
+  const box = boxes.reduce((a, b) => (b.width * b.height < a.width * a.height ? b : a), boxes[0] ?? nothing);
   return formatSize(Math.max(box.width, box.height), Math.min(box.width, box.height), "mm");
 }
 

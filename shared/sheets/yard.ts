@@ -5,6 +5,7 @@ import { type CellMask, type CellSize, cellMask } from "./cell-mask.ts";
 import { type CutShape, type LaidShape, laidShapes } from "./cut-shape.ts";
 import type { Item } from "./filler.ts";
 import { emptyOccupancy, findPlace, type Occupancy, refreshJumps, stamp, type WorkMeter } from "./occupancy.ts";
+import { freeTurnsFor } from "./outline-turns.ts";
 import type { SheetField } from "./sheet-field.ts";
 
 /** A shape in one of its ways on a kind of field. */
@@ -67,13 +68,20 @@ export function groundOf(
   const origin = { x: inner.x - padMm, y: inner.y - padMm };
   const empty = emptyOccupancy(columns, rows);
   if (field.allowed) blockOutside(empty, field.allowed, origin, { width, height }, cell, kernel);
+  const freeTurns = freeTurnsFor(shapes.length);
   let wayCount = 0;
   const ways = shapes.map((shape) =>
-    laidShapes(shape, field.stock.grainTurn)
+    laidShapes(shape, { grainTurn: field.stock.grainTurn, freeTurns })
       .filter(({ box }) => box.width <= inner.width + fitMm && box.height <= inner.height + fitMm)
       .map((laid): Way => {
-        const mask = cellMask(laid.grown, { x: laid.box.x - padMm, y: laid.box.y - padMm }, cell);
+        const touched = cellMask(laid.grown, { x: laid.box.x - padMm, y: laid.box.y - padMm }, cell);
         const [longMm, wideMm] = along === "x" ? [laid.box.width, laid.box.height] : [laid.box.height, laid.box.width];
+        // The grown outline reaches less than the pad over the piece; counted in full, the piece ends inside the margin.
+        const mask = {
+          ...touched,
+          columns: Math.max(touched.columns, Math.ceil((longMm + 2 * padMm) / cell.u - fitMm)),
+          rows: Math.max(touched.rows, Math.ceil((wideMm + 2 * padMm) / cell.v - fitMm)),
+        };
         return { index: wayCount++, laid, mask, long: longMm, wide: wideMm };
       }),
   );
@@ -111,7 +119,7 @@ function blockOutside(
     const end = Math.min(grid.rows, mask.runEnds[run] ?? 0);
     grid.taken.fill(1, column * grid.rows + (mask.runStarts[run] ?? 0), column * grid.rows + end);
   }
-  refreshJumps(grid, 0, grid.columns);
+  for (let column = 0; column < grid.columns; column++) refreshJumps(grid, column, 0, grid.rows);
 }
 
 export function openBin(ground: Ground, sheet: number): Bin {
