@@ -9,8 +9,8 @@ import { type ThinPlace, thinPlaces } from "../stack/thin-places.ts";
 
 /** A corner loses half its width over less than this many limits of length: it is as steep as 14° (our choice). */
 const cornerLimits = 4;
-/** What is left of a corner at half the limit, of its area: a quarter, where a slot keeps all or nothing. */
-const cornerLeft = { least: 0.03, most: 0.5 } as const;
+/** Up to this share of a corner's length is narrower than a quarter of the limit; of a slot all or nothing is. */
+const mostCornerLeft = 0.75;
 
 /**
  * The narrowest gap inside a region or between its parts, in mm to 0.02, looked for up to `limitMm`, with its place; null
@@ -29,18 +29,19 @@ export function narrowGap(
   const air = kernel.difference(around, region);
   const places = thinPlaces(air, limitMm, kernel);
   if (places.length === 0) return null;
-  const halfway = thinPlaces(air, limitMm / 2, kernel);
-  const gaps = places.filter((place) => !isCorner(place, halfway, limitMm, kernel));
+  const narrow = thinPlaces(air, limitMm / 4, kernel);
+  const gaps = places.filter((place) => !isCorner(place, narrow, limitMm, kernel));
   return narrowestOf(gaps, air, limitMm, kernel);
 }
 
-function isCorner(place: ThinPlace, halfway: readonly ThinPlace[], limitMm: number, kernel: Kernel): boolean {
-  const length = smallestBox(place.region)?.length ?? 0;
+function isCorner(place: ThinPlace, narrow: readonly ThinPlace[], limitMm: number, kernel: Kernel): boolean {
+  const length = lengthOf(place);
   if (length >= cornerLimits * limitMm) return false;
-  const left =
-    halfway.reduce((area, other) => area + sharedArea(place, other, kernel), 0) / regionAreaMm2(place.region);
-  return left > cornerLeft.least && left < cornerLeft.most;
+  const left = narrow.filter((other) => sharedArea(place, other, kernel) > 0).map(lengthOf);
+  return left.length > 0 && Math.max(...left) < mostCornerLeft * length;
 }
+
+const lengthOf = ({ region }: ThinPlace): number => smallestBox(region)?.length ?? 0;
 
 function sharedArea(one: ThinPlace, other: ThinPlace, kernel: Kernel): number {
   const [a, b] = [boxOfRegion(one.region), boxOfRegion(other.region)];

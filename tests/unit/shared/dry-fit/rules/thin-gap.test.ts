@@ -51,6 +51,17 @@ describe("a notch that comes to a point", () => {
     expect(await findingsOf(thinGap, signOf(notched(4, 11.34)))).toEqual([]);
   });
 
+  it("is a corner at 30° too, where the mitre takes most of it", async () => {
+    expect(await findingsOf(thinGap, signOf(notched(8, 14.93)))).toEqual([]);
+  });
+
+  it("is a gap when it is a short slit", async () => {
+    expect(await findingsOf(thinGap, signOf(slotted(0.2)))).toHaveLength(1);
+    const slit = rectanglePath({ x: -20, y: -20, width: 40, height: 40 });
+    const inside = rectanglePath({ x: -2, y: 0, width: 4, height: 0.3 });
+    expect(await findingsOf(thinGap, signOf([...slit, ...inside]))).toHaveLength(1);
+  });
+
   it("is a gap when it does not: 6° are under 1.5 mm for 14.3 mm", async () => {
     expect(await findingsOf(thinGap, signOf(notched(2, 19.08)))).toMatchObject([{ severity: "caution" }]);
   });
