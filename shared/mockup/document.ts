@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { type capStudSchema, hardwareSchema } from "./hardware-schemas.ts";
-import { colour, coordinate, id, length, longestMm, name, pathSchema, point } from "./schema-parts.ts";
+import { colour, coordinate, id, leastBoardMm, length, longestMm, name, pathSchema, point } from "./schema-parts.ts";
 import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema } from "./stock-schemas.ts";
 
 /**
@@ -10,8 +10,6 @@ import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema
  */
 export const documentVersion = 3;
 
-/** Nothing smaller is a board: figures and shadows of one have no meaning. */
-export const leastBoardMm = 20;
 const boardSide = length.min(leastBoardMm, `A board is at least ${leastBoardMm} mm wide and high.`);
 const key = z.string().regex(/^[A-Z]{1,2}$/, "A layer's key is one or two capital letters.");
 

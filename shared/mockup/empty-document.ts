@@ -1,4 +1,5 @@
 import { documentVersion, type MockupDocument, type Wood } from "./document.ts";
+import { leastBoardMm } from "./schema-parts.ts";
 
 /**
  * A document with a plain board and nothing on it. Size in mm, as the brief states it or 600 by 400; light from the
@@ -17,8 +18,8 @@ export function emptyDocument(options: {
     version: documentVersion,
     board: {
       outline: { kind: "rectangle" },
-      width: options.widthMm ?? 600,
-      height: options.heightMm ?? 400,
+      width: Math.max(leastBoardMm, options.widthMm ?? 600),
+      height: Math.max(leastBoardMm, options.heightMm ?? 400),
       measures: "overall",
     },
     hanging: { kind: "none", gap: 0, pose: "upright", carriesKg: null, points: [] },

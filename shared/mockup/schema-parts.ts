@@ -3,6 +3,9 @@ import { z } from "zod";
 /** Largest sign, piece or offset we take, mm. Beyond it figures mean nothing and the canvas can't show them. */
 export const longestMm = 10_000;
 
+/** Least side of a board, mm: figures and shadows of a smaller one have no meaning. */
+export const leastBoardMm = 20;
+
 export const length = z.number().finite().positive().max(longestMm);
 export const coordinate = z.number().finite().min(-longestMm).max(longestMm);
 export const id = z.string().min(1).max(64);

@@ -1,3 +1,4 @@
+import { leastBoardMm } from "./schema-parts.ts";
 import type { UpgradeStep } from "./upgrade.ts";
 
 type Json = Readonly<Record<string, unknown>>;
@@ -13,7 +14,7 @@ export const upgradeFrom1: UpgradeStep = (old) => {
   const finish = typeof backer.finish === "string" ? backer.finish.trim() : "";
   return {
     ...old,
-    board: { ...board, outline: { kind: "rectangle" } },
+    board: { ...board, width: boardSide(board.width), height: boardSide(board.height), outline: { kind: "rectangle" } },
     hanging: { ...hanging, pose: "upright", carriesKg: null, points: [] },
     backer: {
       ...backer,
@@ -30,6 +31,9 @@ export const upgradeFrom1: UpgradeStep = (old) => {
     })),
   };
 };
+
+/** Version 1 took boards of any size; one too small to mean anything becomes the least there is. */
+const boardSide = (side: unknown): unknown => (typeof side === "number" ? Math.max(leastBoardMm, side) : side);
 
 /** Version 1 took the most of the usual softwoods and hardwoods, flatsawn (Wood Handbook, table 13-5). */
 export function upgradeWood(wood: Json): Json {

@@ -40,7 +40,7 @@ describe("a mockup", () => {
 
   it("opens for the largest and the smallest brief there may be", async () => {
     const largest = { widthMm: 10_000, heightMm: 10_000, viewingDistanceMm: 200_000, quantity: 1000 };
-    const smallest = { widthMm: 0.001, heightMm: 0.001, viewingDistanceMm: 0.001, quantity: 1 };
+    const smallest = { widthMm: 20, heightMm: 20, viewingDistanceMm: 0.001, quantity: 1 };
     for (const brief of [largest, smallest]) {
       const own = await buildJob(world, { brief });
       const { document } = await own.visitors.maker.get(getMockup, { params: of(own) });

@@ -1,7 +1,6 @@
 import type { Coat, MockupDocument, Wood } from "#shared/mockup/document.ts";
-import { leastBoardMm } from "#shared/mockup/document.ts";
 
-import { longestMm } from "#shared/mockup/schema-parts.ts";
+import { leastBoardMm, longestMm } from "#shared/mockup/schema-parts.ts";
 import { lengthOf } from "../limits.ts";
 import { withFields } from "../same.ts";
 import { movePieces } from "./pieces.ts";
