@@ -1,6 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { z } from "zod";
 import { type CuttingJob, squareEnd } from "#shared/stock-lengths/cutting-job.ts";
+import { packInOrder } from "#shared/stock-lengths/first-fit.ts";
+import { packingOfJob } from "#shared/stock-lengths/packing-of-job.ts";
 import { planCutting } from "#shared/stock-lengths/plan-cutting.ts";
 import { faultsOfPlan } from "../support/check-cuts.ts";
 import { checkReference } from "../support/check-reference.ts";
@@ -60,6 +62,18 @@ describe("bin packing with published optima", () => {
     });
     expect(plan).toMatchObject({ leastCost: data.optimum_bins, gap: 0, ended: "proved" });
     expect(faultsOfPlan(job, plan)).toEqual([]);
+  });
+
+  it.each(["bpp-t60_00.json", "bpp-u120_00.json", "bpp-N1C1W1_A.json"])("%s by first fit decreasing alone", (file) => {
+    const data = bins.parse(referenceJson(file));
+    const { packing } = packingOfJob(
+      plainJob(
+        data.bin_size,
+        data.items.map((size) => [size, 1]),
+      ),
+    );
+    // 23, 49 and 25: calculated with another program.
+    expect(packInOrder(packing, [0], "first")?.cost).toBe(data.first_fit_decreasing);
   });
 
   it("cuts 219 rolls from 73 of 5600 mm, and wastes 1640 mm", () => {

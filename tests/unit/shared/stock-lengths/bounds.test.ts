@@ -215,6 +215,19 @@ describe("filling one bar", () => {
 });
 
 describe("packings", () => {
+  it("found quickly are the cheapest of those tried", () => {
+    // Two pieces on one bar for 10, or one each on two bars for 9.
+    const bars = [
+      { room: 60, cost: 9, onHand: null },
+      { room: 100, cost: 10, onHand: null },
+    ];
+    const packing = { items: [{ size: 50, demand: 2, family: null }], setups: [], bars };
+    expect(packQuickly(packing)).toEqual({
+      cost: 10,
+      uses: [{ pattern: { bar: 1, shares: [{ item: 0, count: 2 }] }, times: 1 }],
+    });
+  });
+
   it("are sound however they are found, and the search bar by bar finds the best and proves it", () => {
     fc.assert(
       fc.property(anyPacking, (packing) => {

@@ -66,6 +66,8 @@ describe("what a bar holds", () => {
     const square = part("a", 327, { quantity: 3 });
     expect(planOf(buildJob({ parts: [square] })).barCount).toBe(1);
     expect(planOf(buildJob({ parts: [{ ...square, ...slant("left") }] })).barCount).toBe(2);
+    // With one end square and one at 45 the flatter cut counts.
+    expect(planOf(buildJob({ parts: [{ ...square, end: slant("left").end }] })).barCount).toBe(2);
   });
 
   it("knots take their share", () => {
