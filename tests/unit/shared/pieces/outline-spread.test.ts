@@ -28,6 +28,19 @@ it.each([
   expect(spreadsAreWithin(spreadOfRegion(side(10)), spreadOfRegion(side(half)), Math.SQRT2)).toBe(within);
 });
 
+it("a triangle is within nothing of the one that points the other way only when that is turned", () => {
+  const triangle = [
+    { x: -10, y: -8 },
+    { x: 10, y: -8 },
+    { x: 0, y: 8 },
+  ];
+  const up = spreadOfRegion([triangle]);
+  const down = spreadOfRegion([triangle.map(({ x, y }) => ({ x: -x, y: -y }))]);
+  expect(spreadsAreWithin(up, down, 0.001, true)).toBe(true);
+  expect(spreadsAreWithin(up, down, 3)).toBe(false);
+  expect(spreadsAreWithin(up, up, 3, true)).toBe(false);
+});
+
 it("outlines that lie within a distance of each other never differ more in their spread, turned or not", async () => {
   const kernel = await loadKernel();
   const corner = fc.record({ x: fc.integer({ min: -30, max: 30 }), y: fc.integer({ min: -30, max: 30 }) });
