@@ -15,11 +15,15 @@ import { StandoffDrawing } from "./standoff-drawing.tsx";
 
 type Entry = WrittenOf<"hardware">;
 
-const kinds: readonly { readonly kind: Hardware["kind"]; readonly label: string }[] = [
-  { kind: "capStud", label: "Barrel with a cap: the barrel is screwed down, the cap's stud passes the panel" },
-  { kind: "throughScrew", label: "Loose spacer: one screw passes panel and spacer" },
-  { kind: "blindStud", label: "Hidden stud: in the panel's back, nothing seen" },
-  { kind: "edgeGrip", label: "Edge grip: a slot takes the panel's edge" },
+const kinds: readonly { readonly kind: Hardware["kind"]; readonly label: string; readonly hint: string }[] = [
+  {
+    kind: "capStud",
+    label: "Barrel with a cap",
+    hint: "The barrel is screwed down; the cap's stud passes the panel into it.",
+  },
+  { kind: "throughScrew", label: "Loose spacer", hint: "One wood screw passes the panel and the spacer." },
+  { kind: "blindStud", label: "Hidden stud", hint: "A stud in the panel's back goes into the wood; nothing is seen." },
+  { kind: "edgeGrip", label: "Edge grip", hint: "A holder is screwed down and takes the panel's edge in its slot." },
 ];
 
 export function HardwareFields({
@@ -43,6 +47,7 @@ export function HardwareFields({
     <>
       <Select
         label="Kind of standoff"
+        hint={kinds.find(({ kind }) => kind === hardware.kind)?.hint}
         value={hardware.kind}
         onChange={(event) => set(asKind(hardware, event.target.value as Hardware["kind"]))}
       >
@@ -52,19 +57,27 @@ export function HardwareFields({
           </option>
         ))}
       </Select>
-      <StandoffDrawing hardware={hardware} unit={unit} active={active} />
-      <KindParts hardware={hardware} faults={faults} onChange={set} />
-      <MeasureFields unit={unit} hardware={hardware} faults={faults} onActive={setActive} onChange={set} />
-      {hardware.kind !== "blindStud" && (
-        <ScrewChoice
-          unit={unit}
-          screws={screws}
-          screw={hardware.screw}
-          faults={faults}
-          onChange={(screw) => set({ ...hardware, screw })}
-        />
-      )}
-      <div className="grid gap-4 sm:grid-cols-2">
+      <div className="grid gap-x-6 gap-y-4 md:grid-cols-[22rem_minmax(0,1fr)]">
+        <div>
+          <div className="md:sticky md:top-0">
+            <StandoffDrawing hardware={hardware} unit={unit} active={active} />
+          </div>
+        </div>
+        <div className="space-y-4">
+          <KindParts hardware={hardware} faults={faults} onChange={set} />
+          <MeasureFields unit={unit} hardware={hardware} faults={faults} onActive={setActive} onChange={set} />
+          {hardware.kind !== "blindStud" && (
+            <ScrewChoice
+              unit={unit}
+              screws={screws}
+              screw={hardware.screw}
+              faults={faults}
+              onChange={(screw) => set({ ...hardware, screw })}
+            />
+          )}
+        </div>
+      </div>
+      <div className="grid gap-4 sm:grid-cols-3">
         <Field
           label="Name"
           hint="As the shop says it."

@@ -21,7 +21,7 @@ export function MeasureFields({
   return (
     <fieldset className="min-w-0">
       <legend className="sr-only">Measures, by their numbers on the drawing</legend>
-      <div className="grid grid-cols-2 gap-x-3 gap-y-4 sm:gap-x-4 md:grid-cols-3">
+      <div className="grid grid-cols-2 gap-x-3 gap-y-4 sm:gap-x-4">
         {measuresOf(hardware).map(({ field, label, hint, number }) => (
           <LengthField
             key={field}

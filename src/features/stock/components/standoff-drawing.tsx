@@ -1,11 +1,13 @@
 import { useId } from "react";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { cx } from "@/lib/cx.ts";
-import { useMedia } from "@/lib/use-media.ts";
 import type { Matter } from "../model/section-bodies.ts";
 import { digitWidth, type LaidDimension, layOutSection } from "../model/section-layout.ts";
 import { standoffSection } from "../model/standoff-section.ts";
 import type { WrittenHardware } from "../model/written.ts";
+
+/** px, as much as a phone has; where there is more the drawing is enlarged. */
+const drawingWidth = 300;
 
 /** Each measure of the form at its place: the standoff cut along its axis, wood to the left and the viewer to the right. */
 export function StandoffDrawing({
@@ -18,21 +20,20 @@ export function StandoffDrawing({
   /** The field that is being written. */
   readonly active: string | null;
 }) {
-  const isWide = useMedia("(min-width: 48rem)");
   const id = useId();
   const laid = layOutSection(standoffSection(hardware), {
-    width: isWide ? 660 : 300,
-    tallest: isWide ? 190 : 130,
+    width: drawingWidth,
+    tallest: 150,
     unit,
   });
   const words = laid.dimensions.map(({ number, label, text }) => `${number} ${label}${text === "" ? "" : `: ${text}`}`);
   return (
-    <figure className="top-0 z-10 border border-rule bg-paper p-2 md:sticky">
+    <figure className="border border-rule bg-paper p-2">
       <svg
         role="img"
         aria-label={`The standoff in section. ${words.join("; ")}.`}
         viewBox={`0 0 ${laid.width} ${laid.height}`}
-        className="mx-auto block w-full max-w-[41.25rem]"
+        className="mx-auto block w-full max-w-96"
       >
         <defs>
           <Hatching id={`${id}-metal`} turn={45} />

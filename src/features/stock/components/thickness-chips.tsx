@@ -21,24 +21,40 @@ export function ThicknessChips({
   const there = values.filter((mm) => mm !== null);
   const focusField = () => fieldset.current?.querySelector("input")?.focus();
 
-  function handleAdd() {
-    if (next !== null && Number.isFinite(next)) {
-      if (!there.includes(next)) onChange([...there, next].toSorted((a, b) => a - b));
-      setNext(null);
-    }
-    focusField();
+  /** What was typed counts as soon as it is left, so that saving does not lose it. */
+  function takeIn() {
+    if (next === null || !Number.isFinite(next)) return;
+    if (!there.includes(next)) onChange([...there, next].toSorted((a, b) => a - b));
+    setNext(null);
   }
   function handleEnter(event: KeyboardEvent) {
     // Enter adds the thickness; the form is sent by its button.
     if (event.key !== "Enter" || !(event.target instanceof HTMLInputElement)) return;
     event.preventDefault();
-    handleAdd();
+    takeIn();
   }
   return (
     <fieldset ref={fieldset} onKeyDown={handleEnter} className="min-w-0">
       <legend className="mb-1 font-sans text-sm font-semibold text-ink">Thicknesses in stock</legend>
-      {there.length > 0 && (
-        <ul className="mb-2 flex flex-wrap gap-2">
+      <div className="flex items-start gap-2">
+        <div className="w-52">
+          <LengthField
+            label={there.length === 0 ? "Thickness" : "Another thickness"}
+            unit={unit}
+            value={next}
+            onChange={setNext}
+            onBlur={takeIn}
+            fine
+            error={error}
+          />
+        </div>
+        <Button onClick={focusField} className="mt-6">
+          Add it
+        </Button>
+      </div>
+      {/* Room for the first row is kept, so that nothing moves from under the pointer when a thickness is taken in. */}
+      <div className="mt-2 min-h-11">
+        <ul className="flex flex-wrap gap-2">
           {there.map((mm) => {
             const words = formatLengthWithUnit(mm, unit);
             return (
@@ -61,14 +77,6 @@ export function ThicknessChips({
             );
           })}
         </ul>
-      )}
-      <div className="flex items-start gap-2">
-        <div className="w-44">
-          <LengthField label="Another thickness" unit={unit} value={next} onChange={setNext} fine error={error} />
-        </div>
-        <Button onClick={handleAdd} className="mt-6">
-          Add it
-        </Button>
       </div>
     </fieldset>
   );

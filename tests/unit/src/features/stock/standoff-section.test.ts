@@ -8,9 +8,9 @@ import { standoffSection } from "@/features/stock/model/standoff-section.ts";
 
 const kinds: readonly Hardware["kind"][] = ["capStud", "throughScrew", "blindStud", "edgeGrip"];
 const rooms = [
-  { width: 660, tallest: 190, unit: "mm" },
-  { width: 300, tallest: 130, unit: "mm" },
-  { width: 300, tallest: 130, unit: "in" },
+  { width: 300, tallest: 150, unit: "mm" },
+  { width: 300, tallest: 150, unit: "in" },
+  { width: 600, tallest: 200, unit: "mm" },
 ] as const;
 
 /** What balloon and figure of a dimension cover. */
@@ -64,7 +64,7 @@ describe("a standoff that is being written", () => {
     ({ kind, mm }) => {
       const blank = blankHardware(kind);
       const written = measuresOf(blank).reduce((one, { field }) => withMeasure(one, field, mm), blank);
-      const laid = layOutSection(standoffSection(written), rooms[1]);
+      const laid = layOutSection(standoffSection(written), rooms[0]);
       const numbers = [
         laid.height,
         ...laid.dimensions.flatMap(({ balloon, line }) => [balloon.x, line.from.x, line.to.y]),
