@@ -1,4 +1,12 @@
-import { converter, differenceCiede2000, modeLab65, modeRgb, modeXyz65, useMode as registerMode } from "culori/fn";
+import {
+  converter,
+  differenceCiede2000,
+  formatHex,
+  modeLab65,
+  modeRgb,
+  modeXyz65,
+  useMode as registerMode,
+} from "culori/fn";
 
 registerMode(modeRgb);
 registerMode(modeXyz65);
@@ -14,6 +22,11 @@ export function labOf(colour: string): Lab {
   const lab = /^#[0-9a-f]{6}$/i.test(colour) ? toLab65(colour) : undefined;
   if (!lab) throw new RangeError(`${colour} is no colour of the form #RRGGBB.`);
   return { L: lab.l, a: lab.a, b: lab.b };
+}
+
+/** A CIELAB colour as sRGB, #RRGGBB in capitals; one that a screen can't show is taken to the nearest channel by channel. */
+export function colourOf({ L, a, b }: Lab): string {
+  return formatHex({ mode: "lab65", l: L, a, b }).toUpperCase();
 }
 
 /**

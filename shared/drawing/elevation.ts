@@ -10,6 +10,7 @@ import { outlineMm, type PaperScale } from "./dimensions.ts";
 import type { DisplayList, Item } from "./display-list.ts";
 import { dimensionMargins, drawElevationDimensions } from "./elevation-dimensions.ts";
 import { drawSolids, drawWallShadow } from "./elevation-pieces.ts";
+import { faceColour } from "./face-colour.ts";
 import { placedStandoffs } from "./hardware.ts";
 import { shadowOffsetMm } from "./light.ts";
 import { mixColours, sheetWhite } from "./palette.ts";
@@ -51,7 +52,8 @@ export function boardOriginOf(list: DisplayList): Point | null {
 }
 
 function drawBoard({ document, texture, paperScale }: ElevationInput, box: Box, outline: Path): Item[] {
-  const { colour, name } = faceStock(document.backer);
+  const { name } = faceStock(document.backer);
+  const colour = faceColour(document.backer);
   const seed = [...name].reduce((sum, character) => (sum * 31 + (character.codePointAt(0) ?? 0)) % 9973, 17);
   const face: Item = texture
     ? { kind: "image", box, pngBase64: texture.pngBase64 }

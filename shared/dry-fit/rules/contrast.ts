@@ -1,8 +1,9 @@
 import { contrastRatio } from "../../colour/contrast.ts";
+import { colouringCoats } from "../../colour/finish-colour.ts";
 import { finishedWood } from "../../colour/finished-wood.ts";
 import { type Lab, labOf } from "../../colour/lab.ts";
 import { lrvOfLightness, luminanceContrast } from "../../colour/lrv.ts";
-import type { Coat, MockupDocument } from "../../mockup/document.ts";
+import type { MockupDocument } from "../../mockup/document.ts";
 import { faceStock } from "../../stack/backer.ts";
 import type { Finding } from "../finding.ts";
 import { type Letter, lettersOf } from "../lettering.ts";
@@ -74,17 +75,10 @@ function groundOf(document: MockupDocument, key: string): Ground {
   const { finish } = document.backer;
   const stock = faceStock(document.backer);
   const bare = labOf(stock.colour);
-  const coats = finish.flatMap(finishCoat);
+  const coats = colouringCoats(finish);
   const finished = finishedWood(bare, coats);
   if (coats.length === 0 || !finished.ok) return { name: stock.name, colour: stock.colour, lab: bare };
   return { name: `${stock.name} with its finish`, colour: null, lab: finished.value };
-}
-
-/** What a coat does to the wood's colour; sanding, conditioner and whatever else is used do nothing that we know of. */
-function finishCoat(coat: Coat): Parameters<typeof finishedWood>[1][number][] {
-  if (coat.kind === "stain") return [{ kind: "stain", colour: labOf(coat.colour), strength: coat.strength }];
-  if (coat.kind !== "clear coat") return [];
-  return [{ kind: coat.base === "water-borne" ? "clear, water-borne" : "clear, oil or shellac" }];
 }
 
 /** WCAG's ratio from luminances in percent. */

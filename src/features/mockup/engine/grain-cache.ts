@@ -1,5 +1,7 @@
 import type { DisplayList, Item } from "#shared/drawing/display-list.ts";
+import { faceColour } from "#shared/drawing/face-colour.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
+import { faceStock } from "#shared/stack/backer.ts";
 
 type Texture = { readonly pngBase64: string };
 
@@ -23,7 +25,14 @@ export function createGrainCache(): GrainCache {
 
 /** All that the grain depends on. */
 function nameOf({ board, backer }: MockupDocument): string {
-  return [board.width, board.height, backer.stock.colour, backer.stock.name, backer.grainTurn, JSON.stringify(backer.slats)].join("|");
+  return [
+    board.width,
+    board.height,
+    faceColour(backer),
+    faceStock(backer).name,
+    backer.grainTurn,
+    JSON.stringify(backer.slats),
+  ].join("|");
 }
 
 /** The image that is clipped to the board, right after the board itself; undefined when the picture has none. */

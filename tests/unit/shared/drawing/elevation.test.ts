@@ -3,7 +3,7 @@ import { loadKernel } from "#server/artwork/load-kernel.ts";
 import type { DisplayList, Item } from "#shared/drawing/display-list.ts";
 import { boardOriginOf, drawElevation } from "#shared/drawing/elevation.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
-import type { MockupDocument } from "#shared/mockup/document.ts";
+import type { Coat, MockupDocument } from "#shared/mockup/document.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
 import { orreryBooks } from "../../../support/orrery-books.ts";
 
@@ -92,6 +92,31 @@ describe("the elevation of a rich sign", () => {
     expect(idsOf(list)).not.toContain("disc");
     expect(idsOf(list)).not.toContain("hole:h1");
     expect(everyItem(list.items).filter((item) => item.kind === "image" && item.opacity !== undefined)).toHaveLength(1);
+  });
+});
+
+describe("the board's face", () => {
+  const filled = (list: DisplayList) =>
+    everyItem(list.items).flatMap((item) =>
+      item.kind === "path" && item.id === "board" && item.fill ? [item.fill] : [],
+    );
+  const finished = (finish: Coat[]): MockupDocument => {
+    const { backer, ...rest } = orreryBooks();
+    return { ...rest, layers: [], backer: { ...backer, stock: { ...backer.stock, colour: "#E6CFA4" }, finish } };
+  };
+  const umber: Coat = { kind: "stain", name: "Umber", colour: "#3A2415", strength: 1, dryingHours: 8 };
+
+  it("is the wood's own colour when it is bare or only sanded", () => {
+    expect(filled(draw(finished([])))).toEqual(["#E6CFA4"]);
+    expect(filled(draw(finished([{ kind: "sanding", grit: 180 }])))).toEqual(["#E6CFA4"]);
+  });
+
+  it("is stained when it is stained, with the grain on it", () => {
+    const grainOf = (list: DisplayList) => everyItem(list.items).find((item) => item.kind === "image");
+    const [bare, stained] = [draw(finished([])), draw(finished([umber]))];
+    expect(filled(stained)).toEqual(["#3A2415"]);
+    expect(grainOf(stained)).toBeDefined();
+    expect(grainOf(stained)).not.toEqual(grainOf(bare));
   });
 });
 

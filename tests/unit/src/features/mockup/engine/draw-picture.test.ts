@@ -53,5 +53,7 @@ describe("the picture on the desk", () => {
     expect(kept?.pngBase64.length).toBeGreaterThan(1000);
     expect(drawPicture(input, { kernel, grain }).drawing?.elevation).toEqual(first);
     expect(grain.find(setBoard(document, { width: 610 }))).toBeUndefined();
+    const stain = { kind: "stain" as const, name: "Umber", colour: "#3A2415", strength: 0.8, dryingHours: 8 };
+    expect(grain.find(setBoard(document, { finish: [stain] }))).toBeUndefined();
   });
 });
