@@ -1,7 +1,20 @@
-import { boxCentre, boxOfRegion } from "../geometry/box.ts";
+import { boxCentre, boxesOverlap, boxOfRegion } from "../geometry/box.ts";
 import { distanceToRegionEdgeMm, regionContains } from "../geometry/contains.ts";
-import type { Point, Region } from "../geometry/path.ts";
+import type { Box, Point, Region } from "../geometry/path.ts";
+import { type SmallestBox, smallestBox } from "../geometry/smallest-box.ts";
 import { isShorter } from "../geometry/tolerance.ts";
+
+/**
+ * Outlines that a disc round a hole may not cross, so that it lies on one level: the cap's over what lies on the piece,
+ * the barrel's foot over what lies under it. A side says where the hole must be besides.
+ */
+export type Level = {
+  readonly outlines: Region;
+  readonly diameter: number;
+  readonly side?: "inside" | "outside";
+  /** Round the outlines, for who asks of many places. */
+  readonly box?: Box;
+};
 
 /** Where a hole may be. All mm. */
 export type HoleConstraints = {
@@ -9,11 +22,7 @@ export type HoleConstraints = {
   readonly edge: number;
   /** From a hole's middle to the next one's. */
   readonly apart: number;
-  /**
-   * Discs round the hole that must lie on one level: the cap's over what lies on the piece, the barrel's foot over what
-   * lies under it. A disc may not cross the outlines.
-   */
-  readonly level: readonly { readonly outlines: Region; readonly diameter: number }[];
+  readonly level: readonly Level[];
 };
 
 /** How many places are tried on the way from a corner to the middle. */
@@ -24,7 +33,17 @@ const mostHoles = 400;
 /** Whether a hole may be there. */
 export function mayHoleBeAt(point: Point, piece: Region, { edge, level }: HoleConstraints): boolean {
   if (!(regionContains(piece, point) && !isShorter(distanceToRegionEdgeMm(piece, point), edge))) return false;
-  return level.every(({ outlines, diameter }) => !isShorter(distanceToRegionEdgeMm(outlines, point), diameter / 2));
+  return level.every((one) => keepsLevel(point, one));
+}
+
+/** Whether a disc round a place crosses no outline and lies on the side that is asked for. */
+export function keepsLevel(point: Point, { outlines, diameter, side, box: known }: Level): boolean {
+  const radius = diameter / 2;
+  const box = known ?? boxOfRegion(outlines);
+  const around = { x: point.x - radius, y: point.y - radius, width: diameter, height: diameter };
+  if (!box || !boxesOverlap(box, around)) return side !== "inside";
+  if (isShorter(distanceToRegionEdgeMm(outlines, point), radius)) return false;
+  return side === undefined || regionContains(outlines, point) === (side === "inside");
 }
 
 /**
@@ -87,6 +106,45 @@ export function evenHoles(piece: Region, constraints: HoleConstraints, pitch: nu
       if (found.length >= mostHoles) return found;
       if (mayHoleBeAt(point, piece, constraints) && isApart(point, found, constraints.apart)) found.push(point);
     }
+  }
+  return found;
+}
+
+/**
+ * Holes in one row along the middle of a piece's smallest box, evenly, no further than `pitch` mm from each other, the
+ * outer ones at the edge distance: for what is too narrow for two rows. Places where no hole may be are left out. `fits`
+ * as for the corners.
+ */
+export function rowHoles(
+  piece: Region,
+  constraints: HoleConstraints,
+  pitch: number,
+  fits: (holes: readonly Point[]) => boolean = () => true,
+): Point[] {
+  const box = smallestBox(piece);
+  if (!box || !(pitch > 0)) return [];
+  const half = Math.max(0, box.length / 2 - constraints.edge);
+  const outermost = rowOf(piece, box, constraints, half, pitch);
+  for (let step = 0; step < tries; step++) {
+    const holes = rowOf(piece, box, constraints, half * (1 - step / tries), pitch);
+    if (holes.length < Math.min(2, outermost.length)) break;
+    if (fits(holes)) return holes;
+  }
+  return outermost;
+}
+
+function rowOf(
+  piece: Region,
+  { centre, turn }: SmallestBox,
+  constraints: HoleConstraints,
+  half: number,
+  pitch: number,
+): Point[] {
+  const angle = (turn * Math.PI) / 180;
+  const found: Point[] = [];
+  for (const along of evenPlaces(-half, half, pitch)) {
+    const point = { x: centre.x + along * Math.cos(angle), y: centre.y + along * Math.sin(angle) };
+    if (mayHoleBeAt(point, piece, constraints) && isApart(point, found, constraints.apart)) found.push(point);
   }
   return found;
 }

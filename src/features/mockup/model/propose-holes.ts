@@ -1,20 +1,24 @@
 import type { Limits } from "#shared/dry-fit/limits.ts";
 import { usualContext } from "#shared/dry-fit/usual-context.ts";
 import { windowOfHole } from "#shared/dry-fit/window-of-hole.ts";
-import { flattenPath } from "#shared/geometry/flatten.ts";
-import type { Point } from "#shared/geometry/path.ts";
-import { placeRegion } from "#shared/geometry/placement.ts";
+import type { Point, Region } from "#shared/geometry/path.ts";
 import { isShorter } from "#shared/geometry/tolerance.ts";
-import { cornerHoles } from "#shared/hardware/hole-proposals.ts";
+import { edgeGripPlaces } from "#shared/hardware/edge-places.ts";
+import { cornerHoles, type HoleConstraints, type Level, rowHoles } from "#shared/hardware/hole-proposals.ts";
 import { holeWindowOfKind } from "#shared/hardware/hole-window-of-kind.ts";
 import { panelHoleOf } from "#shared/hardware/panel-hole.ts";
-import { passingDiameterMm, seenDiameterMm, usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
+import { passesPanel, passingDiameterMm, seenDiameterMm, usualOffsetMm } from "#shared/hardware/standoff-parts.ts";
 import type { Hardware, Hold, Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
+import { holeGrounds, outlineOf } from "./hole-grounds.ts";
 import { coordinateOf, lengthOf, mostHoles } from "./limits.ts";
 import { withFields } from "./same.ts";
 
-/** Coarse: a proposal is looked at and moved, and a layer can have hundreds of pieces. */
-const flatnessMm = 0.2;
+/** A panel's rim that stays seen round a front (our choice). */
+const rimMm = 2;
+/** Standoffs of a row are no further apart (our choice). */
+const rowPitchMm = 300;
+/** Holes this much nearer the middle are not nearer for the eye. */
+const alikeMm = 1;
 
 type StandoffHold = Extract<Hold, { kind: "standoff" }>;
 
@@ -24,42 +28,86 @@ export type Site = { readonly place: "inside" | "outside"; readonly limits: Limi
 type Where = { readonly document: MockupDocument; readonly site: Site };
 
 /**
- * Holes towards the four corners of each piece of a layer, as far out as the cap and the rule for holes near an edge
- * allow. On a layer of one piece they come nearer each other until the panel's movement leaves each of them a diameter
- * that hides. A piece too small for four gets fewer; the first hole of the layer is the fixed one.
+ * Places of standoffs on each piece of a layer. Where they pass the panel or are fixed to its back: towards the four
+ * corners, as far out as the front and the rule for holes near an edge allow; a piece too narrow for that gets a
+ * row. On a layer of one piece they come nearer each other until the panel's movement leaves each of them a diameter that
+ * hides. Edge grips stand at the upper and the lower edge. None has its front or its foot on a step as long as there is
+ * a place without. A piece too small for four gets fewer; the hole nearest the layer's middle is the fixed one.
  */
 export function propose(layer: Layer, { hardware, id, ...where }: { hardware: Hardware; id: string } & Where): Hole[] {
-  const { limits } = where.site;
-  const window = holeWindowOfKind(panelHoleOf(hardware), {
-    placingError: limits.placingErrorMm,
-    cover: limits.coverMm,
-    movement: 0,
-  });
-  const lower = window?.lower ?? passingDiameterMm(hardware);
-  const widest = window ? Math.max(window.lower, window.upper) : 0;
-  const seen = seenDiameterMm(hardware);
-  const edge = Math.max(
-    limits.edgeDiameters * widest,
-    seen / 2 + 2,
-    widest / 2 + limits.webThicknesses * layer.thickness,
-  );
-  const apart = 2 * seen;
-  const regions = layer.pieces.map((piece) => placeRegion(flattenPath(piece.path, flatnessMm), piece.placement));
+  const regions = layer.pieces.map(outlineOf);
   const holdWith = (points: readonly Point[]): StandoffHold => {
-    const holes = points
-      .map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) }))
-      .filter(isPoint)
-      .slice(0, mostHoles)
-      .map(({ x, y }, index) => ({ id: `${id}-${index + 1}`, x, y, diameter: lower, fixed: index === 0 }));
-    return { kind: "standoff", hardware, offset: usualOffsetMm(hardware), holes };
+    const placed = points.map(({ x, y }) => ({ x: coordinateOf(x), y: coordinateOf(y) })).filter(isPoint);
+    const holes = placed.slice(0, mostHoles).map(({ x, y }, index) => ({
+      id: `${id}-${index + 1}`,
+      x,
+      y,
+      diameter: passingDiameterMm(hardware),
+      fixed: false,
+    }));
+    const fixed = nearestMiddle(holes);
+    const offset = usualOffsetMm(hardware);
+    return { kind: "standoff", hardware, offset, holes: holes.map((hole) => ({ ...hole, fixed: hole.id === fixed })) };
   };
   // Pieces of one layer are bound to one fixed hole: coming nearer its own middle helps a single one only.
   const allHaveWindow = (points: readonly Point[]): boolean => {
     const hold = holdWith(points);
     return regions.length > 1 || hold.holes.every((hole) => hasWindow(hold, hole, where));
   };
-  const constraints = { edge, apart, level: [] };
-  return fitDiameters(holdWith(regions.flatMap((region) => cornerHoles(region, constraints, allHaveWindow))), where);
+  const room = roomOf(hardware, layer, where.site.limits);
+  const { document } = where;
+  const { capClearanceMm: clearanceMm } = where.site.limits;
+  const grounds = holeGrounds(layer, { hardware, document, clearanceMm, reach: room.reach });
+  const points = regions.flatMap((region) => {
+    const on = (level: readonly Level[]) => placesOn(region, hardware, { ...room, level }, allHaveWindow);
+    const most = grounds(region)
+      .map(on)
+      .reduce<Point[]>((best, one) => (one.length > best.length ? one : best), []);
+    return most.length > 0 ? most : on([]);
+  });
+  return fitDiameters(holdWith(points), where);
+}
+
+/** What a standoff asks for round it on a piece, mm, and how far outside the piece it may stand. */
+function roomOf(hardware: Hardware, layer: Layer, limits: Limits): Omit<HoleConstraints, "level"> & { reach: number } {
+  const seen = seenDiameterMm(hardware);
+  const apart = 2 * seen;
+  if (!passesPanel(hardware))
+    return { edge: hardware.barrelDiameter / 2 + rimMm, apart, reach: hardware.barrelDiameter };
+  const window = holeWindowOfKind(panelHoleOf(hardware), {
+    placingError: limits.placingErrorMm,
+    cover: limits.coverMm,
+    movement: 0,
+  });
+  const widest = window ? Math.max(window.lower, window.upper) : 0;
+  const edge = Math.max(
+    limits.edgeDiameters * widest,
+    seen / 2 + rimMm,
+    widest / 2 + limits.webThicknesses * layer.thickness,
+  );
+  return { edge, apart, reach: 0 };
+}
+
+function placesOn(
+  region: Region,
+  hardware: Hardware,
+  constraints: HoleConstraints,
+  fits: (points: readonly Point[]) => boolean,
+): Point[] {
+  if (hardware.kind === "edgeGrip") return edgeGripPlaces(region, hardware, constraints.level);
+  const corners = cornerHoles(region, constraints, fits);
+  if (corners.length > 2) return corners;
+  const row = rowHoles(region, constraints, rowPitchMm, fits);
+  return row.length >= corners.length ? row : corners;
+}
+
+/** The hole nearest the middle of them all, of about equally near ones the first; undefined for none. */
+function nearestMiddle(holes: readonly Hole[]): string | undefined {
+  const x = holes.reduce((sum, hole) => sum + hole.x, 0) / holes.length;
+  const y = holes.reduce((sum, hole) => sum + hole.y, 0) / holes.length;
+  const far = (hole: Hole): number => Math.hypot(hole.x - x, hole.y - y);
+  const least = Math.min(...holes.map(far));
+  return holes.find((hole) => far(hole) <= least + alikeMm)?.id;
 }
 
 function hasWindow(hold: StandoffHold, hole: Hole, where: Where): boolean {

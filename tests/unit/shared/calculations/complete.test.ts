@@ -10,6 +10,7 @@ const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour
 const parts = [
   "hardware/check-hardware.ts",
   "hardware/driven-of.ts",
+  "hardware/edge-places.ts",
   "hardware/nearest-place.ts",
   "hardware/over-panel.ts",
   "hardware/panel-hole.ts",

@@ -4,7 +4,9 @@ import { distanceToRegionEdgeMm, regionContains } from "#shared/geometry/contain
 import { flattenPath } from "#shared/geometry/flatten.ts";
 import type { Region } from "#shared/geometry/path.ts";
 import { circlePath, rectanglePath } from "#shared/geometry/shapes.ts";
-import { cornerHoles, evenHoles } from "#shared/hardware/hole-proposals.ts";
+import { edgeOverlapMm } from "#shared/hardware/edge-grip.ts";
+import { edgeGripPlaces } from "#shared/hardware/edge-places.ts";
+import { cornerHoles, evenHoles, keepsLevel, rowHoles } from "#shared/hardware/hole-proposals.ts";
 
 const box = (x: number, y: number, width: number, height: number): Region =>
   flattenPath(rectanglePath({ x, y, width, height }));
@@ -103,4 +105,80 @@ it("every proposed hole keeps its distances", () => {
     }),
     { numRuns: 60 },
   );
+});
+
+describe("a row", () => {
+  it("runs along a bar, however it is turned, no further apart than the pitch", () => {
+    expect(rowHoles(box(0, 0, 400, 30), usual, 200)).toEqual([15, 200, 385].map((x) => ({ x, y: 15 })));
+    const turned = rowHoles(box(0, 0, 30, 400), usual, 500);
+    expect(turned.map(({ y }) => Math.round(y)).toSorted((a, b) => a - b)).toEqual([15, 385]);
+  });
+  it("is one hole on what is too short, and none on what is too narrow", () => {
+    expect(rowHoles(box(0, 0, 40, 30), usual, 500)).toHaveLength(1);
+    expect(rowHoles(box(0, 0, 400, 29), usual, 500)).toEqual([]);
+    expect(rowHoles([], usual, 500)).toEqual([]);
+    expect(rowHoles(panel, usual, 0)).toEqual([]);
+  });
+  it("draws together until it fits", () => {
+    const across = (holes: readonly { x: number }[]) => (holes.at(-1)?.x ?? 0) - (holes[0]?.x ?? 0);
+    const near = rowHoles(box(0, 0, 400, 30), usual, 500, (holes) => across(holes) <= 200);
+    expect(across(near)).toBeLessThanOrEqual(200);
+    expect(across(near)).toBeGreaterThan(200 - 370 / 60);
+  });
+});
+
+describe("a level", () => {
+  const plate = box(0, 0, 100, 100);
+  it.each([
+    { x: 50, either: true, inside: true, outside: false },
+    { x: 92.5, either: true, inside: true, outside: false },
+    { x: 93, either: false, inside: false, outside: false },
+    { x: 107, either: false, inside: false, outside: false },
+    { x: 107.5, either: true, inside: false, outside: true },
+    { x: 500, either: true, inside: false, outside: true },
+  ])("keeps a disc of 15 at $x: $either, inside $inside, outside $outside", ({ x, either, inside, outside }) => {
+    const level = { outlines: plate, diameter: 15 };
+    const at = { x, y: 50 };
+    expect(keepsLevel(at, level)).toBe(either);
+    expect(keepsLevel(at, { ...level, side: "inside" })).toBe(inside);
+    expect(keepsLevel(at, { ...level, side: "outside" })).toBe(outside);
+  });
+  it("of nothing is kept outside only", () => {
+    expect(keepsLevel({ x: 0, y: 0 }, { outlines: [], diameter: 15, side: "outside" })).toBe(true);
+    expect(keepsLevel({ x: 0, y: 0 }, { outlines: [], diameter: 15, side: "inside" })).toBe(false);
+  });
+});
+
+describe("places of edge grips", () => {
+  const holder = { barrelDiameter: 16, gripDepth: 5 };
+  it("are two at the upper edge and two at the lower one", () => {
+    expect(edgeGripPlaces(panel, holder, []).map(({ x, y }) => [x, Math.round(y * 100) / 100])).toEqual([
+      [75, -3],
+      [225, -3],
+      [75, 203],
+      [225, 203],
+    ]);
+  });
+  it("are moved along the edge off what is in the way, or left out", () => {
+    const way = { outlines: box(60, -20, 40, 60), diameter: 16, side: "outside" as const };
+    const [first] = edgeGripPlaces(panel, holder, [way]);
+    expect(first?.x).toBe(45);
+    const all = { outlines: box(-100, -100, 600, 150), diameter: 16, side: "outside" as const };
+    expect(edgeGripPlaces(panel, holder, [all]).map(({ y }) => y > 100)).toEqual([true, true]);
+  });
+  it("reach over any edge by the slot's depth", () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 20, max: 300, noNaN: true }),
+        fc.double({ min: 1, max: 8, noNaN: true }),
+        (radius, gripDepth) => {
+          const round = flattenPath(circlePath({ x: 0, y: 0 }, radius));
+          for (const place of edgeGripPlaces(round, { barrelDiameter: 16, gripDepth }, [])) {
+            expect(edgeOverlapMm(16, round, place)).toBeCloseTo(gripDepth, 2);
+          }
+        },
+      ),
+    );
+    expect(edgeGripPlaces([], holder, [])).toEqual([]);
+  });
 });
