@@ -69,6 +69,7 @@ describe("how points hold a sheet", () => {
   it.each([
     { name: "four in a row", points: at([0, 0], [100, 0], [200, 0], [300, 0]), longer: 100 },
     { name: "a trapezium", points: at([50, 0], [250, 0], [0, 200], [300, 200]), longer: 300 },
+    { name: "a leaning parallelogram", points: at([0, 0], [300, 0], [350, 200], [50, 200]), longer: 300 },
     { name: "three", points: at([0, 0], [100, 0], [50, 80]), longer: 100 },
   ])("$name: a span", ({ points, longer }) => {
     expect(holdingPattern(points, 7.5)).toMatchObject({ kind: "span", longer });
