@@ -8,6 +8,7 @@ import { legibilityCalculations } from "./legibility-calculations.ts";
 import { loadCalculations } from "./load-calculations.ts";
 import { pieceCalculations } from "./piece-calculations.ts";
 import { screwCalculations } from "./screw-calculations.ts";
+import { sheetCalculations } from "./sheet-calculations.ts";
 import { slatCalculations } from "./slat-calculations.ts";
 import { stockLengthCalculations } from "./stock-length-calculations.ts";
 
@@ -22,6 +23,7 @@ export const calculations: readonly CalculationGroup[] = [
   loadCalculations,
   legibilityCalculations,
   stockLengthCalculations,
+  sheetCalculations,
   costCalculations,
   drawingCalculations,
 ];

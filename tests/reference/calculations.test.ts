@@ -159,6 +159,13 @@ const stated: Readonly<Record<string, Readonly<Record<string, string | readonly 
   "nested-slats": { "They take": [1558.2695, 5e-5] },
   // Textbook example of the cutting-stock problem; optimum proved by a solver, 73 · 5600 − 407160.
   "stock-lengths": { Bars: [73, 0], "No plan needs fewer than": [73, 0], "Left over": [1640, 1e-9] },
+  // Burke, Kendall, Whitwell: 40.
+  "sheet-rectangles": { "Length of strip": [40, 1e-9] },
+  // ⌊995/95⌋ · ⌊495/95⌋.
+  "sheet-gaps": { "On one sheet": [50, 0] },
+  // (π (100² − 60²) + 70²)/206², circles of four cubics 0.03 % larger.
+  "sheet-shapes": { Sheets: [1, 0], Used: [0.5893, 0.0005] },
+  "sheet-bed": { Parts: [4, 0] },
   // 0.36 m² · 1.15 · 42.00 = 17.388.
   "cost-line": { Quantity: [0.414, 1e-12], Amount: "17.39\u00a0EUR" },
   // 22.5 + 5.4 + 10 minutes at a euro each.
