@@ -119,6 +119,62 @@ export const screens: readonly Screen[] = [
     ready: text("client@orrery.example"),
   },
   { who: "owner", name: "stock", at: "stock", path: () => paths.stock(shop), ready: text("Midnight") },
+  {
+    who: "owner",
+    name: "stock-change-sheet",
+    at: "stock",
+    path: () => paths.stock(shop),
+    ready: text("Midnight"),
+    open: openDialog("Change Midnight"),
+  },
+  {
+    who: "owner",
+    name: "stock-change-standoff",
+    at: "stock",
+    path: () => `${paths.stock(shop)}?kind=hardware`,
+    ready: text("Standoff 15 × 19"),
+    open: async (page) => {
+      await openDialog("Change Standoff 15 × 19")(page);
+      await page.getByRole("textbox", { name: /Bore, deep/ }).focus();
+    },
+  },
+  {
+    who: "owner",
+    name: "stock-add-wood",
+    at: "stock",
+    path: () => `${paths.stock(shop)}?kind=wood`,
+    ready: text("Black walnut"),
+    open: async (page) => {
+      await openDialog("Add a wood")(page);
+      await page.getByLabel("Species").selectOption({ label: "Yellow birch" });
+      await page.getByRole("button", { name: "Add to stock" }).click();
+      await page.getByText("Add at least one thickness.").waitFor();
+    },
+  },
+  {
+    who: "owner",
+    name: "stock-change-screw",
+    at: "stock",
+    path: () => `${paths.stock(shop)}?kind=screw`,
+    ready: text("No. 6 × 16, flat head"),
+    open: openDialog("Change No. 6 × 16, flat head"),
+  },
+  {
+    who: "owner",
+    name: "stock-change-adhesive",
+    at: "stock",
+    path: () => `${paths.stock(shop)}?kind=adhesive`,
+    ready: text("Slow epoxy"),
+    open: openDialog("Change Slow epoxy"),
+  },
+  {
+    who: "owner",
+    name: "stock-nothing-found",
+    at: "stock",
+    path: () => `${paths.stock(shop)}?q=zzzz`,
+    ready: text("Nothing here has “zzzz” in its name."),
+  },
+  { who: "rep", name: "stock-look-only", at: "stock", path: () => paths.stock(shop), ready: text("Midnight") },
   { who: "owner", name: "team", at: "team", path: () => paths.team(shop), ready: text("maker@copperlark.example") },
   { who: "owner", name: "shop", at: "shop", path: () => paths.shop(shop), ready: heading(/./) },
   {
