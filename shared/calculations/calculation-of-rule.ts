@@ -3,6 +3,7 @@ export const calculationOfRule: Readonly<Record<number, string>> = {
   1: "support",
   2: "height",
   3: "thinnest-stroke",
+  4: "thinnest-stroke",
   5: "drop-outs",
   6: "hole-window",
   7: "hole-to-edge",

@@ -132,7 +132,8 @@ export const pieceCalculations: CalculationGroup = {
       formula:
         "What an opening takes away: shrunk by half the limit and grown again, with mitred corners. The interval is halved until the width is found.",
       source: { text: "Mathematical morphology", status: "calculated" },
-      limits: "To 0.02 mm. Tips of 30° and less count as thin, corners from 45° do not.",
+      limits:
+        "To 0.02 mm. Tips of 30° and less count as thin, corners from 45° do not; of gaps only those that stay narrow for four times the limit, or do not come to a point.",
       example: (kernel) => {
         const neck = 1.5;
         const dumbbell = kernel.union(

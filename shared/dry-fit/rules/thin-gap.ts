@@ -1,6 +1,6 @@
 import { type Kernel, remembered } from "../../geometry/kernel.ts";
 import type { Point } from "../../geometry/path.ts";
-import { narrowGap } from "../../pieces/narrow-gap.ts";
+import { thinnestGap } from "../../pieces/thinnest-gap.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
 import { formatFine } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
@@ -16,7 +16,7 @@ export function measureGap(
   limitMm: number,
   kernel: Kernel,
 ): { readonly widthMm: number; readonly where: Point } | null {
-  return remembered(kernel, region, `narrow gap ${limitMm}`, () => narrowGap(region, limitMm, kernel));
+  return remembered(kernel, region, `thinnest gap ${limitMm}`, () => thinnestGap(region, limitMm, kernel));
 }
 
 function check(input: RuleInput): Finding[] {
