@@ -8,6 +8,7 @@ const filesIn = (folder: string) => readdirSync(new URL(`${folder}/`, shared)).f
 const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour"];
 /** Parts of calculations that are explained with the ones that use them. */
 const parts = [
+  "bonds/surfaces.ts",
   "hardware/check-hardware.ts",
   "hardware/driven-of.ts",
   "hardware/edge-places.ts",
@@ -17,7 +18,9 @@ const parts = [
   "hardware/standoff-parts.ts",
   "legibility/accessible-limits.ts",
   "pieces/area-moments.ts",
+  "pieces/outline-spread.ts",
   "pieces/same-outline.ts",
+  "pieces/template-islands.ts",
 ];
 
 it("every calculation of a subject is explained, or is a part of one that is", () => {
