@@ -53,8 +53,8 @@ export function CellText({ value, onCommit, className, ...input }: CellTextProps
           value={draft ?? value}
           // Nothing typed: undo is the desk's, not the field's.
           data-untouched={draft === null || undefined}
-          aria-invalid={(draft !== null && refusal !== null) || undefined}
-          aria-describedby={refusal === null ? undefined : refusalId}
+          aria-invalid={(draft !== null && refusal !== null) || input["aria-invalid"]}
+          aria-describedby={refusal === null ? input["aria-describedby"] : refusalId}
           onChange={(event) => {
             setDraft(event.target.value);
             setRefusal(null);
@@ -134,9 +134,9 @@ export function WordButton({ className, type = "button", inText = false, ...butt
 }
 
 /** A small square of a stock's own colour. The name beside it says the rest. */
-export function Swatch({ colour }: { readonly colour: string }) {
+export function Swatch({ colour, large = false }: { readonly colour: string; readonly large?: boolean }) {
   return (
-    <svg aria-hidden="true" viewBox="0 0 12 12" className="size-3.5 shrink-0">
+    <svg aria-hidden="true" viewBox="0 0 12 12" className={cx("shrink-0", large ? "size-8" : "size-3.5")}>
       <rect x="0.5" y="0.5" width="11" height="11" fill={colour} stroke="currentColor" />
     </svg>
   );

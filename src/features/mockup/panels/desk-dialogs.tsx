@@ -3,7 +3,7 @@ import { BringInDialog } from "./bring-in-dialog.tsx";
 import { KeysDialog } from "./keys-dialog.tsx";
 import { PlateDialog } from "./plate-dialog.tsx";
 
-export type DeskDialog = "artwork" | "plate" | "board" | "keys";
+export type DeskDialog = "artwork" | "plate" | "board" | "finish" | "keys";
 
 type DeskDialogsProps = {
   readonly open: DeskDialog | null;
@@ -26,6 +26,7 @@ export function DeskDialogs({ open, onClose, ...job }: DeskDialogsProps) {
       <BringInDialog {...at("artwork")} {...job} />
       <PlateDialog {...at("plate")} />
       <BoardDialog {...at("board")} />
+      <BoardDialog {...at("finish")} at="finish" />
       <KeysDialog {...at("keys")} />
     </>
   );

@@ -160,7 +160,11 @@ export function MockupDesk(props: MockupDeskProps) {
       </div>
       <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_minmax(17rem,24rem)]">
         <div className="min-w-0">
-          <SchedulePanel onBoard={() => setDialog("board")} onBringIn={() => setDialog("artwork")} />
+          <SchedulePanel
+            onBoard={() => setDialog("board")}
+            onFinish={() => setDialog("finish")}
+            onBringIn={() => setDialog("artwork")}
+          />
           <LayerDetails />
           <PiecesPanel />
         </div>

@@ -4,11 +4,11 @@ import { useDesk } from "../editor/desk-context.ts";
 import { centrePieces, placePiece, removePieces } from "../model/commands/pieces.ts";
 import { setReads } from "../model/commands/set-reads.ts";
 import { coordinateBounds, scaleBounds } from "../model/limits.ts";
+import { nameOfPiece } from "../model/piece-name.ts";
 import { chooseLayer, choosePiece } from "../model/selection.ts";
 import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 import { HolesTable } from "./holes-table.tsx";
-import { nameOfPiece } from "./piece-name.ts";
 import { WordsOfLayer } from "./words-of-layer.tsx";
 
 /** The pieces of the chosen layer as a list: what the canvas does by hand is done here in figures and by keyboard. */

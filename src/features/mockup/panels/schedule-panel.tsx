@@ -1,10 +1,10 @@
+import { faceColour } from "#shared/drawing/face-colour.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
-import type { Coat } from "#shared/mockup/document.ts";
 import { finishWords } from "#shared/mockup/finish-words.ts";
+import { faceStock } from "#shared/stack/backer.ts";
 import { Table } from "@/components/ui/table.tsx";
 import { useDesk } from "../editor/desk-context.ts";
-import { setBoard } from "../model/commands/set-board.ts";
-import { CellText, Swatch, WordButton } from "./cell-controls.tsx";
+import { Swatch, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 import { LayerTools } from "./layer-tools.tsx";
 import { ScheduleRow } from "./schedule-row.tsx";
@@ -14,15 +14,17 @@ const heads = ["Key", "What", "Stock", "Thick", "Held by", "Offset", "Locate by"
 /** The schedule: a row a layer from the wall outward, with its cells changed in place. */
 export function SchedulePanel({
   onBoard,
+  onFinish,
   onBringIn,
 }: {
   readonly onBoard: () => void;
+  readonly onFinish: () => void;
   readonly onBringIn: () => void;
 }) {
   const { document, figures, unit, heights, letterHeights } = useDesk();
   const rows = figures === null ? null : scheduleRows(document, figures, unit, heights);
   const backer = rows?.[0];
-  const { stock, thickness } = document.backer;
+  const { thickness } = document.backer;
 
   return (
     <section aria-label="Schedule" className="min-w-0 px-4 pt-2 pb-6 sm:px-6">
@@ -41,13 +43,13 @@ export function SchedulePanel({
         <tbody>
           <tr>
             <DeskRowHead>A</DeskRowHead>
-            <DeskCell>
-              <BackerName />
+            <DeskCell className="min-w-40">
+              <BackerName onFinish={onFinish} />
             </DeskCell>
             <DeskCell>
               <span className="flex items-center gap-2">
-                <Swatch colour={stock.colour} />
-                {stock.name}
+                <Swatch colour={faceColour(document.backer)} />
+                {faceStock(document.backer).name}
               </span>
             </DeskCell>
             <DeskCell>{backer?.thickness ?? thickness}</DeskCell>
@@ -88,24 +90,16 @@ export function SchedulePanel({
   );
 }
 
-/** The backer's finish is what tells it apart in the schedule, so it is written here. */
-function BackerName() {
-  const { document, edit } = useDesk();
-  const bare = document.backer.finish.length === 0;
+/** The backer's finish is what tells it apart in the schedule; its coats are written in a dialog. */
+function BackerName({ onFinish }: { readonly onFinish: () => void }) {
+  const { document } = useDesk();
+  const words = finishWords(document.backer.finish);
   return (
-    <span className="flex items-center gap-1">
-      Backer,
-      <CellText
-        aria-label="Finish of the backer"
-        placeholder="bare"
-        maxLength={120}
-        value={bare ? "" : finishWords(document.backer.finish)}
-        onCommit={(finish) => {
-          const coats: Coat[] = finish === "" ? [] : [{ kind: "other", name: finish, dryingHours: 0 }];
-          edit({ label: "Finish the backer", change: (before) => setBoard(before, { finish: coats }) });
-          return null;
-        }}
-      />
+    <span className="whitespace-normal">
+      Backer,{" "}
+      <WordButton inText aria-label={`Finish of the backer: ${words}`} onClick={onFinish}>
+        {words}
+      </WordButton>
     </span>
   );
 }

@@ -1,18 +1,26 @@
-import type { Coat, MockupDocument, Wood } from "#shared/mockup/document.ts";
-
+import { boxCentre } from "#shared/geometry/box.ts";
+import type { Point } from "#shared/geometry/path.ts";
+import type { Board, Coat, MockupDocument, Wood } from "#shared/mockup/document.ts";
 import { leastBoardMm, longestMm } from "#shared/mockup/schema-parts.ts";
-import { lengthOf } from "../limits.ts";
+import { mostCoats } from "../coat-draft.ts";
+import { coordinateOf, lengthOf } from "../limits.ts";
+import { boardOutline, outlineOfPiece } from "../outline-of-piece.ts";
 import { withFields } from "../same.ts";
-import { movePieces } from "./pieces.ts";
+import { movePieces, removePieces } from "./pieces.ts";
+
+type Hanging = MockupDocument["hanging"];
 
 export type BoardFields = {
+  readonly outline?: Board["outline"];
+  /** Takes a piece's outer ring for the board's outline, where it lies; the piece can go with it. */
+  readonly outlineOf?: { readonly pieceId: string; readonly remove: boolean };
   readonly width?: number;
   readonly height?: number;
   readonly stock?: Wood;
   readonly thickness?: number;
   readonly grainTurn?: number;
   readonly finish?: readonly Coat[];
-  readonly hanging?: MockupDocument["hanging"];
+  readonly hanging?: Partial<Hanging>;
   readonly quantity?: number;
   readonly wall?: string;
   readonly light?: MockupDocument["presentation"]["light"];
@@ -21,21 +29,34 @@ export type BoardFields = {
 
 /**
  * Sets what is given of the board, its backer, hanging and showing. A value that a document can't hold is left as it was.
- * A board of another size grows or shrinks about its middle: what is centred on it stays so.
+ * A board of another size grows or shrinks about its middle, with everything on it and the wall's fixings keeping their
+ * place from there; one that takes the outline of a piece comes to lie about that piece.
  */
 export function setBoard(document: MockupDocument, fields: BoardFields): MockupDocument {
-  const changed = withBoardFields(document, fields);
-  return movePieces(changed, {
+  const source = fields.outlineOf ? outlineOfPiece(document, fields.outlineOf.pieceId) : null;
+  const sized = withBoardFields(document, fields);
+  const about = source ? boxCentre(source.box) : middleOf(document.board);
+  const to = middleOf(sized.board);
+  const by = { x: to.x - about.x, y: to.y - about.y };
+  const shaped = source
+    ? { ...sized, board: withFields(sized.board, { outline: boardOutline(source, sized.board) }) }
+    : sized;
+  const points = fields.hanging?.points ?? movedPoints(document.hanging.points, by);
+  const moved = movePieces(withFields(shaped, { hanging: withFields(shaped.hanging, { points: [...points] }) }), {
     pieceIds: document.layers.flatMap(({ pieces }) => pieces.map(({ id }) => id)),
-    dx: (changed.board.width - document.board.width) / 2,
-    dy: (changed.board.height - document.board.height) / 2,
+    dx: by.x,
+    dy: by.y,
   });
+  return source && fields.outlineOf?.remove ? removePieces(moved, { pieceIds: [fields.outlineOf.pieceId] }) : moved;
 }
+
+const middleOf = ({ width, height }: Board): Point => ({ x: width / 2, y: height / 2 });
 
 function withBoardFields(document: MockupDocument, fields: BoardFields): MockupDocument {
   const { board, backer, hanging, presentation, quantity } = document;
   return withFields(document, {
     board: withFields(board, {
+      outline: fields.outline && isOutline(fields.outline) ? fields.outline : board.outline,
       width: lengthOf(fields.width ?? board.width, longestMm, leastBoardMm) ?? board.width,
       height: lengthOf(fields.height ?? board.height, longestMm, leastBoardMm) ?? board.height,
     }),
@@ -43,9 +64,9 @@ function withBoardFields(document: MockupDocument, fields: BoardFields): MockupD
       stock: fields.stock ?? backer.stock,
       thickness: lengthOf(fields.thickness ?? backer.thickness, 200) ?? backer.thickness,
       grainTurn: isWithin(fields.grainTurn ?? -1, 0, 180) ? (fields.grainTurn ?? backer.grainTurn) : backer.grainTurn,
-      finish: fields.finish ? [...fields.finish].slice(0, 12) : backer.finish,
+      finish: fields.finish ? fields.finish.slice(0, mostCoats) : backer.finish,
     }),
-    hanging: fields.hanging && isWithin(fields.hanging.gap, 0, 500) ? fields.hanging : hanging,
+    hanging: withHangingFields(hanging, fields.hanging ?? {}),
     quantity:
       fields.quantity !== undefined && Number.isInteger(fields.quantity) && isWithin(fields.quantity, 1, 1000)
         ? fields.quantity
@@ -58,6 +79,27 @@ function withBoardFields(document: MockupDocument, fields: BoardFields): MockupD
     }),
   });
 }
+
+function withHangingFields(hanging: Hanging, { kind, gap, pose, carriesKg, points }: Partial<Hanging>): Hanging {
+  const carries = carriesKg === undefined || carriesKg === null ? carriesKg : lengthOf(carriesKg, 10_000);
+  const held = points?.every(({ x, y }) => coordinateOf(x) !== null && coordinateOf(y) !== null) ? points : undefined;
+  return withFields(hanging, {
+    kind: kind ?? hanging.kind,
+    gap: gap !== undefined && isWithin(gap, 0, 500) ? gap : hanging.gap,
+    pose: pose ?? hanging.pose,
+    carriesKg: carries === undefined || (carries === null && carriesKg !== null) ? hanging.carriesKg : carries,
+    points: held ?? hanging.points,
+  });
+}
+
+/** A point that would leave what a document can hold stays where it is. */
+function movedPoints(points: readonly Point[], by: Point): readonly Point[] {
+  if (by.x === 0 && by.y === 0) return points;
+  return points.map(({ x, y }) => ({ x: coordinateOf(x + by.x) ?? x, y: coordinateOf(y + by.y) ?? y }));
+}
+
+const isOutline = (outline: Board["outline"]): boolean =>
+  outline.kind === "rounded" ? lengthOf(outline.radius) !== null : outline.kind !== "path" || outline.path.length > 0;
 
 function isLight({ azimuth, elevation, angularSize }: MockupDocument["presentation"]["light"]): boolean {
   return isWithin(azimuth, 0, 360) && isWithin(elevation, 10, 90) && isWithin(angularSize, 0, 1);
