@@ -3,7 +3,8 @@ import { findEntry, sameThicknessMm } from "../materials/find-stock.ts";
 import type { AcrylicStock } from "../materials/stock.ts";
 import { countOf } from "../mockup/change.ts";
 import type { Hardware, Layer } from "../mockup/document.ts";
-import { formatLengthWithUnit } from "../units/format-length.ts";
+import { formatFine } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
 import type { Finding } from "./finding.ts";
 import type { PieceWithFigures } from "./joints.ts";
 import { foundBy, type RuleInput } from "./rule.ts";
@@ -15,6 +16,11 @@ export const stockSource = "the shop's own stock list";
 export type CutLayer = { readonly layer: Layer; readonly pieces: readonly PieceWithFigures[] };
 
 const mm2PerM2 = 1e6;
+const mm2PerSquareFoot = 304.8 ** 2;
+
+function areaWords(mm2: number, unit: LengthUnit): string {
+  return unit === "mm" ? `${(mm2 / mm2PerM2).toFixed(2)} m²` : `${(mm2 / mm2PerSquareFoot).toFixed(1)} ft²`;
+}
 
 /** The entry of the stock list that a layer's sheet is; null when it is not in it. */
 export const entryOf = ({ stock }: Layer, acrylics: readonly AcrylicStock[]): AcrylicStock | null =>
@@ -67,12 +73,12 @@ function checkSheets({ entry, thicknessMm, layers }: SheetNeed, { document, limi
   const areaMm2 = layers.flatMap(({ pieces }) => pieces).reduce((sum, { figures }) => sum + figures.areaMm2, 0);
   const needed = (areaMm2 * document.quantity) / limits.sheetShare;
   if (needed <= onHand.areaMm2) return [];
-  const m2 = (area: number) => (area / mm2PerM2).toFixed(2);
+  const area = (mm2: number) => areaWords(mm2, context.unit);
   const signs = document.quantity === 1 ? "The sign takes" : `${document.quantity} signs take`;
   return [
     foundBy(stockRule, {
       severity: "caution",
-      text: `${signs} about ${m2(needed)} m² of ${entry.acrylic.name}, ${formatLengthWithUnit(thicknessMm, context.unit)}, waste included (${layers.map(({ layer }) => layer.key).join(", ")}); ${m2(onHand.areaMm2)} m² are on hand in ${countOf(onHand.count, "sheet")}.`,
+      text: `${signs} about ${area(needed)} of ${entry.acrylic.name}, ${formatFine(thicknessMm, context.unit)}, for ${layers.map(({ layer }) => layer.key).join(", ")}, waste included; ${area(onHand.areaMm2)} are on hand in ${countOf(onHand.count, "sheet")}.`,
       layerKey: layers.length === 1 ? first.layer.key : null,
       where: first.pieces[0]?.figures.centroid ?? null,
       value: needed / mm2PerM2,
@@ -123,7 +129,7 @@ function checkWood({ document, context }: RuleInput): Finding[] {
   const { woods } = context.stock;
   const { stock, thickness } = document.backer;
   if (woods.length === 0) return [];
-  const mm = (length: number) => formatLengthWithUnit(length, context.unit);
+  const mm = (length: number) => formatFine(length, context.unit);
   const base = { severity: "caution" as const, source: stockSource };
   const entry = findEntry(woods, stock, ({ wood }) => wood);
   if (!entry) return [foundBy(stockRule, { ...base, text: `${stock.name} of the backer is not in the stock list.` })];

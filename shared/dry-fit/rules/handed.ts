@@ -74,5 +74,7 @@ function factWords(layer: Layer, count: number, oneWay: readonly PieceWithFigure
       : `${oneWay.length === count ? countOf(count, "piece") : `${oneWay.length} of ${countOf(count, "piece")}`} of ${layerWords(layer)}${listed} ${fits} with one face up only.`;
   const faces = `The two faces of ${layer.stock.name} look different`;
   if (!layer.stock.facesDiffer) return handedWords;
-  return oneWay.length === 0 ? `${faces}: ${count} of ${layerWords(layer)}.` : `${handedWords} ${faces}.`;
+  return oneWay.length === 0
+    ? `${faces}, and ${countOf(count, "piece")} of ${layerWords(layer)} ${count === 1 ? "is" : "are"} cut from it.`
+    : `${handedWords} ${faces}.`;
 }

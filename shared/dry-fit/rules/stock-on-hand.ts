@@ -1,6 +1,6 @@
 import { lengthsEqual } from "../../geometry/tolerance.ts";
 import { hasThickness, nearestSheet, nearestThickness } from "../../materials/find-stock.ts";
-import { formatLengthWithUnit } from "../../units/format-length.ts";
+import { formatFine } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import type { Mend, MendStep } from "../mend.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -18,7 +18,7 @@ function check(input: RuleInput): Finding[] {
 
 function checkSheet({ layer, pieces }: CutLayer, { context }: RuleInput): Finding[] {
   const { acrylics } = context.stock;
-  const mm = (length: number) => formatLengthWithUnit(length, context.unit);
+  const mm = (length: number) => formatFine(length, context.unit);
   const base = {
     severity: "caution" as const,
     layerKey: layer.key,
@@ -58,7 +58,7 @@ function mends(finding: Finding, input: RuleInput): Mend[] {
   const { document, context } = input;
   const layer = document.layers.find(({ key }) => key === finding.layerKey);
   if (!layer || finding.pieceIds.length === 0) return [];
-  const mm = (length: number) => formatLengthWithUnit(length, context.unit);
+  const mm = (length: number) => formatFine(length, context.unit);
   const { acrylics } = context.stock;
   const entry = entryOf(layer, acrylics);
   if (entry && hasThickness(entry.thicknessesMm, layer.thickness)) return [];

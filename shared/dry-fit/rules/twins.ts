@@ -65,7 +65,7 @@ function groupWords(found: readonly NearTwins[], cuts: readonly Cut[]): string {
     ...(turned.length > 0 ? [`${words(turned)} upside down`] : []),
   ];
   const more = groups.length - mostGroups;
-  return more > 0 ? `${groups.slice(0, mostGroups).join("; ")}; and ${more} more groups` : groups.join("; ");
+  return more > 0 ? `${groups.slice(0, mostGroups).join("; ")}; and ${countOf(more, "more group")}` : groups.join("; ");
 }
 
 /** Pieces that are alike through any chain of others, in the order in which they were found. */

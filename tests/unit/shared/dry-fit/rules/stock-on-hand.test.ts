@@ -89,8 +89,19 @@ describe("sheets on hand", () => {
     expect(findings).toHaveLength(count);
     for (const finding of findings) {
       expect(finding).toMatchObject({ severity: "caution", layerKey: "B", value: 0.14, limit: 0.12, unit: "m²" });
-      expect(finding.text).toContain("5 signs take about 0.14 m² of Midnight, 3 mm");
+      expect(finding.text).toContain(
+        "5 signs take about 0.14 m² of Midnight, 3 mm, for B, waste included; 0.12 m² are on hand in 1 sheet.",
+      );
     }
+  });
+
+  it("are told in square feet where lengths are in inches: 0.12 m² are 1.3 ft²", async () => {
+    const { stock } = counted([one(1)]).context;
+    const [finding] = await findingsOf(stockOnHand, signOf(sheet("Midnight"), 3, 5), {
+      context: { stock, unit: "in" },
+    });
+    expect(finding?.text).toContain("about 1.5 ft² of Midnight, 0.118″");
+    expect(finding?.text).toContain("1.3 ft² are on hand");
   });
 
   it("say nothing until all of that thickness are counted", async () => {
@@ -106,7 +117,7 @@ describe("sheets on hand", () => {
     );
     const findings = await findingsOf(stockOnHand, buildSign(layers, { quantity: 2 }), counted([one(1)]));
     expect(findings).toMatchObject([{ layerKey: null, value: 0.17, limit: 0.12 }]);
-    expect(findings[0]?.text).toContain("(B, C, D)");
+    expect(findings[0]?.text).toContain("for B, C, D,");
   });
 });
 
