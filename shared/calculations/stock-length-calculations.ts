@@ -43,7 +43,7 @@ export const stockLengthCalculations: CalculationGroup = {
       title: "What a cut takes along the bar",
       formula: "kerf / sin(angle between blade and bar); the cut itself runs w · cot(angle) along a bar w wide.",
       source: { text: "Trigonometry", status: "calculated" },
-      limits: "15 to 90 degrees. A part with two angles is reckoned with the flatter one.",
+      limits: "1 to 90 degrees. A part with two angles is reckoned with the flatter one.",
       example: () => {
         const kerf = 3;
         const angle = 45;

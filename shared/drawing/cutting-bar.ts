@@ -29,7 +29,6 @@ export type BarStrip = {
  */
 export function drawBarStrip(strip: BarStrip): Item[] {
   const { bar, at, heightMm, scale, unit } = strip;
-  const x = (mm: number) => at.x + mm / scale;
   const whole = rectanglePath({ x: at.x, y: at.y, width: bar.lengthMm / scale, height: heightMm });
   const last = bar.places.at(-1);
   const end = last ? last.toMm + last.kerfMm : bar.squaringMm;
@@ -37,7 +36,7 @@ export function drawBarStrip(strip: BarStrip): Item[] {
   const fitsLeft = textWidthMm(left, "serif", smallTextMm) + 1.6 <= bar.leftMm / scale;
   const leftText = textItem(
     left,
-    { x: (x(Math.min(end, bar.lengthMm)) + x(bar.lengthMm)) / 2, y: textBase(strip) },
+    { x: xOf(strip, (Math.min(end, bar.lengthMm) + bar.lengthMm) / 2), y: textBase(strip) },
     {
       font: "serif",
       colour: graphite,
@@ -57,52 +56,55 @@ export function drawBarStrip(strip: BarStrip): Item[] {
   ];
 }
 
-/** Corners of a part on paper, clockwise from its upper left; a part shorter than its mitres comes to a point. */
-export function partCorners({ parts, widthMm, scale, at, heightMm }: BarStrip, place: PlacedPart): Point[] {
-  const { start = squareEnd, end = squareEnd } = parts.get(place.partId) ?? {};
-  const from = edgesOf(start, place.fromMm, cutRun(start, widthMm));
-  const to = edgesOf(end, place.toMm, -cutRun(end, widthMm));
-  const corner = (mm: number, y: number) => ({ x: at.x + mm / scale, y });
-  const upper = at.y;
-  const lower = at.y + heightMm;
-  if (from.upper >= to.upper || from.lower >= to.lower) {
-    const isUp = from.upper < to.upper;
-    const [left, right] = isUp ? [from.upper, to.upper] : [from.lower, to.lower];
-    const edge = isUp ? upper : lower;
-    return [corner(left, edge), corner(right, edge), corner((left + right) / 2, isUp ? lower : upper)];
+/** Corners of a part on paper, clockwise from its lower left; a part shorter than its mitres comes to a point. */
+export function partCorners(strip: BarStrip, place: PlacedPart): Point[] {
+  const { start = squareEnd, end = squareEnd } = strip.parts.get(place.partId) ?? {};
+  const from = profileOf(start, place.fromMm, cutRun(start, strip.widthMm));
+  const to = profileOf(end, place.toMm, -cutRun(end, strip.widthMm));
+  if (from.upper < to.upper && from.lower < to.lower) {
+    return [...pointsOf(strip, from), ...pointsOf(strip, to).reverse()];
   }
-  return [corner(from.upper, upper), corner(to.upper, upper), corner(to.lower, lower), corner(from.lower, lower)];
+  const isUp = from.upper < to.upper;
+  const [left, right] = isUp ? [from.upper, to.upper] : [from.lower, to.lower];
+  const { upper, lower } = edgeHeights(strip);
+  const edge = isUp ? upper : lower;
+  const tip = isUp ? lower : upper;
+  return [
+    { x: xOf(strip, Math.min(left, right)), y: edge },
+    { x: xOf(strip, Math.max(left, right)), y: edge },
+    { x: xOf(strip, (left + right) / 2), y: tip },
+  ];
 }
 
 function partItems(strip: BarStrip, place: PlacedPart): Item[] {
-  const corners = partCorners(strip, place);
   const outline: Item = {
     kind: "path",
     id: `part:${place.partId}`,
-    path: [polygonRing(corners)],
+    path: [polygonRing(partCorners(strip, place))],
     fill: linen,
     stroke: { colour: ink, widthMm: fineLineMm },
   };
-  const room = roomForText(corners);
-  if (textWidthMm(place.label, "sans-semibold", smallTextMm) + 1 > room.width) return [outline];
+  const { start = squareEnd, end = squareEnd } = strip.parts.get(place.partId) ?? {};
+  // A label stands at half height.
+  const left = xOf(strip, profileOf(start, place.fromMm, cutRun(start, strip.widthMm)).middle);
+  const right = xOf(strip, profileOf(end, place.toMm, -cutRun(end, strip.widthMm)).middle);
+  if (textWidthMm(place.label, "sans-semibold", smallTextMm) + 1 > right - left) return [outline];
   const style = { font: "sans-semibold", align: "middle" } as const;
-  return [outline, textItem(place.label, { x: room.middle, y: textBase(strip) }, style)];
+  return [outline, textItem(place.label, { x: (left + right) / 2, y: textBase(strip) }, style)];
 }
 
 /** The way of the blade behind a part. */
 function kerf(strip: BarStrip, place: PlacedPart): Item[] {
-  const { end = squareEnd } = strip.parts.get(place.partId) ?? {};
-  const { upper, lower } = edgesOf(end, place.toMm, -cutRun(end, strip.widthMm));
-  const corner = (mm: number, y: number) => ({ x: strip.at.x + mm / strip.scale, y });
-  const top = strip.at.y;
-  const bottom = top + strip.heightMm;
   if (place.kerfMm <= 0) return [];
-  const way = [
-    corner(upper, top),
-    corner(upper + place.kerfMm, top),
-    corner(lower + place.kerfMm, bottom),
-    corner(lower, bottom),
-  ];
+  const { end = squareEnd } = strip.parts.get(place.partId) ?? {};
+  const cut = profileOf(end, place.toMm, -cutRun(end, strip.widthMm));
+  const behind = {
+    upper: cut.upper + place.kerfMm,
+    middle: cut.middle + place.kerfMm,
+    lower: cut.lower + place.kerfMm,
+    isTip: cut.isTip,
+  };
+  const way = [...pointsOf(strip, cut), ...pointsOf(strip, behind).reverse()];
   return [{ kind: "path", path: [polygonRing(way)], fill: graphite }];
 }
 
@@ -116,17 +118,34 @@ function squaredOff({ bar, at, heightMm, scale }: BarStrip): Item[] {
 const cutRun = ({ angle }: BarEnd, widthMm: number): number =>
   angle === 90 ? 0 : widthMm / Math.tan((angle * Math.PI) / 180);
 
-/** Where a cut meets both edges: its long point at `mm`, the other `run` off. */
-function edgesOf({ longPoint }: BarEnd, mm: number, run: number): { upper: number; lower: number } {
-  return longPoint === "upper" ? { upper: mm, lower: mm + run } : { upper: mm + run, lower: mm };
+/** Where a cut crosses the bar, in mm along it. */
+type Profile = {
+  readonly upper: number;
+  readonly middle: number;
+  readonly lower: number;
+  /** Whether it has a corner in the middle. */
+  readonly isTip: boolean;
+};
+
+/** A cut with its long point at `mm`, which falls back by `run` over the bar's width. Two cuts that meet are drawn alike. */
+function profileOf({ longPoint }: BarEnd, mm: number, run: number): Profile {
+  if (longPoint === "middle") return { upper: mm + run / 2, middle: mm, lower: mm + run / 2, isTip: true };
+  const [upper, lower] = longPoint === "upper" ? [mm, mm + run] : [mm + run, mm];
+  return { upper, middle: mm + run / 2, lower, isTip: false };
 }
 
-/** Width at half height, where a label stands. */
-function roomForText(corners: readonly Point[]): { width: number; middle: number } {
-  const [a, b, c, d] = corners;
-  if (!a || !b || !c || !d) return { width: 0, middle: 0 };
-  const [left, right] = [(a.x + d.x) / 2, (b.x + c.x) / 2];
-  return { width: right - left, middle: (left + right) / 2 };
+/** A cut on paper, from the lower edge to the upper one. */
+function pointsOf(strip: BarStrip, { upper, middle, lower, isTip }: Profile): Point[] {
+  const heights = edgeHeights(strip);
+  const tip = { x: xOf(strip, middle), y: (heights.upper + heights.lower) / 2 };
+  return [
+    { x: xOf(strip, lower), y: heights.lower },
+    ...(isTip ? [tip] : []),
+    { x: xOf(strip, upper), y: heights.upper },
+  ];
 }
+
+const xOf = ({ at, scale }: BarStrip, mm: number): number => at.x + mm / scale;
+const edgeHeights = ({ at, heightMm }: BarStrip) => ({ upper: at.y, lower: at.y + heightMm });
 
 const textBase = ({ at, heightMm }: BarStrip): number => at.y + heightMm / 2 + (smallTextMm * capHeightShare) / 2;

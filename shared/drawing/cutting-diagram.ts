@@ -77,7 +77,8 @@ function blockOf(diagram: CuttingDiagram, bar: CutBar, number: number): Block {
   const stripMm = Math.min(mostStripMm, Math.max(leastStripMm, job.widthMm / scale));
   const label = job.stock.find(({ id }) => id === bar.stockId)?.label ?? "";
   const lines = wrapText(cutOrder(bar, parts, unit), "sans", smallTextMm, widthMm);
-  const left = `left ${formatLengthWithUnit(bar.leftMm, unit)}`;
+  const knots = job.saw.rejectShare > 0 ? ", knots included" : "";
+  const left = `left ${formatLengthWithUnit(bar.leftMm, unit)}${knots}`;
   return {
     heightMm: headMm + stripMm + 1.2 + lines.length * lineMm,
     draw: (y) => [

@@ -1,7 +1,7 @@
 import { checked, lengthRange, type Outcome, type Range, shareRange } from "../units/outcome.ts";
 
-/** Angles between blade and bar that are reckoned with, degrees. */
-export const bladeAngleRange: Range = { least: 15, most: 90 };
+/** Angles between blade and bar that are reckoned with, degrees; whether a saw can be set to them is another matter. */
+export const bladeAngleRange: Range = { least: 1, most: 90 };
 /** Blades: nothing up to 20 mm. */
 export const kerfRange: Range = { least: 0, most: 20 };
 /** What is cut off to square an end, mm. */

@@ -1,9 +1,9 @@
 /** An end of a part as the saw makes it. */
 export type BarEnd = {
-  /** Between blade and bar, degrees: 90 is square, 45 a mitre. */
+  /** Between blade and bar, degrees: 90 is square, 45 a mitre. Of two cuts at one end the flatter. */
   readonly angle: number;
-  /** The edge of the bar that the part reaches farther along; of no account at 90 degrees. */
-  readonly longPoint: "upper" | "lower";
+  /** The edge of the bar that the part reaches farther along, or between them where two cuts meet; of no account at 90 degrees. */
+  readonly longPoint: "upper" | "lower" | "middle";
 };
 
 /** A part to be cut from a bar, drawn lying: its start on the left, its face towards the viewer. */
@@ -56,5 +56,6 @@ export const squareEnd: BarEnd = { angle: 90, longPoint: "upper" };
 
 /** Whether both cuts of a part run the same way, so that parts can lie in each other. */
 export function hasParallelCuts({ start, end }: Pick<BarPart, "start" | "end">): boolean {
-  return start.angle === end.angle && start.angle < 90 && start.longPoint !== end.longPoint;
+  const isOneCut = start.longPoint !== "middle" && end.longPoint !== "middle";
+  return isOneCut && start.angle === end.angle && start.angle < 90 && start.longPoint !== end.longPoint;
 }

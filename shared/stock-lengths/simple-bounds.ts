@@ -49,3 +49,29 @@ export function longPiecesBound(packing: Packing): number {
 /** More than any packing costs that leaves no bar empty. */
 export const moreThanAny = (packing: Packing): number =>
   countPieces(packing) * Math.max(...packing.bars.map(({ cost }) => cost)) + 1;
+
+/** Sums of costs are looked through up to here; what is larger keeps its bound as it is. */
+const mostCostLookedThrough = 4_000_000;
+
+/**
+ * The least cost from `bound` on that any choice of bars comes to at all, `upTo` at most: bars cost what they cost, and not every
+ * sum is one of theirs. `bound` itself when the costs are too large to look through.
+ */
+export function payableFrom({ bars }: Packing, bound: number, upTo: number): number {
+  if (!(upTo <= mostCostLookedThrough) || bound >= upTo) return bound;
+  // For every sum whether it is one, and how many of the present bar it takes.
+  const isSum = new Uint8Array(upTo + 1);
+  isSum[0] = 1;
+  for (const { cost, onHand } of bars) {
+    if (cost === 0) continue;
+    const taken = new Uint32Array(upTo + 1);
+    for (let sum = cost; sum <= upTo; sum += 1) {
+      const count = (taken[sum - cost] ?? 0) + 1;
+      if (isSum[sum] === 1 || isSum[sum - cost] !== 1 || (onHand !== null && count > onHand)) continue;
+      isSum[sum] = 1;
+      taken[sum] = count;
+    }
+  }
+  const found = isSum.indexOf(1, bound);
+  return found < 0 ? upTo : found;
+}

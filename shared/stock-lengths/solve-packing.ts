@@ -3,7 +3,7 @@ import { diveForPacking } from "./dive.ts";
 import { packQuickly } from "./first-fit.ts";
 import { countPieces, gathered, type Packed, type Packing } from "./packing.ts";
 import { boundByPatterns } from "./pattern-bound.ts";
-import { lengthBound, longPiecesBound, moreThanAny } from "./simple-bounds.ts";
+import { lengthBound, longPiecesBound, moreThanAny, payableFrom } from "./simple-bounds.ts";
 import { type Effort, startMeter } from "./work-meter.ts";
 
 export type Solved = {
@@ -28,7 +28,11 @@ export function solvePacking(packing: Packing, effort: Effort = {}): Solved {
   const meter = startMeter(effort);
   const pieces = countPieces(packing);
   let packed = packQuickly(packing);
-  let bound = Math.max(lengthBound(packing), longPiecesBound(packing));
+  let bound = 0;
+  const raise = (found: number) => {
+    if (found > bound) bound = payableFrom(packing, found, packed?.cost ?? Number.POSITIVE_INFINITY);
+  };
+  raise(Math.max(lengthBound(packing), longPiecesBound(packing)));
   const isProved = () => packed !== null && packed.cost <= bound;
   const improve = (found: Packed | null) => {
     if (found && (packed === null || found.cost < packed.cost)) packed = found;
@@ -38,14 +42,14 @@ export function solvePacking(packing: Packing, effort: Effort = {}): Solved {
     const lessThan = packed?.cost ?? moreThanAny(packing);
     const found = completeBars(packing, { lessThan, enough: bound }, meter.within(work));
     improve(found.packed);
-    if (found.isProof) bound = Math.max(bound, packed?.cost ?? lessThan);
+    if (found.isProof) raise(packed?.cost ?? lessThan);
   };
 
   complete(meter.left() / 40);
   if (!isProved() && packing.items.length <= mostItemsToBound) {
     const enough = packed?.cost ?? Number.POSITIVE_INFINITY;
     const root = boundByPatterns(packing, { pool: [], enough, meter: meter.within(meter.left() / 2) });
-    bound = Math.max(bound, root.bound);
+    raise(root.bound);
     if (!isProved())
       improve(diveForPacking(packing, { best: packed, bound, pool: root.pool }, meter.within(meter.left() * 0.7)));
   }

@@ -47,8 +47,8 @@ function faultsOfBar({ parts, saw, stock, widthMm }: CuttingJob, bar: CutBar): s
     const startRun = widthMm / tangent(part.start.angle);
     const endRun = widthMm / tangent(part.end.angle);
     const from = {
-      upper: fromMm + (part.start.longPoint === "upper" ? 0 : startRun),
-      lower: fromMm + (part.start.longPoint === "lower" ? 0 : startRun),
+      upper: fromMm + (part.start.longPoint !== "lower" ? 0 : startRun),
+      lower: fromMm + (part.start.longPoint !== "upper" ? 0 : startRun),
     };
     const before = parts.find(({ id }) => id === bar.places[index - 1]?.partId);
     const gap = before ? Math.min(from.upper - upper, from.lower - lower) : fromMm;
@@ -56,8 +56,8 @@ function faultsOfBar({ parts, saw, stock, widthMm }: CuttingJob, bar: CutBar): s
       ? saw.kerfMm / Math.sin((Math.min(before.start.angle, before.end.angle) * Math.PI) / 180)
       : saw.squaringMm;
     if (gap < needed - hair) faults.push(`${gap} before ${partId}, ${needed} needed`);
-    upper = toMm - (part.end.longPoint === "upper" ? 0 : endRun);
-    lower = toMm - (part.end.longPoint === "lower" ? 0 : endRun);
+    upper = toMm - (part.end.longPoint !== "lower" ? 0 : endRun);
+    lower = toMm - (part.end.longPoint !== "upper" ? 0 : endRun);
     taken = Math.max(taken, upper, lower);
   }
   const usable = length * (1 - saw.rejectShare);

@@ -51,13 +51,22 @@ describe("a cutting diagram", () => {
     // 4.243 behind it, less the mitre: 20 + 500 + 4.243 − 40 = 484.243.
     const left = 0.125;
     const first = cornersOf(page, "part:S3");
-    expect(first.map(([x]) => x)).toEqual([4, 96, 104, 12].map((x) => expect.closeTo(x + left, 6)));
+    expect(first.map(([x]) => x)).toEqual([12, 4, 96, 104].map((x) => expect.closeTo(x + left, 6)));
     const second = cornersOf(page, "part:S1");
-    expect(second[0]?.[0]).toBeCloseTo(484.243 / 5 + left, 3);
+    expect(second[1]?.[0]).toBeCloseTo(484.243 / 5 + left, 3);
     // Drawn 8 mm high: 40 at 1:5.
-    expect((first[2]?.[1] ?? 0) - (first[0]?.[1] ?? 0)).toBeCloseTo(8, 9);
+    expect((first[0]?.[1] ?? 0) - (first[1]?.[1] ?? 0)).toBeCloseTo(8, 9);
     // A stub shorter than its mitre of 23 mm comes to a point.
     expect(cornersOf(page, "part:T")).toHaveLength(3);
+  });
+
+  it("draws an end of two cuts as a point", () => {
+    const tip = { angle: 45, longPoint: "middle" } as const;
+    const job = buildJob();
+    const parts = job.parts.slice(0, 1).map((part) => ({ ...part, end: tip }));
+    // 300 mm from 20 on: tip at 320, both edges 20 before it.
+    const corners = cornersOf(draw({ ...job, parts })[0], "part:S1");
+    expect(corners.map(([x]) => x)).toEqual([12, 4, 60, 64, 60].map((x) => expect.closeTo(x + 0.125, 6)));
   });
 
   it("says what to buy, the scale, the order of the cuts with lengths and saw settings, and what is left", () => {

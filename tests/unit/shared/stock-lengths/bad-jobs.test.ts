@@ -45,7 +45,7 @@ describe("a job that can't be planned is refused in words", () => {
     { quantity: 0, field: "parts.0.quantity", words: /at least 1/ },
     { quantity: 1.5, field: "parts.0.quantity", words: /whole number, not 1.5/ },
     { quantity: 1e9, field: "parts.0.quantity", words: /at most 20000/ },
-    { angle: 14, field: "parts.0.start.angle", words: /start of part S1 is 14°; it must be at least 15°/ },
+    { angle: 0, field: "parts.0.start.angle", words: /start of part S1 is 0°; it must be at least 1°/ },
     { angle: 135, field: "parts.0.end.angle", words: /at most 90°/ },
     { barMm: Number.POSITIVE_INFINITY, field: "stock.0.lengthMm", words: /length of the 8 ft strip must be a number/ },
     { price: -1, field: "stock.0.price", words: /price of the 8 ft strip is -1; it must be at least 0/ },
@@ -97,7 +97,7 @@ it("any numbers give a sound plan or words", () => {
   const changes = fc.record({
     lengthMm: mostly(0.1, 2400),
     quantity: whole(40),
-    angle: mostly(15, 90),
+    angle: mostly(1, 90),
     barMm: mostly(1500, 10_000),
     price: fc.option(whole(10_000)),
     onHand: fc.option(whole(60)),
@@ -166,6 +166,6 @@ describe("what a cut takes", () => {
         }
       }),
     );
-    expect(bladeAngleRange).toEqual({ least: 15, most: 90 });
+    expect(bladeAngleRange).toEqual({ least: 1, most: 90 });
   });
 });

@@ -6,7 +6,7 @@ import { fillBar } from "#shared/stock-lengths/fill-bar.ts";
 import { packQuickly } from "#shared/stock-lengths/first-fit.ts";
 import { costOfUses, loadOf, type Packed, type Packing, type Pattern } from "#shared/stock-lengths/packing.ts";
 import { boundByPatterns } from "#shared/stock-lengths/pattern-bound.ts";
-import { lengthBound, longPiecesBound, moreThanAny } from "#shared/stock-lengths/simple-bounds.ts";
+import { lengthBound, longPiecesBound, moreThanAny, payableFrom } from "#shared/stock-lengths/simple-bounds.ts";
 import { startMeter } from "#shared/stock-lengths/work-meter.ts";
 
 const plain = (room: number, sizes: readonly (readonly [size: number, demand: number])[]): Packing => ({
@@ -174,6 +174,22 @@ describe("bounds", () => {
     expect(bound).toBe(73);
     expect(values.reduce((sum, { value }) => sum + value, 0)).toBeCloseTo(72.916_666_667, 6);
     for (const { pattern } of values) expect(fits(rolls, pattern)).toBe(true);
+  });
+
+  it.each([
+    // Bars of 4 (one on hand) and 3: 3 4 6 7 9 10 12 13 …, never 8.
+    { bound: 5, upTo: 20, payable: 6 },
+    { bound: 8, upTo: 20, payable: 9 },
+    { bound: 11, upTo: 20, payable: 12 },
+    { bound: 14, upTo: 14, payable: 14 },
+    { bound: 14, upTo: 15, payable: 15 },
+    { bound: 8, upTo: 1e12, payable: 8 },
+  ])("of $bound rise to $payable, which bars can cost", ({ bound, upTo, payable }) => {
+    const bars = [
+      { room: 9, cost: 4, onHand: 1 },
+      { room: 9, cost: 3, onHand: null },
+    ];
+    expect(payableFrom({ items: [], setups: [], bars }, bound, upTo)).toBe(payable);
   });
 
   it("by patterns see what lengths don't: three to a bar of what fits twice", () => {
