@@ -27,24 +27,34 @@ export type Thing = {
   readonly raised: boolean;
 };
 
-/** What stands outward of the face of a held piece and over it, in document order. */
+/** Layers outward of one, with their pieces' figures. */
+type Outward = ReturnType<typeof layersWithFigures>;
+
+/** For the pieces of the layer at `level`, what stands outward of the face of each and over it, in document order. */
 export function thingsOver(
   input: Pick<RuleInput, "document" | "figures">,
   level: number,
-  piece: PieceFigures,
-): Thing[] {
+): (piece: PieceFigures) => readonly Thing[] {
+  const outward = layersWithFigures(input).slice(level + 1);
+  const known = new Map<string, readonly Thing[]>();
+  return (piece) => {
+    const things = known.get(piece.pieceId) ?? thingsOn(piece, outward);
+    known.set(piece.pieceId, things);
+    return things;
+  };
+}
+
+function thingsOn(piece: PieceFigures, outward: Outward): Thing[] {
   const face = piece.top.nominal;
-  return layersWithFigures(input)
-    .slice(level + 1)
-    .flatMap(({ layer, pieces }) => {
-      const over = pieces.filter(({ figures }) => figures.areaMm2 > 0 && boxesOverlap(figures.box, piece.box));
-      const raised = layer.hold.kind === "standoff";
-      const outward = over.filter(({ figures }) => isShorter(face, figures.top.nominal));
-      const things = outward.map(({ piece: one, figures }) => thingOf(pieceWords(layer, one), one, figures, raised));
-      const { hold } = layer;
-      if (hold.kind !== "standoff") return things;
-      return [...things, ...over.flatMap(({ figures }) => barrelsOn(face, layer.key, hold, figures))];
-    });
+  return outward.flatMap(({ layer, pieces }) => {
+    const over = pieces.filter(({ figures }) => figures.areaMm2 > 0 && boxesOverlap(figures.box, piece.box));
+    const raised = layer.hold.kind === "standoff";
+    const higher = over.filter(({ figures }) => isShorter(face, figures.top.nominal));
+    const things = higher.map(({ piece: one, figures }) => thingOf(pieceWords(layer, one), one, figures, raised));
+    const { hold } = layer;
+    if (hold.kind !== "standoff") return things;
+    return [...things, ...over.flatMap(({ figures }) => barrelsOn(face, layer.key, hold, figures))];
+  });
 }
 
 function thingOf(words: string, piece: Piece, figures: PieceFigures, raised: boolean): Thing {

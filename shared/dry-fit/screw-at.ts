@@ -25,13 +25,11 @@ export function fixingPlaces(
   ground: WoodGround = woodGround(input),
 ): FixingPlace[] {
   const { hold, level } = standing;
-  const overOf = new Map<string, ReturnType<typeof thingsOver>>();
+  const over = thingsOver(input, level);
   return hold.holes.flatMap((hole) => {
     const piece = pieceAt(standing, hole);
     if (!piece) return [];
-    const things = overOf.get(piece.pieceId) ?? thingsOver(input, level, piece);
-    overOf.set(piece.pieceId, things);
-    const { stack } = frontAt(hole, { hold, piece, things, clearanceMm: input.limits.capClearanceMm });
+    const { stack } = frontAt(hole, { hold, piece, things: over(piece), clearanceMm: input.limits.capClearanceMm });
     const wood = woodAt(input, ground, hole);
     const gapMm = wood ? footHeightMm(hold, piece) - wood.face : 0;
     return [{ hole, piece, stack, wood, gapMm }];

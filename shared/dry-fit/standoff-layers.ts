@@ -1,3 +1,4 @@
+import { boxesOverlap } from "../geometry/box.ts";
 import type { Hold, Hole, Layer } from "../mockup/document.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import { holdsPiece } from "../stack/held-piece.ts";
@@ -33,7 +34,10 @@ export function standoffLayerOf(
 
 /** The piece that a hole's standoff holds; null when it holds none. */
 export function pieceAt({ hold, pieces }: Pick<StandoffLayer, "hold" | "pieces">, hole: Hole): PieceFigures | null {
-  return pieces.find((piece) => holdsPiece(hold.hardware, piece.region, hole)) ?? null;
+  const { hardware } = hold;
+  const reach = hardware.kind === "edgeGrip" ? hardware.barrelDiameter / 2 : 0;
+  const place = { x: hole.x - reach, y: hole.y - reach, width: 2 * reach, height: 2 * reach };
+  return pieces.find(({ box, region }) => boxesOverlap(box, place) && holdsPiece(hardware, region, hole)) ?? null;
 }
 
 /** Height of what a held piece's barrels stand on, mm above the back of the board. */

@@ -41,33 +41,30 @@ function movedTo({ hold }: StandoffLayer, hole: Hole, place: Point, input: RuleI
   return window && !isEmptyWindow(window) ? { ...moved, diameter: intoWindow(hole.diameter, window) } : moved;
 }
 
-function fitsAt(standing: StandoffLayer, hole: Hole, input: RuleInput): (place: Point) => boolean {
-  const { hold, level, pieces } = standing;
+function fitsAt(layer: StandoffLayer, hole: Hole, input: RuleInput): (place: Point) => boolean {
+  const { hold, level } = layer;
   const { limits } = input;
   const { hardware } = hold;
-  const held = pieceAt(standing, hole);
-  const surroundings = new Map(
-    pieces.map((piece) => [
-      piece.pieceId,
-      { things: thingsOver(input, level, piece), ground: footGround(standing, piece, input) },
-    ]),
-  );
+  const held = pieceAt(layer, hole);
+  // A standoff goes on holding the piece that it holds; one that holds none may come to hold any.
+  const standing = held ? { ...layer, pieces: [held] } : layer;
+  const over = thingsOver(input, level);
+  const grounds = new Map(standing.pieces.map((piece) => [piece.pieceId, footGround(standing, piece, input)]));
   const apart = Math.max(hardware.barrelDiameter, seenDiameterMm(hardware));
   const others = hold.holes.filter((other) => other.id !== hole.id);
   return (place) => {
     if (others.some((other) => isShorter(Math.hypot(other.x - place.x, other.y - place.y), apart))) return false;
     const moved = movedTo(standing, hole, place, input);
     const piece = pieceAt(standing, moved);
-    if (!piece || (held && held.pieceId !== piece.pieceId)) return false;
+    const ground = piece && grounds.get(piece.pieceId);
+    if (!piece || !ground) return false;
     if (holeEdgeFault(standing, moved, limits)) return false;
     if (hardware.kind === "edgeGrip") {
       const overlap = edgeOverlapMm(hardware.barrelDiameter, piece.region, place);
       if (isShorter(overlap, limits.edgeGripMm) || isShorter(hardware.gripDepth, overlap)) return false;
     }
-    const around = surroundings.get(piece.pieceId);
-    if (!around) return false;
-    const { over, under } = frontAt(place, { hold, piece, things: around.things, clearanceMm: limits.capClearanceMm });
-    if (over.length > 0 || under.length > 0) return false;
-    return !isShorter(footShare(place, hardware.barrelDiameter, around.ground, input), limits.footShare);
+    const at = frontAt(place, { hold, piece, things: over(piece), clearanceMm: limits.capClearanceMm });
+    if (at.over.length > 0 || at.under.length > 0) return false;
+    return !isShorter(footShare(place, hardware.barrelDiameter, ground, input), limits.footShare);
   };
 }

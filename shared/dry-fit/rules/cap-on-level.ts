@@ -17,13 +17,11 @@ function check(input: RuleInput): Finding[] {
 
 function checkLayer(standing: StandoffLayer, input: RuleInput): Finding[] {
   const { hold, level } = standing;
-  const overOf = new Map<string, readonly Thing[]>();
+  const over = thingsOver(input, level);
   return hold.holes.flatMap((hole): Finding[] => {
     const piece = pieceAt(standing, hole);
     if (!piece) return [];
-    const things = overOf.get(piece.pieceId) ?? thingsOver(input, level, piece);
-    overOf.set(piece.pieceId, things);
-    const at = frontAt(hole, { hold, piece, things, clearanceMm: input.limits.capClearanceMm });
+    const at = frontAt(hole, { hold, piece, things: over(piece), clearanceMm: input.limits.capClearanceMm });
     const said = stepWords(standing, at, input) ?? lowWords(standing, at);
     if (!said) return [];
     return [
