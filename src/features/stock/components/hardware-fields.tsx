@@ -35,8 +35,8 @@ export function HardwareFields({
 }: {
   readonly unit: LengthUnit;
   readonly entry: Entry;
-  /** The screws in stock, to choose from. */
-  readonly screws: readonly WrittenScrew[];
+  /** The screws in stock, to choose from; null until they have come. */
+  readonly screws: readonly WrittenScrew[] | null;
   readonly faults: Faults;
   readonly onChange: (entry: Entry) => void;
 }) {

@@ -82,7 +82,7 @@ function KindFields({
         <HardwareFields
           unit={unit}
           entry={entry}
-          screws={(screws.data ?? []).map(({ screw }) => screw)}
+          screws={screws.isPending ? null : (screws.data ?? []).map(({ screw }) => screw)}
           faults={faults}
           onChange={onChange}
         />

@@ -18,13 +18,13 @@ export function ScrewChoice({
   onChange,
 }: {
   readonly unit: LengthUnit;
-  /** The screws in stock. */
-  readonly screws: readonly WrittenScrew[];
+  /** The screws in stock; null until they have come. */
+  readonly screws: readonly WrittenScrew[] | null;
   readonly screw: WrittenScrew;
   readonly faults: Faults;
   readonly onChange: (screw: WrittenScrew) => void;
 }) {
-  const stocked = screws.findIndex((one) => isSameScrew(one, screw));
+  const stocked = (screws ?? [screw]).findIndex((one) => isSameScrew(one, screw));
   const isBlank = isSameScrew(screw, blankScrew);
   const [describing, setDescribing] = useState(false);
   const isOwn = stocked === -1 && (describing || !isBlank);
@@ -32,10 +32,11 @@ export function ScrewChoice({
     <fieldset className="min-w-0 space-y-4">
       <Select
         label="Wood screw"
+        disabled={screws === null}
         error={isOwn ? undefined : isBlank ? blankFault(faults) : faultWithin(faults, "hardware.screw")}
         value={isOwn ? own : stocked === -1 ? "" : String(stocked)}
         onChange={(event) => {
-          const chosen = screws[Number(event.target.value)];
+          const chosen = screws?.[Number(event.target.value)];
           setDescribing(event.target.value === own);
           if (event.target.value === "") onChange(blankScrew);
           else if (event.target.value !== own && chosen) onChange(chosen);
@@ -43,7 +44,7 @@ export function ScrewChoice({
         }}
       >
         <option value="">Choose a screw</option>
-        {screws.map(({ name }, index) => (
+        {(screws ?? [screw]).map(({ name }, index) => (
           <option key={name} value={String(index)}>
             {name}
           </option>

@@ -1,5 +1,5 @@
 import { useRef } from "react";
-import { formatLengthWithUnit } from "#shared/units/format-length.ts";
+import { formatFine } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { LengthField } from "@/components/ui/length-field.tsx";
@@ -55,7 +55,7 @@ export function SheetRows({
               >
                 {options.map((mm) => (
                   <option key={mm} value={String(mm)}>
-                    {formatLengthWithUnit(mm, unit)}
+                    {formatFine(mm, unit)}
                   </option>
                 ))}
               </Select>

@@ -1,5 +1,5 @@
 import { type KeyboardEvent, useRef, useState } from "react";
-import { formatLengthWithUnit } from "#shared/units/format-length.ts";
+import { formatFine } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { LengthField } from "@/components/ui/length-field.tsx";
@@ -56,7 +56,7 @@ export function ThicknessChips({
       <div className="mt-2 min-h-11">
         <ul className="flex flex-wrap gap-2">
           {there.map((mm) => {
-            const words = formatLengthWithUnit(mm, unit);
+            const words = formatFine(mm, unit);
             return (
               <li key={mm} className="flex items-center border border-graphite bg-paper text-base tabular-nums">
                 <span className="pl-3">{words}</span>
