@@ -45,7 +45,7 @@ export function suggestLayers(colours: Artwork["colours"], acrylics: StockChoice
 /** Families in the order in which they are proposed: for acrylic on wood and for acrylic on acrylic (common practice). */
 const familiesFor = {
   wood: ["epoxy", "neutral silicone", "cyanoacrylate", "high-bond tape"],
-  acrylic: ["bodied cement", "solvent cement", "epoxy"],
+  acrylic: ["bodied cement", "solvent cement", "cyanoacrylate"],
 } as const satisfies Record<string, readonly Adhesive["family"][]>;
 
 /** The place in `optionsOfHold` of the adhesive proposed for a layer bonded on wood or on acrylic; the first hold when none suits. */
