@@ -6,8 +6,9 @@ import type { Kernel } from "#shared/geometry/kernel.ts";
 import { smallestBox } from "#shared/geometry/smallest-box.ts";
 import { nestSheets } from "#shared/sheets/nest-sheets.ts";
 import { boxPackedLengthMm } from "../support/box-packing.ts";
-import { expectSoundLayout, usedLengthMm } from "../support/check-layout.ts";
+import { expectSoundLayout } from "../support/check-layout.ts";
 import { buildPiece, buildRequest, buildSheet, concavePaths } from "../support/concave-pieces.ts";
+import { usedLengthMm } from "../support/used-length.ts";
 
 let kernel: Kernel;
 beforeAll(async () => {

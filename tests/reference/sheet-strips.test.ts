@@ -5,10 +5,11 @@ import type { Kernel } from "#shared/geometry/kernel.ts";
 import { rectanglePath } from "#shared/geometry/shapes.ts";
 import { nestSheets } from "#shared/sheets/nest-sheets.ts";
 import type { AllowedTurns } from "#shared/sheets/nesting.ts";
-import { expectSoundLayout, usedLengthMm } from "../support/check-layout.ts";
+import { expectSoundLayout } from "../support/check-layout.ts";
 import { checkReference } from "../support/check-reference.ts";
 import { buildPiece, buildRequest, buildSheet } from "../support/concave-pieces.ts";
 import { referenceJson } from "../support/reference-data.ts";
+import { usedLengthMm } from "../support/used-length.ts";
 
 // E. Hopper, B. C. H. Turton, European Journal of Operational Research 128(1), 34-57, 2001 (C); E. K. Burke, G. Kendall,
 // G. Whitwell, Operations Research 52(4), 655-671, 2004 (N). Every instance fills strip width times optimum height exactly.

@@ -3,7 +3,7 @@ import { loadKernel } from "#server/artwork/load-kernel.ts";
 import { boxOfRegion } from "#shared/geometry/box.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import type { Path } from "#shared/geometry/path.ts";
-import { polygonRing, rectanglePath } from "#shared/geometry/shapes.ts";
+import { circlePath, polygonRing, rectanglePath } from "#shared/geometry/shapes.ts";
 import { nestSheets } from "#shared/sheets/nest-sheets.ts";
 import type { NestingControl, NestingProgress, NestingRequest, SheetLayout } from "#shared/sheets/nesting.ts";
 import { expectSoundLayout } from "../../../support/check-layout.ts";
@@ -71,6 +71,26 @@ describe("where pieces go", () => {
     );
   });
 
+  it("no disc ends even a hundredth over the far margin, so that none must be taken out again", () => {
+    const disc = (radius: number) => circlePath({ x: 9, y: -4 }, radius);
+    const pieces = [
+      buildPiece("ring", annulus(21, 14.7)),
+      buildPiece("large", disc(25), { quantity: 2 }),
+      buildPiece("small", disc(5), { turns: { kind: "steps", from: 0, every: 45 } }),
+    ];
+    expect(
+      nested(buildRequest(pieces, [buildSheet(106, 106)], { rules: { marginMm: 5, kerfMm: 6 } })).unplaced,
+    ).toEqual([]);
+  });
+
+  it.each([
+    { radius: 50, sheets: 1 },
+    { radius: 50.01, sheets: 0 },
+  ])("$sheets discs of radius $radius go on a sheet that leaves 100", ({ radius, sheets }) => {
+    const pieces = [buildPiece("disc", circlePath({ x: 0, y: 0 }, radius), { turns: straight })];
+    expect(nested(buildRequest(pieces, [buildSheet(106, 106)])).sheets).toHaveLength(sheets);
+  });
+
   it("openings in a sheet and its slanting edge stay free", () => {
     const offcut: Path = [
       ...outline([0, 0], [500, 0], [400, 300], [0, 300]),
@@ -117,11 +137,15 @@ describe("which sheets are taken", () => {
   const small = buildSheet(300, 200, { id: "small" });
   const offcut = buildSheet(420, 310, { id: "offcut", quantity: 1, isOffcut: true });
 
+  // Larger than the small sheet, but counted half.
+  const scrap = buildSheet(320, 310, { id: "scrap", quantity: 1, isOffcut: true });
+
   it.each([
     { copies: 2, stock: [large, small], taken: ["small"] },
     { copies: 30, stock: [large, small], taken: ["large"] },
     { copies: 6, stock: [large, offcut], taken: ["offcut"] },
     { copies: 2, stock: [small, offcut], taken: ["small"] },
+    { copies: 2, stock: [small, scrap], taken: ["scrap"] },
     { copies: 60, stock: [large, offcut], taken: ["large", "offcut"] },
   ])("$copies squares go on $taken", ({ copies, stock, taken }) => {
     const layout = nested(buildRequest(squares(copies), stock, { rules: { marginMm: 5 } }));
