@@ -1,0 +1,93 @@
+import type { Kernel } from "../geometry/kernel.ts";
+import type { MockupDocument, Wood } from "../mockup/document.ts";
+import type { Slat, SlatCut } from "../slats/slat-layout.ts";
+import { hasParallelCuts } from "../slats/stock-taken.ts";
+import { frameOf, slatsOf } from "../stack/backer.ts";
+import { type BarEnd, type BarPart, type CuttingJob, squareEnd } from "../stock-lengths/cutting-job.ts";
+import { formatLength } from "../units/format-length.ts";
+import type { LengthUnit } from "../units/length.ts";
+import type { ShopSaws } from "./shop-saws.ts";
+
+/** Everything that is cut from bars of one wood and one section. */
+export type BarTask = {
+  readonly id: string;
+  readonly title: string;
+  readonly stock: Wood;
+  readonly widthMm: number;
+  readonly thicknessMm: number;
+  readonly job: CuttingJob;
+};
+
+/** What has to be cut from stock lengths: slats, spine, frame. What can't be laid asks for nothing; the dry fit says so. */
+export function barTasks({
+  document,
+  saws,
+  unit,
+  kernel,
+}: {
+  readonly document: MockupDocument;
+  readonly saws: ShopSaws;
+  readonly unit: LengthUnit;
+  readonly kernel: Kernel;
+}): BarTask[] {
+  const { backer, frame, quantity } = document;
+  const laid = slatsOf(document, kernel);
+  const round = frameOf(document, kernel);
+  const tasks: { what: string; stock: Wood; width: number; thickness: number; parts: BarPart[] }[] = [];
+  if (backer.slats && laid?.ok) {
+    const { stock, thickness, slatWidth, spineWidth } = backer.slats;
+    const parts = laid.value.slats.map((slat) => slatPart(slat, quantity));
+    tasks.push({ what: "Slats", stock, width: slatWidth, thickness, parts });
+    const { spine } = laid.value;
+    if (spine) {
+      const part = { id: "spine", label: "S", lengthMm: spine.length, quantity, start: squareEnd, end: squareEnd };
+      tasks.push({ what: "Spine", stock, width: spineWidth, thickness, parts: [part] });
+    }
+  }
+  if (frame && round?.ok) {
+    const parts = round.value.members.map(({ longPoint, settings }, index): BarPart => {
+      const [start, end] = settings.map((setting): BarEnd => ({ angle: 90 - setting, longPoint: "upper" }));
+      return {
+        id: `frame-${index + 1}`,
+        label: `F${index + 1}`,
+        lengthMm: longPoint,
+        quantity,
+        start: start ?? squareEnd,
+        end: end ?? squareEnd,
+      };
+    });
+    tasks.push({ what: "Frame", stock: frame.stock, width: frame.width, thickness: frame.depth, parts });
+  }
+  return tasks.map(({ what, stock, width, thickness, parts }) => ({
+    id: what.toLowerCase(),
+    title: `${what}: ${stock.name}, ${formatLength(width, unit)} × ${formatLength(thickness, unit)}${unit === "mm" ? " mm" : ""}`,
+    stock,
+    widthMm: width,
+    thicknessMm: thickness,
+    job: {
+      parts,
+      stock: [{ id: "usual", label: "bar", lengthMm: saws.barLengthMm, price: null, onHand: null }],
+      widthMm: width,
+      saw: { kerfMm: saws.sawKerfMm, squaringMm: saws.squaringMm, rejectShare: saws.rejectShare, nests: true },
+    },
+  }));
+}
+
+/** A slat lying on the saw, its near end left. Parallel cuts have their long points on opposite edges. */
+function slatPart(slat: Slat, quantity: number): BarPart {
+  const parallel = hasParallelCuts(slat);
+  return {
+    id: `slat-${slat.order}`,
+    label: String(slat.order),
+    lengthMm: slat.longPoint,
+    quantity,
+    start: endOf(slat.near, "upper"),
+    end: endOf(slat.far, parallel ? "lower" : "upper"),
+  };
+}
+
+function endOf(cuts: readonly SlatCut[], side: "upper" | "lower"): BarEnd {
+  const setting = cuts.reduce((most, cut) => Math.max(most, cut.setting), 0);
+  if (setting === 0) return squareEnd;
+  return { angle: 90 - setting, longPoint: cuts.length > 1 ? "middle" : side };
+}
