@@ -132,10 +132,53 @@ const turned = (radius: number, degrees: number): Point => ({
   x: middle.x + radius * Math.cos((degrees * Math.PI) / 180),
   y: middle.y + radius * Math.sin((degrees * Math.PI) / 180),
 });
-const ring = (radius: number, width: number): Path => [
-  ...circlePath(middle, radius + width / 2),
-  ...circlePath(middle, radius - width / 2),
-];
+type Planet = { readonly at: number; readonly radius: number };
+const rust: Planet = { at: 158, radius: 12 };
+const outer: Planet = { at: -24, radius: 13 };
+const moon: Planet = { at: 204, radius: 9 };
+
+/** A ring that is cut where planets lie, 0.3 mm off them, so that they lie on the disc and not on its edge. */
+function ring(radius: number, width: number, planets: readonly Planet[]): Path {
+  const gaps = planets
+    .map((planet) => ({ ...planet, half: (360 / Math.PI) * Math.asin((planet.radius + 0.3) / (2 * radius)) }))
+    .toSorted((a, b) => a.at - b.at);
+  if (gaps.length === 0) return [...circlePath(middle, radius + width / 2), ...circlePath(middle, radius - width / 2)];
+  return gaps.map(({ at, half }, index) => {
+    const next = gaps[index + 1] ?? gaps[0];
+    const end = next && (next.at > at ? next.at : next.at + 360) - next.half;
+    return band(radius, width, at + half, end ?? at + half);
+  });
+}
+
+/** A piece of a ring between two directions in degrees. */
+function band(radius: number, width: number, from: number, to: number): Ring {
+  const [wide, narrow] = [radius + width / 2, radius - width / 2];
+  const back = arc(narrow, to, from);
+  return {
+    start: turned(wide, from),
+    segments: [
+      ...arc(wide, from, to),
+      { kind: "line", to: turned(narrow, to) },
+      ...back,
+      { kind: "line", to: turned(wide, from) },
+    ],
+  };
+}
+
+/** An arc of cubics of 45° at the most; the handles are 4/3 tan(angle/4) of the radius. */
+function arc(radius: number, from: number, to: number): Segment[] {
+  const count = Math.ceil(Math.abs(to - from) / 45);
+  const step = (to - from) / count;
+  const handle = (4 / 3) * Math.tan((step * Math.PI) / 720) * radius;
+  return Array.from({ length: count }, (_, index): Segment => {
+    const [start, end] = [from + index * step, from + (index + 1) * step];
+    const along = (degrees: number, sign: 1 | -1): Point => {
+      const [on, radians] = [turned(radius, degrees), (degrees * Math.PI) / 180];
+      return { x: on.x - sign * handle * Math.sin(radians), y: on.y + sign * handle * Math.cos(radians) };
+    };
+    return { kind: "cubic", c1: along(start, 1), c2: along(end, -1), to: turned(radius, end) };
+  });
+}
 
 function layer(
   key: string,
@@ -198,7 +241,7 @@ export function orreryBooks(): MockupDocument {
       layer("C", "Orbits", acrylic("Brass, satin", brass), 3, {
         hold: cement,
         locate: "template",
-        pieces: [ring(98, 5), ring(70, 5), ring(42, 5)].map((path, index) =>
+        pieces: [ring(98, 5, [outer, moon]), ring(70, 5, [rust]), ring(42, 5, [])].map((path, index) =>
           pieceOf(`ring-${index + 1}`, `Orbit ${index + 1}`, path, brass),
         ),
       }),
@@ -210,14 +253,14 @@ export function orreryBooks(): MockupDocument {
       layer("E", "Rust planet", acrylic("Rust, matt", "#B14E3C"), 3, {
         hold: cement,
         locate: "scored line",
-        pieces: [planet("planet-rust", "Rust planet", turned(70, 158), 12, "#B14E3C")],
+        pieces: [planet("planet-rust", "Rust planet", turned(70, rust.at), rust.radius, "#B14E3C")],
       }),
       layer("F", "Chalk planets", acrylic("Chalk, matt", "#F3EEE6"), 3, {
         hold: cement,
         locate: "scored line",
         pieces: [
-          planet("planet-chalk-1", "Outer planet", turned(98, -24), 13, "#F3EEE6"),
-          planet("planet-chalk-2", "Outer moon", turned(98, 204), 9, "#F3EEE6"),
+          planet("planet-chalk-1", "Outer planet", turned(98, outer.at), outer.radius, "#F3EEE6"),
+          planet("planet-chalk-2", "Outer moon", turned(98, moon.at), moon.radius, "#F3EEE6"),
         ],
       }),
       layer("G", "Lettering", acrylic("Midnight, gloss", navy), 4.5, {

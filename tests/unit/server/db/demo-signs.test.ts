@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { importSvg } from "#server/artwork/import-svg.ts";
+import { importBytes } from "#server/artwork/import-bytes.ts";
 import { oarsSvg, orrerySvg, rackSvg } from "#server/db/demo/demo-artwork.ts";
 import { type DemoArtwork, oarsSign, orrerySign, rackSign } from "#server/db/demo/demo-signs.ts";
 import { documentSchema, type MockupDocument } from "#shared/mockup/document.ts";
@@ -7,7 +7,7 @@ import { dryFitOf } from "../../../support/dry-fit.ts";
 import { orreryBooks } from "../../../support/orrery-books.ts";
 
 async function artworkOf(svg: string): Promise<DemoArtwork> {
-  const outcome = await importSvg(Buffer.from(svg));
+  const outcome = await importBytes(Buffer.from(svg));
   if (!outcome.ok) throw new Error(outcome.refusal.text);
   return { artworkId: "0190a3c4-0000-7000-8000-000000000001", pieces: outcome.artwork.pieces };
 }
@@ -26,9 +26,10 @@ const ofPieces = [2, 3, 4, 17, 18, 19, 20, 28, 29, 30];
 const ofHardware = [6, 7, 8, 9, 10, 12, 13, 14, 16];
 
 describe("the signs that people see first", () => {
-  it.each(signs)("$name: nothing is wrong with its standoffs", async ({ build }) => {
+  it.each(signs)("$name: nothing stops it, and nothing is wrong with its standoffs", async ({ build }) => {
     const document = documentSchema.parse(await build());
     const findings = await dryFitOf(document);
+    expect(findings.filter(({ severity }) => severity === "stop")).toEqual([]);
     expect(findings.filter(({ rule }) => ofHardware.includes(rule))).toEqual([]);
   });
 

@@ -60,9 +60,9 @@ describe("the section", () => {
   });
 
   it("dimensions backer, offset, gap and the depth off the wall", () => {
-    // Highest is a planet: 20 + 19 + 4.5 + 3 + 3 = 49.5; with the gap of 6: 55.5.
+    // Highest is a cap: 20 + 19 + 4.5 + 4 = 47.5; with the gap of 6: 53.5.
     const texts = textBoxesOf(draw(1)).map(({ text }) => text);
-    expect(texts).toEqual(expect.arrayContaining(["20", "19", "6", "55.5"]));
+    expect(texts).toEqual(expect.arrayContaining(["20", "19", "6", "53.5"]));
   });
 
   it("has its board where it says, for the elevation to stand beside", () => {
