@@ -57,6 +57,11 @@ export function surfacesOf(
   return [backSurface(layer.stock), under ? "acrylic" : woodSurface(finish)];
 }
 
+/** The pieces of several joints, each once, though it lie on two things. */
+export function piecesOf(joints: readonly Joint[]): PieceWithFigures[] {
+  return [...new Map(joints.flatMap(({ pieces }) => pieces).map((one) => [one.piece.id, one])).values()];
+}
+
 /** What glues a layer, in the order it goes on. */
 export function adhesivesOf({ hold }: GluedLayer): GluedHold["adhesive"][] {
   return hold.kind === "bond" && hold.tack ? [hold.tack, hold.adhesive] : [hold.adhesive];

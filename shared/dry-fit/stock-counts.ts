@@ -124,17 +124,27 @@ function checkHardware({ document, context }: RuleInput): Finding[] {
   });
 }
 
-/** A board is planed down to its thickness, so only a thicker one than the shop has is missing. */
+/** Wood is planed down to its thickness, so only a thicker one than the shop has is missing. */
 function checkWood({ document, context }: RuleInput): Finding[] {
   const { woods } = context.stock;
-  const { stock, thickness } = document.backer;
+  const { backer, frame } = document;
   if (woods.length === 0) return [];
   const mm = (length: number) => formatFine(length, context.unit);
-  const base = { severity: "caution" as const, source: stockSource };
-  const entry = findEntry(woods, stock, ({ wood }) => wood);
-  if (!entry) return [foundBy(stockRule, { ...base, text: `${stock.name} of the backer is not in the stock list.` })];
-  const thickest = Math.max(0, ...entry.thicknessesMm);
-  if (thickness <= thickest + sameThicknessMm) return [];
-  const text = `The backer takes ${stock.name} in ${mm(thickness)}; the thickest in stock is ${mm(thickest)}.`;
-  return [foundBy(stockRule, { ...base, text, value: thickness, limit: thickest, unit: "mm" })];
+  const parts = [
+    { part: backer.slats ? "substrate" : "backer", stock: backer.stock, thicknessMm: backer.thickness },
+    ...(backer.slats ? [{ part: "slats", stock: backer.slats.stock, thicknessMm: backer.slats.thickness }] : []),
+    // A frame's stick lies either way up.
+    ...(frame ? [{ part: "frame", stock: frame.stock, thicknessMm: Math.min(frame.width, frame.depth) }] : []),
+  ];
+  return parts.flatMap(({ part, stock, thicknessMm }): Finding[] => {
+    const base = { severity: "caution" as const, source: stockSource };
+    const entry = findEntry(woods, stock, ({ wood }) => wood);
+    if (!entry) {
+      return [foundBy(stockRule, { ...base, text: `${stock.name} of the ${part} is not in the stock list.` })];
+    }
+    const thickest = Math.max(0, ...entry.thicknessesMm);
+    if (thicknessMm <= thickest + sameThicknessMm) return [];
+    const text = `For the ${part} the sign takes ${stock.name} in ${mm(thicknessMm)}; the thickest in stock is ${mm(thickest)}.`;
+    return [foundBy(stockRule, { ...base, text, value: thicknessMm, limit: thickest, unit: "mm" })];
+  });
 }

@@ -6,9 +6,10 @@ import {
   tackAndWick,
   waitingHours,
 } from "../../bonds/adhesive-families.ts";
+import { faceStock } from "../../stack/backer.ts";
 import type { Finding } from "../finding.ts";
 import { adhesiveMends, isSolvent } from "../fitting-adhesive.ts";
-import { adhesivesOf, type GluedLayer, type JoinedLayer, joinedLayers, surfacesOf } from "../joints.ts";
+import { adhesivesOf, type GluedLayer, type JoinedLayer, joinedLayers, piecesOf, surfacesOf } from "../joints.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 import { hoursWords, layerWords } from "../words.ts";
 
@@ -36,14 +37,19 @@ const surfaceWords: Readonly<Record<Surface, string>> = {
   "finished wood": "finished wood",
 };
 
+/** One stop for what lies on acrylic and one for what lies on the wood, though it be several things. */
 function misfitsOf({ layer, joints }: JoinedLayer, { document }: RuleInput): Finding[] {
-  return joints.flatMap(({ under, pieces }) => {
-    const surfaces = surfacesOf(layer, under, document);
+  const sides = [joints.filter(({ under }) => under === null), joints.filter(({ under }) => under !== null)];
+  return sides.flatMap((side): Finding[] => {
+    const [joint] = side;
+    if (!joint) return [];
+    const surfaces = surfacesOf(layer, joint.under, document);
     const [back, face] = surfaces;
+    const on = side.map(({ under }) => (under ? layerWords(under) : faceStock(document.backer).name)).join(" and ");
+    const pieces = piecesOf(side);
     for (const adhesive of adhesivesOf(layer)) {
       const fit = pairFit(adhesive.family, ...surfaces);
       if (fit.fits) continue;
-      const on = under ? `${layerWords(under)}` : document.backer.stock.name;
       return [
         foundBy(adhesiveFits, {
           severity: "stop",
@@ -62,7 +68,7 @@ function misfitsOf({ layer, joints }: JoinedLayer, { document }: RuleInput): Fin
 /** Solvent that runs along laser-cut edges in a pocket of acrylic. */
 function crazing({ layer, joints }: JoinedLayer): Finding[] {
   const { hold } = layer;
-  const pieces = joints.filter(({ under }) => under !== null).flatMap((joint) => joint.pieces);
+  const pieces = piecesOf(joints.filter(({ under }) => under !== null));
   if (hold.kind !== "pocket" || pieces.length === 0 || !isSolvent(hold.adhesive)) return [];
   const edges = hold.cut === "engraved" ? "the engraved pocket and the piece's laser-cut edge" : "the laser-cut edge";
   return [

@@ -1,5 +1,6 @@
 import { familyFacts } from "../../bonds/adhesive-families.ts";
 import { isShorter } from "../../geometry/tolerance.ts";
+import { faceStock } from "../../stack/backer.ts";
 import { formatFine } from "../../units/format-length.ts";
 import { allowedMovementMm, jointMovements } from "../bond-movement.ts";
 import type { Finding } from "../finding.ts";
@@ -40,7 +41,7 @@ function check(input: RuleInput): Finding[] {
     return [
       foundBy(bondMismatch, {
         severity: "caution",
-        text: `${piecesWords(layer, parting)} and the ${document.backer.stock.name} under ${parting.length === 1 ? "it" : "them"} part by up to ${mm(worst.movement)} at the bond's ends; ${stiffest.name} of ${layerWords(layer)} takes ${mm(allowed)}. ${way}`,
+        text: `${piecesWords(layer, parting)} and the ${faceStock(document.backer).name} under ${parting.length === 1 ? "it" : "them"} part by up to ${mm(worst.movement)} at the bond's ends; ${stiffest.name} of ${layerWords(layer)} takes ${mm(allowed)}. ${way}`,
         layerKey: layer.key,
         pieceIds: parting.map(({ piece }) => piece.id),
         where: worst.figures.centroid,

@@ -6,11 +6,12 @@ import { isShorter } from "../../geometry/tolerance.ts";
 import { sheetBand } from "../../materials/sheet-tolerance.ts";
 import { countOf } from "../../mockup/change.ts";
 import type { Hold, Layer } from "../../mockup/document.ts";
+import { backerThicknessMm, faceStock } from "../../stack/backer.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
 import { type Banded, exactly } from "../../units/banded.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
-import { type JoinedLayer, joinedLayers, type PieceWithFigures } from "../joints.ts";
+import { type JoinedLayer, joinedLayers, type PieceWithFigures, piecesOf } from "../joints.ts";
 import type { Limits } from "../limits.ts";
 import type { Mend } from "../mend.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -37,7 +38,7 @@ function pocketed(input: RuleInput): Pocketed[] {
 
 /** How thick what a pocket is cut into may be. */
 function cutBand(under: Layer | null, { document }: Pick<RuleInput, "document">): Banded {
-  return under ? sheetBand(under.stock.process, under.thickness) : exactly(document.backer.thickness);
+  return under ? sheetBand(under.stock.process, under.thickness) : exactly(backerThicknessMm(document.backer));
 }
 
 function checkFloor({ layer, hold, joints }: Pocketed, input: RuleInput): Finding[] {
@@ -47,7 +48,7 @@ function checkFloor({ layer, hold, joints }: Pocketed, input: RuleInput): Findin
     const floor = pocketFloor(band, hold.depth, { share: input.limits.pocketFloorShare });
     if (!floor.ok || floor.value.holds) return [];
     const { floorMm, neededMm } = floor.value;
-    const what = under ? layerWords(under) : `the ${input.document.backer.stock.name}`;
+    const what = under ? layerWords(under) : `the ${faceStock(input.document.backer).name}`;
     const left = floorMm > 0 ? `can leave only ${mm(floorMm)} of` : "can come through";
     return [
       foundBy(pocket, {
@@ -128,11 +129,6 @@ function checkCorners(
       source,
     }),
   ];
-}
-
-/** Each piece once, though it may lie on two things. */
-function piecesOf(joints: JoinedLayer["joints"]): PieceWithFigures[] {
-  return [...new Map(joints.flatMap(({ pieces }) => pieces).map((one) => [one.piece.id, one])).values()];
 }
 
 /** A shallower pocket leaves the floor, another clearance the gap; a sharp corner is the maker's to decide. */

@@ -67,6 +67,18 @@ describe("an adhesive between two surfaces", () => {
     );
   });
 
+  it("a layer across two plates of one height is one stop", async () => {
+    const plates = ["B", "C"].map((key, index) =>
+      buildLayer(key, [plate(`p${key}`, 15, 15, [300 + 15 * index, 200])], { hold: bond("cyanoacrylate") }),
+    );
+    const across = buildLayer("D", [plate("d", 20, 10, [307, 200])], { hold: bond("epoxy") });
+    const stops = (await findingsOf(adhesiveFits, buildSign([...plates, across]))).filter(
+      ({ severity }) => severity === "stop",
+    );
+    expect(stops).toMatchObject([{ layerKey: "D", pieceIds: ["d"] }]);
+    expect(stops[0]?.text).toMatch(/acrylic to acrylic \((B, Layer B and C, Layer C|C, Layer C and B, Layer B)\)/);
+  });
+
   it("a tack must fit too", async () => {
     expect(await severitiesOf(onWood(bond("epoxy", adhesive("bodied cement"))), "B")).toEqual(["stop"]);
   });

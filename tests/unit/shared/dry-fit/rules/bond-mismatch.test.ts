@@ -97,6 +97,33 @@ describe("on pine", () => {
   });
 });
 
+// Red oak moves 0.00369 a point: a slat of 12 mm by 6 · (0.0014 + 0.01476), 0.097; one of 13 mm by 0.105. The substrate's
+// grain runs along the piece.
+it.each([
+  { slatWidth: 12, values: [] },
+  { slatWidth: 13, values: [0.11] },
+])("a piece on slats of $slatWidth mm parts from each of them: $values", async ({ slatWidth, values }) => {
+  const plain = signOf(60, 10);
+  const oak = standardStock.woods.find(({ wood }) => wood.name === "Red oak")?.wood;
+  if (!oak) throw new Error("There is no red oak.");
+  const slats: MockupDocument["backer"]["slats"] = {
+    stock: oak,
+    thickness: 9,
+    pattern: "single",
+    angle: 90,
+    slatWidth,
+    gap: 0,
+    spineWidth: 10,
+    spineOffset: 0,
+    start: { kind: "corner" },
+    direction: "up",
+    overhang: 0,
+  };
+  const findings = await findingsOf(bondMismatch, { ...plain, backer: { ...plain.backer, slats } });
+  expect(findings.map(({ value }) => value)).toEqual(values);
+  for (const { text } of findings) expect(text).toContain("the Red oak under it");
+});
+
 it("acrylic on acrylic moves as one", async () => {
   const sign = buildSign([
     buildLayer("B", [plate("base", 500, 300, [300, 200])], { hold: bond("neutral silicone") }),

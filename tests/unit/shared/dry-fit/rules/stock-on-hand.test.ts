@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { stockOnHand } from "#shared/dry-fit/rules/stock-on-hand.ts";
 import { standardAcrylics, standardStandoffs, standardStock } from "#shared/materials/standard-stock.ts";
 import type { SheetsOnHand, Stock } from "#shared/materials/stock.ts";
-import type { Acrylic } from "#shared/mockup/document.ts";
+import type { Acrylic, MockupDocument } from "#shared/mockup/document.ts";
 import { buildCapStud, buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
 import { triedMends } from "../../../../support/mend-findings.ts";
@@ -163,6 +163,31 @@ it.each([
   const sign = buildSign([]);
   const findings = await findingsOf(stockOnHand, { ...sign, backer: { ...sign.backer, thickness } });
   expect(findings.map(({ value, limit }) => [value, limit])).toEqual(count === 0 ? [] : [[26, 25]]);
+});
+
+it("slats and frame are asked for too, a frame by its thinner side", async () => {
+  const sign = buildSign([]);
+  const oak = standardStock.woods.find(({ wood }) => wood.name === "Red oak")?.wood;
+  if (!oak) throw new Error("There is no red oak.");
+  const slats: MockupDocument["backer"]["slats"] = {
+    stock: { ...oak, name: "Bog oak" },
+    thickness: 9,
+    pattern: "single",
+    angle: 90,
+    slatWidth: 40,
+    gap: 0,
+    spineWidth: 10,
+    spineOffset: 0,
+    start: { kind: "corner" },
+    direction: "up",
+    overhang: 0,
+  };
+  const frame = (width: number, depth: number) => ({ stock: oak, width, depth, mitred: true });
+  const withSlats = { ...sign, backer: { ...sign.backer, slats }, frame: frame(60, 25) };
+  expect((await findingsOf(stockOnHand, withSlats)).map(({ text }) => text)).toEqual([
+    "Bog oak of the slats is not in the stock list.",
+  ]);
+  expect(await findingsOf(stockOnHand, { ...sign, frame: frame(26, 60) })).toMatchObject([{ value: 26, limit: 25 }]);
 });
 
 it("wood that is not in the list is missing", async () => {
