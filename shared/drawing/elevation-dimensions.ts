@@ -2,6 +2,7 @@ import { boxContains, boxUnion } from "../geometry/box.ts";
 import type { Box } from "../geometry/path.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
+import { signBox } from "../stack/sign-box.ts";
 import { formatLength } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { type Dimension, dimensionFits, dimensionRowMm, drawDimensions, type PaperScale } from "./dimensions.ts";
@@ -56,11 +57,17 @@ function letteringOf({ from, to }: { from: number; to: number }, named: string, 
   return dimensionFits({ from, to, text: whole }, input.paperScale) ? whole : length;
 }
 
+/** The lower or right edge of the whole sign, outside which these dimensions stand. */
+function farEdge({ document }: DimensionInput, axis: "x" | "y"): number {
+  const { x, y, width, height } = signBox(document);
+  return axis === "x" ? y + height : x + width;
+}
+
 /** Edge of the board to the layer, the layer, the layer to the other edge. Steps of nothing are left out. */
 function chainDimensions(layer: Measured, axis: "x" | "y", at: number, input: DimensionInput): Dimension[] {
   const { board } = input.document;
   const end = axis === "x" ? board.width : board.height;
-  const thing = axis === "x" ? board.height : board.width;
+  const thing = farEdge(input, axis);
   const from = layer.box[axis];
   const to = from + (axis === "x" ? layer.box.width : layer.box.height);
   const steps = [
@@ -82,8 +89,7 @@ function chainDimensions(layer: Measured, axis: "x" | "y", at: number, input: Di
 }
 
 function rowsOf(input: DimensionInput, axis: "x" | "y"): Dimension[] {
-  const { board } = input.document;
-  const thing = axis === "x" ? board.height : board.width;
+  const thing = farEdge(input, axis);
   const holes = holeSpread(input, axis);
   const row = (index: number) => thing + dimensionRowMm * (index + 1) * input.paperScale;
   const inner: Dimension[] =
@@ -106,31 +112,30 @@ function rowsOf(input: DimensionInput, axis: "x" | "y"): Dimension[] {
   return [...inner, ...chains];
 }
 
-function overallDimensions({ document: { board }, unit, paperScale }: DimensionInput): Dimension[] {
-  const away = -dimensionRowMm * paperScale;
+/** The whole sign's measures above and at the left; inside a frame the body's too, in a row nearer to it. */
+function overallDimensions(input: DimensionInput): Dimension[] {
+  const { document, unit, paperScale } = input;
+  const { board, frame } = document;
+  const whole = signBox(document);
+  const away = (edge: number, rows: number) => edge - dimensionRowMm * rows * paperScale;
+  const framed = frame !== null && whole.width > board.width;
+  const measure = (axis: "x" | "y", from: number, to: number, rows: number): Dimension => {
+    const thing = axis === "x" ? whole.y : whole.x;
+    return { axis, from, to, at: away(thing, rows), thing, text: formatLength(to - from, unit), overflow: "after" };
+  };
+  const body = (axis: "x" | "y", to: number): Dimension => {
+    const plain = measure(axis, 0, to, 1);
+    return { ...plain, text: letteringOf(plain, "body ", input) };
+  };
+  const rows = framed ? 2 : 1;
   return [
-    {
-      axis: "x",
-      from: 0,
-      to: board.width,
-      at: away,
-      thing: 0,
-      text: formatLength(board.width, unit),
-      overflow: "after",
-    },
-    {
-      axis: "y",
-      from: 0,
-      to: board.height,
-      at: away,
-      thing: 0,
-      text: formatLength(board.height, unit),
-      overflow: "after",
-    },
+    ...(framed ? [body("x", board.width), body("y", board.height)] : []),
+    measure("x", whole.x, whole.x + whole.width, rows),
+    measure("y", whole.y, whole.y + whole.height, rows),
   ];
 }
 
-/** Room the dimensions need around the board, in mm of the sign: rows, and lettering that stands beside a short step. */
+/** Room around the board that a frame and the dimensions need, in mm of the sign: rows, and lettering that stands beside a short step. */
 export function dimensionMargins(input: DimensionInput): { left: number; top: number; right: number; bottom: number } {
   const { paperScale } = input;
   const rows = (axis: "x" | "y") => new Set(rowsOf(input, axis).map(({ at }) => at)).size;
@@ -143,13 +148,19 @@ export function dimensionMargins(input: DimensionInput): { left: number; top: nu
       .reduce((most, { text }) => Math.max(most, textWidthMm(text, "serif", smallTextMm) + 7), 0);
   const under = (dimensions: readonly Dimension[]) =>
     dimensions.some((dimension) => dimension.overflow === "under" && !dimensionFits(dimension, paperScale)) ? 3.2 : 0;
-  const first = dimensionRowMm + 5;
+  const { x, y, width, height } = signBox(input.document);
+  const { board, frame } = input.document;
+  const first = dimensionRowMm * (frame !== null && width > board.width ? 2 : 1) + 5;
   const past = 2.5;
   return {
-    left: Math.max(first, beside(below, "before")) * paperScale,
-    top: Math.max(first, beside(right, "before")) * paperScale,
-    right: Math.max(dimensionRowMm * rows("y") + past + under(right), beside(below, "after")) * paperScale,
-    bottom: Math.max(dimensionRowMm * rows("x") + past + under(below), beside(right, "after")) * paperScale,
+    left: Math.max(first, beside(below, "before")) * paperScale - x,
+    top: Math.max(first, beside(right, "before")) * paperScale - y,
+    right:
+      Math.max(dimensionRowMm * rows("y") + past + under(right), beside(below, "after")) * paperScale +
+      (x + width - board.width),
+    bottom:
+      Math.max(dimensionRowMm * rows("x") + past + under(below), beside(right, "after")) * paperScale +
+      (y + height - board.height),
   };
 }
 

@@ -6,17 +6,18 @@ import type { Box, Path, Region } from "../geometry/path.ts";
 import { pathOfRegion } from "../geometry/path-of-region.ts";
 import { placePath } from "../geometry/placement.ts";
 import { circlePath } from "../geometry/shapes.ts";
-import type { Acrylic, Layer, MockupDocument } from "../mockup/document.ts";
+import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
+import { drawAcrylic } from "./acrylic-look.ts";
 import type { Item } from "./display-list.ts";
 import { type Cylinder, discRegion, drawFront, type PlacedStandoff } from "./hardware.ts";
-import { mixColours } from "./palette.ts";
 import { shadowItem } from "./shadow.ts";
 import type { Caster } from "./shadow-sweep.ts";
 
 /** One thing of the picture: what draws it, what it covers and between which heights it stands. */
 type Solid = {
-  readonly layerKey: string;
+  /** Null for what belongs to no layer. */
+  readonly layerKey: string | null;
   readonly items: readonly Item[];
   readonly region: Region;
   readonly bottom: number;
@@ -24,45 +25,8 @@ type Solid = {
   readonly castsShadow: boolean;
 };
 
-const lookOpacity: Readonly<Record<Acrylic["look"], number>> = { opaque: 1, mirror: 1, frosted: 0.82, clear: 0.3 };
-
-/** Streaks across a mirrored piece, which has no colour of its own to be known by. */
-function mirrorStreaks(path: Path, box: Box): Item {
-  const streak = (from: number, width: number): Item => {
-    const left = box.x + box.width * from;
-    const shift = box.height * 0.6;
-    const right = left + box.width * width;
-    const bottom = box.y + box.height;
-    const corners = [
-      { x: left + shift, y: box.y },
-      { x: right + shift, y: box.y },
-      { x: right - shift, y: bottom },
-      { x: left - shift, y: bottom },
-    ] as const;
-    return {
-      kind: "path",
-      path: [{ start: corners[0], segments: corners.slice(1).map((to) => ({ kind: "line" as const, to })) }],
-      fill: "#FFFFFF",
-      opacity: 0.3,
-    };
-  };
-  return { kind: "clip", clip: path, items: [streak(0.12, 0.16), streak(0.36, 0.05), streak(0.68, 0.1)] };
-}
-
-function drawPiece(id: string, layer: Layer, path: Path, box: Box, lineMm: number): Item[] {
-  const { colour, look } = layer.stock;
-  const body: Item = {
-    kind: "path",
-    id,
-    path,
-    fill: look === "mirror" ? mixColours(colour, "#FFFFFF", 0.18) : colour,
-    ...(lookOpacity[look] < 1 ? { opacity: lookOpacity[look] } : {}),
-  };
-  const edge: Item = { kind: "path", path, stroke: { colour: mixColours(colour, "#14110D", 0.45), widthMm: lineMm } };
-  return [body, ...(look === "mirror" ? [mirrorStreaks(path, box)] : []), edge];
-}
-
 function pieceSolids(document: MockupDocument, figures: Figures, lineMm: number): Solid[] {
+  const { light } = document.presentation;
   return document.layers.flatMap((layer) => {
     if (layer.hidden) return [];
     const holes = layer.hold.kind === "standoff" ? layer.hold.holes : [];
@@ -77,7 +41,15 @@ function pieceSolids(document: MockupDocument, figures: Figures, lineMm: number)
       return [
         {
           layerKey: layer.key,
-          items: drawPiece(piece.id, layer, path, known.box, lineMm),
+          items: drawAcrylic({
+            id: piece.id,
+            path,
+            box: known.box,
+            stock: layer.stock,
+            thicknessMm: layer.thickness,
+            light,
+            lineMm,
+          }),
           region: known.region,
           bottom: known.bottom.nominal,
           top: known.top.nominal,
@@ -117,7 +89,7 @@ function levelsOf(solids: readonly Solid[]): Solid[][] {
 
 /** Neighbours of one layer share a group that carries the layer's name. */
 function groupedByLayer(solids: readonly Solid[]): Item[] {
-  const groups: { layerKey: string; items: Item[] }[] = [];
+  const groups: { layerKey: string | null; items: Item[] }[] = [];
   for (const { layerKey, items } of solids) {
     const last = groups.at(-1);
     if (last?.layerKey === layerKey) last.items.push(...items);
@@ -125,7 +97,9 @@ function groupedByLayer(solids: readonly Solid[]): Item[] {
   }
   return groups
     .filter(({ items }) => items.length > 0)
-    .map(({ layerKey, items }) => ({ kind: "group", id: `layer:${layerKey}`, x: 0, y: 0, scale: 1, items }));
+    .flatMap(({ layerKey, items }): Item[] =>
+      layerKey === null ? items : [{ kind: "group", id: `layer:${layerKey}`, x: 0, y: 0, scale: 1, items }],
+    );
 }
 
 export type SignInput = {
@@ -135,7 +109,15 @@ export type SignInput = {
   readonly standoffs: readonly PlacedStandoff[];
   /** Width of the fine edge around each piece. */
   readonly lineMm: number;
+  /** The frame round the board with its picture; null without one. */
+  readonly frame: { readonly region: Region; readonly items: readonly Item[] } | null;
 };
+
+/** A frame stands on the wall's side of everything and reaches to its depth, in front of the board's face or behind it. */
+function frameSolids({ document, frame }: SignInput): Solid[] {
+  if (!frame || !document.frame) return [];
+  return [{ ...frame, layerKey: null, bottom: 0, top: document.frame.depth, castsShadow: true }];
+}
 
 /**
  * All that stands before the backer, lowest first, each level followed by the shadow that falls on it. The backer's own picture and shadow
@@ -148,10 +130,12 @@ export function drawSolids(
   const { document, figures, kernel, standoffs, lineMm } = input;
   const { light } = document.presentation;
   const solids = [
+    ...frameSolids(input),
     ...pieceSolids(document, figures, lineMm),
     ...standoffs.flatMap((standoff) => standoffSolids(standoff, light, lineMm)),
   ];
-  const casters: Caster[] = solids.filter(({ castsShadow }) => castsShadow);
+  const body: Caster = { region: flattenPath(board.outline), bottom: 0, top: figures.backerTop.nominal };
+  const casters: Caster[] = [body, ...solids.filter(({ castsShadow }) => castsShadow)];
   const shadowOn = (level: number, clip: Path, receivers: readonly Box[]): Item[] => {
     const shadow = shadowItem({
       light,
@@ -175,7 +159,8 @@ export function drawSolids(
 const wallStrength = 0.26;
 
 /** The board's own shadow on the wall behind it; nothing when it lies flat against the wall and throws none. */
-export function drawWallShadow({ document, figures, standoffs }: SignInput, board: Path, wall: Box): Item[] {
+export function drawWallShadow(sign: SignInput, board: Path, wall: Box): Item[] {
+  const { document, figures, standoffs } = sign;
   const { light } = document.presentation;
   const level = -document.hanging.gap;
   const pieces = figures.pieces.filter(({ layerKey }) =>
@@ -183,6 +168,7 @@ export function drawWallShadow({ document, figures, standoffs }: SignInput, boar
   );
   const casters: Caster[] = [
     { region: flattenPath(board), bottom: 0, top: figures.backerTop.nominal },
+    ...frameSolids(sign),
     ...pieces.map(({ region, bottom, top }) => ({ region, bottom: bottom.nominal, top: top.nominal })),
     ...standoffs.flatMap(({ hole, front }) =>
       front ? [{ region: discRegion(hole, front.diameter), bottom: front.from, top: front.to }] : [],

@@ -1,20 +1,21 @@
 import type { Kernel } from "../geometry/kernel.ts";
-import type { Box, Path, Point } from "../geometry/path.ts";
+import type { Point } from "../geometry/path.ts";
 import { rectanglePath } from "../geometry/shapes.ts";
 import type { MockupDocument } from "../mockup/document.ts";
-import { faceStock } from "../stack/backer.ts";
+import { frameOf } from "../stack/backer.ts";
 import { boardPath } from "../stack/board-outline.ts";
 import type { Figures } from "../stack/figures.ts";
+import { signBox } from "../stack/sign-box.ts";
 import type { LengthUnit } from "../units/length.ts";
-import { outlineMm, type PaperScale } from "./dimensions.ts";
+import { drawBoardFace } from "./board-face.ts";
+import type { PaperScale } from "./dimensions.ts";
 import type { DisplayList, Item } from "./display-list.ts";
 import { dimensionMargins, drawElevationDimensions } from "./elevation-dimensions.ts";
 import { drawSolids, drawWallShadow } from "./elevation-pieces.ts";
-import { faceColour } from "./face-colour.ts";
+import { drawFrameFace } from "./frame-face.ts";
 import { placedStandoffs } from "./hardware.ts";
 import { shadowOffsetMm } from "./light.ts";
-import { mixColours, sheetWhite } from "./palette.ts";
-import { woodGrain } from "./wood-grain.ts";
+import { sheetWhite } from "./palette.ts";
 
 export type ElevationInput = {
   readonly document: MockupDocument;
@@ -39,9 +40,13 @@ const bareMargin = 0.09;
 
 /** Room around a sign without dimensions: a share of its longer side, or what the board's shadow on the wall needs if that is more. */
 function bareMarginMm({ document, figures }: Pick<ElevationInput, "document" | "figures">): number {
-  const { board, hanging, presentation } = document;
-  const longer = Math.max(board.width, board.height);
-  const fall = shadowOffsetMm(figures.backerTop.nominal + hanging.gap, presentation.light);
+  const { hanging, presentation } = document;
+  const { width, height } = signBox(document);
+  const longer = Math.max(width, height);
+  const fall = shadowOffsetMm(
+    Math.max(figures.backerTop.nominal, document.frame?.depth ?? 0) + hanging.gap,
+    presentation.light,
+  );
   return Math.max(longer * bareMargin, Math.min(fall * 1.35, longer / 2));
 }
 
@@ -49,24 +54,6 @@ function bareMarginMm({ document, figures }: Pick<ElevationInput, "document" | "
 export function boardOriginOf(list: DisplayList): Point | null {
   const plane = list.items.find((item) => item.kind === "group" && item.id === boardPlaneId);
   return plane?.kind === "group" ? { x: plane.x, y: plane.y } : null;
-}
-
-function drawBoard({ document, texture, paperScale }: ElevationInput, box: Box, outline: Path): Item[] {
-  const { name } = faceStock(document.backer);
-  const colour = faceColour(document.backer);
-  const seed = [...name].reduce((sum, character) => (sum * 31 + (character.codePointAt(0) ?? 0)) % 9973, 17);
-  const face: Item = texture
-    ? { kind: "image", box, pngBase64: texture.pngBase64 }
-    : woodGrain(box, colour, seed, document.backer.grainTurn);
-  return [
-    { kind: "path", id: "board", path: outline, fill: colour },
-    { kind: "clip", clip: outline, items: [face] },
-    {
-      kind: "path",
-      path: outline,
-      stroke: { colour: mixColours(colour, "#2A1E0C", 0.68), widthMm: outlineMm * 0.9 * paperScale },
-    },
-  ];
 }
 
 /**
@@ -79,8 +66,17 @@ export function drawElevation(input: ElevationInput): DisplayList {
   const { width, height } = document.board;
   const box = { x: 0, y: 0, width, height };
   const outline = boardPath(document.board);
+  const whole = signBox(document);
   const bare = bareMarginMm(input);
-  const margins = dimensions ? dimensionMargins(input) : { left: bare, top: bare, right: bare, bottom: bare };
+  const margins = dimensions
+    ? dimensionMargins(input)
+    : {
+        left: bare - whole.x,
+        top: bare - whole.y,
+        right: bare + whole.x + whole.width - width,
+        bottom: bare + whole.y + whole.height - height,
+      };
+  const frame = frameOf(document, kernel);
   const widthMm = margins.left + width + margins.right;
   const heightMm = margins.top + height + margins.bottom;
   const sign = {
@@ -89,6 +85,12 @@ export function drawElevation(input: ElevationInput): DisplayList {
     kernel,
     standoffs: placedStandoffs(document, figures),
     lineMm: 0.16 * paperScale,
+    frame: frame?.ok
+      ? {
+          region: frame.value.members.map(({ outline }) => outline),
+          items: drawFrameFace({ document, frame: frame.value, kernel, box: whole, paperScale }),
+        }
+      : null,
   };
   const wallBox = { x: -margins.left, y: -margins.top, width: widthMm, height: heightMm };
   const ground: Item[] = wall
@@ -99,7 +101,7 @@ export function drawElevation(input: ElevationInput): DisplayList {
     : [];
   const items = [
     ...ground,
-    ...drawSolids(sign, { box, outline, items: drawBoard(input, box, outline) }),
+    ...drawSolids(sign, { box, outline, items: drawBoardFace(input, box, outline) }),
     ...(dimensions
       ? drawElevationDimensions({ ...input, ground: wall ? document.presentation.wall : sheetWhite })
       : []),

@@ -19,9 +19,9 @@ export type ShadowOptions = {
 };
 
 /** Shadows are warm and never black: what they darken is still lit by the room. */
-const shadowColour = "#1A1208";
+export const shadowColour = "#1A1208";
 /** How much of the light is the lamp's own, where the sign hides it. Looked for by eye on pale pine. */
-const boardStrength = 0.42;
+export const boardStrength = 0.42;
 
 /** Opacities come in steps this large (at most 1.3 grey levels on the sheet): the same rows again pack better than noise in the last bit. */
 const alphaStep = 3;

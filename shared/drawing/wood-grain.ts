@@ -1,29 +1,9 @@
 import type { Box } from "../geometry/path.ts";
 import { base64OfBytes } from "./base64.ts";
 import type { Colour, Item } from "./display-list.ts";
-import { colourChannels, mixColours } from "./palette.ts";
+import { grainColours } from "./grain-colours.ts";
+import { noise } from "./noise.ts";
 import { palettePng } from "./png.ts";
-
-/** A hash of a lattice point, 0 to 1 (integer mixing after Wang and Jenkins: multiply, shift, exclusive or). */
-function latticeValue(x: number, y: number, seed: number): number {
-  let value = Math.imul(x, 374_761_393) ^ Math.imul(y, 668_265_263) ^ Math.imul(seed, 974_634_599);
-  value = Math.imul(value ^ (value >>> 13), 1_274_126_177);
-  return ((value ^ (value >>> 16)) >>> 0) / 4_294_967_295;
-}
-
-const eased = (share: number) => share * share * (3 - 2 * share);
-
-/** Smooth value noise, 0 to 1, one bump a unit. */
-function noise(x: number, y: number, seed: number): number {
-  const column = Math.floor(x);
-  const row = Math.floor(y);
-  const across = eased(x - column);
-  const down = eased(y - row);
-  const at = (dx: number, dy: number) => latticeValue(column + dx, row + dy, seed);
-  const upper = at(0, 0) + (at(1, 0) - at(0, 0)) * across;
-  const lower = at(0, 1) + (at(1, 1) - at(0, 1)) * across;
-  return upper + (lower - upper) * down;
-}
 
 /**
  * How dark the grain is at a place in mm, 0 to 1, with the grain along x: growth rings of a flat-sawn board (slowly wandering lines that
@@ -79,11 +59,6 @@ function makeGrain(box: Box, colour: Colour, seed: number, grainTurn: number): G
       pixels[row * width + column] = Math.round(grainAt(alongAt, acrossAt, across, seed) * (shades - 1));
     }
   }
-  // Pale wood is told by its dark lines, dark wood by light ones that must not turn it grey.
-  const [red, green, blue] = colourChannels(colour);
-  const brightness = (0.3 * red + 0.59 * green + 0.11 * blue) / 255;
-  const light = mixColours(colour, mixColours(colour, "#FFF4E0", 0.9), 0.04 + 0.7 * brightness ** 2);
-  const dark = mixColours(colour, mixColours(colour, "#3A2408", 0.65), 0.22 + 0.1 * brightness);
-  const colours = Array.from({ length: shades }, (_, index) => mixColours(light, dark, index / (shades - 1)));
+  const colours = grainColours(colour, shades);
   return { kind: "image", box, pngBase64: base64OfBytes(palettePng({ width, height, pixels }, colours)) };
 }

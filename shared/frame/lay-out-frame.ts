@@ -49,9 +49,7 @@ export function layOutFrame(outline: Path, design: FrameDesign, kernel: Kernel):
     const rectangle = checked({ buttedCorners: [squareCorners(inner), { least: 4, most: 4 }] }, () => null);
     if (!rectangle.ok) return rectangle;
   }
-  const outer = inner.map((corner, index) =>
-    outerCorner(corner, at(inner, index - 1), at(inner, index + 1), design.width),
-  );
+  const outer = outerCorners(inner, design.width);
   const members = inner.map((from, index) =>
     memberOf(from, at(inner, index + 1), at(outer, index), at(outer, index + 1)),
   );
@@ -94,6 +92,11 @@ const at = (polygon: Polygon, index: number): Point => polygon.at(index % polygo
 function outwards(from: Point, to: Point): Point {
   const length = Math.hypot(to.x - from.x, to.y - from.y);
   return { x: (to.y - from.y) / length, y: -(to.x - from.x) / length };
+}
+
+/** The outer corners of a frame round these, one for one: where the outer edges of neighbouring pieces meet. */
+export function outerCorners(inner: Polygon, width: number): Polygon {
+  return inner.map((corner, index) => outerCorner(corner, at(inner, index - 1), at(inner, index + 1), width));
 }
 
 function outerCorner(corner: Point, before: Point, after: Point, width: number): Point {
