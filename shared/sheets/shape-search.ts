@@ -112,9 +112,9 @@ export function improve(
   if (total < 2) return start;
   while (meter.probes - began < control.probes && !control.shouldStop()) {
     const done = (meter.probes - began) / control.probes;
-    // An empty round costs work too, so that the end is reached whatever happens.
-    meter.probes += 1000;
     const taken = ruin(bins, random);
+    // Taking pieces up and laying them down is work too, as much as some looks; an empty round is some, so that it ends.
+    meter.probes += taken.reduce((sum, { way: { mask } }) => sum + (mask.columns * mask.rows) / 2, 1000);
     for (const laying of taken) takeUp(laying);
     const items = order([...taken.map(({ item }) => item), ...current.left], shapes, random);
     const left: Item[] = [];

@@ -117,6 +117,14 @@ describe("grain", () => {
     expect(layout.sheets[0]?.placements.map(({ turn }) => turn)).toEqual([90, 90]);
   });
 
+  it("so are shapes that are no rectangles", () => {
+    const pieces = [buildPiece("ell", ell, { quantity: 2, turns: alongGrain })];
+    const layout = nested(buildRequest(pieces, [buildSheet(300, 260, { grainTurn: 90 })]));
+    const turns = layout.sheets.flatMap(({ placements }) => placements.map(({ turn }) => turn));
+    expect(turns).toHaveLength(2);
+    expect(turns.every((turn) => turn === 90 || turn === 270)).toBe(true);
+  });
+
   it("a plank that is too long along the grain is not turned across it", () => {
     const pieces = [buildPiece("plank", rectangle(280, 40), { turns: alongGrain })];
     const layout = nested(buildRequest(pieces, [buildSheet(400, 260, { grainTurn: 90 })]));
