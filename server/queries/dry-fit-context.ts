@@ -8,7 +8,7 @@ import { wholeStock } from "./list-stock.ts";
 
 /** What the dry fit knows besides the sign: the shop's unit and stock, and what the brief says. */
 export async function dryFitContext(
-  context: ReadContext,
+  context: Pick<ReadContext, "transaction">,
   { shop, brief }: { shop: Shop; brief: Brief },
 ): Promise<DryFitContext> {
   return {

@@ -41,6 +41,6 @@ export async function listStock(context: ReadContext, { cursor, limit, kind, q, 
 }
 
 /** Everything in stock, in the list's order. */
-export function wholeStock({ transaction }: ReadContext, shopId: string): Promise<StockItem[]> {
+export function wholeStock({ transaction }: Pick<ReadContext, "transaction">, shopId: string): Promise<StockItem[]> {
   return StockItem.findAll({ where: { shopId, retiredAt: null }, order: ["kind", byName, "id"], transaction });
 }

@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { Event } from "#server/models/event.ts";
 import { StockItem } from "#server/models/stock-item.ts";
+import { dryFitContext } from "#server/queries/dry-fit-context.ts";
 import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
 import {
   addStockItem,
@@ -12,6 +13,7 @@ import {
   setStockState,
 } from "#shared/contracts/stock.ts";
 import type { StockEntry } from "#shared/contracts/stock-entry.ts";
+import { stockOfItems } from "#shared/contracts/stock-on-hand.ts";
 import { standardHardware, standardScrews } from "#shared/materials/standard-stock.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
@@ -322,5 +324,24 @@ describe("the list", () => {
     });
     expect([first.items.length, second.items.length, second.next]).toEqual([4, 3, null]);
     expect(new Set([...first.items, ...second.items].map(({ id }) => id)).size).toBe(7);
+  });
+});
+
+describe("the dry fit", () => {
+  it("knows what is in stock as the mockup does: sheets, counts and the shop's own screws", async () => {
+    const { params, visitors, owner, job } = await buildWorld(app);
+    const list = async (query: { kind?: Item["kind"]; q?: string } = {}) =>
+      (await visitors.owner.get(listStock, { params, query: { limit: 100, ...query } })).items;
+    const [first, ...others] = await list({ kind: "screw" });
+    if (first?.kind !== "screw") throw new Error("There are usual screws.");
+    for (const { id } of others)
+      await visitors.owner.get(setStockState, { params: { ...params, itemId: id }, body: { state: "retired" } });
+    await visitors.owner.get(addStockItem, { params, body: { entry: { ...screw("Brass, box 4"), quantity: 80 } } });
+    await visitors.owner.get(addStockItem, { params, body: { entry: teal() } });
+
+    const { stock } = await dryFitContext({}, { shop: owner.shop, brief: job.brief });
+    expect(stock.screws.map(({ name }) => name).sort()).toEqual(["Brass, box 4", first.name]);
+    expect(stock.acrylics.find(({ acrylic }) => acrylic.name === "Teal")?.sheets).toEqual(teal().sheets);
+    expect(stock).toEqual(stockOfItems(await list()));
   });
 });

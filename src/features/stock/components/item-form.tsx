@@ -1,4 +1,5 @@
 import { useQuery } from "@tanstack/react-query";
+import { useEffect, useRef } from "react";
 import type { StockEntry } from "#shared/contracts/stock-entry.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
@@ -27,6 +28,12 @@ type ItemFormProps = {
 export function ItemForm({ shop, unit, start, version, action, send, onChanged }: ItemFormProps) {
   const item = useItemForm({ unit, start, version, send });
   const { faults, newer, problem, busy } = item;
+  const report = useRef<HTMLDivElement>(null);
+  // A long form's end may lie below what is shown. Where a field is at fault, that one is gone to instead.
+  const concernsAll = newer !== null || (problem !== null && faults.size === 0);
+  useEffect(() => {
+    if (concernsAll) report.current?.scrollIntoView({ block: "nearest" });
+  }, [concernsAll]);
   const change = (entry: WrittenEntry) => {
     item.change(entry);
     onChanged(true);
@@ -34,20 +41,22 @@ export function ItemForm({ shop, unit, start, version, action, send, onChanged }
   return (
     <form ref={item.form} noValidate onSubmit={item.handleSubmit} className="space-y-5">
       <KindFields shop={shop} unit={unit} entry={item.entry} faults={faults} onChange={change} />
-      {newer && (
-        <Notice tone="caution" title="Not saved: somebody else changed it meanwhile.">
-          <p>They saved it as “{newer.name}”. What you wrote is still here.</p>
-          <div className="mt-2 flex flex-wrap gap-3">
-            <Button size="small" onClick={item.keepMine}>
-              Save mine over it
-            </Button>
-            <Button size="small" onClick={item.takeTheirs}>
-              Take theirs
-            </Button>
-          </div>
-        </Notice>
-      )}
-      {problem && <Notice tone="error">{problem}</Notice>}
+      <div ref={report} className="space-y-3">
+        {newer && (
+          <Notice tone="caution" title="Not saved: somebody else changed it meanwhile.">
+            <p>They saved it as “{newer.name}”. What you wrote is still here.</p>
+            <div className="mt-2 flex flex-wrap gap-3">
+              <Button size="small" onClick={item.keepMine}>
+                Save mine over it
+              </Button>
+              <Button size="small" onClick={item.takeTheirs}>
+                Take theirs
+              </Button>
+            </div>
+          </Notice>
+        )}
+        {problem && <Notice tone="error">{problem}</Notice>}
+      </div>
       {!problem && faults.size > 0 && (
         <p role="status" className="text-sm text-oxblood">
           {faults.size === 1 ? "One thing has to be mended first." : `${faults.size} things have to be mended first.`}

@@ -38,6 +38,8 @@ const done: string[] = [];
 let closed = 0;
 
 beforeAll(async () => {
+  // The document of these tests has no window that could scroll.
+  Element.prototype.scrollIntoView = () => undefined;
   server = await startAnswers(({ method }) =>
     method === "GET"
       ? { status: 200, json: { items: screws, next: null } }
