@@ -10,7 +10,7 @@ import type { Hole, Piece } from "../mockup/document.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import type { Banded } from "../units/banded.ts";
 import type { RuleInput } from "./rule.ts";
-import { footHeightMm, type StandoffHold } from "./standoff-layers.ts";
+import { footHeightMm, pieceAt, type StandoffHold, type StandoffLayer } from "./standoff-layers.ts";
 import { layersWithFigures, pieceWords } from "./words.ts";
 
 /** Something outward of a panel's face: a piece, or the barrel of another panel that stands on it. */
@@ -126,6 +126,24 @@ export function frontAt(
     return footprint.on === null ? [] : [{ thing, notchMm: distanceToRegionEdgeMm(thing.region, place) + reach }];
   });
   return { front, stack: between(piece.bottom, base), over, under: low.filter(({ region }) => isOver(disc, region)) };
+}
+
+/** A standoff that holds a piece, with what lies between its barrel and its front. */
+export type HeldPlace = { readonly hole: Hole; readonly piece: PieceFigures; readonly stack: Banded };
+
+/** Every standoff of a layer that holds a piece, in the order of its holes. */
+export function heldPlaces(
+  standing: StandoffLayer,
+  input: Pick<RuleInput, "document" | "figures" | "limits">,
+): HeldPlace[] {
+  const { hold, level } = standing;
+  const over = thingsOver(input, level);
+  return hold.holes.flatMap((hole) => {
+    const piece = pieceAt(standing, hole);
+    if (!piece) return [];
+    const { stack } = frontAt(hole, { hold, piece, things: over(piece), clearanceMm: input.limits.capClearanceMm });
+    return [{ hole, piece, stack }];
+  });
 }
 
 function isOver(disc: Hole | (Point & { diameter: number }), region: Region): boolean {

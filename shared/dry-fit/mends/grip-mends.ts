@@ -5,8 +5,8 @@ import { formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { gripFault } from "../grip-fault.ts";
 import type { Mend } from "../mend.ts";
+import { heldPlaces } from "../on-panel.ts";
 import type { RuleInput } from "../rule.ts";
-import { fixingPlaces } from "../screw-at.ts";
 import { type StandoffLayer, standoffLayerOf } from "../standoff-layers.ts";
 import { hardwareLike, hardwareMend } from "./hardware-mend.ts";
 import { moveHoleMends } from "./move-hole.ts";
@@ -18,21 +18,18 @@ import { moveHoleMends } from "./move-hole.ts";
 export function gripMends(finding: Finding, input: RuleInput): Mend[] {
   const standing = standoffLayerOf(input, finding.layerKey);
   if (!standing || finding.unit !== "mm") return [];
-  const fitting = hardwareLike(standing, input).filter(
-    (hardware) => gripsAll(standing, hardware, input) && (hardware.kind !== "capStud" || barrelAddsUp(hardware)),
-  );
-  if (finding.holeId === null) return offsetMends(standing, fitting, input);
   // An edge grip beside its place is a matter of the piece whose edge it misses.
   if (finding.pieceIds.length > 0) return moveHoleMends(finding, input);
-  const [best] = fitting;
+  if (finding.holeId === null) return offsetMends(standing, input);
+  const best = nearestFitting(standing, input);
   return best ? [hardwareMend(standing, best, input)] : [];
 }
 
-function offsetMends(standing: StandoffLayer, fitting: readonly Hardware[], input: RuleInput): Mend[] {
+function offsetMends(standing: StandoffLayer, input: RuleInput): Mend[] {
   const { hardware } = standing.hold;
   const held = heldOffsetMm(hardware);
   const sound = held !== null && (hardware.kind !== "capStud" || barrelAddsUp(hardware));
-  const [nearest] = fitting.filter((other) => !sound || usualOffsetMm(other) !== held);
+  const nearest = nearestFitting(standing, input, (other) => !sound || usualOffsetMm(other) !== held);
   const toBarrel: Mend[] = sound
     ? [
         {
@@ -44,10 +41,17 @@ function offsetMends(standing: StandoffLayer, fitting: readonly Hardware[], inpu
   return [...toBarrel, ...(nearest ? [hardwareMend(standing, nearest, input)] : [])];
 }
 
-function gripsAll(standing: StandoffLayer, hardware: Hardware, input: RuleInput): boolean {
-  const offset = usualOffsetMm(hardware);
-  const { hold } = standing;
-  return fixingPlaces({ ...standing, hold: { ...hold, hardware } }, input).every(
-    ({ stack }) => gripFault(hardware, { stack, offset }, input.limits) === null,
-  );
+/** The stock nearest to what a layer has that goes together and grips everywhere. */
+function nearestFitting(
+  standing: StandoffLayer,
+  input: RuleInput,
+  wanted: (hardware: Hardware) => boolean = () => true,
+): Hardware | undefined {
+  return hardwareLike(standing, input).find((hardware) => {
+    if (!wanted(hardware) || (hardware.kind === "capStud" && !barrelAddsUp(hardware))) return false;
+    const offset = usualOffsetMm(hardware);
+    return heldPlaces({ ...standing, hold: { ...standing.hold, hardware } }, input).every(
+      ({ stack }) => gripFault(hardware, { stack, offset }, input.limits) === null,
+    );
+  });
 }

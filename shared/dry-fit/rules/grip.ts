@@ -6,8 +6,8 @@ import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { type GripFault, gripFault, overlapFault } from "../grip-fault.ts";
 import { gripMends } from "../mends/grip-mends.ts";
+import { heldPlaces } from "../on-panel.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
-import { fixingPlaces } from "../screw-at.ts";
 import { pieceAt, type StandoffLayer, standoffLayers } from "../standoff-layers.ts";
 import { layerWords } from "../words.ts";
 
@@ -49,7 +49,7 @@ function checkGrip(standing: StandoffLayer, input: RuleInput): Finding[] {
   const { layer, hold } = standing;
   const { hardware, offset } = hold;
   const found = new Map<string, Finding>();
-  for (const { hole, piece, stack } of fixingPlaces(standing, input)) {
+  for (const { hole, piece, stack } of heldPlaces(standing, input)) {
     const loose = gripFault(hardware, { stack, offset }, input.limits);
     const misses = overlapFault(hardware, piece, hole, input.limits);
     for (const { fault, pieceIds } of [
