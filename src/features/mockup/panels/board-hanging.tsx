@@ -19,8 +19,8 @@ const kinds: readonly { readonly kind: Hanging["kind"]; readonly text: string }[
 
 const poses: readonly { readonly pose: Hanging["pose"]; readonly text: string }[] = [
   { pose: "upright", text: "upright" },
-  { pose: "tilted", text: "tilted, its face downward or upward" },
-  { pose: "lying", text: "lying, or under a ceiling" },
+  { pose: "tilted", text: "tilted" },
+  { pose: "lying", text: "lying flat" },
 ];
 
 /** How the sign hangs, what the wall's fixing carries, and where the fixings are. */
@@ -45,7 +45,7 @@ export function BoardHanging({ writing }: { readonly writing: BoardWriting }) {
           ))}
         </Select>
         <Select
-          label="Its face is"
+          label="The sign is"
           value={draft.pose}
           onChange={(event) => {
             const chosen = poses.find(({ pose }) => pose === event.target.value);

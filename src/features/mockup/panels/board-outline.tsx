@@ -10,7 +10,7 @@ import { outlineChoices } from "../model/outline-of-piece.ts";
 
 const outlines: readonly { readonly kind: BoardDraft["outline"]; readonly text: string }[] = [
   { kind: "rectangle", text: "rectangle" },
-  { kind: "rounded", text: "rectangle with rounded corners" },
+  { kind: "rounded", text: "rounded corners" },
   { kind: "ellipse", text: "ellipse, or a circle" },
   { kind: "path", text: "its own, as drawn" },
   { kind: "piece", text: "the outline of a piece" },

@@ -21,7 +21,7 @@ const kindWords: Readonly<Record<CoatDraft["kind"], string>> = {
   conditioner: "Conditioner",
   stain: "Stain",
   "clear coat": "Clear coat",
-  other: "Something else",
+  other: "Other",
 };
 
 /** One coat: what it is, the fields of its kind, and its place among the others. */

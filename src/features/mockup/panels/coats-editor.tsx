@@ -17,7 +17,7 @@ const kinds: readonly { readonly kind: Coat["kind"]; readonly text: string }[] =
   { kind: "conditioner", text: "conditioner" },
   { kind: "stain", text: "stain" },
   { kind: "clear coat", text: "clear coat" },
-  { kind: "other", text: "something else" },
+  { kind: "other", text: "other" },
 ];
 
 /** The finish as its coats in the order they go on, and how the wood is estimated to look under them. */
@@ -92,14 +92,18 @@ export function CoatsEditor({ writing }: { readonly writing: BoardWriting }) {
           <Swatch large colour={bare} />
           bare
         </span>
-        <span className="flex items-center gap-2">
-          <Swatch large colour={finishColour(bare, coats)} />
-          under its finish, an estimate
-        </span>
-        <span className="min-w-0 wrap-anywhere">
-          {finishWords(coats)}
-          {hours > 0 && <span className="text-graphite">, dries {hoursWords(hours)} in all</span>}
-        </span>
+        {coats.length > 0 && (
+          <>
+            <span className="flex items-center gap-2">
+              <Swatch large colour={finishColour(bare, coats)} />
+              under its finish, an estimate
+            </span>
+            <span className="min-w-0 wrap-anywhere">
+              {finishWords(coats)}
+              {hours > 0 && <span className="text-graphite">, dries {hoursWords(hours)} in all</span>}
+            </span>
+          </>
+        )}
       </div>
     </div>
   );

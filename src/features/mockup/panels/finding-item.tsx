@@ -1,13 +1,17 @@
 import { useEffect, useRef, useState } from "react";
+import { calculationOfRule } from "#shared/calculations/calculation-of-rule.ts";
 import type { Role } from "#shared/contracts/account.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Mend } from "#shared/dry-fit/mend.ts";
 import { maySetAside } from "#shared/dry-fit/set-aside.ts";
 import { wakingWords } from "#shared/dry-fit/waking-words.ts";
+import { paths } from "@/app/paths.ts";
+import { TextLink } from "@/components/ui/text-link.tsx";
 import { cx } from "@/lib/cx.ts";
 import { formatDay } from "@/lib/format.ts";
 import { useReader } from "@/lib/shop-context.ts";
 import type { DeskStanding } from "../editor/use-standings.ts";
+import { shortAndRest } from "../model/short-text.ts";
 import { WordButton } from "./cell-controls.tsx";
 import { SeverityWord } from "./finding-look.tsx";
 import { SetAsideForm } from "./set-aside-form.tsx";
@@ -35,11 +39,13 @@ export function FindingItem({
   onSetAside,
 }: FindingItemProps) {
   const { role, shop } = useReader();
+  const calculation = calculationOfRule[finding.rule];
   return (
     <li className={cx("flex gap-3 border-b border-rule py-2 text-sm", isShown && "bg-indigo/8")}>
       <SeverityWord severity={finding.severity} />
       <div className="min-w-0 flex-1 wrap-anywhere text-ink">
-        {finding.text} <ShowFinding finding={finding} onShow={onShow} />
+        {finding.severity === "remark" ? <ShortText {...finding} /> : finding.text}{" "}
+        <ShowFinding finding={finding} onShow={onShow} />
         <span className="block text-fine text-graphite">
           {finding.title}, {finding.source}
         </span>
@@ -49,20 +55,44 @@ export function FindingItem({
             <span className="text-ink">{wakingWords(woken.finding, finding, shop.unit)}</span>
           </p>
         )}
-        {onMend && mends.length > 0 && (
-          <p className="flex flex-wrap gap-x-3">
-            {mends.map((mend) => (
+        <div className="flex flex-wrap items-center gap-x-3">
+          {onMend &&
+            mends.map((mend) => (
               <WordButton key={mend.label} className="-ml-1" onClick={() => onMend(mend)}>
                 {mend.label}
               </WordButton>
             ))}
-          </p>
-        )}
-        {onSetAside && (
-          <WaysToSetAside finding={finding} role={role} onSend={(reason) => onSetAside(finding, reason)} />
-        )}
+          {onSetAside && (
+            <WaysToSetAside finding={finding} role={role} onSend={(reason) => onSetAside(finding, reason)} />
+          )}
+          {calculation !== undefined && (
+            <TextLink to={paths.howWeWorkItOut(shop.slug, calculation)} target="_blank" className="py-1 text-fine">
+              How it is worked out<span className="sr-only">: {finding.title}, in a new tab</span>
+            </TextLink>
+          )}
+        </div>
       </div>
     </li>
+  );
+}
+
+/** What a remark says first, and the rest of it when it is wanted. */
+function ShortText({ title, text }: Pick<Finding, "title" | "text">) {
+  const [isWhole, setWhole] = useState(false);
+  const { short, rest } = shortAndRest(text);
+  if (rest === "") return text;
+  return (
+    <>
+      {short} {isWhole && `${rest} `}
+      <WordButton
+        inText
+        aria-expanded={isWhole}
+        aria-label={isWhole ? `Less of this: ${title}` : `More of this: ${title}`}
+        onClick={() => setWhole(!isWhole)}
+      >
+        {isWhole ? "Less" : "More"}
+      </WordButton>
+    </>
   );
 }
 
@@ -84,12 +114,17 @@ function WaysToSetAside({ finding, role, onSend }: WaysProps) {
 
   if (role === null || role === "rep") return null;
   if (!maySetAside(role, finding))
-    return <p className="mt-1 text-fine text-graphite">A stop about safety: only an owner can set it aside.</p>;
-  if (isAsking) return <SetAsideForm finding={finding} onSend={onSend} onCancel={() => setAsking(false)} />;
+    return <p className="basis-full text-fine text-graphite">A stop about safety: only an owner can set it aside.</p>;
+  if (isAsking)
+    return (
+      <div className="basis-full">
+        <SetAsideForm finding={finding} onSend={onSend} onCancel={() => setAsking(false)} />
+      </div>
+    );
   return (
     <WordButton
       ref={opener}
-      className="-ml-1 block"
+      className="-ml-1"
       aria-label={`Set aside: ${finding.title}`}
       onClick={() => setAsking(true)}
     >

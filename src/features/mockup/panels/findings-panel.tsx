@@ -12,6 +12,8 @@ import type { DeskStanding, Standings } from "../editor/use-standings.ts";
 import type { DryFit } from "../engine/picture-messages.ts";
 import { keyedStandings } from "../model/keyed-standings.ts";
 import { FindingItem } from "./finding-item.tsx";
+import { FindingsList } from "./findings-list.tsx";
+import { Fold } from "./fold.tsx";
 import { SetAsideList } from "./set-aside-list.tsx";
 
 type FindingsPanelProps = {
@@ -35,9 +37,30 @@ export function FindingsPanel(props: FindingsPanelProps) {
   const { slug } = useShop();
   const landing = useLanding();
   const standings = known.standings ?? [];
-  const standing = standings.filter(({ setAside }) => setAside === null);
+  const open = keyedStandings(standings.filter(({ setAside }) => setAside === null));
+  const of = (severity: Severity) => open.filter(({ finding }) => finding.severity === severity);
+  const remarks = of("remark");
   const mends = new Map(dryFit?.findings.map((finding, index) => [finding, dryFit.mends[index] ?? []]));
   const ready = dryFit !== null && known.standings !== null;
+
+  const renderItem = (one: (typeof open)[number]) => (
+    <FindingItem
+      key={one.key}
+      standing={one}
+      isShown={one.finding === shown}
+      onShow={onShow}
+      mends={isCurrent ? (mends.get(one.finding) ?? []) : []}
+      onMend={onMend}
+      onSetAside={
+        settingAside &&
+        (async (finding, reason) => {
+          const problem = await settingAside.setAside(finding, reason);
+          if (problem === null) landing.go("aside");
+          return problem;
+        })
+      }
+    />
+  );
 
   return (
     <section aria-label="Dry fit" aria-busy={!(isCurrent && ready)} className={cx("min-w-0 px-4 pt-2 pb-6", className)}>
@@ -58,26 +81,15 @@ export function FindingsPanel(props: FindingsPanelProps) {
       {isCurrent && ready && standings.length === 0 && (
         <p className="pt-2 text-sm text-graphite">Nothing found. Test on scrap all the same.</p>
       )}
-      <ul className="pt-1">
-        {keyedStandings(standing).map((one) => (
-          <FindingItem
-            key={one.key}
-            standing={one}
-            isShown={one.finding === shown}
-            onShow={onShow}
-            mends={isCurrent ? (mends.get(one.finding) ?? []) : []}
-            onMend={onMend}
-            onSetAside={
-              settingAside &&
-              (async (finding, reason) => {
-                const problem = await settingAside.setAside(finding, reason);
-                if (problem === null) landing.go("aside");
-                return problem;
-              })
-            }
-          />
-        ))}
-      </ul>
+      <div className="pt-1">
+        <FindingsList label="Stops" standings={of("stop")} renderItem={renderItem} />
+        <FindingsList label="Cautions" standings={of("caution")} renderItem={renderItem} />
+        {remarks.length > 0 && (
+          <Fold name="remarks" summary={counted(remarks.length, "remark")} className="pt-1">
+            <FindingsList label="Remarks" standings={remarks} renderItem={renderItem} />
+          </Fold>
+        )}
+      </div>
       <SetAsideList
         standings={standings}
         heading={landing.aside}

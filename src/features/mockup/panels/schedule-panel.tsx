@@ -95,11 +95,13 @@ function BackerName({ onFinish }: { readonly onFinish: () => void }) {
   const { document } = useDesk();
   const words = finishWords(document.backer.finish);
   return (
-    <span className="whitespace-normal">
-      Backer,{" "}
-      <WordButton inText aria-label={`Finish of the backer: ${words}`} onClick={onFinish}>
-        {words}
-      </WordButton>
-    </span>
+    <WordButton
+      title={words}
+      aria-label={`Finish of the backer: ${words}`}
+      className="line-clamp-2 whitespace-normal"
+      onClick={onFinish}
+    >
+      Backer, {words}
+    </WordButton>
   );
 }
