@@ -35,7 +35,9 @@ function checkHole({ layer, hold }: StandoffLayer, hole: Hole, input: RuleInput)
     source,
   };
   const stud = `${mm(passing.diameter)} ${passing.what}`;
-  const hides = `${mm(Math.min(passing.cover, hardware.barrelDiameter))} ${passing.coverWhat}`;
+  // From behind barrel or spacer hide it, and the narrower of both sides counts.
+  const behind = `${mm(hardware.barrelDiameter)} ${hardware.kind === "throughScrew" ? "spacer" : "barrel"}`;
+  const hides = hardware.barrelDiameter < passing.cover ? behind : `${mm(passing.cover)} ${passing.coverWhat}`;
   const play = `${mm(input.limits.placingErrorMm)} placing error a side and ${mm(movement)} of movement`;
   if (isEmptyWindow(window)) {
     const text = `No hole of ${layerWords(layer)} can be right here: the ${stud} needs ${mm(lower)} for ${play}, but from ${mm(upper)} on the hole shows round the ${hides}. Take a wider cap, or bring this hole and the fixed one nearer each other.`;

@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { holeWindow } from "#shared/dry-fit/rules/hole-window.ts";
-import type { Hole } from "#shared/mockup/document.ts";
-import { buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
+import type { Hardware, Hole } from "#shared/mockup/document.ts";
+import { buildHardware, buildLayer, buildSign, hole, plate, standoffHold } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
 
 const panel = (holes: Hole[]) =>
@@ -69,4 +69,32 @@ it("tells inches in thousandths", async () => {
   expect(finding?.text).toBe(
     "A hole of B, Layer B is 0.394″ wide; over 0.354″ it can show round the 0.591″ cap, for ever.",
   );
+});
+
+describe("other kinds of hardware", () => {
+  const held = (hardware: Hardware, diameter: number) =>
+    buildSign([
+      buildLayer("B", [plate("panel", 500, 300, [300, 200])], {
+        hold: standoffHold([hole("h", 300, 200, { diameter, fixed: true })], hardware),
+      }),
+    ]);
+  const screw = buildHardware("throughScrew");
+  const bare = buildHardware("throughScrew", { cap: null });
+
+  // No. 6 is 3.505 thick, its head 7.087: 4.505 to (12 + 3.505)/2 − 1 = 6.753, under the head (7.087 + 3.505)/2 − 1 = 4.296.
+  it.each([
+    { hardware: screw, diameter: 4.5, words: "the 3.51 mm screw needs at least 4.51 mm" },
+    { hardware: screw, diameter: 4.51, words: null },
+    { hardware: screw, diameter: 6.75, words: null },
+    { hardware: screw, diameter: 6.76, words: "over 6.75 mm it can show round the 12 mm spacer" },
+    { hardware: bare, diameter: 4.4, words: "from 4.3 mm on the hole shows round the 7.09 mm head" },
+  ])("a hole of $diameter mm under $hardware.name: $words", async ({ hardware, diameter, words }) => {
+    const findings = await findingsOf(holeWindow, held(hardware, diameter));
+    expect(findings).toHaveLength(words === null ? 0 : 1);
+    for (const { text } of findings) expect(text).toContain(words);
+  });
+
+  it.each(["blindStud", "edgeGrip"] as const)("%s has no hole, whatever its diameter says", async (kind) => {
+    expect(await findingsOf(holeWindow, held(buildHardware(kind), 50))).toEqual([]);
+  });
 });
