@@ -271,6 +271,82 @@ describe("who is offered what", () => {
   });
 });
 
+describe("many findings", () => {
+  const remark: Finding = {
+    ...thin,
+    rule: 18,
+    title: "Adhesive",
+    severity: "remark",
+    text: "Wicking cement bonds C, Rings: it can be moved after 30 minutes, and is at its full strength after 24 hours. Air the room, keep flames away, and test on scrap of the same sheet first.",
+    pieceIds: [],
+    value: 24,
+    unit: "h",
+  };
+  const caution = (index: number): Finding => ({
+    ...thin,
+    rule: 1,
+    title: "Unsupported",
+    severity: "caution",
+    text: `Letter ${index} lies on nothing.`,
+    pieceIds: [`letter ${index}`],
+  });
+  const six = Array.from({ length: 6 }, (_, index) => caution(index));
+  const isHidden = (text: string) => {
+    const item = [...document.querySelectorAll("li")].findLast((one) => one.textContent?.includes(text));
+    if (!item) throw new Error(`nothing says "${text}"`);
+    return item.closest("[hidden]") !== null;
+  };
+  beforeEach(() => window.sessionStorage.clear());
+
+  it("stand as stops, then the first cautions of a rule, and remarks wait behind their count, which is of all", async () => {
+    await show({ findings: [thin, ...six, remark] });
+    expect(summary()).toBe("1 stop, 6 cautions, 1 remark, 9 fine");
+    expect([...document.querySelectorAll("ul")].map((list) => list.getAttribute("aria-label"))).toEqual([
+      "Stops",
+      "Cautions",
+      "More: Unsupported",
+      "Remarks",
+    ]);
+    expect(isHidden("Letter 2")).toBe(false);
+    expect(isHidden("Letter 3")).toBe(true);
+    expect(isHidden("Wicking cement")).toBe(true);
+    await press(button("3 more: Unsupported"));
+    expect(isHidden("Letter 5")).toBe(false);
+    await press(button("1 remark"));
+    expect(button("1 remark").getAttribute("aria-expanded")).toBe("true");
+    expect(isHidden("Wicking cement")).toBe(false);
+  });
+
+  it("stay open in this tab once they were opened", async () => {
+    await show({ findings: [remark] });
+    await press(button("1 remark"));
+    await show({ findings: [remark] });
+    expect(isHidden("Wicking cement")).toBe(false);
+    await press(button("1 remark"));
+    await show({ findings: [remark] });
+    expect(isHidden("Wicking cement")).toBe(true);
+  });
+
+  it("say a long remark's first sentence and the rest on demand, but a stop in full", async () => {
+    await show({ findings: [{ ...remark, severity: "stop" }, remark] });
+    await press(button("1 remark"));
+    const items = () => [...document.querySelectorAll("li")].map((one) => one.textContent ?? "");
+    expect(items()[0]).toContain("keep flames away");
+    expect(items()[1]).not.toContain("keep flames away");
+    await press(button("More of this: Adhesive"));
+    expect(items()[1]).toContain("keep flames away");
+    await press(button("Less of this: Adhesive"));
+    expect(items()[1]).not.toContain("keep flames away");
+  });
+
+  it("lead to the calculation of their rule, where there is one", async () => {
+    const bed: Finding = { ...thin, rule: 21, title: "Bed", pieceIds: ["plate"] };
+    await show({ findings: [thin, bed] });
+    const links = [...document.querySelectorAll("li")].map((one) => one.querySelector("a")?.getAttribute("href"));
+    expect(links).toEqual(["/shop/copperlark-signs/how-we-work-it-out#thinnest-stroke", undefined]);
+  });
+});
+
 it("lets every finding stand, and says so, when what is set aside can't be loaded", async () => {
   server.end();
   server = await startAnswers(() => ({ status: 500 }));
