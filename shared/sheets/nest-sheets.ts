@@ -43,28 +43,30 @@ export function nestSheets(request: NestingRequest, control: NestingControl, ker
 
   const chosen = chooseSheets(toLay, kinds, shapes, filler, { seed: request.seed, shouldStop });
   const { open } = chosen;
-  const search = (): Filling =>
-    filler.fill(toLay, open, {
-      probes: request.effort * filler.probesPerSecond,
-      seed: request.seed,
-      shouldStop,
-      onProgress: (done, best) => control.onProgress?.({ done, ...progressOf(best, open, shapes) }),
-    });
-  const isOver = request.effort === 0 || shouldStop();
-  const filling = isOver ? chosen.filling : better(search(), chosen.filling, open, shapes);
-  const { sheets, laid, faulty } = nestedSheets(filling, open, shapes, rules, kernel);
-  const consumed = consumedMm2(laid, open);
-  return {
-    ok: true,
-    value: {
+  const finished = (filling: Filling, isStopped: boolean): SheetLayout => {
+    const { sheets, laid, faulty } = nestedSheets(filling, open, shapes, rules, kernel);
+    const consumed = consumedMm2(laid, open);
+    return {
       sheets,
-      unplaced: unplacedPieces({ items, shapes, laid, faulty, fitting, fields, stopped }),
+      unplaced: unplacedPieces({ items, shapes, laid, faulty, fitting, fields, stopped: isStopped }),
       use: consumed > 0 ? areaOf({ laid, left: [] }, shapes) / consumed : 0,
       consumedMm2: consumed,
       remarks,
-      stopped,
-    },
+      stopped: isStopped,
+    };
   };
+  if (request.effort === 0 || shouldStop()) return { ok: true, value: finished(chosen.filling, stopped) };
+
+  const searched = filler.fill(toLay, open, {
+    probes: request.effort * filler.probesPerSecond,
+    seed: request.seed,
+    shouldStop,
+    onProgress: (done, best) => {
+      const layout = () => finished(better(best, chosen.filling, open, shapes), true);
+      control.onProgress?.({ done, ...progressOf(best, open, shapes), layout });
+    },
+  });
+  return { ok: true, value: finished(better(searched, chosen.filling, open, shapes), stopped) };
 }
 
 type ReadRequest =

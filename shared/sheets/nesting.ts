@@ -120,8 +120,11 @@ export type NestingProgress = {
   readonly sheets: number;
   /** Of the best layout so far, as SheetLayout has it. */
   readonly use: number;
+  /** That layout, finished as if the search had been stopped here: some work, so asked for now and then only. */
+  readonly layout: () => SheetLayout;
 };
 
+/** Both are called during the work: who must hear of messages meanwhile keeps the last layout told and ends the worker. */
 export type NestingControl = {
   /** Asked every few milliseconds; true ends the search with the best so far. */
   readonly shouldStop?: () => boolean;

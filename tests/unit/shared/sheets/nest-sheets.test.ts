@@ -258,6 +258,21 @@ describe("the search", () => {
     expect(told.at(-1)?.use).toBeGreaterThanOrEqual(told[0]?.use ?? 1);
   });
 
+  it("gives the best so far at any time, fit to be cut", () => {
+    const layouts: SheetLayout[] = [];
+    const last = nested(request, {
+      onProgress: ({ done, layout }) => {
+        if (layouts.length < 3 && done > 0.3 * layouts.length) layouts.push(layout());
+      },
+    });
+    expect(layouts).toHaveLength(3);
+    for (const layout of layouts) {
+      expectSoundLayout(request, layout, kernel);
+      expect(layout.stopped).toBe(true);
+    }
+    expect(last.use).toBeGreaterThanOrEqual((layouts[0]?.use ?? 1) * 0.99);
+  });
+
   it("ends when told to, with the best so far", () => {
     let asked = 0;
     const layout = nested({ ...request, effort: 100 }, { shouldStop: () => asked++ > 200 });
