@@ -60,9 +60,19 @@ function applyStep(document: MockupDocument, step: MendStep): MockupDocument {
         placement: { ...piece.placement, x: piece.placement.x + step.dx, y: piece.placement.y + step.dy },
       }));
     case "drop pieces":
-      return changePieces(document, step.pieceIds, () => null);
+      return changePieces(document, step.pieceIds, () => []);
     case "reads":
       return changePieces(document, [step.pieceId], (piece) => ({ ...piece, reads: step.reads }));
+    case "split piece":
+      return splitPiece(document, step.pieceId, step.parts);
+    case "slat start": {
+      const { backer } = document;
+      return backer.slats
+        ? { ...document, backer: { ...backer, slats: { ...backer.slats, start: step.start } } }
+        : document;
+    }
+    case "frame depth":
+      return document.frame ? { ...document, frame: { ...document.frame, depth: step.depth } } : document;
     case "split layer":
       return splitLayer(document, step.layerKey, step.pieceIds);
   }
@@ -105,7 +115,7 @@ function changeHole(
 function changePieces(
   document: MockupDocument,
   ids: readonly string[],
-  change: (piece: Piece) => Piece | null,
+  change: (piece: Piece) => Piece | readonly Piece[],
 ): MockupDocument {
   const chosen = new Set(ids);
   return document.layers
@@ -114,13 +124,26 @@ function changePieces(
       (now, { key }) =>
         changeLayer(now, key, (layer) => ({
           ...layer,
-          pieces: layer.pieces.flatMap((piece) => {
-            const next = chosen.has(piece.id) ? change(piece) : piece;
-            return next ? [next] : [];
-          }),
+          pieces: layer.pieces.flatMap((piece) => (chosen.has(piece.id) ? change(piece) : piece)),
         })),
       document,
     );
+}
+
+/** What a piece reads is read once: its first part keeps it. */
+function splitPiece(
+  document: MockupDocument,
+  pieceId: string,
+  parts: Extract<MendStep, { kind: "split piece" }>["parts"],
+): MockupDocument {
+  return changePieces(document, [pieceId], (piece) =>
+    parts.map((part, index) => ({
+      ...piece,
+      ...part,
+      name: piece.name === "" ? "" : `${piece.name.slice(0, 100)}, ${index + 1} of ${parts.length}`,
+      reads: index === 0 ? piece.reads : "",
+    })),
+  );
 }
 
 function splitLayer(document: MockupDocument, key: string, pieceIds: readonly string[]): MockupDocument {

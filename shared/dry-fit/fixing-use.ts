@@ -12,7 +12,8 @@ export type FixingUse = {
   /** Of the upper row. */
   readonly along: { readonly loadN: number; readonly mayN: number };
   readonly rows: FixingRows;
-  readonly inWoodMm: number;
+  /** How deep they are in the wood that carries, at the least. */
+  readonly holdingMm: number;
   readonly unproven: readonly Unproven[];
 };
 
@@ -31,10 +32,10 @@ export function fixingUse(
     hardware.barrelDiameter,
   );
   if (!rows) return null;
-  const inWoodMm = Math.min(...places.map((place) => drivenAt(place, hardware, { offset, limits })?.inWoodMm ?? 0));
+  const holdingMm = Math.min(...places.map((place) => drivenAt(place, hardware, { offset, limits })?.holdingMm ?? 0));
   const wood = document.backer.stock;
   const divisors = { lateral: limits.lateralDivisor, withdrawal: limits.withdrawalDivisor };
-  const allowable = fixingAllowable(hardware, wood, inWoodMm, divisors);
+  const allowable = fixingAllowable(hardware, wood, holdingMm, divisors);
   const lies = document.hanging.pose === "lying";
   const loads = fixingLoads({
     weightN: lies ? 0 : weightN(carried.massG),
@@ -47,7 +48,7 @@ export function fixingUse(
     across: { loadN: loads.value.shearN, mayN: lateralN },
     along: { loadN: loads.value.withdrawalN, mayN: withdrawalN },
     rows,
-    inWoodMm,
+    holdingMm,
     unproven,
   };
 }

@@ -3,6 +3,7 @@ import { hangingLimits } from "./limit-texts/hanging-limits.ts";
 import { holeLimits } from "./limit-texts/hole-limits.ts";
 import { type LimitKey, type LimitText, limitHeadings } from "./limit-texts/limit-text.ts";
 import { pieceLimits } from "./limit-texts/piece-limits.ts";
+import { slatLimits } from "./limit-texts/slat-limits.ts";
 import { standoffLimits } from "./limit-texts/standoff-limits.ts";
 import { defaultLimits, limitsSchema } from "./limits.ts";
 
@@ -12,6 +13,7 @@ const texts: Readonly<Record<LimitKey, LimitText>> = {
   ...bondLimits,
   ...holeLimits,
   ...standoffLimits,
+  ...slatLimits,
   ...hangingLimits,
 };
 

@@ -37,14 +37,17 @@ export const limitsSchema = z.strictObject({
   /** Rule 10: what sanding takes off the wood's face, and what must be left under a point. */
   sandingMm: mm.default(0.3),
   skinMm: mm.default(2),
+  /** Rule 11: how far a screw or stud must come past the slat into the substrate. */
+  slatHoldMm: mm.default(6),
   /** Rule 12: what published loads are divided by, and from which share on a load outside their range is a caution. */
   lateralDivisor: z.number().finite().min(1).max(20).default(2),
   withdrawalDivisor: z.number().finite().min(5).max(20).default(5.5),
   unprovenLoadShare: share.default(0.25),
   /** Rule 13: round a cap to whatever lies beside it. */
   capClearanceMm: mm.default(0.5),
-  /** Rule 14: share of a barrel's foot on what it stands on. */
+  /** Rule 14: share of a barrel's foot on what it stands on, and from its middle to a brad. */
   footShare: share.default(0.8),
+  footBradMm: mm.max(200).default(10),
   /** Rule 15: a push by hand, and how far a panel may give way: the larger of a length and a part of the spacing. */
   pushN: z.number().finite().min(0).max(10_000).default(100),
   bendMm: mm.default(1),
@@ -79,6 +82,17 @@ export const limitsSchema = z.strictObject({
   twinSameMm: mm.default(0.1),
   twinAlikeMm: mm.default(0.75),
   twinAlikeShare: share.default(0.04),
+  /**
+   * Rule 31: the brads in slats and how far they come past them, how far inside the trim line none is; a frame's brads, and how
+   * far they come into the board's edge.
+   */
+  bradLengthMm: mm.min(1).max(200).default(18),
+  bradHoldMm: mm.default(5),
+  bradTrimMm: mm.max(200).default(15),
+  frameBradLengthMm: mm.min(1).max(200).default(30),
+  frameBradHoldMm: mm.default(10),
+  /** Rule 33: how far the saw turns, degrees off a square cut. */
+  sawSettingMost: z.number().finite().min(0).max(90).default(50),
   /** Rules 36 and 38: hardware, adhesive and finish over the mass that is worked out, and what is too heavy for the shop alone. Our choice. */
   unweighedShare: share.default(0.2),
   heaviestKg: z.number().finite().positive().max(10_000).default(25),

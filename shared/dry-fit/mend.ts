@@ -1,4 +1,4 @@
-import type { Acrylic, Adhesive, Hardware, Layer, Screw } from "../mockup/document.ts";
+import type { Acrylic, Adhesive, Hardware, Layer, Piece, Screw, Slats } from "../mockup/document.ts";
 
 /** One change of the document. Coordinates and lengths mm. */
 export type MendStep =
@@ -24,6 +24,10 @@ export type MendStep =
   | { readonly kind: "move pieces"; readonly pieceIds: readonly string[]; readonly dx: number; readonly dy: number }
   | { readonly kind: "drop pieces"; readonly pieceIds: readonly string[] }
   | { readonly kind: "reads"; readonly pieceId: string; readonly reads: string }
+  /** Puts parts in the place of a piece, cut out of it in its own plane. Their ids are new. */
+  | { readonly kind: "split piece"; readonly pieceId: string; readonly parts: readonly Pick<Piece, "id" | "path">[] }
+  | { readonly kind: "slat start"; readonly start: Slats["start"] }
+  | { readonly kind: "frame depth"; readonly depth: number }
   /** Takes the pieces out of their layer into a new one of the same stock and hold, next to it. */
   | { readonly kind: "split layer"; readonly layerKey: string; readonly pieceIds: readonly string[] };
 

@@ -44,6 +44,10 @@ export type Driven = {
   readonly leftMm: number;
   /** How much of it is in wood at the least, mm; nothing or less when it does not get there. */
   readonly inWoodMm: number;
+  /** How far it comes past the slat at the least, mm; less than nothing when it ends in the slat. Null on a plank. */
+  readonly pastSlatMm: number | null;
+  /** How much of it is in the wood that carries: the plank, or the substrate, since slats are held by glue alone. */
+  readonly holdingMm: number;
 };
 
 /** How a standoff's screw or stud sits in the wood at its place; null beside the board, or for measures out of range. */
@@ -61,6 +65,8 @@ export function drivenAt(
   const { slat, substrate } = wood;
   const room = reachRoom({ point, opened }, { slat, substrate, sanding: limits.sandingMm, skin: limits.skinMm });
   if (!room.ok) return null;
-  const { mostMm, leftMm } = room.value;
-  return { point, mostMm, leftMm, inWoodMm: point.least - (wood.face - wood.top) };
+  const { mostMm, leftMm, pastSlatMm } = room.value;
+  const inWoodMm = point.least - (wood.face - wood.top);
+  const holdingMm = Math.min(inWoodMm, pastSlatMm);
+  return { point, mostMm, leftMm, inWoodMm, pastSlatMm: slat > 0 ? pastSlatMm : null, holdingMm };
 }

@@ -1,6 +1,7 @@
 import { regionContains } from "../geometry/contains.ts";
 import type { Point, Region } from "../geometry/path.ts";
 import { isShorter } from "../geometry/tolerance.ts";
+import { faceRegion } from "../stack/backer.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import { boardRegion } from "../stack/piece-region.ts";
 import type { RuleInput } from "./rule.ts";
@@ -9,15 +10,19 @@ import type { RuleInput } from "./rule.ts";
 export type WoodAt = {
   /** Its face as if nothing were let into it. */
   readonly face: number;
-  /** Its face there: the bottom of a pocket where there is one. */
+  /** Its face there: the bottom of a pocket, or the substrate in a gap between slats. */
   readonly top: number;
   /** Slats over the substrate; 0 for a plain plank. */
   readonly slat: number;
   readonly substrate: number;
 };
 
-/** What is asked again and again for one sign: the board's outline, and what is let into its face. */
-export type WoodGround = { readonly board: Region; readonly letIn: readonly PieceFigures[] };
+/** What is asked again and again for one sign: the board, what of its face is wood, and what is let into that. */
+export type WoodGround = {
+  readonly board: Region;
+  readonly wood: Region;
+  readonly letIn: readonly PieceFigures[];
+};
 
 export function woodGround({
   document,
@@ -27,6 +32,7 @@ export function woodGround({
   const face = figures.backerTop.nominal;
   return {
     board: boardRegion(document.board, kernel),
+    wood: faceRegion(document, kernel),
     letIn: figures.pieces.filter((piece) => isShorter(piece.bottom.nominal, face)),
   };
 }
@@ -34,12 +40,13 @@ export function woodGround({
 /** The wood under a place; null beside the board. */
 export function woodAt(
   { document, figures }: Pick<RuleInput, "document" | "figures">,
-  { board, letIn }: WoodGround,
+  { board, wood, letIn }: WoodGround,
   place: Point,
 ): WoodAt | null {
   if (!regionContains(board, place)) return null;
   const face = figures.backerTop.nominal;
   const floors = letIn.filter(({ region }) => regionContains(region, place)).map(({ bottom }) => bottom.nominal);
   const { thickness, slats } = document.backer;
-  return { face, top: Math.min(face, ...floors), slat: slats?.thickness ?? 0, substrate: thickness };
+  const open = wood === board || regionContains(wood, place) ? face : thickness;
+  return { face, top: Math.min(open, ...floors), slat: slats?.thickness ?? 0, substrate: thickness };
 }

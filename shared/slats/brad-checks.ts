@@ -26,15 +26,15 @@ export type BradReach = SlatHold & {
 };
 
 /**
- * How far a brad of a length, set under the face, reaches into the substrate, and what is left behind its point. All mm.
- * Common practice.
+ * How far a brad of a length, set under the face, reaches into the substrate, of which `needed`, and what is left behind its
+ * point. All mm. Common practice.
  */
-export function bradReach(length: number, under: SlatsUnder): Outcome<BradReach> {
+export function bradReach(length: number, under: SlatsUnder, needed: number = usualHoldMm.brad): Outcome<BradReach> {
   const reach = screwReach({ kind: "brad", length });
   if (!reach.ok) return reach;
   const room = reachRoom(reach.value, under);
   if (!room.ok) return room;
-  const hold = slatHold(reach.value.point, under, usualHoldMm.brad);
+  const hold = slatHold(reach.value.point, under, needed);
   if (!hold.ok) return hold;
   return { ok: true, value: { ...hold.value, leftMm: room.value.leftMm } };
 }

@@ -21,6 +21,7 @@ export const limitHeadings = {
   colour: "Colour against artwork",
   lettering: "Lettering",
   pieces: "Small, handed and similar pieces",
+  slats: "Slats and frames",
   hanging: "Hanging and safety",
 } as const;
 

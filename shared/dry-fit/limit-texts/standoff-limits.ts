@@ -44,6 +44,13 @@ export const standoffLimits = {
     unit: "small length",
     why: "Common practice. With less a point bulges or shows at the back.",
   },
+  slatHoldMm: {
+    group: "screws",
+    rules: [11],
+    label: "Screw past a slat into the substrate",
+    unit: "small length",
+    why: "Common practice. A slat is held by glue alone, and a load pulls it off.",
+  },
   lateralDivisor: {
     group: "screws",
     rules: [12],
@@ -78,6 +85,13 @@ export const standoffLimits = {
     label: "Foot of a barrel on what it stands on",
     unit: "percent",
     why: "Common practice. With less it tilts as the screw is tightened.",
+  },
+  footBradMm: {
+    group: "caps",
+    rules: [14, 31],
+    label: "Middle of a barrel to the nearest brad",
+    unit: "small length",
+    why: "Common practice. Nearer, the barrel's screw can meet the brad; brads give way to barrels.",
   },
   pushN: {
     group: "stiffness",

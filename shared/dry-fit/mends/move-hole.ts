@@ -1,5 +1,6 @@
 import type { Point } from "../../geometry/path.ts";
 import { isShorter } from "../../geometry/tolerance.ts";
+import { jointUnder } from "../../hardware/barrel-foot.ts";
 import { edgeOverlapMm } from "../../hardware/edge-grip.ts";
 import { nearestPlace } from "../../hardware/nearest-place.ts";
 import { seenDiameterMm } from "../../hardware/standoff-parts.ts";
@@ -16,7 +17,7 @@ import { intoWindow, isEmptyWindow, windowOfHole } from "../window-of-hole.ts";
 
 /**
  * Moves a finding's hole to the nearest place where it keeps off the edges, its front lies on one level and its foot
- * stands on what the barrels stand on, as wide as it has to be there. None when there is no such place near by.
+ * stands on what the barrels stand on and over no open joint, as wide as it has to be there. None when there is no such place near by.
  */
 export function moveHoleMends({ layerKey, holeId }: Finding, input: RuleInput): Mend[] {
   const standing = standoffLayerOf(input, layerKey);
@@ -65,6 +66,7 @@ function fitsAt(layer: StandoffLayer, hole: Hole, input: RuleInput): (place: Poi
     }
     const at = frontAt(place, { hold, piece, things: over(piece), clearanceMm: limits.capClearanceMm });
     if (at.over.length > 0 || at.under.length > 0) return false;
+    if (jointUnder({ x: place.x, y: place.y, diameter: hardware.barrelDiameter }, ground.openJoints)) return false;
     return !isShorter(footShare(place, hardware.barrelDiameter, ground, input), limits.footShare);
   };
 }

@@ -64,13 +64,16 @@ function isAsThick(screw: Screw, now: Screw): boolean {
   return Math.abs(screw.diameter - now.diameter) <= sameThicknessMm;
 }
 
-/** Whether a layer's hardware goes together, comes into the wood everywhere and breaks through nowhere. */
+/** Whether a layer's hardware goes together, holds in the wood (past any slat) everywhere and breaks through nowhere. */
 function holdsWith(standing: StandoffLayer, hardware: Hardware, input: RuleInput): boolean {
   if (screwMisfits(hardware).length > 0) return false;
   const other = { ...standing, hold: { ...standing.hold, hardware } };
   return fixingPlaces(other, input).every((place) => {
     const driven = drivenAt(place, hardware, { offset: standing.hold.offset, limits: input.limits });
-    return driven === null || (driven.inWoodMm > 0 && !isShorter(driven.leftMm, 0));
+    if (driven === null) return true;
+    const { inWoodMm, leftMm, pastSlatMm } = driven;
+    const held = pastSlatMm === null || !isShorter(pastSlatMm, input.limits.slatHoldMm);
+    return held && inWoodMm > 0 && !isShorter(leftMm, 0);
   });
 }
 

@@ -1,11 +1,12 @@
 import { fitOnBed } from "../../materials/bed-fit.ts";
 import { formatSize } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
+import { splitPieceMends } from "../mends/split-piece.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 import { layersWithFigures, pieceWords } from "../words.ts";
 
 /** Rule 21: a piece goes on the machine's bed, turned as need be. */
-export const bed: Rule = { number: 21, title: "Bed", check };
+export const bed: Rule = { number: 21, title: "Bed", check, mends: splitPieceMends };
 
 function check(input: RuleInput): Finding[] {
   const { bedWidthMm, bedHeightMm } = input.limits;

@@ -56,22 +56,24 @@ function checkPiece({ layer, hold }: StandoffLayer, { piece, places, carried }: 
     const where = { x: beside.x, y: beside.y };
     return [foundBy(load, { ...base, where, holeId: beside.id, severity: "stop", text })];
   }
-  if (!(use.inWoodMm > 0)) {
-    const short = formatFine(-use.inWoodMm, input.context.unit);
+  if (!(use.holdingMm > 0)) {
+    // What ends in a slat is a stop of rule 11.
+    if (input.document.backer.slats) return [];
+    const short = formatFine(-use.holdingMm, input.context.unit);
     const text = `${sentenceStart(fixingWords(hold.hardware))} of ${name} ends ${short} short of the wood: nothing holds the panel.`;
-    return [foundBy(load, { ...base, severity: "stop", text, value: use.inWoodMm, limit: 0, unit: "mm" })];
+    return [foundBy(load, { ...base, severity: "stop", text, value: use.holdingMm, limit: 0, unit: "mm" })];
   }
   const way = tighter(use);
   const { loadN, mayN } = use[way];
   const weight = `${name} and what is on it weighs ${formatMass(carried.massG, input.context.unit)}: that ${askWords(way, use)} ${newtonWords(loadN)}`;
-  const depth = `${formatFine(use.inWoodMm, input.context.unit)} deep in this wood`;
+  const depth = `${formatFine(use.holdingMm, input.context.unit)} deep in ${input.document.backer.slats ? "this substrate" : "this wood"}`;
   if (isOver(use[way])) {
     const text = `${weight}, and ${depth} one may carry ${newtonWords(mayN)}. Take more standoffs, longer screws or a lighter panel.`;
     return [foundBy(load, { ...base, severity: "stop", text, value: loadN, limit: mayN, unit: "N" })];
   }
   const share = input.limits.unprovenLoadShare;
   if (use.unproven.length === 0 || !isOver(use[way], share)) return [];
-  const reasons = use.unproven.map((reason) => reasonWords(reason, hold.hardware, use.inWoodMm)).join("; ");
+  const reasons = use.unproven.map((reason) => reasonWords(reason, hold.hardware, use.holdingMm)).join("; ");
   const text = `${weight}, over ${percentWords(share)} of the ${newtonWords(mayN)} that we estimate for one, ${depth}. No published load covers it: ${reasons}. Try one on scrap.`;
   return [foundBy(load, { ...base, severity: "caution", text, value: loadN, limit: share * mayN, unit: "N" })];
 }
@@ -112,7 +114,7 @@ function mends(finding: Finding, input: RuleInput): Mend[] {
       const use = loaded && fixingUse(own, { hardware, offset }, loaded, input);
       if (!use) return true;
       const share = use.unproven.length > 0 ? input.limits.unprovenLoadShare : 1;
-      return use.inWoodMm > 0 && !isOver(use[tighter(use)], share);
+      return use.holdingMm > 0 && !isOver(use[tighter(use)], share);
     });
   return otherLengthMends(finding, input, suffices);
 }
