@@ -1,5 +1,6 @@
 import type { Revision as RevisionView, SheetView } from "#shared/contracts/revisions.ts";
 import { zonesOnBoard } from "#shared/drawing/board-zones.ts";
+import { makingWords } from "#shared/drawing/making-words.ts";
 import { scheduleRows } from "#shared/drawing/schedule.ts";
 import { visibleToClient } from "#shared/lifecycle/revision-states.ts";
 import { acknowledgementsOf } from "#shared/mockup/acknowledgements.ts";
@@ -55,6 +56,7 @@ export function presentSheet(
       y: centroid.y,
     })),
     figures: { massG: figures.massG, depthMm: figures.depth.nominal, offWallMm: figures.offWall.nominal },
+    making: isStaff(actor) ? makingWords(document, titleBlock.unit) : null,
     words: snapshot.words,
     acknowledgements: acknowledgementsOf({ document, figures, words: snapshot.words, unit: titleBlock.unit }),
     others: revisions

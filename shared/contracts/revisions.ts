@@ -75,6 +75,8 @@ export const sheetSchema = z.strictObject({
     z.strictObject({ id: z.string(), name: z.string(), layerKey: z.string(), x: z.number(), y: z.number() }),
   ),
   figures: z.strictObject({ massG: z.number(), depthMm: z.number(), offWallMm: z.number() }),
+  /** How it hangs and how long its finish dries: the shop's own business, null for a client. */
+  making: z.string().nullable(),
   /** The zones of the paper sheet in mm of the board, so that the screen's frame says the same as the PDF. */
   zones: z.strictObject({ columns: z.array(zoneField), rows: z.array(zoneField) }),
   words: z.string(),

@@ -41,7 +41,8 @@ function heldBy(hold: Hold, support: string, unit: LengthUnit): string {
   }
 }
 
-const hangings: Readonly<Record<MockupDocument["hanging"]["kind"], string>> = {
+/** How a sign hangs, in the schedule. */
+export const hangingWords: Readonly<Record<MockupDocument["hanging"]["kind"], string>> = {
   cleat: "cleat",
   keyholes: "keyholes",
   wire: "wire",
@@ -63,7 +64,7 @@ export function scheduleRows(
     what: `Backer, ${finishWords(backer.finish)}`,
     stock: backer.stock.name,
     thickness: formatLength(backer.thickness, unit),
-    heldBy: hangings[hanging.kind],
+    heldBy: hangingWords[hanging.kind],
     offset: nothing,
     topAt: formatBand(figures.backerTop, unit, heights),
     pieces: "1",

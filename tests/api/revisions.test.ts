@@ -374,6 +374,7 @@ describe("the sheet", () => {
     expect(sheet.reader).toEqual({ name: own.approver.contact.name, side: "client", approver: true });
     expect(sheet.job).toMatchObject({ title: "Lobby sign", number: own.job.number, unit: "mm" });
     expect(sheet.words).toBe("HERON & WEIR");
+    expect(sheet.making).toBeNull();
     expect(sheet.board).toEqual({ widthMm: 600, heightMm: 400 });
     expect(sheet.pieces).toEqual([{ id: "p1", name: "Layer B", layerKey: "B", x: 200, y: 200 }]);
     expect(sheet.zones.columns.map(({ label }) => label)).toEqual(["1", "2", "3", "4", "5", "6"]);
@@ -383,7 +384,10 @@ describe("the sheet", () => {
     });
     await own.visitors.approver.get(getSheet, { params });
     expect((await own.visitors.otherContact.get(getSheet, { params })).reader.approver).toBe(false);
-    expect((await own.visitors.rep.get(getSheet, { params })).reader).toMatchObject({ side: "shop", approver: false });
+    expect(await own.visitors.rep.get(getSheet, { params })).toMatchObject({
+      reader: { side: "shop", approver: false },
+      making: expect.stringMatching(/^Hanging: .*upright/),
+    });
     const kinds = await logKinds(own.job.id);
     expect(kinds.filter((kind) => kind === "revision opened")).toHaveLength(2);
     expect((await own.visitors.owner.get(getJob, { params: of(own) })).nextStep).toBe(

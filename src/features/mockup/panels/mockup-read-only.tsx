@@ -2,6 +2,7 @@ import { useMemo, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
+import { makingWords } from "#shared/drawing/making-words.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
 import { formatSize } from "#shared/units/format-length.ts";
@@ -111,7 +112,9 @@ export function MockupReadOnly({ shop, unit, job, jobPath, mockup, limits, stock
               ))}
             </tbody>
           </Table>
-          <p className="text-fine text-graphite">{scheduleTotal(document, figures.figures, unit)}</p>
+          <p className="text-fine text-graphite">
+            {scheduleTotal(document, figures.figures, unit)} {makingWords(document, unit)}
+          </p>
           <FindingsPanel
             dryFit={drawn.dryFit}
             standings={standings}
