@@ -13,6 +13,9 @@ const fewPieces = 36;
 /** Work that such a rest is given. */
 const workOfRest = 150_000;
 
+/** So little short of a whole bar is rounding. */
+const wholeHair = 1e-3;
+
 type Found = { best: Packed | null; pool: readonly Pattern[] };
 
 /**
@@ -52,7 +55,7 @@ export function diveForPacking(
     found.pool = pool.length > found.pool.length ? pool : found.pool;
     if (bound >= enough || isDone()) return;
     const whole = values.flatMap(({ pattern, value }) => {
-      const times = Math.floor(value + 1e-6);
+      const times = Math.floor(value + wholeHair);
       return times > 0 ? [{ pattern, times }] : [];
     });
     if (whole.length > 0 && detours === 0) {

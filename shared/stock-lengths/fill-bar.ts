@@ -1,5 +1,6 @@
 import type { Packing, Share } from "./packing.ts";
 import type { WorkMeter } from "./work-meter.ts";
+import { worthTable } from "./worth-table.ts";
 
 export type Fill = {
   /** The best filling worth more than asked for; null when none was found. */
@@ -19,14 +20,15 @@ type Candidate = {
 /**
  * The filling of one bar that is worth most, if it is worth more than `moreThan`: a bounded knapsack by branch and
  * bound, items by worth a length (E. Horowitz and S. Sahni, Journal of the ACM 21(2), 1974). Worths are whole numbers,
- * one an item. A family's setup is left out of the bound, which is then only higher.
+ * one an item. A family's setup is left out of the bound, which is then only
+ * higher. Thorough is a search with a table of better bounds, which costs something to make.
  */
 export function fillBar(
   packing: Packing,
   bar: number,
   worths: readonly number[],
   moreThan: number,
-  meter: WorkMeter,
+  { meter, isThorough }: { readonly meter: WorkMeter; readonly isThorough: boolean },
 ): Fill {
   const room = packing.bars[bar]?.room ?? 0;
   const setupOf = (family: number | null) => (family === null ? 0 : (packing.setups[family] ?? 0));
@@ -35,6 +37,8 @@ export function fillBar(
     .filter(({ size, worth, demand, family }) => worth > 0 && demand > 0 && size + setupOf(family) <= room)
     .sort((a, b) => b.worth * a.size - a.worth * b.size || a.item - b.item);
   const boundBySingles = singlesBound(candidates);
+  const table = isThorough ? worthTable(candidates, room) : null;
+  if (table) meter.spend(table.work);
   const chosen: Share[] = [];
   const onBar = packing.setups.map(() => 0);
   let best: Share[] | null = null;
@@ -43,7 +47,9 @@ export function fillBar(
 
   /** The most that candidates from `from` on can be worth in `left`, the last of them in part. */
   function bound(from: number, left: number): number {
-    const few = boundBySingles(left);
+    const few = table ? Math.min(table.atMost(from, left), boundBySingles(left)) : boundBySingles(left);
+    // Dearer to work out, and of no use where the table says as much already.
+    if (table) return few;
     let sum = 0;
     let free = left;
     for (let index = from; index < candidates.length; index += 1) {

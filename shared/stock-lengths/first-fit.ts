@@ -2,8 +2,9 @@ import { costOfUses, gathered, type Packed, type Packing, type Share, type Use }
 
 type OpenBar = { bar: number; left: number; readonly families: Set<number>; readonly shares: Share[] };
 
-/** With more pieces than this only the first bar with room is looked for, not the one with the least. */
-const mostForBestFit = 3_000;
+/** With more pieces than this only the first bar with room is looked for, not the one with the least, and few favourites are tried. */
+const manyPieces = 3_000;
+const favouritesOfMany = 3;
 
 /**
  * A quick packing: longest first, each into the first bar with room, and again into the bar with least room; with
@@ -12,9 +13,10 @@ const mostForBestFit = 3_000;
  */
 export function packQuickly(packing: Packing): Packed | null {
   const pieces = packing.items.reduce((sum, { demand }) => sum + demand, 0);
-  const fits = pieces > mostForBestFit ? (["first"] as const) : (["first", "best"] as const);
+  const fits = pieces > manyPieces ? (["first"] as const) : (["first", "best"] as const);
+  const orders = favourites(packing);
   let best: Packed | null = null;
-  for (const order of favourites(packing)) {
+  for (const order of pieces > manyPieces ? orders.slice(0, favouritesOfMany) : orders) {
     for (const fit of fits) {
       const found = packInOrder(packing, order, fit);
       if (found && (best === null || found.cost < best.cost)) best = found;

@@ -16,6 +16,10 @@ export type PatternBound = {
 const worthSteps = 2 ** 44;
 /** A pattern must be better than the bound by this share to be brought in. */
 const leastGain = 1e-8;
+/** Share of the work kept for the bound at the end. */
+const shareOfLastLook = 0.15;
+/** Rounding that the programme's cost may have in it. */
+const tinyCost = 1e-6;
 /** Work after which a better filling that was found is taken as it is. */
 const workOfGlance = 4_000;
 
@@ -50,31 +54,41 @@ export function boundByPatterns(
     };
   };
   const columns = pool.filter((pattern) => isProper(packing, pattern)).map(columnOf);
-  const workOfExchange = 1 + (rows.length * rows.length) / 60;
+  const workOfExchange = 1 + (rows.length * rows.length) / 200;
+  // Some work is kept for a last look at the prices that the programme ended with.
+  const loop = meter.within(meter.left() * (1 - shareOfLastLook));
   let counted = 0;
   let bound = 0;
   for (;;) {
     master.settle();
     const exchanges = master.exchanges() - counted;
     counted += exchanges;
-    if (!meter.spend(exchanges * workOfExchange + columns.length / 10)) break;
+    if (!loop.spend(exchanges * workOfExchange + columns.length / 10)) break;
     const duals = master.duals();
     let best = bestColumn(columns, duals);
     if (!best) {
-      const priced = price(packing, { rows, limited, duals, steps, meter });
+      const priced = price(packing, { rows, limited, duals, steps, meter: loop, isLast: false });
       if (priced.bound > bound) bound = priced.bound;
-      if (bound >= enough) break;
+      // Costs are whole: once the programme's own cost rounds up to the bound, nothing can lift it any more.
+      if (bound >= enough || bound >= Math.ceil(master.cost() - tinyCost)) return result();
       const found = priced.patterns.map(columnOf);
       columns.push(...found);
       best = bestColumn(found, duals);
     }
-    if (!best || !master.enter(best)) break;
+    if (!best) return result();
+    if (!master.enter(best)) break;
   }
-  return {
-    bound,
-    values: master.values().map(({ column, value }) => ({ pattern: column.pattern, value })),
-    pool: columns.map(({ pattern }) => pattern),
-  };
+  const last = price(packing, { rows, limited, duals: master.duals(), steps, meter, isLast: true });
+  bound = Math.max(bound, last.bound);
+  return result();
+
+  function result(): PatternBound {
+    return {
+      bound,
+      values: master.values().map(({ column, value }) => ({ pattern: column.pattern, value })),
+      pool: columns.map(({ pattern }) => pattern),
+    };
+  }
 }
 
 /** Whether a pattern cuts no more than is asked for, from a bar that is there. */
@@ -102,12 +116,14 @@ type Prices = {
   readonly duals: Float64Array;
   readonly steps: number;
   readonly meter: WorkMeter;
+  /** Whether no exchange follows, so that the bound alone matters. */
+  readonly isLast: boolean;
 };
 
 /** The most valuable filling of each bar at the present prices, and the bound that they give. */
 function price(
   packing: Packing,
-  { rows, limited, duals, steps, meter }: Prices,
+  { rows, limited, duals, steps, meter, isLast }: Prices,
 ): { bound: number; patterns: Pattern[] } {
   const worths = packing.items.map(() => 0);
   let asked = 0n;
@@ -122,10 +138,10 @@ function price(
     const due = bar.cost - (limit < 0 ? 0 : Math.min(0, duals[rows.length + limit] ?? 0));
     const threshold = Math.ceil((due + leastGain * Math.max(1, due)) * steps);
     // Any better filling will do; only that there is none must be searched to the end.
-    const glance = fillBar(packing, index, worths, threshold, meter.within(workOfGlance));
-    const { shares, worthAtMost } = glance.shares
-      ? glance
-      : fillBar(packing, index, worths, threshold, meter.within(meter.left() / 4));
+    const glance = { meter: meter.within(isLast ? 0 : workOfGlance), isThorough: false };
+    const search = { meter: meter.within(meter.left() / (2 * packing.bars.length)), isThorough: true };
+    const seen = fillBar(packing, index, worths, threshold, glance);
+    const { shares, worthAtMost } = seen.shares && !isLast ? seen : fillBar(packing, index, worths, threshold, search);
     if (shares) patterns.push({ bar: index, shares });
     return { worth: BigInt(worthAtMost), cost: BigInt(bar.cost) * BigInt(steps), onHand: bar.onHand };
   });

@@ -7,12 +7,14 @@ export type Column = { readonly pattern: Pattern; readonly cost: number; readonl
 export type PatternMaster = {
   /** Brings a column in, and one out. False when nothing could be exchanged. */
   readonly enter: (column: Column) => boolean;
-  /** Brings in leftovers (more cut than asked for, bars not used) as long as that pays. */
+  /** Leaves bars of the limited kinds unused as long as that pays. */
   readonly settle: () => void;
   /** What one more of each row would cost. */
   readonly duals: () => Float64Array;
   /** Columns in use and how often, in parts of a bar. */
   readonly values: () => { readonly column: Column; readonly value: number }[];
+  /** What the columns in use cost, with the penalty for what is missing, the lifting left out. */
+  readonly cost: () => number;
   /** Exchanges made so far. */
   readonly exchanges: () => number;
 };
@@ -21,18 +23,29 @@ type Basic = { readonly column: Column | null; readonly cost: number; readonly e
 
 /** Smaller pivots, gains and amounts are taken for nothing. */
 const tiny = 1e-9;
-/** After so many exchanges the inverse is worked out anew, so that rounding does not pile up. */
+/**
+ * Every side is lifted a little, each by another amount: with many equal ones the programme would go in circles. What is
+ * given back is none the less right: the bound is taken from the duals alone.
+ */
+const lift = 1e-5;
+const goldenShare = (Math.sqrt(5) - 1) / 2;
+/** Amounts that come from the lifting alone are left out. */
+const leastValue = 1e-3;
+/** After so many exchanges, and two more a row, the inverse is worked out anew, so that rounding does not pile up. */
 const exchangesBeforeRenewal = 100;
 
 /**
- * Least cost of patterns, each in any part of a bar, that cover `atLeast` of each of the first rows and use `atMost` of
- * each of the others; a missing unit costs `penalty`. Columns are brought in one by one by whoever prices them. Revised
- * simplex method with an explicit inverse (V. Chvátal, Linear Programming, 1983, chapters 7 and 13).
+ * Least cost of patterns, each in any part of a bar, that make up `demands`, row by row, and use `atMost` of each of the rows
+ * after those; a missing unit costs `penalty`. Nothing is cut that isn't asked for: every pattern with a piece less is a
+ * pattern too, so that this costs nothing, and a piece nobody wants has a price below 0. Columns are brought in one by one
+ * by whoever prices them. Revised simplex method with an explicit inverse (V. Chvátal, Linear Programming, 1983, chapters
+ * 7 and 13).
  */
-export function createMaster(atLeast: readonly number[], atMost: readonly number[], penalty: number): PatternMaster {
-  const sides = Float64Array.from([...atLeast, ...atMost]);
+export function createMaster(demands: readonly number[], atMost: readonly number[], penalty: number): PatternMaster {
+  const asked = Float64Array.from([...demands, ...atMost]);
+  const sides = asked.map((side, row) => side + lift * (1 + ((row * goldenShare) % 1)));
   const size = sides.length;
-  const isDemand = (row: number) => row < atLeast.length;
+  const isDemand = (row: number) => row < demands.length;
   const basis = Array.from(
     sides,
     (_, row): Basic => ({ column: null, cost: isDemand(row) ? penalty : 0, entries: [[row, 1]] }),
@@ -54,7 +67,7 @@ export function createMaster(atLeast: readonly number[], atMost: readonly number
     addTimes(duals, inverse.row(leaving), gain);
     basis[leaving] = entering;
     exchanges += 1;
-    if (exchanges % exchangesBeforeRenewal === 0) renew();
+    if (exchanges % (exchangesBeforeRenewal + 2 * size) === 0) renew();
     return true;
   }
 
@@ -69,17 +82,16 @@ export function createMaster(atLeast: readonly number[], atMost: readonly number
   }
 
   function settle(): void {
-    for (let round = 0; round < 2 * size; round += 1) {
+    for (let round = 0; round < 2 * atMost.length; round += 1) {
       let most = -1;
       let mostGain = tiny;
-      for (let row = 0; row < size; row += 1) {
-        // A leftover of a demand pays when its dual is negative, one of a limit when it is positive.
-        const gain = isDemand(row) ? -(duals[row] ?? 0) : (duals[row] ?? 0);
+      for (let row = demands.length; row < size; row += 1) {
+        const gain = duals[row] ?? 0;
         if (gain <= mostGain) continue;
         most = row;
         mostGain = gain;
       }
-      if (most < 0 || !exchange({ column: null, cost: 0, entries: [[most, isDemand(most) ? -1 : 1]] })) return;
+      if (most < 0 || !exchange({ column: null, cost: 0, entries: [[most, 1]] })) return;
     }
   }
 
@@ -90,8 +102,9 @@ export function createMaster(atLeast: readonly number[], atMost: readonly number
     values: () =>
       basis.flatMap(({ column }, row) => {
         const value = amounts[row] ?? 0;
-        return column && value > tiny ? [{ column, value }] : [];
+        return column && value > leastValue ? [{ column, value }] : [];
       }),
+    cost: () => asked.reduce((sum, side, row) => sum + side * (duals[row] ?? 0), 0),
     exchanges: () => exchanges,
   };
 }

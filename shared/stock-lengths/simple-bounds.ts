@@ -1,15 +1,22 @@
 import { countPieces, type Packing } from "./packing.ts";
 
-/** No packing costs less: all lengths, setups left out, at the cheapest rate a length. */
+/**
+ * No packing costs less: all lengths, setups left out, at the cheapest rate a length there is, bars on hand as far as they go.
+ * Whole numbers throughout, so that a sum that comes out even is not rounded up.
+ */
 export function lengthBound({ items, bars }: Packing): number {
-  // Whole numbers throughout, so that a sum that comes out even is not rounded up.
-  const length = items.reduce((sum, { size, demand }) => sum + BigInt(size) * BigInt(demand), 0n);
-  let least: bigint | null = null;
-  for (const { cost, room } of bars) {
-    const needed = (length * BigInt(cost) + BigInt(room) - 1n) / BigInt(room);
-    if (least === null || needed < least) least = needed;
+  let length = items.reduce((sum, { size, demand }) => sum + BigInt(size) * BigInt(demand), 0n);
+  let spent = 0n;
+  const byRate = bars.toSorted((a, b) => a.cost * b.room - b.cost * a.room);
+  for (const { cost, room, onHand } of byRate) {
+    if (onHand === null || length <= BigInt(onHand) * BigInt(room)) {
+      return Number(spent + (length * BigInt(cost) + BigInt(room) - 1n) / BigInt(room));
+    }
+    length -= BigInt(onHand) * BigInt(room);
+    spent += BigInt(onHand) * BigInt(cost);
   }
-  return Number(least ?? 0n);
+  // More than all bars hold.
+  return Number(spent);
 }
 
 /**

@@ -48,7 +48,8 @@ export function solvePacking(packing: Packing, effort: Effort = {}): Solved {
   complete(meter.left() / 40);
   if (!isProved() && packing.items.length <= mostItemsToBound) {
     const enough = packed?.cost ?? Number.POSITIVE_INFINITY;
-    const root = boundByPatterns(packing, { pool: [], enough, meter: meter.within(meter.left() / 2) });
+    const pool = packed?.uses.map(({ pattern }) => pattern) ?? [];
+    const root = boundByPatterns(packing, { pool, enough, meter: meter.within(meter.left() / 2) });
     raise(root.bound);
     if (!isProved())
       improve(diveForPacking(packing, { best: packed, bound, pool: root.pool }, meter.within(meter.left() * 0.7)));

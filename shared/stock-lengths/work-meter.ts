@@ -1,6 +1,6 @@
 /** How long a search may go on. */
 export type Effort = {
-  /** Steps of work, about a hundred million a minute on a small machine. The same number gives the same answer everywhere. */
+  /** Steps of work, about two million a second on a small machine. The same number gives the same answer everywhere. */
   readonly work?: number;
   /** Asked now and then; once it says yes the best so far is given back. What it goes by is the caller's affair. */
   readonly shouldStop?: () => boolean;
@@ -18,7 +18,7 @@ export type WorkMeter = {
 };
 
 /** Steps that a search takes at most when nothing else is said: a few seconds. */
-export const usualWork = 30_000_000;
+export const usualWork = 8_000_000;
 /** Steps between two questions whether to stop. */
 const stepsBetweenQuestions = 2_000;
 
