@@ -28,13 +28,14 @@ export function chooseSheets(
   let rest = items;
   while (rest.length > 0 && !control.shouldStop()) {
     let best: { kind: number; filling: Filling; isAll: boolean; value: number; fields: OpenField[] } | null = null;
-    for (const [index, { stock, fields }] of kinds.entries()) {
+    for (const [index, kind] of kinds.entries()) {
+      const { stock, fields } = kind;
       const number = (taken[index] ?? 0) + 1;
       if (stock.quantity !== null && number > stock.quantity) continue;
       const sheet = fields.map((field) => ({ field, sheet: number }));
       const filling = filler.fill(rest, sheet, { ...control, probes: 0, onProgress: () => undefined });
       if (filling.laid.length === 0) continue;
-      const countsMm2 = fields.reduce((sum, { areaMm2 }) => sum + areaMm2, 0) * (stock.isOffcut ? offcutShare : 1);
+      const countsMm2 = countedMm2(kind);
       const isAll = filling.left.length === 0;
       const value = isAll ? -countsMm2 : areaOf(filling, shapes) / countsMm2;
       if (!best || (isAll && !best.isAll) || (isAll === best.isAll && value > best.value))
@@ -47,6 +48,11 @@ export function chooseSheets(
     rest = best.filling.left;
   }
   return { open, filling: { laid, left: rest } };
+}
+
+/** What a sheet counts when sheets are compared: its area, of an offcut half of it, mm². */
+export function countedMm2({ stock, fields }: SheetKind): number {
+  return fields.reduce((sum, { areaMm2 }) => sum + areaMm2, 0) * (stock.isOffcut ? offcutShare : 1);
 }
 
 /** Area of what a filling lays, mm². */

@@ -2,8 +2,9 @@ import type { Kernel } from "../geometry/kernel.ts";
 import type { Region } from "../geometry/path.ts";
 import { smallestBox } from "../geometry/smallest-box.ts";
 import { checkNumbers, checkOutline, type NestingProblem } from "./check-nesting.ts";
-import { areaOf, chooseSheets, type SheetKind } from "./choose-sheets.ts";
+import { areaOf, type ChosenSheets, chooseSheets, type SheetKind } from "./choose-sheets.ts";
 import { type CutShape, cutShape } from "./cut-shape.ts";
+import { exchangeLast } from "./exchange-last.ts";
 import type { Filler, Filling, Item, OpenField } from "./filler.ts";
 import { consumedMm2, nestedSheets } from "./nested-sheets.ts";
 import type { NestingControl, NestingRequest, SheetLayout } from "./nesting.ts";
@@ -43,11 +44,12 @@ export function nestSheets(request: NestingRequest, control: NestingControl, ker
 
   const chosen = chooseSheets(toLay, kinds, shapes, filler, { seed: request.seed, shouldStop });
   const { open } = chosen;
-  const finished = (filling: Filling, isStopped: boolean): SheetLayout => {
-    const { sheets, laid, faulty } = nestedSheets(filling, open, shapes, rules, kernel);
-    const consumed = consumedMm2(laid, open);
+  const finished = ({ open: used, filling }: ChosenSheets, isStopped: boolean): SheetLayout => {
+    const { sheets, laid, faulty } = nestedSheets(filling, used, shapes, rules, kernel);
+    const consumed = consumedMm2(laid, used);
     return {
       sheets,
+      needed: neededSheets(request.stock, sheets),
       unplaced: unplacedPieces({ items, shapes, laid, faulty, fitting, fields, stopped: isStopped }),
       use: consumed > 0 ? areaOf({ laid, left: [] }, shapes) / consumed : 0,
       consumedMm2: consumed,
@@ -55,18 +57,31 @@ export function nestSheets(request: NestingRequest, control: NestingControl, ker
       stopped: isStopped,
     };
   };
-  if (request.effort === 0 || shouldStop()) return { ok: true, value: finished(chosen.filling, stopped) };
+  if (request.effort === 0 || shouldStop()) return { ok: true, value: finished(chosen, stopped) };
 
+  const probes = request.effort * filler.probesPerSecond;
+  const { seed } = request;
   const searched = filler.fill(toLay, open, {
-    probes: request.effort * filler.probesPerSecond,
-    seed: request.seed,
+    probes,
+    seed,
     shouldStop,
     onProgress: (done, best) => {
-      const layout = () => finished(better(best, chosen.filling, open, shapes), true);
+      const layout = () => finished({ open, filling: better(best, chosen.filling, open, shapes) }, true);
       control.onProgress?.({ done, ...progressOf(best, open, shapes), layout });
     },
   });
-  return { ok: true, value: finished(better(searched, chosen.filling, open, shapes), stopped) };
+  const filling = better(searched, chosen.filling, open, shapes);
+  // A tenth of the search again is enough for one sheet.
+  const last = { probes: probes / 10, seed, shouldStop, onProgress: () => undefined };
+  return { ok: true, value: finished(exchangeLast({ open, filling }, kinds, filler, last), stopped) };
+}
+
+/** How many sheets of each kind are cut into, in the order of the stock. */
+function neededSheets(stock: NestingRequest["stock"], sheets: SheetLayout["sheets"]): SheetLayout["needed"] {
+  return stock.flatMap(({ id }) => {
+    const numbers = new Set(sheets.flatMap(({ stockId, sheet }) => (stockId === id ? [sheet] : [])));
+    return numbers.size > 0 ? [{ stockId: id, sheets: numbers.size }] : [];
+  });
 }
 
 type ReadRequest =

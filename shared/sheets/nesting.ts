@@ -101,6 +101,8 @@ export type UnplacedPiece = {
 
 export type SheetLayout = {
   readonly sheets: readonly NestedSheet[];
+  /** Sheets of each kind that are cut into: what must be on hand or bought. */
+  readonly needed: readonly { readonly stockId: string; readonly sheets: number }[];
   readonly unplaced: readonly UnplacedPiece[];
   /** Area of the pieces as a share of what the sheets lose to them: all of a sheet, of the last only up to the last piece. */
   readonly use: number;

@@ -161,6 +161,21 @@ describe("which sheets are taken", () => {
     expect([...new Set(layout.sheets.map(({ stockId }) => stockId))].sort()).toEqual(taken);
   });
 
+  it("says how many sheets of each kind it takes, and parts of one sheet are one", () => {
+    const bed = { widthMm: 610, heightMm: 420, larger: "split" } as const;
+    const both = [
+      buildSheet(1220, 800, { id: "whole", quantity: 1 }),
+      buildSheet(420, 310, { id: "half", quantity: null }),
+    ];
+    const layout = nested(buildRequest(squares(110), both, { rules: { bed, marginMm: 5 } }));
+    expect(layout.unplaced).toEqual([]);
+    // 6 · 4 on each upper part, 6 · 3 on each lower one; 12 on each of the others.
+    expect(layout.needed).toEqual([
+      { stockId: "whole", sheets: 1 },
+      { stockId: "half", sheets: 3 },
+    ]);
+  });
+
   it("no more sheets are taken than there are, and the rest is listed with the reason", () => {
     const layout = nested(buildRequest(squares(7), [buildSheet(300, 200, { quantity: 1 })]));
     expect(layout.sheets.map(({ placements }) => placements.length)).toEqual([6]);
