@@ -17,6 +17,7 @@ import { ShareLink } from "./share-link.ts";
 import { ShareLinkPiece } from "./share-link-piece.ts";
 import { Shop } from "./shop.ts";
 import { ShopLimits } from "./shop-limits.ts";
+import { ShopSaws } from "./shop-saws.ts";
 import { StoredFile } from "./stored-file.ts";
 
 declare module "./membership.ts" {
@@ -67,6 +68,11 @@ declare module "./mockup.ts" {
 }
 declare module "./shop-limits.ts" {
   interface ShopLimits {
+    saver?: NonAttribute<Person>;
+  }
+}
+declare module "./shop-saws.ts" {
+  interface ShopSaws {
     saver?: NonAttribute<Person>;
   }
 }
@@ -124,6 +130,7 @@ export function associate(): void {
   Artwork.belongsTo(Person, { as: "adder", foreignKey: "addedBy" });
   Mockup.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   ShopLimits.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
+  ShopSaws.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   Revision.belongsTo(Job, { as: "job", foreignKey: "jobId" });
   Revision.belongsTo(StoredFile, { as: "pdf", foreignKey: "pdfFileId" });
   Revision.belongsTo(Person, { as: "issuer", foreignKey: "issuedBy" });

@@ -20,6 +20,7 @@ export type EventFacts = {
   "role changed": { name: string; from: string; to: string };
   "shop changed": { fields: string[] };
   "limits changed": { changes: { limit: string; from: number; to: number }[] };
+  "saws changed": { changes: { field: string; from: number; to: number }[] };
   "stock added": { name: string };
   "stock changed": { name: string };
   "stock counted": { name: string; from: number | null; to: number | null };

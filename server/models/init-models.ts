@@ -23,6 +23,7 @@ import { initShareLink } from "./share-link.ts";
 import { initShareLinkPiece } from "./share-link-piece.ts";
 import { initShop } from "./shop.ts";
 import { initShopLimits } from "./shop-limits.ts";
+import { initShopSaws } from "./shop-saws.ts";
 import { initStockItem } from "./stock-item.ts";
 import { initStoredFile } from "./stored-file.ts";
 
@@ -30,6 +31,7 @@ import { initStoredFile } from "./stored-file.ts";
 export function initModels(sequelize: Sequelize): void {
   initShop(sequelize);
   initShopLimits(sequelize);
+  initShopSaws(sequelize);
   initPerson(sequelize);
   initMembership(sequelize);
   initInvitation(sequelize);

@@ -29,6 +29,8 @@ const mayIssue = (actor: Actor, job: { readonly shopId: string }): boolean =>
 export const revisionPolicy = {
   see: (actor: Actor, revision: RevisionFacts): boolean =>
     ofShop(actor, revision) || (ofClient(actor, revision) && visibleToClient(revision.state)),
+  /** What a shop builds from never goes to a client. */
+  build: ofShop,
   issue: mayIssue,
   withdraw: mayIssue,
   mayWithdrawNow: (actor: Actor, revision: RevisionFacts): boolean =>

@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import type { eventSchema } from "#shared/contracts/jobs.ts";
+import { sawFields } from "#shared/cut-plan/saw-fields.ts";
 import { describeLimit, limitKeys } from "#shared/dry-fit/limit-descriptions.ts";
 import { formatLimit } from "#shared/dry-fit/limit-units.ts";
 import type { Event, EventFacts, EventKind } from "../models/event.ts";
@@ -14,6 +15,7 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "role changed": ({ name, from, to }) => `Changed ${name} from ${from} to ${to}`,
   "shop changed": ({ fields }) => `Changed the shop's ${fields.join(", ")}`,
   "limits changed": ({ changes }) => `Changed limits of the dry fit: ${changes.map(limitChange).join("; ")}`,
+  "saws changed": ({ changes }) => `Changed how the shop cuts: ${changes.map(sawChange).join("; ")}`,
   "stock added": ({ name }) => `Added ${name} to the stock`,
   "stock changed": ({ name }) => `Changed ${name} in the stock`,
   "stock counted": ({ name, from, to }) => `Counted ${name}: ${countedAs(to)}, ${countedAs(from)} before`,
@@ -66,6 +68,14 @@ function limitChange({ limit, from, to }: EventFacts["limits changed"]["changes"
   const key = limitKeys.find((known) => known === limit);
   if (key === undefined) return `${limit} from ${from} to ${to}`;
   const { label, unit } = describeLimit(key);
+  return `${label} from ${formatLimit(from, unit, "mm")} to ${formatLimit(to, unit, "mm")}`;
+}
+
+/** Likewise a figure of how the shop cuts. */
+function sawChange({ field, from, to }: EventFacts["saws changed"]["changes"][number]): string {
+  const known = sawFields.find(({ key }) => key === field);
+  if (known === undefined) return `${field} from ${from} to ${to}`;
+  const { label, unit } = known;
   return `${label} from ${formatLimit(from, unit, "mm")} to ${formatLimit(to, unit, "mm")}`;
 }
 

@@ -9,7 +9,9 @@ import { registerMockupRoutes } from "./mockups.ts";
 import { registerNoteRoutes } from "./notes.ts";
 import { registerOutgoingMailRoutes } from "./outgoing-mail.ts";
 import { registerPortfolioRoutes } from "./portfolio.ts";
+import { registerRevisionDocumentRoutes } from "./revision-documents.ts";
 import { registerRevisionRoutes } from "./revisions.ts";
+import { registerSawRoutes } from "./saws.ts";
 import { registerSetAsideRoutes } from "./set-asides.ts";
 import { registerShopRoutes } from "./shop.ts";
 import { registerStockRoutes } from "./stock.ts";
@@ -23,6 +25,7 @@ export function registerRoutes(routes: Routes): void {
   registerLinkRoutes(routes);
   registerShopRoutes(routes);
   registerLimitRoutes(routes);
+  registerSawRoutes(routes);
   registerTeamRoutes(routes);
   registerClientRoutes(routes);
   registerOutgoingMailRoutes(routes);
@@ -32,6 +35,7 @@ export function registerRoutes(routes: Routes): void {
   registerNoteRoutes(routes);
   registerPortfolioRoutes(routes);
   registerRevisionRoutes(routes);
+  registerRevisionDocumentRoutes(routes);
   registerSetAsideRoutes(routes);
   registerStockRoutes(routes);
 }

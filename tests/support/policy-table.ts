@@ -8,11 +8,14 @@ import * as mockups from "#shared/contracts/mockups.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
+import * as revisionDocuments from "#shared/contracts/revision-documents.ts";
 import * as revisions from "#shared/contracts/revisions.ts";
+import * as saws from "#shared/contracts/saws.ts";
 import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
+import { usualSaws } from "#shared/cut-plan/shop-saws.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import type { PolicyWorld } from "./policy-world.ts";
 
@@ -114,6 +117,9 @@ export const policyTable: readonly PolicyRow[] = [
     body: { version: 0, limits: defaultLimits },
   })),
 
+  row(saws.getSaws, staff, inShop),
+  row(saws.changeSaws, makers, (world) => ({ ...inShop(world), body: { version: 0, saws: usualSaws } })),
+
   row(clients.listClients, staff, inShop),
   row(clients.getClient, staff, (world) => ({ params: { ...world.params, clientId: world.clientId } })),
   row(clients.addClient, staff, (world) => ({ ...inShop(world), body: { name: `Client ${world.next()}` } })),
@@ -180,6 +186,7 @@ export const policyTable: readonly PolicyRow[] = [
   row(revisions.issueRevision, makersOnVisible, (world) => ({ ...job(world), body: { mockupVersion: 1 } })),
   row(revisions.getRevision, readers, revision),
   row(revisions.getSheet, readers, revision),
+  row(revisionDocuments.getRevisionDocument, staff, revision),
   row(revisions.getProof, readers, revision),
   row(revisions.getPicture, readers, revision),
   row(revisions.getCertificate, readers, (world) => ({
