@@ -1,7 +1,11 @@
 import type { Box } from "../geometry/path.ts";
 import { rectanglePath } from "../geometry/shapes.ts";
+import { drivenOf } from "../hardware/driven-of.ts";
+import { screwReach } from "../hardware/screw-reach.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import type { Figures } from "../stack/figures.ts";
+import { signBox } from "../stack/sign-box.ts";
+import { exactly } from "../units/banded.ts";
 import type { BandWording } from "../units/format-band.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { fineLineMm, outlineMm, type PaperScale } from "./dimensions.ts";
@@ -56,7 +60,8 @@ export function drawWall({ document, depthScale, paperScale }: SectionInput): It
   const mm = (paper: number) => paper * paperScale;
   const x = -document.hanging.gap * depthScale;
   const over = mm(4);
-  const [top, bottom] = [-over, document.board.height + over];
+  const whole = signBox(document);
+  const [top, bottom] = [whole.y - over, whole.y + whole.height + over];
   const strokes: Item[] = [];
   for (let y = top + mm(wallHatchMm); y <= bottom; y += mm(2)) {
     const points = [
@@ -72,37 +77,50 @@ export function drawWall({ document, depthScale, paperScale }: SectionInput): It
   return [...strokes, { kind: "line", points: face, stroke: { colour: ink, widthMm: mm(outlineMm) } }];
 }
 
-/** The backer cut across: pale, with the year rings a cut board shows. */
-export function drawBacker({ document, figures, depthScale, paperScale }: SectionInput): Item[] {
-  const { height } = document.board;
-  const width = figures.backerTop.nominal * depthScale;
-  const { colour } = document.backer.stock;
-  const outline = rectanglePath(box(0, 0, width, height));
-  const line = { colour: mixColours(colour, "#6B4A1F", 0.45), widthMm: fineLineMm * 0.6 * paperScale };
-  const rings: Item[] = [];
-  for (let y = -width; y < height + width; y += 3.4 * paperScale) {
-    const points = [0, 0.25, 0.5, 0.75, 1].map((share) => ({
-      x: width * share,
-      y: y + width * 0.9 * (share - share ** 2),
-    }));
-    rings.push({ kind: "line", points, stroke: line });
-  }
-  return [
-    { kind: "path", id: "board", path: outline, fill: colour },
-    { kind: "clip", clip: outline, items: rings },
-    { kind: "path", path: outline, stroke: { colour: ink, widthMm: fineLineMm * 1.4 * paperScale } },
-  ];
+/** What of a standoff is in the wood, dashed since wood hides it: as thick as it is, to its point or the bottom of its hole; null for none. */
+function drawReach(standoff: PlacedStandoff, { document, depthScale, paperScale }: SectionInput): Item | null {
+  const { hole, hardware, layerKey, barrel, front } = standoff;
+  const layer = document.layers.find(({ key }) => key === layerKey);
+  if (layer?.hold.kind !== "standoff") return null;
+  const stack = exactly(front ? front.from - barrel.to : 0);
+  const reach = screwReach(drivenOf(hardware, { stack, offset: layer.hold.offset }));
+  if (!reach.ok || reach.value.point.nominal <= 0) return null;
+  const radius = ("screw" in hardware ? hardware.screw.diameter : hardware.studDiameter) / 2;
+  const foot = barrel.from * depthScale;
+  const point = (barrel.from - reach.value.point.nominal) * depthScale;
+  // A screw's point is about as long as it is thick; a stud ends square.
+  const shoulder = Math.min(foot, point + ("screw" in hardware ? 2 * radius * depthScale : 0));
+  const tip = "screw" in hardware ? 0 : radius;
+  return {
+    kind: "line",
+    points: [
+      { x: foot, y: hole.y - radius },
+      { x: shoulder, y: hole.y - radius },
+      { x: point, y: hole.y - tip },
+      { x: point, y: hole.y + tip },
+      { x: shoulder, y: hole.y + radius },
+      { x: foot, y: hole.y + radius },
+    ],
+    stroke: {
+      colour: ink,
+      widthMm: fineLineMm * 0.8 * paperScale,
+      dashMm: [0.9 * paperScale, 0.5 * paperScale],
+    },
+  };
 }
 
 /** Standoffs at one height hide one another: of each height one is drawn. */
 export function drawStandoffs(
   standoffs: readonly PlacedStandoff[],
-  { depthScale, paperScale }: SectionInput,
-): { barrels: Item[]; caps: Item[] } {
+  input: SectionInput,
+): { inWood: Item[]; barrels: Item[]; caps: Item[] } {
+  const { depthScale, paperScale } = input;
   const heights = new Set<string>();
   const barrels: Item[] = [];
   const caps: Item[] = [];
-  for (const { hole, layerKey, hardware, barrel, front } of standoffs) {
+  const inWood: Item[] = [];
+  for (const standoff of standoffs) {
+    const { hole, layerKey, hardware, barrel, front } = standoff;
     const name = `${layerKey} ${hole.y.toFixed(1)}`;
     if (heights.has(name)) continue;
     heights.add(name);
@@ -113,10 +131,12 @@ export function drawStandoffs(
       fill: mixColours(hardware.finish, "#FFFFFF", 0.25),
       stroke: { colour: ink, widthMm: fineLineMm * paperScale },
     });
+    const reach = drawReach(standoff, input);
+    if (reach) inWood.push(reach);
     if (barrel.to > barrel.from) barrels.push(metal(barrel));
     if (front) caps.push(metal(front));
   }
-  return { barrels, caps };
+  return { inWood, barrels, caps };
 }
 
 /** The layers, nearest to the wall first, so that what stands farther out is drawn over it. */

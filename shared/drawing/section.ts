@@ -1,18 +1,12 @@
+import { signBox } from "../stack/sign-box.ts";
 import { formatLength } from "../units/format-length.ts";
 import { dimensionRowMm, drawDimensions } from "./dimensions.ts";
 import type { DisplayList } from "./display-list.ts";
 import { boardPlaneId } from "./elevation.ts";
 import { placedStandoffs } from "./hardware.ts";
 import { sheetWhite } from "./palette.ts";
-import {
-  drawBacker,
-  drawSlabs,
-  drawStandoffs,
-  drawWall,
-  type SectionInput,
-  slabsOf,
-  wallHatchMm,
-} from "./section-bodies.ts";
+import { drawBacker, drawFrame } from "./section-backer.ts";
+import { drawSlabs, drawStandoffs, drawWall, type SectionInput, slabsOf, wallHatchMm } from "./section-bodies.ts";
 import { layLabels } from "./section-labels.ts";
 import { smallTextMm, textWidthMm } from "./type.ts";
 
@@ -23,32 +17,33 @@ import { smallTextMm, textWidthMm } from "./type.ts";
 export function drawSection(input: SectionInput): DisplayList {
   const { document, figures, unit, paperScale, depthScale } = input;
   const mm = (paper: number) => paper * paperScale;
-  const { height } = document.board;
+  const whole = signBox(document);
+  const lowest = whole.y + whole.height;
   const standoffs = placedStandoffs(document, figures);
   const slabs = slabsOf(input);
   const metal = drawStandoffs(standoffs, input);
   const deepest = figures.depth.nominal;
   const depthText = (mmDeep: number) => formatLength(mmDeep, unit);
   const above = [
-    { from: 0, to: figures.backerTop.nominal, thing: 0 },
+    { from: 0, to: figures.backerTop.nominal, thing: whole.y },
     ...standoffs
       .filter(
         ({ barrel }, index) =>
           barrel.to > barrel.from &&
           standoffs.findIndex((other) => other.layerKey === standoffs[index]?.layerKey) === index,
       )
-      .map(({ barrel }) => ({ from: barrel.from, to: barrel.to, thing: 0 })),
+      .map(({ barrel }) => ({ from: barrel.from, to: barrel.to, thing: whole.y })),
   ];
   const below = [
-    ...(document.hanging.gap > 0 ? [{ from: -document.hanging.gap, to: 0, thing: height + mm(4) }] : []),
-    { from: -document.hanging.gap, to: deepest, thing: height + mm(4) },
+    ...(document.hanging.gap > 0 ? [{ from: -document.hanging.gap, to: 0, thing: lowest + mm(4) }] : []),
+    { from: -document.hanging.gap, to: deepest, thing: lowest + mm(4) },
   ];
   const labels = layLabels(input, slabs);
   // Lettering stands to the right of these short steps: whatever ends farther right goes in the nearer row, clear of it.
   const byReach = (a: { to: number }, b: { to: number }) => b.to - a.to;
-  const under = Math.max(height + mm(4), labels.bottom);
+  const under = Math.max(lowest + mm(4), labels.bottom);
   const dimensions = [
-    ...above.sort(byReach).map((step, index) => ({ ...step, at: -mm(dimensionRowMm * (index + 1)) })),
+    ...above.sort(byReach).map((step, index) => ({ ...step, at: whole.y - mm(dimensionRowMm * (index + 1)) })),
     ...below.sort(byReach).map((step, index) => ({ ...step, at: under + mm(dimensionRowMm * (index + 1)) })),
   ].map(({ from, to, at, thing }) => ({
     axis: "x" as const,
@@ -61,7 +56,9 @@ export function drawSection(input: SectionInput): DisplayList {
   }));
   const items = [
     ...drawWall(input),
+    ...drawFrame(input),
     ...drawBacker(input),
+    ...metal.inWood,
     ...metal.barrels,
     ...drawSlabs(slabs, paperScale),
     ...metal.caps,
@@ -73,11 +70,11 @@ export function drawSection(input: SectionInput): DisplayList {
     ...dimensions.map(({ to, text }) => to + mm(textWidthMm(text, "serif", smallTextMm) + 7)),
   );
   const left = document.hanging.gap * depthScale + mm(wallHatchMm + 4.2);
-  const top = mm(Math.max(dimensionRowMm * above.length + 5, 8));
-  const lowest = under + mm(dimensionRowMm * below.length + 2.5);
+  const top = mm(Math.max(dimensionRowMm * above.length + 5, 8)) - whole.y;
+  const bottom = under + mm(dimensionRowMm * below.length + 2.5);
   return {
     widthMm: left + widest,
-    heightMm: top + lowest,
+    heightMm: top + bottom,
     items: [{ kind: "group", id: boardPlaneId, x: left, y: top, scale: 1, items }],
   };
 }

@@ -8,6 +8,7 @@ import type { SlatLayout } from "../slats/slat-layout.ts";
 import { faceRegion, faceStock } from "../stack/backer.ts";
 import type { Colour, Item } from "./display-list.ts";
 import { faceColour } from "./face-colour.ts";
+import { type GrainSample, grainAlikeness, grainSample } from "./grain-alikeness.ts";
 import { shadowDirection, shadowOffsetMm } from "./light.ts";
 import { latticeValue, seedOfText } from "./noise.ts";
 import { mixColours } from "./palette.ts";
@@ -21,7 +22,7 @@ const sideNumbers = { left: 1, right: 2, whole: 3 } as const;
 const spineTone = 2;
 
 /** Slats and spine as strips of grain: neighbours differ in tone, and no two are cut from the same stretch of wood. */
-export function stripsOfSlats({ slats, spine }: SlatLayout, woodName: string): GrainStrip[] {
+export function stripsOfSlats({ design, slats, spine }: SlatLayout, woodName: string): GrainStrip[] {
   const start = seedOfText(woodName);
   const seedOf = (side: keyof typeof sideNumbers, number: number) =>
     Math.floor(latticeValue(start + number, sideNumbers[side], 29) * 1_000_000);
@@ -38,17 +39,51 @@ export function stripsOfSlats({ slats, spine }: SlatLayout, woodName: string): G
     );
     for (const [index, strip] of strips.entries()) tones.set(`${side} ${strip}`, row[index] ?? 0);
   }
-  const laid = slats.map(({ side, strip, order, trimmed, axis }) => ({
-    region: trimmed,
-    axis,
-    tone: tones.get(`${side} ${strip}`) ?? 0,
-    seed: seedOf(side, strip * 1000 + order),
-  }));
+  const cuts = Math.max(2, Math.min(mostCuts, Math.floor(mostCutsInAll / slats.length)));
+  const laid: GrainStrip[] = [];
+  const samples = new Map<string, GrainSample>();
+  for (const { side, strip, order, trimmed, axis } of slats) {
+    const neighbours = [-1, 0, 1].flatMap((step) =>
+      [`left ${strip + step}`, `right ${strip + step}`, `whole ${strip + step}`].map((name) => samples.get(name)),
+    );
+    const chosen = leastAlike(
+      Array.from({ length: cuts }, (_, cut) => ({
+        region: trimmed,
+        axis,
+        tone: tones.get(`${side} ${strip}`) ?? 0,
+        seed: seedOf(side, strip * 1000 + order + cut * 70_001),
+      })),
+      neighbours.filter((sample) => sample !== undefined),
+      design.slatWidth,
+    );
+    samples.set(`${side} ${strip}`, chosen.sample);
+    laid.push(chosen.strip);
+  }
   const box = spine && boxOfRegion(spine.trimmed);
   if (!spine || !box) return laid;
   const middle = box.x + box.width / 2;
   const axis = { from: { x: middle, y: box.y }, to: { x: middle, y: box.y + box.height } };
   return [...laid, { region: spine.trimmed, axis, tone: spineTone, seed: seedOf("whole", 999_983) }];
+}
+
+/** Stretches of wood that are tried for a slat, for all slats together, and the likeness to a neighbour that is little enough. */
+const mostCuts = 12;
+const mostCutsInAll = 4_000;
+const littleAlike = 0.12;
+
+type SampledStrip = { readonly strip: GrainStrip; readonly sample: GrainSample; readonly alike: number };
+
+/** The first of several cuts that is unlike every neighbour, or the one that is least like any. */
+function leastAlike(cuts: readonly GrainStrip[], neighbours: readonly GrainSample[], widthMm: number): SampledStrip {
+  let best: SampledStrip | null = null;
+  for (const strip of cuts) {
+    const sample = grainSample(strip, widthMm);
+    const alike = Math.max(0, ...neighbours.map((neighbour) => Math.abs(grainAlikeness(sample, neighbour))));
+    if (best === null || alike < best.alike) best = { strip, sample, alike };
+    if (alike < littleAlike) break;
+  }
+  if (!best) throw new Error("A slat needs a cut to choose.");
+  return best;
 }
 
 type SlatFace = {

@@ -20,8 +20,10 @@ export const stripTones = 9;
 const middleTone = (stripTones - 1) / 2;
 const shades = 26;
 /** The finest picture, and the most cells of a large one. */
-const finestMm = 0.55;
-const mostCells = 420_000;
+const finestMm = 0.5;
+const mostCells = 600_000;
+/** Grain is drawn as wide as it is where cells are this large or smaller, wider above it. */
+const fineEnoughMm = 0.65;
 
 export type GrainImage = Extract<Item, { kind: "image" }>;
 
@@ -35,10 +37,9 @@ export function stripGrain(box: Box, strips: readonly GrainStrip[], colour: Colo
   const height = Math.max(2, Math.ceil(box.height / cell));
   const pixels = new Uint8Array(width * height).fill(middleTone * shades + Math.floor(shades / 2));
   for (const strip of strips) {
-    const grain = grainOf(strip, Math.max(1, cell / 0.75));
-    const { from, to } = strip.axis;
-    const length = Math.hypot(to.x - from.x, to.y - from.y) || 1;
-    const along = { x: (to.x - from.x) / length, y: (to.y - from.y) / length };
+    const grain = grainOf(strip, Math.max(1, cell / fineEnoughMm));
+    const { from } = strip.axis;
+    const along = directionOf(strip);
     eachSpan(strip.region, box, cell, { width, height }, (row, first, end) => {
       const x = box.x + (first + 0.5) * cell - from.x;
       const y = box.y + (row + 0.5) * cell - from.y;
@@ -57,11 +58,17 @@ export function stripGrain(box: Box, strips: readonly GrainStrip[], colour: Colo
   return { kind: "image", box: { ...box, width: width * cell, height: height * cell }, pngBase64: base64OfBytes(png) };
 }
 
+/** A unit vector along a strip's grain. */
+export function directionOf({ axis: { from, to } }: GrainStrip): Point {
+  const length = Math.hypot(to.x - from.x, to.y - from.y) || 1;
+  return { x: (to.x - from.x) / length, y: (to.y - from.y) / length };
+}
+
 /**
  * How dark a strip's grain is, 0 to below 1, at `u` mm along its axis and `v` mm across: growth rings sawn nearer to or farther from the heart, so
  * wider or narrower apart, over them long fibres. `coarse` widens what would be lost between the cells of a large picture.
  */
-function grainOf({ seed }: GrainStrip, coarse: number): (u: number, v: number) => number {
+export function grainOf({ seed }: GrainStrip, coarse: number): (u: number, v: number) => number {
   const own = (what: number) => latticeValue(seed, what, 77);
   const ringMm = (4.6 + 5.2 * own(1)) * coarse;
   const heart = (own(2) < 0.5 ? -1 : 1) * (6 + 62 * own(3));
@@ -75,7 +82,7 @@ function grainOf({ seed }: GrainStrip, coarse: number): (u: number, v: number) =
     // Late wood darkens slowly and ends fast where the next year's early wood starts.
     const late = phase < 0.86 ? (phase / 0.86) ** 3 : (1 - phase) / 0.14;
     const strength = 0.35 + 0.65 * noise(year * 7.3, u / 240, seed + 3);
-    const fibre = 0.6 * noise(u / 54, v / (1.3 * coarse), seed + 4) + 0.4 * noise(u / 21, v / (0.9 * coarse), seed + 5);
+    const fibre = 0.6 * noise(u / 54, v / (2.2 * coarse), seed + 4) + 0.4 * noise(u / 21, v / (1.6 * coarse), seed + 5);
     const cloud = noise(u / 190, v / 14, seed + 6);
     return Math.min(0.999, Math.max(0, 0.1 + 0.34 * late * strength + 0.42 * fibre + 0.16 * cloud));
   };
