@@ -8,7 +8,7 @@ export function DeskHead({ className, ...rest }: ComponentProps<"th">) {
       scope="col"
       {...rest}
       className={cx(
-        "border-b border-graphite bg-linen px-2.5 py-1 text-fine font-semibold whitespace-nowrap text-graphite",
+        "border-b border-graphite bg-linen px-2 py-1 text-fine font-semibold whitespace-nowrap text-graphite",
         className,
       )}
     />
@@ -21,11 +21,11 @@ export function DeskRowHead({ className, ...rest }: ComponentProps<"th">) {
     <th
       scope="row"
       {...rest}
-      className={cx("border-b border-rule px-2.5 py-0.5 font-semibold whitespace-nowrap text-ink", className)}
+      className={cx("border-b border-rule px-2 py-0.5 font-semibold whitespace-nowrap text-ink", className)}
     />
   );
 }
 
 export function DeskCell({ className, ...rest }: ComponentProps<"td">) {
-  return <td {...rest} className={cx("border-b border-rule px-2.5 py-0.5 whitespace-nowrap text-ink", className)} />;
+  return <td {...rest} className={cx("border-b border-rule px-2 py-0.5 whitespace-nowrap text-ink", className)} />;
 }

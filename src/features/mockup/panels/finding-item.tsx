@@ -41,13 +41,25 @@ export function FindingItem({
   const { role, shop } = useReader();
   const calculation = calculationOfRule[finding.rule];
   return (
-    <li className={cx("flex gap-3 border-b border-rule py-2 text-sm", isShown && "bg-indigo/8")}>
+    <li className={cx("flex gap-2 border-b border-rule py-2 text-sm", isShown && "bg-indigo/8")}>
       <SeverityWord severity={finding.severity} />
       <div className="min-w-0 flex-1 wrap-anywhere text-ink">
         {finding.severity === "remark" ? <ShortText {...finding} /> : finding.text}{" "}
         <ShowFinding finding={finding} onShow={onShow} />
         <span className="block text-fine text-graphite">
-          {finding.title}, {finding.source}
+          {calculation === undefined ? (
+            finding.title
+          ) : (
+            <TextLink
+              to={paths.howWeWorkItOut(shop.slug, calculation)}
+              target="_blank"
+              title="How it is worked out, in a new tab"
+            >
+              {finding.title}
+              <span className="sr-only">: how it is worked out, in a new tab</span>
+            </TextLink>
+          )}
+          , {finding.source}
         </span>
         {woken && (
           <p className="mt-1 border-l-2 border-ochre pl-2 text-fine text-graphite">
@@ -64,11 +76,6 @@ export function FindingItem({
             ))}
           {onSetAside && (
             <WaysToSetAside finding={finding} role={role} onSend={(reason) => onSetAside(finding, reason)} />
-          )}
-          {calculation !== undefined && (
-            <TextLink to={paths.howWeWorkItOut(shop.slug, calculation)} target="_blank" className="py-1 text-fine">
-              How it is worked out<span className="sr-only">: {finding.title}, in a new tab</span>
-            </TextLink>
           )}
         </div>
       </div>

@@ -21,7 +21,7 @@ export function FindingsList({ label, standings, renderItem }: FindingsListProps
         ...first.map(renderItem),
         rest.length > 0 && (
           <li key={`more of ${rule}`} className="border-b border-rule">
-            <Fold name={`${label} ${rule}`} summary={`${rest.length} more: ${title}`} className="pl-[5.75rem]">
+            <Fold name={`${label} ${rule}`} summary={`${rest.length} more: ${title}`} className="pl-22">
               <ul aria-label={`More: ${title}`}>{rest.map(renderItem)}</ul>
             </Fold>
           </li>

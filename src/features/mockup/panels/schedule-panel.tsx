@@ -43,7 +43,7 @@ export function SchedulePanel({
         <tbody>
           <tr>
             <DeskRowHead>A</DeskRowHead>
-            <DeskCell className="min-w-40">
+            <DeskCell className="min-w-28">
               <BackerName onFinish={onFinish} />
             </DeskCell>
             <DeskCell>
@@ -98,7 +98,7 @@ function BackerName({ onFinish }: { readonly onFinish: () => void }) {
     <WordButton
       title={words}
       aria-label={`Finish of the backer: ${words}`}
-      className="line-clamp-2 whitespace-normal"
+      className="-ml-0.5 line-clamp-2 whitespace-normal"
       onClick={onFinish}
     >
       Backer, {words}

@@ -61,7 +61,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           {key}
         </button>
       </DeskRowHead>
-      <DeskCell className="min-w-40">
+      <DeskCell className="min-w-28">
         <CellText
           aria-label={`Name of ${key}`}
           maxLength={120}
@@ -73,7 +73,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           }}
         />
       </DeskCell>
-      <DeskCell className="min-w-36">
+      <DeskCell className="min-w-32">
         <span className="flex items-center gap-2">
           <Swatch colour={layer.stock.colour} />
           <CellSelect
@@ -89,7 +89,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           </CellSelect>
         </span>
       </DeskCell>
-      <DeskCell className="min-w-16">
+      <DeskCell className="min-w-14">
         <CellSelect
           aria-label={`Thickness of ${key}`}
           value={layer.thickness}
@@ -105,10 +105,10 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           ))}
         </CellSelect>
       </DeskCell>
-      <DeskCell className="w-1/4 min-w-44">
+      <DeskCell className="w-1/4 min-w-32">
         <HoldCell layer={layer} />
       </DeskCell>
-      <DeskCell className="min-w-16">
+      <DeskCell className="min-w-14">
         {hold.kind === "standoff" ? (
           <CellLength
             aria-label={`Offset of ${key}`}
@@ -121,7 +121,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           "–"
         )}
       </DeskCell>
-      <DeskCell className="min-w-28">
+      <DeskCell className="min-w-24">
         <CellSelect
           aria-label={`How ${key} is located`}
           value={layer.locate}

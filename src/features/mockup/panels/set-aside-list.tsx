@@ -35,7 +35,7 @@ export function SetAsideList({ standings, heading, onShow, onTakeBack }: SetAsid
       )}
       <ul>
         {aside.map(({ key, finding, setAside }) => (
-          <li key={key} className="flex gap-3 border-b border-rule py-2 text-sm">
+          <li key={key} className="flex gap-2 border-b border-rule py-2 text-sm">
             <SeverityWord quiet severity={finding.severity} />
             <div className="min-w-0 flex-1 wrap-anywhere">
               <p className="text-graphite">
