@@ -1,6 +1,5 @@
 import { drawElevation } from "#shared/drawing/elevation.ts";
 import { rules } from "#shared/dry-fit/index.ts";
-import { listMends } from "#shared/dry-fit/list-mends.ts";
 import type { RuleInput } from "#shared/dry-fit/rule.ts";
 import { runDryFit } from "#shared/dry-fit/run-dry-fit.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
@@ -33,15 +32,11 @@ export function drawPicture(
   return { figures, drawing: { elevation, dryFit: fitOf({ document, figures, limits, context, kernel }) } };
 }
 
-/** Worst first, so what is left without mends on a sign full of findings is the least of them. */
-const mostMended = 60;
-
 function fitOf(input: RuleInput): DryFit {
   const findings = runDryFit(input);
   const found = new Set(findings.map(({ rule }) => rule));
   return {
     findings,
-    mends: findings.map((finding, index) => (index < mostMended ? listMends(finding, input) : [])),
     fine: rules.filter(({ number }) => !found.has(number)).length,
   };
 }

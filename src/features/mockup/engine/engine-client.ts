@@ -1,4 +1,4 @@
-import type { PictureAnswer, PictureInput, PictureRequest, PictureResult } from "./picture-messages.ts";
+import type { MendsOutcome, PictureAnswer, PictureInput, PictureRequest, PictureResult } from "./picture-messages.ts";
 
 /** The two ends of a worker that the client needs, so that tests can put another engine behind it. */
 export type WorkerPort = {
@@ -17,8 +17,13 @@ export type Engine = {
  * One question at a time goes to the worker and the newest one waits, so that a drag never piles up work. Answers come in
  * the order of their questions, each with the input that it is for.
  */
-export function createEngine(port: WorkerPort, onResult: (result: PictureResult) => void): Engine {
+export function createEngine(
+  port: WorkerPort,
+  onResult: (result: PictureResult) => void,
+  onMends: (result: { readonly input: PictureInput; readonly mends: MendsOutcome }) => void,
+): Engine {
   let sequence = 0;
+  let answered: { sequence: number; input: PictureInput } | null = null;
   let asked: { sequence: number; input: PictureInput } | null = null;
   let waiting: PictureInput | null = null;
   let closed = false;
@@ -30,7 +35,14 @@ export function createEngine(port: WorkerPort, onResult: (result: PictureResult)
   }
 
   port.addEventListener("message", ({ data }) => {
-    if (closed || asked === null || data.sequence !== asked.sequence) return;
+    if (closed) return;
+    if ("mends" in data) {
+      // What mends an older picture is of no use any more.
+      if (answered?.sequence === data.sequence) onMends({ input: answered.input, mends: data.mends });
+      return;
+    }
+    if (data.sequence !== asked?.sequence) return;
+    answered = asked;
     const { input } = asked;
     asked = null;
     if (waiting !== null) {

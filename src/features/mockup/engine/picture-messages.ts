@@ -19,12 +19,11 @@ export type PictureInput = {
   readonly what: "all" | "figures";
 };
 
-/** `fine` is the number of rules that found nothing; `mends` stand in the order of the findings. */
-export type DryFit = {
-  readonly findings: readonly Finding[];
-  readonly mends: readonly (readonly Mend[])[];
-  readonly fine: number;
-};
+/** `fine` is the number of rules that found nothing. */
+export type DryFit = { readonly findings: readonly Finding[]; readonly fine: number };
+
+/** What mends each finding of a dry fit, in their order; shorter while the rest is still being worked out. */
+export type Mends = readonly (readonly Mend[])[];
 
 export type Picture = {
   readonly figures: Figures;
@@ -37,5 +36,12 @@ export type PictureOutcome =
   | { readonly ok: false; readonly reason: string };
 
 export type PictureRequest = PictureInput & { readonly sequence: number };
-export type PictureAnswer = { readonly sequence: number; readonly outcome: PictureOutcome };
+/** First the picture, then, when nothing newer was asked, what would mend its findings. */
+export type PictureAnswer =
+  | { readonly sequence: number; readonly outcome: PictureOutcome }
+  | { readonly sequence: number; readonly mends: MendsOutcome };
+
+export type MendsOutcome =
+  | { readonly ok: true; readonly list: Mends }
+  | { readonly ok: false; readonly reason: string };
 export type PictureResult = { readonly input: PictureInput; readonly outcome: PictureOutcome };

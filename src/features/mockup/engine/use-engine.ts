@@ -2,10 +2,10 @@ import { useEffect, useEffectEvent, useRef, useState } from "react";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
 import { createEngine, type Engine } from "./engine-client.ts";
-import type { Picture, PictureInput } from "./picture-messages.ts";
+import type { Mends, MendsOutcome, Picture, PictureInput } from "./picture-messages.ts";
 
 /** A drawing of a document, with what it was made of. */
-export type Drawn = { readonly input: PictureInput } & NonNullable<Picture["drawing"]>;
+export type Drawn = { readonly input: PictureInput; readonly mends: Mends } & NonNullable<Picture["drawing"]>;
 
 type Engineering = {
   /** The newest figures, and the document that they are of. */
@@ -27,14 +27,23 @@ export function useEngine(input: PictureInput | null): Engineering {
     worker.addEventListener("error", () =>
       setMade((before) => ({ ...before, failure: "The part of the page that draws did not start." })),
     );
-    const started = createEngine(worker, ({ input: of, outcome }) => {
+    const keepMends = ({ input: of, mends }: { input: PictureInput; mends: MendsOutcome }) =>
       setMade((before) => {
-        if (!outcome.ok) return { ...before, failure: outcome.reason };
-        const { figures, drawing } = outcome.picture;
-        const drawn = drawing === null ? before.drawn : { input: of, ...drawing };
-        return { figures: { figures, of: of.document }, drawn, failure: null };
+        if (!mends.ok) return { ...before, failure: mends.reason };
+        return before.drawn?.input === of ? { ...before, drawn: { ...before.drawn, mends: mends.list } } : before;
       });
-    });
+    const started = createEngine(
+      worker,
+      ({ input: of, outcome }) => {
+        setMade((before) => {
+          if (!outcome.ok) return { ...before, failure: outcome.reason };
+          const { figures, drawing } = outcome.picture;
+          const drawn = drawing === null ? before.drawn : { input: of, mends: [], ...drawing };
+          return { figures: { figures, of: of.document }, drawn, failure: null };
+        });
+      },
+      keepMends,
+    );
     engine.current = started;
     const waiting = latestInput();
     if (waiting !== null) started.ask(waiting);

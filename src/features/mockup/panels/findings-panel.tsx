@@ -9,7 +9,7 @@ import { counted } from "@/lib/format.ts";
 import { useShop } from "@/lib/shop-context.ts";
 import type { SettingAside } from "../editor/use-setting-aside.ts";
 import type { DeskStanding, Standings } from "../editor/use-standings.ts";
-import type { DryFit } from "../engine/picture-messages.ts";
+import type { DryFit, Mends } from "../engine/picture-messages.ts";
 import { keyedStandings } from "../model/keyed-standings.ts";
 import { FindingItem } from "./finding-item.tsx";
 import { FindingsList } from "./findings-list.tsx";
@@ -19,6 +19,8 @@ import { SetAsideList } from "./set-aside-list.tsx";
 type FindingsPanelProps = {
   /** null until the first run. */
   readonly dryFit: DryFit | null;
+  /** What mends each finding, as far as it is known. */
+  readonly mends?: Mends;
   readonly standings: Standings;
   /** Whether the findings are of the drawing as it is now. */
   readonly isCurrent: boolean;
@@ -40,7 +42,7 @@ export function FindingsPanel(props: FindingsPanelProps) {
   const open = keyedStandings(standings.filter(({ setAside }) => setAside === null));
   const of = (severity: Severity) => open.filter(({ finding }) => finding.severity === severity);
   const remarks = of("remark");
-  const mends = new Map(dryFit?.findings.map((finding, index) => [finding, dryFit.mends[index] ?? []]));
+  const mends = new Map(dryFit?.findings.map((finding, index) => [finding, props.mends?.[index] ?? []]));
   const ready = dryFit !== null && known.standings !== null;
 
   const renderItem = (one: (typeof open)[number]) => (

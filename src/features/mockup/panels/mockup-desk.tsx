@@ -158,7 +158,7 @@ export function MockupDesk(props: MockupDeskProps) {
         />
         <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
       </div>
-      <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_minmax(17rem,24rem)]">
+      <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_clamp(17rem,25.5vw,24rem)]">
         <div className="min-w-0">
           <SchedulePanel
             onBoard={() => setDialog("board")}
@@ -170,6 +170,7 @@ export function MockupDesk(props: MockupDeskProps) {
         </div>
         <FindingsPanel
           dryFit={drawn?.dryFit ?? null}
+          mends={drawn?.mends ?? []}
           standings={standings}
           isCurrent={isCurrent}
           shown={finding}

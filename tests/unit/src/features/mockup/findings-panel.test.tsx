@@ -73,7 +73,8 @@ function Panel({ findings, mends = [], onMend, editing = true, save = async () =
   const settingAside = useSettingAside({ ...place, save });
   return (
     <FindingsPanel
-      dryFit={{ findings, mends: findings.map(() => mends), fine: 9 }}
+      dryFit={{ findings, fine: 9 }}
+      mends={findings.map(() => mends)}
       standings={standings}
       isCurrent
       onShow={() => undefined}

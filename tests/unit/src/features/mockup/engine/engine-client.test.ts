@@ -12,6 +12,7 @@ function startPort() {
   return {
     asked,
     answer: (sequence: number) => listen({ data: { sequence, outcome: { ok: false, reason: `answer ${sequence}` } } }),
+    mend: (sequence: number) => listen({ data: { sequence, mends: { ok: true, list: [] } } }),
     port: {
       postMessage: (request: PictureRequest) => void asked.push(request),
       addEventListener: (_: "message", listener: (event: { data: PictureAnswer }) => void) => {
@@ -31,11 +32,37 @@ const input = (quantity: number): PictureInput => ({
   what: "all",
 });
 
+const noMends = () => {
+  throw new Error("no mends were sent");
+};
+
 describe("asking the engine", () => {
+  it("hands on what mends the picture that was answered last, and nothing of an older one", () => {
+    const { port, answer, mend } = startPort();
+    const mended: number[] = [];
+    const engine = createEngine(
+      port,
+      () => undefined,
+      ({ input: of }) => mended.push(of.document.quantity),
+    );
+    engine.ask(input(1));
+    mend(1);
+    answer(1);
+    mend(1);
+    engine.ask(input(2));
+    mend(1);
+    answer(2);
+    mend(1);
+    mend(2);
+    engine.close();
+    mend(2);
+    expect(mended).toEqual([1, 1, 2]);
+  });
+
   it("has one question under way and lets only the newest one wait", () => {
     const { port, asked, answer } = startPort();
     const results: number[] = [];
-    const engine = createEngine(port, ({ input: of }) => results.push(of.document.quantity));
+    const engine = createEngine(port, ({ input: of }) => results.push(of.document.quantity), noMends);
     for (const quantity of [1, 2, 3, 4]) engine.ask(input(quantity));
     expect(asked.map(({ document }) => document.quantity)).toEqual([1]);
     answer(1);
@@ -47,7 +74,7 @@ describe("asking the engine", () => {
   it("drops answers to what was not asked, was answered, or comes after it was closed", () => {
     const { port, answer } = startPort();
     const results: number[] = [];
-    const engine = createEngine(port, ({ input: of }) => results.push(of.document.quantity));
+    const engine = createEngine(port, ({ input: of }) => results.push(of.document.quantity), noMends);
     engine.ask(input(1));
     answer(9);
     answer(1);
