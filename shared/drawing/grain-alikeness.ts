@@ -4,10 +4,10 @@ import { directionOf, type GrainStrip, grainOf } from "./strip-grain.ts";
 /** Grain of a strip at places in rows along its axis, from its near end; NaN where the strip does not reach. */
 export type GrainSample = Float64Array;
 
-const columns = 24;
-const rows = 14;
+const columns = 36;
+const rows = 16;
 /** Between places along the axis: a short slat still has a few. */
-const alongMm = 12;
+const alongMm = 6;
 
 export function grainSample(strip: GrainStrip, widthMm: number): GrainSample {
   const grain = grainOf(strip, 1);
