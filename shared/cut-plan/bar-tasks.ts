@@ -1,9 +1,8 @@
 import type { Kernel } from "../geometry/kernel.ts";
 import type { MockupDocument, Wood } from "../mockup/document.ts";
-import type { Slat, SlatCut } from "../slats/slat-layout.ts";
-import { hasParallelCuts } from "../slats/stock-taken.ts";
 import { frameOf, slatsOf } from "../stack/backer.ts";
 import { type BarEnd, type BarPart, type CuttingJob, squareEnd } from "../stock-lengths/cutting-job.ts";
+import { partsOfSlats } from "../stock-lengths/parts-of-slats.ts";
 import { formatLength } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { ShopSaws } from "./shop-saws.ts";
@@ -36,7 +35,7 @@ export function barTasks({
   const tasks: { what: string; stock: Wood; width: number; thickness: number; parts: BarPart[] }[] = [];
   if (backer.slats && laid?.ok) {
     const { stock, thickness, slatWidth, spineWidth } = backer.slats;
-    const parts = laid.value.slats.map((slat) => slatPart(slat, quantity));
+    const parts = partsOfSlats(laid.value.slats).map((part) => ({ ...part, quantity }));
     tasks.push({ what: "Slats", stock, width: slatWidth, thickness, parts });
     const { spine } = laid.value;
     if (spine) {
@@ -71,23 +70,4 @@ export function barTasks({
       saw: { kerfMm: saws.sawKerfMm, squaringMm: saws.squaringMm, rejectShare: saws.rejectShare, nests: true },
     },
   }));
-}
-
-/** A slat lying on the saw, its near end left. Parallel cuts have their long points on opposite edges. */
-function slatPart(slat: Slat, quantity: number): BarPart {
-  const parallel = hasParallelCuts(slat);
-  return {
-    id: `slat-${slat.order}`,
-    label: String(slat.order),
-    lengthMm: slat.longPoint,
-    quantity,
-    start: endOf(slat.near, "upper"),
-    end: endOf(slat.far, parallel ? "lower" : "upper"),
-  };
-}
-
-function endOf(cuts: readonly SlatCut[], side: "upper" | "lower"): BarEnd {
-  const setting = cuts.reduce((most, cut) => Math.max(most, cut.setting), 0);
-  if (setting === 0) return squareEnd;
-  return { angle: 90 - setting, longPoint: cuts.length > 1 ? "middle" : side };
 }
