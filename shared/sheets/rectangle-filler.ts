@@ -1,10 +1,9 @@
-import { lengthToleranceMm } from "../geometry/tolerance.ts";
 import { type CutShape, type LaidShape, layShape } from "./cut-shape.ts";
 import type { FillControl, Filler, Filling, Item, LaidCopy, OpenField } from "./filler.ts";
 import { seededNumbers } from "./random.ts";
 import { sidesAlongAxes } from "./rectangle-turns.ts";
 import type { SheetField } from "./sheet-field.ts";
-import { fillRoom, type RectangleWay } from "./skyline.ts";
+import { fillRoom, hairMm, type RectangleWay } from "./skyline.ts";
 
 /** Orders that give nothing better before the search starts over from another one. */
 const patience = 2000;
@@ -93,7 +92,7 @@ export function rectangleFiller(shapes: readonly CutShape[], gapMm: number): Fil
     fits: (shape, field) =>
       (waysOn(field).ways[shape] ?? []).some(({ long, wide }) => {
         const room = roomOf(field, gapMm);
-        return long <= room.long + lengthToleranceMm && wide <= room.wide + lengthToleranceMm;
+        return long <= room.long + hairMm && wide <= room.wide + hairMm;
       }),
   };
 }

@@ -13,8 +13,8 @@ export type LaidRectangle = {
   readonly v: number;
 };
 
-/** Differences below this are rounding. */
-const hair = 1e-7;
+/** Differences below this are rounding, mm. */
+export const hairMm = 1e-7;
 
 type Step = { v: number; wide: number; u: number };
 
@@ -63,7 +63,7 @@ export function fillRoom(
       kindsSeen++;
       for (const way of waysOf[kind] ?? []) {
         meter.probes++;
-        if (way.wide > step.wide + hair || step.u + way.long > room.long + hair) continue;
+        if (way.wide > step.wide + hairMm || step.u + way.long > room.long + hairMm) continue;
         const score = fitness(way, step.wide, left, right);
         if (score > best) {
           best = score;
@@ -90,7 +90,7 @@ export function fillRoom(
   return laid;
 }
 
-const same = (a: number, b: number): boolean => Math.abs(a - b) <= hair;
+const same = (a: number, b: number): boolean => Math.abs(a - b) <= hairMm;
 const mostFitting = 4;
 
 /** How well a rectangle fits between two walls: 4 fills the step up to the higher wall, 0 leaves a new corner everywhere. */
@@ -116,7 +116,7 @@ function standsRight(way: RectangleWay, wide: number, left: number, right: numbe
 
 function lowestStep(steps: readonly Step[]): number {
   let lowest = 0;
-  for (const [index, step] of steps.entries()) if (step.u < (steps[lowest]?.u ?? 0) - hair) lowest = index;
+  for (const [index, step] of steps.entries()) if (step.u < (steps[lowest]?.u ?? 0) - hairMm) lowest = index;
   return lowest;
 }
 
@@ -137,10 +137,10 @@ function put(steps: Step[], at: number, way: RectangleWay, toRight: boolean): vo
   if (!step) return;
   const rest = step.wide - way.wide;
   const laid: Step = { v: toRight ? step.v + rest : step.v, wide: way.wide, u: step.u + way.long };
-  if (rest <= hair) steps.splice(at, 1, { ...laid, wide: step.wide, v: step.v });
+  if (rest <= hairMm) steps.splice(at, 1, { ...laid, wide: step.wide, v: step.v });
   else if (toRight) steps.splice(at, 1, { v: step.v, wide: rest, u: step.u }, laid);
   else steps.splice(at, 1, laid, { v: step.v + way.wide, wide: rest, u: step.u });
-  join(steps, toRight && rest > hair ? at + 1 : at);
+  join(steps, toRight && rest > hairMm ? at + 1 : at);
 }
 
 /** Joins a step with neighbours on its level. */
