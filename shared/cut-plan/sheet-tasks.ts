@@ -18,6 +18,8 @@ export type SheetTask = {
   readonly request: NestingRequest;
   /** Whether the sheets are those counted in stock, or the size that is usually bought. */
   readonly sheetsAreCounted: boolean;
+  /** What is bought when the counted sheets are too few. */
+  readonly usualSheet: StockSheet;
 };
 
 /** Units of search: some five seconds a material in a workshop's computer. */
@@ -55,6 +57,7 @@ export function sheetTasks({
       stock: layer.stock,
       thicknessMm: layer.thickness,
       sheetsAreCounted: counted.length > 0,
+      usualSheet: usualSheet(saws),
       request: {
         pieces,
         stock: counted.length > 0 ? counted.map(sheetInStock(unit)) : [usualSheet(saws)],

@@ -10,7 +10,7 @@ import type { LengthUnit } from "../units/length.ts";
 import { fineLineMm } from "./dimensions.ts";
 import type { Item } from "./display-list.ts";
 import { labelRoom } from "./label-room.ts";
-import { graphite, ink, linen, mixColours, rule, sheetWhite } from "./palette.ts";
+import { graphite, ink, linen, rule, sheetWhite } from "./palette.ts";
 import { textItem } from "./text-item.ts";
 import { capHeightShare, smallTextMm, textWidthMm } from "./type.ts";
 
@@ -25,7 +25,7 @@ export type SheetPicture = {
 };
 
 /**
- * One sheet with the pieces in their places under their names, and what is left for another job dashed, with its size.
+ * One sheet with the pieces in their places under their names, and what is left for another job dashed and hatched, with its size.
  * Everything to scale; a name stands only where it has room.
  */
 export function drawNestedSheet({ sheet, pieces, scale, at, unit }: SheetPicture): Item[] {
@@ -57,9 +57,30 @@ export function drawNestedSheet({ sheet, pieces, scale, at, unit }: SheetPicture
 function offcutItems(region: Region, words: string): Item[] {
   const stroke = { colour: graphite, widthMm: fineLineMm, dashMm: [2, 1.2] };
   return [
-    { kind: "path", path: pathOfRegion(region), stroke, fill: mixColours(rule, sheetWhite, 0.6) },
+    { kind: "clip", clip: pathOfRegion(region), items: hatching(region) },
+    { kind: "path", path: pathOfRegion(region), stroke },
     ...label(words, region, graphite),
   ];
+}
+
+/** Distance of hatching lines along the paper's edges, mm. */
+const hatchMm = 4;
+
+/** Lines at 45 degrees over the box of a region, on one lattice for the whole paper. */
+function hatching(region: Region): Item[] {
+  const box = boxOfRegion(region);
+  if (!box) return [];
+  const stroke = { colour: rule, widthMm: fineLineMm };
+  const first = Math.ceil((box.x + box.y) / hatchMm);
+  const last = Math.floor((box.x + box.width + box.y + box.height) / hatchMm);
+  return Array.from({ length: Math.max(0, last - first + 1) }, (_, index): Item => {
+    const sum = (first + index) * hatchMm;
+    const points = [
+      { x: sum - box.y, y: box.y },
+      { x: sum - box.y - box.height, y: box.y + box.height },
+    ];
+    return { kind: "line", points, stroke };
+  });
 }
 
 function sizeWords(region: Region, unit: LengthUnit): string {
