@@ -72,12 +72,12 @@ export function draftLines(
       const rate = { amount: price, per: pack };
       return { group: "hardware", id, what: name, quantity, decimals: 0, unit: "each", rate, rateUnit, waste: 0 };
     }),
-    ...book.adhesives.map(({ id, name, price, containerMl, mlPerM2, mlPerM }): DraftLine => {
+    ...book.adhesives.map(({ id, name, price, unit = "ml", containerMl, mlPerM2, mlPerM }): DraftLine => {
       const { areaMm2 = 0, beadMm = 0 } = of("adhesives", id);
       const quantity = (areaMm2 / 1e6) * mlPerM2 + (beadMm / 1000) * mlPerM;
       const rate = { amount: price, per: containerMl };
-      const rateUnit = `${containerMl} ml`;
-      return { group: "adhesives", id, what: name, quantity, decimals: 1, unit: "ml", rate, rateUnit, waste: 0 };
+      const rateUnit = `${containerMl} ${unit}`;
+      return { group: "adhesives", id, what: name, quantity, decimals: 1, unit, rate, rateUnit, waste: 0 };
     }),
     ...book.finishes.flatMap(({ id, name, pricePerM2, minutesPerM2, perHour }): DraftLine[] => {
       const quantity = (of("finishes", id).coatMm2 ?? 0) / 1e6;

@@ -24,9 +24,13 @@ const minutes = (what: string) =>
   z.number(`${what} must be a number.`).min(0, `${what} can't be below 0.`).max(10_000, `${what}: a week is too long.`);
 
 const entry = {
-  id: z.string().min(1, "Every entry needs an id.").max(64),
+  id: z.string().min(1, "Every entry needs an id.").max(200),
   name: z.string().trim().min(1, "Every entry needs a name.").max(120),
 };
+
+/** What an adhesive is counted in: a liquid's volume, a paste's mass, a tape's area. */
+export const adhesiveUnits = ["ml", "g", "cm²"] as const;
+export type AdhesiveUnit = (typeof adhesiveUnits)[number];
 
 /** How a material is bought: what one price is for. */
 export const materialUnits = ["m²", "ft²", "m", "ft", "sheet", "bar", "each"] as const;
@@ -79,14 +83,19 @@ export const priceBookSchema = z.strictObject({
         .max(100_000, "A pack holds 100,000 at most."),
     }),
   ),
-  /** Price of a container, and what is spread over an area or laid as a bead. */
+  /** Price of a container, and what is spread over an area or laid as a bead; all counted in `unit` where it isn't ml. */
   adhesives: list(
     z.strictObject({
       ...entry,
       price,
-      containerMl: z.number().int().min(1).max(1_000_000),
-      mlPerM2: z.number().min(0).max(100_000),
-      mlPerM: z.number().min(0).max(100_000),
+      unit: z.enum(adhesiveUnits).optional(),
+      containerMl: z
+        .number("What a container holds must be a number.")
+        .int("What a container holds is a whole number.")
+        .min(1, "A container holds at least 1.")
+        .max(1_000_000, "A container holds 1 000 000 at most."),
+      mlPerM2: z.number("The spread must be a number.").min(0, "The spread can't be below 0.").max(100_000),
+      mlPerM: z.number("The bead must be a number.").min(0, "The bead can't be below 0.").max(100_000),
     }),
   ),
   /** Price and time for a square metre of one coat. */
