@@ -1,6 +1,8 @@
+import { dimensionRowMm } from "#shared/drawing/dimensions.ts";
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import { smallTextMm } from "#shared/drawing/type.ts";
+import type { Box } from "#shared/geometry/path.ts";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
 
 /** Lettering on a screen that shows the whole board, in px of the em. */
@@ -25,27 +27,37 @@ const sectionBottom = 27;
 /** Three rows below and at the right, as most signs have them, for the time before the first picture. */
 export const usualMargins: PaperMargins = { left: 14, top: 14, right: 27, bottom: 30 };
 
-/** The margins of a picture of `drawElevation`, to half a mm so that the window stays still over changes that don't matter. */
-export function marginsOf(list: DisplayList, board: Size, paperScale: number): PaperMargins {
+/**
+ * The margins of a picture of `drawElevation` around a sign, whose box is the board's with its frame, to half a mm so that the window stays still
+ * over changes that don't matter.
+ */
+export function marginsOf(list: DisplayList, sign: Box, paperScale: number): PaperMargins {
   const origin = boardOriginOf(list) ?? { x: 0, y: 0 };
   const paper = (mm: number) => Math.round((mm / paperScale) * 2) / 2;
   return {
-    left: paper(origin.x),
-    top: paper(origin.y),
-    right: paper(list.widthMm - origin.x - board.width),
-    bottom: Math.max(sectionBottom, paper(list.heightMm - origin.y - board.height)),
+    left: paper(origin.x + sign.x),
+    top: paper(origin.y + sign.y),
+    right: paper(list.widthMm - origin.x - sign.x - sign.width),
+    bottom: Math.max(sectionBottom, paper(list.heightMm - origin.y - sign.y - sign.height)),
   };
 }
 
-/** The view of a whole board with its dimensions in a window: where its upper left corner lies, and how large a mm is. */
-export function fitBoard(board: Size, margins: PaperMargins, room: Size): DrawingView {
+/**
+ * The view of a whole sign with its dimensions in a window: where its board's upper left corner lies, and how large a mm is. A frame round the
+ * board makes the sign's box begin left of and above that corner.
+ */
+export function fitSign(sign: Box, margins: PaperMargins, room: Size): DrawingView {
   const px = (paper: number) => paper * pxPerPaperMm;
   const left = edgePx + px(margins.left);
   const top = headingPx + edgePx + px(margins.top);
   const across = room.width - left - edgePx - px(margins.right);
   const down = room.height - top - edgePx - px(margins.bottom);
-  const scale = Math.max(0.01, Math.min(across / board.width, down / board.height));
-  return { scale, x: left + (across - board.width * scale) / 2, y: top + (down - board.height * scale) / 2 };
+  const scale = Math.max(0.01, Math.min(across / sign.width, down / sign.height));
+  return {
+    scale,
+    x: left + (across - sign.width * scale) / 2 - sign.x * scale,
+    y: top + (down - sign.height * scale) / 2 - sign.y * scale,
+  };
 }
 
 /** How many mm of the sign are one of paper, where a mm of the sign is `scale` px. */

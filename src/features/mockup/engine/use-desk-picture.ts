@@ -1,9 +1,11 @@
 import { useEffect, useMemo, useState } from "react";
+import { stepsAbove } from "#shared/drawing/section.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
 import type { DryFitContext } from "#shared/dry-fit/rule.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
+import { signBox } from "#shared/stack/sign-box.ts";
 import type { Size } from "@/lib/drawing-view.ts";
-import { fitBoard, marginsOf, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
+import { fitSign, marginsOf, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
 import { type Drag, documentOfDrag } from "../model/drag.ts";
 import { isSame } from "../model/same.ts";
 import { useEngine } from "./use-engine.ts";
@@ -23,8 +25,9 @@ const usualRoom = { width: 1100, height: 520 };
 /** Figures, elevation and dry fit of the desk, and the view that shows the whole board with its dimensions. */
 export function useDeskPicture({ document, drag, context, limits, room }: Wanted) {
   const [margins, setMargins] = useState(usualMargins);
-  const { width, height } = document.board;
-  const fit = useMemo(() => fitBoard({ width, height }, margins, room ?? usualRoom), [width, height, margins, room]);
+  const { board, frame } = document;
+  const sign = useMemo(() => signBox({ board, frame }), [board, frame]);
+  const fit = useMemo(() => fitSign(sign, margins, room ?? usualRoom), [sign, margins, room]);
   const paperScale = paperScaleAt(fit.scale);
   const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
   const what = drag === null ? "all" : "figures";
@@ -38,7 +41,7 @@ export function useDeskPicture({ document, drag, context, limits, room }: Wanted
   const isDragging = drag !== null;
   useEffect(() => {
     if (drawn === null || isDragging) return;
-    const next = marginsOf(drawn.elevation, drawn.input.document.board, drawn.input.paperScale);
+    const next = marginsOf(drawn.elevation, signBox(drawn.input.document), drawn.input.paperScale);
     setMargins((before) => (isSame(before, next) ? before : next));
   }, [drawn, isDragging]);
 

@@ -5,6 +5,7 @@ import type { StockItem } from "#shared/contracts/stock.ts";
 import { makingWords } from "#shared/drawing/making-words.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
+import { signBox } from "#shared/stack/sign-box.ts";
 import { formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Notice } from "@/components/ui/notice.tsx";
@@ -14,7 +15,7 @@ import { TextLink } from "@/components/ui/text-link.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { DrawingViewer } from "@/lib/drawing-viewer.tsx";
 import { useRoom } from "@/lib/use-room.ts";
-import { fitBoard, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
+import { fitSign, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
 import { useStandings } from "../editor/use-standings.ts";
 import { useEngine } from "../engine/use-engine.ts";
 import { dryFitContextOf } from "../model/dry-fit-context.ts";
@@ -41,7 +42,7 @@ export function MockupReadOnly({ shop, unit, job, jobPath, mockup, limits, stock
   const { width, height } = document.board;
   // On a phone dimension lines would leave no room for the sign; its size stands under it in words.
   const dimensions = room !== null && room.width >= 600;
-  const paperScale = room === null ? null : paperScaleAt(fitBoard({ width, height }, usualMargins, room).scale);
+  const paperScale = room === null ? null : paperScaleAt(fitSign(signBox(document), usualMargins, room).scale);
   const input = useMemo(
     () =>
       paperScale === null

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { fitBoard, paperScaleAt, usualMargins, viewAt } from "@/features/mockup/canvas/view-of-board.ts";
+import { fitSign, paperScaleAt, usualMargins, viewAt } from "@/features/mockup/canvas/view-of-board.ts";
 
 describe("the view of a board", () => {
   it.each([
@@ -7,7 +7,7 @@ describe("the view of a board", () => {
     { board: { width: 150, height: 900 }, room: { width: 1130, height: 540 } },
     { board: { width: 5000, height: 300 }, room: { width: 700, height: 420 } },
   ])("$board.width by $board.height lies with its dimensions inside $room.width by $room.height", ({ board, room }) => {
-    const fit = fitBoard(board, usualMargins, room);
+    const fit = fitSign({ x: 0, y: 0, ...board }, usualMargins, room);
     const paperMm = 13 / 3.4;
     expect(fit.x - usualMargins.left * paperMm).toBeGreaterThanOrEqual(0);
     expect(fit.y - usualMargins.top * paperMm).toBeGreaterThanOrEqual(0);
@@ -15,8 +15,17 @@ describe("the view of a board", () => {
     expect(fit.y + board.height * fit.scale + usualMargins.bottom * paperMm).toBeLessThanOrEqual(room.height);
   });
 
+  it("keeps a frame round the board inside too", () => {
+    const room = { width: 700, height: 900 };
+    const fit = fitSign({ x: -20, y: -20, width: 640, height: 440 }, usualMargins, room);
+    const paperMm = 13 / 3.4;
+    const [left, right] = [fit.x - 20 * fit.scale, fit.x + 620 * fit.scale];
+    expect(left - usualMargins.left * paperMm).toBeCloseTo(10, 6);
+    expect(right + usualMargins.right * paperMm).toBeCloseTo(690, 6);
+  });
+
   it("letters at 13 px: an em of 3.4 mm of paper at the scale shown", () => {
-    const { scale } = fitBoard({ width: 600, height: 400 }, usualMargins, { width: 1130, height: 540 });
+    const { scale } = fitSign({ x: 0, y: 0, width: 600, height: 400 }, usualMargins, { width: 1130, height: 540 });
     expect(3.4 * paperScaleAt(scale) * scale).toBeCloseTo(13, 1);
   });
 
