@@ -68,7 +68,10 @@ function outlineMeasures({ outline }: SlatBoard): Record<string, readonly [numbe
 }
 
 /** Slats that the board with its overhang can take at most. */
-function roughCount({ width, height }: SlatBoard, { pattern, angle, slatWidth, gap, overhang }: SlatDesign): number {
+export function roughCount(
+  { width, height }: SlatBoard,
+  { pattern, angle, slatWidth, gap, overhang }: SlatDesign,
+): number {
   const { sin, cos } = slopeOf(angle);
   const along = (height + 2 * overhang) * sin + (width + 2 * overhang) * cos * (pattern === "single" ? 1 : 0.5);
   return (pattern === "single" ? 1 : 2) * Math.ceil(along / (slatWidth + gap));

@@ -1,7 +1,7 @@
 import type { Kernel } from "../geometry/kernel.ts";
 import { isShorter } from "../geometry/tolerance.ts";
 import type { Outcome } from "../units/outcome.ts";
-import { checkedSlats } from "./check-slats.ts";
+import { checkedSlats, roughCount } from "./check-slats.ts";
 import { pitchMm, slopeOf, stripLengthMm, stripsOfHalf } from "./half-board.ts";
 import { bodyOf } from "./lay-out-slats.ts";
 import { sidesOf, startHeightMm } from "./sides.ts";
@@ -28,10 +28,12 @@ export type StartChoice = {
 
 /** A hand lays a slat so exactly, mm: a start must hold that far either way. Our choice. */
 const layingErrorMm = 0.5;
-/** Starts that are tried besides the exact ones, evenly over one pitch; fewer where an outline has many points. */
+/** Starts that are tried besides the exact ones, evenly over one pitch; fewer where an outline has many points or slats. */
 const triesOnRectangle = 60;
 const triesOnOutline = 24;
 const pointsForAllTries = 2_000;
+/** Slats times starts on an outline: each start is clipped three times over. */
+const mostSlatTries = 1_000;
 
 /**
  * The start that leaves the longest shortest slat, and of those that leave no sliver the one with the widest narrow slat. It
@@ -43,7 +45,7 @@ export function chooseStart(board: SlatBoard, design: SlatDesign, kernel: Kernel
   return checkedSlats(board, design, () => {
     const measure = measureOf(board, design, kernel);
     const exact = board.outline ? [] : exactStarts(board, design);
-    const tries = triesOn(board);
+    const tries = triesOn(board, design);
     const pitch = pitchMm(design);
     const even = Array.from({ length: tries }, (_, index) => (index * pitch) / tries);
     const heights = [...exact, ...even].map((height) => tenths(height - pitch * Math.floor(height / pitch)));
@@ -59,10 +61,12 @@ export function chooseStart(board: SlatBoard, design: SlatDesign, kernel: Kernel
   });
 }
 
-function triesOn({ outline }: SlatBoard): number {
-  if (!outline) return triesOnRectangle;
-  const points = outline.reduce((count, ring) => count + ring.length, 0);
-  return Math.max(4, Math.min(triesOnOutline, Math.floor((triesOnOutline * pointsForAllTries) / points)));
+function triesOn(board: SlatBoard, design: SlatDesign): number {
+  if (!board.outline) return triesOnRectangle;
+  const points = board.outline.reduce((count, ring) => count + ring.length, 0);
+  const byPoints = Math.floor((triesOnOutline * pointsForAllTries) / points);
+  const bySlats = Math.floor(mostSlatTries / roughCount(board, design));
+  return Math.max(4, Math.min(triesOnOutline, byPoints, bySlats));
 }
 
 type Rated = { readonly measure: StartMeasure; readonly length: number; readonly width: number };

@@ -4,10 +4,8 @@ import { flattenRing } from "../../geometry/flatten.ts";
 import { remembered } from "../../geometry/kernel.ts";
 import type { Path, Point } from "../../geometry/path.ts";
 import { unplacePoint } from "../../geometry/placement.ts";
-import { fitOnBed } from "../../materials/bed-fit.ts";
 import type { MockupDocument, Piece } from "../../mockup/document.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
-import { pieceRegion } from "../../stack/piece-region.ts";
 import type { Finding } from "../finding.ts";
 import type { Mend } from "../mend.ts";
 import type { RuleInput } from "../rule.ts";
@@ -17,8 +15,8 @@ import { layersWithFigures } from "../words.ts";
 const asideMm = [0, 0.013, -0.017, 0.031, -0.037, 0.059, -0.061, 0.11, -0.13];
 
 /**
- * Splits a piece that is too large for the bed along a straight cut through its middle, across its longer side unless only
- * the other way makes both halves fit. What a cut leaves apart becomes pieces of its own.
+ * Splits a piece that is too large for the bed along a straight cut through its middle, across its longer side. What the cut
+ * leaves apart becomes pieces of its own.
  */
 export function splitPieceMends({ pieceIds }: Finding, input: RuleInput): Mend[] {
   const found = layersWithFigures(input)
@@ -26,10 +24,7 @@ export function splitPieceMends({ pieceIds }: Finding, input: RuleInput): Mend[]
     .find(({ piece }) => piece.id === pieceIds[0]);
   if (!found) return [];
   const { piece, figures } = found;
-  const { bedWidthMm, bedHeightMm } = input.limits;
-  const paths = remembered(input.kernel, [piece.path, piece.placement], `split ${bedWidthMm} ${bedHeightMm}`, () =>
-    bestSplit(piece, figures, input),
-  );
+  const paths = remembered(input.kernel, [piece.path, piece.placement], "split", () => splitAcross(piece, figures));
   if (!paths) return [];
   const ids = freeIds(piece.id, paths.length, input.document);
   const parts = paths.map((path, index) => ({ id: ids[index] ?? piece.id, path: changeable(path) }));
@@ -37,24 +32,9 @@ export function splitPieceMends({ pieceIds }: Finding, input: RuleInput): Mend[]
   return [{ label, steps: [{ kind: "split piece", pieceId: piece.id, parts }] }];
 }
 
-function bestSplit(piece: Piece, figures: PieceFigures, input: RuleInput): Path[] | null {
-  const turn = figures.smallestBox?.turn ?? 0;
-  const splits = [turn, turn + 90].flatMap((across) => {
-    const parts = splitAcross(piece, figures, across);
-    return parts ? [parts] : [];
-  });
-  return splits.find((parts) => parts.every((path) => goesOnBed({ ...piece, path }, input))) ?? splits[0] ?? null;
-}
-
-function goesOnBed(piece: { readonly path: Path; readonly placement: Piece["placement"] }, input: RuleInput): boolean {
-  const { bedWidthMm, bedHeightMm } = input.limits;
-  const fit = fitOnBed(pieceRegion(piece, input.kernel), { widthMm: bedWidthMm, heightMm: bedHeightMm });
-  return fit === null || fit.overMm === 0;
-}
-
-/** The parts of a piece cut square to a direction, in the middle of its length there; null when no cut divides it. */
-function splitAcross(piece: Piece, { region }: PieceFigures, turn: number): Path[] | null {
-  const radians = (turn * Math.PI) / 180;
+/** The parts of a piece cut in the middle of its length; null when no cut divides it. */
+function splitAcross(piece: Piece, { region, smallestBox }: PieceFigures): Path[] | null {
+  const radians = ((smallestBox?.turn ?? 0) * Math.PI) / 180;
   const [cosine, sine] = [Math.cos(radians), Math.sin(radians)];
   const along = region.flat().map(({ x, y }) => x * cosine + y * sine);
   const middle =
