@@ -1,5 +1,6 @@
 import type { Banded } from "../units/banded.ts";
-import { formatBand } from "../units/format-band.ts";
+import { formatBandEnds } from "../units/format-band.ts";
+import { formatLength } from "../units/format-length.ts";
 import { balloonRadiusMm, drawBalloon, drawLeader } from "./balloon.ts";
 import type { Item } from "./display-list.ts";
 import { graphite } from "./palette.ts";
@@ -20,20 +21,31 @@ export function spreadPlaces(
 }
 
 const labelPitchMm = 7;
+/** Two lines a label. */
+const bandedPitchMm = 8.5;
 /** The first label stays this far below the board's upper edge: its heading must not rise into the dimensions. */
 const leastLabelMm = 3;
 /** Where on a layer's height its leader may end, the best first. */
 const footShares = [0.5, 0.25, 0.75, 0.1, 0.9, 0.4, 0.6];
 const labelTitle = "Top at";
 
-type Label = { readonly key: string; readonly text: string; readonly foot: { readonly x: number; readonly y: number } };
+type Label = {
+  readonly key: string;
+  readonly text: string;
+  /** The band, on a line of its own below; "" without one. */
+  readonly band: string;
+  readonly foot: { readonly x: number; readonly y: number };
+};
 
 function labelsOf(input: SectionInput, slabs: readonly Slab[]): Label[] {
   const { document, figures, unit, depthScale, heights = "nominal" } = input;
-  const top = (band: Banded) => formatBand(band, unit, heights);
+  const top = (band: Banded) => ({
+    text: formatLength(band.nominal, unit),
+    band: heights === "nominal" ? "" : formatBandEnds(band, unit),
+  });
   const backer: Label = {
     key: "A",
-    text: top(figures.backerTop),
+    ...top(figures.backerTop),
     foot: {
       x: figures.backerTop.nominal * depthScale * 0.5,
       y: document.board.height - Math.min(8 * input.paperScale, document.board.height * 0.06),
@@ -50,7 +62,7 @@ function labelsOf(input: SectionInput, slabs: readonly Slab[]): Label[] {
     const clear = heights.find((y) => feet.every((foot) => Math.abs(foot - y) > 2.5 * input.paperScale));
     const y = clear ?? slab.y + slab.height / 2;
     feet.push(y);
-    return [{ key: layer.key, text: top(layer.top), foot: { x: slab.x + slab.width * 0.6, y } }];
+    return [{ key: layer.key, ...top(layer.top), foot: { x: slab.x + slab.width * 0.6, y } }];
   });
   return [...layers, backer].sort((a, b) => a.foot.y - b.foot.y || (a.key < b.key ? -1 : 1));
 }
@@ -65,22 +77,27 @@ export function layLabels(
   const labels = labelsOf(input, slabs);
   const places = spreadPlaces(
     labels.map(({ foot }) => foot.y),
-    { pitch: mm(labelPitchMm), least: mm(leastLabelMm) },
+    { pitch: mm(labels.some(({ band }) => band !== "") ? bandedPitchMm : labelPitchMm), least: mm(leastLabelMm) },
   );
   const balloonX = figures.depth.nominal * depthScale + mm(9);
   const left = balloonX - mm(balloonRadiusMm);
   const textX = balloonX + mm(4.4);
   const sizeMm = mm(smallTextMm);
-  const keys = labels.flatMap(({ key, text, foot }, index): Item[] => {
+  const keys = labels.flatMap(({ key, text, band, foot }, index): Item[] => {
     const y = places[index] ?? foot.y;
+    const line = y + (sizeMm * capHeightShare) / 2;
+    const apart = band === "" ? 0 : sizeMm * 0.55;
     return [
       ...drawLeader([foot, { x: left, y }], paperScale),
       ...drawBalloon(key, { x: balloonX, y }, paperScale),
-      textItem(text, { x: textX, y: y + (sizeMm * capHeightShare) / 2 }, { sizeMm }),
+      textItem(text, { x: textX, y: line - apart }, { sizeMm }),
+      ...(band === "" ? [] : [textItem(band, { x: textX, y: line + apart }, { sizeMm, colour: graphite })]),
     ];
   });
   const title = textItem(labelTitle, { x: left, y: (places[0] ?? 0) - mm(5.4) }, { sizeMm, colour: graphite });
-  const widths = labels.map(({ text }) => textX + textWidthMm(text, "sans", sizeMm) + mm(1));
+  const widths = labels
+    .flatMap(({ text, band }) => [text, band])
+    .map((line) => textX + textWidthMm(line, "sans", sizeMm) + mm(1));
   return {
     items: [...keys, title],
     right: Math.max(...widths, left + textWidthMm(labelTitle, "sans", sizeMm) + mm(1)),

@@ -1,3 +1,6 @@
+import { lengthsEqual } from "../geometry/tolerance.ts";
+import type { MockupDocument } from "../mockup/document.ts";
+import type { Figures } from "../stack/figures.ts";
 import { signBox } from "../stack/sign-box.ts";
 import { formatLength } from "../units/format-length.ts";
 import { dimensionRowMm, drawDimensions } from "./dimensions.ts";
@@ -9,6 +12,19 @@ import { drawBacker, drawFrame } from "./section-backer.ts";
 import { drawSlabs, drawStandoffs, drawWall, type SectionInput, slabsOf, wallHatchMm } from "./section-bodies.ts";
 import { layLabels } from "./section-labels.ts";
 import { smallTextMm, textWidthMm } from "./type.ts";
+
+/** A depth that is dimensioned, mm from the back of the board. */
+type Step = { readonly from: number; readonly to: number };
+
+/** What is dimensioned above the section, a row each: the backer, and every height that barrels stand. */
+export function stepsAbove(document: MockupDocument, figures: Figures): Step[] {
+  const steps: Step[] = [{ from: 0, to: figures.backerTop.nominal }];
+  for (const { barrel } of placedStandoffs(document, figures)) {
+    const isNew = steps.every(({ from, to }) => !lengthsEqual(from, barrel.from) || !lengthsEqual(to, barrel.to));
+    if (barrel.to > barrel.from && isNew) steps.push({ from: barrel.from, to: barrel.to });
+  }
+  return steps;
+}
 
 /**
  * The stack from the side, wall at the left and viewer at the right: every layer at its height above the back of the board, with its
@@ -24,16 +40,7 @@ export function drawSection(input: SectionInput): DisplayList {
   const metal = drawStandoffs(standoffs, input);
   const deepest = figures.depth.nominal;
   const depthText = (mmDeep: number) => formatLength(mmDeep, unit);
-  const above = [
-    { from: 0, to: figures.backerTop.nominal, thing: whole.y },
-    ...standoffs
-      .filter(
-        ({ barrel }, index) =>
-          barrel.to > barrel.from &&
-          standoffs.findIndex((other) => other.layerKey === standoffs[index]?.layerKey) === index,
-      )
-      .map(({ barrel }) => ({ from: barrel.from, to: barrel.to, thing: whole.y })),
-  ];
+  const above = stepsAbove(document, figures).map((step) => ({ ...step, thing: whole.y }));
   const below = [
     ...(document.hanging.gap > 0 ? [{ from: -document.hanging.gap, to: 0, thing: lowest + mm(4) }] : []),
     { from: -document.hanging.gap, to: deepest, thing: lowest + mm(4) },

@@ -2,7 +2,7 @@ import type { Figures } from "#shared/stack/figures.ts";
 import type { BandWording } from "#shared/units/format-band.ts";
 
 /** Paper mm that the section needs beside the depth itself: the wall's hatching, and balloons with their heights. */
-const besidePaperMm: Readonly<Record<BandWording, number>> = { nominal: 36, "with bands": 62 };
+const besidePaperMm: Readonly<Record<BandWording, number>> = { nominal: 36, "with bands": 51 };
 
 /** Scales that are easily said, so that the screen can state its own. */
 const steps = [12, 10, 8, 6, 5, 4, 3.5, 3, 2.5, 2, 1.5, 1.2, 1, 0.8, 0.6, 0.5, 0.4, 0.3, 0.2, 0.1];

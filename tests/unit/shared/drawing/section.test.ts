@@ -2,9 +2,9 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { loadKernel } from "#server/artwork/load-kernel.ts";
 import type { Item } from "#shared/drawing/display-list.ts";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
-import { drawSection } from "#shared/drawing/section.ts";
+import { drawSection, stepsAbove } from "#shared/drawing/section.ts";
 import { spreadPlaces } from "#shared/drawing/section-labels.ts";
-import { boxOfPath } from "#shared/geometry/box.ts";
+import { boxesOverlap, boxOfPath } from "#shared/geometry/box.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
 import { orreryBooks } from "../../../support/orrery-books.ts";
@@ -74,6 +74,58 @@ describe("the section", () => {
   it("of a bare board has no depth but its own", () => {
     const list = draw(1, { ...orreryBooks(), layers: [], hanging: { ...orreryBooks().hanging, kind: "none", gap: 0 } });
     expect(textBoxesOf(list).map(({ text }) => text)).toEqual(["20", "20", "A", "20", "Top at"]);
+  });
+});
+
+describe("heights with their tolerances", () => {
+  const banded = () =>
+    drawSection({
+      document: orreryBooks(),
+      figures: computeFigures(orreryBooks(), kernel),
+      unit: "mm",
+      paperScale: 5,
+      depthScale: 1,
+      heights: "with bands",
+    });
+
+  it("stand below the height that is meant, and no lettering runs into another", () => {
+    const boxes = textBoxesOf(banded());
+    const of = (text: string) => boxes.find((box) => box.text === text);
+    // Cast 4.5 mm sheet on barrels of 19 on a board of 20: 43.5 ± (0.4 + 0.45).
+    expect(of("42.65 to 44.35")?.box.y).toBeGreaterThan(of("43.5")?.box.y ?? Number.POSITIVE_INFINITY);
+    for (const [index, one] of boxes.entries())
+      for (const other of boxes.slice(index + 1))
+        expect(boxesOverlap(one.box, other.box), `${one.text} and ${other.text}`).toBe(false);
+  });
+});
+
+describe("the steps above the section", () => {
+  it("are the backer and each height that barrels stand, once for layers of one height", () => {
+    const document = orreryBooks();
+    // The disc at a third of its size, left and right on the board.
+    const discs = [150, 450].flatMap((x, place) =>
+      document.layers.flatMap((layer) => {
+        if (layer.hold.kind !== "standoff") return [];
+        const id = (before: string) => `${before} ${place}`;
+        const holes = layer.hold.holes.map((hole) => ({ ...hole, id: id(hole.id), x: x + (hole.x - 300) / 3 }));
+        const pieces = layer.pieces.map((piece) => ({
+          ...piece,
+          id: id(piece.id),
+          placement: { ...piece.placement, x, scale: 1 / 3 },
+        }));
+        return [{ ...layer, key: place === 0 ? "B" : "C", pieces, hold: { ...layer.hold, holes } }];
+      }),
+    );
+    const twice = { ...document, layers: discs };
+    expect(discs).toHaveLength(2);
+    expect(stepsAbove(document, computeFigures(document, kernel))).toEqual([
+      { from: 0, to: 20 },
+      { from: 20, to: 39 },
+    ]);
+    expect(stepsAbove(twice, computeFigures(twice, kernel))).toEqual([
+      { from: 0, to: 20 },
+      { from: 20, to: 39 },
+    ]);
   });
 });
 
