@@ -9,7 +9,17 @@ import {
   standardStandoffs,
   standardWoods,
 } from "#shared/materials/standard-stock.ts";
-import type { Acrylic, Adhesive, CapStud, Coat, Hold, Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
+import type {
+  Acrylic,
+  Adhesive,
+  CapStud,
+  Coat,
+  Hold,
+  Layer,
+  MockupDocument,
+  Piece,
+  Wood,
+} from "#shared/mockup/document.ts";
 import { emptyDocument } from "#shared/mockup/empty-document.ts";
 
 /** What the demo's documents are put together from: the standard stock, found by name. */
@@ -59,6 +69,46 @@ export function board(size: {
     ...empty,
     backer: { ...empty.backer, finish: size.finish },
     hanging: { ...empty.hanging, kind: "cleat", gap: 12, carriesKg: 20 },
+  };
+}
+
+/** Veneers laid crosswise hold one another: it moves a tenth of what its wood does (from memory). */
+export const birchPlywood: Wood = {
+  kind: "wood",
+  stockId: null,
+  name: "Birch plywood",
+  colour: "#DCC79C",
+  gravity: 0.6,
+  moisturePercent: 8,
+  hardness: "hardwood",
+  movementPerPoint: 0.0003,
+};
+
+/** A board laid with slats at 45 degrees, mitred to a spine; what it was a board of becomes the slats. */
+export function slatted(
+  document: MockupDocument,
+  { thickness, slatWidth, substrate }: { thickness: number; slatWidth: number; substrate: number },
+): MockupDocument {
+  return {
+    ...document,
+    backer: {
+      ...document.backer,
+      stock: birchPlywood,
+      thickness: substrate,
+      slats: {
+        stock: document.backer.stock,
+        thickness,
+        pattern: "spine",
+        angle: 45,
+        slatWidth,
+        gap: 0,
+        spineWidth: slatWidth,
+        spineOffset: 0,
+        start: { kind: "corner" },
+        direction: "up",
+        overhang: 30,
+      },
+    },
   };
 }
 

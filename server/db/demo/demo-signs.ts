@@ -11,6 +11,7 @@ import {
   layer,
   paleWash,
   piecesOfColour,
+  slatted,
   standoff,
 } from "./demo-mockup.ts";
 
@@ -21,7 +22,11 @@ export function orrerySign(artwork: DemoArtwork, { ringThickness }: { ringThickn
   const on = { ...artwork, at: { x: 40, y: 38 } };
   const middle = { x: 300, y: 150 };
   return {
-    ...board({ width: 600, height: 400, wood: "Eastern white pine", thickness: 18, finish: paleWash }),
+    ...slatted(board({ width: 600, height: 400, wood: "Eastern white pine", thickness: 18, finish: paleWash }), {
+      thickness: 6,
+      slatWidth: 38,
+      substrate: 15,
+    }),
     layers: [
       layer({
         key: "B",
