@@ -55,8 +55,9 @@ export function startWords(
     best.height < 0 ? `${mm(-best.height)} outside the ${edge} edge` : `${mm(best.height)} inside the ${edge} edge`;
   const leaves = `the shortest slat is then ${mm(best.shortestMm)} long`;
   if (current.slivers === 0) return `The shortest slat is ${mm(current.shortestMm)} long: no sliver.`;
-  return isSliverFree
-    ? `Begin ${where} at the spine: ${leaves}, and no slat is shorter than it is wide.`
+  if (isSliverFree) return `Begin ${where} at the spine: ${leaves}, and no slat is shorter than it is wide.`;
+  return best.slivers === 0
+    ? `Begin ${where} at the spine: ${leaves}, but lay the first with care, since a little off leaves a sliver.`
     : `No start leaves every slat longer than it is wide. The best begins ${where} at the spine: ${leaves}.`;
 }
 

@@ -28,7 +28,7 @@ function checkSlats({ document, limits, kernel }: RuleInput): Finding[] {
   const first = slats.find((slat) => [...slat.near, ...slat.far].some(isBeyond));
   const atSpine = slats.some(({ near, far }) => [...near, ...far].some((cut) => isBeyond(cut) && cut.edge === "spine"));
   const way = atSpine
-    ? `Stand the slats at ${90 - most}° to the spine or more, or cut them on a jig.`
+    ? `Stand the slats at ${Number((90 - most).toFixed(1))}° to the spine or more, or cut them on a jig.`
     : "Lay the slats past the edge and trim them flush, or cut them on a jig.";
   return [beyondSaw(`${cutsWords(cuts)} of slats`, steepest, way, first?.axis.from ?? null, most)];
 }

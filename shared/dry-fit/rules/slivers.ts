@@ -53,7 +53,7 @@ function check(input: RuleInput): Finding[] {
 function mends({ severity }: Finding, { document, kernel, context }: RuleInput): Mend[] {
   const { slats } = document.backer;
   const choice = severity === "caution" ? bestStart(document, kernel) : null;
-  if (!slats || !choice?.isSliverFree) return [];
+  if (!slats || !choice || choice.best.slivers > 0) return [];
   const { height } = choice.best;
   const label = `Begin ${formatLengthWithUnit(height, context.unit)} from the ${edgeOf(slats)} edge at the spine`;
   return [{ label, steps: [{ kind: "slat start", start: startedAt(slats, height).start }] }];

@@ -9,6 +9,7 @@ import {
 } from "#shared/materials/standard-stock.ts";
 import { documentSchema, type MockupDocument } from "#shared/mockup/document.ts";
 import { buildLayer, buildSign, hole, plate, pocketHold, standoffHold } from "../../../support/build-sign.ts";
+import { buildFrame, buildSlatSign, buildSlats } from "../../../support/slat-sign.ts";
 
 const one = <T>(list: readonly T[], index = 0): T => {
   const found = list[index];
@@ -94,6 +95,9 @@ describe("a step", () => {
     { step: { kind: "offset", layerKey: "C", offset: 7 } },
     { step: { kind: "tack", layerKey: "D", tack: null } },
     { step: { kind: "move pieces", pieceIds: ["gone"], dx: 5, dy: 5 } },
+    { step: { kind: "split piece", pieceId: "gone", parts: [] } },
+    { step: { kind: "slat start", start: { kind: "corner" } } },
+    { step: { kind: "frame depth", depth: 20 } },
     { step: { kind: "split layer", layerKey: "C", pieceIds: ["c1", "c2"] } },
     { step: { kind: "split layer", layerKey: "C", pieceIds: [] } },
   ])("$step.kind that finds nothing leaves the very document", ({ step }) => {
@@ -119,4 +123,33 @@ it("a layer is split into two neighbours of the same stock and hold, under a fre
     ["D", "Layer D", 1],
   ]);
   expect(documentSchema.safeParse(after).success).toBe(true);
+});
+
+it("a piece is replaced by its parts in its place, and what it reads is read once", () => {
+  const [left, right] = [plate("x", 10, 20, [0, 0]).path, plate("y", 12, 20, [0, 0]).path];
+  const named = buildSign([
+    buildLayer("B", [plate("a", 5, 5, [0, 0]), plate("p", 22, 20, [300, 200], { name: "Plate", reads: "OPEN" })]),
+  ]);
+  const parts = [
+    { id: "p-1", path: left },
+    { id: "p-2", path: right },
+  ];
+  const after = applyMend(named, { label: "Split", steps: [{ kind: "split piece", pieceId: "p", parts }] });
+  expect(after.layers[0]?.pieces).toMatchObject([
+    { id: "a" },
+    { id: "p-1", name: "Plate, 1 of 2", reads: "OPEN", path: left, placement: { x: 300, y: 200 } },
+    { id: "p-2", name: "Plate, 2 of 2", reads: "", path: right, placement: { x: 300, y: 200 } },
+  ]);
+  expect(documentSchema.safeParse(after).success).toBe(true);
+});
+
+it("slats begin elsewhere and a frame is made deeper, and nothing else changes", () => {
+  const before = buildSlatSign({}, [], { frame: buildFrame() });
+  const start = { kind: "height", height: 12.5 } as const;
+  const begun = applyMend(before, { label: "Begin", steps: [{ kind: "slat start", start }] });
+  expect(begun).toEqual({ ...before, backer: { ...before.backer, slats: buildSlats({ start }) } });
+  expect(begun.frame).toBe(before.frame);
+  const deeper = applyMend(before, { label: "Make it deeper", steps: [{ kind: "frame depth", depth: 21 }] });
+  expect(deeper).toEqual({ ...before, frame: buildFrame({ depth: 21 }) });
+  expect(deeper.backer).toBe(before.backer);
 });

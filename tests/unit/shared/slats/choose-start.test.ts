@@ -131,6 +131,13 @@ describe("words about the start", () => {
     },
     {
       current: measure(0, 8.5, 2),
+      best: measure(12.3, 38.4, 0),
+      free: false,
+      words:
+        "Begin 12.3 mm inside the lower edge at the spine: the shortest slat is then 38.4 mm long, but lay the first with care, since a little off leaves a sliver.",
+    },
+    {
+      current: measure(0, 8.5, 2),
       best: measure(-4, 30, 2),
       free: false,
       words:
