@@ -11,6 +11,7 @@ import { Membership } from "./membership.ts";
 import { Mockup } from "./mockup.ts";
 import { Note } from "./note.ts";
 import { Person } from "./person.ts";
+import { PriceBook } from "./price-book.ts";
 import { Reply } from "./reply.ts";
 import { Revision } from "./revision.ts";
 import { ShareLink } from "./share-link.ts";
@@ -76,6 +77,11 @@ declare module "./shop-saws.ts" {
     saver?: NonAttribute<Person>;
   }
 }
+declare module "./price-book.ts" {
+  interface PriceBook {
+    saver?: NonAttribute<Person>;
+  }
+}
 declare module "./revision.ts" {
   interface Revision {
     job?: NonAttribute<Job>;
@@ -131,6 +137,7 @@ export function associate(): void {
   Mockup.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   ShopLimits.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   ShopSaws.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
+  PriceBook.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   Revision.belongsTo(Job, { as: "job", foreignKey: "jobId" });
   Revision.belongsTo(StoredFile, { as: "pdf", foreignKey: "pdfFileId" });
   Revision.belongsTo(Person, { as: "issuer", foreignKey: "issuedBy" });

@@ -21,6 +21,8 @@ export type EventFacts = {
   "shop changed": { fields: string[] };
   "limits changed": { changes: { limit: string; from: number; to: number }[] };
   "saws changed": { changes: { field: string; from: number; to: number }[] };
+  /** Names of entries, no amounts: the log has more readers than the price book. */
+  "prices changed": { entries: string[] };
   "stock added": { name: string };
   "stock changed": { name: string };
   "stock counted": { name: string; from: number | null; to: number | null };

@@ -15,6 +15,7 @@ import { initNote } from "./note.ts";
 import { initOneTimeLink } from "./one-time-link.ts";
 import { initOutgoingMail } from "./outgoing-mail.ts";
 import { initPerson } from "./person.ts";
+import { initPriceBook } from "./price-book.ts";
 import { initReply } from "./reply.ts";
 import { initRevision } from "./revision.ts";
 import { initSession } from "./session.ts";
@@ -32,6 +33,7 @@ export function initModels(sequelize: Sequelize): void {
   initShop(sequelize);
   initShopLimits(sequelize);
   initShopSaws(sequelize);
+  initPriceBook(sequelize);
   initPerson(sequelize);
   initMembership(sequelize);
   initInvitation(sequelize);

@@ -16,6 +16,7 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "shop changed": ({ fields }) => `Changed the shop's ${fields.join(", ")}`,
   "limits changed": ({ changes }) => `Changed limits of the dry fit: ${changes.map(limitChange).join("; ")}`,
   "saws changed": ({ changes }) => `Changed how the shop cuts: ${changes.map(sawChange).join("; ")}`,
+  "prices changed": ({ entries }) => `Changed prices: ${entriesWords(entries)}`,
   "stock added": ({ name }) => `Added ${name} to the stock`,
   "stock changed": ({ name }) => `Changed ${name} in the stock`,
   "stock counted": ({ name, from, to }) => `Counted ${name}: ${countedAs(to)}, ${countedAs(from)} before`,
@@ -60,6 +61,14 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "mail refused": ({ kind, to, reason }) => `Mail to ${to} was refused (${kind}): ${reason}`,
   "signed in": ({ by }) => `Signed in by ${by}`,
 };
+
+/** How many entries a line of the log names before it only counts. */
+const mostNamed = 12;
+
+function entriesWords(entries: readonly string[]): string {
+  const more = entries.length - mostNamed;
+  return more > 0 ? `${entries.slice(0, mostNamed).join("; ")} and ${more} more` : entries.join("; ");
+}
 
 const countedAs = (quantity: number | null): string => (quantity === null ? "not counted" : String(quantity));
 

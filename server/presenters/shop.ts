@@ -5,6 +5,7 @@ import type { Actor } from "../policies/actor.ts";
 import { clientPolicy } from "../policies/client.ts";
 import { jobPolicy } from "../policies/job.ts";
 import { portfolioPolicy } from "../policies/portfolio.ts";
+import { pricesPolicy } from "../policies/prices.ts";
 import { shopPolicy } from "../policies/shop.ts";
 import { stockPolicy } from "../policies/stock.ts";
 import { teamPolicy } from "../policies/team.ts";
@@ -29,6 +30,7 @@ export function presentShop(
       seeClients: clientPolicy.list(actor),
       seeStock: stockPolicy.see(actor),
       changeStock: stockPolicy.change(actor),
+      seePrices: pricesPolicy.see(actor, { shopId }),
       seePortfolio: portfolioPolicy.see(actor),
       sharePortfolio: portfolioPolicy.share(actor),
       seeOutgoingMail: shopPolicy.seeOutgoingMail(actor, { shopId, keepsMail }),

@@ -9,6 +9,7 @@ import { registerMockupRoutes } from "./mockups.ts";
 import { registerNoteRoutes } from "./notes.ts";
 import { registerOutgoingMailRoutes } from "./outgoing-mail.ts";
 import { registerPortfolioRoutes } from "./portfolio.ts";
+import { registerPriceRoutes } from "./prices.ts";
 import { registerRevisionDocumentRoutes } from "./revision-documents.ts";
 import { registerRevisionRoutes } from "./revisions.ts";
 import { registerSawRoutes } from "./saws.ts";
@@ -26,6 +27,7 @@ export function registerRoutes(routes: Routes): void {
   registerShopRoutes(routes);
   registerLimitRoutes(routes);
   registerSawRoutes(routes);
+  registerPriceRoutes(routes);
   registerTeamRoutes(routes);
   registerClientRoutes(routes);
   registerOutgoingMailRoutes(routes);

@@ -20,6 +20,7 @@ export const shopSchema = z.strictObject({
     seeClients: z.boolean(),
     seeStock: z.boolean(),
     changeStock: z.boolean(),
+    seePrices: z.boolean(),
     seePortfolio: z.boolean(),
     sharePortfolio: z.boolean(),
     seeOutgoingMail: z.boolean(),

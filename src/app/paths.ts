@@ -18,6 +18,9 @@ export const paths = {
   client: (shop: string, clientId: string) => `/shop/${shop}/clients/${clientId}`,
   portfolio: (shop: string) => `/shop/${shop}/portfolio`,
   stock: (shop: string) => `/shop/${shop}/stock`,
+  /** With things that are to be given a price, each as its group, id and name. */
+  prices: (shop: string, wanted: readonly { group: string; id: string; name: string }[] = []) =>
+    `/shop/${shop}/prices${wanted.length === 0 ? "" : `?${wantedQuery(wanted)}`}`,
   team: (shop: string) => `/shop/${shop}/team`,
   shop: (shop: string) => `/shop/${shop}/shop`,
   limits: (shop: string) => `/shop/${shop}/limits`,
@@ -26,6 +29,9 @@ export const paths = {
   howWeWorkItOut: (shop: string, calculation?: string) =>
     `/shop/${shop}/how-we-work-it-out${calculation === undefined ? "" : `#${calculation}`}`,
 } as const;
+
+const wantedQuery = (wanted: readonly { group: string; id: string; name: string }[]): string =>
+  new URLSearchParams(wanted.map(({ group, id, name }) => ["wanted", JSON.stringify([group, id, name])])).toString();
 
 /** Sign-in that leads back to where the reader was going. */
 export const signInTo = (next: string): string => `${paths.signIn()}?next=${encodeURIComponent(next)}`;

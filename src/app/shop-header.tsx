@@ -20,6 +20,7 @@ export function placesOf({ shop, side }: Pick<Reader, "shop" | "side">): readonl
     { label: "Bench", to: paths.bench(slug), shown: true },
     { label: "Clients", to: paths.clients(slug), shown: can.seeClients },
     { label: "Stock", to: paths.stock(slug), shown: can.seeStock },
+    { label: "Prices", to: paths.prices(slug), shown: can.seePrices },
     { label: "Portfolio", to: paths.portfolio(slug), shown: can.seePortfolio },
     { label: "Team", to: paths.team(slug), shown: can.manageTeam },
     { label: "Shop", to: paths.shop(slug), shown: can.changeShop },

@@ -12,5 +12,7 @@ export const keys = {
   portfolio: (shop: string) => ["portfolio", shop] as const,
   shareLinks: (shop: string) => ["share links", shop] as const,
   limits: (shop: string) => ["limits", shop] as const,
+  saws: (shop: string) => ["saws", shop] as const,
+  prices: (shop: string) => ["prices", shop] as const,
   outgoingMail: (shop: string) => ["outgoing mail", shop] as const,
 } as const;

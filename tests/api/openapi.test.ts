@@ -9,6 +9,7 @@ import * as mockups from "#shared/contracts/mockups.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
+import * as prices from "#shared/contracts/prices.ts";
 import * as revisions from "#shared/contracts/revisions.ts";
 import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
@@ -40,6 +41,7 @@ const modules = [
   notes,
   outgoingMail,
   portfolio,
+  prices,
   revisions,
   setAsides,
   shop,

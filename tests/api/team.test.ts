@@ -237,6 +237,7 @@ describe("the shop", () => {
       seeClients: true,
       seeStock: true,
       changeStock: false,
+      seePrices: false,
       seePortfolio: true,
       sharePortfolio: true,
       seeOutgoingMail: false,

@@ -8,6 +8,7 @@ import * as mockups from "#shared/contracts/mockups.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
+import * as prices from "#shared/contracts/prices.ts";
 import * as revisionDocuments from "#shared/contracts/revision-documents.ts";
 import * as revisions from "#shared/contracts/revisions.ts";
 import * as saws from "#shared/contracts/saws.ts";
@@ -15,6 +16,7 @@ import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
+import { emptyPriceBook } from "#shared/cost/works.ts";
 import { usualSaws } from "#shared/cut-plan/shop-saws.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
 import type { PolicyWorld } from "./policy-world.ts";
@@ -119,6 +121,12 @@ export const policyTable: readonly PolicyRow[] = [
 
   row(saws.getSaws, staff, inShop),
   row(saws.changeSaws, makers, (world) => ({ ...inShop(world), body: { version: 0, saws: usualSaws } })),
+
+  row(prices.getPrices, "y y - - - - - - o", inShop),
+  row(prices.changePrices, "y n - - - - - - o", (world) => ({
+    ...inShop(world),
+    body: { version: 0, book: emptyPriceBook("EUR") },
+  })),
 
   row(clients.listClients, staff, inShop),
   row(clients.getClient, staff, (world) => ({ params: { ...world.params, clientId: world.clientId } })),

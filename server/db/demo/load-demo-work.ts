@@ -5,6 +5,7 @@ import type { Context } from "../../http/context.ts";
 import { Shop } from "../../models/shop.ts";
 import { contextsOf, type DemoContexts } from "./demo-actors.ts";
 import { oarsSvg, orrerySvg, rackSvg, wheatSvg } from "./demo-artwork.ts";
+import { loadDemoPrices } from "./demo-prices.ts";
 import { oarsSign, orrerySign, rackSign } from "./demo-signs.ts";
 import { demoApproval, demoArtwork, demoIssue, demoJob } from "./demo-steps.ts";
 import { loadDemoStock } from "./demo-stock.ts";
@@ -15,6 +16,7 @@ export async function loadDemoWork(owner: Context, ids: DemoIds): Promise<void> 
   const { transaction, now } = owner;
   const contexts = contextsOf(owner, ids);
   await loadDemoStock({ shopId: ids.shopId, now, transaction });
+  await loadDemoPrices(contexts.asOwner(20), ids.shopId);
   await loadRackPlates(contexts, ids);
   await loadBoathouse(contexts, ids);
   await loadBakehouse(contexts, ids);

@@ -7,6 +7,7 @@ import { setAsides } from "./2026-12-01-05-set-asides.ts";
 import { shopLimits } from "./2026-12-01-06-shop-limits.ts";
 import { stock } from "./2026-12-01-07-stock.ts";
 import { briefPlace } from "./2026-12-01-08-brief-place.ts";
+import { priceBooks } from "./2026-12-01-09-price-books.ts";
 import { shopSaws } from "./2026-12-01-10-shop-saws.ts";
 
 /** Every migration in order. A new one goes to the end. */
@@ -19,5 +20,6 @@ export const migrations: readonly Migration[] = [
   shopLimits,
   stock,
   briefPlace,
+  priceBooks,
   shopSaws,
 ];

@@ -8,6 +8,7 @@ const all = {
   seeClients: true,
   seeStock: true,
   changeStock: true,
+  seePrices: true,
   seePortfolio: true,
   sharePortfolio: true,
   seeOutgoingMail: true,
@@ -21,6 +22,7 @@ describe("placesOf", () => {
       "Bench",
       "Clients",
       "Stock",
+      "Prices",
       "Portfolio",
       "Team",
       "Shop",
@@ -28,7 +30,7 @@ describe("placesOf", () => {
     ]);
   });
   it("leaves out what the reader may not open", () => {
-    const can = { ...all, manageTeam: false, changeShop: false, seeOutgoingMail: false };
+    const can = { ...all, manageTeam: false, changeShop: false, seeOutgoingMail: false, seePrices: false };
     expect(labels({ shop: { ...shop, can }, side: "shop" })).toEqual(["Bench", "Clients", "Stock", "Portfolio"]);
   });
   it("shows a client their own signs only, whatever the shop's answer says", () => {

@@ -10,6 +10,7 @@ const no = {
   seeClients: false,
   seeStock: false,
   changeStock: false,
+  seePrices: false,
   seePortfolio: false,
   sharePortfolio: false,
   seeOutgoingMail: false,

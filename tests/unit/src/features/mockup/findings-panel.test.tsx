@@ -99,6 +99,7 @@ const reader = (role: Role): Reader => ({
       seeClients: true,
       seeStock: true,
       changeStock: false,
+      seePrices: false,
       seePortfolio: true,
       sharePortfolio: false,
       seeOutgoingMail: false,
