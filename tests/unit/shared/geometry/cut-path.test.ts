@@ -2,9 +2,9 @@ import fc from "fast-check";
 import { beforeAll, describe, expect, it } from "vitest";
 import { loadKernel } from "#server/artwork/load-kernel.ts";
 import { regionAreaMm2 } from "#shared/geometry/area.ts";
-import { cubicRootsOnLine } from "#shared/geometry/cut-cubic.ts";
+import { cubicRootsOnLine, cubicSplit } from "#shared/geometry/cut-cubic.ts";
 import { cutPath } from "#shared/geometry/cut-path.ts";
-import { flattenPath } from "#shared/geometry/flatten.ts";
+import { cubicPoint, flattenPath } from "#shared/geometry/flatten.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import type { Path, Point, Polygon } from "#shared/geometry/path.ts";
 import { circlePath, ellipsePath, polygonRing, rectanglePath, roundedRectanglePath } from "#shared/geometry/shapes.ts";
@@ -80,6 +80,13 @@ it("gives what clipping with a half plane gives, for any shapes over each other 
     fc.tuple(point, size, size).map(([{ x, y }, width, height]) => rectanglePath({ x, y, width, height })),
     fc.tuple(point, size, size).map(([{ x, y }, width, height]) => roundedRectanglePath({ x, y, width, height }, 12)),
     fc.array(point, { minLength: 3, maxLength: 7 }).map((points) => [polygonRing(points)]),
+    // Loops and bends that a line may cross three times.
+    fc.array(fc.tuple(point, point, point), { minLength: 1, maxLength: 3 }).map((curves) => [
+      {
+        start: curves.at(-1)?.[2] ?? { x: 0, y: 0 },
+        segments: curves.map(([c1, c2, to]) => ({ kind: "cubic" as const, c1, c2, to })),
+      },
+    ]),
   );
   fc.assert(
     fc.property(
@@ -106,6 +113,27 @@ it("gives what clipping with a half plane gives, for any shapes over each other 
     ),
     { numRuns: 150 },
   );
+});
+
+it("a cubic in parts is the cubic: each part ends where it is divided, and its middle lies on it", () => {
+  const from = { x: 0, y: 0 };
+  const cubic = { kind: "cubic" as const, c1: { x: 40, y: 90 }, c2: { x: 70, y: -80 }, to: { x: 100, y: 10 } };
+  const at = (t: number) => cubicPoint(from, cubic.c1, cubic.c2, cubic.to, t);
+  const places = [0.2, 0.5, 0.9];
+  const parts = cubicSplit(from, cubic, places);
+  expect(parts).toHaveLength(4);
+  let start: Point = from;
+  for (const [index, { c1, c2, to }] of parts.entries()) {
+    const [begin, end] = [places[index - 1] ?? 0, places[index] ?? 1];
+    for (const [got, wanted] of [
+      [to, at(end)],
+      [cubicPoint(start, c1, c2, to, 0.5), at((begin + end) / 2)],
+    ] as const) {
+      expect(got.x).toBeCloseTo(wanted.x, 9);
+      expect(got.y).toBeCloseTo(wanted.y, 9);
+    }
+    start = to;
+  }
 });
 
 describe("where a cubic changes its sign", () => {

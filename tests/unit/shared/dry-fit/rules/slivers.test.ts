@@ -76,6 +76,13 @@ describe("slats shorter than wide", () => {
     expect(mended[0]?.backer.slats?.start.kind).toBe("height");
   });
 
+  it("begin where the start chosen for that board lies", async () => {
+    // The corners' slats are equally long at (482.6 − 209.55 − 53.88)/2 = 109.58; two pitches of 53.88 less.
+    const { labels, mended } = await triedMends(slivers, sign());
+    expect(labels).toEqual([["Begin 1.8 mm from the lower edge at the spine"]]);
+    expect(mended[0]?.backer.slats?.start).toEqual({ kind: "height", height: 1.8 });
+  });
+
   it("are measured from the edge that falling slats rise from", async () => {
     const { labels } = await triedMends(slivers, sign({ ...chevron, direction: "down" }));
     expect(labels).toEqual([[expect.stringMatching(/ from the upper edge at the spine$/)]]);
