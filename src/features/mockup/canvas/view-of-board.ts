@@ -24,19 +24,26 @@ export type PaperMargins = {
 /** Below the board the section beside it has two rows of dimensions from the wall and a line that states its scale. */
 const sectionBottom = 27;
 
+/** So many rows of dimensions have room above the section, with its heading over them. */
+const rowsAboveSection = 2;
+
 /** Three rows below and at the right, as most signs have them, for the time before the first picture. */
 export const usualMargins: PaperMargins = { left: 14, top: 14, right: 27, bottom: 30 };
 
 /**
  * The margins of a picture of `drawElevation` around a sign, whose box is the board's with its frame, to half a mm so that the window stays still
- * over changes that don't matter.
+ * over changes that don't matter. `sectionRows` are the rows of dimensions above the section beside it.
  */
-export function marginsOf(list: DisplayList, sign: Box, paperScale: number): PaperMargins {
+export function marginsOf(
+  list: DisplayList,
+  sign: Box,
+  { paperScale, sectionRows }: { readonly paperScale: number; readonly sectionRows: number },
+): PaperMargins {
   const origin = boardOriginOf(list) ?? { x: 0, y: 0 };
   const paper = (mm: number) => Math.round((mm / paperScale) * 2) / 2;
   return {
     left: paper(origin.x + sign.x),
-    top: paper(origin.y + sign.y),
+    top: paper(origin.y + sign.y) + dimensionRowMm * Math.max(0, sectionRows - rowsAboveSection),
     right: paper(list.widthMm - origin.x - sign.x - sign.width),
     bottom: Math.max(sectionBottom, paper(list.heightMm - origin.y - sign.y - sign.height)),
   };

@@ -41,9 +41,11 @@ export function useDeskPicture({ document, drag, context, limits, room }: Wanted
   const isDragging = drag !== null;
   useEffect(() => {
     if (drawn === null || isDragging) return;
-    const next = marginsOf(drawn.elevation, signBox(drawn.input.document), drawn.input.paperScale);
+    const { document: of, paperScale: at } = drawn.input;
+    const sectionRows = figures === null ? 0 : stepsAbove(figures.of, figures.figures).length;
+    const next = marginsOf(drawn.elevation, signBox(of), { paperScale: at, sectionRows });
     setMargins((before) => (isSame(before, next) ? before : next));
-  }, [drawn, isDragging]);
+  }, [drawn, figures, isDragging]);
 
   return { fit, drawn, figures, failure, isCurrent: drawn?.input === input };
 }

@@ -121,7 +121,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           "–"
         )}
       </DeskCell>
-      <DeskCell className="min-w-24">
+      <DeskCell className="min-w-27">
         <CellSelect
           aria-label={`How ${key} is located`}
           value={layer.locate}

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { fitSign, paperScaleAt, usualMargins, viewAt } from "@/features/mockup/canvas/view-of-board.ts";
+import { fitSign, marginsOf, paperScaleAt, usualMargins, viewAt } from "@/features/mockup/canvas/view-of-board.ts";
 
 describe("the view of a board", () => {
   it.each([
@@ -36,5 +36,14 @@ describe("the view of a board", () => {
     expect(view.scale).toBeCloseTo(2.4, 9);
     expect(view.x + 100 * view.scale).toBeCloseTo(500, 9);
     expect(view.y + 300 * view.scale).toBeCloseTo(250, 9);
+  });
+
+  it("leaves room above for every row of dimensions that the section has beyond two, 8 mm of paper each", () => {
+    const plane = { kind: "group" as const, id: "board-plane", x: 70, y: 70, scale: 1, items: [] };
+    const list = { widthMm: 800, heightMm: 620, items: [plane] };
+    const topWith = (sectionRows: number) =>
+      marginsOf(list, { x: 0, y: 0, width: 600, height: 400 }, { paperScale: 5, sectionRows }).top;
+    expect([0, 1, 2].map(topWith)).toEqual([14, 14, 14]);
+    expect([3, 5].map(topWith)).toEqual([14 + 8, 14 + 3 * 8]);
   });
 });
