@@ -3,6 +3,7 @@ import type { DryFitContext } from "../dry-fit/rule.ts";
 import { runDryFit } from "../dry-fit/run-dry-fit.ts";
 import { type FrozenSetAside, matchSetAsides, openFindings, setAsidesInForce } from "../dry-fit/set-aside.ts";
 import type { Kernel } from "../geometry/kernel.ts";
+import { rememberingKernel } from "../geometry/remembering-kernel.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import { engineVersion, type FrozenNote, type Snapshot, type TitleBlock } from "../mockup/snapshot.ts";
 import { computeFigures } from "../stack/compute-figures.ts";
@@ -23,7 +24,7 @@ export function buildSnapshot({
   paper,
   artworkHashes,
   fontHashes,
-  kernel,
+  kernel: given,
 }: {
   titleBlock: TitleBlock;
   document: MockupDocument;
@@ -39,6 +40,8 @@ export function buildSnapshot({
   kernel: Kernel;
 }): Snapshot {
   const { unit } = titleBlock;
+  // Sheets, elevation and picture show the same wood and ask for the same geometry.
+  const kernel = rememberingKernel(given);
   const figures = computeFigures(document, kernel);
   const findings = runDryFit({ document, figures, limits, context: dryFit, kernel });
   const standings = matchSetAsides(findings, setAsides);

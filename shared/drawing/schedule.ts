@@ -51,6 +51,16 @@ export const hangingWords: Readonly<Record<MockupDocument["hanging"]["kind"], st
   none: "not chosen",
 };
 
+/** Slats and frame in words, where the backer has them: "slats at 45°", "framed 18 × 24 in Black walnut". */
+function layingWords({ backer, frame }: MockupDocument, unit: LengthUnit): string[] {
+  return [
+    ...(backer.slats ? [`slats at ${Math.round(backer.slats.angle * 10) / 10}°`] : []),
+    ...(frame
+      ? [`framed ${formatLength(frame.width, unit)} × ${formatLength(frame.depth, unit)} in ${frame.stock.name}`]
+      : []),
+  ];
+}
+
 /** The schedule, backer first and then the layers from the wall outward. Hidden layers are part of the sign and stay in. */
 export function scheduleRows(
   document: MockupDocument,
@@ -61,9 +71,11 @@ export function scheduleRows(
   const { backer, hanging } = document;
   const first: ScheduleRow = {
     key: "A",
-    what: `Backer, ${finishWords(backer.finish)}`,
-    stock: backer.stock.name,
-    thickness: formatLength(backer.thickness, unit),
+    what: ["Backer", ...layingWords(document, unit), finishWords(backer.finish)].join(", "),
+    stock: backer.slats ? `${backer.slats.stock.name} on ${backer.stock.name}` : backer.stock.name,
+    thickness: [backer.thickness, ...(backer.slats ? [backer.slats.thickness] : [])]
+      .map((thickness) => formatLength(thickness, unit))
+      .join(" + "),
     heldBy: hangingWords[hanging.kind],
     offset: nothing,
     topAt: formatBand(figures.backerTop, unit, heights),

@@ -4,6 +4,7 @@ import type { Box } from "../geometry/path.ts";
 import type { MockupDocument } from "../mockup/document.ts";
 import type { FrozenNote, TitleBlock } from "../mockup/snapshot.ts";
 import type { Figures } from "../stack/figures.ts";
+import { signBox } from "../stack/sign-box.ts";
 import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import { paperOf } from "../units/paper.ts";
@@ -66,9 +67,10 @@ const inner = (box: Box): Box => ({
 
 type Schedule = { readonly items: readonly Item[]; readonly heightMm: number; readonly rest: readonly ScheduleRow[] };
 
-/** The board's size for a narrow cell: it may break behind the cross only. */
-function sizeText({ board }: MockupDocument, unit: LengthUnit): string {
-  const [width, height] = [formatLength(board.width, unit), formatLengthWithUnit(board.height, unit)];
+/** The sign's size, its frame included, for a narrow cell: it may break behind the cross only. */
+function sizeText(document: MockupDocument, unit: LengthUnit): string {
+  const whole = signBox(document);
+  const [width, height] = [formatLength(whole.width, unit), formatLengthWithUnit(whole.height, unit)];
   return [`${width} ×`, height].map((part) => part.replaceAll(" ", "\u00a0")).join(" ");
 }
 

@@ -1,4 +1,4 @@
-import type { MockupDocument, Slats, Wood } from "#shared/mockup/document.ts";
+import type { Acrylic, MockupDocument, Slats, Wood } from "#shared/mockup/document.ts";
 import { orreryBooks } from "./orrery-books.ts";
 
 const wood = (name: string, colour: string): Wood => ({ ...orreryBooks().backer.stock, name, colour });
@@ -33,3 +33,16 @@ export function slatSign(slats: Partial<Slats> = {}, rest: Partial<MockupDocumen
 
 /** A walnut frame round it, 18 mm wide. */
 export const walnutFrame: NonNullable<MockupDocument["frame"]> = { stock: walnut, width: 18, depth: 24, mitred: true };
+
+/** A framed sign on slats, its disc, rings, sun and letters each of another look: opaque, mirror, frosted and clear. */
+export function everyLook(): MockupDocument {
+  const sign = slatSign({ gap: 3 }, { frame: walnutFrame });
+  const looks: Readonly<Record<string, Partial<Acrylic>>> = {
+    C: { look: "mirror", colour: "#C79A3A" },
+    D: { look: "frosted" },
+    E: { look: "clear", colour: "#E4EEF0" },
+    G: { look: "mirror", colour: "#C4C8CC" },
+  };
+  const layers = sign.layers.map((layer) => ({ ...layer, stock: { ...layer.stock, ...looks[layer.key] } }));
+  return { ...sign, layers };
+}
