@@ -3,7 +3,7 @@ import type { MockupDocument, Wood } from "../mockup/document.ts";
 import { frameOf, slatsOf } from "../stack/backer.ts";
 import { type BarEnd, type BarPart, type CuttingJob, squareEnd } from "../stock-lengths/cutting-job.ts";
 import { partsOfSlats } from "../stock-lengths/parts-of-slats.ts";
-import { formatLength } from "../units/format-length.ts";
+import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { ShopSaws } from "./shop-saws.ts";
 
@@ -65,7 +65,15 @@ export function barTasks({
     thicknessMm: thickness,
     job: {
       parts,
-      stock: [{ id: "usual", label: "bar", lengthMm: saws.barLengthMm, price: null, onHand: null }],
+      stock: [
+        {
+          id: "usual",
+          label: `${formatLengthWithUnit(saws.barLengthMm, unit)} bar`,
+          lengthMm: saws.barLengthMm,
+          price: null,
+          onHand: null,
+        },
+      ],
       widthMm: width,
       saw: { kerfMm: saws.sawKerfMm, squaringMm: saws.squaringMm, rejectShare: saws.rejectShare, nests: true },
     },

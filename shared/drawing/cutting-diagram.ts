@@ -17,6 +17,8 @@ export type CuttingDiagram = {
   /** The paper that is free for it, mm. */
   readonly widthMm: number;
   readonly heightMm: number;
+  /** Whether a list ends where its bars do, for a screen; else it is as large as the paper. */
+  readonly isTrimmed?: boolean;
 };
 
 const lineMm = 4.8;
@@ -35,21 +37,22 @@ type Block = { readonly heightMm: number; readonly draw: (y: number) => Item[] }
  * Prices aren't in it: it hangs by the saw.
  */
 export function drawCuttingDiagrams(diagram: CuttingDiagram): DisplayList[] {
-  const { plan, widthMm, heightMm } = diagram;
+  const { plan, widthMm, heightMm, isTrimmed = false } = diagram;
+  const heightTo = (y: number) => (isTrimmed ? y - betweenBarsMm : Math.max(heightMm, y - betweenBarsMm));
   const blocks = plan.bars.map((bar, index) => blockOf(diagram, bar, index + 1));
   const pages: DisplayList[] = [];
   let items: Item[] = heading(diagram);
   let y = headingMm;
   for (const block of blocks) {
     if (y > headingMm && y + block.heightMm > heightMm) {
-      pages.push({ widthMm, heightMm, items });
+      pages.push({ widthMm, heightMm: heightTo(y), items });
       items = heading(diagram);
       y = headingMm;
     }
     items.push(...block.draw(y));
     y += block.heightMm + betweenBarsMm;
   }
-  pages.push({ widthMm, heightMm: Math.max(heightMm, y - betweenBarsMm), items });
+  pages.push({ widthMm, heightMm: heightTo(y), items });
   return pages;
 }
 

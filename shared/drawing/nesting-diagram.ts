@@ -17,6 +17,8 @@ export type NestingDiagram = {
   /** The paper that is free for it, mm. */
   readonly widthMm: number;
   readonly heightMm: number;
+  /** Whether a list ends where its lines do, for a screen; else it is as large as the paper. */
+  readonly isTrimmed?: boolean;
 };
 
 const headingMm = 13;
@@ -32,7 +34,7 @@ export function drawNestingDiagrams(diagram: NestingDiagram): DisplayList[] {
 }
 
 function page(diagram: NestingDiagram, sheet: NestedSheet, count: string): DisplayList {
-  const { widthMm, heightMm, unit } = diagram;
+  const { widthMm, heightMm, unit, isTrimmed = false } = diagram;
   const pieces = new Map(diagram.pieces.map((piece) => [piece.id, piece]));
   const box = boxOfRegion(sheet.region) ?? { x: 0, y: 0, width: 0, height: 0 };
   const lines = wrapText(contents(sheet, pieces), "sans", smallTextMm, widthMm);
@@ -46,7 +48,7 @@ function page(diagram: NestingDiagram, sheet: NestedSheet, count: string): Displ
     ...drawNestedSheet({ sheet, pieces, scale, at, unit }),
     ...lines.map((line, index) => textItem(line, { x: 0, y: belowMm + (index + 1) * lineMm }, { colour: graphite })),
   ];
-  return { widthMm, heightMm: Math.max(heightMm, belowMm + footMm), items };
+  return { widthMm, heightMm: isTrimmed ? belowMm + footMm : Math.max(heightMm, belowMm + footMm), items };
 }
 
 function heading(

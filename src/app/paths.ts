@@ -11,6 +11,7 @@ export const paths = {
   bench: (shop: string) => `/shop/${shop}/bench`,
   job: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}`,
   mockup: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}/mockup`,
+  cutPlan: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}/cut-plan`,
   compare: (shop: string, jobId: string, before: string, after: string) =>
     `/shop/${shop}/jobs/${jobId}/compare?before=${before}&after=${after}`,
   sheet: (shop: string, revisionId: string) => `/shop/${shop}/sheets/${revisionId}`,

@@ -59,6 +59,10 @@ export const router = createBrowserRouter([
                 lazy: page(() => import("./pages/mockup-page.tsx"), "MockupPage"),
               },
               {
+                path: paths.cutPlan(":shop", ":jobId"),
+                lazy: page(() => import("./pages/cut-plan-page.tsx"), "CutPlanPage"),
+              },
+              {
                 path: paths.sheet(":shop", ":revisionId"),
                 lazy: page(() => import("./pages/sheet-page.tsx"), "SheetPage"),
               },

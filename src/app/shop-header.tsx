@@ -47,7 +47,7 @@ export function ShopHeader({
   const me = useQuery(meQuery).data;
   const hasOtherPlaces = me !== undefined && me.memberOf.length + me.contactOf.length > 1;
   return (
-    <header className="flex flex-wrap items-center gap-x-6 border-b border-rule px-4 py-1 sm:px-6">
+    <header className="flex flex-wrap items-center gap-x-6 border-b border-rule px-4 py-1 sm:px-6 print:hidden">
       <Wordmark />
       <nav aria-label="Shop" className="hidden gap-5 lg:flex">
         {places.map(({ label, to }) => (

@@ -8,7 +8,7 @@ import { BriefPart } from "@/features/jobs/components/brief-part.tsx";
 import { ConsentPart } from "@/features/jobs/components/consent-part.tsx";
 import { EventLog } from "@/features/jobs/components/event-log.tsx";
 import { JobMoves } from "@/features/jobs/components/job-moves.tsx";
-import { nextActionOf, wayToMockup } from "@/features/jobs/components/next-action.ts";
+import { nextActionOf, wayToCutPlan, wayToMockup } from "@/features/jobs/components/next-action.ts";
 import { NextStep } from "@/features/jobs/components/next-step.tsx";
 import { OpenNotes } from "@/features/jobs/components/open-notes.tsx";
 import { RevisionList } from "@/features/jobs/components/revision-list.tsx";
@@ -62,7 +62,12 @@ export function JobPage() {
         <div className="grid gap-10 lg:grid-cols-[minmax(0,1.9fr)_minmax(0,1fr)] lg:gap-14">
           <div className="min-w-0 space-y-10">
             {job.state === "brief" && brief}
-            <RevisionList shop={slug} jobId={jobId} side={side} mockup={leadsToMockup ? null : mockup} />
+            <RevisionList
+              shop={slug}
+              jobId={jobId}
+              side={side}
+              ways={[...(mockup && !leadsToMockup ? [mockup] : []), ...(mockup ? [wayToCutPlan(job, slug)] : [])]}
+            />
             {/* A client sees artwork only while the brief is theirs to fill in. */}
             {(staff || job.can.editBrief) && (
               <ArtworkPart

@@ -9,6 +9,7 @@ import { MockupReadOnly } from "@/features/mockup/panels/mockup-read-only.tsx";
 import { limitsQuery } from "@/lib/limits-query.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
 import { useReader } from "@/lib/shop-context.ts";
+import { stockQuery } from "@/lib/stock-query.ts";
 import { useMedia } from "@/lib/use-media.ts";
 import { HeaderTools } from "../header-tools.tsx";
 import { paths } from "../paths.ts";
@@ -22,7 +23,7 @@ export function MockupPage() {
   const isWide = useMedia("(min-width: 900px)");
   const job = useQuery(mockupQueries.job(shop.slug, jobId));
   const mockup = useQuery(mockupQueries.ofJob(shop.slug, jobId));
-  const stock = useQuery(mockupQueries.stock(shop.slug));
+  const stock = useQuery(stockQuery(shop.slug));
   const limits = useQuery(limitsQuery(shop.slug));
   usePageTitle(job.data ? `${job.data.title}, mockup` : "Mockup");
 
@@ -67,6 +68,7 @@ export function MockupPage() {
       stock={stock.data}
       limits={limits.data.limits}
       jobPath={paths.job(shop.slug, jobId)}
+      cutPlanPath={paths.cutPlan(shop.slug, jobId)}
       // A window that is made narrow and wide again goes on from what was saved last.
       onSaved={(saved) => client.setQueryData(mockupQueries.ofJob(shop.slug, jobId).queryKey, saved)}
       onIssued={(revisionId) => void navigate(paths.sheet(shop.slug, revisionId))}

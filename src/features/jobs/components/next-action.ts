@@ -53,3 +53,12 @@ export function wayToMockup({ id, can }: Job, shop: string): { readonly label: s
   if (!can.seeMockup) return null;
   return { label: can.editMockup ? "Open the mockup" : "Look at the mockup", to: paths.mockup(shop, id) };
 }
+
+/** Who sees the mockup may look at what it takes to build it. */
+export const wayToCutPlan = (
+  { id }: Pick<Job, "id">,
+  shop: string,
+): { readonly label: string; readonly to: string } => ({
+  label: "Cut plan",
+  to: paths.cutPlan(shop, id),
+});

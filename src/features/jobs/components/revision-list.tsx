@@ -18,13 +18,13 @@ export function RevisionList({
   shop,
   jobId,
   side,
-  mockup,
+  ways,
 }: {
   readonly shop: string;
   readonly jobId: string;
   readonly side: "shop" | "client";
-  /** The way to the mockup, where the next step does not lead there. */
-  readonly mockup: { readonly label: string; readonly to: string } | null;
+  /** Where else a reader gets from here: the mockup, where the next step does not lead there, and the cut plan. */
+  readonly ways: readonly { readonly label: string; readonly to: string }[];
 }) {
   const [withdrawing, setWithdrawing] = useState<Revision | null>(null);
   const revisions = useInfiniteQuery({
@@ -38,10 +38,14 @@ export function RevisionList({
         <h2 id="revisions" className="font-serif text-lg font-bold">
           {side === "client" ? "Drawings" : "Revisions"}
         </h2>
-        {mockup && (
-          <LinkButton size="small" to={mockup.to}>
-            {mockup.label}
-          </LinkButton>
+        {ways.length > 0 && (
+          <div className="flex flex-wrap gap-3">
+            {ways.map(({ label, to }) => (
+              <LinkButton key={to} size="small" to={to}>
+                {label}
+              </LinkButton>
+            ))}
+          </div>
         )}
       </div>
       {revisions.isPending ? (

@@ -3,24 +3,9 @@ import { type Artwork, getArtworkPieces, listArtworks } from "#shared/contracts/
 import { getJob } from "#shared/contracts/jobs.ts";
 import { getMockup } from "#shared/contracts/mockups.ts";
 import { listSetAsides, type SetAside } from "#shared/contracts/set-asides.ts";
-import { listStock, type StockItem } from "#shared/contracts/stock.ts";
+import { allPages } from "@/lib/all-pages.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
-
-/** More pages than a shop has stock or a job has artwork: a list that never ends is a fault of ours. */
-const mostPages = 50;
-
-async function allPages<T>(page: (cursor: string | undefined) => Promise<{ items: T[]; next: string | null }>) {
-  const items: T[] = [];
-  let cursor: string | undefined;
-  for (let count = 0; count < mostPages; count++) {
-    const answer = await page(cursor);
-    items.push(...answer.items);
-    if (answer.next === null) break;
-    cursor = answer.next;
-  }
-  return items;
-}
 
 export const mockupQueries = {
   /** Read once when the mockup is opened: from there on the screen holds the draft and saves it. */
@@ -38,13 +23,6 @@ export const mockupQueries = {
     queryOptions({
       queryKey: keys.job(shop, jobId),
       queryFn: ({ signal }) => call(getJob, { params: { shop, jobId }, signal }),
-    }),
-  stock: (shop: string) =>
-    queryOptions({
-      queryKey: [...keys.stock(shop), "all"],
-      queryFn: ({ signal }): Promise<StockItem[]> =>
-        allPages((cursor) => call(listStock, { params: { shop }, query: { limit: 100, cursor }, signal })),
-      staleTime: 60_000,
     }),
   setAsides: (shop: string, jobId: string) =>
     queryOptions({

@@ -10,11 +10,12 @@ type DeskBarProps = {
   readonly client: string;
   readonly title: string;
   readonly jobPath: string;
+  readonly cutPlanPath: string;
   readonly onOpen: (dialog: DeskDialog) => void;
 };
 
 /** What can be brought in, and how what is chosen is set out. */
-export function DeskBar({ client, title, jobPath, onOpen }: DeskBarProps) {
+export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBarProps) {
   const { selection, figures, edit, choose } = useDesk();
   const { pieceIds } = selection;
   const idle = pieceIds.length === 0;
@@ -59,6 +60,9 @@ export function DeskBar({ client, title, jobPath, onOpen }: DeskBarProps) {
         </WordButton>
       </Group>
       <span className="ml-auto flex items-center gap-2">
+        <TextLink to={cutPlanPath} className="text-sm">
+          Cut plan
+        </TextLink>
         <WordButton onClick={() => onOpen("board")}>Board</WordButton>
         <WordButton onClick={() => onOpen("keys")}>Keys</WordButton>
       </span>

@@ -46,6 +46,7 @@ export type MockupDeskProps = {
   readonly limits: Limits;
   /** The job's page, where artwork is added. */
   readonly jobPath: string;
+  readonly cutPlanPath: string;
   readonly onSaved: (mockup: Mockup) => void;
   readonly onIssued: (revisionId: string) => void;
   /** Puts the tools into the header of the page. */
@@ -54,7 +55,7 @@ export type MockupDeskProps = {
 
 /** The mockup at work: elevation and section above, schedule and dry fit below. */
 export function MockupDesk(props: MockupDeskProps) {
-  const { shop, unit, personId, job, mockup, limits, jobPath, onSaved, onIssued, renderTools } = props;
+  const { shop, unit, personId, job, mockup, limits, jobPath, cutPlanPath, onSaved, onIssued, renderTools } = props;
   const [editor, dispatch] = useReducer(nextEditor, mockup.document, startEditor);
   const [drag, setDrag] = useState<Drag | null>(null);
   const [view, setView] = useState<DrawingView | null>(null);
@@ -130,7 +131,13 @@ export function MockupDesk(props: MockupDeskProps) {
           onIssued={onIssued}
         />,
       )}
-      <DeskBar client={job.client.name} title={job.title} jobPath={jobPath} onOpen={setDialog} />
+      <DeskBar
+        client={job.client.name}
+        title={job.title}
+        jobPath={jobPath}
+        cutPlanPath={cutPlanPath}
+        onOpen={setDialog}
+      />
       {kept.draft && (
         <KeptDraftNotice
           draft={kept.draft}
