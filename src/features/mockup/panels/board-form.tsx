@@ -26,8 +26,12 @@ export function BoardForm({ at, onChanged, onLeave, onTaken }: BoardFormProps) {
   useEffect(() => onChanged(isChanged), [onChanged, isChanged]);
   useEffect(() => {
     if (at !== "finish") return;
-    finish.current?.focus();
-    finish.current?.scrollIntoView?.({ block: "start" });
+    // After the dialog has taken the focus, and has noted who is to get it back.
+    const frame = requestAnimationFrame(() => {
+      finish.current?.focus();
+      finish.current?.scrollIntoView?.({ block: "start" });
+    });
+    return () => cancelAnimationFrame(frame);
   }, [at]);
 
   function handleSubmit(event: FormEvent) {

@@ -6,7 +6,7 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import { type Desk, DeskContext } from "@/features/mockup/editor/desk-context.ts";
 import { type Editor, nextEditor, startEditor } from "@/features/mockup/model/editor.ts";
 import { BoardDialog } from "@/features/mockup/panels/board-dialog.tsx";
-import { button, field, press, render, type } from "../../support/render.tsx";
+import { button, field, press, render, type, until } from "../../support/render.tsx";
 import { emptyMockup, pine } from "./sample-mockup.ts";
 import { inside } from "./sites.ts";
 
@@ -148,7 +148,7 @@ describe("the board's dialog", () => {
 describe("the coats of the finish", () => {
   it("begin under the focus when the finish was pressed in the schedule", async () => {
     await show({ at: "finish" });
-    expect(focusedName()).toBe("Finish");
+    await until(() => focusedName() === "Finish");
     expect(says("sanded to 180, Umber, dries 8 hours in all")).toBe(true);
   });
 
