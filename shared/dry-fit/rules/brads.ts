@@ -77,13 +77,17 @@ function checkRoom({ document, limits, kernel, context }: RuleInput): Finding[] 
   ];
 }
 
+/** "Slat 7", "Slats 1, 2 and 26", "The spine and 72 slats". */
 function bareWords(orders: readonly number[]): string {
   const numbers = orders.filter((order) => order > 0);
-  const named = numbers.length > mostNamed ? countOf(numbers.length, "slat") : `slat ${numbers.join(", ")}`;
-  const spine = numbers.length < orders.length ? ["the spine"] : [];
-  const words = [...spine, ...(numbers.length === 0 ? [] : [named])].join(" and ");
-  return words.slice(0, 1).toUpperCase() + words.slice(1);
+  const listed = numbers.length === 1 ? `slat ${numbers[0]}` : `slats ${inRow(numbers.map(String))}`;
+  const slats = numbers.length > mostNamed ? countOf(numbers.length, "slat") : listed;
+  const words = [...(orders.includes(0) ? ["the spine"] : []), ...(numbers.length === 0 ? [] : [slats])];
+  const text = words.join(" and ");
+  return text.slice(0, 1).toUpperCase() + text.slice(1);
 }
+
+const inRow = (words: readonly string[]): string => `${words.slice(0, -1).join(", ")} and ${words.at(-1)}`;
 
 function slatMiddle({ slats, spine, body }: SlatLayout, order: number): Finding["where"] {
   const axis = slats.find((slat) => slat.order === order)?.axis;
@@ -104,7 +108,7 @@ function checkFrame({ document, limits, kernel, context }: RuleInput): Finding[]
   return [
     foundBy(brads, {
       severity: "caution",
-      text: `A brad of ${mm(length)} through the ${mm(frame.width)} frame ${comes}; ${mm(needed)} is the least. Take brads of ${mm(length + needed - intoEdgeMm)}, screws, or a narrower frame.`,
+      text: `A brad of ${mm(length)} through the ${mm(frame.width)} frame ${comes}; ${mm(needed)} is the least. Take brads of ${mm(length + needed - intoEdgeMm)} or more, screws, or a narrower frame.`,
       where: round.value.members[0]?.from ?? middleOf(board),
       value: intoEdgeMm,
       limit: needed,

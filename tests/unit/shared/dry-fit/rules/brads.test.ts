@@ -61,7 +61,20 @@ describe("slats that no brad fits in", () => {
     expect(await told(29.8)).toEqual([]);
     const [finding] = await told(30.1);
     expect(finding).toMatchObject({ rule: 31, value: 2, limit: 0 });
-    expect(finding?.text).toMatch(/^Slat 1, 10 take no brad that keeps 30.1 mm inside the trim line/);
+    expect(finding?.text).toMatch(/^Slats 1 and 10 take no brad that keeps 30.1 mm inside the trim line/);
+  });
+
+  it("are told with the spine, alone or several", async () => {
+    const textOf = async (width: number, spineWidth: number) => {
+      const sign = buildSlatSign({ pattern: "spine", angle: 90, spineWidth, slatWidth: 200 });
+      return (await findingsOf(brads, { ...sign, board: { ...sign.board, width } })).find(
+        ({ severity }) => severity === "remark",
+      )?.text;
+    };
+    // A spine of 15 has nothing 10 mm off its joints; slats beside it need 25, 15 to the trim line and 10 to the joint.
+    expect(await textOf(600, 15)).toMatch(/^The spine takes no brad .* Glue and clamp it.$/);
+    expect(await textOf(255, 215)).toMatch(/^Slats 1, 2, 3 and 4 take no brad .* Glue and clamp them.$/);
+    expect(await textOf(255, 204)).toBeUndefined();
   });
 
   it("are counted when they are many", async () => {
@@ -89,7 +102,7 @@ describe("brads of a frame", () => {
 
   it("are told the length that does", async () => {
     expect((await framed({ width: 25 }))[0]?.text).toBe(
-      "A brad of 30 mm through the 25 mm frame comes 5.5 mm into the board's edge; 10 mm is the least. Take brads of 34.5 mm, screws, or a narrower frame.",
+      "A brad of 30 mm through the 25 mm frame comes 5.5 mm into the board's edge; 10 mm is the least. Take brads of 34.5 mm or more, screws, or a narrower frame.",
     );
     expect(await framed({ width: 25 }, { frameBradLengthMm: 34.5 })).toEqual([]);
     expect(await framed({ width: 25 }, { frameBradHoldMm: 5.5 })).toEqual([]);
