@@ -103,6 +103,41 @@ describe("the canvas", () => {
   });
 });
 
+describe("the board", () => {
+  it("takes outline, coats and fixings from its dialog in one step, and the server holds them", async () => {
+    const { page } = owner;
+    const desk = await openDesk(owner);
+    await page.getByRole("button", { name: /^Finish of the backer/ }).click();
+    const dialog = page.getByRole("dialog", { name: "Board" });
+    await dialog.getByRole("button", { name: "stain", exact: true }).click();
+    await page.keyboard.press("ControlOrMeta+a");
+    await page.keyboard.type("Umber");
+    await dialog.getByRole("button", { name: "sanding", exact: true }).click();
+    await dialog.getByRole("button", { name: "Coat 2 earlier" }).press("Enter");
+    await dialog.getByLabel("Outline", { exact: true }).selectOption("rounded");
+    await dialog.getByRole("button", { name: "Spread them evenly" }).click();
+    await dialog.getByLabel("The wall’s fixing carries").fill("25");
+    await dialog.getByRole("button", { name: "Change the board" }).click();
+    await dialog.waitFor({ state: "detached" });
+    await page.getByRole("button", { name: "Finish of the backer: sanded to 180, Umber" }).waitFor();
+    await vi.waitFor(async () => {
+      const { board, hanging } = (await onServer()).document;
+      expect(board.outline.kind).toBe("rounded");
+      expect(hanging).toMatchObject({
+        carriesKg: 25,
+        points: [
+          { x: 150, y: 30 },
+          { x: 450, y: 30 },
+        ],
+      });
+    }, patienceMs);
+    await desk.undo().click();
+    await page.getByRole("button", { name: "Finish of the backer: bare" }).waitFor();
+    expect(await desk.undo().isDisabled()).toBe(true);
+    await vi.waitFor(async () => expect((await onServer()).document.backer.finish).toEqual([]), patienceMs);
+  });
+});
+
 describe("two people at one mockup", () => {
   it("are told, and the second keeps theirs with Undo bringing back the own work, or saves over it", async () => {
     const first = await openDesk(owner);
