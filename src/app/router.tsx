@@ -76,6 +76,7 @@ export const router = createBrowserRouter([
                 lazy: page(() => import("./pages/portfolio-page.tsx"), "PortfolioPage"),
               },
               { path: paths.stock(":shop"), lazy: page(() => import("./pages/stock-page.tsx"), "StockPage") },
+              { path: paths.prices(":shop"), lazy: page(() => import("./pages/prices-page.tsx"), "PricesPage") },
               { path: paths.team(":shop"), lazy: page(() => import("./pages/team-page.tsx"), "TeamPage") },
               { path: paths.shop(":shop"), lazy: page(() => import("./pages/shop-page.tsx"), "ShopPage") },
               { path: paths.limits(":shop"), lazy: page(() => import("./pages/limits-page.tsx"), "LimitsPage") },
