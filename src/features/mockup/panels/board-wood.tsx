@@ -25,7 +25,7 @@ export function BoardWood({ writing }: { readonly writing: BoardWriting }) {
   return (
     <div className="grid gap-3 sm:grid-cols-2 md:grid-cols-4">
       <Select
-        label="Wood"
+        label={document.backer.slats ? "Wood under the slats" : "Wood"}
         value={woods.findIndex((one) => isSameStock(one, draft.stock))}
         onChange={(event) => {
           const chosen = woods[Number(event.target.value)];
