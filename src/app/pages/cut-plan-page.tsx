@@ -13,6 +13,7 @@ import { cutPlanQueries, type PlannedFrom } from "@/features/cut-plan/api/querie
 import { CutPlanSheet } from "@/features/cut-plan/components/cut-plan-sheet.tsx";
 import { SawsPart } from "@/features/cut-plan/components/saws-part.tsx";
 import { limitsQuery } from "@/lib/limits-query.ts";
+import { sawsQuery } from "@/lib/saws-query.ts";
 import { useReader } from "@/lib/shop-context.ts";
 import { stockQuery } from "@/lib/stock-query.ts";
 import { LoadProblem } from "../load-problem.tsx";
@@ -43,7 +44,7 @@ function CutPlanOfJob() {
 function CutPlan({ job }: { readonly job: Job }) {
   const { slug, unit } = useReader().shop;
   const from = useQuery(cutPlanQueries.plannedFrom(slug, job));
-  const saws = useQuery(cutPlanQueries.saws(slug));
+  const saws = useQuery(sawsQuery(slug));
   const stock = useQuery(stockQuery(slug));
   const limits = useQuery(limitsQuery(slug));
   const queries = [from, saws, stock, limits];

@@ -1,6 +1,7 @@
 import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { useNavigate, useParams } from "react-router-dom";
 import type { Role } from "#shared/contracts/account.ts";
+import type { Unpriced } from "#shared/cost/priced-sign.ts";
 import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { mockupQueries } from "@/features/mockup/api/queries.ts";
@@ -44,6 +45,7 @@ export function MockupPage() {
         <Skeleton label="Loading the mockup" />
       </div>
     );
+  const pricesPath = shop.can.seePrices ? (wanted: readonly Unpriced[]) => paths.prices(shop.slug, wanted) : null;
   if (!mockup.data.can.edit || !isWide)
     return (
       <MockupReadOnly
@@ -54,6 +56,7 @@ export function MockupPage() {
         mockup={mockup.data}
         limits={limits.data.limits}
         stock={stock.data}
+        pricesPath={pricesPath}
         why={whyNotToChange({ mayEdit: mockup.data.can.edit, role })}
       />
     );
@@ -68,6 +71,7 @@ export function MockupPage() {
       stock={stock.data}
       limits={limits.data.limits}
       jobPath={paths.job(shop.slug, jobId)}
+      pricesPath={pricesPath}
       cutPlanPath={paths.cutPlan(shop.slug, jobId)}
       // A window that is made narrow and wide again goes on from what was saved last.
       onSaved={(saved) => client.setQueryData(mockupQueries.ofJob(shop.slug, jobId).queryKey, saved)}

@@ -2,7 +2,6 @@ import { queryOptions } from "@tanstack/react-query";
 import { getJob } from "#shared/contracts/jobs.ts";
 import { getMockup } from "#shared/contracts/mockups.ts";
 import { getRevisionDocument } from "#shared/contracts/revision-documents.ts";
-import { getSaws } from "#shared/contracts/saws.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
@@ -37,10 +36,5 @@ export const cutPlanQueries = {
       gcTime: 0,
       refetchOnWindowFocus: false,
       refetchOnReconnect: false,
-    }),
-  saws: (shop: string) =>
-    queryOptions({
-      queryKey: keys.saws(shop),
-      queryFn: ({ signal }) => call(getSaws, { params: { shop }, signal }),
     }),
 };

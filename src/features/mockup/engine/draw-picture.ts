@@ -1,3 +1,4 @@
+import { measureSign } from "#shared/cost/measure-sign.ts";
 import { drawElevation } from "#shared/drawing/elevation.ts";
 import { rules } from "#shared/dry-fit/index.ts";
 import type { RuleInput } from "#shared/dry-fit/rule.ts";
@@ -29,7 +30,10 @@ export function drawPicture(
     ...(texture ? { texture } : {}),
   });
   grain.keep(document, elevation);
-  return { figures, drawing: { elevation, dryFit: fitOf({ document, figures, limits, context, kernel }) } };
+  const dryFit = fitOf({ document, figures, limits, context, kernel });
+  const brads = { trim: limits.bradTrimMm, barrel: limits.footBradMm };
+  const measures = measureSign({ document, figures, kernel, brads });
+  return { figures, drawing: { elevation, dryFit, measures } };
 }
 
 function fitOf(input: RuleInput): DryFit {

@@ -1,3 +1,4 @@
+import type { SignMeasures } from "#shared/cost/measure-sign.ts";
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
@@ -28,7 +29,12 @@ export type Mends = readonly (readonly Mend[])[];
 export type Picture = {
   readonly figures: Figures;
   /** What else was wanted. */
-  readonly drawing: { readonly elevation: DisplayList; readonly dryFit: DryFit } | null;
+  readonly drawing: {
+    readonly elevation: DisplayList;
+    readonly dryFit: DryFit;
+    /** What goes into a sign, to be priced by those who may see prices. */
+    readonly measures: SignMeasures;
+  } | null;
 };
 
 export type PictureOutcome =

@@ -23,6 +23,7 @@ import { dryFitContextOf } from "../model/dry-fit-context.ts";
 import { nextEditor, startEditor } from "../model/editor.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { stockChoices } from "../model/stock-choices.ts";
+import { CostPanel, type CostPanelProps } from "./cost-panel.tsx";
 import { DeskBar } from "./desk-bar.tsx";
 import { type DeskDialog, DeskDialogs } from "./desk-dialogs.tsx";
 import { DeskTools } from "./desk-tools.tsx";
@@ -47,6 +48,8 @@ export type MockupDeskProps = {
   /** The job's page, where artwork is added. */
   readonly jobPath: string;
   readonly cutPlanPath: string;
+  /** The page of the prices; null for those who may not see what a sign costs. */
+  readonly pricesPath: CostPanelProps["pricesPath"] | null;
   readonly onSaved: (mockup: Mockup) => void;
   readonly onIssued: (revisionId: string) => void;
   /** Puts the tools into the header of the page. */
@@ -172,6 +175,16 @@ export function MockupDesk(props: MockupDeskProps) {
             onFinish={() => setDialog("finish")}
             onBringIn={() => setDialog("artwork")}
           />
+          {props.pricesPath && (
+            <CostPanel
+              shop={shop}
+              unit={unit}
+              measures={drawn?.measures ?? null}
+              signs={document.quantity}
+              stock={props.stock}
+              pricesPath={props.pricesPath}
+            />
+          )}
           <LayerDetails />
           <PiecesPanel />
         </div>

@@ -19,6 +19,7 @@ import { fitSign, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts"
 import { useStandings } from "../editor/use-standings.ts";
 import { useEngine } from "../engine/use-engine.ts";
 import { dryFitContextOf } from "../model/dry-fit-context.ts";
+import { CostPanel, type CostPanelProps } from "./cost-panel.tsx";
 import { FindingsPanel } from "./findings-panel.tsx";
 
 type MockupReadOnlyProps = {
@@ -29,12 +30,15 @@ type MockupReadOnlyProps = {
   readonly mockup: Mockup;
   readonly limits: Limits;
   readonly stock: readonly StockItem[];
+  /** The page of the prices; null for those who may not see what a sign costs. */
+  readonly pricesPath: CostPanelProps["pricesPath"] | null;
   /** Why it can only be looked at. */
   readonly why: string;
 };
 
 /** The mockup to look at: the picture, the schedule and the dry fit, for a narrow window and for those who may not change it. */
-export function MockupReadOnly({ shop, unit, job, jobPath, mockup, limits, stock, why }: MockupReadOnlyProps) {
+export function MockupReadOnly(props: MockupReadOnlyProps) {
+  const { shop, unit, job, jobPath, mockup, limits, stock, pricesPath, why } = props;
   const [view, setView] = useState<DrawingView | null>(null);
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
@@ -116,6 +120,18 @@ export function MockupReadOnly({ shop, unit, job, jobPath, mockup, limits, stock
           <p className="text-fine text-graphite">
             {scheduleTotal(document, figures.figures, unit)} {makingWords(document, unit)}
           </p>
+          {pricesPath && (
+            <div className="-mx-4 sm:-mx-6">
+              <CostPanel
+                shop={shop}
+                unit={unit}
+                measures={drawn.measures}
+                signs={document.quantity}
+                stock={stock}
+                pricesPath={pricesPath}
+              />
+            </div>
+          )}
           <FindingsPanel
             dryFit={drawn.dryFit}
             standings={standings}
