@@ -39,7 +39,7 @@ export const holeLimits = {
   },
   moisturePoints: {
     group: "movement",
-    rules: [6, 16, 17],
+    rules: [6, 16, 17, 35],
     label: "Change of the wood's moisture",
     unit: "points",
     why: "Our choice: points of moisture content, either way. What a point moves is the stock's own figure.",

@@ -32,14 +32,14 @@ export const standoffLimits = {
   },
   sandingMm: {
     group: "screws",
-    rules: [10],
+    rules: [10, 31],
     label: "Taken off the wood by sanding",
     unit: "small length",
     why: "Common practice.",
   },
   skinMm: {
     group: "screws",
-    rules: [10],
+    rules: [10, 31],
     label: "Wood left under a point",
     unit: "small length",
     why: "Common practice. With less a point bulges or shows at the back.",

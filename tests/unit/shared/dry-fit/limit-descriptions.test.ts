@@ -35,7 +35,7 @@ describe("the descriptions of the limits", () => {
 
   it("leave no group empty, and gather a group's rules in order", () => {
     expect(limitGroups.every(({ limits }) => limits.length > 0)).toBe(true);
-    expect(limitGroups.find(({ id }) => id === "movement")?.rules).toEqual([6, 16, 17]);
+    expect(limitGroups.find(({ id }) => id === "movement")?.rules).toEqual([6, 16, 17, 35]);
     expect(limitGroups.find(({ id }) => id === "support")).toMatchObject({
       title: "Support under bonded pieces",
       rules: [1],
@@ -44,7 +44,7 @@ describe("the descriptions of the limits", () => {
 
   it("tell for each rule that keeps to a limit which one it is", () => {
     const numbers = new Set(rules.map(({ number }) => number));
-    for (const rule of [1, 3, 6, 7, 21, 23]) {
+    for (const rule of [1, 3, 6, 7, 11, 21, 23, 31, 33]) {
       expect(numbers.has(rule)).toBe(true);
       expect(described.some((limit) => limit.rules.includes(rule))).toBe(true);
     }
