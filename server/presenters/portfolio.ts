@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import type { openShareLink, portfolioPieceSchema, shareLinkSchema } from "#shared/contracts/portfolio.ts";
 import { faceStock } from "#shared/stack/backer.ts";
+import { signBox } from "#shared/stack/sign-box.ts";
 import type { ShareLink } from "../models/share-link.ts";
 import type { Shop } from "../models/shop.ts";
 import type { ApprovedPiece } from "../queries/portfolio.ts";
@@ -8,13 +9,14 @@ import { snapshotOf } from "../queries/snapshot-of.ts";
 
 export function presentPortfolioPiece({ job, client, revision }: ApprovedPiece): z.input<typeof portfolioPieceSchema> {
   const { document, drawing } = snapshotOf(revision);
+  const whole = signBox(document);
   return {
     jobId: job.id,
     title: job.title,
     client: client.name,
     letter: revision.letter,
-    widthMm: document.board.width,
-    heightMm: document.board.height,
+    widthMm: whole.width,
+    heightMm: whole.height,
     consent: job.consentAt !== null,
     elevation: drawing.picture,
   };
@@ -44,12 +46,13 @@ export function presentSharedPieces(
     unit: shop.unit,
     pieces: pieces.map(({ job, client, revision }) => {
       const { document, figures, drawing } = snapshotOf(revision);
-      const { backer, layers, board } = document;
+      const { backer, layers } = document;
+      const whole = signBox(document);
       return {
         title: job.title,
         client: client.name,
-        widthMm: board.width,
-        heightMm: board.height,
+        widthMm: whole.width,
+        heightMm: whole.height,
         offWallMm: figures.offWall.nominal,
         materials: [...new Set([faceStock(backer).name, ...layers.map(({ stock }) => `${stock.name} acrylic`)])],
         elevation: drawing.picture,

@@ -5,6 +5,7 @@ import { scheduleRows } from "#shared/drawing/schedule.ts";
 import { visibleToClient } from "#shared/lifecycle/revision-states.ts";
 import { acknowledgementsOf } from "#shared/mockup/acknowledgements.ts";
 import type { Snapshot } from "#shared/mockup/snapshot.ts";
+import { signBox } from "#shared/stack/sign-box.ts";
 import { type Actor, isStaff } from "../policies/actor.ts";
 import { isApprover } from "../policies/revision.ts";
 import { revisionFacts } from "../queries/find-revision.ts";
@@ -22,6 +23,7 @@ export function presentSheet(
 ): SheetView {
   const { job, client, revisions } = loaded;
   const { document, figures, titleBlock, drawing } = snapshot;
+  const whole = signBox(document);
   const first = drawing.sheets[0];
   const names = new Map(
     document.layers.flatMap(({ name: layerName, pieces }) =>
@@ -46,7 +48,7 @@ export function presentSheet(
     elevation: drawing.elevation,
     section: drawing.section,
     schedule: scheduleRows(document, figures, titleBlock.unit),
-    board: { widthMm: document.board.width, heightMm: document.board.height },
+    board: { widthMm: whole.width, heightMm: whole.height },
     zones: first ? zonesOnBoard(first) : { columns: [], rows: [] },
     pieces: figures.pieces.map(({ pieceId, layerKey, centroid }) => ({
       id: pieceId,

@@ -69,7 +69,7 @@ export const sheetSchema = z.strictObject({
       mass: z.string(),
     }),
   ),
-  /** Board in mm, and where each piece lies, so that a note can be pinned by choosing a piece from the list. */
+  /** The board in mm, its frame included, and where each piece lies, so that a note can be pinned by choosing a piece from the list. */
   board: z.strictObject({ widthMm: z.number(), heightMm: z.number() }),
   pieces: z.array(
     z.strictObject({ id: z.string(), name: z.string(), layerKey: z.string(), x: z.number(), y: z.number() }),

@@ -1,5 +1,6 @@
 import { faceStock } from "../stack/backer.ts";
 import type { Figures } from "../stack/figures.ts";
+import { signBox } from "../stack/sign-box.ts";
 import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { MockupDocument } from "./document.ts";
@@ -19,7 +20,8 @@ export function acknowledgementsOf({
   words: string;
   unit: LengthUnit;
 }): Acknowledgement[] {
-  const { board, layers, quantity } = document;
+  const { layers, quantity } = document;
+  const { width, height } = signBox(document);
   const lines = words.split("\n").map((line) => line.trim());
   const asked: Acknowledgement[] = lines.flatMap((line, index) =>
     line ? [{ id: `words-${index + 1}`, text: `The words read exactly, letter by letter: “${line}”.` }] : [],
@@ -27,7 +29,7 @@ export function acknowledgementsOf({
   const offWall = formatLengthWithUnit(figures.offWall.nominal, unit);
   asked.push({
     id: "size",
-    text: `The size is ${formatSize(board.width, board.height, unit)} and it stands ${offWall} off the wall.`,
+    text: `The size is ${formatSize(width, height, unit)} and it stands ${offWall} off the wall.`,
   });
   const colours = [...new Set(layers.map(({ stock }) => stock.name))];
   if (colours.length > 0) {

@@ -41,7 +41,7 @@ export function ElevationView(props: ElevationViewProps) {
         x: round(at.x - origin.x),
         y: round(at.y - origin.y),
         pieceId: piece?.id ?? null,
-        layerKey: piece?.layerKey ?? (id === "board" ? "A" : null),
+        layerKey: piece?.layerKey ?? (id === "board" || id === "frame" ? "A" : null),
       });
     };
   }, [isPlacing, onTouch, sheet.pieces, origin]);

@@ -6,15 +6,19 @@ import { scheduleRows } from "#shared/drawing/schedule.ts";
 import { drawSection } from "#shared/drawing/section.ts";
 import { boxOfPath } from "#shared/geometry/box.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
+import { rememberingKernel } from "#shared/geometry/remembering-kernel.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
 import { signBox } from "#shared/stack/sign-box.ts";
 import { pine, slatSign, walnut, walnutFrame } from "../../../support/slat-signs.ts";
 
+// What was drawn of one document is known again when the next test draws a part of it.
 let kernel: Kernel;
 beforeAll(async () => {
-  kernel = await loadKernel();
+  kernel = rememberingKernel(await loadKernel());
 });
+const plain = slatSign();
+const framed: MockupDocument = { ...plain, frame: walnutFrame };
 
 const draw = (document: MockupDocument, options: { dimensions?: boolean; wall?: boolean } = {}) =>
   drawElevation({
@@ -48,18 +52,18 @@ const round = { outline: { kind: "ellipse" }, width: 600, height: 400, measures:
 
 describe("slats from the front", () => {
   it("are one picture of grain inside the board's outline, with a line round every one of them", () => {
-    const items = everyItem(draw(bare(slatSign())).items);
+    const items = everyItem(draw(bare(plain)).items);
     expect(items.filter(({ kind }) => kind === "image")).toHaveLength(1);
-    const lines = pathsOf(draw(bare(slatSign()))).find(({ path, fill }) => path.length > 20 && fill === undefined);
+    const lines = pathsOf(draw(bare(plain))).find(({ path, fill }) => path.length > 20 && fill === undefined);
     // 13 strips on each side of 281 by 400 at 45 degrees: (281 + 400) / (38 · √2) = 12.7, and the spine.
     expect(lines?.path).toHaveLength(27);
   });
 
   it("with gaps show the substrate between them, in shadow", () => {
     const paths = pathsOf(draw(bare(slatSign({ gap: 6 }))));
-    expect(paths.find(({ id }) => id === "board")?.fill).not.toBe(pathsOf(draw(bare(slatSign())))[0]?.fill);
+    expect(paths.find(({ id }) => id === "board")?.fill).not.toBe(pathsOf(draw(bare(plain)))[0]?.fill);
     expect(paths.some(({ fill, opacity }) => fill === "#1A1208" && opacity !== undefined)).toBe(true);
-    expect(pathsOf(draw(bare(slatSign()))).some(({ opacity }) => opacity !== undefined)).toBe(false);
+    expect(pathsOf(draw(bare(plain))).some(({ opacity }) => opacity !== undefined)).toBe(false);
   });
 
   it("end at the outline of a round board", () => {
@@ -76,7 +80,7 @@ describe("slats from the front", () => {
 
 describe("a frame from the front", () => {
   it("lies outside the body, and the picture has room for it", () => {
-    const list = draw(slatSign({}, { frame: walnutFrame }));
+    const list = draw(framed);
     expect(boxNamed(list, "frame")).toEqual({ x: -18, y: -18, width: 636, height: 436 });
     expect(boxNamed(list, "board")).toEqual({ x: 0, y: 0, width: 600, height: 400 });
     const origin = boardOriginOf(list) ?? { x: 0, y: 0 };
@@ -86,17 +90,12 @@ describe("a frame from the front", () => {
   });
 
   it("is dimensioned over all, the body inside it too; without one the body alone", () => {
-    expect(overall(draw(slatSign({}, { frame: walnutFrame }), { dimensions: true }))).toEqual([
-      "body 600",
-      "body 400",
-      "636",
-      "436",
-    ]);
-    expect(overall(draw(slatSign(), { dimensions: true }))).toEqual(["600", "400"]);
+    expect(overall(draw(framed, { dimensions: true }))).toEqual(["body 600", "body 400", "636", "436"]);
+    expect(overall(draw(plain, { dimensions: true }))).toEqual(["600", "400"]);
   });
 
   it("keeps the dimensions of the layers outside it", () => {
-    const list = draw(slatSign({}, { frame: walnutFrame }), { dimensions: true });
+    const list = draw(framed, { dimensions: true });
     const rows = everyItem(list.items).find((item) => item.kind === "group" && item.id === "dimension:across");
     const lines = rows?.kind === "group" ? rows.items.flatMap((item) => (item.kind === "line" ? item.points : [])) : [];
     expect(Math.min(...lines.map(({ y }) => y))).toBeGreaterThan(418);
@@ -104,7 +103,7 @@ describe("a frame from the front", () => {
 
   it("throws its shadow on the wall and, where it stands proud, on the face", () => {
     const shadows = (depth: number, wall: boolean) =>
-      everyItem(draw(bare(slatSign({}, { frame: { ...walnutFrame, depth } })), { wall }).items).flatMap((item) =>
+      everyItem(draw(bare({ ...plain, frame: { ...walnutFrame, depth } }), { wall }).items).flatMap((item) =>
         item.kind === "image" && item.opacity !== undefined ? [item.box] : [],
       );
     // The face lies at 12 + 8 - 0.3 mm: level with it a frame throws nothing.
@@ -125,7 +124,7 @@ describe("a frame from the front", () => {
 
 describe("slats and frame from the side", () => {
   it("show the substrate, each slat cut, and the frame at its depth above and below", () => {
-    const list = section(bare(slatSign({}, { frame: walnutFrame })));
+    const list = section(bare(framed));
     expect(boxNamed(list, "board")).toEqual({ x: 0, y: 0, width: 12, height: 400 });
     const filled = (colour: string) => pathsOf(list).filter(({ fill }) => fill === colour);
     const slats = filled(pine.colour).map(({ path }) => boxOfPath(path));
@@ -142,7 +141,7 @@ describe("slats and frame from the side", () => {
   });
 
   it("show how far the standoffs' screws reach into the wood, dashed", () => {
-    const dashed = everyItem(section(slatSign()).items).flatMap((item) =>
+    const dashed = everyItem(section(plain).items).flatMap((item) =>
       item.kind === "line" && item.stroke.dashMm !== undefined && item.points.length === 6 ? [item.points] : [],
     );
     expect(dashed).toHaveLength(2);
@@ -156,7 +155,7 @@ describe("slats and frame from the side", () => {
 
 describe("the schedule", () => {
   it("says what the slats lie on, how thick both are, and what frames them", () => {
-    const document = slatSign({}, { frame: walnutFrame });
+    const document = framed;
     const [first] = scheduleRows(document, computeFigures(document, kernel), "mm");
     expect(first).toMatchObject({
       what: "Backer, slats at 45°, framed 18 × 24 in Black walnut, bare",

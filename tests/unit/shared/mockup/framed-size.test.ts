@@ -1,0 +1,23 @@
+import { beforeAll, describe, expect, it } from "vitest";
+import { loadKernel } from "#server/artwork/load-kernel.ts";
+import type { Kernel } from "#shared/geometry/kernel.ts";
+import { acknowledgementsOf } from "#shared/mockup/acknowledgements.ts";
+import { computeFigures } from "#shared/stack/compute-figures.ts";
+import { slatSign, walnutFrame } from "../../../support/slat-signs.ts";
+
+let kernel: Kernel;
+beforeAll(async () => {
+  kernel = await loadKernel();
+});
+
+describe("the size that an approver confirms", () => {
+  it.each([
+    // 600 by 400 and 18 mm on every side.
+    { name: "a framed sign", frame: walnutFrame, size: "636 × 436 mm" },
+    { name: "a sign without a frame", frame: null, size: "600 × 400 mm" },
+  ])("of $name is $size", ({ frame, size }) => {
+    const document = slatSign({}, { frame });
+    const asked = acknowledgementsOf({ document, figures: computeFigures(document, kernel), words: "", unit: "mm" });
+    expect(asked.find(({ id }) => id === "size")?.text).toContain(`The size is ${size} and it stands`);
+  });
+});
