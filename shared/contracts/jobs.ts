@@ -1,13 +1,17 @@
 import { z } from "zod";
 import { jobStates, staffStates } from "../lifecycle/job-states.ts";
 import { leastBoardMm } from "../mockup/schema-parts.ts";
-import { day, inShop, instant, lengthMm, nothing, pageOf, pageQuery, writtenLine, writtenText } from "./common.ts";
+import { day, inShop, instant, nothing, pageOf, pageQuery, writtenLine, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
 export const jobState = z.enum(jobStates);
 export const move = z.enum(["ours", "client", "nobody"]);
 
-const signSide = lengthMm.min(leastBoardMm, `A sign is at least ${leastBoardMm} mm wide and high.`);
+const signSide = z
+  .number()
+  .finite()
+  .min(leastBoardMm, `A sign is at least ${leastBoardMm} mm wide and high.`)
+  .max(10_000, "At most 10 m (32 feet).");
 const howMany = "Write a whole number from 1 to 1000.";
 
 /** What the sign is to be. Every field may be missing until the brief is complete. */

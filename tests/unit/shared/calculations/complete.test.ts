@@ -9,6 +9,7 @@ const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour
 /** Parts of calculations that are explained with the ones that use them. */
 const parts = [
   "bonds/surfaces.ts",
+  "colour/finish-colour.ts",
   "hardware/check-hardware.ts",
   "hardware/driven-of.ts",
   "hardware/edge-places.ts",
