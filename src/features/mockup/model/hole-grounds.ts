@@ -8,7 +8,7 @@ import { seenDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { Hardware, Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { boardPath } from "#shared/stack/board-outline.ts";
 
-/** Coarse: a proposal is looked at and moved, and a layer can have hundreds of pieces. */
+/** Coarse: a proposal is looked at and moved, and a layer can have hundreds of pieces. What keeps off keeps off that much more. */
 const flatnessMm = 0.2;
 /** So many of the largest pieces under a panel are tried as what it stands on. */
 const mostGrounds = 3;
@@ -46,7 +46,7 @@ export function holeGrounds(
   const level = place < 0 ? document.layers.length : place;
   const over = document.layers.slice(level + 1);
   const foot = hardware.barrelDiameter;
-  const front = (hardware.kind === "edgeGrip" ? foot : seenDiameterMm(hardware)) + 2 * clearanceMm;
+  const front = (hardware.kind === "edgeGrip" ? foot : seenDiameterMm(hardware)) + 2 * (clearanceMm + flatnessMm);
   const lying = over.filter(({ hold }) => hold.kind !== "standoff");
   const clear = [
     ...outlinesOf(lying).map((shape): Boxed => ({ ...shape, diameter: front, side: "outside" })),
@@ -63,7 +63,11 @@ export function holeGrounds(
     const near = clear.filter((one) => boxesOverlap(one.box, around));
     const under = below.filter((one) => boxesOverlap(one.box, around));
     const standing = (on: Shape | null): Level[] =>
-      under.map((shape) => ({ ...shape, diameter: foot, side: shape === on ? "inside" : "outside" }));
+      under.map((shape) =>
+        shape === on
+          ? { ...shape, diameter: foot, side: "inside" }
+          : { ...shape, diameter: foot + 2 * flatnessMm, side: "outside" },
+      );
     return [null, ...under.slice(0, mostGrounds)].map((on) => [...near, board, ...standing(on)]);
   };
 }
