@@ -80,7 +80,8 @@ beforeAll(async () => {
       password: "six small planes sing",
     });
     const slug = new URL(page.url()).pathname.split("/")[2] ?? "";
-    for (const place of ["bench", "clients", "portfolio"] as const) state.links.set(`new ${place}`, paths[place](slug));
+    for (const place of ["bench", "clients", "portfolio", "prices"] as const)
+      state.links.set(`new ${place}`, paths[place](slug));
     await page.goto(paths.team(slug));
     await page.getByLabel("E-mail address").fill("heath@alderawl.example");
     await page.getByRole("button", { name: "Send the invitation" }).click();

@@ -212,6 +212,54 @@ export const screens: readonly Screen[] = [
     path: () => paths.limits(shop),
     ready: heading(/not/i),
   },
+  {
+    who: "owner",
+    name: "prices",
+    at: "prices",
+    path: () => paths.prices(shop),
+    ready: (page) => page.getByLabel("Midnight, 3 mm, Price", { exact: true }),
+  },
+  {
+    who: "owner",
+    name: "prices-refused",
+    at: "prices",
+    path: () => paths.prices(shop, [{ group: "finishes", id: "coat Bees wax", name: "Bees wax" }]),
+    ready: (page) => page.getByLabel("Midnight, 3 mm, Price", { exact: true }),
+    open: async (page) => {
+      await page.getByLabel("Midnight, 3 mm, Price", { exact: true }).fill("12,505");
+      await page.getByLabel("Midnight, 4.5 mm, Waste", { exact: true }).fill("lots");
+      await page.getByLabel("Bees wax, Price for a m²", { exact: true }).fill("4,20");
+      await press("Save the prices")(page);
+      await page.getByText("EUR has 2 decimals at most: write 12.50.").waitFor();
+    },
+  },
+  {
+    who: "owner",
+    name: "prices-wanted",
+    at: "prices",
+    path: () => `${paths.prices(shop, [{ group: "finishes", id: "coat Bees wax", name: "Bees wax" }])}#prices-finishes`,
+    ready: (page) => page.getByLabel("Bees wax, Price for a m²", { exact: true }),
+    open: async (page) => {
+      await press("Add the strip")(page);
+      await page.getByText("Over 0, up to 500 mm.").first().waitFor();
+    },
+  },
+  {
+    who: "newcomer",
+    name: "prices",
+    at: "prices",
+    path: () => linkOf("new prices"),
+    ready: (page) => page.getByLabel("Midnight, 3 mm, Price", { exact: true }),
+  },
+  {
+    who: "maker",
+    name: "prices-to-read",
+    at: "prices",
+    path: () => paths.prices(shop),
+    ready: (page) => page.getByRole("rowheader", { name: "Midnight, 3 mm" }),
+  },
+  { who: "rep", name: "prices-not-theirs", at: "prices", path: () => paths.prices(shop), ready: heading(/not/i) },
+  { who: "client", name: "prices-not-theirs", at: "prices", path: () => paths.prices(shop), ready: heading(/not/i) },
   { who: "owner", name: "mail", at: "outgoingMail", path: () => paths.outgoingMail(shop), ready: text("Look again") },
   {
     who: "owner",
@@ -298,6 +346,18 @@ export const screens: readonly Screen[] = [
       await page.getByRole("button", { name: /^Bring in \d/ }).waitFor();
     },
     only: "desk",
+  },
+  {
+    who: "maker",
+    name: "mockup-cost",
+    at: "mockup",
+    path: () => paths.mockup(shop, jobOf("142")),
+    ready: (page) => page.getByRole("button", { name: /^Costs / }),
+    open: async (page) => {
+      const fold = page.getByRole("button", { name: /^Costs / });
+      if ((await fold.getAttribute("aria-expanded")) === "false") await fold.click();
+      await page.getByRole("rowheader", { name: "To ask" }).scrollIntoViewIfNeeded();
+    },
   },
   {
     who: "maker",
