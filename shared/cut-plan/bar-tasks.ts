@@ -32,7 +32,7 @@ export function barTasks({
   const { backer, frame, quantity } = document;
   const laid = slatsOf(document, kernel);
   const round = frameOf(document, kernel);
-  const tasks: { what: string; stock: Wood; width: number; thickness: number; parts: BarPart[] }[] = [];
+  const tasks: Section[] = [];
   if (backer.slats && laid?.ok) {
     const { stock, thickness, slatWidth, spineWidth } = backer.slats;
     const parts = partsOfSlats(laid.value.slats).map((part) => ({ ...part, quantity }));
@@ -57,7 +57,7 @@ export function barTasks({
     });
     tasks.push({ what: "Frame", stock: frame.stock, width: frame.width, thickness: frame.depth, parts });
   }
-  return tasks.map(({ what, stock, width, thickness, parts }) => ({
+  return bySection(tasks).map(({ what, stock, width, thickness, parts }) => ({
     id: what.toLowerCase(),
     title: `${what}: ${stock.name}, ${formatLength(width, unit)} × ${formatLength(thickness, unit)}${unit === "mm" ? " mm" : ""}`,
     stock,
@@ -78,4 +78,24 @@ export function barTasks({
       saw: { kerfMm: saws.sawKerfMm, squaringMm: saws.squaringMm, rejectShare: saws.rejectShare, nests: true },
     },
   }));
+}
+
+type Section = {
+  readonly what: string;
+  readonly stock: Wood;
+  readonly width: number;
+  readonly thickness: number;
+  readonly parts: readonly BarPart[];
+};
+
+/** What has one wood and one section is cut from the same bars, so that a spine comes out of what slats leave. */
+function bySection(all: readonly Section[]): Section[] {
+  const merged = new Map<string, Section>();
+  for (const section of all) {
+    const key = JSON.stringify([section.stock, section.width, section.thickness]);
+    const before = merged.get(key);
+    const what = `${before?.what} and ${section.what.toLowerCase()}`;
+    merged.set(key, before ? { ...before, what, parts: [...before.parts, ...section.parts] } : section);
+  }
+  return [...merged.values()];
 }

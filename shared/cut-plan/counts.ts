@@ -48,7 +48,17 @@ export type JointCount = {
   readonly fullHours: number;
 };
 
+/** The plank, or what slats are glued on: what goes round the board, of all signs. */
+export type BoardCount = {
+  readonly stock: string;
+  readonly thicknessMm: number;
+  readonly widthMm: number;
+  readonly heightMm: number;
+  readonly count: number;
+};
+
 export type Counts = {
+  readonly board: BoardCount;
   readonly layers: readonly LayerCount[];
   readonly hardware: readonly HardwareCount[];
   readonly screws: readonly ScrewCount[];
@@ -60,9 +70,16 @@ const studRoomMm = 1;
 
 /** Everything that is laid ready before a build, for all signs of a document. Drills to the nearest that `unit` has. */
 export function countParts(document: MockupDocument, unit: LengthUnit): Counts {
-  const { layers, quantity } = document;
+  const { layers, quantity, board, backer } = document;
   const hardware = countHardware(document);
   return {
+    board: {
+      stock: backer.stock.name,
+      thicknessMm: backer.thickness,
+      widthMm: board.width,
+      heightMm: board.height,
+      count: quantity,
+    },
     layers: layers
       .filter(({ pieces }) => pieces.length > 0)
       .map(({ key, name, stock, thickness, pieces }) => ({
@@ -74,7 +91,7 @@ export function countParts(document: MockupDocument, unit: LengthUnit): Counts {
         all: pieces.length * quantity,
       })),
     hardware,
-    screws: countScrews(hardware, document.backer.stock.hardness, unit),
+    screws: countScrews(hardware, backer.stock.hardness, unit),
     joints: layers.flatMap((layer) => jointOf(layer, quantity)),
   };
 }

@@ -22,8 +22,9 @@ export type SheetTask = {
   readonly usualSheet: StockSheet;
 };
 
-/** Units of search: some five seconds a material in a workshop's computer. */
-const usualEffort = 5;
+/** Units of search: some five seconds a material in a workshop's computer, less where there is little to try. */
+const mostEffort = 5;
+const effortACopy = 1 / 6;
 
 /** What has to be cut from sheets, material by material in the order of the layers. Layers without pieces ask for nothing. */
 export function sheetTasks({
@@ -60,7 +61,7 @@ export function sheetTasks({
       usualSheet: usualSheet(saws),
       request: {
         pieces,
-        stock: counted.length > 0 ? counted.map(sheetInStock(unit)) : [usualSheet(saws)],
+        stock: counted.length > 0 ? counted.map(sheetInStock) : [usualSheet(saws)],
         rules: {
           marginMm: saws.sheetMarginMm,
           kerfMm: limits.pieceKerfMm,
@@ -69,7 +70,7 @@ export function sheetTasks({
           leastOffcutMm: saws.leastOffcutMm,
         },
         seed: 1,
-        effort: usualEffort,
+        effort: Math.min(mostEffort, effortACopy * pieces.reduce((sum, { quantity }) => sum + quantity, 0)),
       },
     };
   });
@@ -97,21 +98,21 @@ const entryOf = (acrylics: readonly AcrylicStock[], { stockId, name }: Acrylic):
   acrylics.find(({ acrylic }) => stockId !== null && acrylic.stockId === stockId) ??
   acrylics.find(({ acrylic }) => acrylic.name === name);
 
-const sheetInStock =
-  (unit: LengthUnit) =>
-  (sheet: AcrylicStock["sheets"][number], index: number): StockSheet => ({
+function sheetInStock({ widthMm, heightMm, quantity }: AcrylicStock["sheets"][number], index: number): StockSheet {
+  return {
     id: `stock-${index + 1}`,
-    name: `${formatLength(sheet.widthMm, unit)} × ${formatLength(sheet.heightMm, unit)}`,
-    path: rectanglePath({ x: 0, y: 0, width: sheet.widthMm, height: sheet.heightMm }),
-    quantity: sheet.quantity,
+    name: "Sheet in stock",
+    path: rectanglePath({ x: 0, y: 0, width: widthMm, height: heightMm }),
+    quantity,
     grainTurn: 0,
     isOffcut: false,
-  });
+  };
+}
 
 function usualSheet({ usualSheetWidthMm, usualSheetHeightMm }: ShopSaws): StockSheet {
   return {
     id: "usual",
-    name: "sheet as usually bought",
+    name: "Sheet as bought",
     path: rectanglePath({ x: 0, y: 0, width: usualSheetWidthMm, height: usualSheetHeightMm }),
     quantity: null,
     grainTurn: 0,

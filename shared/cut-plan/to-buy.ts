@@ -1,7 +1,8 @@
+import { boxOfPath } from "../geometry/box.ts";
 import type { Hardware, Screw } from "../mockup/document.ts";
 import type { SheetLayout } from "../sheets/nesting.ts";
 import type { CuttingPlan } from "../stock-lengths/plan-cutting.ts";
-import { formatSize } from "../units/format-length.ts";
+import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { BarTask } from "./bar-tasks.ts";
 import type { Counts } from "./counts.ts";
@@ -30,7 +31,7 @@ export type SheetResult = {
 };
 export type BarResult = { readonly task: BarTask; readonly plan: CuttingPlan | null };
 
-/** What all signs of a document take, against what is on hand: sheets, bars, hardware and screws, in that order. */
+/** What all signs of a document take, against what is on hand: sheets, boards, bars, hardware and screws, in that order. */
 export function listToBuy({
   sheets,
   bars,
@@ -48,7 +49,8 @@ export function listToBuy({
 }): ToBuy[] {
   const usual = formatSize(saws.usualSheetWidthMm, saws.usualSheetHeightMm, unit);
   return [
-    ...sheets.flatMap((result) => sheetLines(result, usual)),
+    ...sheets.flatMap((result) => sheetLines(result, usual, unit)),
+    boardLine(counts, unit),
     ...bars.flatMap(({ task, plan }) =>
       plan === null
         ? []
@@ -74,18 +76,26 @@ export function listToBuy({
   ];
 }
 
-function sheetLines({ task, layout, bought }: SheetResult, usual: string): ToBuy[] {
+function sheetLines({ task, layout, bought }: SheetResult, usual: string, unit: LengthUnit): ToBuy[] {
   if (layout === null) return [];
   const used = layout.sheets.filter(({ placements }) => placements.length > 0);
-  const names = new Map(task.request.stock.map(({ id, name, quantity }) => [id, { name, quantity }]));
+  const stock = new Map(task.request.stock.map((sheet) => [sheet.id, sheet]));
   const lines = [...new Set(used.map(({ stockId }) => stockId))].map((stockId): ToBuy => {
     const need = sheetsOf(used.filter((sheet) => sheet.stockId === stockId));
     if (!task.sheetsAreCounted) return { what: `${task.title}, sheet ${usual}`, need, onHand: 0, buy: need };
-    const { name = "", quantity = null } = names.get(stockId) ?? {};
-    return against(`${task.title}, sheet ${name}`, need, quantity);
+    const sheet = stock.get(stockId);
+    const box = sheet && boxOfPath(sheet.path);
+    const size = box ? ` ${formatSize(box.width, box.height, unit)}` : "";
+    return against(`${task.title}, sheet${size}`, need, sheet?.quantity ?? null);
   });
   const more = bought ? sheetsOf(bought.sheets.filter(({ placements }) => placements.length > 0)) : 0;
   return more > 0 ? [...lines, { what: `${task.title}, sheet ${usual}`, need: more, onHand: 0, buy: more }] : lines;
+}
+
+/** Wood is not counted in the stock list. */
+function boardLine({ board: { stock, thicknessMm, widthMm, heightMm, count } }: Counts, unit: LengthUnit): ToBuy {
+  const size = `${formatLengthWithUnit(thicknessMm, unit)}, ${formatSize(widthMm, heightMm, unit)}`;
+  return { what: `Backer: ${stock}, ${size}`, need: count, onHand: null, buy: null };
 }
 
 /** Several parts of one sheet are one sheet. */

@@ -8,7 +8,7 @@ import { fineLineMm } from "./dimensions.ts";
 import type { DisplayList, Item } from "./display-list.ts";
 import { graphite } from "./palette.ts";
 import { textItem } from "./text-item.ts";
-import { smallTextMm, wrapText } from "./type.ts";
+import { smallTextMm, textWidthMm, wrapText } from "./type.ts";
 
 export type CuttingDiagram = {
   readonly job: CuttingJob;
@@ -28,6 +28,7 @@ const leastStripMm = 6.5;
 const mostStripMm = 14;
 const betweenBarsMm = 5;
 const headingMm = 11;
+const titleMm = 4.2;
 
 type Block = { readonly heightMm: number; readonly draw: (y: number) => Item[] };
 
@@ -64,9 +65,13 @@ function heading(diagram: CuttingDiagram): Item[] {
     return bars > 0 && label !== undefined ? [`${bars} × ${label}`] : [];
   });
   const scale = `Lengths at 1:${Number(scaleOf(diagram).toFixed(1))}, widths not to scale.`;
+  const title = counts.join(", ") || "Nothing to cut";
+  const taken = textWidthMm(title, "serif-bold", titleMm) + textWidthMm(scale, "sans", smallTextMm) + 4;
   return [
-    textItem(counts.join(", ") || "Nothing to cut", { x: 0, y: 4 }, { font: "serif-bold", sizeMm: 4.2 }),
-    textItem(scale, { x: diagram.widthMm, y: 4 }, { colour: graphite, align: "right" }),
+    textItem(title, { x: 0, y: 4 }, { font: "serif-bold", sizeMm: titleMm }),
+    taken <= diagram.widthMm
+      ? textItem(scale, { x: diagram.widthMm, y: 4 }, { colour: graphite, align: "right" })
+      : textItem(scale, { x: 0, y: 8.8 }, { colour: graphite }),
   ];
 }
 

@@ -58,13 +58,15 @@ function heading(
 ): Item[] {
   const name = stock.find(({ id }) => id === stockId)?.name ?? stockId;
   const ofParts = parts > 1 ? `, part ${part} of ${parts}` : "";
-  const figures = `${size}, ${Math.round(use * 100)} % used, at 1:${Number(scale.toFixed(1))}`;
+  const figures = `${size}, ${usedWords(use)}, at 1:${Number(scale.toFixed(1))}`;
   return [
     textItem(`${name}${ofParts}`, { x: 0, y: 4 }, { font: "serif-bold", sizeMm: 4.2 }),
     textItem(count, { x: widthMm, y: 4 }, { colour: graphite, align: "right" }),
     textItem(figures, { x: 0, y: 10 }, { colour: graphite }),
   ];
 }
+
+const usedWords = (use: number): string => (use < 0.01 ? "under 1 % used" : `${Math.round(use * 100)} % used`);
 
 /** What lies on a sheet: each piece once, in the order of the list, with how often. */
 function contents({ placements }: NestedSheet, pieces: ReadonlyMap<string, SheetPiece>): string {

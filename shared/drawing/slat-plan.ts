@@ -1,3 +1,4 @@
+import { regionCentroid } from "../geometry/area.ts";
 import { boxOfRegion } from "../geometry/box.ts";
 import type { Point, Region } from "../geometry/path.ts";
 import { pathOfRegion } from "../geometry/path-of-region.ts";
@@ -27,14 +28,20 @@ export function drawSlatPlan(paper: Paper): DisplayList | null {
   if (!view) return null;
   const { slats, spine } = paper.layout;
   const pieces = [
-    ...(spine ? [{ id: "slat:spine", text: "S", region: spine.trimmed }] : []),
-    ...slats.map(({ order, trimmed }) => ({ id: `slat:${order}`, text: String(order), region: trimmed })),
+    ...(spine ? [{ id: "slat:spine", text: "S", region: spine.trimmed, turn: 0 }] : []),
+    ...slats.map(({ order, trimmed, axis: { from, to } }) => {
+      const turn = (Math.atan2(to.y - from.y, to.x - from.x) * 180) / Math.PI;
+      return { id: `slat:${order}`, text: String(order), region: trimmed, turn: upright(turn) };
+    }),
   ];
-  return page(paper, view, [
-    ...pieces.flatMap(({ id, text, region }) => {
+  return page(paper, view, 0, [
+    ...pieces.flatMap(({ id, text, region, turn }) => {
       const drawn = onPaper(region, view);
       const stroke = { colour: ink, widthMm: fineLineMm };
-      return [{ kind: "path", id, path: pathOfRegion(drawn), fill: linen, stroke } as const, ...numberIn(drawn, text)];
+      return [
+        { kind: "path", id, path: pathOfRegion(drawn), fill: linen, stroke } as const,
+        ...numberIn(drawn, text, turn),
+      ];
     }),
     ...outline(paper, view),
   ]);
@@ -55,7 +62,7 @@ export function drawBradMap(
   const { box, scale } = view;
   const base = edgeMm + box.height / scale + 5;
   const words = `${formatLength(box.width, paper.unit)} × ${formatLength(box.height, paper.unit)}, at 1:${Number(scale.toFixed(1))}`;
-  return page(paper, view, [
+  return page(paper, view, footMm, [
     ...pieces.map((region): Item => {
       const stroke = { colour: rule, widthMm: fineLineMm };
       return { kind: "path", path: pathOfRegion(onPaper(region, view)), fill: sheetWhite, stroke };
@@ -76,9 +83,9 @@ function viewOf({ layout, widthMm, heightMm }: Paper): View | null {
   return { box, scale: Math.max(box.width / (widthMm - 2 * edgeMm), box.height / (heightMm - 2 * edgeMm - footMm)) };
 }
 
-const page = ({ widthMm }: Paper, { box, scale }: View, items: readonly Item[]): DisplayList => ({
+const page = ({ widthMm }: Paper, { box, scale }: View, foot: number, items: readonly Item[]): DisplayList => ({
   widthMm,
-  heightMm: box.height / scale + 2 * edgeMm + footMm,
+  heightMm: box.height / scale + 2 * edgeMm + foot,
   items,
 });
 
@@ -102,13 +109,21 @@ function outline({ layout }: Paper, view: View): Item[] {
   return [{ kind: "path", path: pathOfRegion(onPaper(layout.body, view)), stroke }];
 }
 
-/** In the roomiest place of the slat; one too small for its number bears none, the list names it. */
-function numberIn(region: Region, text: string): Item[] {
+/** Level in the roomiest place of the slat; where it is too narrow for that, along it about its middle. */
+function numberIn(region: Region, text: string, turn: number): Item[] {
   const font = "sans-semibold";
   const capMm = smallTextMm * capHeightShare;
   const place = labelRoom(region, textWidthMm(text, font, smallTextMm) + 0.4, capMm + 0.4);
-  return place ? [textItem(text, { x: place.x, y: place.y + capMm / 2 }, { font, align: "middle" })] : [];
+  if (place) return [textItem(text, { x: place.x, y: place.y + capMm / 2 }, { font, align: "middle" })];
+  const middle = regionCentroid(region);
+  if (!middle) return [];
+  const angle = (turn * Math.PI) / 180;
+  const at = { x: middle.x - (Math.sin(angle) * capMm) / 2, y: middle.y + (Math.cos(angle) * capMm) / 2 };
+  return [{ kind: "text", text, at, sizeMm: smallTextMm, font, colour: ink, align: "middle", turn }];
 }
+
+/** A turn in degrees that lettering is read at from below or from the right. */
+const upright = (turn: number): number => (turn > 90 ? turn - 180 : turn <= -90 ? turn + 180 : turn);
 
 const crossMm = 0.9;
 function cross({ x, y }: Point): Item[] {

@@ -70,6 +70,8 @@ function Layout({
   readonly paperMm: number;
 }) {
   const { pieces } = request;
+  const aspect = aspectOf(layout);
+  const widthMm = Math.min(paperMm, Math.max(leastWidthMm, tallestMm / aspect));
   const pages = useMemo(
     () =>
       drawNestingDiagrams({
@@ -77,11 +79,11 @@ function Layout({
         pieces,
         stock,
         unit,
-        widthMm: paperMm,
-        heightMm: 24 + paperMm * aspectOf(layout),
+        widthMm,
+        heightMm: 24 + widthMm * aspect,
         isTrimmed: true,
       }),
-    [layout, pieces, stock, unit, paperMm],
+    [layout, pieces, stock, unit, widthMm, aspect],
   );
   const names = new Map(pieces.map(({ id, name }) => [id, name]));
   return (
@@ -103,7 +105,7 @@ function Layout({
           </ul>
         </Notice>
       )}
-      <div className="mt-4 space-y-5">
+      <div className="mt-4 flex flex-wrap items-start gap-5">
         {pages.map((list, index) => {
           const what = `${title}, sheet ${index + 1} of ${pages.length}`;
           return <DrawingBlock key={what} list={list} title={what} />;
@@ -112,6 +114,10 @@ function Layout({
     </>
   );
 }
+
+/** A sheet is drawn no higher, so that it is seen whole; nor narrower, for its heading. Paper, mm. */
+const tallestMm = 125;
+const leastWidthMm = 90;
 
 /** Height to width of the tallest sheet, at most a square's and a half. */
 function aspectOf({ sheets }: SheetLayout): number {

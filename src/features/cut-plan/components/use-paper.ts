@@ -2,8 +2,8 @@ import { type RefObject, useRef } from "react";
 import { useRoom } from "@/lib/use-room.ts";
 
 /** Lettering of 3.4 mm on a drawing is then 12.9 px high on the screen. */
-const mmPerPx = 0.263;
-const paddingPx = 26;
+export const mmPerPx = 0.263;
+export const paddingPx = 26;
 const least = 60;
 const most = 270;
 

@@ -58,7 +58,7 @@ describe("what is cut from sheets", () => {
     const counted = { ...standardStock, acrylics: [{ ...first, sheets }] };
     const [midnight, thick] = sheetTasks({ document: sign(), ...given, stock: counted });
     expect(midnight).toMatchObject({ sheetsAreCounted: true });
-    expect(midnight?.request.stock).toMatchObject([{ quantity: 2, name: "900 × 600" }]);
+    expect(midnight?.request.stock).toMatchObject([{ quantity: 2, name: "Sheet in stock" }]);
     expect(thick).toMatchObject({ sheetsAreCounted: false });
     expect(thick?.request.stock).toMatchObject([{ quantity: null }]);
   });
@@ -99,18 +99,28 @@ describe("what is cut from stock lengths", () => {
   });
 
   it("is slats, spine and frame, with the ends that the saw makes", () => {
-    const [slats, spine, frame] = barTasks({ document: slatted, saws: usualSaws, unit: "mm", kernel });
-    expect(slats?.title).toBe("Slats: Eastern white pine, 38.1 × 9 mm");
+    const [slats, frame] = barTasks({ document: slatted, saws: usualSaws, unit: "mm", kernel });
+    expect(slats?.title).toBe("Slats and spine: Eastern white pine, 38.1 × 9 mm");
     expect(slats?.job.parts.every(({ quantity }) => quantity === 3)).toBe(true);
     // Whole slats of 45 degrees have two parallel cuts, so they lie in each other.
     expect(slats?.job.parts[0]).toMatchObject({ start: { angle: 45 }, end: { angle: 45 } });
-    expect(spine?.job.parts).toMatchObject([{ lengthMm: 412, quantity: 3, start: { angle: 90 } }]);
+    expect(slats?.job.parts.at(-1)).toMatchObject({ id: "spine", lengthMm: 412, quantity: 3, start: { angle: 90 } });
     // Outside of a mitred frame: 600 + 2 · 20 and 400 + 2 · 20.
     expect(frame?.job.parts.map(({ lengthMm, start }) => [lengthMm, start.angle])).toEqual([
       [640, 45],
       [440, 45],
       [640, 45],
       [440, 45],
+    ]);
+  });
+
+  it("takes a spine of another width, or a frame of another wood, from bars of its own", () => {
+    const { slats } = slatted.backer;
+    const wider = { ...slatted, backer: { ...slatted.backer, slats: slats && { ...slats, spineWidth: 50 } } };
+    expect(barTasks({ document: wider, saws: usualSaws, unit: "mm", kernel }).map(({ title }) => title)).toEqual([
+      "Slats: Eastern white pine, 38.1 × 9 mm",
+      "Spine: Eastern white pine, 50 × 9 mm",
+      "Frame: Eastern white pine, 20 × 25 mm",
     ]);
   });
 
