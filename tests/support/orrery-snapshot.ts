@@ -2,6 +2,7 @@ import { loadKernel } from "#server/artwork/load-kernel.ts";
 import { drawElevation } from "#shared/drawing/elevation.ts";
 import { drawSection } from "#shared/drawing/section.ts";
 import { drawSheets, type Paper, paperScaleOf } from "#shared/drawing/sheet.ts";
+import { rememberingKernel } from "#shared/geometry/remembering-kernel.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { engineVersion, type Snapshot } from "#shared/mockup/snapshot.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
@@ -9,7 +10,7 @@ import { orreryBooks, orreryFindings, orreryNotes, orreryTitleBlock } from "./or
 
 /** What issuing "Orrery Books" would freeze, or another sign in its place. */
 export async function orrerySnapshot(paper: Paper = "A3", document: MockupDocument = orreryBooks()): Promise<Snapshot> {
-  const kernel = await loadKernel();
+  const kernel = rememberingKernel(await loadKernel());
   const figures = computeFigures(document, kernel);
   const unit = "mm";
   const paperScale = paperScaleOf({ document, figures, paper, unit });
