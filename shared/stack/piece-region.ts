@@ -14,6 +14,18 @@ export function pieceRegion(piece: { readonly path: Path; readonly placement: Pl
   );
 }
 
+/**
+ * A piece's outline in its own plane, as it faces the viewer at its own size and turn: the very same for a piece that was
+ * only moved, so that what does not depend on its place is worked out once.
+ */
+export function shapeRegion(piece: { readonly path: Path; readonly placement: Placement }, kernel: Kernel): Region {
+  const { path, placement } = piece;
+  const { turn, scale, mirrored } = placement;
+  return remembered(kernel, [path], `shape ${turn} ${scale} ${mirrored}`, () =>
+    kernel.union(flattenPath(placePath(path, { ...placement, x: 0, y: 0 })), "evenodd"),
+  );
+}
+
 /** The board's face, flattened to 0.02 mm, as non-crossing rings. */
 export function boardRegion(board: Board, kernel: Kernel): Region {
   return remembered(kernel, [board], "board region", () => kernel.union(flattenPath(boardPath(board)), "evenodd"));

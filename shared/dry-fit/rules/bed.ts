@@ -1,4 +1,6 @@
+import { remembered } from "../../geometry/kernel.ts";
 import { fitOnBed } from "../../materials/bed-fit.ts";
+import { shapeRegion } from "../../stack/piece-region.ts";
 import { formatSize } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { splitPieceMends } from "../mends/split-piece.ts";
@@ -11,9 +13,13 @@ export const bed: Rule = { number: 21, title: "Bed", check, mends: splitPieceMen
 function check(input: RuleInput): Finding[] {
   const { bedWidthMm, bedHeightMm } = input.limits;
   const { unit } = input.context;
+  const { kernel } = input;
   return layersWithFigures(input).flatMap(({ layer, pieces }) =>
     pieces.flatMap(({ piece, figures }): Finding[] => {
-      const size = fitOnBed(figures.region, { widthMm: bedWidthMm, heightMm: bedHeightMm });
+      const shape = shapeRegion(piece, kernel);
+      const size = remembered(kernel, shape, `on a bed ${bedWidthMm} ${bedHeightMm}`, () =>
+        fitOnBed(shape, { widthMm: bedWidthMm, heightMm: bedHeightMm }),
+      );
       if (!size || size.overMm === 0) return [];
       return [
         foundBy(bed, {

@@ -5,7 +5,7 @@ import { countOf } from "../../mockup/change.ts";
 import type { Layer } from "../../mockup/document.ts";
 import { mirrorLine } from "../../pieces/mirror-symmetry.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
-import { discsRegion } from "../../stack/piece-region.ts";
+import { discsRegion, shapeRegion } from "../../stack/piece-region.ts";
 import type { Finding } from "../finding.ts";
 import type { PieceWithFigures } from "../joints.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -36,7 +36,7 @@ function isHanded(region: Region, toleranceMm: number, kernel: Kernel): boolean 
 function check(input: RuleInput): Finding[] {
   return layersWithFigures(input).flatMap(({ layer, pieces }): Finding[] => {
     const there = pieces.filter(({ figures }) => figures.areaMm2 > 0);
-    const oneWay = there.filter(({ figures }) => isHandedInLayer(layer, figures, input));
+    const oneWay = there.filter((one) => isHandedInLayer(layer, one, input));
     const marked = layer.stock.facesDiffer ? there : oneWay;
     const [first] = marked;
     if (!first) return [];
@@ -57,8 +57,12 @@ function check(input: RuleInput): Finding[] {
 }
 
 /** A panel that is its own mirror image is still handed when its holes are not. */
-function isHandedInLayer({ hold }: Layer, figures: PieceFigures, { limits, kernel }: RuleInput): boolean {
-  if (measureHanded(figures, limits.mirrorMm, kernel)) return true;
+function isHandedInLayer(
+  { hold }: Layer,
+  { piece, figures }: PieceWithFigures,
+  { limits, kernel }: RuleInput,
+): boolean {
+  if (measureHanded({ region: shapeRegion(piece, kernel) }, limits.mirrorMm, kernel)) return true;
   if (hold.kind !== "standoff" || hold.holes.length === 0 || !passesPanel(hold.hardware)) return false;
   const drilled = kernel.difference(figures.region, discsRegion(hold.holes, kernel));
   return measureHanded({ region: drilled }, limits.mirrorMm, kernel);

@@ -1,7 +1,9 @@
+import { remembered } from "../../geometry/kernel.ts";
 import { countOf } from "../../mockup/change.ts";
 import type { Layer, Piece } from "../../mockup/document.ts";
 import { type NearTwins, nearTwins } from "../../pieces/near-twins.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
+import { shapeRegion } from "../../stack/piece-region.ts";
 import { formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
@@ -18,10 +20,18 @@ const mostGroups = 3;
 function check(input: RuleInput): Finding[] {
   const { limits, kernel, context } = input;
   return bySheet(input).flatMap((cuts): Finding[] => {
-    const found = nearTwins(
-      cuts.map(({ piece, figures }) => ({ id: piece.id, region: figures.region })),
+    const shapes = cuts.map(({ piece }) => ({ id: piece.id, region: shapeRegion(piece, kernel) }));
+    const alikeBy = {
+      sameMm: limits.twinSameMm,
+      alikeMm: limits.twinAlikeMm,
+      alikeShare: limits.twinAlikeShare,
+    };
+    const which = JSON.stringify([shapes.map(({ id, region }) => [id, region.length]), alikeBy]);
+    const found = remembered(
       kernel,
-      { sameMm: limits.twinSameMm, alikeMm: limits.twinAlikeMm, alikeShare: limits.twinAlikeShare },
+      shapes.flatMap(({ region }) => region),
+      `twins among ${which}`,
+      () => nearTwins(shapes, kernel, alikeBy),
     );
     const ids = new Set(found.flatMap((one) => (one.kind === "turned" ? one.ids : [...one.ids, ...one.others])));
     const alike = cuts.filter(({ piece }) => ids.has(piece.id));
