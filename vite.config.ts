@@ -34,7 +34,7 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: "unit", include: ["tests/unit/**/*.test.ts"], isolate: false, testTimeout: 20 * seconds },
+        test: { name: "unit", include: ["tests/unit/**/*.test.ts"], isolate: false, testTimeout: 60 * seconds },
       },
       {
         extends: true,
@@ -42,7 +42,7 @@ export default defineConfig({
           name: "client",
           include: ["tests/unit/**/*.test.tsx"],
           environment: "jsdom",
-          testTimeout: 20 * seconds,
+          testTimeout: 60 * seconds,
         },
       },
       {
@@ -54,7 +54,7 @@ export default defineConfig({
           testTimeout: 120 * seconds,
         },
       },
-      withDatabase("api", 30 * seconds, 0),
+      withDatabase("api", 60 * seconds, 0),
       withDatabase("db", 60 * seconds, 0),
       withDatabase("e2e", 180 * seconds, 1),
       // The test runner's --long asks for these; they take longer than anybody waits for by chance.
