@@ -75,15 +75,14 @@ function screwWords({ head, diameter, length }: Screw, unit: LengthUnit): string
 
 function hardwareWords(hardware: Hardware, unit: LengthUnit): string {
   const length = (mm: number) => formatLengthWithUnit(mm, unit);
-  const barrel = `barrel ${length(hardware.barrelLength)}`;
   switch (hardware.kind) {
     case "capStud":
-      return `${barrel}, cap ${length(hardware.capDiameter)} across, screw ${hardware.screw.name}`;
+      return `barrel ${length(hardware.barrelLength)}, cap ${length(hardware.capDiameter)} across, screw ${hardware.screw.name}`;
     case "throughScrew":
       return `loose spacer ${length(hardware.barrelLength)}, screw ${hardware.screw.name} through the panel`;
     case "blindStud":
-      return `hidden stud ${length(hardware.studLength)} long${hardware.barrelLength > 0 ? `, ${barrel}` : ""}`;
+      return `hidden stud ${length(hardware.studLength)} long${hardware.barrelLength > 0 ? `, spacer ${length(hardware.barrelLength)}` : ""}`;
     case "edgeGrip":
-      return `grips the edge, slot ${length(hardware.slotWidth)}, ${barrel}`;
+      return `grips the edge, slot ${length(hardware.slotWidth)}, ${length(hardware.barrelLength)} above the wood`;
   }
 }

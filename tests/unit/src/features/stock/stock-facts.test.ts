@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { StockItem } from "#shared/contracts/stock.ts";
+import type { Hardware } from "#shared/mockup/document.ts";
 import { stockFacts } from "@/features/stock/components/stock-facts.ts";
 
 const id = "00000000-0000-4000-8000-000000000501";
@@ -26,7 +27,7 @@ const acrylic: Extract<StockItem, { kind: "acrylic" }> = {
     { thicknessMm: 12.7, widthMm: 610, heightMm: 305, quantity: null },
   ],
 };
-const screw: StockItem = {
+const screw: Extract<StockItem, { kind: "screw" }> = {
   id,
   name: "No. 6 × 16, flat head",
   version: 1,
@@ -64,5 +65,22 @@ describe("stockFacts", () => {
       what: "flat head, 3.51 mm thick, 16 mm long",
       amount: "240 on hand",
     });
+  });
+
+  it("names the parts of a standoff as its form does: only a barrel is a barrel", () => {
+    const base = { stockId: id, name: "Standoff", finish: "#C3C1BA", barrelDiameter: 16 };
+    const floor = { floorThickness: 3, floorHole: 4, countersunk: true, screw: screw.screw };
+    const what = (hardware: Hardware) =>
+      stockFacts({ id, name: "Standoff", version: 1, retiredAt: null, kind: "hardware", hardware, quantity: 8 }, "mm")
+        .what;
+    expect(what({ kind: "blindStud", ...base, barrelLength: 10, studDiameter: 4, studLength: 22 })).toBe(
+      "hidden stud 22 mm long, spacer 10 mm",
+    );
+    expect(what({ kind: "blindStud", ...base, barrelLength: 0, studDiameter: 4, studLength: 22 })).toBe(
+      "hidden stud 22 mm long",
+    );
+    expect(
+      what({ kind: "edgeGrip", ...base, ...floor, barrelLength: 12, slotWidth: 5.5, gripDepth: 7, height: 22 }),
+    ).toBe("grips the edge, slot 5.5 mm, 12 mm above the wood");
   });
 });
