@@ -78,17 +78,15 @@ export function listToBuy({
 
 function sheetLines({ task, layout, bought }: SheetResult, usual: string, unit: LengthUnit): ToBuy[] {
   if (layout === null) return [];
-  const used = layout.sheets.filter(({ placements }) => placements.length > 0);
   const stock = new Map(task.request.stock.map((sheet) => [sheet.id, sheet]));
-  const lines = [...new Set(used.map(({ stockId }) => stockId))].map((stockId): ToBuy => {
-    const need = sheetsOf(used.filter((sheet) => sheet.stockId === stockId));
+  const lines = layout.needed.map(({ stockId, sheets: need }): ToBuy => {
     if (!task.sheetsAreCounted) return { what: `${task.title}, sheet ${usual}`, need, onHand: 0, buy: need };
     const sheet = stock.get(stockId);
     const box = sheet && boxOfPath(sheet.path);
     const size = box ? ` ${formatSize(box.width, box.height, unit)}` : "";
     return against(`${task.title}, sheet${size}`, need, sheet?.quantity ?? null);
   });
-  const more = bought ? sheetsOf(bought.sheets.filter(({ placements }) => placements.length > 0)) : 0;
+  const more = bought?.needed.reduce((sum, { sheets }) => sum + sheets, 0) ?? 0;
   return more > 0 ? [...lines, { what: `${task.title}, sheet ${usual}`, need: more, onHand: 0, buy: more }] : lines;
 }
 
@@ -97,10 +95,6 @@ function boardLine({ board: { stock, thicknessMm, widthMm, heightMm, count } }: 
   const size = `${formatLengthWithUnit(thicknessMm, unit)}, ${formatSize(widthMm, heightMm, unit)}`;
   return { what: `Backer: ${stock}, ${size}`, need: count, onHand: null, buy: null };
 }
-
-/** Several parts of one sheet are one sheet. */
-const sheetsOf = (sheets: SheetLayout["sheets"]): number =>
-  new Set(sheets.map(({ stockId, sheet }) => `${stockId} ${sheet}`)).size;
 
 const against = (what: string, need: number, onHand: number | null): ToBuy => ({
   what,

@@ -39,6 +39,7 @@ const text = (words: string | RegExp) => (page: Page) => page.getByText(words).f
 const group = (title: string) => (page: Page) => page.getByRole("heading", { level: 2, name: new RegExp(`^${title}`) });
 const picture = (name: string | RegExp) => (page: Page) => page.getByRole("img", { name }).first();
 const drawn = (page: Page) => page.getByRole("region", { name: "Dry fit" }).getByText(/\d+ fine/);
+const planned = (page: Page) => page.locator('[aria-busy="false"]:has(#to-buy)');
 const press = (name: string | RegExp) => (page: Page) => page.getByRole("button", { name }).first().click();
 const openDialog = (name: string | RegExp) => async (page: Page) => {
   await press(name)(page);
@@ -237,8 +238,8 @@ export const screens: readonly Screen[] = [
     who: "owner",
     name: "prices-wanted",
     at: "prices",
-    path: () => `${paths.prices(shop, [{ group: "finishes", id: "coat Bees wax", name: "Bees wax" }])}#prices-finishes`,
-    ready: (page) => page.getByLabel("Bees wax, Price for a m²", { exact: true }),
+    path: () => `${paths.prices(shop, [{ group: "finishes", id: "coat Hard wax", name: "Hard wax" }])}#prices-finishes`,
+    ready: (page) => page.getByLabel("Hard wax, Price for a m²", { exact: true }),
     open: async (page) => {
       await press("Add the strip")(page);
       await page.getByText("Over 0, up to 500 mm.").first().waitFor();
@@ -383,6 +384,42 @@ export const screens: readonly Screen[] = [
     at: "mockup",
     path: () => paths.mockup(shop, jobOf("142")),
     ready: picture(/elevation/i),
+  },
+  {
+    who: "maker",
+    name: "cut-plan",
+    at: "cutPlan",
+    path: () => paths.cutPlan(shop, jobOf("142")),
+    ready: planned,
+  },
+  {
+    who: "maker",
+    name: "cut-plan-approved",
+    at: "cutPlan",
+    path: () => paths.cutPlan(shop, jobOf("135")),
+    ready: planned,
+    only: "desk",
+  },
+  {
+    who: "maker",
+    name: "cut-plan-empty",
+    at: "cutPlan",
+    path: () => paths.cutPlan(shop, jobOf("139")),
+    ready: text("Nothing to cut yet"),
+  },
+  {
+    who: "rep",
+    name: "cut-plan-look-only",
+    at: "cutPlan",
+    path: () => paths.cutPlan(shop, jobOf("139")),
+    ready: text("You may look at the figures. Owners and makers set them."),
+  },
+  {
+    who: "client",
+    name: "cut-plan-not-theirs",
+    at: "cutPlan",
+    path: () => paths.cutPlan(shop, jobOf("142")),
+    ready: heading(/not/i),
   },
   { who: "rep", name: "job", at: "job", path: () => paths.job(shop, jobOf("137")), ready: text("Revision B:") },
   {

@@ -18,7 +18,7 @@ export function BarsPart({ work: { task, state }, unit }: { readonly work: BarWo
   const ended = outcome?.ok ? endedWords(outcome.ended) : null;
   const barMm = task.job.stock[0]?.lengthMm ?? 0;
   return (
-    <div ref={ref} className="mt-6">
+    <div ref={ref} className="mt-6 break-inside-avoid">
       <h3 className="font-serif text-lg font-bold text-ink break-after-avoid">{task.title}</h3>
       {plan && (
         <p className="text-base text-graphite">

@@ -4,6 +4,7 @@ import { countParts } from "#shared/cut-plan/counts.ts";
 import { type BarResult, listToBuy, type SheetResult } from "#shared/cut-plan/to-buy.ts";
 import { Notice } from "@/components/ui/notice.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
+import { cx } from "@/lib/cx.ts";
 import type { PlanInput } from "../engine/plan-messages.ts";
 import type { PlanPort } from "../engine/planner.ts";
 import { useCutPlan } from "../engine/use-cut-plan.ts";
@@ -82,9 +83,11 @@ export function CutPlanSheet({ input, items, openPort }: CutPlanSheetProps) {
       <PlanProgress plan={plan} />
       {sheets.length > 0 && (
         <Part id="sheets" title={titleOf("sheets")}>
-          {sheets.map((work) => (
-            <SheetsPart key={work.task.id} work={work} unit={unit} />
-          ))}
+          <div className={cx("grid grid-cols-1 items-start gap-x-8", sheets.length > 1 && "lg:grid-cols-2")}>
+            {sheets.map((work) => (
+              <SheetsPart key={work.task.id} work={work} unit={unit} />
+            ))}
+          </div>
         </Part>
       )}
       {bars.length > 0 && (

@@ -18,7 +18,7 @@ export function SheetsPart({ work: { task, state }, unit }: { readonly work: She
   const ended = outcome?.ok ? endedWords(outcome.ended) : null;
   const copies = task.request.pieces.reduce((sum, { quantity }) => sum + quantity, 0);
   return (
-    <div ref={ref} className="mt-6">
+    <div ref={ref} className="mt-6 min-w-0 break-inside-avoid">
       <h3 className="font-serif text-lg font-bold text-ink break-after-avoid">{task.title}</h3>
       <p className="text-base text-graphite">
         {counted(copies, "piece")}

@@ -53,7 +53,7 @@ export function laySheets(
       return quantity === undefined ? [] : [{ ...piece, quantity }];
     });
     const more = nestSheets({ ...request, pieces, stock: [usualSheet], effort }, { shouldStop: isTimeUp }, kernel);
-    return more.ok ? more.value : null;
+    return more.ok && more.value.sheets.some(({ placements }) => placements.length > 0) ? more.value : null;
   }
 }
 

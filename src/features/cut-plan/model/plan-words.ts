@@ -47,9 +47,7 @@ export function endedWords(ended: Ended): string | null {
   }
 }
 
-const sheetsUsed = ({ sheets }: SheetLayout): number =>
-  new Set(sheets.filter(({ placements }) => placements.length > 0).map(({ stockId, sheet }) => `${stockId} ${sheet}`))
-    .size;
+const sheetsUsed = ({ needed }: SheetLayout): number => needed.reduce((sum, { sheets }) => sum + sheets, 0);
 
 /** Sheets that something is cut from, those to be bought included. */
 export const sheetCount = ({ layout, bought }: SheetsLaid): number =>

@@ -104,19 +104,9 @@ describe("what is laid ready for a build", () => {
 
 describe("what to buy", () => {
   const counts = countParts(signs(), "mm");
-  const sheet = (sheet: number, part = 1) => ({
-    stockId: "stock-1",
-    sheet,
-    part,
-    parts: 2,
-    region: [],
-    placements: [{ pieceId: "panel", copy: 1, x: 0, y: 0, turn: 0, mirrored: false }],
-    use: 0.5,
-    usedBox: null,
-    offcuts: [],
-  });
-  const layoutOf = (sheets: SheetLayout["sheets"]): SheetLayout => ({
-    sheets,
+  const layoutOf = (sheets: number): SheetLayout => ({
+    sheets: [],
+    needed: [{ stockId: "stock-1", sheets }],
     unplaced: [],
     use: 0.5,
     consumedMm2: 1,
@@ -150,8 +140,8 @@ describe("what to buy", () => {
     ]);
   });
 
-  it("counts two parts of a sheet as one sheet, and buys where the stock list counts none", () => {
-    const sheets = [{ task, layout: layoutOf([sheet(1, 1), sheet(1, 2), sheet(2)]), bought: null }];
+  it("buys where the stock list counts none", () => {
+    const sheets = [{ task, layout: layoutOf(2), bought: null }];
     const [line] = listToBuy({ ...given, sheets, counted: nobodyCounted });
     expect(line).toEqual({ what: "Midnight, 3 mm, sheet 1220 × 610 mm", need: 2, onHand: 0, buy: 2 });
   });
@@ -168,7 +158,7 @@ describe("what to buy", () => {
       },
     ];
     const counted = { ...task, sheetsAreCounted: true, request: { ...task.request, stock } };
-    const sheets = [{ task: counted, layout: layoutOf([sheet(1), sheet(2)]), bought: layoutOf([sheet(1)]) }];
+    const sheets = [{ task: counted, layout: layoutOf(2), bought: layoutOf(1) }];
     expect(listToBuy({ ...given, sheets, counted: nobodyCounted }).slice(0, 2)).toEqual([
       { what: "Midnight, 3 mm, sheet 600 × 400 mm", need: 2, onHand: 2, buy: 0 },
       { what: "Midnight, 3 mm, sheet 1220 × 610 mm", need: 1, onHand: 0, buy: 1 },
