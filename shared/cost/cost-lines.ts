@@ -85,7 +85,7 @@ export function draftLines(
       const coats = { quantity, decimals: 4, unit: "m² of one coat", rate, rateUnit: "m² of one coat", waste: 0 };
       const work = timeLine("finishes", {
         id,
-        name: `${name}, laying it on`,
+        name: `${name}, the work of it`,
         perHour,
         minutes: quantity * minutesPerM2,
       });

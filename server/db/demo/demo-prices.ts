@@ -16,6 +16,8 @@ const hour = { hand: 4800, cutter: 6600, saw: 5400 } as const;
 const screwPrices: Readonly<Record<number, number>> = { 12: 410, 16: 460, 19: 490, 25: 560, 32: 640, 38: 720, 45: 810 };
 /** Out of stock, and not bought again yet. */
 const unpricedColour = "Rust";
+/** Woods that the demo keeps strips of, for slats. */
+const stripWoods = new Set(["Eastern white pine", "Black walnut", "Hard maple"]);
 const hangings: Readonly<Record<string, number>> = { cleat: 780, keyholes: 240, wire: 350, "screwed through": 160 };
 
 /** Fills the demo shop's price book for most of its stock. One colour has none yet, so that a visitor sees what that looks like. */
@@ -101,13 +103,15 @@ function woodPrices(stock: Stock): PriceBook["materials"] {
       const price = Math.round((centsPerMm[wood.hardness] * mm) / 50) * 50;
       return [{ ...board, unit: "m²" as const, price, waste: usualWaste.board }];
     }),
-    ...stock.woods.slice(0, 3).map(({ wood }) => ({
-      id: stripId(wood, section, stock),
-      name: stripName(wood.name, section, "mm"),
-      unit: "m" as const,
-      price: wood.hardness === "softwood" ? 180 : 340,
-      waste: usualWaste.strip,
-    })),
+    ...stock.woods
+      .filter(({ wood }) => stripWoods.has(wood.name))
+      .map(({ wood }) => ({
+        id: stripId(wood, section, stock),
+        name: stripName(wood.name, section, "mm"),
+        unit: "m" as const,
+        price: wood.hardness === "softwood" ? 180 : 340,
+        waste: usualWaste.strip,
+      })),
   ];
 }
 

@@ -23,7 +23,8 @@ export function quantityWords({ quantity, decimals, unit, waste }: CostLine): st
 
 /** "60.00 EUR a m²" */
 export function rateWords({ rate, rateUnit }: CostLine, currency: string): string {
-  return `${formatMoney(rate.amount, currency)} ${rateUnit === "each" ? "each" : `a ${rateUnit}`}`;
+  const unit = rateUnit === "each" ? "each" : rateUnit === "h" ? "an hour" : `a ${rateUnit}`;
+  return `${formatMoney(rate.amount, currency)} ${unit}`;
 }
 
 export const percentOf = (share: number): string => `${Number((share * 100).toPrecision(6))}\u00a0%`;

@@ -2,7 +2,11 @@ import type { CostEstimate, CostTotals } from "#shared/cost/estimate-cost.ts";
 import { formatMoney } from "#shared/cost/money.ts";
 import type { PriceBook } from "#shared/cost/price-book.ts";
 import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
+import { cx } from "@/lib/cx.ts";
 import { percentOf, quantityWords, rateWords } from "../model/cost-words.ts";
+
+/** In the hand these columns stand in small print under the line itself. */
+const whereWide = "hidden sm:table-cell";
 
 /** The estimate line by line for all signs, then markup, tax and total, of all and of one. */
 export function CostLines({
@@ -26,8 +30,8 @@ export function CostLines({
         <thead>
           <tr>
             <HeadCell>What</HeadCell>
-            <HeadCell className="text-right">{many ? `For ${signs} signs` : "How much"}</HeadCell>
-            <HeadCell className="text-right">Rate</HeadCell>
+            <HeadCell className={cx(whereWide, "text-right")}>{many ? `For ${signs} signs` : "How much"}</HeadCell>
+            <HeadCell className={cx(whereWide, "text-right")}>Rate</HeadCell>
             <HeadCell className="text-right">Amount</HeadCell>
             {many && <HeadCell className="text-right">A sign</HeadCell>}
           </tr>
@@ -35,9 +39,14 @@ export function CostLines({
         <tbody>
           {lines.map((line) => (
             <tr key={`${line.group} ${line.id} ${line.unit}`}>
-              <RowHead className="min-w-40 py-1.5 font-normal">{line.what}</RowHead>
-              <Cell className="py-1.5 text-right">{quantityWords(line)}</Cell>
-              <Cell className="py-1.5 text-right whitespace-nowrap text-graphite">{rateWords(line, currency)}</Cell>
+              <th scope="row" className="border-b border-rule px-3 py-1.5 align-top font-normal text-ink">
+                {line.what}
+                <span className="block text-fine text-graphite sm:hidden">
+                  {quantityWords(line)} at {rateWords(line, currency)}
+                </span>
+              </th>
+              <Cell className={cx(whereWide, "py-1.5 text-right")}>{quantityWords(line)}</Cell>
+              <Cell className={cx(whereWide, "py-1.5 text-right whitespace-nowrap")}>{rateWords(line, currency)}</Cell>
               <Cell className="py-1.5 text-right whitespace-nowrap">{money(line.amount)}</Cell>
               {many && <Cell className="py-1.5" />}
             </tr>
@@ -46,9 +55,8 @@ export function CostLines({
         <tfoot>
           {sums.map(([label, key]) => (
             <tr key={key}>
-              <RowHead className="py-1.5" colSpan={3}>
-                {label}
-              </RowHead>
+              <RowHead className="py-1.5">{label}</RowHead>
+              <Cell className={whereWide} colSpan={2} />
               <Cell className="py-1.5 text-right font-semibold whitespace-nowrap">{money(whole[key])}</Cell>
               {many && <Cell className="py-1.5 text-right font-semibold whitespace-nowrap">{money(perSign[key])}</Cell>}
             </tr>

@@ -11,6 +11,8 @@ import { PriceRowItem } from "./price-row-item.tsx";
 type PriceGroupSectionProps = {
   readonly group: PriceGroup;
   readonly rows: readonly PriceRow[];
+  /** Those of them that are looked for. */
+  readonly shown: readonly PriceRow[];
   readonly base: readonly PriceRow[];
   readonly currency: string;
   readonly unit: LengthUnit;
@@ -23,13 +25,13 @@ type PriceGroupSectionProps = {
 
 /** A heading of the price book with its rows. */
 export function PriceGroupSection(props: PriceGroupSectionProps) {
-  const { group, rows, base, currency, unit, faults, onWrite, onRemove, children } = props;
+  const { group, rows, shown, base, currency, unit, faults, onWrite, onRemove, children } = props;
   const fields = fieldsOf(group, unit);
   const priced = rows.filter((row) => isPriced(group, row, unit)).length;
   const before = new Map(base.map((row) => [row.id, row]));
   const { title, under } = groupWords[group];
   return (
-    <section aria-labelledby={groupAnchor(group)} className="mt-10">
+    <section aria-labelledby={groupAnchor(group)} className="mt-10 max-w-5xl">
       <div className="flex flex-wrap items-baseline justify-between gap-x-6">
         <h2 id={groupAnchor(group)} tabIndex={-1} className="scroll-mt-4 font-serif text-lg font-bold text-ink">
           {title}
@@ -41,6 +43,11 @@ export function PriceGroupSection(props: PriceGroupSectionProps) {
         )}
       </div>
       <p className="mt-1 max-w-prose text-sm text-graphite">{under}</p>
+      {shown.length < rows.length && (
+        <p className="mt-1 text-sm text-graphite">
+          {shown.length} of {rows.length} shown.
+        </p>
+      )}
       <div
         aria-hidden="true"
         className={cx("mt-2 hidden gap-x-4 border-b-2 border-ink pb-1 md:grid", columnsOf(fields.length))}
@@ -53,7 +60,7 @@ export function PriceGroupSection(props: PriceGroupSectionProps) {
         ))}
       </div>
       <ul className="border-t-2 border-ink md:border-t-0">
-        {rows.map((row) => {
+        {shown.map((row) => {
           const old = before.get(row.id)?.fields;
           return (
             <PriceRowItem

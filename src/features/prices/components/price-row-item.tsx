@@ -2,7 +2,7 @@ import { memo } from "react";
 import { Button } from "@/components/ui/button.tsx";
 import { cx } from "@/lib/cx.ts";
 import { type PriceFaults, type PriceRow, placeOf } from "../model/price-draft.ts";
-import type { PriceField, PriceGroup } from "../model/price-fields.ts";
+import { isAsked, type PriceField, type PriceGroup } from "../model/price-fields.ts";
 import { columnsOf } from "./price-columns.ts";
 import { PriceFieldCell } from "./price-field-cell.tsx";
 
@@ -27,7 +27,7 @@ export const PriceRowItem = memo(function PriceRowItem(props: PriceRowItemProps)
         columnsOf(fields.length),
       )}
     >
-      <div className="col-span-2 flex min-w-0 flex-wrap items-baseline gap-x-3 md:col-span-1 md:pt-3.5">
+      <div className="col-span-2 flex min-w-0 flex-wrap items-center gap-x-3 md:col-span-1 md:mt-1 md:min-h-11">
         <span className="min-w-0 text-base text-ink">{row.name}</span>
         {isUnsaved && <span className="text-sm font-semibold text-ochre">Not saved yet</span>}
         {!row.isStocked && (
@@ -42,17 +42,21 @@ export const PriceRowItem = memo(function PriceRowItem(props: PriceRowItemProps)
           </Button>
         )}
       </div>
-      {fields.map((field) => (
-        <PriceFieldCell
-          key={field.key}
-          field={field}
-          rowName={row.name}
-          currency={currency}
-          value={row.fields[field.key] ?? ""}
-          error={faults.get(placeOf(group, row.id, field.key))}
-          onChange={(text) => onWrite(group, row.id, field.key, text)}
-        />
-      ))}
+      {fields.map((field) =>
+        isAsked(group, row.id, field) ? (
+          <PriceFieldCell
+            key={field.key}
+            field={field}
+            rowName={row.name}
+            currency={currency}
+            value={row.fields[field.key] ?? ""}
+            error={faults.get(placeOf(group, row.id, field.key))}
+            onChange={(text) => onWrite(group, row.id, field.key, text)}
+          />
+        ) : (
+          <span key={field.key} className="hidden md:block" />
+        ),
+      )}
     </li>
   );
 });

@@ -1,11 +1,14 @@
+import { useState } from "react";
 import { Button } from "@/components/ui/button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
 import { counted } from "@/lib/format.ts";
+import { foundRows, type PriceSearch } from "../model/find-rows.ts";
 import { priceGroups } from "../model/price-fields.ts";
 import { AddFinish } from "./add-finish.tsx";
 import { AddStrip } from "./add-strip.tsx";
 import { NewerPrices } from "./newer-prices.tsx";
+import { PriceFinder } from "./price-finder.tsx";
 import { PriceGroupSection } from "./price-group-section.tsx";
 import { PriceIndex } from "./price-index.tsx";
 import { PriceTerms } from "./price-terms.tsx";
@@ -15,6 +18,7 @@ import { type PricesFormInput, usePricesForm } from "./use-prices-form.ts";
 export function PricesForm(props: PricesFormInput) {
   const { unit, stock } = props;
   const prices = usePricesForm(props);
+  const [search, setSearch] = useState<PriceSearch>({ text: "", unpricedOnly: false });
   const { draft, base, faults, changes, busy, newer } = prices;
   return (
     <form
@@ -25,12 +29,14 @@ export function PricesForm(props: PricesFormInput) {
     >
       <UnsavedGuard when={changes > 0 && !busy} what="The price book" />
       <PriceTerms terms={draft} faults={faults} onWrite={prices.onWriteTerm} />
+      <PriceFinder search={search} onSearch={setSearch} />
       <PriceIndex />
       {priceGroups.map((group) => (
         <PriceGroupSection
           key={group}
           group={group}
           rows={draft.rows[group]}
+          shown={foundRows(group, draft.rows[group], { base: base.rows[group], faults, search, unit })}
           base={base.rows[group]}
           currency={draft.currency}
           unit={unit}

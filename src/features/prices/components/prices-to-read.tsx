@@ -5,7 +5,7 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
 import { groupWords } from "../model/group-words.ts";
 import { draftOf, isPriced, type PriceRow } from "../model/price-draft.ts";
-import { fieldsOf, type PriceField, priceGroups, readField } from "../model/price-fields.ts";
+import { fieldsOf, isAsked, type PriceField, priceGroups, readField } from "../model/price-fields.ts";
 import { groupAnchor, PriceIndex } from "./price-index.tsx";
 
 type PricesToReadProps = { readonly book: PriceBook; readonly things: ThingsToPrice; readonly unit: LengthUnit };
@@ -48,7 +48,7 @@ export function PricesToRead({ book, things, unit }: PricesToReadProps) {
                       <RowHead>{row.name}</RowHead>
                       {fields.map((field) => (
                         <Cell key={field.key} className="text-right whitespace-nowrap">
-                          {shown(field, row, { currency: book.currency, unit })}
+                          {isAsked(group, row.id, field) ? shown(field, row, { currency: book.currency, unit }) : "–"}
                         </Cell>
                       ))}
                     </tr>

@@ -12,11 +12,15 @@ import {
   writtenField,
 } from "./price-fields.ts";
 
+type Entry = { readonly id: string; readonly name: string } & Readonly<Record<string, unknown>>;
+
 /** An entry of the price book as it is being written; without money in it it is no entry yet. */
 export type PriceRow = {
   readonly id: string;
   readonly name: string;
   readonly fields: Readonly<Record<string, string>>;
+  /** As the book has it; null while it has none. */
+  readonly entry: Entry | null;
   /** On the stock list or always there; else the shop added it, or the stock has it no more. */
   readonly isStocked: boolean;
 };
@@ -32,8 +36,6 @@ export type PriceDraft = {
 };
 /** Something that a price is asked for, by its group of the price book. */
 export type Wanted = { readonly group: string; readonly id: string; readonly name: string };
-
-type Entry = { readonly id: string; readonly name: string } & Readonly<Record<string, unknown>>;
 
 /** Groups of the book that stand under one heading each. */
 const headingOf: Readonly<Record<string, PriceGroup>> = {
@@ -97,7 +99,7 @@ function rowOf(
     field.key,
     writtenField(field, entry ? entry[field.key] : usual[field.key], writing),
   ]);
-  return { id: thing.id, name: thing.name, fields: Object.fromEntries(fields), isStocked };
+  return { id: thing.id, name: thing.name, fields: Object.fromEntries(fields), entry: entry ?? null, isStocked };
 }
 
 /** A tape is counted by its area and covers what it is put on. */
@@ -143,7 +145,7 @@ export function bookOfDraft(draft: PriceDraft, unit: LengthUnit): DraftOutcome {
       const entry: Record<string, unknown> = { id: row.id, name: row.name };
       for (const field of fieldsOf(group, unit)) {
         const place = placeOf(group, row.id, field.key);
-        const read = readField(field, row.fields[field.key] ?? "", writing);
+        const read = readField(field, row.fields[field.key] ?? "", { ...writing, stored: row.entry?.[field.key] });
         if (read.ok) entry[field.key] = read.value;
         else faults.set(place, read.words);
         places[`${list}.${entries.length}.${field.key}`] = place;

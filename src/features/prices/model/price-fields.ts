@@ -1,6 +1,6 @@
 import { parseMoney, writtenMoney } from "#shared/cost/parse-money.ts";
 import { adhesiveUnits } from "#shared/cost/price-book.ts";
-import { usualPaces, usualWaste } from "#shared/cost/works.ts";
+import { machineWorks, usualPaces, usualWaste } from "#shared/cost/works.ts";
 import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
 
 /** How prices are laid out on the page: the book's materials stand under three headings. */
@@ -113,6 +113,13 @@ export function fieldsOf(group: PriceGroup, unit: LengthUnit): readonly PriceFie
   }
 }
 
+/** Whether a row is asked for a field: a machine that never clears an area has no pace for it. */
+export function isAsked(group: PriceGroup, id: string, { kind }: PriceField): boolean {
+  const work = group === "machines" ? Object.values(machineWorks).find((one) => one.id === id) : undefined;
+  if (!work) return true;
+  return kind === "cut pace" ? work.cuts : kind === "pocket pace" ? work.pockets : true;
+}
+
 /** How many of what is stored make one of what is written. */
 function scaleOf({ kind }: PriceField, unit: LengthUnit): number {
   if (kind === "percent") return 0.01;
@@ -128,7 +135,9 @@ const tidy = (value: number): number => Number(value.toPrecision(10));
 export function writtenField(field: PriceField, stored: unknown, { currency, unit }: Writing): string {
   if (typeof stored === "string") return stored;
   if (typeof stored !== "number") return field.usual;
-  return field.kind === "money" ? writtenMoney(stored, currency) : String(tidy(stored / scaleOf(field, unit)));
+  if (field.kind === "money") return writtenMoney(stored, currency);
+  const value = stored / scaleOf(field, unit);
+  return String(field.kind === "cut pace" || field.kind === "pocket pace" ? Number(value.toPrecision(4)) : tidy(value));
 }
 
 export type FieldOutcome =
@@ -136,8 +145,18 @@ export type FieldOutcome =
   | { readonly ok: false; readonly words: string };
 
 /** What is written, as the price book stores it. */
-export function readField(field: PriceField, text: string, { currency, unit }: Writing): FieldOutcome {
+export function readField(
+  field: PriceField,
+  text: string,
+  {
+    currency,
+    unit,
+    stored,
+  }: Writing & { /** What stands in the book and is kept while nobody wrote over it. */ readonly stored?: unknown },
+): FieldOutcome {
   const written = text.trim();
+  const isKept = typeof stored === "number" || typeof stored === "string";
+  if (isKept && written === writtenField(field, stored, { currency, unit })) return { ok: true, value: stored };
   if (written === "") return { ok: false, words: "Fill this in." };
   if (field.kind === "choice") return { ok: true, value: written };
   if (field.kind === "money") return parseMoney(written, currency);

@@ -67,7 +67,7 @@ describe("three signs, worked out by hand", () => {
     // 0.36 m² · 2 coats · 3.80 = 2.736.
     { what: "Oil", quantity: 0.72, unit: "m² of one coat", amount: 274 },
     // 0.72 · 12 min at 45.00 an hour.
-    { what: "Oil, laying it on", quantity: 8.64, unit: "min", amount: 648 },
+    { what: "Oil, the work of it", quantity: 8.64, unit: "min", amount: 648 },
     // 42 · 6 min at 48.00.
     { what: "Bonding, a piece", quantity: 252, unit: "min", amount: 20_160 },
     // 78 · 2 min at 48.00.
