@@ -11,7 +11,7 @@ import type { PieceFigures } from "../stack/figures.ts";
 import type { Banded } from "../units/banded.ts";
 import type { RuleInput } from "./rule.ts";
 import { footHeightMm, pieceAt, type StandoffHold, type StandoffLayer } from "./standoff-layers.ts";
-import { layersWithFigures, pieceWords } from "./words.ts";
+import { layersWithFigures, pieceWordsWithin } from "./words.ts";
 
 /** Something outward of a panel's face: a piece, or the barrel of another panel that stands on it. */
 export type Thing = {
@@ -50,7 +50,7 @@ function thingsOn(piece: PieceFigures, outward: Outward): Thing[] {
     const over = pieces.filter(({ figures }) => figures.areaMm2 > 0 && boxesOverlap(figures.box, piece.box));
     const raised = layer.hold.kind === "standoff";
     const higher = over.filter(({ figures }) => isShorter(face, figures.top.nominal));
-    const things = higher.map(({ piece: one, figures }) => thingOf(pieceWords(layer, one), one, figures, raised));
+    const things = higher.map(({ piece: one, figures }) => thingOf(pieceWordsWithin(layer, one), one, figures, raised));
     const { hold } = layer;
     if (hold.kind !== "standoff") return things;
     return [...things, ...over.flatMap(({ figures }) => barrelsOn(face, layer.key, hold, figures))];
@@ -69,7 +69,7 @@ function barrelsOn(face: number, key: string, hold: StandoffHold, piece: PieceFi
   return hold.holes.map((hole) => ({
     id: hole.id,
     pieceId: null,
-    words: `A barrel of ${key}`,
+    words: `a barrel of ${key}`,
     region: flattenPath(circlePath(hole, radius)),
     box: { x: hole.x - radius, y: hole.y - radius, width: 2 * radius, height: 2 * radius },
     bottom: foot,

@@ -20,7 +20,7 @@ export function layersWithFigures(input: Pick<RuleInput, "document" | "figures">
   }));
 }
 
-/** A piece in a sentence: its name, or its layer's. */
+/** A piece at the head of a sentence: its name, or its layer's. */
 export function pieceWords(layer: Layer, piece: Piece): string {
   return piece.name ? `${piece.name} (${layer.key})` : `A piece of ${layer.key}, ${layer.name},`;
 }
@@ -34,6 +34,11 @@ export function namesWords(pieces: readonly Pick<Piece, "name">[]): string {
   const said = names.slice(0, mostNames);
   const more = pieces.length - said.length;
   return said.length === 0 || more === 0 ? said.join(", ") : `${said.join(", ")} and ${more} more`;
+}
+
+/** The same within a sentence, where no comma may follow. */
+export function pieceWordsWithin(layer: Layer, piece: Piece): string {
+  return piece.name ? pieceWords(layer, piece) : `a piece of ${layerWords(layer)}`;
 }
 
 /** Pieces of one layer at the head of a sentence: "Letter 1 (G)", "5 pieces of G, Lettering (Ring 1, Ring 2 and 3 more)". */

@@ -27,7 +27,7 @@ export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBar
   return (
     <div className="flex flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-1 sm:px-6">
       <h1
-        className="flex max-w-80 min-w-0 gap-1.5 font-sans text-sm text-ink min-[1600px]:max-w-2xl"
+        className="flex max-w-72 min-w-0 gap-1.5 font-sans text-sm text-ink min-[1600px]:max-w-2xl"
         title={`${client}, ${title}`}
       >
         <span className="shrink-0 font-semibold">Mockup of</span>

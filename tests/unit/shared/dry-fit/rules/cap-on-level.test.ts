@@ -46,6 +46,11 @@ describe("a cap of 15 mm", () => {
     );
   });
 
+  it("names a piece without a name by its layer, within the sentence", async () => {
+    const [finding] = await findingsOf(capOnLevel, over([plate("badge", 100, 60, [252, 200])]));
+    expect(finding?.text).toContain("does not clear a piece of C, Layer C: tightened");
+  });
+
   it("keeps to the shop's clearance", async () => {
     expect(await findingsOf(capOnLevel, over(beside(8)), { limits: { capClearanceMm: 0.6 } })).toHaveLength(1);
   });
@@ -96,7 +101,7 @@ describe("what is not bonded on the panel's face", () => {
     expect(await findingsOf(capOnLevel, raised(215.6))).toEqual([]);
     const [finding] = await findingsOf(capOnLevel, raised(210));
     expect(finding).toMatchObject({ holeId: "h", pieceIds: [] });
-    expect(finding?.text).toContain("does not clear A barrel of C");
+    expect(finding?.text).toContain("does not clear a barrel of C:");
   });
 });
 
