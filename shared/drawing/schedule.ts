@@ -51,8 +51,12 @@ export const hangingWords: Readonly<Record<MockupDocument["hanging"]["kind"], st
   none: "not chosen",
 };
 
+/** What a backer is made of: "Eastern white pine on Birch plywood". */
+export const backerStockWords = ({ stock, slats }: MockupDocument["backer"]): string =>
+  slats ? `${slats.stock.name} on ${stock.name}` : stock.name;
+
 /** Slats and frame in words, where the backer has them: "slats at 45°", "framed 18 × 24 in Black walnut". */
-function layingWords({ backer, frame }: MockupDocument, unit: LengthUnit): string[] {
+export function layingWords({ backer, frame }: Pick<MockupDocument, "backer" | "frame">, unit: LengthUnit): string[] {
   return [
     ...(backer.slats ? [`slats at ${Math.round(backer.slats.angle * 10) / 10}°`] : []),
     ...(frame
@@ -72,7 +76,7 @@ export function scheduleRows(
   const first: ScheduleRow = {
     key: "A",
     what: ["Backer", ...layingWords(document, unit), finishWords(backer.finish)].join(", "),
-    stock: backer.slats ? `${backer.slats.stock.name} on ${backer.stock.name}` : backer.stock.name,
+    stock: backerStockWords(backer),
     thickness: [backer.thickness, ...(backer.slats ? [backer.slats.thickness] : [])]
       .map((thickness) => formatLength(thickness, unit))
       .join(" + "),

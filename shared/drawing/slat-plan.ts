@@ -1,3 +1,4 @@
+import type { Frame } from "../frame/lay-out-frame.ts";
 import { regionCentroid } from "../geometry/area.ts";
 import { boxOfRegion } from "../geometry/box.ts";
 import type { Point, Region } from "../geometry/path.ts";
@@ -22,9 +23,13 @@ type View = { readonly box: NonNullable<ReturnType<typeof boxOfRegion>>; readonl
 const edgeMm = 1;
 const footMm = 7;
 
-/** The board with its slats in place, each under its number in laying order, the spine S. Empty when nothing is laid. */
-export function drawSlatPlan(paper: Paper): DisplayList | null {
-  const view = viewOf(paper);
+/**
+ * The board with its slats in place, each under its number in laying order, the spine S, and the frame round it where one is
+ * given. Empty when nothing is laid.
+ */
+export function drawSlatPlan(paper: Paper & { readonly frame?: Frame | null }): DisplayList | null {
+  const { frame = null } = paper;
+  const view = viewOf(paper, frame ? [frame.outer] : []);
   if (!view) return null;
   const { slats, spine } = paper.layout;
   const pieces = [
@@ -44,6 +49,10 @@ export function drawSlatPlan(paper: Paper): DisplayList | null {
       ];
     }),
     ...outline(paper, view),
+    ...(frame?.members ?? []).map((member): Item => {
+      const stroke = { colour: ink, widthMm: fineLineMm };
+      return { kind: "path", path: pathOfRegion(onPaper([member.outline], view)), fill: sheetWhite, stroke };
+    }),
   ]);
 }
 
@@ -77,8 +86,8 @@ export function drawBradMap(
   ]);
 }
 
-function viewOf({ layout, widthMm, heightMm }: Paper): View | null {
-  const box = boxOfRegion(layout.body);
+function viewOf({ layout, widthMm, heightMm }: Paper, round: Region = []): View | null {
+  const box = boxOfRegion([...layout.body, ...round]);
   if (!box || box.width === 0 || box.height === 0) return null;
   return { box, scale: Math.max(box.width / (widthMm - 2 * edgeMm), box.height / (heightMm - 2 * edgeMm - footMm)) };
 }

@@ -4,7 +4,14 @@ import type { MockupDocument } from "#shared/mockup/document.ts";
 import { leastBoardMm, longestMm } from "#shared/mockup/schema-parts.ts";
 import { boardPath } from "#shared/stack/board-outline.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
-import { type BoardDraft, measuresOf, outlineOfDraft } from "./board-draft.ts";
+import {
+  type FrameProblems,
+  frameProblems,
+  type Refusals,
+  type SlatsProblems,
+  slatsProblems,
+} from "./backer-problems.ts";
+import { type BoardDraft, boardOfDraft, frameInMeasures, measuresOf } from "./board-draft.ts";
 import { type CoatProblems, coatProblems } from "./coat-draft.ts";
 import { type Bounds, boundsProblem, isWithinBounds } from "./length-bounds.ts";
 
@@ -16,6 +23,8 @@ const bounds = {
 } as const satisfies Record<string, Bounds>;
 const distance: Bounds = { least: 100, most: 200_000 };
 
+const none: Refusals = { slats: null, frame: null };
+
 /** What stands in the way of taking a draft, by field; coats and fixings by their ids. */
 export type BoardProblems = {
   readonly fields: Partial<
@@ -23,14 +32,26 @@ export type BoardProblems = {
   >;
   readonly coats: ReadonlyMap<string, CoatProblems>;
   readonly fixings: ReadonlyMap<string, string>;
+  readonly slats: SlatsProblems;
+  readonly frame: FrameProblems;
 };
 
-export function boardProblems(draft: BoardDraft, document: MockupDocument, unit: LengthUnit): BoardProblems {
+export function boardProblems(
+  draft: BoardDraft,
+  document: MockupDocument,
+  unit: LengthUnit,
+  refusals: Refusals = none,
+): BoardProblems {
+  const board = boardOfDraft(draft, document);
+  const round = frameInMeasures(draft);
   const fields: { -readonly [key in keyof BoardProblems["fields"]]: string } = {};
   for (const name of ["width", "height", "radius", "gap"] as const) {
     if (name === "radius" && draft.outline !== "rounded") continue;
-    if (isWithinBounds(draft[name], bounds[name])) continue;
-    fields[name] = boundsProblem(draft[name], bounds[name], unit) ?? "Write a length.";
+    const { least, most } = bounds[name];
+    const added = name === "width" || name === "height" ? round : 0;
+    const held = { least: least + added, most };
+    if (isWithinBounds(draft[name], held)) continue;
+    fields[name] = boundsProblem(draft[name], held, unit) ?? "Write a length.";
   }
   if (draft.outline === "piece" && draft.pieceId === null) fields.pieceId = "Choose the piece.";
   const { quantity, carries } = draft;
@@ -49,17 +70,21 @@ export function boardProblems(draft: BoardDraft, document: MockupDocument, unit:
       }),
     ),
     fixings: fixingProblems(draft, document),
+    slats: slatsProblems(draft, board, { unit, refusal: refusals.slats }),
+    frame: frameProblems(draft, board, { unit, refusal: refusals.frame }),
   };
 }
 
-export const hasProblems = ({ fields, coats, fixings }: BoardProblems): boolean =>
-  Object.keys(fields).length > 0 || coats.size > 0 || fixings.size > 0;
+export const hasProblems = ({ fields, coats, fixings, slats, frame }: BoardProblems): boolean =>
+  [fields, slats, frame].some((group) => Object.keys(group).length > 0) || coats.size > 0 || fixings.size > 0;
 
 function fixingProblems(draft: BoardDraft, document: MockupDocument): ReadonlyMap<string, string> {
   const { width, height } = measuresOf(draft, document);
-  // The outline of a piece is not there yet: against its box, then.
-  const outline = draft.outline === "piece" ? ({ kind: "rectangle" } as const) : outlineOfDraft(draft, document);
-  const region = flattenPath(boardPath({ ...document.board, outline, width, height }));
+  // A piece's outline moves with the piece: against its box, then.
+  const board = boardOfDraft(draft, document);
+  const region = flattenPath(
+    boardPath(draft.outline === "piece" ? { ...board, outline: { kind: "rectangle" } } : board),
+  );
   return new Map(
     draft.fixings.flatMap(({ id, fromX, fromY }): [string, string][] => {
       const at = { x: width / 2 + fromX, y: height / 2 + fromY };

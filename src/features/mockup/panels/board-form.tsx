@@ -1,10 +1,11 @@
 import { type FormEvent, type ReactNode, type Ref, useEffect, useRef } from "react";
 import { Button } from "@/components/ui/button.tsx";
 import { useBoardDraft } from "../editor/use-board-draft.ts";
+import { BoardBacker } from "./board-backer.tsx";
+import { BoardFrame } from "./board-frame.tsx";
 import { BoardHanging } from "./board-hanging.tsx";
 import { BoardOutline } from "./board-outline.tsx";
 import { BoardShowing } from "./board-showing.tsx";
-import { BoardWood } from "./board-wood.tsx";
 import { CoatsEditor } from "./coats-editor.tsx";
 
 export type BoardPart = "finish";
@@ -17,7 +18,7 @@ type BoardFormProps = {
   readonly onTaken: () => void;
 };
 
-/** Outline, wood, finish and hanging of the board, and the light it is shown in. One step for all of it. */
+/** Outline, backer, frame, finish and hanging of the board, and the light it is shown in. One step for all of it. */
 export function BoardForm({ at, onChanged, onLeave, onTaken }: BoardFormProps) {
   const writing = useBoardDraft();
   const { draft, set, isChanged } = writing;
@@ -46,8 +47,11 @@ export function BoardForm({ at, onChanged, onLeave, onTaken }: BoardFormProps) {
       <Part title="Size and outline">
         <BoardOutline writing={writing} />
       </Part>
-      <Part title="Wood">
-        <BoardWood writing={writing} />
+      <Part title="Backer">
+        <BoardBacker writing={writing} />
+      </Part>
+      <Part title="Frame">
+        <BoardFrame writing={writing} />
       </Part>
       <Part title="Finish" heading={finish}>
         <CoatsEditor writing={writing} />

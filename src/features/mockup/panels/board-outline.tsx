@@ -7,6 +7,7 @@ import type { BoardWriting } from "../editor/use-board-draft.ts";
 import type { BoardDraft } from "../model/board-draft.ts";
 import { roundMm } from "../model/limits.ts";
 import { outlineChoices } from "../model/outline-of-piece.ts";
+import { BoardMeasures } from "./board-measures.tsx";
 
 const outlines: readonly { readonly kind: BoardDraft["outline"]; readonly text: string }[] = [
   { kind: "rectangle", text: "rectangle" },
@@ -55,6 +56,7 @@ export function BoardOutline({ writing }: { readonly writing: BoardWriting }) {
         {side("height", "Height")}
         {draft.outline === "rounded" && side("radius", "Radius of the corners")}
       </div>
+      {draft.isFramed && draft.outline === "rectangle" && <BoardMeasures writing={writing} />}
       {draft.outline === "piece" && (
         <div className="grid items-start gap-3 sm:grid-cols-2">
           <Select

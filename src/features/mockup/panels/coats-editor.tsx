@@ -4,10 +4,9 @@ import { hoursWords } from "#shared/dry-fit/words.ts";
 import type { Coat } from "#shared/mockup/document.ts";
 import { dryingHours } from "#shared/mockup/drying-hours.ts";
 import { finishWords } from "#shared/mockup/finish-words.ts";
-import { faceStock } from "#shared/stack/backer.ts";
-import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
 import type { BoardWriting } from "../editor/use-board-draft.ts";
+import { faceStockOfDraft } from "../model/backer-draft.ts";
 import { type CoatDraft, coatsOf, mostCoats, moveCoat, newCoat } from "../model/coat-draft.ts";
 import { Swatch, WordButton } from "./cell-controls.tsx";
 import { CoatItem } from "./coat-item.tsx";
@@ -22,14 +21,13 @@ const kinds: readonly { readonly kind: Coat["kind"]; readonly text: string }[] =
 
 /** The finish as its coats in the order they go on, and how the wood is estimated to look under them. */
 export function CoatsEditor({ writing }: { readonly writing: BoardWriting }) {
-  const { document } = useDesk();
   const { draft, set, problems, tried } = writing;
   const { finish } = draft;
   const list = useRef<HTMLOListElement>(null);
   const [said, setSaid] = useState("");
   const { focusOn, rest } = useFocusIn(list);
   const change = (next: readonly CoatDraft[]) => set({ finish: next });
-  const bare = faceStock({ ...document.backer, stock: draft.stock }).colour;
+  const bare = faceStockOfDraft(draft).colour;
   const coats = coatsOf(finish);
   const hours = dryingHours(coats);
 

@@ -7,7 +7,7 @@ import { counted } from "@/lib/format.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
 import type { BoardWriting } from "../editor/use-board-draft.ts";
-import { measuresOf, outlineOfDraft } from "../model/board-draft.ts";
+import { boardOfDraft, measuresOf } from "../model/board-draft.ts";
 import { mostFixings, spreadFixings } from "../model/fixings.ts";
 import { coordinateBounds } from "../model/limits.ts";
 import { CellLength, WordButton } from "./cell-controls.tsx";
@@ -28,7 +28,7 @@ export function FixingsTable({ writing }: { readonly writing: BoardWriting }) {
 
   function spread() {
     if (!isCount || !isBelow) return;
-    const board = { ...document.board, outline: outlineOfDraft(draft, document), width, height };
+    const board = boardOfDraft(draft, document);
     set({
       fixings: spreadFixings(board, { count, below }).map(({ x, y }) => ({
         id: newId(),

@@ -1,8 +1,8 @@
 import { faceColour } from "#shared/drawing/face-colour.ts";
-import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
+import { backerStockWords, layingWords, scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import { finishWords } from "#shared/mockup/finish-words.ts";
-import { faceStock } from "#shared/stack/backer.ts";
 import { Table } from "@/components/ui/table.tsx";
+import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { Swatch, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
@@ -49,7 +49,7 @@ export function SchedulePanel({
             <DeskCell>
               <span className="flex items-center gap-2">
                 <Swatch colour={faceColour(document.backer)} />
-                {faceStock(document.backer).name}
+                {backerStockWords(document.backer)}
               </span>
             </DeskCell>
             <DeskCell>{backer?.thickness ?? thickness}</DeskCell>
@@ -92,16 +92,17 @@ export function SchedulePanel({
 
 /** The backer's finish is what tells it apart in the schedule; its coats are written in a dialog. */
 function BackerName({ onFinish }: { readonly onFinish: () => void }) {
-  const { document } = useDesk();
+  const { document, unit } = useDesk();
   const words = finishWords(document.backer.finish);
+  const laying = layingWords(document, unit);
   return (
     <WordButton
       title={words}
       aria-label={`Finish of the backer: ${words}`}
-      className="-ml-0.5 line-clamp-2 whitespace-normal"
+      className={cx("-ml-0.5 whitespace-normal", laying.length === 0 && "line-clamp-2")}
       onClick={onFinish}
     >
-      Backer, {words}
+      {["Backer", ...laying, words].join(", ")}
     </WordButton>
   );
 }

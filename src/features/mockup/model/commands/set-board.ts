@@ -1,9 +1,18 @@
 import { boxCentre } from "#shared/geometry/box.ts";
 import type { Point } from "#shared/geometry/path.ts";
-import type { Board, Coat, MockupDocument, Wood } from "#shared/mockup/document.ts";
+import {
+  type Board,
+  type Coat,
+  type FrameOfSign,
+  frameSchema,
+  type MockupDocument,
+  type Slats,
+  slatsSchema,
+  type Wood,
+} from "#shared/mockup/document.ts";
 import { leastBoardMm, longestMm } from "#shared/mockup/schema-parts.ts";
 import { mostCoats } from "../coat-draft.ts";
-import { coordinateOf, lengthOf } from "../limits.ts";
+import { coordinateOf, lengthOf, roundMm } from "../limits.ts";
 import { boardOutline, outlineOfPiece } from "../outline-of-piece.ts";
 import { withFields } from "../same.ts";
 import { movePieces, removePieces } from "./pieces.ts";
@@ -16,9 +25,13 @@ export type BoardFields = {
   readonly outlineOf?: { readonly pieceId: string; readonly remove: boolean };
   readonly width?: number;
   readonly height?: number;
+  readonly measures?: Board["measures"];
   readonly stock?: Wood;
   readonly thickness?: number;
   readonly grainTurn?: number;
+  /** null takes them off. */
+  readonly slats?: Slats | null;
+  readonly frame?: FrameOfSign | null;
   readonly finish?: readonly Coat[];
   readonly hanging?: Partial<Hanging>;
   readonly quantity?: number;
@@ -28,7 +41,7 @@ export type BoardFields = {
 };
 
 /**
- * Sets what is given of the board, its backer, hanging and showing. A value that a document can't hold is left as it was.
+ * Sets what is given of the board, its backer, frame, hanging and showing. A value that a document can't hold is left as it was.
  * A board of another size grows or shrinks about its middle, with everything on it and the wall's fixings keeping their
  * place from there; one that takes the outline of a piece comes to lie about that piece.
  */
@@ -53,19 +66,22 @@ export function setBoard(document: MockupDocument, fields: BoardFields): MockupD
 const middleOf = ({ width, height }: Board): Point => ({ x: width / 2, y: height / 2 });
 
 function withBoardFields(document: MockupDocument, fields: BoardFields): MockupDocument {
-  const { board, backer, hanging, presentation, quantity } = document;
+  const { board, backer, frame, hanging, presentation, quantity } = document;
   return withFields(document, {
     board: withFields(board, {
       outline: fields.outline && isOutline(fields.outline) ? fields.outline : board.outline,
       width: lengthOf(fields.width ?? board.width, longestMm, leastBoardMm) ?? board.width,
       height: lengthOf(fields.height ?? board.height, longestMm, leastBoardMm) ?? board.height,
+      measures: fields.measures ?? board.measures,
     }),
     backer: withFields(backer, {
       stock: fields.stock ?? backer.stock,
       thickness: lengthOf(fields.thickness ?? backer.thickness, 200) ?? backer.thickness,
       grainTurn: isWithin(fields.grainTurn ?? -1, 0, 180) ? (fields.grainTurn ?? backer.grainTurn) : backer.grainTurn,
+      slats: fields.slats === undefined ? backer.slats : slatsToKeep(fields.slats, backer.slats),
       finish: fields.finish ? fields.finish.slice(0, mostCoats) : backer.finish,
     }),
+    frame: fields.frame === undefined ? frame : frameToKeep(fields.frame, frame),
     hanging: withHangingFields(hanging, fields.hanging ?? {}),
     quantity:
       fields.quantity !== undefined && Number.isInteger(fields.quantity) && isWithin(fields.quantity, 1, 1000)
@@ -78,6 +94,28 @@ function withBoardFields(document: MockupDocument, fields: BoardFields): MockupD
         lengthOf(fields.viewingDistance ?? presentation.viewingDistance, 200_000) ?? presentation.viewingDistance,
     }),
   });
+}
+
+function slatsToKeep(slats: Slats | null, before: Slats | null): Slats | null {
+  if (slats === null) return null;
+  const { start } = slats;
+  const rounded: Slats = {
+    ...slats,
+    thickness: roundMm(slats.thickness),
+    slatWidth: roundMm(slats.slatWidth),
+    gap: roundMm(slats.gap),
+    spineWidth: roundMm(slats.spineWidth),
+    spineOffset: roundMm(slats.spineOffset),
+    start: start.kind === "height" ? { kind: "height", height: roundMm(start.height) } : start,
+    overhang: roundMm(slats.overhang),
+  };
+  return slatsSchema.safeParse(rounded).success ? rounded : before;
+}
+
+function frameToKeep(frame: FrameOfSign | null, before: FrameOfSign | null): FrameOfSign | null {
+  if (frame === null) return null;
+  const rounded: FrameOfSign = { ...frame, width: roundMm(frame.width), depth: roundMm(frame.depth) };
+  return frameSchema.safeParse(rounded).success ? rounded : before;
 }
 
 function withHangingFields(hanging: Hanging, { kind, gap, pose, carriesKg, points }: Partial<Hanging>): Hanging {
