@@ -10,7 +10,7 @@ export const move = z.enum(["ours", "client", "nobody"]);
 const signSide = z
   .number()
   .finite()
-  .min(leastBoardMm, `A sign is at least ${leastBoardMm} mm wide and high.`)
+  .min(leastBoardMm, `A sign is at least ${leastBoardMm} mm (13/16 inch) wide and high.`)
   .max(10_000, "At most 10 m (32 feet).");
 const howMany = "Write a whole number from 1 to 1000.";
 

@@ -111,7 +111,7 @@ export function BriefForm({
         />
       </div>
       <fieldset>
-        <legend className="text-sm text-graphite">What asks for more care</legend>
+        <legend className="text-sm font-semibold">What asks for more care</legend>
         <Checkbox
           label="People walk past it within reach"
           hint="How far it stands off the wall is then checked."

@@ -57,6 +57,12 @@ async function openForm(side: "shop" | "client" = "shop") {
   return router;
 }
 
+const checkboxOf = (label: string): HTMLInputElement | null => {
+  const found = [...document.querySelectorAll("label")].find(({ textContent }) => textContent === label);
+  const box = found && document.getElementById(found.htmlFor);
+  return box instanceof HTMLInputElement ? box : null;
+};
+
 describe("the brief's form", () => {
   it("sends only what was changed, lengths in mm", async () => {
     const saved: Job = { ...job, brief: { ...job.brief, heightMm: 450 } };
@@ -82,11 +88,19 @@ describe("the brief's form", () => {
 
   it("sends the approvers chosen from the client's contacts", async () => {
     await openForm();
-    const box = await until(() => document.querySelector<HTMLInputElement>("input[type=checkbox]"));
+    const box = await until(() => checkboxOf(contact.name));
     await press(box);
     await press(button("Save the brief"));
     await until(() => sent().length > 0);
     expect(sent()).toEqual([{ approverIds: [contact.id] }]);
+  });
+
+  it("sends what asks for more care", async () => {
+    await openForm();
+    await press(await until(() => checkboxOf("It hangs over where people stand or walk")));
+    await press(button("Save the brief"));
+    await until(() => sent().length > 0);
+    expect(sent()).toEqual([{ brief: { overhead: true } }]);
   });
 
   it("holds back what is no length", async () => {
@@ -113,7 +127,7 @@ describe("the brief's form", () => {
     { label: "How many", text: "0", words: "Write a whole number from 1 to 1000." },
     { label: "How many", text: "", words: "Write a whole number from 1 to 1000." },
     { label: "How many", text: "1.5", words: "Write a whole number from 1 to 1000." },
-    { label: "Width", text: "-5", words: "Write a length over 0." },
+    { label: "Width", text: "-5", words: "A sign is at least 20 mm (13/16 inch) wide and high." },
     { label: "Height", text: "99999", words: "At most 10 m (32 feet)." },
     { label: "Read from how far", text: "0", words: "Write a distance over 0." },
   ])('says what $label takes when "$text" is written', async ({ label, text, words }) => {
