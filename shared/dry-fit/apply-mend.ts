@@ -1,5 +1,5 @@
 import type { Hold, Hole, Layer, MockupDocument } from "../mockup/document.ts";
-import { nextFreeKeys } from "../mockup/layer-key.ts";
+import { splitLayer } from "../mockup/split-layer.ts";
 import type { Mend, MendStep } from "./mend.ts";
 
 /**
@@ -74,7 +74,7 @@ function applyStep(document: MockupDocument, step: MendStep): MockupDocument {
     case "frame depth":
       return document.frame ? { ...document, frame: { ...document.frame, depth: step.depth } } : document;
     case "split layer":
-      return splitLayer(document, step.layerKey, step.pieceIds);
+      return splitLayer(document, step);
   }
 }
 
@@ -144,16 +144,4 @@ function splitPiece(
       reads: index === 0 ? piece.reads : "",
     })),
   );
-}
-
-function splitLayer(document: MockupDocument, key: string, pieceIds: readonly string[]): MockupDocument {
-  const layer = document.layers.find((one) => one.key === key);
-  const [newKey] = nextFreeKeys(document, 1);
-  const chosen = new Set(pieceIds);
-  const taken = layer?.pieces.filter(({ id }) => chosen.has(id)) ?? [];
-  if (!layer || !newKey || taken.length === 0 || taken.length === layer.pieces.length) return document;
-  const left = { ...layer, pieces: layer.pieces.filter(({ id }) => !chosen.has(id)) };
-  const hold: Hold = layer.hold.kind === "standoff" ? { ...layer.hold, holes: [] } : layer.hold;
-  const split: Layer = { ...layer, key: newKey, name: `${layer.name}, split`.slice(0, 120), hold, pieces: taken };
-  return { ...document, layers: document.layers.flatMap((one) => (one === layer ? [left, split] : [one])) };
 }

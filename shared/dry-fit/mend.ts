@@ -1,4 +1,5 @@
 import type { Acrylic, Adhesive, Hardware, Layer, Piece, Screw, Slats } from "../mockup/document.ts";
+import type { LayerSplit } from "../mockup/split-layer.ts";
 
 /** One change of the document. Coordinates and lengths mm. */
 export type MendStep =
@@ -28,8 +29,8 @@ export type MendStep =
   | { readonly kind: "split piece"; readonly pieceId: string; readonly parts: readonly Pick<Piece, "id" | "path">[] }
   | { readonly kind: "slat start"; readonly start: Slats["start"] }
   | { readonly kind: "frame depth"; readonly depth: number }
-  /** Takes the pieces out of their layer into a new one of the same stock and hold, next to it. */
-  | { readonly kind: "split layer"; readonly layerKey: string; readonly pieceIds: readonly string[] };
+  /** Takes the pieces out of their layer into a new one of the same stock next to it, bonded when an adhesive is given. */
+  | ({ readonly kind: "split layer" } & LayerSplit);
 
 /** What a press does about a finding: one entry in the history, whatever its steps. */
 export type Mend = { readonly label: string; readonly steps: readonly MendStep[] };

@@ -86,9 +86,9 @@ function textOf(
   const stud = "studLength" in hardware ? `The ${mm(hardware.studLength)} stud of ${hardware.name}` : "";
   switch (kind) {
     case "stud too short":
-      return `${stud} has ${value} left in the barrel when the sheet of ${layer} is at its thickest; ${limit} is the least. The cap pulls out.`;
+      return `${stud} at ${layer} has ${value} left in the barrel when all that lies under its cap is at its thickest; ${limit} is the least. The cap pulls out.`;
     case "stud too long":
-      return `${stud} reaches ${value} into the barrel when the sheet of ${layer} is at its thinnest, but the bore has ${limit} before the screw's head. The cap never tightens.`;
+      return `${stud} at ${layer} reaches ${value} into the barrel when all that lies under its cap is at its thinnest, but the bore has ${limit} before the screw's head. The cap never tightens.`;
     case "stud not in the wood":
       return `${stud} comes ${value} into the wood under ${layer}; ${limit} is the least that glue holds it by.`;
     case "slot too narrow":

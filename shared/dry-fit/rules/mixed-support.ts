@@ -1,5 +1,6 @@
 import { lengthsEqual } from "../../geometry/tolerance.ts";
 import type { Layer } from "../../mockup/document.ts";
+import { mostLayers } from "../../mockup/split-layer.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
 import { areasTouch } from "../../stack/touching.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
@@ -27,9 +28,6 @@ function check(input: RuleInput): Finding[] {
     ];
   });
 }
-
-/** As many layers as a document takes. */
-const mostLayers = 60;
 
 /** A layer for each of the smaller groups; what else stands in the way is the maker's to decide. */
 function mends(finding: Finding, input: RuleInput): Mend[] {

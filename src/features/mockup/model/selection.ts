@@ -38,6 +38,16 @@ export function chooseAlso(document: MockupDocument, selection: Selection, key: 
   return { layerKey: had ? selection.layerKey : key, pieceIds, holeId: null };
 }
 
+/** Adds a piece to the chosen ones of its layer, or takes it out; when another layer or the whole of its own is chosen, it alone is. */
+export function choosePieceAlso(document: MockupDocument, selection: Selection, pieceId: string): Selection {
+  const layer = layerOfPiece(document, pieceId);
+  if (!layer) return selection;
+  const had = layer.pieces.filter(({ id }) => selection.pieceIds.includes(id)).map(({ id }) => id);
+  if (selection.layerKey !== layer.key || had.length === layer.pieces.length) return choosePiece(document, pieceId);
+  const pieceIds = had.includes(pieceId) ? had.filter((id) => id !== pieceId) : [...had, pieceId];
+  return { layerKey: layer.key, pieceIds, holeId: null };
+}
+
 /** What of the choice is still there after the document changed; the same selection when all of it is. */
 export function keepChosen(document: MockupDocument, selection: Selection): Selection {
   const ids = new Set(document.layers.flatMap((layer) => layer.pieces.map(({ id }) => id)));

@@ -9,7 +9,7 @@ const keys: readonly [string, string][] = [
   ["+ and −", "look closer and farther"],
   ["0", "the whole board"],
   ["Space and drag", "looks around, as a drag on the bare wall does"],
-  ["Shift and press", "adds another layer to what is chosen"],
+  ["Shift and press", "adds another layer to what is chosen; in the list of pieces another piece"],
   ["Press twice", "picks one piece out of its layer"],
   ["Alt while dragging", "catches on nothing"],
 ];

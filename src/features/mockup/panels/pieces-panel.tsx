@@ -1,11 +1,14 @@
+import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
+import { mostLayers, splitLayer } from "#shared/mockup/split-layer.ts";
 import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
+import { counted } from "@/lib/format.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { centrePieces, placePiece, removePieces } from "../model/commands/pieces.ts";
 import { setReads } from "../model/commands/set-reads.ts";
 import { coordinateBounds, scaleBounds } from "../model/limits.ts";
 import { nameOfPiece } from "../model/piece-name.ts";
-import { chooseLayer, choosePiece } from "../model/selection.ts";
+import { chooseLayer, choosePiece, choosePieceAlso } from "../model/selection.ts";
 import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 import { HolesTable } from "./holes-table.tsx";
@@ -17,7 +20,16 @@ export function PiecesPanel() {
   const layer = document.layers.find(({ key }) => key === selection.layerKey);
   if (!layer) return null;
   const { key, name, pieces } = layer;
-  const all = pieces.length > 0 && pieces.every(({ id }) => selection.pieceIds.includes(id));
+  const chosen = pieces.filter(({ id }) => selection.pieceIds.includes(id)).map(({ id }) => id);
+  const all = pieces.length > 0 && chosen.length === pieces.length;
+  const split = () => {
+    const [newKey = key] = nextFreeKeys(document, 1);
+    edit({
+      label: "Make a layer of pieces",
+      change: (before) => splitLayer(before, { layerKey: key, pieceIds: chosen }),
+      choose: (after) => chooseLayer(after, newKey),
+    });
+  };
 
   return (
     <section aria-label={`Pieces of ${key}`} className="space-y-4 border-t border-rule px-4 pt-3 pb-6 sm:px-6">
@@ -27,9 +39,13 @@ export function PiecesPanel() {
         </h2>
         <p className="text-fine text-graphite">
           x and y are the middle of a piece, from the board’s upper left corner.
+          {pieces.length > 1 && " Shift and press chooses several."}
         </p>
         {!all && pieces.length > 0 && (
           <WordButton onClick={() => choose(chooseLayer(document, key))}>Choose all of {key}</WordButton>
+        )}
+        {!all && chosen.length > 0 && document.layers.length < mostLayers && (
+          <WordButton onClick={split}>Make a layer of {counted(chosen.length, "piece")}</WordButton>
         )}
       </div>
       {pieces.length > 1 && <WordsOfLayer layer={layer} />}
@@ -59,7 +75,11 @@ export function PiecesPanel() {
                   <DeskRowHead>
                     <WordButton
                       aria-pressed={selection.pieceIds.includes(piece.id)}
-                      onClick={() => choose(choosePiece(document, piece.id))}
+                      onClick={({ shiftKey }) =>
+                        choose(
+                          shiftKey ? choosePieceAlso(document, selection, piece.id) : choosePiece(document, piece.id),
+                        )
+                      }
                     >
                       {title}
                     </WordButton>

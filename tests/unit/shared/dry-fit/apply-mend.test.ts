@@ -119,7 +119,7 @@ it("a layer is split into two neighbours of the same stock and hold, under a fre
   expect(after.layers.map(({ key, name, pieces }) => [key, name, pieces.length])).toEqual([
     ["B", "Layer B", 1],
     ["C", "Layer C", 1],
-    ["E", "Layer C, split", 1],
+    ["E", "Layer C 2", 1],
     ["D", "Layer D", 1],
   ]);
   expect(documentSchema.safeParse(after).success).toBe(true);

@@ -12,7 +12,8 @@ import {
   plate,
   standoffHold,
 } from "../../../../support/build-sign.ts";
-import { findingsOf } from "../../../../support/dry-fit.ts";
+import { dryFitOf, findingsOf } from "../../../../support/dry-fit.ts";
+import { triedMends } from "../../../../support/mend-findings.ts";
 
 const panel = (hardware: Partial<CapStud>, thickness = 5, offset?: number) =>
   buildSign([
@@ -84,6 +85,14 @@ describe("a piece without a standoff", () => {
     const findings = await findingsOf(grip, sign);
     expect(findings).toMatchObject([{ severity: "stop", pieceIds: ["a", "b"], value: 2 }]);
     expect(findings[0]?.text).toContain("2 pieces of B, Layer B have no standoff: nothing holds them.");
+    const { labels, mended } = await triedMends(grip, sign);
+    expect(labels).toEqual([["Make them a layer, bonded with Thick cyanoacrylate"]]);
+    expect(mended[0]?.layers.map(({ pieces, hold }) => [pieces.length, hold.kind])).toEqual([
+      [1, "standoff"],
+      [2, "bond"],
+    ]);
+    expect(await findingsOf(grip, mended[0] ?? sign)).toEqual([]);
+    expect((await dryFitOf(mended[0] ?? sign)).filter(({ severity }) => severity === "stop")).toEqual([]);
   });
 
   it("is found before any hole is set, without a word on the grip", async () => {

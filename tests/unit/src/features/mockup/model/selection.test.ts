@@ -6,6 +6,7 @@ import {
   chooseHole,
   chooseLayer,
   choosePiece,
+  choosePieceAlso,
   keepChosen,
   nothingChosen,
 } from "@/features/mockup/model/selection.ts";
@@ -29,6 +30,22 @@ const document = addPlate(disc, {
   stock: brass,
   thickness: 3,
   hold: { kind: "bond", adhesive: cement },
+});
+
+describe("choosePieceAlso", () => {
+  const [layer] = disc.layers;
+  const piece = layer?.pieces[0];
+  if (!layer || !piece) throw new Error("A disc was added.");
+  const three = { ...disc, layers: [{ ...layer, pieces: ["a", "b", "c"].map((id) => ({ ...piece, id })) }] };
+  const chosen = (...pieceIds: string[]) => ({ layerKey: "B", pieceIds, holeId: null });
+
+  it("adds a piece, takes it out again, and starts anew from the whole layer or another one", () => {
+    expect(choosePieceAlso(three, chosen("a"), "c")).toEqual(chosen("a", "c"));
+    expect(choosePieceAlso(three, chosen("a", "c"), "a")).toEqual(chosen("c"));
+    expect(choosePieceAlso(three, chosen("a", "b", "c"), "b")).toEqual(chosen("b"));
+    expect(choosePieceAlso(three, { ...chosen("a"), layerKey: "D" }, "b")).toEqual(chosen("b"));
+    expect(choosePieceAlso(three, nothingChosen, "gone")).toBe(nothingChosen);
+  });
 });
 
 describe("selection", () => {
