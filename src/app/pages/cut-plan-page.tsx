@@ -84,7 +84,8 @@ function CutPlan({ job }: { readonly job: Job }) {
         </>
       }
       actions={
-        input && (
+        from.data &&
+        !isEmpty(from.data) && (
           <Button className="print:hidden" onClick={() => window.print()}>
             Print
           </Button>
@@ -99,7 +100,7 @@ function CutPlan({ job }: { readonly job: Job }) {
           {isEmpty(from.data) ? (
             <EmptyState
               title="Nothing to cut yet"
-              action={<LinkButton to={paths.mockup(slug, job.id)}>Open the mockup</LinkButton>}
+              action={<LinkButton to={paths.mockup(slug, job.id)}>To the mockup</LinkButton>}
             >
               The mockup has no pieces, no slats and no frame. Bring artwork in first; what is saved there is planned
               here.

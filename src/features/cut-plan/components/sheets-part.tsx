@@ -22,7 +22,7 @@ export function SheetsPart({ work: { task, state }, unit }: { readonly work: She
       <h3 className="font-serif text-lg font-bold text-ink break-after-avoid">{task.title}</h3>
       <p className="text-base text-graphite">
         {counted(copies, "piece")}
-        {laid && `, ${Math.round(laid.layout.use * 100)} % of the sheet that is cut into is used`}
+        {laid && `, ${Math.round(laid.layout.use * 100)} % of the sheet up to the last piece is used`}
         {task.sheetsAreCounted ? ", on sheets in stock." : ", on sheets as usually bought: the stock list counts none."}
       </p>
       {ended && <p className="text-base text-graphite">{ended}</p>}
