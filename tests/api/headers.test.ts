@@ -14,6 +14,8 @@ beforeAll(async () => {
   await mkdir(join(clientDir, "assets"));
   await writeFile(join(clientDir, "index.html"), "<!doctype html><title>The one page</title>");
   await writeFile(join(clientDir, "assets", "main-4f2a.js"), "export {};");
+  for (const name of ["plan.worker-4f2a.js", "plan.workers-4f2a.js"])
+    await writeFile(join(clientDir, "assets", name), "export {};");
   app = await startTestApp({ env: { CLIENT_DIR: clientDir } });
 });
 afterAll(async () => {
@@ -47,6 +49,14 @@ describe("every answer", () => {
       expect(headers.has("strict-transport-security")).toBe(false);
     },
   );
+
+  it("lets the worker that plans cuts, and nothing that is only named like it, load the geometry kernel", async () => {
+    const worker = (await headersOf("/assets/plan.worker-4f2a.js")).get("content-security-policy");
+    expect(worker).toContain("default-src 'none'");
+    expect(worker).toContain("'unsafe-eval'");
+    const other = (await headersOf("/assets/plan.workers-4f2a.js")).get("content-security-policy");
+    expect(other).not.toContain("'unsafe-eval'");
+  });
 
   it("over https asks for https from then on and marks the cookie secure", async () => {
     const secure = await startTestApp({ env: { PUBLIC_URL: "https://signs.example" } });

@@ -10,7 +10,9 @@ import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
 import * as prices from "#shared/contracts/prices.ts";
+import * as revisionDocuments from "#shared/contracts/revision-documents.ts";
 import * as revisions from "#shared/contracts/revisions.ts";
+import * as saws from "#shared/contracts/saws.ts";
 import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
@@ -42,7 +44,9 @@ const modules = [
   outgoingMail,
   portfolio,
   prices,
+  revisionDocuments,
   revisions,
+  saws,
   setAsides,
   shop,
   stock,
