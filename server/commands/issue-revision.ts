@@ -3,7 +3,7 @@ import { letterToIssue } from "#shared/lifecycle/revision-row.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { newId } from "../db/new-id.ts";
 import { freezeDrawing } from "../drawing/draw.ts";
-import type { Frozen } from "../drawing/drawing-worker.ts";
+import type { FreezeInput, Frozen } from "../drawing/drawing-worker.ts";
 import { AppError, notAllowed, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { enqueue } from "../jobs/queue.ts";
@@ -80,7 +80,7 @@ async function freeze(
   if (document.layers.every(({ pieces }) => pieces.length === 0))
     throw wrongState("The mockup has no pieces yet. Bring in artwork first.");
   const { limits, context: dryFit } = await dryFitInput(context, { shop, job, document });
-  const frozen = await freezeDrawing({
+  const input: FreezeInput = {
     titleBlock: {
       owner: shop.name,
       client: client.name,
@@ -101,7 +101,8 @@ async function freeze(
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
     fontHashes: fontHashes(),
-  });
+  };
+  const frozen = await freezeDrawing(input, { shopId: shop.id });
   const { stops } = frozen;
   if (stops.length > 0) {
     throw new AppError("dry_fit_stops", {

@@ -39,7 +39,7 @@ export async function setAsideFinding(
   });
   const shop = await Shop.findByPk(job.shopId, { transaction, rejectOnEmpty: true });
   const binding = bindingKey(asked);
-  const found = await checkDrawing(await dryFitInput(context, { shop, job, document }));
+  const found = await checkDrawing(await dryFitInput(context, { shop, job, document }), { shopId: shop.id });
   const finding = found.find((candidate) => bindingKey(candidate) === binding);
   if (!finding)
     throw wrongState("The dry fit of the saved mockup does not find this any more. Look at what it finds now.");

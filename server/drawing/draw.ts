@@ -6,9 +6,9 @@ import type { CheckInput, DrawingAnswer, DrawingQuestion, FreezeInput, Frozen } 
 
 /**
  * A large sign takes seconds to compute and to draw; in a thread of its own it keeps nobody else waiting, and it can be ended.
- * Somebody waits for a freeze with the job's row locked, so few may wait and none for long.
+ * Somebody waits for a freeze with the job's row locked, so few may wait and none for long, and no shop fills the line alone.
  */
-export const drawingLimits = { freezeMs: 30_000, freezesWaiting: 3, proofMs: 120_000 } as const;
+export const drawingLimits = { freezeMs: 30_000, freezesWaiting: 3, freezesOfAShop: 2, proofMs: 120_000 } as const;
 
 const program = { bundle: "drawing-worker.mjs", source: "../drawing/drawing-worker.ts", memoryMb: 1024 } as const;
 // WebAssembly memory never shrinks, so a worker is replaced after this many drawings.
@@ -16,18 +16,29 @@ const questionsEach = 50;
 const freezer: WorkerInTurn<DrawingQuestion, DrawingAnswer> = workerInTurn(program, { questionsEach });
 const painter: WorkerInTurn<DrawingQuestion, DrawingAnswer> = workerInTurn(program, { questionsEach });
 
+/** `shopId` is the shop that asks. */
+type AskOptions = { readonly timeMs?: number; readonly shopId?: string };
+
+/** How many of a shop wait for the freezer. */
+const inLine = new Map<string, number>();
+function leaveLine(shopId: string): void {
+  const left = (inLine.get(shopId) ?? 0) - 1;
+  if (left > 0) inLine.set(shopId, left);
+  else inLine.delete(shopId);
+}
+
 /**
  * What a revision freezes. Throws too_large when that takes too long, wrong_state for a piece out of all reach, and too_many_requests
  * while others are being worked out.
  */
-export async function freezeDrawing(input: FreezeInput, options: { timeMs?: number } = {}): Promise<Frozen> {
+export async function freezeDrawing(input: FreezeInput, options: AskOptions = {}): Promise<Frozen> {
   const answer = await askFreezer({ what: "freeze", input }, options);
   if (answer.what !== "freeze") throw new Error(`Asked to freeze, the drawing worker answered ${answer.what}.`);
   return answer.frozen;
 }
 
 /** What the dry fit finds. Throws as freezeDrawing does: it waits in the same line. */
-export async function checkDrawing(input: CheckInput, options: { timeMs?: number } = {}): Promise<readonly Finding[]> {
+export async function checkDrawing(input: CheckInput, options: AskOptions = {}): Promise<readonly Finding[]> {
   const answer = await askFreezer({ what: "check", input }, options);
   if (answer.what !== "check") throw new Error(`Asked for a dry fit, the drawing worker answered ${answer.what}.`);
   return answer.findings;
@@ -35,14 +46,16 @@ export async function checkDrawing(input: CheckInput, options: { timeMs?: number
 
 async function askFreezer(
   question: DrawingQuestion,
-  { timeMs = drawingLimits.freezeMs }: { timeMs?: number },
+  { timeMs = drawingLimits.freezeMs, shopId = "" }: AskOptions,
 ): Promise<DrawingAnswer> {
-  if (freezer.waiting() >= drawingLimits.freezesWaiting) {
+  const ofShop = shopId === "" ? 0 : (inLine.get(shopId) ?? 0);
+  if (freezer.waiting() >= drawingLimits.freezesWaiting || ofShop >= drawingLimits.freezesOfAShop) {
     throw new AppError("too_many_requests", {
       detail: "Other mockups are being worked out right now. Try again in a minute; nothing is lost.",
     });
   }
-  const told = await freezer.ask(question, { timeMs });
+  inLine.set(shopId, ofShop + 1);
+  const told = await freezer.ask(question, { timeMs }).finally(() => leaveLine(shopId));
   if (told.kind === "late") {
     throw new AppError("too_large", {
       detail:

@@ -5,6 +5,7 @@ import type { z } from "zod";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import { Shop } from "../models/shop.ts";
 import { AppError, invalid, notFound } from "./app-error.ts";
+import { asOneChange } from "./change.ts";
 import type { Context, ReadContext, Services } from "./context.ts";
 import { FileAnswer } from "./file-answer.ts";
 import { actorAt, readSession } from "./session.ts";
@@ -47,7 +48,7 @@ export function write<E extends Endpoint>(
   options: Options = {},
 ): void {
   register(routes, endpoint, options, (context, input) =>
-    routes.services.sequelize.transaction((transaction) => handle({ ...context, transaction }, input as Parsed<E>)),
+    asOneChange(context, (transaction) => handle({ ...context, transaction }, input as Parsed<E>)),
   );
 }
 
@@ -75,9 +76,7 @@ export function upload<E extends Endpoint>(
     await allow(context, params);
     const file = await receiveFile(request, response, { dir: routes.services.storage.quarantineDir, maxBytes });
     try {
-      const answer = await routes.services.sequelize.transaction((transaction) =>
-        handle({ ...context, transaction }, { params, file }),
-      );
+      const answer = await asOneChange(context, (transaction) => handle({ ...context, transaction }, { params, file }));
       await send(response, endpoint, answer, routes.services.env.NODE_ENV);
     } finally {
       await rm(file.path, { force: true });

@@ -101,6 +101,14 @@ describe("freezing in a thread of its own", () => {
     expect(new Set(texts).size).toBe(3);
     expect((await freezeDrawing(inputOf(96))).text).toContain('"p1"');
   });
+
+  it("lets two of one shop wait, so that another shop still finds a place", async () => {
+    const asked = [93, 94].map((width) => freezeDrawing(inputOf(width), { shopId: "a" }));
+    await expect(freezeDrawing(inputOf(95), { shopId: "a" })).rejects.toMatchObject({ code: "too_many_requests" });
+    expect((await freezeDrawing(inputOf(96), { shopId: "b" })).text).toContain('"p1"');
+    await Promise.all(asked);
+    expect((await freezeDrawing(inputOf(95), { shopId: "a" })).text).toContain('"p1"');
+  });
 });
 
 describe("drawing a proof in a thread of its own", () => {
