@@ -13,7 +13,7 @@ export type SweepOptions = { readonly light: Light; readonly level: number };
 export type Frame = { readonly along: Point; readonly across: Point; readonly box: Box; readonly cell: number };
 
 /** A point of the board in the light's axes. */
-export const inFrame = ({ along, across }: Frame, { x, y }: Point): Point => ({
+export const inFrame = ({ along, across }: Pick<Frame, "along" | "across">, { x, y }: Point): Point => ({
   x: x * along.x + y * along.y,
   y: x * across.x + y * across.y,
 });

@@ -29,6 +29,8 @@ const alphaStep = 3;
 const finestMm = 25.4 / 72;
 const coarsestMm = 25.4 / 50;
 const mostCells = 1_500_000;
+/** Of the mask in the light's axes, which holds the blur's margin too: a soft light far before the board makes that many times the picture. */
+const mostMaskCells = 12_000_000;
 
 /** The size of a cell in mm: half the least blur, between 72 and 50 to the inch, coarser when the picture would be too large. */
 function cellMm(box: Box, leastSigma: number): number {
@@ -70,18 +72,16 @@ function levelMask(options: ShadowOptions): { frame: Frame; mask: Mask; reach: B
   });
   const reach = boxUnion(touched.filter((box) => box !== null && box.width > 0 && box.height > 0));
   if (!reach) return null;
-  const cell = cellMm(reach, Math.min(...sigmas.map(({ across }) => across)));
   const axes = { along: fall, across: { x: -fall.y, y: fall.x } };
   const corners = [0, 1, 2, 3].map((corner) =>
-    inFrame(
-      { ...axes, box: reach, cell },
-      {
-        x: reach.x + (corner % 2) * reach.width,
-        y: reach.y + (corner < 2 ? 0 : 1) * reach.height,
-      },
-    ),
+    inFrame(axes, {
+      x: reach.x + (corner % 2) * reach.width,
+      y: reach.y + (corner < 2 ? 0 : 1) * reach.height,
+    }),
   );
   const turned = boxOfPoints(corners) ?? reach;
+  const coarse = Math.sqrt(((turned.width + 6 * most) * (turned.height + 6 * most)) / mostMaskCells);
+  const cell = Math.max(coarse, cellMm(reach, Math.min(...sigmas.map(({ across }) => across))));
   const margin = 3 * most + 2 * cell;
   const box = {
     x: turned.x - margin,

@@ -164,3 +164,19 @@ describe("shadowItem", () => {
     expect(edgeOf(profile(plane, "x", 100), 58, 64).middle).toBeCloseTo(60, 0.7);
   });
 });
+
+describe("a shadow of no sign that is ever built", () => {
+  it.each([
+    { what: "a small board a metre behind a wall, by a lamp as large", width: 20, bottom: 1000, size: 1 },
+    { what: "a board as long as a house and as narrow as a finger", width: 10_000, bottom: 30, size: 0.01 },
+  ])("is drawn coarsely, since its mask has twelve million cells at most: on $what", ({ width, bottom, size }) => {
+    const casters: Caster[] = [{ region: square(-20_000, -20_000, 40_000), bottom, top: bottom + 3 }];
+    const light = { azimuth: 45, elevation: 10, angularSize: size };
+    const plane = shadowPlane({ light, level: 18, receivers: [{ x: 0, y: 0, width, height: 20 }], casters });
+    if (!plane) throw new Error("No shadow was thrown.");
+    // In the light's axes the board takes (width + height) / √2 each way, and the blur three sigma on both sides.
+    const sigma = penumbraMm(bottom - 15, light).along / Math.sqrt(12);
+    const side = (width + 20) / Math.SQRT2 + 6 * sigma;
+    expect(plane.box.width / plane.width).toBeCloseTo(side / Math.sqrt(12e6), 5);
+  });
+});
