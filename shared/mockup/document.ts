@@ -1,6 +1,17 @@
 import { z } from "zod";
 import { type capStudSchema, hardwareSchema } from "./hardware-schemas.ts";
-import { colour, coordinate, id, leastBoardMm, length, longestMm, name, pathSchema, point } from "./schema-parts.ts";
+import {
+  colour,
+  coordinate,
+  id,
+  leastBoardMm,
+  length,
+  line,
+  longestMm,
+  name,
+  pathSchema,
+  point,
+} from "./schema-parts.ts";
 import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema } from "./stock-schemas.ts";
 
 /**
@@ -53,7 +64,7 @@ export const holdSchema = z.discriminatedUnion("kind", [
 
 export const pieceSchema = z.strictObject({
   id,
-  name: z.string().trim().max(120),
+  name: line,
   source: z.discriminatedUnion("kind", [
     z.strictObject({ kind: z.literal("artwork"), artworkId: z.uuid(), index: z.int().min(0), colour }),
     z.strictObject({ kind: z.literal("plate") }),
@@ -62,7 +73,7 @@ export const pieceSchema = z.strictObject({
   path: pathSchema,
   placement: placementSchema,
   /** What it reads as, a letter or a word; empty for what is no lettering. */
-  reads: z.string().trim().max(120),
+  reads: line,
 });
 
 export const locateSchema = z.enum(["pocket", "scored line", "template", "hole pattern", "none"]);

@@ -8,8 +8,20 @@ export const leastBoardMm = 20;
 
 export const length = z.number().finite().positive().max(longestMm);
 export const coordinate = z.number().finite().min(-longestMm).max(longestMm);
-export const id = z.string().min(1).max(64);
-export const name = z.string().trim().min(1).max(120);
+/** Controls and halves of surrogate pairs: nothing draws them, and the database takes them in no record. */
+const unwritable = /[\p{Cc}\p{Cs}]/u;
+export const id = z
+  .string()
+  .min(1)
+  .max(64)
+  .refine((text) => !unwritable.test(text), "An id has no control characters.");
+/** One line of text that may be empty. Of what is pasted into it, what can't be written becomes spaces. */
+export const line = z
+  .string()
+  .overwrite((text) => text.replace(/[\p{Cc}\p{Cs}]+/gu, " "))
+  .trim()
+  .max(120);
+export const name = line.min(1);
 export const colour = z.string().regex(/^#[0-9A-F]{6}$/, "A colour is # and six hexadecimal digits in capitals.");
 export const stockId = z.uuid().nullable();
 

@@ -113,6 +113,17 @@ describe("setting a finding aside", () => {
     expect(made.finding).toEqual(given.body.finding);
   });
 
+  it("keeps words that were pasted with what no record can hold", async () => {
+    const own = await buildJob(world);
+    const sign = hanging(0);
+    const layers = sign.layers.map((layer) => ({ ...layer, name: "Outer\u0000ring \ud800" }));
+    const mockupVersion = await save(own, { ...sign, layers });
+    const finding = await offFinding(sign);
+    const body = { mockupVersion, finding, reason: "The left edge stands on a shelf" };
+    const made = await own.visitors.maker.get(setAsideFinding, { params: of(own), body });
+    expect(made.finding.text).toContain("Outer ring");
+  });
+
   it("is refused when the mockup was saved again since, with the newer one", async () => {
     const { own, given } = await hangingJob();
     await save(own, hanging(300));
