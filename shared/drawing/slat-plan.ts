@@ -1,6 +1,7 @@
 import type { Frame } from "../frame/lay-out-frame.ts";
 import { regionCentroid } from "../geometry/area.ts";
 import { boxOfRegion } from "../geometry/box.ts";
+import { regionContains } from "../geometry/contains.ts";
 import type { Point, Region } from "../geometry/path.ts";
 import { pathOfRegion } from "../geometry/path-of-region.ts";
 import { circlePath } from "../geometry/shapes.ts";
@@ -25,10 +26,12 @@ const footMm = 7;
 
 /**
  * The board with its slats in place, each under its number in laying order, the spine S, and the frame round it where one is
- * given. Empty when nothing is laid.
+ * given. Empty when nothing is laid. A picture to look at bears only the numbers that fit in their slats.
  */
-export function drawSlatPlan(paper: Paper & { readonly frame?: Frame | null }): DisplayList | null {
-  const { frame = null } = paper;
+export function drawSlatPlan(
+  paper: Paper & { readonly frame?: Frame | null; readonly numbers?: "every" | "fitting" },
+): DisplayList | null {
+  const { frame = null, numbers = "every" } = paper;
   const view = viewOf(paper, frame ? [frame.outer] : []);
   if (!view) return null;
   const { slats, spine } = paper.layout;
@@ -45,7 +48,7 @@ export function drawSlatPlan(paper: Paper & { readonly frame?: Frame | null }): 
       const stroke = { colour: ink, widthMm: fineLineMm };
       return [
         { kind: "path", id, path: pathOfRegion(drawn), fill: linen, stroke } as const,
-        ...numberIn(drawn, text, turn),
+        ...numberIn(drawn, text, { turn, mustFit: numbers === "fitting" }),
       ];
     }),
     ...outline(paper, view),
@@ -119,16 +122,35 @@ function outline({ layout }: Paper, view: View): Item[] {
 }
 
 /** Level in the roomiest place of the slat; where it is too narrow for that, along it about its middle. */
-function numberIn(region: Region, text: string, turn: number): Item[] {
+function numberIn(region: Region, text: string, { turn, mustFit }: { turn: number; mustFit: boolean }): Item[] {
   const font = "sans-semibold";
   const capMm = smallTextMm * capHeightShare;
-  const place = labelRoom(region, textWidthMm(text, font, smallTextMm) + 0.4, capMm + 0.4);
+  const widthMm = textWidthMm(text, font, smallTextMm);
+  const place = labelRoom(region, widthMm + 0.4, capMm + 0.4);
   if (place) return [textItem(text, { x: place.x, y: place.y + capMm / 2 }, { font, align: "middle" })];
   const middle = regionCentroid(region);
   if (!middle) return [];
   const angle = (turn * Math.PI) / 180;
+  if (mustFit && !holdsLabel(region, middle, { widthMm, capMm, angle })) return [];
   const at = { x: middle.x - (Math.sin(angle) * capMm) / 2, y: middle.y + (Math.cos(angle) * capMm) / 2 };
   return [{ kind: "text", text, at, sizeMm: smallTextMm, font, colour: ink, align: "middle", turn }];
+}
+
+/** Whether a line of text about that point, turned by radians, lies within a region. */
+function holdsLabel(
+  region: Region,
+  { x, y }: Point,
+  { widthMm, capMm, angle }: { widthMm: number; capMm: number; angle: number },
+): boolean {
+  const [along, across] = [widthMm / 2, capMm / 2];
+  return [-1, 1].every((side) =>
+    [-1, 0, 1].every((end) =>
+      regionContains(region, {
+        x: x + end * along * Math.cos(angle) - side * across * Math.sin(angle),
+        y: y + end * along * Math.sin(angle) + side * across * Math.cos(angle),
+      }),
+    ),
+  );
 }
 
 /** A turn in degrees that lettering is read at from below or from the right. */

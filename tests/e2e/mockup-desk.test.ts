@@ -1,8 +1,14 @@
+import { mkdir } from "node:fs/promises";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
+import AxeBuilder from "@axe-core/playwright";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it, vi } from "vitest";
+import { changeJob, openJob } from "#shared/contracts/jobs.ts";
 import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { launchBrowser } from "../support/browser.ts";
+import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
 import { entrance } from "../support/drivers/entrance.ts";
 import { mockup } from "../support/drivers/mockup.ts";
 import { buildMember } from "../support/factories/member.ts";
@@ -12,7 +18,10 @@ import { type Seat, takeSeat } from "../support/seat.ts";
 import { patienceMs } from "../support/served-app.ts";
 import { signWithFigures } from "../unit/src/features/mockup/sign-with-figures.ts";
 
-/** What hands do at the mockup's desk: dragging on the canvas, two people at one mockup, a lost connection. */
+/**
+ * What hands do at the mockup's desk: dragging on the canvas, laying slats, two people at one mockup, a lost connection. With
+ * SCREENS=1 the slats are kept as pictures.
+ */
 
 let app: TestApp;
 let browser: Browser;
@@ -135,6 +144,88 @@ describe("the board", () => {
     await page.getByRole("button", { name: "Finish of the backer: bare" }).waitFor();
     expect(await desk.undo().isDisabled()).toBe(true);
     await vi.waitFor(async () => expect((await onServer()).document.backer.finish).toEqual([]), patienceMs);
+  });
+});
+
+/** No grave finding of axe in the board's dialog; with SCREENS=1 a picture of the page. */
+async function lookAt(page: Page, name: string) {
+  const dialog = '[role="dialog"]';
+  if ((await page.locator(dialog).count()) > 0) {
+    const { violations } = await new AxeBuilder({ page }).include(dialog).analyze();
+    const grave = violations.filter(({ impact }) => impact === "serious" || impact === "critical");
+    expect(grave.map(({ id, nodes }) => `${id}: ${nodes[0]?.html}`)).toEqual([]);
+  }
+  if (!process.env.SCREENS) return;
+  const folder = join(tmpdir(), "standproud-screens");
+  await mkdir(folder, { recursive: true });
+  await page.screenshot({ path: join(folder, `slats-${name}.png`) });
+}
+
+describe("slats and a frame", () => {
+  it("are written in the board's dialog, lie on the desk without a stop, and are issued", async () => {
+    const { params, job, visitors } = world;
+    const { client, dueOn } = job;
+    const { id: jobId } = await visitors.owner.get(openJob, {
+      params,
+      body: { clientId: client.id, title: "Chevron sign", dueOn: dueOn ?? "2031-05-06" },
+    });
+    const brief = { widthMm: 600, heightMm: 400, place: "inside" as const, viewingDistanceMm: 4000, words: "" };
+    const body = { brief, approverIds: [world.approver.contact.id] };
+    await visitors.owner.get(changeJob, { params: { ...params, jobId }, body });
+    const document = buildSign([buildLayer("B", [plate("bar", 220, 90, [300, 200])], { name: "Bar" })]);
+    await visitors.owner.get(saveMockup, { params: { ...params, jobId }, body: { version: 0, document } });
+    const kept = async () => (await visitors.owner.get(getMockup, { params: { ...params, jobId } })).document;
+
+    const { page, open } = owner;
+    await open(`/shop/${params.shop}/jobs/${jobId}/mockup`);
+    const desk = mockup(page);
+    const isFitted = page.locator('section[aria-label="Dry fit"][aria-busy="false"]');
+    await isFitted.waitFor();
+    await page.getByRole("button", { name: "Change the board" }).click();
+    const dialog = page.getByRole("dialog", { name: "Board" });
+    const choose = (label: string, option: string) =>
+      dialog.getByLabel(label, { exact: true }).selectOption({ label: option });
+    const write = (label: string, text: string) => dialog.getByLabel(label, { exact: true }).fill(text);
+    await choose("Backer is", "slats on a substrate");
+    await dialog.getByText("numbered as they are laid").waitFor();
+    await lookAt(page, "1-first");
+    await choose("Wood of the slats", "Ponderosa pine");
+    await write("Width of a slat", "900");
+    await dialog.getByText("A slat of 900 mm is wider than the board: choose 400 mm at most.").waitFor();
+    await lookAt(page, "2-refused");
+    await write("Width of a slat", "38");
+    await choose("Frame is", "of wood");
+    await choose("Wood of the frame", "Black walnut");
+    // 12 + 9 less 0.3 of sanding.
+    await holds(dialog.getByLabel("Depth of the frame", { exact: true }), "20.7");
+    await dialog.getByText("Body 564 × 364 mm, overall 600 × 400 mm.").waitFor();
+    await dialog.getByRole("button", { name: "Take the best start" }).press("Enter");
+    await dialog.getByRole("button", { name: "This is the best start" }).waitFor();
+    await lookAt(page, "3-framed");
+    await dialog.getByRole("button", { name: "Change the board" }).click();
+    await dialog.waitFor({ state: "detached" });
+
+    const row = page.getByRole("region", { name: "Schedule" }).getByRole("row", { name: /^A / });
+    await row.getByText("Ponderosa pine on Eastern white pine").waitFor();
+    await row.getByText("slats at 45°, framed 18 × 20.7 in Black walnut").waitFor();
+    await vi.waitFor(async () => {
+      const { backer, board, frame } = await kept();
+      expect(backer).toMatchObject({ thickness: 12, slats: { thickness: 9, angle: 45, start: { kind: "height" } } });
+      expect(board).toMatchObject({ width: 564, height: 364, measures: "overall" });
+      expect(frame).toMatchObject({ width: 18, depth: 20.7, mitred: true });
+    }, patienceMs);
+    await isFitted.waitFor();
+    await vi.waitFor(async () => expect(await desk.findings("Stop").count()).toBe(0), patienceMs);
+    await lookAt(page, "4-desk");
+    await desk.undo().click();
+    await row.getByText("Eastern white pine", { exact: true }).waitFor();
+    expect(await desk.undo().isDisabled()).toBe(true);
+    await desk.redo().click();
+    await row.getByText("Ponderosa pine on Eastern white pine").waitFor();
+
+    await desk.saved();
+    await desk.issue("A", "Slats of ponderosa pine, framed in walnut.");
+    expect(owner.faults.filter((fault) => fault.includes(jobId))).toEqual([]);
   });
 });
 

@@ -35,7 +35,7 @@ export function layBoard(sign: BareSign, kernel: Kernel): LaidBoard {
   const round = frame?.ok ? frame.value : null;
   return {
     refusals,
-    plan: drawSlatPlan({ layout: slats.value, frame: round, ...planMm }),
+    plan: drawSlatPlan({ layout: slats.value, frame: round, numbers: "fitting", ...planMm }),
     count: slats.value.slats.length,
     start: bestStart(sign, kernel),
   };

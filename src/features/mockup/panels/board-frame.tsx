@@ -25,7 +25,7 @@ export function BoardFrame({ writing }: { readonly writing: BoardWriting }) {
     <>
       <div className="grid items-start gap-3 sm:grid-cols-2 md:grid-cols-4">
         <Select
-          label="Frame"
+          label="Frame is"
           value={isFramed ? "wood" : "none"}
           error={frameProblemOf("isFramed", isFramed)}
           onChange={(event) => choose(event.target.value === "wood")}

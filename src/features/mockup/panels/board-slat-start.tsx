@@ -22,7 +22,7 @@ export function BoardSlatStart({ writing }: { readonly writing: BoardWriting }) 
     slats.startHeight !== null &&
     lengthsEqual(slats.startHeight, best.height);
   return (
-    <>
+    <div className="grid items-start gap-x-3 gap-y-1 sm:col-span-3 sm:grid-cols-3">
       <Select
         label="First slat begins"
         value={slats.startsAt}
@@ -58,6 +58,6 @@ export function BoardSlatStart({ writing }: { readonly writing: BoardWriting }) 
           </WordButton>
         )}
       </div>
-    </>
+    </div>
   );
 }

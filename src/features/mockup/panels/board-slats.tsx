@@ -1,4 +1,5 @@
 import type { Slats } from "#shared/mockup/document.ts";
+import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
 import { LengthField } from "@/components/ui/length-field.tsx";
 import { NumberField } from "@/components/ui/number-field.tsx";
 import { Select } from "@/components/ui/select.tsx";
@@ -40,29 +41,32 @@ export function BoardSlats({ writing }: { readonly writing: BoardWriting }) {
       <legend className="pb-1 font-sans text-sm font-semibold text-graphite">Slats</legend>
       <div className="grid items-start gap-4 md:grid-cols-[minmax(0,1fr)_18rem]">
         <div className="grid items-start gap-3 sm:grid-cols-3">
-          <WoodSelect
-            label="Wood of the slats"
-            value={slats.stock}
-            drawn={document.backer.slats?.stock ?? document.backer.stock}
-            onChange={(wood) => change({ stock: wood })}
-          />
+          <div className="grid items-start gap-3 sm:col-span-3 sm:grid-cols-2">
+            <WoodSelect
+              label="Wood of the slats"
+              value={slats.stock}
+              drawn={document.backer.slats?.stock ?? document.backer.stock}
+              onChange={(wood) => change({ stock: wood })}
+            />
+            <Select
+              label="Pattern"
+              value={slats.pattern}
+              error={slatProblemOf("pattern", slats.pattern)}
+              onChange={(event) => {
+                const chosen = patterns.find(({ pattern }) => pattern === event.target.value);
+                if (chosen) change({ pattern: chosen.pattern });
+              }}
+            >
+              {patterns.map(({ pattern, text }) => (
+                <option key={pattern} value={pattern}>
+                  {text}
+                </option>
+              ))}
+            </Select>
+          </div>
           {length("slatWidth", "Width of a slat")}
           {length("thickness", "Thickness of a slat")}
-          <Select
-            label="Pattern"
-            value={slats.pattern}
-            error={slatProblemOf("pattern", slats.pattern)}
-            onChange={(event) => {
-              const chosen = patterns.find(({ pattern }) => pattern === event.target.value);
-              if (chosen) change({ pattern: chosen.pattern });
-            }}
-          >
-            {patterns.map(({ pattern, text }) => (
-              <option key={pattern} value={pattern}>
-                {text}
-              </option>
-            ))}
-          </Select>
+          {length("gap", "Gap between slats")}
           <NumberField
             label={slats.pattern === "spine" ? "Angle to the spine" : "Angle to the upright"}
             suffix="°"
@@ -70,7 +74,6 @@ export function BoardSlats({ writing }: { readonly writing: BoardWriting }) {
             onChange={(angle) => change({ angle })}
             error={slatProblemOf("angle", slats.angle)}
           />
-          {length("gap", "Gap between slats")}
           <Select
             label="Slats run"
             value={slats.direction}
@@ -79,14 +82,18 @@ export function BoardSlats({ writing }: { readonly writing: BoardWriting }) {
             <option value="up">{isSingle ? "up to the right" : "up and out"}</option>
             <option value="down">{isSingle ? "down to the right" : "down and out"}</option>
           </Select>
+          {length(
+            "overhang",
+            "Laid past the edge",
+            `Then trimmed flush. Common: ${formatLength(25, unit)} to ${formatLengthWithUnit(50, unit)}.`,
+          )}
           {isAsked(slats, "spineWidth") && length("spineWidth", "Width of the spine")}
           {isAsked(slats, "spineOffset") &&
             length(
               "spineOffset",
-              slats.pattern === "spine" ? "Spine right of the middle" : "Mitres right of the middle",
-              "Less than 0 is to the left.",
+              slats.pattern === "spine" ? "Spine right of middle" : "Mitres right of middle",
+              "Under 0 is to the left.",
             )}
-          {length("overhang", "Laid past the edge", "Then trimmed flush. 25 to 50 mm is common.")}
           <BoardSlatStart writing={writing} />
         </div>
         <SlatPlan writing={writing} />

@@ -125,7 +125,7 @@ export function WordButton({ className, type = "button", inText = false, ...butt
       {...button}
       type={type}
       className={cx(
-        "cursor-pointer rounded text-left font-sans text-sm text-indigo underline underline-offset-4 hover:bg-linen hover:text-ink disabled:cursor-not-allowed disabled:text-graphite disabled:no-underline",
+        "cursor-pointer rounded text-left font-sans text-sm text-indigo underline underline-offset-4 hover:bg-linen hover:text-ink disabled:cursor-not-allowed disabled:text-graphite disabled:no-underline aria-disabled:cursor-not-allowed aria-disabled:text-graphite aria-disabled:no-underline",
         inText ? "inline" : "min-h-7 px-1",
         className,
       )}

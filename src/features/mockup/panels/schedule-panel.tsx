@@ -2,7 +2,6 @@ import { faceColour } from "#shared/drawing/face-colour.ts";
 import { backerStockWords, layingWords, scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import { finishWords } from "#shared/mockup/finish-words.ts";
 import { Table } from "@/components/ui/table.tsx";
-import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { Swatch, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
@@ -96,13 +95,16 @@ function BackerName({ onFinish }: { readonly onFinish: () => void }) {
   const words = finishWords(document.backer.finish);
   const laying = layingWords(document, unit);
   return (
-    <WordButton
-      title={words}
-      aria-label={`Finish of the backer: ${words}`}
-      className={cx("-ml-0.5 whitespace-normal", laying.length === 0 && "line-clamp-2")}
-      onClick={onFinish}
-    >
-      {["Backer", ...laying, words].join(", ")}
-    </WordButton>
+    <>
+      <WordButton
+        title={words}
+        aria-label={`Finish of the backer: ${words}`}
+        className="-ml-0.5 line-clamp-2 whitespace-normal"
+        onClick={onFinish}
+      >
+        Backer, {words}
+      </WordButton>
+      {laying.length > 0 && <span className="block px-0.5 pb-1 text-sm whitespace-normal">{laying.join(", ")}</span>}
+    </>
   );
 }
