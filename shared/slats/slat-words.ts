@@ -1,3 +1,4 @@
+import { isShorter } from "../geometry/tolerance.ts";
 import { formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { OutOfRange } from "../units/outcome.ts";
@@ -56,6 +57,9 @@ export function startWords(
   const leaves = `the shortest slat is then ${mm(best.shortestMm)} long`;
   if (current.slivers === 0) return `The shortest slat is ${mm(current.shortestMm)} long: no sliver.`;
   if (isSliverFree) return `Begin ${where} at the spine: ${leaves}, and no slat is shorter than it is wide.`;
+  const isBest = best.slivers > 0 && !isShorter(current.shortestMm, best.shortestMm);
+  if (isBest)
+    return "No start leaves every slat longer than it is wide, and this is the best. Another width of slat may.";
   return best.slivers === 0
     ? `Begin ${where} at the spine: ${leaves}, but lay the first with care, since a little off leaves a sliver.`
     : `No start leaves every slat longer than it is wide. The best begins ${where} at the spine: ${leaves}.`;

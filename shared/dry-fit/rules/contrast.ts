@@ -57,11 +57,13 @@ function checkLetters(letters: readonly Letter[], { document, limits }: RuleInpu
   const said = lowRatio
     ? `${ratio.toFixed(2)} to 1, ${limits.contrastRatio} to 1 is the least`
     : `${points.value.points.toFixed(0)} points of light reflectance apart, ${limits.contrastPoints} are the least`;
+  // A layer is often named after its stock.
+  const of = layer.name.startsWith(own.name) ? "" : `, ${own.name},`;
   return [
     foundBy(contrast, {
       ...base,
       severity: "caution",
-      text: `The letters of ${layerWords(layer)}, ${own.name}, hardly stand out from ${ground.name}: ${said}.`,
+      text: `The letters of ${layerWords(layer)}${of} hardly stand out from ${ground.name}: ${said}.`,
       value: lowRatio ? ratio : points.value.points,
       limit: lowRatio ? limits.contrastRatio : limits.contrastPoints,
       unit: lowRatio ? "to 1" : "points",

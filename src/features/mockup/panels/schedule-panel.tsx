@@ -2,6 +2,7 @@ import { faceColour } from "#shared/drawing/face-colour.ts";
 import { backerStockWords, layingWords, scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import { finishWords } from "#shared/mockup/finish-words.ts";
 import { Table } from "@/components/ui/table.tsx";
+import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { Swatch, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
@@ -23,7 +24,8 @@ export function SchedulePanel({
   const { document, figures, unit, heights, letterHeights } = useDesk();
   const rows = figures === null ? null : scheduleRows(document, figures, unit, heights);
   const backer = rows?.[0];
-  const { thickness } = document.backer;
+  const { thickness, slats } = document.backer;
+  const isLaid = slats !== null || document.frame !== null;
 
   return (
     <section aria-label="Schedule" className="min-w-0 px-4 pt-2 pb-6 sm:px-6">
@@ -42,11 +44,11 @@ export function SchedulePanel({
         <tbody>
           <tr>
             <DeskRowHead>A</DeskRowHead>
-            <DeskCell className="min-w-28">
+            <DeskCell className={isLaid ? "min-w-56" : "min-w-28"}>
               <BackerName onFinish={onFinish} />
             </DeskCell>
-            <DeskCell>
-              <span className="flex items-center gap-2">
+            <DeskCell className={cx(isLaid && "min-w-40")}>
+              <span className="flex items-center gap-2 whitespace-normal">
                 <Swatch colour={faceColour(document.backer)} />
                 {backerStockWords(document.backer)}
               </span>

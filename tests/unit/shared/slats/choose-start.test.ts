@@ -143,6 +143,12 @@ describe("words about the start", () => {
       words:
         "No start leaves every slat longer than it is wide. The best begins 4 mm outside the lower edge at the spine: the shortest slat is then 30 mm long.",
     },
+    {
+      current: measure(-4, 30, 2),
+      best: measure(-4, 30, 2),
+      free: false,
+      words: "No start leaves every slat longer than it is wide, and this is the best. Another width of slat may.",
+    },
   ])("$words", ({ current, best, free, words }) => {
     expect(startWords({ current, best, isSliverFree: free }, "lower", "mm")).toBe(words);
   });

@@ -37,6 +37,18 @@ it.each([
   }
 });
 
+it("a layer that bears its stock's name is named once", async () => {
+  const named = (name: string) =>
+    buildSign([
+      buildLayer("B", [plate("p", 200, 100, [300, 200])], { stock: acrylic("#FFFFFF") }),
+      buildLayer("C", [plate("l", 20, 30, [300, 200], { reads: "H" })], { stock: acrylic("#999999"), name }),
+    ]);
+  const [other] = await findingsOf(contrast, named("Motto"));
+  expect(other?.text).toMatch(/^The letters of C, Motto, Sheet #999999, hardly stand out/);
+  const [same] = await findingsOf(contrast, named("Sheet #999999 2"));
+  expect(same?.text).toMatch(/^The letters of C, Sheet #999999 2 hardly stand out/);
+});
+
 it("dark on dark may have the ratio and still lack the points", async () => {
   // LRV of #000000 is 0; of #747474 17.6 (CIE 15, calculated): ratio 4.5, points 18.
   const [finding] = await findingsOf(contrast, onPanel("#747474", "#000000"));

@@ -50,7 +50,8 @@ describe("slats shorter than wide", () => {
     const findings = await findingsOf(slivers, square);
     expect(findings.map((finding) => finding.value)).toEqual(value === null ? [] : [value]);
     // Wherever they begin they are as short.
-    for (const { text } of findings) expect(text).toContain("No start leaves every slat longer than it is wide.");
+    for (const { text } of findings)
+      expect(text).toContain("No start leaves every slat longer than it is wide, and this is the best.");
     expect((await triedMends(slivers, square)).labels).toEqual(value === null ? [] : [[]]);
   });
 
