@@ -357,7 +357,8 @@ export const screens: readonly Screen[] = [
     open: async (page) => {
       const fold = page.getByRole("button", { name: /^Costs / });
       if ((await fold.getAttribute("aria-expanded")) === "false") await fold.click();
-      await page.getByRole("rowheader", { name: "To ask" }).scrollIntoViewIfNeeded();
+      await page.getByRole("rowheader", { name: "To ask" }).waitFor();
+      await fold.evaluate((element) => element.scrollIntoView());
     },
   },
   {

@@ -39,26 +39,26 @@ export function CostLines({
         <tbody>
           {lines.map((line) => (
             <tr key={`${line.group} ${line.id} ${line.unit}`}>
-              <th scope="row" className="border-b border-rule px-3 py-1.5 align-top font-normal text-ink">
+              <th scope="row" className="border-b border-rule px-3 py-2.5 align-top font-normal text-ink">
                 {line.what}
                 <span className="block text-fine text-graphite sm:hidden">
                   {quantityWords(line)} at {rateWords(line, currency)}
                 </span>
               </th>
-              <Cell className={cx(whereWide, "py-1.5 text-right")}>{quantityWords(line)}</Cell>
-              <Cell className={cx(whereWide, "py-1.5 text-right whitespace-nowrap")}>{rateWords(line, currency)}</Cell>
-              <Cell className="py-1.5 text-right whitespace-nowrap">{money(line.amount)}</Cell>
-              {many && <Cell className="py-1.5" />}
+              <Cell className={cx(whereWide, "text-right")}>{quantityWords(line)}</Cell>
+              <Cell className={cx(whereWide, "text-right whitespace-nowrap")}>{rateWords(line, currency)}</Cell>
+              <Cell className="text-right whitespace-nowrap">{money(line.amount)}</Cell>
+              {many && <Cell />}
             </tr>
           ))}
         </tbody>
         <tfoot>
           {sums.map(([label, key]) => (
             <tr key={key}>
-              <RowHead className="py-1.5">{label}</RowHead>
+              <RowHead>{label}</RowHead>
               <Cell className={whereWide} colSpan={2} />
-              <Cell className="py-1.5 text-right font-semibold whitespace-nowrap">{money(whole[key])}</Cell>
-              {many && <Cell className="py-1.5 text-right font-semibold whitespace-nowrap">{money(perSign[key])}</Cell>}
+              <Cell className="text-right font-semibold whitespace-nowrap">{money(whole[key])}</Cell>
+              {many && <Cell className="text-right font-semibold whitespace-nowrap">{money(perSign[key])}</Cell>}
             </tr>
           ))}
         </tfoot>

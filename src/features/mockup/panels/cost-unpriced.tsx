@@ -25,7 +25,7 @@ export function CostUnpriced({
           <TextLink to={pricesPath}>Give them a price</TextLink>
         ) : (
           <>
-            An owner gives them one. <TextLink to={pricesPath}>Look at the prices</TextLink>
+            An owner writes the prices. <TextLink to={pricesPath}>Look at the prices</TextLink>
           </>
         )}
       </p>

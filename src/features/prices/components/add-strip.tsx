@@ -35,11 +35,11 @@ export function AddStrip({ stock, unit, onAdd }: AddStripProps) {
     setAsked(false);
   };
   return (
-    <fieldset className="mt-3 grid max-w-3xl grid-cols-2 items-end gap-3 md:grid-cols-[minmax(0,1fr)_9rem_9rem_auto]">
+    <fieldset className="mt-3 grid max-w-3xl grid-cols-2 items-start gap-3 md:grid-cols-[minmax(0,1fr)_9rem_9rem_auto]">
       <legend className="sr-only">Add a strip</legend>
       <Select
         label="Strip of"
-        className="col-span-2 self-start md:col-span-1"
+        className="col-span-2 md:col-span-1"
         value={chosen}
         onChange={(event) => setChosen(Number(event.target.value))}
       >
@@ -51,7 +51,7 @@ export function AddStrip({ stock, unit, onAdd }: AddStripProps) {
       </Select>
       <LengthField label="Wide" unit={unit} value={widthMm} onChange={setWidth} error={fault(widthMm)} />
       <LengthField label="Thick" unit={unit} value={thicknessMm} onChange={setThickness} error={fault(thicknessMm)} />
-      <Button className="col-span-2 justify-self-start md:col-span-1" onClick={add}>
+      <Button className="col-span-2 justify-self-start md:col-span-1 md:mt-6" onClick={add}>
         Add the strip
       </Button>
     </fieldset>

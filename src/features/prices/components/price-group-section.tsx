@@ -31,7 +31,7 @@ export function PriceGroupSection(props: PriceGroupSectionProps) {
   const before = new Map(base.map((row) => [row.id, row]));
   const { title, under } = groupWords[group];
   return (
-    <section aria-labelledby={groupAnchor(group)} className="mt-10 max-w-5xl">
+    <section aria-labelledby={groupAnchor(group)} className="mt-10">
       <div className="flex flex-wrap items-baseline justify-between gap-x-6">
         <h2 id={groupAnchor(group)} tabIndex={-1} className="scroll-mt-4 font-serif text-lg font-bold text-ink">
           {title}

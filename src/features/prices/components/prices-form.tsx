@@ -25,7 +25,7 @@ export function PricesForm(props: PricesFormInput) {
       noValidate
       onSubmit={prices.handleSubmit}
       aria-label="Prices"
-      className="[&_:is(a,button,input,select)]:scroll-mb-32"
+      className="max-w-5xl [&_:is(a,button,input,select)]:scroll-mb-32"
     >
       <UnsavedGuard when={changes > 0 && !busy} what="The price book" />
       <PriceTerms terms={draft} faults={faults} onWrite={prices.onWriteTerm} />

@@ -149,7 +149,7 @@ describe("the cost beside the schedule", () => {
   it("tells a maker that an owner gives prices", async () => {
     await open(prices({ can: { change: false } }));
     await press(await fold());
-    expect(page()).toContain("An owner gives them one.");
+    expect(page()).toContain("An owner writes the prices.");
     expect(document.querySelector("a")?.textContent).toBe("Look at the prices");
   });
 
