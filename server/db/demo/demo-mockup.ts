@@ -136,6 +136,14 @@ export function piecesOfColour({ artworkId, pieces, at }: ArtworkOnBoard, colour
     });
 }
 
+/** The letters of one line, from the left, each saying what it reads. */
+export function reading(words: string, letters: readonly Piece[]): Piece[] {
+  const characters = [...words.replaceAll(" ", "")];
+  if (characters.length !== letters.length) throw new Error(`“${words}” is not ${letters.length} letters long.`);
+  const inOrder = letters.toSorted((a, b) => a.placement.x - b.placement.x);
+  return letters.map((letter) => ({ ...letter, reads: characters[inOrder.indexOf(letter)] ?? "" }));
+}
+
 /** A round plate. */
 export function disc(id: string, name: string, { x, y, radius }: { x: number; y: number; radius: number }): Piece {
   return {

@@ -11,6 +11,7 @@ import {
   layer,
   paleWash,
   piecesOfColour,
+  reading,
   slatted,
   standoff,
 } from "./demo-mockup.ts";
@@ -82,7 +83,7 @@ export function orrerySign(artwork: DemoArtwork, { ringThickness }: { ringThickn
         stock: "Midnight",
         thickness: 4.5,
         hold: bondToWood,
-        pieces: piecesOfColour(on, "#27314F", "Letter"),
+        pieces: reading("ORRERY BOOKS", piecesOfColour(on, "#27314F", "Letter")),
       }),
     ],
   };
@@ -126,7 +127,7 @@ export function rackSign(artwork: DemoArtwork): MockupDocument {
         stock: "Tide",
         thickness: 4.5,
         hold: bondToWood,
-        pieces: piecesOfColour({ ...artwork, at: { x: 20, y: 20 } }, "#28685C", "Letter"),
+        pieces: reading("RACK 4", piecesOfColour({ ...artwork, at: { x: 20, y: 20 } }, "#28685C", "Letter")),
       }),
     ],
   };

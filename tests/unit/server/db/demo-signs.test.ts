@@ -33,6 +33,15 @@ describe("the signs that people see first", () => {
     expect(findings.filter(({ rule }) => ofHardware.includes(rule))).toEqual([]);
   });
 
+  it.each([
+    { words: "ORRERY BOOKS", build: signs[0]?.build },
+    { words: "RACK 4", build: signs[2]?.build },
+  ])("reads $words, letter by letter", async ({ words, build }) => {
+    const document = documentSchema.parse(await build?.());
+    const findings = await dryFitOf(document, { context: { words } });
+    expect(findings.filter(({ rule }) => rule === 26)).toEqual([]);
+  });
+
   it.each(signs)(
     "$name: its bonds and pieces stop nothing, and nothing parts, lacks its place or is slit",
     async ({ build }) => {
