@@ -63,7 +63,7 @@ export function FindingItem({
         </span>
         {woken && (
           <p className="mt-1 border-l-2 border-ochre pl-2 text-fine text-graphite">
-            {woken.by} set this aside on {formatDay(woken.at)}: “{woken.reason}”{" "}
+            {woken.by} set this aside on {formatDay(woken.at)}: “{woken.reason}”.{" "}
             <span className="text-ink">{wakingWords(woken.finding, finding, shop.unit)}</span>
           </p>
         )}
