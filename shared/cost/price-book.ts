@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { idOf, line } from "../mockup/schema-parts.ts";
 import { currencyDigits } from "./currency.ts";
 import { mostPrice } from "./money.ts";
 
@@ -24,8 +25,8 @@ const minutes = (what: string) =>
   z.number(`${what} must be a number.`).min(0, `${what} can't be below 0.`).max(10_000, `${what}: a week is too long.`);
 
 const entry = {
-  id: z.string().min(1, "Every entry needs an id.").max(200),
-  name: z.string().trim().min(1, "Every entry needs a name.").max(120),
+  id: idOf(200),
+  name: line.min(1, "Every entry needs a name."),
 };
 
 /** What an adhesive is counted in: a liquid's volume, a paste's mass, a tape's area. */
@@ -105,7 +106,7 @@ export const priceBookSchema = z.strictObject({
   /** Work by piece, by slat, by sign or by whatever is counted. */
   labour: list(z.strictObject({ ...entry, perHour: price, minutesEach: minutes("The time for one") })),
   markup: share(10, "Markup"),
-  tax: z.strictObject({ name: z.string().trim().min(1).max(40), share: share(1, "Tax") }),
+  tax: z.strictObject({ name: line.min(1).max(40), share: share(1, "Tax") }),
 });
 
 export type PriceBook = z.infer<typeof priceBookSchema>;

@@ -10,11 +10,13 @@ export const length = z.number().finite().positive().max(longestMm);
 export const coordinate = z.number().finite().min(-longestMm).max(longestMm);
 /** Controls and halves of surrogate pairs: nothing draws them, and the database takes them in no record. */
 const unwritable = /[\p{Cc}\p{Cs}]/u;
-export const id = z
-  .string()
-  .min(1)
-  .max(64)
-  .refine((text) => !unwritable.test(text), "An id has no control characters.");
+export const idOf = (longest: number) =>
+  z
+    .string()
+    .min(1)
+    .max(longest)
+    .refine((text) => !unwritable.test(text), "An id has no control characters.");
+export const id = idOf(64);
 /** One line of text that may be empty. Of what is pasted into it, what can't be written becomes spaces. */
 export const line = z
   .string()
