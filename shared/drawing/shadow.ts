@@ -32,10 +32,16 @@ const mostCells = 1_500_000;
 /** Of the mask in the light's axes, which holds the blur's margin too: a soft light far before the board makes that many times the picture. */
 const mostMaskCells = 12_000_000;
 
-/** The size of a cell in mm: half the least blur, between 72 and 50 to the inch, coarser when the picture would be too large. */
+/** A blur that spreads over so many cells looks no smoother in finer ones. */
+const cellsOfSigma = 20;
+
+/**
+ * The size of a cell in mm: half the least blur, between 72 and 50 to the inch; coarser when that blur is wide
+ * or the picture would be too large.
+ */
 function cellMm(box: Box, leastSigma: number): number {
   const wanted = Math.min(coarsestMm, Math.max(finestMm, leastSigma / 2));
-  return Math.max(wanted, Math.sqrt((box.width * box.height) / mostCells));
+  return Math.max(wanted, leastSigma / cellsOfSigma, Math.sqrt((box.width * box.height) / mostCells));
 }
 
 /** Casters that reach above the level, by their height over it, so that each height is blurred once. */

@@ -166,17 +166,33 @@ describe("shadowItem", () => {
 });
 
 describe("a shadow of no sign that is ever built", () => {
-  it.each([
-    { what: "a small board a metre behind a wall, by a lamp as large", width: 20, bottom: 1000, size: 1 },
-    { what: "a board as long as a house and as narrow as a finger", width: 10_000, bottom: 30, size: 0.01 },
-  ])("is drawn coarsely, since its mask has twelve million cells at most: on $what", ({ width, bottom, size }) => {
-    const casters: Caster[] = [{ region: square(-20_000, -20_000, 40_000), bottom, top: bottom + 3 }];
-    const light = { azimuth: 45, elevation: 10, angularSize: size };
+  const wide = square(-20_000, -20_000, 40_000);
+  const cellOf = (casters: readonly Caster[], angularSize: number, width: number): number => {
+    const light = { azimuth: 45, elevation: 10, angularSize };
     const plane = shadowPlane({ light, level: 18, receivers: [{ x: 0, y: 0, width, height: 20 }], casters });
     if (!plane) throw new Error("No shadow was thrown.");
+    return plane.box.width / plane.width;
+  };
+  const sigmaMm = (height: number, angularSize: number, way: "along" | "across"): number =>
+    penumbraMm(height, { azimuth: 45, elevation: 10, angularSize })[way] / Math.sqrt(12);
+
+  it.each([
+    {
+      what: "a small board under a plate and a metre behind a wall, by a large lamp",
+      width: 20,
+      tops: [21, 1018],
+      size: 1,
+    },
+    { what: "a board as long as a house and as narrow as a finger", width: 10_000, tops: [33], size: 0.01 },
+  ])("is drawn coarsely, since its mask has twelve million cells at most: on $what", ({ width, tops, size }) => {
+    const casters = tops.map((top): Caster => ({ region: wide, bottom: top - 3, top }));
     // In the light's axes the board takes (width + height) / √2 each way, and the blur three sigma on both sides.
-    const sigma = penumbraMm(bottom - 15, light).along / Math.sqrt(12);
-    const side = (width + 20) / Math.SQRT2 + 6 * sigma;
-    expect(plane.box.width / plane.width).toBeCloseTo(side / Math.sqrt(12e6), 5);
+    const side = (width + 20) / Math.SQRT2 + 6 * sigmaMm(Math.max(...tops) - 18, size, "along");
+    expect(cellOf(casters, size, width)).toBeCloseTo(side / Math.sqrt(12e6), 5);
+  });
+
+  it("is drawn as coarsely as its least blur allows", () => {
+    const cell = cellOf([{ region: wide, bottom: 1000, top: 1018 }], 1, 20);
+    expect(cell).toBeCloseTo(sigmaMm(1000, 1, "across") / 20, 5);
   });
 });
