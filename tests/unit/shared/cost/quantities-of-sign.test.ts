@@ -132,6 +132,13 @@ describe("what goes into a sign", () => {
     expect(measures.framePieces).toBe(4);
   });
 
+  it("lays a dot of the tack under each piece", () => {
+    const tack = { stockId: null, name: "Thick cyanoacrylate", family: "cyanoacrylate" as const };
+    const two = [plate("one", 40, 20, [100, 100]), plate("two", 40, 20, [300, 100])];
+    const tacked = buildSign([buildLayer("B", two, { hold: { kind: "bond", adhesive: tape(), tack } })]);
+    expect(measured(tacked).bonds.find(({ adhesive }) => adhesive.name === tack.name)?.beadMm).toBe(40);
+  });
+
   it("counts no hole where the hardware passes no panel, and no bond on nothing", () => {
     const away = buildSign([
       buildLayer("B", [plate("b", 100, 50, [-400, -400])]),
