@@ -4,7 +4,7 @@ import type { MockupDocument } from "../mockup/document.ts";
 import { dryingHours } from "../mockup/drying-hours.ts";
 import { formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
-import { formatMass } from "../units/mass.ts";
+import { formatStatedMass } from "../units/mass.ts";
 import { hangingWords } from "./schedule.ts";
 
 /** How a sign hangs and how long its finish dries, in a few sentences for those who make it. */
@@ -16,7 +16,7 @@ export function makingWords(document: MockupDocument, unit: LengthUnit): string 
     gap > 0 && `${formatLengthWithUnit(gap, unit)} behind it`,
     carriesKg === null
       ? "what the fixing carries is not stated"
-      : `the fixing carries ${formatMass(carriesKg * 1000, unit)}`,
+      : `the fixing carries ${formatStatedMass(carriesKg, unit)}`,
     points.length > 0 && `${countOf(points.length, "place")} set out for it`,
   ].filter((part) => part !== false);
   const hours = dryingHours(backer.finish);

@@ -18,6 +18,11 @@ export function formatMass(grams: number, unit: LengthUnit): string {
   return `${(grams / 1000).toFixed(Math.abs(grams) < 100_000 ? 2 : 0)} kg`;
 }
 
+/** A mass that somebody stated in kilograms, with no more decimals than it has: "40 kg", "12.5 kg"; "88.18 lb" for shops that work in inches. */
+export function formatStatedMass(kg: number, unit: LengthUnit): string {
+  return unit === "mm" && Number.isFinite(kg) ? `${decimals(kg, 2)} kg` : formatMass(kg * 1000, unit);
+}
+
 function decimals(value: number, count: number): string {
   const rounded = Number(value.toFixed(count));
   return String(rounded === 0 ? 0 : rounded);

@@ -1,4 +1,4 @@
-import { formatMass } from "../../units/mass.ts";
+import { formatMass, formatStatedMass } from "../../units/mass.ts";
 import type { Finding } from "../finding.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 
@@ -22,6 +22,6 @@ function check({ document, figures, limits, context }: RuleInput): Finding[] {
     return [foundBy(hanging, { ...base, severity: "caution", text })];
   }
   if (kg <= carriesKg) return [];
-  const text = `The sign weighs about ${mass(kg)} with its hardware; the wall's fixing is stated to carry ${mass(carriesKg)}. Take another one, or a lighter sign.`;
+  const text = `The sign weighs about ${mass(kg)} with its hardware; the wall's fixing is stated to carry ${formatStatedMass(carriesKg, context.unit)}. Take another one, or a lighter sign.`;
   return [foundBy(hanging, { ...base, severity: "stop", text, value: kg, limit: carriesKg, unit: "kg" })];
 }

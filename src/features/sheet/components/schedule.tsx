@@ -19,7 +19,7 @@ export function ScheduleTable({ rows }: Pick<ScheduleProps, "rows">) {
           <HeadCell>Thick</HeadCell>
           <HeadCell>Held by</HeadCell>
           <HeadCell>Offset</HeadCell>
-          <HeadCell>Top at</HeadCell>
+          <HeadCell className="whitespace-nowrap">Top at</HeadCell>
           <HeadCell>Pieces</HeadCell>
           <HeadCell>Mass</HeadCell>
         </tr>
@@ -30,12 +30,12 @@ export function ScheduleTable({ rows }: Pick<ScheduleProps, "rows">) {
             <RowHead className="font-serif">{row.key}</RowHead>
             <Cell>{row.what}</Cell>
             <Cell>{row.stock}</Cell>
-            <Cell>{row.thickness}</Cell>
+            <Cell className="whitespace-nowrap">{row.thickness}</Cell>
             <Cell>{row.heldBy}</Cell>
-            <Cell>{row.offset}</Cell>
-            <Cell>{row.topAt}</Cell>
-            <Cell>{row.pieces}</Cell>
-            <Cell>{row.mass}</Cell>
+            <Cell className="whitespace-nowrap">{row.offset}</Cell>
+            <Cell className="whitespace-nowrap">{row.topAt}</Cell>
+            <Cell className="whitespace-nowrap">{row.pieces}</Cell>
+            <Cell className="whitespace-nowrap">{row.mass}</Cell>
           </tr>
         ))}
       </tbody>

@@ -14,7 +14,7 @@ export function SheetFigures({ sheet }: { readonly sheet: Pick<SheetView, "figur
       )}
       <p>
         Stands {formatLengthWithUnit(figures.offWallMm, job.unit)} off the wall, weighs about{" "}
-        {formatMass(figures.massG, job.unit)}. Masses are estimates for planning.
+        {formatMass(figures.massG, job.unit)} without hardware. Masses are estimates for planning.
       </p>
       {making !== null && <p>For the shop: {making}</p>}
     </div>

@@ -21,7 +21,7 @@ describe("how a sign is made, for the shop", () => {
       { kind: "clear coat", name: "Clear", base: "water-borne", dryingHours: 12 },
     ];
     expect(makingWords(hung({ points }, finish), "mm")).toBe(
-      "Hanging: cleat, upright, 12 mm behind it, the fixing carries 20.00 kg, 2 places set out for it. The finish dries 20 hours in all.",
+      "Hanging: cleat, upright, 12 mm behind it, the fixing carries 20 kg, 2 places set out for it. The finish dries 20 hours in all.",
     );
   });
 

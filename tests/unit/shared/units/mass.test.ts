@@ -1,5 +1,5 @@
 import { expect, it } from "vitest";
-import { formatMass } from "#shared/units/mass.ts";
+import { formatMass, formatStatedMass } from "#shared/units/mass.ts";
 
 it.each([
   { grams: 270, unit: "mm" as const, text: "0.27 kg" },
@@ -15,4 +15,13 @@ it.each([
   { grams: Number.NaN, unit: "mm" as const, text: "–" },
 ])("$grams g read $text", ({ grams, unit, text }) => {
   expect(formatMass(grams, unit)).toBe(text);
+});
+
+it.each([
+  { kg: 40, unit: "mm" as const, text: "40 kg" },
+  { kg: 12.5, unit: "mm" as const, text: "12.5 kg" },
+  { kg: 9.071847, unit: "in" as const, text: "20 lb" },
+  { kg: Number.NaN, unit: "mm" as const, text: "–" },
+])("$kg kg, as somebody stated it, read $text", ({ kg, unit, text }) => {
+  expect(formatStatedMass(kg, unit)).toBe(text);
 });
