@@ -1,3 +1,4 @@
+import { forTheClient } from "../dry-fit/for-the-client.ts";
 import type { Limits } from "../dry-fit/limits.ts";
 import type { DryFitContext } from "../dry-fit/rule.ts";
 import { runDryFit } from "../dry-fit/run-dry-fit.ts";
@@ -45,12 +46,12 @@ export function buildSnapshot({
   const figures = computeFigures(document, kernel);
   const findings = runDryFit({ document, figures, limits, context: dryFit, kernel });
   const standings = matchSetAsides(findings, setAsides);
-  // What the shop has set aside is the shop's affair: the sheets, which go to the client, are drawn without it.
+  // What was set aside, and what is about the making, is the shop's affair: the sheets, which go to the client, are drawn without it.
   const sheets = drawSheets({
     titleBlock,
     document,
     figures,
-    findings: openFindings(standings),
+    findings: forTheClient(openFindings(standings)),
     notes,
     words,
     unit,

@@ -72,7 +72,7 @@ export function sheetTextLines({ words, notes, findings }: SheetText, widthMm: n
         ];
   const fit =
     findings.length === 0
-      ? headingLines("Dry fit at issue", "Nothing open", widthMm)
+      ? headingLines("Dry fit at issue", "Nothing open on the sign itself", widthMm)
       : [
           ...headingLines("Dry fit at issue", "", widthMm),
           ...findings.flatMap((finding) => findingLines(finding, widthMm)),

@@ -19,7 +19,11 @@ const mm2PerM2 = 1e6;
 const mm2PerSquareFoot = 304.8 ** 2;
 
 function areaWords(mm2: number, unit: LengthUnit): string {
-  return unit === "mm" ? `${(mm2 / mm2PerM2).toFixed(2)} m²` : `${(mm2 / mm2PerSquareFoot).toFixed(1)} ft²`;
+  if (unit === "mm")
+    return mm2 < mm2PerM2 / 100 ? `${(mm2 / 100).toFixed(1)} cm²` : `${(mm2 / mm2PerM2).toFixed(2)} m²`;
+  return mm2 < mm2PerSquareFoot / 10
+    ? `${(mm2 / 25.4 ** 2).toFixed(1)} in²`
+    : `${(mm2 / mm2PerSquareFoot).toFixed(1)} ft²`;
 }
 
 /** The entry of the stock list that a layer's sheet is; null when it is not in it. */
@@ -78,7 +82,7 @@ function checkSheets({ entry, thicknessMm, layers }: SheetNeed, { document, limi
   return [
     foundBy(stockRule, {
       severity: "caution",
-      text: `${signs} about ${area(needed)} of ${entry.acrylic.name}, ${formatFine(thicknessMm, context.unit)}, for ${layers.map(({ layer }) => layer.key).join(", ")}, waste included; ${area(onHand.areaMm2)} are on hand in ${countOf(onHand.count, "sheet")}.`,
+      text: `${signs} about ${area(needed)} of ${entry.acrylic.name}, ${formatFine(thicknessMm, context.unit)}, for ${layers.map(({ layer }) => layer.key).join(", ")}, waste included; ${onHand.count === 0 ? "no sheet of it is on hand" : `${area(onHand.areaMm2)} are on hand in ${countOf(onHand.count, "sheet")}`}.`,
       layerKey: layers.length === 1 ? first.layer.key : null,
       where: first.pieces[0]?.figures.centroid ?? null,
       value: needed / mm2PerM2,

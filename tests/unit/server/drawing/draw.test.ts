@@ -54,7 +54,10 @@ describe("freezing in a thread of its own", () => {
   });
 
   it("freezes what was set aside with its reason, is stopped by it no more, and draws it on no sheet", async () => {
-    const { stops } = await freezeDrawing(inputOf(5000));
+    // A stop that concerns the client, so that the sheets would letter it.
+    const asked = inputOf(5000);
+    const outside = { ...asked, dryFit: { ...asked.dryFit, place: "outside" as const } };
+    const { stops } = await freezeDrawing(outside);
     const reason = "The client wants it to hang over";
     const setAsides = stops.map((finding) => ({
       finding,
@@ -64,15 +67,13 @@ describe("freezing in a thread of its own", () => {
       at: "2026-12-01T09:00:00Z",
     }));
     const elsewhere = setAsides.map((one) => ({ ...one, finding: { ...one.finding, layerKey: "Z" } }));
-    const frozen = await freezeDrawing({ ...inputOf(5000), setAsides: [...elsewhere, ...setAsides] });
+    const frozen = await freezeDrawing({ ...outside, setAsides: [...elsewhere, ...setAsides] });
     expect(frozen.stops).toEqual([]);
     const snapshot = JSON.parse(frozen.text) as Snapshot;
     expect(snapshot.setAside).toEqual(JSON.parse(JSON.stringify(setAsides)));
     expect(snapshot.findings).toEqual(expect.arrayContaining([...stops]));
     const drawn = JSON.stringify(snapshot.drawing);
-    expect(JSON.stringify((JSON.parse((await freezeDrawing(inputOf(5000))).text) as Snapshot).drawing)).toContain(
-      "Stop:",
-    );
+    expect(JSON.stringify((JSON.parse((await freezeDrawing(outside)).text) as Snapshot).drawing)).toContain("Stop:");
     for (const word of ["Stop:", reason, "Ada Maker"]) expect(drawn).not.toContain(word);
   });
 
