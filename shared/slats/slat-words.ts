@@ -3,6 +3,7 @@ import { formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { OutOfRange } from "../units/outcome.ts";
 import type { StartChoice } from "./choose-start.ts";
+import type { SlatDesign } from "./slat-layout.ts";
 
 /** Lengths that a refusal may be about, in a sentence. */
 const lengths: Readonly<Record<string, string>> = {
@@ -45,10 +46,14 @@ export function slatRefusalWords({ field, value, range }: OutOfRange, unit: Leng
   return `${name} must lie between ${mm(range.least)} and ${mm(range.most)}${given(value, mm(value))}.`;
 }
 
-/** What a start leaves, and whether another would leave more. `edge`: the one that slats rise from. */
+/** Where a start is measured, and from which edge. */
+export const startPlace = ({ pattern, direction }: Pick<SlatDesign, "pattern" | "direction">) =>
+  ({ edge: direction === "up" ? "lower" : "upper", at: pattern === "single" ? "left edge" : "spine" }) as const;
+
+/** What a start leaves, and whether another would leave more. */
 export function startWords(
   { current, best, isSliverFree }: StartChoice,
-  edge: "lower" | "upper",
+  { edge, at }: ReturnType<typeof startPlace>,
   unit: LengthUnit,
 ): string {
   const mm = (length: number) => formatLengthWithUnit(length, unit);
@@ -56,13 +61,13 @@ export function startWords(
     best.height < 0 ? `${mm(-best.height)} outside the ${edge} edge` : `${mm(best.height)} inside the ${edge} edge`;
   const leaves = `the shortest slat is then ${mm(best.shortestMm)} long`;
   if (current.slivers === 0) return `The shortest slat is ${mm(current.shortestMm)} long: no sliver.`;
-  if (isSliverFree) return `Begin ${where} at the spine: ${leaves}, and no slat is shorter than it is wide.`;
+  if (isSliverFree) return `Begin ${where} at the ${at}: ${leaves}, and no slat is shorter than it is wide.`;
   const isBest = best.slivers > 0 && !isShorter(current.shortestMm, best.shortestMm);
   if (isBest)
     return "No start leaves every slat longer than it is wide, and this is the best. Another width of slat may.";
   return best.slivers === 0
-    ? `Begin ${where} at the spine: ${leaves}, but lay the first with care, since a little off leaves a sliver.`
-    : `No start leaves every slat longer than it is wide. The best begins ${where} at the spine: ${leaves}.`;
+    ? `Begin ${where} at the ${at}: ${leaves}, but lay the first with care, since a little off leaves a sliver.`
+    : `No start leaves every slat longer than it is wide. The best begins ${where} at the ${at}: ${leaves}.`;
 }
 
 const given = (value: number, text: string): string => (Number.isFinite(value) ? `, not at ${text}` : "");

@@ -1,5 +1,5 @@
 import { countOf } from "../../mockup/change.ts";
-import { slatRefusalWords, startWords } from "../../slats/slat-words.ts";
+import { slatRefusalWords, startPlace, startWords } from "../../slats/slat-words.ts";
 import { sliversOf } from "../../slats/slivers.ts";
 import { slatsOf } from "../../stack/backer.ts";
 import { formatLengthWithUnit } from "../../units/format-length.ts";
@@ -34,7 +34,7 @@ function check(input: RuleInput): Finding[] {
   );
   const mm = (length: number) => formatLengthWithUnit(length, context.unit);
   const choice = bestStart(document, kernel);
-  const best = choice ? startWords(choice, edgeOf(backer.slats), context.unit) : "Try another start.";
+  const best = choice ? startWords(choice, startPlace(backer.slats), context.unit) : "Try another start.";
   const { from, to } = slat.axis;
   return [
     foundBy(slivers, {
@@ -55,10 +55,9 @@ function mends({ severity }: Finding, { document, kernel, context }: RuleInput):
   const choice = severity === "caution" ? bestStart(document, kernel) : null;
   if (!slats || !choice || choice.best.slivers > 0) return [];
   const { height } = choice.best;
-  const label = `Begin ${formatLengthWithUnit(height, context.unit)} from the ${edgeOf(slats)} edge at the spine`;
+  const { edge, at } = startPlace(slats);
+  const label = `Begin ${formatLengthWithUnit(height, context.unit)} from the ${edge} edge at the ${at}`;
   return [{ label, steps: [{ kind: "slat start", start: startedAt(slats, height).start }] }];
 }
-
-const edgeOf = ({ direction }: { readonly direction: "up" | "down" }) => (direction === "up" ? "lower" : "upper");
 
 const numberOf = (value: number): number | null => (Number.isFinite(value) ? value : null);

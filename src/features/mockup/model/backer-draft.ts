@@ -1,7 +1,8 @@
 import { nearestThickness } from "#shared/materials/find-stock.ts";
 import type { Backer, FrameOfSign, MockupDocument, Slats, Wood } from "#shared/mockup/document.ts";
 import { backerThicknessMm, faceStock } from "#shared/stack/backer.ts";
-import { roundMm } from "./limits.ts";
+import { type Bounds, isWithinBounds } from "./length-bounds.ts";
+import { coordinateBounds, roundMm, spineWidthBounds } from "./limits.ts";
 import { isSameStock, type StockChoices } from "./stock-choices.ts";
 
 /** Slats while they are being written; there are some to begin with, also while the backer is a plank. Lengths mm. */
@@ -98,8 +99,10 @@ export function slatsOfDraft({ startsAt, startHeight, ...draft }: SlatsDraft): S
   const slatWidth = numberIn(draft.slatWidth);
   const gap = numberIn(draft.gap);
   const overhang = numberIn(draft.overhang);
-  const spineWidth = numberIn(draft.spineWidth) ?? (pattern === "spine" ? null : usual.spineWidth);
-  const spineOffset = numberIn(draft.spineOffset) ?? (pattern === "single" ? usual.spineOffset : null);
+  const spineWidth =
+    pattern === "spine" ? numberIn(draft.spineWidth) : spare(draft.spineWidth, spineWidthBounds, usual.spineWidth);
+  const spineOffset =
+    pattern === "single" ? spare(draft.spineOffset, coordinateBounds, usual.spineOffset) : numberIn(draft.spineOffset);
   const height = numberIn(startHeight);
   if (thickness === null || angle === null || slatWidth === null || gap === null || overhang === null) return null;
   if (spineWidth === null || spineOffset === null) return null;
@@ -111,6 +114,10 @@ export function slatsOfDraft({ startsAt, startHeight, ...draft }: SlatsDraft): S
 
 /** What a field holds; null for an empty one and for what is no number. */
 const numberIn = (value: number | null): number | null => (Number.isNaN(value) ? null : value);
+
+/** What a field that the pattern does not ask for leaves in the document: what is in it, if that can stay there. */
+const spare = (value: number | null, bounds: Bounds, otherwise: number): number =>
+  isWithinBounds(value, bounds) ? value : otherwise;
 
 /** The frame as the document keeps it; null without one, or while a measure is missing. */
 export function frameOfDraft({ isFramed, frame }: BackerDraft): FrameOfSign | null {

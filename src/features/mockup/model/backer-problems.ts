@@ -10,7 +10,7 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import type { OutOfRange } from "#shared/units/outcome.ts";
 import { type BackerDraft, type FrameDraft, frameOfDraft, type SlatsDraft, slatsOfDraft } from "./backer-draft.ts";
 import { type Bounds, boundsProblem, isWithinBounds } from "./length-bounds.ts";
-import { coordinateBounds } from "./limits.ts";
+import { coordinateBounds, spineWidthBounds } from "./limits.ts";
 
 type SlatsField = Exclude<keyof SlatsDraft, "stock" | "startsAt" | "direction">;
 type FrameField = "isFramed" | "mitred" | Exclude<keyof FrameDraft, "stock">;
@@ -29,7 +29,7 @@ const slatBounds: Readonly<Record<Exclude<SlatsField, "angle" | "pattern">, Boun
   thickness: thicknessBounds,
   slatWidth: widths,
   gap: spans,
-  spineWidth: widths,
+  spineWidth: spineWidthBounds,
   spineOffset: coordinateBounds,
   startHeight: coordinateBounds,
   overhang: { least: 0, most: 1000 },

@@ -1,5 +1,5 @@
 import { lengthsEqual } from "#shared/geometry/tolerance.ts";
-import { startWords } from "#shared/slats/slat-words.ts";
+import { startPlace, startWords } from "#shared/slats/slat-words.ts";
 import { LengthField } from "@/components/ui/length-field.tsx";
 import { Select } from "@/components/ui/select.tsx";
 import { useDesk } from "../editor/desk-context.ts";
@@ -13,7 +13,7 @@ export function BoardSlatStart({ writing }: { readonly writing: BoardWriting }) 
   const { draft, set, slatProblemOf, shown, laying } = writing;
   const { slats } = draft;
   const change = (more: Partial<SlatsDraft>) => set({ slats: { ...slats, ...more } });
-  const edge = slats.direction === "up" ? "lower" : "upper";
+  const place = startPlace(slats);
   const start = shown?.start ?? null;
   const best = laying.step === "laid" ? (laying.laid.start?.best ?? null) : null;
   const isTaken =
@@ -33,18 +33,18 @@ export function BoardSlatStart({ writing }: { readonly writing: BoardWriting }) 
       </Select>
       {slats.startsAt === "height" && (
         <LengthField
-          label={edge === "lower" ? "Over the lower edge" : "Under the upper edge"}
+          label={place.edge === "lower" ? "Over the lower edge" : "Under the upper edge"}
           unit={unit}
           value={slats.startHeight}
           onChange={(startHeight) => change({ startHeight })}
           error={slatProblemOf("startHeight", slats.startHeight)}
-          hint={slats.pattern === "single" ? "At the left edge." : "At the spine."}
+          hint={`At the ${place.at}.`}
           fine
         />
       )}
       <div className="text-sm text-graphite sm:col-span-3">
         <span role="status">
-          {start && startWords(start, edge, unit)}
+          {start && startWords(start, place, unit)}
           {laying.step === "laid" && !start && laying.laid.count > 0 && "Too many slats to look for the best start."}
         </span>{" "}
         {start && (

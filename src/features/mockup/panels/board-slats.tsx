@@ -76,11 +76,12 @@ export function BoardSlats({ writing }: { readonly writing: BoardWriting }) {
           />
           <Select
             label="Slats run"
+            {...(isSingle ? { hint: "Towards the right." } : {})}
             value={slats.direction}
             onChange={(event) => change({ direction: event.target.value === "down" ? "down" : "up" })}
           >
-            <option value="up">{isSingle ? "up to the right" : "up and out"}</option>
-            <option value="down">{isSingle ? "down to the right" : "down and out"}</option>
+            <option value="up">{isSingle ? "upward" : "up and out"}</option>
+            <option value="down">{isSingle ? "downward" : "down and out"}</option>
           </Select>
           {length(
             "overhang",

@@ -150,6 +150,6 @@ describe("words about the start", () => {
       words: "No start leaves every slat longer than it is wide, and this is the best. Another width of slat may.",
     },
   ])("$words", ({ current, best, free, words }) => {
-    expect(startWords({ current, best, isSliverFree: free }, "lower", "mm")).toBe(words);
+    expect(startWords({ current, best, isSliverFree: free }, { edge: "lower", at: "spine" }, "mm")).toBe(words);
   });
 });
