@@ -51,16 +51,16 @@ export const hangingWords: Readonly<Record<MockupDocument["hanging"]["kind"], st
   none: "not chosen",
 };
 
-/** What a backer is made of: "Eastern white pine on Birch plywood". */
+/** What a backer is made of, from the wall outward as its thickness is given: "Birch plywood, slats of Eastern white pine". */
 export const backerStockWords = ({ stock, slats }: MockupDocument["backer"]): string =>
-  slats ? `${slats.stock.name} on ${stock.name}` : stock.name;
+  slats ? `${stock.name}, slats of ${slats.stock.name}` : stock.name;
 
-/** Slats and frame in words, where the backer has them: "slats at 45°", "framed 18 × 24 in Black walnut". */
+/** Slats and frame in words, where the backer has them: "slats at 45°", "framed in Black walnut 18 × 24". */
 export function layingWords({ backer, frame }: Pick<MockupDocument, "backer" | "frame">, unit: LengthUnit): string[] {
   return [
     ...(backer.slats ? [`slats at ${Math.round(backer.slats.angle * 10) / 10}°`] : []),
     ...(frame
-      ? [`framed ${formatLength(frame.width, unit)} × ${formatLength(frame.depth, unit)} in ${frame.stock.name}`]
+      ? [`framed in ${frame.stock.name} ${formatLength(frame.width, unit)} × ${formatLength(frame.depth, unit)}`]
       : []),
   ];
 }

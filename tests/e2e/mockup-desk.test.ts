@@ -206,8 +206,8 @@ describe("slats and a frame", () => {
     await dialog.waitFor({ state: "detached" });
 
     const row = page.getByRole("region", { name: "Schedule" }).getByRole("row", { name: /^A / });
-    await row.getByText("Ponderosa pine on Eastern white pine").waitFor();
-    await row.getByText("slats at 45°, framed 18 × 20.7 in Black walnut").waitFor();
+    await row.getByText("Eastern white pine, slats of Ponderosa pine").waitFor();
+    await row.getByText("slats at 45°, framed in Black walnut 18 × 20.7").waitFor();
     await vi.waitFor(async () => {
       const { backer, board, frame } = await kept();
       expect(backer).toMatchObject({ thickness: 12, slats: { thickness: 9, angle: 45, start: { kind: "height" } } });
@@ -221,7 +221,7 @@ describe("slats and a frame", () => {
     await row.getByText("Eastern white pine", { exact: true }).waitFor();
     expect(await desk.undo().isDisabled()).toBe(true);
     await desk.redo().click();
-    await row.getByText("Ponderosa pine on Eastern white pine").waitFor();
+    await row.getByText("Eastern white pine, slats of Ponderosa pine").waitFor();
 
     await desk.saved();
     await desk.issue("A", "Slats of ponderosa pine, framed in walnut.");

@@ -158,8 +158,8 @@ describe("the schedule", () => {
     const document = framed;
     const [first] = scheduleRows(document, computeFigures(document, kernel), "mm");
     expect(first).toMatchObject({
-      what: "Backer, slats at 45°, framed 18 × 24 in Black walnut, bare",
-      stock: "Eastern white pine on Birch plywood",
+      what: "Backer, slats at 45°, framed in Black walnut 18 × 24, bare",
+      stock: "Birch plywood, slats of Eastern white pine",
       thickness: "12 + 8",
     });
   });
