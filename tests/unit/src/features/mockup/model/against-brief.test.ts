@@ -25,4 +25,20 @@ describe("againstBrief", () => {
       "The brief asks for 24″ wide, the board is 23 5/8″ wide.",
     ]);
   });
+
+  it("counts the frame where the measures mean overall, and not where they mean the body", () => {
+    // 600 by 400 and 18 mm on every side.
+    const framed = (measures: "body" | "overall") =>
+      emptyMockup({
+        board: { ...document.board, measures },
+        frame: { stock: document.backer.stock, width: 18, depth: 20, mitred: true },
+      });
+    const asked = { widthMm: 636, heightMm: 400, quantity: 1 };
+    expect(againstBrief(asked, framed("overall"), "mm")).toEqual([
+      "The brief asks for 400 mm high, the sign with its frame is 436 mm high.",
+    ]);
+    expect(againstBrief(asked, framed("body"), "mm")).toEqual([
+      "The brief asks for 636 mm wide, the board is 600 mm wide.",
+    ]);
+  });
 });
