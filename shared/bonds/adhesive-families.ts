@@ -167,6 +167,14 @@ export const tackAndWick: TwoStepJoint = {
   restHours: 12,
 };
 
+/** A tack of any family, and another that bonds after it: the waits of `tackAndWick` between and after (common practice). */
+export const tackThenBond = (tack: Family, bond: Family): TwoStepJoint => ({
+  ...tackAndWick,
+  name: "tack, then bond",
+  first: tack,
+  second: bond,
+});
+
 /** Hours until a joint may be loaded: of one family its own, of two steps both and the rest between and after. */
 export function waitingHours(joint: Family | TwoStepJoint): { readonly handling: number; readonly full: number } {
   if (typeof joint === "string") {

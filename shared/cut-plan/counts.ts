@@ -1,4 +1,4 @@
-import { tackAndWick, waitingHours } from "../bonds/adhesive-families.ts";
+import { tackThenBond, waitingHours } from "../bonds/adhesive-families.ts";
 import { nearestDrillMm, pilotHoleMm } from "../hardware/pilot-hole.ts";
 import { passesPanel } from "../hardware/standoff-parts.ts";
 import { rootDiameterMm } from "../materials/wood-screw-threads.ts";
@@ -153,8 +153,8 @@ function pilotDrillMm({ gauge }: Screw, hardness: "softwood" | "hardwood", unit:
 function jointOf({ key, name, hold, pieces }: Layer, quantity: number): JointCount[] {
   if (hold.kind === "standoff" || pieces.length === 0) return [];
   const tack = hold.kind === "bond" ? hold.tack : null;
-  const isTwoStep = tack?.family === tackAndWick.first && hold.adhesive.family === tackAndWick.second;
-  const hours = waitingHours(isTwoStep ? tackAndWick : hold.adhesive.family);
+  const { family } = hold.adhesive;
+  const hours = waitingHours(tack ? tackThenBond(tack.family, family) : family);
   return [
     {
       layerKey: key,

@@ -3,7 +3,7 @@ import {
   pairFit,
   type Surface,
   type TwoStepJoint,
-  tackAndWick,
+  tackThenBond,
   waitingHours,
 } from "../../bonds/adhesive-families.ts";
 import { faceStock } from "../../stack/backer.ts";
@@ -114,5 +114,5 @@ function cautionsOf({ layer, joints }: JoinedLayer, { document }: RuleInput): Fi
 
 function twoSteps({ hold }: GluedLayer): TwoStepJoint | null {
   if (hold.kind !== "bond" || !hold.tack) return null;
-  return { ...tackAndWick, name: "tack, then bond", first: hold.tack.family, second: hold.adhesive.family };
+  return tackThenBond(hold.tack.family, hold.adhesive.family);
 }

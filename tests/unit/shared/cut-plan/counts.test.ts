@@ -4,6 +4,7 @@ import { sheetTasks } from "#shared/cut-plan/sheet-tasks.ts";
 import { usualSaws } from "#shared/cut-plan/shop-saws.ts";
 import { listToBuy } from "#shared/cut-plan/to-buy.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
+import { adhesiveFits } from "#shared/dry-fit/rules/adhesive-fits.ts";
 import { rectanglePath } from "#shared/geometry/shapes.ts";
 import { standardAdhesives, standardStock } from "#shared/materials/standard-stock.ts";
 import type { Hold, MockupDocument } from "#shared/mockup/document.ts";
@@ -17,6 +18,7 @@ import {
   plate,
   standoffHold,
 } from "../../../support/build-sign.ts";
+import { findingsOf } from "../../../support/dry-fit.ts";
 
 const adhesive = (family: string) => {
   const found = standardAdhesives.find((one) => one.family === family);
@@ -100,6 +102,19 @@ describe("what is laid ready for a build", () => {
       },
     ]);
   });
+});
+
+it("says the same waiting time as the dry fit, whatever tacks and bonds", async () => {
+  const hold: Hold = { kind: "bond", adhesive: adhesive("bodied cement"), tack: adhesive("cyanoacrylate") };
+  const sign = buildSign([
+    buildLayer("B", [plate("panel", 300, 200, [300, 200])]),
+    buildLayer("C", [plate("1", 20, 20, [250, 200])], { hold }),
+  ]);
+  // 15 minutes between the two, then an hour; 24 hours and those 15 minutes until it is loaded.
+  const { joints } = countParts(sign, "mm");
+  expect(joints.at(-1)).toMatchObject({ layerKey: "C", handlingHours: 1.25, fullHours: 24.25 });
+  const findings = await findingsOf(adhesiveFits, sign);
+  expect(findings.find(({ layerKey }) => layerKey === "C")).toMatchObject({ severity: "remark", value: 24.25 });
 });
 
 describe("what to buy", () => {
