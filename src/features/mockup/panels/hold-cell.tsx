@@ -38,8 +38,10 @@ export function HoldCell({ layer }: { readonly layer: Layer }) {
     choices.map(
       (choice, index) =>
         choice.kind === kind && (
-          <option key={`${kind} ${idOf(choice)}`} value={index}>
+          // What is drawn may be one of the stock with another screw: its id and name then stand here twice.
+          <option key={`${kind} ${idOf(choice)} ${screwOf(choice)}`} value={index}>
             {wordsOf(choice, unit)}
+            {choices.some((other) => other !== choice && isNamedAlike(other, choice)) && screwOf(choice)}
           </option>
         ),
     );
@@ -64,6 +66,12 @@ const idOf = (choice: HoldChoice): string => {
   const { stockId, name } = choice.kind === "standoff" ? choice.hardware : choice.adhesive;
   return `${stockId} ${name}`;
 };
+
+const screwOf = (choice: HoldChoice): string =>
+  choice.kind === "standoff" && "screw" in choice.hardware ? `, ${choice.hardware.screw.name}` : "";
+
+const isNamedAlike = (a: HoldChoice, b: HoldChoice): boolean =>
+  a.kind === "standoff" && b.kind === "standoff" && a.hardware.name === b.hardware.name;
 
 function wordsOf(choice: HoldChoice, unit: LengthUnit): string {
   if (choice.kind !== "standoff") return `${choice.kind}, ${choice.adhesive.name}`;

@@ -28,7 +28,13 @@ export function PriceTerms({ terms, faults, onWrite }: PriceTermsProps) {
       </Select>
       <Field label="Markup on the cost" suffix="%" inputMode="decimal" autoComplete="off" {...written("markup")} />
       <Field label="Tax is called" autoComplete="off" {...written("taxName")} />
-      <Field label="Tax on both" suffix="%" inputMode="decimal" autoComplete="off" {...written("taxShare")} />
+      <Field
+        label="Tax on cost and markup"
+        suffix="%"
+        inputMode="decimal"
+        autoComplete="off"
+        {...written("taxShare")}
+      />
     </fieldset>
   );
 }

@@ -19,6 +19,10 @@ export const groupWords: Readonly<Record<PriceGroup, { readonly title: string; r
   hardware: { title: "Hardware", under: "One of a pack is charged in proportion." },
   adhesives: { title: "Adhesives", under: "What a container costs and holds, and how much of it a bond takes." },
   finishes: { title: "Finishes", under: "For a square metre of one coat: what is put on, and the work of it." },
-  machines: { title: "Machines", under: "Setting up counts once for all signs of a job." },
+  machines: {
+    title: "Machines",
+    under:
+      "Setting up counts once for all signs of a job: for each sheet stock that is cut, and for each setting of the saw.",
+  },
   labour: { title: "Work by hand", under: "What an hour costs, and how long one takes." },
 };

@@ -105,7 +105,7 @@ describe("the prices as a form", () => {
     await open(setWith(bookWith(5250), 1));
     await type(field("Midnight, 3 mm, Price"), "52,505");
     await type(field("Midnight, 3 mm, Waste"), "lots");
-    await type(field("Tax on both"), "");
+    await type(field("Tax on cost and markup"), "");
     await press(button("Save the prices"));
     await says("EUR has 2 decimals at most: write 12.50.");
     expect(page()).toContain("Write a number, like 2.5.");
