@@ -49,11 +49,11 @@ export function piecesWords(layer: Layer, pieces: readonly { readonly piece: Pie
   return `${pieces.length} pieces of ${layerWords(layer)}${names === "" ? "" : ` (${names})`}`;
 }
 
-/** A waiting time as people say it: "15 minutes", "1.5 hours", "24 hours", "3 days". */
+/** A waiting time as people say it: "15 minutes", "1.25 hours", "24 hours", "3 days". */
 export function hoursWords(hours: number): string {
   if (hours < 1) return countOf(Math.round(hours * 60), "minute");
   if (hours > 48) return countOf(Number((hours / 24).toFixed(1)), "day");
-  return countOf(Number(hours.toFixed(hours < 10 ? 1 : 0)), "hour");
+  return countOf(Number(hours.toFixed(hours < 10 ? 2 : 0)), "hour");
 }
 
 export const layerWords = (layer: Layer): string => `${layer.key}, ${layer.name}`;
