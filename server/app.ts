@@ -12,6 +12,7 @@ import { requestLog } from "./http/request-log.ts";
 import type { Registered } from "./http/route.ts";
 import { securityHeaders } from "./http/security-headers.ts";
 import { signedInOnly } from "./http/signed-in-only.ts";
+import { soundPieces } from "./http/sound-pieces.ts";
 import { registerRoutes } from "./routes/index.ts";
 
 const smallBody = "256kb";
@@ -47,7 +48,7 @@ export function createApp(services: Services): App {
   app.post("/api/account/password", limited("signIn", env));
   app.get("/api/share/:token", limited("links", env));
   app.post(addArtwork.path, limited("uploads", env));
-  app.put(saveMockup.path, signedInOnly(env), express.json({ limit: mockupBody }));
+  app.put(saveMockup.path, signedInOnly(env), express.json({ limit: mockupBody }), soundPieces);
   app.use("/api", express.json({ limit: smallBody }));
   // Who opens another shop tells a known account's password here too.
   app.post("/api/register", account);

@@ -37,3 +37,23 @@ describe("a shop that asks for much at once", () => {
     expect(new Set(statuses)).toEqual(new Set([200, 429]));
   }, 60_000);
 });
+
+describe("a mockup of nothing but faults", () => {
+  const put = (document: unknown) =>
+    world.visitors.owner.send("PUT", `/api/shops/${world.params.shop}/jobs/${world.job.id}/mockup`, {
+      body: { version: 0, document },
+    });
+
+  it.each([
+    { what: "segments", path: Array.from({ length: 20 }, () => ({ start: {}, segments: Array(25_000).fill(0) })) },
+    { what: "rings", path: Array(500_000).fill(0) },
+    { what: "pieces", path: 0, times: 2000 },
+  ])("is refused in words when those are its $what", async ({ path, times = 1 }) => {
+    const { status, text } = await put({ layers: [{ pieces: Array(times).fill({ path }) }] });
+    expect(status).toBe(422);
+    expect(JSON.parse(text)).toMatchObject({
+      code: "validation_failed",
+      errors: [{ pointer: "/document", detail: "This is no mockup: its pieces can't be read." }],
+    });
+  });
+});
