@@ -2,6 +2,7 @@ import type { LimitSet } from "#shared/contracts/limits.ts";
 import { describeLimit, limitKeys } from "#shared/dry-fit/limit-descriptions.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
+import { NewerNotice } from "@/components/ui/newer-notice.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
 import { counted } from "@/lib/format.ts";
@@ -9,7 +10,6 @@ import { LimitField } from "./limit-field.tsx";
 import { LimitGroups } from "./limit-groups.tsx";
 import { LimitIndex } from "./limit-index.tsx";
 import { LimitRow } from "./limit-row.tsx";
-import { NewerLimits } from "./newer-limits.tsx";
 import { useLimitsForm } from "./use-limits-form.ts";
 
 type LimitsFormProps = {
@@ -63,7 +63,7 @@ export function LimitsForm({ shop, unit, set, explanationOf }: LimitsFormProps) 
         )}
       </LimitGroups>
       <div className="sticky bottom-0 -mx-4 space-y-3 border-t border-ink bg-paper px-4 py-3 sm:-mx-6 sm:px-6">
-        {newer && <NewerLimits newer={newer} onTake={limits.takeTheirs} onKeep={limits.keepMine} />}
+        {newer && <NewerNotice what="limits" newer={newer} onTake={limits.takeTheirs} onKeep={limits.keepMine} />}
         {limits.problem && <Notice tone="error">{limits.problem}</Notice>}
         <div className="flex flex-wrap items-center gap-x-5 gap-y-2">
           <Button type="submit" kind="primary" busy={busy} disabled={changed.length === 0 && !busy}>

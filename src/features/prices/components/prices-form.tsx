@@ -1,5 +1,6 @@
 import { useState } from "react";
 import { Button } from "@/components/ui/button.tsx";
+import { NewerNotice } from "@/components/ui/newer-notice.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { UnsavedGuard } from "@/components/ui/unsaved-guard.tsx";
 import { counted } from "@/lib/format.ts";
@@ -7,7 +8,6 @@ import { foundRows, type PriceSearch } from "../model/find-rows.ts";
 import { priceGroups } from "../model/price-fields.ts";
 import { AddFinish } from "./add-finish.tsx";
 import { AddStrip } from "./add-strip.tsx";
-import { NewerPrices } from "./newer-prices.tsx";
 import { PriceFinder } from "./price-finder.tsx";
 import { PriceGroupSection } from "./price-group-section.tsx";
 import { PriceIndex } from "./price-index.tsx";
@@ -51,7 +51,7 @@ export function PricesForm(props: PricesFormInput) {
         </PriceGroupSection>
       ))}
       <div className="sticky bottom-0 z-10 -mx-4 mt-10 space-y-3 border-t border-ink bg-paper px-4 py-3 sm:-mx-6 sm:px-6">
-        {newer && <NewerPrices newer={newer} onTake={prices.takeTheirs} onKeep={prices.keepMine} />}
+        {newer && <NewerNotice what="prices" newer={newer} onTake={prices.takeTheirs} onKeep={prices.keepMine} />}
         {prices.problem && <Notice tone="error">{prices.problem}</Notice>}
         <div className="flex flex-wrap items-center gap-x-5 gap-y-2">
           <Button type="submit" kind="primary" busy={busy} disabled={changes === 0 && !busy}>
