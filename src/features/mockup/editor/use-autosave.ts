@@ -25,6 +25,9 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
   const [keptHere, setKeptHere] = useState(true);
   /** The document that the server has, by reference. */
   const onServer = useRef(mockup.document);
+  /** The document that is on the desk, also for a request that is answered after it was left. */
+  const onDesk = useRef(mockup.document);
+  const isLeft = useRef(false);
   const waiters = useRef<((version: number | null) => void)[]>([]);
   const unsaved = hasUnsavedWork(autosave) || document !== onServer.current;
 
@@ -32,6 +35,16 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
     const draft = { version: autosave.version, keptAt: new Date().toISOString(), document };
     return keepDraft(window.localStorage, place, draft);
   });
+
+  /** What was changed while the last save was on its way, after the desk was left. */
+  async function sendTheRest(version: number) {
+    const rest = onDesk.current;
+    keepDraft(window.localStorage, place, { version, keptAt: new Date().toISOString(), document: rest });
+    const outcome = await saveDraft(place, { version, document: rest });
+    if (outcome.kind !== "saved") return;
+    onSaved({ ...outcome.mockup, document: rest });
+    dropDraft(window.localStorage, place);
+  }
 
   const send = useEffectEvent(async () => {
     if (autosave.state === "saving" || autosave.state === "stale") return;
@@ -41,16 +54,20 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
     if (outcome.kind === "saved") {
       onServer.current = sent;
       onSaved({ ...outcome.mockup, document: sent });
-      dropDraft(window.localStorage, place);
       dispatch({ kind: "answered", version: outcome.mockup.version, savedAt: outcome.mockup.savedAt });
+      if (!isLeft.current || onDesk.current === sent) dropDraft(window.localStorage, place);
+      else await sendTheRest(outcome.mockup.version);
     } else if (outcome.kind === "newer") dispatch(outcome);
     else if (outcome.kind === "refused") dispatch(outcome);
     else dispatch({ kind: "unreachable", now: Date.now() });
   });
 
-  useEffect(() => {
-    if (document !== onServer.current) dispatch({ kind: "edited", now: Date.now() });
-  }, [document]);
+  const noteEdit = useEffectEvent((now: MockupDocument) => {
+    onDesk.current = now;
+    // What is on its way is soon the server's, so that going back to what it had is an edit, too.
+    if (now !== onServer.current || autosave.state === "saving") dispatch({ kind: "edited", now: Date.now() });
+  });
+  useEffect(() => noteEdit(document), [document]);
 
   const due = saveDueAt(autosave);
   useEffect(() => {
@@ -90,11 +107,16 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
 
   // Leaving for another page of the application does not stop a request, so the last edits are sent on the way out.
   const sendOnTheWayOut = useEffectEvent(() => {
-    if (document === onServer.current || autosave.state === "stale") return;
+    isLeft.current = true;
+    const isSent = document === onServer.current && autosave.state !== "saving";
+    if (isSent || autosave.state === "stale") return;
     keep();
     void send();
   });
-  useEffect(() => () => sendOnTheWayOut(), []);
+  useEffect(() => {
+    isLeft.current = false;
+    return () => sendOnTheWayOut();
+  }, []);
 
   return {
     autosave,

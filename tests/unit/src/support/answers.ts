@@ -6,21 +6,21 @@ export type Asked = { readonly method: string; readonly path: string; readonly b
 export type Answer = { readonly status: number; readonly json?: unknown };
 
 /** A server for one test file, reached by every fetch of the page. It keeps what was asked and answers as the test says. */
-export async function startAnswers(answer: (asked: Asked) => Answer) {
+export async function startAnswers(answer: (asked: Asked) => Answer | Promise<Answer>) {
   const asked: Asked[] = [];
   const server = createServer((request, response) => {
     let text = "";
     request.on("data", (chunk: Buffer) => {
       text += chunk.toString();
     });
-    request.on("end", () => {
+    request.on("end", async () => {
       const one = {
         method: request.method ?? "",
         path: request.url ?? "",
         body: text === "" ? null : JSON.parse(text),
       };
       asked.push(one);
-      const { status, json } = answer(one);
+      const { status, json } = await answer(one);
       response
         .writeHead(status, { "content-type": "application/json" })
         .end(json === undefined ? "" : JSON.stringify(json));

@@ -33,7 +33,7 @@ function Desk({ document }: { document: MockupDocument }) {
 }
 
 let answers: Awaited<ReturnType<typeof startAnswers>>;
-let answer: (body: unknown) => Answer;
+let answer: (body: unknown) => Answer | Promise<Answer>;
 let desk: Awaited<ReturnType<typeof render>>;
 beforeEach(async () => {
   window.localStorage.clear();
@@ -64,6 +64,46 @@ describe("saving what is on the desk", () => {
     expect(answers.asked).toHaveLength(1);
     expect(answers.asked[0]).toMatchObject({ method: "PUT", body: { version: 3, document: { quantity: 2 } } });
     expect(saving.unsaved).toBe(false);
+  });
+
+  /** Holds the answer to the first save back until the test lets it go; the version counts on from 4. */
+  function holdFirstSave(): () => void {
+    let letGo = () => {};
+    const held = new Promise<void>((resolve) => {
+      letGo = resolve;
+    });
+    let version = 3;
+    answer = async () => {
+      version += 1;
+      if (version > 4) return { status: 200, json: saved(version, start.document) };
+      await held;
+      return { status: 200, json: saved(4, edited) };
+    };
+    return letGo;
+  }
+
+  it("sends an undo, too, that is pressed while the edit is on its way", async () => {
+    const letGo = holdFirstSave();
+    await desk.redraw(<Desk document={edited} />);
+    await until(() => answers.asked.length === 1);
+    await desk.redraw(<Desk document={start.document} />);
+    letGo();
+    await until(() => saving.autosave.state === "saved" && saving.autosave.version === 5);
+    expect(answers.asked[1]).toMatchObject({ body: { version: 4, document: { quantity: 1 } } });
+    expect(saving.unsaved).toBe(false);
+  });
+
+  it("sends what was changed while a save was on its way, when the desk is left meanwhile", async () => {
+    const letGo = holdFirstSave();
+    await desk.redraw(<Desk document={edited} />);
+    await until(() => answers.asked.length === 1);
+    await desk.redraw(<Desk document={emptyMockup({ quantity: 3 })} />);
+    await desk.redraw(<p>Another page</p>);
+    expect(findDraft(window.localStorage, place)?.document.quantity).toBe(3);
+    letGo();
+    await until(() => answers.asked.length === 2);
+    expect(answers.asked[1]).toMatchObject({ body: { version: 4, document: { quantity: 3 } } });
+    await until(() => findDraft(window.localStorage, place) === null);
   });
 
   it("stops at a newer version, keeps the work here, and saves over it when told to keep mine", async () => {
