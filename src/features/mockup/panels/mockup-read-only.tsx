@@ -43,10 +43,11 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
   const { document } = mockup;
-  const { width, height } = document.board;
+  const { board, frame: frameOfSign } = document;
+  const whole = signBox(document);
   // On a phone dimension lines would leave no room for the sign; its size stands under it in words.
   const dimensions = room !== null && room.width >= 600;
-  const paperScale = room === null ? null : paperScaleAt(fitSign(signBox(document), usualMargins, room).scale);
+  const paperScale = room === null ? null : paperScaleAt(fitSign(whole, usualMargins, room).scale);
   const input = useMemo(
     () =>
       paperScale === null
@@ -91,7 +92,11 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
       </div>
       {drawn && figures && (
         <>
-          <p className="text-sm text-graphite">Board {formatSize(width, height, unit)}</p>
+          <p className="text-sm text-graphite">
+            {frameOfSign
+              ? `Overall ${formatSize(whole.width, whole.height, unit)}, body ${formatSize(board.width, board.height, unit)}`
+              : `Board ${formatSize(board.width, board.height, unit)}`}
+          </p>
           <h2 className="font-serif text-base font-bold text-ink">Schedule</h2>
           <Table caption="Layers from the wall outward">
             <thead>
