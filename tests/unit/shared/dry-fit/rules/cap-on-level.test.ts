@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { capOnLevel } from "#shared/dry-fit/rules/cap-on-level.ts";
+import { grip } from "#shared/dry-fit/rules/grip.ts";
 import type { Hardware, Layer, Piece } from "#shared/mockup/document.ts";
 import {
   buildCapStud,
@@ -13,6 +14,7 @@ import {
   standoffHold,
 } from "../../../../support/build-sign.ts";
 import { findingsOf } from "../../../../support/dry-fit.ts";
+import { triedMends } from "../../../../support/mend-findings.ts";
 
 const under = (hardware: Hardware = buildCapStud()) =>
   buildLayer("B", [plate("panel", 400, 200, [300, 200])], { hold: standoffHold([hole("h", 200, 200)], hardware) });
@@ -49,6 +51,26 @@ describe("a cap of 15 mm", () => {
   it("names a piece without a name by its layer, within the sentence", async () => {
     const [finding] = await findingsOf(capOnLevel, over([plate("badge", 100, 60, [252, 200])]));
     expect(finding?.text).toContain("does not clear a piece of C, Layer C: tightened");
+  });
+
+  it.each([
+    { studLength: 11, way: "off the badge, where the stud still grips", x: [189, 190] },
+    { studLength: 14.6, way: "onto the badge, which is nearer, where a longer stud grips there too", x: [205, 206.5] },
+  ])("moves $way", async ({ studLength, x: [least = 0, most = 0] }) => {
+    // The badge's edge lies 2 left of the middle: 5.5 to the right the cap of 15 lies on it wholly, 10 to the left it clears it.
+    const sign = buildSign([
+      buildLayer("B", [plate("panel", 400, 200, [300, 200])], {
+        hold: standoffHold([hole("h", 200, 200)], buildCapStud({ studLength })),
+        thickness: 5,
+      }),
+      buildLayer("C", beside(-2), { thickness: 3 }),
+    ]);
+    const { mended } = await triedMends(capOnLevel, sign);
+    const [moved] = mended.flatMap(({ layers: [panel] }) => (panel?.hold.kind === "standoff" ? panel.hold.holes : []));
+    expect(moved?.x).toBeGreaterThanOrEqual(least);
+    expect(moved?.x).toBeLessThanOrEqual(most);
+    expect(mended).toHaveLength(1);
+    expect(await findingsOf(grip, mended[0] ?? sign)).toEqual([]);
   });
 
   it("keeps to the shop's clearance", async () => {
