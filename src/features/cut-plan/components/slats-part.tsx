@@ -96,7 +96,7 @@ function Pictures({ plan: { layout, brads }, document, unit, paperMm }: SlatsPar
 function bradWords(count: number, without: readonly number[], withOne: readonly number[]): string {
   const named = (orders: readonly number[]) => orders.map((order) => (order === 0 ? "the spine" : order)).join(", ");
   const parts = [
-    `${counted(count, "brad")} a sign, clear of the trim line, joints and barrels.`,
+    `${counted(count, "brad")} a sign, clear of the trim line, joints and screws.`,
     without.length > 0 && `No brad fits in ${named(without)}: glue and clamp.`,
     withOne.length > 0 && `Only one fits in ${named(withOne)}: clamp until the glue holds.`,
   ];
