@@ -11,7 +11,7 @@ it.each([
   { reader: maker, words: "waiting for the client" },
 ])("an issued revision tells $reader.name: $words", ({ reader, words }) => {
   expect(standingOf({ state: "issued", decision: null, letter: "B" }, reader)).toEqual({
-    words,
+    words: `not yet: ${words}`,
     alone: words,
     tone: "waiting",
   });
@@ -23,9 +23,17 @@ it.each([
   { reader: maker, words: "notes to answer", tone: "ours" },
 ])("an issued revision with a note that waits on the shop tells $reader.name: $words", ({ reader, words, tone }) => {
   expect(standingOf({ state: "issued", decision: null, letter: "B" }, reader, 1)).toEqual({
-    words,
+    words: `not yet: ${words}`,
     alone: words,
     tone,
+  });
+});
+
+it("a revision that is asked for is named as what keeps the approval away", () => {
+  expect(standingOf({ state: "revision asked", decision: null, letter: "B" }, approver)).toEqual({
+    words: "not yet: a revision is asked for",
+    alone: "a revision is asked for",
+    tone: "ours",
   });
 });
 
