@@ -325,7 +325,7 @@ export const screens: readonly Screen[] = [
     name: "mockup",
     at: "mockup",
     path: () => paths.mockup(shop, jobOf("142")),
-    ready: picture(/elevation/i),
+    ready: picture("Section, from the side"),
     only: "phone",
   },
   {

@@ -4,6 +4,7 @@ import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
 import { makingWords } from "#shared/drawing/making-words.ts";
 import { scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
+import { drawSection } from "#shared/drawing/section.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
 import { signBox } from "#shared/stack/sign-box.ts";
 import { formatSize } from "#shared/units/format-length.ts";
@@ -40,6 +41,7 @@ type MockupReadOnlyProps = {
 export function MockupReadOnly(props: MockupReadOnlyProps) {
   const { shop, unit, job, jobPath, mockup, limits, stock, pricesPath, why } = props;
   const [view, setView] = useState<DrawingView | null>(null);
+  const [sideView, setSideView] = useState<DrawingView | null>(null);
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
   const { document } = mockup;
@@ -63,6 +65,13 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
     [document, unit, job.brief, stock, limits, paperScale, dimensions],
   );
   const { drawn, figures, failure } = useEngine(input);
+  const section = useMemo(
+    () =>
+      figures === null || paperScale === null
+        ? null
+        : drawSection({ document, figures: figures.figures, unit, paperScale, depthScale: 1 }),
+    [document, figures, unit, paperScale],
+  );
   const standings = useStandings({ shop, jobId: job.id }, drawn?.dryFit.findings ?? null);
 
   return (
@@ -78,15 +87,26 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
           {failure}
         </Notice>
       )}
-      <div ref={frame} className="h-[56dvh] border border-rule bg-sheet">
-        {drawn === null && failure === null && <Skeleton label="Drawing the mockup" />}
-        {drawn && (
+      <div className="grid border border-rule bg-sheet md:grid-cols-[minmax(0,1fr)_minmax(0,24rem)]">
+        <div ref={frame} className="h-[56dvh]">
+          {drawn === null && failure === null && <Skeleton label="Drawing the mockup" />}
+          {drawn && (
+            <DrawingViewer
+              list={drawn.elevation}
+              title="Elevation, from the front"
+              view={view}
+              onView={setView}
+              className="h-full"
+            />
+          )}
+        </div>
+        {drawn && section && (
           <DrawingViewer
-            list={drawn.elevation}
-            title="Elevation, from the front"
-            view={view}
-            onView={setView}
-            className="h-full"
+            list={section}
+            title="Section, from the side"
+            view={sideView}
+            onView={setSideView}
+            className="h-[56dvh] border-t border-rule md:border-t-0 md:border-l"
           />
         )}
       </div>
