@@ -67,6 +67,9 @@ const inner = (box: Box): Box => ({
 
 type Schedule = { readonly items: readonly Item[]; readonly heightMm: number; readonly rest: readonly ScheduleRow[] };
 
+/** A print goes from hand to hand, so each says what its bare numbers are (ISO 129-1). */
+const measuresIn: Readonly<Record<LengthUnit, string>> = { mm: "Measures in mm.", in: "Measures in inches." };
+
 /** The sign's size, its frame included, for a narrow cell: it may break behind the cross only. */
 function sizeText(document: MockupDocument, unit: LengthUnit): string {
   const whole = signBox(document);
@@ -143,7 +146,7 @@ export function drawSheets(input: SheetsInput): DrawingSheet[] {
     sheets: 10,
   };
   const titleMm = titleBlockHeightMm(block, right.width);
-  const caution = paragraph(planningCaution, { widthMm: text.width, colour: graphite });
+  const caution = paragraph(`${measuresIn[input.unit]} ${planningCaution}`, { widthMm: text.width, colour: graphite });
   const cautionMm = caution.reduce((sum, line) => sum + line.heightMm, 0);
   const notesBox = { ...text, height: right.height - titleMm - cautionMm - 2 * padMm };
 

@@ -20,7 +20,7 @@ export function acknowledgementsOf({
   words: string;
   unit: LengthUnit;
 }): Acknowledgement[] {
-  const { layers, quantity } = document;
+  const { layers, quantity, backer, frame } = document;
   const { width, height } = signBox(document);
   const lines = words.split("\n").map((line) => line.trim());
   const asked: Acknowledgement[] = lines.flatMap((line, index) =>
@@ -33,9 +33,11 @@ export function acknowledgementsOf({
   });
   const colours = [...new Set(layers.map(({ stock }) => stock.name))];
   if (colours.length > 0) {
+    const face = `${backer.slats ? "slats of " : ""}${faceStock(backer).name}`;
+    const framed = frame ? `, framed in ${frame.stock.name}` : "";
     asked.push({
       id: "colours",
-      text: `The colours are ${colours.join(", ")} on ${faceStock(document.backer).name}. A screen shows them only nearly.`,
+      text: `The colours are ${colours.join(", ")} on ${face}${framed}. A screen shows them only nearly.`,
     });
   }
   const hardware = layers.flatMap(({ hold }) =>

@@ -125,6 +125,11 @@ describe.each(sets)("a set on $paper in $unit", ({ paper, unit, width, height })
     );
   });
 
+  it("says on each sheet what its bare numbers are (ISO 129-1)", () => {
+    const words = unit === "mm" ? "Measures in mm." : "Measures in inches.";
+    for (const sheet of sheets) expect(textsOf(sheet).join(" ")).toContain(words);
+  });
+
   it("carries every note, finding and schedule row somewhere", () => {
     const all = sheets.flatMap((sheet) => textsOf(sheet)).join(" ");
     for (const words of [

@@ -21,3 +21,20 @@ describe("the size that an approver confirms", () => {
     expect(asked.find(({ id }) => id === "size")?.text).toContain(`The size is ${size} and it stands`);
   });
 });
+
+describe("the wood that an approver confirms", () => {
+  const plank = { ...slatSign().backer, slats: null };
+  it.each([
+    { name: "slats", rest: {}, wood: "on slats of Eastern white pine. A screen" },
+    {
+      name: "framed slats",
+      rest: { frame: walnutFrame },
+      wood: "on slats of Eastern white pine, framed in Black walnut. A screen",
+    },
+    { name: "a plain board", rest: { backer: plank }, wood: "on Birch plywood. A screen" },
+  ])("of $name is named as it lies", ({ rest, wood }) => {
+    const document = slatSign({}, rest);
+    const asked = acknowledgementsOf({ document, figures: computeFigures(document, kernel), words: "", unit: "mm" });
+    expect(asked.find(({ id }) => id === "colours")?.text).toContain(wood);
+  });
+});
