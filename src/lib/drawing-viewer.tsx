@@ -91,12 +91,14 @@ export function DrawingViewer(props: DrawingViewerProps) {
           )}
         </div>
       </div>
-      <p className="flex gap-1 px-2 pt-0.5 pb-2">
+      <p className="flex flex-wrap gap-1 px-2 pt-0.5 pb-2">
         <ViewButton label="Closer" about={title} onPress={() => gestures.step(1.6)} />
         <ViewButton label="Farther" about={title} idle={gestures.isWhole} onPress={() => gestures.step(1 / 1.6)} />
         <ViewButton label="Whole" about={title} idle={gestures.isWhole} onPress={() => onView(null)} />
         {drawn !== list && spared !== list && (
-          <span className="self-center pl-1.5 text-fine text-graphite">Closer shows every dimension.</span>
+          <span className="flex-1 basis-32 self-center pl-1.5 text-fine text-graphite">
+            Closer shows every dimension.
+          </span>
         )}
       </p>
       <p id={hintId} className="sr-only">

@@ -503,6 +503,21 @@ export const screens: readonly Screen[] = [
     path: () => paths.compare(shop, jobOf("142"), sheetOf("142 A"), sheetOf("142 B")),
     ready: picture("Revision B, front"),
   },
+  {
+    who: "client",
+    name: "compare-from-the-side",
+    at: "compare",
+    path: () => paths.compare(shop, jobOf("142"), sheetOf("142 A"), sheetOf("142 B")),
+    ready: picture("Revision B, front"),
+    open: async (page) => {
+      await press("From the side")(page);
+      const letters = page.getByRole("img", { name: "Revision B, from the side" }).locator("text");
+      await letters.first().waitFor();
+      const heights = await letters.evaluateAll((texts) => texts.map((text) => text.getBoundingClientRect().height));
+      // A line's box is higher than its letters of 12.5 px.
+      if (Math.min(...heights) < 12.5) throw new Error("The sections are lettered too small to read.");
+    },
+  },
   { who: "client", name: "account", at: "account", path: paths.account, ready: text("Where you are signed in") },
   {
     who: "client",

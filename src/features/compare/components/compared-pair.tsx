@@ -5,6 +5,7 @@ import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
+import { cx } from "@/lib/cx.ts";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { revisionStateWord, type Side } from "@/lib/revision-state.ts";
 import { alignPictures } from "../model/align-pictures.ts";
@@ -65,16 +66,24 @@ export function ComparedPair({ pair, side: reader, pathOfSheet }: ComparedPairPr
             </Button>
           ))}
         </p>
-        <div className="grid min-h-0 flex-1 auto-rows-[19rem] lg:auto-rows-auto lg:grid-cols-2">
+        <div
+          className={cx(
+            "grid min-h-0 flex-1 lg:auto-rows-auto lg:grid-cols-2",
+            // Sections are tall and narrow: under each other a phone would letter them too small to read.
+            side === "section" ? "auto-rows-[32rem] grid-cols-2" : "auto-rows-[19rem]",
+          )}
+        >
           {[
             { ...before, list: aligned.before },
             { ...after, list: aligned.after },
           ].map((one, index) => (
             <div
               key={one.revision.id}
-              className={
-                index === 0 ? "min-h-0 lg:border-r lg:border-rule" : "min-h-0 border-t border-ink lg:border-t-0"
-              }
+              className={cx(
+                "min-h-0 min-w-0",
+                index === 0 && (side === "section" ? "border-r border-rule" : "lg:border-r lg:border-rule"),
+                index === 1 && side === "elevation" && "border-t border-ink lg:border-t-0",
+              )}
             >
               <ComparedPicture
                 list={one.list}
