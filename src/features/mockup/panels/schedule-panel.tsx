@@ -1,6 +1,7 @@
 import { faceColour } from "#shared/drawing/face-colour.ts";
 import { backerStockWords, layingWords, scheduleRows, scheduleTotal } from "#shared/drawing/schedule.ts";
 import { finishWords } from "#shared/mockup/finish-words.ts";
+import { explodedOrder, orderWords } from "#shared/stack/exploded-order.ts";
 import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
@@ -77,7 +78,9 @@ export function SchedulePanel({
       )}
       {figures !== null && (
         <p className="pt-2 text-fine text-graphite">
-          {scheduleTotal(document, figures, unit)} Figures are estimates for planning.{" "}
+          {scheduleTotal(document, figures, unit)}{" "}
+          {document.layers.length > 1 && <>Goes together in this order: {orderWords(explodedOrder(figures))}. </>}
+          Figures are estimates for planning.{" "}
           <WordButton
             inText
             aria-pressed={heights === "with bands"}
