@@ -1,18 +1,14 @@
 import { drivenOf } from "../hardware/driven-of.ts";
 import { reachRoom, screwReach } from "../hardware/screw-reach.ts";
-import type { Hardware, Hole } from "../mockup/document.ts";
-import type { PieceFigures } from "../stack/figures.ts";
+import type { Hardware } from "../mockup/document.ts";
 import { type Banded, bandSum, exactly } from "../units/banded.ts";
-import { frontAt, thingsOver } from "./on-panel.ts";
+import { type HeldPlace, heldPlaces } from "./on-panel.ts";
 import type { RuleInput } from "./rule.ts";
-import { footHeightMm, pieceAt, type StandoffLayer } from "./standoff-layers.ts";
+import { footHeightMm, type StandoffLayer } from "./standoff-layers.ts";
 import { type WoodAt, type WoodGround, woodAt, woodGround } from "./wood-at.ts";
 
 /** A standoff where it stands, with the wood under it and what lies under its front. */
-export type FixingPlace = {
-  readonly hole: Hole;
-  readonly piece: PieceFigures;
-  readonly stack: Banded;
+export type FixingPlace = HeldPlace & {
   readonly wood: WoodAt | null;
   /** From what the barrel stands on down to the wood's face; less than nothing where it stands in a recess. */
   readonly gapMm: number;
@@ -24,15 +20,9 @@ export function fixingPlaces(
   input: RuleInput,
   ground: WoodGround = woodGround(input),
 ): FixingPlace[] {
-  const { hold, level } = standing;
-  const over = thingsOver(input, level);
-  return hold.holes.flatMap((hole) => {
-    const piece = pieceAt(standing, hole);
-    if (!piece) return [];
-    const { stack } = frontAt(hole, { hold, piece, things: over(piece), clearanceMm: input.limits.capClearanceMm });
-    const wood = woodAt(input, ground, hole);
-    const gapMm = wood ? footHeightMm(hold, piece) - wood.face : 0;
-    return [{ hole, piece, stack, wood, gapMm }];
+  return heldPlaces(standing, input).map((place) => {
+    const wood = woodAt(input, ground, place.hole);
+    return { ...place, wood, gapMm: wood ? footHeightMm(standing.hold, place.piece) - wood.face : 0 };
   });
 }
 

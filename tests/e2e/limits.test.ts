@@ -5,24 +5,18 @@ import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
 import { paths } from "@/app/paths.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { launchBrowser } from "../support/browser.ts";
-import { entrance } from "../support/drivers/entrance.ts";
 import { keyboard } from "../support/drivers/keyboard.ts";
 import { mockup } from "../support/drivers/mockup.ts";
 import { buildMember } from "../support/factories/member.ts";
-import { testPassword } from "../support/factories/person.ts";
 import { buildWorld, type World } from "../support/factories/work.ts";
-import { type Seat, takeSeat } from "../support/seat.ts";
+import { takeSignedInSeat } from "../support/signed-in-seat.ts";
 import { signWithFigures } from "../unit/src/features/mockup/sign-with-figures.ts";
 
 let app: TestApp;
 let browser: Browser;
 let world: World;
 
-async function sit(email: string): Promise<Seat> {
-  const seat = await takeSeat(browser, { baseUrl: app.baseUrl, size: "desk" });
-  await entrance(seat.page).signIn({ email, password: testPassword });
-  return seat;
-}
+const sit = (email: string) => takeSignedInSeat(browser, { baseUrl: app.baseUrl, email });
 
 beforeAll(async () => {
   [app, browser] = await Promise.all([startTestApp({ poolMax: 8 }), launchBrowser()]);

@@ -9,13 +9,12 @@ import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { launchBrowser } from "../support/browser.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
-import { entrance } from "../support/drivers/entrance.ts";
 import { mockup } from "../support/drivers/mockup.ts";
 import { buildMember } from "../support/factories/member.ts";
-import { testPassword } from "../support/factories/person.ts";
 import { buildWorld, type World } from "../support/factories/work.ts";
-import { type Seat, takeSeat } from "../support/seat.ts";
+import type { Seat } from "../support/seat.ts";
 import { patienceMs } from "../support/served-app.ts";
+import { takeSignedInSeat } from "../support/signed-in-seat.ts";
 import { signWithFigures } from "../unit/src/features/mockup/sign-with-figures.ts";
 
 /**
@@ -35,11 +34,7 @@ const onServer = () => world.visitors.owner.get(getMockup, { params: jobParams()
 const holds = (locator: ReturnType<Page["locator"]>, value: string) =>
   vi.waitFor(async () => expect(await locator.inputValue()).toBe(value), { timeout: patienceMs, interval: 100 });
 
-async function sit(email: string): Promise<Seat> {
-  const seat = await takeSeat(browser, { baseUrl: app.baseUrl, size: "desk" });
-  await entrance(seat.page).signIn({ email, password: testPassword });
-  return seat;
-}
+const sit = (email: string) => takeSignedInSeat(browser, { baseUrl: app.baseUrl, email });
 
 /** Opens the mockup and waits for the first dry fit, so that the picture is there. */
 async function openDesk({ page, open }: Seat) {

@@ -9,13 +9,12 @@ import { standardAdhesives } from "#shared/materials/standard-stock.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { launchBrowser } from "../support/browser.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
-import { entrance } from "../support/drivers/entrance.ts";
 import { mockup } from "../support/drivers/mockup.ts";
 import { buildMember } from "../support/factories/member.ts";
-import { testPassword } from "../support/factories/person.ts";
 import { buildWorld, type World } from "../support/factories/work.ts";
-import { type Seat, type SeatSize, takeSeat } from "../support/seat.ts";
+import type { Seat, SeatSize } from "../support/seat.ts";
 import { patienceMs } from "../support/served-app.ts";
+import { takeSignedInSeat } from "../support/signed-in-seat.ts";
 
 /** A stop is set aside by keyboard, passes, wakes when the piece moves, and is read by those who only look on. With SCREENS=1 with pictures. */
 
@@ -25,8 +24,7 @@ let world: World;
 const folder = join(tmpdir(), "standproud-screens");
 
 async function sit(email: string, size: SeatSize): Promise<Seat> {
-  const seat = await takeSeat(browser, { baseUrl: app.baseUrl, size });
-  await entrance(seat.page).signIn({ email, password: testPassword });
+  const seat = await takeSignedInSeat(browser, { baseUrl: app.baseUrl, email, size });
   await seat.open(`/shop/${world.params.shop}/jobs/${world.job.id}/mockup`);
   await seat.page.locator('section[aria-label="Dry fit"][aria-busy="false"]').waitFor();
   return seat;

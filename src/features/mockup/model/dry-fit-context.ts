@@ -1,8 +1,8 @@
 import type { Brief } from "#shared/contracts/jobs.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
+import { stockOfItems } from "#shared/contracts/stock-on-hand.ts";
 import type { DryFitContext } from "#shared/dry-fit/rule.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
-import { stockOnHand } from "./stock-choices.ts";
 
 /** What the dry fit knows besides the sign, as the server puts it together when it issues. */
 export function dryFitContextOf({
@@ -21,6 +21,6 @@ export function dryFitContextOf({
     overhead: brief.overhead,
     electrical: brief.electrical,
     words: brief.words,
-    stock: stockOnHand(stock),
+    stock: stockOfItems(stock),
   };
 }

@@ -1,5 +1,4 @@
 import type { StockItem } from "#shared/contracts/stock.ts";
-import { stockOfItems } from "#shared/contracts/stock-on-hand.ts";
 import type { Acrylic, Adhesive, Hardware, Hold, Wood } from "#shared/mockup/document.ts";
 import type { HoldChoice } from "./commands/new-layer.ts";
 import { isSame } from "./same.ts";
@@ -38,9 +37,6 @@ export function stockChoices(items: readonly StockItem[]): StockChoices {
     adhesives: items.flatMap((item) => (item.kind === "adhesive" ? [{ ...item.adhesive, stockId: item.id }] : [])),
   };
 }
-
-/** The stock as the dry fit looks at it, here and on the server. */
-export const stockOnHand = stockOfItems;
 
 /** The same sheet, wood, adhesive or hardware, whichever row of the stock list it was taken from. */
 export function isSameStock<T extends { readonly stockId: string | null }>(a: T, b: T): boolean {

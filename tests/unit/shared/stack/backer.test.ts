@@ -2,38 +2,21 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { loadKernel } from "#server/artwork/load-kernel.ts";
 import { regionAreaMm2 } from "#shared/geometry/area.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
-import type { FrameOfSign, MockupDocument, Slats } from "#shared/mockup/document.ts";
+import type { MockupDocument, Slats } from "#shared/mockup/document.ts";
 import { backerThicknessMm, faceRegion, faceStock, frameOf, slatsOf } from "#shared/stack/backer.ts";
 import { computeFigures } from "#shared/stack/compute-figures.ts";
-import { buildLayer, buildSign, plate } from "../../../support/build-sign.ts";
+import { buildLayer, plate } from "../../../support/build-sign.ts";
+import { buildFrame, buildSlatSign } from "../../../support/slat-sign.ts";
 
 let kernel: Kernel;
 beforeAll(async () => {
   kernel = await loadKernel();
 });
 
-const pine = buildSign([]).backer.stock;
-const oak = { ...pine, name: "Red oak", gravity: 0.63, colour: "#C49A6C" };
-const slats = (rest: Partial<Slats> = {}): Slats => ({
-  stock: oak,
-  thickness: 9,
-  pattern: "single",
-  angle: 90,
-  slatWidth: 40,
-  gap: 0,
-  spineWidth: 40,
-  spineOffset: 0,
-  start: { kind: "corner" },
-  direction: "up",
-  overhang: 0,
-  ...rest,
-});
-const frame: FrameOfSign = { stock: oak, width: 20, depth: 30, mitred: true };
-/** Pine of 12 mm, 600 by 400, under oak slats of 9 mm lying across. */
-const sign = (rest: Partial<Slats> = {}, more: Partial<MockupDocument> = {}): MockupDocument => {
-  const plain = buildSign([buildLayer("B", [plate("p", 100, 60, [300, 200])])]);
-  return { ...plain, backer: { ...plain.backer, thickness: 12, slats: slats(rest) }, ...more };
-};
+const frame = buildFrame();
+/** Oak slats on pine with one plate bonded to them. */
+const sign = (rest: Partial<Slats> = {}, more: Partial<MockupDocument> = {}): MockupDocument =>
+  buildSlatSign(rest, [buildLayer("B", [plate("p", 100, 60, [300, 200])])], more);
 
 describe("a backer of slats", () => {
   it("has its face where substrate and slats end, less what sanding takes", () => {
