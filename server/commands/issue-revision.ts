@@ -100,7 +100,7 @@ async function freeze(
     setAsides: await setAsidesToFreeze(context, job.id),
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
-    fontHashes: fontHashes(),
+    fontHashes: { ...fontHashes(), ...letteringHashes(document) },
   };
   const frozen = await freezeDrawing(input, { shopId: shop.id });
   const { stops } = frozen;
@@ -112,3 +112,7 @@ async function freeze(
   }
   return frozen;
 }
+
+/** The hash of the face of each lettering, as it was when its outlines were taken. */
+const letteringHashes = ({ lettering }: MockupDocument): Record<string, string> =>
+  Object.fromEntries(lettering.map(({ face, fontSha256 }) => [face, fontSha256]));

@@ -1,3 +1,4 @@
+import { artworkUsed } from "#shared/mockup/artwork-used.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { newId } from "../db/new-id.ts";
 import { invalid, notAllowed, notFound, stale } from "../http/app-error.ts";
@@ -31,7 +32,7 @@ export async function saveMockup(
       presentMockup(actor, loaded, known),
     );
   }
-  await refuseForeignArtwork(context, { shopId: job.shopId, jobId, document });
+  await refuseForeignArtwork(context, { shopId: job.shopId, clientId: job.clientId, document });
   const saved = { version: version + 1, document: JSON.stringify(document), savedBy: actor.personId, savedAt: now };
   if (known) await known.update(saved, { transaction });
   else {
@@ -43,17 +44,17 @@ export async function saveMockup(
   return { loaded: await refreshJob(context, job), mockup };
 }
 
-/** Pieces may only come from artwork of this very job. */
+/** Pieces may only come from artwork of the job's own client: they are copied from job to job. */
 async function refuseForeignArtwork(
   { transaction }: Context,
-  { shopId, jobId, document }: { shopId: string; jobId: string; document: MockupDocument },
+  { shopId, clientId, document }: { shopId: string; clientId: string; document: MockupDocument },
 ): Promise<void> {
-  const used = new Set(
-    document.layers.flatMap(({ pieces }) =>
-      pieces.flatMap(({ source }) => (source.kind === "artwork" ? [source.artworkId] : [])),
-    ),
-  );
-  const known = await Artwork.count({ where: { id: [...used], shopId, jobId }, transaction });
-  if (known !== used.size)
-    throw invalid([{ pointer: "/document/layers", detail: "A piece comes from artwork that is not on this job." }]);
+  const used = artworkUsed(document);
+  const known = await Artwork.count({
+    where: { id: used, shopId },
+    include: [{ association: "job", where: { clientId }, required: true }],
+    transaction,
+  });
+  if (known !== used.length)
+    throw invalid([{ pointer: "/document/layers", detail: "A piece comes from artwork that is not this client’s." }]);
 }

@@ -132,6 +132,7 @@ export function associate(): void {
   Job.hasMany(JobApprover, { as: "approvers", foreignKey: "jobId" });
   Job.hasMany(Revision, { as: "revisions", foreignKey: "jobId" });
   JobApprover.belongsTo(Contact, { as: "contact", foreignKey: "contactId" });
+  Artwork.belongsTo(Job, { as: "job", foreignKey: "jobId" });
   Artwork.belongsTo(StoredFile, { as: "file", foreignKey: "fileId" });
   Artwork.belongsTo(Person, { as: "adder", foreignKey: "addedBy" });
   Mockup.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });

@@ -1,3 +1,4 @@
+import { artworkUsed } from "#shared/mockup/artwork-used.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { ReadContext } from "../http/context.ts";
 import { Artwork } from "../models/artwork.ts";
@@ -7,11 +8,8 @@ export async function artworkHashes(
   { transaction }: ReadContext,
   { shopId, document }: { shopId: string; document: MockupDocument },
 ): Promise<Record<string, string>> {
-  const used = document.layers.flatMap(({ pieces }) =>
-    pieces.flatMap(({ source }) => (source.kind === "artwork" ? [source.artworkId] : [])),
-  );
   const artworks = await Artwork.findAll({
-    where: { id: [...new Set(used)], shopId },
+    where: { id: artworkUsed(document), shopId },
     attributes: ["id"],
     include: ["file"],
     order: ["id"],

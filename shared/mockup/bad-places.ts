@@ -26,7 +26,7 @@ export function badPlaces(document: unknown, most: number): number {
   return Math.min(count, most);
 }
 
-const sources: readonly unknown[] = ["artwork", "plate"];
+const sources: readonly unknown[] = ["artwork", "plate", "lettering", "margin", "worked"];
 
 function isPiece(value: unknown): boolean {
   const { id, name, source, path, placement, reads, ...rest } = recordOf(value);

@@ -1,5 +1,7 @@
 import { z } from "zod";
 import { type capStudSchema, hardwareSchema } from "./hardware-schemas.ts";
+import { letteringSchema } from "./lettering-schema.ts";
+import { pieceSourceSchema } from "./piece-source.ts";
 import {
   colour,
   coordinate,
@@ -13,13 +15,14 @@ import {
   point,
 } from "./schema-parts.ts";
 import { acrylicSchema, adhesiveSchema, coatSchema, type screwSchema, woodSchema } from "./stock-schemas.ts";
+import { wallPhotoSchema } from "./wall-photo.ts";
 
 /**
  * The mockup document: what a maker edits, a revision freezes and every figure is computed from.
  * Lengths mm, angles degrees, x right and y down from the board's upper left corner, z from the back of the board to the viewer.
  * A changed meaning gets a new version and a step in upgrade.ts; old documents are never rewritten in place.
  */
-export const documentVersion = 3;
+export const documentVersion = 4;
 
 const boardSide = length.min(leastBoardMm, `A board is at least ${leastBoardMm} mm wide and high.`);
 const key = z.string().regex(/^[A-Z]{1,2}$/, "A layer's key is one or two capital letters.");
@@ -65,10 +68,7 @@ export const holdSchema = z.discriminatedUnion("kind", [
 export const pieceSchema = z.strictObject({
   id,
   name: line,
-  source: z.discriminatedUnion("kind", [
-    z.strictObject({ kind: z.literal("artwork"), artworkId: z.uuid(), index: z.int().min(0), colour }),
-    z.strictObject({ kind: z.literal("plate") }),
-  ]),
+  source: pieceSourceSchema,
   /** In the piece's own plane, about its own origin: the centre of its box when it was brought in. */
   path: pathSchema,
   placement: placementSchema,
@@ -89,6 +89,8 @@ export const layerSchema = z.strictObject({
   marked: z.enum(["front", "back", "not stated"]),
   pieces: z.array(pieceSchema).max(2000),
   hidden: z.boolean(),
+  /** Safe from the hand: its pieces and holes can be chosen and looked at, not moved or taken out. */
+  locked: z.boolean(),
 });
 
 export const boardSchema = z.strictObject({
@@ -161,8 +163,12 @@ export const documentSchema = z
     frame: frameSchema.nullable(),
     /** From the wall outward. Key A is the backer's, layers start at B. */
     layers: z.array(layerSchema).max(60),
+    /** Words set as pieces. What they were set with stays here, so that they can be set again. */
+    lettering: z.array(letteringSchema).max(200),
     presentation: z.strictObject({
       wall: colour,
+      /** The place itself, in whose picture the sign is shown; null for a plain wall. */
+      photo: wallPhotoSchema.nullable(),
       light: z.strictObject({
         /** Degrees clockwise from the top. */
         azimuth: z.number().finite().min(0).max(360),
@@ -177,6 +183,9 @@ export const documentSchema = z
   .superRefine((document, context) => {
     const keys = new Set<string>(["A"]);
     const ids = new Set<string>();
+    const set = new Set(document.lettering.map(({ id }) => id));
+    if (set.size < document.lettering.length)
+      context.addIssue({ code: "custom", path: ["lettering"], message: "An id of lettering is used twice." });
     for (const [index, layer] of document.layers.entries()) {
       if (keys.has(layer.key))
         context.addIssue({
@@ -191,6 +200,13 @@ export const documentSchema = z
           context.addIssue({ code: "custom", path: ["layers", index], message: `The id ${thing.id} is used twice.` });
         ids.add(thing.id);
       }
+      for (const { id, source } of layer.pieces)
+        if (source.kind === "lettering" && !set.has(source.letteringId))
+          context.addIssue({
+            code: "custom",
+            path: ["layers", index],
+            message: `Piece ${id} is of lettering that is not there.`,
+          });
     }
   });
 
@@ -210,4 +226,7 @@ export type Coat = z.infer<typeof coatSchema>;
 export type Acrylic = z.infer<typeof acrylicSchema>;
 export type Wood = z.infer<typeof woodSchema>;
 export type Adhesive = z.infer<typeof adhesiveSchema>;
+export type Lettering = z.infer<typeof letteringSchema>;
+export type PieceSource = z.infer<typeof pieceSourceSchema>;
+export type WallPhoto = z.infer<typeof wallPhotoSchema>;
 export type Locate = z.infer<typeof locateSchema>;

@@ -27,8 +27,10 @@ export function emptyDocument(options: {
     backer: { stock: options.backer, thickness: options.thicknessMm ?? 18, grainTurn: 0, slats: null, finish: [] },
     frame: null,
     layers: [],
+    lettering: [],
     presentation: {
       wall: options.wall ?? "#EFE9DC",
+      photo: null,
       light: { azimuth: 315, elevation: 45, angularSize: 0.05 },
       viewingDistance: options.viewingDistanceMm ?? 3000,
     },

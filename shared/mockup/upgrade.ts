@@ -2,6 +2,7 @@ import type { z } from "zod";
 import { documentSchema, documentVersion, type MockupDocument } from "./document.ts";
 import { upgradeFrom1 } from "./upgrade-from-1.ts";
 import { upgradeFrom2 } from "./upgrade-from-2.ts";
+import { upgradeFrom3 } from "./upgrade-from-3.ts";
 
 export type ReadOutcome =
   | { readonly ok: true; readonly document: MockupDocument }
@@ -11,7 +12,7 @@ export type ReadOutcome =
 export type UpgradeStep = (old: Readonly<Record<string, unknown>>) => Record<string, unknown>;
 
 /** By the version a step starts from. */
-const steps: Readonly<Record<number, UpgradeStep>> = { 1: upgradeFrom1, 2: upgradeFrom2 };
+const steps: Readonly<Record<number, UpgradeStep>> = { 1: upgradeFrom1, 2: upgradeFrom2, 3: upgradeFrom3 };
 
 /**
  * A stored document in today's version. The stored text itself stays as it was. Refused with the reason when it is no

@@ -116,6 +116,7 @@ export function buildLayer(key: string, pieces: Piece[], overrides: Partial<Laye
     pieces,
     marked: "not stated",
     hidden: false,
+    locked: false,
     ...overrides,
   };
 }

@@ -187,7 +187,7 @@ function layer(
   thickness: number,
   rest: Pick<Layer, "hold" | "locate" | "pieces">,
 ): Layer {
-  return { key, name, stock, thickness, marked: "back", hidden: false, ...rest };
+  return { key, name, stock, thickness, marked: "back", hidden: false, locked: false, ...rest };
 }
 
 /** The document of "Orrery Books": a pine board of 600 by 400 mm, layers B to G. Fresh at every call. */
@@ -207,7 +207,7 @@ export function orreryBooks(): MockupDocument {
   const planet = (id: string, name: string, at: Point, radius: number, colour: string) =>
     pieceOf(id, name, circlePath(at, radius), colour);
   return documentSchema.parse({
-    version: 3,
+    version: 4,
     board: { outline: { kind: "rectangle" }, width: 600, height: 400, measures: "body" },
     hanging: { kind: "cleat", gap: 6, pose: "upright", carriesKg: 20, points: [] },
     quantity: 1,
@@ -271,7 +271,9 @@ export function orreryBooks(): MockupDocument {
         ),
       }),
     ],
+    lettering: [],
     presentation: {
+      photo: null,
       wall: "#EFE8DC",
       light: { azimuth: 320, elevation: 52, angularSize: 0.22 },
       viewingDistance: 6000,

@@ -170,6 +170,7 @@ export function layer(one: {
     locate: one.hold.kind === "standoff" ? "hole pattern" : "template",
     marked: "back",
     hidden: false,
+    locked: false,
   };
 }
 

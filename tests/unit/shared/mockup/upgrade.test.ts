@@ -37,6 +37,17 @@ it("a plank of version 2 has no slats and no frame", () => {
   if (read.ok) expect(read.document.backer).not.toHaveProperty("kind");
 });
 
+it("a sign of version 3 has nothing locked, lettered or hung in a photo", () => {
+  const read = readDocument(sample(3));
+  expect(read).toMatchObject({ ok: true, document: { lettering: [], presentation: { photo: null } } });
+  if (read.ok) expect(read.document.layers.every(({ locked }) => !locked)).toBe(true);
+});
+
+it("lettering whose setting is gone is refused", () => {
+  const json = z.looseObject({ lettering: z.array(z.unknown()) }).parse(sample(4));
+  expect(readDocument({ ...json, lettering: [] })).toMatchObject({ ok: false, reason: /lettering that is not there/ });
+});
+
 it("a finish in words is kept as it was written, and an upright board's grain stays upright", () => {
   const old = sample(1);
   const first = z.looseObject({ board: z.looseObject({}), backer: z.looseObject({}) }).parse(old);

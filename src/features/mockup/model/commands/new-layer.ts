@@ -30,6 +30,7 @@ export function newLayer(
     marked: "not stated",
     pieces,
     hidden: false,
+    locked: false,
   };
   if (hold.kind !== "standoff" || bare.hold.kind !== "standoff") return bare;
   return { ...bare, hold: { ...bare.hold, holes: propose(bare, { hardware: hold.hardware, id, ...where }) } };

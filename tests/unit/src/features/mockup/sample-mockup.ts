@@ -58,14 +58,16 @@ export function barrel(barrelLength: number, fields: Partial<CapStud> = {}): Cap
 
 export function emptyMockup(fields: Partial<MockupDocument> = {}): MockupDocument {
   return {
-    version: 3,
+    version: 4,
     board: { outline: { kind: "rectangle" }, width: 600, height: 400, measures: "body" },
     hanging: { kind: "cleat", gap: 8, pose: "upright", carriesKg: null, points: [] },
     quantity: 1,
     backer: { stock: pine, thickness: 20, grainTurn: 0, slats: null, finish: [] },
     frame: null,
     layers: [],
+    lettering: [],
     presentation: {
+      photo: null,
       wall: "#EFE8DA",
       light: { azimuth: 330, elevation: 55, angularSize: 0.12 },
       viewingDistance: 6000,
