@@ -2,7 +2,7 @@ import type { Hardware, MockupDocument } from "#shared/mockup/document.ts";
 import type { Guide } from "./catch-guides.ts";
 import { setHole } from "./commands/holes.ts";
 import { movePieces } from "./commands/pieces.ts";
-import { raiseLayer } from "./commands/set-hold.ts";
+import { raiseLayer, setPocket } from "./commands/set-hold.ts";
 
 /** What a hand is moving, measured from where it took hold. */
 export type Drag =
@@ -15,7 +15,9 @@ export type Drag =
     }
   | { readonly kind: "hole"; readonly holeId: string; readonly x: number; readonly y: number }
   /** In the section: `hardware` when the offset caught on a barrel. */
-  | { readonly kind: "raise"; readonly key: string; readonly offset: number; readonly hardware: Hardware | undefined };
+  | { readonly kind: "raise"; readonly key: string; readonly offset: number; readonly hardware: Hardware | undefined }
+  /** In the section: how deep a layer's pocket is. */
+  | { readonly kind: "let in"; readonly key: string; readonly depth: number };
 
 /** The document as it would be if the hand let go now. */
 export function documentOfDrag(document: MockupDocument, drag: Drag | null): MockupDocument {
@@ -27,6 +29,8 @@ export function documentOfDrag(document: MockupDocument, drag: Drag | null): Moc
       return setHole(document, drag);
     case "raise":
       return raiseLayer(document, drag);
+    case "let in":
+      return setPocket(document, drag);
   }
 }
 
@@ -39,5 +43,7 @@ export function labelOfDrag(drag: Drag): string {
       return "Move a hole";
     case "raise":
       return `Raise ${drag.key}`;
+    case "let in":
+      return `Let ${drag.key} in`;
   }
 }

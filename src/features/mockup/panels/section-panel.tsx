@@ -9,7 +9,7 @@ import { useDesk } from "../editor/desk-context.ts";
 import type { Drag } from "../model/drag.ts";
 import { depthScaleFor } from "../model/section-scale.ts";
 import { chooseHole, chooseLayer } from "../model/selection.ts";
-import { RaiseHandle } from "./raise-handle.tsx";
+import { SectionHandle } from "./section-handle.tsx";
 
 type SectionPanelProps = {
   readonly view: DrawingView;
@@ -20,7 +20,7 @@ type SectionPanelProps = {
 const Picture = memo(DrawingSvg);
 const insetPx = 10;
 
-/** The stack from the side, at the elevation's own vertical scale and place. Standoff layers are raised here. */
+/** The stack from the side, at the elevation's own vertical scale and place. Standoff layers are raised here, and pockets cut deeper or less deep. */
 export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
   const { document, figures, figuresOf: drawn, unit, heights, choose } = useDesk();
   const element = useRef<HTMLDivElement>(null);
@@ -75,7 +75,7 @@ export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
         {figures &&
           list &&
           document.layers.map((layer) => (
-            <RaiseHandle
+            <SectionHandle
               key={layer.key}
               layer={layer}
               figures={figures}

@@ -1,0 +1,90 @@
+import { type KeyboardEvent, type PointerEvent, useRef } from "react";
+import { cx } from "@/lib/cx.ts";
+
+type SectionGripProps = {
+  readonly label: string;
+  /** The measure that the grip changes, mm, and how it reads. */
+  readonly now: number;
+  readonly most: number;
+  readonly text: string;
+  readonly title: string;
+  readonly isChosen: boolean;
+  readonly isDragged: boolean;
+  readonly pxPerMm: number;
+  readonly place: { readonly left: number; readonly top: number; readonly width: number; readonly height: number };
+  readonly onTake: () => void;
+  /** So many mm towards the viewer from where it was taken; `free` asks to catch on nothing. */
+  readonly onPull: (by: number, free: boolean) => void;
+  readonly onDrop: () => void;
+  readonly onGiveUp: () => void;
+  readonly onStep: (towards: "viewer" | "wall", fine: boolean) => void;
+};
+
+/** Before that many px a press is no drag. */
+const dragFromPx = 3;
+
+/** What lies over a layer in the section, to be dragged towards the viewer or the wall, or moved by arrows. */
+export function SectionGrip(props: SectionGripProps) {
+  const { label, now, most, text, title, isChosen, isDragged, pxPerMm, place } = props;
+  const from = useRef<number | null>(null);
+
+  function handlePointerDown(event: PointerEvent<HTMLElement>) {
+    if (event.button !== 0) return;
+    props.onTake();
+    event.currentTarget.setPointerCapture(event.pointerId);
+    from.current = event.clientX;
+  }
+
+  function handlePointerMove(event: PointerEvent) {
+    if (from.current === null) return;
+    const px = event.clientX - from.current;
+    if (isDragged || Math.abs(px) >= dragFromPx) props.onPull(px / pxPerMm, event.altKey);
+  }
+
+  function handlePointerUp() {
+    from.current = null;
+    if (isDragged) props.onDrop();
+  }
+
+  function giveUp() {
+    from.current = null;
+    if (isDragged) props.onGiveUp();
+  }
+
+  function handleKeyDown(event: KeyboardEvent) {
+    if (event.key === "Escape") giveUp();
+    const towards = stepOf[event.key];
+    if (towards === undefined) return;
+    event.preventDefault();
+    props.onStep(towards, event.shiftKey);
+  }
+
+  return (
+    <div
+      role="slider"
+      tabIndex={0}
+      aria-label={label}
+      aria-orientation="horizontal"
+      aria-valuemin={0}
+      aria-valuemax={most}
+      aria-valuenow={now}
+      aria-valuetext={text}
+      title={title}
+      onPointerDown={handlePointerDown}
+      onPointerMove={handlePointerMove}
+      onPointerUp={handlePointerUp}
+      onPointerCancel={giveUp}
+      onKeyDown={handleKeyDown}
+      onFocus={props.onTake}
+      className={cx("absolute cursor-ew-resize touch-none", isChosen && "border border-dashed border-indigo")}
+      style={place}
+    />
+  );
+}
+
+const stepOf: Readonly<Record<string, "viewer" | "wall">> = {
+  ArrowRight: "viewer",
+  ArrowUp: "viewer",
+  ArrowLeft: "wall",
+  ArrowDown: "wall",
+};
