@@ -4,6 +4,7 @@ import { Busy } from "@/components/ui/busy.tsx";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
 import type { Drawn } from "../engine/use-engine.ts";
 import type { Drag } from "../model/drag.ts";
+import { HolesByHand } from "./holes-by-hand.tsx";
 import { useCanvasKeys } from "./use-canvas-keys.ts";
 import { useScene } from "./use-scene.ts";
 import { useShownPicture } from "./use-shown-picture.ts";
@@ -53,6 +54,7 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
         Choose a layer in the schedule or a piece in the list below. Arrows move what is chosen by 1 mm, with Shift by
         10; Delete removes it. Plus and minus look closer and farther, 0 shows the whole board.
       </p>
+      <HolesByHand />
       <ViewTools view={view} fit={fit} room={room} onView={onView} />
       {drawn === null && failure === null && (
         <div className="pointer-events-none absolute inset-0 flex items-center justify-center">

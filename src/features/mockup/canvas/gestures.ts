@@ -22,6 +22,8 @@ export type GestureHost = {
   /** Whether a drag from empty ground, or with the space bar down, looks around. */
   readonly spaceDown: () => boolean;
   readonly press: (touched: Touched | null, held: Held) => void;
+  /** Puts something down where a press is, when something is at hand for that; false when nothing is. */
+  readonly put: (point: Point) => boolean;
   readonly pressTwice: (touched: Touched) => void;
   /** `by` is mm from where the hand took hold. */
   readonly drag: (touched: Touched, by: { dx: number; dy: number }, held: Held) => void;
@@ -65,6 +67,10 @@ export function listenToCanvas(canvas: Canvas, host: GestureHost): () => void {
     if (e.button !== 0) return;
     const point = pointOf(place);
     const touched = host.touched(point);
+    if (touched?.kind !== "hole" && host.put(point)) {
+      lastPress = null;
+      return;
+    }
     const twice = touched !== null && lastPress?.id === touched.id && e.timeStamp - lastPress.at < twiceWithinMs;
     lastPress = touched === null ? null : { id: touched.id, at: e.timeStamp };
     if (touched !== null && twice) host.pressTwice(touched);

@@ -1,4 +1,5 @@
 import type { Box, Point } from "#shared/geometry/path.ts";
+import type { CapCover } from "../model/cap-covers.ts";
 import type { Guide } from "../model/catch-guides.ts";
 
 /** What is drawn over the picture to guide the hand. All in mm of the board. */
@@ -7,9 +8,11 @@ export type Marks = {
   readonly chosen: readonly Box[];
   /** The hole that is picked out, with its cap's diameter. */
   readonly hole: (Point & { readonly diameter: number }) | null;
+  /** The holes of the chosen layer with what covers them. */
+  readonly covers: readonly CapCover[];
   readonly guides: readonly Guide[];
   /** A spot that a finding points at. */
   readonly spot: Point | null;
 };
 
-export const noMarks: Marks = { chosen: [], hole: null, guides: [], spot: null };
+export const noMarks: Marks = { chosen: [], hole: null, covers: [], guides: [], spot: null };

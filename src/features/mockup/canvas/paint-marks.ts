@@ -1,6 +1,7 @@
 import { Circle, type FabricObject, Line, Rect } from "fabric/es";
 import { boxUnion } from "#shared/geometry/box.ts";
 import type { Marks } from "./marks.ts";
+import { paintCovers } from "./paint-covers.ts";
 
 /** The theme's indigo (what is chosen) and oxblood (what a finding points at): a canvas has no classes. */
 const indigo = "#34416B";
@@ -9,7 +10,7 @@ const oxblood = "#7A1F2B";
 const still = { selectable: false, evented: false, objectCaching: false, fill: "transparent" } as const;
 
 /** Marks over the picture. Their lines keep their width on the screen: `mmPerPx` is what a pixel is on the board. */
-export function paintMarks({ chosen, hole, guides, spot }: Marks, mmPerPx: number): FabricObject[] {
+export function paintMarks({ chosen, hole, covers, guides, spot }: Marks, mmPerPx: number): FabricObject[] {
   const px = (count: number) => count * mmPerPx;
   const dashed = { ...still, stroke: indigo, strokeWidth: px(1.5), strokeDashArray: [px(6), px(4)] };
   const around = boxUnion(chosen);
@@ -28,6 +29,7 @@ export function paintMarks({ chosen, hole, guides, spot }: Marks, mmPerPx: numbe
           }),
         ]
       : []),
+    ...paintCovers(covers, mmPerPx),
     ...guides.map(({ axis, at }) => {
       const ends: [number, number, number, number] = axis === "x" ? [at, -far, at, far] : [-far, at, far, at];
       return new Line(ends, { ...dashed, strokeWidth: px(1), strokeDashArray: [px(14), px(4), px(2), px(4)] });

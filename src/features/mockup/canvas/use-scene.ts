@@ -1,8 +1,10 @@
 import { type RefObject, useEffect, useEffectEvent, useState } from "react";
 import { type DrawingView, viewScaled } from "@/lib/drawing-view.ts";
 import { useDesk } from "../editor/desk-context.ts";
+import { newId } from "../editor/new-id.ts";
 import { catchGuides } from "../model/catch-guides.ts";
 import { boxesToLineUpWith, boxOfChosen, findHole } from "../model/chosen-box.ts";
+import { addHole } from "../model/commands/holes.ts";
 import { type Drag, documentOfDrag, labelOfDrag } from "../model/drag.ts";
 import { holeAt, pieceAt } from "../model/piece-at.ts";
 import { chooseAlso, chooseHole, chooseLayer, choosePiece, layerOfPiece, nothingChosen } from "../model/selection.ts";
@@ -21,13 +23,15 @@ type Hand = {
 
 /** How near a finger must come to an outline, and a moved edge to a line, px. */
 const reachPx = 6;
+/** A hole put down by hand lies on whole and half millimetres. */
+const putStepMm = 0.5;
 
 /** A fabric scene in an element of the page, whose gestures choose and drag what is on the desk; null until it is there. */
 export function useScene(
   place: RefObject<HTMLElement | null>,
   { drag, onDrag, view, fit, onView, spaceDown }: Hand,
 ): Scene | null {
-  const { document, figures, figuresOf, selection, edit, choose } = useDesk();
+  const { document, figures, figuresOf, selection, site, holesByHand, edit, choose } = useDesk();
   const [scene, setScene] = useState<Scene | null>(null);
 
   // A gesture asks for what is true when the hand moves, not for what was when the scene began to listen.
@@ -46,6 +50,18 @@ export function useScene(
       if (layer && more) choose(chooseAlso(document, selection, layer.key));
       else if (layer && !selection.pieceIds.includes(what.id)) choose(chooseLayer(document, layer.key));
     }
+  });
+  const put = useEffectEvent<GestureHost["put"]>(({ x, y }) => {
+    const key = holesByHand;
+    if (key === null) return false;
+    const id = newId();
+    const at = { x: Math.round(x / putStepMm) * putStepMm, y: Math.round(y / putStepMm) * putStepMm };
+    edit({
+      label: `Add a hole to ${key}`,
+      change: (before) => addHole(before, { key, id, site, ...at }),
+      choose: (after) => chooseHole(after, id),
+    });
+    return true;
   });
   const pressTwice = useEffectEvent<GestureHost["pressTwice"]>((what) => {
     if (what.kind === "piece") choose(choosePiece(document, what.id));
@@ -90,6 +106,7 @@ export function useScene(
       spaceDown: () => spaceDown.current,
       touched: (point) => touched(point),
       press: (what, held) => press(what, held),
+      put: (point) => put(point),
       pressTwice: (what) => pressTwice(what),
       drag: (what, by, held) => pull(what, by, held),
       drop: () => drop(),

@@ -3,6 +3,7 @@ import type { Point } from "#shared/geometry/path.ts";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import type { Drawn } from "../engine/use-engine.ts";
+import { capCoversOf } from "../model/cap-covers.ts";
 import { castShadows } from "../model/cast-shadows.ts";
 import { boxOfChosen, findHole } from "../model/chosen-box.ts";
 import { type Drag, documentOfDrag } from "../model/drag.ts";
@@ -22,8 +23,9 @@ type Shown = {
  * for the engine; and over it the marks of what is chosen, caught or found.
  */
 export function useShownPicture(scene: Scene | null, { drawn, drag, view, room, spot }: Shown): void {
-  const { document, figures, figuresOf, selection } = useDesk();
-  const { pieceIds, holeId } = selection;
+  const { document, figures, figuresOf, selection, site } = useDesk();
+  const { layerKey, pieceIds, holeId } = selection;
+  const { limits } = site;
   const { wall } = document.presentation;
   const elevation = drawn?.elevation ?? null;
   const of = drawn?.input.document ?? document;
@@ -59,8 +61,9 @@ export function useShownPicture(scene: Scene | null, { drawn, drag, view, room, 
     scene?.mark({
       chosen: chosenBox === null ? [] : [chosenBox],
       hole: hole === null ? null : { x: hole.x, y: hole.y, diameter: hole.seenDiameter },
+      covers: capCoversOf(wanted, layerKey, limits),
       guides: drag?.kind === "pieces" ? drag.guides : [],
       spot,
     });
-  }, [scene, chosenBox, wanted, holeId, drag, spot]);
+  }, [scene, chosenBox, wanted, layerKey, holeId, limits, drag, spot]);
 }

@@ -22,6 +22,9 @@ export type Desk = {
   readonly figures: Figures | null;
   /** The document that the figures are of. */
   readonly figuresOf: MockupDocument;
+  /** The standoff layer into which a press on the elevation puts a hole; null while a press chooses. */
+  readonly holesByHand: string | null;
+  readonly putHolesByHand: (key: string | null) => void;
   readonly edit: (edit: Edit) => void;
   readonly choose: (selection: Selection) => void;
 };

@@ -1,8 +1,11 @@
 import type { Hold, Layer } from "#shared/mockup/document.ts";
+import { formatLengthWithUnit } from "#shared/units/format-length.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
 import { Table } from "@/components/ui/table.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
+import { type CapCover, capCovers } from "../model/cap-covers.ts";
 import { addHole, fitHoles, fixHole, proposeHoles, removeHole, setHole } from "../model/commands/holes.ts";
 import { boxOfPieces } from "../model/commands/pieces.ts";
 import { coordinateBounds, holeBounds } from "../model/limits.ts";
@@ -14,8 +17,10 @@ type HolesTableProps = { readonly layer: Layer; readonly hold: Extract<Hold, { k
 
 /** The standoff holes of a layer: where they are, how wide, and which one is fixed. */
 export function HolesTable({ layer, hold }: HolesTableProps) {
-  const { document, selection, edit, choose, unit, site } = useDesk();
+  const { document, selection, edit, choose, unit, site, holesByHand, putHolesByHand } = useDesk();
   const { key } = layer;
+  const covers = new Map(capCovers(hold, site.limits).map((cover) => [cover.id, cover]));
+  const byHand = holesByHand === key;
 
   function add() {
     const box = boxOfPieces(
@@ -36,6 +41,9 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
       <div className="flex flex-wrap items-baseline gap-x-3 pb-1">
         <h3 className="font-serif text-sm font-bold text-ink">Holes of {key}</h3>
         <WordButton onClick={add}>Add a hole</WordButton>
+        <WordButton aria-pressed={byHand} onClick={() => putHolesByHand(byHand ? null : key)}>
+          {byHand ? "Stop putting holes by hand" : "Put holes by hand"}
+        </WordButton>
         <WordButton
           onClick={() => {
             const id = newId();
@@ -59,7 +67,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
         <Table caption={`Holes of ${key}`}>
           <thead>
             <tr>
-              {["Hole", `x, ${unit}`, `y, ${unit}`, `Diameter, ${unit}`, "Fixed"].map((head) => (
+              {["Hole", `x, ${unit}`, `y, ${unit}`, `Diameter, ${unit}`, "Cap covers", "Fixed"].map((head) => (
                 <DeskHead key={head}>{head}</DeskHead>
               ))}
               <DeskHead>
@@ -109,6 +117,9 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       onCommit={(mm) => set({ diameter: mm })}
                     />
                   </DeskCell>
+                  <DeskCell className="w-36">
+                    <CoverWords cover={covers.get(hole.id)} unit={unit} />
+                  </DeskCell>
                   <DeskCell className="w-20">
                     <input
                       type="radio"
@@ -144,5 +155,15 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
         </Table>
       )}
     </div>
+  );
+}
+
+/** How far the cap still reaches over a hole that lies hard over to one side. */
+function CoverWords({ cover, unit }: { readonly cover: CapCover | undefined; readonly unit: LengthUnit }) {
+  if (cover === undefined) return <>no hole in the panel</>;
+  const by = formatLengthWithUnit(Math.abs(cover.reach), unit);
+  if (cover.isEnough) return <>by {by} at least</>;
+  return (
+    <span className="font-semibold text-oxblood">{cover.reach < 0 ? `shows by up to ${by}` : `only by ${by}`}</span>
   );
 }

@@ -5,6 +5,7 @@ import type { StockItem } from "#shared/contracts/stock.ts";
 import { applyMend } from "#shared/dry-fit/apply-mend.ts";
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Limits } from "#shared/dry-fit/limits.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { BandWording } from "#shared/units/format-band.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import type { DrawingView } from "@/lib/drawing-view.ts";
@@ -64,6 +65,7 @@ export function MockupDesk(props: MockupDeskProps) {
   const [view, setView] = useState<DrawingView | null>(null);
   const [finding, setFinding] = useState<Finding | null>(null);
   const [dialog, setDialog] = useState<DeskDialog | null>(null);
+  const [holesOf, putHolesByHand] = useState<string | null>(null);
   const [heights, letterHeights] = useState<BandWording>("nominal");
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
@@ -83,6 +85,7 @@ export function MockupDesk(props: MockupDeskProps) {
   const settingAside = useSettingAside({ shop, jobId: job.id, save: saving.saveNow });
   useUndoKeys(dispatch);
 
+  const holesByHand = takesHoles(document, editor.selection.layerKey, holesOf) ? holesOf : null;
   const desk = useMemo(
     (): Desk => ({
       document,
@@ -94,13 +97,16 @@ export function MockupDesk(props: MockupDeskProps) {
       letterHeights,
       figures: figures?.figures ?? null,
       figuresOf: figures?.of ?? document,
+      holesByHand,
+      putHolesByHand,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
       choose: (selection) => {
         setFinding(null);
+        if (selection.layerKey !== holesByHand) putHolesByHand(null);
         dispatch({ kind: "choose", selection });
       },
     }),
-    [document, editor.selection, unit, stock, whereItHangs, limits, heights, figures],
+    [document, editor.selection, unit, stock, whereItHangs, limits, heights, figures, holesByHand],
   );
 
   function show(next: Finding) {
@@ -209,4 +215,10 @@ export function MockupDesk(props: MockupDeskProps) {
       <LeaveDialog saving={saving} />
     </DeskContext>
   );
+}
+
+/** Whether holes can be put by hand into the layer that they were asked for: it is still the chosen one, and stands off. */
+function takesHoles({ layers }: MockupDocument, chosenKey: string | null, key: string | null): boolean {
+  const layer = layers.find((one) => one.key === key);
+  return layer !== undefined && key === chosenKey && layer.hold.kind === "standoff" && !layer.locked && !layer.hidden;
 }

@@ -3,12 +3,12 @@ import { act, useReducer, useState } from "react";
 import { beforeEach, describe, expect, it } from "vitest";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
-import { type Desk, DeskContext } from "@/features/mockup/editor/desk-context.ts";
+import { DeskContext } from "@/features/mockup/editor/desk-context.ts";
 import { type Editor, nextEditor, startEditor } from "@/features/mockup/model/editor.ts";
 import { BoardDialog } from "@/features/mockup/panels/board-dialog.tsx";
 import { button, field, press, render, type, until } from "../../support/render.tsx";
+import { buildDesk } from "./build-desk.ts";
 import { emptyMockup, pine } from "./sample-mockup.ts";
-import { inside } from "./sites.ts";
 
 let editor: Editor;
 let isOpen: boolean;
@@ -18,19 +18,8 @@ function Page({ document, unit, at }: { document: MockupDocument; unit: LengthUn
   const [open, setOpen] = useState(true);
   editor = held;
   isOpen = open;
-  const desk: Desk = {
-    document: held.history.present,
-    selection: held.selection,
-    unit,
-    stock: { acrylics: [], woods: [{ wood: pine, thicknessesMm: [18, 20] }], hardware: [], adhesives: [] },
-    site: inside,
-    heights: "nominal",
-    letterHeights: () => undefined,
-    figures: null,
-    figuresOf: held.history.present,
-    edit: (edit) => dispatch({ kind: "edit", ...edit }),
-    choose: () => undefined,
-  };
+  const stock = { acrylics: [], woods: [{ wood: pine, thicknessesMm: [18, 20] }], hardware: [], adhesives: [] };
+  const desk = buildDesk(held, dispatch, { unit, stock });
   return (
     <DeskContext value={desk}>
       <BoardDialog open={open} onOpenChange={setOpen} {...(at ? { at } : {})} />

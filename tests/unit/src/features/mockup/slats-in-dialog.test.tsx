@@ -4,7 +4,7 @@ import { afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
 import { loadKernel } from "#server/artwork/load-kernel.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import { type Desk, DeskContext } from "@/features/mockup/editor/desk-context.ts";
+import { DeskContext } from "@/features/mockup/editor/desk-context.ts";
 import type { BoardPort } from "@/features/mockup/engine/board-messages.ts";
 import { layBoard } from "@/features/mockup/engine/lay-board.ts";
 import { BoardWorkerContext } from "@/features/mockup/engine/use-laid-board.ts";
@@ -12,8 +12,8 @@ import { type Editor, nextEditor, startEditor } from "@/features/mockup/model/ed
 import { BoardDialog } from "@/features/mockup/panels/board-dialog.tsx";
 import { walnut } from "../../../../support/slat-signs.ts";
 import { button, field, press, render, type, until } from "../../support/render.tsx";
+import { buildDesk } from "./build-desk.ts";
 import { emptyMockup, pine } from "./sample-mockup.ts";
-import { inside } from "./sites.ts";
 
 let kernel: Kernel;
 let editor: Editor;
@@ -47,19 +47,7 @@ function Page({ document }: { document: MockupDocument }) {
     { wood: pine, thicknessesMm: [12, 18, 20] },
     { wood: walnut, thicknessesMm: [18] },
   ];
-  const desk: Desk = {
-    document: held.history.present,
-    selection: held.selection,
-    unit: "mm",
-    stock: { acrylics: [], woods, hardware: [], adhesives: [] },
-    site: inside,
-    heights: "nominal",
-    letterHeights: () => undefined,
-    figures: null,
-    figuresOf: held.history.present,
-    edit: (edit) => dispatch({ kind: "edit", ...edit }),
-    choose: () => undefined,
-  };
+  const desk = buildDesk(held, dispatch, { stock: { acrylics: [], woods, hardware: [], adhesives: [] } });
   return (
     <BoardWorkerContext value={portHere}>
       <DeskContext value={desk}>

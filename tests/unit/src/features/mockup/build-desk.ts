@@ -1,0 +1,27 @@
+import type { Desk } from "@/features/mockup/editor/desk-context.ts";
+import type { Editor, EditorAction } from "@/features/mockup/model/editor.ts";
+import { inside } from "./sites.ts";
+
+/** A desk for one panel: the editor's document and choice, edits taken, everything else empty unless a test says otherwise. */
+export function buildDesk(
+  { history, selection }: Editor,
+  dispatch: (action: EditorAction) => void,
+  overrides: Partial<Desk> = {},
+): Desk {
+  return {
+    document: history.present,
+    selection,
+    unit: "mm",
+    stock: { acrylics: [], woods: [], hardware: [], adhesives: [] },
+    site: inside,
+    heights: "nominal",
+    letterHeights: () => undefined,
+    figures: null,
+    figuresOf: history.present,
+    holesByHand: null,
+    putHolesByHand: () => undefined,
+    edit: (edit) => dispatch({ kind: "edit", ...edit }),
+    choose: (next) => dispatch({ kind: "choose", selection: next }),
+    ...overrides,
+  };
+}
