@@ -8,7 +8,7 @@ export function HolesByHand() {
   return (
     <p
       role="status"
-      className="absolute inset-x-0 top-12 mx-auto flex w-fit max-w-full items-center gap-3 border border-indigo bg-sheet px-3 py-1 text-sm text-ink"
+      className="absolute top-2 right-2 flex items-center gap-3 border border-indigo bg-sheet px-3 py-1 text-sm text-ink"
     >
       Press where a standoff of {holesByHand} goes. Drag one to move it.
       <WordButton onClick={() => putHolesByHand(null)}>Done</WordButton>

@@ -98,7 +98,10 @@ export function MockupDesk(props: MockupDeskProps) {
       figures: figures?.figures ?? null,
       figuresOf: figures?.of ?? document,
       holesByHand,
-      putHolesByHand,
+      putHolesByHand: (key) => {
+        putHolesByHand(key);
+        if (key !== null) frame.current?.scrollIntoView({ block: "nearest" });
+      },
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
       choose: (selection) => {
         setFinding(null);
