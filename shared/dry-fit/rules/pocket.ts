@@ -3,17 +3,16 @@ import { pocketDepthToleranceMm, pocketFloor } from "../../bonds/pocket-floor.ts
 import { type Kernel, remembered } from "../../geometry/kernel.ts";
 import type { Point } from "../../geometry/path.ts";
 import { isShorter } from "../../geometry/tolerance.ts";
-import { sheetBand } from "../../materials/sheet-tolerance.ts";
 import { countOf } from "../../mockup/change.ts";
 import type { Hold, Layer } from "../../mockup/document.ts";
-import { backerThicknessMm, faceStock } from "../../stack/backer.ts";
+import { faceStock } from "../../stack/backer.ts";
 import type { PieceFigures } from "../../stack/figures.ts";
-import { type Banded, exactly } from "../../units/banded.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { type JoinedLayer, joinedLayers, type PieceWithFigures, piecesOf } from "../joints.ts";
 import type { Limits } from "../limits.ts";
 import type { Mend } from "../mend.ts";
+import { cutBand, deepestPocketMm } from "../pocket-depth.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 import { layerWords, piecesWords } from "../words.ts";
 
@@ -36,15 +35,10 @@ function pocketed(input: RuleInput): Pocketed[] {
   });
 }
 
-/** How thick what a pocket is cut into may be. */
-function cutBand(under: Layer | null, { document }: Pick<RuleInput, "document">): Banded {
-  return under ? sheetBand(under.stock.process, under.thickness) : exactly(backerThicknessMm(document.backer));
-}
-
 function checkFloor({ layer, hold, joints }: Pocketed, input: RuleInput): Finding[] {
   const mm = (length: number) => formatFine(length, input.context.unit);
   return joints.flatMap(({ under, pieces }): Finding[] => {
-    const band = cutBand(under, input);
+    const band = cutBand(under, input.document);
     const floor = pocketFloor(band, hold.depth, { share: input.limits.pocketFloorShare });
     if (!floor.ok || floor.value.holds) return [];
     const { floorMm, neededMm } = floor.value;
@@ -138,7 +132,7 @@ function mends(finding: Finding, input: RuleInput): Mend[] {
   const { layer, hold } = found;
   const mm = (length: number) => formatFine(length, input.context.unit);
   if (checkFloor(found, input).some(({ text }) => text === finding.text)) {
-    const depth = deepestMm(found, input);
+    const depth = deepestPocketMm(found.joints, input);
     if (depth < leastDepthMm) return [];
     const label = `Cut the pocket ${mm(depth)} deep`;
     return [{ label, steps: [{ kind: "pocket", layerKey: layer.key, depth, clearance: hold.clearance }] }];
@@ -151,16 +145,6 @@ function mends(finding: Finding, input: RuleInput): Mend[] {
 
 /** A pocket shallower than this is a mark, not a pocket. */
 const leastDepthMm = 0.3;
-
-/** The deepest cut in whole tenths that leaves the floor of everything under the layer. */
-function deepestMm({ joints }: Pocketed, input: RuleInput): number {
-  const depths = joints.map(({ under }) => {
-    const { least, nominal } = cutBand(under, input);
-    return least - pocketDepthToleranceMm - input.limits.pocketFloorShare * nominal;
-  });
-  // A hair more, so that 1.1 that binary holds as a little less stays 1.1.
-  return Math.floor(Math.min(...depths) * 10 + 1e-6) / 10;
-}
 
 /** Clearance in whole hundredths whose gap lies in the middle of what fits, or as near to it as cutters leave it. */
 function fittingClearance(limits: Limits): number | null {

@@ -7,27 +7,24 @@ export type PocketCatch = { readonly depth: number; readonly what: "half in" | "
 const alikeMm = 0.05;
 
 /**
- * Depths that mean something for a piece of `thickness` let into something `cutInto` thick, both mm, shallowest first: half
- * of it in, its face flush, and the deepest that leaves `floorShare` of what is cut (a share of 1, rule 19). None is deeper
- * than that, except nothing is left of the rule because what is cut is not known (`cutInto` null).
+ * Depths that mean something for a piece of `thickness` let into what takes a pocket of `deepest` at most (rule 19; null
+ * where that is not known), mm, shallowest first: half of it in, its face flush, and the deepest. None is deeper than that.
  */
 export function pocketCatches({
   thickness,
-  cutInto,
-  floorShare,
+  deepest,
 }: {
   readonly thickness: number;
-  readonly cutInto: number | null;
-  readonly floorShare: number;
+  readonly deepest: number | null;
 }): PocketCatch[] {
-  const deepest = cutInto === null ? Number.POSITIVE_INFINITY : Math.floor(cutInto * (1 - floorShare) * 10) / 10;
+  const most = deepest ?? Number.POSITIVE_INFINITY;
   const wanted: PocketCatch[] = [
     { depth: roundMm(thickness / 2), what: "half in" },
     { depth: roundMm(thickness), what: "flush" },
-    { depth: deepest, what: "deepest" },
+    { depth: most, what: "deepest" },
   ];
   return wanted
-    .filter(({ depth }) => Number.isFinite(depth) && depth > 0 && depth <= deepest)
+    .filter(({ depth }) => Number.isFinite(depth) && depth > 0 && depth <= most)
     .filter(({ depth }, index, all) => all.findIndex((other) => Math.abs(other.depth - depth) < alikeMm) === index)
     .toSorted((a, b) => a.depth - b.depth);
 }

@@ -1,8 +1,8 @@
+import { deepestPocketOf } from "#shared/dry-fit/pocket-depth.ts";
 import type { Hold } from "#shared/mockup/document.ts";
 import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { setPocket } from "../model/commands/set-hold.ts";
-import { thicknessUnder } from "../model/cut-into.ts";
 import { labelOfDrag } from "../model/drag.ts";
 import { pocketDepthBounds } from "../model/limits.ts";
 import { catchDepth, nextDepth, pocketCatches } from "../model/pocket-catches.ts";
@@ -28,8 +28,8 @@ export function PocketHandle({ layer, hold, shownDepth, at, ...section }: Pocket
   const isChosen = selection.layerKey === key;
   const face = at.bottom + shownDepth;
   const sunk = drag?.kind === "let in" && drag.key === key ? drag.depth : depth;
-  const floorShare = site.limits.pocketFloorShare;
-  const catches = pocketCatches({ thickness, cutInto: thicknessUnder(drawn, figures, key), floorShare });
+  const deepest = deepestPocketOf({ document: drawn, figures, limits: site.limits }, key);
+  const catches = pocketCatches({ thickness, deepest });
   const within = (mm: number) => Math.min(pocketDepthBounds.most, Math.max(pocketDepthBounds.least, mm));
 
   function pull(by: number, free: boolean) {
