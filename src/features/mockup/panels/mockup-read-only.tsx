@@ -11,10 +11,11 @@ import { formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { Notice } from "@/components/ui/notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
-import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import type { DrawingView } from "@/lib/drawing-view.ts";
 import { DrawingViewer } from "@/lib/drawing-viewer.tsx";
+import { ScheduleList, ScheduleTable } from "@/lib/schedule.tsx";
+import { useMedia } from "@/lib/use-media.ts";
 import { useRoom } from "@/lib/use-room.ts";
 import { fitSign, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts";
 import { useStandings } from "../editor/use-standings.ts";
@@ -47,6 +48,7 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
   const { document } = mockup;
   const { board, frame: frameOfSign } = document;
   const whole = signBox(document);
+  const isWide = useMedia("(min-width: 64rem)");
   // On a phone dimension lines would leave no room for the sign; its size stands under it in words.
   const dimensions = room !== null && room.width >= 600;
   const paperScale = room === null ? null : paperScaleAt(fitSign(whole, usualMargins, room).scale);
@@ -118,30 +120,13 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
               : `Board ${formatSize(board.width, board.height, unit)}`}
           </p>
           <h2 className="font-serif text-base font-bold text-ink">Schedule</h2>
-          <Table caption="Layers from the wall outward">
-            <thead>
-              <tr>
-                {["Key", "What", "Stock", "Thick", "Held by", "Offset", "Top at", "Pieces", "Mass"].map((head) => (
-                  <HeadCell key={head}>{head}</HeadCell>
-                ))}
-              </tr>
-            </thead>
-            <tbody>
-              {scheduleRows(document, figures.figures, unit).map((row) => (
-                <tr key={row.key}>
-                  <RowHead>{row.key}</RowHead>
-                  <Cell className="min-w-32">{row.what}</Cell>
-                  <Cell>{row.stock}</Cell>
-                  <Cell>{row.thickness}</Cell>
-                  <Cell className="min-w-44">{row.heldBy}</Cell>
-                  <Cell>{row.offset}</Cell>
-                  <Cell>{row.topAt}</Cell>
-                  <Cell>{row.pieces}</Cell>
-                  <Cell className="whitespace-nowrap">{row.mass}</Cell>
-                </tr>
-              ))}
-            </tbody>
-          </Table>
+          {isWide ? (
+            <ScheduleTable rows={scheduleRows(document, figures.figures, unit)} />
+          ) : (
+            <div className="-mx-4 border-y border-rule sm:-mx-6">
+              <ScheduleList rows={scheduleRows(document, figures.figures, unit)} unit={unit} />
+            </div>
+          )}
           <p className="text-fine text-graphite">
             {scheduleTotal(document, figures.figures, unit)} {makingWords(document, unit)}
           </p>

@@ -1,7 +1,8 @@
-import type { SheetView } from "#shared/contracts/revisions.ts";
+import type { ScheduleRow } from "#shared/drawing/schedule.ts";
+import type { LengthUnit } from "#shared/units/length.ts";
 import { Cell, HeadCell, RowHead, Table } from "@/components/ui/table.tsx";
 
-type ScheduleProps = { readonly rows: SheetView["schedule"]; readonly unit: SheetView["job"]["unit"] };
+type ScheduleProps = { readonly rows: readonly ScheduleRow[]; readonly unit: LengthUnit };
 
 /** A length as the schedule letters it, with its unit where the lettering has none of its own. */
 const withUnit = (length: string, unit: ScheduleProps["unit"]): string =>
