@@ -15,7 +15,7 @@ import { mostCoats } from "../coat-draft.ts";
 import { coordinateOf, lengthOf, roundMm } from "../limits.ts";
 import { boardOutline, outlineOfPiece } from "../outline-of-piece.ts";
 import { withFields } from "../same.ts";
-import { movePieces, removePieces } from "./pieces.ts";
+import { moveAllPieces, removePieces } from "./pieces.ts";
 
 type Hanging = MockupDocument["hanging"];
 
@@ -42,8 +42,8 @@ export type BoardFields = {
 
 /**
  * Sets what is given of the board, its backer, frame, hanging and showing. A value that a document can't hold is left as it was.
- * A board of another size grows or shrinks about its middle, with everything on it and the wall's fixings keeping their
- * place from there; one that takes the outline of a piece comes to lie about that piece.
+ * A board of another size grows or shrinks about its middle, with everything on it, locked or not, and the wall's fixings
+ * keeping their place from there; one that takes the outline of a piece comes to lie about that piece.
  */
 export function setBoard(document: MockupDocument, fields: BoardFields): MockupDocument {
   const source = fields.outlineOf ? outlineOfPiece(document, fields.outlineOf.pieceId) : null;
@@ -55,8 +55,7 @@ export function setBoard(document: MockupDocument, fields: BoardFields): MockupD
     ? { ...sized, board: withFields(sized.board, { outline: boardOutline(source, sized.board) }) }
     : sized;
   const points = fields.hanging?.points ?? movedPoints(document.hanging.points, by);
-  const moved = movePieces(withFields(shaped, { hanging: withFields(shaped.hanging, { points: [...points] }) }), {
-    pieceIds: document.layers.flatMap(({ pieces }) => pieces.map(({ id }) => id)),
+  const moved = moveAllPieces(withFields(shaped, { hanging: withFields(shaped.hanging, { points: [...points] }) }), {
     dx: by.x,
     dy: by.y,
   });
