@@ -1,4 +1,5 @@
 import svgpath from "svgpath";
+import { cubicOfQuadratic } from "./cubic-of-quadratic.ts";
 import type { Path, Point, Ring, Segment } from "./path.ts";
 
 /**
@@ -90,13 +91,4 @@ export function subpathsFromText(text: string): Subpath[] | null {
     }
   });
   return finite ? subpaths : null;
-}
-
-/** The same curve with handles two thirds of the way to the quadratic's one. */
-function cubicOfQuadratic(from: Point, control: Point, to: Point): Segment {
-  const towards = (end: Point): Point => ({
-    x: end.x + (2 / 3) * (control.x - end.x),
-    y: end.y + (2 / 3) * (control.y - end.y),
-  });
-  return { kind: "cubic", c1: towards(from), c2: towards(to), to };
 }
