@@ -1,0 +1,3 @@
+import { checkScreens } from "../support/check-screens.ts";
+
+checkScreens("phone");
