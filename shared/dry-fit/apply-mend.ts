@@ -1,12 +1,15 @@
+import { artworkOf } from "../mockup/artwork-used.ts";
 import type { Hold, Hole, Layer, MockupDocument } from "../mockup/document.ts";
 import { splitLayer } from "../mockup/split-layer.ts";
+import { withoutUnusedLettering } from "../mockup/without-unused-lettering.ts";
 import type { Mend, MendStep } from "./mend.ts";
 
 /**
- * The document after a mend; the same object when none of its steps finds what it is about, as after that was deleted.
+ * The document after a mend; the same object when none of its steps finds what it is about, as after that was deleted or locked.
  */
 export function applyMend(document: MockupDocument, mend: Mend): MockupDocument {
-  return mend.steps.reduce(applyStep, document);
+  const mended = mend.steps.reduce(applyStep, document);
+  return mended === document ? document : withoutUnusedLettering(mended);
 }
 
 function applyStep(document: MockupDocument, step: MendStep): MockupDocument {
@@ -82,7 +85,7 @@ type Piece = Layer["pieces"][number];
 type StandoffHold = Extract<Hold, { kind: "standoff" }>;
 
 function changeLayer(document: MockupDocument, key: string, change: (layer: Layer) => Layer): MockupDocument {
-  const changed = document.layers.map((layer) => (layer.key === key ? change(layer) : layer));
+  const changed = document.layers.map((layer) => (layer.key === key && !layer.locked ? change(layer) : layer));
   return changed.every((layer, index) => layer === document.layers[index])
     ? document
     : { ...document, layers: changed };
@@ -141,6 +144,7 @@ function splitPiece(
       ...piece,
       ...part,
       name: piece.name === "" ? "" : `${piece.name.slice(0, 100)}, ${index + 1} of ${parts.length}`,
+      source: { kind: "worked", how: "split", artworkIds: [...artworkOf(piece.source)] },
       reads: index === 0 ? piece.reads : "",
     })),
   );

@@ -2,6 +2,7 @@ import { regionContains } from "../geometry/contains.ts";
 import { flattenPath } from "../geometry/flatten.ts";
 import { placeRegion } from "../geometry/placement.ts";
 import type { Adhesive, Hold, Hole, Layer, MockupDocument, Piece } from "./document.ts";
+import { freeLayerName } from "./free-layer-name.ts";
 import { nextFreeKeys } from "./layer-key.ts";
 
 /** As many layers as a document takes. */
@@ -16,18 +17,18 @@ export type LayerSplit = {
 
 /**
  * Takes pieces out of their layer into a new one next to it, of the same stock, with the standoff holes that lie in them. The
- * same document when no piece or every piece is named, or when it has as many layers as it takes.
+ * same document when no piece or every piece is named, when the layer is locked, or when there are as many as a document takes.
  */
 export function splitLayer(document: MockupDocument, { layerKey, pieceIds, adhesive }: LayerSplit): MockupDocument {
   const layer = document.layers.find(({ key }) => key === layerKey);
   const [key] = nextFreeKeys(document, 1);
   const chosen = new Set(pieceIds);
   const taken = layer?.pieces.filter(({ id }) => chosen.has(id)) ?? [];
-  if (!layer || !key || document.layers.length >= mostLayers) return document;
+  if (!layer || layer.locked || !key || document.layers.length >= mostLayers) return document;
   if (taken.length === 0 || taken.length === layer.pieces.length) return document;
   const [holdOfTaken, holdOfRest] = splitHold(layer.hold, taken);
   const rest = { ...layer, hold: holdOfRest, pieces: layer.pieces.filter(({ id }) => !chosen.has(id)) };
-  const same: Layer = { ...layer, key, name: freeName(document, layer.name), hold: holdOfTaken, pieces: taken };
+  const same: Layer = { ...layer, key, name: freeLayerName(document, layer.name), hold: holdOfTaken, pieces: taken };
   const split = adhesive ? bonded(same, adhesive) : same;
   return { ...document, layers: document.layers.flatMap((one) => (one === layer ? [rest, split] : [one])) };
 }
@@ -51,12 +52,3 @@ function splitHold(hold: Hold, taken: readonly Piece[]): readonly [Hold, Hold] {
 /** A part without the fixed hole takes its first for it. */
 const withFixed = (holes: Hole[]): Hole[] =>
   holes.some(({ fixed }) => fixed) ? holes : holes.map((hole, index) => ({ ...hole, fixed: index === 0 }));
-
-/** The layer's name with the first number from 2 that no layer has. */
-function freeName({ layers }: MockupDocument, name: string): string {
-  const base = name.replace(/ \d+$/, "").slice(0, 110);
-  const names = new Set(layers.map((layer) => layer.name));
-  let number = 2;
-  while (names.has(`${base} ${number}`)) number++;
-  return `${base} ${number}`;
-}

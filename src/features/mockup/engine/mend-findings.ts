@@ -1,3 +1,4 @@
+import { applyMend } from "#shared/dry-fit/apply-mend.ts";
 import { listMends } from "#shared/dry-fit/list-mends.ts";
 import type { Mend } from "#shared/dry-fit/mend.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
@@ -19,7 +20,9 @@ export async function mendFindings(
   for (const finding of drawing?.dryFit.findings.slice(0, mostMended) ?? []) {
     await pause();
     if (isOvertaken()) return null;
-    mends.push(listMends(finding, { document, figures, limits, context, kernel }));
+    const listed = listMends(finding, { document, figures, limits, context, kernel });
+    // What lies in a locked layer is mended once that is unlocked.
+    mends.push(listed.filter((mend) => applyMend(document, mend) !== document));
   }
   return mends;
 }

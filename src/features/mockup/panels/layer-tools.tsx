@@ -1,6 +1,6 @@
 import { useDesk } from "../editor/desk-context.ts";
 import { moveLayer, removeLayer } from "../model/commands/order-layers.ts";
-import { setLayer } from "../model/commands/set-layer.ts";
+import { hideLayer } from "../model/commands/show-layer.ts";
 import { WordButton } from "./cell-controls.tsx";
 
 /** What can be done with the chosen layer as a whole. Nothing asks back: Undo brings it all again. */
@@ -31,7 +31,7 @@ export function LayerTools({ onBoard }: { readonly onBoard: () => void }) {
         onClick={() =>
           edit({
             label: hidden ? `Show ${key}` : `Hide ${key}`,
-            change: (before) => setLayer(before, { key, hidden: !hidden }),
+            change: (before) => hideLayer(before, { key, hidden: !hidden }),
           })
         }
       >

@@ -1,6 +1,7 @@
 import type { MockupDocument } from "#shared/mockup/document.ts";
+import { withoutUnusedLettering } from "#shared/mockup/without-unused-lettering.ts";
 
-/** Changes places with the next layer towards the viewer or the wall; nothing happens at either end. Keys stay. */
+/** Changes places with the next layer towards the viewer or the wall; nothing happens at either end. Keys stay. A locked layer can be ordered: nothing of it changes. */
 export function moveLayer(
   document: MockupDocument,
   { key, towards }: { key: string; towards: "viewer" | "wall" },
@@ -16,8 +17,8 @@ export function moveLayer(
   return { ...document, layers };
 }
 
-/** Takes a layer off with all its pieces and holes. */
+/** Takes a layer off with all its pieces and holes; a locked one stays. */
 export function removeLayer(document: MockupDocument, { key }: { key: string }): MockupDocument {
-  const layers = document.layers.filter((layer) => layer.key !== key);
-  return layers.length === document.layers.length ? document : { ...document, layers };
+  const layers = document.layers.filter((layer) => layer.key !== key || layer.locked);
+  return layers.length === document.layers.length ? document : withoutUnusedLettering({ ...document, layers });
 }

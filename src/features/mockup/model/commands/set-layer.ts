@@ -9,7 +9,6 @@ export type LayerFields = {
   readonly thickness?: number;
   readonly locate?: Locate;
   readonly marked?: Layer["marked"];
-  readonly hidden?: boolean;
 };
 
 /**
@@ -24,7 +23,6 @@ export function setLayer(document: MockupDocument, { key, ...fields }: LayerFiel
       thickness: lengthOf(fields.thickness ?? layer.thickness, 100) ?? layer.thickness,
       locate: fields.locate ?? layer.locate,
       marked: fields.marked ?? layer.marked,
-      hidden: fields.hidden ?? layer.hidden,
     }),
   );
 }

@@ -136,7 +136,7 @@ const edit: fc.Arbitrary<Edit> = fc.oneof(
       (document) =>
         removeLayer(document, { key: layerKey }),
   ),
-  fc.record({ key, name: fc.string(), stock, thickness: number, hidden: fc.boolean() }).map(
+  fc.record({ key, name: fc.string(), stock, thickness: number }).map(
     (args): Edit =>
       (document) =>
         setLayer(document, args),

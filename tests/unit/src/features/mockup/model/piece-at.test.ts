@@ -1,6 +1,6 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Figures } from "#shared/stack/figures.ts";
-import { setLayer } from "@/features/mockup/model/commands/set-layer.ts";
+import { hideLayer } from "@/features/mockup/model/commands/show-layer.ts";
 import { holeAt, pieceAt } from "@/features/mockup/model/piece-at.ts";
 import { signWithFigures } from "../sign-with-figures.ts";
 
@@ -29,7 +29,7 @@ describe("what a finger touches", () => {
   });
 
   it("is never a hidden piece", () => {
-    const hidden = setLayer(document, { key: "D", hidden: true });
+    const hidden = hideLayer(document, { key: "D", hidden: true });
     expect(pieceAt({ document: hidden, figures, reachMm: 0 }, { x: 305, y: 203 })).toBe("disc");
   });
 
