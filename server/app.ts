@@ -2,6 +2,7 @@ import compression from "compression";
 import express, { type Express, Router } from "express";
 import { addArtwork } from "#shared/contracts/artworks.ts";
 import { saveMockup } from "#shared/contracts/mockups.ts";
+import { keepDraft } from "#shared/contracts/named-drafts.ts";
 import { authentication } from "./auth/auth.ts";
 import { clientFiles } from "./http/client-files.ts";
 import type { Services } from "./http/context.ts";
@@ -49,6 +50,7 @@ export function createApp(services: Services): App {
   app.get("/api/share/:token", limited("links", env));
   app.post(addArtwork.path, limited("uploads", env));
   app.put(saveMockup.path, signedInOnly(env), express.json({ limit: mockupBody }), soundPieces);
+  app.post(keepDraft.path, signedInOnly(env), express.json({ limit: mockupBody }), soundPieces);
   app.use("/api", express.json({ limit: smallBody }));
   // Who opens another shop tells a known account's password here too.
   app.post("/api/register", account);

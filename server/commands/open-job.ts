@@ -1,4 +1,4 @@
-import { emptyBrief } from "#shared/contracts/jobs.ts";
+import { type Brief, emptyBrief } from "#shared/contracts/jobs.ts";
 import { newId } from "../db/new-id.ts";
 import { notFound } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
@@ -9,10 +9,16 @@ import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
 
-/** Opens a job with the shop's next number and an empty brief. */
+/** Opens a job with the shop's next number and an empty brief, unless one is given. */
 export async function openJob(
   context: Context,
-  { clientId, title, dueOn, personId }: { clientId: string; title: string; dueOn: string | null; personId: string },
+  {
+    clientId,
+    title,
+    dueOn,
+    personId,
+    brief = emptyBrief,
+  }: { clientId: string; title: string; dueOn: string | null; personId: string; brief?: Brief },
 ): Promise<LoadedJob> {
   const { transaction, now } = context;
   const shop = await Shop.findByPk(context.shop?.id ?? "", { transaction, lock: true, rejectOnEmpty: true });
@@ -26,7 +32,7 @@ export async function openJob(
       number: `${shop.jobPrefix}-${String(shop.nextJobNumber).padStart(4, "0")}`,
       title,
       dueOn,
-      brief: emptyBrief,
+      brief,
       state: "brief",
       whoseMove: "ours",
       createdBy: personId,

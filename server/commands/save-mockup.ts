@@ -45,7 +45,7 @@ export async function saveMockup(
 }
 
 /** Pieces may only come from artwork of the job's own client: they are copied from job to job. */
-async function refuseForeignArtwork(
+export async function refuseForeignArtwork(
   { transaction }: Context,
   { shopId, clientId, document }: { shopId: string; clientId: string; document: MockupDocument },
 ): Promise<void> {

@@ -9,6 +9,7 @@ import { Job } from "./job.ts";
 import { JobApprover } from "./job-approver.ts";
 import { Membership } from "./membership.ts";
 import { Mockup } from "./mockup.ts";
+import { NamedDraft } from "./named-draft.ts";
 import { Note } from "./note.ts";
 import { Person } from "./person.ts";
 import { PriceBook } from "./price-book.ts";
@@ -65,6 +66,11 @@ declare module "./artwork.ts" {
 declare module "./mockup.ts" {
   interface Mockup {
     saver?: NonAttribute<Person>;
+  }
+}
+declare module "./named-draft.ts" {
+  interface NamedDraft {
+    keeper?: NonAttribute<Person>;
   }
 }
 declare module "./shop-limits.ts" {
@@ -136,6 +142,7 @@ export function associate(): void {
   Artwork.belongsTo(StoredFile, { as: "file", foreignKey: "fileId" });
   Artwork.belongsTo(Person, { as: "adder", foreignKey: "addedBy" });
   Mockup.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
+  NamedDraft.belongsTo(Person, { as: "keeper", foreignKey: "keptBy" });
   ShopLimits.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   ShopSaws.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   PriceBook.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });

@@ -37,6 +37,7 @@ export type EventFacts = {
   "contact removed": { name: string };
   "contact sent a link": { name: string };
   "job opened": { title: string };
+  "job opened like another": { like: string; artwork: boolean };
   "job changed": { fields: string[] };
   "job moved": { from: string; to: string; reason: string };
   "consent given": Record<string, never>;
@@ -46,6 +47,9 @@ export type EventFacts = {
   "artwork refused": { name: string; reason: string };
   "artwork removed": { name: string };
   "mockup begun": Record<string, never>;
+  "draft kept": { name: string };
+  "draft renamed": { from: string; to: string };
+  "draft removed": { name: string };
   "finding set aside": { finding: string; reason: string };
   "set-aside taken back": { finding: string };
   "revision preparing": { letter: string };

@@ -11,6 +11,8 @@ import { initJob } from "./job.ts";
 import { initJobApprover } from "./job-approver.ts";
 import { initMembership } from "./membership.ts";
 import { initMockup } from "./mockup.ts";
+import { initMockupStart } from "./mockup-start.ts";
+import { initNamedDraft } from "./named-draft.ts";
 import { initNote } from "./note.ts";
 import { initOneTimeLink } from "./one-time-link.ts";
 import { initOutgoingMail } from "./outgoing-mail.ts";
@@ -47,6 +49,8 @@ export function initModels(sequelize: Sequelize): void {
   initStoredFile(sequelize);
   initArtwork(sequelize);
   initMockup(sequelize);
+  initMockupStart(sequelize);
+  initNamedDraft(sequelize);
   initRevision(sequelize);
   initNote(sequelize);
   initReply(sequelize);

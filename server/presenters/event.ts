@@ -31,6 +31,8 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "contact removed": ({ name }) => `Removed the contact ${name}`,
   "contact sent a link": ({ name }) => `Sent ${name} a link`,
   "job opened": ({ title }) => `Opened the job ${title}`,
+  "job opened like another": ({ like, artwork }) =>
+    `Took over format, stack and hardware of job ${like}${artwork ? ", with its artwork" : ""}`,
   "job changed": ({ fields }) => `Changed ${fields.join(", ")}`,
   "job moved": ({ from, to, reason }) => `Moved the job from ${from} to ${to}${reason ? `: ${reason}` : ""}`,
   "consent given": () => "Agreed that the piece may be shown in the portfolio",
@@ -40,6 +42,9 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "artwork refused": ({ name, reason }) => `${name} could not be taken: ${reason}`,
   "artwork removed": ({ name }) => `Took the artwork ${name} off the job`,
   "mockup begun": () => "Began the mockup",
+  "draft kept": ({ name }) => `Kept the mockup as the draft “${name}”`,
+  "draft renamed": ({ from, to }) => `Renamed the draft “${from}” to “${to}”`,
+  "draft removed": ({ name }) => `Removed the draft “${name}”`,
   "finding set aside": ({ finding, reason }) => `Set aside the ${finding}: ${reason}`,
   "set-aside taken back": ({ finding }) => `Took back the setting aside of the ${finding}`,
   "revision preparing": ({ letter }) => `Sent revision ${letter} to be drawn`,

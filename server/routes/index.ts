@@ -6,6 +6,7 @@ import { registerJobRoutes } from "./jobs.ts";
 import { registerLimitRoutes } from "./limits.ts";
 import { registerLinkRoutes } from "./links.ts";
 import { registerMockupRoutes } from "./mockups.ts";
+import { registerNamedDraftRoutes } from "./named-drafts.ts";
 import { registerNoteRoutes } from "./notes.ts";
 import { registerOutgoingMailRoutes } from "./outgoing-mail.ts";
 import { registerPortfolioRoutes } from "./portfolio.ts";
@@ -34,6 +35,7 @@ export function registerRoutes(routes: Routes): void {
   registerArtworkRoutes(routes);
   registerJobRoutes(routes);
   registerMockupRoutes(routes);
+  registerNamedDraftRoutes(routes);
   registerNoteRoutes(routes);
   registerPortfolioRoutes(routes);
   registerRevisionRoutes(routes);

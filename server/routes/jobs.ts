@@ -1,6 +1,8 @@
+import { openAnotherLike as anotherLikeContract } from "#shared/contracts/another-like.ts";
 import * as contract from "#shared/contracts/jobs.ts";
 import { changeJob } from "../commands/change-job.ts";
 import { moveJob } from "../commands/move-job.ts";
+import { openAnotherLike } from "../commands/open-another-like.ts";
 import { openJob } from "../commands/open-job.ts";
 import { setConsent } from "../commands/set-consent.ts";
 import { notAllowed, notFound } from "../http/app-error.ts";
@@ -40,6 +42,10 @@ export function registerJobRoutes(routes: Routes): void {
     if (!isStaff(actor) || !jobPolicy.open(actor)) throw notAllowed("Jobs are opened by the shop.");
     return jobView(context, await openJob(context, { ...body, personId: actor.personId }));
   });
+
+  write(routes, anotherLikeContract, async (context, { params, body }) =>
+    jobView(context, await openAnotherLike(context, { jobId: params.jobId, ...body })),
+  );
 
   write(routes, contract.changeJob, async (context, { params, body }) =>
     jobView(context, await changeJob(context, params.jobId, body)),

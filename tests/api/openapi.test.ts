@@ -1,11 +1,13 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import * as account from "#shared/contracts/account.ts";
+import * as anotherLike from "#shared/contracts/another-like.ts";
 import * as artworks from "#shared/contracts/artworks.ts";
 import * as clients from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
 import * as limits from "#shared/contracts/limits.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
+import * as namedDrafts from "#shared/contracts/named-drafts.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
@@ -35,11 +37,13 @@ type Description = { openapi: string; paths: Record<string, Record<string, Opera
 
 const modules = [
   account,
+  anotherLike,
   artworks,
   clients,
   jobs,
   limits,
   mockups,
+  namedDrafts,
   notes,
   outgoingMail,
   portfolio,

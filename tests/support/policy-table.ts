@@ -1,10 +1,12 @@
 import * as account from "#shared/contracts/account.ts";
+import * as anotherLike from "#shared/contracts/another-like.ts";
 import * as artworks from "#shared/contracts/artworks.ts";
 import * as clients from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
 import * as limits from "#shared/contracts/limits.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
+import * as namedDrafts from "#shared/contracts/named-drafts.ts";
 import * as notes from "#shared/contracts/notes.ts";
 import * as outgoingMail from "#shared/contracts/outgoing-mail.ts";
 import * as portfolio from "#shared/contracts/portfolio.ts";
@@ -62,6 +64,7 @@ const approvers = "n n n y n - - - o";
 const job = (world: PolicyWorld) => ({ params: { ...world.params, jobId: world.jobId } });
 const revision = (world: PolicyWorld) => ({ params: { ...world.params, revisionId: world.revisionId } });
 const artwork = (world: PolicyWorld) => ({ params: { ...world.params, artworkId: world.artworkId } });
+const draft = (world: PolicyWorld) => ({ params: { ...world.params, jobId: world.jobId, draftId: world.draftId } });
 const inShop = (world: PolicyWorld) => ({ params: world.params });
 const epoxyNamed = (name: string) => ({ kind: "adhesive", adhesive: { name, family: "epoxy" } });
 const unknownToken = "A".repeat(43);
@@ -157,6 +160,10 @@ export const policyTable: readonly PolicyRow[] = [
     ...inShop(world),
     body: { clientId: world.clientId, title: "Another sign" },
   })),
+  row(anotherLike.openAnotherLike, staffOnVisible, (world) => ({
+    ...job(world),
+    body: { clientId: world.clientId, title: "Another sign", words: "OTHER WORDS" },
+  })),
   row(jobs.changeJob, staffOnVisible, (world) => ({ ...job(world), body: { title: "Lobby sign" } })),
   row(jobs.moveJob, makersOnVisible, (world) => ({
     params: { ...world.params, jobId: world.toMoveJobId },
@@ -179,6 +186,17 @@ export const policyTable: readonly PolicyRow[] = [
   row(mockups.saveMockup, makers, (world) => ({
     params: { ...world.params, jobId: world.toSaveJobId },
     body: { version: 0, document: world.document },
+  })),
+
+  row(namedDrafts.listDrafts, staff, job),
+  row(namedDrafts.keepDraft, makers, (world) => ({
+    ...job(world),
+    body: { name: `Draft ${world.next()}`, document: world.document },
+  })),
+  row(namedDrafts.getDraft, staff, draft),
+  row(namedDrafts.renameDraft, makers, (world) => ({ ...draft(world), body: { name: `Draft ${world.next()}` } })),
+  row(namedDrafts.removeDraft, makers, (world) => ({
+    params: { ...world.params, jobId: world.jobId, draftId: world.draftIdsToRemove.pop() },
   })),
 
   row(setAsides.listSetAsides, staff, job),

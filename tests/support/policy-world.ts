@@ -3,6 +3,7 @@ import { Artwork } from "#server/models/artwork.ts";
 import { Session } from "#server/models/session.ts";
 import { changeJob, openJob, setConsent } from "#shared/contracts/jobs.ts";
 import { saveMockup } from "#shared/contracts/mockups.ts";
+import { keepDraft } from "#shared/contracts/named-drafts.ts";
 import { addNote } from "#shared/contracts/notes.ts";
 import { listOutgoingMail } from "#shared/contracts/outgoing-mail.ts";
 import { makeShareLink } from "#shared/contracts/portfolio.ts";
@@ -101,6 +102,10 @@ export async function buildPolicyWorld(app: TestApp) {
     nobody: app.visitor(),
   };
   const document: MockupDocument = buildSign([]);
+  const draft = async () => {
+    const body = { name: `Draft ${unique()}`, document };
+    return (await visitors.maker.get(keepDraft, { params: { ...params, jobId: world.job.id }, body })).id;
+  };
   return {
     params,
     askers,
@@ -120,6 +125,8 @@ export async function buildPolicyWorld(app: TestApp) {
     toFit,
     acknowledgedIds,
     artworkId: main.id,
+    draftId: await draft(),
+    draftIdsToRemove: await eachTime(draft),
     noteId: note.id,
     invitationId: invitation.id,
     spareMemberId: spareMember.membership.id,

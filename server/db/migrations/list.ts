@@ -9,6 +9,8 @@ import { stock } from "./2026-12-01-07-stock.ts";
 import { briefPlace } from "./2026-12-01-08-brief-place.ts";
 import { priceBooks } from "./2026-12-01-09-price-books.ts";
 import { shopSaws } from "./2026-12-01-10-shop-saws.ts";
+import { namedDrafts } from "./2026-12-01-13-named-drafts.ts";
+import { mockupStarts } from "./2026-12-01-14-mockup-starts.ts";
 
 /** Every migration in order. A new one goes to the end. */
 export const migrations: readonly Migration[] = [
@@ -22,4 +24,6 @@ export const migrations: readonly Migration[] = [
   briefPlace,
   priceBooks,
   shopSaws,
+  namedDrafts,
+  mockupStarts,
 ];
