@@ -4,6 +4,7 @@ import { longestMm } from "#shared/mockup/schema-parts.ts";
 export const mostLayers = 60;
 export const mostPieces = 2000;
 export const mostHoles = 1000;
+export const mostLettering = 200;
 export const mostOffsetMm = 1000;
 export const offsetBounds = { least: 0, most: mostOffsetMm } as const;
 /** Pockets, as the document takes them; our choice within it for the depth. */

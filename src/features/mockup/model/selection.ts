@@ -42,7 +42,8 @@ export function chooseAlso(document: MockupDocument, selection: Selection, key: 
 export function choosePieceAlso(document: MockupDocument, selection: Selection, pieceId: string): Selection {
   const layer = layerOfPiece(document, pieceId);
   if (!layer) return selection;
-  const had = layer.pieces.filter(({ id }) => selection.pieceIds.includes(id)).map(({ id }) => id);
+  // In the order chosen: the first is what others are lined up with.
+  const had = selection.pieceIds.filter((id) => layer.pieces.some((piece) => piece.id === id));
   if (selection.layerKey !== layer.key || had.length === layer.pieces.length) return choosePiece(document, pieceId);
   const pieceIds = had.includes(pieceId) ? had.filter((id) => id !== pieceId) : [...had, pieceId];
   return { layerKey: layer.key, pieceIds, holeId: null };

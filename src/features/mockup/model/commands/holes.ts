@@ -1,7 +1,7 @@
 import type { Point } from "#shared/geometry/path.ts";
 import { passingDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { Hole, Layer, MockupDocument } from "#shared/mockup/document.ts";
-import { coordinateOf, lengthOf, mostHoles } from "../limits.ts";
+import { coordinateOf, exactCoordinateOf, lengthOf, mostHoles } from "../limits.ts";
 import { fitDiameters, propose, type Site } from "../propose-holes.ts";
 import { isSame, withFields } from "../same.ts";
 import { changeLayer, changeLayers } from "./change-layer.ts";
@@ -45,8 +45,8 @@ export function setHole(
     holes.map((hole) =>
       hole.id === holeId
         ? withFields(hole, {
-            x: coordinateOf(fields.x ?? hole.x) ?? hole.x,
-            y: coordinateOf(fields.y ?? hole.y) ?? hole.y,
+            x: exactCoordinateOf(fields.x ?? hole.x) ?? hole.x,
+            y: exactCoordinateOf(fields.y ?? hole.y) ?? hole.y,
             diameter: lengthOf(fields.diameter ?? hole.diameter) ?? hole.diameter,
           })
         : hole,

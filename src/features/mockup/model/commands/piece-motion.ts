@@ -85,16 +85,19 @@ export function moveAll(document: MockupDocument, pieceIds: readonly string[], m
   return changePieces(document, new Map(pieceIds.map((id) => [id, motion])));
 }
 
-/** A piece after a motion; the same one when there is none or it would leave what a document can hold. */
-export function movedPiece(piece: Piece, motion: Motion | undefined): Piece {
-  if (!motion) return piece;
-  const to = motion.placement(piece.placement);
+/** A placement after a motion; null when it would leave what a document can hold. */
+export function placementAfter(placement: Placement, motion: Motion): Placement | null {
+  const to = motion.placement(placement);
   const x = exactCoordinateOf(to.x);
   const y = exactCoordinateOf(to.y);
   const turn = turnOf(to.turn);
   const scale = exactScaleOf(to.scale);
-  if (x === null || y === null || turn === null || scale === null) return piece;
-  return withFields(piece, { placement: withFields(piece.placement, { ...to, x, y, turn, scale }) });
+  return x === null || y === null || turn === null || scale === null ? null : { ...to, x, y, turn, scale };
+}
+
+function movedPiece(piece: Piece, motion: Motion | undefined): Piece {
+  const placement = motion && placementAfter(piece.placement, motion);
+  return placement ? withFields(piece, { placement: withFields(piece.placement, placement) }) : piece;
 }
 
 /** A hole after a motion; it keeps its diameter. */
