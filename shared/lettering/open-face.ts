@@ -24,12 +24,9 @@ export type OpenFace = {
   /** Height of the outline of H in font units. The file's own figure for it is off by up to 4 % in some fonts. */
   readonly capHeight: number;
   readonly has: (codePoint: number) => boolean;
-  /** The glyphs of one line from left to right, without ligatures, so that a letter is a piece. */
+  /** The glyphs of one line from left to right. Ligatures are taken apart, so that a letter is a piece. */
   readonly line: (text: string, options: { readonly kerning: boolean }) => readonly LineGlyph[];
 };
-
-/** Ligatures would make one piece of several letters; fractions turn figures into others. */
-const unwanted = { liga: false, clig: false, dlig: false, frac: false };
 
 const kinds: Readonly<Record<string, GlyphStep["kind"]>> = {
   moveTo: "move",
@@ -46,21 +43,54 @@ export function openFace(font: Font): OpenFace {
   return {
     capHeight,
     has: (codePoint) => font.hasGlyphForCodePoint(codePoint),
-    line: (text, { kerning }) => {
-      const { glyphs, positions } = font.layout(text, { ...unwanted, kern: kerning });
-      return glyphs.map((glyph, index) => {
-        const place = positions[index];
-        return {
-          codePoints: glyph.codePoints,
-          outline: glyph.path.commands.flatMap(({ command, args }) => {
-            const kind = kinds[command];
-            return kind ? [{ kind, numbers: args }] : [];
-          }),
-          width: glyph.advanceWidth,
-          advance: place?.xAdvance ?? glyph.advanceWidth,
-          shift: { x: place?.xOffset ?? 0, y: place?.yOffset ?? 0 },
-        };
-      });
-    },
+    line: (text, { kerning }) => lettersApart(glyphsOf(font, text, kerning, {}), glyphsOf(font, text, kerning, apart)),
   };
+}
+
+/** Without what makes one glyph of several letters. */
+const apart = { liga: false, clig: false, dlig: false };
+
+function glyphsOf(font: Font, text: string, kerning: boolean, features: Record<string, boolean>): LineGlyph[] {
+  // Fractions would turn figures into others.
+  const { glyphs, positions } = font.layout(text, { ...features, frac: false, kern: kerning });
+  return glyphs.map((glyph, index) => {
+    const place = positions[index];
+    return {
+      codePoints: glyph.codePoints,
+      outline: glyph.path.commands.flatMap(({ command, args }) => {
+        const kind = kinds[command];
+        return kind ? [{ kind, numbers: args }] : [];
+      }),
+      width: glyph.advanceWidth,
+      advance: place?.xAdvance ?? glyph.advanceWidth,
+      shift: { x: place?.xOffset ?? 0, y: place?.yOffset ?? 0 },
+    };
+  });
+}
+
+/**
+ * A line as the face wants it, but for its ligatures. They can't simply be switched off: scripts use the same feature to give a
+ * letter the form that meets its neighbour. So each letter that is a glyph of its own keeps that form, and the others come
+ * from the line that was laid without ligatures.
+ */
+function lettersApart(joined: readonly LineGlyph[], plain: readonly LineGlyph[]): readonly LineGlyph[] {
+  const wanted = clustersOf(joined);
+  return [...clustersOf(plain)].flatMap(([key, glyphs]) => wanted.get(key) ?? glyphs);
+}
+
+/** Glyphs by the stretch of the text that they stand for. */
+function clustersOf(glyphs: readonly LineGlyph[]): ReadonlyMap<string, readonly LineGlyph[]> {
+  const clusters = new Map<string, LineGlyph[]>();
+  let at = 0;
+  let own: LineGlyph[] = [];
+  for (const glyph of glyphs) {
+    const { length } = glyph.codePoints;
+    if (length > 0 || own.length === 0) {
+      own = [];
+      clusters.set(`${at}+${length}`, own);
+      at += length;
+    }
+    own.push(glyph);
+  }
+  return clusters;
 }
