@@ -11,15 +11,21 @@ const refusedKinds: Readonly<Partial<Record<ArtworkKind, RefusalCode>>> = {
   empty: "file.empty",
   png: "file.png",
   jpeg: "file.jpeg",
-  pdf: "file.pdf",
   unknown: "file.unknown",
 };
 
-/** Looks at a file's first bytes, whatever its name says, and refuses in words what can't be artwork yet. Keeps nothing of it. */
-export async function refuseWrongType(file: ReceivedFile): Promise<void> {
+const mediaTypes: Readonly<Partial<Record<ArtworkKind, string>>> = { pdf: "application/pdf" };
+
+/**
+ * The media type of a file by its first bytes, whatever its name says. Refuses in words what can't be artwork yet, and keeps
+ * nothing of it.
+ */
+export async function acceptedType(file: ReceivedFile): Promise<string> {
   const head = Buffer.alloc(65_536);
   const handle = await open(file.path, "r");
   const { bytesRead } = await handle.read(head, 0, head.length, 0).finally(() => handle.close());
-  const code = refusedKinds[sniffArtwork(head.subarray(0, bytesRead)).kind];
+  const { kind } = sniffArtwork(head.subarray(0, bytesRead));
+  const code = refusedKinds[kind];
   if (code) throw new AppError("unsupported_type", { detail: artworkRefusal(code).text });
+  return mediaTypes[kind] ?? "image/svg+xml";
 }

@@ -15,7 +15,6 @@ const refusedKinds: Readonly<Partial<Record<ArtworkKind, RefusalCode>>> = {
   empty: "file.empty",
   png: "file.png",
   jpeg: "file.jpeg",
-  pdf: "file.pdf",
   unknown: "file.unknown",
 };
 

@@ -25,7 +25,9 @@ function kindOf(bytes: Uint8Array): ArtworkKind {
   if (startsWith(bytes, [0x1f, 0x8b])) return "gzip";
   // Every second byte of UTF-16 text in a Latin script is 0, so leaving zeros out shows the letters of either encoding.
   const head = Buffer.from(bytes.subarray(0, 65_536).filter((byte) => byte !== 0)).toString("latin1");
-  return /^[^<]{0,16}</.test(head) && /<([\w-]+:)?svg[\s>/]/.test(head) ? "svg" : textKind(head);
+  if (/^[^<]{0,16}</.test(head) && /<([\w-]+:)?svg[\s>/]/.test(head)) return "svg";
+  // Some writers put a few bytes of their own before the header; readers look for it in the first thousand.
+  return head.slice(0, 1024).includes("%PDF-") ? "pdf" : textKind(head);
 }
 
 /** XML that names no svg early on still goes to the import, whose refusal says more than "unknown". */

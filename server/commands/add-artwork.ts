@@ -10,16 +10,16 @@ import { findJob } from "../queries/find-job.ts";
 import { logEvent } from "./log-event.ts";
 import { storeReceivedFile } from "./store-file.ts";
 
-/** Keeps an SVG as it came and sets the queue to turn it into pieces. The caller has looked at its content. */
+/** Keeps a drawing as it came and sets the queue to turn it into pieces. The caller has looked at its content. */
 export async function addArtwork(
   context: Context,
-  { jobId, file }: { jobId: string; file: ReceivedFile },
+  { jobId, file, mediaType }: { jobId: string; file: ReceivedFile; mediaType: string },
 ): Promise<Artwork> {
   const { transaction, actor, now } = context;
   const { job, facts } = await findJob(context, jobId, { lock: true });
   if (!isStaff(actor) || !artworkPolicy.change(actor, facts))
     throw notAllowed("Artwork is brought in by owners and makers.");
-  const stored = await storeReceivedFile(context, { shopId: job.shopId, file, mediaType: "image/svg+xml" });
+  const stored = await storeReceivedFile(context, { shopId: job.shopId, file, mediaType });
   const artwork = await Artwork.create(
     {
       id: newId(),

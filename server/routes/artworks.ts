@@ -1,5 +1,5 @@
 import * as contract from "#shared/contracts/artworks.ts";
-import { largestArtworkBytes, refuseWrongType } from "../artwork/accept-upload.ts";
+import { acceptedType, largestArtworkBytes } from "../artwork/accept-upload.ts";
 import { addArtwork } from "../commands/add-artwork.ts";
 import { removeArtwork } from "../commands/remove-artwork.ts";
 import { setTrueSize } from "../commands/set-true-size.ts";
@@ -34,8 +34,8 @@ export function registerArtworkRoutes(routes: Routes): void {
       if (!artworkPolicy.change(context.actor, facts)) throw notAllowed("Artwork is brought in by owners and makers.");
     },
     handle: async (context, { params, file }) => {
-      await refuseWrongType(file);
-      const { id } = await addArtwork(context, { jobId: params.jobId, file });
+      const mediaType = await acceptedType(file);
+      const { id } = await addArtwork(context, { jobId: params.jobId, file, mediaType });
       const { facts } = await findJob(context, params.jobId);
       return presentArtwork(context.actor, facts, await findArtwork(context, id));
     },

@@ -3,6 +3,8 @@ export const artworkLimits = {
   /** Bytes of the file as brought, and of its text after unpacking. */
   fileBytes: 10_000_000,
   textBytes: 16_000_000,
+  /** Bytes that the packed streams of a PDF may hold together. */
+  unpackedBytes: 100_000_000,
   elements: 100_000,
   depth: 200,
   entities: 50,

@@ -3,12 +3,11 @@ import type { ArtworkRefusal } from "./imported-artwork.ts";
 /** Every reason an artwork file is turned away, in words for the person who brought it: what is wrong, what to do. */
 const refusalTexts = {
   "file.empty": "The file is empty. Export it again from the drawing program and bring that one in.",
-  "file.too-large":
-    "The file is larger than 10 MB. Remove embedded pictures and hidden layers, then export it again as SVG.",
+  "file.too-large": "The file is larger than 10 MB. Remove embedded pictures and hidden layers, then export it again.",
   "file.png": "This is a PNG picture. Tracing pictures comes later: bring the logo in as SVG.",
   "file.jpeg": "This is a JPEG picture. Tracing pictures comes later: bring the logo in as SVG.",
-  "file.pdf": "This is a PDF. Open it in the drawing program and export the logo as SVG.",
-  "file.unknown": "This is not an SVG drawing. Export the logo as SVG from the drawing program and bring that one in.",
+  "file.unknown":
+    "This is not a drawing in SVG or PDF. Export the logo as one of them from the drawing program and bring that one in.",
   "file.unpacking":
     "The compressed file is damaged or unpacks to more than 16 MB. Save it as a plain SVG, not compressed, and try again.",
   "file.encoding": "The file's letters can't be read in the encoding it names. Save it as SVG in UTF-8 and try again.",
@@ -32,10 +31,17 @@ const refusalTexts = {
     "The drawing falls into more than 5,000 pieces, more than anyone could cut. Simplify it and export it again.",
   "svg.nothing-visible":
     "The drawing shows nothing that could be cut: no filled shape and no line. Check that the logo is on its page and visible.",
+  "pdf.broken":
+    "The PDF is damaged or cut off, so no page of it can be read. Save it again from the drawing program and bring that one in.",
+  "pdf.password": "The PDF is locked with a password. Save a copy without one and bring that one in.",
+  "pdf.unpacking":
+    "The PDF unpacks to more than 100 MB. Remove pictures and hidden layers from it, or export the logo as SVG.",
+  "pdf.only-pictures":
+    "The page holds a picture and no drawn shapes. Bring the picture itself in, or ask for the drawing it was made from.",
   "import.too-slow":
     "The drawing took longer than 5 seconds to work out. Merge its overlapping shapes or simplify the paths and try again.",
   "import.failed":
-    "Working out this drawing failed on our side. Save it as plain SVG with everything turned into paths and try again.",
+    "Working out this drawing failed on our side. Save it as plain SVG, with everything turned into paths and try again.",
 } as const;
 
 export type RefusalCode = keyof typeof refusalTexts;

@@ -33,6 +33,15 @@ const warningTexts = {
   "css.current-color": "The file takes colours from the page it is shown on (currentColor). Unset, they became black.",
   "css.vector-effect": "The file asks for lines that keep their width when scaled (vector-effect). They were scaled.",
   "css.transform-origin": "The file sets transform-origin, which we don't read: check the positions.",
+  "pdf.font-missing":
+    "Letters whose font is not in the PDF were left out. Turn text into outlines in the drawing program and bring the file in again.",
+  "pdf.hairline":
+    "Lines of no width were left out: a printer draws them as thin as it can, a cutter can't. Give them a width.",
+  "pdf.layer-hidden": "The PDF has hidden layers. They were left out, as a reader would leave them out.",
+  "pdf.mask-left-out": "A mask made of a picture was left out. What it should fade out shows whole.",
+  "pdf.comments": "Comments, stamps or form fields on the page were left out: only its drawing becomes pieces.",
+  "pdf.damaged":
+    "Parts of the page could not be read, or hold a very large picture, and were left out. Look at what is missing.",
 } as const;
 
 export type WarningCode = keyof typeof warningTexts;

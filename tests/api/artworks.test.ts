@@ -22,6 +22,7 @@ import { buildMember } from "../support/factories/member.ts";
 import { artworksPath, buildArtwork, buildWorld, formWith, plainSvg, type World } from "../support/factories/work.ts";
 import { lastLogLine, logKinds } from "../support/job-log.ts";
 import { runSql } from "../support/run-sql.ts";
+import { pdfOf } from "../support/seeded-pdf.ts";
 import { signInAs } from "../support/sign-in.ts";
 
 let app: TestApp;
@@ -102,6 +103,24 @@ describe("bringing in artwork", () => {
     expect(ready.colours[1]?.areaMm2).toBeCloseTo(706.858, 0);
     expect(await logKinds(own.job.id)).toEqual(["job opened", "job changed", "artwork added", "artwork ready"]);
     expect(await lastLogLine(own.job.id)).toBe("Standproud: Heron logo.svg became 3 pieces");
+  });
+
+  it("takes a PDF whatever it is called, in its true size, and gives it back as one", async () => {
+    const own = await buildJob(world);
+    // 144 by 72 points, and on it a square of 36.
+    const pdf = await pdfOf("0.8 0.1 0.1 rg\n10 10 36 36 re\nf", { size: [144, 72] });
+    const added = artworkSchema.parse(JSON.parse((await bringIn(own, formWith("logo.svg", pdf))).text));
+    await app.runJobs();
+    const params = { ...own.params, artworkId: added.id };
+    const ready = await own.visitors.maker.get(getArtwork, { params });
+    expect(ready).toMatchObject({ state: "ready", warnings: [], colours: [{ colour: "#CC1A1A", pieces: 1 }] });
+    expect(ready.widthMm).toBeCloseTo(50.8, 6);
+    expect(ready.heightMm).toBeCloseTo(25.4, 6);
+    expect(ready.colours[0]?.areaMm2).toBeCloseTo(161.29, 2);
+    const { headers } = await own.visitors.maker.ask(getArtworkFile, { params });
+    expect(headers.get("content-type")).toBe("application/pdf");
+    expect(headers.get("content-security-policy")).toBe("sandbox; default-src 'none'");
+    expect(headers.get("content-disposition")).toMatch(/^attachment;/);
   });
 
   it("gives the original back as an attachment that no browser runs", async () => {
@@ -198,16 +217,10 @@ describe("an upload that can't be taken", () => {
       says: "This is a JPEG picture. Tracing pictures comes later: bring the logo in as SVG.",
     },
     {
-      name: "a PDF",
-      file: "logo.svg",
-      content: new TextEncoder().encode("%PDF-1.7\n"),
-      says: "This is a PDF. Open it in the drawing program and export the logo as SVG.",
-    },
-    {
       name: "a program",
       file: "logo.svg",
       content: bytes(0x7f, 0x45, 0x4c, 0x46, 2, 1, 1),
-      says: "This is not an SVG drawing.",
+      says: "This is not a drawing in SVG or PDF.",
     },
   ])("is refused in words: $name", async ({ file, content, says }) => {
     const own = await buildJob(world);

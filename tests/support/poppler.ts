@@ -17,12 +17,13 @@ async function withFile<T>(pdf: Uint8Array, work: (file: string, folder: string)
   }
 }
 
-/** A page of a PDF as poppler draws it, as PNG bytes. */
+/** What shows of a page of a PDF as poppler draws it, as PNG bytes. */
 export function pageAsPng(pdf: Uint8Array, { page, dpi }: { page: number; dpi: number }): Promise<Buffer> {
   return withFile(pdf, async (file, folder) => {
     const out = join(folder, "page");
     await run("pdftoppm", [
       "-png",
+      "-cropbox",
       "-r",
       String(dpi),
       "-f",

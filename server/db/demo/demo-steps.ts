@@ -55,6 +55,7 @@ export async function demoArtwork(
   await writeFile(path, svg);
   const artwork = await addArtwork(context, {
     jobId,
+    mediaType: "image/svg+xml",
     file: { path, originalName: name, byteSize: Buffer.byteLength(svg) },
   });
   const outcome = await importSvg(Buffer.from(svg));

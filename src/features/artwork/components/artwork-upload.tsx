@@ -39,7 +39,7 @@ export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly
         type="file"
         multiple
         aria-label="Artwork file"
-        accept=".svg,.png,.jpg,.jpeg,image/svg+xml,image/png,image/jpeg"
+        accept=".svg,.pdf,.png,.jpg,.jpeg,image/svg+xml,application/pdf,image/png,image/jpeg"
         className="sr-only"
         tabIndex={-1}
         onChange={(event) => {
@@ -71,7 +71,7 @@ export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly
       ) : (
         <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
           <Button onClick={() => input.current?.click()}>Bring in a file</Button>
-          <p className="text-sm text-graphite">or drop it here. SVG; the file is kept as it came.</p>
+          <p className="text-sm text-graphite">or drop it here. SVG or PDF; the file is kept as it came.</p>
         </div>
       )}
     </fieldset>
