@@ -2,6 +2,7 @@ import { readFileSync } from "node:fs";
 import { expect, it } from "vitest";
 import { z } from "zod";
 import { sha256Hex } from "#server/files/sha256.ts";
+import { sha256 as sha256InPage } from "#shared/lettering/sha-256.ts";
 
 // NIST FIPS 180-4 with its example messages.
 const { sha256 } = z
@@ -16,4 +17,5 @@ it.each(sha256)("SHA-256 of $repeat × $message", ({ message, repeat, digest }) 
   const text = message.repeat(repeat);
   expect(sha256Hex(text)).toBe(digest);
   expect(sha256Hex(new TextEncoder().encode(text))).toBe(digest);
+  expect(sha256InPage(new TextEncoder().encode(text))).toBe(digest);
 });

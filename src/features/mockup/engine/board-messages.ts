@@ -1,14 +1,9 @@
 import type { BareSign, LaidBoard } from "./lay-board.ts";
+import type { AskPort } from "./use-asked.ts";
 
-export type BoardQuestion = { readonly sequence: number; readonly sign: BareSign };
-export type BoardAnswer = { readonly sequence: number } & (
-  | { readonly ok: true; readonly laid: LaidBoard }
-  | { readonly ok: false; readonly reason: string }
-);
+type Asked = { readonly sign: BareSign };
+type Said = { readonly ok: true; readonly laid: LaidBoard } | { readonly ok: false; readonly reason: string };
 
-/** The ends of a worker that lays boards; tests put the same work behind them without one. */
-export type BoardPort = {
-  readonly postMessage: (question: BoardQuestion) => void;
-  readonly addEventListener: (type: "message", listener: (event: { data: BoardAnswer }) => void) => void;
-  readonly terminate: () => void;
-};
+export type BoardQuestion = { readonly sequence: number } & Asked;
+export type BoardAnswer = { readonly sequence: number } & Said;
+export type BoardPort = AskPort<Asked, Said>;

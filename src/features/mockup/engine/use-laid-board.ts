@@ -1,7 +1,7 @@
-import { createContext, useContext, useEffect, useRef, useState } from "react";
-import { isSame } from "../model/same.ts";
-import type { BoardAnswer, BoardPort } from "./board-messages.ts";
+import { createContext, useContext } from "react";
+import type { BoardPort } from "./board-messages.ts";
 import type { BareSign, LaidBoard } from "./lay-board.ts";
+import { useAsked } from "./use-asked.ts";
 
 export type LaidState =
   | { readonly step: "nothing" | "laying" }
@@ -25,40 +25,9 @@ export function useLaidBoard(asked: BareSign | null): {
   readonly state: LaidState;
   readonly shown: LaidBoard | null;
 } {
-  const start = useContext(BoardWorkerContext);
-  const [sign, setSign] = useState(asked);
-  if (!isSame(sign, asked)) setSign(asked);
-  const [answer, setAnswer] = useState<{ readonly of: BareSign; readonly laid: LaidBoard | null } | null>(null);
-  const port = useRef<BoardPort | null>(null);
-  const question = useRef<{ sequence: number; sign: BareSign | null }>({ sequence: 0, sign: null });
-
-  useEffect(() => {
-    if (sign === null) return;
-    const hear = ({ sequence, ...said }: BoardAnswer) => {
-      const { sign: of, sequence: newest } = question.current;
-      if (of !== null && sequence === newest) setAnswer({ of, laid: said.ok ? said.laid : null });
-    };
-    if (port.current === null) {
-      port.current = start(() => {
-        const { sign: of } = question.current;
-        if (of !== null) setAnswer({ of, laid: null });
-      });
-      port.current.addEventListener("message", ({ data }) => hear(data));
-    }
-    question.current = { sequence: question.current.sequence + 1, sign };
-    port.current.postMessage({ sequence: question.current.sequence, sign });
-  }, [sign, start]);
-
-  useEffect(
-    () => () => {
-      port.current?.terminate();
-      port.current = null;
-    },
-    [],
-  );
-
-  const shown = sign === null ? null : (answer?.laid ?? null);
-  if (sign === null) return { state: { step: "nothing" }, shown };
-  if (answer?.of !== sign) return { state: { step: "laying" }, shown };
-  return { state: answer.laid ? { step: "laid", laid: answer.laid } : { step: "failed" }, shown };
+  const { question, answer } = useAsked(useContext(BoardWorkerContext), asked && { sign: asked });
+  if (question === null) return { state: { step: "nothing" }, shown: null };
+  const laid = answer?.said?.ok ? answer.said.laid : null;
+  if (answer?.of !== question) return { state: { step: "laying" }, shown: laid };
+  return { state: laid ? { step: "laid", laid } : { step: "failed" }, shown: laid };
 }
