@@ -19,6 +19,7 @@ log.info({ address: server.address(), publicUrl: env.PUBLIC_URL, worker: env.WOR
 
 onEnd(log, async () => {
   // Browsers keep connections open; each is closed once its request is answered.
+  await services.watchers.close();
   const idle = setInterval(() => server.closeIdleConnections(), 100);
   await new Promise<void>((resolve) => server.close(() => resolve()));
   clearInterval(idle);

@@ -4,6 +4,7 @@ import { connect } from "./db/connection.ts";
 import { appDatabaseUrl, type Environment } from "./env.ts";
 import { openDiskStorage } from "./files/disk-storage.ts";
 import type { Services } from "./http/context.ts";
+import { openWatchers } from "./live/watchers.ts";
 import { createLog } from "./log.ts";
 import { openLocalSink } from "./mail/local-sink.ts";
 import { initModels } from "./models/init-models.ts";
@@ -26,9 +27,11 @@ export async function openServices(
   initModels(sequelize);
   const storage = await openDiskStorage(env.FILES_DIR);
   const mailSink = env.SMTP_URL ? null : await openLocalSink({ dir: mailSinkDir(env), log });
+  const watchers = openWatchers(appDatabaseUrl(env), log);
   return {
-    services: { env, sequelize, storage, mailSink, log },
+    services: { env, sequelize, storage, mailSink, watchers, log },
     close: async () => {
+      await watchers.close();
       await mailSink?.close();
       await sequelize.close();
     },

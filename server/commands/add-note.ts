@@ -12,6 +12,7 @@ import { snapshotOf } from "../queries/snapshot-of.ts";
 import { logEvent } from "./log-event.ts";
 import { mailTheOtherSide } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** Leaves a note on a revision that takes notes, numbered within its job. */
 export async function addNote(
@@ -62,6 +63,7 @@ export async function addNote(
     data: { number: note.number, letter: revision.letter },
   });
   if (!shopOnly) await mailTheOtherSide(context, loaded, { kind: "note added", data: { revisionId, noteId: note.id } });
+  await signalJob(context, job, { kind: "note", id: note.id, shopOnly });
   await refreshJob(context, job);
   return note;
 }

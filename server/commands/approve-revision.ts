@@ -9,6 +9,7 @@ import { type Decidable, findDecidable, recordDecision } from "./decide.ts";
 import { logEvent } from "./log-event.ts";
 import { mailShop } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 export type Approval = {
   readonly revisionId: string;
@@ -50,6 +51,7 @@ export async function approveRevision(context: Context, approval: Approval): Pro
     data: { letter: revision.letter, typedName: approval.typedName },
   });
   await mailShop(context, loaded, { kind: "approved", data: { revisionId: revision.id } });
+  await signalJob(context, job, { kind: "revision", id: revision.id });
   await refreshJob(context, job);
 }
 

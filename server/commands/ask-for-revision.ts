@@ -6,6 +6,7 @@ import { findDecidable, recordDecision } from "./decide.ts";
 import { logEvent } from "./log-event.ts";
 import { mailShop } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** Asks for a revision. The shop must be able to tell what is wanted: by an open note of the client's or by a summary. */
 export async function askForRevision(
@@ -36,5 +37,6 @@ export async function askForRevision(
     data: { letter: revision.letter, summary },
   });
   await mailShop(context, loaded, { kind: "revision asked", data: { revisionId } });
+  await signalJob(context, job, { kind: "revision", id: revisionId });
   await refreshJob(context, job);
 }

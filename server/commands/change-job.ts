@@ -8,6 +8,7 @@ import { findJob } from "../queries/find-job.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 export type JobChange = {
   readonly title?: string | undefined;
@@ -55,6 +56,7 @@ export async function changeJob(context: Context, jobId: string, change: JobChan
     if (approvers.map(({ contactId }) => contactId).join() !== contactIds.join()) fields.push("approvers");
   }
   if (fields.length > 0) await logEvent(context, { shopId: job.shopId, jobId, kind: "job changed", data: { fields } });
+  if (fields.length > 0) await signalJob(context, job, { kind: "job", id: jobId });
   return refreshJob(context, job);
 }
 

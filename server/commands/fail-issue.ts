@@ -3,10 +3,11 @@ import { Job } from "../models/job.ts";
 import { Revision } from "../models/revision.ts";
 import { logSystemEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** The PDF could not be drawn: the revision is a draft again, with the reason, and what was out stays out. */
 export async function failIssue(
-  context: Pick<Context, "transaction" | "now">,
+  context: Pick<Context, "services" | "transaction" | "now">,
   { revisionId, reason }: { revisionId: string; reason: string },
 ): Promise<void> {
   const { transaction } = context;
@@ -21,5 +22,6 @@ export async function failIssue(
     kind: "revision failed",
     data: { letter: revision.letter, reason },
   });
+  await signalJob(context, job, { kind: "revision", id: revisionId, shopOnly: true });
   await refreshJob(context, job);
 }

@@ -6,6 +6,7 @@ import { loadJobs } from "../queries/load-jobs.ts";
 import { logSystemEvent } from "./log-event.ts";
 import { mailApprovers } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 import { storeBytes } from "./store-file.ts";
 
 /**
@@ -35,5 +36,6 @@ export async function finishIssue(
     data: { letter: revision.letter },
   });
   await mailApprovers(context, loaded, { kind: "proof issued", data: { revisionId } });
+  await signalJob(context, job, { kind: "revision", id: revisionId });
   await refreshJob(context, job);
 }

@@ -16,11 +16,13 @@ import { artworkHashes } from "../queries/artwork-hashes.ts";
 import { dryFitInput } from "../queries/dry-fit-input.ts";
 import { findJob } from "../queries/find-job.ts";
 import { notesToFreeze } from "../queries/list-notes.ts";
+import { photoHashes } from "../queries/photo-hashes.ts";
 import { setAsidesToFreeze } from "../queries/list-set-asides.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { draftToJudge } from "./draft-to-judge.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /**
  * Freezes the saved draft of that very version as the next letter and sets the queue to draw its PDF.
@@ -68,6 +70,7 @@ export async function issueRevision(
       );
   await enqueue(transaction, "render-proof", { revisionId: revision.id });
   await logEvent(context, { shopId: job.shopId, jobId, kind: "revision preparing", data: { letter } });
+  await signalJob(context, job, { kind: "revision", id: revision.id, shopOnly: true });
   return { loaded: await refreshJob(context, job), revision };
 }
 
@@ -100,6 +103,7 @@ async function freeze(
     setAsides: await setAsidesToFreeze(context, job.id),
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
+    photoHashes: await photoHashes(context, { shopId: job.shopId, document }),
     fontHashes: { ...fontHashes(), ...letteringHashes(document) },
   };
   const frozen = await freezeDrawing(input, { shopId: shop.id });

@@ -6,6 +6,7 @@ import { findJob } from "../queries/find-job.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /**
  * Moves a job on after approval, holds it, takes it up again or cancels it. Taken up again, it is where it was held.
@@ -26,6 +27,7 @@ export async function moveJob(
   const state = to === "taken up again" ? (job.heldFrom ?? "mockup") : to;
   await job.update({ state, heldFrom: to === "on hold" ? holdable(from) : null }, { transaction: context.transaction });
   await logEvent(context, { shopId: job.shopId, jobId, kind: "job moved", data: { from, to, reason } });
+  await signalJob(context, job, { kind: "job", id: jobId });
   return refreshJob(context, job);
 }
 

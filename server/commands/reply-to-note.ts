@@ -9,6 +9,7 @@ import { findNote } from "../queries/find-note.ts";
 import { logEvent } from "./log-event.ts";
 import { mailTheOtherSide } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** Answers a note. The shop's answer makes an open note answered; the client's opens an answered one again. */
 export async function replyToNote(context: Context, { noteId, text }: { noteId: string; text: string }): Promise<void> {
@@ -39,5 +40,6 @@ export async function replyToNote(context: Context, { noteId, text }: { noteId: 
     const data = { revisionId: on.revision.id, noteId, replyId: reply.id };
     await mailTheOtherSide(context, on.loaded, { kind: "note answered", data });
   }
+  await signalJob(context, on.loaded.job, { kind: "note", id: noteId, shopOnly: note.shopOnly });
   await refreshJob(context, on.loaded.job);
 }

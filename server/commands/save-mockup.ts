@@ -12,7 +12,9 @@ import { findJob } from "../queries/find-job.ts";
 import { findMockup } from "../queries/find-mockup.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
+import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** Saves the draft if it was edited from the newest version; otherwise answers `stale` with the newer one. */
 export async function saveMockup(
@@ -33,12 +35,14 @@ export async function saveMockup(
     );
   }
   await refuseForeignArtwork(context, { shopId: job.shopId, clientId: job.clientId, document });
+  await refuseForeignPhoto(context, { shopId: job.shopId, clientId: job.clientId, document });
   const saved = { version: version + 1, document: JSON.stringify(document), savedBy: actor.personId, savedAt: now };
   if (known) await known.update(saved, { transaction });
   else {
     await Mockup.create({ id: newId(), shopId: job.shopId, jobId, ...saved }, { transaction });
     await logEvent(context, { shopId: job.shopId, jobId, kind: "mockup begun", data: {} });
   }
+  await signalJob(context, job, { kind: "mockup", id: jobId, shopOnly: true });
   const mockup = await findMockup(context, { shopId: job.shopId, jobId });
   if (!mockup) throw new Error("A mockup that was saved is there.");
   return { loaded: await refreshJob(context, job), mockup };

@@ -5,6 +5,7 @@ import { notePolicy } from "../policies/note.ts";
 import { findNote } from "../queries/find-note.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** Settles a note (its author does) or opens it again. Asking for the state it has changes nothing. */
 export async function setNoteState(
@@ -24,5 +25,6 @@ export async function setNoteState(
     kind: state === "settled" ? "note settled" : "note opened again",
     data: { number: note.number },
   });
+  await signalJob(context, on.loaded.job, { kind: "note", id: noteId, shopOnly: note.shopOnly });
   await refreshJob(context, on.loaded.job);
 }

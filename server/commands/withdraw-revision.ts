@@ -5,6 +5,7 @@ import { revisionPolicy } from "../policies/revision.ts";
 import { findRevision } from "../queries/find-revision.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { signalJob } from "./signal-job.ts";
 
 /** Takes an issued revision back before it is decided on. What it superseded stays superseded. */
 export async function withdrawRevision(
@@ -22,5 +23,6 @@ export async function withdrawRevision(
     kind: "revision withdrawn",
     data: { letter: revision.letter, reason },
   });
+  await signalJob(context, loaded.job, { kind: "revision", id: revisionId });
   await refreshJob(context, loaded.job);
 }

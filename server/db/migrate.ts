@@ -57,7 +57,7 @@ grant usage on schema public, graphile_worker to ${role};
 grant select, insert, update on all tables in schema public to ${role};
 revoke delete on all tables in schema public from ${role};
 grant delete on job_approvers to ${role};
-revoke update on events, decisions, certificates, stored_files, notes, replies, set_asides, mockup_starts from ${role};
+revoke update on events, decisions, certificates, stored_files, notes, replies, set_asides, mockup_starts, job_signals from ${role};
 grant update (state) on notes to ${role};
 grant update (taken_back_by, taken_back_name, taken_back_at) on set_asides to ${role};
 revoke insert, update on migrations from ${role};

@@ -2,6 +2,7 @@ import type { Logger } from "pino";
 import type { Sequelize, Transaction } from "sequelize";
 import type { Environment } from "../env.ts";
 import type { Storage } from "../files/storage.ts";
+import type { Watchers } from "../live/watchers.ts";
 import type { MailSink } from "../mail/sink.ts";
 import type { Actor } from "../policies/actor.ts";
 
@@ -12,6 +13,8 @@ export type Services = {
   readonly storage: Storage;
   /** The local sink while no mail server is configured. */
   readonly mailSink: MailSink | null;
+  /** Who looks at a job in this process, to be told what changes. */
+  readonly watchers: Watchers;
   readonly log: Logger;
 };
 

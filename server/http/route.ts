@@ -17,6 +17,8 @@ type Parsed<E extends Endpoint> = {
   query: z.output<E["query"]>;
   body: z.output<E["body"]>;
 };
+/** What a reader of a stream asks for, with the last event that its browser says it had. */
+type Streamed<E extends Endpoint> = Parsed<E> & { readonly lastEventId: string | undefined };
 /** An endpoint whose result is nothing answers nothing, or a file. */
 type Answer<E extends Endpoint> =
   undefined extends z.input<E["result"]> ? undefined | FileAnswer : z.input<E["result"]>;
@@ -54,19 +56,22 @@ export function write<E extends Endpoint>(
 
 /**
  * A request that brings a file. `allow` is asked before the first byte is taken; `handle` then runs in one transaction with the
- * file in quarantine, which is removed afterwards unless the handler moved it away.
+ * file in quarantine, which is removed afterwards unless the handler moved it away. What takes long with a file is done by `prepare`, before
+ * the transaction holds a connection.
  */
-export function upload<E extends Endpoint>(
+export function upload<E extends Endpoint, F extends ReceivedFile = ReceivedFile>(
   routes: Routes,
   endpoint: E,
   {
     maxBytes,
     allow,
+    prepare = async (file) => file as F,
     handle,
   }: {
     maxBytes: number;
     allow: (context: ReadContext, params: z.output<E["params"]>) => Promise<void>;
-    handle: (context: Context, input: { params: z.output<E["params"]>; file: ReceivedFile }) => Promise<Answer<E>>;
+    prepare?: (file: ReceivedFile) => Promise<F>;
+    handle: (context: Context, input: { params: z.output<E["params"]>; file: F }) => Promise<Answer<E>>;
   },
 ): void {
   routes.registered.push({ endpoint, reach: "insiders" });
@@ -76,11 +81,37 @@ export function upload<E extends Endpoint>(
     await allow(context, params);
     const file = await receiveFile(request, response, { dir: routes.services.storage.quarantineDir, maxBytes });
     try {
-      const answer = await asOneChange(context, (transaction) => handle({ ...context, transaction }, { params, file }));
+      const ready = await prepare(file);
+      const answer = await asOneChange(context, (transaction) =>
+        handle({ ...context, transaction }, { params, file: ready }),
+      );
       await send(response, endpoint, answer, routes.services.env.NODE_ENV);
     } finally {
       await rm(file.path, { force: true });
     }
+  });
+}
+
+/**
+ * A request that is answered by events as they come. `ask` says anew who is there, or throws when nobody is; `open` has looked at it
+ * once before it sends anything, so that a refusal is an answer like any other.
+ */
+export function stream<E extends Endpoint>(
+  routes: Routes,
+  endpoint: E,
+  open: (ask: () => Promise<ReadContext>, input: Streamed<E>, response: Response) => Promise<void>,
+): void {
+  routes.registered.push({ endpoint, reach: "insiders" });
+  routes.router.get(endpoint.path, async (request, response) => {
+    const ask = () => contextOf(request, routes.services, "insiders");
+    await ask();
+    const input = {
+      params: parsed(endpoint.params, request.params, "params"),
+      query: parsed(endpoint.query, request.query, "query"),
+      body: parsed(endpoint.body, request.body ?? {}, ""),
+      lastEventId: request.get("last-event-id"),
+    };
+    await open(ask, input as Streamed<E>, response);
   });
 }
 
@@ -158,7 +189,7 @@ async function send(response: Response, endpoint: Endpoint, answer: unknown, mod
     response.setHeader("Content-Disposition", `${answer.disposition}; filename*=UTF-8''${headerText(answer.fileName)}`);
     const policy = policyOf(answer);
     if (policy) response.setHeader("Content-Security-Policy", policy);
-    await stream(answer, response);
+    await sendBytes(answer, response);
     return;
   }
   response.status(endpoint.status ?? 200);
@@ -179,7 +210,7 @@ function policyOf({ disposition, mediaType }: FileAnswer): string | null {
 }
 
 /** Sends the bytes as fast as the reader takes them. A reader who leaves in the middle is no failure of ours. */
-async function stream(answer: FileAnswer, response: Response): Promise<void> {
+async function sendBytes(answer: FileAnswer, response: Response): Promise<void> {
   try {
     await pipeline(answer.stream, response);
   } catch (error) {

@@ -37,8 +37,10 @@ const reasons = {
   notKept: "The PDF could not be kept on the server's disk. Nothing went out; issue it again or ask for help.",
 } as const;
 
-function fail({ sequelize }: Services, revisionId: string, reason: string): Promise<void> {
-  return sequelize.transaction((transaction) => failIssue({ transaction, now: new Date() }, { revisionId, reason }));
+function fail(services: Services, revisionId: string, reason: string): Promise<void> {
+  return services.sequelize.transaction((transaction) =>
+    failIssue({ services, transaction, now: new Date() }, { revisionId, reason }),
+  );
 }
 
 type Drawn = { readonly ok: true; readonly pdf: Uint8Array } | { readonly ok: false; readonly error: unknown };

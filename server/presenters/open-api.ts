@@ -78,6 +78,7 @@ function bodyOf(endpoint: Endpoint): Json {
 }
 
 function contentOf(endpoint: Endpoint): Json {
+  if (endpoint.form === "stream") return { content: { "text/event-stream": {} } };
   if (endpoint.form === "file") return { content: { "application/octet-stream": {} } };
   if (endpoint.status === 204 || endpoint.status === 202) {
     const schema = schemaOf(endpoint.result, "output");

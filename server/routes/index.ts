@@ -2,6 +2,7 @@ import type { Routes } from "../http/route.ts";
 import { registerAccountRoutes } from "./account.ts";
 import { registerArtworkRoutes } from "./artworks.ts";
 import { registerClientRoutes } from "./clients.ts";
+import { registerJobSignalRoutes } from "./job-signals.ts";
 import { registerJobRoutes } from "./jobs.ts";
 import { registerLimitRoutes } from "./limits.ts";
 import { registerLinkRoutes } from "./links.ts";
@@ -19,6 +20,7 @@ import { registerShopRoutes } from "./shop.ts";
 import { registerStockRoutes } from "./stock.ts";
 import { registerSystemRoutes } from "./system.ts";
 import { registerTeamRoutes } from "./team.ts";
+import { registerWallPhotoRoutes } from "./wall-photos.ts";
 
 /** Every route of the application, one line a noun. */
 export function registerRoutes(routes: Routes): void {
@@ -34,6 +36,7 @@ export function registerRoutes(routes: Routes): void {
   registerOutgoingMailRoutes(routes);
   registerArtworkRoutes(routes);
   registerJobRoutes(routes);
+  registerJobSignalRoutes(routes);
   registerMockupRoutes(routes);
   registerNamedDraftRoutes(routes);
   registerNoteRoutes(routes);
@@ -42,4 +45,5 @@ export function registerRoutes(routes: Routes): void {
   registerRevisionDocumentRoutes(routes);
   registerSetAsideRoutes(routes);
   registerStockRoutes(routes);
+  registerWallPhotoRoutes(routes);
 }

@@ -21,8 +21,8 @@ export type Endpoint<
   readonly query: Q;
   readonly body: B;
   readonly result: R;
-  /** `multipart`: the body carries a file; `file`: the answer is bytes, `result` describes nothing. */
-  readonly form?: "multipart" | "file";
+  /** `multipart`: the body carries a file; `file`: the answer is bytes; `stream`: it is events as they come. `result` then describes nothing. */
+  readonly form?: "multipart" | "file" | "stream";
   readonly status?: 200 | 201 | 202 | 204;
 };
 

@@ -9,3 +9,8 @@ export const revisionKeys = {
   compare: (shop: string, jobId: string, before: string, after: string) =>
     [...keys.job(shop, jobId), "compare", before, after] as const,
 };
+
+/** Whether a key belongs to an answer about a revision of a shop: its standing, its sheet or its notes. */
+export function isAboutRevision(key: readonly unknown[], shop: string): boolean {
+  return key[0] === "shop" && key[1] === shop && key[2] === "revision";
+}

@@ -4,6 +4,7 @@ import * as anotherLike from "#shared/contracts/another-like.ts";
 import * as artworks from "#shared/contracts/artworks.ts";
 import * as clients from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
+import * as jobSignals from "#shared/contracts/job-signals.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
 import * as limits from "#shared/contracts/limits.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
@@ -40,6 +41,7 @@ const modules = [
   anotherLike,
   artworks,
   clients,
+  jobSignals,
   jobs,
   limits,
   mockups,

@@ -3,6 +3,7 @@ import * as anotherLike from "#shared/contracts/another-like.ts";
 import * as artworks from "#shared/contracts/artworks.ts";
 import * as clients from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
+import * as jobSignals from "#shared/contracts/job-signals.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
 import * as limits from "#shared/contracts/limits.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
@@ -171,6 +172,7 @@ export const policyTable: readonly PolicyRow[] = [
   })),
   row(jobs.setConsent, "n n n y y - - - o", (world) => ({ ...job(world), body: { given: true } })),
   row(jobs.listEvents, staff, job),
+  row(jobSignals.streamJobSignals, readers, (world) => ({ ...job(world), query: { once: "1" } })),
 
   row(artworks.listArtworks, staff, job),
   row(artworks.addArtwork, makers, job),

@@ -14,6 +14,7 @@ import { OpenNotes } from "@/features/jobs/components/open-notes.tsx";
 import { RevisionList } from "@/features/jobs/components/revision-list.tsx";
 import { formatDay, formatDue } from "@/lib/format.ts";
 import { useReader } from "@/lib/shop-context.ts";
+import { useLiveJob } from "@/lib/use-live-job.ts";
 import { LoadProblem } from "../load-problem.tsx";
 import { Page } from "../page.tsx";
 import { paths } from "../paths.ts";
@@ -22,6 +23,7 @@ export function JobPage() {
   const { shop, side } = useReader();
   const { jobId = "" } = useParams();
   const query = useQuery(jobQuery(shop.slug, jobId));
+  useLiveJob(shop.slug, query.isSuccess ? jobId : null);
   if (query.isPending) {
     return (
       <Page title="Job">

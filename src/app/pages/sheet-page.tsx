@@ -6,6 +6,7 @@ import { SheetSkeleton } from "@/features/sheet/components/sheet-skeleton.tsx";
 import { UnreadySheet } from "@/features/sheet/components/unready-sheet.tsx";
 import { ApiProblem } from "@/lib/api-client.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
+import { useLiveJob } from "@/lib/use-live-job.ts";
 import { NotFoundScreen } from "../not-found-screen.tsx";
 import { paths } from "../paths.ts";
 import { SheetScreen } from "./sheet-screen.tsx";
@@ -18,6 +19,8 @@ export function SheetPage() {
   // Both are asked for at once; only a revision known to be unready has no sheet to ask for.
   const sheet = useQuery({ ...sheetQueries.sheet(shop, revisionId), enabled: !unready });
   usePageTitle(sheet.data ? `${sheet.data.job.title}, revision ${sheet.data.revision.letter}` : "Sheet");
+
+  useLiveJob(shop, revision.data?.jobId ?? null);
 
   const error = revision.error ?? (unready ? null : sheet.error);
   if (error instanceof ApiProblem && error.code === "not_found") return <NotFoundScreen />;
