@@ -1,4 +1,5 @@
 import type { Layer, Piece } from "../mockup/document.ts";
+import { inReadingOrder } from "../pieces/reading-order.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import type { RuleInput } from "./rule.ts";
 import { layersWithFigures } from "./words.ts";
@@ -48,20 +49,5 @@ function heightOf({ piece, figures }: Letter): number {
  * within half its height. Spaces between words are not told.
  */
 export function linesOf(letters: readonly Letter[]): Letter[][] {
-  const lines: { middle: number; height: number; letters: Letter[] }[] = [];
-  const fromTop = letters.toSorted((a, b) => a.figures.box.y - b.figures.box.y || a.figures.box.x - b.figures.box.x);
-  for (const letter of fromTop) {
-    const { y, height } = letter.figures.box;
-    const middle = y + height / 2;
-    const line = lines.find((one) => Math.abs(one.middle - middle) <= Math.max(one.height, height) / 2);
-    if (!line) lines.push({ middle, height, letters: [letter] });
-    else {
-      line.letters.push(letter);
-      if (height > line.height) {
-        line.height = height;
-        line.middle = middle;
-      }
-    }
-  }
-  return lines.map((line) => line.letters.toSorted((a, b) => a.figures.box.x - b.figures.box.x));
+  return inReadingOrder(letters, ({ figures }) => figures.box);
 }
