@@ -2,11 +2,14 @@ import type { KeyboardEvent } from "react";
 import type { Point } from "#shared/geometry/path.ts";
 import { type DrawingView, type Size, viewMoved, viewScaled } from "@/lib/drawing-view.ts";
 import { useDesk } from "../editor/desk-context.ts";
+import { useArrowStep } from "../editor/use-arrow-step.ts";
+import { shiftTimes } from "../model/arrow-steps.ts";
 import { findHole } from "../model/chosen-box.ts";
+import { whyIdle } from "../model/chosen-words.ts";
 import { removeHole, setHole } from "../model/commands/holes.ts";
 import { movePieces, removePieces } from "../model/commands/pieces.ts";
 import type { Drag } from "../model/drag.ts";
-import { nothingChosen } from "../model/selection.ts";
+import { chooseAllPieces, nothingChosen } from "../model/selection.ts";
 
 type Looking = {
   readonly view: DrawingView;
@@ -17,8 +20,6 @@ type Looking = {
   readonly onDrag: (drag: Drag | null) => void;
 };
 
-const nudgeMm = 1;
-const farNudgeMm = 10;
 const lookStepPx = 48;
 const stepFactor = 1.4;
 
@@ -29,44 +30,54 @@ const arrows = new Map<string, Point>([
   ["ArrowDown", { x: 0, y: 1 }],
 ]);
 
-/** What the keys do on the elevation: move and remove what is chosen, look closer and farther, let go. */
+/** What the keys do on the elevation: choose all, move and remove what is chosen, look closer and farther, let go. */
 export function useCanvasKeys({ view, fit, room, onView, drag, onDrag }: Looking) {
-  const { document, selection, edit, choose } = useDesk();
+  const { document, selection, unit, edit, choose, say, holesByHand, putHolesByHand } = useDesk();
+  const [step] = useArrowStep(unit);
   const { holeId, pieceIds } = selection;
+  const whyNot = holeId === null ? whyIdle(document, selection) : null;
 
   function nudge({ x, y }: Point, by: number) {
     const hole = holeId === null ? null : findHole(document, holeId);
     if (hole !== null) {
       const to = { holeId: hole.id, x: hole.x + x * by, y: hole.y + y * by };
       edit({ label: "Move a hole", together: `nudge ${hole.id}`, change: (before) => setHole(before, to) });
-    } else if (pieceIds.length > 0) {
+    } else if (pieceIds.length === 0) onView(viewMoved(view, { x: -x * lookStepPx, y: -y * lookStepPx }));
+    else if (whyNot !== null) say(whyNot);
+    else {
       const move = { pieceIds, dx: x * by, dy: y * by };
       edit({
         label: "Move pieces",
         together: `nudge ${pieceIds.join(" ")}`,
         change: (before) => movePieces(before, move),
       });
-    } else onView(viewMoved(view, { x: -x * lookStepPx, y: -y * lookStepPx }));
+    }
   }
 
   function remove() {
     if (holeId !== null) edit({ label: "Remove a hole", change: (before) => removeHole(before, { holeId }) });
-    else if (pieceIds.length > 0)
-      edit({ label: "Remove pieces", change: (before) => removePieces(before, { pieceIds }) });
+    else if (whyNot !== null) say(whyNot);
+    else edit({ label: "Remove pieces", change: (before) => removePieces(before, { pieceIds }) });
   }
 
   function letGo() {
-    if (drag === null) choose(nothingChosen);
-    else onDrag(null);
+    if (drag !== null) onDrag(null);
+    else if (holesByHand !== null) putHolesByHand(null);
+    else choose(nothingChosen);
   }
 
   return function handleKeyDown(event: KeyboardEvent) {
+    if ((event.ctrlKey || event.metaKey) && !event.altKey && event.key.toLowerCase() === "a") {
+      event.preventDefault();
+      choose(chooseAllPieces(document));
+      return;
+    }
     if (event.altKey || event.ctrlKey || event.metaKey) return;
     const middle = { x: (room?.width ?? 0) / 2, y: (room?.height ?? 0) / 2 };
     const arrow = arrows.get(event.key);
     if (arrow) {
       event.preventDefault();
-      nudge(arrow, event.shiftKey ? farNudgeMm : nudgeMm);
+      nudge(arrow, event.shiftKey ? step * shiftTimes : step);
     } else if (event.key === "+" || event.key === "=") onView(viewScaled(view, stepFactor, middle, fit));
     else if (event.key === "-") onView(viewScaled(view, 1 / stepFactor, middle, fit));
     else if (event.key === "0") onView(null);

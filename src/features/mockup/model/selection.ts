@@ -1,3 +1,4 @@
+import { lettersOnBoard } from "#shared/lettering/letters-on-board.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 
 /** What is chosen: a layer's row, the pieces a move would take along, and a hole when one is picked out. */
@@ -13,6 +14,14 @@ export const nothingChosen: Selection = { layerKey: null, pieceIds: [], holeId: 
 export function chooseLayer(document: MockupDocument, key: string): Selection {
   const layer = document.layers.find((candidate) => candidate.key === key);
   return layer ? { layerKey: key, pieceIds: layer.pieces.map(({ id }) => id), holeId: null } : nothingChosen;
+}
+
+/** All letters of a lettering, wherever they lie; the layer of the first of them. */
+export function chooseLettering(document: MockupDocument, letteringId: string): Selection {
+  const letters = lettersOnBoard(document, letteringId);
+  const [first] = letters;
+  if (!first) return nothingChosen;
+  return { layerKey: first.layer.key, pieceIds: letters.map(({ piece }) => piece.id), holeId: null };
 }
 
 /** One piece out of its layer. */
@@ -47,6 +56,13 @@ export function choosePieceAlso(document: MockupDocument, selection: Selection, 
   if (selection.layerKey !== layer.key || had.length === layer.pieces.length) return choosePiece(document, pieceId);
   const pieceIds = had.includes(pieceId) ? had.filter((id) => id !== pieceId) : [...had, pieceId];
   return { layerKey: layer.key, pieceIds, holeId: null };
+}
+
+/** Every piece that is shown and not locked. */
+export function chooseAllPieces({ layers }: MockupDocument): Selection {
+  const open = layers.filter(({ hidden, locked, pieces }) => !hidden && !locked && pieces.length > 0);
+  const pieceIds = open.flatMap(({ pieces }) => pieces.map(({ id }) => id));
+  return { layerKey: open[0]?.key ?? null, pieceIds, holeId: null };
 }
 
 /** What of the choice is still there after the document changed; the same selection when all of it is. */

@@ -1,5 +1,6 @@
 import { Popover } from "radix-ui";
 import { type ComponentProps, type KeyboardEvent, useId, useState } from "react";
+import { formatExact } from "#shared/units/format-exact.ts";
 import { formatLength } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
 import { parseLength } from "#shared/units/parse-length.ts";
@@ -88,11 +89,13 @@ type CellLengthProps = Omit<CellTextProps, "value" | "onCommit"> & {
   readonly mm: number;
   readonly unit: LengthUnit;
   readonly bounds: Bounds;
+  /** Shows thousandths of a millimetre and sixty-fourths of an inch, for what is set out in figures. */
+  readonly exact?: boolean;
   readonly onCommit: (mm: number) => void;
 };
 
 /** A length in a cell, in the shop's unit and within bounds. */
-export function CellLength({ mm, unit, bounds, onCommit, ...input }: CellLengthProps) {
+export function CellLength({ mm, unit, bounds, exact = false, onCommit, ...input }: CellLengthProps) {
   function handleCommit(text: string): string | null {
     const length = parseLength(text, unit);
     if (length === null) return `Write a length, like ${unit === "mm" ? "19 or 2.5 cm" : "3/4 or 19 mm"}.`;
@@ -101,7 +104,8 @@ export function CellLength({ mm, unit, bounds, onCommit, ...input }: CellLengthP
     onCommit(length);
     return null;
   }
-  return <CellText {...input} inputMode="decimal" value={formatLength(mm, unit)} onCommit={handleCommit} />;
+  const value = exact ? formatExact(mm, unit) : formatLength(mm, unit);
+  return <CellText {...input} inputMode="decimal" value={value} onCommit={handleCommit} />;
 }
 
 /** One choice out of a few, in a cell. Options are the children. */

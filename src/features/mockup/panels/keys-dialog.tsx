@@ -1,20 +1,7 @@
 import { Dialog } from "@/components/ui/dialog.tsx";
+import { deskKeys } from "./keys-list.ts";
 
-const keys: readonly [string, string][] = [
-  ["Arrows", "move what is chosen by 1 mm, with Shift by 10 mm"],
-  ["Arrows on a layer in the section", "raise it from barrel to barrel, with Shift by half a millimetre"],
-  ["Delete", "removes the chosen pieces or hole"],
-  ["Escape", "lets go of what is chosen, or of what is being dragged"],
-  ["Ctrl Z, Ctrl Shift Z", "undo, redo"],
-  ["+ and −", "look closer and farther"],
-  ["0", "the whole board"],
-  ["Space and drag", "looks around, as a drag on the bare wall does"],
-  ["Shift and press", "adds another layer to what is chosen; in the list of pieces another piece"],
-  ["Press twice", "picks one piece out of its layer"],
-  ["Alt while dragging", "catches on nothing"],
-];
-
-/** What the keys do, for those who would rather not reach for the mouse. */
+/** What the keys do, for those who would rather not reach for the mouse, and the way for those who listen. */
 export function KeysDialog({
   open,
   onOpenChange,
@@ -23,15 +10,36 @@ export function KeysDialog({
   readonly onOpenChange: (open: boolean) => void;
 }) {
   return (
-    <Dialog open={open} onOpenChange={onOpenChange} title="Keys">
-      <dl className="grid grid-cols-[auto_1fr] gap-x-5 gap-y-2 text-sm">
-        {keys.map(([key, does]) => (
-          <div key={key} className="contents">
-            <dt className="font-semibold text-ink">{key}</dt>
-            <dd className="text-ink">{does}</dd>
-          </div>
+    <Dialog
+      open={open}
+      onOpenChange={onOpenChange}
+      size="wide"
+      title="Keys"
+      description="On a Mac, the Command key stands for Ctrl."
+    >
+      <div className="gap-x-10 md:columns-2">
+        {deskKeys.map(({ where, keys }) => (
+          <section key={where} className="mb-5 break-inside-avoid">
+            <h3 className="mb-1.5 text-sm font-semibold text-ink">{where}</h3>
+            <dl className="grid grid-cols-[9rem_1fr] gap-x-4 gap-y-1.5 text-sm">
+              {keys.map((key) => (
+                <div key={key.keys} className="contents">
+                  <dt className="font-semibold text-ink">{key.keys}</dt>
+                  <dd className="text-ink">{key.does}</dd>
+                </div>
+              ))}
+            </dl>
+          </section>
         ))}
-      </dl>
+        <section className="break-inside-avoid">
+          <h3 className="mb-1.5 text-sm font-semibold text-ink">Without the drawing</h3>
+          <p className="text-sm text-ink">
+            Choose a layer by its key in the schedule. Its pieces are listed under it: choose some there, set their
+            places in the list or all together in the line over the schedule, or use the words of the bar. What was done
+            is said in that line.
+          </p>
+        </section>
+      </div>
     </Dialog>
   );
 }
