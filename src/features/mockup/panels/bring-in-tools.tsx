@@ -7,6 +7,7 @@ export function BringInTools({ onOpen }: { readonly onOpen: (dialog: DeskDialog)
   return (
     <ToolGroup title="Bring in">
       <WordButton onClick={() => onOpen("artwork")}>artwork</WordButton>
+      <WordButton onClick={() => onOpen("lettering")}>lettering</WordButton>
       <WordButton onClick={() => onOpen("plate")}>a plate</WordButton>
     </ToolGroup>
   );

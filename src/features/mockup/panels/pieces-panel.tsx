@@ -12,6 +12,7 @@ import { chooseLayer, choosePiece, choosePieceAlso } from "../model/selection.ts
 import { CellLength, CellText, WordButton } from "./cell-controls.tsx";
 import { DeskCell, DeskHead, DeskRowHead } from "./desk-table.tsx";
 import { HolesTable } from "./holes-table.tsx";
+import { LetteringOfLayer } from "./lettering-of-layer.tsx";
 import { WordsOfLayer } from "./words-of-layer.tsx";
 
 /** The pieces of the chosen layer as a list: what the canvas does by hand is done here in figures and by keyboard. */
@@ -48,6 +49,7 @@ export function PiecesPanel() {
           <WordButton onClick={split}>Make a layer of {counted(chosen.length, "piece")}</WordButton>
         )}
       </div>
+      <LetteringOfLayer layer={layer} />
       {pieces.length > 1 && <WordsOfLayer layer={layer} />}
       {pieces.length === 0 ? (
         <p className="text-sm text-graphite">This layer has no pieces left. Remove it, or undo.</p>
