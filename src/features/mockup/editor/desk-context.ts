@@ -15,6 +15,8 @@ export type Desk = {
   readonly unit: LengthUnit;
   readonly stock: StockChoices;
   readonly site: Site;
+  /** The words that the sign shall bear, a line a line. */
+  readonly briefWords: string;
   /** How heights are lettered in schedule and section. */
   readonly heights: BandWording;
   readonly letterHeights: (heights: BandWording) => void;

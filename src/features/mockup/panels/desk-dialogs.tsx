@@ -1,9 +1,10 @@
 import { BoardDialog } from "./board-dialog.tsx";
 import { BringInDialog } from "./bring-in-dialog.tsx";
 import { KeysDialog } from "./keys-dialog.tsx";
+import { LetteringDialog } from "./lettering-dialog.tsx";
 import { PlateDialog } from "./plate-dialog.tsx";
 
-export type DeskDialog = "artwork" | "plate" | "board" | "finish" | "keys";
+export type DeskDialog = "artwork" | "lettering" | "plate" | "board" | "finish" | "keys";
 
 type DeskDialogsProps = {
   readonly open: DeskDialog | null;
@@ -24,6 +25,7 @@ export function DeskDialogs({ open, onClose, ...job }: DeskDialogsProps) {
   return (
     <>
       <BringInDialog {...at("artwork")} {...job} />
+      <LetteringDialog {...at("lettering")} />
       <PlateDialog {...at("plate")} />
       <BoardDialog {...at("board")} />
       <BoardDialog {...at("finish")} at="finish" />

@@ -93,6 +93,7 @@ export function MockupDesk(props: MockupDeskProps) {
       unit,
       stock,
       site: { place: whereItHangs, limits },
+      briefWords: job.brief.words,
       heights,
       letterHeights,
       figures: figures?.figures ?? null,

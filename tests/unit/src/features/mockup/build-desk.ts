@@ -14,6 +14,7 @@ export function buildDesk(
     unit: "mm",
     stock: { acrylics: [], woods: [], hardware: [], adhesives: [] },
     site: inside,
+    briefWords: "",
     heights: "nominal",
     letterHeights: () => undefined,
     figures: null,
