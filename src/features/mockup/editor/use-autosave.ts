@@ -1,8 +1,10 @@
-import { useEffect, useEffectEvent, useReducer, useRef, useState } from "react";
+import { useEffect, useEffectEvent, useReducer, useRef } from "react";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { hasUnsavedWork, nextAutosave, saveDueAt, startAutosave } from "../model/autosave.ts";
-import { type DraftPlace, dropDraft, keepDraft } from "./kept-draft.ts";
+import { holdDesk } from "./desk-locks.ts";
+import type { DraftKeeper } from "./draft-keeper.ts";
+import type { DraftPlace } from "./draft-shelf.ts";
 import { saveDraft } from "./save-mockup.ts";
 
 /** Where the work stands with the server, and what can be done about it. */
@@ -10,62 +12,82 @@ export type Saving = ReturnType<typeof useAutosave>;
 
 type Options = {
   readonly mockup: Mockup;
+  /** The document that the desk was opened with: the mockup's, as the very object that is on the desk. */
+  readonly start: MockupDocument;
   readonly document: MockupDocument;
   readonly place: DraftPlace;
+  /** What was done last, in words; null when nothing was. */
+  readonly lastChange: string | null;
+  /** Keeps in this browser what the server does not have yet. The same one as long as the desk is open. */
+  readonly keeper: DraftKeeper;
   /** Called with what the server holds after each save. */
   readonly onSaved: (mockup: Mockup) => void;
 };
 
 /**
- * Saves the document as it changes. What the server does not have is kept in this browser while it can't be reached, and
- * when the page is closed; `keptHere` is false when the browser had no room for that.
+ * Saves the document as it changes. Until the server has it, it is kept in this browser: whether the server answers or not,
+ * the tab is closed or dies, what was drawn more than a moment before is found again.
  */
-export function useAutosave({ mockup, document, place, onSaved }: Options) {
+export function useAutosave({ mockup, start, document, place, lastChange, keeper, onSaved }: Options) {
   const [autosave, dispatch] = useReducer(nextAutosave, mockup, startAutosave);
-  const [keptHere, setKeptHere] = useState(true);
   /** The document that the server has, by reference. */
-  const onServer = useRef(mockup.document);
+  const onServer = useRef(start);
   /** The document that is on the desk, also for a request that is answered after it was left. */
-  const onDesk = useRef(mockup.document);
+  const onDesk = useRef(start);
   const isLeft = useRef(false);
+  /** How many changes the server does not have. */
+  const changes = useRef(0);
+  const unlock = useRef(() => {});
   const waiters = useRef<((version: number | null) => void)[]>([]);
   const unsaved = hasUnsavedWork(autosave) || document !== onServer.current;
 
-  const keep = useEffectEvent(() => {
-    const draft = { version: autosave.version, keptAt: new Date().toISOString(), document };
-    return keepDraft(window.localStorage, place, draft);
-  });
+  const work = useEffectEvent(() => ({
+    version: autosave.version,
+    changes: changes.current,
+    lastChange,
+    document,
+  }));
 
   /** What was changed while the last save was on its way, after the desk was left. */
   async function sendTheRest(version: number) {
     const rest = onDesk.current;
-    keepDraft(window.localStorage, place, { version, keptAt: new Date().toISOString(), document: rest });
+    await keeper.keepNow({ version, changes: changes.current, lastChange, document: rest });
     const outcome = await saveDraft(place, { version, document: rest });
     if (outcome.kind !== "saved") return;
     onSaved({ ...outcome.mockup, document: rest });
-    dropDraft(window.localStorage, place);
+    await keeper.letGo();
   }
 
   const send = useEffectEvent(async () => {
     if (autosave.state === "saving" || autosave.state === "stale") return;
     const sent = document;
+    const sentChanges = changes.current;
     dispatch({ kind: "sent" });
     const outcome = await saveDraft(place, { version: autosave.version, document: sent });
     if (outcome.kind === "saved") {
+      const { version, savedAt } = outcome.mockup;
       onServer.current = sent;
+      changes.current -= sentChanges;
       onSaved({ ...outcome.mockup, document: sent });
-      dispatch({ kind: "answered", version: outcome.mockup.version, savedAt: outcome.mockup.savedAt });
-      if (!isLeft.current || onDesk.current === sent) dropDraft(window.localStorage, place);
-      else await sendTheRest(outcome.mockup.version);
+      dispatch({ kind: "answered", version, savedAt });
+      if (onDesk.current === sent) await keeper.letGo();
+      else if (isLeft.current) await sendTheRest(version);
     } else if (outcome.kind === "newer") dispatch(outcome);
     else if (outcome.kind === "refused") dispatch(outcome);
     else dispatch({ kind: "unreachable", now: Date.now() });
+    if (isLeft.current) unlock.current();
   });
 
   const noteEdit = useEffectEvent((now: MockupDocument) => {
     onDesk.current = now;
     // What is on its way is soon the server's, so that going back to what it had is an edit, too.
-    if (now !== onServer.current || autosave.state === "saving") dispatch({ kind: "edited", now: Date.now() });
+    const isAsOnServer = now === onServer.current && autosave.state !== "saving";
+    if (isAsOnServer && autosave.state === "saved") return;
+    if (!isAsOnServer) {
+      changes.current += 1;
+      dispatch({ kind: "edited", now: Date.now() });
+    }
+    keeper.keepSoon(work());
   });
   useEffect(() => noteEdit(document), [document]);
 
@@ -79,10 +101,7 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
   const { state, version } = autosave;
   useEffect(() => {
     if (state === "saved") settle(waiters.current, version);
-    if (state === "stale" || state === "refused" || state === "offline") {
-      settle(waiters.current, null);
-      setKeptHere(keep());
-    }
+    if (state === "stale" || state === "refused" || state === "offline") settle(waiters.current, null);
   }, [state, version]);
 
   const sendWhenBack = useEffectEvent(() => {
@@ -94,9 +113,23 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
     return () => window.removeEventListener("online", tryAgain);
   }, []);
 
+  /** A tab that is hidden may be taken away without another word. */
+  const keepUnsaved = useEffectEvent(() => {
+    if (unsaved) void keeper.keepNow(work());
+  });
+  useEffect(() => {
+    const listen = () => keepUnsaved();
+    window.addEventListener("pagehide", listen);
+    window.document.addEventListener("visibilitychange", listen);
+    return () => {
+      window.removeEventListener("pagehide", listen);
+      window.document.removeEventListener("visibilitychange", listen);
+    };
+  }, []);
+
   const leave = useEffectEvent((event: BeforeUnloadEvent) => {
     if (!unsaved) return;
-    keep();
+    void keeper.keepNow(work());
     event.preventDefault();
   });
   useEffect(() => {
@@ -109,19 +142,21 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
   const sendOnTheWayOut = useEffectEvent(() => {
     isLeft.current = true;
     const isSent = document === onServer.current && autosave.state !== "saving";
-    if (isSent || autosave.state === "stale") return;
-    keep();
-    void send();
+    if (!isSent) void keeper.keepNow(work());
+    // Until an answer came the work is still on its way, and nobody is to be offered it.
+    if (isSent || autosave.state === "stale") unlock.current();
+    else void send();
   });
+  const { deskId } = keeper;
   useEffect(() => {
     isLeft.current = false;
+    unlock.current = holdDesk(deskId);
     return () => sendOnTheWayOut();
-  }, []);
+  }, [deskId]);
 
   return {
     autosave,
     unsaved,
-    keptHere,
     /** Saves now and gives the version on the server, or null when that could not be done. */
     saveNow: (): Promise<number | null> =>
       new Promise((resolve) => {
@@ -137,7 +172,8 @@ export function useAutosave({ mockup, document, place, onSaved }: Options) {
     keepTheirs: () => {
       if (autosave.state !== "stale") return;
       onServer.current = autosave.newer.document;
-      dropDraft(window.localStorage, place);
+      changes.current = 0;
+      void keeper.letGo();
       dispatch({ kind: "keep theirs" });
     },
   };

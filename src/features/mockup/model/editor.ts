@@ -1,5 +1,5 @@
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import { commit, type History, redo, startHistory, undo } from "./history.ts";
+import { commit, goToStep, type History, redo, startHistory, undo } from "./history.ts";
 import { keepChosen, nothingChosen, type Selection } from "./selection.ts";
 
 export type Editor = { readonly history: History; readonly selection: Selection };
@@ -17,10 +17,17 @@ export type EditorAction =
   | ({ readonly kind: "edit" } & Edit)
   | { readonly kind: "undo" }
   | { readonly kind: "redo" }
+  /** To where so many steps are done. */
+  | { readonly kind: "go to step"; readonly position: number }
   | { readonly kind: "choose"; readonly selection: Selection };
 
 export function startEditor(document: MockupDocument): Editor {
-  return { history: startHistory(document), selection: nothingChosen };
+  return resumeEditor(startHistory(document));
+}
+
+/** The editor with the steps of earlier in the session. */
+export function resumeEditor(history: History): Editor {
+  return { history, selection: nothingChosen };
 }
 
 /** The next state of the editor; the same one when the action changed nothing. */
@@ -36,6 +43,8 @@ export function nextEditor(editor: Editor, action: EditorAction): Editor {
       return withHistory(editor, undo(history));
     case "redo":
       return withHistory(editor, redo(history));
+    case "go to step":
+      return withHistory(editor, goToStep(history, action.position));
     case "choose":
       return action.selection === selection ? editor : { history, selection: action.selection };
   }

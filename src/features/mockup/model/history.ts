@@ -11,8 +11,11 @@ export type History = {
   readonly together: string | null;
 };
 
-/** Older steps are let go: documents share what they have in common, so this is memory for changes only. */
-export const mostSteps = 300;
+/**
+ * The whole session: one step every three seconds through a day of eight hours. Documents share what they have in common,
+ * so that a step is memory for its change only, a few kilobytes; older ones are let go rather than the page growing for ever.
+ */
+export const mostSteps = 10_000;
 
 export function startHistory(document: MockupDocument): History {
   return { past: [], present: document, future: [], together: null };
@@ -44,4 +47,29 @@ export function redo(history: History): History {
   if (!next) return history;
   const past = [...history.past, { document: history.present, label: next.label }];
   return { past, present: next.document, future, together: null };
+}
+
+/** Where the document stands after so many steps: back or forward, nothing is let go. The same history when it stands there. */
+export function goToStep(history: History, position: number): History {
+  const { past, present, future } = history;
+  const labels = [...past, ...future].map(({ label }) => label);
+  const documents = [...past.map(({ document }) => document), present, ...future.map(({ document }) => document)];
+  const to = documents[position];
+  if (to === undefined || position === past.length) return history;
+  const stepAt = (label: string, document: MockupDocument | undefined): Step => ({ label, document: document ?? to });
+  return {
+    past: labels.slice(0, position).map((label, index) => stepAt(label, documents[index])),
+    present: to,
+    future: labels.slice(position).map((label, index) => stepAt(label, documents[position + 1 + index])),
+    together: null,
+  };
+}
+
+export type StepInWords = { readonly position: number; readonly label: string; readonly isUndone: boolean };
+
+/** Every step in words, the newest first; `position` is how many steps are done once it is. The start is not among them. */
+export function stepsInWords({ past, future }: History): StepInWords[] {
+  return [...past, ...future]
+    .map(({ label }, index) => ({ position: index + 1, label, isUndone: index >= past.length }))
+    .reverse();
 }

@@ -1,4 +1,5 @@
 import { TextLink } from "@/components/ui/text-link.tsx";
+import { AidsTools } from "./aids-tools.tsx";
 import { BringInTools } from "./bring-in-tools.tsx";
 import { WordButton } from "./cell-controls.tsx";
 import type { DeskDialog } from "./desk-dialogs.tsx";
@@ -26,8 +27,10 @@ export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBar
         </TextLink>
       </h1>
       <BringInTools onOpen={onOpen} />
-      <SetOutTools />
+      <SetOutTools onOpen={onOpen} />
       <span className="ml-auto flex items-center gap-2">
+        <AidsTools />
+        <WordButton onClick={() => onOpen("drafts")}>Drafts</WordButton>
         <TextLink to={cutPlanPath} className="text-sm">
           Cut plan
         </TextLink>

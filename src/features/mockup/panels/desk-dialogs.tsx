@@ -1,10 +1,12 @@
 import { BoardDialog } from "./board-dialog.tsx";
 import { BringInDialog } from "./bring-in-dialog.tsx";
+import { DeskDrafts } from "./desk-drafts.tsx";
 import { KeysDialog } from "./keys-dialog.tsx";
 import { LetteringDialog } from "./lettering-dialog.tsx";
 import { PlateDialog } from "./plate-dialog.tsx";
+import { StepOffDialog } from "./step-off-dialog.tsx";
 
-export type DeskDialog = "artwork" | "lettering" | "plate" | "board" | "finish" | "keys";
+export type DeskDialog = "drafts" | "artwork" | "lettering" | "plate" | "board" | "finish" | "keys" | "step off";
 
 type DeskDialogsProps = {
   readonly open: DeskDialog | null;
@@ -29,6 +31,8 @@ export function DeskDialogs({ open, onClose, ...job }: DeskDialogsProps) {
       <PlateDialog {...at("plate")} />
       <BoardDialog {...at("board")} />
       <BoardDialog {...at("finish")} at="finish" />
+      <StepOffDialog {...at("step off")} />
+      <DeskDrafts {...at("drafts")} shop={job.shop} jobId={job.jobId} />
       <KeysDialog {...at("keys")} />
     </>
   );

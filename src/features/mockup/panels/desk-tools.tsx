@@ -7,12 +7,14 @@ import type { LengthUnit } from "#shared/units/length.ts";
 import { Button } from "@/components/ui/button.tsx";
 import { counted } from "@/lib/format.ts";
 import type { Saving } from "../editor/use-autosave.ts";
+import type { KeepFailure } from "../editor/use-draft-keeper.ts";
 import type { DeskStanding } from "../editor/use-standings.ts";
 import { againstBrief } from "../model/against-brief.ts";
 import type { History } from "../model/history.ts";
 import { WordButton } from "./cell-controls.tsx";
 import { IssueDialog } from "./issue-dialog.tsx";
 import { SavedState } from "./saved-state.tsx";
+import { StepsMenu } from "./steps-menu.tsx";
 
 type DeskToolsProps = {
   readonly shop: string;
@@ -20,6 +22,7 @@ type DeskToolsProps = {
   readonly job: Job;
   readonly mayIssue: boolean;
   readonly saving: Saving;
+  readonly keepFailure: KeepFailure;
   readonly history: History;
   /** null until the dry fit has run and what is set aside is known. */
   readonly standings: readonly DeskStanding[] | null;
@@ -27,12 +30,14 @@ type DeskToolsProps = {
   readonly isCurrent: boolean;
   readonly onUndo: () => void;
   readonly onRedo: () => void;
+  readonly onGoToStep: (position: number) => void;
   readonly onIssued: (revisionId: string) => void;
 };
 
 /** Saved or not, a step back and forward, and the one main action: to issue the mockup as the next revision. */
 export function DeskTools(props: DeskToolsProps) {
-  const { shop, unit, job, mayIssue, saving, history, standings, isCurrent, onUndo, onRedo, onIssued } = props;
+  const { shop, unit, job, mayIssue, saving, keepFailure, history, standings, isCurrent } = props;
+  const { onUndo, onRedo, onGoToStep, onIssued } = props;
   const [open, setOpen] = useState(false);
   const letter = nextRevisionLetter(job.latest?.letter ?? null);
   const stops = standings && openStops(standings);
@@ -42,13 +47,14 @@ export function DeskTools(props: DeskToolsProps) {
 
   return (
     <>
-      <SavedState autosave={saving.autosave} keptHere={saving.keptHere} />
+      <SavedState autosave={saving.autosave} keepFailure={keepFailure} />
       <WordButton disabled={lastStep === undefined} title={lastStep} onClick={onUndo}>
         Undo
       </WordButton>
       <WordButton disabled={nextStep === undefined} title={nextStep} onClick={onRedo}>
         Redo
       </WordButton>
+      <StepsMenu history={history} onGoTo={onGoToStep} />
       {mayIssue && (
         <span className="flex items-center gap-3">
           {why !== null && (

@@ -1,4 +1,4 @@
-import { type ReactNode, useMemo, useReducer, useRef, useState } from "react";
+import { type ReactNode, useMemo, useRef, useState } from "react";
 import type { Job } from "#shared/contracts/jobs.ts";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { StockItem } from "#shared/contracts/stock.ts";
@@ -13,15 +13,16 @@ import { useRoom } from "@/lib/use-room.ts";
 import { CanvasPanel } from "../canvas/canvas-panel.tsx";
 import { viewAt } from "../canvas/view-of-board.ts";
 import { type Desk, DeskContext } from "../editor/desk-context.ts";
-import { useAutosave } from "../editor/use-autosave.ts";
-import { useKeptDraft } from "../editor/use-kept-draft.ts";
+import { useDeskAids } from "../editor/use-desk-aids.ts";
+import { useSafeEditor } from "../editor/use-safe-editor.ts";
 import { useSettingAside } from "../editor/use-setting-aside.ts";
 import { useStandings } from "../editor/use-standings.ts";
 import { useUndoKeys } from "../editor/use-undo-keys.ts";
+import { useVoice } from "../editor/use-voice.ts";
 import { useDeskPicture } from "../engine/use-desk-picture.ts";
 import type { Drag } from "../model/drag.ts";
 import { dryFitContextOf } from "../model/dry-fit-context.ts";
-import { nextEditor, startEditor } from "../model/editor.ts";
+import { placeWords } from "../model/place-words.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { stockChoices } from "../model/stock-choices.ts";
 import { CostPanel, type CostPanelProps } from "./cost-panel.tsx";
@@ -33,6 +34,7 @@ import { KeptDraftNotice } from "./kept-draft-notice.tsx";
 import { LayerDetails } from "./layer-details.tsx";
 import { LeaveDialog } from "./leave-dialog.tsx";
 import { PiecesPanel } from "./pieces-panel.tsx";
+import { PlaceStrip } from "./place-strip.tsx";
 import { SchedulePanel } from "./schedule-panel.tsx";
 import { SectionPanel } from "./section-panel.tsx";
 import { StaleDialog } from "./stale-dialog.tsx";
@@ -60,7 +62,9 @@ export type MockupDeskProps = {
 /** The mockup at work: elevation and section above, schedule and dry fit below. */
 export function MockupDesk(props: MockupDeskProps) {
   const { shop, unit, personId, job, mockup, limits, jobPath, cutPlanPath, onSaved, onIssued, renderTools } = props;
-  const [editor, dispatch] = useReducer(nextEditor, mockup.document, startEditor);
+  const place = useMemo(() => ({ personId, shop, jobId: job.id }), [personId, shop, job.id]);
+  const safe = useSafeEditor({ mockup, place, onSaved });
+  const { editor, dispatch, saving } = safe;
   const [drag, setDrag] = useState<Drag | null>(null);
   const [view, setView] = useState<DrawingView | null>(null);
   const [finding, setFinding] = useState<Finding | null>(null);
@@ -70,9 +74,6 @@ export function MockupDesk(props: MockupDeskProps) {
   const frame = useRef<HTMLDivElement>(null);
   const room = useRoom(frame);
   const document = editor.history.present;
-  const place = useMemo(() => ({ personId, shop, jobId: job.id }), [personId, shop, job.id]);
-  const saving = useAutosave({ mockup, document, place, onSaved });
-  const kept = useKeptDraft(place, mockup);
   const stock = useMemo(() => stockChoices(props.stock), [props.stock]);
 
   const whereItHangs = job.brief.place ?? "inside";
@@ -84,6 +85,8 @@ export function MockupDesk(props: MockupDeskProps) {
   const standings = useStandings({ shop, jobId: job.id }, drawn?.dryFit.findings ?? null);
   const settingAside = useSettingAside({ shop, jobId: job.id, save: saving.saveNow });
   useUndoKeys(dispatch);
+  const { aids, changeAids } = useDeskAids(personId, unit);
+  const { said, say } = useVoice(editor.history, () => placeWords(document, editor.selection, unit));
 
   const holesByHand = takesHoles(document, editor.selection.layerKey, holesOf) ? holesOf : null;
   const desk = useMemo(
@@ -103,14 +106,36 @@ export function MockupDesk(props: MockupDeskProps) {
         putHolesByHand(key);
         if (key !== null) frame.current?.scrollIntoView({ block: "nearest" });
       },
+      client: job.client.name,
+      copyPlace: { personId, shop, clientId: job.client.id },
+      aids,
+      changeAids,
       edit: (edit) => dispatch({ kind: "edit", ...edit }),
       choose: (selection) => {
         setFinding(null);
         if (selection.layerKey !== holesByHand) putHolesByHand(null);
         dispatch({ kind: "choose", selection });
       },
+      say,
     }),
-    [document, editor.selection, unit, stock, whereItHangs, limits, heights, figures, holesByHand],
+    [
+      document,
+      editor.selection,
+      unit,
+      stock,
+      whereItHangs,
+      limits,
+      heights,
+      figures,
+      holesByHand,
+      job.client,
+      personId,
+      shop,
+      aids,
+      changeAids,
+      say,
+      dispatch,
+    ],
   );
 
   function show(next: Finding) {
@@ -118,13 +143,6 @@ export function MockupDesk(props: MockupDeskProps) {
     setFinding(next);
     if (next.where !== null && room !== null) setView(viewAt(next.where, fit, room));
     frame.current?.scrollIntoView({ block: "nearest" });
-  }
-
-  function keepTheirs() {
-    if (saving.autosave.state !== "stale") return;
-    const theirs = saving.autosave.newer.document;
-    saving.keepTheirs();
-    dispatch({ kind: "edit", label: "Keep the newer version", change: () => theirs });
   }
 
   return (
@@ -136,11 +154,13 @@ export function MockupDesk(props: MockupDeskProps) {
           job={job}
           mayIssue={mockup.can.issue}
           saving={saving}
+          keepFailure={safe.keepFailure}
           history={editor.history}
           standings={standings.standings}
           isCurrent={isCurrent}
           onUndo={() => dispatch({ kind: "undo" })}
           onRedo={() => dispatch({ kind: "redo" })}
+          onGoToStep={(position) => dispatch({ kind: "go to step", position })}
           onIssued={onIssued}
         />,
       )}
@@ -151,19 +171,17 @@ export function MockupDesk(props: MockupDeskProps) {
         cutPlanPath={cutPlanPath}
         onOpen={setDialog}
       />
-      {kept.draft && (
+      {safe.keptDrafts.map((draft) => (
         <KeptDraftNotice
-          draft={kept.draft}
-          version={mockup.version}
-          onTakeUp={() => {
-            const mine = kept.draft?.document;
-            kept.forget();
-            if (mine) dispatch({ kind: "edit", label: "Take up kept work", change: () => mine });
-          }}
-          onLeave={kept.forget}
+          key={draft.deskId}
+          draft={draft}
+          mockup={mockup}
+          unit={unit}
+          onTakeUp={() => safe.takeUp(draft)}
+          onThrowAway={() => safe.throwAway(draft)}
         />
-      )}
-      <div className="grid h-[max(26rem,calc(100dvh-22.5rem))] grid-cols-[minmax(0,1fr)_minmax(15rem,18.5rem)] border-b border-rule">
+      ))}
+      <div className="grid h-[max(26rem,calc(100dvh-25rem))] grid-cols-[minmax(0,1fr)_minmax(15rem,18.5rem)] border-b border-rule">
         <CanvasPanel
           drawn={drawn}
           failure={failure}
@@ -178,6 +196,7 @@ export function MockupDesk(props: MockupDeskProps) {
         />
         <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
       </div>
+      <PlaceStrip said={said} />
       <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_clamp(17rem,25.5vw,24rem)]">
         <div className="min-w-0">
           <SchedulePanel
@@ -213,10 +232,12 @@ export function MockupDesk(props: MockupDeskProps) {
       <DeskDialogs open={dialog} onClose={() => setDialog(null)} shop={shop} jobId={job.id} jobPath={jobPath} />
       <StaleDialog
         newer={saving.autosave.state === "stale" ? saving.autosave.newer : null}
-        onTheirs={keepTheirs}
-        onMine={saving.keepMine}
+        mine={document}
+        unit={unit}
+        onTheirs={safe.keepTheirs}
+        onMine={safe.keepMine}
       />
-      <LeaveDialog saving={saving} />
+      <LeaveDialog saving={saving} keepFailure={safe.keepFailure} />
     </DeskContext>
   );
 }

@@ -1,29 +1,40 @@
 import { formatInstant } from "@/lib/format.ts";
+import type { KeepFailure } from "../editor/use-draft-keeper.ts";
 import type { Autosave } from "../model/autosave.ts";
 
-/** Where the work stands with the server, in words. */
-export function SavedState({ autosave, keptHere }: { readonly autosave: Autosave; readonly keptHere: boolean }) {
+type SavedStateProps = { readonly autosave: Autosave; readonly keepFailure: KeepFailure };
+
+/** Where the work stands with the server, in words, and whether this browser keeps a copy meanwhile. */
+export function SavedState({ autosave, keepFailure }: SavedStateProps) {
   return (
-    <p role="status" className="text-sm text-graphite">
-      {textOf(autosave, keptHere)}
+    <p role="status" className="max-w-80 text-right text-sm text-graphite">
+      {textOf(autosave, keepFailure)}
     </p>
   );
 }
 
-function textOf(autosave: Autosave, keptHere: boolean): string {
+function textOf(autosave: Autosave, keepFailure: KeepFailure): string {
+  const kept = keepFailure === null ? "Kept on this device" : noCopyWords(keepFailure);
   switch (autosave.state) {
     case "saved":
-      return autosave.savedAt === null
-        ? "Nothing to save yet"
-        : `Saved ${formatInstant(autosave.savedAt).replace("today ", "")}`;
+      if (autosave.savedAt === null) return "Nothing to save yet";
+      return `Saved ${formatInstant(autosave.savedAt).replace("today ", "")}${and(keepFailure)}`;
     case "dirty":
     case "saving":
-      return "Saving …";
+      return `Saving …${and(keepFailure)}`;
     case "stale":
-      return "Not saved: a newer version is there";
+      return `Not saved: a newer version is there. ${kept}`;
     case "offline":
-      return keptHere ? "No connection. Kept on this device" : "No connection, and no room to keep it here";
+      return `No connection. ${kept}`;
     case "refused":
-      return `Not saved. ${autosave.why}`;
+      return `Not saved. ${autosave.why} ${kept}`;
   }
 }
+
+/** Said also while all goes well, as soon as it is known: when the connection goes it is too late. */
+const and = (failure: KeepFailure): string => (failure === null ? "" : `. ${noCopyWords(failure)}`);
+
+const noCopyWords = (failure: NonNullable<KeepFailure>): string =>
+  failure === "full"
+    ? "No copy on this device: its room for this page is full"
+    : "No copy on this device: this browser lets pages keep nothing";

@@ -3,11 +3,12 @@ import { act } from "react";
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import { findDraft } from "@/features/mockup/editor/kept-draft.ts";
+import { draftKeeper } from "@/features/mockup/editor/draft-keeper.ts";
 import { type Saving, useAutosave } from "@/features/mockup/editor/use-autosave.ts";
 import { type Answer, startAnswers } from "../../../support/answers.ts";
 import { render, until } from "../../../support/render.tsx";
 import { emptyMockup } from "../sample-mockup.ts";
+import { memoryShelf } from "./memory-shelf.ts";
 
 const place = { personId: "p1", shop: "copperlark-signs", jobId: "0b8f7c52-2c1e-4a55-9d55-0a2c5a1f9c11" };
 const start: Mockup = {
@@ -27,8 +28,12 @@ const saved = (version: number, document: MockupDocument): Mockup => ({
 });
 
 let saving: Saving;
+let shelf: ReturnType<typeof memoryShelf>;
+let keeper: ReturnType<typeof draftKeeper>;
 function Desk({ document }: { document: MockupDocument }) {
-  saving = useAutosave({ mockup: start, document, place, onSaved: () => undefined });
+  const lastChange = `Quantity ${document.quantity}`;
+  const onSaved = () => undefined;
+  saving = useAutosave({ mockup: start, start: start.document, document, place, lastChange, keeper, onSaved });
   return null;
 }
 
@@ -36,7 +41,8 @@ let answers: Awaited<ReturnType<typeof startAnswers>>;
 let answer: (body: unknown) => Answer | Promise<Answer>;
 let desk: Awaited<ReturnType<typeof render>>;
 beforeEach(async () => {
-  window.localStorage.clear();
+  shelf = memoryShelf();
+  keeper = draftKeeper({ shelf, place, deskId: "d1", onOutcome: () => undefined });
   answer = () => ({ status: 200, json: saved(4, edited) });
   answers = await startAnswers(({ body }) => answer(body));
   desk = await render(<Desk document={start.document} />);
@@ -45,6 +51,21 @@ afterEach(async () => {
   await desk.end();
   answers.end();
 });
+
+/** What this browser keeps of the desk's work. */
+async function keptHere() {
+  const [draft] = await shelf.list(place);
+  return draft ?? null;
+}
+const untilKept = async (isKept: boolean) => {
+  for (let look = 0; look < 300; look += 1) {
+    if (((await keptHere()) !== null) === isKept) return;
+    await act(async () => {
+      await new Promise((resolve) => setTimeout(resolve, 10));
+    });
+  }
+  throw new Error(`the work is ${isKept ? "not" : "still"} kept`);
+};
 
 /** The answer comes while the page goes on drawing, so it is waited for outside of the act that asks. */
 async function saveNow(): Promise<number | null> {
@@ -99,11 +120,11 @@ describe("saving what is on the desk", () => {
     await until(() => answers.asked.length === 1);
     await desk.redraw(<Desk document={emptyMockup({ quantity: 3 })} />);
     await desk.redraw(<p>Another page</p>);
-    expect(findDraft(window.localStorage, place)?.document.quantity).toBe(3);
+    expect((await keptHere())?.document.quantity).toBe(3);
     letGo();
     await until(() => answers.asked.length === 2);
     expect(answers.asked[1]).toMatchObject({ body: { version: 4, document: { quantity: 3 } } });
-    await until(() => findDraft(window.localStorage, place) === null);
+    await untilKept(false);
   });
 
   it("stops at a newer version, keeps the work here, and saves over it when told to keep mine", async () => {
@@ -114,23 +135,25 @@ describe("saving what is on the desk", () => {
     });
     await desk.redraw(<Desk document={edited} />);
     await until(() => saving.autosave.state === "stale");
-    expect(findDraft(window.localStorage, place)?.document).toEqual(edited);
+    await untilKept(true);
+    expect(await keptHere()).toMatchObject({ version: 3, changes: 1, lastChange: "Quantity 2", document: edited });
     answer = () => ({ status: 200, json: saved(10, edited) });
     await act(async () => saving.keepMine());
     await until(() => saving.autosave.state === "saved");
     expect(answers.asked.at(-1)).toMatchObject({ body: { version: 9, document: { quantity: 2 } } });
-    expect(findDraft(window.localStorage, place)).toBeNull();
+    await untilKept(false);
   });
 
   it("keeps the work here while the server can't be reached, and saves once it is back", async () => {
     answer = () => ({ status: 503, json: {} });
     await desk.redraw(<Desk document={edited} />);
     await until(() => saving.autosave.state === "offline");
-    expect(findDraft(window.localStorage, place)?.version).toBe(3);
+    await untilKept(true);
+    expect((await keptHere())?.version).toBe(3);
     answer = () => ({ status: 200, json: saved(4, edited) });
     await act(async () => window.dispatchEvent(new Event("online")));
     await until(() => saving.autosave.state === "saved");
-    expect(findDraft(window.localStorage, place)).toBeNull();
+    await untilKept(false);
   });
 
   it("saves at once when a revision is to be issued, and says so when that can't be done", async () => {
@@ -148,6 +171,17 @@ describe("saving what is on the desk", () => {
     await desk.redraw(<Desk document={emptyMockup({ quantity: 5 })} />);
     expect(await saveNow()).toBeNull();
     expect(saving.autosave).toMatchObject({ state: "refused", why: "You may look, but not do this." });
+  });
+
+  it("keeps the work here also while the answer to a save is awaited, and lets go of it with the answer", async () => {
+    const letGo = holdFirstSave();
+    await desk.redraw(<Desk document={edited} />);
+    await until(() => answers.asked.length === 1);
+    await untilKept(true);
+    expect(await keptHere()).toMatchObject({ version: 3, document: { quantity: 2 } });
+    letGo();
+    await until(() => saving.autosave.state === "saved");
+    await untilKept(false);
   });
 
   it("asks the browser to hold the page while there is unsaved work", async () => {

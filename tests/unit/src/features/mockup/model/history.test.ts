@@ -17,7 +17,15 @@ import {
 import { setBoard } from "@/features/mockup/model/commands/set-board.ts";
 import { bondLayer, raiseLayer, standLayer } from "@/features/mockup/model/commands/set-hold.ts";
 import { setLayer } from "@/features/mockup/model/commands/set-layer.ts";
-import { commit, mostSteps, redo, startHistory, undo } from "@/features/mockup/model/history.ts";
+import {
+  commit,
+  goToStep,
+  mostSteps,
+  redo,
+  startHistory,
+  stepsInWords,
+  undo,
+} from "@/features/mockup/model/history.ts";
 import { barrel, brass, cement, chalk, emptyMockup, midnight, pine } from "../sample-mockup.ts";
 import { inside } from "../sites.ts";
 
@@ -242,10 +250,34 @@ describe("history", () => {
   it("keeps the newest steps and lets go of the oldest", () => {
     let history = startHistory(emptyMockup());
     for (let step = 1; step <= mostSteps + 7; step++)
-      history = commit(history, setBoard(history.present, { width: 600 + step }), { label: `Step ${step}` });
-    while (history.past.length > 0) history = undo(history);
-    expect(history.present.board.width).toBe(607);
-    expect(history.future).toHaveLength(mostSteps);
+      history = commit(history, { ...history.present }, { label: `Step ${step}` });
+    expect(history.past).toHaveLength(mostSteps);
+    expect(history.past[0]?.label).toBe("Step 8");
+    const start = goToStep(history, 0);
+    expect(start.future).toHaveLength(mostSteps);
+    expect(goToStep(start, mostSteps)).toEqual(history);
+  });
+
+  it("tells its steps in words, and goes to any of them, back and forward, without losing one", () => {
+    const start = emptyMockup();
+    let history = startHistory(start);
+    for (const width of [610, 620, 630, 640])
+      history = commit(history, setBoard(history.present, { width }), { label: `Width ${width}` });
+    const widthAt = (position: number) => goToStep(history, position).present.board.width;
+    expect([0, 1, 2, 3, 4].map(widthAt)).toEqual([600, 610, 620, 630, 640]);
+    const back = goToStep(history, 1);
+    expect(back).toEqual(undo(undo(undo(history))));
+    expect(stepsInWords(back)).toEqual([
+      { position: 4, label: "Width 640", isUndone: true },
+      { position: 3, label: "Width 630", isUndone: true },
+      { position: 2, label: "Width 620", isUndone: true },
+      { position: 1, label: "Width 610", isUndone: false },
+    ]);
+    expect(goToStep(back, 4)).toEqual(history);
+    expect(goToStep(goToStep(history, 0), 3).present).toBe(undo(history).present);
+    expect(goToStep(history, 0).present).toBe(start);
+    expect(goToStep(back, 1)).toBe(back);
+    expect(goToStep(history, 5)).toBe(history);
   });
 
   it("stays the same when nothing changed or nothing is left", () => {
