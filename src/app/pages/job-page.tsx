@@ -1,9 +1,10 @@
 import { useQuery } from "@tanstack/react-query";
-import { useParams } from "react-router-dom";
+import { useNavigate, useParams } from "react-router-dom";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import { ArtworkPart } from "@/features/artwork/components/artwork-part.tsx";
 import { jobQuery } from "@/features/jobs/api/queries.ts";
+import { AnotherLike } from "@/features/jobs/components/another-like.tsx";
 import { BriefPart } from "@/features/jobs/components/brief-part.tsx";
 import { ConsentPart } from "@/features/jobs/components/consent-part.tsx";
 import { EventLog } from "@/features/jobs/components/event-log.tsx";
@@ -22,6 +23,7 @@ import { paths } from "../paths.ts";
 export function JobPage() {
   const { shop, side } = useReader();
   const { jobId = "" } = useParams();
+  const navigate = useNavigate();
   const query = useQuery(jobQuery(shop.slug, jobId));
   useLiveJob(shop.slug, query.isSuccess ? jobId : null);
   if (query.isPending) {
@@ -84,6 +86,14 @@ export function JobPage() {
           <div className="min-w-0 space-y-8">
             <OpenNotes shop={slug} job={job} />
             {staff && <JobMoves shop={slug} job={job} />}
+            {staff && (
+              <AnotherLike
+                key={jobId}
+                shop={slug}
+                job={job}
+                onOpened={(openedId) => void navigate(paths.job(slug, openedId))}
+              />
+            )}
             <ConsentPart shop={slug} shopName={shop.name} job={job} side={side} />
             {staff && <EventLog shop={slug} jobId={jobId} />}
           </div>

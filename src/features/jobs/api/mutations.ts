@@ -1,5 +1,6 @@
 import { useMutation, useQueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
+import { openAnotherLike } from "#shared/contracts/another-like.ts";
 import { addClient } from "#shared/contracts/clients.ts";
 import * as contract from "#shared/contracts/jobs.ts";
 import { withdrawRevision } from "#shared/contracts/revisions.ts";
@@ -37,6 +38,15 @@ export function useOpenJob(shop: string) {
     onSuccess: keep,
     // The client may have been added even if the job then was refused.
     onSettled: () => client.invalidateQueries({ queryKey: keys.clients(shop) }),
+  });
+}
+
+/** Opens a job of the same format, stack and hardware as an earlier one. */
+export function useOpenAnotherLike(shop: string, jobId: string) {
+  return useMutation({
+    mutationFn: (body: z.input<typeof openAnotherLike.body>) =>
+      call(openAnotherLike, { params: { shop, jobId }, body }),
+    onSuccess: useKeepJob(shop),
   });
 }
 
