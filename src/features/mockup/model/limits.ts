@@ -12,6 +12,8 @@ export const pocketDepthBounds = { least: 0.1, most: 100 } as const;
 export const clearanceBounds = { least: 0, most: 5 } as const;
 export const bitRadiusBounds = { least: 0, most: 25 } as const;
 export const coordinateBounds = { least: -longestMm, most: longestMm } as const;
+/** Width or height of pieces; our choice for the least: nothing thinner is cut. */
+export const sizeBounds = { least: 0.1, most: longestMm } as const;
 /** Our choice for the least. */
 export const spineWidthBounds = { least: 1, most: longestMm } as const;
 /** Our choice: no drill of a sign shop makes a smaller or a wider hole. */

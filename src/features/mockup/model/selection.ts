@@ -44,7 +44,8 @@ export function chooseAlso(document: MockupDocument, selection: Selection, key: 
   const had = more.some((id) => selection.pieceIds.includes(id));
   const pieceIds = had ? selection.pieceIds.filter((id) => !more.includes(id)) : [...selection.pieceIds, ...more];
   if (pieceIds.length === 0) return nothingChosen;
-  return { layerKey: had ? selection.layerKey : key, pieceIds, holeId: null };
+  const left = selection.layerKey === key ? layerOfPiece(document, pieceIds.at(-1) ?? "")?.key : selection.layerKey;
+  return { layerKey: had ? (left ?? null) : key, pieceIds, holeId: null };
 }
 
 /** Adds a piece to the chosen ones of its layer, or takes it out; when another layer or the whole of its own is chosen, it alone is. */

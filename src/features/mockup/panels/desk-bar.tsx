@@ -2,6 +2,7 @@ import { TextLink } from "@/components/ui/text-link.tsx";
 import { AidsTools } from "./aids-tools.tsx";
 import { BringInTools } from "./bring-in-tools.tsx";
 import { WordButton } from "./cell-controls.tsx";
+import { CutTools } from "./cut-tools.tsx";
 import type { DeskDialog } from "./desk-dialogs.tsx";
 import { SetOutTools } from "./set-out-tools.tsx";
 
@@ -28,6 +29,7 @@ export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBar
       </h1>
       <BringInTools onOpen={onOpen} />
       <SetOutTools onOpen={onOpen} />
+      <CutTools onOpen={onOpen} />
       <span className="ml-auto flex items-center gap-2">
         <AidsTools />
         <WordButton onClick={() => onOpen("drafts")}>Drafts</WordButton>

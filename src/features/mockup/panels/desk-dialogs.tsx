@@ -1,12 +1,29 @@
 import { BoardDialog } from "./board-dialog.tsx";
 import { BringInDialog } from "./bring-in-dialog.tsx";
+import { CutAwayDialog } from "./cut-away-dialog.tsx";
 import { DeskDrafts } from "./desk-drafts.tsx";
+import { JoinDialog } from "./join-dialog.tsx";
 import { KeysDialog } from "./keys-dialog.tsx";
 import { LetteringDialog } from "./lettering-dialog.tsx";
+import { LooseBitsDialog } from "./loose-bits-dialog.tsx";
+import { MarginDialog } from "./margin-dialog.tsx";
 import { PlateDialog } from "./plate-dialog.tsx";
+import { SplitDialog } from "./split-dialog.tsx";
 import { StepOffDialog } from "./step-off-dialog.tsx";
 
-export type DeskDialog = "drafts" | "artwork" | "lettering" | "plate" | "board" | "finish" | "keys" | "step off";
+/** How pieces are shaped. */
+type CutDialog = "margin" | "join" | "cut away" | "loose bits" | "split";
+
+export type DeskDialog =
+  | "drafts"
+  | "artwork"
+  | "lettering"
+  | "plate"
+  | "board"
+  | "finish"
+  | "keys"
+  | "step off"
+  | CutDialog;
 
 type DeskDialogsProps = {
   readonly open: DeskDialog | null;
@@ -33,6 +50,11 @@ export function DeskDialogs({ open, onClose, ...job }: DeskDialogsProps) {
       <BoardDialog {...at("finish")} at="finish" />
       <StepOffDialog {...at("step off")} />
       <DeskDrafts {...at("drafts")} shop={job.shop} jobId={job.jobId} />
+      <MarginDialog {...at("margin")} />
+      <JoinDialog {...at("join")} />
+      <CutAwayDialog {...at("cut away")} />
+      <LooseBitsDialog {...at("loose bits")} />
+      <SplitDialog {...at("split")} />
       <KeysDialog {...at("keys")} />
     </>
   );

@@ -7,13 +7,10 @@ import { chosenWords, whyIdle } from "../model/chosen-words.ts";
 import { setHole } from "../model/commands/holes.ts";
 import { boxOfPieces, mirrorPieces, placePiece, turnPieces } from "../model/commands/pieces.ts";
 import { type PlaceOfChosen, placeChosen } from "../model/commands/place-chosen.ts";
-import { coordinateBounds } from "../model/limits.ts";
+import { coordinateBounds, sizeBounds } from "../model/limits.ts";
 import { readDegrees } from "../model/read-number.ts";
 import { CellLength, CellSelect, CellText } from "./cell-controls.tsx";
 import { ToolWord } from "./tool-word.tsx";
-
-/** Our choice for the least: nothing thinner is cut. */
-const sizeBounds = { least: 0.1, most: 10_000 } as const;
 
 /** Place, size and turn of what is chosen as a whole, in figures, and what was done last. */
 export function PlaceStrip({ said }: { readonly said: Said }) {

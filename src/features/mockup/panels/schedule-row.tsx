@@ -7,7 +7,7 @@ import { useDesk } from "../editor/desk-context.ts";
 import { raiseLayer } from "../model/commands/set-hold.ts";
 import { setLayer } from "../model/commands/set-layer.ts";
 import { offsetBounds } from "../model/limits.ts";
-import { chooseLayer } from "../model/selection.ts";
+import { chooseAlso, chooseLayer } from "../model/selection.ts";
 import { catchBarrel, typedReachMm } from "../model/snapping.ts";
 import { isSameStock, thicknessChoices, withCurrent } from "../model/stock-choices.ts";
 import { CellLength, CellSelect, CellText, Swatch } from "./cell-controls.tsx";
@@ -25,6 +25,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
   const { document, edit, choose, selection, stock, unit } = useDesk();
   const { key, name, hold } = layer;
   const isChosen = selection.layerKey === key;
+  const isBeside = layer.pieces.some(({ id }) => selection.pieceIds.includes(id));
   const sheets = withCurrent(
     stock.acrylics.map(({ acrylic }) => acrylic),
     layer.stock,
@@ -45,17 +46,21 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
   return (
     <tr
       aria-current={isChosen || undefined}
-      className={cx(isChosen && "bg-indigo/8", layer.hidden && "opacity-70")}
-      onFocusCapture={() => {
-        if (!isChosen) choose(chooseLayer(document, key));
+      className={cx((isChosen || isBeside) && "bg-indigo/8", layer.hidden && "opacity-70")}
+      onFocusCapture={({ target }) => {
+        // Its key chooses when it is pressed, alone or beside others.
+        if (!isChosen && !target.hasAttribute("data-chooses")) choose(chooseLayer(document, key));
       }}
     >
       <DeskRowHead>
         <button
           type="button"
           aria-label={`Choose ${key}, ${name}`}
-          aria-pressed={isChosen}
-          onClick={() => choose(chooseLayer(document, key))}
+          aria-pressed={isChosen || isBeside}
+          data-chooses
+          onClick={({ shiftKey }) =>
+            choose(shiftKey ? chooseAlso(document, selection, key) : chooseLayer(document, key))
+          }
           className="min-h-7 min-w-7 cursor-pointer rounded border border-transparent text-left font-semibold underline decoration-dotted underline-offset-4 hover:bg-linen"
         >
           {key}

@@ -1,4 +1,5 @@
 import type { Desk } from "@/features/mockup/editor/desk-context.ts";
+import { usualAids } from "@/features/mockup/model/desk-aids.ts";
 import type { Editor, EditorAction } from "@/features/mockup/model/editor.ts";
 import { inside } from "./sites.ts";
 
@@ -21,8 +22,13 @@ export function buildDesk(
     figuresOf: history.present,
     holesByHand: null,
     putHolesByHand: () => undefined,
+    client: "Any client",
+    copyPlace: { personId: "person", shop: "shop", clientId: "client" },
+    aids: usualAids("mm"),
+    changeAids: () => undefined,
     edit: (edit) => dispatch({ kind: "edit", ...edit }),
     choose: (next) => dispatch({ kind: "choose", selection: next }),
+    say: () => undefined,
     ...overrides,
   };
 }
