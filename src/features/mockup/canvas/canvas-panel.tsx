@@ -1,14 +1,19 @@
-import { type RefObject, useId, useRef } from "react";
+import { type RefObject, useId, useRef, useState } from "react";
 import type { Point } from "#shared/geometry/path.ts";
 import { Busy } from "@/components/ui/busy.tsx";
+import { cx } from "@/lib/cx.ts";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
+import { useDesk } from "../editor/desk-context.ts";
 import type { Drawn } from "../engine/use-engine.ts";
 import type { Drag } from "../model/drag.ts";
 import { HolesByHand } from "./holes-by-hand.tsx";
+import { Rulers } from "./rulers.tsx";
 import { useCanvasKeys } from "./use-canvas-keys.ts";
+import { usePointerMarks } from "./use-pointer-marks.ts";
 import { useScene } from "./use-scene.ts";
 import { useShownPicture } from "./use-shown-picture.ts";
 import { useSpaceBar } from "./use-space-bar.ts";
+import { viewOfBox } from "./view-of-board.ts";
 import { ViewTools } from "./view-tools.tsx";
 
 type CanvasPanelProps = {
@@ -32,8 +37,12 @@ type CanvasPanelProps = {
 export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onView, spot, frame }: CanvasPanelProps) {
   const place = useRef<HTMLDivElement>(null);
   const spaceDown = useSpaceBar(frame);
-  const scene = useScene(place, { drag, onDrag, view, fit, onView, spaceDown });
-  useShownPicture(scene, { drawn, drag, view, room, spot });
+  const { unit, aids } = useDesk();
+  const [looksAround, setLooksAround] = useState(false);
+  const pointer = usePointerMarks();
+  const hand = { onDrag, view, fit, onView, spaceDown, looksAround, onPointer: pointer.follow };
+  const { scene, sweep } = useScene(place, hand);
+  const chosen = useShownPicture(scene, { drawn, drag, view, room, spot, sweep });
   const handleKeyDown = useCanvasKeys({ view, fit, room, onView, drag, onDrag });
   const hintId = useId();
   const takesKeys = { tabIndex: 0, onKeyDown: handleKeyDown };
@@ -46,16 +55,32 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
         aria-label="Elevation, from the front"
         aria-describedby={hintId}
         {...takesKeys}
-        className="absolute inset-0 touch-none overflow-hidden -outline-offset-4"
+        className={cx(
+          "absolute inset-0 touch-none overflow-hidden -outline-offset-4",
+          looksAround && "[&_canvas]:cursor-grab!",
+        )}
       >
         <div ref={place} />
       </div>
       <p id={hintId} className="sr-only">
-        Choose a layer in the schedule or a piece in the list below. Arrows move what is chosen by 1 mm, with Shift by
-        10; Delete removes it. Plus and minus look closer and farther, 0 shows the whole board.
+        Choose a layer in the schedule or a piece in the list below. Arrows move what is chosen by the step that the bar
+        names, with Shift ten times as far; Delete removes it. Keys lists them all. Plus and minus look closer and
+        farther, 0 shows the whole board.
       </p>
+      {aids.rulers && room !== null && (
+        <Rulers view={view} room={room} unit={unit} chosen={chosen} pointer={pointer.marks} />
+      )}
       <HolesByHand />
-      <ViewTools view={view} fit={fit} room={room} onView={onView} />
+      <ViewTools
+        view={view}
+        fit={fit}
+        room={room}
+        onView={onView}
+        onChosen={chosen && room && (() => onView(viewOfBox(chosen, fit, room)))}
+        looksAround={looksAround}
+        onLookAround={setLooksAround}
+        besideRulers={aids.rulers}
+      />
       {drawn === null && failure === null && (
         <div className="pointer-events-none absolute inset-0 flex items-center justify-center">
           <Busy label="Drawing the sign" />

@@ -18,6 +18,8 @@ import type { Images } from "./load-images.ts";
 export type Painted = {
   readonly object: FabricObject;
   readonly id: string | null;
+  /** The layer's group that it is drawn in, by its id; null outside any. */
+  readonly layer: string | null;
   /** A thing's own picture carries its name; an image without one is a shadow on something. */
   readonly isShadow: boolean;
 };
@@ -51,12 +53,13 @@ function paintAll(items: readonly Item[], matrix: Matrix, images: Images, layer:
     const own = "id" in item ? (item.id ?? null) : null;
     if (own !== null) named = own;
     // The unnamed lines after a piece, in its layer's group, are that piece's own; so is what is clipped right after any named thing.
-    const belongs = layer?.startsWith("layer:") || (item.kind === "clip" && justNamed);
+    const inLayer = layer?.startsWith("layer:") ? layer : null;
+    const belongs = inLayer !== null || (item.kind === "clip" && justNamed);
     const id = own ?? (belongs ? named : null);
     justNamed = own !== null;
     const isShadow = id === null && (item.kind === "image" || item.kind === "clip");
     const object = objectOf(item, matrix, images);
-    return object === null ? [] : [{ object, id, isShadow }];
+    return object === null ? [] : [{ object, id, layer: inLayer, isShadow }];
   });
 }
 

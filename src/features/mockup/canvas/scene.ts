@@ -1,16 +1,16 @@
-import { Canvas, cache, type FabricObject, Shadow } from "fabric/es";
+import { Canvas, cache, type FabricObject } from "fabric/es";
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
+import type { Box } from "#shared/geometry/path.ts";
 import type { DrawingView, Size } from "@/lib/drawing-view.ts";
 import type { CastShadow } from "../model/cast-shadows.ts";
 import type { Shift } from "../model/shifts.ts";
+import { type Grid, GridLines } from "./grid-lines.ts";
 import { type Images, loadImages } from "./load-images.ts";
 import { type Marks, noMarks } from "./marks.ts";
 import { drawingFaces, type Painted, paintItems } from "./paint-items.ts";
 import { paintMarks } from "./paint-marks.ts";
-
-/** As dark as the shadows of the drawing are at their darkest. */
-const castColour = "rgba(26, 18, 8, 0.46)";
+import { Picture } from "./picture.ts";
 
 export type Scene = {
   readonly canvas: Canvas;
@@ -18,6 +18,8 @@ export type Scene = {
   readonly show: (list: DisplayList, shifts: ReadonlyMap<string, Shift>) => Promise<void>;
   /** The wall around the picture. */
   readonly ground: (colour: string) => void;
+  /** Lines over the wood; null for none. */
+  readonly rule: (grid: Grid | null) => void;
   /** Moves what carries these ids from where the picture has it, until the next picture comes. */
   readonly shift: (shifts: ReadonlyMap<string, Shift>) => void;
   /** Pieces in the hand throw the canvas's own rough shadows in place of the picture's; null gives those back. */
@@ -27,9 +29,6 @@ export type Scene = {
   readonly look: (view: DrawingView, room: Size) => void;
   readonly close: () => Promise<void>;
 };
-
-/** A shown object, with where the picture has it. */
-type Shown = Painted & { readonly left: number; readonly top: number };
 
 /** The only place that makes fabric objects. What they show comes in; nothing is ever read back from them. */
 export function createScene(host: HTMLElement): Scene {
@@ -46,61 +45,57 @@ export function createScene(host: HTMLElement): Scene {
     defaultCursor: "default",
   });
   const letters = loadLetters();
-  let shown: Shown[] = [];
+  const picture = new Picture();
+  canvas.add(picture);
+  let painted: Painted[] = [];
+  let grid: Grid | null = null;
   let marked: FabricObject[] = [];
-  let lifted: ReadonlyMap<string, CastShadow> | null = null;
   let images: Images = new Map();
   let turns = 0;
   let marks = noMarks;
-  let origin = { x: 0, y: 0 };
   let view: DrawingView = { scale: 1, x: 0, y: 0 };
+  let window: Box = { x: 0, y: 0, width: 0, height: 0 };
 
   async function show(list: DisplayList, shifts: ReadonlyMap<string, Shift>) {
     const turn = ++turns;
     const [loaded] = await Promise.all([loadImages(list, images), letters]);
     if (turn !== turns) return;
     images = loaded;
-    origin = boardOriginOf(list) ?? { x: 0, y: 0 };
-    canvas.remove(...shown.map(({ object }) => object));
-    shown = paintItems(list, images).map((painted) => ({
-      ...painted,
-      left: painted.object.left - origin.x,
-      top: painted.object.top - origin.y,
-    }));
-    canvas.insertAt(0, ...shown.map(({ object }) => object));
-    lift(lifted);
-    shift(shifts);
+    const origin = boardOriginOf(list) ?? { x: 0, y: 0 };
+    painted = paintItems(list, images);
+    for (const { object } of painted) object.set({ left: object.left - origin.x, top: object.top - origin.y });
+    picture.shift(shifts);
+    showAll();
+  }
+
+  /** The grid lies over the wood and under all layers. */
+  function showAll() {
+    const lines = grid && { object: new GridLines(grid), id: null, layer: null, isShadow: false };
+    const firstLayer = painted.findIndex(({ layer }) => layer !== null);
+    const wood = painted.findLastIndex(({ id }) => id === "board") + 1;
+    picture.show(lines ? painted.toSpliced(firstLayer < 0 ? wood : firstLayer, 0, lines) : painted);
+    canvas.requestRenderAll();
+  }
+
+  function rule(next: Grid | null) {
+    grid = next;
+    showAll();
   }
 
   function lift(shadows: ReadonlyMap<string, CastShadow> | null) {
-    lifted = shadows;
-    const first = new Set<string>();
-    for (const { object, id, isShadow } of shown) {
-      if (isShadow) object.visible = shadows === null;
-      // Only a piece's body throws a shadow, which is the first of what carries its name.
-      if (id === null || first.has(id)) continue;
-      first.add(id);
-      const cast = shadows?.get(id);
-      object.shadow = cast
-        ? new Shadow({ color: castColour, offsetX: cast.dx, offsetY: cast.dy, blur: cast.blur })
-        : null;
-    }
+    picture.lift(shadows);
     canvas.requestRenderAll();
   }
 
   function shift(shifts: ReadonlyMap<string, Shift>) {
-    for (const { object, id, left, top } of shown) {
-      const by = id === null ? undefined : shifts.get(id.replace(/^hole:/, ""));
-      object.set({ left: left + (by?.dx ?? 0), top: top + (by?.dy ?? 0) });
-      object.setCoords();
-    }
+    picture.shift(shifts);
     canvas.requestRenderAll();
   }
 
   function mark(next: Marks) {
     marks = next;
     canvas.remove(...marked);
-    marked = paintMarks(marks, 1 / view.scale);
+    marked = paintMarks(marks, 1 / view.scale, window);
     canvas.add(...marked);
     canvas.requestRenderAll();
   }
@@ -108,6 +103,8 @@ export function createScene(host: HTMLElement): Scene {
   function look(next: DrawingView, room: Size) {
     const rescaled = next.scale !== view.scale;
     view = next;
+    const mm = (px: number) => px / view.scale;
+    window = { x: mm(-view.x), y: mm(-view.y), width: mm(room.width), height: mm(room.height) };
     if (canvas.width !== room.width || canvas.height !== room.height) canvas.setDimensions(room);
     canvas.setViewportTransform([view.scale, 0, 0, view.scale, view.x, view.y]);
     if (rescaled) mark(marks);
@@ -127,7 +124,7 @@ export function createScene(host: HTMLElement): Scene {
     element.remove();
   }
 
-  return { canvas, show, ground, shift, lift, mark, look, close };
+  return { canvas, show, ground, rule, shift, lift, mark, look, close };
 }
 
 /** The drawing's faces, before anything is lettered in them: fabric remembers the widths of what it measured too early. */

@@ -2,8 +2,9 @@ import { dimensionRowMm } from "#shared/drawing/dimensions.ts";
 import type { DisplayList } from "#shared/drawing/display-list.ts";
 import { boardOriginOf } from "#shared/drawing/elevation.ts";
 import { smallTextMm } from "#shared/drawing/type.ts";
+import { boxCentre } from "#shared/geometry/box.ts";
 import type { Box } from "#shared/geometry/path.ts";
-import type { DrawingView, Size } from "@/lib/drawing-view.ts";
+import { type DrawingView, type Size, viewScaled } from "@/lib/drawing-view.ts";
 
 /** Lettering on a screen that shows the whole board, in px of the em. */
 const letterPx = 13;
@@ -76,4 +77,20 @@ export function paperScaleAt(scale: number): number {
 export function viewAt(spot: { readonly x: number; readonly y: number }, fit: DrawingView, room: Size): DrawingView {
   const scale = fit.scale * 3;
   return { scale, x: room.width / 2 - spot.x * scale, y: room.height / 2 - spot.y * scale };
+}
+
+/** Room left around what is looked at, as a share of the window. */
+const aroundShare = 0.16;
+
+/** The view with a box of the board in the middle, as close as it fits with some room around, but no closer than one may come. */
+export function viewOfBox(box: Box, fit: DrawingView, room: Size): DrawingView {
+  const free = 1 - 2 * aroundShare;
+  const scale = Math.min((room.width * free) / box.width, (room.height * free) / box.height);
+  const seen = viewScaled(fit, scale / fit.scale, { x: 0, y: 0 }, fit);
+  const middle = boxCentre(box);
+  return {
+    scale: seen.scale,
+    x: room.width / 2 - middle.x * seen.scale,
+    y: room.height / 2 - middle.y * seen.scale,
+  };
 }

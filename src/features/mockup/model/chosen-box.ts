@@ -22,15 +22,6 @@ export function boxOfChosen(
   );
 }
 
-/** The boxes of all other layers, which moved pieces can be lined up with. A layer counts without the pieces that move. */
-export function boxesToLineUpWith(figures: Figures, movedIds: readonly string[]): Box[] {
-  const moved = new Set(movedIds);
-  return figures.layers.flatMap(({ key }) => {
-    const still = figures.pieces.filter(({ layerKey, pieceId }) => layerKey === key && !moved.has(pieceId));
-    return boxUnion(still.map(({ box }) => box)) ?? [];
-  });
-}
-
 export type HoleOnBoard = {
   readonly id: string;
   readonly x: number;

@@ -1,10 +1,10 @@
 import type { Hardware, MockupDocument } from "#shared/mockup/document.ts";
 import type { Guide } from "./catch-guides.ts";
-import type { Measure } from "./move-measures.ts";
 import { setHole } from "./commands/holes.ts";
 import { movePieces } from "./commands/pieces.ts";
 import { raiseLayer, setPocket } from "./commands/set-hold.ts";
 import { roundMm } from "./limits.ts";
+import type { Measure } from "./move-measures.ts";
 
 /** What a hand is moving, measured from where it took hold. */
 export type Drag =

@@ -2,7 +2,7 @@ import { beforeAll, describe, expect, it } from "vitest";
 import type { Figures } from "#shared/stack/figures.ts";
 import { withCarried } from "@/features/mockup/model/carried.ts";
 import { castShadows } from "@/features/mockup/model/cast-shadows.ts";
-import { boxesToLineUpWith, boxOfChosen } from "@/features/mockup/model/chosen-box.ts";
+import { boxOfChosen } from "@/features/mockup/model/chosen-box.ts";
 import { movePieces } from "@/features/mockup/model/commands/pieces.ts";
 import { setBoard } from "@/features/mockup/model/commands/set-board.ts";
 import { shiftsBetween } from "@/features/mockup/model/shifts.ts";
@@ -37,10 +37,6 @@ describe("a picture of a moment ago", () => {
     const box = boxOfChosen(figures, ["disc"], shiftsBetween(document, moved));
     expect(box?.x).toBeCloseTo(300 - 137.5 + 12, 1);
     expect(box?.y).toBeCloseTo(200 - 137.5 - 4, 1);
-  });
-
-  it("leaves the moved layer out of what it can be lined up with", () => {
-    expect(boxesToLineUpWith(figures, ["disc", "sun"]).map(({ width }) => Math.round(width))).toEqual([220]);
   });
 });
 

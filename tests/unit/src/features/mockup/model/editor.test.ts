@@ -45,7 +45,7 @@ describe("the editor", () => {
 
 describe("a drag", () => {
   it("shows what letting go would do, for pieces, holes and raised layers", () => {
-    const pieces = documentOfDrag(sign, { kind: "pieces", pieceIds: ["disc"], dx: 7, dy: 0, guides: [] });
+    const pieces = documentOfDrag(sign, { kind: "pieces", pieceIds: ["disc"], dx: 7, dy: 0, guides: [], measures: [] });
     expect(pieces.layers[0]?.pieces[0]?.placement.x).toBe(307);
     const hole = documentOfDrag(sign, { kind: "hole", holeId: "disc-h-1", x: 250, y: 151 });
     expect(hole.layers[0]?.hold).toMatchObject({ holes: [{ x: 250, y: 151 }, {}, {}, {}] });
