@@ -12,6 +12,7 @@ import { findNamedDraft } from "../queries/find-named-draft.ts";
 import { measureDrafts } from "../queries/list-named-drafts.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
+import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
 import { refuseForeignArtwork } from "./save-mockup.ts";
 
 /** Keeps a state of the mockup under a name. Refused in words when the job has its fill of drafts. */
@@ -24,6 +25,7 @@ export async function keepDraft(
   if (!isStaff(actor)) throw notFound("draft");
   const { shopId, clientId } = job;
   await refuseForeignArtwork(context, { shopId, clientId, document });
+  await refuseForeignPhoto(context, { shopId, clientId, document });
   const text = JSON.stringify(document);
   const kept = await measureDrafts(context, { shopId, jobId });
   if (kept.count >= mostDrafts)

@@ -13,6 +13,7 @@ import { findMockup } from "../queries/find-mockup.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
 import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
+import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
 import { refreshJob } from "./refresh-job.ts";
 import { signalJob } from "./signal-job.ts";
 
@@ -35,6 +36,7 @@ export async function saveMockup(
     );
   }
   await refuseForeignArtwork(context, { shopId: job.shopId, clientId: job.clientId, document });
+  await refuseForeignPhoto(context, { shopId: job.shopId, clientId: job.clientId, document });
   await refuseForeignPhoto(context, { shopId: job.shopId, clientId: job.clientId, document });
   const saved = { version: version + 1, document: JSON.stringify(document), savedBy: actor.personId, savedAt: now };
   if (known) await known.update(saved, { transaction });

@@ -21,6 +21,7 @@ import { Shop } from "./shop.ts";
 import { ShopLimits } from "./shop-limits.ts";
 import { ShopSaws } from "./shop-saws.ts";
 import { StoredFile } from "./stored-file.ts";
+import { WallPhoto } from "./wall-photo.ts";
 
 declare module "./membership.ts" {
   interface Membership {
@@ -59,6 +60,12 @@ declare module "./job-approver.ts" {
 }
 declare module "./artwork.ts" {
   interface Artwork {
+    file?: NonAttribute<StoredFile>;
+    adder?: NonAttribute<Person>;
+  }
+}
+declare module "./wall-photo.ts" {
+  interface WallPhoto {
     file?: NonAttribute<StoredFile>;
     adder?: NonAttribute<Person>;
   }
@@ -141,6 +148,9 @@ export function associate(): void {
   Artwork.belongsTo(Job, { as: "job", foreignKey: "jobId" });
   Artwork.belongsTo(StoredFile, { as: "file", foreignKey: "fileId" });
   Artwork.belongsTo(Person, { as: "adder", foreignKey: "addedBy" });
+  WallPhoto.belongsTo(Job, { as: "job", foreignKey: "jobId" });
+  WallPhoto.belongsTo(StoredFile, { as: "file", foreignKey: "fileId" });
+  WallPhoto.belongsTo(Person, { as: "adder", foreignKey: "addedBy" });
   Mockup.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });
   NamedDraft.belongsTo(Person, { as: "keeper", foreignKey: "keptBy" });
   ShopLimits.belongsTo(Person, { as: "saver", foreignKey: "savedBy" });

@@ -46,6 +46,8 @@ export type EventFacts = {
   "artwork ready": { name: string; pieces: number };
   "artwork refused": { name: string; reason: string };
   "artwork removed": { name: string };
+  "wall photo added": { name: string };
+  "wall photo removed": { name: string };
   "mockup begun": Record<string, never>;
   "draft kept": { name: string };
   "draft renamed": { from: string; to: string };

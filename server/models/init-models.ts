@@ -29,6 +29,7 @@ import { initShopLimits } from "./shop-limits.ts";
 import { initShopSaws } from "./shop-saws.ts";
 import { initStockItem } from "./stock-item.ts";
 import { initStoredFile } from "./stored-file.ts";
+import { initWallPhoto } from "./wall-photo.ts";
 
 /** Binds every model to a connection. Models are singletons of the process: one database a process. */
 export function initModels(sequelize: Sequelize): void {
@@ -48,6 +49,7 @@ export function initModels(sequelize: Sequelize): void {
   initJobApprover(sequelize);
   initStoredFile(sequelize);
   initArtwork(sequelize);
+  initWallPhoto(sequelize);
   initMockup(sequelize);
   initMockupStart(sequelize);
   initNamedDraft(sequelize);

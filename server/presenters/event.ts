@@ -41,6 +41,8 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "artwork ready": ({ name, pieces }) => `${name} became ${pieces} ${pieces === 1 ? "piece" : "pieces"}`,
   "artwork refused": ({ name, reason }) => `${name} could not be taken: ${reason}`,
   "artwork removed": ({ name }) => `Took the artwork ${name} off the job`,
+  "wall photo added": ({ name }) => `Brought in the photo ${name} of the wall`,
+  "wall photo removed": ({ name }) => `Took the photo ${name} of the wall off the job`,
   "mockup begun": () => "Began the mockup",
   "draft kept": ({ name }) => `Kept the mockup as the draft “${name}”`,
   "draft renamed": ({ from, to }) => `Renamed the draft “${from}” to “${to}”`,

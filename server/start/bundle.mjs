@@ -14,6 +14,7 @@ export const serverEntries = {
   migrate: "server/migrate.ts",
   "import-worker": "server/artwork/import-worker.ts",
   "drawing-worker": "server/drawing/drawing-worker.ts",
+  "photo-worker": "server/photos/photo-worker.ts",
 };
 
 /**

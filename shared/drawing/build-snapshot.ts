@@ -24,6 +24,7 @@ export function buildSnapshot({
   setAsides,
   paper,
   artworkHashes,
+  photoHashes = {},
   fontHashes,
   kernel: given,
 }: {
@@ -37,6 +38,7 @@ export function buildSnapshot({
   setAsides: readonly FrozenSetAside[];
   paper: Paper;
   artworkHashes: Readonly<Record<string, string>>;
+  photoHashes?: Readonly<Record<string, string>>;
   fontHashes: Readonly<Record<string, string>>;
   kernel: Kernel;
 }): Snapshot {
@@ -76,6 +78,7 @@ export function buildSnapshot({
       sheets,
     },
     artworkHashes,
+    photoHashes,
     fontHashes,
   };
 }

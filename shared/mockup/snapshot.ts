@@ -57,5 +57,7 @@ export type Snapshot = {
   };
   /** SHA-256 of each artwork used, by artwork id. */
   readonly artworkHashes: Readonly<Record<string, string>>;
+  /** SHA-256 of the photo of the wall, by its id. Missing in what was frozen before there were any. */
+  readonly photoHashes?: Readonly<Record<string, string>>;
   readonly fontHashes: Readonly<Record<string, string>>;
 };

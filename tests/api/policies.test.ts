@@ -4,6 +4,7 @@ import { addArtwork } from "#shared/contracts/artworks.ts";
 import { type ErrorCode, problemSchema } from "#shared/contracts/errors.ts";
 import { getJob, openJob } from "#shared/contracts/jobs.ts";
 import { openShareLink } from "#shared/contracts/portfolio.ts";
+import { addWallPhoto } from "#shared/contracts/wall-photos.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { formWith, plainSvg } from "../support/factories/work.ts";
 import {
@@ -16,10 +17,13 @@ import {
 } from "../support/policy-table.ts";
 import { buildPolicyWorld, type PolicyWorld } from "../support/policy-world.ts";
 import type { Answer, Given } from "../support/visitor.ts";
+import { pngOf, twoHalves } from "../support/wall-pictures.ts";
 
 let app: TestApp;
 let world: PolicyWorld;
+let wall: Uint8Array<ArrayBuffer>;
 beforeAll(async () => {
+  wall = await pngOf(twoHalves(60, 40));
   app = await startTestApp();
   world = await buildPolicyWorld(app);
 }, 120_000);
@@ -35,9 +39,9 @@ function verdictOf({ status, text }: Answer): Verdict {
 /** Asks as one actor. A file route gets a file, every other what its row says. */
 function ask({ endpoint, given }: PolicyRow, actor: ActorName): Promise<Answer> {
   const visitor = world.askers[actor];
-  if (endpoint === addArtwork) {
+  if (endpoint === addArtwork || endpoint === addWallPhoto) {
     return visitor.send("POST", endpoint.path.replace(":shop", world.params.shop).replace(":jobId", world.jobId), {
-      body: formWith("logo.svg", plainSvg()),
+      body: endpoint === addArtwork ? formWith("logo.svg", plainSvg()) : formWith("wall.png", wall, "image/png"),
     });
   }
   return visitor.ask(endpoint, (given?.(world) ?? {}) as Given<typeof endpoint>);

@@ -19,6 +19,7 @@ import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
+import * as wallPhotos from "#shared/contracts/wall-photos.ts";
 import { emptyPriceBook } from "#shared/cost/works.ts";
 import { usualSaws } from "#shared/cut-plan/shop-saws.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
@@ -182,6 +183,13 @@ export const policyTable: readonly PolicyRow[] = [
   row(artworks.setTrueSize, makers, (world) => ({ ...artwork(world), body: { side: "width", lengthMm: 200 } })),
   row(artworks.removeArtwork, makers, (world) => ({
     params: { ...world.params, artworkId: world.artworkIdsToRemove.pop() },
+  })),
+
+  row(wallPhotos.listWallPhotos, staff, job),
+  row(wallPhotos.addWallPhoto, makers, job),
+  row(wallPhotos.getWallPhotoFile, staff, (world) => ({ params: { ...world.params, photoId: world.photoId } })),
+  row(wallPhotos.removeWallPhoto, makers, (world) => ({
+    params: { ...world.params, photoId: world.photoIdsToRemove.pop() },
   })),
 
   row(mockups.getMockup, staff, job),

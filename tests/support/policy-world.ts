@@ -20,6 +20,7 @@ import { buildClient, buildContact } from "./factories/client.ts";
 import { buildMember } from "./factories/member.ts";
 import { buildPerson } from "./factories/person.ts";
 import { unique } from "./factories/unique.ts";
+import { buildWallPhoto } from "./factories/wall-photo.ts";
 import { buildArtwork, buildRevision, buildWorld, signFromArtwork, type World } from "./factories/work.ts";
 import { type ActorName, actors } from "./policy-table.ts";
 import { signInAs, signInByMail } from "./sign-in.ts";
@@ -134,6 +135,8 @@ export async function buildPolicyWorld(app: TestApp) {
     /** One for each who asks to have it removed, since it is gone after the first who may. */
     contactIdsToRemove: await eachTime(async () => (await buildContact({ client: approver.client })).contact.id),
     artworkIdsToRemove: await eachTime(() => copyOfArtwork(main.id)),
+    photoId: (await buildWallPhoto(world)).id,
+    photoIdsToRemove: await eachTime(async () => (await buildWallPhoto(world)).id),
     mailId: mails.items[0]?.id ?? "",
     adhesiveId: await stockItemOf("adhesive"),
     screwId: await stockItemOf("screw"),

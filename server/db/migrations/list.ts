@@ -10,6 +10,7 @@ import { briefPlace } from "./2026-12-01-08-brief-place.ts";
 import { priceBooks } from "./2026-12-01-09-price-books.ts";
 import { shopSaws } from "./2026-12-01-10-shop-saws.ts";
 import { wallPhotos } from "./2026-12-01-12-wall-photos.ts";
+import { wallPhotos } from "./2026-12-01-12-wall-photos.ts";
 import { namedDrafts } from "./2026-12-01-13-named-drafts.ts";
 import { mockupStarts } from "./2026-12-01-14-mockup-starts.ts";
 import { jobSignals } from "./2026-12-01-15-job-signals.ts";
