@@ -109,7 +109,9 @@ describe("bringing in artwork", () => {
     const own = await buildJob(world);
     // 144 by 72 points, and on it a square of 36.
     const pdf = await pdfOf("0.8 0.1 0.1 rg\n10 10 36 36 re\nf", { size: [144, 72] });
-    const added = artworkSchema.parse(JSON.parse((await bringIn(own, formWith("logo.svg", pdf))).text));
+    const added = artworkSchema.parse(
+      JSON.parse((await bringIn(own, formWith("logo.svg", Uint8Array.from(pdf)))).text),
+    );
     await app.runJobs();
     const params = { ...own.params, artworkId: added.id };
     const ready = await own.visitors.maker.get(getArtwork, { params });

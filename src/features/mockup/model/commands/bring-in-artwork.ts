@@ -10,9 +10,14 @@ import { type NewLayer, newLayer } from "./new-layer.ts";
 
 export type ColourChoice = NewLayer & {
   readonly colour: string;
+  /** Which pieces, by their index in the artwork: all of the colour unless said otherwise. */
+  readonly indices?: readonly number[];
   /** Cut the outer outlines only, so that other colours can be bonded on the plate instead of lying in its openings. */
   readonly solid: boolean;
 };
+
+/** Pieces that join a layer which is there. */
+export type AddedPieces = { readonly key: string; readonly indices: readonly number[] };
 
 export type ArtworkToBringIn = {
   readonly artworkId: string;
@@ -22,8 +27,8 @@ export type ArtworkToBringIn = {
 };
 
 /**
- * Adds a layer for each chosen colour of an artwork, from the wall outward in the order given, with the next free keys.
- * The artwork's middle comes to the board's middle and its pieces keep their places to one another. Ids are made from `id`.
+ * Adds a layer for each choice of pieces of an artwork, from the wall outward in the order given, with the next free keys,
+ * and the pieces of `added` to layers that are there, on top of theirs. The artwork's middle comes to the board's middle and its pieces keep their places to one another. Ids are made from `id`.
  * Colours that no piece has are passed over; more layers or pieces than a document takes are not added.
  */
 export function bringInArtwork(
@@ -31,25 +36,49 @@ export function bringInArtwork(
   {
     artwork,
     choices,
+    added = [],
     id,
     site,
-  }: { artwork: ArtworkToBringIn; choices: readonly ColourChoice[]; id: string; site: Site },
+  }: {
+    artwork: ArtworkToBringIn;
+    choices: readonly ColourChoice[];
+    added?: readonly AddedPieces[];
+    id: string;
+    site: Site;
+  },
 ): MockupDocument {
   const dx = document.board.width / 2 - artwork.widthMm / 2;
   const dy = document.board.height / 2 - artwork.heightMm / 2;
   const keys = nextFreeKeys(document, choices.length);
-  const layers = [...document.layers];
+  const pieceHere = (piece: ArtworkPiece) => pieceOf(piece, { artworkId: artwork.artworkId, id, dx, dy });
+  const layers = document.layers.map((layer) => {
+    const more = added
+      .filter(({ key }) => key === layer.key && !layer.locked)
+      .flatMap(({ indices }) => chosenOf(artwork.pieces, indices))
+      .map(pieceHere)
+      .filter((piece) => piece !== null)
+      .slice(0, Math.max(0, mostPieces - layer.pieces.length));
+    return more.length === 0 ? layer : { ...layer, pieces: [...layer.pieces, ...more] };
+  });
   for (const [order, choice] of choices.entries()) {
-    const ofColour = artwork.pieces.filter((piece) => piece.colour === choice.colour);
-    const pieces = (choice.solid ? withoutOpenings(ofColour) : ofColour)
+    const chosen = choice.indices
+      ? chosenOf(artwork.pieces, choice.indices)
+      : artwork.pieces.filter((piece) => piece.colour === choice.colour);
+    const pieces = (choice.solid ? withoutOpenings(chosen) : chosen)
       .slice(0, mostPieces)
-      .map((piece): Piece | null => pieceOf(piece, { artworkId: artwork.artworkId, id, dx, dy }))
+      .map(pieceHere)
       .filter((piece) => piece !== null);
     const key = keys[layers.length - document.layers.length];
     if (pieces.length === 0 || key === undefined || layers.length >= mostLayers) continue;
     layers.push(newLayer(choice, { key, pieces, id: `${id}-h${order + 1}`, document, site }));
   }
-  return layers.length === document.layers.length ? document : { ...document, layers };
+  const isSame = layers.length === document.layers.length && layers.every((one, at) => one === document.layers[at]);
+  return isSame ? document : { ...document, layers };
+}
+
+function chosenOf(pieces: readonly ArtworkPiece[], indices: readonly number[]): ArtworkPiece[] {
+  const chosen = new Set(indices);
+  return pieces.filter(({ index }) => chosen.has(index));
 }
 
 function pieceOf(
