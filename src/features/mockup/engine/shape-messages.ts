@@ -1,14 +1,11 @@
+import type { AskPort } from "./use-asked.ts";
 import type { ShapeMade, ShapeTask } from "./work-shape.ts";
 
-export type ShapeQuestion = { readonly sequence: number; readonly task: ShapeTask };
-export type ShapeAnswer = { readonly sequence: number } & (
+export type ShapeAsked = { readonly task: ShapeTask };
+export type ShapeSaid =
   | { readonly ok: true; readonly made: ShapeMade }
-  | { readonly ok: false; readonly reason: string }
-);
+  | { readonly ok: false; readonly reason: string };
 
-/** The ends of a worker that shapes pieces; tests put the same work behind them without one. */
-export type ShapePort = {
-  readonly postMessage: (question: ShapeQuestion) => void;
-  readonly addEventListener: (type: "message", listener: (event: { data: ShapeAnswer }) => void) => void;
-  readonly terminate: () => void;
-};
+export type ShapeQuestion = ShapeAsked & { readonly sequence: number };
+export type ShapeAnswer = ShapeSaid & { readonly sequence: number };
+export type ShapePort = AskPort<ShapeAsked, ShapeSaid>;

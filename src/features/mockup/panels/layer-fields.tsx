@@ -1,5 +1,6 @@
 import { formatLength } from "#shared/units/format-length.ts";
 import { Select } from "@/components/ui/select.tsx";
+import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import type { HoldChoice } from "../model/commands/new-layer.ts";
 import { optionsOfHold } from "../model/stock-choices.ts";
@@ -13,10 +14,12 @@ type LayerFieldsProps = {
   /** Ends each label for screen readers when there are several layers: "of #27314F". */
   readonly of?: string;
   readonly hint?: string;
+  /** One below the other, where there is not room for three beside each other. */
+  readonly narrow?: boolean;
 };
 
 /** Stock, thickness and hold of a layer that is to be made. */
-export function LayerFields({ choice, onChange, of = "", hint }: LayerFieldsProps) {
+export function LayerFields({ choice, onChange, of = "", hint, narrow = false }: LayerFieldsProps) {
   const { stock, unit } = useDesk();
   const sheet = stock.acrylics[choice.sheet];
   const label = (text: string) => (
@@ -33,7 +36,7 @@ export function LayerFields({ choice, onChange, of = "", hint }: LayerFieldsProp
   }
 
   return (
-    <div className="grid gap-3 sm:grid-cols-[3fr_2fr_4fr]">
+    <div className={cx("grid gap-3", narrow ? "grid-cols-2 *:last:col-span-2" : "sm:grid-cols-[3fr_2fr_4fr]")}>
       <Select
         label={label("Stock")}
         {...(hint ? { hint } : {})}
