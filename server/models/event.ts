@@ -64,6 +64,7 @@ export type EventFacts = {
   "certificate made": { letter: string };
   "note added": { number: number; letter: string };
   "note answered": { number: number };
+  "note put right": { number: number };
   "note settled": { number: number };
   "note opened again": { number: number };
   "share link made": { label: string };

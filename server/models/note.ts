@@ -24,6 +24,7 @@ export class Note extends Model<InferAttributes<Note>, InferCreationAttributes<N
   declare authorId: string;
   declare authorName: string;
   declare createdAt: Date;
+  declare editedAt: CreationOptional<Date | null>;
 }
 
 export function initNote(sequelize: Sequelize): void {
@@ -44,6 +45,7 @@ export function initNote(sequelize: Sequelize): void {
       authorId: DataTypes.UUID,
       authorName: DataTypes.TEXT,
       createdAt: DataTypes.DATE,
+      editedAt: DataTypes.DATE,
     },
     { sequelize, tableName: "notes" },
   );

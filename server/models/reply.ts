@@ -1,4 +1,11 @@
-import { DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
 
 export class Reply extends Model<InferAttributes<Reply>, InferCreationAttributes<Reply>> {
   declare id: string;
@@ -9,6 +16,7 @@ export class Reply extends Model<InferAttributes<Reply>, InferCreationAttributes
   declare authorId: string;
   declare authorName: string;
   declare createdAt: Date;
+  declare editedAt: CreationOptional<Date | null>;
 }
 
 export function initReply(sequelize: Sequelize): void {
@@ -22,6 +30,7 @@ export function initReply(sequelize: Sequelize): void {
       authorId: DataTypes.UUID,
       authorName: DataTypes.TEXT,
       createdAt: DataTypes.DATE,
+      editedAt: DataTypes.DATE,
     },
     { sequelize, tableName: "replies" },
   );

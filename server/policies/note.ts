@@ -1,3 +1,4 @@
+import { isEditable } from "#shared/lifecycle/note-edits.ts";
 import { canMoveNote, type NoteState } from "#shared/lifecycle/note-states.ts";
 import { takesNotes } from "#shared/lifecycle/revision-states.ts";
 import { type Actor, isInsider, isStaff } from "./actor.ts";
@@ -20,6 +21,17 @@ export const notePolicy = {
   addShopOnly: (actor: Actor, revision: RevisionFacts): boolean => isStaff(actor) && notePolicy.add(actor, revision),
   reply: (actor: Actor, revision: RevisionFacts, note: NoteFacts): boolean =>
     notePolicy.see(actor, revision, note) && takesNotes(revision.state),
+  /** The author puts right what they wrote, a note or a reply, for a few minutes. */
+  edit: (
+    actor: Actor,
+    revision: RevisionFacts,
+    note: NoteFacts,
+    written: { readonly authorId: string; readonly createdAt: Date; readonly now: Date },
+  ): boolean =>
+    notePolicy.reply(actor, revision, note) &&
+    isInsider(actor) &&
+    written.authorId === actor.personId &&
+    isEditable(written.createdAt, written.now),
   move: (actor: Actor, revision: RevisionFacts, note: NoteFacts, to: NoteState): boolean =>
     notePolicy.see(actor, revision, note) &&
     takesNotes(revision.state) &&

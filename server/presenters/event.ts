@@ -59,6 +59,7 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "certificate made": ({ letter }) => `The certificate of revision ${letter} is ready`,
   "note added": ({ number, letter }) => `Left note ${number} on revision ${letter}`,
   "note answered": ({ number }) => `Answered note ${number}`,
+  "note put right": ({ number }) => `Put note ${number} right`,
   "note settled": ({ number }) => `Settled note ${number}`,
   "note opened again": ({ number }) => `Opened note ${number} again`,
   "share link made": ({ label }) => `Made the portfolio link ${label}`,

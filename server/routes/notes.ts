@@ -1,5 +1,6 @@
 import * as contract from "#shared/contracts/notes.ts";
 import { addNote } from "../commands/add-note.ts";
+import { editNote, editReply } from "../commands/edit-note.ts";
 import { replyToNote } from "../commands/reply-to-note.ts";
 import { setNoteState } from "../commands/set-note-state.ts";
 import type { ReadContext } from "../http/context.ts";
@@ -17,7 +18,7 @@ export function registerNoteRoutes(routes: Routes): void {
     return pageOf(
       notes,
       query.limit,
-      (note) => presentNote(context.actor, facts, note),
+      (note) => presentNote(context, facts, note),
       ({ number }) => [number],
     );
   });
@@ -32,6 +33,16 @@ export function registerNoteRoutes(routes: Routes): void {
     return noteView(context, params.noteId);
   });
 
+  write(routes, contract.editNote, async (context, { params, body }) => {
+    await editNote(context, { noteId: params.noteId, ...body });
+    return noteView(context, params.noteId);
+  });
+
+  write(routes, contract.editReply, async (context, { params, body }) => {
+    await editReply(context, { ...params, ...body });
+    return noteView(context, params.noteId);
+  });
+
   write(routes, contract.setNoteState, async (context, { params, body }) => {
     await setNoteState(context, { noteId: params.noteId, ...body });
     return noteView(context, params.noteId);
@@ -40,5 +51,5 @@ export function registerNoteRoutes(routes: Routes): void {
 
 async function noteView(context: ReadContext, noteId: string) {
   const { note, on } = await findNote(context, noteId);
-  return presentNote(context.actor, on.facts, note);
+  return presentNote(context, on.facts, note);
 }

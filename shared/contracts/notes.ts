@@ -27,6 +27,9 @@ export const replySchema = z.strictObject({
   author: z.string(),
   side: z.enum(["shop", "client"]),
   at: instant,
+  editedAt: instant.nullable(),
+  /** Until when the reader, its author, may change it; null for everyone else. */
+  editableUntil: instant.nullable(),
 });
 export const noteSchema = z.strictObject({
   id: z.uuid(),
@@ -42,6 +45,8 @@ export const noteSchema = z.strictObject({
   shopOnly: z.boolean(),
   fromLetter: z.string(),
   at: instant,
+  editedAt: instant.nullable(),
+  editableUntil: instant.nullable(),
   replies: z.array(replySchema),
   can: z.strictObject({ reply: z.boolean(), settle: z.boolean(), reopen: z.boolean() }),
 });
@@ -84,6 +89,24 @@ export const replyToNote = endpoint({
   body: z.strictObject({ text: said(4000) }),
   result: noteSchema,
   status: 201,
+});
+export const editNote = endpoint({
+  method: "PATCH",
+  path: "/api/shops/:shop/notes/:noteId",
+  summary: "Put right a note within five minutes of leaving it",
+  params: oneNote,
+  query: nothing,
+  body: z.strictObject({ text: said(4000), kind: noteKind }),
+  result: noteSchema,
+});
+export const editReply = endpoint({
+  method: "PATCH",
+  path: "/api/shops/:shop/notes/:noteId/replies/:replyId",
+  summary: "Put right a reply within five minutes of sending it",
+  params: oneNote.extend({ replyId: z.uuid() }),
+  query: nothing,
+  body: z.strictObject({ text: said(4000) }),
+  result: noteSchema,
 });
 export const setNoteState = endpoint({
   method: "POST",

@@ -254,7 +254,15 @@ export const policyTable: readonly PolicyRow[] = [
     params: { ...world.params, noteId: world.noteId },
     body: { text: "We can." },
   })),
-  // Left by the approver, so only they settle it.
+  // Left by the approver, so only they put it right and settle it.
+  row(notes.editNote, approvers, (world) => ({
+    params: { ...world.params, noteId: world.noteId },
+    body: { text: "Wider, please?", kind: "must change" },
+  })),
+  row(notes.editReply, approvers, (world) => ({
+    params: { ...world.params, noteId: world.noteId, replyId: world.replyId },
+    body: { text: "By a hand’s breadth." },
+  })),
   row(notes.setNoteState, approvers, (world) => ({
     params: { ...world.params, noteId: world.noteId },
     body: { state: "settled" },

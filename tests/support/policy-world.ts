@@ -4,7 +4,7 @@ import { Session } from "#server/models/session.ts";
 import { changeJob, openJob, setConsent } from "#shared/contracts/jobs.ts";
 import { saveMockup } from "#shared/contracts/mockups.ts";
 import { keepDraft } from "#shared/contracts/named-drafts.ts";
-import { addNote } from "#shared/contracts/notes.ts";
+import { addNote, replyToNote } from "#shared/contracts/notes.ts";
 import { listOutgoingMail } from "#shared/contracts/outgoing-mail.ts";
 import { makeShareLink } from "#shared/contracts/portfolio.ts";
 import { approveRevision, getRevision, getSheet, type Revision } from "#shared/contracts/revisions.ts";
@@ -38,6 +38,10 @@ export async function buildPolicyWorld(app: TestApp) {
   const note = await visitors.approver.get(addNote, {
     params: { ...params, revisionId: issued.id },
     body: { text: "Wider?", kind: "must change", anchor: { on: "whole" } },
+  });
+  const { replies } = await visitors.approver.get(replyToNote, {
+    params: { ...params, noteId: note.id },
+    body: { text: "By a hand." },
   });
 
   const issuedOnNewJob = async (title: string): Promise<{ world: World; revision: Revision }> => {
@@ -129,6 +133,7 @@ export async function buildPolicyWorld(app: TestApp) {
     draftId: await draft(),
     draftIdsToRemove: await eachTime(draft),
     noteId: note.id,
+    replyId: replies[0]?.id ?? "",
     invitationId: invitation.id,
     spareMemberId: spareMember.membership.id,
     spareContactId: (await buildContact({ client: approver.client })).contact.id,

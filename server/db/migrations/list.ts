@@ -10,10 +10,10 @@ import { briefPlace } from "./2026-12-01-08-brief-place.ts";
 import { priceBooks } from "./2026-12-01-09-price-books.ts";
 import { shopSaws } from "./2026-12-01-10-shop-saws.ts";
 import { wallPhotos } from "./2026-12-01-12-wall-photos.ts";
-import { wallPhotos } from "./2026-12-01-12-wall-photos.ts";
 import { namedDrafts } from "./2026-12-01-13-named-drafts.ts";
 import { mockupStarts } from "./2026-12-01-14-mockup-starts.ts";
 import { jobSignals } from "./2026-12-01-15-job-signals.ts";
+import { noteEdits } from "./2026-12-01-16-note-edits.ts";
 
 /** Every migration in order. A new one goes to the end. */
 export const migrations: readonly Migration[] = [
@@ -31,4 +31,5 @@ export const migrations: readonly Migration[] = [
   namedDrafts,
   mockupStarts,
   jobSignals,
+  noteEdits,
 ];

@@ -1,5 +1,5 @@
 import { type InfiniteData, useMutation, useQueryClient } from "@tanstack/react-query";
-import { addNote, type Note, replyToNote, setNoteState } from "#shared/contracts/notes.ts";
+import { addNote, editNote, editReply, type Note, replyToNote, setNoteState } from "#shared/contracts/notes.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
@@ -60,6 +60,23 @@ export function useSetNoteState(shop: string, revisionId: string, noteId: string
   const onSuccess = useNoteLanding(shop, revisionId);
   return useMutation({
     mutationFn: (state: "settled" | "open") => call(setNoteState, { params: { shop, noteId }, body: { state } }),
+    onSuccess,
+  });
+}
+
+export function useEditNote(shop: string, revisionId: string, noteId: string) {
+  const onSuccess = useNoteLanding(shop, revisionId);
+  return useMutation({
+    mutationFn: (body: Pick<Note, "text" | "kind">) => call(editNote, { params: { shop, noteId }, body }),
+    onSuccess,
+  });
+}
+
+export function useEditReply(shop: string, revisionId: string, noteId: string) {
+  const onSuccess = useNoteLanding(shop, revisionId);
+  return useMutation({
+    mutationFn: ({ replyId, text }: { replyId: string; text: string }) =>
+      call(editReply, { params: { shop, noteId, replyId }, body: { text } }),
     onSuccess,
   });
 }

@@ -8,6 +8,7 @@ import { formatExact, formatInstant } from "@/lib/format.ts";
 import { useSetNoteState } from "../api/mutations.ts";
 import { kindWords, noteTone, placeWords } from "../model/note-words.ts";
 import { NoteMark, toneText } from "./note-mark.tsx";
+import { NoteWords, ReplyWords } from "./note-words.tsx";
 import { ReplyForm } from "./reply-form.tsx";
 
 type NoteItemProps = {
@@ -58,7 +59,7 @@ export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelecte
           {note.number}
         </button>
         <div className="min-w-0 flex-1">
-          <p className="whitespace-pre-wrap">{note.text}</p>
+          <NoteWords shop={shop} revisionId={revisionId} note={note} />
           <p className="mt-0.5 text-fine text-graphite">
             <span className={cx("font-semibold", toneText[tone])}>
               <NoteMark tone={tone} /> {state}
@@ -70,18 +71,20 @@ export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelecte
             <time dateTime={note.at} title={formatExact(note.at)}>
               {formatInstant(note.at)}
             </time>
+            {note.editedAt !== null && ", put right since"}
             {note.shopOnly && <strong className="ml-1.5 border border-graphite px-1 font-semibold">shop only</strong>}
           </p>
           {note.replies.length > 0 && (
             <ul aria-label={`Replies to note ${note.number}`} className="mt-2 space-y-2 border-l-2 border-rule pl-3">
               {note.replies.map((reply) => (
                 <li key={reply.id}>
-                  <p className="whitespace-pre-wrap">{reply.text}</p>
+                  <ReplyWords shop={shop} revisionId={revisionId} note={note} reply={reply} />
                   <p className="text-fine text-graphite">
                     {reply.author},{" "}
                     <time dateTime={reply.at} title={formatExact(reply.at)}>
                       {formatInstant(reply.at)}
                     </time>
+                    {reply.editedAt !== null && ", put right since"}
                   </p>
                 </li>
               ))}
