@@ -36,23 +36,52 @@ const kinds: Readonly<Record<string, GlyphStep["kind"]>> = {
   closePath: "close",
 };
 
-/** A font that fontkit has opened. Throws a RangeError for one without capitals. */
-export function openFace(font: Font): OpenFace {
+/** Lines that are kept laid: as many as are written at a time. */
+const mostKept = 40;
+
+/**
+ * A face by what opens its font with fontkit, anew each time it is called. Throws a RangeError for one without capitals.
+ */
+export function openFace(open: () => Font): OpenFace {
+  const font = open();
   const capHeight = font.glyphForCodePoint("H".codePointAt(0) ?? 0).bbox.maxY;
   if (!(capHeight > 0)) throw new RangeError("A face without capitals has no cap height.");
+  const kept = new Map<string, readonly LineGlyph[]>();
   return {
     capHeight,
     has: (codePoint) => font.hasGlyphForCodePoint(codePoint),
-    line: (text, { kerning }) => lettersApart(glyphsOf(font, text, kerning, {}), glyphsOf(font, text, kerning, apart)),
+    line: (text, { kerning }) => {
+      const key = `${kerning} ${text}`;
+      const laid =
+        kept.get(key) ??
+        lettersApart(laidLine(font, open, text, { kern: kerning }), () =>
+          laidLine(font, open, text, { kern: kerning, ...apart }),
+        );
+      if (kept.size >= mostKept) kept.clear();
+      kept.set(key, laid);
+      return laid;
+    },
   };
 }
 
 /** Without what makes one glyph of several letters. */
 const apart = { liga: false, clig: false, dlig: false };
 
-function glyphsOf(font: Font, text: string, kerning: boolean, features: Record<string, boolean>): LineGlyph[] {
+/**
+ * A line with what each glyph stands for. fontkit keeps glyphs and remembers of each what it first stood for, which was nothing when
+ * it was opened as the letter under an accent. So where there are as many glyphs as characters they are taken one by one, and else
+ * the font is opened anew.
+ */
+function laidLine(font: Font, open: () => Font, text: string, features: Record<string, boolean>): LineGlyph[] {
+  const characters = [...text].map((one) => one.codePointAt(0) ?? 0);
+  const glyphs = glyphsOf(font, text, features);
+  if (glyphs.length !== characters.length) return glyphsOf(open(), text, features);
+  return glyphs.map((glyph, index) => ({ ...glyph, codePoints: characters.slice(index, index + 1) }));
+}
+
+function glyphsOf(font: Font, text: string, features: Record<string, boolean>): LineGlyph[] {
   // Fractions would turn figures into others.
-  const { glyphs, positions } = font.layout(text, { ...features, frac: false, kern: kerning });
+  const { glyphs, positions } = font.layout(text, { ...features, frac: false });
   return glyphs.map((glyph, index) => {
     const place = positions[index];
     return {
@@ -73,9 +102,10 @@ function glyphsOf(font: Font, text: string, kerning: boolean, features: Record<s
  * letter the form that meets its neighbour. So each letter that is a glyph of its own keeps that form, and the others come
  * from the line that was laid without ligatures.
  */
-function lettersApart(joined: readonly LineGlyph[], plain: readonly LineGlyph[]): readonly LineGlyph[] {
+function lettersApart(joined: readonly LineGlyph[], layPlain: () => readonly LineGlyph[]): readonly LineGlyph[] {
+  if (joined.every(({ codePoints }) => codePoints.length === 1)) return joined;
   const wanted = clustersOf(joined);
-  return [...clustersOf(plain)].flatMap(([key, glyphs]) => wanted.get(key) ?? glyphs);
+  return [...clustersOf(layPlain())].flatMap(([key, glyphs]) => wanted.get(key) ?? glyphs);
 }
 
 /** Glyphs by the stretch of the text that they stand for. */

@@ -21,7 +21,7 @@ export function fontOfFace(key: string): Font {
 
 /** A shipped face, opened once. */
 export function openFaceOf(key: string): OpenFace {
-  const known = opened.get(key) ?? openFace(fontOfFace(key));
+  const known = opened.get(key) ?? openFace(() => fontOfFace(key));
   opened.set(key, known);
   return known;
 }

@@ -1,4 +1,4 @@
-import { create } from "fontkit";
+import { create, type Font } from "fontkit";
 import { type OpenFace, openFace } from "#shared/lettering/open-face.ts";
 import { sha256 } from "#shared/lettering/sha-256.ts";
 import { faceFiles } from "./face-files.ts";
@@ -26,8 +26,12 @@ async function fetchFace(key: string): Promise<LoadedFace> {
   const answer = await fetch(url);
   if (!answer.ok) throw new Error(`The face could not be fetched (${answer.status}).`);
   const bytes = new Uint8Array(await answer.arrayBuffer());
+  return { face: openFace(() => fontOf(bytes)), fontSha256: sha256(bytes) };
+}
+
+function fontOf(bytes: Uint8Array): Font {
   // fontkit asks for Node's kind of bytes in its types only.
   const font = create(bytes as Parameters<typeof create>[0]);
   if (!("layout" in font)) throw new Error("The face's file is a collection of fonts.");
-  return { face: openFace(font), fontSha256: sha256(bytes) };
+  return font;
 }

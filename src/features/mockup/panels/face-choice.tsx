@@ -36,7 +36,10 @@ export function FaceChoice({ value, onChange, sample }: FaceChoiceProps) {
                 aria-describedby={`face-${face.key}`}
                 className="absolute top-2 right-2 size-4 accent-indigo"
               />
-              <span aria-hidden="true" className={cx("block truncate pr-5 text-ink", `face-${face.key}`)}>
+              <span
+                aria-hidden="true"
+                className={cx("block truncate pr-5 text-xl leading-normal text-ink", `face-${face.key}`)}
+              >
                 {sample === "" ? face.family : sample}
               </span>
               <span id={`face-${face.key}`} className="block text-fine text-graphite">
