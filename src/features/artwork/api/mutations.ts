@@ -2,19 +2,10 @@ import { useMutation, useQueryClient } from "@tanstack/react-query";
 import * as contract from "#shared/contracts/artworks.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
-import { upload } from "@/lib/upload.ts";
 
 function useRefreshJob(shop: string, jobId: string) {
   const client = useQueryClient();
   return () => client.invalidateQueries({ queryKey: keys.job(shop, jobId) });
-}
-
-export function useAddArtwork(shop: string, jobId: string) {
-  return useMutation({
-    mutationFn: (sent: { file: File; signal: AbortSignal; onProgress: (share: number) => void }) =>
-      upload(contract.addArtwork, { params: { shop, jobId }, ...sent }),
-    onSuccess: useRefreshJob(shop, jobId),
-  });
 }
 
 export function useSetTrueSize(shop: string, jobId: string, artworkId: string) {

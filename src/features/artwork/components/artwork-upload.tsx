@@ -3,15 +3,15 @@ import { Busy } from "@/components/ui/busy.tsx";
 import { Button } from "@/components/ui/button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { cx } from "@/lib/cx.ts";
-import { useDropsKeptOut } from "./use-drops-kept-out.ts";
-import { useUpload } from "./use-upload.ts";
+import { useArtworkUpload } from "@/lib/use-artwork-upload.ts";
+import { useDropsKeptOut } from "@/lib/use-drops-kept-out.ts";
 
 /** Brings in artwork files: chosen, or dropped on the frame. Shows how far they are, and why one was refused. */
 export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly jobId: string }) {
   const input = useRef<HTMLInputElement>(null);
   const id = useId();
   const [over, setOver] = useState(false);
-  const { state, refusals, send, cancel } = useUpload(shop, jobId);
+  const { state, refusals, send, cancel } = useArtworkUpload(shop, jobId);
   useDropsKeptOut();
   const sending = state.step === "sending";
   const take = (files: FileList | null) => {
