@@ -51,6 +51,7 @@ export function HoldCell({ layer }: { readonly layer: Layer }) {
       {hold.kind === "standoff" && <span className="whitespace-nowrap">{count} ×</span>}
       <CellSelect
         aria-label={`How ${key} is held`}
+        disabled={layer.locked}
         value={choices.findIndex((choice) => isChoiceOf(choice, layer))}
         onChange={(event) => change(Number(event.target.value))}
       >

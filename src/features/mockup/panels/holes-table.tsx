@@ -18,7 +18,7 @@ type HolesTableProps = { readonly layer: Layer; readonly hold: Extract<Hold, { k
 /** The standoff holes of a layer: where they are, how wide, and which one is fixed. */
 export function HolesTable({ layer, hold }: HolesTableProps) {
   const { document, selection, edit, choose, unit, site, holesByHand, putHolesByHand } = useDesk();
-  const { key } = layer;
+  const { key, locked } = layer;
   const covers = new Map(capCovers(hold, site.limits).map((cover) => [cover.id, cover]));
   const byHand = holesByHand === key;
 
@@ -40,11 +40,14 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
     <div>
       <div className="flex flex-wrap items-baseline gap-x-3 pb-1">
         <h3 className="font-serif text-sm font-bold text-ink">Holes of {key}</h3>
-        <WordButton onClick={add}>Add a hole</WordButton>
-        <WordButton aria-pressed={byHand} onClick={() => putHolesByHand(byHand ? null : key)}>
+        <WordButton disabled={locked} onClick={add}>
+          Add a hole
+        </WordButton>
+        <WordButton disabled={locked} aria-pressed={byHand} onClick={() => putHolesByHand(byHand ? null : key)}>
           {byHand ? "Stop putting holes by hand" : "Put holes by hand"}
         </WordButton>
         <WordButton
+          disabled={locked}
           onClick={() => {
             const id = newId();
             edit({ label: `Propose holes in ${key}`, change: (before) => proposeHoles(before, { key, id, site }) });
@@ -53,6 +56,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
           Propose holes near the corners
         </WordButton>
         <WordButton
+          disabled={locked}
           title="Wide enough to have play, narrow enough to hide under the cap"
           onClick={() =>
             edit({ label: `Fit the holes of ${key}`, change: (before) => fitHoles(before, { key, site }) })
@@ -93,6 +97,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                   <DeskCell className="w-28">
                     <CellLength
                       aria-label={`x of ${title}`}
+                      disabled={locked}
                       mm={hole.x}
                       unit={unit}
                       bounds={coordinateBounds}
@@ -102,6 +107,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                   <DeskCell className="w-28">
                     <CellLength
                       aria-label={`y of ${title}`}
+                      disabled={locked}
                       mm={hole.y}
                       unit={unit}
                       bounds={coordinateBounds}
@@ -111,6 +117,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                   <DeskCell className="w-28">
                     <CellLength
                       aria-label={`Diameter of ${title}`}
+                      disabled={locked}
                       mm={hole.diameter}
                       unit={unit}
                       bounds={holeBounds}
@@ -125,6 +132,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       type="radio"
                       name={`fixed hole of ${key}`}
                       aria-label={`${title} is the fixed one`}
+                      disabled={locked}
                       checked={hole.fixed}
                       onChange={() =>
                         edit({
@@ -138,6 +146,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                   <DeskCell>
                     <WordButton
                       aria-label={`Remove ${title}`}
+                      disabled={locked}
                       onClick={() =>
                         edit({
                           label: `Remove ${title} of ${key}`,

@@ -15,11 +15,13 @@ export function LayerDetails() {
   const { hold } = layer;
   return (
     <section aria-label={`More of ${layer.key}`} className="border-t border-rule px-4 py-2 sm:px-6">
-      <dl className="flex flex-wrap items-end gap-x-6 gap-y-2 text-sm">
-        {hold.kind === "pocket" && <PocketCells layerKey={layer.key} hold={hold} />}
-        {hold.kind === "bond" && <TackCell layerKey={layer.key} hold={hold} />}
-        <MarkedCell layer={layer} />
-      </dl>
+      <fieldset disabled={layer.locked}>
+        <dl className="flex flex-wrap items-end gap-x-6 gap-y-2 text-sm">
+          {hold.kind === "pocket" && <PocketCells layerKey={layer.key} hold={hold} />}
+          {hold.kind === "bond" && <TackCell layerKey={layer.key} hold={hold} />}
+          <MarkedCell layer={layer} />
+        </dl>
+      </fieldset>
     </section>
   );
 }

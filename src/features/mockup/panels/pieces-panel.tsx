@@ -43,7 +43,7 @@ export function PiecesPanel() {
         {!all && pieces.length > 0 && (
           <WordButton onClick={() => choose(chooseLayer(document, key))}>Choose all of {key}</WordButton>
         )}
-        {!all && chosen.length > 0 && document.layers.length < mostLayers && (
+        {!all && !layer.locked && chosen.length > 0 && document.layers.length < mostLayers && (
           <WordButton onClick={split}>Make a layer of {counted(chosen.length, "piece")}</WordButton>
         )}
       </div>

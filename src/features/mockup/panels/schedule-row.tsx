@@ -23,7 +23,7 @@ type ScheduleRowProps = {
 /** One layer in the schedule. Pressing its key chooses it. */
 export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
   const { document, edit, choose, selection, stock, unit } = useDesk();
-  const { key, name, hold } = layer;
+  const { key, name, hold, locked } = layer;
   const isChosen = selection.layerKey === key;
   const isBeside = layer.pieces.some(({ id }) => selection.pieceIds.includes(id));
   const sheets = withCurrent(
@@ -55,7 +55,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
       <DeskRowHead>
         <button
           type="button"
-          aria-label={`Choose ${key}, ${name}`}
+          aria-label={`Choose ${key}, ${name}${locked ? ", locked" : ""}`}
           aria-pressed={isChosen || isBeside}
           data-chooses
           onClick={({ shiftKey }) =>
@@ -65,10 +65,12 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
         >
           {key}
         </button>
+        {locked && <span className="block text-fine font-normal text-graphite">locked</span>}
       </DeskRowHead>
       <DeskCell className="min-w-28">
         <CellText
           aria-label={`Name of ${key}`}
+          disabled={locked}
           maxLength={120}
           value={name}
           onCommit={(text) => {
@@ -83,6 +85,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
           <Swatch colour={layer.stock.colour} />
           <CellSelect
             aria-label={`Stock of ${key}`}
+            disabled={locked}
             value={sheets.findIndex((sheet) => isSameStock(sheet, layer.stock))}
             onChange={(event) => changeStock(Number(event.target.value))}
           >
@@ -97,6 +100,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
       <DeskCell className="min-w-14">
         <CellSelect
           aria-label={`Thickness of ${key}`}
+          disabled={locked}
           value={layer.thickness}
           onChange={(event) => {
             const thickness = Number(event.target.value);
@@ -117,6 +121,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
         {hold.kind === "standoff" ? (
           <CellLength
             aria-label={`Offset of ${key}`}
+            disabled={locked}
             mm={hold.offset}
             unit={unit}
             bounds={offsetBounds}
@@ -129,6 +134,7 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
       <DeskCell className="min-w-27">
         <CellSelect
           aria-label={`How ${key} is located`}
+          disabled={locked}
           value={layer.locate}
           onChange={(event) => {
             const locate = locateSchema.parse(event.target.value);

@@ -21,6 +21,7 @@ export function WordsOfLayer({ layer }: { readonly layer: Layer }) {
       <span className="whitespace-nowrap">Its letters read</span>
       <CellText
         aria-label={`What the letters of ${layer.key} read`}
+        disabled={layer.locked}
         placeholder="nothing, these are no letters"
         maxLength={2000}
         value={lines
