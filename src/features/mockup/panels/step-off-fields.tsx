@@ -41,7 +41,11 @@ export function StepOffFields({ draft, onChange }: StepOffFieldsProps) {
   function changeWhat(what: StepOffDraft["what"]) {
     const spacings = spacingsFor(what);
     const [usual = draft.spacing] = spacings;
-    change({ what, spacing: spacings.includes(draft.spacing) ? draft.spacing : usual });
+    change({
+      what,
+      spacing: spacings.includes(draft.spacing) ? draft.spacing : usual,
+      together: what === "chosen" && draft.together === "all as one" ? "each piece" : draft.together,
+    });
   }
 
   return (

@@ -22,7 +22,7 @@ export function idsOfCopy(id: string, copy: number, count: number): string[] {
  * Adds copies of pieces to their own layers, over the pieces that are there, each copy moved by its motion. A copied letter
  * gets words of its own, so that either can be set anew alone. Standoff holes in the pieces are copied if so wished; none
  * of the copies is the fixed one. Pieces of locked layers are not copied. Nothing happens when the copies are more than a
- * document takes, or one would lie further off than it can.
+ * document takes, one would lie further off than it can, or they were made before.
  */
 export function addCopies(document: MockupDocument, copies: Copies): MockupDocument {
   const { motions, id } = copies;
@@ -34,14 +34,16 @@ export function addCopies(document: MockupDocument, copies: Copies): MockupDocum
   if (lettering.length > mostLettering) return document;
 
   const ids = motions.map((_, copy) => {
-    const made = idsOfCopy(id, copy, pieceIds.length);
-    return new Map(pieceIds.map((of, index) => [of, made[index] ?? of]));
+    const own = idsOfCopy(id, copy, pieceIds.length);
+    return new Map(pieceIds.map((of, index) => [of, own[index] ?? of]));
   });
+  const made = new Set(ids.flatMap((one) => [...one.values()]));
+  if (document.layers.some(({ pieces }) => pieces.some((piece) => made.has(piece.id)))) return document;
   let isTooMuch = false;
   const layers = document.layers.map((layer) => {
     const originals = layer.locked ? [] : layer.pieces.filter((piece) => chosen.has(piece.id));
     if (originals.length === 0) return layer;
-    const made = motions.flatMap((motion, copy) =>
+    const added = motions.flatMap((motion, copy) =>
       originals.map((piece): Piece | null => {
         const placement = placementAfter(piece.placement, motion);
         const copyId = ids[copy]?.get(piece.id);
@@ -50,8 +52,8 @@ export function addCopies(document: MockupDocument, copies: Copies): MockupDocum
           : null;
       }),
     );
-    const pieces = [...layer.pieces, ...made.filter((piece) => piece !== null)];
-    isTooMuch ||= pieces.length > mostPieces || made.includes(null);
+    const pieces = [...layer.pieces, ...added.filter((piece) => piece !== null)];
+    isTooMuch ||= pieces.length > mostPieces || added.includes(null);
     const next = withCopiedHoles({ ...layer, pieces }, layer, copies);
     isTooMuch ||= next.hold.kind === "standoff" && next.hold.holes.length > mostHoles;
     return withFitDiameters(next, layer, document, copies.site);

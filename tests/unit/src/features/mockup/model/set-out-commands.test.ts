@@ -363,6 +363,8 @@ describe("stepping copies off", () => {
     expect(stepOffCopies(document, { pieceIds: ["a"], count: 1998, way: along, ...made })).toBe(document);
     const far = { ...along, spacing: { kind: "pitch", mm: 9999 } } as const;
     expect(stepOffCopies(document, { pieceIds: ["a"], count: 2, way: far, ...made })).toBe(document);
+    const once = stepOffCopies(document, { pieceIds: ["a"], count: 2, way: along, ...made });
+    expect(stepOffCopies(once, { pieceIds: ["a"], count: 2, way: along, ...made })).toBe(once);
     const round = { kind: "round", centre: { x: 50, y: 60 }, radius: null, sweep: 360, turned: false } as const;
     expect(stepOffCopies(document, { pieceIds: ["a"], count: 2, way: round, ...made })).toBe(document);
   });

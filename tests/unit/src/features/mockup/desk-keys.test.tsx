@@ -1,0 +1,202 @@
+// @vitest-environment jsdom
+import { beforeEach, describe, expect, it } from "vitest";
+import type { Drag } from "@/features/mockup/model/drag.ts";
+import { chooseLayer, choosePiece } from "@/features/mockup/model/selection.ts";
+import { deskKeys } from "@/features/mockup/panels/keys-list.ts";
+import {
+  control,
+  page,
+  pick,
+  placementOf,
+  present,
+  pressKey,
+  said,
+  showSetOut,
+  threeAndOne,
+  typeThen,
+} from "./set-out-page.tsx";
+
+const document0 = threeAndOne();
+const chosen = choosePiece(document0, "a");
+const idsOf = (index: number) => present().layers[index]?.pieces.map(({ id }) => id);
+const dragging: Drag = { kind: "pieces", pieceIds: ["a"], dx: 5, dy: 5, guides: [], measures: [] };
+
+/** What each key of the list does, by the place and the keys that the list letters. */
+const shown: Readonly<Record<string, () => Promise<void>>> = {
+  "On the drawing: Arrows": async () => {
+    await showSetOut(document0, { chosen });
+    await pick("An arrow key moves by", "0.5");
+    for (const key of ["ArrowRight", "ArrowRight", "ArrowDown"]) await pressKey(key);
+    expect(placementOf("a")).toMatchObject({ x: 51, y: 60.5 });
+    for (const key of ["ArrowLeft", "ArrowUp"]) await pressKey(key);
+    expect(placementOf("a")).toMatchObject({ x: 50.5, y: 60 });
+    await pressKey("Escape");
+    await pressKey("ArrowRight");
+    expect(page().view).toEqual({ scale: 1, x: -48, y: 0 });
+  },
+  "On the drawing: Shift Arrows": async () => {
+    await showSetOut(document0, { chosen });
+    await pick("An arrow key moves by", "0.1");
+    await pressKey("Shift ArrowLeft");
+    expect(placementOf("a")?.x).toBe(49);
+  },
+  "On the drawing: Delete, Backspace": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Delete");
+    expect(idsOf(0)).toEqual(["b", "c"]);
+    await showSetOut(document0, { chosen });
+    await pressKey("Backspace");
+    expect(idsOf(0)).toEqual(["b", "c"]);
+  },
+  "On the drawing: Ctrl A": async () => {
+    await showSetOut(document0);
+    await pressKey("Ctrl a");
+    expect(page().editor.selection.pieceIds).toEqual(["a", "b", "c", "d"]);
+  },
+  "On the drawing: Escape": async () => {
+    await showSetOut(document0, { chosen, startDrag: dragging });
+    await pressKey("Escape");
+    expect(page().drag).toBeNull();
+    expect(page().editor.selection).toEqual(chosen);
+    await pressKey("Escape");
+    expect(page().editor.selection.pieceIds).toEqual([]);
+    const ended: (string | null)[] = [];
+    await showSetOut(document0, { chosen, desk: { holesByHand: "B", putHolesByHand: (key) => ended.push(key) } });
+    await pressKey("Escape");
+    expect(ended).toEqual([null]);
+  },
+  "On the drawing: +, −": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("+");
+    expect(page().view?.scale).toBeCloseTo(1.4, 9);
+    await pressKey("+");
+    await pressKey("-");
+    expect(page().view?.scale).toBeCloseTo(1.4, 9);
+  },
+  "On the drawing: 0": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("+");
+    await pressKey("0");
+    expect(page().view).toBeNull();
+  },
+  "Anywhere but in a field: Ctrl C": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Ctrl c");
+    expect(said()).toBe("1 piece copied, to be pasted in any job of Any client.");
+    expect(present()).toBe(document0);
+  },
+  "Anywhere but in a field: Ctrl X": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Ctrl x");
+    expect(idsOf(0)).toEqual(["b", "c"]);
+    await pressKey("Ctrl v");
+    expect(present().layers.flatMap(({ pieces }) => pieces)).toHaveLength(5);
+    expect(present().layers[0]?.pieces.at(-1)?.placement).toEqual({ x: 50, y: 60, turn: 0, scale: 1, mirrored: false });
+  },
+  "Anywhere but in a field: Ctrl V": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Ctrl c");
+    await pressKey("Ctrl v");
+    expect(idsOf(0)).toHaveLength(4);
+    expect(page().editor.selection.pieceIds).toEqual(idsOf(0)?.slice(3));
+    await showSetOut(document0, { chosen: chooseLayer(document0, "C") });
+    await pressKey("Ctrl c");
+    await pressKey("Ctrl v");
+    expect(present().layers.map(({ key, name }) => [key, name])).toEqual([
+      ["B", "Layer B"],
+      ["C", "Layer C"],
+      ["D", "Layer D"],
+      ["E", "Layer C 2"],
+    ]);
+  },
+  "Anywhere but in a field: Ctrl Shift V": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Ctrl c");
+    await pressKey("Ctrl Shift V");
+    expect(present().layers.map(({ key, pieces }) => [key, pieces.length])).toEqual([
+      ["B", 3],
+      ["C", 1],
+      ["D", 1],
+      ["E", 1],
+    ]);
+  },
+  "Anywhere but in a field: Ctrl D": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Ctrl d");
+    const [, , , copy] = present().layers[0]?.pieces ?? [];
+    expect(copy?.placement).toEqual({ x: 50, y: 60, turn: 0, scale: 1, mirrored: false });
+    expect(page().editor.selection.pieceIds).toEqual([copy?.id]);
+  },
+  "Anywhere but in a field: Ctrl Z": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Delete");
+    await pressKey("Ctrl z");
+    expect(present()).toBe(document0);
+    expect(said()).toBe("Undone: Remove pieces");
+  },
+  "Anywhere but in a field: Ctrl Shift Z, Ctrl Y": async () => {
+    for (const keys of ["Ctrl Shift Z", "Ctrl y"]) {
+      await showSetOut(document0, { chosen });
+      await pressKey("Delete");
+      await pressKey("Ctrl z");
+      await pressKey(keys);
+      expect(idsOf(0)).toEqual(["b", "c"]);
+      expect(said()).toBe("Done again: Remove pieces");
+    }
+  },
+  "In a cell of a list: Enter": async () => {
+    await showSetOut(document0, { chosen });
+    await typeThen("x of what is chosen", "77,5", "Enter");
+    expect(placementOf("a")?.x).toBe(77.5);
+  },
+  "In a cell of a list: Escape": async () => {
+    await showSetOut(document0, { chosen });
+    await typeThen("x of what is chosen", "77", "Escape");
+    expect(control("x of what is chosen", HTMLInputElement).value).toBe("50");
+    expect(present()).toBe(document0);
+    expect(page().editor.selection).toEqual(chosen);
+  },
+};
+
+/** Shown by the section's own tests, or with a pointer. */
+const shownElsewhere = ["On a layer in the section", "With the pointer"];
+
+beforeEach(() => localStorage.clear());
+
+describe("the list of keys", () => {
+  const listed = deskKeys
+    .filter(({ where }) => !shownElsewhere.includes(where))
+    .flatMap(({ where, keys }) => keys.map(({ keys: lettered }) => `${where}: ${lettered}`));
+
+  it("holds what is pressed here, and nothing more", () => {
+    expect(listed.toSorted()).toEqual(Object.keys(shown).toSorted());
+  });
+
+  it.each(listed)("is true of %s", async (key) => {
+    await shown[key]?.();
+    expect.hasAssertions();
+  });
+});
+
+describe("keys that have nothing to do", () => {
+  it("say why when what is chosen is locked, and leave it", async () => {
+    await showSetOut(document0, { chosen: chooseLayer(document0, "D") });
+    await pressKey("ArrowRight");
+    expect(said()).toBe("D is locked. Unlock it first.");
+    await pressKey("Delete");
+    expect(present()).toBe(document0);
+  });
+
+  it("leave copy, cut, paste and double to a field that has the focus", async () => {
+    await showSetOut(document0, { chosen });
+    for (const keys of ["Ctrl c", "Ctrl x", "Ctrl d", "Ctrl v"]) await pressKey(keys, "A field");
+    expect(localStorage).toHaveLength(0);
+    expect(present()).toBe(document0);
+  });
+
+  it("say that nothing was copied yet", async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("Ctrl v");
+    expect(said()).toBe("Nothing was copied yet in a job of Any client.");
+  });
+});
