@@ -54,6 +54,8 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
         role="application"
         aria-label="Elevation, from the front"
         aria-describedby={hintId}
+        // Scale in px a mm, and where the board's corner lies in the window, px.
+        data-view={[view.scale, view.x, view.y].join(" ")}
         {...takesKeys}
         className={cx(
           "absolute inset-0 touch-none overflow-hidden -outline-offset-4",

@@ -98,8 +98,11 @@ export class Picture extends FabricObject {
   #throwShadows(): void {
     const shadows = this.#shadows;
     const first = new Set<string>();
+    let isOnBoard = false;
     for (const { object, id, isShadow } of this.#placed) {
-      if (isShadow) object.visible = shadows === null;
+      // What the board throws on the wall stays: nothing on it moves the board.
+      isOnBoard ||= id === "board";
+      if (isShadow) object.visible = shadows === null || !isOnBoard;
       // Only a piece's body throws a shadow, which is the first of what carries its name.
       if (id === null || first.has(id)) continue;
       first.add(id);

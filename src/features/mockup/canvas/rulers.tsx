@@ -7,7 +7,7 @@ import { type RulerLine, rulerLines } from "../model/ruler-steps.ts";
 import { type Axis, type Span, spanOf } from "../model/span.ts";
 
 /** How wide a ruler is, px. */
-export const rulerPx = 22;
+export const rulerPx = 24;
 
 export type PointerMarks = {
   readonly x: RefObject<SVGLineElement | null>;
@@ -31,7 +31,7 @@ export function Rulers({ view, room, unit, chosen, pointer }: RulersProps) {
     <div aria-hidden="true" className="pointer-events-none absolute inset-0">
       <Ruler {...ruler("x")} axis="x" origin={view.x} length={room.width} mark={pointer.x} />
       <Ruler {...ruler("y")} axis="y" origin={view.y} length={room.height} mark={pointer.y} />
-      <span className="absolute top-0 left-0 flex size-5.5 items-center justify-center border-r border-b border-rule bg-paper font-sans text-[11px] text-graphite">
+      <span className="absolute top-0 left-0 flex size-6 items-center justify-center border-r border-b border-rule bg-paper font-sans text-fine text-graphite">
         {unit}
       </span>
     </div>
@@ -49,7 +49,8 @@ type RulerProps = {
   readonly mark: RefObject<SVGLineElement | null>;
 };
 
-const linePx: Readonly<Record<RulerLine["kind"], number>> = { figure: 9, middle: 7, line: 4 };
+const figureRoomPx = 34;
+const linePx: Readonly<Record<RulerLine["kind"], number>> = { figure: 10, middle: 7, line: 4 };
 
 function Ruler({ axis, origin, length, scale, unit, chosen, mark }: RulerProps) {
   const place = (mm: number) => origin + mm * scale;
@@ -77,18 +78,19 @@ function Ruler({ axis, origin, length, scale, unit, chosen, mark }: RulerProps) 
       <path d={path} />
       <path d={edge} className="text-rule" stroke="currentColor" />
       {lines
-        .filter(({ kind }) => kind === "figure")
+        .filter(({ at, kind }) => kind === "figure" && hasRoom(axis, place(at), length))
         .map(({ at }) => {
-          const along = Math.round(place(at)) + 3;
+          const along = Math.round(place(at));
+          // Read from below and from the right, as the figures of dimensions are.
+          const spot = axis === "x" ? { x: along + 3, y: 12 } : { x: 12, y: along - 3 };
           return (
             <text
               key={at}
-              x={axis === "x" ? along : 11}
-              y={axis === "x" ? 12 : along}
-              transform={axis === "x" ? undefined : `rotate(-90 11 ${along - 6})`}
+              {...spot}
+              transform={axis === "x" ? undefined : `rotate(-90 ${spot.x} ${spot.y})`}
               stroke="none"
               fill="currentColor"
-              className="font-sans text-[11px] tabular-nums"
+              className="font-sans text-fine tabular-nums"
             >
               {formatLength(at, unit)}
             </text>
@@ -113,3 +115,7 @@ function ChosenSpan({ axis, from, to }: { readonly axis: Axis; readonly from: nu
       : { x: 0, y: from, width: rulerPx, height: to - from };
   return <rect {...box} className="fill-indigo/20" stroke="none" />;
 }
+
+/** Whether a figure has room before the corner or the end: neither is ever cut. */
+const hasRoom = (axis: Axis, along: number, length: number) =>
+  axis === "x" ? along + figureRoomPx < length : along - figureRoomPx > rulerPx;

@@ -35,10 +35,11 @@ export function usePieceDrag({ onDrag, scale }: Hand): Pick<GestureHost, "drag" 
     if (figures === null) return null;
     const locked = new Set(document.layers.flatMap((layer) => (layer.locked ? layer.pieces.map(({ id }) => id) : [])));
     const pieceIds = selection.pieceIds.filter((id) => !locked.has(id));
-    const box = boxOfChosen(figures, pieceIds, shiftsBetween(figuresOf, document));
+    const shifts = shiftsBetween(figuresOf, document);
+    const box = boxOfChosen(figures, pieceIds, shifts);
     if (box === null) return null;
     const { marginMm } = aids;
-    const grounds = { document, figures, movedIds: pieceIds, marginMm, gridMm: catchingGridMm(aids) };
+    const grounds = { document, figures, shifts, movedIds: pieceIds, marginMm, gridMm: catchingGridMm(aids) };
     return { pieceIds, box, grounds: catchGroundsOf(grounds) };
   }
 

@@ -2,6 +2,7 @@ import { useRef, useState } from "react";
 import type { Box } from "#shared/geometry/path.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { boxBetween, chooseWithin, piecesWithin } from "../model/choose-box.ts";
+import { shiftsBetween } from "../model/shifts.ts";
 import type { GestureHost } from "./gestures.ts";
 
 /** A box that is being drawn, with the pieces that it would choose and their boxes. */
@@ -9,7 +10,7 @@ type Drawn = { readonly box: Box; readonly pieceIds: readonly string[]; readonly
 
 /** A box that a hand draws round pieces: what it would choose is shown meanwhile, and chosen when the hand lets go. */
 export function useSweep() {
-  const { document, figures, selection, choose } = useDesk();
+  const { document, figures, figuresOf, selection, choose } = useDesk();
   const [drawn, setDrawn] = useState<Drawn | null>(null);
   /** The newest box: the hand may let go before it was shown. */
   const newest = useRef<Drawn | null>(null);
@@ -22,7 +23,7 @@ export function useSweep() {
   const sweep: GestureHost["sweep"] = (from, to) => {
     if (figures === null) return;
     const box = boxBetween(from, to);
-    const pieces = piecesWithin(document, figures, box);
+    const pieces = piecesWithin({ document, figures, shifts: shiftsBetween(figuresOf, document) }, box);
     draw({ box, pieceIds: pieces.map(({ pieceId }) => pieceId), within: pieces.map((piece) => piece.box) });
   };
   const endSweep: GestureHost["endSweep"] = ({ more }) => {

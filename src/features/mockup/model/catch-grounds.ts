@@ -2,6 +2,7 @@ import { boxUnion } from "#shared/geometry/box.ts";
 import type { Box } from "#shared/geometry/path.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
+import { boxShifted, type Shift } from "./shifts.ts";
 import { type Axis, otherAxis, type Span, spanMiddle, spanOf } from "./span.ts";
 
 /** Whose line it is, in the order in which lines are preferred. */
@@ -27,6 +28,8 @@ export type CatchGrounds = {
 type Resting = {
   readonly document: MockupDocument;
   readonly figures: Figures;
+  /** What was moved since the figures were computed. */
+  readonly shifts: ReadonlyMap<string, Shift>;
   readonly movedIds: readonly string[];
   /** How far from the board's edges a line catches; null for none. */
   readonly marginMm: number | null;
@@ -34,10 +37,12 @@ type Resting = {
 };
 
 /** What pieces that move can catch: the board, its margin, every shown layer without the pieces that move, and every piece of them. */
-export function catchGroundsOf({ document, figures, movedIds, marginMm, gridMm }: Resting): CatchGrounds {
+export function catchGroundsOf({ document, figures, shifts, movedIds, marginMm, gridMm }: Resting): CatchGrounds {
   const moved = new Set(movedIds);
   const hidden = new Set(document.layers.filter((layer) => layer.hidden).map(({ key }) => key));
-  const pieces = figures.pieces.filter(({ layerKey, pieceId }) => !moved.has(pieceId) && !hidden.has(layerKey));
+  const pieces = figures.pieces
+    .filter(({ layerKey, pieceId }) => !moved.has(pieceId) && !hidden.has(layerKey))
+    .map(({ layerKey, pieceId, box }) => ({ layerKey, box: boxShifted(box, shifts.get(pieceId)) }));
   const byLayer = new Map<string, Box[]>();
   for (const { layerKey, box } of pieces) {
     const boxes = byLayer.get(layerKey);

@@ -3,7 +3,7 @@ import type { Box } from "#shared/geometry/path.ts";
 import { seenDiameterMm } from "#shared/hardware/standoff-parts.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Figures } from "#shared/stack/figures.ts";
-import type { Shift } from "./shifts.ts";
+import { boxShifted, type Shift } from "./shifts.ts";
 
 /** The box around pieces, from figures and what was moved since they were computed; null for none. */
 export function boxOfChosen(
@@ -15,10 +15,7 @@ export function boxOfChosen(
   return boxUnion(
     figures.pieces
       .filter(({ pieceId }) => chosen.has(pieceId))
-      .map(({ pieceId, box }) => {
-        const { dx, dy } = shifts.get(pieceId) ?? { dx: 0, dy: 0 };
-        return { ...box, x: box.x + dx, y: box.y + dy };
-      }),
+      .map(({ pieceId, box }) => boxShifted(box, shifts.get(pieceId))),
   );
 }
 

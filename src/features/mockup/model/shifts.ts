@@ -1,4 +1,4 @@
-import type { Placement } from "#shared/geometry/path.ts";
+import type { Box, Placement } from "#shared/geometry/path.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 
 export type Shift = { readonly dx: number; readonly dy: number };
@@ -18,6 +18,11 @@ export function shiftsBetween(shown: MockupDocument, wanted: MockupDocument): Re
     if (was.x !== place.x || was.y !== place.y) shifts.set(id, { dx: place.x - was.x, dy: place.y - was.y });
   }
   return shifts;
+}
+
+/** A box where it lies after a shift; where it was without one. */
+export function boxShifted(box: Box, shift: Shift | undefined): Box {
+  return shift ? { ...box, x: box.x + shift.dx, y: box.y + shift.dy } : box;
 }
 
 type Place = Readonly<Placement>;

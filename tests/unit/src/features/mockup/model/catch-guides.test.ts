@@ -13,7 +13,14 @@ const kernel = clipperKernel(await createClipper());
 
 type Aids = { readonly marginMm?: number | null; readonly gridMm?: number | null; readonly moved?: readonly string[] };
 const groundsOf = (document: MockupDocument, { marginMm = null, gridMm = null, moved = ["moved"] }: Aids = {}) =>
-  catchGroundsOf({ document, figures: computeFigures(document, kernel), movedIds: moved, marginMm, gridMm });
+  catchGroundsOf({
+    document,
+    figures: computeFigures(document, kernel),
+    shifts: new Map(),
+    movedIds: moved,
+    marginMm,
+    gridMm,
+  });
 
 /** A board of 600 × 400 with `pieces` in layer B and the one that is moved in layer C: 80 × 40 with its corner at 100, 50. */
 const signOf = (...pieces: ReturnType<typeof plate>[]) =>
