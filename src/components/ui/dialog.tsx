@@ -8,8 +8,8 @@ type DialogProps = {
   readonly onOpenChange: (open: boolean) => void;
   readonly title: string;
   readonly description?: ReactNode;
-  /** For a form beside a drawing. */
-  readonly size?: "normal" | "wide";
+  /** Wide for a form beside a drawing; desk for a table beside one. */
+  readonly size?: "normal" | "wide" | "desk";
   readonly children?: ReactNode;
 };
 
@@ -25,7 +25,7 @@ export function Dialog({ open, onOpenChange, title, description, size = "normal"
           {...(description ? {} : { "aria-describedby": undefined })}
           className={cx(
             "fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6",
-            size === "wide" ? "max-w-4xl" : "max-w-xl",
+            { normal: "max-w-xl", wide: "max-w-4xl", desk: "max-w-[100rem]" }[size],
           )}
         >
           <div className="flex items-start justify-between gap-4">

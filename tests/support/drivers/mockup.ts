@@ -53,8 +53,7 @@ export function mockup(page: Page) {
         if (stock) await dialog.getByLabel(`Stock of ${colour}`).selectOption(stock);
         if (thickness) await dialog.getByLabel(`Thickness, mm of ${colour}`).selectOption(thickness);
         if (hold) await dialog.getByLabel(`Held by of ${colour}`).selectOption(hold);
-        if (solid)
-          await dialog.getByRole("listitem").filter({ hasText: colour }).getByLabel("Close its openings").check();
+        if (solid) await dialog.getByLabel(`Close its openings of ${colour}`).check();
       }
       await dialog.getByRole("button", { name: /^Bring in \d+ layer/ }).click();
       await dialog.waitFor({ state: "detached" });

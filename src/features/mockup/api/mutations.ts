@@ -1,10 +1,12 @@
 import { useMutation, useQueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
+import { setTrueSize } from "#shared/contracts/artworks.ts";
 import { issueRevision } from "#shared/contracts/revisions.ts";
 import { setAsideFinding, takeBackSetAside } from "#shared/contracts/set-asides.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
+import { mockupQueries } from "./queries.ts";
 
 /** Issues the saved draft of one version as the next revision. */
 export function useIssueRevision(shop: string, jobId: string) {
@@ -37,5 +39,19 @@ export function useTakeBack(shop: string, jobId: string) {
   return useMutation({
     mutationFn: (setAsideId: string) => call(takeBackSetAside, { params: { shop, jobId, setAsideId } }),
     onSettled: () => client.invalidateQueries({ queryKey: keys.job(shop, jobId) }),
+  });
+}
+
+/** Sets an artwork's true size by its page's width; its pieces are read anew. */
+export function useSetArtworkWidth(shop: string, jobId: string, artworkId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (lengthMm: number) =>
+      call(setTrueSize, { params: { shop, artworkId }, body: { side: "width", lengthMm } }),
+    onSuccess: () =>
+      Promise.all([
+        client.invalidateQueries({ queryKey: keys.job(shop, jobId) }),
+        client.invalidateQueries({ queryKey: mockupQueries.pieces(shop, artworkId).queryKey }),
+      ]),
   });
 }

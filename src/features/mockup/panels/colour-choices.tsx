@@ -1,148 +1,176 @@
-import { useQueryClient } from "@tanstack/react-query";
 import { useMemo, useState } from "react";
-import type { ColourMatch } from "#shared/colour/nearest-stock.ts";
 import type { Artwork } from "#shared/contracts/artworks.ts";
 import { Button } from "@/components/ui/button.tsx";
-import { Checkbox } from "@/components/ui/checkbox.tsx";
-import { Notice } from "@/components/ui/notice.tsx";
-import { messageOf } from "@/lib/form-problem.ts";
 import { counted } from "@/lib/format.ts";
-import { mockupQueries } from "../api/queries.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
-import { bringInArtwork, type ColourChoice } from "../model/commands/bring-in-artwork.ts";
+import {
+  type ArtworkPart,
+  changePart,
+  destinationsOf,
+  joinAlike,
+  sendPart,
+  splitPart,
+  startParts,
+} from "../model/artwork-parts.ts";
+import { type ArtworkToBringIn, bringInArtwork, type ColourChoice } from "../model/commands/bring-in-artwork.ts";
 import { chooseLayer } from "../model/selection.ts";
-import { optionsOfHold, type StockChoices } from "../model/stock-choices.ts";
-import { type SuggestedLayer, suggestHold, suggestLayers } from "../model/suggest-layers.ts";
-import { Swatch } from "./cell-controls.tsx";
-import { type LayerChoice, LayerFields } from "./layer-fields.tsx";
+import { sheetOfPart } from "../model/sheet-of-part.ts";
+import { optionsOfHold } from "../model/stock-choices.ts";
+import { suggestHold, suggestLayers } from "../model/suggest-layers.ts";
+import { ArtworkPicture } from "./artwork-picture.tsx";
+import { ArtworkSize } from "./artwork-size.tsx";
+import { WordButton } from "./cell-controls.tsx";
+import { PartRow } from "./part-row.tsx";
+import { PickedPieces } from "./picked-pieces.tsx";
 
-type Row = Omit<SuggestedLayer & LayerChoice, "hold"> & {
-  /** null until the hold was chosen by hand: it then follows what the layer will lie on. */
-  readonly hold: number | null;
-  readonly wanted: boolean;
-  readonly solid: boolean;
+type ColourChoicesProps = {
+  readonly shop: string;
+  readonly jobId: string;
+  readonly artwork: Artwork;
+  readonly drawing: ArtworkToBringIn;
+  readonly onDone: () => void;
 };
 
-const matchWords: Record<ColourMatch, string> = {
-  same: "the colour of the artwork",
-  close: "close to the artwork",
-  visible: "off the artwork, it shows side by side",
-  "another colour": "another colour than the artwork",
-};
-
-type ColourChoicesProps = { readonly shop: string; readonly artwork: Artwork; readonly onDone: () => void };
-
-/** The colours of one artwork with what is proposed for each. */
-export function ColourChoices({ shop, artwork, onDone }: ColourChoicesProps) {
-  const { stock, site, edit } = useDesk();
-  const client = useQueryClient();
-  const proposed = useMemo(
-    () =>
-      suggestLayers(artwork.colours, stock.acrylics).map(
-        (layer): Row => ({ ...layer, hold: null, wanted: true, solid: false }),
-      ),
-    [artwork.colours, stock.acrylics],
+/** The colours of one artwork: what each is cut from, which go together, elsewhere or nowhere, and the picture that makes. */
+export function ColourChoices({ shop, jobId, artwork, drawing, onDone }: ColourChoicesProps) {
+  const { document, stock, site, edit } = useDesk();
+  const [parts, setParts] = useState<readonly ArtworkPart[]>(() =>
+    startParts(suggestLayers(artwork.colours, stock.acrylics), drawing.pieces),
   );
-  const [rows, setRows] = useState(proposed);
-  const [busy, setBusy] = useState(false);
-  const [problem, setProblem] = useState<string | null>(null);
-  const wanted = rows.filter((row) => row.wanted);
-  const hasPlate = wanted.some((row) => row.solid);
-  const holdOf = (row: Row) => row.hold ?? suggestHold(stock, hasPlate && !row.solid ? "acrylic" : "wood");
+  const [picked, setPicked] = useState<ReadonlySet<number>>(new Set());
+  const { made, added, out } = destinationsOf(parts);
+  const hasPlate = made.some(({ part }) => part.solid);
+  const holdOf = (part: ArtworkPart) => part.hold ?? suggestHold(stock, hasPlate && !part.solid ? "acrylic" : "wood");
+  const sheets = useMemo(() => {
+    const byIndex = new Map<number, string | null>();
+    for (const part of parts) {
+      const colour = sheetOfPart(part, { parts, document, stock })?.colour ?? null;
+      for (const index of part.indices) byIndex.set(index, colour);
+    }
+    return byIndex;
+  }, [parts, document, stock]);
+  const joined = joinAlike(parts);
+  const alike = joined.filter((part, at) => part !== parts[at]).length;
 
-  function change(colour: string, fields: Partial<Row>) {
-    setRows((before) => before.map((row) => (row.colour === colour ? { ...row, ...fields } : row)));
+  function pick(index: number) {
+    setPicked((before) => {
+      const next = new Set(before);
+      if (!next.delete(index)) next.add(index);
+      return next;
+    });
   }
 
-  async function bringIn() {
-    setBusy(true);
-    setProblem(null);
-    try {
-      const { widthMm, heightMm, pieces } = await client.fetchQuery(mockupQueries.pieces(shop, artwork.id));
-      // Solid plates lie under what is bonded on them.
-      const choices = wanted
-        .toSorted((a, b) => Number(b.solid) - Number(a.solid))
-        .flatMap((row) => choiceOf(row, holdOf(row), stock));
-      const id = newId();
-      edit({
-        label: `Bring in ${artwork.name}`,
-        change: (before) =>
-          bringInArtwork(before, { artwork: { artworkId: artwork.id, widthMm, heightMm, pieces }, choices, id, site }),
-        choose: (after) => chooseLayer(after, after.layers.at(-1)?.key ?? ""),
+  function split() {
+    setParts((before) => before.reduce((next, { id }) => splitPart(next, id, [...picked]), before));
+    setPicked(new Set());
+  }
+
+  function bringIn() {
+    // Solid plates lie under what is bonded on them.
+    const choices = made
+      .toSorted((a, b) => Number(b.part.solid) - Number(a.part.solid))
+      .flatMap(({ part, indices }): ColourChoice[] => {
+        const sheet = stock.acrylics[part.sheet]?.acrylic;
+        const hold = optionsOfHold(stock)[holdOf(part)];
+        if (!sheet || !hold) return [];
+        const { colour, thickness, solid } = part;
+        return [{ colour, indices, thickness, solid, hold, stock: sheet, name: sheet.name }];
       });
-      onDone();
-    } catch (error) {
-      setProblem(messageOf(error));
-    } finally {
-      setBusy(false);
-    }
+    const id = newId();
+    edit({
+      label: `Bring in ${artwork.name}`,
+      change: (before) => bringInArtwork(before, { artwork: drawing, choices, added, id, site }),
+      choose: (after) =>
+        chooseLayer(after, choices.length > 0 ? (after.layers.at(-1)?.key ?? "") : (added[0]?.key ?? "")),
+    });
+    onDone();
   }
 
   return (
-    <form
-      className="space-y-4"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void bringIn();
-      }}
-    >
-      <ul className="divide-y divide-rule border-y border-rule">
-        {rows.map((row) => (
-          <li key={row.colour} className="space-y-2 py-3">
-            <Checkbox
-              label={
-                <span className="inline-flex items-center gap-2">
-                  <Swatch colour={row.colour} /> {row.colour}, {counted(row.pieces, "piece")}
-                </span>
-              }
-              checked={row.wanted}
-              onChange={(event) => change(row.colour, { wanted: event.target.checked })}
-            />
-            {row.wanted && (
-              <>
-                <LayerFields
-                  of={`of ${row.colour}`}
-                  choice={{ ...row, hold: holdOf(row) }}
-                  onChange={({ sheet, thickness, hold }) =>
-                    change(row.colour, { sheet, thickness, ...(hold === holdOf(row) ? {} : { hold }) })
-                  }
-                  {...(row.sheet === sheetOf(proposed, row.colour) ? { hint: matchWords[row.match] } : {})}
-                />
-                <Checkbox
-                  label="Close its openings"
-                  hint="One plate to bond the other colours on, instead of pieces that lie between them."
-                  checked={row.solid}
-                  onChange={(event) => change(row.colour, { solid: event.target.checked })}
-                />
-              </>
-            )}
-          </li>
-        ))}
-      </ul>
-      {problem && (
-        <Notice tone="error" title="Nothing was brought in.">
-          {problem}
-        </Notice>
-      )}
-      <div className="flex flex-wrap justify-end gap-3">
-        <Button onClick={onDone}>Cancel</Button>
-        <Button type="submit" busy={busy} disabled={wanted.length === 0}>
-          Bring in {counted(wanted.length, "layer")}
-        </Button>
+    <div className="grid gap-6 lg:grid-cols-[minmax(16rem,26rem)_minmax(0,1fr)]">
+      <div className="space-y-3">
+        <ArtworkPicture
+          label={`${artwork.name} as it will be cut`}
+          {...drawing}
+          colourOf={(index) => sheets.get(index) ?? null}
+          picked={picked}
+          onPick={pick}
+        />
+        <PickedPieces
+          parts={parts}
+          pieces={drawing.pieces}
+          picked={picked}
+          onPick={pick}
+          onClear={() => setPicked(new Set())}
+          onSplit={split}
+        />
+        {artwork.can.change && (
+          <ArtworkSize
+            shop={shop}
+            jobId={jobId}
+            artwork={{ id: artwork.id, widthMm: drawing.widthMm }}
+            pieces={drawing.pieces}
+            picked={picked}
+          />
+        )}
       </div>
-    </form>
+      <div className="min-w-0 space-y-3">
+        {alike > 0 && (
+          <p className="text-sm">
+            {counted(alike, "colour looks", "colours look")} like another one.{" "}
+            <WordButton inText onClick={() => setParts(joined)}>
+              Join what looks the same
+            </WordButton>
+          </p>
+        )}
+        <div className="overflow-x-auto lg:max-h-[58dvh] lg:overflow-y-auto">
+          <table className="w-full min-w-3xl border-collapse">
+            <thead className="sticky top-0 z-10 bg-sheet text-left text-fine text-graphite">
+              <tr className="border-b border-ink">
+                <th scope="col" className="py-1 pr-3 font-semibold">
+                  Artwork, sheet
+                </th>
+                {["Goes to", "Stock", "Difference", "Thickness", "Held by"].map((title) => (
+                  <th key={title} scope="col" className="px-1 font-semibold">
+                    {title}
+                  </th>
+                ))}
+                <th scope="col" className="font-semibold" title="One plate to bond the other colours on">
+                  Openings closed
+                </th>
+              </tr>
+            </thead>
+            <tbody>
+              {parts.map((part) => (
+                <PartRow
+                  key={part.id}
+                  part={part}
+                  parts={parts}
+                  hold={holdOf(part)}
+                  onSend={(to) => setParts((before) => sendPart(before, part.id, to))}
+                  onChange={(fields) => setParts((before) => changePart(before, part.id, fields))}
+                />
+              ))}
+            </tbody>
+          </table>
+        </div>
+        <div className="flex flex-wrap items-center justify-end gap-3">
+          <p className="mr-auto text-sm text-graphite">{wordsOf(made.length, added.length, out)}</p>
+          <Button onClick={onDone}>Cancel</Button>
+          <Button onClick={bringIn} disabled={made.length + added.length === 0}>
+            {made.length === 0 && added.length > 0 ? "Add to the layers" : `Bring in ${counted(made.length, "layer")}`}
+          </Button>
+        </div>
+      </div>
+    </div>
   );
 }
 
-function sheetOf(rows: readonly Row[], colour: string): number | undefined {
-  return rows.find((row) => row.colour === colour)?.sheet;
-}
-
-function choiceOf(row: Row, holdIndex: number, stock: StockChoices): ColourChoice[] {
-  const sheet = stock.acrylics[row.sheet];
-  const hold = optionsOfHold(stock)[holdIndex];
-  if (!sheet || !hold) return [];
-  const { colour, thickness, solid } = row;
-  return [{ colour, thickness, solid, hold, stock: sheet.acrylic, name: sheet.acrylic.name }];
+function wordsOf(made: number, added: number, out: number): string {
+  return [
+    counted(made, "new layer"),
+    ...(added > 0 ? [`pieces added to ${counted(added, "layer")}`] : []),
+    ...(out > 0 ? [`${counted(out, "piece")} left out`] : []),
+  ].join(", ");
 }

@@ -30,11 +30,12 @@ type DeskDialogsProps = {
   readonly onClose: () => void;
   readonly shop: string;
   readonly jobId: string;
-  readonly jobPath: string;
+  /** Files dropped on the drawing, for the artwork dialog that they open. */
+  readonly files: readonly File[];
 };
 
 /** The dialogs that the bar over the drawing opens, one at a time. */
-export function DeskDialogs({ open, onClose, ...job }: DeskDialogsProps) {
+export function DeskDialogs({ open, onClose, files, ...job }: DeskDialogsProps) {
   const at = (dialog: DeskDialog) => ({
     open: open === dialog,
     onOpenChange: (isOpen: boolean) => {
@@ -43,7 +44,7 @@ export function DeskDialogs({ open, onClose, ...job }: DeskDialogsProps) {
   });
   return (
     <>
-      <BringInDialog {...at("artwork")} {...job} />
+      <BringInDialog {...at("artwork")} {...job} files={files} />
       <LetteringDialog {...at("lettering")} />
       <PlateDialog {...at("plate")} />
       <BoardDialog {...at("board")} />

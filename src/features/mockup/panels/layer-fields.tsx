@@ -75,6 +75,7 @@ export function LayerFields({ choice, onChange, of = "", hint, narrow = false }:
   );
 }
 
-function nameOfHold(option: HoldChoice): string {
+/** A hold in words, as its choice names it. */
+export function nameOfHold(option: HoldChoice): string {
   return option.kind === "standoff" ? option.hardware.name : `${option.kind}, ${option.adhesive.name}`;
 }

@@ -29,6 +29,7 @@ import { CostPanel, type CostPanelProps } from "./cost-panel.tsx";
 import { DeskBar } from "./desk-bar.tsx";
 import { type DeskDialog, DeskDialogs } from "./desk-dialogs.tsx";
 import { DeskTools } from "./desk-tools.tsx";
+import { DropGround } from "./drop-ground.tsx";
 import { FindingsPanel } from "./findings-panel.tsx";
 import { KeptDraftNotice } from "./kept-draft-notice.tsx";
 import { LayerDetails } from "./layer-details.tsx";
@@ -69,6 +70,7 @@ export function MockupDesk(props: MockupDeskProps) {
   const [view, setView] = useState<DrawingView | null>(null);
   const [finding, setFinding] = useState<Finding | null>(null);
   const [dialog, setDialog] = useState<DeskDialog | null>(null);
+  const [files, setFiles] = useState<readonly File[]>([]);
   const [holesOf, putHolesByHand] = useState<string | null>(null);
   const [heights, letterHeights] = useState<BandWording>("nominal");
   const frame = useRef<HTMLDivElement>(null);
@@ -138,6 +140,11 @@ export function MockupDesk(props: MockupDeskProps) {
     ],
   );
 
+  function closeDialog() {
+    setDialog(null);
+    setFiles([]);
+  }
+
   function show(next: Finding) {
     if (next.layerKey !== null) dispatch({ kind: "choose", selection: chooseLayer(document, next.layerKey) });
     setFinding(next);
@@ -181,7 +188,13 @@ export function MockupDesk(props: MockupDeskProps) {
           onThrowAway={() => safe.throwAway(draft)}
         />
       ))}
-      <div className="grid h-[max(26rem,calc(100dvh-25rem))] grid-cols-[minmax(0,1fr)_minmax(15rem,18.5rem)] border-b border-rule">
+      <DropGround
+        className="grid h-[max(26rem,calc(100dvh-25rem))] grid-cols-[minmax(0,1fr)_minmax(15rem,18.5rem)] border-b border-rule"
+        onFiles={(dropped) => {
+          setFiles(dropped);
+          setDialog("artwork");
+        }}
+      >
         <CanvasPanel
           drawn={drawn}
           failure={failure}
@@ -195,7 +208,7 @@ export function MockupDesk(props: MockupDeskProps) {
           frame={frame}
         />
         <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
-      </div>
+      </DropGround>
       <PlaceStrip said={said} />
       <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_clamp(17rem,25.5vw,24rem)]">
         <div className="min-w-0">
@@ -229,7 +242,7 @@ export function MockupDesk(props: MockupDeskProps) {
           className="border-rule max-[1200px]:border-t min-[1200px]:border-l"
         />
       </div>
-      <DeskDialogs open={dialog} onClose={() => setDialog(null)} shop={shop} jobId={job.id} jobPath={jobPath} />
+      <DeskDialogs open={dialog} onClose={closeDialog} shop={shop} jobId={job.id} files={files} />
       <StaleDialog
         newer={saving.autosave.state === "stale" ? saving.autosave.newer : null}
         mine={document}
