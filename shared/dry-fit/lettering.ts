@@ -1,5 +1,5 @@
+import { boxOfPath } from "../geometry/box.ts";
 import type { Layer, Piece } from "../mockup/document.ts";
-import { inReadingOrder } from "../pieces/reading-order.ts";
 import type { PieceFigures } from "../stack/figures.ts";
 import type { RuleInput } from "./rule.ts";
 import { layersWithFigures } from "./words.ts";
@@ -38,16 +38,10 @@ export function letterHeightMm(
 }
 
 function heightOf({ piece, figures }: Letter): number {
+  // The outline of a letter that was set stands upright in its own plane, however it is turned on the board.
+  if (piece.source.kind === "lettering") return (boxOfPath(piece.path)?.height ?? 0) * piece.placement.scale;
   const upright = Math.abs(piece.placement.turn % 180) < 1;
   if (upright) return figures.box.height;
   const { smallestBox } = figures;
   return smallestBox ? Math.max(smallestBox.width, smallestBox.length) : figures.box.height;
-}
-
-/**
- * What the letters read in lines from the top, each from left to right: a letter belongs to the line whose middle lies
- * within half its height. Spaces between words are not told.
- */
-export function linesOf(letters: readonly Letter[]): Letter[][] {
-  return inReadingOrder(letters, ({ figures }) => figures.box);
 }

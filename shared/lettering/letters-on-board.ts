@@ -20,14 +20,19 @@ export function lettersOnBoard({ layers }: Pick<MockupDocument, "layers">, lette
     .toSorted((a, b) => a.source.letter - b.source.letter);
 }
 
-/**
- * The letters set by set: doubled lettering lies on the board more than once, and each time has its own place. The first of
- * every letter makes one set, the second the next.
- */
+/** The letters of a lettering copy by copy, as `copiesOf` parts them. */
 export function copiesOnBoard(document: Pick<MockupDocument, "layers">, letteringId: string): LetterPiece[][] {
-  const copies: LetterPiece[][] = [];
+  return copiesOf(lettersOnBoard(document, letteringId));
+}
+
+/**
+ * Letters of one lettering parted copy by copy: doubled lettering lies on the board more than once, and each time has its own
+ * place. The first piece of every letter makes one copy, the second the next.
+ */
+export function copiesOf<T extends Pick<LetterPiece, "source">>(letters: readonly T[]): T[][] {
+  const copies: T[][] = [];
   const seen = new Map<number, number>();
-  for (const letter of lettersOnBoard(document, letteringId)) {
+  for (const letter of letters) {
     const copy = seen.get(letter.source.letter) ?? 0;
     seen.set(letter.source.letter, copy + 1);
     const own = copies[copy];
@@ -38,7 +43,7 @@ export function copiesOnBoard(document: Pick<MockupDocument, "layers">, letterin
 }
 
 /** Where the plane of some letters of one lettering lies on the board. Null for no letters. */
-export function movementOfLetters(letters: readonly LetterPiece[]): Placement | null {
+export function movementOfLetters(letters: readonly Pick<LetterPiece, "piece" | "source">[]): Placement | null {
   return commonMovement(letters.map(({ piece, source }) => ({ laid: source.laid, placement: piece.placement })));
 }
 

@@ -1,5 +1,6 @@
 import type { Finding } from "../finding.ts";
-import { type Letter, lettersOf, linesOf } from "../lettering.ts";
+import { type Letter, lettersOf } from "../lettering.ts";
+import { linesOf } from "../reading-lines.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 
 const source = "the brief";
@@ -10,7 +11,7 @@ export const wordsAgainstBrief: Rule = { number: 26, title: "Words", check };
 function check(input: RuleInput): Finding[] {
   const wanted = charactersOf(input.context.words);
   if (wanted.length === 0) return [];
-  const letters = linesOf(lettersOf(input)).flat();
+  const letters = linesOf(lettersOf(input), input.document.lettering).flat();
   if (letters.length === 0) {
     return [
       foundBy(wordsAgainstBrief, {

@@ -1,4 +1,4 @@
-import { linesOf } from "#shared/dry-fit/lettering.ts";
+import { linesOf } from "#shared/dry-fit/reading-lines.ts";
 import type { Layer } from "#shared/mockup/document.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { setReads, spreadWords } from "../model/commands/set-reads.ts";
@@ -6,7 +6,7 @@ import { CellText } from "./cell-controls.tsx";
 
 /** The words of a layer of letters, typed as they are read off the drawing and spread over its pieces. */
 export function WordsOfLayer({ layer }: { readonly layer: Layer }) {
-  const { figures, edit } = useDesk();
+  const { document, figures, edit } = useDesk();
   if (figures === null) return null;
   const known = new Map(figures.pieces.map((one) => [one.pieceId, one]));
   const lines = linesOf(
@@ -14,6 +14,7 @@ export function WordsOfLayer({ layer }: { readonly layer: Layer }) {
       const own = known.get(piece.id);
       return own ? [{ layer, piece, figures: own }] : [];
     }),
+    document.lettering,
   );
   const inOrder = lines.flat();
   return (
