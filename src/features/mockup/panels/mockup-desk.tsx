@@ -36,6 +36,7 @@ import { LayerDetails } from "./layer-details.tsx";
 import { LeaveDialog } from "./leave-dialog.tsx";
 import { PiecesPanel } from "./pieces-panel.tsx";
 import { PlaceStrip } from "./place-strip.tsx";
+import { ReadBackPanel } from "./read-back-panel.tsx";
 import { SchedulePanel } from "./schedule-panel.tsx";
 import { SectionPanel } from "./section-panel.tsx";
 import { StaleDialog } from "./stale-dialog.tsx";
@@ -227,6 +228,7 @@ export function MockupDesk(props: MockupDeskProps) {
               pricesPath={props.pricesPath}
             />
           )}
+          <ReadBackPanel />
           <LayerDetails />
           <PiecesPanel />
         </div>
