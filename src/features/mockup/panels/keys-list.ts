@@ -48,7 +48,12 @@ export const deskKeys: readonly DeskKeys[] = [
   {
     where: "With the pointer",
     keys: [
-      { keys: "Space and drag", does: "looks around" },
+      {
+        keys: "Drag on bare ground",
+        does: "draws a box that chooses what lies in it; with Ctrl it can begin on a piece",
+      },
+      { keys: "Space and drag", does: "looks around, as the middle button does" },
+      { keys: "Wheel", does: "looks closer and farther, where the pointer is" },
       { keys: "Shift and press", does: "adds to what is chosen, on the drawing and in the list of pieces" },
       { keys: "Press twice", does: "picks one piece out of its layer" },
       { keys: "Alt while dragging", does: "catches on nothing" },

@@ -25,7 +25,7 @@ export function LineUpPopover({ why }: { readonly why: string | null }) {
           aria-label="Line up"
           align="start"
           sideOffset={4}
-          className="z-40 w-80 space-y-3 border border-ink bg-sheet p-4"
+          className="z-40 w-96 space-y-3 border border-ink bg-sheet p-4"
         >
           <LineUpForm why={why} />
         </Popover.Content>
@@ -57,24 +57,26 @@ function LineUpForm({ why }: { readonly why: string | null }) {
 
   return (
     <>
-      <Select
-        label="With"
-        value={to}
-        onChange={(event) => setTo(others.find((one) => one === event.target.value) ?? to)}
-      >
-        {others.map((one) => (
-          <option key={one}>{one}</option>
-        ))}
-      </Select>
-      <Select
-        label="What moves"
-        value={together}
-        onChange={(event) => setChosen(togethers.find((one) => one === event.target.value) ?? together)}
-      >
-        {togethers.map((one) => (
-          <option key={one}>{one}</option>
-        ))}
-      </Select>
+      <div className="grid grid-cols-2 gap-3">
+        <Select
+          label="With"
+          value={to}
+          onChange={(event) => setTo(others.find((one) => one === event.target.value) ?? to)}
+        >
+          {others.map((one) => (
+            <option key={one}>{one}</option>
+          ))}
+        </Select>
+        <Select
+          label="What moves"
+          value={together}
+          onChange={(event) => setChosen(togethers.find((one) => one === event.target.value) ?? together)}
+        >
+          {togethers.map((one) => (
+            <option key={one}>{one}</option>
+          ))}
+        </Select>
+      </div>
       <div className="grid grid-cols-3 gap-1">{linedUpBy.map(word)}</div>
       {whyNot !== null && <p className="text-fine text-graphite">{whyNot}</p>}
       <p className="text-right">

@@ -20,7 +20,7 @@ export function PlaceStrip({ said }: { readonly said: Said }) {
   return (
     <section
       aria-label="Place of what is chosen"
-      className="flex min-h-10 flex-wrap items-center gap-x-4 border-b border-rule px-4 py-1 sm:px-6"
+      className="flex min-h-10 flex-wrap items-center gap-x-3 border-b border-rule px-4 py-1 sm:px-6"
     >
       <p className="max-w-64 min-w-0 truncate text-sm font-semibold text-ink" title={words ?? undefined}>
         {words ?? "Nothing is chosen"}
@@ -52,7 +52,7 @@ function PieceFigures() {
     edit({ label: "Place in figures", change: (before) => placeChosen(before, { pieceIds, anchor, ...to }) });
   const mirror = (way: "across" | "down") =>
     edit({ label: `Mirror ${way}`, change: (before) => mirrorPieces(before, { pieceIds, way }) });
-  const length = { unit, exact: true, disabled: why !== null, className: "w-20", title: why ?? undefined };
+  const length = { unit, exact: true, disabled: why !== null, title: why ?? undefined };
 
   function turn(text: string): string | null {
     const degrees = readDegrees(text);
@@ -67,13 +67,8 @@ function PieceFigures() {
 
   return (
     <>
-      <Labelled words="at its">
-        <CellSelect
-          aria-label="Measured at"
-          className="w-auto"
-          value={at}
-          onChange={(event) => setAt(Number(event.target.value))}
-        >
+      <Labelled words="at its" width="w-36">
+        <CellSelect aria-label="Measured at" value={at} onChange={(event) => setAt(Number(event.target.value))}>
           {anchors.map(({ words }, index) => (
             <option key={words} value={index}>
               {words}
@@ -81,7 +76,7 @@ function PieceFigures() {
           ))}
         </CellSelect>
       </Labelled>
-      <Labelled words="x">
+      <Labelled words={`x, ${unit}`}>
         <CellLength
           {...length}
           aria-label="x of what is chosen"
@@ -117,11 +112,10 @@ function PieceFigures() {
           onCommit={(height) => place({ height })}
         />
       </Labelled>
-      <Labelled words={only ? "turned" : "turn by"}>
+      <Labelled words={only ? "turned" : "turn by"} width="w-14">
         <CellText
           aria-label={only ? "Turn of what is chosen, degrees" : "Turn what is chosen by, degrees"}
           inputMode="decimal"
-          className="w-16"
           disabled={why !== null}
           value={only ? `${plainDegrees(only.placement.turn)}°` : "0°"}
           onCommit={turn}
@@ -146,10 +140,10 @@ function HoleFigures() {
   if (!hole) return null;
   const place = (to: { x?: number; y?: number }) =>
     edit({ label: "Place a hole", change: (before) => setHole(before, { holeId: hole.id, ...to }) });
-  const length = { unit, exact: true, bounds: coordinateBounds, className: "w-20" };
+  const length = { unit, exact: true, bounds: coordinateBounds };
   return (
     <>
-      <Labelled words="x">
+      <Labelled words={`x, ${unit}`}>
         <CellLength {...length} aria-label="x of the chosen hole" mm={hole.x} onCommit={(x) => place({ x })} />
       </Labelled>
       <Labelled words="y">
@@ -159,13 +153,15 @@ function HoleFigures() {
   );
 }
 
-function Labelled({ words, children }: { readonly words: string; readonly children: ReactNode }) {
+type LabelledProps = { readonly words: string; readonly width?: string; readonly children: ReactNode };
+
+function Labelled({ words, width = "w-20", children }: LabelledProps) {
   return (
     <span className="flex items-baseline gap-x-1.5">
       <span aria-hidden="true" className="text-fine whitespace-nowrap text-graphite">
         {words}
       </span>
-      {children}
+      <span className={width}>{children}</span>
     </span>
   );
 }

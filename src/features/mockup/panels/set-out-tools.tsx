@@ -46,18 +46,19 @@ function ArrowStep() {
   return (
     <span className="flex items-baseline gap-x-1 text-sm text-graphite">
       <span aria-hidden="true">arrows</span>
-      <CellSelect
-        aria-label="An arrow key moves by"
-        className="w-auto"
-        value={step}
-        onChange={(event) => chooseStep(Number(event.target.value))}
-      >
-        {arrowSteps(unit).map((mm) => (
-          <option key={mm} value={mm}>
-            {formatExactWithUnit(mm, unit)}
-          </option>
-        ))}
-      </CellSelect>
+      <span className="w-18">
+        <CellSelect
+          aria-label="An arrow key moves by"
+          value={step}
+          onChange={(event) => chooseStep(Number(event.target.value))}
+        >
+          {arrowSteps(unit).map((mm) => (
+            <option key={mm} value={mm}>
+              {formatExactWithUnit(mm, unit)}
+            </option>
+          ))}
+        </CellSelect>
+      </span>
     </span>
   );
 }

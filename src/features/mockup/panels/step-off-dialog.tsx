@@ -71,7 +71,7 @@ function StepOffForm({ onDone }: { readonly onDone: () => void }) {
         </p>
         <div className="mt-auto flex flex-wrap justify-end gap-3">
           <Button onClick={onDone}>Cancel</Button>
-          <Button type="submit" kind="primary" disabled={!outcome.ok}>
+          <Button type="submit" disabled={!outcome.ok}>
             Step off
           </Button>
         </div>

@@ -55,8 +55,8 @@ export function StepOffFields({ draft, onChange }: StepOffFieldsProps) {
         value={draft.what}
         onChange={(event) => changeWhat(event.target.value === "copies" ? "copies" : "chosen")}
       >
-        <option value="copies">copies of it, all as one</option>
-        <option value="chosen">what is chosen itself</option>
+        <option value="copies">copies of it</option>
+        <option value="chosen">the pieces themselves</option>
       </Select>
       {isCopying ? (
         <NumberField label="Copies" value={draft.count} onChange={(count) => change({ count })} />
@@ -123,18 +123,22 @@ export function StepOffFields({ draft, onChange }: StepOffFieldsProps) {
         />
       )}
       {!isCopying && draft.shape !== "round" && (
-        <Checkbox
-          label="Bring their middles onto one line"
-          checked={draft.onto}
-          onChange={(event) => change({ onto: event.target.checked })}
-        />
+        <div className="sm:col-span-2">
+          <Checkbox
+            label="Bring their middles onto one line"
+            checked={draft.onto}
+            onChange={(event) => change({ onto: event.target.checked })}
+          />
+        </div>
       )}
       {isCopying && haveHoles(document, selection.pieceIds) && (
-        <Checkbox
-          label="With the standoff holes in it"
-          checked={draft.withHoles}
-          onChange={(event) => change({ withHoles: event.target.checked })}
-        />
+        <div className="sm:col-span-2">
+          <Checkbox
+            label="With the standoff holes in it"
+            checked={draft.withHoles}
+            onChange={(event) => change({ withHoles: event.target.checked })}
+          />
+        </div>
       )}
     </div>
   );

@@ -53,11 +53,13 @@ export function StepOffRound({ draft, onChange }: StepOffRoundProps) {
         onChange={(sweep) => change({ sweep })}
         hint="Under 0 goes counter-clockwise"
       />
-      <Checkbox
-        label="Turn along as they go round"
-        checked={draft.turned}
-        onChange={(event) => change({ turned: event.target.checked })}
-      />
+      <div className="sm:col-span-2">
+        <Checkbox
+          label="Turn along as they go round"
+          checked={draft.turned}
+          onChange={(event) => change({ turned: event.target.checked })}
+        />
+      </div>
     </>
   );
 }
