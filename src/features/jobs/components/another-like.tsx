@@ -26,7 +26,7 @@ export function AnotherLike({ shop, job, onOpened }: AnotherLikeProps) {
         open={open}
         onOpenChange={setOpen}
         title={`Another like ${job.number}`}
-        description={`A new job like “${job.title}” for ${job.client.name}. This one stays as it is.`}
+        description={`A new job like “${job.title}” of ${job.client.name}. That one stays as it is.`}
       >
         <AnotherLikeForm shop={shop} job={job} onOpened={onOpened} />
       </Dialog>

@@ -71,7 +71,8 @@ function openDatabase(onGone: () => void): Promise<IDBDatabase> {
       fail(new DOMException("This browser keeps nothing for pages.", "SecurityError"));
       return;
     }
-    const request = indexedDB.open(databaseName, 1);
+    const request = openRequest(fail);
+    if (request === null) return;
     request.addEventListener("upgradeneeded", () => request.result.createObjectStore(storeName));
     request.addEventListener("error", () => fail(request.error));
     request.addEventListener("success", () => {
@@ -85,6 +86,16 @@ function openDatabase(onGone: () => void): Promise<IDBDatabase> {
       resolve(database);
     });
   });
+}
+
+/** Some browsers throw at once where pages may keep nothing. */
+function openRequest(fail: (error: unknown) => void): IDBOpenDBRequest | null {
+  try {
+    return indexedDB.open(databaseName, 1);
+  } catch (error) {
+    fail(error);
+    return null;
+  }
 }
 
 /** One request in a transaction of its own, done when the transaction is: what is full is said only then. */

@@ -37,7 +37,7 @@ export function KeepDraftForm({ shop, jobId, document }: DraftsOf) {
             {...form.register("name")}
           />
         </div>
-        <Button type="submit" busy={busy} className="sm:mt-7">
+        <Button type="submit" busy={busy} className="sm:mt-6">
           Keep as a draft
         </Button>
       </div>

@@ -6,6 +6,7 @@ import { matrixMultiply, pathTransform, scaleMatrix, translateMatrix } from "#sh
 import type { Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { coordinateOf, mostPieces } from "../limits.ts";
 import { type ArtworkMatch, type Fit, fittedBox } from "../match-artworks.ts";
+import { withFields } from "../same.ts";
 import { withoutOpenings } from "../without-openings.ts";
 import type { ArtworkToBringIn } from "./bring-in-artwork.ts";
 
@@ -110,15 +111,14 @@ function laid(
   const x = coordinateOf(place.x);
   const y = coordinateOf(place.y);
   if (x === null || y === null) return null;
-  return {
-    ...piece,
+  return withFields(piece, {
     source: { kind: "artwork", artworkId, index: next.index, colour: next.colour },
     path: aboutItsMiddle(next, fit.scale * anchor.scale).map(({ start, segments }) => ({
       start,
       segments: [...segments],
     })),
     placement: { ...piece.placement, x, y },
-  };
+  });
 }
 
 function aboutItsMiddle({ path, box }: ArtworkPiece, scale: number): Path {
