@@ -4,7 +4,8 @@ import { expect } from "vitest";
 import { documentSchema, type MockupDocument } from "#shared/mockup/document.ts";
 import { commit, goToStep, type History, redo, startHistory, undo } from "@/features/mockup/model/history.ts";
 import { emptyMockup } from "../unit/src/features/mockup/sample-mockup.ts";
-import { type Chance, randomStep } from "./random-commands.ts";
+import type { Chance } from "./random-chance.ts";
+import { randomStep } from "./random-commands.ts";
 import { seededRandom } from "./seeded-random.ts";
 
 const folder = "src/features/mockup/model/commands";
