@@ -5,7 +5,7 @@ import { useDesk } from "../editor/desk-context.ts";
 import { useArrowStep } from "../editor/use-arrow-step.ts";
 import { shiftTimes } from "../model/arrow-steps.ts";
 import { findHole } from "../model/chosen-box.ts";
-import { whyIdle } from "../model/chosen-words.ts";
+import { whyHoleStays, whyIdle } from "../model/chosen-words.ts";
 import { removeHole, setHole } from "../model/commands/holes.ts";
 import { movePieces, removePieces } from "../model/commands/pieces.ts";
 import type { Drag } from "../model/drag.ts";
@@ -35,14 +35,15 @@ export function useCanvasKeys({ view, fit, room, onView, drag, onDrag }: Looking
   const { document, selection, unit, edit, choose, say, holesByHand, putHolesByHand } = useDesk();
   const [step] = useArrowStep(unit);
   const { holeId, pieceIds } = selection;
-  const whyNot = holeId === null ? whyIdle(document, selection) : null;
+  const whyNot = holeId === null ? whyIdle(document, selection) : whyHoleStays(document, holeId);
 
   function nudge({ x, y }: Point, by: number) {
     const hole = holeId === null ? null : findHole(document, holeId);
-    if (hole !== null) {
+    if (hole !== null && whyNot === null) {
       const to = { holeId: hole.id, x: hole.x + x * by, y: hole.y + y * by };
       edit({ label: "Move a hole", together: `nudge ${hole.id}`, change: (before) => setHole(before, to) });
-    } else if (pieceIds.length === 0) onView(viewMoved(view, { x: -x * lookStepPx, y: -y * lookStepPx }));
+    } else if (hole === null && pieceIds.length === 0)
+      onView(viewMoved(view, { x: -x * lookStepPx, y: -y * lookStepPx }));
     else if (whyNot !== null) say(whyNot);
     else {
       const move = { pieceIds, dx: x * by, dy: y * by };
@@ -55,8 +56,8 @@ export function useCanvasKeys({ view, fit, room, onView, drag, onDrag }: Looking
   }
 
   function remove() {
-    if (holeId !== null) edit({ label: "Remove a hole", change: (before) => removeHole(before, { holeId }) });
-    else if (whyNot !== null) say(whyNot);
+    if (whyNot !== null) say(whyNot);
+    else if (holeId !== null) edit({ label: "Remove a hole", change: (before) => removeHole(before, { holeId }) });
     else edit({ label: "Remove pieces", change: (before) => removePieces(before, { pieceIds }) });
   }
 

@@ -9,6 +9,7 @@ import { fitSign, marginsOf, paperScaleAt, usualMargins } from "../canvas/view-o
 import { type Drag, documentOfDrag } from "../model/drag.ts";
 import { isSame } from "../model/same.ts";
 import { useEngine } from "./use-engine.ts";
+import { usePaced } from "./use-paced.ts";
 
 type Wanted = {
   readonly document: MockupDocument;
@@ -22,6 +23,15 @@ type Wanted = {
 /** The size that a window is taken to have before it was measured, px. */
 const usualRoom = { width: 1100, height: 520 };
 
+/** Handing more than this to the worker for each move of a hand would keep the hand waiting: the figures follow it a few times a second. */
+const manyNodes = 4000;
+const paceMs = 250;
+
+const nodesOf = ({ layers }: MockupDocument): number =>
+  layers
+    .flatMap(({ pieces }) => pieces.flatMap(({ path }) => path))
+    .reduce((sum, ring) => sum + ring.segments.length, 0);
+
 /** Figures, elevation and dry fit of the desk, and the view that shows the whole board with its dimensions. */
 export function useDeskPicture({ document, drag, context, limits, room }: Wanted) {
   const [margins, setMargins] = useState(usualMargins);
@@ -29,8 +39,10 @@ export function useDeskPicture({ document, drag, context, limits, room }: Wanted
   const sign = useMemo(() => signBox({ board, frame }), [board, frame]);
   const fit = useMemo(() => fitSign(sign, margins, room ?? usualRoom), [sign, margins, room]);
   const paperScale = paperScaleAt(fit.scale);
-  const wanted = useMemo(() => documentOfDrag(document, drag), [document, drag]);
-  const what = drag === null ? "all" : "figures";
+  const isLarge = useMemo(() => nodesOf(document) > manyNodes, [document]);
+  const followed = usePaced(drag, { isPaced: drag !== null && isLarge, everyMs: paceMs });
+  const wanted = useMemo(() => documentOfDrag(document, followed), [document, followed]);
+  const what = followed === null ? "all" : "figures";
   const input = useMemo(
     () => ({ document: wanted, context, limits, paperScale, dimensions: true, what }) as const,
     [wanted, context, limits, paperScale, what],

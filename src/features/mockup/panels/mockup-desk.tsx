@@ -14,6 +14,7 @@ import { CanvasPanel } from "../canvas/canvas-panel.tsx";
 import { viewAt } from "../canvas/view-of-board.ts";
 import { type Desk, DeskContext } from "../editor/desk-context.ts";
 import { useDeskAids } from "../editor/use-desk-aids.ts";
+import { useKeptWhile } from "../editor/use-kept-while.ts";
 import { useSafeEditor } from "../editor/use-safe-editor.ts";
 import { useSettingAside } from "../editor/use-setting-aside.ts";
 import { useStandings } from "../editor/use-standings.ts";
@@ -37,6 +38,7 @@ import { LeaveDialog } from "./leave-dialog.tsx";
 import { PiecesPanel } from "./pieces-panel.tsx";
 import { PlaceStrip } from "./place-strip.tsx";
 import { ReadBackPanel } from "./read-back-panel.tsx";
+import { Resting } from "./resting.tsx";
 import { SchedulePanel } from "./schedule-panel.tsx";
 import { SectionPanel } from "./section-panel.tsx";
 import { StaleDialog } from "./stale-dialog.tsx";
@@ -91,6 +93,9 @@ export function MockupDesk(props: MockupDeskProps) {
   const { aids, changeAids } = useDeskAids(personId, unit);
   const { said, say } = useVoice(editor.history, () => placeWords(document, editor.selection, unit));
 
+  // What is raised or let in changes heights, which the schedule follows; what is moved on the board does not.
+  const isStill = drag?.kind === "pieces" || drag?.kind === "hole";
+  const restingFigures = useKeptWhile(figures, isStill);
   const holesByHand = takesHoles(document, editor.selection.layerKey, holesOf) ? holesOf : null;
   const desk = useMemo(
     (): Desk => ({
@@ -102,8 +107,8 @@ export function MockupDesk(props: MockupDeskProps) {
       briefWords: job.brief.words,
       heights,
       letterHeights,
-      figures: figures?.figures ?? null,
-      figuresOf: figures?.of ?? document,
+      figures: restingFigures?.figures ?? null,
+      figuresOf: restingFigures?.of ?? document,
       holesByHand,
       putHolesByHand: (key) => {
         putHolesByHand(key);
@@ -128,8 +133,9 @@ export function MockupDesk(props: MockupDeskProps) {
       stock,
       whereItHangs,
       limits,
+      job.brief.words,
       heights,
-      figures,
+      restingFigures,
       holesByHand,
       job.client,
       personId,
@@ -139,6 +145,11 @@ export function MockupDesk(props: MockupDeskProps) {
       say,
       dispatch,
     ],
+  );
+
+  const following = useMemo(
+    (): Desk => ({ ...desk, figures: figures?.figures ?? null, figuresOf: figures?.of ?? document }),
+    [desk, figures, document],
   );
 
   function closeDialog() {
@@ -172,13 +183,15 @@ export function MockupDesk(props: MockupDeskProps) {
           onIssued={onIssued}
         />,
       )}
-      <DeskBar
-        client={job.client.name}
-        title={job.title}
-        jobPath={jobPath}
-        cutPlanPath={cutPlanPath}
-        onOpen={setDialog}
-      />
+      <Resting isStill={isStill}>
+        <DeskBar
+          client={job.client.name}
+          title={job.title}
+          jobPath={jobPath}
+          cutPlanPath={cutPlanPath}
+          onOpen={setDialog}
+        />
+      </Resting>
       {safe.keptDrafts.map((draft) => (
         <KeptDraftNotice
           key={draft.deskId}
@@ -208,42 +221,48 @@ export function MockupDesk(props: MockupDeskProps) {
           spot={finding?.where ?? null}
           frame={frame}
         />
-        <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
+        <DeskContext value={following}>
+          <SectionPanel view={view ?? fit} drag={drag} onDrag={setDrag} />
+        </DeskContext>
       </DropGround>
-      <PlaceStrip said={said} />
-      <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_clamp(17rem,25.5vw,24rem)]">
-        <div className="min-w-0">
-          <SchedulePanel
-            onBoard={() => setDialog("board")}
-            onFinish={() => setDialog("finish")}
-            onBringIn={() => setDialog("artwork")}
-          />
-          {props.pricesPath && (
-            <CostPanel
-              shop={shop}
-              unit={unit}
-              measures={drawn?.measures ?? null}
-              signs={document.quantity}
-              stock={props.stock}
-              pricesPath={props.pricesPath}
+      <Resting isStill={isStill}>
+        <PlaceStrip said={said} />
+        <div className="grid min-[1200px]:grid-cols-[minmax(0,1fr)_clamp(17rem,25.5vw,24rem)]">
+          <div className="min-w-0">
+            <SchedulePanel
+              onBoard={() => setDialog("board")}
+              onFinish={() => setDialog("finish")}
+              onBringIn={() => setDialog("artwork")}
             />
-          )}
-          <ReadBackPanel />
-          <LayerDetails />
-          <PiecesPanel />
+            {props.pricesPath && (
+              <CostPanel
+                shop={shop}
+                unit={unit}
+                measures={drawn?.measures ?? null}
+                signs={document.quantity}
+                stock={props.stock}
+                pricesPath={props.pricesPath}
+              />
+            )}
+            <ReadBackPanel />
+            <LayerDetails />
+            <PiecesPanel />
+          </div>
+          <FindingsPanel
+            dryFit={drawn?.dryFit ?? null}
+            mends={drawn?.mends ?? []}
+            standings={standings}
+            isCurrent={isCurrent}
+            shown={finding}
+            onShow={show}
+            onMend={(mend) =>
+              dispatch({ kind: "edit", label: mend.label, change: (before) => applyMend(before, mend) })
+            }
+            settingAside={settingAside}
+            className="border-rule max-[1200px]:border-t min-[1200px]:border-l"
+          />
         </div>
-        <FindingsPanel
-          dryFit={drawn?.dryFit ?? null}
-          mends={drawn?.mends ?? []}
-          standings={standings}
-          isCurrent={isCurrent}
-          shown={finding}
-          onShow={show}
-          onMend={(mend) => dispatch({ kind: "edit", label: mend.label, change: (before) => applyMend(before, mend) })}
-          settingAside={settingAside}
-          className="border-rule max-[1200px]:border-t min-[1200px]:border-l"
-        />
-      </div>
+      </Resting>
       <DeskDialogs open={dialog} onClose={closeDialog} shop={shop} jobId={job.id} files={files} />
       <StaleDialog
         newer={saving.autosave.state === "stale" ? saving.autosave.newer : null}
