@@ -61,6 +61,7 @@ const source: MockupDocument = buildSign(
       hidden: true,
     }),
     buildLayer("D", [wordsHalo, letter, disguised], { name: "Midnight words" }),
+    buildLayer("E", [], { hold: standoffHold([hole("hole-alone", 120, 200, { fixed: true })]) }),
   ],
   {
     board: { outline: { kind: "path", path: outline }, width: 600, height: 400, measures: "overall" },
@@ -109,7 +110,7 @@ const theirs = [
   ...["heron", "halo", "joined", "words-halo", "letter", "disguised", "round", "edge", "set"].map(
     (name) => `${name}-id`,
   ),
-  ...["hole-in-disc", "hole-in-heron", "hole-in-edge", "hole-in-halo"],
+  ...["hole-in-disc", "hole-in-heron", "hole-in-edge", "hole-in-halo", "hole-alone"],
   ...[logo, mark, "7c0dbe0a-9a9c-4c1c-8f53-7f4f0f6a1d22"],
   ...["Heron", "HERON", "WEIR", "Halo", "Reeds", "words", "Base", "A1B2C3", '"carriesKg":37'],
   // Half of each width, as the outline has it.
@@ -145,6 +146,7 @@ describe("another like this for another client", () => {
       ["B", "Layer B", 5, "standoff"],
       ["C", "Layer C", 3, "standoff"],
       ["D", "Layer D", 3, "bond"],
+      ["E", "Layer E", 3, "standoff"],
     ]);
     const [ground, halos, lettered] = made.layers;
     expect(ground?.pieces.map(({ name, reads, path, placement }) => ({ name, reads, path, placement }))).toEqual([
@@ -165,6 +167,8 @@ describe("another like this for another client", () => {
     });
     expect(halos).toMatchObject({ pieces: [], hidden: false, hold: { hardware: { kind: "throughScrew" }, holes: [] } });
     expect(lettered).toMatchObject({ pieces: [], locked: false });
+    // Nothing says what a hole was for in which no piece is.
+    expect(made.layers[3]?.hold).toMatchObject({ holes: [] });
   });
 
   it("keeps a layer's name where it is only its sheet's, and all slats, frame and finish of the kept sample", () => {
@@ -187,7 +191,7 @@ describe("another like this for the same client", () => {
     const after = JSON.stringify(made);
     for (const text of [logo, mark, "heron-id", "20.8655", "0.649", "HERON", "Heron"])
       expect(after).not.toContain(text);
-    expect(made.layers.map(({ name }) => name)).toEqual(["Layer B", "Halo", "Midnight words"]);
+    expect(made.layers.map(({ name }) => name)).toEqual(["Layer B", "Halo", "Midnight words", "Layer E"]);
     expect(made.layers[0]?.pieces.map(({ name }) => name)).toEqual(["Plate", "Base"]);
   });
 
