@@ -11,6 +11,8 @@ import { useDesk } from "./desk-context.ts";
 import { browserStorage } from "./kept-aids.ts";
 import { newId } from "./new-id.ts";
 
+const tooMuch = "This would be more than a mockup takes.";
+
 /** Copying, taking out, doubling and pasting what is chosen, here and in other jobs of the client. */
 export function useCopying() {
   const { document, selection, site, client, copyPlace, edit, say } = useDesk();
@@ -40,10 +42,14 @@ export function useCopying() {
     const movable = movableOf(document, pieceIds);
     if (movable.length === 0) return;
     const id = newId();
+    const copies = { pieceIds: movable, motions: [shiftMotion(0, 0)], id, withHoles: true, site };
+    if (addCopies(document, copies) === document) {
+      say(tooMuch);
+      return;
+    }
     edit({
       label: `Double ${counted(movable.length, "piece")} in place`,
-      change: (before) =>
-        addCopies(before, { pieceIds: movable, motions: [shiftMotion(0, 0)], id, withHoles: true, site }),
+      change: (before) => addCopies(before, copies),
       choose: (after) => choosePieces(after, idsOfCopy(id, 0, movable.length)),
     });
   }
@@ -57,6 +63,10 @@ export function useCopying() {
     const { copied } = read;
     const id = newId();
     const count = counted(piecesOfCopied(copied), "piece");
+    if (paste(document, { copied, into, id, site }) === document) {
+      say(tooMuch);
+      return;
+    }
     edit({
       label: into === null ? `Paste ${count}` : `Paste ${count} into ${into}`,
       change: (before) => paste(before, { copied, into, id, site }),

@@ -25,6 +25,13 @@ export function chosenWords(document: MockupDocument, selection: Selection): str
     : `${counted(pieces.length, "piece")} of ${layer.key}`;
 }
 
+/** Why the chosen hole stays where it is; null when it can be moved. */
+export function whyHoleStays(document: MockupDocument, holeId: string): string | null {
+  const { layerKey } = chooseHole(document, holeId);
+  const layer = document.layers.find(({ key }) => key === layerKey);
+  return layer?.locked ? `${layer.key} is locked. Unlock it first.` : null;
+}
+
 /** Why nothing can be set out, in words; null when there are pieces that can be moved. */
 export function whyIdle({ layers }: MockupDocument, { pieceIds }: Selection): string | null {
   const chosen = new Set(pieceIds);

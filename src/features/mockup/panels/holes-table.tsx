@@ -100,6 +100,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       disabled={locked}
                       mm={hole.x}
                       unit={unit}
+                      exact
                       bounds={coordinateBounds}
                       onCommit={(mm) => set({ x: mm })}
                     />
@@ -110,6 +111,7 @@ export function HolesTable({ layer, hold }: HolesTableProps) {
                       disabled={locked}
                       mm={hole.y}
                       unit={unit}
+                      exact
                       bounds={coordinateBounds}
                       onCommit={(mm) => set({ y: mm })}
                     />

@@ -3,7 +3,7 @@ import { useDesk } from "../editor/desk-context.ts";
 import type { Said } from "../editor/use-voice.ts";
 import { anchorPoint, anchors, middleAnchor } from "../model/anchors.ts";
 import { findHole } from "../model/chosen-box.ts";
-import { chosenWords, whyIdle } from "../model/chosen-words.ts";
+import { chosenWords, whyHoleStays, whyIdle } from "../model/chosen-words.ts";
 import { setHole } from "../model/commands/holes.ts";
 import { boxOfPieces, mirrorPieces, placePiece, turnPieces } from "../model/commands/pieces.ts";
 import { type PlaceOfChosen, placeChosen } from "../model/commands/place-chosen.ts";
@@ -140,7 +140,8 @@ function HoleFigures() {
   if (!hole) return null;
   const place = (to: { x?: number; y?: number }) =>
     edit({ label: "Place a hole", change: (before) => setHole(before, { holeId: hole.id, ...to }) });
-  const length = { unit, exact: true, bounds: coordinateBounds };
+  const why = whyHoleStays(document, hole.id);
+  const length = { unit, exact: true, bounds: coordinateBounds, disabled: why !== null };
   return (
     <>
       <Labelled words={`x, ${unit}`}>
@@ -149,6 +150,7 @@ function HoleFigures() {
       <Labelled words="y">
         <CellLength {...length} aria-label="y of the chosen hole" mm={hole.y} onCommit={(y) => place({ y })} />
       </Labelled>
+      {why !== null && <span className="text-fine text-graphite">{why}</span>}
     </>
   );
 }

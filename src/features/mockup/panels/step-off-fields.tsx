@@ -24,11 +24,11 @@ const shapes: readonly { readonly shape: StepOffShape; readonly words: string }[
 ];
 
 const spacingWords: Record<StepOffSpacing, string> = {
-  gap: "a gap from edge to edge",
-  pitch: "a pitch from middle to middle",
-  over: "equal parts of a length",
-  "equal gaps": "equal gaps between first and last",
-  "equal pitch": "equal pitch between first and last",
+  gap: "gap, edge to edge",
+  pitch: "pitch, of middles",
+  over: "parts of a length",
+  "equal gaps": "equal gaps",
+  "equal pitch": "equal pitch",
 };
 const lengthLabels = { gap: "Gap", pitch: "Pitch", over: "Length", "equal gaps": "Gap", "equal pitch": "Pitch" };
 
@@ -100,6 +100,7 @@ export function StepOffFields({ draft, onChange }: StepOffFieldsProps) {
       ) : (
         <Select
           label="How far apart"
+          {...(!needsLength(draft) && { hint: "The first and the last stay" })}
           value={draft.spacing}
           onChange={(event) =>
             change({ spacing: spacingsFor(draft.what).find((one) => one === event.target.value) ?? draft.spacing })

@@ -1,7 +1,9 @@
 import { useMemo } from "react";
+import { boxGrow, boxUnion } from "#shared/geometry/box.ts";
 import { pathToText } from "#shared/geometry/path-text.ts";
 import { placePath } from "#shared/geometry/placement.ts";
 import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
+import { boxOfPieces } from "../model/commands/pieces.ts";
 
 type StepOffPictureProps = {
   readonly before: MockupDocument;
@@ -9,13 +11,17 @@ type StepOffPictureProps = {
   readonly pieceIds: readonly string[];
 };
 
-/** Room round the board, as a share of its larger side. */
+/** Room round all that is there, as a share of the larger side of the board. */
 const marginShare = 0.06;
 
 /** Outlines of the sign as it would be: what comes or moves is filled, the rest thin. */
 export function StepOffPicture({ before, after, pieceIds }: StepOffPictureProps) {
   const { width, height } = after.board;
-  const margin = Math.max(width, height) * marginShare;
+  const ground = useMemo(() => {
+    const ids = piecesOf(after).map(({ id }) => id);
+    const box = boxUnion([{ x: 0, y: 0, width, height }, boxOfPieces(after, ids)]);
+    return box && boxGrow(box, Math.max(width, height) * marginShare);
+  }, [after, width, height]);
   const drawn = useMemo(() => {
     const was = new Map(piecesOf(before).map((piece) => [piece.id, piece.placement]));
     const chosen = new Set(pieceIds);
@@ -29,7 +35,7 @@ export function StepOffPicture({ before, after, pieceIds }: StepOffPictureProps)
     <svg
       role="img"
       aria-label="The sign as it would be"
-      viewBox={`${-margin} ${-margin} ${width + 2 * margin} ${height + 2 * margin}`}
+      viewBox={ground ? `${ground.x} ${ground.y} ${ground.width} ${ground.height}` : undefined}
       className="max-h-80 w-full border border-rule bg-linen"
     >
       <rect

@@ -1,13 +1,17 @@
 // @vitest-environment jsdom
 import { beforeEach, describe, expect, it } from "vitest";
+import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { Drag } from "@/features/mockup/model/drag.ts";
-import { chooseLayer, choosePiece } from "@/features/mockup/model/selection.ts";
+import { chooseHole, chooseLayer, choosePiece } from "@/features/mockup/model/selection.ts";
 import { deskKeys } from "@/features/mockup/panels/keys-list.ts";
+import { barrel, emptyMockup } from "./sample-mockup.ts";
 import {
   control,
+  layerOf,
   page,
   pick,
   placementOf,
+  plate,
   present,
   pressKey,
   said,
@@ -28,6 +32,7 @@ const shown: Readonly<Record<string, () => Promise<void>>> = {
     await pick("An arrow key moves by", "0.5");
     for (const key of ["ArrowRight", "ArrowRight", "ArrowDown"]) await pressKey(key);
     expect(placementOf("a")).toMatchObject({ x: 51, y: 60.5 });
+    expect(said()).toBe("Move pieces, x 51, y 60.5");
     for (const key of ["ArrowLeft", "ArrowUp"]) await pressKey(key);
     expect(placementOf("a")).toMatchObject({ x: 50.5, y: 60 });
     await pressKey("Escape");
@@ -185,6 +190,42 @@ describe("keys that have nothing to do", () => {
     expect(said()).toBe("D is locked. Unlock it first.");
     await pressKey("Delete");
     expect(present()).toBe(document0);
+  });
+
+  it("move and remove a chosen hole, unless its layer is locked", async () => {
+    const hold = {
+      kind: "standoff" as const,
+      hardware: barrel(19),
+      offset: 19,
+      holes: [
+        { id: "h1", x: 50, y: 60, diameter: 6, fixed: true },
+        { id: "h2", x: 55, y: 60, diameter: 6, fixed: false },
+      ],
+    };
+    const ofHoles = (document: MockupDocument) => {
+      const now = document.layers[0]?.hold;
+      return now?.kind === "standoff" ? now.holes.map(({ id, x, y }) => [id, x, y]) : [];
+    };
+    const standing = emptyMockup({ layers: [layerOf("B", [plate("a", 50, 60)], { hold })] });
+    const hole = chooseHole(standing, "h2");
+    await showSetOut(standing, { chosen: hole });
+    await pressKey("Shift ArrowDown");
+    expect(said()).toBe("Move a hole, x 55, y 70");
+    await typeThen("x of the chosen hole", "61.25", "Enter");
+    expect(ofHoles(present())).toEqual([
+      ["h1", 50, 60],
+      ["h2", 61.25, 70],
+    ]);
+    await pressKey("Delete");
+    expect(ofHoles(present())).toEqual([["h1", 50, 60]]);
+
+    const shut = emptyMockup({ layers: [layerOf("B", [plate("a", 50, 60)], { hold, locked: true })] });
+    await showSetOut(shut, { chosen: hole });
+    for (const key of ["ArrowRight", "Delete"]) {
+      await pressKey(key);
+      expect(said()).toBe("B is locked. Unlock it first.");
+    }
+    expect(present()).toBe(shut);
   });
 
   it("leave copy, cut, paste and double to a field that has the focus", async () => {
