@@ -99,7 +99,10 @@ function freeId(parts: readonly ArtworkPart[], colour: string): string {
 /** Colours up to this ΔE00 apart are taken for one that a file holds twice: "close", side by side. */
 const alikeDeltaE = 2;
 
-/** Joins each part of a layer of its own to the first before it whose colour is close. The same parts when no two are. */
+/**
+ * Joins each part with a layer of its own to the first before it whose colour is another, but close. The same parts when no two
+ * are: parts of one colour were split by hand.
+ */
 export function joinAlike(parts: readonly ArtworkPart[]): readonly ArtworkPart[] {
   let joined = parts;
   for (const part of parts) {
@@ -109,11 +112,13 @@ export function joinAlike(parts: readonly ArtworkPart[]): readonly ArtworkPart[]
         0,
         joined.findIndex(({ id }) => id === part.id),
       )
-      .find(({ to, colour }) => to.kind === "new" && deltaE00(labOf(colour), labOf(part.colour)) <= alikeDeltaE);
+      .find(({ to, colour }) => to.kind === "new" && colour !== part.colour && isAlike(colour, part.colour));
     if (host) joined = sendPart(joined, part.id, { kind: "with", part: host.id });
   }
   return joined;
 }
+
+const isAlike = (a: string, b: string) => deltaE00(labOf(a), labOf(b)) <= alikeDeltaE;
 
 /** Pieces by where they go: the layers that are to be made, in order, and what is added to layers that are there. */
 export function destinationsOf(parts: readonly ArtworkPart[]): {

@@ -31,12 +31,10 @@ export function ArtworkSize({ shop, jobId, artwork, pieces, picked }: ArtworkSiz
   const known = drawnBox(pieces.filter(({ index }) => picked.has(index))) ?? whole;
   if (!whole || !known) return null;
   const factor = isWithinBounds(wanted, lengthBounds) && known[side] > 0 ? wanted / known[side] : null;
-  const of = picked.size > 0 ? "of what is picked" : "of all that is drawn";
+  const of = picked.size > 0 ? "of the picked" : "of all";
   return (
-    <fieldset className="space-y-2 border-t border-rule pt-3">
-      <legend className="float-left w-full text-sm font-semibold">
-        True size: {formatSize(whole.width, whole.height, unit)}
-      </legend>
+    <section aria-label="True size" className="space-y-2 border-t border-rule pt-3">
+      <p className="text-sm font-semibold">True size: {formatSize(whole.width, whole.height, unit)}</p>
       <div className="grid grid-cols-2 gap-2">
         <Select
           label="Known length"
@@ -66,6 +64,6 @@ export function ArtworkSize({ shop, jobId, artwork, pieces, picked }: ArtworkSiz
           </span>
         )}
       </div>
-    </fieldset>
+    </section>
   );
 }

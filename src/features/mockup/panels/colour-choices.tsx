@@ -1,6 +1,7 @@
 import { useMemo, useState } from "react";
 import type { Artwork } from "#shared/contracts/artworks.ts";
 import { Button } from "@/components/ui/button.tsx";
+import { cx } from "@/lib/cx.ts";
 import { counted } from "@/lib/format.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { newId } from "../editor/new-id.ts";
@@ -31,6 +32,14 @@ type ColourChoicesProps = {
   readonly drawing: ArtworkToBringIn;
   readonly onDone: () => void;
 };
+
+const columns = [
+  { title: "Goes to", width: "w-[20%]" },
+  { title: "Stock", width: "w-[16%]" },
+  { title: "Difference", width: "" },
+  { title: "Thickness", width: "w-[7%]" },
+  { title: "Held by", width: "w-[20%]" },
+] as const;
 
 /** The colours of one artwork: what each is cut from, which go together, elsewhere or nowhere, and the picture that makes. */
 export function ColourChoices({ shop, jobId, artwork, drawing, onDone }: ColourChoicesProps) {
@@ -131,12 +140,12 @@ export function ColourChoices({ shop, jobId, artwork, drawing, onDone }: ColourC
                 <th scope="col" className="py-1 pr-3 font-semibold">
                   Artwork, sheet
                 </th>
-                {["Goes to", "Stock", "Difference", "Thickness", "Held by"].map((title) => (
-                  <th key={title} scope="col" className="px-1 font-semibold">
+                {columns.map(({ title, width }) => (
+                  <th key={title} scope="col" className={cx("px-1 font-semibold", width)}>
                     {title}
                   </th>
                 ))}
-                <th scope="col" className="font-semibold" title="One plate to bond the other colours on">
+                <th scope="col" className="text-center font-semibold" title="One plate to bond the other colours on">
                   Openings closed
                 </th>
               </tr>

@@ -33,14 +33,11 @@ export function PartRow({ part, parts, hold, onSend, onChange }: PartRowProps) {
 
   return (
     <tr className="border-b border-rule align-middle">
-      <th scope="row" className="py-1.5 pr-3 text-left font-normal">
+      <th scope="row" className="py-1 pr-3 text-left font-normal">
         <span className="flex items-center gap-2">
           <SwatchPair artwork={colour} sheet={sheet?.colour ?? null} />
-          <span className="min-w-0">
-            <span className="block text-sm font-semibold whitespace-nowrap tabular-nums">{id}</span>
-            <span className="block text-fine whitespace-nowrap text-graphite">
-              {counted(part.indices.length, "piece")}
-            </span>
+          <span className="text-sm whitespace-nowrap tabular-nums">
+            <span className="font-semibold">{id}</span>, {counted(part.indices.length, "piece")}
           </span>
         </span>
       </th>
@@ -62,7 +59,9 @@ export function PartRow({ part, parts, hold, onSend, onChange }: PartRowProps) {
               ))}
             </CellSelect>
           </td>
-          <td className="px-1 text-sm text-graphite tabular-nums">{sheet && differenceWords(colour, sheet.colour)}</td>
+          <td className="px-1 text-sm whitespace-nowrap text-graphite tabular-nums">
+            {sheet && differenceWords(colour, sheet.colour)}
+          </td>
           <td className="px-1">
             <CellSelect
               aria-label={`Thickness, ${unit} of ${id}`}

@@ -79,6 +79,8 @@ describe("the parts of an artwork", () => {
     ]);
     const dropped = send(parts, "#27314F", { kind: "out" });
     expect(joinAlike(dropped)).toBe(dropped);
+    const split = splitPart(parts.slice(0, 2), "#27314F", [1]);
+    expect(joinAlike(split)).toBe(split);
   });
 
   it("hold every piece exactly once, whatever is done to them", () => {
