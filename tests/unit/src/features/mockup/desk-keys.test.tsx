@@ -44,6 +44,8 @@ const shown: Readonly<Record<string, () => Promise<void>>> = {
     await pick("An arrow key moves by", "0.1");
     await pressKey("Shift ArrowLeft");
     expect(placementOf("a")?.x).toBe(49);
+    // Remembered by the browser.
+    expect(localStorage.getItem("standproud:arrow-step:mm")).toBe("0.1");
   },
   "On the drawing: Delete, Backspace": async () => {
     await showSetOut(document0, { chosen });
@@ -83,6 +85,12 @@ const shown: Readonly<Record<string, () => Promise<void>>> = {
     await pressKey("+");
     await pressKey("0");
     expect(page().view).toBeNull();
+  },
+  "On the drawing: 9": async () => {
+    await showSetOut(document0, { chosen });
+    await pressKey("9");
+    // 20 mm in 68 % of a window 500 px high; the piece's middle at 50, 60 comes into the window's at 500, 250.
+    expect(page().view).toEqual({ scale: 17, x: -350, y: -770 });
   },
   "Anywhere but in a field: Ctrl C": async () => {
     await showSetOut(document0, { chosen });
@@ -209,6 +217,7 @@ describe("keys that have nothing to do", () => {
     const standing = emptyMockup({ layers: [layerOf("B", [plate("a", 50, 60)], { hold })] });
     const hole = chooseHole(standing, "h2");
     await showSetOut(standing, { chosen: hole });
+    await pick("An arrow key moves by", "1");
     await pressKey("Shift ArrowDown");
     expect(said()).toBe("Move a hole, x 55, y 70");
     await typeThen("x of the chosen hole", "61.25", "Enter");
