@@ -2,6 +2,7 @@ import { artworkOf } from "../mockup/artwork-used.ts";
 import type { Hold, Hole, Layer, MockupDocument } from "../mockup/document.ts";
 import { splitLayer } from "../mockup/split-layer.ts";
 import { withoutUnusedLettering } from "../mockup/without-unused-lettering.ts";
+import { nameOfPart } from "../pieces/name-of-part.ts";
 import type { Mend, MendStep } from "./mend.ts";
 
 /**
@@ -143,7 +144,7 @@ function splitPiece(
     parts.map((part, index) => ({
       ...piece,
       ...part,
-      name: piece.name === "" ? "" : `${piece.name.slice(0, 100)}, ${index + 1} of ${parts.length}`,
+      name: nameOfPart(piece.name, index + 1, parts.length),
       source: { kind: "worked", how: "split", artworkIds: [...artworkOf(piece.source)] },
       reads: index === 0 ? piece.reads : "",
     })),

@@ -25,8 +25,12 @@ export type MendStep =
   | { readonly kind: "move pieces"; readonly pieceIds: readonly string[]; readonly dx: number; readonly dy: number }
   | { readonly kind: "drop pieces"; readonly pieceIds: readonly string[] }
   | { readonly kind: "reads"; readonly pieceId: string; readonly reads: string }
-  /** Puts parts in the place of a piece, cut out of it in its own plane. Their ids are new. */
-  | { readonly kind: "split piece"; readonly pieceId: string; readonly parts: readonly Pick<Piece, "id" | "path">[] }
+  /** Puts parts in the place of a piece, cut out of it where it lies. Their ids are new. */
+  | {
+      readonly kind: "split piece";
+      readonly pieceId: string;
+      readonly parts: readonly Pick<Piece, "id" | "path" | "placement">[];
+    }
   | { readonly kind: "slat start"; readonly start: Slats["start"] }
   | { readonly kind: "frame depth"; readonly depth: number }
   /** Takes the pieces out of their layer into a new one of the same stock next to it, bonded when an adhesive is given. */

@@ -1,9 +1,11 @@
 import { regionCentroid } from "../geometry/area.ts";
+import { connectedPieces } from "../geometry/connected.ts";
 import { type CutLine, cutPath } from "../geometry/cut-path.ts";
+import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Path, Point, Region } from "../geometry/path.ts";
-import { unplacePoint } from "../geometry/placement.ts";
-import { smallestBox } from "../geometry/smallest-box.ts";
+import { placePath, unplacePoint } from "../geometry/placement.ts";
+import { convexHull, smallestBox } from "../geometry/smallest-box.ts";
 import { fitOnBed } from "../materials/bed-fit.ts";
 import { partsOfOutline } from "./parts-of-outline.ts";
 import { coveredBy, type Outline, type Shaped, shapedAboutMiddle } from "./shaped.ts";
@@ -31,30 +33,35 @@ export type SplitPart = {
 };
 
 export type Split = {
+  /** Whether it goes on the bed as it is, and need not be split. */
+  readonly fitsWhole: boolean;
   readonly parts: readonly SplitPart[];
   /** Where the seams fall, from one side of the piece's box to the other, on the board. */
   readonly seams: readonly (readonly [Point, Point])[];
 };
 
-/** More parts than this beside each other are no split but a mistake. */
+/** More parts than this beside each other are no split but a mistake, and more cells than that, either. */
 export const mostParts = 12;
+const mostCells = 24;
+/** Splits tried before the first of them is given as it is: a cell that goes on the bed nearly always does with what is in it. */
+const mostTries = 4;
 /** A cut that would run through a node is moved aside by one of these, mm. */
 const asideMm = [0, 0.013, -0.017, 0.031, -0.037, 0.059, -0.061, 0.11, -0.13];
 
 /**
  * Splits an outline along straight seams so that each part goes on the bed, turned as need be: side by side, and where that
  * does not do, in rows, too. Its own curves are kept. A piece that hung together comes apart into all that the seams leave
- * apart. Where no split of up to 12 by 12 goes on the bed, the one that comes nearest by size is given, and its parts say so.
- * Null for an outline that covers nothing, and where no seam meets it.
+ * apart. With a count, or seams moved, parts may be too large for the bed, and say so. Null for an outline that covers nothing, where
+ * no seam meets it, and without a count where no split into up to 24 goes on the bed.
  */
 export function splitToBed(outline: Outline, bed: Bed, choice: SplitChoice, kernel: Kernel): Split | null {
-  const region = coveredBy(outline, kernel);
-  const frame = frameOf(region, choice.seams);
+  const frame = frameOf(outline, choice.seams);
   if (!frame) return null;
-  const isOne = partsOfOutline(outline, kernel).parts.length === 1;
-  const at = (grid: Grid, shiftMm: number) => splitAt(outline, frame, { grid, shiftMm, isOne, bed }, kernel);
   const grids = gridsFor(frame, bed, choice.count);
-  for (const grid of grids) {
+  if (grids.length === 0 && choice.count === null) return null;
+  const isOne = connectedPieces(coveredBy(outline, kernel)).length === 1;
+  const at = (grid: Grid, shiftMm: number) => splitAt(outline, frame, { grid, shiftMm, isOne, bed }, kernel);
+  for (const grid of grids.slice(0, mostTries)) {
     const even = at(grid, 0);
     if (!even?.parts.every(({ fits }) => fits)) continue;
     return choice.shiftMm === 0 ? even : at(grid, choice.shiftMm);
@@ -72,16 +79,16 @@ type Frame = {
 };
 type Grid = { readonly columns: number; readonly rows: number };
 
-function frameOf(region: Region, seams: SeamWay): Frame | null {
-  const box = smallestBox(region);
+function frameOf({ path, placement }: Outline, seams: SeamWay): Frame | null {
+  const hull = convexHull(flattenPath(placePath(path, placement)).flat());
+  const box = smallestBox([hull]);
   if (!box || box.width === 0) return null;
   const radians = ((seams === "across" ? box.turn : 0) * Math.PI) / 180;
   // Parts are numbered along it: from the left, and those of an upright piece from the top.
   const forth = Math.cos(radians) < -1e-9 ? -1 : 1;
   const along = seams === "level" ? { x: 0, y: 1 } : { x: forth * Math.cos(radians), y: forth * Math.sin(radians) };
-  const points = region.flat();
-  const [from, to] = extent(points.map(({ x, y }) => x * along.x + y * along.y));
-  const [low, high] = extent(points.map(({ x, y }) => y * along.x - x * along.y));
+  const [from, to] = extent(hull.map(({ x, y }) => x * along.x + y * along.y));
+  const [low, high] = extent(hull.map(({ x, y }) => y * along.x - x * along.y));
   return { along, from, length: to - from, low, width: high - low };
 }
 
@@ -96,7 +103,7 @@ function gridsFor({ length, width }: Frame, bed: Bed, count: number | null): Gri
   const goes = (a: number, b: number) => a <= bed.widthMm && b <= bed.heightMm;
   return (count === null ? sizes : [count])
     .flatMap((columns) => sizes.map((rows) => ({ columns, rows })))
-    .filter(({ columns, rows }) => columns * rows > 1)
+    .filter(({ columns, rows }) => columns * rows > 1 && columns * rows <= mostCells)
     .filter(({ columns, rows }) => {
       const [a, b] = [length / columns, width / rows];
       return goes(a, b) || goes(b, a);
@@ -134,7 +141,12 @@ function splitAt(outline: Outline, frame: Frame, { grid, shiftMm, isOne, bed }: 
     .flatMap((part) => measuredPart(part, bed, kernel) ?? [])
     .map((part) => ({ part, ...cellOf(part) }))
     .toSorted((a, b) => a.row - b.row || a.column - b.column);
-  return { parts: ordered.map(({ part }) => part), seams: [...columns, ...rows].map(([a, b]) => [a, b] as const) };
+  const fitsWhole = fitOnBed([convexHull(coveredBy(outline, kernel).flat())], bed)?.overMm === 0;
+  return {
+    fitsWhole,
+    parts: ordered.map(({ part }) => part),
+    seams: [...columns, ...rows].map(([a, b]) => [a, b] as const),
+  };
 }
 
 function cutAlong(path: Path, [a, b, aside]: readonly [Point, Point, Point], { placement }: Outline): Path[] {
@@ -153,6 +165,7 @@ function lineThrough(through: Point, to: Point): CutLine {
 }
 
 function loosened(path: Path, { placement }: Outline, kernel: Kernel): Outline[] {
+  if (connectedPieces(coveredBy({ path, placement }, kernel)).length < 2) return [{ path, placement }];
   const parted = partsOfOutline({ path, placement }, kernel);
   return parted.parts.map((part) => ({ path: part.path, placement: parted.placement }));
 }
@@ -160,7 +173,7 @@ function loosened(path: Path, { placement }: Outline, kernel: Kernel): Outline[]
 function measuredPart(outline: Outline, bed: Bed, kernel: Kernel): SplitPart | null {
   const shaped = shapedAboutMiddle(outline);
   const region = coveredBy(outline, kernel);
-  const fit = fitOnBed(region, bed);
+  const fit = fitOnBed([convexHull(region.flat())], bed);
   if (!shaped || !fit) return null;
   return { shaped, region, widthMm: fit.widthMm, heightMm: fit.heightMm, fits: fit.overMm === 0 };
 }

@@ -1,5 +1,7 @@
 import { useMemo, useState } from "react";
+import { boxOfPath } from "#shared/geometry/box.ts";
 import { placePath } from "#shared/geometry/placement.ts";
+import type { Piece } from "#shared/mockup/document.ts";
 import { mostParts, type SeamWay, type Split } from "#shared/shaping/split-to-bed.ts";
 import { formatSize } from "#shared/units/format-length.ts";
 import type { LengthUnit } from "#shared/units/length.ts";
@@ -45,13 +47,16 @@ function SplitForm({ onDone }: { readonly onDone: () => void }) {
   const { bedWidthMm: widthMm, bedHeightMm: heightMm } = site.limits;
   const pieces = useMemo(
     () =>
-      chosenByLayer(document, selection).flatMap(({ layer, pieces: own }) =>
-        own.map((piece) => ({
-          piece,
-          layerKey: layer.key,
-          title: `${nameOfPiece(piece, layer.pieces.indexOf(piece))} of ${layer.key}`,
-        })),
-      ),
+      chosenByLayer(document, selection)
+        .flatMap(({ layer, pieces: own }) =>
+          own.map((piece) => ({
+            piece,
+            layerKey: layer.key,
+            title: `${nameOfPiece(piece, layer.pieces.indexOf(piece))} of ${layer.key}`,
+            size: sizeOf(piece),
+          })),
+        )
+        .toSorted((a, b) => b.size - a.size),
     [document, selection],
   );
   const [pieceId, setPiece] = useState<string | null>(null);
@@ -155,25 +160,36 @@ function SplitForm({ onDone }: { readonly onDone: () => void }) {
   );
 }
 
+/** From corner to corner of its box, mm: the largest piece is offered first. */
+function sizeOf({ path, placement }: Piece): number {
+  const box = boxOfPath(placePath(path, placement));
+  return box ? Math.hypot(box.width, box.height) : 0;
+}
+
 /** A list longer than this is told by its largest part. */
 const mostListed = 6;
 
 function PartList({ split, unit }: { readonly split: Split | null; readonly unit: LengthUnit }) {
-  if (!split) return <>No seam meets the piece there.</>;
+  if (!split) return <>No seam meets the piece there, or no 24 parts of it go on the bed.</>;
+  const asIs = split.fitsWhole && <p className="text-graphite">It goes on the bed as it is, too.</p>;
   const large = split.parts.filter(({ fits }) => !fits).length;
   if (split.parts.length > mostListed)
     return (
       <>
+        {asIs}
         {split.parts.length} parts. {large === 0 ? "All go on the bed." : `${large} are still larger than the bed.`}
       </>
     );
   return (
-    <ul>
-      {split.parts.map(({ shaped, widthMm, heightMm, fits }, index) => (
-        <li key={`${shaped.placement.x} ${shaped.placement.y}`} className={fits ? "" : "font-semibold text-oxblood"}>
-          Part {index + 1}: {formatSize(widthMm, heightMm, unit)}, {fits ? "goes on the bed" : "larger than the bed"}
-        </li>
-      ))}
-    </ul>
+    <>
+      {asIs}
+      <ul>
+        {split.parts.map(({ shaped, widthMm, heightMm, fits }, index) => (
+          <li key={`${shaped.placement.x} ${shaped.placement.y}`} className={fits ? "" : "font-semibold text-oxblood"}>
+            Part {index + 1}: {formatSize(widthMm, heightMm, unit)}, {fits ? "goes on the bed" : "larger than the bed"}
+          </li>
+        ))}
+      </ul>
+    </>
   );
 }

@@ -126,19 +126,21 @@ it("a layer is split into two neighbours of the same stock and hold, under a fre
 });
 
 it("a piece is replaced by its parts in its place, and what it reads is read once", () => {
-  const [left, right] = [plate("x", 10, 20, [0, 0]).path, plate("y", 12, 20, [0, 0]).path];
+  const [{ path: left }, { path: right }] = [plate("x", 10, 20, [0, 0]), plate("y", 12, 20, [0, 0])];
+  const at = (x: number) => ({ x, y: 200, turn: 0, scale: 1, mirrored: false });
   const named = buildSign([
     buildLayer("B", [plate("a", 5, 5, [0, 0]), plate("p", 22, 20, [300, 200], { name: "Plate", reads: "OPEN" })]),
   ]);
   const parts = [
-    { id: "p-1", path: left },
-    { id: "p-2", path: right },
+    { id: "p-1", path: left, placement: at(294) },
+    { id: "p-2", path: right, placement: at(305) },
   ];
+  const worked = { kind: "worked", how: "split", artworkIds: [] };
   const after = applyMend(named, { label: "Split", steps: [{ kind: "split piece", pieceId: "p", parts }] });
   expect(after.layers[0]?.pieces).toMatchObject([
     { id: "a" },
-    { id: "p-1", name: "Plate, 1 of 2", reads: "OPEN", path: left, placement: { x: 300, y: 200 } },
-    { id: "p-2", name: "Plate, 2 of 2", reads: "", path: right, placement: { x: 300, y: 200 } },
+    { id: "p-1", name: "Plate, part 1 of 2", reads: "OPEN", path: left, placement: { x: 294, y: 200 }, source: worked },
+    { id: "p-2", name: "Plate, part 2 of 2", reads: "", path: right, placement: { x: 305, y: 200 }, source: worked },
   ]);
   expect(documentSchema.safeParse(after).success).toBe(true);
 });

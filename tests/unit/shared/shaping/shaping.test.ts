@@ -331,10 +331,18 @@ describe("splitting to the bed", () => {
     expect(splitToBed(panel, bed, { ...even, count: 4 }, kernel)?.parts).toHaveLength(4);
   });
 
-  it("gives the best it can where nothing goes on the bed, and nothing for nothing", () => {
-    const long = splitToBed(panel, { widthMm: 30, heightMm: 20 }, even, kernel);
-    expect(long?.parts.some(({ fits }) => fits)).toBe(false);
+  it("gives nothing where no 24 parts go on the bed, unless so many are asked for, and nothing for nothing", () => {
+    const small = { widthMm: 30, heightMm: 20 };
+    expect(splitToBed(panel, small, even, kernel)).toBeNull();
+    expect(splitToBed(panel, small, { ...even, count: 5 }, kernel)?.parts.map(({ fits }) => fits)).toEqual(
+      Array(5).fill(false),
+    );
     expect(splitToBed(at([]), bed, even, kernel)).toBeNull();
+  });
+
+  it("says of a piece that it goes on the bed as it is", () => {
+    expect(splitToBed(panel, { widthMm: 300, heightMm: 1000 }, even, kernel)?.fitsWhole).toBe(true);
+    expect(splitToBed(panel, { widthMm: 299, heightMm: 1000 }, even, kernel)?.fitsWhole).toBe(false);
   });
 
   it("keeps all of a turned, mirrored piece with curves and openings, in parts that go on the bed in some turn", () => {

@@ -1,6 +1,7 @@
 import { boxOfPath } from "#shared/geometry/box.ts";
 import { placePath } from "#shared/geometry/placement.ts";
 import type { Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
+import { nameOfPart } from "#shared/pieces/name-of-part.ts";
 import { inReadingOrder } from "#shared/pieces/reading-order.ts";
 import type { CutPiece } from "#shared/shaping/cut-away.ts";
 import type { Joined } from "#shared/shaping/join-outlines.ts";
@@ -11,8 +12,6 @@ import { artworkOfPieces, keptOutline, replacePieces } from "./replace-pieces.ts
 
 /** As much as a piece reads. */
 const mostRead = 120;
-/** What is left of a name, so that its part can be told after it. */
-const longestName = 95;
 
 /** Makes one piece of each group that was joined. It bears the first name among them and reads what they read, in reading order. */
 export function joinPieces(
@@ -89,17 +88,11 @@ function partsOf(piece: Piece, parts: readonly Shaped[], source: Piece["source"]
   if (only && parts.length === 1) return [{ ...piece, source, ...keptOutline(only) }];
   return parts.map((part, index) => ({
     id: `${id}-${index + 1}`,
-    name: partName(piece.name, index + 1, parts.length),
+    name: nameOfPart(piece.name, index + 1, parts.length),
     source,
     ...keptOutline(part),
     reads: index === 0 ? piece.reads : "",
   }));
-}
-
-/** "Night disc, part 1 of 2". */
-function partName(name: string, number: number, count: number): string {
-  const part = `part ${number} of ${count}`;
-  return name === "" ? `Part ${number} of ${count}` : `${name.slice(0, longestName)}, ${part}`;
 }
 
 function piecesOf({ layers }: MockupDocument, ids: readonly string[]): Layer["pieces"] {

@@ -44,10 +44,17 @@ describe("a piece that is split", () => {
     expect(labels).toEqual([["Split it in two"]]);
     const halves = piecesOf(mended[0]);
     expect(halves.map(({ id, name, reads }) => [id, name, reads])).toEqual([
-      ["p-1", "Panel, 1 of 2", "OPEN"],
-      ["p-2", "Panel, 2 of 2", ""],
+      ["p-1", "Panel, part 1 of 2", "OPEN"],
+      ["p-2", "Panel, part 2 of 2", ""],
     ]);
-    for (const half of halves) expect(half.placement).toEqual(placement);
+    const { x, y, ...way } = placement;
+    for (const half of halves) expect(half.placement).toMatchObject(way);
+    // Each about its own middle: a quarter of the 600 mm either way along the turn of 30°.
+    const middles = halves.map((half) => [half.placement.x, half.placement.y].map(Math.round));
+    expect(middles).toEqual([
+      [190, 135],
+      [450, 285],
+    ]);
     // 600 by 250 on the board, cut across its longer side.
     expect(await areaOf(halves)).toBeCloseTo(600 * 250, 1);
     for (const half of halves) expect(await areaOf([half])).toBeCloseTo(300 * 250, -1);
@@ -60,23 +67,28 @@ describe("a piece that is split", () => {
     expect(kernel.difference(pieceRegion(panel, kernel), kernel.offset(whole, 0.01, "mitre"))).toEqual([]);
   });
 
-  it("that is too large even in halves can be split again", async () => {
-    const first = await triedMends(bed, buildSign([buildLayer("B", [plate("p", 1500, 200, [300, 200])])]), options);
-    const [once] = first.mended;
-    if (!once) throw new Error("It was split.");
-    const { labels, mended } = await triedMends(bed, once, options);
-    expect(labels).toEqual([["Split it in two"], ["Split it in two"]]);
-    expect(piecesOf(mended[0]).map(({ id }) => id)).toEqual(["p-1-1", "p-1-2", "p-2"]);
+  it("comes apart in as many parts as go on the bed, by one press", async () => {
+    const long = buildSign([buildLayer("B", [plate("p", 1500, 200, [300, 200])])]);
+    const { labels, mended } = await triedMends(bed, long, options);
+    expect(labels).toEqual([["Split it, into 4 parts"]]);
+    expect(piecesOf(mended[0]).map(({ id, placement }) => [id, Math.round(placement.x * 10) / 10])).toEqual([
+      ["p-1", -262.5],
+      ["p-2", 112.5],
+      ["p-3", 487.5],
+      ["p-4", 862.5],
+    ]);
+    expect(mended[0] && (await findingsOf(bed, mended[0], options))).toEqual([]);
   });
 
   it("keeps the curves of its outline, and ids that are taken", async () => {
     const layers = [buildLayer("B", [disc("o", 250, [300, 200])]), buildLayer("C", [plate("o-1", 20, 20, [300, 200])])];
     const { mended } = await triedMends(bed, buildSign(layers), options);
-    const halves = piecesOf(mended[0]).filter(({ id }) => id !== "o-1");
-    expect(halves.map(({ id }) => id)).toEqual(["o-2", "o-3"]);
-    const cubics = halves.flatMap(({ path }) => path.flatMap(({ segments }) => segments));
-    expect(cubics.filter(({ kind }) => kind === "cubic").length).toBeGreaterThanOrEqual(6);
-    expect(cubics.length).toBeLessThan(12);
+    const parts = piecesOf(mended[0]).filter(({ id }) => id !== "o-1");
+    // 500 mm over, so that no halves go on 400 by 300: quarters.
+    expect(parts.map(({ id }) => id)).toEqual(["o-2", "o-3", "o-4", "o-5"]);
+    const segments = parts.flatMap(({ path }) => path.flatMap((ring) => ring.segments));
+    expect(segments.filter(({ kind }) => kind === "cubic").length).toBeGreaterThanOrEqual(4);
+    expect(segments.length).toBeLessThan(24);
   });
 
   it("falls into what its cut leaves apart", async () => {
