@@ -10,7 +10,7 @@ const loopbackNames = new Set(["localhost", "127.0.0.1", "[::1]"]);
  * page, no cookies to read and nothing to fetch but their code; pages stay under the strict policy.
  */
 function allowKernel(response: ServerResponse, path: string): void {
-  if (!/[\\/](?:board|engine|examples|lettering|plan|shape)\.worker-[\w-]+\.js$/.test(path)) return;
+  if (!/[\\/](?:board|engine|examples|lettering|plan|shape|wall)\.worker-[\w-]+\.js$/.test(path)) return;
   response.setHeader(
     "Content-Security-Policy",
     "default-src 'none'; script-src 'self' 'wasm-unsafe-eval' 'unsafe-eval'; connect-src 'self'",

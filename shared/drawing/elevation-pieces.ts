@@ -119,14 +119,21 @@ function frameSolids({ document, frame }: SignInput): Solid[] {
   return [{ ...frame, layerKey: null, bottom: 0, top: document.frame.depth, castsShadow: true }];
 }
 
+/** What is seen of one height: its things, and the shadow that falls on them. */
+export type DrawnLevel = { readonly topMm: number; readonly items: readonly Item[] };
+
+type DrawnBoard = { readonly box: Box; readonly outline: Path; readonly items: readonly Item[] };
+
+/** All that stands before the backer, as `drawLevels` draws it. */
+export function drawSolids(input: SignInput, board: DrawnBoard): Item[] {
+  return drawLevels(input, board).flatMap(({ items }) => items);
+}
+
 /**
- * All that stands before the backer, lowest first, each level followed by the shadow that falls on it. The backer's own picture and shadow
- * come from `board`. Everything is in the board's own mm.
+ * The backer and all that stands before it, lowest first, each level followed by the shadow that falls on it. The backer's own picture comes
+ * from `board`; it is the first level. Everything is in the board's own mm, heights from the back of the board.
  */
-export function drawSolids(
-  input: SignInput,
-  board: { readonly box: Box; readonly outline: Path; readonly items: readonly Item[] },
-): Item[] {
+export function drawLevels(input: SignInput, board: DrawnBoard): DrawnLevel[] {
   const { document, figures, kernel, standoffs, lineMm } = input;
   const { light } = document.presentation;
   const solids = [
@@ -145,15 +152,16 @@ export function drawSolids(
     });
     return shadow ? [{ kind: "clip", clip, items: [shadow] }] : [];
   };
-  const items: Item[] = [...board.items, ...shadowOn(figures.backerTop.nominal, board.outline, [board.box])];
+  const face = figures.backerTop.nominal;
+  const drawn: DrawnLevel[] = [{ topMm: face, items: [...board.items, ...shadowOn(face, board.outline, [board.box])] }];
   for (const level of levelsOf(solids)) {
-    items.push(...groupedByLayer(level));
     const regions = level.filter((solid) => solid.items.length > 0).map(({ region }) => region);
     const surface = kernel.union(regions.flat(), "nonzero");
     const receivers = regions.map(boxOfRegion).filter((box) => box !== null);
-    items.push(...shadowOn(level[0]?.top ?? 0, pathOfRegion(surface), receivers));
+    const topMm = level[0]?.top ?? 0;
+    drawn.push({ topMm, items: [...groupedByLayer(level), ...shadowOn(topMm, pathOfRegion(surface), receivers)] });
   }
-  return items;
+  return drawn;
 }
 
 const wallStrength = 0.26;

@@ -39,7 +39,7 @@ export const boardPlaneId = "board-plane";
 const bareMargin = 0.09;
 
 /** Room around a sign without dimensions: a share of its longer side, or what the board's shadow on the wall needs if that is more. */
-function bareMarginMm({ document, figures }: Pick<ElevationInput, "document" | "figures">): number {
+export function bareMarginMm({ document, figures }: Pick<ElevationInput, "document" | "figures">): number {
   const { hanging, presentation } = document;
   const { width, height } = signBox(document);
   const longer = Math.max(width, height);

@@ -10,11 +10,21 @@ type DialogProps = {
   readonly description?: ReactNode;
   /** Wide for a form beside a drawing; desk for a table beside one. */
   readonly size?: "normal" | "wide" | "desk";
+  /** Its changes are the page's own, and so are the keys that undo them. */
+  readonly undoes?: boolean;
   readonly children?: ReactNode;
 };
 
 /** A sheet laid over the page. Traps the focus and gives it back; Escape and the ground behind it close it. */
-export function Dialog({ open, onOpenChange, title, description, size = "normal", children }: DialogProps) {
+export function Dialog({
+  open,
+  onOpenChange,
+  title,
+  description,
+  size = "normal",
+  undoes = false,
+  children,
+}: DialogProps) {
   const focus = useReturnFocus();
   return (
     <Primitive.Root open={open} onOpenChange={onOpenChange}>
@@ -23,6 +33,7 @@ export function Dialog({ open, onOpenChange, title, description, size = "normal"
         <Primitive.Content
           {...focus}
           {...(description ? {} : { "aria-describedby": undefined })}
+          data-undoes={undoes || undefined}
           className={cx(
             "fixed top-1/2 left-1/2 z-50 max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] -translate-x-1/2 -translate-y-1/2 overflow-y-auto border border-ink bg-sheet p-5 sm:p-6",
             { normal: "max-w-xl", wide: "max-w-4xl", desk: "max-w-[100rem]" }[size],

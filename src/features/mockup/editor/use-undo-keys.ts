@@ -21,6 +21,6 @@ export function useUndoKeys(step: (action: { readonly kind: "undo" | "redo" }) =
 function isField(target: EventTarget | null): boolean {
   return (
     target instanceof HTMLElement &&
-    target.closest("input:not([type=radio], [data-untouched]), textarea, [role=dialog]") !== null
+    target.closest("input:not([type=radio], [data-untouched]), textarea, [role=dialog]:not([data-undoes])") !== null
   );
 }

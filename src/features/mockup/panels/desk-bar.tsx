@@ -32,6 +32,7 @@ export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBar
       <CutTools onOpen={onOpen} />
       <span className="ml-auto flex items-center gap-2">
         <AidsTools />
+        <WordButton onClick={() => onOpen("wall")}>On the wall</WordButton>
         <WordButton onClick={() => onOpen("drafts")}>Drafts</WordButton>
         <TextLink to={cutPlanPath} className="text-sm">
           Cut plan

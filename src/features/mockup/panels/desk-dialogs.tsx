@@ -10,6 +10,7 @@ import { MarginDialog } from "./margin-dialog.tsx";
 import { PlateDialog } from "./plate-dialog.tsx";
 import { SplitDialog } from "./split-dialog.tsx";
 import { StepOffDialog } from "./step-off-dialog.tsx";
+import { WallDialog } from "./wall-dialog.tsx";
 
 /** How pieces are shaped. */
 type CutDialog = "margin" | "join" | "cut away" | "loose bits" | "split";
@@ -23,6 +24,7 @@ export type DeskDialog =
   | "finish"
   | "keys"
   | "step off"
+  | "wall"
   | CutDialog;
 
 type DeskDialogsProps = {
@@ -56,6 +58,7 @@ export function DeskDialogs({ open, onClose, files, ...job }: DeskDialogsProps) 
       <CutAwayDialog {...at("cut away")} />
       <LooseBitsDialog {...at("loose bits")} />
       <SplitDialog {...at("split")} />
+      <WallDialog {...at("wall")} shop={job.shop} jobId={job.jobId} />
       <KeysDialog {...at("keys")} />
     </>
   );

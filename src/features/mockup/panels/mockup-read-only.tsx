@@ -23,6 +23,7 @@ import { useEngine } from "../engine/use-engine.ts";
 import { dryFitContextOf } from "../model/dry-fit-context.ts";
 import { CostPanel, type CostPanelProps } from "./cost-panel.tsx";
 import { FindingsPanel } from "./findings-panel.tsx";
+import { WallReadOnly } from "./wall-read-only.tsx";
 
 type MockupReadOnlyProps = {
   readonly shop: string;
@@ -112,6 +113,7 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
           />
         )}
       </div>
+      {document.presentation.photo && <WallReadOnly shop={shop} unit={unit} document={document} />}
       {drawn && figures && (
         <>
           <p className="text-sm text-graphite">
