@@ -67,7 +67,7 @@ export function CanvasPanel({ drawn, failure, drag, onDrag, view, fit, room, onV
       <p id={hintId} className="sr-only">
         Choose a layer in the schedule or a piece in the list below. Arrows move what is chosen by the step that the bar
         names, with Shift ten times as far; Delete removes it. Keys lists them all. Plus and minus look closer and
-        farther, 0 shows the whole board.
+        farther, 0 shows the whole board, 9 what is chosen.
       </p>
       {aids.rulers && room !== null && (
         <Rulers view={view} room={room} unit={unit} chosen={chosen} pointer={pointer.marks} />

@@ -14,6 +14,8 @@ const arrowPx = 7;
 const arrowHalfPx = 2.2;
 /** How far beside a box its distances to the board's edges are drawn. */
 const besidePx = 15;
+/** A gap that looks smaller than this isn't read but looked at closer, unless it is like another. */
+const leastGapPx = 16;
 /** Kept free between lettering and the window's edge. */
 const edgePx = 12;
 
@@ -22,8 +24,10 @@ export function paintMeasures(measures: readonly LetteredMeasure[], window: Box,
   return measures.flatMap((measure) => paintMeasure(measure, window, mmPerPx));
 }
 
-function paintMeasure({ axis, from, to, of, level, text }: LetteredMeasure, window: Box, mmPerPx: number) {
+function paintMeasure(measure: LetteredMeasure, window: Box, mmPerPx: number): FabricObject[] {
+  const { axis, from, to, of, level, text, isEqual } = measure;
   const px = (count: number) => count * mmPerPx;
+  if (of === "piece" && !isEqual && to - from < px(leastGapPx)) return [];
   const seen = spanOf(window, axis);
   const seenAcross = spanOf(window, otherAxis(axis));
   const [start, end] = [Math.max(from, seen.from + px(edgePx)), Math.min(to, seen.to - px(edgePx))];

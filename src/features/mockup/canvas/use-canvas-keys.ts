@@ -7,9 +7,10 @@ import { shiftTimes } from "../model/arrow-steps.ts";
 import { findHole } from "../model/chosen-box.ts";
 import { whyHoleStays, whyIdle } from "../model/chosen-words.ts";
 import { removeHole, setHole } from "../model/commands/holes.ts";
-import { movePieces, removePieces } from "../model/commands/pieces.ts";
+import { boxOfPieces, movePieces, removePieces } from "../model/commands/pieces.ts";
 import type { Drag } from "../model/drag.ts";
 import { chooseAllPieces, nothingChosen } from "../model/selection.ts";
+import { viewOfBox } from "./view-of-board.ts";
 
 type Looking = {
   readonly view: DrawingView;
@@ -67,6 +68,11 @@ export function useCanvasKeys({ view, fit, room, onView, drag, onDrag }: Looking
     else choose(nothingChosen);
   }
 
+  function lookAtChosen() {
+    const box = boxOfPieces(document, pieceIds);
+    if (box !== null && room !== null) onView(viewOfBox(box, fit, room));
+  }
+
   return function handleKeyDown(event: KeyboardEvent) {
     if ((event.ctrlKey || event.metaKey) && !event.altKey && event.key.toLowerCase() === "a") {
       event.preventDefault();
@@ -82,6 +88,7 @@ export function useCanvasKeys({ view, fit, room, onView, drag, onDrag }: Looking
     } else if (event.key === "+" || event.key === "=") onView(viewScaled(view, stepFactor, middle, fit));
     else if (event.key === "-") onView(viewScaled(view, 1 / stepFactor, middle, fit));
     else if (event.key === "0") onView(null);
+    else if (event.key === "9") lookAtChosen();
     else if (event.key === "Delete" || event.key === "Backspace") remove();
     else if (event.key === "Escape") letGo();
   };

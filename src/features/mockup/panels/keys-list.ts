@@ -17,6 +17,7 @@ export const deskKeys: readonly DeskKeys[] = [
       { keys: "Escape", does: "lets go: of what is dragged, of putting holes, of what is chosen" },
       { keys: "+, −", does: "look closer and farther" },
       { keys: "0", does: "the whole board" },
+      { keys: "9", does: "what is chosen, as close as it fits" },
     ],
   },
   {
@@ -50,10 +51,10 @@ export const deskKeys: readonly DeskKeys[] = [
     keys: [
       {
         keys: "Drag on bare ground",
-        does: "draws a box that chooses what lies in it; with Ctrl it can begin on a piece",
+        does: "draws a box that chooses what lies wholly in it; with Ctrl it can begin on a piece",
       },
-      { keys: "Space and drag", does: "looks around, as the middle button does" },
-      { keys: "Wheel", does: "looks closer and farther, where the pointer is" },
+      { keys: "Space and drag", does: "looks around, as the middle button, two fingers and “Look around” do" },
+      { keys: "Wheel", does: "looks closer and farther, where the pointer is, as two fingers do" },
       { keys: "Shift and press", does: "adds to what is chosen, on the drawing and in the list of pieces" },
       { keys: "Press twice", does: "picks one piece out of its layer" },
       { keys: "Alt while dragging", does: "catches on nothing" },
