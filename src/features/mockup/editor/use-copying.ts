@@ -1,4 +1,4 @@
-import { useMemo, useSyncExternalStore } from "react";
+import { useMemo } from "react";
 import { counted } from "@/lib/format.ts";
 import { addCopies, idsOfCopy } from "../model/commands/add-copies.ts";
 import { idsOfPaste, paste } from "../model/commands/paste.ts";
@@ -6,17 +6,18 @@ import { movableOf, shiftMotion } from "../model/commands/piece-motion.ts";
 import { removePieces } from "../model/commands/pieces.ts";
 import { copiedFromText, copyOf, piecesOfCopied } from "../model/copied.ts";
 import { type chooseLayer, layerOfPiece, type Selection } from "../model/selection.ts";
-import { findCopiedText, keepCopied, listenToCopies } from "./copy-shelf.ts";
+import { keepCopied } from "./copy-shelf.ts";
 import { useDesk } from "./desk-context.ts";
 import { browserStorage } from "./kept-aids.ts";
 import { newId } from "./new-id.ts";
+import { useCopiedText } from "./use-copied-text.ts";
 
 const tooMuch = "This would be more than a mockup takes.";
 
 /** Copying, taking out, doubling and pasting what is chosen, here and in other jobs of the client. */
 export function useCopying() {
   const { document, selection, site, client, copyPlace, edit, say } = useDesk();
-  const text = useSyncExternalStore(listenToCopies, () => findCopiedText(browserStorage(), copyPlace));
+  const text = useCopiedText(copyPlace);
   const read = useMemo(() => (text === null ? null : copiedFromText(text)), [text]);
   const { pieceIds } = selection;
 
