@@ -1,4 +1,5 @@
 import "./lettering-faces.css";
+import { useLayoutEffect, useRef } from "react";
 import { faces, nameOfFace } from "#shared/lettering/faces.ts";
 import { cx } from "@/lib/cx.ts";
 
@@ -11,11 +12,20 @@ type FaceChoiceProps = {
 
 /** The shipped faces to choose one of, each in its own letters. */
 export function FaceChoice({ value, onChange, sample }: FaceChoiceProps) {
+  const list = useRef<HTMLDivElement>(null);
+  const first = useRef(value);
+  useLayoutEffect(() => {
+    const chosen = list.current?.querySelector<HTMLElement>(`label:has(input[value="${first.current}"])`);
+    if (list.current && chosen) list.current.scrollTop = chosen.offsetTop - chosen.offsetHeight / 2;
+  }, []);
   return (
     <fieldset>
       <legend className="text-sm font-semibold text-ink">Face</legend>
       {/* Room for the ring round a face that has the focus, which would be clipped else. */}
-      <div className="mt-1 grid max-h-57 gap-1 overflow-y-auto border border-rule p-1.5 sm:grid-cols-2 lg:grid-cols-3">
+      <div
+        ref={list}
+        className="relative mt-1 grid max-h-50 gap-1 overflow-y-auto border border-rule p-1.5 sm:grid-cols-2 lg:grid-cols-3"
+      >
         {faces.map((face) => {
           const name = nameOfFace(face);
           return (

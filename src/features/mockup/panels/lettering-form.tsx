@@ -41,7 +41,7 @@ export function LetteringForm({ writing, action, canSend, onSend, onCancel, chil
         <div className="space-y-1">
           <TextArea
             label="Words"
-            rows={4}
+            rows={3}
             value={draft.words}
             onChange={(event) => set({ words: event.target.value })}
             error={isTooLong ? `At most ${longestWords} characters.` : undefined}
@@ -57,7 +57,8 @@ export function LetteringForm({ writing, action, canSend, onSend, onCancel, chil
       />
       <LetteringFields draft={draft} set={set} unit={unit} />
       {children}
-      <div className="flex flex-wrap justify-end gap-3">
+      {/* Within reach however long the form is. */}
+      <div className="sticky bottom-0 z-10 -mx-5 -mb-5 flex flex-wrap justify-end gap-3 border-t border-rule bg-sheet px-5 py-3 sm:-mx-6 sm:-mb-6 sm:px-6">
         <Button onClick={onCancel}>Cancel</Button>
         <Button type="submit" disabled={!canSend}>
           {action}

@@ -22,7 +22,7 @@ export function LetteringPreview({ state, shown, face, unit }: LetteringPreviewP
   const touching = shown && touchingWords(shown);
   return (
     <div className="space-y-2">
-      <div className="flex h-44 items-center justify-center border border-rule bg-paper p-3">
+      <div className="flex h-40 items-center justify-center border border-rule bg-paper p-3">
         {shown?.box ? (
           <Letters laid={shown} box={shown.box} />
         ) : (
