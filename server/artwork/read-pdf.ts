@@ -1,4 +1,12 @@
-import type { PDFDocumentProxy, PDFPageProxy } from "pdfjs-dist/legacy/build/pdf.mjs";
+// Its parser, which it would else load with the first file, whose time must not pay for that.
+import "pdfjs-dist/legacy/build/pdf.worker.mjs";
+import {
+  getDocument,
+  OPS,
+  type PDFDocumentProxy,
+  type PDFPageProxy,
+  VerbosityLevel,
+} from "pdfjs-dist/legacy/build/pdf.mjs";
 import { isRecord, numbersOf } from "#shared/artwork/pdf/operands.ts";
 import type { PdfFont, PdfOperation, PdfPage } from "#shared/artwork/pdf/pdf-page.ts";
 import { ArtworkRefused } from "#shared/artwork/refusals.ts";
@@ -30,8 +38,7 @@ export async function readPdf(bytes: Uint8Array): Promise<ReadPdf> {
 
 /** Null when the file can't be read. With `isStrict` the operations end where the first can't be read. */
 async function readAs(bytes: Uint8Array, { isStrict }: { isStrict: boolean }): Promise<ReadPdf | null> {
-  const pdfjs = await import("pdfjs-dist/legacy/build/pdf.mjs");
-  const loading = pdfjs.getDocument({
+  const loading = getDocument({
     data: Uint8Array.from(bytes),
     isEvalSupported: false,
     useWorkerFetch: false,
@@ -44,14 +51,14 @@ async function readAs(bytes: Uint8Array, { isStrict }: { isStrict: boolean }): P
     fontExtraProperties: true,
     stopAtErrors: isStrict,
     maxImageSize: mostPixels,
-    verbosity: pdfjs.VerbosityLevel.ERRORS,
+    verbosity: VerbosityLevel.ERRORS,
   });
   try {
     const file = await loading.promise;
     const page = await file.getPage(1);
     const warnings = new Set<WarningCode>();
     if (await hasComments(page)) warnings.add("pdf.comments");
-    return { page: await pageOf(file, page, pdfjs.OPS), pages: file.numPages, warnings };
+    return { page: await pageOf(file, page), pages: file.numPages, warnings };
   } catch (error) {
     if (error instanceof Error && error.name === "PasswordException") throw new ArtworkRefused("pdf.password");
     // Whatever else the reader throws is about the file, which is then refused.
@@ -67,17 +74,14 @@ async function hasComments(page: PDFPageProxy): Promise<boolean> {
   return annotations.some(({ subtype }) => subtype !== "Link" && subtype !== "Popup");
 }
 
-async function pageOf(
-  file: PDFDocumentProxy,
-  page: PDFPageProxy,
-  operators: Readonly<Record<string, number>>,
-): Promise<PdfPage> {
-  const names = new Map(Object.entries(operators).map(([name, code]) => [code, name]));
+const names: ReadonlyMap<number, string> = new Map(Object.entries(OPS).map(([name, code]) => [code, name]));
+
+async function pageOf(file: PDFDocumentProxy, page: PDFPageProxy): Promise<PdfPage> {
   // 0: without comments, stamps and form fields.
   const list = await page.getOperatorList({ annotationMode: 0 });
   const layers = await file.getOptionalContentConfig();
   const [left = 0, bottom = 0, right = 0, top = 0] = page.view;
-  const operations = operationsOf(list, names);
+  const operations = operationsOf(list);
   const objects = await objectsOf(page, operations);
   const fonts = new Map<string, PdfFont | null>();
   return {
@@ -88,7 +92,7 @@ async function pageOf(
     font: (id) => {
       const known = fonts.get(id);
       if (known !== undefined) return known;
-      const font = fontOf(objects.get(id), objects, names);
+      const font = fontOf(objects.get(id), objects);
       fonts.set(id, font);
       return font;
     },
@@ -102,7 +106,7 @@ async function pageOf(
 
 type OperatorList = { readonly fnArray: readonly number[]; readonly argsArray: readonly unknown[] };
 
-function operationsOf({ fnArray, argsArray }: OperatorList, names: ReadonlyMap<number, string>): PdfOperation[] {
+function operationsOf({ fnArray, argsArray }: OperatorList): PdfOperation[] {
   return fnArray.map((code, index) => {
     const args = argsArray[index];
     return { name: names.get(code) ?? "", args: Array.isArray(args) || isTyped(args) ? Array.from<unknown>(args) : [] };
@@ -126,11 +130,7 @@ async function objectsOf(page: PDFPageProxy, operations: readonly PdfOperation[]
   return objects;
 }
 
-function fontOf(
-  font: unknown,
-  objects: ReadonlyMap<string, unknown>,
-  names: ReadonlyMap<number, string>,
-): PdfFont | null {
+function fontOf(font: unknown, objects: ReadonlyMap<string, unknown>): PdfFont | null {
   if (!isRecord(font)) return null;
   const glyphs = isRecord(font.charProcOperatorList) ? font.charProcOperatorList : null;
   return {
@@ -148,7 +148,7 @@ function fontOf(
       font.isType3Font === true
         ? (glyph) => {
             const list = glyphs?.[glyph];
-            return isOperatorList(list) ? operationsOf(list, names) : null;
+            return isOperatorList(list) ? operationsOf(list) : null;
           }
         : null,
   };

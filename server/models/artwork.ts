@@ -7,6 +7,8 @@ import {
   type Sequelize,
 } from "sequelize";
 import type { ArtworkRefusal, ImportedArtwork } from "#shared/artwork/imported-artwork.ts";
+import type { TraceChoices } from "#shared/tracing/trace-choices.ts";
+import type { TraceRecord } from "#shared/tracing/traced-picture.ts";
 
 /** What lists show of an imported artwork, at the file's own size. */
 export type ArtworkSummary = Pick<ImportedArtwork, "widthMm" | "heightMm" | "colours" | "warnings">;
@@ -22,6 +24,9 @@ export class Artwork extends Model<InferAttributes<Artwork>, InferCreationAttrib
   declare summary: CreationOptional<ArtworkSummary | null>;
   declare pieces: CreationOptional<string | null>;
   declare refusal: CreationOptional<ArtworkRefusal | null>;
+  declare trace: CreationOptional<TraceRecord | null>;
+  declare traceAsked: CreationOptional<TraceChoices | null>;
+  declare traceFailure: CreationOptional<ArtworkRefusal | null>;
   declare addedBy: string;
   declare addedAt: Date;
   declare removedAt: CreationOptional<Date | null>;
@@ -40,6 +45,9 @@ export function initArtwork(sequelize: Sequelize): void {
       summary: DataTypes.JSONB,
       pieces: DataTypes.TEXT,
       refusal: DataTypes.JSONB,
+      trace: DataTypes.JSONB,
+      traceAsked: DataTypes.JSONB,
+      traceFailure: DataTypes.JSONB,
       addedBy: DataTypes.UUID,
       addedAt: DataTypes.DATE,
       removedAt: DataTypes.DATE,
@@ -47,3 +55,7 @@ export function initArtwork(sequelize: Sequelize): void {
     { sequelize, tableName: "artworks" },
   );
 }
+
+/** Whether its file is a picture, whose outlines are traced. The artwork must have been read with its file. */
+export const isPicture = ({ file }: Artwork): boolean =>
+  file?.mediaType === "image/png" || file?.mediaType === "image/jpeg";

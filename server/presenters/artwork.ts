@@ -3,7 +3,7 @@ import type { ArtworkPiece } from "#shared/artwork/imported-artwork.ts";
 import type { artworkPieces, artworkSchema } from "#shared/contracts/artworks.ts";
 import { boxOfPath } from "#shared/geometry/box.ts";
 import { placePath } from "#shared/geometry/placement.ts";
-import type { Artwork } from "../models/artwork.ts";
+import { type Artwork, isPicture } from "../models/artwork.ts";
 import type { Actor } from "../policies/actor.ts";
 import { artworkPolicy } from "../policies/artwork.ts";
 import type { JobFacts } from "../policies/job.ts";
@@ -26,7 +26,24 @@ export function presentArtwork(actor: Actor, facts: JobFacts, artwork: Artwork):
     colours: summary ? summary.colours.map((group) => ({ ...group, areaMm2: group.areaMm2 * scale * scale })) : [],
     warnings: summary ? [...summary.warnings] : [],
     refusal: artwork.refusal,
-    can: { change: may && artwork.state === "ready", remove: may },
+    trace: isPicture(artwork) ? presentTrace(artwork) : null,
+    can: {
+      change: may && artwork.state === "ready",
+      remove: may,
+      trace: may && isPicture(artwork) && artwork.state !== "importing",
+    },
+  };
+}
+
+function presentTrace({ trace, traceAsked, traceFailure, scale }: Artwork): z.input<typeof artworkSchema>["trace"] {
+  return {
+    record: trace && {
+      ...trace,
+      found: trace.found.map((colour) => ({ ...colour })),
+      smallestMm2: trace.smallestMm2 * scale * scale,
+    },
+    asked: traceAsked,
+    failure: traceFailure,
   };
 }
 

@@ -3,6 +3,7 @@ import { acceptedType, largestArtworkBytes } from "../artwork/accept-upload.ts";
 import { addArtwork } from "../commands/add-artwork.ts";
 import { removeArtwork } from "../commands/remove-artwork.ts";
 import { setTrueSize } from "../commands/set-true-size.ts";
+import { cancelTrace, traceArtwork } from "../commands/trace-artwork.ts";
 import { notAllowed, notFound, wrongState } from "../http/app-error.ts";
 import { type Routes, read, upload, write } from "../http/route.ts";
 import { artworkPolicy } from "../policies/artwork.ts";
@@ -61,6 +62,18 @@ export function registerArtworkRoutes(routes: Routes): void {
 
   write(routes, contract.setTrueSize, async (context, { params, body }) => {
     const artwork = await setTrueSize(context, params.artworkId, body);
+    const { facts } = await findJob(context, artwork.jobId);
+    return presentArtwork(context.actor, facts, artwork);
+  });
+
+  write(routes, contract.traceArtwork, async (context, { params, body }) => {
+    const artwork = await traceArtwork(context, params.artworkId, body);
+    const { facts } = await findJob(context, artwork.jobId);
+    return presentArtwork(context.actor, facts, artwork);
+  });
+
+  write(routes, contract.cancelTrace, async (context, { params }) => {
+    const artwork = await cancelTrace(context, params.artworkId);
     const { facts } = await findJob(context, artwork.jobId);
     return presentArtwork(context.actor, facts, artwork);
   });

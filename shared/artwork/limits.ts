@@ -16,5 +16,9 @@ export const artworkLimits = {
   dashes: 20_000,
   pieces: 5_000,
   timeMs: 5_000,
+  /** A picture, before it is decoded: all its pixels, its shorter side, and what tracing it may take. */
+  picturePixels: 40_000_000,
+  pictureSide: 16,
+  pictureTimeMs: 60_000,
   memoryMb: 512,
 } as const;

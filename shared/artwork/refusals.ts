@@ -4,10 +4,8 @@ import type { ArtworkRefusal } from "./imported-artwork.ts";
 const refusalTexts = {
   "file.empty": "The file is empty. Export it again from the drawing program and bring that one in.",
   "file.too-large": "The file is larger than 10 MB. Remove embedded pictures and hidden layers, then export it again.",
-  "file.png": "This is a PNG picture. Tracing pictures comes later: bring the logo in as SVG.",
-  "file.jpeg": "This is a JPEG picture. Tracing pictures comes later: bring the logo in as SVG.",
   "file.unknown":
-    "This is not a drawing in SVG or PDF. Export the logo as one of them from the drawing program and bring that one in.",
+    "This is neither a drawing in SVG or PDF nor a picture in PNG or JPEG. Export the logo as one of them and bring that one in.",
   "file.unpacking":
     "The compressed file is damaged or unpacks to more than 16 MB. Save it as a plain SVG, not compressed, and try again.",
   "file.encoding": "The file's letters can't be read in the encoding it names. Save it as SVG in UTF-8 and try again.",
@@ -38,6 +36,20 @@ const refusalTexts = {
     "The PDF unpacks to more than 100 MB. Remove pictures and hidden layers from it, or export the logo as SVG.",
   "pdf.only-pictures":
     "The page holds a picture and no drawn shapes. Bring the picture itself in, or ask for the drawing it was made from.",
+  "picture.unreadable":
+    "The picture is damaged or cut off, or uses its format in a way we can't read. Open it in a picture program, save it again as PNG and bring that one in.",
+  "picture.too-large":
+    "The picture has more than 40 million pixels. Scale it down to 4,000 pixels along its longer side and bring that one in.",
+  "picture.too-small":
+    "The picture is smaller than 16 pixels on a side, too coarse to be traced. Ask for a larger one, or for the logo as SVG.",
+  "picture.print-colours":
+    "This JPEG holds print colours (CMYK), which screens show in different ways. Save it in RGB colours, as PNG if possible, and bring that one in.",
+  "picture.nothing-left":
+    "Nothing of the picture is left to cut: it is empty, of one colour that was dropped, or all of it counts as specks. Keep the background or choose a smaller speck, and trace it again.",
+  "picture.too-many-pieces":
+    "The picture falls into more than 5,000 pieces, more than anyone could cut. Choose fewer colours or a larger smallest area, and trace it again.",
+  "picture.too-slow":
+    "The picture took longer than a minute to trace. Scale it down, choose fewer colours, and try again.",
   "import.too-slow":
     "The drawing took longer than 5 seconds to work out. Merge its overlapping shapes or simplify the paths and try again.",
   "import.failed":

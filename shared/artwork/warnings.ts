@@ -6,6 +6,15 @@ const warningTexts = {
     "The file gives no true size, so we took 96 units for an inch. Type one true measure to set the size.",
   "size.rescaled":
     "The size in the file can't be a sign's, so the drawing was fitted to 300 mm. Type one true measure to set the size.",
+  "size.from-density":
+    "The size comes from the density that the picture states, which says how fine it is and rarely how large the sign will be. Type one true measure to set the size.",
+  "size.of-picture":
+    "A picture tells no true size, so its longer side became 300 mm. Type one true measure to set the size.",
+  "picture.paper-dropped":
+    "The white that fills the picture's rim was taken for paper and makes no pieces. Trace again and keep the background if it belongs to the logo.",
+  "picture.shades":
+    "The picture holds shades that run into each other, as a gradient or a photograph does. They were cut into flat colours: look at them, or choose fewer.",
+  "picture.scaled-down": "The picture was scaled down to 2,000 pixels along its longer side before it was traced.",
   "text.font-replaced":
     "Text in the file was drawn in Merriweather, not in its own font. Turn text into paths and bring the file in again.",
   "text.missing-letters":

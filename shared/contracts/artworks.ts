@@ -1,9 +1,31 @@
 import { z } from "zod";
 import { pathSchema } from "../mockup/schema-parts.ts";
+import { traceChoices } from "../tracing/trace-choices.ts";
 import { inShop, instant, lengthMm, noContent, nothing, pageOf, pageQuery, sha256 } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
 const box = z.strictObject({ x: z.number(), y: z.number(), width: z.number(), height: z.number() });
+
+const reason = z.strictObject({ code: z.string(), text: z.string() });
+
+/** How a picture became pieces. Sizes in pixels as the file has them and as they were traced. */
+const traceRecord = z.strictObject({
+  choices: traceChoices,
+  widthPx: z.number().int(),
+  heightPx: z.number().int(),
+  tracedWidthPx: z.number().int(),
+  tracedHeightPx: z.number().int(),
+  found: z.array(
+    z.strictObject({
+      colour: z.string(),
+      share: z.number(),
+      fillsRim: z.boolean(),
+      became: z.enum(["pieces", "joined", "dropped"]),
+    }),
+  ),
+  nodes: z.number().int(),
+  smallestMm2: z.number(),
+});
 
 export const artworkSchema = z.strictObject({
   id: z.uuid(),
@@ -18,8 +40,12 @@ export const artworkSchema = z.strictObject({
   heightMm: z.number().nullable(),
   colours: z.array(z.strictObject({ colour: z.string(), pieces: z.number().int(), areaMm2: z.number() })),
   warnings: z.array(z.strictObject({ code: z.string(), text: z.string() })),
-  refusal: z.strictObject({ code: z.string(), text: z.string() }).nullable(),
-  can: z.strictObject({ change: z.boolean(), remove: z.boolean() }),
+  refusal: reason.nullable(),
+  /** Of a picture: how its pieces came to be, what it is being traced again with, and why that failed the last time. */
+  trace: z
+    .strictObject({ record: traceRecord.nullable(), asked: traceChoices.nullable(), failure: reason.nullable() })
+    .nullable(),
+  can: z.strictObject({ change: z.boolean(), remove: z.boolean(), trace: z.boolean() }),
 });
 export type Artwork = z.infer<typeof artworkSchema>;
 
@@ -92,6 +118,26 @@ export const setTrueSize = endpoint({
   params: oneArtwork,
   query: nothing,
   body: z.strictObject({ side: z.enum(["width", "height"]), lengthMm }),
+  result: artworkSchema,
+});
+/** Answers when it is asked for; the pieces stay what they were until it is done, and when it fails. */
+export const traceArtwork = endpoint({
+  method: "POST",
+  path: "/api/shops/:shop/artworks/:artworkId/trace",
+  summary: "Trace a picture again with other choices",
+  params: oneArtwork,
+  query: nothing,
+  body: traceChoices,
+  result: artworkSchema,
+  status: 202,
+});
+export const cancelTrace = endpoint({
+  method: "DELETE",
+  path: "/api/shops/:shop/artworks/:artworkId/trace",
+  summary: "Give up tracing again and keep the pieces",
+  params: oneArtwork,
+  query: nothing,
+  body: nothing,
   result: artworkSchema,
 });
 export const removeArtwork = endpoint({

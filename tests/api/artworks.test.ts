@@ -21,6 +21,7 @@ import { buildJob } from "../support/factories/job.ts";
 import { buildMember } from "../support/factories/member.ts";
 import { artworksPath, buildArtwork, buildWorld, formWith, plainSvg, type World } from "../support/factories/work.ts";
 import { lastLogLine, logKinds } from "../support/job-log.ts";
+import { rawPng } from "../support/pictures.ts";
 import { runSql } from "../support/run-sql.ts";
 import { pdfOf } from "../support/seeded-pdf.ts";
 import { signInAs } from "../support/sign-in.ts";
@@ -207,16 +208,10 @@ describe("an upload that can't be taken", () => {
   it.each([
     { name: "an empty file", file: "empty.svg", content: bytes(), says: "The file is empty." },
     {
-      name: "a PNG called SVG",
+      name: "a PNG of 20,000 by 20,000 pixels called SVG",
       file: "logo.svg",
-      content: bytes(0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0x1a, 0x0a, 0, 0, 0, 13),
-      says: "This is a PNG picture. Tracing pictures comes later: bring the logo in as SVG.",
-    },
-    {
-      name: "a JPEG",
-      file: "logo.jpg",
-      content: bytes(0xff, 0xd8, 0xff, 0xe0, 0, 16, 0x4a, 0x46),
-      says: "This is a JPEG picture. Tracing pictures comes later: bring the logo in as SVG.",
+      content: rawPng({ width: 20_000, height: 20_000, depth: 8, colourType: 0, bytesPerPixel: 1, rows: bytes(0) }),
+      says: "The picture has more than 40 million pixels.",
     },
     {
       name: "a program",

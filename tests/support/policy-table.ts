@@ -23,6 +23,7 @@ import * as wallPhotos from "#shared/contracts/wall-photos.ts";
 import { emptyPriceBook } from "#shared/cost/works.ts";
 import { usualSaws } from "#shared/cut-plan/shop-saws.ts";
 import { defaultLimits } from "#shared/dry-fit/limits.ts";
+import { firstChoices } from "#shared/tracing/trace-choices.ts";
 import type { PolicyWorld } from "./policy-world.ts";
 
 /** Who asks, in the order of the table's columns. */
@@ -65,6 +66,7 @@ const approvers = "n n n y n - - - o";
 
 const job = (world: PolicyWorld) => ({ params: { ...world.params, jobId: world.jobId } });
 const revision = (world: PolicyWorld) => ({ params: { ...world.params, revisionId: world.revisionId } });
+const picture = (world: PolicyWorld) => ({ params: { ...world.params, artworkId: world.pictureId } });
 const artwork = (world: PolicyWorld) => ({ params: { ...world.params, artworkId: world.artworkId } });
 const draft = (world: PolicyWorld) => ({ params: { ...world.params, jobId: world.jobId, draftId: world.draftId } });
 const inShop = (world: PolicyWorld) => ({ params: world.params });
@@ -181,6 +183,8 @@ export const policyTable: readonly PolicyRow[] = [
   row(artworks.getArtworkPieces, staff, artwork),
   row(artworks.getArtworkFile, staff, artwork),
   row(artworks.setTrueSize, makers, (world) => ({ ...artwork(world), body: { side: "width", lengthMm: 200 } })),
+  row(artworks.traceArtwork, makers, (world) => ({ ...picture(world), body: firstChoices })),
+  row(artworks.cancelTrace, makers, picture),
   row(artworks.removeArtwork, makers, (world) => ({
     params: { ...world.params, artworkId: world.artworkIdsToRemove.pop() },
   })),

@@ -21,7 +21,14 @@ import { buildMember } from "./factories/member.ts";
 import { buildPerson } from "./factories/person.ts";
 import { unique } from "./factories/unique.ts";
 import { buildWallPhoto } from "./factories/wall-photo.ts";
-import { buildArtwork, buildRevision, buildWorld, signFromArtwork, type World } from "./factories/work.ts";
+import {
+  buildArtwork,
+  buildPicture,
+  buildRevision,
+  buildWorld,
+  signFromArtwork,
+  type World,
+} from "./factories/work.ts";
 import { type ActorName, actors } from "./policy-table.ts";
 import { signInAs, signInByMail } from "./sign-in.ts";
 import type { Visitor } from "./visitor.ts";
@@ -34,6 +41,7 @@ export async function buildPolicyWorld(app: TestApp) {
   const { params, visitors, approver, owner } = world;
   const clientId = approver.client.id;
   const main = await buildArtwork(app, world);
+  const picture = await buildPicture(app, world);
   const issued = await buildRevision(app, world, { document: await signFromArtwork(world, main.id) });
   const note = await visitors.approver.get(addNote, {
     params: { ...params, revisionId: issued.id },
@@ -130,6 +138,7 @@ export async function buildPolicyWorld(app: TestApp) {
     toFit,
     acknowledgedIds,
     artworkId: main.id,
+    pictureId: picture.id,
     draftId: await draft(),
     draftIdsToRemove: await eachTime(draft),
     noteId: note.id,

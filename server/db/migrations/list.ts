@@ -9,6 +9,7 @@ import { stock } from "./2026-12-01-07-stock.ts";
 import { briefPlace } from "./2026-12-01-08-brief-place.ts";
 import { priceBooks } from "./2026-12-01-09-price-books.ts";
 import { shopSaws } from "./2026-12-01-10-shop-saws.ts";
+import { artworkTracing } from "./2026-12-01-11-artwork-tracing.ts";
 import { wallPhotos } from "./2026-12-01-12-wall-photos.ts";
 import { namedDrafts } from "./2026-12-01-13-named-drafts.ts";
 import { mockupStarts } from "./2026-12-01-14-mockup-starts.ts";
@@ -27,6 +28,7 @@ export const migrations: readonly Migration[] = [
   briefPlace,
   priceBooks,
   shopSaws,
+  artworkTracing,
   wallPhotos,
   namedDrafts,
   mockupStarts,

@@ -9,6 +9,7 @@ import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import type { TestApp } from "../app.ts";
 import { buildLayer, buildSign } from "../build-sign.ts";
+import { paintedPicture, pngOf } from "../pictures.ts";
 import { signInAs, signInByMail } from "../sign-in.ts";
 import type { Visitor } from "../visitor.ts";
 import { type BuiltContact, buildClient, buildContact } from "./client.ts";
@@ -78,9 +79,17 @@ export async function buildArtwork(
   world: World,
   svg = plainSvg(),
 ): Promise<z.output<typeof artworkSchema>> {
-  const { status, text } = await world.visitors.owner.send("POST", artworksPath(world), {
-    body: formWith("logo.svg", svg),
-  });
+  return bringIn(app, world, formWith("logo.svg", svg));
+}
+
+/** The same with a picture: a blue square on transparent ground. */
+export async function buildPicture(app: TestApp, world: World): Promise<z.output<typeof artworkSchema>> {
+  const picture = paintedPicture(60, 40, (x, y) => (x > 10 && x < 40 && y > 5 && y < 35 ? "#27314F" : "#00000000"), 1);
+  return bringIn(app, world, formWith("logo.png", pngOf(picture), "image/png"));
+}
+
+async function bringIn(app: TestApp, world: World, form: FormData): Promise<z.output<typeof artworkSchema>> {
+  const { status, text } = await world.visitors.owner.send("POST", artworksPath(world), { body: form });
   if (status !== (addArtwork.status ?? 200)) throw new Error(`The artwork was refused: ${status} ${text}`);
   await app.runJobs();
   return artworkSchema.parse(JSON.parse(text));

@@ -33,8 +33,8 @@ async function refusalOf(bytes: Uint8Array): Promise<{ code: string; text: strin
 describe("files that are refused, with the reason in words", () => {
   const files: { name: string; bytes: () => Uint8Array; code: RefusalCode }[] = [
     { name: "an empty file", bytes: () => new Uint8Array(), code: "file.empty" },
-    { name: "a picture renamed to .svg", bytes: () => fixture("renamed-picture.svg"), code: "file.png" },
-    { name: "a JPEG picture", bytes: () => Uint8Array.of(0xff, 0xd8, 0xff, 0xe0, 0, 16), code: "file.jpeg" },
+    { name: "a picture renamed to .svg", bytes: () => fixture("renamed-picture.svg"), code: "picture.unreadable" },
+    { name: "a JPEG picture", bytes: () => Uint8Array.of(0xff, 0xd8, 0xff, 0xe0, 0, 16), code: "picture.unreadable" },
     { name: "a PDF that ends after its header", bytes: () => bytesOf("%PDF-1.7\n"), code: "pdf.broken" },
     { name: "plain text", bytes: () => fixture("plain-text.svg"), code: "file.unknown" },
     { name: "a file of 11 MB", bytes: () => bytesOf(drawing(" ".repeat(11_000_000))), code: "file.too-large" },

@@ -52,6 +52,7 @@ const artwork: Artwork = {
   ],
   warnings: [],
   refusal: null,
+  trace: null,
   can: { change: false, remove: false, trace: false },
 };
 const stock = {

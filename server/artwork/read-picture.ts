@@ -1,0 +1,30 @@
+import { artworkLimits } from "#shared/artwork/limits.ts";
+import { ArtworkRefused } from "#shared/artwork/refusals.ts";
+import type { PictureFile } from "#shared/tracing/trace-picture.ts";
+import { type PictureHeader, readPictureHeader } from "./picture-header.ts";
+
+/**
+ * A PNG or JPEG as pixels, turned the way its camera says. Its size is read from the header first: a small file can unpack to
+ * gigabytes. Throws ArtworkRefused with the reason when it can't be taken.
+ */
+export async function readPicture(bytes: Uint8Array): Promise<PictureFile> {
+  const header = readPictureHeader(bytes);
+  if (!header) throw new ArtworkRefused("picture.unreadable");
+  const { lossy, density, warnings } = header;
+  refuseBySize(header);
+  if (header.channels === 4) throw new ArtworkRefused("picture.print-colours");
+  // Loaded by the first picture: drawings need none of it.
+  const { Jimp } = await import("jimp");
+  const limits = { maxResolutionInMP: artworkLimits.picturePixels / 1e6, maxMemoryUsageInMB: 1_000 };
+  const read = await Jimp.fromBuffer(Buffer.from(bytes), { "image/jpeg": limits }).catch(() => null);
+  if (!read) throw new ArtworkRefused("picture.unreadable");
+  const { width, height, data } = read.bitmap;
+  const asTold = width * height === header.width * header.height && data.length === width * height * 4;
+  if (!asTold) throw new ArtworkRefused("picture.unreadable");
+  return { picture: { width, height, data }, lossy, density, warnings };
+}
+
+function refuseBySize({ width, height }: PictureHeader): void {
+  if (width * height > artworkLimits.picturePixels) throw new ArtworkRefused("picture.too-large");
+  if (Math.min(width, height) < artworkLimits.pictureSide) throw new ArtworkRefused("picture.too-small");
+}
