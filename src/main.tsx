@@ -1,4 +1,3 @@
-import "./lib/zod-words.ts";
 import "@fontsource/merriweather/latin-400.css";
 import "@fontsource/merriweather/latin-700.css";
 import "@fontsource/merriweather/latin-900.css";

@@ -1,4 +1,4 @@
-import { type ErrorCode, errorCodes } from "#shared/contracts/errors.ts";
+import { type ErrorCode, errorCodes } from "#shared/contracts/error-codes.ts";
 
 export type FieldError = { readonly pointer: string; readonly detail: string };
 

@@ -1,6 +1,7 @@
 import type { ServerResponse } from "node:http";
 import { join, resolve } from "node:path";
 import express, { Router } from "express";
+import compressedFiles from "express-static-gzip";
 import type { Environment } from "../env.ts";
 
 const loopbackNames = new Set(["localhost", "127.0.0.1", "[::1]"]);
@@ -10,7 +11,7 @@ const loopbackNames = new Set(["localhost", "127.0.0.1", "[::1]"]);
  * page, no cookies to read and nothing to fetch but their code; pages stay under the strict policy.
  */
 function allowKernel(response: ServerResponse, path: string): void {
-  if (!/[\\/](?:board|engine|examples|lettering|plan|shape|wall)\.worker-[\w-]+\.js$/.test(path)) return;
+  if (!/[\\/](?:board|engine|examples|lettering|plan|shape|wall)\.worker-[\w-]+\.js(?:\.br)?$/.test(path)) return;
   response.setHeader(
     "Content-Security-Policy",
     "default-src 'none'; script-src 'self' 'wasm-unsafe-eval' 'unsafe-eval'; connect-src 'self'",
@@ -31,11 +32,11 @@ export function clientFiles({ CLIENT_DIR, PUBLIC_URL }: Pick<Environment, "CLIEN
   });
   router.use(
     "/assets",
-    express.static(join(root, "assets"), {
-      immutable: true,
-      maxAge: "1y",
-      fallthrough: false,
-      setHeaders: allowKernel,
+    compressedFiles(join(root, "assets"), {
+      enableBrotli: true,
+      orderPreference: ["br"],
+      index: false,
+      serveStatic: { immutable: true, maxAge: "1y", fallthrough: false, setHeaders: allowKernel },
     }),
   );
   router.use(express.static(root, { index: false, maxAge: "1h" }));

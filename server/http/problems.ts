@@ -1,5 +1,6 @@
 import type { ErrorRequestHandler, RequestHandler } from "express";
-import { type ErrorCode, errorCodes, type Problem } from "#shared/contracts/errors.ts";
+import { type ErrorCode, errorCodes } from "#shared/contracts/error-codes.ts";
+import type { Problem } from "#shared/contracts/errors.ts";
 import { AppError, notFound } from "./app-error.ts";
 import { withoutSecrets } from "./without-secrets.ts";
 

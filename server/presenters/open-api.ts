@@ -1,6 +1,7 @@
 import { z } from "zod";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
-import { errorCodes, problemSchema } from "#shared/contracts/errors.ts";
+import { errorCodes } from "#shared/contracts/error-codes.ts";
+import { problemSchema } from "#shared/contracts/errors.ts";
 import type { Registered } from "../http/route.ts";
 import { sessionCookieNames } from "../http/session.ts";
 

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { addresses } from "./addresses.ts";
 import { email, instant, noContent, nothing, password, personName, shopSlug, token, writtenLine } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -17,8 +18,7 @@ export const meSchema = z.strictObject({
 export type Me = z.infer<typeof meSchema>;
 
 export const whoAmI = endpoint({
-  method: "GET",
-  path: "/api/me",
+  ...addresses.whoAmI,
   summary: "Who is signed in, and where",
   params: nothing,
   query: nothing,

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { addresses } from "./addresses.ts";
 import { inShop, noContent, nothing } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -14,8 +15,7 @@ export type JobSignal = z.infer<typeof jobSignalSchema>;
  * `after` or the `Last-Event-ID` header on; `begun` first, with the number from which it goes on. `once` ends after those that are there.
  */
 export const streamJobSignals = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop/jobs/:jobId/signals",
+  ...addresses.streamJobSignals,
   summary: "What changes on a job, as it changes",
   params: inShop.extend({ jobId: z.uuid() }),
   query: z.strictObject({

@@ -1,5 +1,6 @@
 import { z } from "zod";
 import { noteKinds, noteStates } from "../lifecycle/note-states.ts";
+import { addresses } from "./addresses.ts";
 import { inShop, instant, nothing, pageOf, pageQuery, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -57,8 +58,7 @@ const oneNote = inShop.extend({ noteId: z.uuid() });
 const said = (longest: number) => writtenText(longest).refine((text) => text.length > 0, "Write something first.");
 
 export const listNotes = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop/revisions/:revisionId/notes",
+  ...addresses.listNotes,
   summary: "Notes of a revision, those carried over too",
   params: oneRevision,
   query: z.strictObject(pageQuery),
@@ -66,8 +66,7 @@ export const listNotes = endpoint({
   result: pageOf(noteSchema),
 });
 export const addNote = endpoint({
-  method: "POST",
-  path: "/api/shops/:shop/revisions/:revisionId/notes",
+  ...addresses.addNote,
   summary: "Leave a note at a spot",
   params: oneRevision,
   query: nothing,
@@ -81,8 +80,7 @@ export const addNote = endpoint({
   status: 201,
 });
 export const replyToNote = endpoint({
-  method: "POST",
-  path: "/api/shops/:shop/notes/:noteId/replies",
+  ...addresses.replyToNote,
   summary: "Answer a note; the shop's answer makes it answered",
   params: oneNote,
   query: nothing,
@@ -91,8 +89,7 @@ export const replyToNote = endpoint({
   status: 201,
 });
 export const editNote = endpoint({
-  method: "PATCH",
-  path: "/api/shops/:shop/notes/:noteId",
+  ...addresses.editNote,
   summary: "Put right a note within five minutes of leaving it",
   params: oneNote,
   query: nothing,
@@ -100,8 +97,7 @@ export const editNote = endpoint({
   result: noteSchema,
 });
 export const editReply = endpoint({
-  method: "PATCH",
-  path: "/api/shops/:shop/notes/:noteId/replies/:replyId",
+  ...addresses.editReply,
   summary: "Put right a reply within five minutes of sending it",
   params: oneNote.extend({ replyId: z.uuid() }),
   query: nothing,
@@ -109,8 +105,7 @@ export const editReply = endpoint({
   result: noteSchema,
 });
 export const setNoteState = endpoint({
-  method: "POST",
-  path: "/api/shops/:shop/notes/:noteId/state",
+  ...addresses.setNoteState,
   summary: "Settle a note or open it again",
   params: oneNote,
   query: nothing,

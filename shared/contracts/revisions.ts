@@ -3,6 +3,7 @@ import type { DisplayList } from "../drawing/display-list.ts";
 import type { Finding } from "../dry-fit/finding.ts";
 import { revisionStates } from "../lifecycle/revision-states.ts";
 import type { Change } from "../mockup/changes.ts";
+import { addresses } from "./addresses.ts";
 import { inShop, instant, noContent, nothing, pageOf, pageQuery, personName, sha256, writtenText } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -109,8 +110,7 @@ export const issueRevision = endpoint({
   status: 202,
 });
 export const getRevision = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop/revisions/:revisionId",
+  ...addresses.getRevision,
   summary: "One revision",
   params: oneRevision,
   query: nothing,
@@ -118,8 +118,7 @@ export const getRevision = endpoint({
   result: revisionSchema,
 });
 export const getSheet = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop/revisions/:revisionId/sheet",
+  ...addresses.getSheet,
   summary: "The sheet of a revision",
   params: oneRevision,
   query: nothing,
@@ -127,8 +126,7 @@ export const getSheet = endpoint({
   result: sheetSchema,
 });
 export const getProof = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop/revisions/:revisionId/proof.pdf",
+  ...addresses.getProof,
   summary: "The issued PDF",
   params: oneRevision,
   query: nothing,
@@ -137,8 +135,7 @@ export const getProof = endpoint({
   form: "file",
 });
 export const getCertificate = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop/revisions/:revisionId/certificate.pdf",
+  ...addresses.getCertificate,
   summary: "The certificate of approval",
   params: oneRevision,
   query: nothing,
@@ -167,8 +164,7 @@ export const withdrawRevision = endpoint({
   result: revisionSchema,
 });
 export const approveRevision = endpoint({
-  method: "POST",
-  path: "/api/shops/:shop/revisions/:revisionId/approve",
+  ...addresses.approveRevision,
   summary: "Approve this very PDF",
   params: oneRevision,
   query: nothing,
@@ -183,8 +179,7 @@ export const approveRevision = endpoint({
   result: revisionSchema,
 });
 export const askForRevision = endpoint({
-  method: "POST",
-  path: "/api/shops/:shop/revisions/:revisionId/ask",
+  ...addresses.askForRevision,
   summary: "Ask for a revision: needs an open note or a summary",
   params: oneRevision,
   query: nothing,

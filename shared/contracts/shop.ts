@@ -1,5 +1,6 @@
 import { z } from "zod";
 import { role } from "./account.ts";
+import { addresses } from "./addresses.ts";
 import { email, inShop, instant, noContent, nothing, pageOf, pageQuery, shopSlug, writtenLine } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
@@ -29,8 +30,7 @@ export const shopSchema = z.strictObject({
 export type Shop = z.infer<typeof shopSchema>;
 
 export const getShop = endpoint({
-  method: "GET",
-  path: "/api/shops/:shop",
+  ...addresses.getShop,
   summary: "The shop as the reader sees it",
   params: inShop,
   query: nothing,

@@ -17,8 +17,16 @@ function Root() {
   );
 }
 
-/** A page that is fetched when it is first opened. */
+/** A page that is fetched when it is first opened. What is typed there is checked by schemas, in our words. */
 const page =
+  <Name extends string>(load: () => Promise<Record<Name, ComponentType>>, name: Name) =>
+  async () => {
+    await import("@/lib/zod-words.ts");
+    return { Component: (await load())[name] };
+  };
+
+/** A page that checks nothing by schemas, so that it comes without them: what a client opens on a phone. */
+const lightPage =
   <Name extends string>(load: () => Promise<Record<Name, ComponentType>>, name: Name) =>
   async () => ({ Component: (await load())[name] });
 
@@ -64,7 +72,7 @@ export const router = createBrowserRouter([
               },
               {
                 path: paths.sheet(":shop", ":revisionId"),
-                lazy: page(() => import("./pages/sheet-page.tsx"), "SheetPage"),
+                lazy: lightPage(() => import("./pages/sheet-page.tsx"), "SheetPage"),
               },
               { path: paths.clients(":shop"), lazy: page(() => import("./pages/clients-page.tsx"), "ClientsPage") },
               {

@@ -1,16 +1,12 @@
-import { useQuery } from "@tanstack/react-query";
 import type { ReactNode, RefCallback } from "react";
-import { NavLink, useNavigate } from "react-router-dom";
-import { Button } from "@/components/ui/button.tsx";
-import { Menu, MenuItem, MenuLabel, MenuRule } from "@/components/ui/menu.tsx";
+import { NavLink } from "react-router-dom";
 import { cx } from "@/lib/cx.ts";
-import { meQuery } from "@/lib/me.ts";
 import type { Reader } from "@/lib/shop-context.ts";
+import { HeaderMenu } from "./header-menu.tsx";
 import { paths } from "./paths.ts";
-import { useSignOut } from "./use-sign-out.ts";
 import { Wordmark } from "./wordmark.tsx";
 
-type Place = { readonly label: string; readonly to: string };
+export type Place = { readonly label: string; readonly to: string };
 
 /** Where this reader may go in the shop, in the order of a day's work. */
 export function placesOf({ shop, side }: Pick<Reader, "shop" | "side">): readonly Place[] {
@@ -41,11 +37,7 @@ export function ShopHeader({
   readonly reader: Reader;
   readonly slotRef: RefCallback<HTMLElement>;
 }) {
-  const navigate = useNavigate();
-  const signOut = useSignOut();
   const places = placesOf(reader);
-  const me = useQuery(meQuery).data;
-  const hasOtherPlaces = me !== undefined && me.memberOf.length + me.contactOf.length > 1;
   return (
     <header className="flex flex-wrap items-center gap-x-6 border-b border-rule px-4 py-1 sm:px-6 print:hidden">
       <Wordmark />
@@ -57,39 +49,7 @@ export function ShopHeader({
         ))}
       </nav>
       <div className="ml-auto flex items-center lg:order-last lg:ml-0">
-        <Menu
-          trigger={
-            <Button kind="bare" size="small" className="min-h-11 max-w-[60vw]">
-              <span className="hidden truncate lg:inline">{reader.person.name}</span>
-              <span className="lg:hidden">Menu</span>
-              <svg aria-hidden="true" viewBox="0 0 16 16" className="size-3 shrink-0">
-                <path d="M2 5l6 6 6-6" fill="none" stroke="currentColor" strokeWidth="2" />
-              </svg>
-            </Button>
-          }
-        >
-          <MenuLabel>
-            {reader.side === "client"
-              ? `${reader.person.name} for ${reader.client}, at ${reader.shop.name}`
-              : `${reader.person.name}, ${reader.role} of ${reader.shop.name}`}
-          </MenuLabel>
-          {places.map(({ label, to }) => (
-            <MenuItem key={to} className="lg:hidden" onSelect={() => void navigate(to)}>
-              {label}
-            </MenuItem>
-          ))}
-          <MenuRule />
-          {reader.side === "shop" && (
-            <MenuItem onSelect={() => void navigate(paths.howWeWorkItOut(reader.shop.slug))}>
-              How we work it out
-            </MenuItem>
-          )}
-          <MenuItem onSelect={() => void navigate(paths.account())}>Account</MenuItem>
-          {hasOtherPlaces && (
-            <MenuItem onSelect={() => void navigate(paths.home(), { state: { choose: true } })}>Other places</MenuItem>
-          )}
-          <MenuItem onSelect={() => signOut.mutate()}>Sign out</MenuItem>
-        </Menu>
+        <HeaderMenu reader={reader} places={places} />
       </div>
       <div
         ref={slotRef}

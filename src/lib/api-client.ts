@@ -1,6 +1,8 @@
 import type { z } from "zod";
+import type { AddressOf } from "#shared/contracts/addresses.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
-import { type ErrorCode, errorCodes, type Problem, problemSchema } from "#shared/contracts/errors.ts";
+import { type ErrorCode, errorCodes, isProblem } from "#shared/contracts/error-codes.ts";
+import type { Problem } from "#shared/contracts/errors.ts";
 
 /** Sent with every write: a form on a foreign page cannot set it. */
 export const writeHeaders = { "X-Standproud": "1" } as const;
@@ -45,7 +47,7 @@ const entriesOf = (value: unknown): [string, unknown][] => Object.entries((value
 
 /** The address of an endpoint with its parameters filled in, for links to files as well as for requests. */
 export function addressOf<E extends Endpoint>(
-  endpoint: E,
+  endpoint: E | AddressOf<E>,
   options: Needed<"params", z.input<E["params"]>> & { readonly query?: z.input<E["query"]> },
 ): string {
   const loose: Loose = options;
@@ -67,8 +69,7 @@ export function problemOf(status: number, body: string): ApiProblem {
   } catch {
     parsed = null;
   }
-  const read = problemSchema.safeParse(parsed);
-  if (read.success) return new ApiProblem(read.data.code, read.data.detail ?? read.data.title, read.data);
+  if (isProblem(parsed)) return new ApiProblem(parsed.code, parsed.detail ?? parsed.title, parsed);
   const code: ErrorCode = status === 413 ? "too_large" : status === 429 ? "too_many_requests" : "internal";
   const title = errorCodes[code].title;
   return new ApiProblem(code, title, { type: `/problems/${code}`, title, status, code });
@@ -81,7 +82,10 @@ export const unreachable = (): ApiProblem =>
  * Makes one request and gives the typed answer.
  * Throws ApiProblem for every answer that is not a success, and the signal's own reason when the request is given up.
  */
-export async function call<E extends Endpoint>(endpoint: E, options: CallOptions<E>): Promise<z.output<E["result"]>> {
+export async function call<E extends Endpoint>(
+  endpoint: E | AddressOf<E>,
+  options: CallOptions<E>,
+): Promise<z.output<E["result"]>> {
   const loose: Loose = options;
   const writes = endpoint.method !== "GET";
   const carriesBody = writes && loose.body !== undefined;

@@ -1,9 +1,12 @@
 import { type QueryClient, useQueryClient } from "@tanstack/react-query";
 import { useEffect } from "react";
-import { type JobSignal, jobSignalSchema, streamJobSignals } from "#shared/contracts/job-signals.ts";
+import { type AddressOf, addresses } from "#shared/contracts/addresses.ts";
+import type { JobSignal, streamJobSignals } from "#shared/contracts/job-signals.ts";
 import { addressOf } from "./api-client.ts";
 import { keys } from "./query-keys.ts";
 import { isAboutRevision } from "./revision-keys.ts";
+
+const signalsAt: AddressOf<typeof streamJobSignals> = addresses.streamJobSignals;
 
 /** A stream that the server refused is not tried again by the browser: we do, after this long, ms. */
 const againMs = 30_000;
@@ -21,13 +24,13 @@ export function useLiveJob(shop: string, jobId: string | null): void {
     let again: ReturnType<typeof setTimeout> | undefined;
 
     function open() {
-      const opened = new EventSource(addressOf(streamJobSignals, { params: { shop, jobId: job } }));
+      const opened = new EventSource(addressOf(signalsAt, { params: { shop, jobId: job } }));
       source = opened;
       // What changed between the page's own answers and this moment.
       opened.addEventListener("begun", () => refresh(client, { shop, jobId: job }, "note"), { once: true });
       opened.addEventListener("signal", ({ data }: MessageEvent<string>) => {
-        const signal = jobSignalSchema.safeParse(JSON.parse(data));
-        if (signal.success) refresh(client, { shop, jobId: job }, signal.data.kind);
+        const { kind }: JobSignal = JSON.parse(data);
+        refresh(client, { shop, jobId: job }, kind);
       });
       opened.addEventListener("error", () => {
         if (opened.readyState === EventSource.CLOSED) again = setTimeout(open, againMs);

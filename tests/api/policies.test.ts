@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { ShareLink } from "#server/models/share-link.ts";
 import { addArtwork } from "#shared/contracts/artworks.ts";
-import { type ErrorCode, problemSchema } from "#shared/contracts/errors.ts";
+import type { ErrorCode } from "#shared/contracts/error-codes.ts";
+import { problemSchema } from "#shared/contracts/errors.ts";
 import { getJob, openJob } from "#shared/contracts/jobs.ts";
 import { openShareLink } from "#shared/contracts/portfolio.ts";
 import { addWallPhoto } from "#shared/contracts/wall-photos.ts";

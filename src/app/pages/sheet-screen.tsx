@@ -1,5 +1,6 @@
 import { useMemo, useRef, useState } from "react";
-import { getCertificate, getProof, type Revision, type SheetView } from "#shared/contracts/revisions.ts";
+import { type AddressOf, addresses } from "#shared/contracts/addresses.ts";
+import type { getCertificate, getProof, Revision, SheetView } from "#shared/contracts/revisions.ts";
 import { waitsOnShop } from "#shared/lifecycle/note-states.ts";
 import { useNotes } from "@/features/notes/api/queries.ts";
 import { Balloons } from "@/features/notes/components/balloons.tsx";
@@ -23,6 +24,9 @@ import { useMedia } from "@/lib/use-media.ts";
 import { paths } from "../paths.ts";
 import { SheetDecisions } from "./sheet-decisions.tsx";
 
+const proofAt: AddressOf<typeof getProof> = addresses.getProof;
+const certificateAt: AddressOf<typeof getCertificate> = addresses.getCertificate;
+
 type SheetScreenProps = { readonly shop: string; readonly revision: Revision; readonly sheet: SheetView };
 
 /** The sheet with its notes and decisions, on a desk or in the hand. */
@@ -37,7 +41,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
   const desk = useNoteDesk(revision.id);
   const { notes, isWhole, isLoading, error, refetch } = useNotes(shop, revision.id);
   const pieceNames = useMemo(() => new Map(sheet.pieces.map(({ id, name }) => [id, name])), [sheet.pieces]);
-  const proofAddress = addressOf(getProof, { params: { shop, revisionId: revision.id } });
+  const proofAddress = addressOf(proofAt, { params: { shop, revisionId: revision.id } });
   const isClient = reader.side === "client";
 
   function showDrawing() {
@@ -155,7 +159,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
       revision={revision}
       shopName={job.shopName}
       pathOfSheet={(id) => paths.sheet(shop, id)}
-      certificateAddress={addressOf(getCertificate, { params: { shop, revisionId: revision.id } })}
+      certificateAddress={addressOf(certificateAt, { params: { shop, revisionId: revision.id } })}
       bannerRef={banner}
     />
   );

@@ -7,13 +7,15 @@ export function Menu({
   trigger,
   children,
   align = "end",
+  isOpenAtFirst = false,
 }: {
   readonly trigger: ReactNode;
   readonly children: ReactNode;
   readonly align?: "start" | "end";
+  readonly isOpenAtFirst?: boolean;
 }) {
   return (
-    <DropdownMenu.Root modal={false}>
+    <DropdownMenu.Root modal={false} defaultOpen={isOpenAtFirst}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
       <DropdownMenu.Portal>
         <DropdownMenu.Content

@@ -1,10 +1,19 @@
 import { type InfiniteData, useMutation, useQueryClient } from "@tanstack/react-query";
-import { addNote, editNote, editReply, type Note, replyToNote, setNoteState } from "#shared/contracts/notes.ts";
+import { type AddressOf, addresses } from "#shared/contracts/addresses.ts";
+import type * as contract from "#shared/contracts/notes.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
 import type { NoteDraft } from "../model/note-draft.ts";
 import { noteQueries } from "./queries.ts";
+
+type Note = contract.Note;
+
+const addAt: AddressOf<typeof contract.addNote> = addresses.addNote;
+const replyAt: AddressOf<typeof contract.replyToNote> = addresses.replyToNote;
+const stateAt: AddressOf<typeof contract.setNoteState> = addresses.setNoteState;
+const editAt: AddressOf<typeof contract.editNote> = addresses.editNote;
+const editReplyAt: AddressOf<typeof contract.editReply> = addresses.editReply;
 
 type Pages<Cursor> = InfiniteData<{ items: Note[]; next: string | null }, Cursor>;
 
@@ -43,7 +52,7 @@ export function useAddNote(shop: string, revisionId: string) {
   const onSuccess = useNoteLanding(shop, revisionId);
   return useMutation({
     mutationFn: ({ text, kind, anchor, shopOnly }: NoteDraft & Required<Pick<Note, "kind" | "anchor">>) =>
-      call(addNote, { params: { shop, revisionId }, body: { text, kind, anchor, shopOnly } }),
+      call(addAt, { params: { shop, revisionId }, body: { text, kind, anchor, shopOnly } }),
     onSuccess,
   });
 }
@@ -51,7 +60,7 @@ export function useAddNote(shop: string, revisionId: string) {
 export function useReplyToNote(shop: string, revisionId: string, noteId: string) {
   const onSuccess = useNoteLanding(shop, revisionId);
   return useMutation({
-    mutationFn: (text: string) => call(replyToNote, { params: { shop, noteId }, body: { text } }),
+    mutationFn: (text: string) => call(replyAt, { params: { shop, noteId }, body: { text } }),
     onSuccess,
   });
 }
@@ -59,7 +68,7 @@ export function useReplyToNote(shop: string, revisionId: string, noteId: string)
 export function useSetNoteState(shop: string, revisionId: string, noteId: string) {
   const onSuccess = useNoteLanding(shop, revisionId);
   return useMutation({
-    mutationFn: (state: "settled" | "open") => call(setNoteState, { params: { shop, noteId }, body: { state } }),
+    mutationFn: (state: "settled" | "open") => call(stateAt, { params: { shop, noteId }, body: { state } }),
     onSuccess,
   });
 }
@@ -67,7 +76,7 @@ export function useSetNoteState(shop: string, revisionId: string, noteId: string
 export function useEditNote(shop: string, revisionId: string, noteId: string) {
   const onSuccess = useNoteLanding(shop, revisionId);
   return useMutation({
-    mutationFn: (body: Pick<Note, "text" | "kind">) => call(editNote, { params: { shop, noteId }, body }),
+    mutationFn: (body: Pick<Note, "text" | "kind">) => call(editAt, { params: { shop, noteId }, body }),
     onSuccess,
   });
 }
@@ -76,7 +85,7 @@ export function useEditReply(shop: string, revisionId: string, noteId: string) {
   const onSuccess = useNoteLanding(shop, revisionId);
   return useMutation({
     mutationFn: ({ replyId, text }: { replyId: string; text: string }) =>
-      call(editReply, { params: { shop, noteId, replyId }, body: { text } }),
+      call(editReplyAt, { params: { shop, noteId, replyId }, body: { text } }),
     onSuccess,
   });
 }

@@ -1,15 +1,18 @@
 import { infiniteQueryOptions, useInfiniteQuery } from "@tanstack/react-query";
 import { useEffect, useMemo } from "react";
-import { listNotes } from "#shared/contracts/notes.ts";
+import { type AddressOf, addresses } from "#shared/contracts/addresses.ts";
+import type { listNotes } from "#shared/contracts/notes.ts";
 import { call } from "@/lib/api-client.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
+
+const notesAt: AddressOf<typeof listNotes> = addresses.listNotes;
 
 export const noteQueries = {
   ofRevision: (shop: string, revisionId: string) =>
     infiniteQueryOptions({
       queryKey: revisionKeys.notes(shop, revisionId),
       queryFn: ({ pageParam, signal }) =>
-        call(listNotes, {
+        call(notesAt, {
           params: { shop, revisionId },
           query: { limit: 100, ...(pageParam === null ? {} : { cursor: pageParam }) },
           signal,

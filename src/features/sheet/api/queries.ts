@@ -1,7 +1,11 @@
 import { queryOptions } from "@tanstack/react-query";
-import { getRevision, getSheet, type Revision } from "#shared/contracts/revisions.ts";
+import { type AddressOf, addresses } from "#shared/contracts/addresses.ts";
+import type { getRevision, getSheet, Revision } from "#shared/contracts/revisions.ts";
 import { call } from "@/lib/api-client.ts";
 import { revisionKeys } from "@/lib/revision-keys.ts";
+
+const revisionAt: AddressOf<typeof getRevision> = addresses.getRevision;
+const sheetAt: AddressOf<typeof getSheet> = addresses.getSheet;
 
 const preparingPollMs = 2000;
 const certificatePollMs = 5000;
@@ -14,7 +18,7 @@ export const sheetQueries = {
   revision: (shop: string, revisionId: string) =>
     queryOptions({
       queryKey: revisionKeys.revision(shop, revisionId),
-      queryFn: ({ signal }) => call(getRevision, { params: { shop, revisionId }, signal }),
+      queryFn: ({ signal }) => call(revisionAt, { params: { shop, revisionId }, signal }),
       refetchInterval: ({ state: { data } }) => {
         if (data?.state === "preparing") return preparingPollMs;
         return data?.state === "approved" && data.decision?.hasCertificate === false ? certificatePollMs : false;
@@ -23,6 +27,6 @@ export const sheetQueries = {
   sheet: (shop: string, revisionId: string) =>
     queryOptions({
       queryKey: revisionKeys.sheet(shop, revisionId),
-      queryFn: ({ signal }) => call(getSheet, { params: { shop, revisionId }, signal }),
+      queryFn: ({ signal }) => call(sheetAt, { params: { shop, revisionId }, signal }),
     }),
 };
