@@ -115,11 +115,16 @@ function laidLetter(
     x: foot.x + middle.x * Math.cos(radians) - middle.y * Math.sin(radians),
     y: foot.y + middle.x * Math.sin(radians) + middle.y * Math.cos(radians),
   };
-  return { letter, reads, path: own, laid: { x: exact(at.x), y: exact(at.y), turn: exact(foot.turn) } };
+  return {
+    letter,
+    reads,
+    path: own,
+    laid: { x: exact(at.x), y: exact(at.y), turn: Math.round(foot.turn * 100) / 100 + 0 },
+  };
 }
 
 /** To a thousandth of a mm, the kernel's grid. */
 const round = ({ x, y }: Point): Point => ({ x: Math.round(x * 1000) / 1000 + 0, y: Math.round(y * 1000) / 1000 + 0 });
 
-/** Places and turns are kept finer, so that equal spaces along an arc stay equal. */
+/** Places are kept finer, so that equal spaces along an arc stay equal. */
 const exact = (value: number): number => Math.round(value * 1e6) / 1e6 + 0;

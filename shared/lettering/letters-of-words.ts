@@ -41,3 +41,8 @@ export function nameOfLetter(text: string): string {
   const numbers = [...text].map((one) => `U+${(one.codePointAt(0) ?? 0).toString(16).toUpperCase().padStart(4, "0")}`);
   return `${text} (${numbers.join(" ")})`;
 }
+
+/** Which letter of the words it is as people count them, from 1 and without spaces; `letter` counts from 0 and with them. */
+export function numberOfLetter(words: string, letter: number): number {
+  return lettersOfWords(words).filter((one) => one.letter <= letter && !isSpace(one.text)).length;
+}

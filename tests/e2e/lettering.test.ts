@@ -67,7 +67,7 @@ it("words of the brief become letters, are set again in a bowl, and are read bac
   await dialog.waitFor({ state: "detached" });
 
   const list = page.getByRole("region", { name: "Pieces of B", exact: true });
-  await list.getByRole("button", { name: "Y, letter 6", exact: true }).waitFor();
+  await list.getByRole("button", { name: "Letter 6: Y", exact: true }).waitFor();
   await page.getByRole("button", { name: "Words: read as the brief, 11 letters" }).waitFor();
   const setAgain = list.getByRole("button", { name: "Set “ORRERY BOOKS” again" });
   await setAgain.click();

@@ -58,7 +58,7 @@ export function LetteringForm({ writing, action, canSend, onSend, onCancel, chil
       <LetteringFields draft={draft} set={set} unit={unit} />
       {children}
       {/* Within reach however long the form is. */}
-      <div className="sticky bottom-0 z-10 -mx-5 -mb-5 flex flex-wrap justify-end gap-3 border-t border-rule bg-sheet px-5 py-3 sm:-mx-6 sm:-mb-6 sm:px-6">
+      <div className="sticky -bottom-5 z-10 sm:-bottom-6 -mx-5 -mb-5 flex flex-wrap justify-end gap-3 border-t border-rule bg-sheet px-5 py-3 sm:-mx-6 sm:-mb-6 sm:px-6">
         <Button onClick={onCancel}>Cancel</Button>
         <Button type="submit" disabled={!canSend}>
           {action}

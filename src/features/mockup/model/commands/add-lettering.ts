@@ -1,6 +1,7 @@
 import type { Box, Placement } from "#shared/geometry/path.ts";
 import { movedLetter } from "#shared/lettering/common-movement.ts";
 import type { LaidLetter } from "#shared/lettering/lay-words.ts";
+import { numberOfLetter } from "#shared/lettering/letters-of-words.ts";
 import type { Lettering, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
 import { exactCoordinateOf, exactScaleOf, mostLayers, mostLettering, mostPieces, turnOf } from "../limits.ts";
@@ -40,7 +41,7 @@ export function addLettering(
     mirrored: false,
   };
   const pieces = letters.map((letter) =>
-    pieceOfLetter(letter, { id, letteringId: lettering.id, placement: movedLetter({ laid: letter.laid, movement }) }),
+    pieceOfLetter(letter, { id, lettering, placement: movedLetter({ laid: letter.laid, movement }) }),
   );
   if (pieces.length === 0 || !pieces.every((piece) => piece !== null)) return document;
   const added = withPieces(document, { pieces, id, into });
@@ -61,17 +62,17 @@ function withPieces(
   return { ...document, layers: [...document.layers, newLayer(layer, { key, pieces, id: `${id}-h`, document, site })] };
 }
 
-/** A letter as a piece; null where it would lie beyond what a document holds. */
+/** A letter of a lettering as a piece; null where it would lie beyond what a document holds. */
 export function pieceOfLetter(
   { letter, reads, path, laid }: LaidLetter,
-  { id, letteringId, placement }: { id: string; letteringId: string; placement: Placement },
+  { id, lettering, placement }: { id: string; lettering: Lettering; placement: Placement },
 ): Piece | null {
   const held = heldPlacement(placement);
   if (!held) return null;
   return {
     id: `${id}-${letter + 1}`,
-    name: nameOfLetterPiece({ letter, reads }),
-    source: { kind: "lettering", letteringId, letter, laid },
+    name: nameOfLetterPiece(lettering.words, { letter, reads }),
+    source: { kind: "lettering", letteringId: lettering.id, letter, laid },
     path: path.map(({ start, segments }) => ({ start, segments: [...segments] })),
     placement: held,
     reads,
@@ -79,8 +80,8 @@ export function pieceOfLetter(
 }
 
 /** What a letter is called in lists until somebody gives it a name. */
-export const nameOfLetterPiece = ({ letter, reads }: Pick<LaidLetter, "letter" | "reads">): string =>
-  `${reads}, letter ${letter + 1}`;
+export const nameOfLetterPiece = (words: string, { letter, reads }: Pick<LaidLetter, "letter" | "reads">): string =>
+  `Letter ${numberOfLetter(words, letter)}: ${reads}`;
 
 /** A placement as documents keep it; null for one that they can't hold. */
 export function heldPlacement({ mirrored, ...to }: Placement): Placement | null {

@@ -37,7 +37,7 @@ export function setLetteringAgain(
   const match = matchLetters(before.words, lettering.words);
   let { layers } = document;
   for (const [index, copy] of copies.entries()) {
-    const plan = planOf(copy, { letters, match, putBack, id: index === 0 ? id : `${id}-${index}` });
+    const plan = planOf(copy, { before, lettering, letters, match, putBack, id: index === 0 ? id : `${id}-${index}` });
     if (plan === null) return document;
     layers = layers.map((layer) => layerSetAgain(layer, plan));
   }
@@ -58,11 +58,13 @@ type Plan = {
 function planOf(
   copy: readonly LetterPiece[],
   {
+    before,
+    lettering,
     letters,
     match,
     putBack,
     id,
-  }: { letters: readonly LaidLetter[]; match: readonly (number | null)[]; putBack: boolean; id: string },
+  }: Required<SetAgain> & { before: Lettering; match: readonly (number | null)[] },
 ): Plan | null {
   const movement = movementOfLetters(copy);
   const [first] = copy;
@@ -78,11 +80,14 @@ function planOf(
     if (old) {
       const to = placementAgain(old, letter, { movement, here });
       if (!to) return null;
-      kept.set(old.piece.id, { motion: motionBetween(old.piece.placement, to), after: withLetter(old, letter) });
+      kept.set(old.piece.id, {
+        motion: motionBetween(old.piece.placement, to),
+        after: withLetter(old, letter, [before.words, lettering.words]),
+      });
       last = { id: old.piece.id, layerKey: old.layer.key };
     } else if (was === null || putBack) {
       const placement = movedLetter({ laid: letter.laid, movement: here });
-      const piece = pieceOfLetter(letter, { id, letteringId: first.source.letteringId, placement });
+      const piece = pieceOfLetter(letter, { id, lettering, placement });
       if (!piece) return null;
       added.push({ piece, layerKey: last.layerKey, follows: last.id });
       last = { id: piece.id, layerKey: last.layerKey };
@@ -102,13 +107,15 @@ function placementAgain(
 }
 
 /** The letter's own fields; what it is called and what it is said to read stay when they were changed. */
-function withLetter({ source: was }: LetterPiece, { letter, reads, path, laid }: LaidLetter): (piece: Piece) => Piece {
+function withLetter(
+  { source: was }: LetterPiece,
+  { letter, reads, path, laid }: LaidLetter,
+  [before, after]: readonly [string, string],
+): (piece: Piece) => Piece {
+  const usual = nameOfLetterPiece(before, { letter: was.letter, reads });
   return (piece) => ({
     ...piece,
-    name:
-      piece.name === nameOfLetterPiece({ letter: was.letter, reads })
-        ? nameOfLetterPiece({ letter, reads })
-        : piece.name,
+    name: piece.name === usual ? nameOfLetterPiece(after, { letter, reads }) : piece.name,
     source: { ...was, letter, laid },
     path: path.map(({ start, segments }) => ({ start, segments: [...segments] })),
   });

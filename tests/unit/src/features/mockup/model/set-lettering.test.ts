@@ -90,9 +90,9 @@ describe("adding lettering", () => {
     const document = added({ words: "AN O" });
     expect(document.layers.map(({ key, name }) => [key, name])).toEqual([["B", "Words"]]);
     expect(pieces(document).map(({ reads: text, name }) => [text, name])).toEqual([
-      ["A", "A, letter 1"],
-      ["N", "N, letter 2"],
-      ["O", "O, letter 4"],
+      ["A", "Letter 1: A"],
+      ["N", "Letter 2: N"],
+      ["O", "Letter 3: O"],
     ]);
     const box = boxOfPieces(document, idsOf(document));
     expect((box?.x ?? 0) + (box?.width ?? 0) / 2).toBeCloseTo(300, 3);
@@ -266,7 +266,7 @@ describe("setting again", () => {
     expect([0, 1, 2, 3, 4].map((letter) => at(shorter, letter).id)).toEqual(
       [7, 8, 9, 10, 11].map((letter) => at(next, letter).id),
     );
-    expect(at(shorter, 0).name).toBe("B, letter 1");
+    expect(at(shorter, 0).name).toBe("Letter 1: B");
   });
 
   it("drops the shift of a letter that is another now", () => {
