@@ -21,7 +21,9 @@ import { fitSign, paperScaleAt, usualMargins } from "../canvas/view-of-board.ts"
 import { useStandings } from "../editor/use-standings.ts";
 import { useEngine } from "../engine/use-engine.ts";
 import { dryFitContextOf } from "../model/dry-fit-context.ts";
+import { WordButton } from "./cell-controls.tsx";
 import { CostPanel, type CostPanelProps } from "./cost-panel.tsx";
+import { DraftsDialog } from "./drafts-dialog.tsx";
 import { FindingsPanel } from "./findings-panel.tsx";
 import { WallReadOnly } from "./wall-read-only.tsx";
 
@@ -42,6 +44,7 @@ type MockupReadOnlyProps = {
 /** The mockup to look at: the picture, the schedule and the dry fit, for a narrow window and for those who may not change it. */
 export function MockupReadOnly(props: MockupReadOnlyProps) {
   const { shop, unit, job, jobPath, mockup, limits, stock, pricesPath, why } = props;
+  const [draftsOpen, setDraftsOpen] = useState(false);
   const [view, setView] = useState<DrawingView | null>(null);
   const [sideView, setSideView] = useState<DrawingView | null>(null);
   const frame = useRef<HTMLDivElement>(null);
@@ -83,8 +86,20 @@ export function MockupReadOnly(props: MockupReadOnlyProps) {
         {job.client.name}, {job.title}, mockup
       </h1>
       <p className="text-base text-graphite">
-        {why} <TextLink to={jobPath}>To the job</TextLink>
+        {why} <TextLink to={jobPath}>To the job</TextLink>{" "}
+        <WordButton inText className="ml-2" onClick={() => setDraftsOpen(true)}>
+          Drafts
+        </WordButton>
       </p>
+      <DraftsDialog
+        open={draftsOpen}
+        onOpenChange={setDraftsOpen}
+        shop={shop}
+        jobId={job.id}
+        unit={unit}
+        document={document}
+        onGoBack={null}
+      />
       {failure && (
         <Notice tone="error" title="The drawing could not be made.">
           {failure}
