@@ -21,7 +21,6 @@ import { registerStockRoutes } from "./stock.ts";
 import { registerSystemRoutes } from "./system.ts";
 import { registerTeamRoutes } from "./team.ts";
 import { registerWallPhotoRoutes } from "./wall-photos.ts";
-import { registerWallPhotoRoutes } from "./wall-photos.ts";
 
 /** Every route of the application, one line a noun. */
 export function registerRoutes(routes: Routes): void {
@@ -46,6 +45,5 @@ export function registerRoutes(routes: Routes): void {
   registerRevisionDocumentRoutes(routes);
   registerSetAsideRoutes(routes);
   registerStockRoutes(routes);
-  registerWallPhotoRoutes(routes);
   registerWallPhotoRoutes(routes);
 }
