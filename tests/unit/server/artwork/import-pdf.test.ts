@@ -113,6 +113,73 @@ describe("what a page paints", () => {
   });
 });
 
+describe("groups, masks and drawn letters", () => {
+  /** A form that is a transparency group (ISO 32000-1, 11.4.7). */
+  const group = (file: PDFDocument, content: string) =>
+    file.context.register(
+      file.context.stream(content, {
+        Type: "XObject",
+        Subtype: "Form",
+        BBox: [0, 0, 400, 300],
+        Group: { S: "Transparency", CS: "DeviceRGB" },
+      }),
+    );
+
+  it("a faded group is faded as a whole: what lies over something in it hides it", async () => {
+    const prepare = (page: PDFPage, file: PDFDocument) => {
+      const form = group(file, "1 0 0 rg 100 50 72 72 re f 0 0 1 rg 136 50 72 72 re f");
+      page.node.set(
+        PDFName.of("Resources"),
+        file.context.obj({ XObject: { Fm: form }, ExtGState: { Half: { ca: 0.5 } } }),
+      );
+    };
+    const { colours } = await taken(await pdfOf("/Half gs\n/Fm Do", { prepare }));
+    expect(colours.map(({ colour, areaMm2 }) => [colour, areaMm2.toFixed(1)])).toEqual([
+      ["#8080FF", "645.2"],
+      ["#FF8080", "322.6"],
+    ]);
+  });
+
+  it("a soft mask lets through what it is white under", async () => {
+    const prepare = (page: PDFPage, file: PDFDocument) => {
+      const mask = { S: "Luminosity", G: group(file, "1 g 100 50 36 72 re f") };
+      page.node.set(
+        PDFName.of("Resources"),
+        file.context.obj({ ExtGState: { Masked: { SMask: mask }, Plain: { SMask: "None" } } }),
+      );
+    };
+    const masked = await taken(await pdfOf(`/Masked gs\n${square}`, { prepare }));
+    expect(areaOf(masked)).toBeCloseTo(322.58, 1);
+    const ended = await taken(await pdfOf(`/Masked gs\n/Plain gs\n${square}`, { prepare }));
+    expect(areaOf(ended)).toBeCloseTo(645.16, 1);
+  });
+
+  it("letters that a font draws by operators stand where the text has them", async () => {
+    const prepare = (page: PDFPage, file: PDFDocument) => {
+      const a = file.context.register(file.context.stream("1000 0 0 0 750 750 d1 0 0 750 750 re f"));
+      const font = {
+        Type: "Font",
+        Subtype: "Type3",
+        FontBBox: [0, 0, 750, 750],
+        FontMatrix: [0.001, 0, 0, 0.001, 0, 0],
+        CharProcs: { square: a },
+        Encoding: { Type: "Encoding", Differences: [97, "square"] },
+        FirstChar: 97,
+        LastChar: 97,
+        Widths: [1000],
+        Resources: {},
+      };
+      page.node.set(PDFName.of("Resources"), file.context.obj({ Font: { T3: font } }));
+    };
+    // Two letters of 40 points, 4 more between them; each a square of 30 points.
+    const { pieces } = await taken(await pdfOf("BT\n/T3 40 Tf\n4 Tc\n1 0 0 rg\n100 50 Td\n(aa) Tj\nET", { prepare }));
+    expect(pieces.map(({ box }) => [box.x, box.width].map((mm) => (mm / mmPerPoint).toFixed(2)))).toEqual([
+      ["100.00", "30.00"],
+      ["144.00", "30.00"],
+    ]);
+  });
+});
+
 describe("what a page can't give is said", () => {
   it("lines of no width", async () => {
     expect(codesOf(await taken(await pdfOf(`${square}\n0 w\n10 10 m\n90 90 l\nS`)))).toEqual(["pdf.hairline"]);
