@@ -9,7 +9,9 @@ export const paths = {
   account: () => "/account",
   share: (token: string) => `/share/${token}`,
   bench: (shop: string) => `/shop/${shop}/bench`,
-  job: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}`,
+  /** With the artwork whose tracing is to be open. */
+  job: (shop: string, jobId: string, tracing?: string) =>
+    `/shop/${shop}/jobs/${jobId}${tracing === undefined ? "" : `?trace=${tracing}#artwork`}`,
   mockup: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}/mockup`,
   cutPlan: (shop: string, jobId: string) => `/shop/${shop}/jobs/${jobId}/cut-plan`,
   compare: (shop: string, jobId: string, before: string, after: string) =>

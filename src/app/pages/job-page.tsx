@@ -1,5 +1,5 @@
 import { useQuery } from "@tanstack/react-query";
-import { useNavigate, useParams } from "react-router-dom";
+import { useNavigate, useParams, useSearchParams } from "react-router-dom";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import { ArtworkPart } from "@/features/artwork/components/artwork-part.tsx";
@@ -24,6 +24,7 @@ export function JobPage() {
   const { shop, side } = useReader();
   const { jobId = "" } = useParams();
   const navigate = useNavigate();
+  const [search] = useSearchParams();
   const query = useQuery(jobQuery(shop.slug, jobId));
   useLiveJob(shop.slug, query.isSuccess ? jobId : null);
   if (query.isPending) {
@@ -78,6 +79,7 @@ export function JobPage() {
                 shop={slug}
                 jobId={jobId}
                 unit={shop.unit}
+                tracing={search.get("trace")}
                 mayAdd={staff ? job.can.editMockup : job.can.editBrief}
               />
             )}

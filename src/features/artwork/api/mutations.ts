@@ -1,5 +1,6 @@
 import { useMutation, useQueryClient } from "@tanstack/react-query";
 import * as contract from "#shared/contracts/artworks.ts";
+import type { TraceChoices } from "#shared/tracing/trace-choices.ts";
 import { call } from "@/lib/api-client.ts";
 import { keys } from "@/lib/query-keys.ts";
 
@@ -12,6 +13,20 @@ export function useSetTrueSize(shop: string, jobId: string, artworkId: string) {
   return useMutation({
     mutationFn: (body: { side: "width" | "height"; lengthMm: number }) =>
       call(contract.setTrueSize, { params: { shop, artworkId }, body }),
+    onSuccess: useRefreshJob(shop, jobId),
+  });
+}
+
+export function useTraceArtwork(shop: string, jobId: string, artworkId: string) {
+  return useMutation({
+    mutationFn: (body: TraceChoices) => call(contract.traceArtwork, { params: { shop, artworkId }, body }),
+    onSuccess: useRefreshJob(shop, jobId),
+  });
+}
+
+export function useCancelTrace(shop: string, jobId: string, artworkId: string) {
+  return useMutation({
+    mutationFn: () => call(contract.cancelTrace, { params: { shop, artworkId } }),
     onSuccess: useRefreshJob(shop, jobId),
   });
 }

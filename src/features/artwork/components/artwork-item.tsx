@@ -8,6 +8,9 @@ import { FileButton } from "@/components/ui/link-button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { addressOf } from "@/lib/api-client.ts";
 import { counted, formatBytes, formatInstant } from "@/lib/format.ts";
+import { TraceFigures } from "./trace-figures.tsx";
+import { TraceForm } from "./trace-form.tsx";
+import { TraceUnderWay } from "./trace-under-way.tsx";
 import { TrueSizeForm } from "./true-size-form.tsx";
 
 /** One artwork: what it became, at which size, and what to look at. */
@@ -16,15 +19,17 @@ export function ArtworkItem({
   jobId,
   unit,
   artwork,
+  tracingAtFirst,
   onRemove,
 }: {
   readonly shop: string;
   readonly jobId: string;
   readonly unit: LengthUnit;
   readonly artwork: Artwork;
+  readonly tracingAtFirst: boolean;
   readonly onRemove: () => void;
 }) {
-  const [sizing, setSizing] = useState(false);
+  const [open, setOpen] = useState<"size" | "trace" | null>(tracingAtFirst ? "trace" : null);
   const { name, state, widthMm, heightMm, colours, warnings, refusal } = artwork;
   const pieces = colours.reduce((sum, { pieces: count }) => sum + count, 0);
   return (
@@ -75,13 +80,29 @@ export function ArtworkItem({
           </ul>
         </Notice>
       )}
-      {sizing ? (
-        <TrueSizeForm shop={shop} jobId={jobId} unit={unit} artwork={artwork} onDone={() => setSizing(false)} />
+      {artwork.trace?.record && (
+        <TraceFigures
+          colours={colours.length}
+          pieces={pieces}
+          nodes={artwork.trace.record.nodes}
+          smallestMm2={artwork.trace.record.smallestMm2}
+        />
+      )}
+      <TraceUnderWay shop={shop} jobId={jobId} artwork={artwork} />
+      {open === "size" ? (
+        <TrueSizeForm shop={shop} jobId={jobId} unit={unit} artwork={artwork} onDone={() => setOpen(null)} />
+      ) : open === "trace" && artwork.can.trace ? (
+        <TraceForm shop={shop} jobId={jobId} artwork={artwork} onDone={() => setOpen(null)} />
       ) : (
         <div className="mt-3 flex flex-wrap gap-2">
           {state === "ready" && artwork.can.change && (
-            <Button size="small" aria-label={`Set the true size of ${name}`} onClick={() => setSizing(true)}>
+            <Button size="small" aria-label={`Set the true size of ${name}`} onClick={() => setOpen("size")}>
               Set the true size
+            </Button>
+          )}
+          {artwork.can.trace && (
+            <Button size="small" aria-label={`Trace ${name} again`} onClick={() => setOpen("trace")}>
+              Trace again
             </Button>
           )}
           <FileButton

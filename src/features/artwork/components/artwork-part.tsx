@@ -19,17 +19,21 @@ export function ArtworkPart({
   jobId,
   unit,
   mayAdd,
+  tracing = null,
 }: {
   readonly shop: string;
   readonly jobId: string;
   readonly unit: LengthUnit;
   readonly mayAdd: boolean;
+  /** The picture whose tracing is to be open from the start. */
+  readonly tracing?: string | null;
 }) {
   const [removing, setRemoving] = useState<Artwork | null>(null);
   const remove = useRemoveArtwork(shop, jobId);
   const artworks = useInfiniteQuery({
     ...artworksQuery(shop, jobId),
-    refetchInterval: ({ state }) => (itemsOf(state.data).some((item) => item.state === "importing") ? 1500 : false),
+    refetchInterval: ({ state }) =>
+      itemsOf(state.data).some((item) => item.state === "importing" || item.trace?.asked) ? 1500 : false,
   });
   const rows = itemsOf(artworks.data);
   return (
@@ -58,6 +62,7 @@ export function ArtworkPart({
               jobId={jobId}
               unit={unit}
               artwork={artwork}
+              tracingAtFirst={artwork.id === tracing}
               onRemove={() => setRemoving(artwork)}
             />
           ))}

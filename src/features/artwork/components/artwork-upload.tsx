@@ -71,7 +71,7 @@ export function ArtworkUpload({ shop, jobId }: { readonly shop: string; readonly
       ) : (
         <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
           <Button onClick={() => input.current?.click()}>Bring in a file</Button>
-          <p className="text-sm text-graphite">or drop it here. SVG or PDF; the file is kept as it came.</p>
+          <p className="text-sm text-graphite">or drop it here. SVG, PDF, PNG or JPEG; the file is kept as it came.</p>
         </div>
       )}
     </fieldset>
