@@ -1,7 +1,7 @@
 import type { MockupDocument, WallPhoto } from "#shared/mockup/document.ts";
 import { signBox } from "#shared/stack/sign-box.ts";
 import { formatFine, formatLengthWithUnit } from "#shared/units/format-length.ts";
-import type { LengthUnit } from "#shared/units/length.ts";
+import { inchesToMm, type LengthUnit } from "#shared/units/length.ts";
 import { isDoubtful, likelyErrorAt, type WallReading } from "#shared/wall/read-wall-photo.ts";
 import { sheetSizeMm } from "#shared/wall/sheet-on-wall.ts";
 
@@ -55,3 +55,7 @@ function gapWords(side: "right" | "left" | "below" | "above", gap: number, unit:
   const length = formatLengthWithUnit(gap, unit);
   return side === "right" || side === "left" ? `${length} ${side} of` : `${length} ${side}`;
 }
+
+/** How far the arrow keys move the sign along the wall, mm: round lengths of the person's unit. */
+export const wallStepsOf = (unit: LengthUnit): { readonly usual: number; readonly fine: number } =>
+  unit === "mm" ? { usual: 10, fine: 1 } : { usual: inchesToMm(1 / 2), fine: inchesToMm(1 / 16) };

@@ -6,7 +6,7 @@ import { signBox } from "#shared/stack/sign-box.ts";
 import { mapPoint } from "#shared/wall/homography.ts";
 import type { WallReading } from "#shared/wall/read-wall-photo.ts";
 import { useDesk } from "../editor/desk-context.ts";
-import { placeOnWallWords } from "../model/wall-words.ts";
+import { placeOnWallWords, wallStepsOf } from "../model/wall-words.ts";
 import { seenAt, warpOf } from "../model/warp.ts";
 
 type SignHandleProps = {
@@ -64,7 +64,8 @@ export function SignHandle({ photo, reading, onWall, shown, onDrag, onHang }: Si
     const way = arrows[event.key];
     if (!way) return;
     event.preventDefault();
-    const by = event.shiftKey ? 1 : 10;
+    const steps = wallStepsOf(unit);
+    const by = event.shiftKey ? steps.fine : steps.usual;
     onHang({ x: photo.at.x + way.x * by, y: photo.at.y + way.y * by }, true);
   }
 

@@ -1,4 +1,4 @@
-import type { CSSProperties } from "react";
+import { type CSSProperties, memo } from "react";
 import type { OnWall } from "#shared/drawing/on-wall.ts";
 import type { Board, WallPhoto } from "#shared/mockup/document.ts";
 import type { WallReading } from "#shared/wall/read-wall-photo.ts";
@@ -30,13 +30,16 @@ export function SignOnPhoto({ onWall, reading, at, board, shown }: SignOnPhotoPr
         };
         return (
           <div key={planeKey(index)} className="absolute top-0 left-0 origin-top-left" style={style}>
-            <DrawingSvg list={list} title="" className="block size-full" />
+            <Plane list={list} title="" className="block size-full" />
           </div>
         );
       })}
     </div>
   );
 }
+
+/** Under a hand the planes move and nothing in them changes. */
+const Plane = memo(DrawingSvg);
 
 /** Planes keep their order, the wall's first. */
 const planeKey = (index: number): string => `plane ${index}`;

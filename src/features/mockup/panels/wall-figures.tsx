@@ -26,8 +26,8 @@ export function WallFigures({ photo, step }: { readonly photo: WallPhoto; readon
             edit({ label: "Choose the sheet", change: (before) => setSheet(before, { paper }) });
           }}
         >
-          <option value="A4">A4, 210 × 297 mm</option>
-          <option value="Letter">Letter, 8 1/2 × 11″</option>
+          <option value="A4">A4</option>
+          <option value="Letter">Letter</option>
         </Select>
         <Select
           label="It is taped"

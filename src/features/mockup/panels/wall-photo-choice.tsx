@@ -99,8 +99,9 @@ export function WallPhotoChoice({ shop, jobId, onChoose }: WallPhotoChoiceProps)
             Bring in a photo
           </Button>
           <p className="text-sm text-graphite">
-            or drop it here: JPEG or PNG. Tape an A4 or Letter sheet flat and level on the wall before you take it, and
-            keep the whole photo, uncropped.
+            {photo
+              ? "or drop it here: JPEG or PNG."
+              : "or drop it here: JPEG or PNG. Tape an A4 or Letter sheet flat and level on the wall before you take it, and keep the whole photo, uncropped."}
           </p>
         </div>
       )}
