@@ -1,6 +1,7 @@
 import { regionAreaMm2 } from "../geometry/area.ts";
 import { connectedPieces } from "../geometry/connected.ts";
 import type { Kernel } from "../geometry/kernel.ts";
+import { tracerOf } from "./drawn-rings.ts";
 import { leastOverlapMm2, type Named, overlaps } from "./join-outlines.ts";
 import { coveredBy, type Outline, type Shaped, shapedFromRegion } from "./shaped.ts";
 
@@ -31,7 +32,8 @@ export function cutAway(
     const rest = connectedPieces(kernel.difference(region, tool)).filter((part) => regionAreaMm2(part) >= crumbMm2);
     const takenMm2 = regionAreaMm2(region) - rest.reduce((sum, part) => sum + regionAreaMm2(part), 0);
     if (takenMm2 <= leastOverlapMm2) return [];
+    const trace = tracerOf([outline]);
     const pieces = connectedPieces(region).length === 1 ? rest : rest.length === 0 ? [] : [rest.flat()];
-    return [{ id: outline.id, left: pieces.flatMap((part) => shapedFromRegion(part) ?? []), takenMm2 }];
+    return [{ id: outline.id, left: pieces.flatMap((part) => shapedFromRegion(part, trace) ?? []), takenMm2 }];
   });
 }

@@ -3,6 +3,7 @@ import { boxesOverlap, boxOfRegion } from "../geometry/box.ts";
 import { connectedPieces } from "../geometry/connected.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Region } from "../geometry/path.ts";
+import { tracerOf } from "./drawn-rings.ts";
 import { coveredBy, type Outline, type Shaped, shapedFromRegion } from "./shaped.ts";
 
 export type Named<T> = T & { readonly id: string };
@@ -30,13 +31,14 @@ export function joinOutlines(outlines: readonly Named<Outline>[], kernel: Kernel
     const ids = [...own.flatMap((group) => group.ids), id];
     groups = [...others, { ids, region: own.flatMap((group) => group.region) }];
   }
+  const trace = tracerOf(outlines);
   const order = new Map(outlines.map(({ id }, index) => [id, index]));
   return groups
     .filter(({ ids }) => ids.length > 1)
     .map(({ ids, region }) => ({ ids: ids.toSorted((a, b) => (order.get(a) ?? 0) - (order.get(b) ?? 0)), region }))
     .toSorted((a, b) => (order.get(a.ids[0] ?? "") ?? 0) - (order.get(b.ids[0] ?? "") ?? 0))
     .flatMap(({ ids, region }) => {
-      const shaped = shapedFromRegion(region);
+      const shaped = shapedFromRegion(region, trace);
       return shaped ? [{ ids, shaped }] : [];
     });
 }

@@ -15,7 +15,7 @@ export type Shaped = Outline;
 /** A quarter of what other figures are flattened to, so that curves fitted again stay as true as those. */
 export const flatMm = 0.005;
 /** How far a curve fitted again may run from what was worked out. */
-const fitMm = 0.02;
+export const fitMm = 0.02;
 
 /** A plane that is the board's own. */
 export const asOnBoard: Placement = { x: 0, y: 0, turn: 0, scale: 1, mirrored: false };
@@ -32,9 +32,9 @@ export function tracedPath(region: Region): Path {
   return region.map((ring) => fitRing(ring, fitMm));
 }
 
-/** Straight rings on the board as an outline with curves where they follow one, about its own middle; null for none. */
-export function shapedFromRegion(region: Region): Shaped | null {
-  return shapedAboutMiddle({ path: tracedPath(region), placement: asOnBoard });
+/** Straight rings on the board as an outline with curves, as `trace` finds them, about its own middle; null for none. */
+export function shapedFromRegion(region: Region, trace: (region: Region) => Path = tracedPath): Shaped | null {
+  return shapedAboutMiddle({ path: trace(region), placement: asOnBoard });
 }
 
 /** The same outline with its origin in the middle of its box, to a thousandth of a mm, there where it lies; null without rings. */

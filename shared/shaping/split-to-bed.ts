@@ -1,11 +1,12 @@
 import { regionCentroid } from "../geometry/area.ts";
+import { boxOfPoints } from "../geometry/box.ts";
 import { connectedPieces } from "../geometry/connected.ts";
 import { type CutLine, cutPath } from "../geometry/cut-path.ts";
 import { flattenPath } from "../geometry/flatten.ts";
 import type { Kernel } from "../geometry/kernel.ts";
 import type { Path, Point, Region } from "../geometry/path.ts";
 import { placePath, unplacePoint } from "../geometry/placement.ts";
-import { convexHull, smallestBox } from "../geometry/smallest-box.ts";
+import { convexHull, type SmallestBox, smallestBox } from "../geometry/smallest-box.ts";
 import { fitOnBed } from "../materials/bed-fit.ts";
 import { partsOfOutline } from "./parts-of-outline.ts";
 import { coveredBy, type Outline, type Shaped, shapedAboutMiddle } from "./shaped.ts";
@@ -83,13 +84,20 @@ function frameOf({ path, placement }: Outline, seams: SeamWay): Frame | null {
   const hull = convexHull(flattenPath(placePath(path, placement)).flat());
   const box = smallestBox([hull]);
   if (!box || box.width === 0) return null;
-  const radians = ((seams === "across" ? box.turn : 0) * Math.PI) / 180;
+  const radians = ((seams === "across" ? turnAcross(hull, box) : 0) * Math.PI) / 180;
   // Parts are numbered along it: from the left, and those of an upright piece from the top.
   const forth = Math.cos(radians) < -1e-9 ? -1 : 1;
   const along = seams === "level" ? { x: 0, y: 1 } : { x: forth * Math.cos(radians), y: forth * Math.sin(radians) };
   const [from, to] = extent(hull.map(({ x, y }) => x * along.x + y * along.y));
   const [low, high] = extent(hull.map(({ x, y }) => y * along.x - x * along.y));
   return { along, from, length: to - from, low, width: high - low };
+}
+
+/** Which way the longer side runs, degrees: upright or level for a piece that is hardly larger so, as a disc or a square on its side. */
+function turnAcross(hull: readonly Point[], { length, width, turn }: SmallestBox): number {
+  const upright = boxOfPoints(hull);
+  if (!upright || upright.width * upright.height > length * width * 1.01) return turn;
+  return upright.width >= upright.height ? 0 : 90;
 }
 
 const extent = (values: readonly number[]): readonly [number, number] => [

@@ -8,6 +8,7 @@ import { flattenPath } from "#shared/geometry/flatten.ts";
 import type { Kernel } from "#shared/geometry/kernel.ts";
 import { nodeCount } from "#shared/geometry/node-count.ts";
 import type { Path, Placement, Region } from "#shared/geometry/path.ts";
+import { pathToText } from "#shared/geometry/path-text.ts";
 import { placePath } from "#shared/geometry/placement.ts";
 import { circlePath, ellipsePath, polygonRing, rectanglePath, roundedRectanglePath } from "#shared/geometry/shapes.ts";
 import { cutAway } from "#shared/shaping/cut-away.ts";
@@ -206,6 +207,15 @@ describe("cutting away", () => {
     expect(Math.abs(areaOf(cut?.left[0] ?? at([])) - (2000 - taken))).toBeLessThan(0.1);
   });
 
+  it("keeps the curves of a ring that it does not touch", () => {
+    const disc = { id: "disc", ...at(circlePath({ x: 0, y: 0 }, 132), { x: 300, y: 150 }) };
+    const [cut] = cutAway([disc], { by: [at(circlePath({ x: 310, y: 160 }, 20))], roomMm: 0.3 }, kernel);
+    const [left] = cut?.left ?? [];
+    expect(left?.path).toHaveLength(2);
+    expect(left?.path.map((ring) => pathToText([ring], 6))).toContain(pathToText(disc.path, 6));
+    expect(left?.placement).toEqual(disc.placement);
+  });
+
   it("leaves two pieces where the cut goes through, each about its own middle", () => {
     const [cut] = cutAway(
       [bar],
@@ -300,6 +310,12 @@ describe("splitting to the bed", () => {
         { x: 700, y: 450 },
       ],
     ]);
+  });
+
+  it("has upright seams in a disc, which is as long either way", () => {
+    const disc = at(circlePath({ x: 0, y: 0 }, 400), { x: 500, y: 500, turn: 33 });
+    const [seam] = splitToBed(disc, { widthMm: 900, heightMm: 500 }, even, kernel)?.seams ?? [];
+    expect(seam?.map(({ x }) => Math.round(x))).toEqual([500, 500]);
   });
 
   it("moves the seam, and says which part is too large then", () => {
