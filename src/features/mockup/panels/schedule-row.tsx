@@ -43,14 +43,20 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
     edit({ label: `Raise ${key}`, change: (before) => raiseLayer(before, { key, ...caught }) });
   }
 
+  function chooseThis() {
+    if (!isChosen) choose(chooseLayer(document, key));
+  }
+
   return (
     <tr
       aria-current={isChosen || undefined}
       className={cx((isChosen || isBeside) && "bg-indigo/8", layer.hidden && "opacity-70")}
-      onFocusCapture={({ target }) => {
-        // Its key chooses when it is pressed, alone or beside others.
-        if (!isChosen && !target.hasAttribute("data-chooses")) choose(chooseLayer(document, key));
+      onPointerDownCapture={({ target }) => {
+        // Its key chooses when the press ends, alone or beside others.
+        if (!(target instanceof Element && target.closest("[data-chooses]"))) chooseThis();
       }}
+      // Not on focus: who goes from the list of pieces to the bar by Tab passes here with what is chosen.
+      onInputCapture={chooseThis}
     >
       <DeskRowHead>
         <button

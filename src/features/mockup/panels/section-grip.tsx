@@ -56,6 +56,8 @@ export function SectionGrip(props: SectionGripProps) {
     const towards = stepOf[event.key];
     if (towards === undefined) return;
     event.preventDefault();
+    // Not on focus: Tab leads past here with what is chosen.
+    props.onTake();
     props.onStep(towards, event.shiftKey);
   }
 
@@ -75,7 +77,6 @@ export function SectionGrip(props: SectionGripProps) {
       onPointerUp={handlePointerUp}
       onPointerCancel={giveUp}
       onKeyDown={handleKeyDown}
-      onFocus={props.onTake}
       className={cx("absolute cursor-ew-resize touch-none", isChosen && "border border-dashed border-indigo")}
       style={place}
     />
