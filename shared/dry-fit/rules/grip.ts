@@ -1,19 +1,22 @@
+import { regionCentroid } from "../../geometry/area.ts";
 import { lengthsEqual } from "../../geometry/tolerance.ts";
 import { barrelAddsUp, nearestBarrel } from "../../hardware/barrel-offset.ts";
 import { heldOffsetMm } from "../../hardware/standoff-parts.ts";
 import type { Hardware } from "../../mockup/document.ts";
+import { holdsPiece } from "../../stack/held-piece.ts";
 import { formatFine, formatLengthWithUnit } from "../../units/format-length.ts";
 import type { Finding } from "../finding.ts";
 import { type GripFault, gripFault, overlapFault } from "../grip-fault.ts";
 import { gripMends } from "../mends/grip-mends.ts";
 import { heldPlaces } from "../on-panel.ts";
+import { partsOfPiece } from "../parts-of-piece.ts";
 import { foundBy, type Rule, type RuleInput } from "../rule.ts";
 import { pieceAt, type StandoffLayer, standoffLayers } from "../standoff-layers.ts";
-import { layerWords } from "../words.ts";
+import { layerWords, pieceWords } from "../words.ts";
 
 const source = "arithmetic; how much grip is enough is common practice";
 
-/** Rule 8: a standoff grips, it is as high as the offset, and every piece has one to hold it. */
+/** Rule 8: a standoff grips, it is as high as the offset, and every piece, and every part of it, has one to hold it. */
 export const grip: Rule = { number: 8, title: "Grip", check, mends: gripMends };
 
 function check(input: RuleInput): Finding[] {
@@ -21,6 +24,7 @@ function check(input: RuleInput): Finding[] {
     ...checkOffset(standing, input),
     ...checkGrip(standing, input),
     ...checkHeld(standing),
+    ...checkParts(standing, input),
   ]);
 }
 
@@ -121,4 +125,30 @@ function checkHeld(standing: StandoffLayer): Finding[] {
       source,
     }),
   ];
+}
+
+/** Of a letter as i the dot falls off when only the stem has a standoff. */
+function checkParts(standing: StandoffLayer, { kernel }: RuleInput): Finding[] {
+  const { layer, hold, pieces } = standing;
+  const held = new Set(hold.holes.map((hole) => pieceAt(standing, hole)?.pieceId));
+  return pieces.flatMap((figures): Finding[] => {
+    const parts = held.has(figures.pieceId) ? partsOfPiece(figures, kernel) : [];
+    const loose = parts.filter((part) => !hold.holes.some((hole) => holdsPiece(hold.hardware, part, hole)));
+    const piece = layer.pieces.find(({ id }) => id === figures.pieceId);
+    const [first] = loose;
+    if (parts.length < 2 || !first || !piece) return [];
+    const some = loose.length === 1 ? "one of them has" : `${loose.length} of them have`;
+    return [
+      foundBy(grip, {
+        severity: "stop",
+        text: `${pieceWords(layer, piece)} is ${parts.length} parts, and ${some} no standoff: nothing holds ${loose.length === 1 ? "it" : "them"}. Set a hole in each part, or bond the layer.`,
+        layerKey: layer.key,
+        pieceIds: [figures.pieceId],
+        where: regionCentroid(first),
+        value: loose.length,
+        limit: 0,
+        source,
+      }),
+    ];
+  });
 }
