@@ -12,6 +12,7 @@ import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { mockupQueries } from "../api/queries.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import type { ArtworkToBringIn } from "../model/commands/bring-in-artwork.ts";
+import { optionsOfHold } from "../model/stock-choices.ts";
 import { ColourChoices } from "./colour-choices.tsx";
 import { ReplaceReview } from "./replace-review.tsx";
 
@@ -40,10 +41,12 @@ export function ArtworkChoice({ shop, jobId, chosen, onChoose, onDone }: Artwork
         onRetry={() => void artworks.refetch()}
       />
     );
-  if (stock.acrylics.length === 0)
+  if (stock.acrylics.length === 0 || optionsOfHold(stock).length === 0)
     return (
       <Notice tone="caution">
-        The stock list has no acrylic. A layer needs a sheet to be cut from: ask for one to be added.
+        {stock.acrylics.length === 0
+          ? "The stock list has no acrylic. A layer needs a sheet to be cut from: ask for one to be added."
+          : "The stock list has no adhesive and no hardware. A layer needs something to hold it: ask for one to be added."}
       </Notice>
     );
   const artwork =

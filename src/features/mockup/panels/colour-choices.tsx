@@ -1,6 +1,8 @@
 import { useMemo, useState } from "react";
 import type { Artwork } from "#shared/contracts/artworks.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
 import { Button } from "@/components/ui/button.tsx";
+import { Notice } from "@/components/ui/notice.tsx";
 import { cx } from "@/lib/cx.ts";
 import { counted } from "@/lib/format.ts";
 import { useDesk } from "../editor/desk-context.ts";
@@ -15,6 +17,7 @@ import {
   startParts,
 } from "../model/artwork-parts.ts";
 import { type ArtworkToBringIn, bringInArtwork, type ColourChoice } from "../model/commands/bring-in-artwork.ts";
+import { mostLayers, mostPieces } from "../model/limits.ts";
 import { chooseLayer } from "../model/selection.ts";
 import { sheetOfPart } from "../model/sheet-of-part.ts";
 import { optionsOfHold } from "../model/stock-choices.ts";
@@ -61,6 +64,8 @@ export function ColourChoices({ shop, jobId, artwork, drawing, onDone }: ColourC
   }, [parts, document, stock]);
   const joined = joinAlike(parts);
   const alike = joined.filter((part, at) => part !== parts[at]).length;
+
+  const problem = roomProblem(document, { made, added });
 
   function pick(index: number) {
     setPicked((before) => {
@@ -164,16 +169,34 @@ export function ColourChoices({ shop, jobId, artwork, drawing, onDone }: ColourC
             </tbody>
           </table>
         </div>
+        {problem && <Notice tone="caution">{problem}</Notice>}
         <div className="flex flex-wrap items-center justify-end gap-3">
           <p className="mr-auto text-sm text-graphite">{wordsOf(made.length, added.length, out)}</p>
           <Button onClick={onDone}>Cancel</Button>
-          <Button onClick={bringIn} disabled={made.length + added.length === 0}>
+          <Button onClick={bringIn} disabled={made.length + added.length === 0 || problem !== null}>
             {made.length === 0 && added.length > 0 ? "Add to the layers" : `Bring in ${counted(made.length, "layer")}`}
           </Button>
         </div>
       </div>
     </div>
   );
+}
+
+/** Why a document can't take all that is to be brought in; null when it can. */
+function roomProblem(
+  { layers }: MockupDocument,
+  { made, added }: Pick<ReturnType<typeof destinationsOf>, "made" | "added">,
+): string | null {
+  const over = layers.length + made.length - mostLayers;
+  if (over > 0)
+    return `A mockup takes ${mostLayers} layers: join or leave out ${counted(over, "colour")} more, or send them to a layer that is there.`;
+  const crowded = [
+    ...made.map(({ indices }) => indices.length),
+    ...added.map(
+      ({ key, indices }) => indices.length + (layers.find((layer) => layer.key === key)?.pieces.length ?? 0),
+    ),
+  ].some((count) => count > mostPieces);
+  return crowded ? `A layer takes ${mostPieces} pieces: split the colour that has more.` : null;
 }
 
 function wordsOf(made: number, added: number, out: number): string {

@@ -4,7 +4,9 @@ import { act, useReducer } from "react";
 import { afterEach, describe, expect, it } from "vitest";
 import type { Artwork } from "#shared/contracts/artworks.ts";
 import { rectanglePath } from "#shared/geometry/shapes.ts";
+import type { MockupDocument } from "#shared/mockup/document.ts";
 import { DeskContext } from "@/features/mockup/editor/desk-context.ts";
+import { addPlate } from "@/features/mockup/model/commands/add-plate.ts";
 import type { ArtworkToBringIn } from "@/features/mockup/model/commands/bring-in-artwork.ts";
 import { type Editor, nextEditor, startEditor } from "@/features/mockup/model/editor.ts";
 import { ColourChoices } from "@/features/mockup/panels/colour-choices.tsx";
@@ -12,6 +14,7 @@ import { ReplaceReview } from "@/features/mockup/panels/replace-review.tsx";
 import { button, press, render } from "../../support/render.tsx";
 import { buildDesk } from "./build-desk.ts";
 import { brass, cement, chalk, emptyMockup, epoxy, midnight } from "./sample-mockup.ts";
+import { inside } from "./sites.ts";
 
 let editor: Editor;
 let page: Awaited<ReturnType<typeof render>> | null = null;
@@ -62,8 +65,14 @@ const stock = {
   adhesives: [epoxy, cement],
 };
 
-function Page({ replaceWith }: { readonly replaceWith?: ArtworkToBringIn }) {
-  const [held, dispatch] = useReducer(nextEditor, emptyMockup(), startEditor);
+function Page({
+  replaceWith,
+  document: start = emptyMockup(),
+}: {
+  readonly replaceWith?: ArtworkToBringIn;
+  readonly document?: MockupDocument;
+}) {
+  const [held, dispatch] = useReducer(nextEditor, start, startEditor);
   editor = held;
   return (
     <QueryClientProvider client={new QueryClient()}>
@@ -140,6 +149,28 @@ describe("the colours of an artwork", () => {
       ["B", 2],
       ["C", 2],
     ]);
+  });
+});
+
+describe("a mockup with room for one more layer", () => {
+  it("takes no second one, and says what to do", async () => {
+    let full = emptyMockup();
+    for (let key = 0; key < 59; key++)
+      full = addPlate(full, {
+        shape: { kind: "circle", diameter: 20 },
+        id: `plate${key}`,
+        name: "Plate",
+        stock: chalk,
+        thickness: 3,
+        hold: { kind: "bond", adhesive: cement },
+        site: inside,
+      });
+    page = await render(<Page document={full} />);
+    expect(says()).toContain("A mockup takes 60 layers: join or leave out 1 colour more");
+    expect(button("Bring in 2 layers").disabled).toBe(true);
+    await choose(`Where ${gold} goes`, `with ${blue}`);
+    await press(button("Bring in 1 layer"));
+    expect(layers()).toHaveLength(60);
   });
 });
 
