@@ -146,7 +146,7 @@ describe("work that never reached the server", () => {
       .getByText(/^It is 2 changes, the last of them “.+”\. It began from version 1, which is the one you see/)
       .waitFor();
     await again.getByText("D, Kept sun: called Sun before").waitFor();
-    await lookAt(again, "kept-draft", "main");
+    await lookAt(again, "kept-draft", '[role="status"]:has(button)');
     await again.getByRole("button", { name: "Take it up" }).click();
     await job.named("Kept sun");
     await second.saved();
