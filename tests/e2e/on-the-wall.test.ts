@@ -135,6 +135,16 @@ it("hangs the sign on the client's wall where the camera would see it", async ()
   await keep(page, "2-marked", "[role=dialog]");
   await page.keyboard.press("Control+z");
   await vi.waitFor(async () => expect(await mark.getAttribute("aria-label")).toBe(before));
+  // By the hand, and back by one step.
+  const spot = await mark.boundingBox();
+  if (!spot) throw new Error("The mark can be taken.");
+  await page.mouse.move(spot.x + 22, spot.y + 22);
+  await page.mouse.down();
+  await page.mouse.move(spot.x + 30, spot.y + 40);
+  await page.mouse.up();
+  await view.getByText(/^The corners are \d+(\.\d)? px from .* look at each corner again/).waitFor();
+  await page.keyboard.press("Control+z");
+  await vi.waitFor(async () => expect(await mark.getAttribute("aria-label")).toBe(before));
 
   await view.getByRole("radio", { name: "Hang the sign" }).check();
   await view.getByRole("textbox", { name: "Right of the sheet" }).fill("600");

@@ -13,6 +13,8 @@ type CornerMarkProps = {
   readonly onActive: (isActive: boolean) => void;
   readonly onDrag: (to: Point) => void;
   readonly onPut: (to: Point, together: boolean) => void;
+  /** The hand let go without having moved it. */
+  readonly onLeave: () => void;
 };
 
 const arrows: Readonly<Record<string, Point>> = {
@@ -25,8 +27,8 @@ const arrows: Readonly<Record<string, Point>> = {
 const slowly = 0.2;
 
 /** The mark of one corner of the sheet: dragged, slowly with Shift, or moved by arrow keys. */
-export function CornerMark({ corner, at, shown, isActive, onActive, onDrag, onPut }: CornerMarkProps) {
-  const hand = useRef<{ last: Point; place: Point } | null>(null);
+export function CornerMark({ corner, at, shown, isActive, onActive, onDrag, onPut, onLeave }: CornerMarkProps) {
+  const hand = useRef<{ start: Point; last: Point; place: Point } | null>(null);
 
   function handleMove(event: PointerEvent) {
     const held = hand.current;
@@ -62,17 +64,18 @@ export function CornerMark({ corner, at, shown, isActive, onActive, onDrag, onPu
       onKeyDown={handleKey}
       onPointerDown={(event) => {
         event.currentTarget.setPointerCapture(event.pointerId);
-        hand.current = { last: { x: event.clientX, y: event.clientY }, place: at };
+        hand.current = { start: at, last: { x: event.clientX, y: event.clientY }, place: at };
       }}
       onPointerMove={handleMove}
       onPointerUp={() => {
         const held = hand.current;
         hand.current = null;
-        if (held && (held.place.x !== at.x || held.place.y !== at.y || isActive)) onPut(held.place, false);
+        if (held && (held.place.x !== held.start.x || held.place.y !== held.start.y)) onPut(held.place, false);
+        else onLeave();
       }}
       onPointerCancel={() => {
         hand.current = null;
-        onDrag(at);
+        onLeave();
       }}
     >
       <svg aria-hidden="true" viewBox="0 0 44 44" className="size-full" fill="none">

@@ -67,6 +67,7 @@ export function PhotoWall({ address, photo, onWall, step, onPreview, onMark, onH
                   }
                   onDrag={(to) => onPreview(withCorner(corner, to))}
                   onPut={(to, together) => onMark(corner, to, together)}
+                  onLeave={() => onPreview(null)}
                 />
               ))}
             {step === "mark" && mark && room && (
@@ -80,6 +81,7 @@ export function PhotoWall({ address, photo, onWall, step, onPreview, onMark, onH
                 shown={shown}
                 onDrag={(at) => onPreview({ ...photo, at })}
                 onHang={onHang}
+                onLeave={() => onPreview(null)}
               />
             )}
           </>

@@ -16,6 +16,8 @@ type SignHandleProps = {
   readonly shown: number;
   readonly onDrag: (at: Point) => void;
   readonly onHang: (at: Point, together: boolean) => void;
+  /** The hand let go without having moved it. */
+  readonly onLeave: () => void;
 };
 
 const arrows: Readonly<Record<string, Point>> = {
@@ -26,7 +28,7 @@ const arrows: Readonly<Record<string, Point>> = {
 };
 
 /** What the hand takes to move the sign along the wall: as wide and high as the sign is seen. Nothing where it isn't seen. */
-export function SignHandle({ photo, reading, onWall, shown, onDrag, onHang }: SignHandleProps) {
+export function SignHandle({ photo, reading, onWall, shown, onDrag, onHang, onLeave }: SignHandleProps) {
   const { document, unit } = useDesk();
   const hand = useRef<{ from: Point; at: Point; now: Point } | null>(null);
   const warp = warpOf({ reading, at: photo.at, board: document.board, box: onWall.box, shown }, { offWallMm: 0 });
@@ -87,11 +89,11 @@ export function SignHandle({ photo, reading, onWall, shown, onDrag, onHang }: Si
         const held = hand.current;
         hand.current = null;
         if (held && held.now !== held.at) onHang(held.now, false);
+        else onLeave();
       }}
       onPointerCancel={() => {
-        const held = hand.current;
         hand.current = null;
-        if (held) onDrag(held.at);
+        onLeave();
       }}
     />
   );
