@@ -9,6 +9,7 @@ import { castShadows } from "../../src/features/mockup/model/cast-shadows.ts";
 import { startTestApp } from "../support/app.ts";
 import { type Measure, summarise } from "../support/benchmark.ts";
 import { launchBrowser } from "../support/browser.ts";
+import { mockup } from "../support/drivers/mockup.ts";
 import { buildWorld } from "../support/factories/work.ts";
 import { largeSign } from "../support/large-sign.ts";
 import { takeSignedInSeat } from "../support/signed-in-seat.ts";
@@ -123,23 +124,26 @@ async function timeOpening(page: Page, address: string): Promise<number> {
 
 /** Edits that each are a step of their own: two layers are chosen by turns and moved by a tap of an arrow. */
 async function editAndUndo(page: Page, count: number): Promise<void> {
+  const { undo } = mockup(page);
   await page.evaluate(async (steps) => {
     const elevation = document.querySelector('[role="application"]');
     const keyOf = (key: string) => document.querySelector<HTMLElement>(`button[aria-label^="Choose ${key},"]`);
     const press = (key: string, more: KeyboardEventInit = {}) =>
       elevation?.dispatchEvent(new KeyboardEvent("keydown", { key, bubbles: true, cancelable: true, ...more }));
+    const shown = () => new Promise((resolve) => setTimeout(resolve));
     for (let step = 0; step < steps; step += 1) {
-      keyOf(step % 2 === 0 ? "D" : "E")?.click();
-      await new Promise(requestAnimationFrame);
+      keyOf(step % 2 === 0 ? "B" : "E")?.click();
+      await shown();
       press(step % 4 < 2 ? "ArrowRight" : "ArrowLeft");
-      await new Promise(requestAnimationFrame);
+      await shown();
     }
     for (let step = 0; step < steps; step += 1) {
       press("z", { ctrlKey: true });
-      await new Promise(requestAnimationFrame);
+      await shown();
     }
   }, count);
   await isAtRest(page);
+  if (await undo().isEnabled()) throw new Error("Not every edit was undone.");
 }
 
 /**

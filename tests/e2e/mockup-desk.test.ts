@@ -57,6 +57,25 @@ async function lookAtMiddle(page: Page) {
   return { x: canvas.x + canvas.width / 2, y: canvas.y + canvas.height / 2, pxPerMm: (disc.height - 8) / 275 };
 }
 
+/** Where points of the board, mm, lie in the window, once the view has made room for the dimensions. */
+async function boardInWindow(page: Page) {
+  const elevation = page.getByRole("application", { name: /elevation/i });
+  const read = async () => (await elevation.getAttribute("data-view")) ?? "";
+  let view = "";
+  await vi.waitFor(
+    async () => {
+      const before = view;
+      view = await read();
+      expect(view).toBe(before);
+    },
+    { timeout: patienceMs, interval: 250 },
+  );
+  const box = await elevation.boundingBox();
+  const [scale, left, top] = view.split(" ").map(Number);
+  if (!box || !scale || left === undefined || top === undefined) throw new Error("The elevation is not there.");
+  return (x: number, y: number) => [box.x + left + x * scale, box.y + top + y * scale] as const;
+}
+
 beforeAll(async () => {
   [app, browser] = await Promise.all([startTestApp({ poolMax: 8 }), launchBrowser()]);
   world = await buildWorld(app);
@@ -91,6 +110,7 @@ describe("the canvas", () => {
     await desk.undo().click();
     await holds(across, "300");
     expect(await desk.undo().isDisabled()).toBe(true);
+    await desk.saved();
   });
 
   it("lets go of a drag at Escape and leaves everything where it was", async () => {
@@ -104,6 +124,34 @@ describe("the canvas", () => {
     await page.mouse.up();
     await holds(page.getByLabel("x of Sun", { exact: true }), "300");
     expect(await desk.undo().isDisabled()).toBe(true);
+  });
+
+  it("chooses by a box what lies wholly in it, and catches the margin with it", async () => {
+    const { page } = owner;
+    const desk = await openDesk(owner);
+    // Round the ring of 220 mm and the sun in the middle of the board, from bare wood; the disc of 275 mm reaches out of it.
+    const at = await boardInWindow(page);
+    await page.mouse.move(...at(176, 324));
+    await page.keyboard.down("Control");
+    await page.mouse.down();
+    await page.mouse.move(...at(424, 76), { steps: 4 });
+    await page.mouse.up();
+    await page.keyboard.up("Control");
+    const place = page.getByRole("region", { name: "Place of what is chosen" });
+    await place.getByText("2 pieces", { exact: false }).waitFor();
+    // The ring begins at 190: after 168.6 mm it is 1.4 from the margin of 20.
+    await page.mouse.move(...at(300, 200));
+    await page.mouse.down();
+    await page.mouse.move(...at(200, 203), { steps: 4 });
+    await page.mouse.move(...at(131.4, 200.5), { steps: 4 });
+    await page.mouse.up();
+    const across = page.getByLabel("x of what is chosen");
+    await holds(across, "130");
+    await holds(page.getByLabel("y of what is chosen"), "200");
+    await desk.undo().click();
+    await holds(across, "300");
+    expect(await desk.undo().isDisabled()).toBe(true);
+    await desk.saved();
   });
 });
 

@@ -1,4 +1,4 @@
-import { Circle, type FabricObject, Rect } from "fabric/es";
+import { Circle, type FabricObject, type FabricObjectProps, Rect } from "fabric/es";
 import { boxUnion } from "#shared/geometry/box.ts";
 import type { Box } from "#shared/geometry/path.ts";
 import type { Marks } from "./marks.ts";
@@ -10,6 +10,8 @@ import { paintSweep } from "./paint-sweep.ts";
 /** The theme's indigo (what is chosen) and oxblood (what a finding points at): a canvas has no classes. */
 const indigo = "#34416B";
 const oxblood = "#7A1F2B";
+/** Under the dashes, so that they are seen on dark pieces. */
+const sheet = "#FFFFFF";
 
 const still = { selectable: false, evented: false, objectCaching: false, fill: "transparent" } as const;
 
@@ -20,20 +22,23 @@ const still = { selectable: false, evented: false, objectCaching: false, fill: "
 export function paintMarks(marks: Marks, mmPerPx: number, window: Box): FabricObject[] {
   const { chosen, hole, covers, guides, measures, sweep, spot } = marks;
   const px = (count: number) => count * mmPerPx;
-  const dashed = { ...still, stroke: indigo, strokeWidth: px(1.5), strokeDashArray: [px(6), px(4)] };
+  const rectangle = (box: Box, look: Partial<FabricObjectProps>) =>
+    new Rect({
+      ...still,
+      left: box.x + box.width / 2,
+      top: box.y + box.height / 2,
+      width: box.width + px(4),
+      height: box.height + px(4),
+      ...look,
+    });
   const around = boxUnion(chosen);
   const ring = (at: { x: number; y: number }, radius: number, stroke: string) =>
     new Circle({ ...still, left: at.x, top: at.y, radius, stroke, strokeWidth: px(2) });
   return [
     ...(around
       ? [
-          new Rect({
-            ...dashed,
-            left: around.x + around.width / 2,
-            top: around.y + around.height / 2,
-            width: around.width + px(4),
-            height: around.height + px(4),
-          }),
+          rectangle(around, { stroke: sheet, strokeWidth: px(3), opacity: 0.6 }),
+          rectangle(around, { stroke: indigo, strokeWidth: px(1.5), strokeDashArray: [px(6), px(4)] }),
         ]
       : []),
     ...paintCovers(covers, mmPerPx),
