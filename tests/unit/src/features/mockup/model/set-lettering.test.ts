@@ -253,6 +253,26 @@ describe("setting again", () => {
     );
   });
 
+  it("keeps what one letter was turned and resized by alone, in mirrored lettering too", () => {
+    fc.assert(
+      fc.property(hand, fc.double({ min: -80, max: 80, noNaN: true }), (moved, by) => {
+        const whole = handled(added(), { ...moved, scale: 1 });
+        const { id, placement } = at(whole, 3);
+        const turned = turnPieces(whole, { pieceIds: [id], by, about: placement });
+        const document = scalePieces(turned, { pieceIds: [id], by: 1.5, about: placement });
+        const [own, base] = [again(document, { letterSpacing: 6 }), again(whole, { letterSpacing: 6 })].map(
+          (next) => at(next, 3).placement,
+        );
+        if (!own || !base) throw new Error("No letter.");
+        const difference = own.turn - base.turn - by;
+        expect(difference - 360 * Math.round(difference / 360)).toBeCloseTo(0, 5);
+        expect(own.scale).toBeCloseTo(1.5, 6);
+        expect([own.x, own.y]).toEqual([expect.closeTo(base.x, 5), expect.closeTo(base.y, 5)]);
+      }),
+      { numRuns: 60 },
+    );
+  });
+
   it("gives the letters of the words, and keeps the pieces of letters that are still the same", () => {
     const document = added({ words: "ORERY" });
     const next = again(document, { words: "ORRERY BOOKS" });
