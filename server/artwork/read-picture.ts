@@ -16,12 +16,20 @@ export async function readPicture(bytes: Uint8Array): Promise<PictureFile> {
   // Loaded by the first picture: drawings need none of it.
   const { Jimp } = await import("jimp");
   const limits = { maxResolutionInMP: artworkLimits.picturePixels / 1e6, maxMemoryUsageInMB: 1_000 };
-  const read = await Jimp.fromBuffer(Buffer.from(bytes), { "image/jpeg": limits }).catch(() => null);
+  const read = await Jimp.fromBuffer(stillPicture(bytes, header), { "image/jpeg": limits }).catch(() => null);
   if (!read) throw new ArtworkRefused("picture.unreadable");
   const { width, height, data } = read.bitmap;
   const asTold = width * height === header.width * header.height && data.length === width * height * 4;
   if (!asTold) throw new ArtworkRefused("picture.unreadable");
   return { picture: { width, height, data }, lossy, density, warnings };
+}
+
+/** The reader takes an animated PNG for a format of its own; without the chunk that says so it is its first picture. */
+function stillPicture(bytes: Uint8Array, { warnings }: PictureHeader): Buffer {
+  const whole = Buffer.from(bytes);
+  const at = warnings.has("animation.ignored") ? whole.indexOf("acTL", 0, "latin1") - 4 : -1;
+  if (at < 0) return whole;
+  return Buffer.concat([whole.subarray(0, at), whole.subarray(at + 12 + whole.readUInt32BE(at))]);
 }
 
 function refuseBySize({ width, height }: PictureHeader): void {

@@ -80,7 +80,7 @@ export function ArtworkItem({
           </ul>
         </Notice>
       )}
-      {artwork.trace?.record && (
+      {artwork.trace?.record && open !== "trace" && (
         <TraceFigures
           colours={colours.length}
           pieces={pieces}

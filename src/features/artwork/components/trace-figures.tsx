@@ -14,7 +14,7 @@ export function TraceFigures({
   readonly smallestMm2: number | null;
 }) {
   return (
-    <p className="text-sm tabular-nums" role="status">
+    <p className="mt-2 text-sm tabular-nums" role="status">
       {counted(colours, "colour")}, {counted(pieces, "piece")}, {counted(nodes, "node")}
       {smallestMm2 !== null && `, smallest piece ${formatArea(smallestMm2)}`}
     </p>

@@ -54,7 +54,7 @@ export function TraceForm({
       <div className="flex flex-wrap items-start gap-3">
         <Select
           label="Number of colours"
-          className="w-44"
+          className="w-56"
           value={choices.colours ?? ""}
           onChange={({ target }) => change({ colours: target.value === "" ? null : Number(target.value) })}
         >
