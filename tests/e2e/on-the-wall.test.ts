@@ -68,8 +68,14 @@ async function keep(page: Page, name: string, within: string) {
 
 /** Where the board's face lies in the photo, px, by the sides of the box round it. */
 async function boardIn(within: Locator): Promise<number[]> {
-  const frame = await within.getByAltText("The wall that the sign is to hang on").boundingBox();
-  const board = await within.locator('[data-sign] [data-id="board"]').boundingBox();
+  // Both at one moment: what lies above may still be growing.
+  const boxes = await within.evaluate((element) =>
+    ["img[alt]", '[data-sign] [data-id="board"]'].map((found) => {
+      const box = element.querySelector(found)?.getBoundingClientRect();
+      return box ? { x: box.x, y: box.y, width: box.width, height: box.height } : null;
+    }),
+  );
+  const [frame, board] = boxes;
   if (!frame || !board) throw new Error("The sign is not on the photo.");
   const shown = frame.width / camera.widthPx;
   const [x, y] = [board.x - frame.x, board.y - frame.y];
@@ -134,7 +140,7 @@ it("hangs the sign on the client's wall where the camera would see it", async ()
   expect(await mark.getAttribute("aria-label")).not.toBe(before);
   await keep(page, "2-marked", "[role=dialog]");
   await page.keyboard.press("Control+z");
-  await vi.waitFor(async () => expect(await mark.getAttribute("aria-label")).toBe(before));
+  await vi.waitFor(async () => expect(await mark.getAttribute("aria-label")).toBe(before), { timeout: patienceMs });
   // By the hand, and back by one step.
   const spot = await mark.boundingBox();
   if (!spot) throw new Error("The mark can be taken.");
@@ -144,7 +150,7 @@ it("hangs the sign on the client's wall where the camera would see it", async ()
   await page.mouse.up();
   await view.getByText(/^The corners are \d+(\.\d)? px from .* look at each corner again/).waitFor();
   await page.keyboard.press("Control+z");
-  await vi.waitFor(async () => expect(await mark.getAttribute("aria-label")).toBe(before));
+  await vi.waitFor(async () => expect(await mark.getAttribute("aria-label")).toBe(before), { timeout: patienceMs });
 
   await view.getByRole("radio", { name: "Hang the sign" }).check();
   await view.getByRole("textbox", { name: "Right of the sheet" }).fill("600");
@@ -191,7 +197,10 @@ it("is looked at, not changed, on a phone", async () => {
   await section.locator('[data-sign] [data-id="board"]').waitFor();
   const hung = await stored();
   const off = sign.hanging.gap + sign.backer.thickness;
-  expect(farthest(await boardIn(section), boardSeen(hung?.at ?? { x: 0, y: 0 }, off))).toBeLessThan(1.5);
+  await vi.waitFor(
+    async () => expect(farthest(await boardIn(section), boardSeen(hung?.at ?? { x: 0, y: 0 }, off))).toBeLessThan(1.5),
+    { timeout: patienceMs },
+  );
   expect(await section.getByRole("button").count()).toBe(0);
   await section.scrollIntoViewIfNeeded();
   await keep(page, "4-phone", "main");
