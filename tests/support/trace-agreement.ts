@@ -131,8 +131,9 @@ function joinedColours({ width, height, data }: Picture) {
   const of = new Int32Array(width * height);
   const seen = new Map<number, number>();
   for (let pixel = 0; pixel < of.length; pixel++) {
-    const [red = 0, green = 0, blue = 0, alpha = 0] = data.subarray(pixel * 4, pixel * 4 + 4);
-    const colour = alpha < 128 ? -1 : (red << 16) | (green << 8) | blue;
+    const at = pixel * 4;
+    const solid = (data[at + 3] ?? 0) >= 128;
+    const colour = solid ? ((data[at] ?? 0) << 16) | ((data[at + 1] ?? 0) << 8) | (data[at + 2] ?? 0) : -1;
     of[pixel] = colour;
     seen.set(colour, (seen.get(colour) ?? 0) + 1);
   }
