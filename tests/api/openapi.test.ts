@@ -20,6 +20,7 @@ import * as setAsides from "#shared/contracts/set-asides.ts";
 import * as shop from "#shared/contracts/shop.ts";
 import * as stock from "#shared/contracts/stock.ts";
 import * as system from "#shared/contracts/system.ts";
+import * as wallPhotos from "#shared/contracts/wall-photos.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 
 let app: TestApp;
@@ -57,6 +58,7 @@ const modules = [
   shop,
   stock,
   system,
+  wallPhotos,
 ];
 const isEndpoint = (value: unknown): value is Endpoint =>
   typeof value === "object" && value !== null && "method" in value && "path" in value && "result" in value;
