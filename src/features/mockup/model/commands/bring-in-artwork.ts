@@ -1,7 +1,7 @@
 import type { ArtworkPiece } from "#shared/artwork/imported-artwork.ts";
-import { boxCentre } from "#shared/geometry/box.ts";
+import { boxCentre, boxUnion } from "#shared/geometry/box.ts";
 import { pathTransform, translateMatrix } from "#shared/geometry/transform.ts";
-import type { MockupDocument, Piece } from "#shared/mockup/document.ts";
+import type { Board, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { nextFreeKeys } from "#shared/mockup/layer-key.ts";
 import { coordinateOf, mostLayers, mostPieces, roundMm } from "../limits.ts";
 import type { Site } from "../propose-holes.ts";
@@ -28,7 +28,8 @@ export type ArtworkToBringIn = {
 
 /**
  * Adds a layer for each choice of pieces of an artwork, from the wall outward in the order given, with the next free keys,
- * and the pieces of `added` to layers that are there, on top of theirs. The artwork's middle comes to the board's middle and its pieces keep their places to one another. Ids are made from `id`.
+ * and the pieces of `added` to layers that are there, on top of theirs. The artwork's pieces keep their places to one another, its
+ * middle comes to the board's (see `moveToBoard`). Ids are made from `id`.
  * Colours that no piece has are passed over; more layers or pieces than a document takes are not added.
  */
 export function bringInArtwork(
@@ -47,8 +48,7 @@ export function bringInArtwork(
     site: Site;
   },
 ): MockupDocument {
-  const dx = document.board.width / 2 - artwork.widthMm / 2;
-  const dy = document.board.height / 2 - artwork.heightMm / 2;
+  const { dx, dy } = moveToBoard(artwork, document.board);
   const keys = nextFreeKeys(document, choices.length);
   const pieceHere = (piece: ArtworkPiece) => pieceOf(piece, { artworkId: artwork.artworkId, id, dx, dy });
   const layers = document.layers.map((layer) => {
@@ -74,6 +74,23 @@ export function bringInArtwork(
   }
   const isSame = layers.length === document.layers.length && layers.every((one, at) => one === document.layers[at]);
   return isSame ? document : { ...document, layers };
+}
+
+/**
+ * How far an artwork moves onto the board, mm: its page's middle comes to the board's, so that what was drawn as the whole sign lies as it
+ * was drawn. Where pieces would fall off the board that way, as a mark in the corner of a page does, their own middle comes there.
+ */
+function moveToBoard(
+  { widthMm, heightMm, pieces }: ArtworkToBringIn,
+  { width, height }: Board,
+): { dx: number; dy: number } {
+  const byPage = { dx: width / 2 - widthMm / 2, dy: height / 2 - heightMm / 2 };
+  const box = boxUnion(pieces.map((piece) => piece.box));
+  if (box === null) return byPage;
+  const fits = (from: number, size: number, room: number) => from >= 0 && from + size <= room;
+  if (fits(box.x + byPage.dx, box.width, width) && fits(box.y + byPage.dy, box.height, height)) return byPage;
+  const middle = boxCentre(box);
+  return { dx: roundMm(width / 2 - middle.x), dy: roundMm(height / 2 - middle.y) };
 }
 
 function chosenOf(pieces: readonly ArtworkPiece[], indices: readonly number[]): ArtworkPiece[] {

@@ -65,6 +65,18 @@ describe("bringing in artwork", () => {
     pieces: [square(0, "#111111", 0, 0, 40), square(1, "#EEEEEE", 150, 60, 20), square(2, "#111111", 60, 10, 10)],
   };
 
+  it("puts a mark that lies in the corner of a large page on the middle of the board", () => {
+    const { board } = emptyMockup();
+    const page = { ...artwork, widthMm: 2000, heightMm: 2000, pieces: [square(0, "#111111", 0, 0, 40)] };
+    const document = bringInArtwork(emptyMockup(), {
+      artwork: page,
+      choices: [choice("#111111")],
+      site: inside,
+      id: "in",
+    });
+    expect(document.layers[0]?.pieces[0]?.placement).toMatchObject({ x: board.width / 2, y: board.height / 2 });
+  });
+
   it("makes a layer for each chosen colour, in the order chosen, with the artwork's middle on the board's", () => {
     const document = bringInArtwork(emptyMockup(), {
       artwork,
