@@ -16,10 +16,9 @@ import { artworkHashes } from "../queries/artwork-hashes.ts";
 import { dryFitInput } from "../queries/dry-fit-input.ts";
 import { findJob } from "../queries/find-job.ts";
 import { notesToFreeze } from "../queries/list-notes.ts";
-import { photoHashes } from "../queries/photo-hashes.ts";
-import { photoHashes } from "../queries/photo-hashes.ts";
 import { setAsidesToFreeze } from "../queries/list-set-asides.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
+import { photoHashes } from "../queries/photo-hashes.ts";
 import { draftToJudge } from "./draft-to-judge.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
@@ -104,7 +103,6 @@ async function freeze(
     setAsides: await setAsidesToFreeze(context, job.id),
     paper: shop.paper,
     artworkHashes: await artworkHashes(context, { shopId: job.shopId, document }),
-    photoHashes: await photoHashes(context, { shopId: job.shopId, document }),
     photoHashes: await photoHashes(context, { shopId: job.shopId, document }),
     fontHashes: { ...fontHashes(), ...letteringHashes(document) },
   };

@@ -12,9 +12,8 @@ import { findJob } from "../queries/find-job.ts";
 import { findMockup } from "../queries/find-mockup.ts";
 import type { LoadedJob } from "../queries/load-jobs.ts";
 import { logEvent } from "./log-event.ts";
-import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
-import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
 import { refreshJob } from "./refresh-job.ts";
+import { refuseForeignPhoto } from "./refuse-foreign-photo.ts";
 import { signalJob } from "./signal-job.ts";
 
 /** Saves the draft if it was edited from the newest version; otherwise answers `stale` with the newer one. */
@@ -36,7 +35,6 @@ export async function saveMockup(
     );
   }
   await refuseForeignArtwork(context, { shopId: job.shopId, clientId: job.clientId, document });
-  await refuseForeignPhoto(context, { shopId: job.shopId, clientId: job.clientId, document });
   await refuseForeignPhoto(context, { shopId: job.shopId, clientId: job.clientId, document });
   const saved = { version: version + 1, document: JSON.stringify(document), savedBy: actor.personId, savedAt: now };
   if (known) await known.update(saved, { transaction });
