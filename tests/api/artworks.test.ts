@@ -217,7 +217,7 @@ describe("an upload that can't be taken", () => {
       name: "a program",
       file: "logo.svg",
       content: bytes(0x7f, 0x45, 0x4c, 0x46, 2, 1, 1),
-      says: "This is not a drawing in SVG or PDF.",
+      says: "This is neither a drawing in SVG or PDF nor a picture in PNG or JPEG.",
     },
   ])("is refused in words: $name", async ({ file, content, says }) => {
     const own = await buildJob(world);
@@ -439,7 +439,7 @@ describe("artwork", () => {
     expect((await rep.refusal(setTrueSize, { params, body: { side: "width", lengthMm: 50 } })).code).toBe(
       "not_allowed",
     );
-    expect((await rep.get(getArtwork, { params })).can).toEqual({ change: false, remove: false });
+    expect((await rep.get(getArtwork, { params })).can).toEqual({ change: false, remove: false, trace: false });
     const stranger = await signInAs(app, await buildMember());
     for (const visitor of [approver, stranger]) {
       expect((await visitor.refusal(getArtwork, { params })).code).toBe("not_found");
