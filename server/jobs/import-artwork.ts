@@ -1,7 +1,7 @@
 import { Op } from "sequelize";
 import { artworkRefusal } from "#shared/artwork/refusals.ts";
 import type { ImportedFile } from "../artwork/import-bytes.ts";
-import { importSvg } from "../artwork/import-svg.ts";
+import { importFile } from "../artwork/import-file.ts";
 import { finishImport } from "../commands/finish-import.ts";
 import type { Services } from "../http/context.ts";
 import { Artwork } from "../models/artwork.ts";
@@ -34,7 +34,7 @@ export async function importArtwork(
 }
 
 async function importStored({ storage, log }: Services, { id, file, traceAsked }: Artwork): Promise<ImportedFile> {
-  return importSvg(await storage.read(file?.storageKey ?? ""), {
+  return importFile(await storage.read(file?.storageKey ?? ""), {
     ...(traceAsked ? { choices: traceAsked } : {}),
     onFault: (message) => log.error({ artworkId: id, fault: message }, "The artwork import broke"),
   });

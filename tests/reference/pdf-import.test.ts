@@ -2,7 +2,7 @@ import { readdirSync, readFileSync } from "node:fs";
 import { join } from "node:path";
 import { PNG } from "pngjs";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import { importSvg, stopImporting } from "#server/artwork/import-svg.ts";
+import { importFile, stopImporting } from "#server/artwork/import-file.ts";
 import type { ImportOutcome } from "#shared/artwork/imported-artwork.ts";
 import { launchBrowser } from "../support/browser.ts";
 import { piecesAsSvg } from "../support/ink-agreement.ts";
@@ -79,7 +79,7 @@ describe("pages of PDF as pieces", () => {
 });
 
 async function judge(name: string, pdf: Uint8Array): Promise<Judged> {
-  const outcome = await importSvg(pdf, { timeMs: 60_000 });
+  const outcome = await importFile(pdf, { timeMs: 60_000 });
   const theirs = await pageAsPng(pdf, { page: 1, dpi });
   const ours = outcome.ok ? await svgAsPng(piecesAsSvg(outcome.artwork), PNG.sync.read(theirs).width) : null;
   return { name, theirs, ours, outcome, score: ours ? paperInkAgreement(theirs, ours) : -1 };

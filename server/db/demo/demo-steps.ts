@@ -3,7 +3,7 @@ import { join } from "node:path";
 import type { Brief } from "#shared/contracts/jobs.ts";
 import { acknowledgementsOf } from "#shared/mockup/acknowledgements.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
-import { importSvg } from "../../artwork/import-svg.ts";
+import { importFile } from "../../artwork/import-file.ts";
 import { addArtwork } from "../../commands/add-artwork.ts";
 import { approveRevision } from "../../commands/approve-revision.ts";
 import { changeJob } from "../../commands/change-job.ts";
@@ -58,7 +58,7 @@ export async function demoArtwork(
     mediaType: "image/svg+xml",
     file: { path, originalName: name, byteSize: Buffer.byteLength(svg) },
   });
-  const outcome = await importSvg(Buffer.from(svg));
+  const outcome = await importFile(Buffer.from(svg));
   await finishImport(context, { artworkId: artwork.id, outcome });
   if (!outcome.ok) throw new Error(`The demo's artwork ${name} was refused: ${outcome.refusal.text}`);
   return { artworkId: artwork.id, pieces: outcome.artwork.pieces };

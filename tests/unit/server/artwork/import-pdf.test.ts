@@ -1,7 +1,7 @@
 import { deflateSync } from "node:zlib";
 import { type PDFDocument, PDFName, PDFNumber, type PDFPage, StandardFonts } from "pdf-lib";
 import { afterAll, describe, expect, it } from "vitest";
-import { importSvg, stopImporting } from "#server/artwork/import-svg.ts";
+import { importFile, stopImporting } from "#server/artwork/import-file.ts";
 import { unpacksWithinLimit } from "#server/artwork/unpacked-size.ts";
 import type { ImportedArtwork } from "#shared/artwork/imported-artwork.ts";
 import { pdfOf } from "../../../support/seeded-pdf.ts";
@@ -15,14 +15,14 @@ afterAll(stopImporting);
 
 async function taken(bytes: Uint8Array): Promise<ImportedArtwork> {
   const faults: string[] = [];
-  const outcome = await importSvg(bytes, { ...patient, onFault: (message) => faults.push(message) });
+  const outcome = await importFile(bytes, { ...patient, onFault: (message) => faults.push(message) });
   expect(faults).toEqual([]);
   if (!outcome.ok) throw new Error(`Refused: ${outcome.refusal.code}`);
   return outcome.artwork;
 }
 
 async function refusalOf(bytes: Uint8Array): Promise<string> {
-  const outcome = await importSvg(bytes, patient);
+  const outcome = await importFile(bytes, patient);
   if (outcome.ok) throw new Error("The file was taken.");
   return outcome.refusal.code;
 }

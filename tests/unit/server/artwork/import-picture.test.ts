@@ -1,12 +1,12 @@
 import { deflateSync } from "node:zlib";
 import { afterAll, describe, expect, it } from "vitest";
-import { importSvg, stopImporting } from "#server/artwork/import-svg.ts";
+import { importFile, stopImporting } from "#server/artwork/import-file.ts";
 import { jpegOf, paintedPicture, pngChunk, pngDensity, pngOf, rawPng } from "../../../support/pictures.ts";
 
 afterAll(stopImporting);
 
 // All parts of the suite share two cores; a fault would end in import.failed, not in this limit.
-const outcomeOf = (bytes: Uint8Array) => importSvg(bytes, { timeMs: 60_000 });
+const outcomeOf = (bytes: Uint8Array) => importFile(bytes, { timeMs: 60_000 });
 async function taken(bytes: Uint8Array) {
   const outcome = await outcomeOf(bytes);
   if (!outcome.ok) throw new Error(`Refused: ${outcome.refusal.code}`);

@@ -1,7 +1,7 @@
 import { readFileSync } from "node:fs";
 import { gzipSync } from "node:zlib";
 import { afterAll, describe, expect, it } from "vitest";
-import { importSvg, stopImporting } from "#server/artwork/import-svg.ts";
+import { importFile, stopImporting } from "#server/artwork/import-file.ts";
 import type { ImportedArtwork } from "#shared/artwork/imported-artwork.ts";
 import type { RefusalCode } from "#shared/artwork/refusals.ts";
 import type { WarningCode } from "#shared/artwork/warnings.ts";
@@ -18,14 +18,14 @@ afterAll(stopImporting);
 
 async function taken(bytes: Uint8Array): Promise<ImportedArtwork> {
   const faults: string[] = [];
-  const outcome = await importSvg(bytes, { ...patient, onFault: (message) => faults.push(message) });
+  const outcome = await importFile(bytes, { ...patient, onFault: (message) => faults.push(message) });
   expect(faults).toEqual([]);
   if (!outcome.ok) throw new Error(`Refused: ${outcome.refusal.code}`);
   return outcome.artwork;
 }
 
 async function refusalOf(bytes: Uint8Array): Promise<{ code: string; text: string }> {
-  const outcome = await importSvg(bytes, patient);
+  const outcome = await importFile(bytes, patient);
   if (outcome.ok) throw new Error("The file was taken.");
   return outcome.refusal;
 }
@@ -99,7 +99,7 @@ describe("files that are refused, with the reason in words", () => {
       (_, i) =>
         `<path transform="rotate(${i} 50 50)" d="M${i % 7} 9h${40 + (i % 11)}v60h-40z" fill="#${(0x100000 + i * 997).toString(16)}" opacity=".5"/>`,
     );
-    const outcome = await importSvg(bytesOf(drawing(squares.join(""))), { timeMs: 300 });
+    const outcome = await importFile(bytesOf(drawing(squares.join(""))), { timeMs: 300 });
     expect(outcome).toMatchObject({ ok: false, refusal: { code: "import.too-slow" } });
     expect((await taken(bytesOf(square))).pieces).toHaveLength(1);
   });

@@ -31,7 +31,7 @@ const worker = workerInTurn<ImportQuestion, ImportedFile>(program, { questionsEa
  * A drawing or a picture as pieces, or why it can't be taken. The work is done in a worker thread, one file at a time, which is ended
  * when it takes too long, runs out of memory or breaks. Never rejects for what is in the file; the same bytes always give the same outcome.
  */
-export async function importSvg(bytes: Uint8Array, options: ImportOptions = {}): Promise<ImportedFile> {
+export async function importFile(bytes: Uint8Array, options: ImportOptions = {}): Promise<ImportedFile> {
   if (bytes.length > artworkLimits.fileBytes) return refused("file.too-large");
   const { kind } = sniffArtwork(bytes);
   const code = refusedKinds[kind];
