@@ -2,7 +2,7 @@ import { readdirSync, readFileSync } from "node:fs";
 import { join } from "node:path";
 import type { Browser } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import { importSvg, stopImporting } from "#server/artwork/import-svg.ts";
+import { importFile, stopImporting } from "#server/artwork/import-file.ts";
 import type { ImportOutcome } from "#shared/artwork/imported-artwork.ts";
 import { launchBrowser } from "../support/browser.ts";
 import { inkAgreements, piecesAsSvg } from "../support/ink-agreement.ts";
@@ -87,7 +87,7 @@ async function judgeSet({ folder, seed }: (typeof sets)[number]): Promise<Judged
   const read = sample.map((file) => ({ file, original: readFileSync(join(path, file), "utf8") }));
   const outcomes: ImportOutcome[] = [];
   for (const { original } of read)
-    outcomes.push(await importSvg(new TextEncoder().encode(original), { timeMs: 60_000 }));
+    outcomes.push(await importFile(new TextEncoder().encode(original), { timeMs: 60_000 }));
   const scores = await inkAgreements(
     browser,
     read.map(({ original }, index) => {
