@@ -17,6 +17,7 @@ import { handed } from "./rules/handed.ts";
 import { hanging } from "./rules/hanging.ts";
 import { holeToEdge } from "./rules/hole-to-edge.ts";
 import { holeWindow } from "./rules/hole-window.ts";
+import { inOnePlace } from "./rules/in-one-place.ts";
 import { licensedPractice } from "./rules/licensed-practice.ts";
 import { load } from "./rules/load.ts";
 import { locate } from "./rules/locate.ts";
@@ -78,4 +79,5 @@ export const rules: readonly Rule[] = [
   hanging,
   protrusion,
   licensedPractice,
+  inOnePlace,
 ];

@@ -19,7 +19,9 @@ const parts = [
   "hardware/standoff-parts.ts",
   "legibility/accessible-limits.ts",
   "pieces/area-moments.ts",
+  "pieces/name-of-part.ts",
   "pieces/outline-spread.ts",
+  "pieces/reading-order.ts",
   "pieces/same-outline.ts",
   "pieces/template-islands.ts",
 ];

@@ -17,7 +17,7 @@ describe("the descriptions of the limits", () => {
     expect(label.length).toBeLessThanOrEqual(60);
     expect(why).toMatch(/\.$/);
     expect(of.length).toBeGreaterThan(0);
-    for (const rule of of) expect(rule >= 1 && rule <= 38).toBe(true);
+    for (const rule of of) expect(rule >= 1 && rule <= 39).toBe(true);
     expect(limit.usual).toBe(defaultLimits[key]);
     expect(limit.least).toBeLessThanOrEqual(limit.usual);
     expect(limit.usual).toBeLessThanOrEqual(limit.most);

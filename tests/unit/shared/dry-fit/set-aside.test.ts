@@ -86,7 +86,7 @@ describe("a set-aside", () => {
 });
 
 const roles = ["owner", "maker", "rep"] as const;
-const rules = Array.from({ length: 38 }, (_, index) => index + 1);
+const rules = Array.from({ length: 39 }, (_, index) => index + 1);
 
 describe("who may set aside", () => {
   it("safety stops are the owner's, the rest the owner's and the makers', and a rep's never", () => {
