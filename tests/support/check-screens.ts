@@ -4,16 +4,16 @@ import { join } from "node:path";
 import AxeBuilder from "@axe-core/playwright";
 import { afterAll, beforeAll, expect, it, onTestFailed } from "vitest";
 import { type ScreenStage, setScreenStage } from "./screen-stage.ts";
-import { screens } from "./screen-table.ts";
+import { screens, type Who } from "./screen-table.ts";
 import { type SeatSize, sizes } from "./seat.ts";
 
 const folder = join(tmpdir(), "standproud-screens");
 
 /**
- * A test for every screen of the application with the demo shop in it, at one size: it comes, nothing is wider than the window, the
+ * A test for every screen of the application with the demo shop in it that these people see, at one size: it comes, nothing is wider than the window, the
  * console is silent and axe finds nothing grave. With SCREENS=1 each is kept as a picture. Gives the stage for more.
  */
-export function checkScreens(size: SeatSize): () => ScreenStage {
+export function checkScreens(size: SeatSize, whose: (who: Who) => boolean = () => true): () => ScreenStage {
   let stage: ScreenStage;
 
   beforeAll(async () => {
@@ -25,7 +25,8 @@ export function checkScreens(size: SeatSize): () => ScreenStage {
     await stage?.stop();
   });
 
-  it.each(screens.filter(({ only = size }) => only === size))("$who sees $name as it should be", async (screen) => {
+  const shown = screens.filter(({ who, only = size }) => only === size && whose(who));
+  it.each(shown)("$who sees $name as it should be", async (screen) => {
     const { page, faults } = await stage.seatOf(screen.who, size);
     const before = faults.length;
     const path = join(folder, `${size}-${screen.who}-${screen.name}.png`);

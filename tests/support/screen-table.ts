@@ -5,6 +5,9 @@ import type { SeatSize } from "./seat.ts";
 /** Who looks: the demo shop's staff, two contacts of its clients, somebody without a session, the owner of an empty shop. */
 export type Who = "owner" | "maker" | "rep" | "client" | "captain" | "nobody" | "newcomer";
 
+/** Those who mostly work at a desk. */
+export const atTheDesk: ReadonlySet<Who> = new Set(["owner", "maker", "newcomer"]);
+
 export type Screen = {
   readonly who: Who;
   readonly name: string;
