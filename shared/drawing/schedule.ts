@@ -4,7 +4,7 @@ import type { Figures } from "../stack/figures.ts";
 import { type BandWording, formatBand } from "../units/format-band.ts";
 import { formatLength, formatLengthWithUnit } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
-import { formatMass } from "../units/mass.ts";
+import { formatMass, formatMassColumn } from "../units/mass.ts";
 
 /** A layer as the schedule lists it, lettered in the reader's unit. */
 export type ScheduleRow = {
@@ -73,6 +73,11 @@ export function scheduleRows(
   heights: BandWording = "nominal",
 ): ScheduleRow[] {
   const { backer, hanging } = document;
+  const figuresOf = (key: string) => figures.layers.find((layer) => layer.key === key);
+  const [backerMass = nothing, ...masses] = formatMassColumn(
+    [figures.backerMassG, ...document.layers.map(({ key }) => figuresOf(key)?.massG ?? Number.NaN)],
+    unit,
+  );
   const first: ScheduleRow = {
     key: "A",
     what: ["Backer", ...layingWords(document, unit), finishWords(backer.finish)].join(", "),
@@ -84,10 +89,10 @@ export function scheduleRows(
     offset: nothing,
     topAt: formatBand(figures.backerTop, unit, heights),
     pieces: "1",
-    mass: formatMass(figures.backerMassG, unit),
+    mass: backerMass,
   };
-  const layers = document.layers.map((layer): ScheduleRow => {
-    const own = figures.layers.find(({ key }) => key === layer.key);
+  const layers = document.layers.map((layer, index): ScheduleRow => {
+    const own = figuresOf(layer.key);
     return {
       key: layer.key,
       what: layer.name,
@@ -97,7 +102,7 @@ export function scheduleRows(
       offset: layer.hold.kind === "standoff" ? formatLength(layer.hold.offset, unit) : nothing,
       topAt: own ? formatBand(own.top, unit, heights) : nothing,
       pieces: String(layer.pieces.length),
-      mass: own ? formatMass(own.massG, unit) : nothing,
+      mass: masses[index] ?? nothing,
     };
   });
   return [first, ...layers];

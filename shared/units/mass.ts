@@ -18,6 +18,21 @@ export function formatMass(grams: number, unit: LengthUnit): string {
   return `${(grams / 1000).toFixed(Math.abs(grams) < 100_000 ? 2 : 0)} kg`;
 }
 
+/** A column says no mass finer than a tenth of a gram. */
+const mostColumnPlaces = 4;
+
+/**
+ * Masses in words that stand under one another: all in kg, or in lb for shops that work in inches, with two decimals and more where
+ * the smallest of them needs more to be seen: 2300 g and 4.23 g read "2.300 kg" and "0.004 kg". Something that is no number is an en dash.
+ */
+export function formatMassColumn(grams: readonly number[], unit: LengthUnit): string[] {
+  const [perUnit, name] = unit === "in" ? [gramsPerPound, "lb"] : [1000, "kg"];
+  const smallest = Math.min(...grams.filter((mass) => mass > 0)) / perUnit;
+  const needed = Number.isFinite(smallest) ? Math.ceil(-Math.log10(smallest)) : 0;
+  const places = Math.min(mostColumnPlaces, Math.max(2, needed));
+  return grams.map((mass) => (Number.isFinite(mass) ? `${(mass / perUnit).toFixed(places)} ${name}` : "–"));
+}
+
 /** A mass that somebody stated in kilograms, with no more decimals than it has: "40 kg", "12.5 kg"; "88.18 lb" for shops that work in inches. */
 export function formatStatedMass(kg: number, unit: LengthUnit): string {
   return unit === "mm" && Number.isFinite(kg) ? `${decimals(kg, 2)} kg` : formatMass(kg * 1000, unit);

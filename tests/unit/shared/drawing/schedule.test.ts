@@ -16,8 +16,8 @@ describe("the schedule", () => {
     const document = orreryBooks();
     const rows = scheduleRows(document, computeFigures(document, kernel), "mm");
     expect(rows.map(({ key }) => key).join("")).toBe("ABCDEFG");
-    // 600 × 400 × 20 mm of pine, 1000 · 0.35 · 1.09 = 381.5 kg/m³: 1.83 kg.
-    expect(rows[0]).toMatchObject({ thickness: "20", heldBy: "cleat", offset: "–", topAt: "20", mass: "1.83 kg" });
+    // 600 × 400 × 20 mm of pine, 1000 · 0.35 · 1.09 = 381.5 kg/m³: 1.831 kg. The lightest layer weighs less than 10 g: three places.
+    expect(rows[0]).toMatchObject({ thickness: "20", heldBy: "cleat", offset: "–", topAt: "20", mass: "1.831 kg" });
     // π 130² less four holes of 8 mm, 4.5 mm thick, 1190 kg/m³: 283 g.
     expect(rows[1]).toEqual({
       key: "B",
@@ -28,10 +28,21 @@ describe("the schedule", () => {
       offset: "19",
       topAt: "43.5",
       pieces: "1",
-      mass: "0.28 kg",
+      mass: "0.283 kg",
     });
     expect(rows[2]?.heldBy).toBe("bond on B, Bodied acrylic cement");
     expect(rows[6]?.heldBy).toBe("bond on A, Thick cyanoacrylate");
+  });
+
+  it("gives all masses in one unit, with as many places as its lightest layer needs", () => {
+    const document = orreryBooks();
+    const figures = computeFigures(document, kernel);
+    const light = {
+      ...figures,
+      layers: figures.layers.map((layer) => (layer.key === "G" ? { ...layer, massG: 3.6 } : layer)),
+    };
+    const masses = scheduleRows(document, light, "mm").map(({ mass }) => mass);
+    expect([masses[0], masses[1], masses[6]]).toEqual(["1.831 kg", "0.283 kg", "0.004 kg"]);
   });
 
   it("says a layer that stands on nothing stands on nothing", () => {

@@ -1,5 +1,5 @@
 import { expect, it } from "vitest";
-import { formatMass, formatStatedMass } from "#shared/units/mass.ts";
+import { formatMass, formatMassColumn, formatStatedMass } from "#shared/units/mass.ts";
 
 it.each([
   { grams: 270, unit: "mm" as const, text: "0.27 kg" },
@@ -24,4 +24,16 @@ it.each([
   { kg: Number.NaN, unit: "mm" as const, text: "–" },
 ])("$kg kg, as somebody stated it, read $text", ({ kg, unit, text }) => {
   expect(formatStatedMass(kg, unit)).toBe(text);
+});
+
+it.each([
+  { grams: [1831, 283, 48], unit: "mm" as const, texts: ["1.83 kg", "0.28 kg", "0.05 kg"] },
+  { grams: [2300, 4.23], unit: "mm" as const, texts: ["2.300 kg", "0.004 kg"] },
+  { grams: [2300, 0.4, 0], unit: "mm" as const, texts: ["2.3000 kg", "0.0004 kg", "0.0000 kg"] },
+  { grams: [123_456, 0.01, Number.NaN], unit: "mm" as const, texts: ["123.4560 kg", "0.0000 kg", "–"] },
+  { grams: [0], unit: "mm" as const, texts: ["0.00 kg"] },
+  { grams: [453.59237, 2.27], unit: "in" as const, texts: ["1.000 lb", "0.005 lb"] },
+  { grams: [], unit: "mm" as const, texts: [] },
+])("under one another $grams g read $texts", ({ grams, unit, texts }) => {
+  expect(formatMassColumn(grams, unit)).toEqual(texts);
 });
