@@ -148,7 +148,7 @@ export function SheetScreen({ shop, revision, sheet }: SheetScreenProps) {
       jobPath={paths.job(shop, job.id)}
       mockupPath={isClient ? null : paths.mockup(shop, job.id)}
       dimensions={
-        hasDimensions(sheet.elevation)
+        hasDimensions(sheet.elevation) && (isDesk || tab === "front")
           ? { shown: showDimensions, onToggle: () => setShowDimensions((shown) => !shown) }
           : null
       }
