@@ -2,7 +2,6 @@ import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { useNavigate, useParams } from "react-router-dom";
 import type { Role } from "#shared/contracts/account.ts";
 import type { Unpriced } from "#shared/cost/priced-sign.ts";
-import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { mockupQueries } from "@/features/mockup/api/queries.ts";
 import { MockupDesk } from "@/features/mockup/panels/mockup-desk.tsx";
@@ -13,6 +12,7 @@ import { useReader } from "@/lib/shop-context.ts";
 import { stockQuery } from "@/lib/stock-query.ts";
 import { useMedia } from "@/lib/use-media.ts";
 import { HeaderTools } from "../header-tools.tsx";
+import { LoadProblem } from "../load-problem.tsx";
 import { paths } from "../paths.ts";
 
 /** The mockup of a job: the desk where there is room for it and the right to change it, else a picture to look at. */
@@ -31,13 +31,7 @@ export function MockupPage() {
   const failed = [job, mockup, stock, limits].find((query) => query.isError && query.data === undefined);
   if (failed)
     return (
-      <div className="mx-auto max-w-3xl px-4 py-8">
-        <ProblemNotice
-          what="The mockup could not be loaded."
-          error={failed.error}
-          onRetry={() => void failed.refetch()}
-        />
-      </div>
+      <LoadProblem what="The mockup could not be loaded." error={failed.error} onRetry={() => void failed.refetch()} />
     );
   if (!job.data || !mockup.data || !stock.data || !limits.data)
     return (

@@ -1,12 +1,12 @@
 import { useQuery } from "@tanstack/react-query";
 import { useParams } from "react-router-dom";
-import { ProblemNotice } from "@/components/ui/problem-notice.tsx";
 import { isUnready, sheetQueries } from "@/features/sheet/api/queries.ts";
 import { SheetSkeleton } from "@/features/sheet/components/sheet-skeleton.tsx";
 import { UnreadySheet } from "@/features/sheet/components/unready-sheet.tsx";
 import { ApiProblem } from "@/lib/api-client.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
 import { useLiveJob } from "@/lib/use-live-job.ts";
+import { LoadProblem } from "../load-problem.tsx";
 import { NotFoundScreen } from "../not-found-screen.tsx";
 import { paths } from "../paths.ts";
 import { SheetScreen } from "./sheet-screen.tsx";
@@ -35,13 +35,11 @@ export function SheetPage() {
   }
   if (error) {
     return (
-      <div className="mx-auto max-w-2xl px-4 py-10">
-        <ProblemNotice
-          what="The sheet could not be loaded."
-          error={error}
-          onRetry={() => void Promise.all([revision.refetch(), sheet.refetch()])}
-        />
-      </div>
+      <LoadProblem
+        what="The sheet could not be loaded."
+        error={error}
+        onRetry={() => void Promise.all([revision.refetch(), sheet.refetch()])}
+      />
     );
   }
   return <SheetSkeleton />;
