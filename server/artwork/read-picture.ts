@@ -2,6 +2,7 @@ import { artworkLimits } from "#shared/artwork/limits.ts";
 import { ArtworkRefused } from "#shared/artwork/refusals.ts";
 import type { PictureFile } from "#shared/tracing/trace-picture.ts";
 import { type PictureHeader, readPictureHeader } from "./picture-header.ts";
+import { unpacksAsTold } from "./unpacks-as-told.ts";
 
 /**
  * A PNG or JPEG as pixels, turned the way its camera says. Its size is read from the header first: a small file can unpack to
@@ -13,6 +14,7 @@ export async function readPicture(bytes: Uint8Array): Promise<PictureFile> {
   const { lossy, density, warnings } = header;
   refuseBySize(header);
   if (header.channels === 4) throw new ArtworkRefused("picture.print-colours");
+  if (!lossy && !unpacksAsTold(bytes)) throw new ArtworkRefused("picture.unreadable");
   // Loaded by the first picture: drawings need none of it.
   const { Jimp } = await import("jimp");
   const limits = { maxResolutionInMP: artworkLimits.picturePixels / 1e6, maxMemoryUsageInMB: 1_000 };

@@ -1,5 +1,7 @@
 import { Jimp } from "jimp";
 import { longestPhotoSidePx } from "#shared/mockup/wall-photo.ts";
+import { sniffArtwork } from "../artwork/sniff-artwork.ts";
+import { unpacksAsTold } from "../artwork/unpacks-as-told.ts";
 
 export type PreparedBytes =
   | { readonly ok: true; readonly jpeg: Uint8Array; readonly widthPx: number; readonly heightPx: number }
@@ -7,16 +9,16 @@ export type PreparedBytes =
 
 /** Of what the encoder can do: beyond this the file grows and the wall does not get clearer. */
 const quality = 86;
-/** What decoding the largest picture that is let in takes, with room. */
-const decodeMemoryMb = 1_500;
+/** What decoding the largest picture that is let in takes, with room, and its pixels: the header that was looked at may not be the one that counts. */
+const decoding = { maxMemoryUsageInMB: 1_500, maxResolutionInMP: 40 };
 
 /**
  * A JPEG or PNG turned as its camera was held, made smaller where it is larger than a photo is kept, laid on white where it lets
  * light through, and written anew as a JPEG: only its pixels are taken over, nothing else that is in the file. `ok` is false for bytes that are no such picture.
  */
 export async function prepareBytes(bytes: Uint8Array): Promise<PreparedBytes> {
-  const options = { "image/jpeg": { maxMemoryUsageInMB: decodeMemoryMb } };
-  const picture = await Jimp.fromBuffer(Buffer.from(bytes), options).catch(() => null);
+  if (sniffArtwork(bytes).kind === "png" && !unpacksAsTold(bytes)) return { ok: false };
+  const picture = await Jimp.fromBuffer(Buffer.from(bytes), { "image/jpeg": decoding }).catch(() => null);
   if (!picture) return { ok: false };
   const { width, height, data } = picture.bitmap;
   const plain = new Jimp({ width, height, data });
