@@ -24,9 +24,11 @@ export function unpacksWithinLimit(bytes: Uint8Array, limit: number = artworkLim
   return true;
 }
 
-function startOfData(file: Buffer, at: number): number {
-  if (file[at] === 0x0d) return file[at + 1] === 0x0a ? at + 2 : at + 1;
-  return file[at] === 0x0a ? at + 1 : at;
+/** On the next line, as the reader has it, whatever else stands behind the word. */
+function startOfData(file: Buffer, from: number): number {
+  let at = from;
+  while (at < file.length && file[at] !== 0x0a && file[at] !== 0x0d) at++;
+  return file[at] === 0x0d && file[at + 1] === 0x0a ? at + 2 : at + 1;
 }
 
 /** RFC 1950, section 2.2: method 8, and the first two bytes as a number are a multiple of 31. */

@@ -323,6 +323,11 @@ describe("how much a PDF unpacks to", () => {
     expect(unpacksWithinLimit(bytes, limit)).toBe(within);
   });
 
+  // The reader begins at the next line, whatever stands behind the word.
+  it.each(["stream\n", "stream\r", "stream \n", "stream % a remark\r\n"])("is told behind %j", (word) => {
+    expect(unpacksWithinLimit(Buffer.concat([Buffer.from(`1 0 obj<<>>${word}`), packed]), 999)).toBe(false);
+  });
+
   it("is too much when a stream is packed over and over", () => {
     let data: Buffer = Buffer.from("x");
     for (let turn = 0; turn < 6; turn++) data = deflateSync(data);
