@@ -213,6 +213,40 @@ describe("work that never reached the server", () => {
     await page.close();
   });
 
+  it("is no conflict with itself when the window is made narrow and wide, or the mockup opened again, during a save", async () => {
+    const job = await newJob("Narrow");
+    const page = await seat.context.newPage();
+    await page.setViewportSize(sizes.desk);
+    const desk = await openDesk(page, job);
+    const leaveDuringSave = async (name: string, leave: () => Promise<void>) => {
+      const held = await holdJob(server.database, job.id);
+      await desk.write("Name of D", name);
+      await held.waiters(1);
+      await leave();
+      await page.getByText("The mockup opens as soon as that is done.").waitFor();
+      await held.release();
+      await desk.cell("Name of D").waitFor();
+      expect(await desk.cell("Name of D").inputValue()).toBe(name);
+      await desk.write("Name of C", `Beside ${name}`);
+      await job.named(`Beside ${name}`);
+      await desk.saved();
+      expect(await offered(page).count()).toBe(0);
+    };
+    await leaveDuringSave("Narrow", async () => {
+      await page.setViewportSize(sizes.phone);
+      await desk.cell("Name of D").waitFor({ state: "detached" });
+      await page.setViewportSize(sizes.desk);
+    });
+    await leaveDuringSave("Away", async () => {
+      await page.getByRole("heading", { level: 1 }).getByRole("link").click();
+      await page
+        .getByRole("link", { name: /mockup/i })
+        .first()
+        .click();
+    });
+    await page.close();
+  });
+
   it("is said not to be kept while the browser has no room, and is offered after a sign-in that lapsed meanwhile", async () => {
     const job = await newJob("Lapsed");
     const own = await takeSignedInSeat(browser, { baseUrl: server.baseUrl, email: owner.email });

@@ -1,9 +1,11 @@
 import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { useNavigate, useParams } from "react-router-dom";
 import type { Role } from "#shared/contracts/account.ts";
+import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { Unpriced } from "#shared/cost/priced-sign.ts";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { mockupQueries } from "@/features/mockup/api/queries.ts";
+import { useIsSaveLeft } from "@/features/mockup/editor/saves-left.ts";
 import { MockupDesk } from "@/features/mockup/panels/mockup-desk.tsx";
 import { MockupReadOnly } from "@/features/mockup/panels/mockup-read-only.tsx";
 import { limitsQuery } from "@/lib/limits-query.ts";
@@ -23,15 +25,30 @@ export function MockupPage() {
   const client = useQueryClient();
   const isWide = useMedia("(min-width: 900px)");
   const job = useQuery(mockupQueries.job(shop.slug, jobId));
-  const mockup = useQuery(mockupQueries.ofJob(shop.slug, jobId));
+  const isSaveLeft = useIsSaveLeft({ shop: shop.slug, jobId });
+  // Asked before a save is answered that was on its way when the desk was left, the server might tell the version before.
+  const mockup = useQuery({ ...mockupQueries.ofJob(shop.slug, jobId), enabled: !isSaveLeft });
   const stock = useQuery(stockQuery(shop.slug));
   const limits = useQuery(limitsQuery(shop.slug));
   usePageTitle(job.data ? `${job.data.title}, mockup` : "Mockup");
+
+  /** A window that is made narrow and wide again goes on from what was saved last. After the page was left, the server is asked. */
+  function noteSaved(saved: Mockup) {
+    const { queryKey } = mockupQueries.ofJob(shop.slug, jobId);
+    const isOpen = client.getQueryCache().find({ queryKey })?.getObserversCount();
+    if (isOpen) client.setQueryData(queryKey, saved);
+  }
 
   const failed = [job, mockup, stock, limits].find((query) => query.isError && query.data === undefined);
   if (failed)
     return (
       <LoadProblem what="The mockup could not be loaded." error={failed.error} onRetry={() => void failed.refetch()} />
+    );
+  if (isSaveLeft && isWide)
+    return (
+      <p role="status" className="px-4 py-8 text-graphite sm:px-6">
+        The last changes are being saved. The mockup opens as soon as that is done.
+      </p>
     );
   if (!job.data || !mockup.data || !stock.data || !limits.data)
     return (
@@ -67,8 +84,7 @@ export function MockupPage() {
       jobPath={paths.job(shop.slug, jobId)}
       pricesPath={pricesPath}
       cutPlanPath={paths.cutPlan(shop.slug, jobId)}
-      // A window that is made narrow and wide again goes on from what was saved last.
-      onSaved={(saved) => client.setQueryData(mockupQueries.ofJob(shop.slug, jobId).queryKey, saved)}
+      onSaved={noteSaved}
       onIssued={(revisionId) => void navigate(paths.sheet(shop.slug, revisionId))}
       renderTools={(tools) => <HeaderTools>{tools}</HeaderTools>}
     />

@@ -6,6 +6,7 @@ import { holdDesk } from "./desk-locks.ts";
 import type { DraftKeeper } from "./draft-keeper.ts";
 import type { DraftPlace } from "./draft-shelf.ts";
 import { saveDraft } from "./save-mockup.ts";
+import { leaveSave } from "./saves-left.ts";
 
 /** Where the work stands with the server, and what can be done about it. */
 export type Saving = ReturnType<typeof useAutosave>;
@@ -20,7 +21,7 @@ type Options = {
   readonly lastChange: string | null;
   /** Keeps in this browser what the server does not have yet. The same one as long as the desk is open. */
   readonly keeper: DraftKeeper;
-  /** Called with what the server holds after each save. */
+  /** Called with what the server holds after each save, and with the newer version that a save on the way out came upon. */
   readonly onSaved: (mockup: Mockup) => void;
 };
 
@@ -35,6 +36,8 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
   /** The document that is on the desk, also for a request that is answered after it was left. */
   const onDesk = useRef(start);
   const isLeft = useRef(false);
+  /** The save that is on its way, until everything that comes of its answer is done. */
+  const onItsWay = useRef<Promise<void> | null>(null);
   /** How many changes the server does not have. */
   const changes = useRef(0);
   const unlock = useRef(() => {});
@@ -53,13 +56,22 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
     const rest = onDesk.current;
     await keeper.keepNow({ version, changes: changes.current, lastChange, document: rest });
     const outcome = await saveDraft(place, { version, document: rest });
+    if (outcome.kind === "newer") onSaved(outcome.newer);
     if (outcome.kind !== "saved") return;
     onSaved({ ...outcome.mockup, document: rest });
     await keeper.letGo();
   }
 
-  const send = useEffectEvent(async () => {
+  const send = useEffectEvent(() => {
     if (autosave.state === "saving" || autosave.state === "stale") return;
+    const sending = sendNow();
+    onItsWay.current = sending;
+    void sending.finally(() => {
+      if (onItsWay.current === sending) onItsWay.current = null;
+    });
+  });
+
+  const sendNow = useEffectEvent(async () => {
     const sent = document;
     const sentChanges = changes.current;
     dispatch({ kind: "sent" });
@@ -72,8 +84,11 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
       dispatch({ kind: "answered", version, savedAt });
       if (onDesk.current === sent) await keeper.letGo();
       else if (isLeft.current) await sendTheRest(version);
-    } else if (outcome.kind === "newer") dispatch(outcome);
-    else if (outcome.kind === "refused") dispatch(outcome);
+    } else if (outcome.kind === "newer") {
+      dispatch(outcome);
+      // A desk that is opened again begins from there, and offers what this one kept.
+      if (isLeft.current) onSaved(outcome.newer);
+    } else if (outcome.kind === "refused") dispatch(outcome);
     else dispatch({ kind: "unreachable", now: Date.now() });
     if (isLeft.current) unlock.current();
   });
@@ -94,7 +109,7 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
   const due = saveDueAt(autosave);
   useEffect(() => {
     if (due === null) return;
-    const timer = setTimeout(() => void send(), Math.max(0, due - Date.now()));
+    const timer = setTimeout(() => send(), Math.max(0, due - Date.now()));
     return () => clearTimeout(timer);
   }, [due]);
 
@@ -105,7 +120,7 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
   }, [state, version]);
 
   const sendWhenBack = useEffectEvent(() => {
-    if (autosave.state === "offline") void send();
+    if (autosave.state === "offline") send();
   });
   useEffect(() => {
     const tryAgain = () => sendWhenBack();
@@ -145,7 +160,8 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
     if (!isSent) void keeper.keepNow(work());
     // Until an answer came the work is still on its way, and nobody is to be offered it.
     if (isSent || autosave.state === "stale") unlock.current();
-    else void send();
+    else send();
+    if (onItsWay.current !== null) leaveSave(place, onItsWay.current);
   });
   const { deskId } = keeper;
   useEffect(() => {
@@ -165,7 +181,7 @@ export function useAutosave({ mockup, start, document, place, lastChange, keeper
           return;
         }
         waiters.current.push(resolve);
-        void send();
+        send();
       }),
     keepMine: () => dispatch({ kind: "keep mine", now: Date.now() }),
     /** The caller puts the newer document on the desk; from here on it is the one the server has. */

@@ -4,6 +4,7 @@ import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import type { Mockup } from "#shared/contracts/mockups.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
 import { draftKeeper } from "@/features/mockup/editor/draft-keeper.ts";
+import { useIsSaveLeft } from "@/features/mockup/editor/saves-left.ts";
 import { type Saving, useAutosave } from "@/features/mockup/editor/use-autosave.ts";
 import { type Answer, startAnswers } from "../../../support/answers.ts";
 import { render, until } from "../../../support/render.tsx";
@@ -27,12 +28,19 @@ const saved = (version: number, document: MockupDocument): Mockup => ({
   savedBy: "Robin",
 });
 
+/** What the desk said that the server holds, in this order. */
+let told: Mockup[];
+/** The page that the desk lies on, and goes on after it. */
+function OtherPage({ jobId = place.jobId }: { jobId?: string }) {
+  return <p>{useIsSaveLeft({ shop: place.shop, jobId }) ? "being saved" : "may be opened"}</p>;
+}
+
 let saving: Saving;
 let shelf: ReturnType<typeof memoryShelf>;
 let keeper: ReturnType<typeof draftKeeper>;
 function Desk({ document }: { document: MockupDocument }) {
   const lastChange = `Quantity ${document.quantity}`;
-  const onSaved = () => undefined;
+  const onSaved = (mockup: Mockup) => void told.push(mockup);
   saving = useAutosave({ mockup: start, start: start.document, document, place, lastChange, keeper, onSaved });
   return null;
 }
@@ -41,6 +49,7 @@ let answers: Awaited<ReturnType<typeof startAnswers>>;
 let answer: (body: unknown) => Answer | Promise<Answer>;
 let desk: Awaited<ReturnType<typeof render>>;
 beforeEach(async () => {
+  told = [];
   shelf = memoryShelf();
   keeper = draftKeeper({ shelf, place, deskId: "d1", onOutcome: () => undefined });
   answer = () => ({ status: 200, json: saved(4, edited) });
@@ -125,6 +134,40 @@ describe("saving what is on the desk", () => {
     await until(() => answers.asked.length === 2);
     expect(answers.asked[1]).toMatchObject({ body: { version: 4, document: { quantity: 3 } } });
     await untilKept(false);
+  });
+
+  it("says that a save is under way until all that was changed is answered, so that no desk begins from before it", async () => {
+    const letGo = holdFirstSave();
+    await desk.redraw(<Desk document={edited} />);
+    await until(() => answers.asked.length === 1);
+    await desk.redraw(<Desk document={emptyMockup({ quantity: 3 })} />);
+    await desk.redraw(
+      <>
+        <OtherPage />
+        <OtherPage jobId="3f0f4f6e-52d5-4d3e-8a7e-6a0f6c1d2b11" />
+      </>,
+    );
+    expect(desk.element.textContent).toBe("being savedmay be opened");
+    letGo();
+    await until(() => desk.element.textContent === "may be openedmay be opened");
+    expect(answers.asked).toHaveLength(2);
+    expect(told.map(({ version, document }) => [version, document.quantity])).toEqual([
+      [4, 2],
+      [5, 3],
+    ]);
+  });
+
+  it("tells of the newer version that it comes upon on the way out", async () => {
+    const newer = saved(9, emptyMockup({ quantity: 7 }));
+    answer = () => ({
+      status: 409,
+      json: { type: "/problems/stale", title: "Stale", status: 409, code: "stale", extra: { newer } },
+    });
+    await desk.redraw(<Desk document={edited} />);
+    await desk.redraw(<OtherPage />);
+    await until(() => desk.element.textContent === "may be opened" && told.length > 0);
+    expect(told).toEqual([newer]);
+    expect(await keptHere()).toMatchObject({ version: 3, document: { quantity: 2 } });
   });
 
   it("stops at a newer version, keeps the work here, and saves over it when told to keep mine", async () => {
