@@ -20,5 +20,8 @@ export const artworkLimits = {
   picturePixels: 40_000_000,
   pictureSide: 16,
   pictureTimeMs: 60_000,
+  /** Connected areas of one colour: of the traced picture before specks are taken out, and of those left, with the ones that become no pieces. */
+  pictureAreas: 500_000,
+  pictureOutlines: 40_000,
   memoryMb: 512,
 } as const;

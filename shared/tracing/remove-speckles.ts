@@ -1,10 +1,15 @@
+import { artworkLimits } from "../artwork/limits.ts";
+import { ArtworkRefused } from "../artwork/refusals.ts";
 import type { Labels } from "./label-pixels.ts";
 import { pixelAreas } from "./pixel-areas.ts";
 
 /** Taking one speckle out joins what lay around it, which may leave another to be taken. */
 const mostRounds = 4;
 
-/** The labels with every area of fewer than `leastPixels` given to the colour that it borders most. */
+/**
+ * The labels with every area of fewer than `leastPixels` given to the colour that it borders most. Throws ArtworkRefused for a picture that is
+ * hardly more than specks: counting what each borders would take gigabytes.
+ */
 export function removeSpeckles(labels: Labels, leastPixels: number): Labels {
   let current = labels;
   for (let round = 0; round < mostRounds; round++) {
@@ -18,6 +23,7 @@ export function removeSpeckles(labels: Labels, leastPixels: number): Labels {
 function oneRound(labels: Labels, leastPixels: number): Labels | null {
   const { width, height } = labels;
   const { of, areas } = pixelAreas(labels);
+  if (areas.length > artworkLimits.pictureAreas) throw new ArtworkRefused("picture.too-many-pieces");
   const small = areas.map(({ pixels }) => pixels < leastPixels);
   if (areas.length < 2 || !small.includes(true)) return null;
   const borders = new Map<number, Map<number, number>>();

@@ -1,3 +1,5 @@
+import { artworkLimits } from "../artwork/limits.ts";
+import { ArtworkRefused } from "../artwork/refusals.ts";
 import { artworkWarnings, type WarningCode } from "../artwork/warnings.ts";
 import { nodeCount } from "../geometry/node-count.ts";
 import { chooseLabels } from "./choose-labels.ts";
@@ -8,7 +10,7 @@ import { outlineAreas } from "./outline-areas.ts";
 import type { Picture } from "./picture.ts";
 import { hexOf } from "./picture-colours.ts";
 import { type Density, pictureSize } from "./picture-size.ts";
-import { pixelAreas } from "./pixel-areas.ts";
+import { type PixelAreas, pixelAreas } from "./pixel-areas.ts";
 import { removeSpeckles } from "./remove-speckles.ts";
 import { scaleDown } from "./scale-down.ts";
 import type { TraceChoices } from "./trace-choices.ts";
@@ -49,6 +51,7 @@ export function tracePicture({ picture, lossy, density, warnings }: PictureFile,
   const chosen = chooseLabels(relabelled(shades, palette.colourOf), palette.colours, choices);
   const labels = removeSpeckles(chosen.labels, choices.speckle);
   const areas = pixelAreas(labels);
+  refuseTooMany(areas, chosen.none);
   const kind = lossy ? "lossy" : "drawn";
   const outlines = outlineAreas(labels, areas, {
     tolerancePx: tolerancePx[kind] * smoothing[choices.smoothing].factor,
@@ -88,4 +91,11 @@ export function tracePicture({ picture, lossy, density, warnings }: PictureFile,
       smallestMm2: Math.min(...pieces.map(({ areaMm2 }) => areaMm2)),
     },
   };
+}
+
+/** Before any border is walked, which for a picture of nothing but specks takes half a minute and more memory than there is. */
+function refuseTooMany({ areas }: PixelAreas, none: number): void {
+  const coloured = areas.filter(({ label }) => label !== none).length;
+  if (coloured > artworkLimits.pieces || areas.length > artworkLimits.pictureOutlines)
+    throw new ArtworkRefused("picture.too-many-pieces");
 }

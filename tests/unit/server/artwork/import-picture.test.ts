@@ -1,6 +1,7 @@
 import { deflateSync } from "node:zlib";
 import { afterAll, describe, expect, it } from "vitest";
 import { importFile, stopImporting } from "#server/artwork/import-file.ts";
+import { firstChoices } from "#shared/tracing/trace-choices.ts";
 import { jpegOf, paintedPicture, pngChunk, pngDensity, pngOf, rawPng } from "../../../support/pictures.ts";
 
 afterAll(stopImporting);
@@ -142,6 +143,15 @@ describe("pictures that are refused, with the reason in words", () => {
     const head = file.subarray(0, 33);
     return Buffer.concat([head, pngChunk("IDAT", deflateSync(Buffer.alloc(400_000_000)))]);
   })();
+  /** Every second pixel black, as a chess board: a file of less than a kilobyte. */
+  const specks = rawPng({
+    width: 1000,
+    height: 1000,
+    depth: 1,
+    colourType: 0,
+    bytesPerPixel: 1 / 8,
+    rows: Uint8Array.from({ length: 1000 * 125 }, (_, at) => (Math.floor(at / 125) % 2 ? 0xaa : 0x55)),
+  });
   it.each([
     { name: "a cut PNG", bytes: () => png.subarray(0, 60), code: "picture.unreadable" },
     { name: "a PNG without its header", bytes: () => png.subarray(0, 12), code: "picture.unreadable" },
@@ -172,6 +182,7 @@ describe("pictures that are refused, with the reason in words", () => {
       bytes: () => Buffer.concat([Buffer.from("ffd8ffc00011080028003c03011100021101031101", "hex"), Buffer.alloc(9)]),
       code: "picture.unreadable",
     },
+    { name: "half a million specks on white", bytes: () => specks, code: "picture.too-many-pieces" },
     {
       name: "a picture of nothing",
       bytes: () => pngOf(paintedPicture(40, 40, () => "#00000000", 1)),
@@ -181,6 +192,23 @@ describe("pictures that are refused, with the reason in words", () => {
     const outcome = await outcomeOf(bytes());
     expect(outcome).toMatchObject({ ok: false, refusal: { code } });
     if (!outcome.ok) expect(outcome.refusal.text).toMatch(/\.$/);
+  });
+
+  it.each([
+    { name: "specks that are all to be kept", dropped: [] },
+    { name: "specks that are all left out of what is to be cut", dropped: ["#FFFFFF"] },
+  ])("$name", async ({ dropped }) => {
+    const width = 600;
+    const rows = Uint8Array.from({ length: width * width }, (_, at) =>
+      Math.floor(at / width) % 2 && (at % width) % 2 ? 255 : 0,
+    );
+    const bytes = rawPng({ width, height: width, depth: 8, colourType: 0, bytesPerPixel: 1, rows });
+    const faults: string[] = [];
+    const choices = { ...firstChoices, speckle: 0, dropped, background: "kept" as const };
+    const onFault = (fault: string) => faults.push(fault);
+    const outcome = await importFile(bytes, { timeMs: 60_000, choices, onFault });
+    expect(faults).toEqual([]);
+    expect(outcome).toMatchObject({ ok: false, refusal: { code: "picture.too-many-pieces" } });
   });
 
   it("and the next file is taken all the same", async () => {
