@@ -11,19 +11,24 @@ export type KillableServer = {
   readonly baseUrl: string;
   readonly database: TestDatabase;
   readonly filesDir: string;
+  /** Where the mails lie that nobody sends in a test. */
+  readonly mailDir: string;
   /** Starts the built server and waits until it says that it is ready. */
   readonly start: () => Promise<void>;
   /** kill -9: nothing of the process is asked, nothing is finished. */
   readonly kill: () => Promise<void>;
   /** Everything the server printed, over all its lives. */
   readonly printed: () => string;
-  /** Kills it and clears everything away. */
+  /** Kills it and clears away everything that is its own. */
   readonly clear: () => Promise<void>;
 };
 
-/** The server as it is deployed: the bundle, in a process of its own, as the role that owns no table. */
-export async function prepareServer(): Promise<KillableServer> {
-  const database = await createTestDatabase();
+/**
+ * The server as it is deployed: the bundle, in a process of its own, as the role that owns no table. With `beside` it is one more
+ * process over the same database, files and mails as another; that one is cleared last.
+ */
+export async function prepareServer({ beside }: { beside?: KillableServer } = {}): Promise<KillableServer> {
+  const database = beside?.database ?? (await createTestDatabase());
   const folder = await mkdtemp(join(tmpdir(), "standproud-kill-"));
   const root = checkoutOf(import.meta.url);
   // A copy, so that a build beside this test can't pull the bundle away between two starts.
@@ -31,7 +36,8 @@ export async function prepareServer(): Promise<KillableServer> {
   await cp(join(root, "dist", "server"), bundle, { recursive: true });
   const port = await findFreePort();
   const baseUrl = `http://127.0.0.1:${port}`;
-  const filesDir = join(folder, "files");
+  const filesDir = beside?.filesDir ?? join(folder, "files");
+  const mailDir = beside?.mailDir ?? join(folder, "mail");
   const env = {
     PATH: process.env.PATH,
     NODE_ENV: "production",
@@ -41,7 +47,7 @@ export async function prepareServer(): Promise<KillableServer> {
     APP_DATABASE_URL: database.appUrl,
     AUTH_SECRET: "a secret for tests, of no worth to anybody",
     FILES_DIR: filesDir,
-    MAIL_SINK_DIR: join(folder, "mail"),
+    MAIL_SINK_DIR: mailDir,
     RATE_LIMIT_FACTOR: "1000",
   };
   let output = "";
@@ -60,6 +66,7 @@ export async function prepareServer(): Promise<KillableServer> {
     baseUrl,
     database,
     filesDir,
+    mailDir,
     kill,
     printed: () => output,
     async start() {
@@ -81,7 +88,7 @@ export async function prepareServer(): Promise<KillableServer> {
     },
     async clear() {
       await kill();
-      await database.drop();
+      if (!beside) await database.drop();
       await rm(folder, { recursive: true, force: true });
       await rm(bundle, { recursive: true, force: true });
     },

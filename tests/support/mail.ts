@@ -2,12 +2,16 @@ import { readdir, readFile } from "node:fs/promises";
 import { join } from "node:path";
 import { type ParsedMail, simpleParser } from "mailparser";
 import type { TestApp } from "./app.ts";
+import { runSql } from "./run-sql.ts";
 
 export type Caught = { to: string; subject: string; text: string; html: string; parsed: ParsedMail; source: string };
 
 /** Every mail that the sink caught, of all shops, the newest first. */
-export async function caughtMails({ services }: Pick<TestApp, "services">): Promise<Caught[]> {
-  const dir = services.env.MAIL_SINK_DIR ?? "";
+export const caughtMails = ({ services }: Pick<TestApp, "services">): Promise<Caught[]> =>
+  mailsIn(services.env.MAIL_SINK_DIR ?? "");
+
+/** Every mail that lies in a sink's folder, the newest first. */
+export async function mailsIn(dir: string): Promise<Caught[]> {
   const names = (await readdir(dir))
     .filter((name) => name.endsWith(".eml"))
     .sort()
@@ -29,6 +33,12 @@ export async function caughtMails({ services }: Pick<TestApp, "services">): Prom
       };
     }),
   );
+}
+
+/** Lets the time pass that mails gather in, and sends them. */
+export async function sendGathered(app: Pick<TestApp, "database" | "runJobs">): Promise<void> {
+  await runSql(app.database.ownerUrl, "update graphile_worker._private_jobs set run_at = now() where run_at > now()");
+  await app.runJobs();
 }
 
 /** The secret of the one link in a mail. Throws when there is none, or more than one. */

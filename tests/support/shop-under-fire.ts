@@ -119,7 +119,7 @@ export async function openShopUnderFire(server: KillableServer) {
       `select (select count(*)::int from events where kind = 'revision issued') as issued,
               (select count(*)::int from outgoing_mails where kind = 'proof issued' and state in ('sent', 'dropped')) as mails`,
     );
-    expect(counted).toEqual([{ issued: revisions, mails: Math.min(revisions, mostMails) }]);
+    expect(counted).toEqual([{ issued: revisions, mails: revisions }]);
   }
 
   async function download(path: string): Promise<{ status: number; bytes: Uint8Array }> {
@@ -128,7 +128,18 @@ export async function openShopUnderFire(server: KillableServer) {
     return { status: response.status, bytes: new Uint8Array(await response.arrayBuffer()) };
   }
 
-  return { visitor, files, acknowledged, issue, bringIn, settled, expectWhole, close: () => sequelize.close() };
+  return {
+    shop: owner.shop,
+    approver,
+    visitor,
+    files,
+    acknowledged,
+    issue,
+    bringIn,
+    settled,
+    expectWhole,
+    close: () => sequelize.close(),
+  };
 }
 
 /** What a request answered; undefined when the connection was cut by the kill. Anything else is thrown. */

@@ -1,6 +1,6 @@
 import type { Page } from "playwright-core";
 
-export type NoteToAdd = { kind: "Must change" | "Question" | "Fine as is"; text: string };
+export type NoteToAdd = { kind: "Must change" | "Question" | "Fine as is"; text: string; shopOnly?: boolean };
 
 /** A revision as a drawing sheet, on the desk and in the hand. */
 export function sheet(page: Page) {
@@ -25,7 +25,7 @@ export function sheet(page: Page) {
       await viewer.getByRole("img", { name: "Front elevation" }).waitFor();
     },
     /** Touches a spot of the board, given as parts of its width and height, and writes a note about it. */
-    async addNoteAt({ across, down }: { across: number; down: number }, { kind, text }: NoteToAdd) {
+    async addNoteAt({ across, down }: { across: number; down: number }, { kind, text, shopOnly = false }: NoteToAdd) {
       await notes.getByRole("button", { name: "Add a note" }).click();
       await page.getByText("Touch the spot you mean.").waitFor();
       // The board has no role of its own: it is a shape of the drawing.
@@ -37,14 +37,15 @@ export function sheet(page: Page) {
       const form = page.getByRole("form", { name: "A new note" });
       await form.getByText(kind, { exact: true }).click();
       await form.getByLabel("Your note").fill(text);
+      if (shopOnly) await form.getByLabel("Shop only").check();
       await form.getByRole("button", { name: "Add the note" }).click();
       await form.waitFor({ state: "detached" });
     },
     async reply(number: number, text: string) {
       await note(number)
-        .getByRole("button", { name: `Reply to note ${number}` })
+        .getByRole("button", { name: `Reply to note ${number}`, exact: true })
         .click();
-      await note(number).getByLabel(`Reply to note ${number}`).fill(text);
+      await note(number).getByLabel(`Reply to note ${number}`, { exact: true }).fill(text);
       await note(number).getByRole("button", { name: "Send the reply" }).click();
       await note(number)
         .getByRole("list", { name: `Replies to note ${number}` })
