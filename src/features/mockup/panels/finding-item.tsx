@@ -12,6 +12,7 @@ import { formatDay } from "@/lib/format.ts";
 import { useReader } from "@/lib/shop-context.ts";
 import type { DeskStanding } from "../editor/use-standings.ts";
 import { shortAndRest } from "../model/short-text.ts";
+import { titleAndLayer } from "../model/title-and-layer.ts";
 import { WordButton } from "./cell-controls.tsx";
 import { SeverityWord } from "./finding-look.tsx";
 import { SetAsideForm } from "./set-aside-form.tsx";
@@ -70,7 +71,12 @@ export function FindingItem({
         <div className="flex flex-wrap items-center gap-x-3">
           {onMend &&
             mends.map((mend) => (
-              <WordButton key={mend.label} className="-ml-1" onClick={() => onMend(mend)}>
+              <WordButton
+                key={mend.label}
+                className="-ml-1"
+                aria-label={`${mend.label}: ${titleAndLayer(finding)}`}
+                onClick={() => onMend(mend)}
+              >
                 {mend.label}
               </WordButton>
             ))}
@@ -132,7 +138,7 @@ function WaysToSetAside({ finding, role, onSend }: WaysProps) {
     <WordButton
       ref={opener}
       className="-ml-1"
-      aria-label={`Set aside: ${finding.title}`}
+      aria-label={`Set aside: ${titleAndLayer(finding)}`}
       onClick={() => setAsking(true)}
     >
       Set aside …

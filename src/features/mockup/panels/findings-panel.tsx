@@ -52,7 +52,13 @@ export function FindingsPanel(props: FindingsPanelProps) {
       isShown={one.finding === shown}
       onShow={onShow}
       mends={isCurrent ? (mends.get(one.finding) ?? []) : []}
-      onMend={onMend}
+      onMend={
+        onMend &&
+        ((mend) => {
+          onMend(mend);
+          landing.go("open");
+        })
+      }
       onSetAside={
         settingAside &&
         (async (finding, reason) => {
@@ -65,7 +71,12 @@ export function FindingsPanel(props: FindingsPanelProps) {
   );
 
   return (
-    <section aria-label="Dry fit" aria-busy={!(isCurrent && ready)} className={cx("min-w-0 px-4 pt-2 pb-6", className)}>
+    <section
+      aria-label="Dry fit"
+      data-desk-part
+      aria-busy={!(isCurrent && ready)}
+      className={cx("min-w-0 px-4 pt-2 pb-6", className)}
+    >
       <h2 ref={landing.open} tabIndex={-1} className="font-serif text-base font-bold text-ink">
         Dry fit{" "}
         <span role="status" className="font-sans text-sm font-normal text-graphite">

@@ -4,6 +4,7 @@ import type { Finding } from "#shared/dry-fit/finding.ts";
 import { formatDay } from "@/lib/format.ts";
 import type { DeskStanding } from "../editor/use-standings.ts";
 import { keyedStandings } from "../model/keyed-standings.ts";
+import { titleAndLayer } from "../model/title-and-layer.ts";
 import { WordButton } from "./cell-controls.tsx";
 import { SeverityWord } from "./finding-look.tsx";
 import { ShowFinding } from "./show-finding.tsx";
@@ -48,7 +49,7 @@ export function SetAsideList({ standings, heading, onShow, onTakeBack }: SetAsid
                   <WordButton
                     inText
                     className="ml-1"
-                    aria-label={`Take back: ${finding.title}`}
+                    aria-label={`Take back: ${titleAndLayer(finding)}`}
                     onClick={() => void onTakeBack(setAside).then(setProblem)}
                   >
                     Take back

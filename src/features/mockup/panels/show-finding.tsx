@@ -1,4 +1,5 @@
 import type { Finding } from "#shared/dry-fit/finding.ts";
+import { titleAndLayer } from "../model/title-and-layer.ts";
 import { WordButton } from "./cell-controls.tsx";
 
 type ShowFindingProps = {
@@ -11,7 +12,7 @@ type ShowFindingProps = {
 export function ShowFinding({ finding, onShow }: ShowFindingProps) {
   if (!onShow || (finding.where === null && finding.layerKey === null)) return null;
   return (
-    <WordButton inText aria-label={`Show: ${finding.title}`} onClick={() => onShow(finding)}>
+    <WordButton inText aria-label={`Show: ${titleAndLayer(finding)}`} onClick={() => onShow(finding)}>
       Show
     </WordButton>
   );

@@ -167,7 +167,7 @@ describe("setting a finding aside", () => {
   it("asks why, sends the saved version's finding, and moves it below with reason, name and day", async () => {
     await show({ findings: [thin] });
     expect(summary()).toBe("1 stop, 9 fine");
-    await press(button("Set aside: Thin stroke"));
+    await press(button("Set aside: Thin stroke of C"));
     expect(document.activeElement).toBe(area());
     await write("Drawn so by the client");
     await press(button("Set aside"));
@@ -186,21 +186,21 @@ describe("setting a finding aside", () => {
 
   it("sends nothing without a reason, and gives the focus back when it is left by Escape", async () => {
     await show({ findings: [thin] });
-    await press(button("Set aside: Thin stroke"));
+    await press(button("Set aside: Thin stroke of C"));
     await write("  ok ");
     await press(button("Set aside"));
     expect(says("Say why, in a few words.")).toBe(true);
     expect(area().getAttribute("aria-invalid")).toBe("true");
     await act(async () => area().dispatchEvent(new KeyboardEvent("keydown", { key: "Escape", bubbles: true })));
     expect(document.querySelector("textarea")).toBeNull();
-    expect(document.activeElement).toBe(button("Set aside: Thin stroke"));
+    expect(document.activeElement).toBe(button("Set aside: Thin stroke of C"));
     expect(written()).toEqual([]);
   });
 
   it("says under the reason what the server refused, and keeps what was written", async () => {
     refusal = { code: "already_exists", detail: "Ben Owner has set this aside already: as meant" };
     await show({ findings: [thin] });
-    await press(button("Set aside: Thin stroke"));
+    await press(button("Set aside: Thin stroke of C"));
     await write("Drawn so by the client");
     await press(button("Set aside"));
     await until(() => says("Ben Owner has set this aside already: as meant"));
@@ -209,7 +209,7 @@ describe("setting a finding aside", () => {
 
   it("sends nothing when the mockup could not be saved", async () => {
     await show({ findings: [thin], save: async () => null });
-    await press(button("Set aside: Thin stroke"));
+    await press(button("Set aside: Thin stroke of C"));
     await write("Drawn so by the client");
     await press(button("Set aside"));
     await until(() => says("The mockup could not be saved, so nothing was set aside."));
@@ -227,7 +227,7 @@ describe("what was set aside", () => {
     expect(asideRegion()).toBeNull();
     expect(says("Ada Maker set this aside on 1 Dec 2026: “Drawn so by the client”")).toBe(true);
     expect(says("The value was 1.82 mm then, it is 1.64 mm now.")).toBe(true);
-    await press(button("Set aside: Thin stroke"));
+    await press(button("Set aside: Thin stroke of C"));
     await write("Thinner still");
     await redraw({ findings: [{ ...thin, value: 1.5 }] });
     expect(area().value).toBe("Thinner still");
@@ -237,7 +237,7 @@ describe("what was set aside", () => {
   it("is taken back with a press, and the focus goes to what stands", async () => {
     kept = [asideOf(thin)];
     await show({ findings: [thin] });
-    await press(button("Take back: Thin stroke"));
+    await press(button("Take back: Thin stroke of C"));
     await until(() => asideRegion() === null);
     expect(written()).toEqual([
       {
