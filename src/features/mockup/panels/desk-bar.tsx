@@ -17,7 +17,11 @@ type DeskBarProps = {
 /** What can be brought in, and how what is chosen is set out. */
 export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBarProps) {
   return (
-    <div className="flex flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-1 sm:px-6">
+    <section
+      aria-label="Tools"
+      data-desk-part
+      className="flex flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-1 sm:px-6"
+    >
       <h1
         className="flex max-w-72 min-w-0 gap-1.5 font-sans text-sm text-ink min-[1600px]:max-w-2xl"
         title={`${client}, ${title}`}
@@ -40,6 +44,6 @@ export function DeskBar({ client, title, jobPath, cutPlanPath, onOpen }: DeskBar
         <WordButton onClick={() => onOpen("board")}>Board</WordButton>
         <WordButton onClick={() => onOpen("keys")}>Keys</WordButton>
       </span>
-    </div>
+    </section>
   );
 }

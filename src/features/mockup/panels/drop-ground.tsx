@@ -14,7 +14,7 @@ export function DropGround({ className, onFiles, children }: DropGroundProps) {
   const { over, handlers } = useFileDrop(onFiles);
   useDropsKeptOut();
   return (
-    <section aria-label="Drawing" {...handlers} className={cx("relative", className)}>
+    <section aria-label="Drawing" data-desk-part {...handlers} className={cx("relative", className)}>
       {children}
       {over && (
         <p className="pointer-events-none absolute inset-2 z-20 flex items-center justify-center border-2 border-dashed border-indigo bg-sheet/80 text-base font-semibold text-indigo">

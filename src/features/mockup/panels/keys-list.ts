@@ -33,6 +33,15 @@ export const deskKeys: readonly DeskKeys[] = [
     ],
   },
   {
+    where: "Anywhere on the desk",
+    keys: [
+      {
+        keys: "F6, Shift F6",
+        does: "to the next part and back: head, tools, drawing, section, place, schedule, pieces, dry fit",
+      },
+    ],
+  },
+  {
     where: "On a layer in the section",
     keys: [
       { keys: "Arrows", does: "raise it from barrel to barrel, or let it in step by step" },

@@ -15,6 +15,7 @@ import { viewAt } from "../canvas/view-of-board.ts";
 import { type Desk, DeskContext } from "../editor/desk-context.ts";
 import { useDeskAids } from "../editor/use-desk-aids.ts";
 import { useKeptWhile } from "../editor/use-kept-while.ts";
+import { usePartKeys } from "../editor/use-part-keys.ts";
 import { useSafeEditor } from "../editor/use-safe-editor.ts";
 import { useSettingAside } from "../editor/use-setting-aside.ts";
 import { useStandings } from "../editor/use-standings.ts";
@@ -90,6 +91,7 @@ export function MockupDesk(props: MockupDeskProps) {
   const standings = useStandings({ shop, jobId: job.id }, drawn?.dryFit.findings ?? null);
   const settingAside = useSettingAside({ shop, jobId: job.id, save: saving.saveNow });
   useUndoKeys(dispatch);
+  usePartKeys();
   const { aids, changeAids } = useDeskAids(personId, unit);
   const { said, say } = useVoice(editor.history, () => placeWords(document, editor.selection, unit));
 

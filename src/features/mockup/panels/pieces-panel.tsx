@@ -30,7 +30,11 @@ export function PiecesPanel() {
   };
 
   return (
-    <section aria-label={`Pieces of ${key}`} className="space-y-4 border-t border-rule px-4 pt-3 pb-6 sm:px-6">
+    <section
+      aria-label={`Pieces of ${key}`}
+      data-desk-part
+      className="space-y-4 border-t border-rule px-4 pt-3 pb-6 sm:px-6"
+    >
       <div className="flex flex-wrap items-baseline gap-x-4">
         <h2 className="min-w-0 font-serif text-base font-bold wrap-anywhere text-ink">
           Pieces of {key}, {name}

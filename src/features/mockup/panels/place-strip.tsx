@@ -20,6 +20,7 @@ export function PlaceStrip({ said }: { readonly said: Said }) {
   return (
     <section
       aria-label="Place of what is chosen"
+      data-desk-part
       className="flex min-h-10 flex-wrap items-center gap-x-3 border-b border-rule px-4 py-1 sm:px-6"
     >
       <p className="max-w-64 min-w-0 truncate text-sm font-semibold text-ink" title={words ?? undefined}>

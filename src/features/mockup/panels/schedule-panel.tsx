@@ -29,7 +29,7 @@ export function SchedulePanel({
   const isLaid = slats !== null || document.frame !== null;
 
   return (
-    <section aria-label="Schedule" className="min-w-0 px-4 pt-2 pb-6 sm:px-6">
+    <section aria-label="Schedule" data-desk-part className="min-w-0 px-4 pt-2 pb-6 sm:px-6">
       <div className="flex min-h-8 flex-wrap items-baseline justify-between gap-x-6">
         <h2 className="font-serif text-base font-bold text-ink">Schedule</h2>
         <LayerTools onBoard={onBoard} />

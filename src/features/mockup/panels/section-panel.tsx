@@ -52,7 +52,11 @@ export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
   }
 
   return (
-    <section aria-label="Section" className="relative h-full min-h-0 overflow-hidden border-l border-ink bg-sheet">
+    <section
+      aria-label="Section"
+      data-desk-part
+      className="relative h-full min-h-0 overflow-hidden border-l border-ink bg-sheet"
+    >
       <div ref={element} className="absolute inset-0 overflow-hidden">
         {list && (
           <div

@@ -158,6 +158,24 @@ const shown: Readonly<Record<string, () => Promise<void>>> = {
       expect(said()).toBe("Done again: Remove pieces");
     }
   },
+  "Anywhere on the desk: F6, Shift F6": async () => {
+    const focused = () => document.activeElement?.getAttribute("aria-label");
+    await showSetOut(document0, { chosen });
+    await pressKey("F6");
+    expect(focused()).toBe("Place of what is chosen");
+    await pressKey("F6", "x of what is chosen");
+    expect(focused()).toBe("Head");
+    await pressKey("Shift F6", "x of what is chosen");
+    expect(focused()).toBe("Head");
+    await pressKey("Shift F6", "Head");
+    expect(focused()).toBe("Place of what is chosen");
+    await pressKey("Shift F6", "A field");
+    expect(focused()).toBe("Place of what is chosen");
+    expect(page().editor.selection).toEqual(chosen);
+    // It is no stop of Tab, nor one of the mouse: only while the key has brought the focus there.
+    control("A field", HTMLInputElement).focus();
+    expect(control("Place of what is chosen", HTMLElement).hasAttribute("tabindex")).toBe(false);
+  },
   "In a cell of a list: Enter": async () => {
     await showSetOut(document0, { chosen });
     await typeThen("x of what is chosen", "77,5", "Enter");

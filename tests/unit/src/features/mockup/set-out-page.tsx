@@ -3,6 +3,7 @@ import { rectanglePath } from "#shared/geometry/shapes.ts";
 import type { Layer, MockupDocument, Piece } from "#shared/mockup/document.ts";
 import { useCanvasKeys } from "@/features/mockup/canvas/use-canvas-keys.ts";
 import { type Desk, DeskContext } from "@/features/mockup/editor/desk-context.ts";
+import { usePartKeys } from "@/features/mockup/editor/use-part-keys.ts";
 import { useUndoKeys } from "@/features/mockup/editor/use-undo-keys.ts";
 import { useVoice } from "@/features/mockup/editor/use-voice.ts";
 import type { Drag } from "@/features/mockup/model/drag.ts";
@@ -82,9 +83,11 @@ function SetOutPage({ document, chosen, desk, startDrag }: PageProps) {
   const [drag, setDrag] = useState<Drag | null>(startDrag);
   held = { editor, view, drag };
   useUndoKeys(dispatch);
+  usePartKeys();
   const { said, say } = useVoice(editor.history, () => placeWords(editor.history.present, editor.selection, "mm"));
   return (
     <DeskContext value={buildDesk(editor, dispatch, { say, ...desk })}>
+      <section aria-label="Head" data-desk-part />
       <Drawing view={view ?? whole} fit={whole} room={room} onView={setView} drag={drag} onDrag={setDrag} />
       <SetOutTools onOpen={setDialog} />
       <PlaceStrip said={said} />
