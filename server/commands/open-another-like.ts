@@ -80,6 +80,9 @@ async function lastDocument(context: Context, { id: jobId, shopId }: Job): Promi
   return read.document;
 }
 
+/** Of a copy nothing is under way, whatever is of its original. */
+const noTrace = { traceAsked: null, traceFailure: null };
+
 /** Puts the artwork of one job, and what else its pieces go back to, on another one of the same client; new ids by old ones. */
 async function copyArtwork(
   { actor, transaction, now }: Context,
@@ -101,7 +104,7 @@ async function copyArtwork(
     const copy = newId();
     ids.set(id, copy);
     await Artwork.create(
-      { ...row.get(), id: copy, jobId: to.id, addedBy: actor.personId, addedAt: now, removedAt: null },
+      { ...row.get(), ...noTrace, id: copy, jobId: to.id, addedBy: actor.personId, addedAt: now, removedAt: null },
       { transaction },
     );
   }

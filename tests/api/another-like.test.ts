@@ -6,6 +6,7 @@ import { listArtworks } from "#shared/contracts/artworks.ts";
 import { getJob, listEvents, listJobs } from "#shared/contracts/jobs.ts";
 import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
+import { firstChoices } from "#shared/tracing/trace-choices.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildLayer, plate } from "../support/build-sign.ts";
 import { buildClient } from "../support/factories/client.ts";
@@ -121,6 +122,17 @@ describe("another like this", () => {
     expect((await owner.get(listArtworks, { params: of(own) })).items.map(({ id }) => id)).toEqual([artworkId]);
     const rows = await Artwork.findAll({ where: { id: [artworkId, items[0]?.id ?? ""] }, attributes: ["fileId"] });
     expect(rows[0]?.fileId).toBe(rows[1]?.fileId);
+  });
+
+  it("takes a picture along as it is, not the tracing that is under way for the first job", async () => {
+    const { owner } = own.visitors;
+    await Artwork.update({ traceAsked: firstChoices }, { where: { id: artworkId } });
+    const body = { clientId: clientOf(own), title: "Third door", artwork: true };
+    const job = await owner.get(openAnotherLike, { params: of(own), body });
+    const { items } = await owner.get(listArtworks, at(job.id));
+    const rows = await Artwork.findAll({ where: { id: items.map(({ id }) => id) }, attributes: ["traceAsked"] });
+    expect(rows.map(({ traceAsked }) => traceAsked)).toEqual([null]);
+    await Artwork.update({ traceAsked: null }, { where: { id: artworkId } });
   });
 
   it("never takes artwork to another client, whatever was asked, and opens nothing then", async () => {
