@@ -1,8 +1,9 @@
 import compression from "compression";
 import express, { type Express, Router } from "express";
-import { addArtwork } from "#shared/contracts/artworks.ts";
+import { addArtwork, traceArtwork } from "#shared/contracts/artworks.ts";
 import { saveMockup } from "#shared/contracts/mockups.ts";
 import { keepDraft } from "#shared/contracts/named-drafts.ts";
+import { addWallPhoto } from "#shared/contracts/wall-photos.ts";
 import { authentication } from "./auth/auth.ts";
 import { clientFiles } from "./http/client-files.ts";
 import type { Services } from "./http/context.ts";
@@ -48,7 +49,8 @@ export function createApp(services: Services): App {
   app.post(["/api/links/fresh", "/api/links/request", "/api/password/forgot"], limited("mails", env));
   app.post("/api/account/password", limited("signIn", env));
   app.get("/api/share/:token", limited("links", env));
-  app.post(addArtwork.path, limited("uploads", env));
+  app.post([addArtwork.path, addWallPhoto.path], limited("uploads", env));
+  app.post(traceArtwork.path, limited("traces", env));
   app.put(saveMockup.path, signedInOnly(env), express.json({ limit: mockupBody }), soundPieces);
   app.post(keepDraft.path, signedInOnly(env), express.json({ limit: mockupBody }), soundPieces);
   app.use("/api", express.json({ limit: smallBody }));

@@ -1,6 +1,7 @@
 import type { Finding } from "#shared/dry-fit/finding.ts";
 import type { Snapshot } from "#shared/mockup/snapshot.ts";
 import { AppError, wrongState } from "../http/app-error.ts";
+import { shopLine } from "../threads/shop-line.ts";
 import { type Outcome, type WorkerInTurn, workerInTurn } from "../threads/worker-in-turn.ts";
 import type { CheckInput, DrawingAnswer, DrawingQuestion, FreezeInput, Frozen } from "./drawing-worker.ts";
 
@@ -19,13 +20,8 @@ const painter: WorkerInTurn<DrawingQuestion, DrawingAnswer> = workerInTurn(progr
 /** `shopId` is the shop that asks. */
 type AskOptions = { readonly timeMs?: number; readonly shopId?: string };
 
-/** How many of a shop wait for the freezer. */
-const inLine = new Map<string, number>();
-function leaveLine(shopId: string): void {
-  const left = (inLine.get(shopId) ?? 0) - 1;
-  if (left > 0) inLine.set(shopId, left);
-  else inLine.delete(shopId);
-}
+/** Who waits for the freezer. */
+const line = shopLine();
 
 /**
  * What a revision freezes. Throws too_large when that takes too long, wrong_state for a piece out of all reach, and too_many_requests
@@ -48,14 +44,13 @@ async function askFreezer(
   question: DrawingQuestion,
   { timeMs = drawingLimits.freezeMs, shopId = "" }: AskOptions,
 ): Promise<DrawingAnswer> {
-  const ofShop = shopId === "" ? 0 : (inLine.get(shopId) ?? 0);
+  const ofShop = shopId === "" ? 0 : line.of(shopId);
   if (freezer.waiting() >= drawingLimits.freezesWaiting || ofShop >= drawingLimits.freezesOfAShop) {
     throw new AppError("too_many_requests", {
       detail: "Other mockups are being worked out right now. Try again in a minute; nothing is lost.",
     });
   }
-  inLine.set(shopId, ofShop + 1);
-  const told = await freezer.ask(question, { timeMs }).finally(() => leaveLine(shopId));
+  const told = await line.stand(shopId, () => freezer.ask(question, { timeMs }));
   if (told.kind === "late") {
     throw new AppError("too_large", {
       detail:

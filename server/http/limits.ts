@@ -19,6 +19,7 @@ const limits = {
   links: { minutes: 15, times: 60, by: byAddress },
   mails: { minutes: 15, times: 15, by: byAddress },
   uploads: { minutes: 10, times: 60, by: byAddress },
+  traces: { minutes: 10, times: 120, by: byAddress },
 } satisfies Record<string, Limit>;
 
 export type LimitName = keyof typeof limits;

@@ -70,7 +70,7 @@ export function upload<E extends Endpoint, F extends ReceivedFile = ReceivedFile
   }: {
     maxBytes: number;
     allow: (context: ReadContext, params: z.output<E["params"]>) => Promise<void>;
-    prepare?: (file: ReceivedFile) => Promise<F>;
+    prepare?: (file: ReceivedFile, context: ReadContext) => Promise<F>;
     handle: (context: Context, input: { params: z.output<E["params"]>; file: F }) => Promise<Answer<E>>;
   },
 ): void {
@@ -81,7 +81,7 @@ export function upload<E extends Endpoint, F extends ReceivedFile = ReceivedFile
     await allow(context, params);
     const file = await receiveFile(request, response, { dir: routes.services.storage.quarantineDir, maxBytes });
     try {
-      const ready = await prepare(file);
+      const ready = await prepare(file, context);
       const answer = await asOneChange(context, (transaction) =>
         handle({ ...context, transaction }, { params, file: ready }),
       );

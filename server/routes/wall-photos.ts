@@ -2,6 +2,7 @@ import * as contract from "#shared/contracts/wall-photos.ts";
 import { addWallPhoto } from "../commands/add-wall-photo.ts";
 import { removeWallPhoto } from "../commands/remove-wall-photo.ts";
 import { notAllowed, notFound } from "../http/app-error.ts";
+import { shopIdOf } from "../http/context.ts";
 import { FileAnswer } from "../http/file-answer.ts";
 import { type Routes, read, upload, write } from "../http/route.ts";
 import { photoLimits, preparePhoto } from "../photos/prepare-photo.ts";
@@ -32,7 +33,7 @@ export function registerWallPhotoRoutes(routes: Routes): void {
       if (!wallPhotoPolicy.change(context.actor, facts))
         throw notAllowed("Photos are brought in by owners and makers.");
     },
-    prepare: preparePhoto,
+    prepare: (file, context) => preparePhoto(file, shopIdOf(context)),
     handle: async (context, { params, file }) => {
       const { id } = await addWallPhoto(context, { jobId: params.jobId, photo: file });
       const { facts } = await findJob(context, params.jobId);

@@ -51,3 +51,18 @@ describe("an account that is guessed at by opening shops with its address", () =
     expect(answer.status).toBe(429);
   });
 });
+
+describe("work that costs us much", () => {
+  const nobody = "00000000-0000-4000-8000-000000000000";
+  it.each([
+    { what: "artwork and photos of walls together", paths: ["jobs/ID/artworks", "jobs/ID/wall-photos"], times: 60 },
+    { what: "pictures traced again", paths: ["artworks/ID/trace"], times: 120 },
+  ])("is counted by the address it comes from: $what", async ({ paths, times }) => {
+    const visitor = app.visitor();
+    const headers = { "X-Forwarded-For": "203.0.113.77" };
+    const ask = (index: number) =>
+      visitor.send("POST", `/api/shops/any/${paths[index % paths.length]?.replace("ID", nobody)}`, { headers });
+    for (let index = 0; index < times; index += 1) expect((await ask(index)).status).toBe(401);
+    for (const index of paths.keys()) expect((await ask(index)).status).toBe(429);
+  });
+});
