@@ -9,8 +9,8 @@ import { isInsider, isStaff, nameAt } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findRevision } from "../queries/find-revision.ts";
 import { snapshotOf } from "../queries/snapshot-of.ts";
+import { gatherNews } from "./gather-news.ts";
 import { logEvent } from "./log-event.ts";
-import { mailTheOtherSide } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
 import { signalJob } from "./signal-job.ts";
 
@@ -62,7 +62,7 @@ export async function addNote(
     kind: "note added",
     data: { number: note.number, letter: revision.letter },
   });
-  if (!shopOnly) await mailTheOtherSide(context, loaded, { kind: "note added", data: { revisionId, noteId: note.id } });
+  if (!shopOnly) await gatherNews(context, loaded, { noteId: note.id, revisionId, what: "left" });
   await signalJob(context, job, { kind: "note", id: note.id, shopOnly });
   await refreshJob(context, job);
   return note;

@@ -1,3 +1,4 @@
+import { dryingHoursOfSign } from "#shared/bonds/drying-hours-of-sign.ts";
 import { canIssue } from "#shared/lifecycle/job-states.ts";
 import { letterToIssue } from "#shared/lifecycle/revision-row.ts";
 import type { MockupDocument } from "#shared/mockup/document.ts";
@@ -57,6 +58,7 @@ export async function issueRevision(
     message,
     snapshot: text,
     snapshotSha256: sha256,
+    dryingHours: Math.ceil(dryingHoursOfSign(document)),
     issuedBy: actor.personId,
     requestedAt: now,
     failure: null,

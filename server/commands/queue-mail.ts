@@ -3,34 +3,39 @@ import type { Context } from "../http/context.ts";
 import { enqueue } from "../jobs/queue.ts";
 import { type MailData, type MailKind, OutgoingMail } from "../models/outgoing-mail.ts";
 
+export type MailOrder = {
+  readonly kind: MailKind;
+  readonly address: string;
+  readonly shopId: string | null;
+  readonly jobId?: string | null;
+  readonly recipientId?: string | null;
+  readonly data: MailData;
+  /** The refused mail that this one goes in place of. */
+  readonly follows?: string;
+  /** How long it waits for more to tell, seconds. */
+  readonly inSeconds?: number;
+};
+
 /**
  * Puts a mail on its way in the transaction of what causes it. Words and one-time links are made when it is sent,
  * so neither row nor job holds a secret.
  */
 export async function queueMail(
   { now, transaction }: Pick<Context, "now" | "transaction">,
-  mail: {
-    kind: MailKind;
-    address: string;
-    shopId: string | null;
-    jobId?: string | null;
-    recipientId?: string | null;
-    data: MailData;
-  },
+  { jobId = null, recipientId = null, follows, inSeconds = 0, ...mail }: MailOrder,
 ): Promise<void> {
   const row = await OutgoingMail.create(
     {
       id: newId(),
-      shopId: mail.shopId,
-      jobId: mail.jobId ?? null,
-      kind: mail.kind,
-      recipientId: mail.recipientId ?? null,
-      address: mail.address,
-      data: mail.data,
+      ...mail,
+      jobId,
+      recipientId,
       state: "queued",
       createdAt: now,
+      follows: follows ?? null,
+      dueAt: inSeconds > 0 ? new Date(now.getTime() + inSeconds * 1000) : null,
     },
     { transaction },
   );
-  await enqueue(transaction, "send-mail", { mailId: row.id });
+  await enqueue(transaction, "send-mail", { mailId: row.id }, { inSeconds });
 }

@@ -6,8 +6,8 @@ import { Reply } from "../models/reply.ts";
 import { isInsider, isStaff, nameAt } from "../policies/actor.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findNote } from "../queries/find-note.ts";
+import { gatherNews } from "./gather-news.ts";
 import { logEvent } from "./log-event.ts";
-import { mailTheOtherSide } from "./mail-the-other-side.ts";
 import { refreshJob } from "./refresh-job.ts";
 import { signalJob } from "./signal-job.ts";
 
@@ -37,8 +37,8 @@ export async function replyToNote(context: Context, { noteId, text }: { noteId: 
   const kind = state === "open" && side === "client" ? "note opened again" : "note answered";
   await logEvent(context, { shopId: note.shopId, jobId: note.jobId, kind, data: { number: note.number } });
   if (!note.shopOnly) {
-    const data = { revisionId: on.revision.id, noteId, replyId: reply.id };
-    await mailTheOtherSide(context, on.loaded, { kind: "note answered", data });
+    const news = { noteId, revisionId: on.revision.id, what: "answered", replyId: reply.id } as const;
+    await gatherNews(context, on.loaded, news);
   }
   await signalJob(context, on.loaded.job, { kind: "note", id: noteId, shopOnly: note.shopOnly });
   await refreshJob(context, on.loaded.job);

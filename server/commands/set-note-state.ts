@@ -3,6 +3,7 @@ import { notAllowed, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import { notePolicy } from "../policies/note.ts";
 import { findNote } from "../queries/find-note.ts";
+import { gatherNews } from "./gather-news.ts";
 import { logEvent } from "./log-event.ts";
 import { refreshJob } from "./refresh-job.ts";
 import { signalJob } from "./signal-job.ts";
@@ -18,6 +19,7 @@ export async function setNoteState(
     throw wrongState(`Revision ${on.revision.letter} is ${on.revision.state}: its notes are closed.`);
   if (!notePolicy.move(context.actor, on.facts, note, state))
     throw notAllowed("A note is settled by the one who left it.");
+  const from = note.state;
   await note.update({ state }, { transaction: context.transaction });
   await logEvent(context, {
     shopId: note.shopId,
@@ -25,6 +27,7 @@ export async function setNoteState(
     kind: state === "settled" ? "note settled" : "note opened again",
     data: { number: note.number },
   });
+  if (!note.shopOnly) await gatherNews(context, on.loaded, { noteId, revisionId: on.revision.id, what: "moved", from });
   await signalJob(context, on.loaded.job, { kind: "note", id: noteId, shopOnly: note.shopOnly });
   await refreshJob(context, on.loaded.job);
 }

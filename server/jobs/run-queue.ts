@@ -1,5 +1,12 @@
 import { EventEmitter } from "node:events";
-import { type JobHelpers, Logger as QueueLogger, run, type TaskList, type WorkerEvents } from "graphile-worker";
+import {
+  type JobHelpers,
+  parseCronItems,
+  Logger as QueueLogger,
+  run,
+  type TaskList,
+  type WorkerEvents,
+} from "graphile-worker";
 import pg from "pg";
 import type { Logger } from "pino";
 import { appDatabaseUrl } from "../env.ts";
@@ -11,6 +18,10 @@ import { type Task, tasks } from "./tasks.ts";
 
 /** One more than there are kinds of heavy work, so that mails find a free hand however much one shop brings. */
 const concurrency = heavyJobs.size + 1;
+/** What is done by the clock. Every quarter of an hour it is nine in the morning somewhere; several processes agree on who does it. */
+const clockwork = [
+  { task: "remind" satisfies JobName, match: "*/15 * * * *", options: { jobKey: "remind", maxAttempts: 3 } },
+];
 /** What the queue tells of jobs is said below in our own words, so here it is for finding faults in the queue itself. */
 const levels = { error: "error", warning: "warn", info: "debug", debug: "trace" } as const;
 
@@ -40,7 +51,7 @@ export async function runQueue(services: Services): Promise<RunningQueue> {
     concurrency,
     noHandleSignals: true,
     pollInterval: 2_000,
-    parsedCronItems: [],
+    parsedCronItems: parseCronItems(clockwork),
     forbiddenFlags: underWay,
     taskList,
     logger: new QueueLogger(() => (level, message) => log[levels[level]](withoutSecrets(message))),

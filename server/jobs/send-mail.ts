@@ -1,60 +1,85 @@
 import type { Transaction } from "sequelize";
 import { newToken, tokenHash } from "../auth/tokens.ts";
-import { logSystemEvent } from "../commands/log-event.ts";
+import { issueUnsubscribeToken } from "../auth/unsubscribe-tokens.ts";
+import { closeMail, endMail } from "../commands/close-mail.ts";
 import { newId } from "../db/new-id.ts";
 import type { Services } from "../http/context.ts";
 import { compose } from "../mail/compose.ts";
 import type { Draft, LinkOrder } from "../mail/draft.ts";
+import { choiceOf } from "../mail/optional-mail.ts";
 import { pages } from "../mail/pages.ts";
 import { MailDelayed, MailRefused, type Message, send } from "../mail/send.ts";
 import { OneTimeLink } from "../models/one-time-link.ts";
 import { OutgoingMail } from "../models/outgoing-mail.ts";
 import { onlyShopOf } from "../queries/only-shop-of.ts";
+import type { Attempt } from "./tasks.ts";
 
 /**
  * Sends one mail: first its words and its link are made and committed, then it goes out, then it is marked as sent. If
  * the process dies in between it goes out once more, with the same Message-ID and a link of its own that works as well.
+ * A mail that the server would not take until the last try is refused too, so that nobody waits for it.
  */
-export async function sendMail(services: Services, { mailId }: { mailId: string }): Promise<void> {
+export async function sendMail(
+  services: Services,
+  { mailId }: { mailId: string },
+  { isLast }: Attempt = { isLast: false },
+): Promise<void> {
   const message = await prepare(services, mailId);
   if (!message) return;
   try {
     await send(services, message);
   } catch (error) {
-    if (error instanceof MailRefused) return refuse(services, mailId, error.message);
-    const reason = error instanceof MailDelayed ? error.message : "The mail could not be put together.";
-    await OutgoingMail.update({ lastError: reason }, { where: { id: mailId } });
+    const reason = error instanceof MailRefused || error instanceof MailDelayed ? error.message : null;
+    if (error instanceof MailRefused || isLast) {
+      if (reason === null) services.log.error({ err: error, mailId }, "A mail could not be put together");
+      return closeMail(services, mailId, { state: "refused", reason: reason ?? notPutTogether });
+    }
+    await OutgoingMail.update({ lastError: reason ?? notPutTogether }, { where: { id: mailId } });
     throw error;
   }
-  await inState(services, mailId, async (mail, transaction) => {
-    const now = new Date();
-    await mail.update({ state: "sent", sentAt: now, lastError: null }, { transaction });
-    if (!mail.shopId) return;
-    const { shopId, jobId, kind, address } = mail;
-    await logSystemEvent({ now, transaction }, { shopId, jobId, kind: "mail sent", data: { kind, to: address } });
-  });
+  await closeMail(services, mailId, { state: "sent" });
 }
 
+const notPutTogether = "The mail could not be put together.";
+
 /** Makes the message, or drops the mail when the rows say that nobody should get it any more. */
-async function prepare({ sequelize, env }: Services, mailId: string): Promise<Message | null> {
-  return inState({ sequelize }, mailId, async (mail, transaction) => {
+async function prepare(services: Services, mailId: string): Promise<Message | null> {
+  const { sequelize, env } = services;
+  return sequelize.transaction(async (transaction) => {
+    const mail = await OutgoingMail.findByPk(mailId, { lock: transaction.LOCK.UPDATE, transaction });
+    if (mail?.state !== "queued") return null;
     const draft = await compose(mail, transaction);
-    if (!draft) {
-      await mail.update({ state: "dropped" }, { transaction });
+    const now = new Date();
+    if ("notSent" in draft) {
+      await endMail({ transaction, now }, mail, { state: "dropped", reason: draft.notSent });
       return null;
     }
-    await mail.update({ attempts: mail.attempts + 1 }, { transaction });
+    await mail.update({ attempts: mail.attempts + 1, closedAt: mail.closedAt ?? now }, { transaction });
     const path = await pathOf(mail, draft, transaction);
-    const button = draft.button && path ? { label: draft.button.label, url: env.PUBLIC_URL + path } : null;
     return {
       id: mail.id,
       shownTo: await shopToShow(mail, draft, transaction),
       to: mail.address,
       greeting: draft.greeting,
       sender: draft.sender,
-      letter: { ...draft.letter, button },
+      letter: {
+        ...draft.letter,
+        button: draft.button && path ? { label: draft.button.label, url: env.PUBLIC_URL + path } : null,
+        stop: await stopOf(services, mail, { now, transaction }),
+      },
     };
   });
+}
+
+/** Where the reader stops mails of this kind, unless they are needed. */
+async function stopOf(
+  { env }: Pick<Services, "env">,
+  { kind, shopId, recipientId }: OutgoingMail,
+  at: { now: Date; transaction: Transaction },
+): Promise<Message["letter"]["stop"]> {
+  if (choiceOf(kind) === null || !shopId || !recipientId) return null;
+  const token = await issueUnsubscribeToken(env, { personId: recipientId, shopId }, at);
+  return { url: env.PUBLIC_URL + pages.unsubscribe(token) };
 }
 
 async function pathOf(mail: OutgoingMail, { button }: Draft, transaction: Transaction): Promise<string | null> {
@@ -87,28 +112,4 @@ async function makeLink(mail: OutgoingMail, order: LinkOrder, transaction: Trans
     { transaction },
   );
   return pages.link(token);
-}
-
-async function refuse(services: Services, mailId: string, reason: string): Promise<void> {
-  await inState(services, mailId, async (mail, transaction) => {
-    const now = new Date();
-    await mail.update({ state: "refused", lastError: reason }, { transaction });
-    await OneTimeLink.update({ killedAt: now }, { where: { mailId, spentAt: null, killedAt: null }, transaction });
-    if (!mail.shopId) return;
-    const { shopId, jobId, kind, address } = mail;
-    const data = { kind, to: address, reason };
-    await logSystemEvent({ now, transaction }, { shopId, jobId, kind: "mail refused", data });
-  });
-}
-
-/** Runs `change` on the locked row while it is still queued; null when it is not. */
-function inState<T>(
-  { sequelize }: Pick<Services, "sequelize">,
-  mailId: string,
-  change: (mail: OutgoingMail, transaction: Transaction) => Promise<T>,
-): Promise<T | null> {
-  return sequelize.transaction(async (transaction) => {
-    const mail = await OutgoingMail.findByPk(mailId, { lock: transaction.LOCK.UPDATE, transaction });
-    return mail?.state === "queued" ? change(mail, transaction) : null;
-  });
 }

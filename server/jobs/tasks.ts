@@ -2,6 +2,7 @@ import type { Services } from "../http/context.ts";
 import { importArtwork } from "./import-artwork.ts";
 import { makeCertificateOfDecision } from "./make-certificate.ts";
 import type { JobName, JobPayloads } from "./queue.ts";
+import { remind } from "./remind.ts";
 import { renderProofOfRevision } from "./render-proof.ts";
 import { sendMail } from "./send-mail.ts";
 
@@ -20,4 +21,5 @@ export const tasks: { readonly [N in JobName]?: Task<N> } = {
   "import-artwork": importArtwork,
   "render-proof": renderProofOfRevision,
   "make-certificate": makeCertificateOfDecision,
+  remind,
 };

@@ -1,10 +1,12 @@
 import type { Transaction } from "sequelize";
 import type { MailKind, OutgoingMail } from "../models/outgoing-mail.ts";
-import type { Draft } from "./draft.ts";
+import type { Draft, NotSent } from "./draft.ts";
+import { notesGathered } from "./templates/notes.ts";
 import { addressChanged, invitation, newPassword, signInLink } from "./templates/people.ts";
-import { approved, noteAdded, noteAnswered, proofIssued, revisionAsked } from "./templates/work.ts";
+import { yesNeededSoon, yesWasNeeded } from "./templates/reminders.ts";
+import { approved, proofIssued, revisionAsked } from "./templates/work.ts";
 
-const templates: Record<MailKind, (mail: OutgoingMail, transaction: Transaction) => Promise<Draft | null>> = {
+const templates: Record<MailKind, (mail: OutgoingMail, transaction: Transaction) => Promise<Draft | NotSent>> = {
   "sign in link": signInLink,
   "proof issued": proofIssued,
   invitation,
@@ -12,11 +14,12 @@ const templates: Record<MailKind, (mail: OutgoingMail, transaction: Transaction)
   "address changed": addressChanged,
   "revision asked": revisionAsked,
   approved,
-  "note added": noteAdded,
-  "note answered": noteAnswered,
+  "notes gathered": notesGathered,
+  "yes needed soon": yesNeededSoon,
+  "yes was needed": yesWasNeeded,
 };
 
-/** The words of a mail from the rows as they are now; null when it should not be sent any more. */
-export function compose(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
+/** The words of a mail from the rows as they are now, or why it should not be sent any more. */
+export function compose(mail: OutgoingMail, transaction: Transaction): Promise<Draft | NotSent> {
   return templates[mail.kind](mail, transaction);
 }

@@ -14,10 +14,22 @@ export type LinkOrder = Pick<OneTimeLink, "purpose"> & {
 export type Draft = {
   readonly greeting: string;
   readonly sender: string | null;
-  readonly letter: Omit<Letter, "button">;
+  readonly letter: Omit<Letter, "button" | "stop">;
   /** Where the button leads: to a link of its own, to a page of the application, or there is no button. */
   readonly button: { readonly label: string; readonly leadsTo: LinkOrder | string } | null;
 };
+
+/** Why nobody is sent this mail any more, for the log. */
+export type NotSent = { readonly notSent: string };
+
+export const notSent = {
+  gone: { notSent: "There is nobody any more whom it could go to under this address." },
+  withdrawn: { notSent: "The revision it was about was withdrawn." },
+  missing: { notSent: "What it was about is not there any more." },
+  nothing: { notSent: "There was nothing left to tell." },
+  decided: { notSent: "Nobody waits for the client's yes any more." },
+  stopped: { notSent: "Its reader has stopped these mails." },
+} as const satisfies Record<string, NotSent>;
 
 /** How long each kind of link holds, in hours. */
 export const linkHours = { "sign in": 14 * 24, "join shop": 7 * 24, "new password": 1 } as const;

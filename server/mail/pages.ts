@@ -2,5 +2,6 @@
 export const pages = {
   link: (token: string): string => `/link/${token}`,
   bench: (shop: string): string => `/shop/${shop}/bench`,
+  unsubscribe: (token: string): string => `/unsubscribe/${token}`,
   sheet: (shop: string, revisionId: string): string => `/shop/${shop}/sheets/${revisionId}`,
 } as const;

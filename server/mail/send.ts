@@ -48,6 +48,7 @@ export async function send({ env, mailSink }: Pick<Services, "env" | "mailSink">
       html: letterHtml(message.letter, frame),
       headers: {
         "Auto-Submitted": "auto-generated",
+        ...stopHeaders(message.letter),
         ...(mailSink && message.shownTo ? { [shopHeader]: message.shownTo } : {}),
       },
     });
@@ -56,6 +57,18 @@ export async function send({ env, mailSink }: Pick<Services, "env" | "mailSink">
   } finally {
     transport.close();
   }
+}
+
+/**
+ * How a mail program stops mails like this one (RFC 2369, RFC 8058). The one click is promised by https only, as it has to be. There is no
+ * address to write to: nobody reads what comes in.
+ */
+export function stopHeaders({ stop }: Pick<Letter, "stop">): Record<string, string> {
+  if (!stop) return {};
+  return {
+    "List-Unsubscribe": `<${stop.url}>`,
+    ...(stop.url.startsWith("https:") ? { "List-Unsubscribe-Post": "List-Unsubscribe=One-Click" } : {}),
+  };
 }
 
 /** "Name <address>" or a bare address. */

@@ -72,6 +72,8 @@ export type EventFacts = {
   "share link opened": { label: string };
   "mail sent": { kind: string; to: string };
   "mail refused": { kind: string; to: string; reason: string };
+  "mail dropped": { kind: string; to: string; reason: string };
+  "mail sent again": { kind: string; to: string };
   "signed in": { by: string };
 };
 

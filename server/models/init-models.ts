@@ -9,6 +9,7 @@ import { initEvent } from "./event.ts";
 import { initInvitation } from "./invitation.ts";
 import { initJob } from "./job.ts";
 import { initJobApprover } from "./job-approver.ts";
+import { initMailChoices } from "./mail-choices.ts";
 import { initMembership } from "./membership.ts";
 import { initMockup } from "./mockup.ts";
 import { initMockupStart } from "./mockup-start.ts";
@@ -29,6 +30,7 @@ import { initShopLimits } from "./shop-limits.ts";
 import { initShopSaws } from "./shop-saws.ts";
 import { initStockItem } from "./stock-item.ts";
 import { initStoredFile } from "./stored-file.ts";
+import { initUnsubscribeToken } from "./unsubscribe-token.ts";
 import { initWallPhoto } from "./wall-photo.ts";
 
 /** Binds every model to a connection. Models are singletons of the process: one database a process. */
@@ -45,6 +47,8 @@ export function initModels(sequelize: Sequelize): void {
   initSession(sequelize);
   initOutgoingMail(sequelize);
   initOneTimeLink(sequelize);
+  initMailChoices(sequelize);
+  initUnsubscribeToken(sequelize);
   initJob(sequelize);
   initJobApprover(sequelize);
   initStoredFile(sequelize);

@@ -18,6 +18,8 @@ export class Revision extends Model<InferAttributes<Revision>, InferCreationAttr
   declare message: CreationOptional<string>;
   declare snapshot: CreationOptional<string | null>;
   declare snapshotSha256: CreationOptional<string | null>;
+  /** How long the sign dries in all, whole hours. */
+  declare dryingHours: CreationOptional<number>;
   declare pdfFileId: CreationOptional<string | null>;
   declare issuedBy: string;
   declare requestedAt: Date;
@@ -38,6 +40,7 @@ export function initRevision(sequelize: Sequelize): void {
       message: { type: DataTypes.TEXT, defaultValue: "" },
       snapshot: DataTypes.TEXT,
       snapshotSha256: DataTypes.TEXT,
+      dryingHours: { type: DataTypes.INTEGER, defaultValue: 0 },
       pdfFileId: DataTypes.UUID,
       issuedBy: DataTypes.UUID,
       requestedAt: DataTypes.DATE,

@@ -67,6 +67,8 @@ const words: { readonly [K in EventKind]: (data: EventFacts[K]) => string } = {
   "share link opened": ({ label }) => `Opened the portfolio link ${label}`,
   "mail sent": ({ kind, to }) => `Mail went to ${to}: ${kind}`,
   "mail refused": ({ kind, to, reason }) => `Mail to ${to} was refused (${kind}): ${reason}`,
+  "mail dropped": ({ kind, to, reason }) => `Mail to ${to} did not go out (${kind}): ${reason}`,
+  "mail sent again": ({ kind, to }) => `Sent a refused mail once more, to ${to}: ${kind}`,
   "signed in": ({ by }) => `Signed in by ${by}`,
 };
 

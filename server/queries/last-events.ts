@@ -9,7 +9,7 @@ export async function lastEvents(
 ): Promise<Map<string, Event>> {
   if (jobIds.length === 0) return new Map();
   const rows = await services.sequelize.query<Event>(
-    `select distinct on (job_id) * from events where job_id in (:jobIds) and kind <> 'mail sent' order by job_id, id desc`,
+    `select distinct on (job_id) * from events where job_id in (:jobIds) and kind not in ('mail sent', 'mail dropped') order by job_id, id desc`,
     {
       replacements: { jobIds: [...jobIds] },
       type: QueryTypes.SELECT,

@@ -21,7 +21,7 @@ import { buildClient, buildContact } from "../support/factories/client.ts";
 import { buildIssued } from "../support/factories/issued.ts";
 import { buildRevision, buildWorld, type World } from "../support/factories/work.ts";
 import { lastLogLine } from "../support/job-log.ts";
-import { caughtMails } from "../support/mail.ts";
+import { caughtMails, sendGathered } from "../support/mail.ts";
 import { popplerText } from "../support/poppler.ts";
 import { signInByMail } from "../support/sign-in.ts";
 import type { Visitor } from "../support/visitor.ts";
@@ -90,11 +90,11 @@ describe("a note", () => {
     expect(first.zone).toMatch(/^[A-D][1-6]$/);
     expect(first.zone).not.toBe(second.zone);
 
-    await app.runJobs();
-    const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "note added" } });
+    await sendGathered(app);
+    const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "notes gathered" } });
     const sentTo = (noteId: string) =>
       mails
-        .filter(({ data, state }) => data.noteId === noteId && state === "sent")
+        .filter(({ data, state }) => data.news?.some((news) => news.noteId === noteId) && state === "sent")
         .map(({ address }) => address)
         .sort();
     expect(sentTo(first.id)).toHaveLength(3);
@@ -138,7 +138,7 @@ describe("a note", () => {
     const { own, revisionId } = await issued();
     const text = `<script>alert("1")</script> & 'quotes' -- ; drop table notes; {{x}} \u202e 漢字\n\tnew line ${"é".repeat(3900)}`;
     expect((await say(own, own.visitors.approver, revisionId, { text })).text).toBe(text);
-    await app.runJobs();
+    await sendGathered(app);
     const mail = (await caughtMails(app)).find(({ subject }) => subject.includes(`(${own.job.number})`));
     expect(mail?.text).toContain('<script>alert("1")</script>');
     expect(mail?.html).not.toContain("<script>");
@@ -209,7 +209,7 @@ describe("a note for the shop alone", () => {
     const secret = await say(own, rep, revisionId, { text: "They pay late, ask for half", shopOnly: true });
     expect(secret).toMatchObject({ number: 1, shopOnly: true });
     const open = await say(own, maker, revisionId, { text: "Is this wall plumb", kind: "question" });
-    await app.runJobs();
+    await sendGathered(app);
     expect((await notesOf(own, owner, revisionId)).map(({ number }) => number)).toEqual([1, 2]);
     expect((await notesOf(own, approver, revisionId)).map(({ number }) => number)).toEqual([2]);
     expect(JSON.stringify(await approver.get(getSheet, { params: at(own, revisionId) }))).not.toContain("pay late");
@@ -219,8 +219,8 @@ describe("a note for the shop alone", () => {
     const hidden = { params: { ...own.params, noteId: secret.id } };
     expect((await approver.refusal(replyToNote, { ...hidden, body: { text: "?" } })).code).toBe("not_found");
     expect((await approver.refusal(setNoteState, { ...hidden, body: { state: "settled" } })).code).toBe("not_found");
-    const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "note added" } });
-    expect(mails.map(({ data }) => data.noteId)).toEqual([open.id]);
+    const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "notes gathered" } });
+    expect(mails.map(({ data }) => data.news?.map(({ noteId }) => noteId))).toEqual([[open.id]]);
     expect((await caughtMails(app)).some(({ source }) => source.includes("pay late"))).toBe(false);
 
     // B carries the open notes on its drawing.

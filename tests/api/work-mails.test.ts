@@ -6,7 +6,7 @@ import { addNote, listNotes, replyToNote } from "#shared/contracts/notes.ts";
 import { askForRevision, type Revision } from "#shared/contracts/revisions.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildRevision, buildWorld, type World } from "../support/factories/work.ts";
-import { type Caught, caughtMails, tokenIn } from "../support/mail.ts";
+import { type Caught, caughtMails, sendGathered, tokenIn } from "../support/mail.ts";
 
 let app: TestApp;
 let world: World;
@@ -63,35 +63,43 @@ describe("a proof that is out", () => {
   });
 });
 
-describe("a note", () => {
+describe("notes", () => {
   const noteParams = () => ({ ...world.params, revisionId: revision.id });
   const anchor = { on: "whole" as const };
+  const about = () => `on “Lobby sign” (${world.job.number}), revision A`;
 
-  it("of the client is mailed to each of the team, to the plain page", async () => {
+  it("of the client are mailed to each of the team, to the plain page", async () => {
     await world.visitors.approver.get(addNote, {
       params: noteParams(),
       body: { kind: "must change", text: "Wider <gap>,\nplease", anchor },
     });
-    const mail = await mailAbout(world.owner.email, "Note 1");
+    await app.runJobs();
+    expect((await caughtMails(app)).some(({ subject }) => subject.startsWith("1 note"))).toBe(false);
+    await sendGathered(app);
+    const mail = await mailAbout(world.owner.email, "1 note on");
+    expect(mail.subject).toBe(`1 note ${about()}`);
+    expect(mail.text).toContain("Note 1, must change, open");
     expect(mail.text).toContain("> Wider <gap>,\n> please");
     expect(mail.html).toContain("Wider &lt;gap&gt;,<br>please");
     expect(mail.text).toContain(`${app.baseUrl}${sheetPath()}`);
     expect(mail.text).not.toContain("/link/");
-    const others = (await caughtMails(app)).filter(({ subject }) => subject.startsWith("Note 1"));
+    const others = (await caughtMails(app)).filter(({ subject }) => subject.startsWith("1 note on"));
     expect(others).toHaveLength(3);
   });
 
-  it("of the shop is mailed to the approver with a link of their own; a shop-only one to nobody", async () => {
+  it("of the shop are mailed to the approver with a link of their own; a shop-only one to nobody", async () => {
     const { maker } = world.visitors;
     const body = { kind: "question" as const, text: "Which wall?", anchor };
     await maker.get(addNote, { params: noteParams(), body });
     await maker.get(addNote, { params: noteParams(), body: { ...body, text: "He pays late", shopOnly: true } });
-    const mail = await mailAbout(world.approver.email, "Note 2");
+    await sendGathered(app);
+    const mail = await mailAbout(world.approver.email, "1 note on");
+    expect(mail.text).toContain("Note 2, question, open");
     expect(tokenIn(mail.text)).toHaveLength(43);
     expect((await caughtMails(app)).some(({ source }) => source.includes("pays late"))).toBe(false);
   });
 
-  it("that is answered is mailed to the other side with both wordings; one for the shop alone to nobody", async () => {
+  it("that are answered are mailed to the other side with both wordings; one for the shop alone to nobody", async () => {
     const { maker, approver } = world.visitors;
     const { items } = await maker.get(listNotes, { params: noteParams() });
     const [ofClient, , shopOnly] = items;
@@ -99,26 +107,19 @@ describe("a note", () => {
     const to = (noteId: string) => ({ ...world.params, noteId });
     await maker.get(replyToNote, { params: to(ofClient.id), body: { text: "Widened by 5 mm." } });
     await maker.get(replyToNote, { params: to(shopOnly.id), body: { text: "Ask for a deposit" } });
-    const subject = `Answer to note 1 on “Lobby sign” (${world.job.number}), revision A`;
-    const mail = await mailAbout(world.approver.email, "Answer to note 1");
-    expect(mail.subject).toBe(subject);
-    expect(mail.text).toContain("answered note 1 (“Wider <gap>, please”)");
-    expect(mail.text).toContain("> Widened by 5 mm.");
+    await sendGathered(app);
+    const mail = await mailAbout(world.approver.email, "1 answer");
+    expect(mail.subject).toBe(`1 answer ${about()}`);
+    expect(mail.text).toContain("Note 1, must change, answered");
+    expect(mail.text).toContain("> Wider <gap>, please");
+    expect(mail.text).toContain("answered:\n> Widened by 5 mm.");
     expect((await app.visitor().get(inspectLink, { body: { token: tokenIn(mail.text) } })).goTo).toBe(sheetPath());
     await approver.get(replyToNote, { params: to(ofClient.id), body: { text: "Thank you." } });
-    const back = await mailAbout(world.owner.email, "Answer to note 1");
+    await sendGathered(app);
+    const back = await mailAbout(world.owner.email, "1 answer");
     expect(back.text).toContain("> Thank you.");
     expect(back.text).not.toContain("/link/");
     expect((await caughtMails(app)).some(({ source }) => source.includes("deposit"))).toBe(false);
-  });
-
-  it("fills no mailbox: past thirty within the hour it stands on the sheet only", async () => {
-    const where = { address: world.approver.email, kind: "note added" as const };
-    const body = { kind: "question" as const, text: "And this?", anchor };
-    for (let number = 0; number < 32; number += 1) {
-      await world.visitors.maker.get(addNote, { params: noteParams(), body });
-    }
-    expect(await OutgoingMail.count({ where })).toBe(30);
   });
 });
 

@@ -207,7 +207,7 @@ describe("a revision", () => {
   async function canMove(from: RevisionState, to: RevisionState): Promise<boolean> {
     await owner.query("begin");
     try {
-      await owner.query("create temporary table bare (like revisions) on commit drop");
+      await owner.query("create temporary table bare (like revisions including defaults) on commit drop");
       await owner.query(
         "insert into bare (id, shop_id, job_id, letter, sequence, state, message, issued_by, requested_at) values ($1, $1, $1, 'A', 1, $2, '', $1, now())",
         [randomUUID(), from],

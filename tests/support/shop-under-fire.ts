@@ -19,8 +19,6 @@ import { popplerText } from "./poppler.ts";
 import { runSql } from "./run-sql.ts";
 import { type Answer, Visitor } from "./visitor.ts";
 
-/** One address gets no more proofs than this within the hour, however many are issued. */
-const mostMails = 30;
 /** Long enough for the queue to take back what a killed process held. */
 const patienceMs = 60_000;
 

@@ -15,6 +15,8 @@ import { namedDrafts } from "./2026-12-01-13-named-drafts.ts";
 import { mockupStarts } from "./2026-12-01-14-mockup-starts.ts";
 import { jobSignals } from "./2026-12-01-15-job-signals.ts";
 import { noteEdits } from "./2026-12-01-16-note-edits.ts";
+import { gatheredMail } from "./2026-12-01-17-gathered-mail.ts";
+import { mailChoices } from "./2026-12-01-18-mail-choices.ts";
 
 /** Every migration in order. A new one goes to the end. */
 export const migrations: readonly Migration[] = [
@@ -34,4 +36,6 @@ export const migrations: readonly Migration[] = [
   mockupStarts,
   jobSignals,
   noteEdits,
+  gatheredMail,
+  mailChoices,
 ];

@@ -5,7 +5,7 @@ import { Invitation } from "../../models/invitation.ts";
 import type { OutgoingMail } from "../../models/outgoing-mail.ts";
 import { Person } from "../../models/person.ts";
 import { Shop } from "../../models/shop.ts";
-import { type Draft, linkHours, linkRemarks } from "../draft.ts";
+import { type Draft, linkHours, linkRemarks, type NotSent, notSent } from "../draft.ts";
 import { pages } from "../pages.ts";
 
 /** The contact a mail is for, as long as they are one and the address is still theirs. */
@@ -27,9 +27,9 @@ export async function recipientContact(
   return contact && client && shop && person?.email === address ? { contact, client, shop } : null;
 }
 
-export async function signInLink(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
+export async function signInLink(mail: OutgoingMail, transaction: Transaction): Promise<Draft | NotSent> {
   const found = await recipientContact(mail, transaction);
-  if (!found) return null;
+  if (!found) return notSent.gone;
   const { contact, client, shop } = found;
   const { revisionId } = mail.data;
   return {
@@ -53,16 +53,16 @@ export async function signInLink(mail: OutgoingMail, transaction: Transaction): 
   };
 }
 
-export async function invitation(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
+export async function invitation(mail: OutgoingMail, transaction: Transaction): Promise<Draft | NotSent> {
   const { shopId, data, address } = mail;
-  if (!shopId || !data.invitationId) return null;
+  if (!shopId || !data.invitationId) return notSent.missing;
   const invited = await Invitation.findOne({
     where: { id: data.invitationId, shopId, email: address, acceptedAt: null, revokedAt: null },
     include: [{ model: Person, as: "inviter" }],
     transaction,
   });
   const shop = await Shop.findByPk(shopId, { transaction });
-  if (!invited || !shop) return null;
+  if (!invited || !shop) return notSent.missing;
   const by = invited.inviter?.name ?? shop.name;
   return {
     greeting: address,
@@ -84,10 +84,10 @@ export async function invitation(mail: OutgoingMail, transaction: Transaction): 
   };
 }
 
-export async function newPassword(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
-  if (!mail.data.personId) return null;
+export async function newPassword(mail: OutgoingMail, transaction: Transaction): Promise<Draft | NotSent> {
+  if (!mail.data.personId) return notSent.gone;
   const person = await Person.findOne({ where: { id: mail.data.personId, email: mail.address }, transaction });
-  if (!person) return null;
+  if (!person) return notSent.gone;
   return {
     greeting: person.name,
     sender: null,
@@ -104,9 +104,9 @@ export async function newPassword(mail: OutgoingMail, transaction: Transaction):
 }
 
 /** Goes to the address that no longer counts, so it is sent whatever the contact's address is now. */
-export async function addressChanged(mail: OutgoingMail, transaction: Transaction): Promise<Draft | null> {
+export async function addressChanged(mail: OutgoingMail, transaction: Transaction): Promise<Draft | NotSent> {
   const { shopId, data } = mail;
-  if (!shopId || !data.contactId) return null;
+  if (!shopId || !data.contactId) return notSent.missing;
   const contact = await Contact.findOne({
     where: { id: data.contactId, shopId },
     include: [
@@ -115,7 +115,7 @@ export async function addressChanged(mail: OutgoingMail, transaction: Transactio
     ],
     transaction,
   });
-  if (!contact?.client || !contact.shop) return null;
+  if (!contact?.client || !contact.shop) return notSent.missing;
   return {
     greeting: contact.name,
     sender: contact.shop.name,
