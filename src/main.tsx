@@ -7,6 +7,9 @@ import "./index.css";
 import { StrictMode } from "react";
 import { createRoot } from "react-dom/client";
 import { Providers } from "./app/providers.tsx";
+import { listenForMissingParts } from "./lib/missing-part.ts";
+
+listenForMissingParts();
 
 const root = document.getElementById("root");
 if (root === null) throw new Error("index.html has no element #root");
