@@ -55,8 +55,9 @@ export function ScheduleRow({ layer, figures }: ScheduleRowProps) {
         // Its key chooses when the press ends, alone or beside others.
         if (!(target instanceof Element && target.closest("[data-chooses]"))) chooseThis();
       }}
-      // Not on focus: who goes from the list of pieces to the bar by Tab passes here with what is chosen.
-      onInputCapture={chooseThis}
+      // Not on focus: who goes from the list of pieces to the bar by Tab passes here with what is chosen. Not while the event
+      // is on its way down either: drawn again before its cell heard of it, the cell would put back its old text.
+      onChange={chooseThis}
     >
       <DeskRowHead>
         <button

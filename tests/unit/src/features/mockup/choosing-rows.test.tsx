@@ -50,6 +50,22 @@ describe("a row of the schedule", () => {
     expect(typed[0]).toEqual(wholeC);
   });
 
+  it("is not chosen before its cell heard what was typed: drawn again in between, the cell would lose it", async () => {
+    const chosen = await showRow();
+    // A browser lets React draw between two listeners of one event. This one is called between those of the row and the cell.
+    const before: number[] = [];
+    const name = control("Name of C", HTMLInputElement);
+    name.addEventListener("input", () => before.push(chosen.length));
+    await type(name, "Moon");
+    // A list tells of a choice twice, and what was chosen is taken from the second.
+    const stock = control("Thickness of C", HTMLSelectElement);
+    await act(async () => stock.dispatchEvent(new Event("input", { bubbles: true })));
+    before.push(chosen.length);
+    expect(before).toEqual([0, 1]);
+    await act(async () => stock.dispatchEvent(new Event("change", { bubbles: true })));
+    expect(chosen).toEqual([wholeC, wholeC]);
+  });
+
   it("is chosen by its key alone, or with Shift beside what is chosen", async () => {
     const alone = await showRow();
     await press(button("Choose C, Layer C"));
