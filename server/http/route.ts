@@ -103,7 +103,8 @@ export function stream<E extends Endpoint>(
 ): void {
   routes.registered.push({ endpoint, reach: "insiders" });
   routes.router.get(endpoint.path, async (request, response) => {
-    const ask = () => contextOf(request, routes.services, "insiders");
+    // A page that lies open is nobody's doing: it must not keep a session from running out.
+    const ask = () => contextOf(request, routes.services, "insiders", { isUse: false });
     await ask();
     const input = {
       params: parsed(endpoint.params, request.params, "params"),
@@ -135,9 +136,14 @@ function register(
   });
 }
 
-async function contextOf(request: Request, services: Services, reach: Reach): Promise<ReadContext> {
+async function contextOf(
+  request: Request,
+  services: Services,
+  reach: Reach,
+  use: { isUse?: boolean } = {},
+): Promise<ReadContext> {
   const now = new Date();
-  const live = await readSession(request, services.env, now);
+  const live = await readSession(request, services.env, now, use);
   if (reach !== "anyone" && !live) throw new AppError("not_signed_in");
   const slug = typeof request.params.shop === "string" ? request.params.shop : null;
   const shop = slug ? await Shop.findOne({ where: { slug } }) : null;

@@ -17,13 +17,16 @@ export const usesSecureCookies = (env: Environment): boolean => env.PUBLIC_URL.s
 export const sessionCookieNames = ["__Secure-authjs.session-token", "authjs.session-token"] as const;
 export const sessionCookie = (env: Environment): string => sessionCookieNames[usesSecureCookies(env) ? 0 : 1];
 
-/** The session's row is what counts: ended or run out means signed out at once, whatever the cookie says. */
-export async function liveSession(sessionId: string, now: Date): Promise<LiveSession | null> {
+/**
+ * The session's row is what counts: ended or run out means signed out at once, whatever the cookie says. `isUse`: whether somebody does
+ * something by it, which keeps it from running out.
+ */
+export async function liveSession(sessionId: string, now: Date, { isUse = true } = {}): Promise<LiveSession | null> {
   const session = await Session.findOne({ where: { id: sessionId, endedAt: null, expiresAt: { [Op.gt]: now } } });
   if (!session) return null;
   const person = await Person.findByPk(session.personId);
   if (!person) return null;
-  if (now.getTime() - session.lastSeenAt.getTime() > touchAfterMs) {
+  if (isUse && now.getTime() - session.lastSeenAt.getTime() > touchAfterMs) {
     // Never undoes an ending that another request has just written.
     await Session.update(
       {
@@ -64,7 +67,12 @@ const speaksForClients = ({ session, person }: LiveSession): boolean =>
 type WithCookie = { readonly headers: { readonly cookie?: string | undefined } };
 
 /** Who sent the request, read from the encrypted cookie and then from the session's row. */
-export async function readSession(request: WithCookie, env: Environment, now: Date): Promise<LiveSession | null> {
+export async function readSession(
+  request: WithCookie,
+  env: Environment,
+  now: Date,
+  use: { isUse?: boolean } = {},
+): Promise<LiveSession | null> {
   if (!request.headers.cookie) return null;
   const cookieName = sessionCookie(env);
   const token = await getToken({
@@ -74,7 +82,7 @@ export async function readSession(request: WithCookie, env: Environment, now: Da
     salt: cookieName,
     secureCookie: usesSecureCookies(env),
   });
-  return typeof token?.sessionId === "string" ? liveSession(token.sessionId, now) : null;
+  return typeof token?.sessionId === "string" ? liveSession(token.sessionId, now, use) : null;
 }
 
 /**

@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { Note } from "#server/models/note.ts";
+import { Session } from "#server/models/session.ts";
 import { endSession, listSessions } from "#shared/contracts/account.ts";
 import { removeContact } from "#shared/contracts/clients.ts";
 import { streamJobSignals } from "#shared/contracts/job-signals.ts";
@@ -135,6 +136,27 @@ describe("a stream ends", () => {
     await say(own, own.visitors.maker, revisionId);
     await reader.ended();
     expect(reader.signals()).toEqual([]);
+  });
+
+  it("when the session runs out: a page that lies open does not prolong it", async () => {
+    const { own, revisionId } = await issued();
+    const visitor = await signInAs(app, await buildMember({ shop: own.owner.shop, role: "maker" }));
+    const { items } = await visitor.get(listSessions);
+    const where = { where: { id: items[0]?.id ?? "" } };
+    const longAgo = new Date(Date.now() - 3_600_000);
+    await Session.update({ lastSeenAt: longAgo }, where);
+    const given = { params: { ...own.params, jobId: own.job.id }, query: { after: 0, once: "1" as const } };
+    expect((await visitor.ask(streamJobSignals, given)).status).toBe(200);
+    expect((await Session.findOne({ ...where, rejectOnEmpty: true })).lastSeenAt).toEqual(longAgo);
+    // Whereas who reads anything else is there.
+    await visitor.get(listSessions);
+    expect((await Session.findOne({ ...where, rejectOnEmpty: true })).lastSeenAt.getTime()).toBeGreaterThan(
+      longAgo.getTime(),
+    );
+    const reader = await look(own, visitor);
+    await Session.update({ expiresAt: new Date(Date.now() - 1000) }, where);
+    await say(own, own.visitors.maker, revisionId);
+    await reader.ended();
   });
 
   it("after what there is when that is all that was asked for", async () => {
