@@ -29,7 +29,7 @@ export function CopyTools() {
         copy
       </ToolWord>
       <ToolWord why={why} title="Ctrl D" onClick={double}>
-        double
+        double pieces
       </ToolWord>
       {whyNoPaste !== null ? (
         <ToolWord why={whyNoPaste}>paste</ToolWord>

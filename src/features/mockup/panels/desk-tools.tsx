@@ -47,32 +47,32 @@ export function DeskTools(props: DeskToolsProps) {
 
   return (
     <>
-      <SavedState autosave={saving.autosave} keepFailure={keepFailure} />
-      <WordButton disabled={lastStep === undefined} title={lastStep} onClick={onUndo}>
-        Undo
-      </WordButton>
-      <WordButton disabled={nextStep === undefined} title={nextStep} onClick={onRedo}>
-        Redo
-      </WordButton>
-      <StepsMenu history={history} onGoTo={onGoToStep} />
-      {mayIssue && (
-        <span className="flex items-center gap-3">
-          {why !== null && (
-            <span id="why-not-to-issue" className="max-w-56 text-fine text-graphite">
-              {why}
-            </span>
-          )}
+      {/* As wide whatever is said, so that the header neither wraps nor moves its tools under the hand. */}
+      <div className="flex w-full items-center justify-end gap-3 lg:w-[31rem] min-[1600px]:w-[44rem]">
+        <div className="min-w-0 flex-1 text-right text-fine leading-tight text-graphite">
+          <SavedState autosave={saving.autosave} keepFailure={keepFailure} />
+          {mayIssue && why !== null && <p id="why-not-to-issue">{why}</p>}
+        </div>
+        <WordButton disabled={lastStep === undefined} title={lastStep} onClick={onUndo}>
+          Undo
+        </WordButton>
+        <WordButton disabled={nextStep === undefined} title={nextStep} onClick={onRedo}>
+          Redo
+        </WordButton>
+        <StepsMenu history={history} onGoTo={onGoToStep} />
+        {mayIssue && (
           <Button
             kind="primary"
             size="small"
+            className="shrink-0"
             disabled={why !== null}
             aria-describedby={why === null ? undefined : "why-not-to-issue"}
             onClick={() => setOpen(true)}
           >
             Issue revision {letter}
           </Button>
-        </span>
-      )}
+        )}
+      </div>
       <IssueDialog
         open={open}
         onOpenChange={setOpen}

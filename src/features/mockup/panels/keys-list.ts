@@ -27,7 +27,7 @@ export const deskKeys: readonly DeskKeys[] = [
       { keys: "Ctrl X", does: "copies it and takes it out" },
       { keys: "Ctrl V", does: "pastes: whole layers as layers, single pieces into the chosen layer" },
       { keys: "Ctrl Shift V", does: "pastes as layers of their own" },
-      { keys: "Ctrl D", does: "doubles what is chosen in its place" },
+      { keys: "Ctrl D", does: "doubles the chosen pieces in their place" },
       { keys: "Ctrl Z", does: "undo" },
       { keys: "Ctrl Shift Z, Ctrl Y", does: "redo" },
     ],

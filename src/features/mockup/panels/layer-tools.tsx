@@ -40,7 +40,7 @@ export function LayerTools({ onBoard }: { readonly onBoard: () => void }) {
     const id = newId();
     const [newKey = key] = nextFreeKeys(document, 1);
     edit({
-      label: `Double ${key}`,
+      label: `Double layer ${key}`,
       change: (before) => doubleLayer(before, { key, id }),
       choose: (after) => chooseLayer(after, newKey),
     });
@@ -80,7 +80,7 @@ export function LayerTools({ onBoard }: { readonly onBoard: () => void }) {
         {locked ? "unlock" : "lock"}
       </WordButton>
       <ToolWord why={whyFull} onClick={double}>
-        double
+        double layer
       </ToolWord>
       {add}
       <ToolWord

@@ -6,9 +6,10 @@ type SavedStateProps = { readonly autosave: Autosave; readonly keepFailure: Keep
 
 /** Where the work stands with the server, in words, and whether this browser keeps a copy meanwhile. */
 export function SavedState({ autosave, keepFailure }: SavedStateProps) {
+  const text = textOf(autosave, keepFailure);
   return (
-    <p role="status" className="max-w-80 text-right text-sm text-graphite">
-      {textOf(autosave, keepFailure)}
+    <p role="status" title={text} className="line-clamp-2">
+      {text}
     </p>
   );
 }
@@ -37,4 +38,4 @@ const and = (failure: KeepFailure): string => (failure === null ? "" : `. ${noCo
 const noCopyWords = (failure: NonNullable<KeepFailure>): string =>
   failure === "full"
     ? "No copy on this device: its room for this page is full"
-    : "No copy on this device: this browser lets pages keep nothing";
+    : "No copy on this device: this browser keeps nothing";

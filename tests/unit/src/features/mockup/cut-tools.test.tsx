@@ -213,7 +213,7 @@ describe("the tools that cut", () => {
 describe("a layer's tools", () => {
   it("double, lock and unlock it, and remove it only when it is not locked", async () => {
     await start("C");
-    await press(button("double"));
+    await press(button("double layer"));
     expect(layerOf("E")).toMatchObject({ name: "Layer 4" });
     await press(button("lock"));
     expect(layerOf("E")?.locked).toBe(true);
@@ -223,7 +223,7 @@ describe("a layer's tools", () => {
     await press(button("unlock"));
     await press(button("remove"));
     expect(layerOf("E")).toBeUndefined();
-    expect(labels()).toEqual(["Double C", "Lock E", "Unlock E", "Remove E"]);
+    expect(labels()).toEqual(["Double layer C", "Lock E", "Unlock E", "Remove E"]);
   });
 
   it("add an empty one, right under the chosen one if so wished", async () => {
