@@ -46,3 +46,6 @@ export function useSessionText(key: string): readonly [string, (text: string) =>
   const [draft, setDraft] = useSessionDraft(key, (stored) => (typeof stored === "string" ? stored : null));
   return [draft ?? "", (text) => setDraft(text === "" ? null : text)];
 }
+
+/** Whether a text that was being typed lies there from before, as after a reload. */
+export const hasSessionText = (key: string): boolean => typeof readStored(key) === "string";

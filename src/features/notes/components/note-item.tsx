@@ -9,7 +9,7 @@ import { useSetNoteState } from "../api/mutations.ts";
 import { kindWords, noteTone, placeWords } from "../model/note-words.ts";
 import { NoteMark, toneText } from "./note-mark.tsx";
 import { NoteWords, ReplyWords } from "./note-words.tsx";
-import { ReplyForm } from "./reply-form.tsx";
+import { hasBegunReply, ReplyForm } from "./reply-form.tsx";
 
 type NoteItemProps = {
   readonly shop: string;
@@ -26,7 +26,8 @@ export const noteButtonId = (noteId: string): string => `note-${noteId}`;
 
 /** One note as a line of the margin: number, words, what and where, replies, and what can be done with it. */
 export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelected, onSelect }: NoteItemProps) {
-  const [isReplying, setReplying] = useState(false);
+  const [isReplying, setReplying] = useState(() => note.can.reply && hasBegunReply(note.id));
+  const [wasAsked, setAsked] = useState(false);
   const change = useSetNoteState(shop, revisionId, note.id);
   const line = useRef<HTMLLIElement>(null);
   const tone = noteTone(note);
@@ -34,6 +35,11 @@ export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelecte
   useEffect(() => {
     if (isSelected) line.current?.scrollIntoView({ block: "nearest" });
   }, [isSelected]);
+
+  function handleReply() {
+    setAsked(true);
+    setReplying(true);
+  }
 
   const state = note.state === "settled" ? "Settled" : kindWords[note.kind].word;
   const rest = [
@@ -96,11 +102,17 @@ export function NoteItem({ shop, revisionId, letter, note, pieceNames, isSelecte
             </Notice>
           )}
           {isReplying ? (
-            <ReplyForm shop={shop} revisionId={revisionId} note={note} onDone={() => setReplying(false)} />
+            <ReplyForm
+              shop={shop}
+              revisionId={revisionId}
+              note={note}
+              takesFocus={wasAsked}
+              onDone={() => setReplying(false)}
+            />
           ) : (
             <p className="mt-1 flex flex-wrap gap-x-4 empty:hidden">
               {note.can.reply && (
-                <Button kind="bare" size="small" onClick={() => setReplying(true)}>
+                <Button kind="bare" size="small" onClick={handleReply}>
                   Reply
                   <span className="sr-only"> to note {note.number}</span>
                 </Button>

@@ -4,19 +4,26 @@ import { Button } from "@/components/ui/button.tsx";
 import { Notice } from "@/components/ui/notice.tsx";
 import { TextArea } from "@/components/ui/text-area.tsx";
 import { messageOf } from "@/lib/form-problem.ts";
-import { useSessionText } from "@/lib/session-draft.ts";
+import { hasSessionText, useSessionText } from "@/lib/session-draft.ts";
 import { useReplyToNote } from "../api/mutations.ts";
 
 type ReplyFormProps = {
   readonly shop: string;
   readonly revisionId: string;
   readonly note: Note;
+  /** Not when it stands open from before: the reader may be looking elsewhere. */
+  readonly takesFocus: boolean;
   readonly onDone: () => void;
 };
 
+const keyOf = (noteId: string): string => `standproud:reply:${noteId}`;
+
+/** Whether an answer to a note was begun and neither sent nor emptied. */
+export const hasBegunReply = (noteId: string): boolean => hasSessionText(keyOf(noteId));
+
 /** An answer under a note. What is typed survives a reload. */
-export function ReplyForm({ shop, revisionId, note, onDone }: ReplyFormProps) {
-  const [text, setText] = useSessionText(`standproud:reply:${note.id}`);
+export function ReplyForm({ shop, revisionId, note, takesFocus, onDone }: ReplyFormProps) {
+  const [text, setText] = useSessionText(keyOf(note.id));
   const [isEmpty, setEmpty] = useState(false);
   const isSent = useRef(false);
   const reply = useReplyToNote(shop, revisionId, note.id);
@@ -42,7 +49,7 @@ export function ReplyForm({ shop, revisionId, note, onDone }: ReplyFormProps) {
   return (
     <form onSubmit={handleSubmit} className="mt-2 space-y-2" noValidate>
       <TextArea
-        autoFocus
+        autoFocus={takesFocus}
         label={`Reply to note ${note.number}`}
         value={text}
         rows={2}
