@@ -1,4 +1,5 @@
 import { type KeyboardEvent, type ReactNode, useRef } from "react";
+import { flushSync } from "react-dom";
 import { cx } from "@/lib/cx.ts";
 import type { SheetParts } from "./sheet-desk.tsx";
 
@@ -21,6 +22,14 @@ type SheetInHandProps = {
 /** The sheet in the hand: the drawing on top, its parts by plain words, notes below, the decisions at the bottom edge. */
 export function SheetInHand({ parts, tools, tab, onTab, shape }: SheetInHandProps) {
   const list = useRef<HTMLDivElement>(null);
+  const panel = useRef<HTMLDivElement>(null);
+
+  /** The parts are of different heights: after a long one, a short one would lie above what is in sight. */
+  function choose(next: SheetTab) {
+    flushSync(() => onTab(next));
+    const shown = panel.current;
+    if (shown && shown.getBoundingClientRect().top < 0) shown.scrollIntoView({ block: "start" });
+  }
 
   function handleKeyDown(event: KeyboardEvent) {
     const step = { ArrowRight: 1, ArrowLeft: -1 }[event.key];
@@ -29,13 +38,14 @@ export function SheetInHand({ parts, tools, tab, onTab, shape }: SheetInHandProp
     const at = tabs.findIndex(({ id }) => id === tab);
     const next = tabs[(at + step + tabs.length) % tabs.length];
     if (!next) return;
-    onTab(next.id);
-    list.current?.querySelector<HTMLElement>(`#tab-${next.id}`)?.focus();
+    choose(next.id);
+    list.current?.querySelector<HTMLElement>(`#tab-${next.id}`)?.focus({ preventScroll: true });
   }
 
   return (
     <div className="flex min-h-[calc(100dvh-8rem)] flex-col">
       <div
+        ref={panel}
         id="sheet-part"
         role="tabpanel"
         aria-labelledby={`tab-${tab}`}
@@ -72,7 +82,7 @@ export function SheetInHand({ parts, tools, tab, onTab, shape }: SheetInHandProp
             aria-selected={id === tab}
             aria-controls="sheet-part"
             tabIndex={id === tab ? 0 : -1}
-            onClick={() => onTab(id)}
+            onClick={() => choose(id)}
             className={cx(
               "min-h-11 cursor-pointer border-b-2",
               id === tab ? "border-madder font-semibold text-ink" : "border-transparent text-graphite",
