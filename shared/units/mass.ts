@@ -18,19 +18,24 @@ export function formatMass(grams: number, unit: LengthUnit): string {
   return `${(grams / 1000).toFixed(Math.abs(grams) < 100_000 ? 2 : 0)} kg`;
 }
 
-/** A column says no mass finer than a tenth of a gram. */
-const mostColumnPlaces = 4;
+/** Decimals of kg or lb in a column: no more are known of a mass that is worked out, and fewer hide a letter. */
+const columnPlaces = { fewest: 2, most: 3 } as const;
 
 /**
- * Masses in words that stand under one another: all in kg, or in lb for shops that work in inches, with two decimals and more where
- * the smallest of them needs more to be seen: 2300 g and 4.23 g read "2.300 kg" and "0.004 kg". Something that is no number is an en dash.
+ * Masses in words that stand under one another: all in kg, or in lb for shops that work in inches, with two decimals, or three where the
+ * lightest of them needs the third: 2300 g and 4.23 g read "2.300 kg" and "0.004 kg". What would still read as nothing is "under
+ * 0.001 kg"; something that is no number is an en dash.
  */
 export function formatMassColumn(grams: readonly number[], unit: LengthUnit): string[] {
   const [perUnit, name] = unit === "in" ? [gramsPerPound, "lb"] : [1000, "kg"];
-  const smallest = Math.min(...grams.filter((mass) => mass > 0)) / perUnit;
-  const needed = Number.isFinite(smallest) ? Math.ceil(-Math.log10(smallest)) : 0;
-  const places = Math.min(mostColumnPlaces, Math.max(2, needed));
-  return grams.map((mass) => (Number.isFinite(mass) ? `${(mass / perUnit).toFixed(places)} ${name}` : "–"));
+  const isLight = grams.some((mass) => mass > 0 && mass / perUnit < 10 ** -columnPlaces.fewest);
+  const places = isLight ? columnPlaces.most : columnPlaces.fewest;
+  const least = 10 ** -places;
+  return grams.map((mass) => {
+    if (!Number.isFinite(mass)) return "–";
+    const written = (mass / perUnit).toFixed(places);
+    return mass > 0 && Number(written) === 0 ? `under ${least.toFixed(places)} ${name}` : `${written} ${name}`;
+  });
 }
 
 /** A mass that somebody stated in kilograms, with no more decimals than it has: "40 kg", "12.5 kg"; "88.18 lb" for shops that work in inches. */

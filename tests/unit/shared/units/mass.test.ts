@@ -29,8 +29,10 @@ it.each([
 it.each([
   { grams: [1831, 283, 48], unit: "mm" as const, texts: ["1.83 kg", "0.28 kg", "0.05 kg"] },
   { grams: [2300, 4.23], unit: "mm" as const, texts: ["2.300 kg", "0.004 kg"] },
-  { grams: [2300, 0.4, 0], unit: "mm" as const, texts: ["2.3000 kg", "0.0004 kg", "0.0000 kg"] },
-  { grams: [123_456, 0.01, Number.NaN], unit: "mm" as const, texts: ["123.4560 kg", "0.0000 kg", "–"] },
+  { grams: [2300, 0.4, 0], unit: "mm" as const, texts: ["2.300 kg", "under 0.001 kg", "0.000 kg"] },
+  { grams: [123_456, 0.01, Number.NaN], unit: "mm" as const, texts: ["123.456 kg", "under 0.001 kg", "–"] },
+  { grams: [10, 0.6], unit: "mm" as const, texts: ["0.010 kg", "0.001 kg"] },
+  { grams: [10], unit: "mm" as const, texts: ["0.01 kg"] },
   { grams: [0], unit: "mm" as const, texts: ["0.00 kg"] },
   { grams: [453.59237, 2.27], unit: "in" as const, texts: ["1.000 lb", "0.005 lb"] },
   { grams: [], unit: "mm" as const, texts: [] },
