@@ -2,12 +2,12 @@ import { newId } from "../db/new-id.ts";
 import { notAllowed } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
 import type { ReceivedFile } from "../http/uploads.ts";
-import { enqueue } from "../jobs/queue.ts";
 import { Artwork } from "../models/artwork.ts";
 import { isStaff } from "../policies/actor.ts";
 import { artworkPolicy } from "../policies/artwork.ts";
 import { findJob } from "../queries/find-job.ts";
 import { logEvent } from "./log-event.ts";
+import { queueImport } from "./queue-import.ts";
 import { storeReceivedFile } from "./store-file.ts";
 
 /** Keeps a drawing as it came and sets the queue to turn it into pieces. The caller has looked at its content. */
@@ -33,7 +33,7 @@ export async function addArtwork(
     },
     { transaction },
   );
-  await enqueue(transaction, "import-artwork", { artworkId: artwork.id });
+  await queueImport(context, artwork);
   await logEvent(context, { shopId: job.shopId, jobId, kind: "artwork added", data: { name: artwork.name } });
   return artwork;
 }

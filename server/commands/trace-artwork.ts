@@ -1,12 +1,12 @@
 import type { TraceChoices } from "#shared/tracing/trace-choices.ts";
 import { notAllowed, wrongState } from "../http/app-error.ts";
 import type { Context } from "../http/context.ts";
-import { enqueue } from "../jobs/queue.ts";
 import type { Artwork } from "../models/artwork.ts";
 import { isPicture } from "../models/artwork.ts";
 import { artworkPolicy } from "../policies/artwork.ts";
 import { findArtwork } from "../queries/find-artwork.ts";
 import { findJob } from "../queries/find-job.ts";
+import { queueImport } from "./queue-import.ts";
 
 /**
  * Sets the queue to trace a picture again with other choices. Until that is done the artwork keeps its pieces, and it keeps them when
@@ -16,7 +16,7 @@ export async function traceArtwork(context: Context, artworkId: string, choices:
   const artwork = await lockedPicture(context, artworkId);
   if (artwork.state === "importing") throw wrongState("This picture is still being traced for the first time.");
   await artwork.update({ traceAsked: choices, traceFailure: null }, { transaction: context.transaction });
-  await enqueue(context.transaction, "import-artwork", { artworkId });
+  await queueImport(context, artwork);
   return artwork;
 }
 

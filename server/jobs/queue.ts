@@ -28,19 +28,28 @@ const mostTries: Readonly<Record<JobName, number>> = {
 /**
  * Adds a job in the very transaction of the change that causes it: rolled back together, committed together.
  * The key makes asking twice the same as asking once. `inSeconds` is counted by the database's clock, as the queue counts.
+ * Of what is due the lowest `priority` comes first, and of one priority what was asked first.
  */
 export async function enqueue<N extends JobName>(
   transaction: Transaction,
   name: N,
   payload: JobPayloads[N],
-  { inSeconds = 0 }: { readonly inSeconds?: number } = {},
+  { inSeconds = 0, priority = 0 }: { readonly inSeconds?: number; readonly priority?: number } = {},
 ): Promise<void> {
   const key = `${name}:${Object.values(payload).join(":")}`;
   await sequelizeOf(transaction).query(
     `select graphile_worker.add_job($1::text, payload := $2::json, flags := $3::text[], job_key := $4::text, max_attempts := $5::int,
-       run_at := now() + make_interval(secs => $6::float8))`,
+       run_at := now() + make_interval(secs => $6::float8), priority := $7::int)`,
     {
-      bind: [name, JSON.stringify(payload), heavyJobs.has(name) ? [name] : null, key, mostTries[name], inSeconds],
+      bind: [
+        name,
+        JSON.stringify(payload),
+        heavyJobs.has(name) ? [name] : null,
+        key,
+        mostTries[name],
+        inSeconds,
+        priority,
+      ],
       transaction,
     },
   );

@@ -1,8 +1,9 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { artworkSchema } from "#shared/contracts/artworks.ts";
 import { changeJob } from "#shared/contracts/jobs.ts";
 import { listStock } from "#shared/contracts/stock.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
-import { buildWorld, type World } from "../support/factories/work.ts";
+import { artworksPath, buildWorld, formWith, plainSvg, type World } from "../support/factories/work.ts";
 import { holdJob } from "../support/hold-job.ts";
 
 let app: TestApp;
@@ -36,6 +37,23 @@ describe("a shop that asks for much at once", () => {
     const statuses = (await Promise.all(answers)).map(({ status }) => status);
     expect(new Set(statuses)).toEqual(new Set([200, 429]));
   }, 60_000);
+});
+
+describe("a shop that brings in much at once", () => {
+  it("keeps no other shop waiting for all of it", async () => {
+    const bring = async (own: World, name: string): Promise<string> => {
+      const body = formWith(name, plainSvg());
+      const { text } = await own.visitors.maker.send("POST", artworksPath(own), { body });
+      return artworkSchema.parse(JSON.parse(text)).id;
+    };
+    const many: string[] = [];
+    for (const name of ["1.svg", "2.svg", "3.svg", "4.svg"]) many.push(await bring(world, name));
+    const one = await bring(others, "logo.svg");
+    await app.runJobs();
+    const lines = app.logged.map((line) => JSON.parse(line) as { task?: string; payload?: { artworkId?: string } });
+    const done = lines.filter(({ task }) => task === "import-artwork").map(({ payload }) => payload?.artworkId);
+    expect(done).toEqual([many[0], one, ...many.slice(1)]);
+  });
 });
 
 describe("a mockup of nothing but faults", () => {
