@@ -255,7 +255,7 @@ describe("work that never reached the server", () => {
     await devtools.send("Storage.overrideQuotaForOrigin", { origin, quotaSize: 1 });
     const desk = await openDesk(own.page, job);
     await desk.write("Name of D", "No room");
-    await own.page.getByText(/^Saved .+\. No copy on this device: its room for this page is full$/).waitFor();
+    await own.page.getByText(/^Saved .+\. No copy on this device: no room left$/).waitFor();
     // Said in one row with all that an owner finds there: at 1440 px the header is as high as ever.
     expect((await own.page.getByRole("banner").boundingBox())?.height).toBeLessThan(60);
     await job.named("No room");

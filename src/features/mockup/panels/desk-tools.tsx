@@ -47,9 +47,10 @@ export function DeskTools(props: DeskToolsProps) {
 
   return (
     <>
-      {/* As wide whatever is said, so that the header neither wraps nor moves its tools under the hand. */}
-      <div className="flex w-full items-center justify-end gap-3 lg:w-[31rem] min-[1600px]:w-[44rem]">
-        <div className="min-w-0 flex-1 text-right text-fine leading-tight text-graphite">
+      {/* As wide whatever is said, so that the header neither wraps nor moves its tools under the hand. Where the places of the
+          shop leave no room, a row with nobody but the reader's name. */}
+      <div className="flex w-full items-center justify-end gap-2 lg:w-[calc(100vw-16rem)] min-[85rem]:w-[31rem] 2xl:w-[40rem]">
+        <div className="mr-1 min-w-0 flex-1 text-right text-fine leading-[1.1] text-graphite">
           <SavedState autosave={saving.autosave} keepFailure={keepFailure} />
           {mayIssue && why !== null && <p id="why-not-to-issue">{why}</p>}
         </div>

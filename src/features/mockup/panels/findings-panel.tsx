@@ -82,9 +82,10 @@ export function FindingsPanel(props: FindingsPanelProps) {
         <span role="status" className="font-sans text-sm font-normal text-graphite">
           {ready ? summaryOf(standings, dryFit.fine) : "is running"}
         </span>
+        {/* It takes no room: the list below must not jump at each change of the drawing. */}
         {ready && !isCurrent && (
-          <span aria-hidden="true" className="font-sans text-sm font-normal text-graphite">
-            , looking again …
+          <span aria-hidden="true" className="absolute font-sans text-sm font-normal text-graphite">
+            …
           </span>
         )}
       </h2>

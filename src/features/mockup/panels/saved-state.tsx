@@ -24,7 +24,7 @@ function textOf(autosave: Autosave, keepFailure: KeepFailure): string {
     case "saving":
       return `Saving …${and(keepFailure)}`;
     case "stale":
-      return `Not saved: a newer version is there. ${kept}`;
+      return `A newer version is there. ${kept}`;
     case "offline":
       return `No connection. ${kept}`;
     case "refused":
@@ -36,6 +36,4 @@ function textOf(autosave: Autosave, keepFailure: KeepFailure): string {
 const and = (failure: KeepFailure): string => (failure === null ? "" : `. ${noCopyWords(failure)}`);
 
 const noCopyWords = (failure: NonNullable<KeepFailure>): string =>
-  failure === "full"
-    ? "No copy on this device: its room for this page is full"
-    : "No copy on this device: this browser keeps nothing";
+  failure === "full" ? "No copy on this device: no room left" : "No copy: this browser keeps none";
