@@ -188,7 +188,11 @@ function pointerOf(path: readonly PropertyKey[]): string {
 async function send(response: Response, endpoint: Endpoint, answer: unknown, mode: string): Promise<void> {
   response.setHeader("Cache-Control", "no-store");
   if (answer instanceof FileAnswer) {
-    if (answer.keepForSeconds > 0) response.setHeader("Cache-Control", `private, max-age=${answer.keepForSeconds}`);
+    if (answer.keepForSeconds > 0) {
+      response.setHeader("Cache-Control", `private, max-age=${answer.keepForSeconds}`);
+      // Kept for who asked: the next person at the same browser has another session, and is asked for it.
+      response.vary("Cookie");
+    }
     response.setHeader("Content-Type", answer.mediaType);
     response.setHeader("Content-Length", answer.byteSize);
     response.setHeader("X-Content-Type-Options", "nosniff");

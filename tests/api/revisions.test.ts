@@ -137,6 +137,7 @@ describe("issuing", () => {
     const picture = await own.visitors.approver.ask(getPicture, { params: at(own, id) });
     expect(picture.headers.get("content-type")).toBe("image/svg+xml");
     expect(picture.headers.get("cache-control")).toBe("private, max-age=3600");
+    expect(picture.headers.get("vary")?.split(/,\s*/)).toContain("Cookie");
     expect(picture.text).toMatch(/^<svg /);
   });
 

@@ -64,6 +64,7 @@ describe("a photo of the wall", () => {
     expect(headers.get("content-type")).toBe("image/jpeg");
     expect(headers.get("content-disposition")).toMatch(/^inline/);
     expect(headers.get("x-content-type-options")).toBe("nosniff");
+    expect(headers.get("vary")?.split(/,\s*/)).toContain("Cookie");
     expect(bytes.includes(cameraSerial)).toBe(false);
     const { bitmap } = await Jimp.fromBuffer(bytes);
     expect([bitmap.width, bitmap.height]).toEqual([480, 640]);
