@@ -7,6 +7,7 @@ import { afterAll, beforeAll, describe, expect, it, vi } from "vitest";
 import { changeJob, openJob } from "#shared/contracts/jobs.ts";
 import { getMockup, saveMockup } from "#shared/contracts/mockups.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
+import { boardInWindow } from "../support/board-in-window.ts";
 import { launchBrowser } from "../support/browser.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
 import { mockup } from "../support/drivers/mockup.ts";
@@ -55,25 +56,6 @@ async function lookAtMiddle(page: Page) {
   if (canvas === null || disc === null) throw new Error("The canvas or the section is not there.");
   // The handle lies round the disc of 275 mm with 4 px to spare on each side.
   return { x: canvas.x + canvas.width / 2, y: canvas.y + canvas.height / 2, pxPerMm: (disc.height - 8) / 275 };
-}
-
-/** Where points of the board, mm, lie in the window, once the view has made room for the dimensions. */
-async function boardInWindow(page: Page) {
-  const elevation = page.getByRole("application", { name: /elevation/i });
-  const read = async () => (await elevation.getAttribute("data-view")) ?? "";
-  let view = "";
-  await vi.waitFor(
-    async () => {
-      const before = view;
-      view = await read();
-      expect(view).toBe(before);
-    },
-    { timeout: patienceMs, interval: 250 },
-  );
-  const box = await elevation.boundingBox();
-  const [scale, left, top] = view.split(" ").map(Number);
-  if (!box || !scale || left === undefined || top === undefined) throw new Error("The elevation is not there.");
-  return (x: number, y: number) => [box.x + left + x * scale, box.y + top + y * scale] as const;
 }
 
 beforeAll(async () => {
@@ -130,7 +112,7 @@ describe("the canvas", () => {
     const { page } = owner;
     const desk = await openDesk(owner);
     // Round the ring of 220 mm and the sun in the middle of the board, from bare wood; the disc of 275 mm reaches out of it.
-    const at = await boardInWindow(page);
+    const at = await boardInWindow(page.getByRole("application", { name: /elevation/i }));
     await page.mouse.move(...at(176, 324));
     await page.keyboard.down("Control");
     await page.mouse.down();

@@ -86,6 +86,8 @@ const keepPictures =
       [1440, 900],
     ] as const) {
       await page.setViewportSize({ width, height });
+      // Until the drawing is made anew for that size.
+      await page.waitForTimeout(1000);
       await page.locator('[aria-busy="true"]').waitFor({ state: "detached" });
       await page.evaluate(() => window.scrollTo(0, 0));
       await page.screenshot({ path: join(folder, `whole-sign-${name}-${moment}-${width}.png`) });
@@ -137,6 +139,10 @@ async function expectIssued({ page }: Seat) {
     ["Slow epoxy", "scored line"],
   ]);
   expect(document.lettering).toMatchObject([{ words: "ORRERY BOOKS", face: "merriweather-900", capHeight: 40 }]);
+  // A hand catches on what it comes near; the arrows do not.
+  const feet = document.layers.at(-1)?.pieces.map(({ placement }) => placement.y) ?? [];
+  expect(Math.min(...feet)).toBeGreaterThan(340);
+  expect(Math.max(...feet)).toBeLessThan(350);
   expect(document.layers.flatMap(({ pieces }) => pieces.map(({ reads }) => reads)).join("")).toBe("ORRERYBOOKS");
   const found = findings
     .filter(({ severity }) => severity !== "remark")

@@ -69,7 +69,10 @@ export async function drawOrrery(
   await hand.choose(lettering.getByLabel("Thickness"), "4.5");
   await hand.press(lettering.getByRole("button", { name: "Set the words" }));
   await lettering.waitFor({ state: "detached" });
-  await hand.write(page.getByLabel("y of what is chosen"), "345");
+  // By the stem of the first R, from the middle of the board down to its lower edge.
+  await still();
+  const elevation = page.getByRole("application", { name: /elevation/i });
+  await hand.move(elevation, { from: { x: 133, y: 200 }, to: { x: 133, y: 345 } });
 
   await mend(page, hand);
   await still();

@@ -1,6 +1,9 @@
 import type { Locator, Page } from "playwright-core";
+import { boardInWindow } from "../board-in-window.ts";
 
 export type GivenFile = { readonly name: string; readonly mimeType: string; readonly buffer: Buffer };
+
+type OnBoard = { readonly x: number; readonly y: number };
 
 /** What a person does at a screen, one action at a time, with a record of it. */
 export type Hand = {
@@ -13,6 +16,8 @@ export type Hand = {
   readonly write: (target: Locator, text: string) => Promise<void>;
   /** Chooses the option of a list that reads so. */
   readonly choose: (target: Locator, option: string) => Promise<void>;
+  /** Moves what is chosen and lies at one place of the board to another, whole mm. */
+  readonly move: (elevation: Locator, way: { readonly from: OnBoard; readonly to: OnBoard }) => Promise<void>;
   /** Presses what asks for a file, and gives it: two actions. */
   readonly give: (opener: Locator, file: GivenFile) => Promise<void>;
 };
@@ -59,6 +64,16 @@ export function pointerHand(page: Page): Hand {
     async choose(target, option) {
       await note(`choose “${option}” in`, target);
       await target.selectOption({ label: option });
+    },
+    async move(elevation, { from, to }) {
+      actions.push(`drag from ${from.x} | ${from.y} mm to ${to.x} | ${to.y} mm`);
+      await elevation.scrollIntoViewIfNeeded();
+      const at = await boardInWindow(elevation);
+      await page.mouse.move(...at(from.x, from.y));
+      await page.mouse.down();
+      await page.mouse.move(...at((from.x + to.x) / 2, (from.y + to.y) / 2), { steps: 4 });
+      await page.mouse.move(...at(to.x, to.y), { steps: 4 });
+      await page.mouse.up();
     },
     async give(opener, file) {
       await note("press", opener);

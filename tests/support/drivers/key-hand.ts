@@ -7,20 +7,22 @@ const mostStops = 200;
 export type KeyHand = Hand & {
   /** How often Tab and F6 were pressed, forwards or backwards. */
   readonly stops: () => number;
-  /** Presses keys where the focus is. */
-  readonly keys: (...presses: string[]) => Promise<void>;
 };
 
 /** A hand on the keys that never touches the mouse: Tab to get there, and there what the control answers to. */
 export function keyHand(page: Page): KeyHand {
   const { actions, note } = recordOfActions();
   let stops = 0;
+  // Files are asked for by the browser itself unless somebody listens, and Enter would be there before one who begins with it.
+  page.on("filechooser", () => undefined);
 
-  /** The key that brings the focus nearer to the target; null when it is there, to be seen. */
+  /** The key that brings the focus nearer to the target; null when it is there, to be seen; "wait" while a dialog is still to take it. */
   const keyTowards = (target: Locator) =>
     target.evaluate((element) => {
       if (element.matches(":focus-visible")) return null;
       const from = document.activeElement ?? document.body;
+      const dialog = element.closest("[role=dialog]");
+      if (dialog && !dialog.contains(from)) return "wait";
       const isBefore = (from.compareDocumentPosition(element) & Node.DOCUMENT_POSITION_PRECEDING) !== 0;
       // F6 goes from part to part of the desk, but not out of what lies over it.
       const part = from.closest("[role=dialog], [role=menu]") ? null : element.closest("header, [data-desk-part]");
@@ -33,6 +35,10 @@ export function keyHand(page: Page): KeyHand {
     for (let stop = 0; stop < mostStops; stop++) {
       const key = await keyTowards(target);
       if (key === null) return;
+      if (key === "wait") {
+        await page.waitForTimeout(50);
+        continue;
+      }
       await page.keyboard.press(key);
       stops++;
     }
@@ -46,6 +52,13 @@ export function keyHand(page: Page): KeyHand {
     for (let step = 0; step < mostStops && !(await target.isChecked()); step++) await page.keyboard.press("ArrowDown");
   }
 
+  /** A millimetre a press, as the bar says at first, and ten with Shift. */
+  async function pressArrows(mm: number, [less, more]: readonly [string, string]): Promise<void> {
+    const arrow = mm < 0 ? less : more;
+    for (let left = Math.abs(mm); left >= 10; left -= 10) await page.keyboard.press(`Shift+${arrow}`);
+    for (let left = Math.abs(mm) % 10; left > 0; left--) await page.keyboard.press(arrow);
+  }
+
   async function write(target: Locator, text: string): Promise<void> {
     await note(`write “${text}” into`, target);
     await goTo(target);
@@ -57,12 +70,6 @@ export function keyHand(page: Page): KeyHand {
   return {
     actions,
     stops: () => stops,
-    async keys(...presses) {
-      for (const press of presses) {
-        actions.push(press);
-        await page.keyboard.press(press);
-      }
-    },
     async press(target) {
       await note("press", target);
       const type = await target.getAttribute("type");
@@ -86,6 +93,12 @@ export function keyHand(page: Page): KeyHand {
         return wanted - element.selectedIndex;
       }, option);
       for (let step = 0; step < Math.abs(by); step++) await page.keyboard.press(by < 0 ? "ArrowUp" : "ArrowDown");
+    },
+    async move(elevation, { from, to }) {
+      actions.push(`move by ${to.x - from.x} | ${to.y - from.y} mm`);
+      await goTo(elevation);
+      await pressArrows(to.x - from.x, ["ArrowLeft", "ArrowRight"]);
+      await pressArrows(to.y - from.y, ["ArrowUp", "ArrowDown"]);
     },
     async give(opener, file) {
       await note("press", opener);

@@ -91,6 +91,9 @@ const reader = (role: Role): Reader => ({
     unit: "mm",
     jobPrefix: "CL",
     paper: "A3",
+    timeZone: "UTC",
+    buildDays: 5,
+    freightDays: 2,
     demo: false,
     can: {
       changeShop: false,
@@ -159,6 +162,8 @@ it("offers what mends a finding, and hands over the one that is pressed", async 
   const second = [...document.querySelectorAll("button")].find(({ textContent }) => textContent === "Take 6 mm sheet");
   await act(async () => second?.click());
   expect(pressed).toEqual([mends[1]]);
+  // What was pressed is gone until the next run: the focus is not lost with it.
+  expect(document.activeElement?.textContent).toContain("Dry fit");
   await redraw({ findings: [thin], mends });
   expect(buttonNames()).not.toContain("Take 6 mm sheet");
 });
