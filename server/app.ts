@@ -1,6 +1,7 @@
 import compression from "compression";
 import express, { type Express, Router } from "express";
 import { addArtwork, traceArtwork } from "#shared/contracts/artworks.ts";
+import { inspectUnsubscribe, unsubscribe } from "#shared/contracts/mail-choices.ts";
 import { saveMockup } from "#shared/contracts/mockups.ts";
 import { keepDraft } from "#shared/contracts/named-drafts.ts";
 import { addWallPhoto } from "#shared/contracts/wall-photos.ts";
@@ -49,6 +50,7 @@ export function createApp(services: Services): App {
   app.post(["/api/links/fresh", "/api/links/request", "/api/password/forgot"], limited("mails", env));
   app.post("/api/account/password", limited("signIn", env));
   app.get("/api/share/:token", limited("links", env));
+  app.post([unsubscribe.path, inspectUnsubscribe.path], limited("unsubscribe", env));
   app.post([addArtwork.path, addWallPhoto.path], limited("uploads", env));
   app.post(traceArtwork.path, limited("traces", env));
   app.put(saveMockup.path, signedInOnly(env), express.json({ limit: mockupBody }), soundPieces);

@@ -5,6 +5,13 @@ import type { Context } from "../http/context.ts";
 import { Shop } from "../models/shop.ts";
 import { logEvent } from "./log-event.ts";
 
+const fieldWords: Readonly<Record<string, string>> = {
+  jobPrefix: "job numbers",
+  timeZone: "time zone",
+  buildDays: "days to build",
+  freightDays: "days on the road",
+};
+
 /** Changes the given fields of the shop. A new prefix counts for jobs opened from now on. */
 export async function changeShop(
   context: Context,
@@ -20,7 +27,7 @@ export async function changeShop(
   await logEvent(context, {
     shopId,
     kind: "shop changed",
-    data: { fields: fields.map((field) => (field === "jobPrefix" ? "job numbers" : field)) },
+    data: { fields: fields.map((field) => fieldWords[field] ?? field) },
   });
   return shop;
 }

@@ -12,6 +12,8 @@ export type MailOrder = {
   readonly data: MailData;
   /** The refused mail that this one goes in place of. */
   readonly follows?: string;
+  /** It tells what it tells, even if more happens before it leaves. */
+  readonly gathersNoMore?: boolean;
   /** How long it waits for more to tell, seconds. */
   readonly inSeconds?: number;
 };
@@ -22,7 +24,7 @@ export type MailOrder = {
  */
 export async function queueMail(
   { now, transaction }: Pick<Context, "now" | "transaction">,
-  { jobId = null, recipientId = null, follows, inSeconds = 0, ...mail }: MailOrder,
+  { jobId = null, recipientId = null, follows, gathersNoMore = false, inSeconds = 0, ...mail }: MailOrder,
 ): Promise<void> {
   const row = await OutgoingMail.create(
     {
@@ -33,6 +35,7 @@ export async function queueMail(
       state: "queued",
       createdAt: now,
       follows: follows ?? null,
+      closedAt: gathersNoMore ? now : null,
       dueAt: inSeconds > 0 ? new Date(now.getTime() + inSeconds * 1000) : null,
     },
     { transaction },

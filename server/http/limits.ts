@@ -17,6 +17,8 @@ const limits = {
   account: { minutes: 15, times: 50, by: byAccount },
   register: { minutes: 60, times: 10, by: byAddress },
   links: { minutes: 15, times: 60, by: byAddress },
+  /** Mail programs press for many readers at once. */
+  unsubscribe: { minutes: 15, times: 300, by: byAddress },
   mails: { minutes: 15, times: 15, by: byAddress },
   uploads: { minutes: 10, times: 60, by: byAddress },
   traces: { minutes: 10, times: 120, by: byAddress },

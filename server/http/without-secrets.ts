@@ -4,7 +4,7 @@
  */
 export function withoutSecrets(text: string): string {
   return text
-    .replace(/(\/(?:link|share)\/)[^/?#\s"']+/g, "$1[token]")
+    .replace(/(\/(?:link|share|unsubscribe)\/)[^/?#\s"']+/g, "$1[token]")
     .replace(/([?&](?:token|csrfToken|password|code)=)[^&#\s]*/gi, "$1[hidden]")
     .replace(/[A-Za-z0-9_-]{43,}/g, "[token]");
 }

@@ -28,13 +28,14 @@ export function openApiOf(registered: readonly Registered[]): Json {
 }
 
 function operationOf(endpoint: Endpoint, needsSession: boolean): Json {
-  const writes = endpoint.method !== "GET";
+  // What mail programs post from elsewhere stands outside /api and carries no header of ours.
+  const guarded = endpoint.method !== "GET" && endpoint.path.startsWith("/api/");
   return {
     summary: endpoint.summary,
     parameters: [
       ...parametersOf(endpoint.params, "path"),
       ...parametersOf(endpoint.query, "query"),
-      ...(writes ? [{ name: "X-Standproud", in: "header", required: true, schema: { const: "1" } }] : []),
+      ...(guarded ? [{ name: "X-Standproud", in: "header", required: true, schema: { const: "1" } }] : []),
     ],
     ...bodyOf(endpoint),
     responses: {

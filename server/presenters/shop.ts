@@ -13,7 +13,7 @@ import { teamPolicy } from "../policies/team.ts";
 /** `keepsMail`: whether mail goes to the local sink. */
 export function presentShop(
   actor: Actor,
-  { id: shopId, slug, name, unit, jobPrefix, paper, demo }: Shop,
+  { id: shopId, slug, name, unit, jobPrefix, paper, timeZone, buildDays, freightDays, demo }: Shop,
   { keepsMail }: { keepsMail: boolean },
 ): z.input<typeof shopSchema> {
   return {
@@ -22,6 +22,9 @@ export function presentShop(
     unit,
     jobPrefix,
     paper,
+    timeZone,
+    buildDays,
+    freightDays,
     demo,
     can: {
       changeShop: shopPolicy.change(actor, { shopId }),

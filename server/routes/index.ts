@@ -6,6 +6,7 @@ import { registerJobSignalRoutes } from "./job-signals.ts";
 import { registerJobRoutes } from "./jobs.ts";
 import { registerLimitRoutes } from "./limits.ts";
 import { registerLinkRoutes } from "./links.ts";
+import { registerMailChoiceRoutes } from "./mail-choices.ts";
 import { registerMockupRoutes } from "./mockups.ts";
 import { registerNamedDraftRoutes } from "./named-drafts.ts";
 import { registerNoteRoutes } from "./notes.ts";
@@ -34,6 +35,7 @@ export function registerRoutes(routes: Routes): void {
   registerTeamRoutes(routes);
   registerClientRoutes(routes);
   registerOutgoingMailRoutes(routes);
+  registerMailChoiceRoutes(routes);
   registerArtworkRoutes(routes);
   registerJobRoutes(routes);
   registerJobSignalRoutes(routes);

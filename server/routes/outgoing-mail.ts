@@ -1,11 +1,15 @@
 import { z } from "zod";
 import * as contract from "#shared/contracts/outgoing-mail.ts";
+import { sendMailAgain } from "../commands/send-mail-again.ts";
 import { notFound } from "../http/app-error.ts";
 import { type ReadContext, shopIdOf } from "../http/context.ts";
-import { type Routes, read } from "../http/route.ts";
+import { type Routes, read, write } from "../http/route.ts";
 import type { MailSink } from "../mail/sink.ts";
+import { jobPolicy } from "../policies/job.ts";
 import { shopPolicy } from "../policies/shop.ts";
-import { presentMail, presentMailRow } from "../presenters/outgoing-mail.ts";
+import { presentJobMail, presentMail, presentMailRow } from "../presenters/outgoing-mail.ts";
+import { findJob } from "../queries/find-job.ts";
+import { listJobMails } from "../queries/list-job-mails.ts";
 import { pageOf, places, readCursor } from "../queries/page.ts";
 
 export function registerOutgoingMailRoutes(routes: Routes): void {
@@ -19,6 +23,22 @@ export function registerOutgoingMailRoutes(routes: Routes): void {
     const mail = await openSink(context).find({ shopId: shopIdOf(context), id: params.mailId });
     if (!mail) throw notFound("mail");
     return presentMail(mail, { publicUrl: context.services.env.PUBLIC_URL });
+  });
+
+  read(routes, contract.listJobMails, async (context, { params, query }) => {
+    const { job, facts } = await findJob(context, params.jobId);
+    if (!jobPolicy.seeLog(context.actor, facts)) throw notFound("log");
+    return pageOf(
+      await listJobMails(context, job.id, query),
+      query.limit,
+      ({ mail, followed }) => presentJobMail(mail, { followed }),
+      ({ mail }) => [mail.createdAt.toISOString(), mail.id],
+    );
+  });
+
+  write(routes, contract.sendMailAgain, async (context, { params }) => {
+    await sendMailAgain(context, params);
+    return undefined;
   });
 }
 

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { inShop, instant, nothing, pageOf, pageQuery } from "./common.ts";
+import { inShop, instant, noContent, nothing, pageOf, pageQuery } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
 export const mailRowSchema = z.strictObject({ id: z.string(), to: z.string(), subject: z.string(), at: instant });
@@ -23,4 +23,44 @@ export const getOutgoingMail = endpoint({
   query: nothing,
   body: nothing,
   result: mailSchema,
+});
+
+const ofJob = inShop.extend({ jobId: z.uuid() });
+
+/** A mail about a job, with what became of it. */
+export const jobMailSchema = z.strictObject({
+  id: z.uuid(),
+  /** What it says, as "proof issued". */
+  kind: z.string(),
+  to: z.string(),
+  state: z.enum(["queued", "sent", "refused", "dropped"]),
+  /** What the mail server said to the last try, or why it was dropped. */
+  reason: z.string().nullable(),
+  queuedAt: instant,
+  /** A mail that gathers leaves then. */
+  dueAt: instant.nullable(),
+  sentAt: instant.nullable(),
+  can: z.strictObject({ sendAgain: z.boolean() }),
+});
+export type JobMail = z.infer<typeof jobMailSchema>;
+
+export const listJobMails = endpoint({
+  method: "GET",
+  path: "/api/shops/:shop/jobs/:jobId/mails",
+  summary: "Mail about a job with its state, newest first",
+  params: ofJob,
+  /** `only`: those refused that were not sent again. */
+  query: z.strictObject({ ...pageQuery, only: z.literal("refused").optional() }),
+  body: nothing,
+  result: pageOf(jobMailSchema),
+});
+export const sendMailAgain = endpoint({
+  method: "POST",
+  path: "/api/shops/:shop/jobs/:jobId/mails/:mailId/again",
+  summary: "Send a refused mail once more, to the address that its reader has now",
+  params: ofJob.extend({ mailId: z.uuid() }),
+  query: nothing,
+  body: nothing,
+  result: noContent,
+  status: 204,
 });

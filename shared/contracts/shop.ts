@@ -1,10 +1,14 @@
 import { z } from "zod";
+import { isTimeZone } from "../lifecycle/reminder-due.ts";
 import { role } from "./account.ts";
 import { addresses } from "./addresses.ts";
 import { email, inShop, instant, noContent, nothing, pageOf, pageQuery, shopSlug, writtenLine } from "./common.ts";
 import { endpoint } from "./endpoint.ts";
 
 export const lengthUnit = z.enum(["mm", "in"]);
+
+const howManyDays = "Write a whole number of days from 0 to 60.";
+const leadDays = z.number(howManyDays).int(howManyDays).min(0, howManyDays).max(60, howManyDays);
 
 export const shopSchema = z.strictObject({
   slug: shopSlug,
@@ -13,6 +17,10 @@ export const shopSchema = z.strictObject({
   /** As CL in CL-0142. */
   jobPrefix: z.string(),
   paper: z.enum(["A4", "A3", "Letter", "Tabloid"]),
+  /** What counts back from a due day to the day a yes is needed by. */
+  timeZone: z.string(),
+  buildDays: z.number().int(),
+  freightDays: z.number().int(),
   demo: z.boolean(),
   can: z.strictObject({
     changeShop: z.boolean(),
@@ -41,7 +49,7 @@ export const getShop = endpoint({
 export const changeShop = endpoint({
   method: "PATCH",
   path: "/api/shops/:shop",
-  summary: "Change the shop's name, unit, numbering and paper",
+  summary: "Change the shop's name, unit, numbering, paper and lead time",
   params: inShop,
   query: nothing,
   body: z.strictObject({
@@ -52,6 +60,9 @@ export const changeShop = endpoint({
       .regex(/^[A-Z]{1,4}$/, "One to four capital letters.")
       .optional(),
     paper: z.enum(["A4", "A3", "Letter", "Tabloid"]).optional(),
+    timeZone: z.string().max(60).refine(isTimeZone, "Write a zone by its name, like Europe/Vienna.").optional(),
+    buildDays: leadDays.optional(),
+    freightDays: leadDays.optional(),
   }),
   result: shopSchema,
 });

@@ -7,6 +7,7 @@ import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import * as jobSignals from "#shared/contracts/job-signals.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
 import * as limits from "#shared/contracts/limits.ts";
+import * as mailChoices from "#shared/contracts/mail-choices.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
 import * as namedDrafts from "#shared/contracts/named-drafts.ts";
 import * as notes from "#shared/contracts/notes.ts";
@@ -45,6 +46,7 @@ const modules = [
   jobSignals,
   jobs,
   limits,
+  mailChoices,
   mockups,
   namedDrafts,
   notes,

@@ -6,6 +6,7 @@ import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import * as jobSignals from "#shared/contracts/job-signals.ts";
 import * as jobs from "#shared/contracts/jobs.ts";
 import * as limits from "#shared/contracts/limits.ts";
+import * as mailChoices from "#shared/contracts/mail-choices.ts";
 import * as mockups from "#shared/contracts/mockups.ts";
 import * as namedDrafts from "#shared/contracts/named-drafts.ts";
 import * as notes from "#shared/contracts/notes.ts";
@@ -105,6 +106,12 @@ export const policyTable: readonly PolicyRow[] = [
   row(account.listSessions, signedIn),
   row(account.endSession, "- - - - - - - - o", (world) => ({ params: { sessionId: world.someoneElsesSessionId } })),
 
+  row(mailChoices.listMailChoices, signedIn),
+  row(mailChoices.changeMailChoices, insiders, (world) => ({ ...inShop(world), body: { reminders: true } })),
+  // Whoever holds the token of a mail stops that reader's mails, and can do nothing else with it.
+  row(mailChoices.inspectUnsubscribe, anyone, (world) => ({ body: { token: world.unsubscribeToken } })),
+  row(mailChoices.unsubscribe, anyone, (world) => ({ params: { token: world.unsubscribeToken } })),
+
   row(shop.getShop, insiders, inShop),
   row(shop.changeShop, "y n n n n n - - o", (world) => ({ ...inShop(world), body: { paper: "A4" } })),
   row(shop.listMembers, owners, inShop),
@@ -157,6 +164,11 @@ export const policyTable: readonly PolicyRow[] = [
 
   row(outgoingMail.listOutgoingMail, owners, inShop),
   row(outgoingMail.getOutgoingMail, owners, (world) => ({ params: { ...world.params, mailId: world.mailId } })),
+
+  row(outgoingMail.listJobMails, staff, job),
+  row(outgoingMail.sendMailAgain, staff, (world) => ({
+    params: { ...world.params, jobId: world.jobId, mailId: world.refusedMailIds.pop() },
+  })),
 
   row(jobs.listJobs, insiders, inShop),
   row(jobs.getJob, readers, job),

@@ -1,5 +1,7 @@
+import { issueUnsubscribeToken } from "#server/auth/unsubscribe-tokens.ts";
 import { newId } from "#server/db/new-id.ts";
 import { Artwork } from "#server/models/artwork.ts";
+import { OutgoingMail } from "#server/models/outgoing-mail.ts";
 import { Session } from "#server/models/session.ts";
 import { changeJob, openJob, setConsent } from "#shared/contracts/jobs.ts";
 import { saveMockup } from "#shared/contracts/mockups.ts";
@@ -96,6 +98,14 @@ export async function buildPolicyWorld(app: TestApp) {
   await signInAs(app, someone);
   const someonesSession = await Session.findOne({ where: { personId: someone.id }, rejectOnEmpty: true });
 
+  const unsubscribeToken = await app.services.sequelize.transaction((transaction) =>
+    issueUnsubscribeToken(
+      app.services.env,
+      { personId: someone.id, shopId: owner.shop.id },
+      { now: new Date(), transaction },
+    ),
+  );
+
   const otherShop = await buildMember();
   const askers: Readonly<Record<ActorName, Visitor>> = {
     owner: visitors.owner,
@@ -156,6 +166,8 @@ export async function buildPolicyWorld(app: TestApp) {
     screwId: await stockItemOf("screw"),
     someoneElsesSessionId: someonesSession.id,
     liveShareToken: tokenOf(live.url),
+    unsubscribeToken,
+    refusedMailIds: await eachTime(() => refusedMail(world)),
     spareShareLinkId: spare.link.id,
     document,
     next: unique,
@@ -185,6 +197,14 @@ async function eachTime(make: () => Promise<string>): Promise<string[]> {
   const ids: string[] = [];
   for (const _ of actors) ids.push(await make());
   return ids;
+}
+
+/** A proof mail that the mail server refused. */
+async function refusedMail({ job, owner, approver }: World): Promise<string> {
+  const row = { shopId: owner.shop.id, jobId: job.id, kind: "proof issued" as const, recipientId: approver.person.id };
+  const data = { contactId: approver.contact.id };
+  const refused = { ...row, address: approver.email, data, state: "refused" as const, createdAt: new Date() };
+  return (await OutgoingMail.create({ id: newId(), ...refused })).id;
 }
 
 async function copyOfArtwork(artworkId: string): Promise<string> {

@@ -5,6 +5,7 @@ const token = "A1b2-_C3d4E5f6G7h8I9j0K1l2M3n4O5p6Q7r8S9t0U";
 
 it.each([
   { text: `/link/${token}`, shown: "/link/[token]" },
+  { text: "/unsubscribe/broken-off", shown: "/unsubscribe/[token]" },
   { text: "/link/broken-off", shown: "/link/[token]" },
   { text: `/api/share/${token}?from=mail`, shown: "/api/share/[token]?from=mail" },
   {

@@ -13,7 +13,18 @@ const all = {
   sharePortfolio: true,
   seeOutgoingMail: true,
 };
-const shop = { slug: "s", name: "S", unit: "mm", jobPrefix: "S", paper: "A4", demo: false, can: all } as const;
+const shop = {
+  slug: "s",
+  name: "S",
+  unit: "mm",
+  jobPrefix: "S",
+  paper: "A4",
+  timeZone: "UTC",
+  buildDays: 5,
+  freightDays: 2,
+  demo: false,
+  can: all,
+} as const;
 const labels = (reader: Parameters<typeof placesOf>[0]) => placesOf(reader).map(({ label }) => label);
 
 describe("placesOf", () => {

@@ -21,6 +21,9 @@ const shop: Shop = {
   unit: "mm",
   jobPrefix: "CL",
   paper: "A4",
+  timeZone: "UTC",
+  buildDays: 5,
+  freightDays: 2,
   demo: true,
   can: no,
 };
