@@ -6,6 +6,8 @@ export const paths = {
   forgotPassword: () => "/forgot-password",
   /** Where mailed links lead: sign in, join a shop, new password. A page with a button, since scanners open links too. */
   link: (token: string) => `/link/${token}`,
+  /** Where the foot of a mail leads to stop mails like it. */
+  unsubscribe: (token: string) => `/unsubscribe/${token}`,
   account: () => "/account",
   share: (token: string) => `/share/${token}`,
   bench: (shop: string) => `/shop/${shop}/bench`,

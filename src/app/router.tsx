@@ -48,6 +48,10 @@ export const router = createBrowserRouter([
             lazy: page(() => import("./pages/forgot-password-page.tsx"), "ForgotPasswordPage"),
           },
           { path: paths.link(":token"), lazy: page(() => import("./pages/link-page.tsx"), "LinkPage") },
+          {
+            path: paths.unsubscribe(":token"),
+            lazy: page(() => import("./pages/unsubscribe-page.tsx"), "UnsubscribePage"),
+          },
           { path: paths.account(), lazy: page(() => import("./pages/account-page.tsx"), "AccountPage") },
           { path: "*", element: <NotFoundScreen /> },
         ],

@@ -63,6 +63,13 @@ export const screens: readonly Screen[] = [
     path: () => paths.link("x".repeat(43)),
     ready: heading(/is not known/),
   },
+  {
+    who: "nobody",
+    name: "unsubscribe-unknown",
+    at: "unsubscribe",
+    path: () => paths.unsubscribe("x".repeat(43)),
+    ready: heading(/is not known/),
+  },
   { who: "nobody", name: "link-join", at: "link", path: () => linkOf("join"), ready: heading(/^Join/) },
   { who: "nobody", name: "share", at: "share", path: () => linkOf("share"), ready: picture(/./) },
   { who: "nobody", name: "share-closed", at: "share", path: () => linkOf("closed"), ready: heading(/no longer open/) },

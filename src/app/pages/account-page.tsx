@@ -7,6 +7,7 @@ import { TextLink } from "@/components/ui/text-link.tsx";
 import { NameForm } from "@/features/account/components/name-form.tsx";
 import { PasswordForm } from "@/features/account/components/password-form.tsx";
 import { SessionList } from "@/features/account/components/session-list.tsx";
+import { MailChoiceList } from "@/features/mail-choices/components/mail-choice-list.tsx";
 import { meQuery } from "@/lib/me.ts";
 import { usePageTitle } from "@/lib/page-title.ts";
 import { paths, signInTo } from "../paths.ts";
@@ -49,6 +50,10 @@ export function AccountPage() {
             <TextLink to={paths.forgotPassword()}>Set one all the same</TextLink>
           </p>
         )}
+      </section>
+      <section>
+        <h2 className={headingClass}>Mail</h2>
+        <MailChoiceList />
       </section>
       <section>
         <h2 className={headingClass}>Where you are signed in</h2>

@@ -3,6 +3,8 @@ import { useNavigate, useParams, useSearchParams } from "react-router-dom";
 import { Skeleton } from "@/components/ui/skeleton.tsx";
 import { TextLink } from "@/components/ui/text-link.tsx";
 import { ArtworkPart } from "@/features/artwork/components/artwork-part.tsx";
+import { JobMailList } from "@/features/job-mails/components/job-mail-list.tsx";
+import { RefusedMails } from "@/features/job-mails/components/refused-mails.tsx";
 import { jobQuery } from "@/features/jobs/api/queries.ts";
 import { AnotherLike } from "@/features/jobs/components/another-like.tsx";
 import { BriefPart } from "@/features/jobs/components/brief-part.tsx";
@@ -63,6 +65,7 @@ export function JobPage() {
       }
     >
       <div className="space-y-9">
+        {staff && <RefusedMails shop={slug} jobId={jobId} />}
         <NextStep job={job} shop={slug} side={side} />
         <div className="grid gap-10 lg:grid-cols-[minmax(0,1.9fr)_minmax(0,1fr)] lg:gap-14">
           <div className="min-w-0 space-y-10">
@@ -97,6 +100,7 @@ export function JobPage() {
               />
             )}
             <ConsentPart shop={slug} shopName={shop.name} job={job} side={side} />
+            {staff && <JobMailList shop={slug} jobId={jobId} />}
             {staff && <EventLog shop={slug} jobId={jobId} />}
           </div>
         </div>

@@ -8,16 +8,28 @@ import { Select } from "@/components/ui/select.tsx";
 import { useSend } from "@/lib/use-send.ts";
 import { useChangeShop } from "../api/mutations.ts";
 
+const fields = ["name", "unit", "jobPrefix", "paper", "buildDays", "freightDays", "timeZone"] as const;
+
+/** Every zone that the browser knows, and the one the shop has. */
+const zonesWith = (own: string): string[] =>
+  [...new Set(["UTC", own, ...Intl.supportedValuesOf("timeZone")])].sort((a, b) => a.localeCompare(b));
+
 /** What stands on every sheet of the shop, and how it counts and measures. */
 export function ShopForm({ shop }: { readonly shop: Shop }) {
   const change = useChangeShop(shop.slug);
   const form = useForm({
     resolver: zodResolver(changeShop.body),
-    values: { name: shop.name, unit: shop.unit, jobPrefix: shop.jobPrefix, paper: shop.paper },
+    values: {
+      name: shop.name,
+      unit: shop.unit,
+      jobPrefix: shop.jobPrefix,
+      paper: shop.paper,
+      buildDays: shop.buildDays,
+      freightDays: shop.freightDays,
+      timeZone: shop.timeZone,
+    },
   });
-  const { problem, busy, handleSubmit } = useSend(form, ["name", "unit", "jobPrefix", "paper"], (values) =>
-    change.mutateAsync(values),
-  );
+  const { problem, busy, handleSubmit } = useSend(form, fields, (values) => change.mutateAsync(values));
   const { errors, isDirty } = form.formState;
   const prefix = form.watch("jobPrefix") || shop.jobPrefix;
   return (
@@ -51,6 +63,32 @@ export function ShopForm({ shop }: { readonly shop: Shop }) {
         {changeShop.body.shape.paper.unwrap().options.map((size) => (
           <option key={size} value={size}>
             {size}
+          </option>
+        ))}
+      </Select>
+      <Field
+        label="Working days from the yes to a finished sign"
+        hint="Without what dries: that is counted from its finish and bonds."
+        inputMode="numeric"
+        error={errors.buildDays?.message}
+        {...form.register("buildDays", { valueAsNumber: true })}
+      />
+      <Field
+        label="Days on the road to the client"
+        hint="With the due day they tell by when a yes is needed. The client is reminded two days before it."
+        inputMode="numeric"
+        error={errors.freightDays?.message}
+        {...form.register("freightDays", { valueAsNumber: true })}
+      />
+      <Select
+        label="Time zone"
+        hint="Reminders leave at nine in the morning there."
+        error={errors.timeZone?.message}
+        {...form.register("timeZone")}
+      >
+        {zonesWith(shop.timeZone).map((zone) => (
+          <option key={zone} value={zone}>
+            {zone}
           </option>
         ))}
       </Select>
