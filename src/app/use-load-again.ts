@@ -30,9 +30,11 @@ const loadAgain = () => window.location.reload();
  * server's place. Says whether that is under way. What is being typed is kept over it.
  */
 export function useLoadAgain(error: unknown, reload: () => void = loadAgain): boolean {
-  const [isUnderWay, setUnderWay] = useState(() => isMissingPart(error) && takeTurn());
+  const [isUnderWay, setUnderWay] = useState(() => isMissingPart(error));
   useEffect(() => {
     if (!isUnderWay) return;
+    // Not while drawing: after an error the screen is drawn twice, and the turn is taken once.
+    if (!takeTurn()) return setUnderWay(false);
     void isServerThere().then((isThere) => {
       if (isThere) reload();
       else setUnderWay(false);

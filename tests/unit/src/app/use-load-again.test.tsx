@@ -1,4 +1,6 @@
 // @vitest-environment jsdom
+import { lazy, Suspense } from "react";
+import { createMemoryRouter, RouterProvider, useRouteError } from "react-router-dom";
 import { afterEach, beforeAll, beforeEach, expect, it, vi } from "vitest";
 import { useLoadAgain } from "@/app/use-load-again.ts";
 import { listenForMissingParts } from "@/lib/missing-part.ts";
@@ -11,6 +13,10 @@ let status = 200;
 
 function Screen({ error }: { readonly error: unknown }) {
   return <p>{useLoadAgain(error, reload) ? "loading again" : "broke"}</p>;
+}
+
+function Broken() {
+  return <Screen error={useRouteError()} />;
 }
 
 /** A part of the application that could not be fetched, as the bundler's loader tells it. */
@@ -29,7 +35,10 @@ beforeEach(async () => {
   window.sessionStorage.clear();
   server = await startAnswers(() => ({ status, json: {} }));
 });
-afterEach(() => server.end());
+afterEach(() => {
+  server.end();
+  vi.restoreAllMocks();
+});
 
 it("loads a page anew that a newer version has taken the parts of, and once only", async () => {
   await render(<Screen error={missingPart()} />);
@@ -38,6 +47,21 @@ it("loads a page anew that a newer version has taken the parts of, and once only
   await render(<Screen error={missingPart()} />);
   await says("broke");
   expect(reload).toHaveBeenCalledTimes(1);
+});
+
+it("does so when the part was missed in the middle of a page, whose screen is drawn more than once", async () => {
+  const error = missingPart();
+  const Dialog = lazy(() => Promise.reject(error));
+  const page = (
+    <Suspense>
+      <Dialog />
+    </Suspense>
+  );
+  vi.spyOn(console, "error").mockImplementation(() => undefined);
+  await render(
+    <RouterProvider router={createMemoryRouter([{ path: "/", element: page, errorElement: <Broken /> }])} />,
+  );
+  await until(() => reload.mock.calls.length === 1);
 });
 
 it("stays where the server is away: what is shown is better than the browser’s own page", async () => {
