@@ -7,6 +7,7 @@ import { useRoom } from "@/lib/use-room.ts";
 import { paperScaleAt } from "../canvas/view-of-board.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import type { Drag } from "../model/drag.ts";
+import { sectionHint } from "../model/section-hint.ts";
 import { depthScaleFor } from "../model/section-scale.ts";
 import { chooseHole, chooseLayer } from "../model/selection.ts";
 import { SectionHandle } from "./section-handle.tsx";
@@ -93,7 +94,7 @@ export function SectionPanel({ view, drag, onDrag }: SectionPanelProps) {
       </div>
       <div className="pointer-events-none absolute inset-x-0 top-0 flex items-baseline justify-between gap-2 bg-sheet/90 px-2.5 pt-1.5">
         <h2 className="font-serif text-base font-bold text-ink">Section</h2>
-        <p className="text-fine text-graphite">drag a layer to raise it</p>
+        <p className="text-fine text-graphite">{sectionHint(document.layers)}</p>
       </div>
       <p className="pointer-events-none absolute inset-x-0 bottom-0 bg-sheet/90 px-2.5 pb-1 text-fine text-graphite">
         Depths {depthScale.toFixed(1)} times as large as heights
