@@ -4,11 +4,12 @@ import { signBox } from "../stack/sign-box.ts";
 import { formatLengthWithUnit, formatSize } from "../units/format-length.ts";
 import type { LengthUnit } from "../units/length.ts";
 import type { MockupDocument } from "./document.ts";
+import { finishWords } from "./finish-words.ts";
 
 /** What an approver confirms, one tick each. */
 export type Acknowledgement = { readonly id: string; readonly text: string };
 
-/** Reads the drawing back to the approver: every line of the words, size, colours, hardware and what a yes means. */
+/** Reads the drawing back to the approver: every line of the words, size, colours, finish, hardware and what a yes means. */
 export function acknowledgementsOf({
   document,
   figures,
@@ -40,6 +41,13 @@ export function acknowledgementsOf({
       text: `The colours are ${colours.join(", ")} on ${face}${framed}. A screen shows them only nearly.`,
     });
   }
+  asked.push({
+    id: "finish",
+    text:
+      backer.finish.length === 0
+        ? "The wood stays bare: no finish is put on it."
+        : `The wood is finished in this order: ${finishWords(backer.finish)}.`,
+  });
   const hardware = layers.flatMap(({ hold }) =>
     hold.kind === "standoff" && hold.holes.length > 0 ? [`${hold.holes.length} × ${hold.hardware.name}`] : [],
   );

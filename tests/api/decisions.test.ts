@@ -82,6 +82,7 @@ describe("approving", () => {
       "The words read exactly, letter by letter: “open daily”.",
       "The size is 600 × 400 mm and it stands 21 mm off the wall.",
       expect.stringMatching(/^The colours are Midnight on /),
+      expect.stringMatching(/^The wood /),
       "Once it is cut and bonded a sign can't be changed. A later change is a new revision and may cost more.",
     ]);
     expect((await own.visitors.approver.refusal(getCertificate, { params: at(own, revisionId) })).code).toBe(
@@ -156,6 +157,7 @@ describe("approving", () => {
         detail: "Confirm this first: The words read exactly, letter by letter: “open daily”.",
       },
       { pointer: "/acknowledgedIds", detail: expect.stringContaining("The colours are Midnight on") },
+      { pointer: "/acknowledgedIds", detail: expect.stringContaining("The wood ") },
     ]);
     const all = await approvalOf(own, revisionId);
     const more = await refused(own, revisionId, { acknowledgedIds: [...all.acknowledgedIds, "hardware"] });

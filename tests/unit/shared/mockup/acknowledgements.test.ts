@@ -38,3 +38,20 @@ describe("the wood that an approver confirms", () => {
     expect(asked.find(({ id }) => id === "colours")?.text).toContain(wood);
   });
 });
+
+describe("the finish that an approver confirms", () => {
+  const oil = { kind: "other", name: "Hard oil", dryingHours: 12 } as const;
+  it.each([
+    { name: "bare wood", finish: [], text: "The wood stays bare: no finish is put on it." },
+    {
+      name: "sanded wood with two coats",
+      finish: [{ kind: "sanding", grit: 180 } as const, oil, oil],
+      text: "The wood is finished in this order: sanded to 180, Hard oil, 2 coats.",
+    },
+  ])("of $name is read back coat by coat", ({ finish, text }) => {
+    const sign = slatSign();
+    const document = { ...sign, backer: { ...sign.backer, finish } };
+    const asked = acknowledgementsOf({ document, figures: computeFigures(document, kernel), words: "", unit: "mm" });
+    expect(asked.find(({ id }) => id === "finish")?.text).toBe(text);
+  });
+});
