@@ -41,7 +41,7 @@ export function job(page: Page) {
     async setTrueSize(name: string, { side, length }: { side: "Width" | "Height"; length: string }) {
       const item = artwork(name);
       await item.getByRole("button", { name: "Set the true size" }).click();
-      await item.getByLabel("Known side").selectOption(side);
+      await item.getByLabel("Known side").selectOption({ label: `${side} of the page` });
       await item.getByLabel("True length").fill(length);
       await item.getByRole("button", { name: "Set the true size" }).click();
       await item.getByLabel("True length").waitFor({ state: "detached" });

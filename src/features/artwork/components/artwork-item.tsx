@@ -51,7 +51,8 @@ export function ArtworkItem({
       {state === "ready" && widthMm !== null && heightMm !== null && (
         <>
           <p className="mt-1 text-base tabular-nums">
-            {formatSize(widthMm, heightMm, unit)}, {counted(pieces, "piece")} in {counted(colours.length, "colour")}
+            Page {formatSize(widthMm, heightMm, unit)}, {counted(pieces, "piece")} in{" "}
+            {counted(colours.length, "colour")}
           </p>
           <ul className="mt-2 flex flex-wrap gap-x-4 gap-y-1.5">
             {colours.map(({ colour, pieces: count }) => (

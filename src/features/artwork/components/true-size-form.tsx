@@ -43,14 +43,14 @@ export function TrueSizeForm({
       <div className="flex flex-wrap items-start gap-3">
         <Select
           label="Known side"
-          className="w-36"
+          className="w-52"
           {...form.register("side", {
             onChange: (event: { target: { value: string } }) =>
               form.setValue("lengthMm", event.target.value === "width" ? widthMm : heightMm),
           })}
         >
-          <option value="width">Width</option>
-          <option value="height">Height</option>
+          <option value="width">Width of the page</option>
+          <option value="height">Height of the page</option>
         </Select>
         <Controller
           control={form.control}
@@ -68,7 +68,11 @@ export function TrueSizeForm({
         />
       </div>
       {Number.isFinite(factor) && factor > 0 && (
-        <p className="text-sm text-graphite">Becomes {formatSize(widthMm * factor, heightMm * factor, unit)}.</p>
+        <p className="text-sm text-graphite">
+          The page becomes {formatSize(widthMm * factor, heightMm * factor, unit)}, with what is empty round the
+          drawing. To go by the drawing itself or by one of its pieces, set the size where it is brought into the
+          mockup.
+        </p>
       )}
       <div className="flex gap-2">
         <Button type="submit" size="small" busy={busy}>

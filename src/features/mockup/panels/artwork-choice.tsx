@@ -174,5 +174,5 @@ const toBringIn = ({
 
 function nameOf({ name, state, widthMm, heightMm }: Artwork, unit: LengthUnit): string {
   if (state === "refused") return `${name}, not taken`;
-  return widthMm === null || heightMm === null ? name : `${name}, ${formatSize(widthMm, heightMm, unit)}`;
+  return widthMm === null || heightMm === null ? name : `${name}, page ${formatSize(widthMm, heightMm, unit)}`;
 }
