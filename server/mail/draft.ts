@@ -26,6 +26,7 @@ export const notSent = {
   gone: { notSent: "There is nobody any more whom it could go to under this address." },
   withdrawn: { notSent: "The revision it was about was withdrawn." },
   missing: { notSent: "What it was about is not there any more." },
+  seen: { notSent: "Its reader has seen all of it on the sheet." },
   nothing: { notSent: "There was nothing left to tell." },
   decided: { notSent: "Nobody waits for the client's yes any more." },
   stopped: { notSent: "Its reader has stopped these mails." },

@@ -83,8 +83,13 @@ function senderOf(text: string): { name: string; address: string } {
  */
 function failureOf(error: unknown): MailRefused | MailDelayed {
   if (!(error instanceof Error)) return new MailDelayed(withoutSecrets(String(error)));
-  const { responseCode, code } = error as Error & { responseCode?: number; code?: string };
-  const words = withoutSecrets(headerLine(error.message, 400));
+  const { responseCode, code, response } = error as Error & {
+    responseCode?: number;
+    code?: string;
+    response?: unknown;
+  };
+  // What the server said, where it said something; the mailer's own words are about its side of the talk.
+  const words = withoutSecrets(headerLine(typeof response === "string" ? response : error.message, 400));
   const isFinal = responseCode !== undefined && responseCode >= 500 && code !== "EAUTH";
   return isFinal || (code === "EENVELOPE" && responseCode === undefined)
     ? new MailRefused(words)

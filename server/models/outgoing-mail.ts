@@ -41,6 +41,8 @@ export type MailData = {
   personId?: string;
   revisionId?: string;
   news?: readonly NoteNews[];
+  /** How many of the news its reader has seen on the sheet already. */
+  seen?: number;
 };
 
 export class OutgoingMail extends Model<InferAttributes<OutgoingMail>, InferCreationAttributes<OutgoingMail>> {

@@ -7,6 +7,7 @@ import { approveRevision } from "../commands/approve-revision.ts";
 import { askForRevision } from "../commands/ask-for-revision.ts";
 import { issueRevision } from "../commands/issue-revision.ts";
 import { noteOpening } from "../commands/note-opening.ts";
+import { seeNews } from "../commands/see-news.ts";
 import { withdrawRevision } from "../commands/withdraw-revision.ts";
 import { notFound } from "../http/app-error.ts";
 import type { ReadContext } from "../http/context.ts";
@@ -52,6 +53,7 @@ export function registerRevisionRoutes(routes: Routes): void {
   write(routes, contract.getSheet, async (context, { params }) => {
     const found = await findRevision(context, params.revisionId, { withSnapshot: true });
     await noteOpening(context, found);
+    await seeNews(context, found);
     const { loaded, revision } = found;
     return presentSheet(context.actor, {
       loaded,

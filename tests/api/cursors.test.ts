@@ -5,7 +5,7 @@ import { listClients } from "#shared/contracts/clients.ts";
 import type { Endpoint } from "#shared/contracts/endpoint.ts";
 import { listEvents, listJobs } from "#shared/contracts/jobs.ts";
 import { listNotes } from "#shared/contracts/notes.ts";
-import { listOutgoingMail } from "#shared/contracts/outgoing-mail.ts";
+import { listJobMails, listOutgoingMail } from "#shared/contracts/outgoing-mail.ts";
 import { listPortfolioPieces, listShareLinks } from "#shared/contracts/portfolio.ts";
 import { listRevisions } from "#shared/contracts/revisions.ts";
 import { listInvitations, listMembers } from "#shared/contracts/shop.ts";
@@ -40,6 +40,7 @@ const lists: { list: string; endpoint: Endpoint; query?: Record<string, string> 
   { list: "members", endpoint: listMembers },
   { list: "invitations", endpoint: listInvitations },
   { list: "outgoing mail", endpoint: listOutgoingMail },
+  { list: "mail of a job", endpoint: listJobMails },
 ];
 
 const someId = "6a0f3c52-6a0e-4c11-9d37-0f2a54f1f001";

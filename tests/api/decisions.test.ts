@@ -408,7 +408,10 @@ describe("asking for a revision", () => {
       acknowledgements: null,
     });
     expect(await lastLogLine(own.job.id)).toMatch(/: Asked for a revision of A: Make the heron\nlarger$/);
-    expect((await app.queuedJobs()).map(({ task }) => task)).toEqual(["send-mail", "send-mail", "send-mail"]);
+    const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "revision asked" } });
+    expect(mails.map(({ state }) => state)).toEqual(["queued", "queued", "queued"]);
+    const queued = (await app.queuedJobs()).map(({ payload }) => payload.mailId);
+    for (const { id } of mails) expect(queued).toContain(id);
     expect(await owner.get(getJob, { params: of(own) })).toMatchObject({
       state: "revision asked",
       whoseMove: "ours",

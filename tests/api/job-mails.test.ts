@@ -77,7 +77,7 @@ describe("the mails about a job", () => {
     const mail = await refusedProof();
     const [first] = (await list("refused")).items;
     expect(first).toMatchObject({ id: mail.id, state: "refused", can: { sendAgain: true } });
-    expect(first?.reason).toContain("No such mailbox here");
+    expect(first?.reason).toBe("550 No such mailbox here");
     expect((await logOf())[0]).toMatch(/^Mail to .+ was refused \(proof issued\): .*No such mailbox here/);
     expect((await world.visitors.approver.refusal(listJobMails, { params: of() })).code).toBe("not_found");
     // Whoever has the job's page open is told to look again, but no client.

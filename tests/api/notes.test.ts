@@ -82,6 +82,7 @@ describe("a note", () => {
     expect(await lastLogLine(own.job.id)).toMatch(/: Left note 3 on revision A$/);
 
     // The sheet says which millimetres of the board lie in which zone; the note says the same.
+    await sendGathered(app);
     const { zones } = await own.visitors.approver.get(getSheet, { params: at(own, revisionId) });
     const label = (fields: typeof zones.rows, mm: number) =>
       fields.find(({ fromMm, toMm }) => mm >= fromMm && mm < toMm)?.label;
@@ -90,7 +91,6 @@ describe("a note", () => {
     expect(first.zone).toMatch(/^[A-D][1-6]$/);
     expect(first.zone).not.toBe(second.zone);
 
-    await sendGathered(app);
     const mails = await OutgoingMail.findAll({ where: { jobId: own.job.id, kind: "notes gathered" } });
     const sentTo = (noteId: string) =>
       mails

@@ -1,8 +1,11 @@
 import type { Page } from "playwright-core";
 import { expect } from "vitest";
+import { issueUnsubscribeToken } from "#server/auth/unsubscribe-tokens.ts";
 import { Client } from "#server/models/client.ts";
 import { Job } from "#server/models/job.ts";
+import { Person } from "#server/models/person.ts";
 import { Revision } from "#server/models/revision.ts";
+import { Shop } from "#server/models/shop.ts";
 import { demoAccounts, demoPassword } from "#server/start/demo-accounts.mjs";
 import { listShareLinks, makeShareLink, revokeShareLink } from "#shared/contracts/portfolio.ts";
 import { paths } from "@/app/paths.ts";
@@ -84,6 +87,16 @@ export async function setScreenStage(): Promise<ScreenStage> {
     state.links.set("join", await app.linkMailedTo("heath@alderawl.example", /^Join/));
     state.links.set("open", await askForLink(page, "treasurer@saltgrass.example"));
   });
+  const reader = await Person.findOne({ where: { email: "client@orrery.example" }, rejectOnEmpty: true });
+  const demoShop = await Shop.findOne({ where: { slug: shop }, rejectOnEmpty: true });
+  const token = await app.services.sequelize.transaction((transaction) =>
+    issueUnsubscribeToken(
+      app.services.env,
+      { personId: reader.id, shopId: demoShop.id },
+      { now: new Date(), transaction },
+    ),
+  );
+  state.links.set("unsubscribe", paths.unsubscribe(token));
   const rep = app.visitor();
   await rep.signIn("password", { email: "rep@copperlark.example", password: demoPassword });
   const body = { label: "The next client", jobIds: [jobOf("135")], days: 30 };

@@ -65,6 +65,13 @@ export const screens: readonly Screen[] = [
   },
   {
     who: "nobody",
+    name: "unsubscribe",
+    at: "unsubscribe",
+    path: () => linkOf("unsubscribe"),
+    ready: heading(/^Stop mails from/),
+  },
+  {
+    who: "nobody",
     name: "unsubscribe-unknown",
     at: "unsubscribe",
     path: () => paths.unsubscribe("x".repeat(43)),

@@ -32,7 +32,9 @@ export async function notesGathered(mail: OutgoingMail, transaction: Transaction
     transaction,
   });
   const seen = revisions.filter(({ state }) => visibleToClient(state));
-  const news = data.news.filter(({ revisionId }) => seen.some(({ id }) => id === revisionId));
+  const unseen = data.news.slice(data.seen ?? 0);
+  if (unseen.length === 0) return notSent.seen;
+  const news = unseen.filter(({ revisionId }) => seen.some(({ id }) => id === revisionId));
   if (news.length === 0) return notSent.withdrawn;
   const told = await tellNotes(news, { job, isForClient, transaction });
   if (told.length === 0) return notSent.nothing;

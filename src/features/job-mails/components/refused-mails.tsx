@@ -18,7 +18,8 @@ export function RefusedMails({ shop, jobId }: { readonly shop: string; readonly 
         <li key={mail.id}>
           <Notice tone="error" title={`${mailName(mail)} to ${mail.to} was refused`}>
             <p className="[overflow-wrap:anywhere]">
-              The mail server said: {mail.reason}. Put the address right with the client's contacts, then send it again.
+              The mail server said: “{mail.reason}”. If the address is wrong, put it right first; it then goes to the
+              new one.
             </p>
             {again.isError && again.variables === mail.id && <p className="mt-2">{messageOf(again.error)}</p>}
             <Button
