@@ -6,7 +6,7 @@ import { NumberField } from "@/components/ui/number-field.tsx";
 import { Select } from "@/components/ui/select.tsx";
 import { cx } from "@/lib/cx.ts";
 import { useDesk } from "../editor/desk-context.ts";
-import { hangAt, markCorner, setSheet } from "../model/commands/set-wall.ts";
+import { hangAt, isUnmarked, markCorner, setSheet } from "../model/commands/set-wall.ts";
 import { depthWords, errorWords, placeOnWallWords, residualWords } from "../model/wall-words.ts";
 import { cornerNames } from "./corner-mark.tsx";
 import type { WallStep } from "./wall-form.tsx";
@@ -97,7 +97,12 @@ export function WallFigures({ photo, step }: { readonly photo: WallPhoto; readon
           />
         </div>
       )}
-      {reading.ok && (
+      {isUnmarked(photo) && (
+        <p className="border-t border-rule pt-3 text-sm text-ink">
+          Put the four marks on the corners of the taped sheet first: what is read from them is said here then.
+        </p>
+      )}
+      {reading.ok && !isUnmarked(photo) && (
         <div className="space-y-2 border-t border-rule pt-3 text-sm text-ink">
           <p>{placeOnWallWords(document, photo, unit)}</p>
           <p>{errorWords(document, photo, reading.value, unit)}</p>

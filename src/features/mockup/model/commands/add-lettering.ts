@@ -8,6 +8,7 @@ import { exactCoordinateOf, exactScaleOf, mostLayers, mostLettering, mostPieces,
 import type { Site } from "../propose-holes.ts";
 import { changeLayer } from "./change-layer.ts";
 import { type NewLayer, newLayer } from "./new-layer.ts";
+import { boxOfPieces } from "./pieces.ts";
 
 /** The layer that letters go into: a new one nearest the viewer, or one that is there. */
 export type LetteringLayer =
@@ -23,7 +24,7 @@ export type SetWords = {
 };
 
 /**
- * Adds words letter by letter, their box in the middle of the board. Ids of pieces are made from `id`. The same document when
+ * Adds words letter by letter, their box in the middle of the board, or under the words that are there where there is room. Ids of pieces are made from `id`. The same document when
  * there are no letters, when the layer is locked or is not there, and when it has as many as it takes.
  */
 export function addLettering(
@@ -35,7 +36,7 @@ export function addLettering(
     return document;
   const movement: Placement = {
     x: document.board.width / 2 - box.x - box.width / 2,
-    y: document.board.height / 2 - box.y - box.height / 2,
+    y: topOfNext(document, set) - box.y,
     turn: 0,
     scale: 1,
     mirrored: false,
@@ -46,6 +47,21 @@ export function addLettering(
   if (pieces.length === 0 || !pieces.every((piece) => piece !== null)) return document;
   const added = withPieces(document, { pieces, id, into });
   return added === document ? document : { ...added, lettering: [...document.lettering, lettering] };
+}
+
+/** Of lines one under the other, as a share of the capitals' height: what is left between them (our choice). */
+const gapShare = 0.75;
+
+/** Where the upper edge of new words comes to, mm: under the lowest of those that are there, else in the middle. */
+function topOfNext(document: MockupDocument, { lettering, box }: SetWords): number {
+  const middle = document.board.height / 2 - box.height / 2;
+  const words = document.layers.flatMap(({ pieces }) =>
+    pieces.filter(({ source }) => source.kind === "lettering").map((piece) => piece.id),
+  );
+  const there = boxOfPieces(document, words);
+  if (!there) return middle;
+  const under = there.y + there.height + gapShare * lettering.capHeight;
+  return under + box.height <= document.board.height ? under : middle;
 }
 
 function withPieces(

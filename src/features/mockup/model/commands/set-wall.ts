@@ -47,6 +47,10 @@ function firstMarks({ widthPx, heightPx }: ChosenPhoto): Quad {
   );
 }
 
+/** Whether the marks lie as they first came, on no sheet yet: what is read from them means nothing. */
+export const isUnmarked = ({ corners, ...photo }: WallPhoto): boolean =>
+  firstMarks(photo).every(({ x, y }, corner) => corners[corner]?.x === x && corners[corner]?.y === y);
+
 /** Says which sheet is taped and how it lies. */
 export function setSheet(document: MockupDocument, sheet: Partial<Pick<WallPhoto, "paper" | "lies">>): MockupDocument {
   return withPhoto(document, (photo) => withFields<WallPhoto>(photo, sheet));

@@ -101,6 +101,29 @@ describe("adding lettering", () => {
     expect(isSound(document)).toBe(true);
   });
 
+  it("puts more words under those that are there, and in the middle when there is no room under them", () => {
+    const { letters, box } = lay(plain);
+    if (!box) throw new Error("No letters.");
+    const into = { kind: "existing" as const, key: "B" };
+    let document = added();
+    const words = (id: string) => ({ lettering: { ...letteringOf(plain), id }, letters, box });
+    const boxes = ["v", "u", "t", "s", "r"].map((id) => {
+      document = addLettering(document, { set: words(id), id, into });
+      return boxOfPieces(
+        document,
+        idsOf(document).filter((one) => one.startsWith(`${id}-`)),
+      );
+    });
+    const first = boxOfPieces(
+      document,
+      idsOf(document).filter((one) => one.startsWith("p-")),
+    );
+    const gap = 0.75 * plain.capHeight;
+    expect(boxes[0]?.y).toBeCloseTo((first?.y ?? 0) + (first?.height ?? 0) + gap, 3);
+    expect(boxes[1]?.y).toBeCloseTo((boxes[0]?.y ?? 0) + box.height + gap, 3);
+    expect(boxes.at(-1)?.y).toBeCloseTo(200 - box.height / 2, 3);
+  });
+
   it("puts them on a layer that is there, after its pieces; a locked one takes none", () => {
     const first = added();
     const set = {

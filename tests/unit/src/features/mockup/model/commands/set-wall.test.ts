@@ -3,6 +3,7 @@ import { documentSchema } from "#shared/mockup/document.ts";
 import {
   chooseWallPhoto,
   hangAt,
+  isUnmarked,
   markCorner,
   setSheet,
   setWallColour,
@@ -40,6 +41,11 @@ describe("the wall of a mockup", () => {
     expect(chooseWallPhoto(onPhoto, chosen)).toBe(onPhoto);
     expect(chooseWallPhoto(onPhoto, null).presentation.photo).toBeNull();
     expect(chooseWallPhoto(sign, null)).toBe(sign);
+  });
+
+  it("is known to be unmarked until a mark is put somewhere", () => {
+    expect(isUnmarked(photoOf(onPhoto))).toBe(true);
+    expect(isUnmarked(photoOf(markCorner(onPhoto, { corner: 2, to: { x: 921, y: 769.71 } })))).toBe(false);
   });
 
   it("keeps a mark within its photo, and the other marks where they are", () => {
