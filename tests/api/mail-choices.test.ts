@@ -1,8 +1,10 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { issueUnsubscribeToken } from "#server/auth/unsubscribe-tokens.ts";
 import { queueReminders } from "#server/commands/queue-reminders.ts";
+import { sendMail } from "#server/jobs/send-mail.ts";
 import { Job } from "#server/models/job.ts";
 import { MailChoices } from "#server/models/mail-choices.ts";
+import { OutgoingMail } from "#server/models/outgoing-mail.ts";
 import { UnsubscribeToken } from "#server/models/unsubscribe-token.ts";
 import { requestLink } from "#shared/contracts/account.ts";
 import { changeMailChoices, inspectUnsubscribe, listMailChoices } from "#shared/contracts/mail-choices.ts";
@@ -67,6 +69,24 @@ describe("a mail that is not needed", () => {
     expect(rows).toHaveLength(1);
   });
 
+  it("promises the one click when people reach us by https, as RFC 8058 asks", async () => {
+    await world.visitors.maker.get(addNote, {
+      params: { ...world.params, revisionId },
+      body: { kind: "question", text: "Screws or glue?", anchor: { on: "whole" } },
+    });
+    const where = { kind: "notes gathered" as const, state: "queued" as const };
+    const { id } = await OutgoingMail.findOne({ where, rejectOnEmpty: true });
+    const env = { ...app.services.env, PUBLIC_URL: "https://proofs.example" };
+    await sendMail({ ...app.services, env }, { mailId: id });
+    const [mail] = stopping(await mailsTo(world.approver.email));
+    const headers = mail?.source
+      .replace(/\r\n\s+/g, " ")
+      .split("\r\n\r\n")[0]
+      ?.split("\r\n");
+    expect(headers).toContain(`List-Unsubscribe: <https://proofs.example/unsubscribe/${stopOf(mail as Caught)}>`);
+    expect(headers).toContain("List-Unsubscribe-Post: List-Unsubscribe=One-Click");
+  });
+
   it("is stopped by one press of the mail program, for this shop and this reader, and twice does no harm", async () => {
     const [gathered] = stopping(await mailsTo(world.approver.email));
     const token = stopOf(gathered as Caught);
@@ -88,7 +108,7 @@ describe("a mail that is not needed", () => {
       await queueReminders({ services: app.services, now: new Date(`${addDays(today, day)}T10:00:00Z`) });
     }
     await app.runJobs();
-    expect(stopping(await mailsTo(world.approver.email))).toHaveLength(1);
+    expect(stopping(await mailsTo(world.approver.email))).toHaveLength(2);
   });
 
   it("is not stopped by looking at the page: a mail scanner does that too", async () => {
@@ -100,7 +120,7 @@ describe("a mail that is not needed", () => {
     expect(looked).toEqual({ shopName: world.owner.shop.name, notes: true, reminders: false });
     expect(addressHint).toMatch(/^.•••••@/);
     await say("Still there?");
-    expect(stopping(await mailsTo(world.approver.email))).toHaveLength(2);
+    expect(stopping(await mailsTo(world.approver.email))).toHaveLength(3);
   });
 
   it("is not stopped by a token that nobody made", async () => {

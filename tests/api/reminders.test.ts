@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { queueReminders } from "#server/commands/queue-reminders.ts";
 import { enqueue } from "#server/jobs/queue.ts";
+import { runQueue } from "#server/jobs/run-queue.ts";
 import { Job } from "#server/models/job.ts";
 import { MailChoices } from "#server/models/mail-choices.ts";
 import { OutgoingMail } from "#server/models/outgoing-mail.ts";
@@ -14,6 +15,7 @@ import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildIssued } from "../support/factories/issued.ts";
 import { buildRevision, buildWorld, type World } from "../support/factories/work.ts";
 import { type Caught, caughtMails, tokenIn } from "../support/mail.ts";
+import { runSql } from "../support/run-sql.ts";
 
 let app: TestApp;
 let world: World;
@@ -143,5 +145,12 @@ describe("a reminder that a yes is needed", () => {
     expect(await kindsOf(job)).toEqual([]);
     expect((await app.queuedJobs()).filter(({ task }) => task === "remind")).toEqual([]);
     await done(job);
+  });
+
+  it("is looked for by the clock, a quarter of an hour after the other", async () => {
+    const queue = await runQueue(app.services);
+    await queue.stop();
+    const known = await runSql(app.database.ownerUrl, "select identifier from graphile_worker._private_known_crontabs");
+    expect(known).toEqual([{ identifier: "remind" }]);
   });
 });
