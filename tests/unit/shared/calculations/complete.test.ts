@@ -8,6 +8,7 @@ const filesIn = (folder: string) => readdirSync(new URL(`${folder}/`, shared)).f
 const subjects = ["hardware", "plates", "bonds", "pieces", "legibility", "colour"];
 /** Parts of calculations that are explained with the ones that use them. */
 const parts = [
+  "bonds/drying-hours-of-sign.ts",
   "bonds/surfaces.ts",
   "colour/finish-colour.ts",
   "hardware/check-hardware.ts",
