@@ -297,6 +297,28 @@ describe("what was set aside", () => {
   });
 });
 
+describe("notes", () => {
+  it.each([
+    { age: "1 minute", code: "not refused" },
+    { age: "11 minutes", code: restricted },
+  ])("of $age: what they say is refused to change by $code", async ({ age, code }) => {
+    const { shop, job, revision, person } = await buildWork();
+    const [note, reply] = [randomUUID(), randomUUID()];
+    await app.query(
+      `insert into notes (id, shop_id, job_id, revision_id, number, kind, text, anchor, side, author_id, author_name, created_at) values ($1, $2, $3, $4, 1, 'question', 'x', '{}', 'shop', $5, 'P', now() - interval '${age}')`,
+      [note, shop, job, revision, person],
+    );
+    await app.query(
+      `insert into replies (id, shop_id, note_id, text, side, author_id, author_name, created_at) values ($1, $2, $3, 'x', 'shop', $4, 'P', now() - interval '${age}')`,
+      [reply, shop, note, person],
+    );
+    expect(await refusal(app, "update notes set text = 'y' where id = $1", [note])).toBe(code);
+    expect(await refusal(app, "update notes set kind = 'must change' where id = $1", [note])).toBe(code);
+    expect(await refusal(app, "update replies set text = 'y' where id = $1", [reply])).toBe(code);
+    expect(await refusal(app, "update notes set state = 'settled' where id = $1", [note])).toBe("not refused");
+  });
+});
+
 describe("shops", () => {
   it("no row can point into another shop", async () => {
     const mine = await buildWork();
@@ -360,9 +382,8 @@ describe("the application's role", () => {
     "delete from people",
     "delete from stored_files",
     "delete from outgoing_mails",
-    "update notes set text = 'x'",
     "update notes set author_name = 'x'",
-    "update replies set text = 'x'",
+    "update replies set author_name = 'x'",
     "update set_asides set reason = 'other'",
     "update set_asides set finding = '{}'",
     "delete from set_asides",

@@ -17,6 +17,7 @@ import { jobSignals } from "./2026-12-01-15-job-signals.ts";
 import { noteEdits } from "./2026-12-01-16-note-edits.ts";
 import { gatheredMail } from "./2026-12-01-17-gathered-mail.ts";
 import { mailChoices } from "./2026-12-01-18-mail-choices.ts";
+import { noteGuards } from "./2026-12-01-19-note-guards.ts";
 
 /** Every migration in order. A new one goes to the end. */
 export const migrations: readonly Migration[] = [
@@ -38,4 +39,5 @@ export const migrations: readonly Migration[] = [
   noteEdits,
   gatheredMail,
   mailChoices,
+  noteGuards,
 ];
