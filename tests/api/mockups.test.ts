@@ -1,10 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { Mockup } from "#server/models/mockup.ts";
 import { removeArtwork } from "#shared/contracts/artworks.ts";
-import { changeJob } from "#shared/contracts/jobs.ts";
+import { changeJob, openJob } from "#shared/contracts/jobs.ts";
 import { getMockup, mockupSchema, saveMockup } from "#shared/contracts/mockups.ts";
 import { startTestApp, type TestApp } from "../support/app.ts";
 import { buildLayer, buildSign, plate } from "../support/build-sign.ts";
+import { buildClient } from "../support/factories/client.ts";
 import { buildJob } from "../support/factories/job.ts";
 import { buildMember } from "../support/factories/member.ts";
 import { buildArtwork, buildWorld, signFromArtwork, type World } from "../support/factories/work.ts";
@@ -90,23 +91,29 @@ describe("a mockup", () => {
     expect(kept.version).toBe(2);
   });
 
-  it("draws only from artwork of its own job, also from what was taken off since", async () => {
+  it("draws only from artwork of its job's client, from any job of theirs and from what was taken off since", async () => {
     const own = await buildJob(world);
-    const other = await buildJob(world);
+    const sister = await buildJob(world);
     const artwork = await buildArtwork(app, own);
     const document = await signFromArtwork(own, artwork.id);
-    const foreign = await other.visitors.maker.refusal(saveMockup, {
-      params: of(other),
-      body: { version: 0, document },
+    const body = { version: 0, document };
+    const stranger = await buildClient({ shop: own.owner.shop });
+    const foreign = await own.visitors.maker.get(openJob, {
+      params: own.params,
+      body: { clientId: stranger.id, title: "Another's sign", dueOn: null },
     });
-    expect(foreign).toMatchObject({
+    const refused = await own.visitors.maker.refusal(saveMockup, {
+      params: { ...own.params, jobId: foreign.id },
+      body,
+    });
+    expect(refused).toMatchObject({
       code: "validation_failed",
-      errors: [{ pointer: "/document/layers", detail: "A piece comes from artwork that is not on this job." }],
+      errors: [{ pointer: "/document/layers", detail: "A piece comes from artwork that is not this client’s." }],
     });
-    expect(await Mockup.count({ where: { jobId: other.job.id } })).toBe(0);
+    expect(await Mockup.count({ where: { jobId: foreign.id } })).toBe(0);
+    expect((await own.visitors.maker.get(saveMockup, { params: of(sister), body })).document).toEqual(document);
     await own.visitors.maker.get(removeArtwork, { params: { ...own.params, artworkId: artwork.id } });
-    const saved = await own.visitors.maker.get(saveMockup, { params: of(own), body: { version: 0, document } });
-    expect(saved.document).toEqual(document);
+    expect((await own.visitors.maker.get(saveMockup, { params: of(own), body })).document).toEqual(document);
   });
 
   it("names each fault of a document by its place", async () => {
