@@ -6,6 +6,7 @@ import tailwindcss from "@tailwindcss/vite";
 import react from "@vitejs/plugin-react";
 import type { Plugin } from "vite";
 import { defineConfig, type TestProjectInlineConfiguration } from "vitest/config";
+import { BaseSequencer, type TestSpecification } from "vitest/node";
 
 const here = import.meta.dirname;
 const appUrl = process.env.STANDPROUD_APP ?? "http://127.0.0.1:4601";
@@ -28,6 +29,30 @@ function compressedBeside(): Plugin {
       );
     },
   };
+}
+
+/** Files that take longest, the longest first: begun last, one of them alone would keep everyone waiting. */
+const longest = [
+  "e2e/screens-desk",
+  "e2e/whole-sign",
+  "e2e/round-trip",
+  "e2e/screens-phone",
+  "e2e/safety-net",
+  "api/races",
+  "api/policies",
+  "api/decisions",
+  "api/revisions",
+  "reference/tracing",
+];
+
+class LongestFirst extends BaseSequencer {
+  override async sort(files: TestSpecification[]): Promise<TestSpecification[]> {
+    const place = ({ moduleId }: TestSpecification) => {
+      const found = longest.findIndex((name) => moduleId.includes(`/tests/${name}.test.`));
+      return found < 0 ? longest.length : found;
+    };
+    return (await super.sort(files)).toSorted((a, b) => place(a) - place(b));
+  }
 }
 
 /** Projects whose tests talk to PostgreSQL: their global setup starts a throw-away cluster. */
@@ -55,6 +80,7 @@ export default defineConfig({
   test: {
     // More than there are cores: most of the time a test waits for the database, a browser or a thread.
     maxWorkers: 4,
+    sequence: { sequencer: LongestFirst },
     projects: [
       {
         extends: true,
