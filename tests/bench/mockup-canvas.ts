@@ -181,6 +181,9 @@ export const measure: Measure = async () => {
     const drag = await timeDrag(page, from);
     const plain = await timePlainRedraw(page, await shapesOf(sign));
     await isAtRest(page);
+    // The piece may not have come down exactly where it was taken up.
+    while (await mockup(page).undo().isEnabled()) await mockup(page).undo().click();
+    await isAtRest(page);
 
     const before = await usedMb(session);
     await editAndUndo(page, edits);
