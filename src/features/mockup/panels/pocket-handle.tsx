@@ -3,10 +3,8 @@ import type { Hold } from "#shared/mockup/document.ts";
 import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { setPocket } from "../model/commands/set-hold.ts";
-import { labelOfDrag } from "../model/drag.ts";
 import { pocketDepthBounds } from "../model/limits.ts";
 import { catchDepth, nextDepth, pocketCatches } from "../model/pocket-catches.ts";
-import { chooseLayer } from "../model/selection.ts";
 import { CatchLines } from "./catch-lines.tsx";
 import { SectionGrip } from "./section-grip.tsx";
 import type { LayerInSection, SectionHandleProps } from "./section-handle.tsx";
@@ -22,7 +20,7 @@ type PocketHandleProps = SectionHandleProps & {
 /** A layer that is let in, in the section: dragged or moved by arrows deeper or less deep into what it lies in. */
 export function PocketHandle({ layer, hold, shownDepth, at, ...section }: PocketHandleProps) {
   const { figures, pxPerMm, pxOfDepth, pxOfHeight, drag, onDrag } = section;
-  const { document, figuresOf: drawn, edit, choose, selection, site, unit } = useDesk();
+  const { figuresOf: drawn, edit, selection, site, unit } = useDesk();
   const { key, thickness } = layer;
   const { depth } = hold;
   const isChosen = selection.layerKey === key;
@@ -35,13 +33,6 @@ export function PocketHandle({ layer, hold, shownDepth, at, ...section }: Pocket
   function pull(by: number, free: boolean) {
     const wanted = within(depth - by);
     onDrag({ kind: "let in", key, depth: within(catchDepth(wanted, free ? [] : catches, catchPx / pxPerMm)) });
-  }
-
-  function drop() {
-    if (drag?.kind !== "let in") return;
-    const dropped = drag;
-    edit({ label: labelOfDrag(dropped), change: (before) => setPocket(before, dropped) });
-    onDrag(null);
   }
 
   function step(towards: "viewer" | "wall", fine: boolean) {
@@ -69,21 +60,17 @@ export function PocketHandle({ layer, hold, shownDepth, at, ...section }: Pocket
         />
       )}
       <SectionGrip
+        layerKey={key}
         label={`Depth of the pocket of ${key}, ${layer.name}`}
         now={sunk}
         most={pocketDepthBounds.most}
         text={`${formatLengthWithUnit(sunk, unit)} deep`}
         title="Drag to let it in deeper or less deep. Arrows go from catch to catch, with Shift by half a millimetre."
-        isChosen={isChosen}
-        isDragged={drag?.kind === "let in" && drag.key === key}
+        drag={drag}
+        onDrag={onDrag}
         pxPerMm={pxPerMm}
         place={{ ...at.place, left: at.place.left + (shownDepth - sunk) * pxPerMm }}
-        onTake={() => {
-          if (!isChosen) choose(chooseLayer(document, key));
-        }}
         onPull={pull}
-        onDrop={drop}
-        onGiveUp={() => onDrag(null)}
         onStep={step}
       />
     </>

@@ -2,9 +2,7 @@ import type { Hold } from "#shared/mockup/document.ts";
 import { formatLength, formatLengthWithUnit } from "#shared/units/format-length.ts";
 import { useDesk } from "../editor/desk-context.ts";
 import { raiseLayer } from "../model/commands/set-hold.ts";
-import { labelOfDrag } from "../model/drag.ts";
 import { mostOffsetMm } from "../model/limits.ts";
-import { chooseLayer } from "../model/selection.ts";
 import { barrelLengths, catchBarrel, hardwareOfLength, nextBarrel } from "../model/snapping.ts";
 import { CatchLines } from "./catch-lines.tsx";
 import { SectionGrip } from "./section-grip.tsx";
@@ -21,7 +19,7 @@ type RaiseHandleProps = SectionHandleProps & {
 /** A standoff layer in the section, dragged or moved by arrows from barrel to barrel. */
 export function RaiseHandle({ layer, hold, shownOffset, at, ...section }: RaiseHandleProps) {
   const { pxPerMm, pxOfDepth, pxOfHeight, drag, onDrag } = section;
-  const { document, figuresOf: drawn, edit, choose, selection, stock, unit } = useDesk();
+  const { figuresOf: drawn, edit, selection, stock, unit } = useDesk();
   const { key } = layer;
   const { hardware, offset } = hold;
   const isChosen = selection.layerKey === key;
@@ -33,13 +31,6 @@ export function RaiseHandle({ layer, hold, shownOffset, at, ...section }: RaiseH
     const reachMm = free ? 0 : catchPx / pxPerMm;
     const caught = catchBarrel(Math.round(wanted * 10) / 10, { stock: stock.hardware, current: hardware, reachMm });
     onDrag({ kind: "raise", key, ...caught });
-  }
-
-  function drop() {
-    if (drag?.kind !== "raise") return;
-    const dropped = drag;
-    edit({ label: labelOfDrag(dropped), change: (before) => raiseLayer(before, dropped) });
-    onDrag(null);
   }
 
   function step(towards: "viewer" | "wall", fine: boolean) {
@@ -71,21 +62,17 @@ export function RaiseHandle({ layer, hold, shownOffset, at, ...section }: RaiseH
         />
       )}
       <SectionGrip
+        layerKey={key}
         label={`Raise ${key}, ${layer.name}`}
         now={raised}
         most={mostOffsetMm}
         text={`${formatLengthWithUnit(raised, unit)}, ${hardware.name}`}
         title="Drag to raise. Arrows go from barrel to barrel, with Shift by half a millimetre."
-        isChosen={isChosen}
-        isDragged={drag?.kind === "raise" && drag.key === key}
+        drag={drag}
+        onDrag={onDrag}
         pxPerMm={pxPerMm}
         place={{ ...at.place, left: at.place.left + (raised - shownOffset) * pxPerMm }}
-        onTake={() => {
-          if (!isChosen) choose(chooseLayer(document, key));
-        }}
         onPull={pull}
-        onDrop={drop}
-        onGiveUp={() => onDrag(null)}
         onStep={step}
       />
     </>

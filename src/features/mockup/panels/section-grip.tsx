@@ -1,22 +1,23 @@
 import { type KeyboardEvent, type PointerEvent, useRef } from "react";
 import { cx } from "@/lib/cx.ts";
+import { useDesk } from "../editor/desk-context.ts";
+import { type Drag, documentOfDrag, labelOfDrag } from "../model/drag.ts";
+import { chooseLayer } from "../model/selection.ts";
 
 type SectionGripProps = {
+  readonly layerKey: string;
   readonly label: string;
   /** The measure that the grip changes, mm, and how it reads. */
   readonly now: number;
   readonly most: number;
   readonly text: string;
   readonly title: string;
-  readonly isChosen: boolean;
-  readonly isDragged: boolean;
+  readonly drag: Drag | null;
+  readonly onDrag: (drag: Drag | null) => void;
   readonly pxPerMm: number;
   readonly place: { readonly left: number; readonly top: number; readonly width: number; readonly height: number };
-  readonly onTake: () => void;
   /** So many mm towards the viewer from where it was taken; `free` asks to catch on nothing. */
   readonly onPull: (by: number, free: boolean) => void;
-  readonly onDrop: () => void;
-  readonly onGiveUp: () => void;
   readonly onStep: (towards: "viewer" | "wall", fine: boolean) => void;
 };
 
@@ -25,12 +26,19 @@ const dragFromPx = 3;
 
 /** What lies over a layer in the section, to be dragged towards the viewer or the wall, or moved by arrows. */
 export function SectionGrip(props: SectionGripProps) {
-  const { label, now, most, text, title, isChosen, isDragged, pxPerMm, place } = props;
+  const { layerKey, label, now, most, text, title, drag, onDrag, pxPerMm, place } = props;
+  const { document, selection, edit, choose } = useDesk();
+  const isChosen = selection.layerKey === layerKey;
+  const isDragged = drag !== null && "key" in drag && drag.key === layerKey;
   const from = useRef<number | null>(null);
+
+  function take() {
+    if (!isChosen) choose(chooseLayer(document, layerKey));
+  }
 
   function handlePointerDown(event: PointerEvent<HTMLElement>) {
     if (event.button !== 0) return;
-    props.onTake();
+    take();
     event.currentTarget.setPointerCapture(event.pointerId);
     from.current = event.clientX;
   }
@@ -43,12 +51,14 @@ export function SectionGrip(props: SectionGripProps) {
 
   function handlePointerUp() {
     from.current = null;
-    if (isDragged) props.onDrop();
+    if (!isDragged) return;
+    edit({ label: labelOfDrag(drag), change: (before) => documentOfDrag(before, drag) });
+    onDrag(null);
   }
 
   function giveUp() {
     from.current = null;
-    if (isDragged) props.onGiveUp();
+    if (isDragged) onDrag(null);
   }
 
   function handleKeyDown(event: KeyboardEvent) {
@@ -57,7 +67,7 @@ export function SectionGrip(props: SectionGripProps) {
     if (towards === undefined) return;
     event.preventDefault();
     // Not on focus: Tab leads past here with what is chosen.
-    props.onTake();
+    take();
     props.onStep(towards, event.shiftKey);
   }
 
